@@ -1,0 +1,58 @@
+package org.pofk.answer;
+
+import java.util.List;
+import org.pofk.exact.Rational;
+
+/** What an output does as k grows: decided by exact division by cyclotomic polynomials, never by looking at moduli. */
+public sealed interface LongRun {
+
+    <R> R accept(Visitor<R> visitor);
+
+    /** One method per variant. */
+    interface Visitor<R> {
+        R limit(Limit limit);
+
+        R cycle(Cycle cycle);
+
+        R none(None none);
+    }
+
+    /** p(k) tends to {@code value}. */
+    record Limit(Rational value) implements LongRun {
+        @Override
+        public <R> R accept(Visitor<R> visitor) {
+            return visitor.limit(this);
+        }
+    }
+
+    /** p(k) approaches values that repeat; {@code values} in place j are for k ≡ j modulo the period (at least 2). */
+    record Cycle(List<Rational> values) implements LongRun {
+        public Cycle {
+            values = List.copyOf(values);
+        }
+
+        public int period() {
+            return values.size();
+        }
+
+        public Rational average() {
+            return values.stream().reduce(Rational.ZERO, Rational::plus).dividedBy(Rational.of(values.size()));
+        }
+
+        @Override
+        public <R> R accept(Visitor<R> visitor) {
+            return visitor.cycle(this);
+        }
+    }
+
+    /** No limit and no cycle. */
+    record None(Reason reason, String explanation) implements LongRun {
+        @Override
+        public <R> R accept(Visitor<R> visitor) {
+            return visitor.none(this);
+        }
+    }
+
+    /** Why there is neither. */
+    enum Reason { GROWS, RECURS_WITHOUT_PERIOD }
+}

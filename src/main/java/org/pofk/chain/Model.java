@@ -1,0 +1,49 @@
+package org.pofk.chain;
+
+import java.util.List;
+import java.util.Optional;
+
+/**
+ * A chain with what its author says about it: all that a model file holds.
+ *
+ * @param parameters parameters in the order of the file
+ * @param notes      notes and sources on entries, in the order of the file
+ * @param changes    every change made to rounded rows on entry ({@code sums: rescale}, {@code give to diagonal}),
+ *                   and what each {@code rest} came to, one line each
+ */
+public record Model(String title, Step step, Convention convention, About about, Chain chain,
+        List<Parameter> parameters, List<Remark> notes, List<String> changes, Origin origin) {
+
+    /** How the author writes a matrix: moves out of a state stand in a column or in a row. */
+    public enum Convention { COLUMNS, ROWS }
+
+    /** What one step is: {@code 1 shift}; how long it lasts and what the first is called, where given. */
+    public record Step(String is, Optional<String> lasts, Optional<String> first) {
+    }
+
+    /** Where the model comes from, carried into reports; never invented. */
+    public record About(Optional<String> document, Optional<String> revision, Optional<String> preparedBy,
+            List<String> assumptions) {
+        public static final About NOTHING =
+                new About(Optional.empty(), Optional.empty(), Optional.empty(), List.of());
+    }
+
+    /** A named value; {@code value} is its exact number as text. */
+    public record Parameter(String name, String value, Optional<String> definition, Optional<String> from,
+            Optional<String> to, Optional<String> meaning, Optional<String> source) {
+    }
+
+    /** A note or source on an entry of the file. */
+    public record Remark(String on, String kind, String text) {
+    }
+
+    /** The file a model was read from: its name as given and the SHA-256 of its bytes, in hexadecimal. */
+    public record Origin(String file, String sha256) {
+    }
+
+    public Model {
+        parameters = List.copyOf(parameters);
+        notes = List.copyOf(notes);
+        changes = List.copyOf(changes);
+    }
+}

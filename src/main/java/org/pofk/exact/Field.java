@@ -1,0 +1,49 @@
+package org.pofk.exact;
+
+/**
+ * A field of exact coefficients: the rationals, residues modulo a polynomial, later rational functions of parameters.
+ * Elements are immutable and in canonical form, so that {@code equals} is equality in the field.
+ *
+ * @param <E> element
+ */
+public interface Field<E> {
+    E zero();
+
+    E one();
+
+    /** The image of a rational number. */
+    E of(Rational value);
+
+    E add(E a, E b);
+
+    E negate(E a);
+
+    E multiply(E a, E b);
+
+    /** 1/a; an {@link ArithmeticException} when a is zero. */
+    E inverse(E a);
+
+    boolean isZero(E a);
+
+    default E of(long value) {
+        return of(Rational.of(value));
+    }
+
+    default E subtract(E a, E b) {
+        return add(a, negate(b));
+    }
+
+    default E divide(E a, E b) {
+        return multiply(a, inverse(b));
+    }
+
+    /** The product of two polynomials over this field; a field with a fast way overrides it. */
+    default Polynomial<E> multiply(Polynomial<E> a, Polynomial<E> b) {
+        return Polynomial.schoolbookProduct(this, a, b);
+    }
+
+    /** The monic greatest common divisor, zero only for two zeros; a field with a fast way overrides it. */
+    default Polynomial<E> greatestCommonDivisor(Polynomial<E> a, Polynomial<E> b) {
+        return Polynomial.euclid(this, a, b);
+    }
+}
