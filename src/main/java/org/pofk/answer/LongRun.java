@@ -1,6 +1,7 @@
 package org.pofk.answer;
 
 import java.util.List;
+import java.util.Optional;
 import org.pofk.exact.Rational;
 
 /** What an output does as k grows: decided by exact division by cyclotomic polynomials, never by looking at moduli. */
@@ -45,8 +46,13 @@ public sealed interface LongRun {
         }
     }
 
-    /** No limit and no cycle. */
-    record None(Reason reason, String explanation) implements LongRun {
+    /**
+     * No limit and no cycle.
+     *
+     * @param average     what the averages of p(0) … p(k) tend to, where they tend to anything
+     * @param explanation why, in one line: {@code grows like k * 1.2^k}
+     */
+    record None(Reason reason, Optional<Rational> average, String explanation) implements LongRun {
         @Override
         public <R> R accept(Visitor<R> visitor) {
             return visitor.none(this);
