@@ -1,0 +1,103 @@
+package org.pofk.input;
+
+import java.util.List;
+import java.util.Optional;
+import org.pofk.text.Position;
+
+/**
+ * A value of a YAML or JSON text with the place where it begins. Scalars stay text: {@code 0.70}, {@code 010} and
+ * {@code no} are what they are.
+ */
+sealed interface Node {
+
+    Position position();
+
+    /** What it is, in words. */
+    String inWords();
+
+    /** This, when it is a single value. */
+    default Optional<Scalar> asScalar() {
+        return Optional.empty();
+    }
+
+    /** This, when it is a list. */
+    default Optional<Sequence> asSequence() {
+        return Optional.empty();
+    }
+
+    /** This, when it is a mapping. */
+    default Optional<Mapping> asMapping() {
+        return Optional.empty();
+    }
+
+    /** How a scalar is written; block scalars count as quoted. */
+    enum Style { PLAIN, QUOTED }
+
+    /** A single value; empty and plain where nothing is written. */
+    record Scalar(Position position, String text, Style style) implements Node {
+        /** Nothing is written here. */
+        boolean isAbsent() {
+            return style == Style.PLAIN && text.isEmpty();
+        }
+
+        boolean isPlain() {
+            return style == Style.PLAIN;
+        }
+
+        /** The text as a name: trimmed, in NFC. */
+        String name() {
+            return Names.canonical(text);
+        }
+
+        @Override
+        public Optional<Scalar> asScalar() {
+            return Optional.of(this);
+        }
+
+        @Override
+        public String inWords() {
+            return isAbsent() ? "nothing" : "'" + Words.shortened(text) + "'";
+        }
+    }
+
+    /** A list. */
+    record Sequence(Position position, List<Node> items) implements Node {
+        public Sequence {
+            items = List.copyOf(items);
+        }
+
+        @Override
+        public Optional<Sequence> asSequence() {
+            return Optional.of(this);
+        }
+
+        @Override
+        public String inWords() {
+            return "a list";
+        }
+    }
+
+    /** Keys with values, in order; no key twice. */
+    record Mapping(Position position, List<Entry> entries) implements Node {
+        public Mapping {
+            entries = List.copyOf(entries);
+        }
+
+        @Override
+        public Optional<Mapping> asMapping() {
+            return Optional.of(this);
+        }
+
+        @Override
+        public String inWords() {
+            return "a mapping";
+        }
+    }
+
+    /** A key and its value. */
+    record Entry(Scalar key, Node value) {
+        String name() {
+            return key.name();
+        }
+    }
+}

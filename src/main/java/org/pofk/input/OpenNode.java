@@ -1,0 +1,97 @@
+package org.pofk.input;
+
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import org.pofk.text.Faults;
+import org.pofk.text.Position;
+
+/** A list or mapping whose end has not been read yet. Mutable; lives for one reading. */
+abstract sealed class OpenNode {
+
+    static OpenNode sequence(Position position) {
+        return new OpenSequence(position);
+    }
+
+    static OpenNode mapping(Position position) {
+        return new OpenMapping(position);
+    }
+
+    /** The next value would be a key. */
+    abstract boolean awaitsKey();
+
+    /** Takes the next value; a fault for a key that was given before. */
+    abstract void add(Node node, Faults faults);
+
+    abstract Node close();
+
+    private static final class OpenSequence extends OpenNode {
+        private final Position position;
+        private final List<Node> items = new ArrayList<>();
+
+        OpenSequence(Position position) {
+            this.position = position;
+        }
+
+        @Override
+        boolean awaitsKey() {
+            return false;
+        }
+
+        @Override
+        void add(Node node, Faults faults) {
+            items.add(node);
+        }
+
+        @Override
+        Node close() {
+            return new Node.Sequence(position, items);
+        }
+    }
+
+    private static final class OpenMapping extends OpenNode {
+        private final Position position;
+        private final List<Node.Entry> entries = new ArrayList<>();
+        private final Map<String, Position> keys = new HashMap<>();
+        private Optional<Node.Scalar> key = Optional.empty();
+
+        OpenMapping(Position position) {
+            this.position = position;
+        }
+
+        @Override
+        boolean awaitsKey() {
+            return key.isEmpty();
+        }
+
+        @Override
+        void add(Node node, Faults faults) {
+            if (key.isPresent()) {
+                addEntry(key.get(), node, faults);
+                key = Optional.empty();
+            } else {
+                key = Optional.of((Node.Scalar) node);
+            }
+        }
+
+        private void addEntry(Node.Scalar name, Node value, Faults faults) {
+            Position before = keys.putIfAbsent(Names.canonical(name.text()), name.position());
+            if (name.isPlain() && name.text().equals("<<")) {
+                faults.add(name.position(), "merge-key", "the merge key '<<' isn't accepted; write the entries out");
+            } else if (before != null) {
+                faults.add(name.position(), "duplicate-key", "the key '" + Words.shortened(name.text())
+                        + "' is given twice; it stands at line " + before.line() + ", column " + before.column()
+                        + " already");
+            } else {
+                entries.add(new Node.Entry(name, value));
+            }
+        }
+
+        @Override
+        Node close() {
+            return new Node.Mapping(position, entries);
+        }
+    }
+}

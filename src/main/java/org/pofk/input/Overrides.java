@@ -1,0 +1,23 @@
+package org.pofk.input;
+
+import java.util.LinkedHashMap;
+import java.util.Map;
+import java.util.Optional;
+
+/**
+ * What a command line says in place of the file.
+ *
+ * @param parameters values by parameter, as written
+ * @param start      the state to start in
+ */
+public record Overrides(Map<String, String> parameters, Optional<String> start) {
+    public static final Overrides NONE = new Overrides(Map.of(), Optional.empty());
+
+    /** Source names for faults in these values. */
+    static final String SET_OPTION = "--set";
+    static final String START_OPTION = "--start";
+
+    public Overrides {
+        parameters = java.util.Collections.unmodifiableMap(new LinkedHashMap<>(parameters));
+    }
+}
