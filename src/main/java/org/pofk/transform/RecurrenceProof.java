@@ -11,6 +11,17 @@ package org.pofk.transform;
  */
 public record RecurrenceProof(Method method, int order, int comparedSteps, int primes, int bits) {
 
-    /** All windows of the output's sequence, or D(A) x0 = 0 as a vector (which proves every output at once). */
-    public enum Method { WINDOWS, VECTOR }
+    /** What was compared. */
+    public enum Method {
+        /** All n windows of the output's own sequence. */
+        WINDOWS,
+        /** D(A) x0 = 0 as a vector, which proves every output at once. */
+        VECTOR,
+        /**
+         * Modulo every prime the sequence needs all n orders, so D is the characteristic polynomial of the states
+         * that take part, and Cayley–Hamilton alone proves it; its coefficients are settled by primes beyond their
+         * bound.
+         */
+        CHARACTERISTIC
+    }
 }
