@@ -42,6 +42,11 @@ public interface Field<E> {
         return Polynomial.schoolbookProduct(this, a, b);
     }
 
+    /** Quotient and remainder by a divisor that isn't zero; a field with a fast way overrides it. */
+    default Polynomial.Division<E> divide(Polynomial<E> dividend, Polynomial<E> divisor) {
+        return Polynomial.longDivision(this, dividend, divisor);
+    }
+
     /** The monic greatest common divisor, zero only for two zeros; a field with a fast way overrides it. */
     default Polynomial<E> greatestCommonDivisor(Polynomial<E> a, Polynomial<E> b) {
         return Polynomial.euclid(this, a, b);

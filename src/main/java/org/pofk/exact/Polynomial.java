@@ -154,25 +154,10 @@ public record Polynomial<E>(Field<E> field, List<E> coefficients) {
 
     /** Quotient and remainder, the remainder's degree below the divisor's; fails on a zero divisor. */
     public Division<E> dividedBy(Polynomial<E> divisor) {
-        E inverseLeading = field.inverse(divisor.leading());
-        int steps = degree() - divisor.degree();
-        if (steps < 0) {
-            return new Division<>(zero(field), this);
+        if (divisor.isZero()) {
+            throw new ArithmeticException("division by the zero polynomial");
         }
-        List<E> rest = new ArrayList<>(coefficients);
-        List<E> quotient = new ArrayList<>(Collections.nCopies(steps + 1, field.zero()));
-        for (int shift = steps; shift >= 0; shift--) {
-            E factor = field.multiply(rest.get(shift + divisor.degree()), inverseLeading);
-            quotient.set(shift, factor);
-            if (!field.isZero(factor)) {
-                for (int i = 0; i <= divisor.degree(); i++) {
-                    rest.set(shift + i, field.subtract(rest.get(shift + i),
-                            field.multiply(factor, divisor.coefficients.get(i))));
-                }
-            }
-        }
-        return new Division<>(new Polynomial<>(field, quotient),
-                new Polynomial<>(field, rest.subList(0, Math.max(0, divisor.degree()))));
+        return field.divide(this, divisor);
     }
 
     /** The quotient of a division that leaves nothing; an {@link ArithmeticException} when it leaves something. */
@@ -235,6 +220,28 @@ public record Polynomial<E>(Field<E> field, List<E> coefficients) {
             }
         }
         return new Polynomial<>(field, product);
+    }
+
+    static <E> Division<E> longDivision(Field<E> field, Polynomial<E> dividend, Polynomial<E> divisor) {
+        E inverseLeading = field.inverse(divisor.leading());
+        int steps = dividend.degree() - divisor.degree();
+        if (steps < 0) {
+            return new Division<>(zero(field), dividend);
+        }
+        List<E> rest = new ArrayList<>(dividend.coefficients);
+        List<E> quotient = new ArrayList<>(Collections.nCopies(steps + 1, field.zero()));
+        for (int shift = steps; shift >= 0; shift--) {
+            E factor = field.multiply(rest.get(shift + divisor.degree()), inverseLeading);
+            quotient.set(shift, factor);
+            if (!field.isZero(factor)) {
+                for (int i = 0; i <= divisor.degree(); i++) {
+                    rest.set(shift + i, field.subtract(rest.get(shift + i),
+                            field.multiply(factor, divisor.coefficients.get(i))));
+                }
+            }
+        }
+        return new Division<>(new Polynomial<>(field, quotient),
+                new Polynomial<>(field, rest.subList(0, Math.max(0, divisor.degree()))));
     }
 
     static <E> Polynomial<E> euclid(Field<E> field, Polynomial<E> a, Polynomial<E> b) {

@@ -1,0 +1,122 @@
+package org.pofk.exact;
+
+import java.util.ArrayList;
+import java.util.Collection;
+import java.util.HashSet;
+import java.util.List;
+import java.util.stream.IntStream;
+import org.apache.commons.math3.primes.Primes;
+
+/**
+ * The cyclotomic polynomials: the n-th is monic, irreducible over Q, of degree φ(n), and its roots are the primitive
+ * n-th roots of unity. Exact.
+ */
+public final class Cyclotomic {
+    private Cyclotomic() {
+    }
+
+    /** The n-th cyclotomic polynomial, n ≥ 1. About n·φ(n) additions. */
+    public static Polynomial<Rational> polynomial(int order) {
+        return PrimitiveForm.polynomial(Rational.ONE, integerPolynomial(order));
+    }
+
+    /** Euler's φ: how many of 1 … n are coprime to n. */
+    public static int totient(int order) {
+        int totient = order;
+        for (int prime : primesDividing(order)) {
+            totient = totient / prime * (prime - 1);
+        }
+        return totient;
+    }
+
+    /** All n whose cyclotomic polynomial divides this one, ascending; none for the zero polynomial. */
+    public static List<Integer> ordersDividing(Polynomial<Rational> polynomial) {
+        return ordersDividing(polynomial, ordersUpToDegree(polynomial.degree()));
+    }
+
+    /** Those of the candidate orders whose cyclotomic polynomial divides this one, ascending; none for zero. */
+    public static List<Integer> ordersDividing(Polynomial<Rational> polynomial, Collection<Integer> candidates) {
+        IntegerPolynomial part = PrimitiveForm.partOf(polynomial);
+        return candidates.stream().distinct().sorted().filter(order -> divides(order, part)).toList();
+    }
+
+    /** Whether the n-th cyclotomic polynomial divides this one, which isn't zero. */
+    static boolean divides(int order, IntegerPolynomial part) {
+        return totient(order) <= part.degree()
+                && vanishesModuloPrime(order, part)
+                && part.quotientBy(integerPolynomial(order)).isPresent();
+    }
+
+    /** All n with φ(n) ≤ degree, ascending. */
+    static List<Integer> ordersUpToDegree(int degree) {
+        return IntStream.rangeClosed(1, largestOrder(degree)).filter(order -> totient(order) <= degree).boxed()
+                .toList();
+    }
+
+    /**
+     * A bound on n with φ(n) ≤ degree. With k distinct primes φ(n) is at least the product of p − 1 over the first k
+     * primes, and n/φ(n) at most the product of p/(p − 1) over them.
+     */
+    private static int largestOrder(int degree) {
+        long smallestTotient = 1;
+        long product = 1;
+        int prime = 2;
+        while (smallestTotient * (prime - 1) <= degree) {
+            smallestTotient *= prime - 1;
+            product *= prime;
+            prime = Primes.nextPrime(prime + 1);
+        }
+        return Math.toIntExact(Math.max(0, degree) * product / smallestTotient);
+    }
+
+    /** Built prime by prime: Φ of m·p is Φ_m(z^p)/Φ_m(z) for a new prime p, and Φ_m(z^p) for an old one. */
+    static IntegerPolynomial integerPolynomial(int order) {
+        if (order < 1) {
+            throw new ArithmeticException("there is no cyclotomic polynomial of order " + order);
+        }
+        IntegerPolynomial result = IntegerPolynomial.ofIntegers(-1, 1);
+        int built = 1;
+        for (int prime : primesDividing(order)) {
+            result = result.atPower(prime).quotientBy(result).orElseThrow();
+            built *= prime;
+        }
+        return result.atPower(order / built);
+    }
+
+    private static Collection<Integer> primesDividing(int order) {
+        return order < 2 ? List.of() : new HashSet<>(Primes.primeFactors(order));
+    }
+
+    /**
+     * Whether the polynomial vanishes at an element of order n modulo a prime that is 1 modulo n: it does when the
+     * n-th cyclotomic polynomial divides it, so nearly all others are told apart without a division.
+     */
+    private static boolean vanishesModuloPrime(int order, IntegerPolynomial part) {
+        int prime = (1 << 30) / order * order + 1;
+        while (!Primes.isPrime(prime)) {
+            prime += order;
+        }
+        return part.modulo(prime).valueAt(elementOfOrder(order, prime)) == 0;
+    }
+
+    private static long elementOfOrder(int order, int prime) {
+        for (long base = 2;; base++) {
+            long element = ModularPolynomial.power(base, (prime - 1) / order, prime);
+            if (primesDividing(order).stream().allMatch(
+                    divisor -> ModularPolynomial.power(element, order / divisor, prime) != 1)) {
+                return element;
+            }
+        }
+    }
+
+    /** The product of the cyclotomic polynomials among the candidates that divide a square-free polynomial. */
+    static List<IntegerPolynomial> factorsOf(IntegerPolynomial squareFree, Collection<Integer> candidates) {
+        List<IntegerPolynomial> found = new ArrayList<>();
+        for (int order : candidates) {
+            if (divides(order, squareFree)) {
+                found.add(integerPolynomial(order));
+            }
+        }
+        return found;
+    }
+}

@@ -1,0 +1,120 @@
+package org.pofk.exact;
+
+import java.util.ArrayList;
+import java.util.Collection;
+import java.util.List;
+import java.util.Optional;
+import org.pofk.exact.Factorization.Irreducible;
+
+/**
+ * Takes a square-free primitive polynomial without the root zero apart, the cheap ways first: rational roots,
+ * cyclotomic factors, known divisors, q(z) = g(z^m), degrees modulo primes, and the Rings library up to degree
+ * {@link #FACTORED_DEGREE}. Exact; what stays undecided is said so.
+ */
+final class SquareFreeFactoring {
+    /** Up to here full factorization takes less than half a second. */
+    static final int FACTORED_DEGREE = 200;
+    /** Where full factorization can follow, primes that bring nothing are given up soon. */
+    private static final int PATIENCE = 5;
+
+    /** A factor, and whether it is known to have none of its own. */
+    record Piece(IntegerPolynomial polynomial, Irreducible irreducible) {
+        static Piece proved(IntegerPolynomial polynomial) {
+            return new Piece(polynomial, Irreducible.PROVED);
+        }
+    }
+
+    private SquareFreeFactoring() {
+    }
+
+    /** The factors in no particular order; none for a constant. */
+    static List<Piece> of(IntegerPolynomial squareFree, Factoring.Hints hints) {
+        List<Piece> pieces = new ArrayList<>();
+        IntegerPolynomial rest = splitRootsAndCyclotomic(squareFree, hints.cyclotomicOrders(), pieces);
+        for (IntegerPolynomial part : splitBy(rest, hints.divisors())) {
+            pieces.addAll(withoutPowers(part));
+        }
+        return pieces;
+    }
+
+    /** Adds the rational linear and the cyclotomic factors to the pieces; what is left has none of either. */
+    private static IntegerPolynomial splitRootsAndCyclotomic(IntegerPolynomial squareFree,
+            Collection<Integer> likelyOrders, List<Piece> pieces) {
+        IntegerPolynomial rest = squareFree;
+        if (!rest.isConstant()) {
+            rest = divideOut(rest, RationalRoots.of(rest).stream().map(RationalRoots::linear).toList(), pieces);
+        }
+        rest = divideOut(rest, Cyclotomic.factorsOf(rest, likelyOrders), pieces);
+        return divideOut(rest, Cyclotomic.factorsOf(rest, Cyclotomic.ordersUpToDegree(rest.degree())), pieces);
+    }
+
+    private static IntegerPolynomial divideOut(IntegerPolynomial polynomial, List<IntegerPolynomial> factors,
+            List<Piece> pieces) {
+        IntegerPolynomial rest = polynomial;
+        for (IntegerPolynomial factor : factors) {
+            Optional<IntegerPolynomial> quotient = rest.quotientBy(factor);
+            if (quotient.isPresent()) {
+                pieces.add(Piece.proved(factor));
+                rest = quotient.get();
+            }
+        }
+        return rest;
+    }
+
+    /** Pairwise coprime parts that multiply to the polynomial, split along its common divisors with the known ones. */
+    private static List<IntegerPolynomial> splitBy(IntegerPolynomial squareFree, List<Polynomial<Rational>> divisors) {
+        List<IntegerPolynomial> parts = List.of(squareFree);
+        for (Polynomial<Rational> divisor : divisors) {
+            IntegerPolynomial known = PrimitiveForm.partOf(divisor);
+            List<IntegerPolynomial> finer = new ArrayList<>();
+            for (IntegerPolynomial part : parts) {
+                IntegerPolynomial common = part.greatestCommonDivisor(known);
+                finer.add(common);
+                finer.add(part.quotientBy(common).orElseThrow());
+            }
+            parts = finer.stream().filter(part -> !part.isConstant()).toList();
+        }
+        return parts.stream().filter(part -> !part.isConstant()).toList();
+    }
+
+    /** Factors a polynomial without rational or cyclotomic factors by way of g where it is g(z^m), m maximal. */
+    private static List<Piece> withoutPowers(IntegerPolynomial polynomial) {
+        int m = polynomial.commonExponent();
+        if (m == 1) {
+            return direct(polynomial);
+        }
+        List<Piece> pieces = new ArrayList<>();
+        for (Piece piece : of(polynomial.withExponentsOver(m), Factoring.Hints.NONE)) {
+            pieces.addAll(raised(piece, m));
+        }
+        return pieces;
+    }
+
+    /** The factors of h(z^m): at once when Capelli's criterion holds, else one prime of m after the other. */
+    private static List<Piece> raised(Piece piece, int m) {
+        IntegerPolynomial h = piece.polynomial;
+        if (m == 1 || piece.irreducible == Irreducible.NOT_PROVED || Capelli.proveIrreducible(h, m)) {
+            return List.of(new Piece(h.atPower(m), piece.irreducible));
+        }
+        int prime = Capelli.primesDividing(m).iterator().next();
+        List<Piece> factors = new ArrayList<>();
+        IntegerPolynomial rest = splitRootsAndCyclotomic(h.atPower(prime), List.of(), factors);
+        factors.addAll(direct(rest));
+        return factors.stream().flatMap(factor -> raised(factor, m / prime).stream()).toList();
+    }
+
+    /** Factors a polynomial without rational roots by degrees modulo primes, then by the library. */
+    private static List<Piece> direct(IntegerPolynomial polynomial) {
+        if (polynomial.isConstant()) {
+            return List.of();
+        }
+        boolean small = polynomial.degree() <= FACTORED_DEGREE;
+        if (polynomial.degree() <= 3
+                || DegreePatterns.proveIrreducible(polynomial, small ? PATIENCE : Integer.MAX_VALUE)) {
+            return List.of(Piece.proved(polynomial));
+        }
+        return small
+                ? RingsAlgebra.irreducibleFactors(polynomial).stream().map(Piece::proved).toList()
+                : List.of(new Piece(polynomial, Irreducible.NOT_PROVED));
+    }
+}
