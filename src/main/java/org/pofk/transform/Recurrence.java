@@ -1,16 +1,15 @@
 package org.pofk.transform;
 
+import java.util.List;
 import org.pofk.exact.Polynomial;
 import org.pofk.exact.Rational;
 
 /**
- * A sequence by its shortest recurrence: Σ_k y(k) z^(−k−1) = numerator / denominator in lowest terms, the denominator
- * monic of degree d and the numerator's degree below d; proved for every k. Exact.
+ * Sequences by the shortest recurrence they share: Σ y(k) z^(−k−1) = numerator / denominator for each, the denominator
+ * monic of degree d and the numerators' degrees below d; proved for every k. Exact.
  */
-public record Recurrence(Polynomial<Rational> numerator, Polynomial<Rational> denominator, RecurrenceProof proof) {
-
-    /** Y(z) = Σ y(k) z^(−k) in lowest terms. */
-    public TransferFunction<Rational> transferFunction() {
-        return new TransferFunction<>(numerator.shiftedUp(1), denominator);
+record Recurrence(Polynomial<Rational> denominator, List<Polynomial<Rational>> numerators, RecurrenceProof proof) {
+    Recurrence {
+        numerators = List.copyOf(numerators);
     }
 }

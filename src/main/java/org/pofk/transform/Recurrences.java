@@ -3,90 +3,85 @@ package org.pofk.transform;
 import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.function.Function;
 import java.util.stream.IntStream;
 import org.pofk.exact.Polynomial;
 import org.pofk.exact.Rational;
 import org.pofk.transform.RecurrenceProof.Method;
 
 /**
- * The shortest recurrence of every reading of a system: modulo primes of 31 bits, joined by Chinese remainders, and
- * proved. Modulo one prime the recurrence of order d is found from n + d terms and holds there for every k.
- * Primes whose order is below the largest seen are left out: they are the ones that can be misleading.
+ * The shortest recurrences of a system: modulo primes of 31 bits, joined by Chinese remainders, and proved. Primes
+ * whose order is below the largest seen are left out: they are the ones that can mislead.
  *
- * <p>Proof that the joined D, P are right over the rationals. Let χ be the characteristic polynomial and N = P_χ its
- * numerator. E = N·D − P·χ vanishes modulo every prime taken, and E times (Δ·l)·δ, δ the common denominator of D and P,
- * is integral; so E = 0 once the product of the primes exceeds twice a bound on it. When d = n, D is χ itself and a
- * bound on its own coefficients is enough. D is shortest because it is shortest modulo a prime.
+ * <p>Proof that the joined D, P are right over the rationals. Let χ be the characteristic polynomial and N the
+ * numerator over it. E = N·D − P·χ vanishes modulo every prime taken, and E times (Δ·l)·δ, δ the common denominator of
+ * D and P, is integral; so E = 0 once the product of the primes exceeds twice a bound on it. When d = n, D is χ itself
+ * and a bound on its own coefficients is enough. D is shortest because it is shortest modulo a prime.
  *
- * <p>Exact. Cost: for each prime (n + d) steps of the system and O((n + d)·d) for each reading.
+ * <p>Exact. Cost: for each prime (n + d) steps of the system, fewer when a vector proves it.
  */
 final class Recurrences {
     private static final long BELOW = 1L << 31;
-    private static final int PARALLEL_FROM = 48;
+    /** Below this size a prime takes less than handing it to another thread. */
+    private static final int PARALLEL_FROM = 40;
 
-    /** What one prime says of every reading. */
-    private record Modular(PrimeField field, List<long[]> denominators, List<long[]> numerators) {
-        int order(int reading) {
-            return numerators.get(reading).length;
-        }
+    /** What one prime says. */
+    private record Modular(PrimeField field, List<ModularRecurrence> recurrences) {
     }
 
     private final LinearSystem system;
-    private final KrylovTerms terms;
+    private final Function<ModularSystem, List<ModularRecurrence>> method;
+    private final SystemResidues residues;
     private final SystemBounds bounds;
     private final List<Modular> known = new ArrayList<>();
     private long nextBelow = BELOW;
 
-    private Recurrences(LinearSystem system) {
+    private Recurrences(LinearSystem system, Function<ModularSystem, List<ModularRecurrence>> method) {
         this.system = system;
-        terms = new KrylovTerms(system);
+        this.method = method;
+        residues = new SystemResidues(system);
         bounds = SystemBounds.of(system);
     }
 
     /** One recurrence for each reading, in their order. */
-    static List<Recurrence> of(LinearSystem system) {
-        Recurrences search = new Recurrences(system);
+    static List<Recurrence> ofReadings(LinearSystem system) {
+        Recurrences search = new Recurrences(system, ModularSystem::recurrences);
         List<Recurrence> found = new ArrayList<>();
         for (int reading = 0; reading < system.readings().size(); reading++) {
-            found.add(search.of(reading));
+            found.add(search.proved(reading));
         }
         return found;
     }
 
-    private Recurrence of(int reading) {
+    /** The recurrence that the state as a whole shares, with one numerator for each state; readings play no part. */
+    static Recurrence ofState(LinearSystem system) {
+        LinearSystem whole = new LinearSystem(system.matrix(), system.start(),
+                List.of(java.util.Collections.nCopies(system.size(), Rational.ONE)));
+        return new Recurrences(whole, modular -> List.of(modular.ofState())).proved(0);
+    }
+
+    private Recurrence proved(int place) {
         BigInteger wanted = bounds.scale().multiply(bounds.coefficient()).multiply(bounds.term()).shiftLeft(1);
         while (true) {
-            List<Modular> taken = ofLargestOrder(reading);
+            List<Modular> taken = ofLargestOrder(place);
             ChineseRemainders remainders = new ChineseRemainders(taken.stream().map(Modular::field).toList());
             if (remainders.product().compareTo(wanted) <= 0) {
                 addPrimes(wanted.bitLength() - remainders.product().bitLength());
                 continue;
             }
-            Polynomial<Rational> denominator =
-                    joined(remainders, taken.stream().map(one -> one.denominators.get(reading)).toList());
-            Polynomial<Rational> numerator =
-                    joined(remainders, taken.stream().map(one -> one.numerators.get(reading)).toList());
-            int order = denominator.degree();
-            if (order == system.size()) {
-                return new Recurrence(numerator, denominator,
-                        proof(Method.CHARACTERISTIC, order, taken.size(), remainders));
+            Recurrence joined = joined(remainders, taken.stream().map(one -> one.recurrences.get(place)).toList());
+            if (joined.denominator().degree() < system.size()) {
+                wanted = wanted.max(differenceBound(joined).shiftLeft(1));
             }
-            wanted = wanted.max(differenceBound(numerator, denominator).shiftLeft(1));
             if (remainders.product().compareTo(wanted) > 0) {
-                return new Recurrence(numerator, denominator,
-                        proof(Method.WINDOWS, order, taken.size(), remainders));
+                return joined;
             }
         }
     }
 
-    private RecurrenceProof proof(Method method, int order, int primes, ChineseRemainders remainders) {
-        return new RecurrenceProof(method, system.size(), system.size() + order, primes,
-                remainders.product().bitLength() - 1);
-    }
-
-    private List<Modular> ofLargestOrder(int reading) {
-        int largest = known.stream().mapToInt(one -> one.order(reading)).max().orElse(0);
-        return known.stream().filter(one -> one.order(reading) == largest).toList();
+    private List<Modular> ofLargestOrder(int place) {
+        int largest = known.stream().mapToInt(one -> one.recurrences.get(place).order()).max().orElse(0);
+        return known.stream().filter(one -> one.recurrences.get(place).order() == largest).toList();
     }
 
     /** More primes, together of at least that many bits. */
@@ -95,38 +90,60 @@ final class Recurrences {
         while (fields.size() <= bits / 30) {
             PrimeField field = PrimeField.of(PrimeField.primesBelow(nextBelow, 1).get(0));
             nextBelow = field.prime();
-            if (terms.isDefinedModulo(field)) {
+            if (residues.isDefinedModulo(field)) {
                 fields.add(field);
             }
         }
         IntStream places = IntStream.range(0, fields.size());
         known.addAll((system.size() < PARALLEL_FROM ? places : places.parallel())
-                .mapToObj(i -> modulo(fields.get(i))).toList());
+                .mapToObj(i -> new Modular(fields.get(i), method.apply(residues.modulo(fields.get(i))))).toList());
     }
 
-    private Modular modulo(PrimeField field) {
-        List<BerlekampMassey> found = terms.recurrencesModulo(field);
-        return new Modular(field, found.stream().map(BerlekampMassey::recurrence).toList(),
-                found.stream().map(BerlekampMassey::numerator).toList());
+    private Recurrence joined(ChineseRemainders remainders, List<ModularRecurrence> parts) {
+        int order = parts.get(0).order();
+        Polynomial<Rational> denominator = polynomial(remainders, parts, order + 1, ModularRecurrence::denominator);
+        List<Polynomial<Rational>> numerators = IntStream.range(0, parts.get(0).sequences())
+                .mapToObj(sequence -> polynomial(remainders, parts, order,
+                        (part, power) -> part.numerator(sequence, power))).toList();
+        return new Recurrence(denominator, numerators, proof(remainders, parts));
     }
 
-    private Polynomial<Rational> joined(ChineseRemainders remainders, List<long[]> residues) {
-        List<Rational> coefficients = new ArrayList<>();
-        for (int power = 0; power < residues.get(0).length; power++) {
+    /** The residue of one coefficient. */
+    private interface Residue {
+        long at(ModularRecurrence part, int power);
+    }
+
+    private Polynomial<Rational> polynomial(ChineseRemainders remainders, List<ModularRecurrence> parts, int length,
+            Residue residue) {
+        List<Rational> coefficients = new ArrayList<>(length);
+        for (int power = 0; power < length; power++) {
             int at = power;
-            long[] ofPower = residues.stream().mapToLong(one -> one[at]).toArray();
+            long[] ofPower = parts.stream().mapToLong(part -> residue.at(part, at)).toArray();
             coefficients.add(new Rational(remainders.combine(ofPower, bounds.scale()), bounds.scale()));
         }
         return Polynomial.ofRationals(coefficients);
     }
 
-    /** A bound on (Δ·l)·δ·E. */
-    private BigInteger differenceBound(Polynomial<Rational> numerator, Polynomial<Rational> denominator) {
-        List<Rational> all = new ArrayList<>(numerator.coefficients());
-        all.addAll(denominator.coefficients());
-        Rational sum = denominator.coefficients().stream().map(Rational::abs).reduce(Rational.ZERO, Rational::plus);
-        Rational largest = numerator.coefficients().stream().map(Rational::abs)
-                .reduce(Rational.ZERO, Rational::max);
+    private RecurrenceProof proof(ChineseRemainders remainders, List<ModularRecurrence> parts) {
+        int order = parts.get(0).order();
+        int bits = remainders.product().bitLength() - 1;
+        if (order == system.size()) {
+            return new RecurrenceProof(Method.CHARACTERISTIC, order, 2 * order, parts.size(), bits);
+        }
+        boolean vectors = parts.stream().allMatch(part -> part.method() == Method.VECTOR);
+        int proved = vectors ? parts.stream().mapToInt(ModularRecurrence::provedOrder).max().orElse(0) : system.size();
+        return new RecurrenceProof(vectors ? Method.VECTOR : Method.WINDOWS, proved, proved + order, parts.size(),
+                bits);
+    }
+
+    /** A bound on (Δ·l)·δ·E, for every sequence. */
+    private BigInteger differenceBound(Recurrence recurrence) {
+        List<Rational> all = new ArrayList<>(recurrence.denominator().coefficients());
+        recurrence.numerators().forEach(numerator -> all.addAll(numerator.coefficients()));
+        Rational sum = recurrence.denominator().coefficients().stream().map(Rational::abs)
+                .reduce(Rational.ZERO, Rational::plus);
+        Rational largest = recurrence.numerators().stream().flatMap(numerator -> numerator.coefficients().stream())
+                .map(Rational::abs).reduce(Rational.ZERO, Rational::max);
         Rational bound = sum.times(Rational.of(bounds.term())).plus(largest)
                 .times(Rational.of(bounds.coefficient().multiply(bounds.scale())))
                 .times(Rational.of(SystemBounds.commonDenominator(all)));

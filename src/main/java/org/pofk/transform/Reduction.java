@@ -3,12 +3,14 @@ package org.pofk.transform;
 import java.util.ArrayDeque;
 import java.util.ArrayList;
 import java.util.BitSet;
+import java.util.Collections;
 import java.util.Deque;
 import java.util.List;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Output;
 import org.pofk.chain.SparseMatrix;
 import org.pofk.chain.SparseMatrix.Entry;
+import org.pofk.exact.Rational;
 
 /**
  * A chain cut down to what takes part in the asked outputs: states that the start reaches and that reach an output.
@@ -25,6 +27,14 @@ public record Reduction(List<Integer> kept, LinearSystem reduced) {
     /** What is left of the chain for these outputs. */
     public static Reduction of(Chain chain, List<Output> outputs) {
         LinearSystem whole = LinearSystem.of(chain, outputs);
+        List<Integer> kept = taking(whole);
+        return new Reduction(kept, whole.restrictedTo(kept));
+    }
+
+    /** What is left of the chain when every state is asked for: the states that the start reaches. */
+    static Reduction ofState(Chain chain) {
+        LinearSystem whole = new LinearSystem(chain.matrix(), chain.start(),
+                List.of(Collections.nCopies(chain.size(), Rational.ONE)));
         List<Integer> kept = taking(whole);
         return new Reduction(kept, whole.restrictedTo(kept));
     }

@@ -1,9 +1,14 @@
 package org.pofk.transform;
 
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Output;
+import org.pofk.exact.Factorization;
+import org.pofk.exact.Polynomial;
+import org.pofk.exact.Rational;
 
 /** The exact engine: Chain → Y(z) in lowest terms, factored, for any set of outputs at once. */
 public final class Transforms {
@@ -12,13 +17,15 @@ public final class Transforms {
 
     /** One transform per output, in their order. */
     public static List<Transform> of(Chain chain, List<Output> outputs) {
-        List<Recurrence> recurrences = Recurrences.of(Reduction.of(chain, outputs).reduced());
+        List<Recurrence> recurrences = Recurrences.ofReadings(Reduction.of(chain, outputs).reduced());
+        Map<Polynomial<Rational>, Factorization<Rational>> factored = new HashMap<>();
         List<Transform> transforms = new ArrayList<>();
         for (int i = 0; i < outputs.size(); i++) {
-            Recurrence recurrence = recurrences.get(i);
-            TransferFunction<org.pofk.exact.Rational> y = recurrence.transferFunction();
-            transforms.add(new Transform(outputs.get(i), recurrence.denominator(), y,
-                    DenominatorFactors.of(y.denominator()), recurrence.proof()));
+            Polynomial<Rational> recurrence = recurrences.get(i).denominator();
+            TransferFunction<Rational> y =
+                    new TransferFunction<>(recurrences.get(i).numerators().get(0).shiftedUp(1), recurrence);
+            transforms.add(new Transform(outputs.get(i), recurrence, y,
+                    factored.computeIfAbsent(y.denominator(), DenominatorFactors::of), recurrences.get(i).proof()));
         }
         return transforms;
     }

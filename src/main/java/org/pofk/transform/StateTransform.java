@@ -1,0 +1,37 @@
+package org.pofk.transform;
+
+import java.util.ArrayList;
+import java.util.List;
+import org.pofk.chain.Chain;
+import org.pofk.exact.Factorization;
+import org.pofk.exact.Polynomial;
+import org.pofk.exact.Rational;
+
+/**
+ * All states at once over one denominator: Σ x(k) z^(−k) = z · numerators(z) / recurrence(z), nothing cancelled, so
+ * that partial fractions of numerator_s/recurrence are the modes of state s, with z/(z−λ)^j for 1/(z−λ)^j. Exact.
+ *
+ * @param recurrence D, the monic polynomial of least degree d with D(A) x(0) = 0; keeps z^m
+ * @param numerators one for each state of the chain, degree below d; zero for a state never reached
+ * @param factors    the factors of D
+ * @param proof      why D(A) x(0) = 0
+ */
+public record StateTransform(Polynomial<Rational> recurrence, List<Polynomial<Rational>> numerators,
+        Factorization<Rational> factors, RecurrenceProof proof) {
+    public StateTransform {
+        numerators = List.copyOf(numerators);
+    }
+
+    /** The transform of x(k) for the chain's start. Cost: d·n numbers of the length of D's. */
+    public static StateTransform of(Chain chain) {
+        Reduction reduction = Reduction.ofState(chain);
+        Recurrence recurrence = Recurrences.ofState(reduction.reduced());
+        List<Polynomial<Rational>> numerators = new ArrayList<>(java.util.Collections.nCopies(chain.size(),
+                Polynomial.zero(recurrence.denominator().field())));
+        for (int place = 0; place < reduction.kept().size(); place++) {
+            numerators.set(reduction.kept().get(place), recurrence.numerators().get(place));
+        }
+        return new StateTransform(recurrence.denominator(), numerators,
+                DenominatorFactors.of(recurrence.denominator()), recurrence.proof());
+    }
+}
