@@ -38,12 +38,12 @@ public interface Field<E> {
     }
 
     /** The product of two polynomials over this field; a field with a fast way overrides it. */
-    default Polynomial<E> multiply(Polynomial<E> a, Polynomial<E> b) {
+    default Polynomial<E> product(Polynomial<E> a, Polynomial<E> b) {
         return Polynomial.schoolbookProduct(this, a, b);
     }
 
     /** Quotient and remainder by a divisor that isn't zero; a field with a fast way overrides it. */
-    default Polynomial.Division<E> divide(Polynomial<E> dividend, Polynomial<E> divisor) {
+    default Polynomial.Division<E> division(Polynomial<E> dividend, Polynomial<E> divisor) {
         return Polynomial.longDivision(this, dividend, divisor);
     }
 

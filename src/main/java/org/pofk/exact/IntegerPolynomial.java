@@ -106,6 +106,22 @@ record IntegerPolynomial(List<BigInteger> coefficients) {
         return of(product);
     }
 
+    IntegerPolynomial plus(IntegerPolynomial other) {
+        return new IntegerPolynomial(IntStream.rangeClosed(0, Math.max(degree(), other.degree()))
+                .mapToObj(i -> coefficient(i).add(other.coefficient(i))).toList());
+    }
+
+    /** The sign of the value at a rational point. */
+    int signAt(Rational point) {
+        BigInteger value = BigInteger.ZERO;
+        BigInteger scale = BigInteger.ONE;
+        for (int i = degree(); i >= 0; i--) {
+            value = value.multiply(point.numerator()).add(coefficients.get(i).multiply(scale));
+            scale = scale.multiply(point.denominator());
+        }
+        return value.signum();
+    }
+
     IntegerPolynomial derivative() {
         List<BigInteger> result = new ArrayList<>();
         for (int i = 1; i <= degree(); i++) {

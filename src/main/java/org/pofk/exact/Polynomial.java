@@ -107,7 +107,7 @@ public record Polynomial<E>(Field<E> field, List<E> coefficients) {
     }
 
     public Polynomial<E> times(Polynomial<E> other) {
-        return field.multiply(this, other);
+        return field.product(this, other);
     }
 
     public Polynomial<E> times(E scalar) {
@@ -157,7 +157,7 @@ public record Polynomial<E>(Field<E> field, List<E> coefficients) {
         if (divisor.isZero()) {
             throw new ArithmeticException("division by the zero polynomial");
         }
-        return field.divide(this, divisor);
+        return field.division(this, divisor);
     }
 
     /** The quotient of a division that leaves nothing; an {@link ArithmeticException} when it leaves something. */

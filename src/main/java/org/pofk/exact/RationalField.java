@@ -48,14 +48,14 @@ public enum RationalField implements Field<Rational> {
     }
 
     @Override
-    public Polynomial<Rational> multiply(Polynomial<Rational> a, Polynomial<Rational> b) {
+    public Polynomial<Rational> product(Polynomial<Rational> a, Polynomial<Rational> b) {
         PrimitiveForm first = PrimitiveForm.of(a);
         PrimitiveForm second = PrimitiveForm.of(b);
         return PrimitiveForm.polynomial(first.content().times(second.content()), first.part().times(second.part()));
     }
 
     @Override
-    public Polynomial.Division<Rational> divide(Polynomial<Rational> dividend, Polynomial<Rational> divisor) {
+    public Polynomial.Division<Rational> division(Polynomial<Rational> dividend, Polynomial<Rational> divisor) {
         PrimitiveForm first = PrimitiveForm.of(dividend);
         PrimitiveForm second = PrimitiveForm.of(divisor);
         IntegerPolynomial.PseudoDivision division = first.part().pseudoDividedBy(second.part());
