@@ -2,7 +2,10 @@ package org.pofk.answer;
 
 import java.util.List;
 import java.util.Optional;
+import org.pofk.chain.Chain;
+import org.pofk.chain.Structure;
 import org.pofk.exact.Rational;
+import org.pofk.transform.Transform;
 
 /** What an output does as k grows: decided by exact division by cyclotomic polynomials, never by looking at moduli. */
 public sealed interface LongRun {
@@ -59,6 +62,21 @@ public sealed interface LongRun {
         }
     }
 
-    /** Why there is neither. */
-    enum Reason { GROWS, RECURS_WITHOUT_PERIOD }
+    /** Why there is neither; the last one is a cycle too long to list. */
+    enum Reason { GROWS, RECURS_WITHOUT_PERIOD, CYCLE_TOO_LONG }
+
+    /**
+     * The long run of a chain's output: divided by the cyclotomic polynomials of the periods of its closed classes,
+     * outside of which a chain has no pole on or outside the unit circle.
+     */
+    static LongRun of(Chain chain, Transform transform) {
+        return chain.kind() == Chain.Kind.CHAIN
+                ? LongRunByPoles.ofChain(Structure.of(chain), transform)
+                : of(transform);
+    }
+
+    /** The long run of any output, from where its poles lie. */
+    static LongRun of(Transform transform) {
+        return LongRunByPoles.ofRecursion(transform);
+    }
 }

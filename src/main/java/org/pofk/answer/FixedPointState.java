@@ -1,0 +1,79 @@
+package org.pofk.answer;
+
+import java.math.BigInteger;
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.List;
+import org.pofk.chain.Output;
+import org.pofk.exact.Ball;
+import org.pofk.exact.Rational;
+
+/**
+ * A probability vector from below: every component is a multiple of 2^−{@value #BITS} that is at most the true one.
+ * What the components lack to one is therefore the whole error, known without any estimate. Certified.
+ */
+record FixedPointState(List<BigInteger> components) {
+    static final int BITS = 128;
+    private static final BigInteger ONE = BigInteger.ONE.shiftLeft(BITS);
+
+    FixedPointState {
+        components = List.copyOf(components);
+    }
+
+    /** The largest multiples that are not above the components of a probability vector. */
+    static FixedPointState below(List<Rational> probabilities) {
+        return new FixedPointState(probabilities.stream().map(FixedPointState::below).toList());
+    }
+
+    static BigInteger below(Rational value) {
+        return value.numerator().shiftLeft(BITS).divide(value.denominator());
+    }
+
+    /** What the components lack to one: the true vector lies within this of them, summed over all states. */
+    BigInteger missing() {
+        return ONE.subtract(components.stream().reduce(BigInteger.ZERO, BigInteger::add));
+    }
+
+    /** What an output reads in the true state. */
+    Ball reading(Output output) {
+        Rational sum = output.constant();
+        Rational largest = Rational.ZERO;
+        for (int i = 0; i < components.size(); i++) {
+            Rational weight = output.coefficients().get(i);
+            if (!weight.isZero()) {
+                sum = sum.plus(weight.times(new Rational(components.get(i), ONE)));
+                largest = Rational.max(largest, weight.abs());
+            }
+        }
+        BigInteger center = below(sum);
+        // one unit for rounding the sum, one for rounding the product up
+        BigInteger radius = largest.times(Rational.of(missing())).floor().add(BigInteger.TWO);
+        return new Ball(center, radius, BITS);
+    }
+
+    /** An upper bound on the largest difference of a component from that of another such vector. */
+    Rational distanceAtMost(FixedPointState other) {
+        BigInteger largest = BigInteger.ZERO;
+        for (int i = 0; i < components.size(); i++) {
+            largest = largest.max(components.get(i).subtract(other.components.get(i)).abs());
+        }
+        return new Rational(largest.add(missing().max(other.missing())), ONE);
+    }
+
+    /** The components of Σ column · weight, rounded down. */
+    static FixedPointState combination(List<FixedPointColumn> columns, List<BigInteger> weights) {
+        BigInteger[] sums = new BigInteger[weights.size()];
+        Arrays.fill(sums, BigInteger.ZERO);
+        for (int j = 0; j < columns.size(); j++) {
+            BigInteger weight = weights.get(j);
+            if (weight.signum() != 0) {
+                columns.get(j).addTo(sums, weight);
+            }
+        }
+        List<BigInteger> rounded = new ArrayList<>(sums.length);
+        for (BigInteger sum : sums) {
+            rounded.add(sum.shiftRight(BITS));
+        }
+        return new FixedPointState(rounded);
+    }
+}

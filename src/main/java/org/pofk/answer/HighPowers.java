@@ -1,0 +1,118 @@
+package org.pofk.answer;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import org.pofk.chain.Chain;
+import org.pofk.chain.Output;
+import org.pofk.exact.Ball;
+import org.pofk.exact.Rational;
+
+/**
+ * A chain's state at high powers: the third way to a long run, and what common practice, comparing two successive
+ * high powers, would have made of it. The states are certified enclosures.
+ */
+public final class HighPowers {
+    /** What common practice takes for "no longer changes": six decimals. */
+    public static final Rational HABIT = Rational.of(1, 2_000_000);
+    /** An accepted value may be wrong by this much before the habit is said to mislead. */
+    private static final Rational RIGHT_WITHIN = HABIT.times(Rational.of(20));
+
+    private final PowerSequence sequence;
+
+    private HighPowers(PowerSequence sequence) {
+        this.sequence = sequence;
+    }
+
+    /** The two ways in which successive powers are compared. */
+    public enum Way { STEP_BY_STEP, BY_SQUARING }
+
+    /** What became of the value that a habit accepted. */
+    public enum Outcome { RIGHT, MISLED_BY_CYCLE, MISLED_BY_SLOW_POLE }
+
+    /**
+     * Where comparing successive powers would have stopped, because no state changed by more than {@link #HABIT}.
+     *
+     * @param k       the later of the two powers compared
+     * @param value   what the output reads there
+     * @param outcome whether that is the long run
+     */
+    public record Stop(Way way, long k, Ball value, Outcome outcome) {
+    }
+
+    /**
+     * High powers held against a long run.
+     *
+     * @param k           the highest power, and how many steps from there were looked at: one, or a whole cycle
+     * @param within      no value seen there is farther than this from the long run; proved
+     * @param habits      where each habit stops; a habit that never stops in what was computed isn't listed
+     */
+    public record Verdict(long k, int looked, Rational within, List<Stop> habits) {
+        public Verdict {
+            habits = List.copyOf(habits);
+        }
+
+        /** True when some habit accepts a value that is not the long run. */
+        public boolean habitMisleads() {
+            return habits.stream().anyMatch(stop -> stop.outcome != Outcome.RIGHT);
+        }
+    }
+
+    /**
+     * @param period of the cycle to be looked at, 1 for a limit
+     */
+    public static HighPowers of(Chain chain, int period) {
+        return new HighPowers(PowerSequence.of(chain, period, HABIT));
+    }
+
+    /** Empty when there is neither a limit nor a listed cycle, or the states computed cover less than its period. */
+    public Optional<Verdict> against(LongRun longRun, Output output) {
+        List<Rational> values = LongRunValues.of(longRun);
+        if (values.isEmpty() || values.size() > sequence.tail().size()) {
+            return Optional.empty();
+        }
+        long highest = 1L << (sequence.doubling().size() - 1);
+        Rational within = Rational.ZERO;
+        for (int j = 0; j < values.size(); j++) {
+            Rational expected = values.get((int) ((highest + j) % values.size()));
+            within = Rational.max(within, farthest(sequence.tail().get(j).reading(output), expected));
+        }
+        List<Stop> habits = new ArrayList<>();
+        stopStepByStep(output, values).ifPresent(habits::add);
+        stopBySquaring(output, values).ifPresent(habits::add);
+        return Optional.of(new Verdict(highest, values.size(), within, habits));
+    }
+
+    private Optional<Stop> stopStepByStep(Output output, List<Rational> values) {
+        return firstStop(sequence.steps()).map(place ->
+                stop(Way.STEP_BY_STEP, place, sequence.steps().get(place).reading(output), values));
+    }
+
+    private Optional<Stop> stopBySquaring(Output output, List<Rational> values) {
+        return firstStop(sequence.doubling()).map(place ->
+                stop(Way.BY_SQUARING, 1L << place, sequence.doubling().get(place).reading(output), values));
+    }
+
+    /** The place of the first state that differs from the one before it by no more than the habit's tolerance. */
+    private static Optional<Integer> firstStop(List<FixedPointState> states) {
+        for (int place = 1; place < states.size(); place++) {
+            if (states.get(place).distanceAtMost(states.get(place - 1)).compareTo(HABIT) <= 0) {
+                return Optional.of(place);
+            }
+        }
+        return Optional.empty();
+    }
+
+    private static Stop stop(Way way, long k, Ball value, List<Rational> values) {
+        boolean right = values.stream().allMatch(each -> farthest(value, each).compareTo(RIGHT_WITHIN) <= 0);
+        boolean rightForThisStep = farthest(value, values.get((int) (k % values.size()))).compareTo(RIGHT_WITHIN) <= 0;
+        Outcome outcome = right ? Outcome.RIGHT
+                : rightForThisStep ? Outcome.MISLED_BY_CYCLE : Outcome.MISLED_BY_SLOW_POLE;
+        return new Stop(way, k, value, outcome);
+    }
+
+    private static Rational farthest(Ball ball, Rational value) {
+        Rational unit = Rational.TWO.pow(-ball.scale());
+        return Rational.of(ball.center()).times(unit).minus(value).abs().plus(Rational.of(ball.radius()).times(unit));
+    }
+}

@@ -1,0 +1,46 @@
+package org.pofk.answer;
+
+import java.util.List;
+import java.util.TreeSet;
+import org.pofk.chain.Structure;
+import org.pofk.exact.Cyclotomic;
+import org.pofk.exact.Rational;
+import org.pofk.transform.Transform;
+
+/**
+ * The long run read off the denominator of Y(z): what lies on the unit circle stays, what lies inside dies out, and
+ * anything outside, or repeated on the circle, grows. Exact.
+ */
+final class LongRunByPoles {
+    private LongRunByPoles() {
+    }
+
+    /**
+     * A chain's poles on the unit circle are simple, and roots of unity whose order divides the period of a closed
+     * class (Perron and Frobenius; Seneta 1981, section 1.3, from memory).
+     */
+    static LongRun ofChain(Structure structure, Transform transform) {
+        TreeSet<Integer> orders = new TreeSet<>();
+        structure.closedClasses().stream().filter(each -> each.reached()).mapToInt(each -> each.period()).distinct()
+                .forEach(period -> addDivisors(period, orders));
+        return periodic(transform, Cyclotomic.ordersDividing(transform.y().denominator(), orders));
+    }
+
+    static LongRun ofRecursion(Transform transform) {
+        throw new UnsupportedOperationException();
+    }
+
+    private static LongRun periodic(Transform transform, List<Integer> orders) {
+        List<List<Rational>> parts = orders.stream().map(order -> UnitCirclePart.values(transform.y(), order)).toList();
+        return PeriodicValues.sum(parts).longRun();
+    }
+
+    private static void addDivisors(int period, TreeSet<Integer> orders) {
+        for (int divisor = 1; (long) divisor * divisor <= period; divisor++) {
+            if (period % divisor == 0) {
+                orders.add(divisor);
+                orders.add(period / divisor);
+            }
+        }
+    }
+}
