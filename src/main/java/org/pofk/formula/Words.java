@@ -33,6 +33,14 @@ final class Words {
         return FUNCTION_NAMES.get(function.ordinal());
     }
 
+    static String nameOf(Constant constant) {
+        return switch (constant) {
+            case PI -> "pi";
+            case I -> "i";
+            case DEGREE -> "deg";
+        };
+    }
+
     static boolean beginsName(int codePoint) {
         return Character.isLetter(codePoint) || codePoint == '_';
     }
