@@ -1,0 +1,34 @@
+package org.pofk.cli;
+
+import java.nio.file.Path;
+import java.util.Arrays;
+import java.util.List;
+import java.util.Locale;
+import java.util.Optional;
+
+/** What an answer can be written as. */
+enum Format {
+    TEXT(".txt"), JSON(".json");
+
+    private final String ending;
+
+    Format(String ending) {
+        this.ending = ending;
+    }
+
+    /** The format a file's name asks for. */
+    static Optional<Format> of(Path file) {
+        String name = file.toString().toLowerCase(Locale.ROOT);
+        return Arrays.stream(values()).filter(format -> name.endsWith(format.ending)).findFirst();
+    }
+
+    static List<String> endings() {
+        return Arrays.stream(values()).map(format -> format.ending).toList();
+    }
+
+    /** As typed: {@code json}. */
+    @Override
+    public String toString() {
+        return name().toLowerCase(Locale.ROOT);
+    }
+}

@@ -1,0 +1,66 @@
+package org.pofk.cli;
+
+import java.util.List;
+import java.util.Optional;
+import org.pofk.text.Suggestion;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
+import picocli.CommandLine.Parameters;
+
+/** {@code pofk help}: the commands; {@code pofk help WORDS}: the command that answers a word of the trade. */
+@Command(description = "Explains a command, or leads from a word of the trade to the command that answers it.")
+final class HelpCommand implements Work {
+    private static final List<String> OVERVIEW = List.of(
+            "pofk: exact, proven formulas p(k) for a chain that moves in steps",
+            "",
+            "  pofk derive MODEL     formulas that hold for every k, with their proof",
+            "                        (also what  pofk MODEL  does)",
+            "  pofk inspect MODEL    the structure: classes, periods, long run, warnings",
+            "  pofk simulate MODEL   random walks with intervals, beside the exact values",
+            "  pofk new              patterns to start a model from",
+            "  pofk help COMMAND     the options of a command",
+            "  pofk help WORDS       from a word of the trade to the command that answers it:",
+            "                        steady state, availability, mean time to failure, …",
+            "  pofk version          which version this is",
+            "",
+            "Begin:  pofk new pump-pair --save pumps.yaml",
+            "        pofk derive pumps.yaml --of lost");
+
+    @Parameters(arity = "0..*", paramLabel = "WORDS", description = "a command, or words of the trade")
+    private List<String> words = List.of();
+
+    @Mixin
+    private CommonOptions common;
+
+    @Override
+    public ExitCode run(Streams streams) throws UsageException {
+        String asked = String.join(" ", words);
+        Optional<CommandName> command = CommandName.of(asked);
+        if (asked.isBlank()) {
+            OVERVIEW.forEach(streams.answer()::println);
+        } else if (command.isPresent()) {
+            command.get().commandLine().usage(streams.answer());
+        } else {
+            explain(asked, streams);
+        }
+        return ExitCode.ANSWERED;
+    }
+
+    private static void explain(String asked, Streams streams) throws UsageException {
+        Optional<Planned> planned = Planned.of(asked);
+        Optional<TradeWords.Entry> entry = TradeWords.read().about(asked);
+        if (planned.isEmpty() && entry.isEmpty()) {
+            throw unknown(asked);
+        }
+        planned.ifPresent(command -> streams.answer().println(
+                "'" + command.word() + "' isn't built yet: it " + command.purpose()));
+        entry.ifPresent(found -> found.shown().forEach(streams.answer()::println));
+    }
+
+    private static UsageException unknown(String asked) {
+        TradeWords known = TradeWords.read();
+        List<String> first = known.entries().stream().map(entry -> entry.words().get(0)).toList();
+        return new UsageException("nothing is known about '" + asked + "'"
+                + Suggestion.didYouMean(known.words(), asked) + "\nWords that lead further: " + String.join(", ", first));
+    }
+}
