@@ -61,6 +61,7 @@ final class HelpCommand implements Work {
         TradeWords known = TradeWords.read();
         List<String> first = known.entries().stream().map(entry -> entry.words().get(0)).toList();
         return new UsageException("nothing is known about '" + asked + "'"
-                + Suggestion.didYouMean(known.words(), asked) + "\nWords that lead further: " + String.join(", ", first));
+                + Suggestion.didYouMean(known.words(), asked) + "\nWords that lead further:\n  "
+                + String.join("\n  ", first));
     }
 }
