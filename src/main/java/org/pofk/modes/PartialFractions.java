@@ -1,0 +1,110 @@
+package org.pofk.modes;
+
+import java.util.ArrayList;
+import java.util.List;
+import org.pofk.exact.Factorization;
+import org.pofk.exact.Field;
+import org.pofk.exact.Polynomial;
+import org.pofk.exact.ResidueField;
+import org.pofk.transform.TransferFunction;
+
+/**
+ * Partial fractions of Y(z)/z over any coefficient field, without a root being computed: the coefficients of a factor
+ * q^e are the Taylor coefficients at a root λ of what is left of Y(z)/z beside (z − λ)^e, taken in E[λ]/(q)
+ * (full partial fraction decomposition; Bronstein and Salvy 1993, from memory). The q-adic digits of the numerator
+ * are not these. Exact. A factor of degree d and multiplicity e costs about e² products and one inverse modulo q;
+ * a simple factor of high degree costs nothing, its coefficient stays the quotient N(λ)/D′(λ).
+ */
+public final class PartialFractions<E> {
+    private final Field<E> field;
+    private final Polynomial<E> numerator;
+    private final Polynomial<E> denominator;
+
+    /** N/D = Y(z)/z in lowest terms: the z of the transform stays outside. */
+    private PartialFractions(TransferFunction<E> y) {
+        field = y.denominator().field();
+        boolean startsAtZero = field.isZero(y.numerator().coefficient(0));
+        numerator = startsAtZero ? y.numerator().shiftedDown(1) : y.numerator();
+        denominator = startsAtZero ? y.denominator() : y.denominator().shiftedUp(1);
+    }
+
+    /**
+     * The expansion of Y, whose denominator has the factors given (z among them where Y has a pole at zero).
+     * Y ≡ 0 has neither impulses nor parts.
+     */
+    public static <E> Expansion<E> of(TransferFunction<E> y, Factorization<E> factors) {
+        if (y.numerator().degree() > y.denominator().degree()) {
+            throw new AssertionError("a transform of a sequence that starts before k = 0: " + y);
+        }
+        if (y.numerator().isZero()) {
+            return new Expansion<>(y.denominator().field(), List.of(), List.of());
+        }
+        return new PartialFractions<>(y).expand(factors);
+    }
+
+    private Expansion<E> expand(Factorization<E> factors) {
+        List<Expansion.Part<E>> parts = new ArrayList<>();
+        for (Factorization.Factor<E> factor : factors.factors()) {
+            if (!isZ(factor.polynomial())) {
+                parts.add(new Expansion.Part<>(factor, coefficients(factor)));
+            }
+        }
+        return new Expansion<>(field, impulses(), parts);
+    }
+
+    /** True for the factor z, whose terms are impulses. */
+    static <E> boolean isZ(Polynomial<E> factor) {
+        return factor.degree() == 1 && factor.field().isZero(factor.coefficient(0));
+    }
+
+    /** The terms c/z^(i+1) of N/D, c the impulse at k = i: the power series at zero of N/(D/z^m), read backwards. */
+    private List<E> impulses() {
+        int order = denominator.lowestPower();
+        Polynomial<E> rest = denominator.shiftedDown(order);
+        List<E> series = Series.quotient(field, numerator, rest, order);
+        List<E> impulses = new ArrayList<>(series);
+        java.util.Collections.reverse(impulses);
+        return impulses;
+    }
+
+    private List<Expansion.Coefficient<E>> coefficients(Factorization.Factor<E> factor) {
+        boolean simple = factor.multiplicity() == 1;
+        return simple && factor.polynomial().degree() > Expansion.REDUCED_UP_TO
+                ? List.of(new Expansion.Coefficient<>(numerator, denominator.derivative()))
+                : taylor(factor);
+    }
+
+    /** R_p is the Taylor coefficient of order e−1−p: 1/(z − λ)^(p+1) goes with binomial(k, p) λ^(k−p). */
+    private List<Expansion.Coefficient<E>> taylor(Factorization.Factor<E> factor) {
+        Polynomial<E> q = factor.polynomial();
+        int e = factor.multiplicity();
+        Polynomial<E> power = q.pow(e);
+        Polynomial<E> cofactor = denominator.dividedExactlyBy(power);
+        ResidueField<E> residues = new ResidueField<>(q);
+        Polynomial<Polynomial<E>> beside = atRoot(residues, cofactor.remainder(power), 0, e);
+        Polynomial<Polynomial<E>> overRoot = atRoot(residues, q, 1, e);
+        for (int i = 0; i < e; i++) {
+            beside = Series.truncated(beside.times(overRoot), e);
+        }
+        List<Polynomial<E>> series =
+                Series.quotient(residues, atRoot(residues, numerator.remainder(power), 0, e), beside, e);
+        List<Expansion.Coefficient<E>> coefficients = new ArrayList<>();
+        for (int p = 0; p < e; p++) {
+            coefficients.add(new Expansion.Coefficient<>(series.get(e - 1 - p), Polynomial.one(field)));
+        }
+        return coefficients;
+    }
+
+    /** The Taylor coefficients of orders {@code from} … from+length−1 of f at λ, as a polynomial in t = z − λ. */
+    private Polynomial<Polynomial<E>> atRoot(ResidueField<E> residues, Polynomial<E> f, int from, int length) {
+        List<Polynomial<E>> taylor = new ArrayList<>();
+        Polynomial<E> derivative = f;
+        for (int order = 0; order < from + length; order++) {
+            if (order >= from) {
+                taylor.add(derivative.remainder(residues.modulus()));
+            }
+            derivative = derivative.derivative().times(field.inverse(field.of(order + 1L)));
+        }
+        return new Polynomial<>(residues, taylor);
+    }
+}
