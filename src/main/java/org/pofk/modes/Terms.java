@@ -1,0 +1,112 @@
+package org.pofk.modes;
+
+import java.math.BigInteger;
+import java.util.ArrayList;
+import java.util.List;
+import org.pofk.exact.Rational;
+import org.pofk.formula.Formula;
+
+/**
+ * How closed forms are written as formula trees: no factor 1, no exponent 1, no sum of one term, signs in front of
+ * products, fractions with the radical in the numerator (√2/10).
+ */
+final class Terms {
+    static final Formula K = new Formula.Symbol("k");
+
+    private Terms() {
+    }
+
+    static Formula number(Rational value) {
+        return new Formula.Number(value);
+    }
+
+    static Formula sum(List<Formula> terms) {
+        return switch (terms.size()) {
+            case 0 -> number(Rational.ZERO);
+            case 1 -> terms.get(0);
+            default -> new Formula.Sum(terms);
+        };
+    }
+
+    /** The factors multiplied, ones left out, products within flattened, one sign in front. */
+    static Formula product(List<Formula> factors) {
+        List<Formula> kept = new ArrayList<>();
+        boolean negative = false;
+        for (Formula factor : factors) {
+            Formula rest = factor;
+            if (rest instanceof Formula.Negation negation) {
+                negative = !negative;
+                rest = negation.operand();
+            }
+            if (rest instanceof Formula.Number number && number.value().signum() < 0) {
+                negative = !negative;
+                rest = number(number.value().negate());
+            }
+            if (rest instanceof Formula.Product product) {
+                kept.addAll(product.factors());
+            } else if (!isOne(rest)) {
+                kept.add(rest);
+            }
+        }
+        Formula product = switch (kept.size()) {
+            case 0 -> number(Rational.ONE);
+            case 1 -> kept.get(0);
+            default -> new Formula.Product(kept);
+        };
+        return negative ? negated(product) : product;
+    }
+
+    /** factor · irrational, as one fraction: −3√2/10. */
+    static Formula scaled(Rational factor, Formula irrational) {
+        Formula numerator = product(List.of(number(Rational.of(factor.numerator().abs())), irrational));
+        Formula positive = factor.isInteger()
+                ? numerator
+                : new Formula.Quotient(numerator, number(Rational.of(factor.denominator())));
+        return factor.signum() < 0 ? negated(positive) : positive;
+    }
+
+    /** −formula, a sign already in front taken away and a number's sign turned. */
+    static Formula negated(Formula formula) {
+        if (formula instanceof Formula.Negation negation) {
+            return negation.operand();
+        }
+        return formula instanceof Formula.Number number
+                ? number(number.value().negate())
+                : new Formula.Negation(formula);
+    }
+
+    static Formula squareRoot(Formula radicand) {
+        return call(Formula.Function.SQRT, radicand);
+    }
+
+    static Formula call(Formula.Function function, Formula... arguments) {
+        return new Formula.Call(function, List.of(arguments));
+    }
+
+    static Formula power(Formula base, Formula exponent) {
+        return isOne(exponent) || isOne(base) ? base : new Formula.Power(base, exponent);
+    }
+
+    /** k − shift. */
+    static Formula kMinus(int shift) {
+        return shift == 0 ? K : new Formula.Sum(List.of(K, negated(number(Rational.of(shift)))));
+    }
+
+    /** binomial(k, p): 1 for p = 0, k for p = 1. */
+    static Formula binomial(int p) {
+        return switch (p) {
+            case 0 -> number(Rational.ONE);
+            case 1 -> K;
+            default -> call(Formula.Function.BINOMIAL, K, number(Rational.of(p)));
+        };
+    }
+
+    static boolean isOne(Formula formula) {
+        return formula instanceof Formula.Number number
+                && number.value().numerator().equals(BigInteger.ONE) && number.value().isInteger();
+    }
+
+    static boolean isZero(Formula formula) {
+        return formula instanceof Formula.Number number && number.value().isZero();
+    }
+}
