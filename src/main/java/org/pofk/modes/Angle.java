@@ -1,5 +1,6 @@
 package org.pofk.modes;
 
+import java.util.Optional;
 import org.pofk.exact.Rational;
 import org.pofk.formula.Formula;
 
@@ -7,6 +8,9 @@ import org.pofk.formula.Formula;
 sealed interface Angle {
 
     Formula formula();
+
+    /** The angle over π where that is rational. */
+    Optional<Rational> piFraction();
 
     /** fraction · π. */
     record PiMultiple(Rational fraction) implements Angle {
@@ -16,6 +20,11 @@ sealed interface Angle {
                     ? Terms.number(fraction)
                     : Terms.scaled(fraction, Formula.Constant.PI);
         }
+
+        @Override
+        public Optional<Rational> piFraction() {
+            return Optional.of(fraction);
+        }
     }
 
     /** ±arccos(cosine), which reaches all quadrants; never a rational multiple of π. */
@@ -24,6 +33,11 @@ sealed interface Angle {
         public Formula formula() {
             Formula angle = Terms.call(Formula.Function.ARCCOS, cosine.formula());
             return sign < 0 ? Terms.negated(angle) : angle;
+        }
+
+        @Override
+        public Optional<Rational> piFraction() {
+            return Optional.empty();
         }
     }
 }

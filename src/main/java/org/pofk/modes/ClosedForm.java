@@ -1,7 +1,9 @@
 package org.pofk.modes;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import org.pofk.exact.Factorization.Factor;
 import org.pofk.exact.Rational;
 import org.pofk.exact.Roots;
 import org.pofk.formula.Formula;
@@ -19,23 +21,43 @@ public record ClosedForm(Transform transform, Expansion<Rational> expansion, Lis
         modes = List.copyOf(modes);
     }
 
+    /** Exact in what modes there are and in every short form; the constants left are certified enclosures. */
     public static ClosedForm of(Transform transform) {
-        throw new UnsupportedOperationException();
+        Expansion<Rational> expansion = PartialFractions.of(transform.y(), transform.factors());
+        List<Roots> roots = transform.factors().factors().stream().map(Factor::polynomial).map(Roots::of).toList();
+        List<Mode> modes = new ArrayList<>(impulses(expansion.impulses()));
+        for (Expansion.Part<Rational> part : expansion.parts()) {
+            int index = transform.factors().factors().indexOf(part.factor());
+            modes.addAll(FactorModes.of(index, part, roots.get(index)));
+        }
+        return new ClosedForm(transform, expansion, roots, modes);
+    }
+
+    private static List<Mode> impulses(List<Rational> values) {
+        List<Mode> impulses = new ArrayList<>();
+        for (int at = 0; at < values.size(); at++) {
+            if (!values.get(at).isZero()) {
+                impulses.add(new Mode.Impulse(at, RealValue.of(values.get(at))));
+            }
+        }
+        return impulses;
     }
 
     /** True when every constant of every mode has a short exact form. */
     public boolean isExactThroughout() {
-        throw new UnsupportedOperationException();
+        return modes.stream().allMatch(Mode::isExact);
     }
 
     /** The formula in short exact forms; empty when some constant has none. Variable k. */
     public Optional<Formula> exactFormula() {
-        throw new UnsupportedOperationException();
+        return isExactThroughout()
+                ? Optional.of(Terms.sum(modes.stream().map(ModeFormula::exact).toList()))
+                : Optional.empty();
     }
 
     /** The exact formula always: a factor without short forms is a {@link Formula.RootSum} over its roots. */
     public Formula formulaOverRoots() {
-        throw new UnsupportedOperationException();
+        return FormulaOverRoots.of(this);
     }
 
     /** The formula in decimals, with what it promises. */

@@ -1,5 +1,8 @@
 package org.pofk.modes;
 
+import java.util.OptionalInt;
+import java.util.stream.Stream;
+
 /**
  * One term of a closed form. Power p stands for binomial(k, p) · base^(k−p), zero for k < p; an oscillating term is
  * amplitude · binomial(k, p) · modulus^(k−p) · cos(angle (k−p) + phase), once per conjugate pair.
@@ -8,6 +11,12 @@ package org.pofk.modes;
 public sealed interface Mode {
 
     <R> R accept(Visitor<R> visitor);
+
+    /** True when every constant of this mode has a short exact form. */
+    boolean isExact();
+
+    /** The place of the factor of the denominator it belongs to; empty for an impulse. */
+    OptionalInt factorIndex();
 
     /** One method per variant. */
     interface Visitor<R> {
@@ -21,6 +30,17 @@ public sealed interface Mode {
     /** value at k = at, zero elsewhere. */
     record Impulse(int at, RealValue value) implements Mode {
         @Override
+        public boolean isExact() {
+            return value.exact().isPresent();
+        }
+
+        @Override
+        public OptionalInt factorIndex() {
+            return OptionalInt.empty();
+        }
+
+
+        @Override
         public <R> R accept(Visitor<R> visitor) {
             return visitor.impulse(this);
         }
@@ -28,6 +48,17 @@ public sealed interface Mode {
 
     /** A real pole, its sign kept in the base. */
     record Geometric(int factor, int root, int power, RealValue base, RealValue coefficient) implements Mode {
+        @Override
+        public boolean isExact() {
+            return base.exact().isPresent() && coefficient.exact().isPresent();
+        }
+
+        @Override
+        public OptionalInt factorIndex() {
+            return OptionalInt.of(factor);
+        }
+
+
         @Override
         public <R> R accept(Visitor<R> visitor) {
             return visitor.geometric(this);
@@ -37,6 +68,17 @@ public sealed interface Mode {
     /** A conjugate pair; angle in (0, π), amplitude above 0, phase in (−π, π]. */
     record Oscillating(int factor, int root, int power, RealValue modulus, RealValue angle, RealValue amplitude,
             RealValue phase) implements Mode {
+        @Override
+        public boolean isExact() {
+            return Stream.of(modulus, angle, amplitude, phase).allMatch(value -> value.exact().isPresent());
+        }
+
+        @Override
+        public OptionalInt factorIndex() {
+            return OptionalInt.of(factor);
+        }
+
+
         @Override
         public <R> R accept(Visitor<R> visitor) {
             return visitor.oscillating(this);

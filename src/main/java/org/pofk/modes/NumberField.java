@@ -1,8 +1,10 @@
 package org.pofk.modes;
 
+import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.IntFunction;
 import org.pofk.exact.ComplexBall;
 import org.pofk.exact.Polynomial;
 import org.pofk.exact.Rational;
@@ -22,6 +24,7 @@ final class NumberField {
     private final ResidueField<Rational> residues;
     private final Roots roots;
     private final int step;
+    private Optional<Roots> stepRoots = Optional.empty();
 
     NumberField(Polynomial<Rational> q, Roots roots) {
         this.residues = new ResidueField<>(q);
@@ -51,10 +54,14 @@ final class NumberField {
         int step = 0;
         for (int power = 1; power <= q.degree(); power++) {
             if (!q.coefficient(power).isZero()) {
-                step = java.math.BigInteger.valueOf(step).gcd(java.math.BigInteger.valueOf(power)).intValue();
+                step = BigInteger.valueOf(step).gcd(BigInteger.valueOf(power)).intValue();
             }
         }
         return step;
+    }
+
+    Polynomial<Rational> one() {
+        return residues.one();
     }
 
     Polynomial<Rational> multiply(Polynomial<Rational> a, Polynomial<Rational> b) {
@@ -77,6 +84,25 @@ final class NumberField {
             }
         }
         return result;
+    }
+
+    /** Decides whether λ^m is real, m = {@link #step}: it is a root of g, and there it is known. Costs the roots of g. */
+    boolean hasRealStepPower(Root root) {
+        if (step == 1) {
+            return root.isReal();
+        }
+        return located(rootsOfStepPolynomial(), bits -> root.enclose(bits).pow(step)).isReal();
+    }
+
+    private synchronized Roots rootsOfStepPolynomial() {
+        if (stepRoots.isEmpty()) {
+            List<Rational> coefficients = new ArrayList<>();
+            for (int power = 0; power <= degree(); power += step) {
+                coefficients.add(modulus().coefficient(power));
+            }
+            stepRoots = Optional.of(Roots.of(Polynomial.ofRationals(coefficients)));
+        }
+        return stepRoots.get();
     }
 
     /**
@@ -117,7 +143,7 @@ final class NumberField {
     }
 
     /** Which root of q the number is that {@code at} encloses; it is known to be one. */
-    static Root located(Roots roots, java.util.function.IntFunction<ComplexBall> at) {
+    static Root located(Roots roots, IntFunction<ComplexBall> at) {
         List<Root> left = new ArrayList<>(roots.all());
         for (int bits = 32; left.size() > 1; bits *= 2) {
             int precision = bits;

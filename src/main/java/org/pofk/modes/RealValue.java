@@ -2,6 +2,7 @@ package org.pofk.modes;
 
 import java.util.Optional;
 import org.pofk.exact.Enclosed;
+import org.pofk.exact.Rational;
 import org.pofk.formula.Formula;
 
 /**
@@ -9,4 +10,25 @@ import org.pofk.formula.Formula;
  * Certified; exact when {@code exact} is present.
  */
 public record RealValue(Optional<Formula> exact, Enclosed enclosure) {
+
+    public static RealValue of(Rational value) {
+        return new RealValue(Optional.of(Terms.number(value)), Enclosed.of(value));
+    }
+
+    static RealValue of(Optional<Radical> shortForm, Enclosed enclosure) {
+        return shortForm.flatMap(Radical::rational).map(RealValue::of)
+                .orElseGet(() -> new RealValue(shortForm.map(Radical::formula), enclosure));
+    }
+
+    /** An angle; a rational multiple of π is enclosed as one, for an argument's enclosure straddles π at π. */
+    static RealValue ofAngle(Optional<Angle> shortForm, Enclosed enclosure) {
+        Enclosed sharper = shortForm.flatMap(Angle::piFraction)
+                .map(fraction -> Enclosed.pi().times(Enclosed.of(fraction))).orElse(enclosure);
+        return new RealValue(shortForm.map(Angle::formula), sharper);
+    }
+
+    /** The value where it is known to be rational. */
+    public Optional<Rational> rational() {
+        return exact.filter(Formula.Number.class::isInstance).map(number -> ((Formula.Number) number).value());
+    }
 }

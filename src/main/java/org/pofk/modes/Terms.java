@@ -3,6 +3,7 @@ package org.pofk.modes;
 import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.List;
+import org.pofk.exact.Polynomial;
 import org.pofk.exact.Rational;
 import org.pofk.formula.Formula;
 
@@ -65,6 +66,13 @@ final class Terms {
         return factor.signum() < 0 ? negated(positive) : positive;
     }
 
+    /** value · factor, written over the value's denominator where it is a fraction: 2π/5 · k as 2πk/5. */
+    static Formula overDenominator(Formula value, Formula factor) {
+        return value instanceof Formula.Quotient quotient
+                ? new Formula.Quotient(product(List.of(quotient.numerator(), factor)), quotient.denominator())
+                : product(List.of(value, factor));
+    }
+
     /** −formula, a sign already in front taken away and a number's sign turned. */
     static Formula negated(Formula formula) {
         if (formula instanceof Formula.Negation negation) {
@@ -99,6 +107,20 @@ final class Terms {
             case 1 -> K;
             default -> call(Formula.Function.BINOMIAL, K, number(Rational.of(p)));
         };
+    }
+
+    /** A polynomial written in a variable, highest power first. */
+    static Formula polynomial(Polynomial<Rational> polynomial, Formula variable) {
+        List<Formula> terms = new ArrayList<>();
+        for (int power = polynomial.degree(); power >= 0; power--) {
+            Rational coefficient = polynomial.coefficient(power);
+            if (!coefficient.isZero()) {
+                terms.add(product(List.of(number(coefficient), power == 0
+                        ? number(Rational.ONE)
+                        : power(variable, number(Rational.of(power))))));
+            }
+        }
+        return sum(terms);
     }
 
     static boolean isOne(Formula formula) {
