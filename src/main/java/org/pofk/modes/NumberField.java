@@ -42,7 +42,7 @@ final class NumberField {
 
     /** λ. */
     Polynomial<Rational> root() {
-        return Polynomial.monomial(RationalField.Q, Rational.ONE, 1).remainder(modulus());
+        return residues.generator();
     }
 
     /** The largest m with q(z) = g(z^m). */
@@ -160,41 +160,8 @@ final class NumberField {
         return roots;
     }
 
-    /** The monic polynomial of least degree that vanishes at h; d³ operations. */
+    /** The monic polynomial of least degree that vanishes at h; d products modulo q. */
     Polynomial<Rational> minimalPolynomial(Polynomial<Rational> h) {
-        LinearDependence dependence = new LinearDependence();
-        Polynomial<Rational> power = residues.one();
-        while (true) {
-            Optional<Polynomial<Rational>> relation = dependence.add(power);
-            if (relation.isPresent()) {
-                return relation.get();
-            }
-            power = multiply(power, h);
-        }
-    }
-
-    /** Gaussian elimination on vectors as they come, with how each reduced one was made from those given. */
-    private static final class LinearDependence {
-        private final List<Polynomial<Rational>> reduced = new ArrayList<>();
-        private final List<Polynomial<Rational>> combinations = new ArrayList<>();
-
-        /** The relation Σ c_i v_i = 0 with leading coefficient one, once the vectors v_0, v_1 … are dependent. */
-        Optional<Polynomial<Rational>> add(Polynomial<Rational> vector) {
-            Polynomial<Rational> rest = vector;
-            Polynomial<Rational> combination =
-                    Polynomial.monomial(RationalField.Q, Rational.ONE, reduced.size());
-            for (int i = 0; i < reduced.size(); i++) {
-                Polynomial<Rational> row = reduced.get(i);
-                Rational multiple = rest.coefficient(row.degree()).dividedBy(row.leading());
-                rest = rest.minus(row.times(multiple));
-                combination = combination.minus(combinations.get(i).times(multiple));
-            }
-            if (rest.isZero()) {
-                return Optional.of(combination.monic());
-            }
-            reduced.add(rest);
-            combinations.add(combination);
-            return Optional.empty();
-        }
+        return residues.minimalPolynomial(h);
     }
 }
