@@ -77,6 +77,10 @@ abstract sealed class OpenNode {
         }
 
         private void addEntry(Node.Scalar name, Node value, Faults faults) {
+            if (isRestOfDecimal(name, value)) {
+                joinDecimal(name, faults);
+                return;
+            }
             Position before = keys.putIfAbsent(Names.canonical(name.text()), name.position());
             if (name.isPlain() && name.text().equals("<<")) {
                 faults.add(name.position(), "merge-key", "the merge key '<<' isn't accepted; write the entries out");
@@ -87,6 +91,28 @@ abstract sealed class OpenNode {
             } else {
                 entries.add(new Node.Entry(name, value));
             }
+        }
+
+        /** In {@code {both: 0,5}} YAML sees a second key 5, without a value. */
+        private boolean isRestOfDecimal(Node.Scalar key, Node value) {
+            if (entries.isEmpty() || value.asScalar().filter(Node.Scalar::isAbsent).isEmpty()) {
+                return false;
+            }
+            return entries.get(entries.size() - 1).value().asScalar().filter(Node.Scalar::isPlain)
+                    .filter(whole -> Numerals.hasDecimalComma(whole.text() + "," + key.text()))
+                    .filter(whole -> whole.position().line() == key.position().line()
+                            && whole.position().column() + whole.text().length() + 1 == key.position().column())
+                    .isPresent();
+        }
+
+        /** Refuses the comma, and reads on as if a point stood there. */
+        private void joinDecimal(Node.Scalar fraction, Faults faults) {
+            Node.Entry last = entries.remove(entries.size() - 1);
+            Node.Scalar whole = last.value().asScalar().orElseThrow();
+            String joined = whole.text() + "." + fraction.text();
+            faults.add(whole.position(), "decimal-comma", "'" + Words.shortened(whole.text() + "," + fraction.text())
+                    + "' has a decimal comma; write " + Words.shortened(joined));
+            entries.add(new Node.Entry(last.key(), new Node.Scalar(whole.position(), joined, Node.Style.PLAIN)));
         }
 
         @Override

@@ -32,4 +32,9 @@ final class Words {
         return n == 1 ? words.get(0)
                 : String.join(", ", words.subList(0, n - 1)) + " " + last + " " + words.get(n - 1);
     }
+
+    /** {@code 1 row}, {@code 3 rows}. */
+    static String count(int n, String one, String several) {
+        return n + " " + (n == 1 ? one : several);
+    }
 }

@@ -1,0 +1,64 @@
+package org.pofk.input;
+
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import org.pofk.exact.Rational;
+
+/** Reads exact numbers, written as such or as expressions in parameters. */
+final class Amounts {
+    private static final String REST = "rest";
+    private static final List<String> VALUE = List.of("value");
+
+    private final Map<String, Rational> parameters;
+    private final Reading reading;
+
+    Amounts(Map<String, Rational> parameters, Reading reading) {
+        this.parameters = parameters;
+        this.reading = reading;
+    }
+
+    /** The number, or faults and nothing; {@code rest} is a fault. */
+    Optional<Rational> number(Node node, String on) {
+        return scalar(node, on).flatMap(this::number);
+    }
+
+    /** What goes to a state, {@code rest} included; faults and nothing when it can't be read. */
+    Optional<Share> share(Node node, int state, String on) {
+        Optional<Node.Scalar> scalar = scalar(node, on);
+        if (scalar.isPresent() && isRest(scalar.get())) {
+            return Optional.of(new Share(state, Optional.empty(), scalar.get().position(), REST));
+        }
+        return scalar.flatMap(written -> number(written)
+                .map(value -> new Share(state, Optional.of(value), written.position(), written.text().strip())));
+    }
+
+    static boolean isRest(Node.Scalar scalar) {
+        return scalar.text().strip().equals(REST);
+    }
+
+    /** The written number itself, out of {@code {value: …, note: …}} where it has remarks. */
+    private Optional<Node.Scalar> scalar(Node node, String on) {
+        Optional<Node> value = node.asMapping().isEmpty() ? Optional.of(node)
+                : Fields.of(node.asMapping().get(), on, VALUE, reading).value("value");
+        if (value.isEmpty()) {
+            reading.fault(node.position(), "number-missing", "a number is missing here; write for example "
+                    + "{value: 1/20, note: …}");
+            return Optional.empty();
+        }
+        if (value.get().asScalar().isEmpty()) {
+            reading.fault(node.position(), "not-a-number",
+                    "a number belongs here, not " + value.get().inWords());
+        }
+        return value.get().asScalar();
+    }
+
+    private Optional<Rational> number(Node.Scalar scalar) {
+        if (isRest(scalar)) {
+            reading.fault(scalar.position(), "rest-not-here",
+                    "'rest' has no meaning here, where nothing must add up to 1; write the number");
+            return Optional.empty();
+        }
+        return Numerals.read(scalar.text(), scalar.position(), reading.faults());
+    }
+}

@@ -1,0 +1,55 @@
+package org.pofk.input;
+
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import org.pofk.chain.Model.Remark;
+import org.pofk.text.Suggestion;
+
+/** A mapping whose keys are words of the file format. Keys that begin with {@code x-} are ignored. */
+final class Fields {
+    private static final List<String> REMARKS = List.of("note", "source");
+
+    private final Map<String, Node> values;
+
+    private Fields(Map<String, Node> values) {
+        this.values = values;
+    }
+
+    /**
+     * The known keys of {@code mapping}; a fault for each other key. A {@code note} or {@code source} is kept as a
+     * remark on {@code on}.
+     */
+    static Fields of(Node.Mapping mapping, String on, List<String> known, Reading reading) {
+        Map<String, Node> values = new LinkedHashMap<>();
+        for (Node.Entry entry : mapping.entries()) {
+            if (known.contains(entry.name())) {
+                values.put(entry.name(), entry.value());
+            } else if (!takeRemark(entry, on, reading) && !entry.name().startsWith("x-")) {
+                reading.fault(entry.key().position(), "unknown-key", "the key '" + Words.shortened(entry.name())
+                        + "' isn't known here" + suggestion(known, entry.name()));
+            }
+        }
+        return new Fields(values);
+    }
+
+    /** Keeps the entry as a remark when it is one. */
+    static boolean takeRemark(Node.Entry entry, String on, Reading reading) {
+        if (!REMARKS.contains(entry.name())) {
+            return false;
+        }
+        reading.text(entry.value(), "'" + entry.name() + "'")
+                .ifPresent(text -> reading.remarks().add(new Remark(on, entry.name(), text)));
+        return true;
+    }
+
+    private static String suggestion(List<String> known, String name) {
+        String meant = Suggestion.didYouMean(known, name);
+        return meant.isEmpty() ? "; known are " + String.join(", ", known) : meant;
+    }
+
+    Optional<Node> value(String key) {
+        return Optional.ofNullable(values.get(key));
+    }
+}

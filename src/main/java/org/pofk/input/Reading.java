@@ -1,0 +1,90 @@
+package org.pofk.input;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import org.pofk.chain.Model.Remark;
+import org.pofk.text.Faults;
+import org.pofk.text.Position;
+
+/** What the sections of one model share while it is read: faults, remarks and changes. Mutable; one for a reading. */
+final class Reading {
+    private final Faults faults;
+    private final Overrides overrides;
+    private final List<Remark> remarks = new ArrayList<>();
+    private final List<String> changes = new ArrayList<>();
+
+    Reading(Faults faults, Overrides overrides) {
+        this.faults = faults;
+        this.overrides = overrides;
+    }
+
+    Faults faults() {
+        return faults;
+    }
+
+    Overrides overrides() {
+        return overrides;
+    }
+
+    List<Remark> remarks() {
+        return remarks;
+    }
+
+    List<String> changes() {
+        return changes;
+    }
+
+    void fault(Position position, String code, String message) {
+        faults.add(position, code, message);
+    }
+
+    /** The node as a mapping, or a fault that says what {@code what} should be. */
+    Optional<Node.Mapping> mapping(Node node, String what, String example) {
+        if (node.asMapping().isEmpty()) {
+            fault(node.position(), "not-a-mapping",
+                    what + " must be a mapping such as " + example + ", not " + node.inWords());
+        }
+        return node.asMapping();
+    }
+
+    /** The node as a list, or a fault. */
+    Optional<Node.Sequence> sequence(Node node, String what, String example) {
+        if (node.asSequence().isEmpty()) {
+            fault(node.position(), "not-a-list",
+                    what + " must be a list such as " + example + ", not " + node.inWords());
+        }
+        return node.asSequence();
+    }
+
+    /** The node as a single value that is there, or a fault. */
+    Optional<Node.Scalar> scalar(Node node, String what) {
+        Optional<Node.Scalar> scalar = node.asScalar().filter(value -> !value.isAbsent());
+        if (scalar.isEmpty()) {
+            fault(node.position(), "not-a-value", what + " must be a single value, not " + node.inWords());
+        }
+        return scalar;
+    }
+
+    /** The node as a text, or a fault. */
+    Optional<String> text(Node node, String what) {
+        return scalar(node, what).map(value -> value.text().strip());
+    }
+
+    /** One of some words, or a fault with what was probably meant. */
+    <E extends Enum<E> & Keyword> Optional<E> keyword(Node node, String what, E[] choices) {
+        Optional<Node.Scalar> scalar = scalar(node, what);
+        if (scalar.isEmpty()) {
+            return Optional.empty();
+        }
+        String word = scalar.get().name();
+        for (E choice : choices) {
+            if (choice.word().equals(word)) {
+                return Optional.of(choice);
+            }
+        }
+        List<String> words = java.util.Arrays.stream(choices).map(Keyword::word).toList();
+        fault(node.position(), "unknown-word", what + " is " + Words.choice(words) + ", not " + node.inWords());
+        return Optional.empty();
+    }
+}

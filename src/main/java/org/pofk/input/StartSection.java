@@ -1,0 +1,101 @@
+package org.pofk.input;
+
+import java.util.ArrayList;
+import java.util.Collections;
+import java.util.List;
+import java.util.Optional;
+import org.pofk.chain.Chain;
+import org.pofk.chain.SparseMatrix.Entry;
+import org.pofk.exact.Rational;
+import org.pofk.text.Position;
+
+/** The section {@code start}: a state, a mapping of states to probabilities, or a list of them. */
+final class StartSection {
+    private final States states;
+    private final Head head;
+    private final Amounts amounts;
+    private final Reading reading;
+
+    StartSection(States states, Head head, Amounts amounts, Reading reading) {
+        this.states = states;
+        this.head = head;
+        this.amounts = amounts;
+        this.reading = reading;
+    }
+
+    /** x(0); the command line's start comes before the file's. */
+    List<Rational> vector(Optional<Node> written, Position file) {
+        Optional<String> override = reading.overrides().start();
+        if (override.isPresent()) {
+            Position option = Position.ofWhole(Overrides.START_OPTION);
+            return inState(new Node.Scalar(option, override.get(), Node.Style.QUOTED));
+        }
+        if (written.isEmpty()) {
+            reading.fault(file, "start-missing", "the key 'start' is missing; write start: STATE, or a mapping such as "
+                    + "{STATE: 9/10, OTHER: rest}");
+            return List.of();
+        }
+        Node start = written.get();
+        if (start.asMapping().isPresent()) {
+            return fromMapping(start.asMapping().get());
+        }
+        return start.asSequence().map(this::fromList)
+                .orElseGet(() -> inState(start.asScalar().orElseThrow()));
+    }
+
+    private List<Rational> inState(Node.Scalar name) {
+        return states.find(name, reading).map(state -> vector(List.of(new Entry(state, Rational.ONE))))
+                .orElse(List.of());
+    }
+
+    private List<Rational> fromMapping(Node.Mapping mapping) {
+        List<Optional<Share>> shares = new ArrayList<>();
+        for (Node.Entry entry : mapping.entries()) {
+            if (states.contains(entry.name()) || !Fields.takeRemark(entry, "start", reading)) {
+                Optional<Integer> state = states.find(entry.key(), reading);
+                Optional<Share> share = share(entry.value(), state.orElse(0));
+                shares.add(state.flatMap(known -> share));
+            }
+        }
+        return complete(shares, mapping.position());
+    }
+
+    private List<Rational> fromList(Node.Sequence list) {
+        List<Optional<Share>> shares = new ArrayList<>();
+        if (list.items().size() != states.size()) {
+            reading.fault(list.position(), "size-differs", "the start has "
+                    + Words.count(list.items().size(), "number", "numbers") + ", but there are "
+                    + Words.count(states.size(), "state", "states") + "; these must be equal in number");
+            return List.of();
+        }
+        for (Node item : list.items()) {
+            shares.add(share(item, shares.size()));
+        }
+        return complete(shares, list.position());
+    }
+
+    private Optional<Share> share(Node node, int state) {
+        return head.kind() == Chain.Kind.CHAIN ? amounts.share(node, state, "start")
+                : amounts.number(node, "start")
+                        .map(value -> new Share(state, Optional.of(value), node.position(), Numbers.shown(value)));
+    }
+
+    private List<Rational> complete(List<Optional<Share>> read, Position position) {
+        List<Share> shares = read.stream().flatMap(Optional::stream).toList();
+        if (head.kind() == Chain.Kind.RECURSION) {
+            return vector(shares.stream().map(share -> new Entry(share.state(), share.amount())).toList());
+        }
+        Distribution distribution = Distribution.ofStart(position, shares, states);
+        if (shares.size() < read.size()) {
+            distribution.eachIsSound(reading);
+            return List.of();
+        }
+        return vector(distribution.complete(head.sums(), reading));
+    }
+
+    private List<Rational> vector(List<Entry> entries) {
+        List<Rational> vector = new ArrayList<>(Collections.nCopies(states.size(), Rational.ZERO));
+        entries.forEach(entry -> vector.set(entry.row(), vector.get(entry.row()).plus(entry.value())));
+        return List.copyOf(vector);
+    }
+}

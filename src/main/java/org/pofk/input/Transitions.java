@@ -1,0 +1,129 @@
+package org.pofk.input;
+
+import java.util.ArrayList;
+import java.util.Collections;
+import java.util.HashSet;
+import java.util.List;
+import java.util.Optional;
+import java.util.Set;
+import org.pofk.chain.Chain;
+import org.pofk.chain.SparseMatrix;
+import org.pofk.chain.SparseMatrix.Entry;
+import org.pofk.exact.Rational;
+
+/** The section {@code transitions}: from each state a mapping of states to probabilities, or {@code stays}. */
+final class Transitions {
+    private static final String STAYS = "stays";
+
+    private final Node.Mapping written;
+    private final States states;
+    private final Head head;
+    private final Amounts amounts;
+    private final Reading reading;
+
+    Transitions(Node.Mapping written, States states, Head head, Amounts amounts, Reading reading) {
+        this.written = written;
+        this.states = states;
+        this.head = head;
+        this.amounts = amounts;
+        this.reading = reading;
+    }
+
+    /** The states in the order of their entries. */
+    static List<Node.Scalar> states(Node.Mapping written) {
+        return written.entries().stream().map(Node.Entry::key).toList();
+    }
+
+    SparseMatrix matrix() {
+        List<List<Entry>> columns = new ArrayList<>(Collections.nCopies(states.size(), List.of()));
+        Set<String> given = new HashSet<>();
+        for (Node.Entry entry : written.entries()) {
+            given.add(entry.name());
+            Optional<Integer> from = states.find(entry.key(), reading);
+            if (from.isPresent()) {
+                columns.set(from.get(), column(entry, from.get()));
+            } else {
+                checkTargets(entry);
+            }
+        }
+        for (Node.Scalar state : states.listed()) {
+            if (!given.contains(state.name())) {
+                reading.fault(state.position(), "state-without-entry", "the state '" + Words.shortened(state.name())
+                        + "' has no entry under transitions; write '" + Words.shortened(state.name())
+                        + ": stays' when nothing leaves it");
+            }
+        }
+        return new SparseMatrix(columns);
+    }
+
+    private List<Entry> column(Node.Entry entry, int from) {
+        if (entry.value().asScalar().map(Node.Scalar::name).filter(STAYS::equals).isPresent()) {
+            return List.of(new Entry(from, Rational.ONE));
+        }
+        if (entry.value().asMapping().isEmpty()) {
+            reading.fault(entry.value().position(), "not-transitions", "what leaves '" + entry.name()
+                    + "' must be a mapping such as {STATE: 1/20, '" + entry.name() + "': rest}, or stays, not "
+                    + entry.value().inWords());
+            return List.of();
+        }
+        return head.kind() == Chain.Kind.CHAIN ? moves(entry, entry.value().asMapping().get(), from)
+                : coefficients(entry, entry.value().asMapping().get());
+    }
+
+    private List<Entry> moves(Node.Entry entry, Node.Mapping moves, int from) {
+        List<Share> shares = new ArrayList<>();
+        boolean allRead = true;
+        for (Node.Entry move : withoutRemarks(moves, entry.name())) {
+            Optional<Integer> to = target(move.key());
+            Optional<Share> share = amounts.share(move.value(), to.orElse(from), on(entry, move));
+            allRead &= to.isPresent() && share.isPresent();
+            if (to.isPresent()) {
+                share.ifPresent(shares::add);
+            }
+        }
+        Distribution distribution = Distribution.ofMoves("from '" + entry.name() + "'", entry.key().position(), shares,
+                from, states);
+        if (!allRead) {
+            distribution.eachIsSound(reading);
+            return List.of();
+        }
+        return distribution.complete(head.sums(), reading);
+    }
+
+    private List<Entry> coefficients(Node.Entry entry, Node.Mapping coefficients) {
+        List<Entry> column = new ArrayList<>();
+        for (Node.Entry move : withoutRemarks(coefficients, entry.name())) {
+            Optional<Integer> to = target(move.key());
+            Optional<Rational> value = amounts.number(move.value(), on(entry, move));
+            if (to.isPresent()) {
+                value.ifPresent(number -> column.add(new Entry(to.get(), number)));
+            }
+        }
+        return column;
+    }
+
+    /** The moves; what is a remark on them goes to the remarks. */
+    private List<Node.Entry> withoutRemarks(Node.Mapping moves, String from) {
+        return moves.entries().stream()
+                .filter(move -> states.contains(move.name()) || !Fields.takeRemark(move, "from '" + from + "'", reading))
+                .toList();
+    }
+
+    private static String on(Node.Entry from, Node.Entry to) {
+        return "from '" + from.name() + "' to '" + to.name() + "'";
+    }
+
+    private Optional<Integer> target(Node.Scalar name) {
+        if (!states.contains(name.name()) && states.listed().isEmpty()) {
+            reading.fault(name.position(), "unknown-state", "the state '" + Words.shortened(name.name())
+                    + "' has no entry under transitions" + states.suggestion(name.name()));
+            return Optional.empty();
+        }
+        return states.find(name, reading);
+    }
+
+    private void checkTargets(Node.Entry entry) {
+        entry.value().asMapping().ifPresent(moves -> withoutRemarks(moves, entry.name())
+                .forEach(move -> target(move.key())));
+    }
+}
