@@ -1,20 +1,22 @@
 package org.pofk.input;
 
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import org.pofk.exact.Rational;
+import org.pofk.formula.LinearForm;
 
 /** Reads exact numbers, written as such or as expressions in parameters. */
 final class Amounts {
     private static final String REST = "rest";
     private static final List<String> VALUE = List.of("value");
 
-    private final Map<String, Rational> parameters;
+    private final Map<String, LinearForm> parameters = new LinkedHashMap<>();
     private final Reading reading;
 
     Amounts(Map<String, Rational> parameters, Reading reading) {
-        this.parameters = parameters;
+        parameters.forEach((name, value) -> this.parameters.put(name, LinearForm.constant(value)));
         this.reading = reading;
     }
 
@@ -59,6 +61,10 @@ final class Amounts {
                     "'rest' has no meaning here, where nothing must add up to 1; write the number");
             return Optional.empty();
         }
-        return Numerals.read(scalar.text(), scalar.position(), reading.faults());
+        if (!Expressions.isExpression(scalar.text())) {
+            return Numerals.read(scalar.text(), scalar.position(), reading.faults());
+        }
+        return Expressions.parse(scalar, parameters.keySet(), reading)
+                .flatMap(parsed -> Expressions.evaluate(parsed, parameters, reading)).map(LinearForm::constant);
     }
 }

@@ -20,6 +20,8 @@ record Head(String title, Step step, Chain.Kind kind, Optional<Convention> conve
         return new Head(title, step, kind, convention, own.orElse(sums), about);
     }
 
+    private static final Step ONE_STEP = new Step("1 step", Optional.empty(), Optional.empty());
+
     private enum Kind implements Keyword {
         CHAIN, RECURSION;
 
@@ -47,6 +49,11 @@ record Head(String title, Step step, Chain.Kind kind, Optional<Convention> conve
         }
     }
 
+    /** For a table alone, which says nothing about itself. */
+    static Head ofTable(String file) {
+        return new Head(file, ONE_STEP, Chain.Kind.CHAIN, Optional.empty(), Sums.EXACT, About.NOTHING);
+    }
+
     static Head read(Fields fields, Node.Mapping root, String file, Reading reading) {
         checkVersion(fields, root, reading);
         String title = fields.value("title").flatMap(node -> reading.text(node, "the title")).orElse(file);
@@ -58,7 +65,7 @@ record Head(String title, Step step, Chain.Kind kind, Optional<Convention> conve
         Sums sums = fields.value("sums").flatMap(node -> reading.keyword(node, "'sums'", Sums.values()))
                 .orElse(Sums.EXACT);
         Step step = fields.value("step").flatMap(node -> step(node, reading))
-                .orElse(new Step("1 step", Optional.empty(), Optional.empty()));
+                .orElse(ONE_STEP);
         About about = fields.value("about").map(node -> about(node, reading)).orElse(About.NOTHING);
         return new Head(title, step, kind == Kind.CHAIN ? Chain.Kind.CHAIN : Chain.Kind.RECURSION, convention, sums,
                 about);

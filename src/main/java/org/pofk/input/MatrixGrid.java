@@ -36,8 +36,7 @@ record MatrixGrid(List<List<Optional<MatrixGrid.Cell>>> rows, Position place) {
         if (otherFits) {
             String first = trial.faults().list().get(0).message();
             reading.fault(said, "wrong-orientation", "read by " + orientation.word() + ", " + first + "; read by "
-                    + orientation.other().word() + " the matrix would fit: orientation: "
-                    + orientation.other().word());
+                    + orientation.other().word() + " it would fit");
         } else {
             reading.faults().addAll(trial.faults().list());
         }

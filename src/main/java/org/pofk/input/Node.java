@@ -2,6 +2,7 @@ package org.pofk.input;
 
 import java.util.List;
 import java.util.Optional;
+import org.pofk.text.Places;
 import org.pofk.text.Position;
 
 /**
@@ -33,8 +34,16 @@ sealed interface Node {
     /** How a scalar is written; block scalars count as quoted. */
     enum Style { PLAIN, QUOTED }
 
-    /** A single value; empty and plain where nothing is written. */
-    record Scalar(Position position, String text, Style style) implements Node {
+    /**
+     * A single value; empty and plain where nothing is written.
+     *
+     * @param verbatim the text stands in the source as it is: on one line, without escapes
+     */
+    record Scalar(Position position, String text, Style style, boolean verbatim) implements Node {
+        Scalar(Position position, String text, Style style) {
+            this(position, text, style, true);
+        }
+
         /** Nothing is written here. */
         boolean isAbsent() {
             return style == Style.PLAIN && text.isEmpty();
@@ -42,6 +51,15 @@ sealed interface Node {
 
         boolean isPlain() {
             return style == Style.PLAIN;
+        }
+
+        /** Where each character of the text stands; all at the beginning when the text is not verbatim. */
+        Places places() {
+            if (!verbatim) {
+                return offset -> position;
+            }
+            return Places.from(position.isWhole() || isPlain() ? position
+                    : new Position(position.source(), position.line(), position.column() + 1), text);
         }
 
         /** The text as a name: trimmed, in NFC. */

@@ -29,6 +29,16 @@ final class Numerals {
         return DECIMAL.matcher(text).matches() || FRACTION.matcher(text).matches();
     }
 
+    /** Whether this is meant as a number, readable or not, and not as an expression. */
+    static boolean isMeantAsNumeral(String written) {
+        String text = written.strip();
+        return text.isEmpty() || isNumeral(text) || hasDecimalComma(text) || isPercentFraction(text);
+    }
+
+    private static boolean isPercentFraction(String text) {
+        return text.contains("%") && PERCENT_FRACTION.matcher(text).matches();
+    }
+
     /** A number with a decimal comma, and nothing else. */
     static boolean hasDecimalComma(String text) {
         return DECIMAL_COMMA.matcher(text).matches();
@@ -103,7 +113,7 @@ final class Numerals {
         if (hasDecimalComma(text)) {
             return "decimal-comma";
         }
-        return PERCENT_FRACTION.matcher(text).matches() && text.contains("%") ? "percent-sign" : "number-unreadable";
+        return isPercentFraction(text) ? "percent-sign" : "number-unreadable";
     }
 
     private static String complaint(String text) {

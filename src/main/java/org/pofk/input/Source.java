@@ -36,6 +36,11 @@ public record Source(String name, String text, String sha256) {
         return new Source(name, StrictUtf8.decode(bytes, name), sha256(bytes));
     }
 
+    /** The last part of the name. */
+    String fileName() {
+        return name.substring(Math.max(name.lastIndexOf('/'), name.lastIndexOf('\\')) + 1);
+    }
+
     private static byte[] bytes(Path file, String name) throws RefusedException {
         if (Files.isDirectory(file)) {
             throw refusal(name, "folder", "this is a folder, not a file; name the file in it");

@@ -13,6 +13,7 @@ import org.snakeyaml.engine.v2.events.CollectionStartEvent;
 import org.snakeyaml.engine.v2.events.Event;
 import org.snakeyaml.engine.v2.events.NodeEvent;
 import org.snakeyaml.engine.v2.events.ScalarEvent;
+import org.snakeyaml.engine.v2.exceptions.Mark;
 import org.snakeyaml.engine.v2.exceptions.YamlEngineException;
 import org.snakeyaml.engine.v2.parser.ParserImpl;
 import org.snakeyaml.engine.v2.scanner.StreamReader;
@@ -83,7 +84,16 @@ final class YamlComposer {
             stop(place, "scalar-too-long", "this value is longer than 64 KiB, the most that is read as one value");
         }
         refuseDecoration(event, event.getTag());
-        add(new Node.Scalar(place, event.getValue(), event.isPlain() ? Node.Style.PLAIN : Node.Style.QUOTED));
+        add(new Node.Scalar(place, event.getValue(), event.isPlain() ? Node.Style.PLAIN : Node.Style.QUOTED,
+                isVerbatim(event)));
+    }
+
+    private static boolean isVerbatim(ScalarEvent event) {
+        Mark start = event.getStartMark().orElseThrow();
+        Mark end = event.getEndMark().orElseThrow();
+        int length = event.getValue().codePointCount(0, event.getValue().length()) + (event.isPlain() ? 0 : 2);
+        return !event.isLiteral() && !event.isFolded() && start.getLine() == end.getLine()
+                && end.getColumn() - start.getColumn() == length;
     }
 
     private void begin(OpenNode node, CollectionStartEvent event) throws RefusedException {

@@ -1,0 +1,82 @@
+package org.pofk.input;
+
+import java.nio.file.Path;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import org.pofk.chain.Chain;
+import org.pofk.chain.ChainCheck;
+import org.pofk.chain.Model;
+import org.pofk.chain.Model.Convention;
+import org.pofk.chain.Model.Origin;
+import org.pofk.chain.Model.Parameter;
+import org.pofk.chain.Output;
+import org.pofk.chain.SparseMatrix;
+import org.pofk.exact.Rational;
+import org.pofk.text.Faults;
+import org.pofk.text.RefusedException;
+
+/**
+ * Reads model files: YAML 1.2 or JSON. Numbers are exact as written; a file that can't be accepted is refused with
+ * all its faults at their places. Linear in the length of the file but for the arithmetic.
+ */
+public final class ModelReader {
+    private static final List<String> KEYS = List.of("pofk", "title", "kind", "step", "convention", "states", "start",
+            "transitions", "matrix", "sums", "sets", "outputs", "parameters", "about");
+
+    private final Source source;
+    private final Optional<Path> folder;
+    private final Reading reading;
+
+    private ModelReader(Source source, Optional<Path> folder, Reading reading) {
+        this.source = source;
+        this.folder = folder;
+        this.reading = reading;
+    }
+
+    /** The model in a file; tables that it names lie beside it. */
+    public static Model read(Path file, Overrides overrides) throws RefusedException {
+        return read(Source.read(file), Optional.ofNullable(file.toAbsolutePath().getParent()), overrides);
+    }
+
+    /** The model in a text; tables that it names lie in {@code folder}. */
+    public static Model read(Source source, Optional<Path> folder, Overrides overrides) throws RefusedException {
+        FileKind.of(source).require(FileKind.MODEL, source);
+        Faults faults = new Faults();
+        ModelReader reader = new ModelReader(source, folder, new Reading(faults, overrides));
+        Node root = YamlComposer.compose(source, faults);
+        Optional<Model> model = reader.reading
+                .mapping(root, "a model", "pofk: 1 with states and transitions").map(reader::model);
+        faults.refuseIfAny();
+        List<String> wrong = ChainCheck.violations(model.orElseThrow().chain());
+        if (!wrong.isEmpty()) {
+            throw new AssertionError("accepted, but not a chain: " + source.name() + ": " + wrong);
+        }
+        return model.orElseThrow();
+    }
+
+    private Model model(Node.Mapping root) {
+        Fields fields = Fields.of(root, "model", KEYS, reading);
+        Head head = Head.read(fields, root, source.fileName(), reading);
+        ParametersSection section = new ParametersSection(reading);
+        List<Parameter> parameters = section.read(fields.value("parameters"));
+        Map<String, Rational> values = section.values();
+        Amounts amounts = new Amounts(values, reading);
+        Moves moves = Moves.read(fields, root, folder, reading);
+        States states = moves.states();
+        SparseMatrix matrix = moves.matrix(head, amounts);
+        List<Rational> start = new StartSection(states, head, amounts, reading)
+                .vector(fields.value("start"), root.position());
+        Map<String, List<Integer>> sets = fields.value("sets")
+                .map(node -> new SetsSection(states, reading).read(node)).orElse(Map.of());
+        List<Output> outputs = fields.value("outputs")
+                .map(node -> new OutputsSection(states, head.kind(), sets, values, reading).read(node))
+                .orElse(List.of());
+        NameClashes.check(root, states, reading);
+        Convention convention = head.convention()
+                .or(() -> moves.orientation().map(Head.Orientation::convention)).orElse(Convention.COLUMNS);
+        return new Model(head.title(), head.step(), convention, head.about(),
+                new Chain(head.kind(), states.names(), matrix, start, sets, outputs), parameters, reading.remarks(),
+                reading.changes(), new Origin(source.name(), source.sha256()));
+    }
+}

@@ -1,0 +1,159 @@
+package org.pofk.input;
+
+import java.util.ArrayDeque;
+import java.util.ArrayList;
+import java.util.Deque;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.stream.Collectors;
+import org.pofk.chain.Chain;
+import org.pofk.chain.Output;
+import org.pofk.exact.Rational;
+import org.pofk.formula.Formula;
+import org.pofk.formula.LinearForm;
+import org.pofk.formula.ParsedFormula;
+import org.pofk.text.Suggestion;
+
+/**
+ * The section {@code outputs}: linear expressions in states, sets, parameters and other outputs, or mappings of states
+ * to coefficients.
+ */
+final class OutputsSection {
+    private final States states;
+    private final Chain.Kind kind;
+    private final Map<String, List<Integer>> sets;
+    private final Amounts amounts;
+    private final Reading reading;
+    private final Map<String, LinearForm> names = new LinkedHashMap<>();
+    private final Map<String, Node> written = new LinkedHashMap<>();
+    private final Deque<String> open = new ArrayDeque<>();
+
+    OutputsSection(States states, Chain.Kind kind, Map<String, List<Integer>> sets, Map<String, Rational> parameters,
+            Reading reading) {
+        this.states = states;
+        this.kind = kind;
+        this.sets = sets;
+        this.amounts = new Amounts(parameters, reading);
+        this.reading = reading;
+        parameters.forEach((name, value) -> names.put(name, LinearForm.constant(value)));
+        states.names().forEach(state -> names.put(state, LinearForm.of(state)));
+        sets.forEach((name, members) -> names.put(name, sum(members)));
+    }
+
+    private LinearForm sum(List<Integer> members) {
+        return new LinearForm(Rational.ZERO, members.stream()
+                .collect(Collectors.toMap(states.names()::get, member -> Rational.ONE)));
+    }
+
+    List<Output> read(Node node) {
+        reading.mapping(node, "'outputs'", "{lost: 1 - running}").ifPresent(this::collect);
+        written.keySet().forEach(this::resolve);
+        return written.keySet().stream().map(this::output).toList();
+    }
+
+    private void collect(Node.Mapping mapping) {
+        for (Node.Entry entry : mapping.entries()) {
+            if (States.isName(entry.key(), "an output", reading)) {
+                written.put(entry.name(), entry.value());
+            }
+        }
+    }
+
+    private Output output(String name) {
+        LinearForm form = names.get(name);
+        boolean spread = kind == Chain.Kind.CHAIN;
+        Rational everywhere = spread ? form.constant() : Rational.ZERO;
+        List<Rational> coefficients = states.names().stream()
+                .map(state -> form.coefficient(state).plus(everywhere)).toList();
+        return new Output(name, coefficients, spread ? Rational.ZERO : form.constant(), definition(written.get(name)));
+    }
+
+    private static String definition(Node node) {
+        return node.asMapping().map(mapping -> mapping.entries().stream()
+                        .map(entry -> entry.name() + ": " + entry.value().asScalar().map(Node.Scalar::text).orElse("…"))
+                        .collect(Collectors.joining(", ", "{", "}")))
+                .orElseGet(() -> node.asScalar().map(Node.Scalar::text).orElse("").strip());
+    }
+
+    /** Makes the output's form known; zero when it has faults, so that each fault is told once. */
+    private void resolve(String name) {
+        if (!names.containsKey(name)) {
+            open.push(name);
+            LinearForm form = form(written.get(name), name);
+            open.pop();
+            names.put(name, form);
+        }
+    }
+
+    private LinearForm form(Node node, String output) {
+        if (node.asMapping().isPresent()) {
+            return mapped(node.asMapping().get(), output);
+        }
+        return reading.scalar(node, "the output '" + Words.shortened(output) + "'").flatMap(this::expression)
+                .orElse(LinearForm.ZERO);
+    }
+
+    private Optional<LinearForm> expression(Node.Scalar scalar) {
+        if (!scalar.isPlain() && isName(scalar.name())) {
+            if (written.containsKey(scalar.name())) {
+                resolve(scalar.name());
+            }
+            return Optional.of(names.get(scalar.name()));
+        }
+        return Expressions.parse(scalar, allNames(), reading).flatMap(this::evaluate);
+    }
+
+    private Optional<LinearForm> evaluate(ParsedFormula parsed) {
+        boolean circle = false;
+        for (ParsedFormula symbol : parsed.symbols()) {
+            String name = ((Formula.Symbol) symbol.formula()).name();
+            if (open.contains(name) && !names.containsKey(name)) {
+                reading.fault(symbol.position(), "output-cycle", "the output '" + open.peek()
+                        + "' is defined by itself, by way of '" + name + "'; break the circle");
+                circle = true;
+            } else if (written.containsKey(name)) {
+                resolve(name);
+            }
+        }
+        return circle ? Optional.empty() : Expressions.evaluate(parsed, names, reading);
+    }
+
+    /** Coefficients by state or set, or an expression with remarks as {@code {value: …, note: …}}. */
+    private LinearForm mapped(Node.Mapping mapping, String output) {
+        LinearForm sum = LinearForm.ZERO;
+        for (Node.Entry entry : mapping.entries()) {
+            sum = sum.plus(term(entry, output));
+        }
+        return sum;
+    }
+
+    private LinearForm term(Node.Entry entry, String output) {
+        String on = "output '" + output + "'";
+        String name = entry.name();
+        if (states.contains(name) || sets.containsKey(name)) {
+            return amounts.number(entry.value(), on).map(names.get(name)::times).orElse(LinearForm.ZERO);
+        }
+        if (name.equals("value")) {
+            return form(entry.value(), output);
+        }
+        if (!Fields.takeRemark(entry, on, reading)) {
+            List<String> known = new ArrayList<>(states.names());
+            known.addAll(sets.keySet());
+            reading.fault(entry.key().position(), "unknown-state", "there is no state or set '"
+                    + Words.shortened(name) + "'" + Suggestion.didYouMean(known, name));
+        }
+        return LinearForm.ZERO;
+    }
+
+    private boolean isName(String name) {
+        return names.containsKey(name) || written.containsKey(name) && !open.contains(name);
+    }
+
+    private java.util.Set<String> allNames() {
+        java.util.Set<String> all = new java.util.LinkedHashSet<>(names.keySet());
+        all.addAll(written.keySet());
+        return all;
+    }
+}

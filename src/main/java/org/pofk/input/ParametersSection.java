@@ -1,0 +1,169 @@
+package org.pofk.input;
+
+import java.util.ArrayDeque;
+import java.util.ArrayList;
+import java.util.Deque;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.Set;
+import org.pofk.chain.Model.Parameter;
+import org.pofk.exact.Rational;
+import org.pofk.formula.Formula;
+import org.pofk.formula.LinearForm;
+import org.pofk.formula.ParsedFormula;
+import org.pofk.text.Position;
+import org.pofk.text.Suggestion;
+
+/** The section {@code parameters}: named numbers, which may be defined by one another without going in a circle. */
+final class ParametersSection {
+    private static final List<String> KEYS = List.of("value", "from", "to", "meaning");
+    private static final Set<String> RESERVED = Set.of("k", "z", "i", "pi", "π", "deg", "delta", "rest", "sqrt", "cos",
+            "sin", "exp", "arctan", "atan", "arccos", "acos", "binomial");
+
+    private final Reading reading;
+    private final Map<String, Declaration> declared = new LinkedHashMap<>();
+    private final Map<String, Optional<Rational>> values = new LinkedHashMap<>();
+    private final Deque<String> open = new ArrayDeque<>();
+
+    /** A parameter as the file gives it; {@code value} is the scalar that defines it. */
+    private record Declaration(Node.Scalar name, Optional<Node.Scalar> value, Optional<Node> from, Optional<Node> to,
+            Optional<String> meaning, Optional<String> source) {
+    }
+
+    ParametersSection(Reading reading) {
+        this.reading = reading;
+    }
+
+    /** All parameters with their values; those with faults are left out. */
+    List<Parameter> read(Optional<Node> node) {
+        node.flatMap(section -> reading.mapping(section, "'parameters'", "{fade: 1/50}")).ifPresent(this::declareAll);
+        refuseUnknownOverrides();
+        List<Parameter> parameters = new ArrayList<>();
+        for (Declaration declaration : declared.values()) {
+            value(declaration.name().name()).ifPresent(value -> parameters.add(parameter(declaration, value)));
+        }
+        return parameters;
+    }
+
+    /** The value of each name that is declared; zero for those with faults, so that each fault is told once. */
+    Map<String, Rational> values() {
+        Map<String, Rational> numbers = new LinkedHashMap<>();
+        declared.keySet().forEach(name -> numbers.put(name, value(name).orElse(Rational.ZERO)));
+        return numbers;
+    }
+
+    /** Parameters whose values aren't known because of faults. */
+    boolean isKnown(String name) {
+        return value(name).isPresent();
+    }
+
+    private void declareAll(Node.Mapping mapping) {
+        for (Node.Entry entry : mapping.entries()) {
+            if (RESERVED.contains(entry.name())) {
+                reading.fault(entry.key().position(), "reserved-name", "'" + entry.name()
+                        + "' has a meaning of its own in formulas; give the parameter another name");
+            } else if (States.isName(entry.key(), "a parameter", reading)) {
+                declared.put(entry.name(), declaration(entry));
+            }
+        }
+    }
+
+    private Declaration declaration(Node.Entry entry) {
+        Optional<Node> override = Optional.ofNullable(reading.overrides().parameters().get(entry.name()))
+                .map(text -> new Node.Scalar(Position.ofWhole(Overrides.SET_OPTION), text, Node.Style.QUOTED));
+        if (entry.value().asMapping().isEmpty()) {
+            return new Declaration(entry.key(), scalar(override.or(() -> Optional.of(entry.value()))),
+                    Optional.empty(), Optional.empty(), Optional.empty(), Optional.empty());
+        }
+        String on = "parameter '" + entry.name() + "'";
+        Fields fields = Fields.of(entry.value().asMapping().get(), on, KEYS, reading);
+        return new Declaration(entry.key(), scalar(override.or(() -> fields.value("value"))), fields.value("from"),
+                fields.value("to"), fields.value("meaning").flatMap(node -> reading.text(node, "'meaning'")),
+                reading.remarks().stream().filter(remark -> remark.on().equals(on) && remark.kind().equals("source"))
+                        .map(remark -> remark.text()).findFirst());
+    }
+
+    /** The scalar that defines a value; none for nothing, {@code ~} and {@code null}. */
+    private Optional<Node.Scalar> scalar(Optional<Node> node) {
+        if (node.isPresent() && node.get().asScalar().isEmpty()) {
+            reading.fault(node.get().position(), "not-a-number", "a number belongs here, not " + node.get().inWords());
+        }
+        return node.flatMap(Node::asScalar).filter(value -> !value.isAbsent()
+                && !(value.isPlain() && (value.text().equals("null") || value.text().equals("~"))));
+    }
+
+    private void refuseUnknownOverrides() {
+        for (String name : reading.overrides().parameters().keySet()) {
+            if (!declared.containsKey(Names.canonical(name))) {
+                reading.fault(Position.ofWhole(Overrides.SET_OPTION), "unknown-parameter", "there is no parameter '"
+                        + Words.shortened(name) + "'" + Suggestion.didYouMean(declared.keySet(), name));
+            }
+        }
+    }
+
+    private Optional<Rational> value(String name) {
+        if (!values.containsKey(name)) {
+            open.push(name);
+            Optional<Rational> value = evaluate(declared.get(name));
+            open.pop();
+            values.put(name, value);
+        }
+        return values.get(name);
+    }
+
+    private Optional<Rational> evaluate(Declaration declaration) {
+        if (declaration.value().isEmpty()) {
+            reading.fault(declaration.name().position(), "parameter-without-value", "the parameter '"
+                    + declaration.name().name() + "' has no value; formulas in symbols aren't available yet, so write "
+                    + "for example " + declaration.name().name() + ": 1/20");
+            return Optional.empty();
+        }
+        Node.Scalar written = declaration.value().get();
+        if (!Expressions.isExpression(written.text())) {
+            return Numerals.read(written.text(), written.position(), reading.faults());
+        }
+        return Expressions.parse(written, declared.keySet(), reading).flatMap(this::evaluate);
+    }
+
+    private Optional<Rational> evaluate(ParsedFormula definition) {
+        Map<String, LinearForm> known = new LinkedHashMap<>();
+        boolean allKnown = true;
+        for (ParsedFormula symbol : definition.symbols()) {
+            String name = ((Formula.Symbol) symbol.formula()).name();
+            if (open.contains(name)) {
+                reading.fault(symbol.position(), "parameter-cycle", "the parameter '" + open.peek()
+                        + "' is defined by itself, by way of '" + name + "'; break the circle");
+                allKnown = false;
+            } else if (declared.containsKey(name)) {
+                Optional<Rational> value = value(name);
+                allKnown &= value.isPresent();
+                known.put(name, LinearForm.constant(value.orElse(Rational.ZERO)));
+            }
+        }
+        return allKnown ? Expressions.evaluate(definition, known, reading).map(LinearForm::constant)
+                : Optional.empty();
+    }
+
+    private Parameter parameter(Declaration declaration, Rational value) {
+        Amounts amounts = new Amounts(Map.of(), reading);
+        Optional<Rational> from = declaration.from().flatMap(node -> amounts.number(node, "from"));
+        Optional<Rational> to = declaration.to().flatMap(node -> amounts.number(node, "to"));
+        Position place = declaration.value().orElseThrow().position();
+        String name = declaration.name().name();
+        if (from.isPresent() && to.isPresent() && from.get().compareTo(to.get()) > 0) {
+            reading.fault(declaration.from().get().position(), "empty-range", "the range of '" + name + "' from "
+                    + Numbers.shown(from.get()) + " to " + Numbers.shown(to.get()) + " is empty; turn it round");
+        } else if (from.filter(least -> value.compareTo(least) < 0).isPresent()
+                || to.filter(most -> value.compareTo(most) > 0).isPresent()) {
+            reading.fault(place, "out-of-range", "the parameter '" + name + "' is " + Numbers.shown(value)
+                    + ", outside its range" + from.map(least -> " from " + Numbers.shown(least)).orElse("")
+                    + to.map(most -> " to " + Numbers.shown(most)).orElse(""));
+        }
+        Optional<String> definition = declaration.value().map(Node.Scalar::text).map(String::strip)
+                .filter(Expressions::isExpression);
+        return new Parameter(name, value.toString(), definition, from.map(Rational::toString),
+                to.map(Rational::toString), declaration.meaning(), declaration.source());
+    }
+}
