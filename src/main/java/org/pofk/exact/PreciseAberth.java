@@ -1,0 +1,137 @@
+package org.pofk.exact;
+
+import java.math.BigInteger;
+import java.util.ArrayList;
+import java.util.List;
+
+/**
+ * The iteration of Aberth and Ehrlich with p and p′ at any precision, for roots that doubles can't tell apart or hold.
+ * Approximate: starts only. The sum over the other roots needs few digits and is taken in doubles. Mutable: goes on
+ * from where it was when asked again with more precision.
+ */
+final class PreciseAberth {
+    private static final int MOST_ROUNDS = 100;
+    private static final int FACTOR_BITS = 60;
+    private static final double LARGEST_FACTOR = 0x1p40;
+
+    private final BoundedHorner polynomial;
+    private final List<Point> points;
+
+    /** One approximation. */
+    private static final class Point {
+        private BigInteger x;
+        private BigInteger y;
+        private int scale;
+        private int doubt;
+        private boolean isDone;
+
+        Point(BigInteger x, BigInteger y, int scale) {
+            this.x = x;
+            this.y = y;
+            this.scale = scale;
+        }
+
+        int exponent() {
+            return Disc.leastExponent(x, y) - scale;
+        }
+    }
+
+    /** @param guesses none to start from the circles */
+    PreciseAberth(BoundedHorner polynomial, List<NewtonPolygon.Circle> circles, List<Start> guesses) {
+        this.polynomial = polynomial;
+        this.points = guesses.isEmpty()
+                ? around(circles)
+                : new ArrayList<>(guesses.stream().map(s -> new Point(s.x(), s.y(), s.scale())).toList());
+    }
+
+    private static List<Point> around(List<NewtonPolygon.Circle> circles) {
+        List<Point> all = new ArrayList<>();
+        for (NewtonPolygon.Circle circle : circles) {
+            int exponent = (int) Math.floor(circle.logRadius());
+            double radius = Math.pow(2, circle.logRadius() - exponent);
+            for (int i = 0; i < circle.count(); i++) {
+                double angle = 2 * Math.PI * i / circle.count() + 0.4 + all.size() * 1e-3;
+                Start start = Start.of(radius * Math.cos(angle), radius * Math.sin(angle), 1);
+                all.add(new Point(start.x(), start.y(), start.scale() - exponent));
+            }
+        }
+        return all;
+    }
+
+    /** Guesses that are as good as this precision allows. */
+    List<Start> starts(int precision) {
+        points.forEach(point -> point.isDone = false);
+        for (int round = 0; round < MOST_ROUNDS && points.stream().anyMatch(point -> !point.isDone); round++) {
+            points.stream().filter(point -> !point.isDone).forEach(point -> move(point, precision));
+        }
+        return points.stream().map(p -> new Start(p.x, p.y, p.scale, p.doubt)).toList();
+    }
+
+    private void move(Point point, int precision) {
+        if (point.x.signum() == 0 && point.y.signum() == 0) {
+            point.x = BigInteger.ONE;
+        }
+        int scale = Math.max(point.scale, precision - point.exponent());
+        point.x = point.x.shiftLeft(scale - point.scale);
+        point.y = point.y.shiftLeft(scale - point.scale);
+        point.scale = scale;
+        Evaluation value = polynomial.at(point.x, point.y, scale, precision);
+        point.doubt = value.radiusExponent().orElse(point.exponent() + 1);
+        if (value.isNoise()) {
+            point.isDone = true;
+            return;
+        }
+        step(point, value);
+    }
+
+    /** z ← z − w / (1 − w Σ 1/(z − z_j)), w = p/p′. */
+    private void step(Point point, Evaluation value) {
+        Evaluation.Correction newton = value.realSlope().signum() == 0 && value.imaginarySlope().signum() == 0
+                ? new Evaluation.Correction(BigInteger.ONE.shiftLeft(point.scale), BigInteger.ZERO)
+                : value.correction(point.scale);
+        double wr = asDouble(newton.x(), point.scale);
+        double wi = asDouble(newton.y(), point.scale);
+        double sr = 0;
+        double si = 0;
+        for (Point other : points) {
+            if (other != point) {
+                int common = Math.max(point.scale, other.scale);
+                double ar = asDouble(difference(point.x, point.scale, other.x, other.scale), common);
+                double ai = asDouble(difference(point.y, point.scale, other.y, other.scale), common);
+                double largest = Math.max(Math.abs(ar), Math.abs(ai));
+                double square = (ar / largest) * (ar / largest) + (ai / largest) * (ai / largest);
+                if (largest > 0) {
+                    sr += ar / largest / square / largest;
+                    si -= ai / largest / square / largest;
+                }
+            }
+        }
+        double br = 1 - (wr * sr - wi * si);
+        double bi = -(wr * si + wi * sr);
+        double square = br * br + bi * bi;
+        double fr = br / square;
+        double fi = -bi / square;
+        if (!(Math.abs(fr) + Math.abs(fi) < LARGEST_FACTOR)) {
+            fr = 1;
+            fi = 0;
+        }
+        BigInteger factorX = BigInteger.valueOf(Math.round(Math.scalb(fr, FACTOR_BITS - 40)));
+        BigInteger factorY = BigInteger.valueOf(Math.round(Math.scalb(fi, FACTOR_BITS - 40)));
+        int drop = FACTOR_BITS - 40;
+        BigInteger stepX = newton.x().multiply(factorX).subtract(newton.y().multiply(factorY)).shiftRight(drop);
+        BigInteger stepY = newton.x().multiply(factorY).add(newton.y().multiply(factorX)).shiftRight(drop);
+        point.x = point.x.subtract(stepX);
+        point.y = point.y.subtract(stepY);
+        point.isDone = Math.max(stepX.bitLength(), stepY.bitLength()) <= 3;
+    }
+
+    private static BigInteger difference(BigInteger a, int aScale, BigInteger b, int bScale) {
+        int common = Math.max(aScale, bScale);
+        return a.shiftLeft(common - aScale).subtract(b.shiftLeft(common - bScale));
+    }
+
+    private static double asDouble(BigInteger units, int scale) {
+        int shift = Math.max(0, units.bitLength() - 62);
+        return Math.scalb(units.shiftRight(shift).doubleValue(), shift - scale);
+    }
+}
