@@ -100,17 +100,12 @@ public record ResidueField<E>(Polynomial<E> modulus) implements Field<Polynomial
         return residue(smallerCofactor.times(base().inverse(smaller.leading())));
     }
 
-    /** The sum of the element's values at all roots of q. */
+    /**
+     * The sum of the element's values at all roots of q: Σ g(λ)/q′(λ) is the coefficient of λ^(d−1) of g (Euler; Serre,
+     * Local Fields, III §6, from memory), here with g = element · q′.
+     */
     public E trace(Polynomial<E> element) {
-        return trace(residue(element), powerSums());
-    }
-
-    private E trace(Polynomial<E> residue, List<E> powerSums) {
-        E sum = base().zero();
-        for (int i = 0; i <= residue.degree(); i++) {
-            sum = base().add(sum, base().multiply(residue.coefficient(i), powerSums.get(i)));
-        }
-        return sum;
+        return multiply(element, modulus.derivative()).coefficient(degree() - 1);
     }
 
     /** The product of the element's values at all roots of q. */
@@ -121,15 +116,14 @@ public record ResidueField<E>(Polynomial<E> modulus) implements Field<Polynomial
 
     /**
      * The monic polynomial over E whose roots are the element's values at the d roots of q, from the traces of the
-     * element's powers by Newton's identities. d products of residues.
+     * element's powers by Newton's identities. 2d products of residues.
      */
     public Polynomial<E> characteristicPolynomial(Polynomial<E> element) {
-        List<E> powerSums = powerSums();
         List<E> traces = new ArrayList<>(List.of(base().of(degree())));
         Polynomial<E> power = one();
         for (int k = 1; k <= degree(); k++) {
             power = multiply(power, element);
-            traces.add(trace(power, powerSums));
+            traces.add(trace(power));
         }
         List<E> descending = new ArrayList<>(List.of(base().one()));
         for (int k = 1; k <= degree(); k++) {
@@ -146,20 +140,6 @@ public record ResidueField<E>(Polynomial<E> modulus) implements Field<Polynomial
      */
     public Polynomial<E> minimalPolynomial(Polynomial<E> element) {
         return SquareFree.part(characteristicPolynomial(element));
-    }
-
-    /** Σ λ^k over the roots of q for k = 0 … d − 1, by Newton's identities. */
-    private List<E> powerSums() {
-        List<E> descending = new ArrayList<>(modulus.coefficients());
-        Collections.reverse(descending);
-        List<E> sums = new ArrayList<>(List.of(base().of(degree())));
-        for (int k = 1; k < degree(); k++) {
-            sums.add(base().zero());
-            E known = convolution(descending, sums, k);
-            E own = base().multiply(base().of(k), descending.get(k));
-            sums.set(k, base().negate(base().add(known, own)));
-        }
-        return sums;
     }
 
     /** Σ e_i s_(k−i) for i = 0 … k − 1, e by descending power. */
