@@ -13,7 +13,7 @@ import net.jqwik.api.Provide;
 /** What a field is; a new one is held to it by a subclass of one line in {@link FieldsTest}. */
 abstract class FieldLaws<E> {
     private static final String SEED = "20261201";
-    private static final int TRIES = 150;
+    private static final int TRIES = 60;
 
     private final Field<E> field;
     private final Arbitrary<E> elements;
