@@ -110,7 +110,7 @@ public final class PlainText {
 
         @Override
         public Piece negation(Negation negation) {
-            return negative(write(negation.operand()).at(Binding.QUOTIENT));
+            return negative(write(negation.operand()).at(Binding.ROOT_SUM));
         }
 
         @Override
