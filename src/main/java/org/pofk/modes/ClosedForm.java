@@ -62,7 +62,7 @@ public record ClosedForm(Transform transform, Expansion<Rational> expansion, Lis
 
     /** The formula in decimals, with what it promises. */
     public DecimalForm decimalForm(int digits) {
-        throw new UnsupportedOperationException();
+        return DecimalForms.of(modes, digits);
     }
 
     /** The first k from which no impulse is left: where the formula without impulses holds. */

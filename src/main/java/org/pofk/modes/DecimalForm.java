@@ -10,7 +10,8 @@ import org.pofk.formula.Formula;
  *
  * @param formula    the formula as printed; empty where more than 30 digits would be needed, or no number of digits
  *                   is enough
- * @param errorBound proved: |printed(k) − p(k)| ≤ errorBound for every k it holds for
+ * @param errorBound proved: |printed(k) − p(k)| ≤ errorBound for every k it holds for, at most 10^−digits; zero where
+ *                   there is no formula
  * @param upTo       the last k the bound holds for, empty when it holds for every k ≥ 0
  * @param reason     why there is no formula, or why it stops; empty otherwise
  */

@@ -15,11 +15,11 @@ final class FormulaOverRoots {
 
     static Formula of(ClosedForm form) {
         List<Formula> terms = new ArrayList<>(form.modes().stream()
-                .filter(mode -> mode.factorIndex().isEmpty()).map(ModeFormula::exact).toList());
+                .filter(mode -> mode.pole().isEmpty()).map(ModeFormula::exact).toList());
         for (Expansion.Part<Rational> part : form.expansion().parts()) {
             int index = form.transform().factors().factors().indexOf(part.factor());
             List<Mode> modes = form.modes().stream()
-                    .filter(mode -> mode.factorIndex().isPresent() && mode.factorIndex().getAsInt() == index).toList();
+                    .filter(mode -> !mode.pole().isEmpty() && mode.pole().get(0) == index).toList();
             if (modes.stream().allMatch(Mode::isExact)) {
                 modes.forEach(mode -> terms.add(ModeFormula.exact(mode)));
             } else {

@@ -1,6 +1,6 @@
 package org.pofk.modes;
 
-import java.util.OptionalInt;
+import java.util.List;
 import java.util.stream.Stream;
 
 /**
@@ -15,8 +15,8 @@ public sealed interface Mode {
     /** True when every constant of this mode has a short exact form. */
     boolean isExact();
 
-    /** The place of the factor of the denominator it belongs to; empty for an impulse. */
-    OptionalInt factorIndex();
+    /** Which pole it belongs to: the places of the factor and of the root; empty for an impulse. */
+    List<Integer> pole();
 
     /** One method per variant. */
     interface Visitor<R> {
@@ -35,8 +35,8 @@ public sealed interface Mode {
         }
 
         @Override
-        public OptionalInt factorIndex() {
-            return OptionalInt.empty();
+        public List<Integer> pole() {
+            return List.of();
         }
 
 
@@ -54,8 +54,8 @@ public sealed interface Mode {
         }
 
         @Override
-        public OptionalInt factorIndex() {
-            return OptionalInt.of(factor);
+        public List<Integer> pole() {
+            return List.of(factor, root);
         }
 
 
@@ -74,8 +74,8 @@ public sealed interface Mode {
         }
 
         @Override
-        public OptionalInt factorIndex() {
-            return OptionalInt.of(factor);
+        public List<Integer> pole() {
+            return List.of(factor, root);
         }
 
 

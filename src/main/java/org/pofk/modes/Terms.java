@@ -123,6 +123,19 @@ final class Terms {
         return sum(terms);
     }
 
+    /** π, 2π/5, −π/3: as {@link #scaled} writes them. */
+    static boolean isMultipleOfPi(Formula formula) {
+        if (formula instanceof Formula.Negation negation) {
+            return isMultipleOfPi(negation.operand());
+        }
+        if (formula instanceof Formula.Quotient quotient) {
+            return quotient.denominator() instanceof Formula.Number && isMultipleOfPi(quotient.numerator());
+        }
+        return formula == Formula.Constant.PI || formula instanceof Formula.Product product
+                && product.factors().size() == 2 && product.factors().get(0) instanceof Formula.Number
+                && product.factors().get(1) == Formula.Constant.PI;
+    }
+
     static boolean isOne(Formula formula) {
         return formula instanceof Formula.Number number
                 && number.value().numerator().equals(BigInteger.ONE) && number.value().isInteger();

@@ -82,14 +82,14 @@ class PartialFractionsTest {
         assertEquals(expansion.recombined(), new TransferFunction<>(Polynomial.ofIntegers(0, 0, 1), q));
     }
 
-    /** The power series of N/D against traces, and the expansion brought back to N/D, on 1,500 random products. */
+    /** The power series of N/D against traces, and the expansion brought back to N/D, on 500 random products. */
     @Test
     void expansionOfRandomProductsRecombinesAndGivesTheSeries() {
         Random random = new Random(20240917);
         int repeated = 0;
         int poleAtZero = 0;
         int simpleQuadratics = 0;
-        for (int run = 0; run < 1_500; run++) {
+        for (int run = 0; run < 500; run++) {
             RandomTransform sample = RandomTransform.of(random);
             repeated += sample.hasRepeatedQuadratic() ? 1 : 0;
             poleAtZero += sample.y().denominator().lowestPower() > 0 ? 1 : 0;
@@ -101,9 +101,9 @@ class PartialFractionsTest {
                 assertEquals(series.get(k), expansion.valueAt(k), sample + " at " + k);
             }
         }
-        assertTrue(repeated > 300, "repeated quadratics: " + repeated);
-        assertTrue(poleAtZero > 300, "poles at zero: " + poleAtZero);
-        assertTrue(simpleQuadratics > 300, "others: " + simpleQuadratics);
+        assertTrue(repeated > 100, "repeated quadratics: " + repeated);
+        assertTrue(poleAtZero > 100, "poles at zero: " + poleAtZero);
+        assertTrue(simpleQuadratics > 100, "others: " + simpleQuadratics);
     }
 
     /** Over Q(√2) the same code splits z² − 1/2, which is irreducible over Q. */
