@@ -35,10 +35,22 @@ record Amplification(Optional<Rational> ofCoefficient, Optional<Rational> ofBase
 
     /** Any ρ, for k = 0 … last. */
     static Amplification upTo(int last, Rational rho, int power) {
-        Rational reach = Rational.max(Rational.ONE, roundedUp(rho)).pow(last);
+        Rational reach = powerRoundedUp(Rational.max(Rational.ONE, roundedUp(rho)), last);
         Rational coefficient = roundedUp(Rational.max(Rational.ONE, Expansion.binomial(last, power)).times(reach));
         Rational other = coefficient.times(Rational.of(last));
         return new Amplification(Optional.of(coefficient), Optional.of(other), Optional.of(other));
+    }
+
+    private static Rational powerRoundedUp(Rational base, int exponent) {
+        Rational result = Rational.ONE;
+        Rational square = base;
+        for (int left = exponent; left > 0; left >>= 1) {
+            if ((left & 1) == 1) {
+                result = roundedUp(result.times(square));
+            }
+            square = roundedUp(square.times(square));
+        }
+        return result;
     }
 
     /** A dyadic number at least as large, of 64 bits. */

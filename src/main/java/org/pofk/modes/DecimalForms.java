@@ -20,7 +20,7 @@ final class DecimalForms {
     private static final int MOST_DIGITS = 30;
     /** For those who ask for more digits themselves. */
     private static final int MORE_DIGITS = 10;
-    private static final int[] LAST_STEPS = {1_000, 100, 20};
+    private static final int[] LAST_STEPS = {1_000, 500, 200, 100, 50, 20};
     private static final MathContext TWO_DIGITS_UP = new MathContext(2, RoundingMode.CEILING);
 
     private final List<Mode> modes;
