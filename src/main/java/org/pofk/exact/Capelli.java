@@ -2,9 +2,6 @@ package org.pofk.exact;
 
 import java.math.BigInteger;
 import java.util.Optional;
-import java.util.Set;
-import java.util.TreeSet;
-import org.apache.commons.math3.primes.Primes;
 
 /**
  * When h(z^m) is irreducible for an irreducible h with a root α: exactly if α is no p-th power in Q(α) for the primes
@@ -18,16 +15,12 @@ final class Capelli {
     /** Whether the norm of α proves that h(z^m) is irreducible, h irreducible with h(0) ≠ 0. */
     static boolean proveIrreducible(IntegerPolynomial irreducible, int m) {
         Rational norm = norm(irreducible);
-        for (int prime : primesDividing(m)) {
+        for (int prime : SmallPrimes.dividing(m)) {
             if (isPower(norm, prime)) {
                 return false;
             }
         }
         return m % 4 != 0 || !isPower(norm.dividedBy(Rational.of(-4).pow(irreducible.degree())), 4);
-    }
-
-    static Set<Integer> primesDividing(int m) {
-        return m < 2 ? Set.of() : new TreeSet<>(Primes.primeFactors(m));
     }
 
     /** The product of the roots. */

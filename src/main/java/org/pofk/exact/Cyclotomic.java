@@ -2,10 +2,8 @@ package org.pofk.exact;
 
 import java.util.ArrayList;
 import java.util.Collection;
-import java.util.HashSet;
 import java.util.List;
 import java.util.stream.IntStream;
-import org.apache.commons.math3.primes.Primes;
 
 /**
  * The cyclotomic polynomials: the n-th is monic, irreducible over Q, of degree φ(n), and its roots are the primitive
@@ -23,7 +21,7 @@ public final class Cyclotomic {
     /** Euler's φ: how many of 1 … n are coprime to n. */
     public static int totient(int order) {
         int totient = order;
-        for (int prime : primesDividing(order)) {
+        for (int prime : SmallPrimes.dividing(order)) {
             totient = totient / prime * (prime - 1);
         }
         return totient;
@@ -64,7 +62,7 @@ public final class Cyclotomic {
         while (smallestTotient * (prime - 1) <= degree) {
             smallestTotient *= prime - 1;
             product *= prime;
-            prime = Primes.nextPrime(prime + 1);
+            prime = SmallPrimes.after(prime);
         }
         return Math.toIntExact(Math.max(0, degree) * product / smallestTotient);
     }
@@ -76,15 +74,11 @@ public final class Cyclotomic {
         }
         IntegerPolynomial result = IntegerPolynomial.ofIntegers(-1, 1);
         int built = 1;
-        for (int prime : primesDividing(order)) {
+        for (int prime : SmallPrimes.dividing(order)) {
             result = result.atPower(prime).quotientBy(result).orElseThrow();
             built *= prime;
         }
         return result.atPower(order / built);
-    }
-
-    private static Collection<Integer> primesDividing(int order) {
-        return order < 2 ? List.of() : new HashSet<>(Primes.primeFactors(order));
     }
 
     /**
@@ -92,8 +86,8 @@ public final class Cyclotomic {
      * n-th cyclotomic polynomial divides it, so nearly all others are told apart without a division.
      */
     private static boolean vanishesModuloPrime(int order, IntegerPolynomial part) {
-        int prime = (1 << 30) / order * order + 1;
-        while (!Primes.isPrime(prime)) {
+        int prime = (1 << 20) / order * order + 1;
+        while (!SmallPrimes.isPrime(prime)) {
             prime += order;
         }
         return part.modulo(prime).valueAt(elementOfOrder(order, prime)) == 0;
@@ -102,7 +96,7 @@ public final class Cyclotomic {
     private static long elementOfOrder(int order, int prime) {
         for (long base = 2;; base++) {
             long element = ModularPolynomial.power(base, (prime - 1) / order, prime);
-            if (primesDividing(order).stream().allMatch(
+            if (SmallPrimes.dividing(order).stream().allMatch(
                     divisor -> ModularPolynomial.power(element, order / divisor, prime) != 1)) {
                 return element;
             }

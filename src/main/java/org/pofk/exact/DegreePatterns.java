@@ -2,7 +2,6 @@ package org.pofk.exact;
 
 import java.util.BitSet;
 import java.util.List;
-import org.apache.commons.math3.primes.Primes;
 
 /**
  * Proof of irreducibility by degrees: a factor over Q has, modulo every good prime, a degree that is a sum of degrees
@@ -24,7 +23,7 @@ final class DegreePatterns {
         int useless = 0;
         int used = 0;
         for (int prime = FIRST_PRIME; used < PRIMES_AT_MOST && useless < patience;
-                prime = Primes.nextPrime(prime + 1)) {
+                prime = SmallPrimes.after(prime)) {
             ModularPolynomial image = squareFree.modulo(prime);
             if (image.degree() == squareFree.degree() && image.isSquareFree()) {
                 int before = possible.cardinality();

@@ -16,9 +16,7 @@ import org.pofk.exact.Factorization.Irreducible;
  */
 public final class Factoring {
     /** By degree, then by the coefficients in ascending power, compared as numbers. */
-    public static final Comparator<Polynomial<Rational>> CANONICAL_ORDER = Comparator
-            .<Polynomial<Rational>>comparingInt(Polynomial::degree)
-            .thenComparing(Polynomial::coefficients, Factoring::compareInOrder);
+    public static final Comparator<Polynomial<Rational>> CANONICAL_ORDER = Factoring::compare;
 
     /**
      * What is likely to divide; a wrong hint costs time and changes nothing.
@@ -63,7 +61,7 @@ public final class Factoring {
                 factors.add(new Factor<>(PrimitiveForm.monic(piece.polynomial()), part.getKey(), piece.irreducible()));
             }
         }
-        factors.sort(Comparator.comparing(Factor::polynomial, CANONICAL_ORDER));
+        factors.sort((a, b) -> compare(a.polynomial(), b.polynomial()));
         return multipliedBack(new Factorization<>(polynomial.leading(), factors), polynomial);
     }
 
@@ -75,13 +73,11 @@ public final class Factoring {
         return factorization;
     }
 
-    private static int compareInOrder(List<Rational> a, List<Rational> b) {
-        for (int i = 0; i < Math.min(a.size(), b.size()); i++) {
-            int sign = a.get(i).compareTo(b.get(i));
-            if (sign != 0) {
-                return sign;
-            }
+    private static int compare(Polynomial<Rational> a, Polynomial<Rational> b) {
+        int sign = Integer.compare(a.degree(), b.degree());
+        for (int i = 0; sign == 0 && i <= a.degree(); i++) {
+            sign = a.coefficient(i).compareTo(b.coefficient(i));
         }
-        return Integer.compare(a.size(), b.size());
+        return sign;
     }
 }

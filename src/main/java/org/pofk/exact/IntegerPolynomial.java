@@ -7,7 +7,6 @@ import java.util.Collections;
 import java.util.List;
 import java.util.Optional;
 import java.util.stream.IntStream;
-import org.apache.commons.math3.util.ArithmeticUtils;
 
 /**
  * A polynomial with integer coefficients, the working form behind rational polynomials: no denominators to reduce.
@@ -149,8 +148,11 @@ record IntegerPolynomial(List<BigInteger> coefficients) {
 
     /** The largest m for which this is g(z^m); the polynomial isn't constant. */
     int commonExponent() {
-        return IntStream.rangeClosed(1, degree()).filter(power -> coefficients.get(power).signum() != 0)
-                .reduce(0, ArithmeticUtils::gcd);
+        BigInteger common = BigInteger.ZERO;
+        for (int power = 1; power <= degree(); power++) {
+            common = coefficients.get(power).signum() == 0 ? common : common.gcd(BigInteger.valueOf(power));
+        }
+        return common.intValueExact();
     }
 
     /** The g with this = g(z^m). */

@@ -255,6 +255,18 @@ public record Polynomial<E>(Field<E> field, List<E> coefficients) {
         return larger.monic();
     }
 
+    /** Written out for the same reason as in {@link Rational}. */
+    @Override
+    public boolean equals(Object other) {
+        return other instanceof Polynomial<?> polynomial && field.equals(polynomial.field)
+                && coefficients.equals(polynomial.coefficients);
+    }
+
+    @Override
+    public int hashCode() {
+        return 31 * field.hashCode() + coefficients.hashCode();
+    }
+
     /** Coefficients by descending power with the variable {@code z}, for messages and assertions. */
     @Override
     public String toString() {

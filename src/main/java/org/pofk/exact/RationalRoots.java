@@ -3,7 +3,6 @@ package org.pofk.exact;
 import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.List;
-import org.apache.commons.math3.primes.Primes;
 
 /**
  * The rational roots of a square-free integer polynomial, exact and complete: its roots modulo a prime are lifted
@@ -46,7 +45,7 @@ final class RationalRoots {
     private static SimpleRoots fewest(IntegerPolynomial squareFree) {
         List<SimpleRoots> seen = new ArrayList<>();
         SimpleRoots best = null;
-        for (int prime = FIRST_PRIME; seen.size() < PRIMES_COMPARED; prime = Primes.nextPrime(prime + 1)) {
+        for (int prime = FIRST_PRIME; seen.size() < PRIMES_COMPARED; prime = SmallPrimes.after(prime)) {
             ModularPolynomial image = squareFree.modulo(prime);
             if (image.degree() == squareFree.degree()) {
                 List<Long> residues = roots(image, prime);

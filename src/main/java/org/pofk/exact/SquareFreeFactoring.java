@@ -96,7 +96,7 @@ final class SquareFreeFactoring {
         if (m == 1 || piece.irreducible == Irreducible.NOT_PROVED || Capelli.proveIrreducible(h, m)) {
             return List.of(new Piece(h.atPower(m), piece.irreducible));
         }
-        int prime = Capelli.primesDividing(m).iterator().next();
+        int prime = SmallPrimes.dividing(m).get(0);
         List<Piece> factors = new ArrayList<>();
         IntegerPolynomial rest = splitRootsAndCyclotomic(h.atPower(prime), List.of(), factors);
         factors.addAll(direct(rest));
