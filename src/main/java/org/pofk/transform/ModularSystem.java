@@ -19,6 +19,7 @@ final class ModularSystem {
     private final int[] entry;
     private final int[] start;
     private final List<int[]> readings;
+    private final boolean isShort;
 
     /** A by rows, in compressed form; nothing is copied. */
     ModularSystem(PrimeField field, int[] rowStart, int[] column, int[] entry, int[] start, List<int[]> readings) {
@@ -28,6 +29,19 @@ final class ModularSystem {
         this.entry = entry;
         this.start = start;
         this.readings = readings;
+        isShort = largestRowSum() < 1L << 32;
+    }
+
+    private long largestRowSum() {
+        long largest = 0;
+        for (int i = 0; i < size(); i++) {
+            long sum = 0;
+            for (int at = rowStart[i]; at < rowStart[i + 1]; at++) {
+                sum += entry[at];
+            }
+            largest = Math.max(largest, sum);
+        }
+        return largest;
     }
 
     private int size() {
@@ -181,16 +195,30 @@ final class ModularSystem {
     }
 
     private int[] next(int[] state) {
-        long square = field.prime() * field.prime();
         int[] product = new int[state.length];
         for (int i = 0; i < state.length; i++) {
-            long sum = 0;
-            for (int at = rowStart[i]; at < rowStart[i + 1]; at++) {
-                sum += (long) entry[at] * state[column[at]] - square;
-                sum += (sum >> 63) & square;
-            }
+            long sum = isShort ? sum(i, state) : reducedSum(i, state);
             product[i] = (int) field.reduce(sum);
         }
         return product;
+    }
+
+    /** Row i times the state where no row can exceed 2^63: small whole numbers times residues. */
+    private long sum(int i, int[] state) {
+        long sum = 0;
+        for (int at = rowStart[i]; at < rowStart[i + 1]; at++) {
+            sum += (long) entry[at] * state[column[at]];
+        }
+        return sum;
+    }
+
+    private long reducedSum(int i, int[] state) {
+        long square = field.prime() * field.prime();
+        long sum = 0;
+        for (int at = rowStart[i]; at < rowStart[i + 1]; at++) {
+            sum += (long) entry[at] * state[column[at]] - square;
+            sum += (sum >> 63) & square;
+        }
+        return sum;
     }
 }

@@ -14,15 +14,15 @@ import org.pofk.transform.RecurrenceProof.Method;
  * whose order is below the largest seen are left out: they are the ones that can mislead.
  *
  * <p>Proof that the joined D, P are right over the rationals. Let χ be the characteristic polynomial and N the
- * numerator over it. E = N·D − P·χ vanishes modulo every prime taken, and E times (Δ·l)·δ, δ the common denominator of
- * D and P, is integral; so E = 0 once the product of the primes exceeds twice a bound on it. When d = n, D is χ itself
- * and a bound on its own coefficients is enough. D is shortest because it is shortest modulo a prime.
+ * numerator over it. E = N·D − P·χ vanishes modulo every prime taken, and E·Δ·δ, δ the common denominator of D and P,
+ * is integral; so E = 0 once the product of the primes exceeds twice a bound on it. When d = n, D is χ itself and
+ * bounds on its and N's own coefficients are enough. D is shortest because it is shortest modulo a prime.
  *
  * <p>Exact. Cost: for each prime (n + d) steps of the system, fewer when a vector proves it.
  */
 final class Recurrences {
     private static final long BELOW = 1L << 31;
-    /** Below this size a prime takes less than handing it to another thread. */
+    /** Pieces of work smaller than this take less than handing them to another thread. */
     private static final int PARALLEL_FROM = 40;
 
     /** What one prime says. */
@@ -31,16 +31,18 @@ final class Recurrences {
 
     private final LinearSystem system;
     private final Function<ModularSystem, List<ModularRecurrence>> method;
+    private final ScaledSystem scaled;
     private final SystemResidues residues;
-    private final SystemBounds bounds;
+    private final CoefficientBounds bounds;
     private final List<Modular> known = new ArrayList<>();
     private long nextBelow = BELOW;
 
-    private Recurrences(LinearSystem system, Function<ModularSystem, List<ModularRecurrence>> method) {
-        this.system = system;
+    private Recurrences(LinearSystem original, Function<ModularSystem, List<ModularRecurrence>> method) {
         this.method = method;
+        scaled = ScaledSystem.of(original);
+        system = scaled.system();
         residues = new SystemResidues(system);
-        bounds = SystemBounds.of(system);
+        bounds = scaled.bounds();
     }
 
     /** One recurrence for each reading, in their order. */
@@ -55,13 +57,12 @@ final class Recurrences {
 
     /** The recurrence that the state as a whole shares, with one numerator for each state; readings play no part. */
     static Recurrence ofState(LinearSystem system) {
-        LinearSystem whole = new LinearSystem(system.matrix(), system.start(),
-                List.of(java.util.Collections.nCopies(system.size(), Rational.ONE)));
-        return new Recurrences(whole, modular -> List.of(modular.ofState())).proved(0);
+        LinearSystem unread = new LinearSystem(system.matrix(), system.start(), List.of());
+        return new Recurrences(unread, modular -> List.of(modular.ofState())).proved(0);
     }
 
     private Recurrence proved(int place) {
-        BigInteger wanted = bounds.scale().multiply(bounds.coefficient()).multiply(bounds.term()).shiftLeft(1);
+        BigInteger wanted = bounds.wanted();
         while (true) {
             List<Modular> taken = ofLargestOrder(place);
             ChineseRemainders remainders = new ChineseRemainders(taken.stream().map(Modular::field).toList());
@@ -74,9 +75,16 @@ final class Recurrences {
                 wanted = wanted.max(differenceBound(joined).shiftLeft(1));
             }
             if (remainders.product().compareTo(wanted) > 0) {
-                return joined;
+                return original(joined);
             }
         }
+    }
+
+    private Recurrence original(Recurrence joined) {
+        int degree = joined.denominator().degree();
+        return new Recurrence(scaled.denominator(joined.denominator()),
+                joined.numerators().stream().map(numerator -> scaled.numerator(numerator, degree)).toList(),
+                joined.proof());
     }
 
     private List<Modular> ofLargestOrder(int place) {
@@ -94,9 +102,13 @@ final class Recurrences {
                 fields.add(field);
             }
         }
-        IntStream places = IntStream.range(0, fields.size());
-        known.addAll((system.size() < PARALLEL_FROM ? places : places.parallel())
+        known.addAll(places(fields.size(), system.size())
                 .mapToObj(i -> new Modular(fields.get(i), method.apply(residues.modulo(fields.get(i))))).toList());
+    }
+
+    private static IntStream places(int count, int work) {
+        IntStream places = IntStream.range(0, count);
+        return work < PARALLEL_FROM ? places : places.parallel();
     }
 
     private Recurrence joined(ChineseRemainders remainders, List<ModularRecurrence> parts) {
@@ -115,12 +127,10 @@ final class Recurrences {
 
     private Polynomial<Rational> polynomial(ChineseRemainders remainders, List<ModularRecurrence> parts, int length,
             Residue residue) {
-        List<Rational> coefficients = new ArrayList<>(length);
-        for (int power = 0; power < length; power++) {
-            int at = power;
-            long[] ofPower = parts.stream().mapToLong(part -> residue.at(part, at)).toArray();
-            coefficients.add(new Rational(remainders.combine(ofPower, bounds.scale()), bounds.scale()));
-        }
+        List<Rational> coefficients = places(length, parts.size()).mapToObj(power -> {
+            long[] ofPower = parts.stream().mapToLong(part -> residue.at(part, power)).toArray();
+            return new Rational(remainders.combine(ofPower, bounds.scale()), bounds.scale());
+        }).toList();
         return Polynomial.ofRationals(coefficients);
     }
 
@@ -136,7 +146,7 @@ final class Recurrences {
                 bits);
     }
 
-    /** A bound on (Δ·l)·δ·E, for every sequence. */
+    /** A bound on E·Δ·δ, for every sequence. */
     private BigInteger differenceBound(Recurrence recurrence) {
         List<Rational> all = new ArrayList<>(recurrence.denominator().coefficients());
         recurrence.numerators().forEach(numerator -> all.addAll(numerator.coefficients()));
@@ -144,9 +154,9 @@ final class Recurrences {
                 .reduce(Rational.ZERO, Rational::plus);
         Rational largest = recurrence.numerators().stream().flatMap(numerator -> numerator.coefficients().stream())
                 .map(Rational::abs).reduce(Rational.ZERO, Rational::max);
-        Rational bound = sum.times(Rational.of(bounds.term())).plus(largest)
-                .times(Rational.of(bounds.coefficient().multiply(bounds.scale())))
-                .times(Rational.of(SystemBounds.commonDenominator(all)));
+        Rational bound = sum.times(Rational.of(bounds.numerator()))
+                .plus(largest.times(Rational.of(bounds.denominator())))
+                .times(Rational.of(bounds.scale().multiply(CommonDenominator.of(all))));
         return bound.floor().add(BigInteger.ONE);
     }
 }

@@ -32,6 +32,6 @@ public record StateTransform(Polynomial<Rational> recurrence, List<Polynomial<Ra
             numerators.set(reduction.kept().get(place), recurrence.numerators().get(place));
         }
         return new StateTransform(recurrence.denominator(), numerators,
-                DenominatorFactors.of(recurrence.denominator()), recurrence.proof());
+                new DenominatorFactors(chain).of(recurrence.denominator()), recurrence.proof());
     }
 }

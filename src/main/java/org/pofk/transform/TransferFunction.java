@@ -9,9 +9,13 @@ import org.pofk.exact.Polynomial;
 public record TransferFunction<E>(Polynomial<E> numerator, Polynomial<E> denominator) {
     public TransferFunction {
         Polynomial<E> common = numerator.greatestCommonDivisor(denominator);
-        numerator = numerator.dividedExactlyBy(common);
-        denominator = denominator.dividedExactlyBy(common);
-        numerator = numerator.times(numerator.field().inverse(denominator.leading()));
-        denominator = denominator.monic();
+        if (common.degree() > 0) {
+            numerator = numerator.dividedExactlyBy(common);
+            denominator = denominator.dividedExactlyBy(common);
+        }
+        if (!denominator.leading().equals(denominator.field().one())) {
+            numerator = numerator.times(numerator.field().inverse(denominator.leading()));
+            denominator = denominator.monic();
+        }
     }
 }

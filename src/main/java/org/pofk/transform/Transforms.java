@@ -1,12 +1,9 @@
 package org.pofk.transform;
 
 import java.util.ArrayList;
-import java.util.HashMap;
 import java.util.List;
-import java.util.Map;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Output;
-import org.pofk.exact.Factorization;
 import org.pofk.exact.Polynomial;
 import org.pofk.exact.Rational;
 
@@ -18,14 +15,14 @@ public final class Transforms {
     /** One transform per output, in their order. */
     public static List<Transform> of(Chain chain, List<Output> outputs) {
         List<Recurrence> recurrences = Recurrences.ofReadings(Reduction.of(chain, outputs).reduced());
-        Map<Polynomial<Rational>, Factorization<Rational>> factored = new HashMap<>();
+        DenominatorFactors factors = new DenominatorFactors(chain);
         List<Transform> transforms = new ArrayList<>();
         for (int i = 0; i < outputs.size(); i++) {
             Polynomial<Rational> recurrence = recurrences.get(i).denominator();
             TransferFunction<Rational> y =
                     new TransferFunction<>(recurrences.get(i).numerators().get(0).shiftedUp(1), recurrence);
             transforms.add(new Transform(outputs.get(i), recurrence, y,
-                    factored.computeIfAbsent(y.denominator(), DenominatorFactors::of), recurrences.get(i).proof()));
+                    factors.of(y.denominator()), recurrences.get(i).proof()));
         }
         return transforms;
     }

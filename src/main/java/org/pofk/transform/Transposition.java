@@ -6,8 +6,8 @@ import org.pofk.chain.SparseMatrix;
 import org.pofk.chain.SparseMatrix.Entry;
 
 /** A matrix turned round. Exact; cost linear in the number of entries. */
-final class SystemTransposition {
-    private SystemTransposition() {
+final class Transposition {
+    private Transposition() {
     }
 
     /** The rows of a matrix, each entry's place being its column. */
