@@ -28,11 +28,15 @@ final class FormulaTrees {
 
     /** Trees up to the depth given, of every variant but root sums. */
     static Arbitrary<Formula> upTo(int depth) {
-        Arbitrary<Formula> leaf = Arbitraries.oneOf(numbers(), decimals(), symbols(), Arbitraries.of(Constant.values()));
+        return upTo(depth, Arbitraries.oneOf(numbers(), decimals(), symbols(), Arbitraries.of(Constant.values())));
+    }
+
+    /** Trees up to the depth given over the leaves given. */
+    static Arbitrary<Formula> upTo(int depth, Arbitrary<Formula> leaf) {
         if (depth == 0) {
             return leaf;
         }
-        Arbitrary<Formula> part = upTo(depth - 1);
+        Arbitrary<Formula> part = upTo(depth - 1, leaf);
         Arbitrary<List<Formula>> several = part.list().ofMinSize(2).ofMaxSize(4);
         return Arbitraries.frequencyOf(
                 Tuple.of(2, leaf),
@@ -49,7 +53,7 @@ final class FormulaTrees {
                 .map(arguments -> new Call(function, arguments)));
     }
 
-    private static Arbitrary<Formula> numbers() {
+    static Arbitrary<Formula> numbers() {
         return Combinators.combine(Arbitraries.integers().between(-40, 40), Arbitraries.of(1, 1, 1, 2, 3, 7, 40))
                 .as((numerator, denominator) -> new Number(Rational.of(numerator, denominator)));
     }

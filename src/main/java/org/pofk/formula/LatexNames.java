@@ -1,0 +1,39 @@
+package org.pofk.formula;
+
+import java.util.List;
+import java.util.stream.Collectors;
+
+/** Names in LaTeX mathematics: one letter in italics, Greek letters by command, words upright, all else as text. */
+final class LatexNames {
+    private static final String GREEK = "αβγδεζηθικλμνξπρστυφχψωΓΔΘΛΞΠΣΥΦΨΩ";
+    private static final List<String> COMMANDS = List.of("alpha", "beta", "gamma", "delta", "varepsilon", "zeta", "eta",
+            "theta", "iota", "kappa", "lambda", "mu", "nu", "xi", "pi", "rho", "sigma", "tau", "upsilon", "varphi", "chi",
+            "psi", "omega", "Gamma", "Delta", "Theta", "Lambda", "Xi", "Pi", "Sigma", "Upsilon", "Phi", "Psi", "Omega");
+
+    private LatexNames() {
+    }
+
+    static String write(String name) {
+        if (name.length() == 1 && GREEK.contains(name)) {
+            return "\\" + COMMANDS.get(GREEK.indexOf(name));
+        }
+        if (name.matches("[A-Za-z]")) {
+            return name;
+        }
+        return name.matches("[A-Za-z0-9]+") ? "\\mathrm{" + name + "}" : "\\text{" + escaped(name) + "}";
+    }
+
+    private static String escaped(String name) {
+        return name.codePoints().mapToObj(LatexNames::escaped).collect(Collectors.joining());
+    }
+
+    private static String escaped(int c) {
+        return switch (c) {
+            case '{', '}', '$', '&', '#', '%', '_' -> "\\" + (char) c;
+            case '\\' -> "\\textbackslash{}";
+            case '^' -> "\\textasciicircum{}";
+            case '~' -> "\\textasciitilde{}";
+            default -> Character.toString(c);
+        };
+    }
+}
