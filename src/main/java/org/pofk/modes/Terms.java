@@ -11,17 +11,17 @@ import org.pofk.formula.Formula;
  * How closed forms are written as formula trees: no factor 1, no exponent 1, no sum of one term, signs in front of
  * products, fractions with the radical in the numerator (√2/10).
  */
-final class Terms {
+public final class Terms {
     static final Formula K = new Formula.Symbol("k");
 
     private Terms() {
     }
 
-    static Formula number(Rational value) {
+    public static Formula number(Rational value) {
         return new Formula.Number(value);
     }
 
-    static Formula sum(List<Formula> terms) {
+    public static Formula sum(List<Formula> terms) {
         return switch (terms.size()) {
             case 0 -> number(Rational.ZERO);
             case 1 -> terms.get(0);
@@ -30,7 +30,7 @@ final class Terms {
     }
 
     /** The factors multiplied, ones left out, products within flattened, one sign in front. */
-    static Formula product(List<Formula> factors) {
+    public static Formula product(List<Formula> factors) {
         List<Formula> kept = new ArrayList<>();
         boolean negative = false;
         for (Formula factor : factors) {
@@ -58,7 +58,7 @@ final class Terms {
     }
 
     /** factor · irrational, as one fraction: −3√2/10. */
-    static Formula scaled(Rational factor, Formula irrational) {
+    public static Formula scaled(Rational factor, Formula irrational) {
         Formula numerator = product(List.of(number(Rational.of(factor.numerator().abs())), irrational));
         Formula positive = factor.isInteger()
                 ? numerator
@@ -67,14 +67,14 @@ final class Terms {
     }
 
     /** value · factor, written over the value's denominator where it is a fraction: 2π/5 · k as 2πk/5. */
-    static Formula overDenominator(Formula value, Formula factor) {
+    public static Formula overDenominator(Formula value, Formula factor) {
         return value instanceof Formula.Quotient quotient
                 ? new Formula.Quotient(product(List.of(quotient.numerator(), factor)), quotient.denominator())
                 : product(List.of(value, factor));
     }
 
     /** −formula, a sign already in front taken away and a number's sign turned. */
-    static Formula negated(Formula formula) {
+    public static Formula negated(Formula formula) {
         if (formula instanceof Formula.Negation negation) {
             return negation.operand();
         }
@@ -83,25 +83,25 @@ final class Terms {
                 : new Formula.Negation(formula);
     }
 
-    static Formula squareRoot(Formula radicand) {
+    public static Formula squareRoot(Formula radicand) {
         return call(Formula.Function.SQRT, radicand);
     }
 
-    static Formula call(Formula.Function function, Formula... arguments) {
+    public static Formula call(Formula.Function function, Formula... arguments) {
         return new Formula.Call(function, List.of(arguments));
     }
 
-    static Formula power(Formula base, Formula exponent) {
+    public static Formula power(Formula base, Formula exponent) {
         return isOne(exponent) || isOne(base) ? base : new Formula.Power(base, exponent);
     }
 
     /** k − shift. */
-    static Formula kMinus(int shift) {
+    public static Formula kMinus(int shift) {
         return shift == 0 ? K : new Formula.Sum(List.of(K, negated(number(Rational.of(shift)))));
     }
 
     /** binomial(k, p): 1 for p = 0, k for p = 1. */
-    static Formula binomial(int p) {
+    public static Formula binomial(int p) {
         return switch (p) {
             case 0 -> number(Rational.ONE);
             case 1 -> K;
@@ -110,7 +110,7 @@ final class Terms {
     }
 
     /** A polynomial written in a variable, highest power first. */
-    static Formula polynomial(Polynomial<Rational> polynomial, Formula variable) {
+    public static Formula polynomial(Polynomial<Rational> polynomial, Formula variable) {
         List<Formula> terms = new ArrayList<>();
         for (int power = polynomial.degree(); power >= 0; power--) {
             Rational coefficient = polynomial.coefficient(power);
@@ -124,7 +124,7 @@ final class Terms {
     }
 
     /** π, 2π/5, −π/3: as {@link #scaled} writes them. */
-    static boolean isMultipleOfPi(Formula formula) {
+    public static boolean isMultipleOfPi(Formula formula) {
         if (formula instanceof Formula.Negation negation) {
             return isMultipleOfPi(negation.operand());
         }
@@ -136,12 +136,12 @@ final class Terms {
                 && product.factors().get(1) == Formula.Constant.PI;
     }
 
-    static boolean isOne(Formula formula) {
+    public static boolean isOne(Formula formula) {
         return formula instanceof Formula.Number number
                 && number.value().numerator().equals(BigInteger.ONE) && number.value().isInteger();
     }
 
-    static boolean isZero(Formula formula) {
+    public static boolean isZero(Formula formula) {
         return formula instanceof Formula.Number number && number.value().isZero();
     }
 }
