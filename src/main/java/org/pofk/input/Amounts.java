@@ -1,22 +1,19 @@
 package org.pofk.input;
 
-import java.util.LinkedHashMap;
 import java.util.List;
-import java.util.Map;
 import java.util.Optional;
 import org.pofk.exact.Rational;
-import org.pofk.formula.LinearForm;
 
 /** Reads exact numbers, written as such or as expressions in parameters. */
 final class Amounts {
     private static final String REST = "rest";
     private static final List<String> VALUE = List.of("value");
 
-    private final Map<String, LinearForm> parameters = new LinkedHashMap<>();
+    private final ParameterValues parameters;
     private final Reading reading;
 
-    Amounts(Map<String, Rational> parameters, Reading reading) {
-        parameters.forEach((name, value) -> this.parameters.put(name, LinearForm.constant(value)));
+    Amounts(ParameterValues parameters, Reading reading) {
+        this.parameters = parameters;
         this.reading = reading;
     }
 
@@ -64,7 +61,6 @@ final class Amounts {
         if (!Expressions.isExpression(scalar.text())) {
             return Numerals.read(scalar.text(), scalar.position(), reading.faults());
         }
-        return Expressions.parse(scalar, parameters.keySet(), reading)
-                .flatMap(parsed -> Expressions.evaluate(parsed, parameters, reading)).map(LinearForm::constant);
+        return parameters.value(scalar, reading);
     }
 }

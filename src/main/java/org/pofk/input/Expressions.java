@@ -1,5 +1,6 @@
 package org.pofk.input;
 
+import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
@@ -33,6 +34,16 @@ final class Expressions {
         }
     }
 
+    /** The names used, in order of reading. */
+    static List<String> symbols(ParsedFormula parsed) {
+        return parsed.symbols().stream().map(Expressions::name).toList();
+    }
+
+    /** The name that a symbol stands for. */
+    static String name(ParsedFormula symbol) {
+        return ((Formula.Symbol) symbol.formula()).name();
+    }
+
     static Optional<LinearForm> evaluate(ParsedFormula parsed, Map<String, LinearForm> names, Reading reading) {
         try {
             return Optional.of(LinearForm.evaluate(parsed, names));
@@ -47,7 +58,7 @@ final class Expressions {
         if (names.stream().noneMatch(Numerals::isNumeral)) {
             return true;
         }
-        java.util.List<ParsedFormula> doubtful = parsed.nodes()
+        List<ParsedFormula> doubtful = parsed.nodes()
                 .filter(node -> isNumber(node) && names.contains(written(node, text, places))).toList();
         for (ParsedFormula number : doubtful) {
             String name = written(number, text, places);

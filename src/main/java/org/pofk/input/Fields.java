@@ -5,7 +5,6 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import org.pofk.chain.Model.Remark;
-import org.pofk.text.Suggestion;
 
 /** A mapping whose keys are words of the file format. Keys that begin with {@code x-} are ignored. */
 final class Fields {
@@ -28,15 +27,19 @@ final class Fields {
                 values.put(entry.name(), entry.value());
             } else if (!takeRemark(entry, on, reading) && !entry.name().startsWith("x-")) {
                 reading.fault(entry.key().position(), "unknown-key", "the key '" + Words.shortened(entry.name())
-                        + "' isn't known here" + suggestion(known, entry.name()));
+                        + "' isn't known here" + suggestion(known, entry.name(), reading));
             }
         }
         return new Fields(values);
     }
 
+    static boolean isRemark(Node.Entry entry) {
+        return REMARKS.contains(entry.name());
+    }
+
     /** Keeps the entry as a remark when it is one. */
     static boolean takeRemark(Node.Entry entry, String on, Reading reading) {
-        if (!REMARKS.contains(entry.name())) {
+        if (!isRemark(entry)) {
             return false;
         }
         reading.text(entry.value(), "'" + entry.name() + "'")
@@ -44,8 +47,8 @@ final class Fields {
         return true;
     }
 
-    private static String suggestion(List<String> known, String name) {
-        String meant = Suggestion.didYouMean(known, name);
+    private static String suggestion(List<String> known, String name, Reading reading) {
+        String meant = reading.didYouMean(known, name);
         return meant.isEmpty() ? "; known are " + String.join(", ", known) : meant;
     }
 

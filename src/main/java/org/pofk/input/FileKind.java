@@ -56,7 +56,7 @@ public enum FileKind {
         if (source.name().toLowerCase(Locale.ROOT).endsWith(".csv")) {
             return true;
         }
-        return !ANY_KEY.matcher(source.text()).find() && source.text().lines().filter(line -> !line.isBlank())
+        return source.text().chars().anyMatch(Character::isDigit) && !ANY_KEY.matcher(source.text()).find() && source.text().lines().filter(line -> !line.isBlank())
                 .allMatch(line -> TABLE_LINE.matcher(line).matches());
     }
 

@@ -64,6 +64,10 @@ record Head(String title, Step step, Chain.Kind kind, Optional<Convention> conve
                 .map(Orientation::convention);
         Sums sums = fields.value("sums").flatMap(node -> reading.keyword(node, "'sums'", Sums.values()))
                 .orElse(Sums.EXACT);
+        if (kind == Kind.RECURSION && fields.value("sums").isPresent()) {
+            reading.fault(fields.value("sums").get().position(), "sums-not-here",
+                    "in a recursion nothing must add up to 1; leave 'sums' out");
+        }
         Step step = fields.value("step").flatMap(node -> step(node, reading))
                 .orElse(ONE_STEP);
         About about = fields.value("about").map(node -> about(node, reading)).orElse(About.NOTHING);

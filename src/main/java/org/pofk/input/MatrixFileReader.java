@@ -55,7 +55,7 @@ public final class MatrixFileReader {
     }
 
     private static MatrixGrid grid(NamedTable table, Source source, Reading reading) {
-        Amounts amounts = new Amounts(Map.of(), reading);
+        Amounts amounts = new Amounts(ParameterValues.NONE, reading);
         return new MatrixGrid(table.cells().stream().map(row -> row.stream()
                 .map(cell -> amounts.share(cell, 0, "matrix").map(MatrixGrid.Cell::new)).toList()).toList(),
                 new Position(source.name(), 1, 1));
@@ -79,7 +79,7 @@ public final class MatrixFileReader {
                     + "chain starts; say --start STATE, for example --start '" + states.names().get(0) + "'");
             return List.of();
         }
-        return new StartSection(states, head, new Amounts(Map.of(), reading), reading)
+        return new StartSection(states, head, new Amounts(ParameterValues.NONE, reading), reading)
                 .vector(Optional.empty(), Position.ofWhole(Overrides.START_OPTION));
     }
 }

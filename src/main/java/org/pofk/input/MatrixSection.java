@@ -139,14 +139,10 @@ final class MatrixSection {
             return Optional.empty();
         }
         try {
-            return Optional.of(NamedTable.of(Source.read(beside(folder, file.get())), options));
+            return Optional.of(NamedTable.of(Source.read(folder.orElse(Path.of("")).resolve(file.get())), options));
         } catch (RefusedException refused) {
             reading.faults().addAll(refused.faults());
             return Optional.empty();
         }
-    }
-
-    private static Path beside(Optional<Path> folder, String file) {
-        return folder.map(path -> path.resolve(file)).orElse(Path.of(file));
     }
 }

@@ -36,7 +36,8 @@ public final class ModelReader {
 
     /** The model in a file; tables that it names lie beside it. */
     public static Model read(Path file, Overrides overrides) throws RefusedException {
-        return read(Source.read(file), Optional.ofNullable(file.toAbsolutePath().getParent()), overrides);
+        Path folder = Optional.ofNullable(file.getParent()).orElse(Path.of(""));
+        return read(Source.read(file), Optional.of(folder), overrides);
     }
 
     /** The model in a text; tables that it names lie in {@code folder}. */
@@ -46,37 +47,55 @@ public final class ModelReader {
         ModelReader reader = new ModelReader(source, folder, new Reading(faults, overrides));
         Node root = YamlComposer.compose(source, faults);
         Optional<Model> model = reader.reading
-                .mapping(root, "a model", "pofk: 1 with states and transitions").map(reader::model);
+                .mapping(root, "a model", "pofk: 1 with states and transitions").flatMap(reader::model);
         faults.refuseIfAny();
-        List<String> wrong = ChainCheck.violations(model.orElseThrow().chain());
-        if (!wrong.isEmpty()) {
-            throw new AssertionError("accepted, but not a chain: " + source.name() + ": " + wrong);
-        }
-        return model.orElseThrow();
+        return sound(model.orElseThrow());
     }
 
-    private Model model(Node.Mapping root) {
+    private static Model sound(Model model) {
+        List<String> wrong = ChainCheck.violations(model.chain());
+        if (!wrong.isEmpty()) {
+            throw new AssertionError("accepted, but not a chain: " + model.origin() + ": " + wrong);
+        }
+        return model;
+    }
+
+    /** The model, when there are no faults; nothing when not even its states could be read. */
+    private Optional<Model> model(Node.Mapping root) {
         Fields fields = Fields.of(root, "model", KEYS, reading);
         Head head = Head.read(fields, root, source.fileName(), reading);
         ParametersSection section = new ParametersSection(reading);
         List<Parameter> parameters = section.read(fields.value("parameters"));
-        Map<String, Rational> values = section.values();
-        Amounts amounts = new Amounts(values, reading);
         Moves moves = Moves.read(fields, root, folder, reading);
+        if (moves.states().size() == 0) {
+            refuseWithoutStates(root);
+            return Optional.empty();
+        }
+        Chain chain = chain(fields, root, head, section.values(), moves);
+        NameClashes.check(root, moves.states(), reading);
+        Convention convention = head.convention()
+                .or(() -> moves.orientation().map(Head.Orientation::convention)).orElse(Convention.COLUMNS);
+        return Optional.of(new Model(head.title(), head.step(), convention, head.about(), chain, parameters,
+                reading.remarks(), reading.changes(), new Origin(source.name(), source.sha256())));
+    }
+
+    private void refuseWithoutStates(Node.Mapping root) {
+        if (reading.faults().isEmpty()) {
+            reading.fault(root.position(), "no-states", "the model has no states; name at least one");
+        }
+    }
+
+    private Chain chain(Fields fields, Node.Mapping root, Head head, ParameterValues parameters, Moves moves) {
         States states = moves.states();
+        Amounts amounts = new Amounts(parameters, reading);
         SparseMatrix matrix = moves.matrix(head, amounts);
         List<Rational> start = new StartSection(states, head, amounts, reading)
                 .vector(fields.value("start"), root.position());
         Map<String, List<Integer>> sets = fields.value("sets")
                 .map(node -> new SetsSection(states, reading).read(node)).orElse(Map.of());
         List<Output> outputs = fields.value("outputs")
-                .map(node -> new OutputsSection(states, head.kind(), sets, values, reading).read(node))
+                .map(node -> new OutputsSection(states, head.kind(), sets, parameters, reading).read(node))
                 .orElse(List.of());
-        NameClashes.check(root, states, reading);
-        Convention convention = head.convention()
-                .or(() -> moves.orientation().map(Head.Orientation::convention)).orElse(Convention.COLUMNS);
-        return new Model(head.title(), head.step(), convention, head.about(),
-                new Chain(head.kind(), states.names(), matrix, start, sets, outputs), parameters, reading.remarks(),
-                reading.changes(), new Origin(source.name(), source.sha256()));
+        return new Chain(head.kind(), states.names(), matrix, start, sets, outputs);
     }
 }

@@ -38,12 +38,11 @@ final class Moves {
 
     private static States states(Fields fields, Optional<Node.Mapping> transitions, Optional<MatrixSection> matrix,
             Reading reading) {
-        Optional<Node> listed = fields.value("states");
+        Optional<Node.Sequence> listed = fields.value("states")
+                .flatMap(node -> reading.sequence(node, "'states'", "[both, one, none]"));
         if (listed.isPresent()) {
-            return States.listed(reading.sequence(listed.get(), "'states'", "[both, one, none]")
-                    .map(list -> list.items().stream()
-                            .flatMap(item -> reading.scalar(item, "a state").stream()).toList())
-                    .orElse(List.of()), reading);
+            return States.listed(listed.get().items().stream()
+                    .flatMap(item -> reading.scalar(item, "a state").stream()).toList(), reading);
         }
         if (transitions.isPresent()) {
             return States.named(Transitions.states(transitions.get()), reading);

@@ -4,17 +4,17 @@ import java.util.ArrayDeque;
 import java.util.ArrayList;
 import java.util.Deque;
 import java.util.LinkedHashMap;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
 import java.util.stream.Collectors;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Output;
 import org.pofk.exact.Rational;
-import org.pofk.formula.Formula;
 import org.pofk.formula.LinearForm;
 import org.pofk.formula.ParsedFormula;
-import org.pofk.text.Suggestion;
 
 /**
  * The section {@code outputs}: linear expressions in states, sets, parameters and other outputs, or mappings of states
@@ -25,19 +25,21 @@ final class OutputsSection {
     private final Chain.Kind kind;
     private final Map<String, List<Integer>> sets;
     private final Amounts amounts;
+    private final ParameterValues parameters;
     private final Reading reading;
     private final Map<String, LinearForm> names = new LinkedHashMap<>();
     private final Map<String, Node> written = new LinkedHashMap<>();
     private final Deque<String> open = new ArrayDeque<>();
 
-    OutputsSection(States states, Chain.Kind kind, Map<String, List<Integer>> sets, Map<String, Rational> parameters,
+    OutputsSection(States states, Chain.Kind kind, Map<String, List<Integer>> sets, ParameterValues parameters,
             Reading reading) {
         this.states = states;
         this.kind = kind;
         this.sets = sets;
         this.amounts = new Amounts(parameters, reading);
+        this.parameters = parameters;
         this.reading = reading;
-        parameters.forEach((name, value) -> names.put(name, LinearForm.constant(value)));
+        names.putAll(parameters.known());
         states.names().forEach(state -> names.put(state, LinearForm.of(state)));
         sets.forEach((name, members) -> names.put(name, sum(members)));
     }
@@ -108,16 +110,15 @@ final class OutputsSection {
     private Optional<LinearForm> evaluate(ParsedFormula parsed) {
         boolean circle = false;
         for (ParsedFormula symbol : parsed.symbols()) {
-            String name = ((Formula.Symbol) symbol.formula()).name();
-            if (open.contains(name) && !names.containsKey(name)) {
-                reading.fault(symbol.position(), "output-cycle", "the output '" + open.peek()
-                        + "' is defined by itself, by way of '" + name + "'; break the circle");
+            String name = Expressions.name(symbol);
+            if (!names.containsKey(name) && written.containsKey(name)
+                    && reading.closesCircle(open, name, "output", symbol.position())) {
                 circle = true;
             } else if (written.containsKey(name)) {
                 resolve(name);
             }
         }
-        return circle ? Optional.empty() : Expressions.evaluate(parsed, names, reading);
+        return circle || !parameters.suffice(parsed) ? Optional.empty() : Expressions.evaluate(parsed, names, reading);
     }
 
     /** Coefficients by state or set, or an expression with remarks as {@code {value: …, note: …}}. */
@@ -142,7 +143,7 @@ final class OutputsSection {
             List<String> known = new ArrayList<>(states.names());
             known.addAll(sets.keySet());
             reading.fault(entry.key().position(), "unknown-state", "there is no state or set '"
-                    + Words.shortened(name) + "'" + Suggestion.didYouMean(known, name));
+                    + Words.shortened(name) + "'" + reading.didYouMean(known, name));
         }
         return LinearForm.ZERO;
     }
@@ -151,8 +152,9 @@ final class OutputsSection {
         return names.containsKey(name) || written.containsKey(name) && !open.contains(name);
     }
 
-    private java.util.Set<String> allNames() {
-        java.util.Set<String> all = new java.util.LinkedHashSet<>(names.keySet());
+    private Set<String> allNames() {
+        Set<String> all = new LinkedHashSet<>(names.keySet());
+        all.addAll(parameters.faulty());
         all.addAll(written.keySet());
         return all;
     }

@@ -3,6 +3,7 @@ package org.pofk.input;
 import java.util.ArrayDeque;
 import java.util.ArrayList;
 import java.util.Deque;
+import java.util.HashSet;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -10,11 +11,9 @@ import java.util.Optional;
 import java.util.Set;
 import org.pofk.chain.Model.Parameter;
 import org.pofk.exact.Rational;
-import org.pofk.formula.Formula;
 import org.pofk.formula.LinearForm;
 import org.pofk.formula.ParsedFormula;
 import org.pofk.text.Position;
-import org.pofk.text.Suggestion;
 
 /** The section {@code parameters}: named numbers, which may be defined by one another without going in a circle. */
 final class ParametersSection {
@@ -25,6 +24,7 @@ final class ParametersSection {
     private final Reading reading;
     private final Map<String, Declaration> declared = new LinkedHashMap<>();
     private final Map<String, Optional<Rational>> values = new LinkedHashMap<>();
+    private final Set<String> refused = new HashSet<>();
     private final Deque<String> open = new ArrayDeque<>();
 
     /** A parameter as the file gives it; {@code value} is the scalar that defines it. */
@@ -47,16 +47,13 @@ final class ParametersSection {
         return parameters;
     }
 
-    /** The value of each name that is declared; zero for those with faults, so that each fault is told once. */
-    Map<String, Rational> values() {
-        Map<String, Rational> numbers = new LinkedHashMap<>();
-        declared.keySet().forEach(name -> numbers.put(name, value(name).orElse(Rational.ZERO)));
-        return numbers;
-    }
-
-    /** Parameters whose values aren't known because of faults. */
-    boolean isKnown(String name) {
-        return value(name).isPresent();
+    /** The values, for expressions. */
+    ParameterValues values() {
+        Map<String, LinearForm> known = new LinkedHashMap<>();
+        Set<String> faulty = new HashSet<>(refused);
+        declared.keySet().forEach(name -> value(name).ifPresentOrElse(
+                value -> known.put(name, LinearForm.constant(value)), () -> faulty.add(name)));
+        return new ParameterValues(known, faulty);
     }
 
     private void declareAll(Node.Mapping mapping) {
@@ -64,6 +61,7 @@ final class ParametersSection {
             if (RESERVED.contains(entry.name())) {
                 reading.fault(entry.key().position(), "reserved-name", "'" + entry.name()
                         + "' has a meaning of its own in formulas; give the parameter another name");
+                refused.add(entry.name());
             } else if (States.isName(entry.key(), "a parameter", reading)) {
                 declared.put(entry.name(), declaration(entry));
             }
@@ -98,7 +96,7 @@ final class ParametersSection {
         for (String name : reading.overrides().parameters().keySet()) {
             if (!declared.containsKey(Names.canonical(name))) {
                 reading.fault(Position.ofWhole(Overrides.SET_OPTION), "unknown-parameter", "there is no parameter '"
-                        + Words.shortened(name) + "'" + Suggestion.didYouMean(declared.keySet(), name));
+                        + Words.shortened(name) + "'" + reading.didYouMean(declared.keySet(), name));
             }
         }
     }
@@ -131,15 +129,17 @@ final class ParametersSection {
         Map<String, LinearForm> known = new LinkedHashMap<>();
         boolean allKnown = true;
         for (ParsedFormula symbol : definition.symbols()) {
-            String name = ((Formula.Symbol) symbol.formula()).name();
-            if (open.contains(name)) {
-                reading.fault(symbol.position(), "parameter-cycle", "the parameter '" + open.peek()
-                        + "' is defined by itself, by way of '" + name + "'; break the circle");
+            String name = Expressions.name(symbol);
+            if (reading.closesCircle(open, name, "parameter", symbol.position())) {
                 allKnown = false;
             } else if (declared.containsKey(name)) {
                 Optional<Rational> value = value(name);
                 allKnown &= value.isPresent();
                 known.put(name, LinearForm.constant(value.orElse(Rational.ZERO)));
+            } else if (!refused.contains(name)) {
+                reading.fault(symbol.position(), "unknown-parameter", "there is no parameter '"
+                        + Words.shortened(name) + "'" + reading.didYouMean(declared.keySet(), name));
+                allKnown = false;
             }
         }
         return allKnown ? Expressions.evaluate(definition, known, reading).map(LinearForm::constant)
@@ -147,7 +147,7 @@ final class ParametersSection {
     }
 
     private Parameter parameter(Declaration declaration, Rational value) {
-        Amounts amounts = new Amounts(Map.of(), reading);
+        Amounts amounts = new Amounts(ParameterValues.NONE, reading);
         Optional<Rational> from = declaration.from().flatMap(node -> amounts.number(node, "from"));
         Optional<Rational> to = declaration.to().flatMap(node -> amounts.number(node, "to"));
         Position place = declaration.value().orElseThrow().position();

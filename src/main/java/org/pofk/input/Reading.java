@@ -1,18 +1,26 @@
 package org.pofk.input;
 
 import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.Collection;
+import java.util.Deque;
 import java.util.List;
 import java.util.Optional;
 import org.pofk.chain.Model.Remark;
 import org.pofk.text.Faults;
 import org.pofk.text.Position;
+import org.pofk.text.Suggestion;
 
 /** What the sections of one model share while it is read: faults, remarks and changes. Mutable; one for a reading. */
 final class Reading {
+    private static final int MOST_SUGGESTIONS = 100;
+    private static final int LONGEST_CHAIN = 200;
+
     private final Faults faults;
     private final Overrides overrides;
     private final List<Remark> remarks = new ArrayList<>();
     private final List<String> changes = new ArrayList<>();
+    private int suggestions;
 
     Reading(Faults faults, Overrides overrides) {
         this.faults = faults;
@@ -33,6 +41,33 @@ final class Reading {
 
     List<String> changes() {
         return changes;
+    }
+
+    /**
+     * {@code ; did you mean 'both'?}, or nothing when no candidate is near. Only the first faults get one: a large
+     * file full of unknown names must not take the square of its length.
+     */
+    String didYouMean(Collection<String> candidates, String name) {
+        return ++suggestions > MOST_SUGGESTIONS ? "" : Suggestion.didYouMean(candidates, name);
+    }
+
+    /**
+     * A fault when {@code name} is among the definitions that are still open, outermost last, or when there are too
+     * many of them.
+     */
+    boolean closesCircle(Deque<String> open, String name, String what, Position position) {
+        if (open.contains(name)) {
+            fault(position, what + "-cycle", "the " + what + " '" + Words.shortened(open.getFirst())
+                    + "' is defined by itself" + (open.getFirst().equals(name) ? ""
+                            : ", by way of '" + Words.shortened(name) + "'") + "; break the circle");
+            return true;
+        }
+        if (open.size() > LONGEST_CHAIN) {
+            fault(position, "definition-too-long", "the " + what + " '" + Words.shortened(open.getFirst())
+                    + "' is reached through more than " + LONGEST_CHAIN + " definitions; shorten the chain");
+            return true;
+        }
+        return false;
     }
 
     void fault(Position position, String code, String message) {
@@ -83,8 +118,9 @@ final class Reading {
                 return Optional.of(choice);
             }
         }
-        List<String> words = java.util.Arrays.stream(choices).map(Keyword::word).toList();
-        fault(node.position(), "unknown-word", what + " is " + Words.choice(words) + ", not " + node.inWords());
+        List<String> words = Arrays.stream(choices).map(Keyword::word).toList();
+        fault(node.position(), "unknown-word", what + " is " + Words.choice(words) + ", not " + node.inWords()
+                + didYouMean(words, word));
         return Optional.empty();
     }
 }

@@ -9,7 +9,6 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.SortedSet;
 import java.util.TreeSet;
-import org.pofk.text.Suggestion;
 
 /** The section {@code sets}: named groups of states, of other sets, or of what is not in them. */
 final class SetsSection {
@@ -103,16 +102,14 @@ final class SetsSection {
         if (states.contains(name)) {
             return new TreeSet<>(List.of(states.place(name)));
         }
-        if (open.contains(name)) {
-            reading.fault(scalar.position(), "set-cycle", "the set '" + Words.shortened(set)
-                    + "' is defined by itself, by way of '" + Words.shortened(name) + "'; break the circle");
+        if (written.containsKey(name) && reading.closesCircle(open, name, "set", scalar.position())) {
             return new TreeSet<>();
         }
         if (!written.containsKey(name)) {
             List<String> known = new ArrayList<>(states.names());
             known.addAll(written.keySet());
             reading.fault(scalar.position(), "unknown-state", "there is no state or set '" + Words.shortened(name)
-                    + "'" + Suggestion.didYouMean(known, name));
+                    + "'" + reading.didYouMean(known, name));
             return new TreeSet<>();
         }
         return members(name);

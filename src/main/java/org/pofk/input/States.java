@@ -6,7 +6,6 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import org.pofk.text.Position;
-import org.pofk.text.Suggestion;
 
 /** The states of a model, in order, by name. */
 final class States {
@@ -94,19 +93,15 @@ final class States {
     Optional<Integer> find(Node.Scalar scalar, Reading reading) {
         Integer place = places.get(scalar.name());
         if (place == null) {
-            reading.fault(scalar.position(), "unknown-state", unknown(scalar.name()));
+            reading.fault(scalar.position(), "unknown-state", "there is no state '" + Words.shortened(scalar.name()) + "'"
+                    + suggestion(scalar.name(), reading));
         }
         return Optional.ofNullable(place);
     }
 
-    /** Words for a name that is no state. */
-    String unknown(String name) {
-        return "there is no state '" + Words.shortened(name) + "'" + suggestion(name);
-    }
-
     /** What was probably meant, or all the names when they are few. */
-    String suggestion(String name) {
-        String meant = Suggestion.didYouMean(names, name);
+    String suggestion(String name, Reading reading) {
+        String meant = reading.didYouMean(names, name);
         return meant.isEmpty() && size() > 0 && size() <= 12 ? "; the states are " + Words.quotedList(names) : meant;
     }
 }

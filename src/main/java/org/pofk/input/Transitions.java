@@ -31,13 +31,22 @@ final class Transitions {
 
     /** The states in the order of their entries. */
     static List<Node.Scalar> states(Node.Mapping written) {
-        return written.entries().stream().map(Node.Entry::key).toList();
+        return written.entries().stream().filter(entry -> !isRemark(entry)).map(Node.Entry::key).toList();
+    }
+
+    /** A note or source on all transitions: no state's entry has a text as its value but {@code stays}. */
+    private static boolean isRemark(Node.Entry entry) {
+        return Fields.isRemark(entry) && entry.value().asScalar().filter(text -> !text.name().equals(STAYS)).isPresent();
     }
 
     SparseMatrix matrix() {
         List<List<Entry>> columns = new ArrayList<>(Collections.nCopies(states.size(), List.of()));
         Set<String> given = new HashSet<>();
         for (Node.Entry entry : written.entries()) {
+            if (!states.contains(entry.name()) && isRemark(entry)) {
+                Fields.takeRemark(entry, "transitions", reading);
+                continue;
+            }
             given.add(entry.name());
             Optional<Integer> from = states.find(entry.key(), reading);
             if (from.isPresent()) {
@@ -116,7 +125,7 @@ final class Transitions {
     private Optional<Integer> target(Node.Scalar name) {
         if (!states.contains(name.name()) && states.listed().isEmpty()) {
             reading.fault(name.position(), "unknown-state", "the state '" + Words.shortened(name.name())
-                    + "' has no entry under transitions" + states.suggestion(name.name()));
+                    + "' has no entry under transitions" + states.suggestion(name.name(), reading));
             return Optional.empty();
         }
         return states.find(name, reading);
