@@ -2,11 +2,16 @@ package org.pofk.input;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
 import org.pofk.exact.Rational;
+import org.pofk.text.Fault;
+import org.pofk.text.Faults;
 
 /** Reads exact numbers, written as such or as expressions in parameters. */
 final class Amounts {
     private static final String REST = "rest";
+    private static final Set<String> OF_NUMBERS =
+            Set.of("division-by-zero", "exponent-out-of-range", "number-too-large");
     private static final List<String> VALUE = List.of("value");
 
     private final ParameterValues parameters;
@@ -61,6 +66,19 @@ final class Amounts {
         if (!Expressions.isExpression(scalar.text())) {
             return Numerals.read(scalar.text(), scalar.position(), reading.faults());
         }
-        return parameters.value(scalar, reading);
+        return parameters.names().isEmpty() ? arithmetic(scalar) : parameters.value(scalar, reading);
+    }
+
+    /** Where there are no parameters, what can't be computed with numbers alone is an unreadable number. */
+    private Optional<Rational> arithmetic(Node.Scalar scalar) {
+        Reading trial = new Reading(new Faults(), Overrides.NONE);
+        Optional<Rational> value = parameters.value(scalar, trial);
+        List<Fault> faults = trial.faults().list();
+        if (faults.stream().map(Fault::code).anyMatch(OF_NUMBERS::contains)) {
+            reading.faults().addAll(faults);
+        } else if (!faults.isEmpty()) {
+            Numerals.refuse(scalar, reading.faults());
+        }
+        return value;
     }
 }

@@ -9,6 +9,7 @@ import java.util.stream.IntStream;
 import org.pofk.chain.Chain;
 import org.pofk.chain.SparseMatrix;
 import org.pofk.input.Head.Orientation;
+import org.pofk.text.Fault;
 import org.pofk.text.Position;
 import org.pofk.text.RefusedException;
 
@@ -73,21 +74,27 @@ final class MatrixSection {
                     + " rows and columns, but there are " + states.size() + " states; these must be equal in number");
             return new SparseMatrix(nothing);
         }
-        List<Integer> order = order(states);
+        Optional<List<Integer>> found = order(states);
+        if (found.isEmpty()) {
+            return new SparseMatrix(nothing);
+        }
+        List<Integer> order = found.get();
         List<List<Optional<MatrixGrid.Cell>>> ordered = order.stream()
                 .map(i -> order.stream().map(j -> rows.get().get(i).get(j)).toList()).toList();
         return new MatrixGrid(ordered, place).matrix(orientation.get(),
                 fields.value("orientation").get().position(), states, head.with(sums), reading);
     }
 
-    /** For each state its row in the table. */
-    private List<Integer> order(States states) {
-        List<String> inTable = names.stream().map(Node.Scalar::name).toList();
-        if (inTable.isEmpty()) {
-            return IntStream.range(0, states.size()).boxed().toList();
+    /** For each state its row in the table; faults and nothing when the table names other states. */
+    private Optional<List<Integer>> order(States states) {
+        if (names.isEmpty()) {
+            return Optional.of(IntStream.range(0, states.size()).boxed().toList());
         }
-        names.forEach(name -> states.find(name, reading));
-        return states.names().stream().map(name -> Math.max(0, inTable.indexOf(name))).toList();
+        States inTable = States.named(names, reading);
+        boolean allKnown = names.stream().map(name -> states.find(name, reading)).filter(Optional::isPresent).count()
+                == states.size();
+        return allKnown && inTable.size() == states.size()
+                ? Optional.of(states.names().stream().map(inTable::place).toList()) : Optional.empty();
     }
 
     private void checkOneSource() {
@@ -141,8 +148,14 @@ final class MatrixSection {
         try {
             return Optional.of(NamedTable.of(Source.read(folder.orElse(Path.of("")).resolve(file.get())), options));
         } catch (RefusedException refused) {
-            reading.faults().addAll(refused.faults());
+            refused.faults().forEach(fault -> reading.faults().addAll(List.of(located(fault, node, file.get()))));
             return Optional.empty();
         }
+    }
+
+    /** A fault of the file as a whole is shown where the model names the file. */
+    private static Fault located(Fault fault, Node named, String file) {
+        return fault.position().isWhole()
+                ? new Fault(named.position(), fault.code(), "'" + Words.shortened(file) + "': " + fault.message()) : fault;
     }
 }

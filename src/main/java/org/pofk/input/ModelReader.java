@@ -47,7 +47,7 @@ public final class ModelReader {
         ModelReader reader = new ModelReader(source, folder, new Reading(faults, overrides));
         Node root = YamlComposer.compose(source, faults);
         Optional<Model> model = reader.reading
-                .mapping(root, "a model", "pofk: 1 with states and transitions").flatMap(reader::model);
+                .mapping(root, "a model", "{pofk: 1, states: […], transitions: {…}}").flatMap(reader::model);
         faults.refuseIfAny();
         return sound(model.orElseThrow());
     }

@@ -61,18 +61,18 @@ record NamedTable(List<Node.Scalar> names, List<List<Node.Scalar>> cells) {
 
     private static void checkRectangle(List<List<Node.Scalar>> rows, Faults faults) {
         int width = rows.get(0).size();
+        if (width == 1 && rows.get(0).get(0).text().indexOf('\t') >= 0) {
+            faults.add(rows.get(0).get(0).position(), "tab",
+                    "this line has tabs between its cells; separate them by commas or semicolons");
+            return;
+        }
         for (List<Node.Scalar> row : rows) {
             if (row.size() != width) {
                 faults.add(row.get(0).position(), "ragged-table", "this line has "
                         + Words.count(row.size(), "cell", "cells") + ", but the first one has " + width
-                        + "; all lines must have as many" + hint(row));
+                        + "; all lines must have as many");
             }
         }
-    }
-
-    private static String hint(List<Node.Scalar> row) {
-        boolean tabs = row.size() == 1 && row.get(0).text().indexOf('\t') >= 0;
-        return tabs ? "; cells are separated by commas or semicolons, not tabs" : "";
     }
 
     /** Where the names stand, by the shape of the table and by what can't be a number. */

@@ -64,6 +64,12 @@ final class Numerals {
         return Optional.empty();
     }
 
+    /** The fault of what isn't a number at all. */
+    static void refuse(Node.Scalar scalar, Faults faults) {
+        String text = scalar.text().strip();
+        faults.add(scalar.position(), code(text), complaint(text));
+    }
+
     /** Half a unit of the last written decimal place; zero for fractions, which are not rounded. */
     static Rational lastPlace(String written) {
         Matcher decimal = DECIMAL.matcher(written.strip());

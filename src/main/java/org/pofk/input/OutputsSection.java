@@ -143,7 +143,7 @@ final class OutputsSection {
             List<String> known = new ArrayList<>(states.names());
             known.addAll(sets.keySet());
             reading.fault(entry.key().position(), "unknown-state", "there is no state or set '"
-                    + Words.shortened(name) + "'" + reading.didYouMean(known, name));
+                    + Words.shortened(name) + "'" + reading.known(known, name, "there"));
         }
         return LinearForm.ZERO;
     }

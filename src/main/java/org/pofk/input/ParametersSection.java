@@ -70,7 +70,7 @@ final class ParametersSection {
 
     private Declaration declaration(Node.Entry entry) {
         Optional<Node> override = Optional.ofNullable(reading.overrides().parameters().get(entry.name()))
-                .map(text -> new Node.Scalar(Position.ofWhole(Overrides.SET_OPTION), text, Node.Style.QUOTED));
+                .map(text -> new Node.Scalar(option(entry.name()), text, Node.Style.QUOTED));
         if (entry.value().asMapping().isEmpty()) {
             return new Declaration(entry.key(), scalar(override.or(() -> Optional.of(entry.value()))),
                     Optional.empty(), Optional.empty(), Optional.empty(), Optional.empty());
@@ -95,10 +95,14 @@ final class ParametersSection {
     private void refuseUnknownOverrides() {
         for (String name : reading.overrides().parameters().keySet()) {
             if (!declared.containsKey(Names.canonical(name))) {
-                reading.fault(Position.ofWhole(Overrides.SET_OPTION), "unknown-parameter", "there is no parameter '"
-                        + Words.shortened(name) + "'" + reading.didYouMean(declared.keySet(), name));
+                reading.fault(option(name), "unknown-parameter", "there is no parameter '"
+                        + Words.shortened(name) + "'" + reading.known(declared.keySet(), name, "the parameters"));
             }
         }
+    }
+
+    private static Position option(String name) {
+        return Position.ofWhole(Overrides.SET_OPTION + " " + name);
     }
 
     private Optional<Rational> value(String name) {
@@ -138,7 +142,7 @@ final class ParametersSection {
                 known.put(name, LinearForm.constant(value.orElse(Rational.ZERO)));
             } else if (!refused.contains(name)) {
                 reading.fault(symbol.position(), "unknown-parameter", "there is no parameter '"
-                        + Words.shortened(name) + "'" + reading.didYouMean(declared.keySet(), name));
+                        + Words.shortened(name) + "'" + reading.known(declared.keySet(), name, "the parameters"));
                 allKnown = false;
             }
         }
@@ -155,11 +159,13 @@ final class ParametersSection {
         if (from.isPresent() && to.isPresent() && from.get().compareTo(to.get()) > 0) {
             reading.fault(declaration.from().get().position(), "empty-range", "the range of '" + name + "' from "
                     + Numbers.shown(from.get()) + " to " + Numbers.shown(to.get()) + " is empty; turn it round");
-        } else if (from.filter(least -> value.compareTo(least) < 0).isPresent()
-                || to.filter(most -> value.compareTo(most) > 0).isPresent()) {
-            reading.fault(place, "out-of-range", "the parameter '" + name + "' is " + Numbers.shown(value)
-                    + ", outside its range" + from.map(least -> " from " + Numbers.shown(least)).orElse("")
-                    + to.map(most -> " to " + Numbers.shown(most)).orElse(""));
+        } else {
+            from.filter(least -> value.compareTo(least) < 0).ifPresent(least -> reading.fault(place, "out-of-range",
+                    "the parameter '" + name + "' is " + Numbers.shown(value) + ", below " + Numbers.shown(least)
+                            + ", where its range begins"));
+            to.filter(most -> value.compareTo(most) > 0).ifPresent(most -> reading.fault(place, "out-of-range",
+                    "the parameter '" + name + "' is " + Numbers.shown(value) + ", above " + Numbers.shown(most)
+                            + ", where its range ends"));
         }
         Optional<String> definition = declaration.value().map(Node.Scalar::text).map(String::strip)
                 .filter(Expressions::isExpression);

@@ -15,6 +15,7 @@ import org.pofk.text.Suggestion;
 final class Reading {
     private static final int MOST_SUGGESTIONS = 100;
     private static final int LONGEST_CHAIN = 200;
+    private static final int MOST_LISTED = 12;
 
     private final Faults faults;
     private final Overrides overrides;
@@ -49,6 +50,13 @@ final class Reading {
      */
     String didYouMean(Collection<String> candidates, String name) {
         return ++suggestions > MOST_SUGGESTIONS ? "" : Suggestion.didYouMean(candidates, name);
+    }
+
+    /** What was probably meant, or all that is known when that is little. */
+    String known(Collection<String> candidates, String name, String these) {
+        String meant = didYouMean(candidates, name);
+        return meant.isEmpty() && !candidates.isEmpty() && candidates.size() <= MOST_LISTED
+                ? "; " + these + " are " + Words.quotedList(List.copyOf(candidates)) : meant;
     }
 
     /**

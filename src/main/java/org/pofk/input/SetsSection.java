@@ -109,7 +109,7 @@ final class SetsSection {
             List<String> known = new ArrayList<>(states.names());
             known.addAll(written.keySet());
             reading.fault(scalar.position(), "unknown-state", "there is no state or set '" + Words.shortened(name)
-                    + "'" + reading.didYouMean(known, name));
+                    + "'" + reading.known(known, name, "there"));
             return new TreeSet<>();
         }
         return members(name);

@@ -2,20 +2,24 @@ package org.pofk.input;
 
 import java.util.ArrayList;
 import java.util.HashMap;
+import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
 import org.pofk.text.Position;
 
 /** The states of a model, in order, by name. */
 final class States {
     private final List<String> names;
     private final List<Node.Scalar> listed;
+    private final Set<String> refused;
     private final Map<String, Integer> places = new HashMap<>();
 
-    private States(List<String> names, List<Node.Scalar> listed) {
+    private States(List<String> names, List<Node.Scalar> listed, Set<String> refused) {
         this.names = List.copyOf(names);
-        this.listed = listed;
+        this.listed = List.copyOf(listed);
+        this.refused = Set.copyOf(refused);
         for (String name : names) {
             places.put(name, places.size());
         }
@@ -23,16 +27,16 @@ final class States {
 
     /** From the list of states of a file; faults for names that are empty, unprintable or given twice. */
     static States listed(List<Node.Scalar> written, Reading reading) {
-        return new States(names(written, reading), written);
+        States states = named(written, reading);
+        Set<String> unseen = new HashSet<>(states.names);
+        return new States(states.names, written.stream().filter(name -> unseen.remove(name.name())).toList(),
+                states.refused);
     }
 
     /** From the places where states are named otherwise: entries of transitions, the header of a table. */
     static States named(List<Node.Scalar> written, Reading reading) {
-        return new States(names(written, reading), List.of());
-    }
-
-    private static List<String> names(List<Node.Scalar> written, Reading reading) {
         List<String> names = new ArrayList<>();
+        Set<String> refused = new HashSet<>();
         Map<String, Position> seen = new HashMap<>();
         for (Node.Scalar scalar : written) {
             Position before = seen.putIfAbsent(scalar.name(), scalar.position());
@@ -42,15 +46,17 @@ final class States {
                         + " already");
             } else if (isName(scalar, "a state", reading)) {
                 names.add(scalar.name());
+            } else {
+                refused.add(scalar.name());
             }
         }
-        return names;
+        return new States(names, List.of(), refused);
     }
 
     /** States without names of their own: 1 … n. */
     static States numbered(int n) {
         return new States(java.util.stream.IntStream.rangeClosed(1, n).mapToObj(Integer::toString).toList(),
-                List.of());
+                List.of(), Set.of());
     }
 
     /** Whether the scalar can name something; a fault otherwise. */
@@ -89,10 +95,10 @@ final class States {
         return places.get(name);
     }
 
-    /** The place of the state a scalar names, or a fault with what was probably meant. */
+    /** The place of the state a scalar names, or a fault with what was probably meant unless it has one already. */
     Optional<Integer> find(Node.Scalar scalar, Reading reading) {
         Integer place = places.get(scalar.name());
-        if (place == null) {
+        if (place == null && !refused.contains(scalar.name())) {
             reading.fault(scalar.position(), "unknown-state", "there is no state '" + Words.shortened(scalar.name()) + "'"
                     + suggestion(scalar.name(), reading));
         }
@@ -101,7 +107,6 @@ final class States {
 
     /** What was probably meant, or all the names when they are few. */
     String suggestion(String name, Reading reading) {
-        String meant = reading.didYouMean(names, name);
-        return meant.isEmpty() && size() > 0 && size() <= 12 ? "; the states are " + Words.quotedList(names) : meant;
+        return reading.known(names, name, "the states");
     }
 }

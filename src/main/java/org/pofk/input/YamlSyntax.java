@@ -69,7 +69,7 @@ final class YamlSyntax {
             faults.add(at, "indentation", "this line doesn't fit the lines above; indent entries that belong together "
                     + "equally, and give each its ':' or '-'");
         } else if (context.contains("simple key") || problem.contains("':'")) {
-            faults.add(at, "missing-colon", "a ':' and a blank are missing after the key");
+            faults.add(began, "missing-colon", "a ':' and a blank are missing after the key");
         } else {
             faults.add(at, "not-yaml", "this isn't YAML (" + Words.shortened(problem) + ")");
         }
