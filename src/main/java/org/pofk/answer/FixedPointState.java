@@ -4,6 +4,7 @@ import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
+import org.pofk.chain.Chain;
 import org.pofk.chain.Output;
 import org.pofk.exact.Ball;
 import org.pofk.exact.Rational;
@@ -23,6 +24,21 @@ record FixedPointState(List<BigInteger> components) {
     /** The largest multiples that are not above the components of a probability vector. */
     static FixedPointState below(List<Rational> probabilities) {
         return new FixedPointState(probabilities.stream().map(FixedPointState::below).toList());
+    }
+
+    /** The states of a chain at the given steps, which ascend. */
+    static List<FixedPointState> at(Chain chain, List<Integer> steps) {
+        List<FixedPointColumn> columns = FixedPointColumn.below(chain.matrix());
+        FixedPointState state = below(chain.start());
+        List<FixedPointState> states = new ArrayList<>();
+        int k = 0;
+        for (int step : steps) {
+            for (; k < step; k++) {
+                state = combination(columns, state.components);
+            }
+            states.add(state);
+        }
+        return states;
     }
 
     static BigInteger below(Rational value) {

@@ -41,13 +41,23 @@ public final class HighPowers {
     }
 
     /**
+     * Powers of two over which no state changes by more than {@link #HABIT} from one to the next although the output
+     * is still farther than ten units of that size from its long run: within such a horizon it behaves as {@code value}.
+     *
+     * @param from first power of two, {@code to} the last
+     */
+    public record Plateau(long from, long to, Ball value) {
+    }
+
+    /**
      * High powers held against a long run.
      *
      * @param k           the highest power, and how many steps from there were looked at: one, or a whole cycle
      * @param within      no value seen there is farther than this from the long run; proved
      * @param habits      where each habit stops; a habit that never stops in what was computed isn't listed
+     * @param plateau     where it seems to have settled and hasn't
      */
-    public record Verdict(long k, int looked, Rational within, List<Stop> habits) {
+    public record Verdict(long k, int looked, Rational within, List<Stop> habits, Optional<Plateau> plateau) {
         public Verdict {
             habits = List.copyOf(habits);
         }
@@ -80,7 +90,24 @@ public final class HighPowers {
         List<Stop> habits = new ArrayList<>();
         stopStepByStep(output, values).ifPresent(habits::add);
         stopBySquaring(output, values).ifPresent(habits::add);
-        return Optional.of(new Verdict(highest, values.size(), within, habits));
+        return Optional.of(new Verdict(highest, values.size(), within, habits, plateau(output, values)));
+    }
+
+    /** The last of the first powers of two that agree, where the value they agree on is not the long run's. */
+    private Optional<Plateau> plateau(Output output, List<Rational> values) {
+        Optional<Stop> first = stopBySquaring(output, values)
+                .filter(stop -> stop.outcome == Outcome.MISLED_BY_SLOW_POLE);
+        return first.map(stop -> {
+            int place = Long.numberOfTrailingZeros(stop.k);
+            while (place + 1 < sequence.doubling().size() && hardlyChanges(sequence.doubling(), place + 1)) {
+                place++;
+            }
+            return new Plateau(stop.k / 2, 1L << place, stop.value);
+        });
+    }
+
+    private static boolean hardlyChanges(List<FixedPointState> states, int place) {
+        return states.get(place).distanceAtMost(states.get(place - 1)).compareTo(HABIT) <= 0;
     }
 
     private Optional<Stop> stopStepByStep(Output output, List<Rational> values) {
@@ -96,7 +123,7 @@ public final class HighPowers {
     /** The place of the first state that differs from the one before it by no more than the habit's tolerance. */
     private static Optional<Integer> firstStop(List<FixedPointState> states) {
         for (int place = 1; place < states.size(); place++) {
-            if (states.get(place).distanceAtMost(states.get(place - 1)).compareTo(HABIT) <= 0) {
+            if (hardlyChanges(states, place)) {
                 return Optional.of(place);
             }
         }

@@ -1,6 +1,7 @@
 package org.pofk.answer;
 
 import java.util.List;
+import java.util.Optional;
 import java.util.TreeSet;
 import org.pofk.chain.Structure;
 import org.pofk.exact.Cyclotomic;
@@ -27,7 +28,18 @@ final class LongRunByPoles {
     }
 
     static LongRun ofRecursion(Transform transform) {
-        throw new UnsupportedOperationException();
+        List<PlacedFactor> factors = transform.factors().factors().stream().map(PlacedFactor::of).toList();
+        if (factors.stream().anyMatch(PlacedFactor::grows)) {
+            return new LongRun.None(LongRun.Reason.GROWS, Optional.empty(), GrowthRate.of(factors).inWords());
+        }
+        List<Integer> orders = Cyclotomic.ordersDividing(transform.y().denominator());
+        int rootsOfUnity = orders.stream().mapToInt(Cyclotomic::totient).sum();
+        if (factors.stream().mapToInt(each -> each.counts().on()).sum() == rootsOfUnity) {
+            return periodic(transform, orders);
+        }
+        Rational average = orders.contains(1) ? UnitCirclePart.values(transform.y(), 1).get(0) : Rational.ZERO;
+        return new LongRun.None(LongRun.Reason.RECURS_WITHOUT_PERIOD, Optional.of(average),
+                "recurs without a period: poles on the unit circle that are no roots of unity");
     }
 
     private static LongRun periodic(Transform transform, List<Integer> orders) {

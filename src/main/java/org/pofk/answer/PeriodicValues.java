@@ -26,7 +26,7 @@ record PeriodicValues(List<List<Rational>> parts, Rational constant) {
         List<List<Rational>> least = parts.stream().map(PeriodicValues::leastPeriod).toList();
         long period = 1;
         for (List<Rational> part : least) {
-            period = lcm(period, part.size());
+            period = leastCommonMultiple(period, part.size());
             if (period > LISTED_UP_TO) {
                 return new LongRun.None(LongRun.Reason.CYCLE_TOO_LONG, Optional.of(average()),
                         "cycles with a period above " + LISTED_UP_TO + ", too long to list");
@@ -71,7 +71,7 @@ record PeriodicValues(List<List<Rational>> parts, Rational constant) {
         return true;
     }
 
-    private static long lcm(long a, long b) {
+    private static long leastCommonMultiple(long a, long b) {
         long first = a;
         long second = b;
         while (second != 0) {

@@ -1,0 +1,94 @@
+package org.pofk.answer;
+
+import java.util.List;
+import org.pofk.exact.Ball;
+import org.pofk.exact.Rational;
+import org.pofk.modes.ClosedForm;
+import org.pofk.modes.Mode;
+import org.pofk.modes.RealValue;
+
+/**
+ * The modes of a closed form added up at given steps, from the enclosures of their constants: bases, amplitudes,
+ * angles and phases as they are shown. Certified.
+ */
+final class ModeValues {
+    private static final int FIRST_BITS = 128;
+    private static final int MOST_BITS = 4096;
+    /** Enough to tell a wrong constant from a right one. */
+    private static final int WANTED_BITS = 64;
+
+    private final List<Mode> modes;
+
+    private ModeValues(List<Mode> modes) {
+        this.modes = modes;
+    }
+
+    static ModeValues of(ClosedForm closedForm) {
+        return new ModeValues(closedForm.modes());
+    }
+
+    /** No sum at k = 0, 1, … is farther than this from the value in that place. */
+    Rational farthestFrom(List<Rational> exact) {
+        int bits = FIRST_BITS;
+        while (true) {
+            Rational farthest = farthestFrom(exact, bits);
+            if (farthest.compareTo(Rational.TWO.pow(-WANTED_BITS)) <= 0 || bits >= MOST_BITS) {
+                return farthest;
+            }
+            bits *= 2;
+        }
+    }
+
+    private Rational farthestFrom(List<Rational> exact, int bits) {
+        List<Mode> enclosed = modes;
+        Rational farthest = Rational.ZERO;
+        for (int k = 0; k < exact.size(); k++) {
+            Ball sum = Ball.of(Rational.ZERO, bits);
+            for (Mode mode : enclosed) {
+                sum = sum.plus(mode.accept(new AtStep(k, bits)));
+            }
+            Rational value = exact.get(k);
+            farthest = Rational.max(farthest, Rational.max(sum.upper().minus(value), value.minus(sum.lower())));
+        }
+        return farthest;
+    }
+
+    /** A mode's value at k. */
+    private record AtStep(int k, int bits) implements Mode.Visitor<Ball> {
+
+        @Override
+        public Ball impulse(Mode.Impulse impulse) {
+            return k == impulse.at() ? ball(impulse.value()) : Ball.of(Rational.ZERO, bits);
+        }
+
+        @Override
+        public Ball geometric(Mode.Geometric geometric) {
+            return k < geometric.power()
+                    ? Ball.of(Rational.ZERO, bits)
+                    : ball(geometric.coefficient()).times(binomial(geometric.power()))
+                            .times(ball(geometric.base()).pow(k - geometric.power()));
+        }
+
+        @Override
+        public Ball oscillating(Mode.Oscillating oscillating) {
+            int steps = k - oscillating.power();
+            return steps < 0
+                    ? Ball.of(Rational.ZERO, bits)
+                    : ball(oscillating.amplitude()).times(binomial(oscillating.power()))
+                            .times(ball(oscillating.modulus()).pow(steps))
+                            .times(ball(oscillating.angle()).times(steps).plus(ball(oscillating.phase())).cos());
+        }
+
+        private Ball ball(RealValue value) {
+            return value.enclosure().enclose(bits).roundedTo(bits);
+        }
+
+        private Ball binomial(int power) {
+            Rational binomial = Rational.ONE;
+            for (int i = 0; i < power; i++) {
+                binomial = binomial.times(Rational.of(k - i, i + 1));
+            }
+            return Ball.of(binomial, bits);
+        }
+    }
+}

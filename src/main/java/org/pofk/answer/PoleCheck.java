@@ -1,0 +1,87 @@
+package org.pofk.answer;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import org.apache.commons.math3.complex.Complex;
+import org.apache.commons.math3.exception.MathRuntimeException;
+import org.apache.commons.math3.linear.Array2DRowRealMatrix;
+import org.apache.commons.math3.linear.EigenDecomposition;
+import org.apache.commons.math3.linear.RealMatrix;
+import org.pofk.chain.Chain;
+import org.pofk.chain.Output;
+import org.pofk.chain.SparseMatrix;
+import org.pofk.exact.ComplexBall;
+import org.pofk.exact.Root;
+import org.pofk.exact.Roots;
+import org.pofk.modes.ClosedForm;
+
+/**
+ * The certified poles of an output beside the eigenvalues of A that Commons Math finds in doubles. A comparison, no
+ * verdict: multiple eigenvalues come out of doubles only to a fraction of their digits.
+ *
+ * @param poles           how many different poles were compared
+ * @param largestDistance of a pole from the eigenvalue nearest to it; empty when there was no comparison
+ * @param reason          why there was none; empty otherwise
+ */
+public record PoleCheck(int poles, Optional<Double> largestDistance, Optional<String> reason) {
+    /** Larger matrices aren't taken apart in doubles. */
+    public static final int STATES_AT_MOST = 400;
+    private static final int BITS = 60;
+
+    public static PoleCheck of(Chain chain, ClosedForm closedForm) {
+        if (chain.size() > STATES_AT_MOST) {
+            return none("more than " + STATES_AT_MOST + " states");
+        }
+        try {
+            List<Complex> eigenvalues = eigenvalues(chain, closedForm.transform().output());
+            int poles = 0;
+            double largest = 0;
+            for (Roots roots : closedForm.roots()) {
+                for (Root root : roots.all()) {
+                    double distance = distance(root.enclose(BITS), eigenvalues);
+                    largest = Math.max(largest, distance);
+                    poles++;
+                }
+            }
+            return new PoleCheck(poles, Optional.of(largest), Optional.empty());
+        } catch (MathRuntimeException failure) {
+            return none("the eigenvalue iteration in doubles doesn't converge");
+        }
+    }
+
+    private static PoleCheck none(String reason) {
+        return new PoleCheck(0, Optional.empty(), Optional.of(reason));
+    }
+
+    /** Those of A, and the one of the constant that an output may add. */
+    private static List<Complex> eigenvalues(Chain chain, Output output) {
+        EigenDecomposition found = new EigenDecomposition(dense(chain.matrix()));
+        double[] real = found.getRealEigenvalues();
+        double[] imaginary = found.getImagEigenvalues();
+        List<Complex> eigenvalues = new ArrayList<>();
+        for (int i = 0; i < real.length; i++) {
+            eigenvalues.add(new Complex(real[i], imaginary[i]));
+        }
+        if (!output.constant().isZero()) {
+            eigenvalues.add(Complex.ONE);
+        }
+        return eigenvalues;
+    }
+
+    private static double distance(ComplexBall pole, List<Complex> eigenvalues) {
+        Complex middle = new Complex(pole.real().middle().approximate(), pole.imaginary().middle().approximate());
+        return eigenvalues.stream().mapToDouble(each -> each.subtract(middle).abs()).min()
+                .orElse(Double.POSITIVE_INFINITY);
+    }
+
+    private static RealMatrix dense(SparseMatrix matrix) {
+        double[][] entries = new double[matrix.size()][matrix.size()];
+        for (int j = 0; j < matrix.size(); j++) {
+            for (SparseMatrix.Entry entry : matrix.columns().get(j)) {
+                entries[entry.row()][j] = entry.value().approximate();
+            }
+        }
+        return new Array2DRowRealMatrix(entries, false);
+    }
+}
