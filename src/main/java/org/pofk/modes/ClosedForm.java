@@ -28,7 +28,8 @@ public record ClosedForm(Transform transform, Expansion<Rational> expansion, Lis
         List<Mode> modes = new ArrayList<>(impulses(expansion.impulses()));
         for (Expansion.Part<Rational> part : expansion.parts()) {
             int index = transform.factors().factors().indexOf(part.factor());
-            modes.addAll(FactorModes.of(index, part, roots.get(index)));
+            FactorPoles poles = new FactorPoles(index, part.factor(), roots.get(index));
+            modes.addAll(FactorModes.of(poles, part.coefficients()));
         }
         return new ClosedForm(transform, expansion, roots, modes);
     }
@@ -58,6 +59,11 @@ public record ClosedForm(Transform transform, Expansion<Rational> expansion, Lis
     /** The exact formula always: a factor without short forms is a {@link Formula.RootSum} over its roots. */
     public Formula formulaOverRoots() {
         return FormulaOverRoots.of(this);
+    }
+
+    /** The way here from the factored transform. */
+    public Derivation derivation() {
+        return Derivation.of(this);
     }
 
     /** The formula in decimals, with what it promises. */

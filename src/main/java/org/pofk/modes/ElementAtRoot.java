@@ -22,7 +22,8 @@ record ElementAtRoot(NumberField field, Polynomial<Rational> element, Root root,
         return new ElementAtRoot(field, element, root, PolynomialQuotient.of(element).at(root));
     }
 
-    private ElementAtRoot with(Polynomial<Rational> other) {
+    /** Another element at the same root. */
+    ElementAtRoot with(Polynomial<Rational> other) {
         return of(field, other, root);
     }
 

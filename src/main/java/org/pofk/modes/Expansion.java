@@ -52,7 +52,7 @@ public record Expansion<E>(Field<E> field, List<E> impulses, List<Part<E>> parts
     }
 
     public Expansion {
-        impulses = List.copyOf(impulses);
+        impulses = new Polynomial<>(field, impulses).coefficients();
         parts = List.copyOf(parts);
     }
 

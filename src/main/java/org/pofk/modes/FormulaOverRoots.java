@@ -8,7 +8,7 @@ import org.pofk.formula.Formula;
 
 /** The exact formula of every closed form: factors without short forms stand as sums over their roots. Exact. */
 final class FormulaOverRoots {
-    private static final Formula.Symbol LAMBDA = new Formula.Symbol("λ");
+    private static final Formula.Symbol LAMBDA = TablePair.LAMBDA;
 
     private FormulaOverRoots() {
     }
@@ -42,7 +42,8 @@ final class FormulaOverRoots {
         return new Formula.RootSum(LAMBDA, polynomial(part.factor().polynomial()), Terms.sum(body));
     }
 
-    private static Formula written(Expansion.Coefficient<Rational> coefficient) {
+    /** R(λ). */
+    static Formula written(Expansion.Coefficient<Rational> coefficient) {
         Formula numerator = polynomial(coefficient.numerator());
         return coefficient.isReduced()
                 ? numerator

@@ -1,7 +1,10 @@
 package org.pofk.modes;
 
 import java.util.ArrayList;
+import java.util.Collections;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 import org.pofk.exact.Factorization;
 import org.pofk.exact.Field;
 import org.pofk.exact.Polynomial;
@@ -17,15 +20,14 @@ import org.pofk.transform.TransferFunction;
  */
 public final class PartialFractions<E> {
     private final Field<E> field;
-    private final Polynomial<E> numerator;
     private final Polynomial<E> denominator;
+    private final Factorization<E> factors;
+    private final Map<Polynomial<E>, Polynomial<Polynomial<E>>> inverses = new HashMap<>();
 
-    /** N/D = Y(z)/z in lowest terms: the z of the transform stays outside. */
-    private PartialFractions(TransferFunction<E> y) {
-        field = y.denominator().field();
-        boolean startsAtZero = field.isZero(y.numerator().coefficient(0));
-        numerator = startsAtZero ? y.numerator().shiftedDown(1) : y.numerator();
-        denominator = startsAtZero ? y.denominator() : y.denominator().shiftedUp(1);
+    private PartialFractions(Polynomial<E> denominator, Factorization<E> factors) {
+        this.field = denominator.field();
+        this.denominator = denominator;
+        this.factors = factors;
     }
 
     /**
@@ -39,17 +41,30 @@ public final class PartialFractions<E> {
         if (y.numerator().isZero()) {
             return new Expansion<>(y.denominator().field(), List.of(), List.of());
         }
-        return new PartialFractions<>(y).expand(factors);
+        boolean startsAtZero = y.numerator().field().isZero(y.numerator().coefficient(0));
+        Polynomial<E> numerator = startsAtZero ? y.numerator().shiftedDown(1) : y.numerator();
+        Polynomial<E> denominator = startsAtZero ? y.denominator() : y.denominator().shiftedUp(1);
+        return new PartialFractions<>(denominator, factors).expand(numerator);
     }
 
-    private Expansion<E> expand(Factorization<E> factors) {
+    /**
+     * The expansions of z · N/D for many N over one D, not necessarily in lowest terms: each has a part for every
+     * factor of D but z, with coefficients that may be zero. Each N has a degree below that of D.
+     */
+    public static <E> List<Expansion<E>> ofEach(List<Polynomial<E>> numerators, Polynomial<E> denominator,
+            Factorization<E> factors) {
+        PartialFractions<E> fractions = new PartialFractions<>(denominator, factors);
+        return numerators.stream().map(fractions::expand).toList();
+    }
+
+    private Expansion<E> expand(Polynomial<E> numerator) {
         List<Expansion.Part<E>> parts = new ArrayList<>();
         for (Factorization.Factor<E> factor : factors.factors()) {
             if (!isZ(factor.polynomial())) {
-                parts.add(new Expansion.Part<>(factor, coefficients(factor)));
+                parts.add(new Expansion.Part<>(factor, coefficients(numerator, factor)));
             }
         }
-        return new Expansion<>(field, impulses(), parts);
+        return new Expansion<>(field, impulses(numerator), parts);
     }
 
     /** True for the factor z, whose terms are impulses. */
@@ -58,41 +73,47 @@ public final class PartialFractions<E> {
     }
 
     /** The terms c/z^(i+1) of N/D, c the impulse at k = i: the power series at zero of N/(D/z^m), read backwards. */
-    private List<E> impulses() {
+    private List<E> impulses(Polynomial<E> numerator) {
         int order = denominator.lowestPower();
-        Polynomial<E> rest = denominator.shiftedDown(order);
-        List<E> series = Series.quotient(field, numerator, rest, order);
-        List<E> impulses = new ArrayList<>(series);
-        java.util.Collections.reverse(impulses);
+        List<E> impulses = new ArrayList<>(
+                Series.quotient(field, numerator, denominator.shiftedDown(order), order));
+        Collections.reverse(impulses);
         return impulses;
     }
 
-    private List<Expansion.Coefficient<E>> coefficients(Factorization.Factor<E> factor) {
+    private List<Expansion.Coefficient<E>> coefficients(Polynomial<E> numerator, Factorization.Factor<E> factor) {
         boolean simple = factor.multiplicity() == 1;
         return simple && factor.polynomial().degree() > Expansion.REDUCED_UP_TO
                 ? List.of(new Expansion.Coefficient<>(numerator, denominator.derivative()))
-                : taylor(factor);
+                : taylor(numerator, factor);
     }
 
     /** R_p is the Taylor coefficient of order e−1−p: 1/(z − λ)^(p+1) goes with binomial(k, p) λ^(k−p). */
-    private List<Expansion.Coefficient<E>> taylor(Factorization.Factor<E> factor) {
-        Polynomial<E> q = factor.polynomial();
+    private List<Expansion.Coefficient<E>> taylor(Polynomial<E> numerator, Factorization.Factor<E> factor) {
         int e = factor.multiplicity();
-        Polynomial<E> power = q.pow(e);
-        Polynomial<E> cofactor = denominator.dividedExactlyBy(power);
-        ResidueField<E> residues = new ResidueField<>(q);
-        Polynomial<Polynomial<E>> beside = atRoot(residues, cofactor.remainder(power), 0, e);
-        Polynomial<Polynomial<E>> overRoot = atRoot(residues, q, 1, e);
+        Polynomial<Polynomial<E>> inverse =
+                inverses.computeIfAbsent(factor.polynomial(), q -> inverseBeside(factor));
+        Polynomial<Polynomial<E>> series = atRoot(new ResidueField<>(factor.polynomial()),
+                numerator.remainder(factor.polynomial().pow(e)), 0, e).times(inverse);
+        List<Expansion.Coefficient<E>> coefficients = new ArrayList<>();
+        for (int p = 0; p < e; p++) {
+            coefficients.add(new Expansion.Coefficient<>(series.coefficient(e - 1 - p), Polynomial.one(field)));
+        }
+        return coefficients;
+    }
+
+    /** The first e Taylor coefficients at λ of (z − λ)^e/D, D = q^e · cofactor and q = (z − λ) · overRoot. */
+    private Polynomial<Polynomial<E>> inverseBeside(Factorization.Factor<E> factor) {
+        int e = factor.multiplicity();
+        Polynomial<E> power = factor.polynomial().pow(e);
+        ResidueField<E> residues = new ResidueField<>(factor.polynomial());
+        Polynomial<Polynomial<E>> beside =
+                atRoot(residues, denominator.dividedExactlyBy(power).remainder(power), 0, e);
+        Polynomial<Polynomial<E>> overRoot = atRoot(residues, factor.polynomial(), 1, e);
         for (int i = 0; i < e; i++) {
             beside = Series.truncated(beside.times(overRoot), e);
         }
-        List<Polynomial<E>> series =
-                Series.quotient(residues, atRoot(residues, numerator.remainder(power), 0, e), beside, e);
-        List<Expansion.Coefficient<E>> coefficients = new ArrayList<>();
-        for (int p = 0; p < e; p++) {
-            coefficients.add(new Expansion.Coefficient<>(series.get(e - 1 - p), Polynomial.one(field)));
-        }
-        return coefficients;
+        return new Polynomial<>(residues, Series.quotient(residues, Polynomial.one(residues), beside, e));
     }
 
     /** The Taylor coefficients of orders {@code from} … from+length−1 of f at λ, as a polynomial in t = z − λ. */

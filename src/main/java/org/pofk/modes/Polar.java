@@ -30,6 +30,15 @@ record Polar(Optional<Radical> modulus, Optional<Angle> angle) {
                 : byRealPower(number);
     }
 
+    /** Only the test that is cheap at any degree: λ^m real, where q(z) = g(z^m). */
+    static Polar ofStepPower(ElementAtRoot root) {
+        return PiGuess.of(root.enclosed(), root.field().step())
+                .filter(guess -> root.field().step() % guess.order() == 0
+                        && root.field().hasRealStepPower(root.root()))
+                .map(guess -> new Polar(Optional.empty(), Optional.of(new Angle.PiMultiple(guess.fraction()))))
+                .orElse(NOTHING);
+    }
+
     private static Polar withConjugate(ElementAtRoot number, Rational squaredModulus) {
         NumberField field = number.field();
         Polynomial<Rational> h = number.element();
@@ -74,9 +83,7 @@ record Polar(Optional<Radical> modulus, Optional<Angle> angle) {
             Surd positive = surd.get().signum() < 0 ? surd.get().times(Rational.of(-1)) : surd.get();
             return new Polar(Optional.of(Radical.root(positive, order)), angle);
         }
-        boolean isPowerOfRoot = number.element().equals(field.root()) && field.step() % order == 0;
-        return isPowerOfRoot && field.hasRealStepPower(number.root())
-                        || field.degree() <= NumberField.SEARCHED_UP_TO && power.isReal()
+        return field.degree() <= NumberField.SEARCHED_UP_TO && power.isReal()
                 ? new Polar(Optional.empty(), angle)
                 : NOTHING;
     }

@@ -4,7 +4,6 @@ import java.math.BigInteger;
 import java.util.Optional;
 import org.pofk.exact.Ball;
 import org.pofk.exact.Decimal;
-import org.pofk.exact.Decimals;
 import org.pofk.exact.Rational;
 import org.pofk.formula.Formula;
 
@@ -22,8 +21,7 @@ record PrintedNumber(Formula formula, Rational error) {
         if (rational.isPresent() && rational.get().isInteger() && decimalLength(rational.get()) <= digits) {
             return exactly(value);
         }
-        Decimal decimal = rational.map(r -> Decimals.of(r, digits))
-                .orElseGet(() -> Decimals.of(value.enclosure(), digits));
+        Decimal decimal = value.decimal(digits);
         Rational error = rational.map(r -> r.minus(decimal.value()).abs())
                 .orElseGet(() -> distance(value, decimal.value(), digits));
         return new PrintedNumber(written(decimal.text()), error);

@@ -39,12 +39,17 @@ final class PrintedPole {
 
     /** A positive number below 1 − |λ|; empty where |λ| isn't proved below one. */
     private static Optional<Rational> gapToCircle(RealValue base) {
-        boolean known = base.rational().filter(value -> value.abs().compareTo(Rational.ONE) >= 0).isPresent();
-        for (int bits = SIZE_BITS; bits <= MOST_BITS && !known; bits *= 2) {
+        if (base.rational().isPresent()) {
+            return base.rational().map(value -> Rational.ONE.minus(value.abs())).filter(gap -> gap.signum() > 0);
+        }
+        for (int bits = SIZE_BITS; bits <= MOST_BITS; bits *= 2) {
             Ball size = base.enclosure().enclose(bits).abs();
             Rational gap = Rational.ONE.minus(size.upper());
-            if (gap.signum() > 0 && gap.compareTo(size.upper().minus(size.lower())) > 0) {
+            if (gap.compareTo(size.upper().minus(size.lower())) > 0) {
                 return Optional.of(gap);
+            }
+            if (size.lower().compareTo(Rational.ONE) >= 0) {
+                return Optional.empty();
             }
         }
         return Optional.empty();

@@ -83,6 +83,13 @@ public final class Terms {
                 : new Formula.Negation(formula);
     }
 
+    /** −formula, in a sum with every sign turned. */
+    static Formula opposite(Formula formula) {
+        return formula instanceof Formula.Sum sum
+                ? new Formula.Sum(sum.terms().stream().map(Terms::negated).toList())
+                : negated(formula);
+    }
+
     public static Formula squareRoot(Formula radicand) {
         return call(Formula.Function.SQRT, radicand);
     }
