@@ -23,13 +23,19 @@ public record Document(List<Block> blocks) {
 
         R labelled(Labelled labelled);
 
+        R items(Items items);
+
         R display(Display display);
 
         R table(Table table);
     }
 
     /** A heading, level 1 the highest. */
-    public record Heading(int level, String text) implements Block {
+    public record Heading(int level, Prose text) implements Block {
+        public Heading(int level, String text) {
+            this(level, Prose.of(text));
+        }
+
         @Override
         public <R> R accept(Visitor<R> visitor) {
             return visitor.heading(this);
@@ -37,34 +43,90 @@ public record Document(List<Block> blocks) {
     }
 
     /** Running text; broken into lines by the writer. */
-    public record Paragraph(String text) implements Block {
+    public record Paragraph(Prose text) implements Block {
+        public Paragraph(String text) {
+            this(Prose.of(text));
+        }
+
         @Override
         public <R> R accept(Visitor<R> visitor) {
             return visitor.paragraph(this);
         }
     }
 
-    /** A short label and what belongs to it: {@code long run   20/2447}. */
-    public record Labelled(String label, String text) implements Block {
+    /** A short label and what belongs to it: {@code long run   20/2447}. Neighbours are aligned with each other. */
+    public record Labelled(Prose label, Prose text) implements Block {
+        public Labelled(String label, String text) {
+            this(Prose.of(label), Prose.of(text));
+        }
+
+        public Labelled(String label, Prose text) {
+            this(Prose.of(label), text);
+        }
+
         @Override
         public <R> R accept(Visitor<R> visitor) {
             return visitor.labelled(this);
         }
     }
 
-    /** left = formula, set apart; broken at top-level signs where it is too long for a line. */
-    public record Display(String label, Formula left, Formula right) implements Block {
+    /** An unnumbered list. */
+    public record Items(List<Prose> items) implements Block {
+        public Items {
+            items = List.copyOf(items);
+        }
+
+        @Override
+        public <R> R accept(Visitor<R> visitor) {
+            return visitor.items(this);
+        }
+    }
+
+    /** How the two sides of a display compare. */
+    public enum Relation {
+        /** Exactly. */
+        EQUAL,
+        /** Up to an error that is stated. */
+        ROUNDED
+    }
+
+    /**
+     * left = right, set apart; broken at top-level signs where it is too long for a line.
+     *
+     * @param condition what it holds for, {@code k ≥ 2}; may be empty
+     */
+    public record Display(Prose left, Relation relation, Formula right, Prose condition) implements Block {
+        public Display(Prose left, Relation relation, Formula right) {
+            this(left, relation, right, Prose.EMPTY);
+        }
+
         @Override
         public <R> R accept(Visitor<R> visitor) {
             return visitor.display(this);
         }
     }
 
-    /** A table; every row has as many cells as the header. Numbers are aligned by the writer. */
-    public record Table(String caption, List<String> header, List<List<String>> rows) implements Block {
+    /**
+     * A table; every row has as many cells as the header. Numbers are aligned by the writer, and a table that is too
+     * wide is folded so that every part begins with the first column again.
+     *
+     * @param caption may be empty
+     */
+    public record Table(Prose caption, List<Prose> header, List<List<Prose>> rows) implements Block {
         public Table {
             header = List.copyOf(header);
             rows = rows.stream().map(List::copyOf).toList();
+            for (List<Prose> row : rows) {
+                if (row.size() != header.size()) {
+                    throw new IllegalArgumentException(row.size() + " cells under " + header.size() + " headings");
+                }
+            }
+        }
+
+        /** A table of words and numbers alone. */
+        public static Table ofText(String caption, List<String> header, List<List<String>> rows) {
+            return new Table(Prose.of(caption), header.stream().map(Prose::of).toList(),
+                    rows.stream().map(row -> row.stream().map(Prose::of).toList()).toList());
         }
 
         @Override
