@@ -1,5 +1,6 @@
 package org.pofk.exact;
 
+import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
@@ -38,6 +39,33 @@ final class ModularPolynomial {
             }
         }
         return false;
+    }
+
+    /** The same for rational polynomials, the common denominators left alone: for long numbers the cheap first try. */
+    static boolean provesCoprime(Polynomial<Rational> a, Polynomial<Rational> b) {
+        for (int prime : LARGE_PRIMES) {
+            BigInteger modulus = BigInteger.valueOf(prime);
+            if (isDefined(a, modulus) && isDefined(b, modulus)) {
+                ModularPolynomial first = image(a, prime);
+                ModularPolynomial second = image(b, prime);
+                return (first.degree() == a.degree() || second.degree() == b.degree())
+                        && first.greatestCommonDivisor(second).degree() == 0;
+            }
+        }
+        return false;
+    }
+
+    private static boolean isDefined(Polynomial<Rational> polynomial, BigInteger modulus) {
+        return polynomial.coefficients().stream()
+                .allMatch(coefficient -> coefficient.denominator().mod(modulus).signum() != 0);
+    }
+
+    private static ModularPolynomial image(Polynomial<Rational> polynomial, int prime) {
+        BigInteger modulus = BigInteger.valueOf(prime);
+        return new ModularPolynomial(prime, polynomial.coefficients().stream().mapToLong(coefficient ->
+                coefficient.numerator().mod(modulus).longValueExact()
+                        * power(coefficient.denominator().mod(modulus).longValueExact(), prime - 2L, prime)
+                        % prime).toArray());
     }
 
     int degree() {

@@ -67,6 +67,9 @@ public enum RationalField implements Field<Rational> {
 
     @Override
     public Polynomial<Rational> greatestCommonDivisor(Polynomial<Rational> a, Polynomial<Rational> b) {
+        if (ModularPolynomial.provesCoprime(a, b)) {
+            return Polynomial.one(this);
+        }
         return PrimitiveForm.monic(PrimitiveForm.partOf(a).greatestCommonDivisor(PrimitiveForm.partOf(b)));
     }
 }

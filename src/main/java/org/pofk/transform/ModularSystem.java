@@ -14,34 +14,20 @@ final class ModularSystem {
     private static final int MARGIN = 8;
 
     private final PrimeField field;
-    private final int[] rowStart;
-    private final int[] column;
-    private final int[] entry;
+    private final CompressedRows rows;
+    private final int[] entries;
+    private final boolean isShort;
     private final int[] start;
     private final List<int[]> readings;
-    private final boolean isShort;
 
-    /** A by rows, in compressed form; nothing is copied. */
-    ModularSystem(PrimeField field, int[] rowStart, int[] column, int[] entry, int[] start, List<int[]> readings) {
+    /** Nothing is copied: the arrays are this system's from here on. */
+    ModularSystem(PrimeField field, CompressedRows rows, int[] entries, int[] start, List<int[]> readings) {
         this.field = field;
-        this.rowStart = rowStart;
-        this.column = column;
-        this.entry = entry;
+        this.rows = rows;
+        this.entries = entries;
         this.start = start;
         this.readings = readings;
-        isShort = largestRowSum() < 1L << 32;
-    }
-
-    private long largestRowSum() {
-        long largest = 0;
-        for (int i = 0; i < size(); i++) {
-            long sum = 0;
-            for (int at = rowStart[i]; at < rowStart[i + 1]; at++) {
-                sum += entry[at];
-            }
-            largest = Math.max(largest, sum);
-        }
-        return largest;
+        isShort = rows.isShort(entries);
     }
 
     private int size() {
@@ -69,10 +55,10 @@ final class ModularSystem {
             }
             if (!probed) {
                 probe.accept(product(probing, state));
-                if (probe.count() >= 2 * probe.order() + MARGIN) {
+                probed = 3 * probe.order() >= size();
+                if (!probed && probe.count() >= 2 * probe.order() + MARGIN) {
                     probed = true;
-                    windows = 3 * probe.order() < size() && annihilatesStart(probe.recurrence())
-                            ? probe.order() : windows;
+                    windows = annihilatesStart(probe.recurrence()) ? probe.order() : windows;
                 }
             }
             state = next(state);
@@ -188,37 +174,15 @@ final class ModularSystem {
         long square = field.prime() * field.prime();
         long sum = 0;
         for (int i = 0; i < reading.length; i++) {
-            sum += (long) reading[i] * state[i] - square;
-            sum += (sum >> 63) & square;
+            if (reading[i] != 0) {
+                sum += (long) reading[i] * state[i] - square;
+                sum += (sum >> 63) & square;
+            }
         }
         return field.reduce(sum);
     }
 
     private int[] next(int[] state) {
-        int[] product = new int[state.length];
-        for (int i = 0; i < state.length; i++) {
-            long sum = isShort ? sum(i, state) : reducedSum(i, state);
-            product[i] = (int) field.reduce(sum);
-        }
-        return product;
-    }
-
-    /** Row i times the state where no row can exceed 2^63: small whole numbers times residues. */
-    private long sum(int i, int[] state) {
-        long sum = 0;
-        for (int at = rowStart[i]; at < rowStart[i + 1]; at++) {
-            sum += (long) entry[at] * state[column[at]];
-        }
-        return sum;
-    }
-
-    private long reducedSum(int i, int[] state) {
-        long square = field.prime() * field.prime();
-        long sum = 0;
-        for (int at = rowStart[i]; at < rowStart[i + 1]; at++) {
-            sum += (long) entry[at] * state[column[at]] - square;
-            sum += (sum >> 63) & square;
-        }
-        return sum;
+        return isShort ? rows.timesShort(field, entries, state) : rows.times(field, entries, state);
     }
 }

@@ -1,0 +1,79 @@
+package org.pofk.transform;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.function.ToIntFunction;
+import org.pofk.chain.SparseMatrix;
+import org.pofk.chain.SparseMatrix.Entry;
+import org.pofk.exact.Rational;
+
+/**
+ * Where the entries of a sparse matrix stand, row after row in plain arrays. The values are kept apart, one array of
+ * residues a prime. Exact; a product costs one multiplication for each entry.
+ */
+final class CompressedRows {
+    /** Where each row begins in {@link #column}; one more for the end. */
+    private final int[] begin;
+    private final int[] column;
+    private final int[] value;
+
+    /** {@code places} gives the place of an entry's value. */
+    CompressedRows(SparseMatrix matrix, ToIntFunction<Rational> places) {
+        List<Entry> inOrder = new ArrayList<>();
+        begin = new int[matrix.size() + 1];
+        List<List<Entry>> rows = Transposition.rows(matrix);
+        for (int row = 0; row < rows.size(); row++) {
+            inOrder.addAll(rows.get(row));
+            begin[row + 1] = inOrder.size();
+        }
+        column = inOrder.stream().mapToInt(Entry::row).toArray();
+        value = inOrder.stream().map(Entry::value).mapToInt(places).toArray();
+    }
+
+    /** The place of each entry's value, in the order {@link #times} wants its entries. */
+    int[] valuePlaces() {
+        return value.clone();
+    }
+
+    /** True when sums of products of the entries of a row with residues stay below 2^63. */
+    boolean isShort(int[] entries) {
+        for (int row = 0; row + 1 < begin.length; row++) {
+            long sum = 0;
+            for (int at = begin[row]; at < begin[row + 1]; at++) {
+                sum += entries[at];
+            }
+            if (sum >= 1L << 32) {
+                return false;
+            }
+        }
+        return true;
+    }
+
+    /** The matrix with these entries times a vector of residues, for entries that are short. */
+    int[] timesShort(PrimeField field, int[] entries, int[] vector) {
+        int[] product = new int[vector.length];
+        for (int row = 0; row < product.length; row++) {
+            long sum = 0;
+            for (int at = begin[row]; at < begin[row + 1]; at++) {
+                sum += (long) entries[at] * vector[column[at]];
+            }
+            product[row] = (int) field.reduce(sum);
+        }
+        return product;
+    }
+
+    /** The matrix with these entries times a vector of residues. */
+    int[] times(PrimeField field, int[] entries, int[] vector) {
+        long square = field.prime() * field.prime();
+        int[] product = new int[vector.length];
+        for (int row = 0; row < product.length; row++) {
+            long sum = 0;
+            for (int at = begin[row]; at < begin[row + 1]; at++) {
+                sum += (long) entries[at] * vector[column[at]] - square;
+                sum += (sum >> 63) & square;
+            }
+            product[row] = (int) field.reduce(sum);
+        }
+        return product;
+    }
+}
