@@ -29,7 +29,12 @@ public interface Enclosed {
      * has to be excluded by the caller; it ends in an {@link AssertionError}. Keeps the finest ball found.
      */
     static Enclosed raising(IntFunction<Ball> atPrecision) {
-        return new Raising<>(atPrecision, Ball::isWithin)::enclose;
+        Raising<Ball> raising = new Raising<>(atPrecision, Ball::isWithin);
+        return bits -> {
+            Ball ball = raising.enclose(bits);
+            // an exact ball may come at a coarse scale, on which what is computed from it would stay as coarse
+            return ball.roundedTo(Math.max(bits, ball.scale()));
+        };
     }
 
     /** f of this number. */

@@ -20,7 +20,11 @@ public interface EnclosedComplex {
 
     /** As {@link Enclosed#raising}. */
     static EnclosedComplex raising(IntFunction<ComplexBall> atPrecision) {
-        return new Raising<>(atPrecision, ComplexBall::isWithin)::enclose;
+        Raising<ComplexBall> raising = new Raising<>(atPrecision, ComplexBall::isWithin);
+        return bits -> {
+            ComplexBall ball = raising.enclose(bits);
+            return ball.roundedTo(Math.max(bits, ball.scale()));
+        };
     }
 
     /** f of this number. */

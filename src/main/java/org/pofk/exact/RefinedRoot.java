@@ -19,7 +19,8 @@ final class RefinedRoot implements EnclosedComplex {
         }
         ComplexBall rectangle = known.disc().rectangle();
         int enough = 8 - goal;
-        return rectangle.scale() > enough ? rectangle.roundedTo(enough) : rectangle;
+        // an exact center may come at a coarse scale, on which what is computed from it would stay as coarse
+        return rectangle.roundedTo(Math.max(bits, Math.min(rectangle.scale(), enough)));
     }
 
     private synchronized Isolated refined(int goal) {
