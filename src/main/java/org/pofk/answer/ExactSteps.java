@@ -22,8 +22,7 @@ record ExactSteps(List<List<Rational>> values) {
     }
 
     static ExactSteps of(Chain chain, List<Output> outputs, int last) {
-        BigInteger scale = chain.matrix().columns().stream().flatMap(List::stream)
-                .map(entry -> entry.value().denominator()).reduce(BigInteger.ONE, ExactSteps::leastCommonMultiple);
+        BigInteger scale = commonDenominator(chain.matrix());
         BigInteger divisor = chain.start().stream().map(Rational::denominator)
                 .reduce(BigInteger.ONE, ExactSteps::leastCommonMultiple);
         BigInteger[] state = new BigInteger[chain.size()];
@@ -40,6 +39,12 @@ record ExactSteps(List<List<Rational>> values) {
             divisor = divisor.multiply(scale);
         }
         return new ExactSteps(values);
+    }
+
+    /** L, of all entries of a matrix. */
+    static BigInteger commonDenominator(SparseMatrix matrix) {
+        return matrix.columns().stream().flatMap(List::stream)
+                .map(entry -> entry.value().denominator()).reduce(BigInteger.ONE, ExactSteps::leastCommonMultiple);
     }
 
     private static BigInteger[] step(SparseMatrix matrix, BigInteger scale, BigInteger[] state) {

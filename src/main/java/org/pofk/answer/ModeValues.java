@@ -2,6 +2,7 @@ package org.pofk.answer;
 
 import java.util.List;
 import org.pofk.exact.Ball;
+import org.pofk.exact.Enclosed;
 import org.pofk.exact.Rational;
 import org.pofk.modes.ClosedForm;
 import org.pofk.modes.Mode;
@@ -40,17 +41,26 @@ final class ModeValues {
     }
 
     private Rational farthestFrom(List<Rational> exact, int bits) {
-        List<Mode> enclosed = modes;
         Rational farthest = Rational.ZERO;
         for (int k = 0; k < exact.size(); k++) {
-            Ball sum = Ball.of(Rational.ZERO, bits);
-            for (Mode mode : enclosed) {
-                sum = sum.plus(mode.accept(new AtStep(k, bits)));
-            }
+            Ball sum = sum(k, bits);
             Rational value = exact.get(k);
             farthest = Rational.max(farthest, Rational.max(sum.upper().minus(value), value.minus(sum.lower())));
         }
         return farthest;
+    }
+
+    /** The sum at one step. */
+    Enclosed at(int k) {
+        return Enclosed.raising(bits -> sum(k, Math.max(bits, 0)));
+    }
+
+    private Ball sum(int k, int bits) {
+        Ball sum = Ball.of(Rational.ZERO, bits);
+        for (Mode mode : modes) {
+            sum = sum.plus(mode.accept(new AtStep(k, bits)));
+        }
+        return sum;
     }
 
     /** A mode's value at k. */

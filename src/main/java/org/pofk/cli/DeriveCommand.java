@@ -1,7 +1,17 @@
 package org.pofk.cli;
 
+import java.util.EnumSet;
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
+import org.pofk.answer.DerivedModel;
+import org.pofk.answer.Deriving;
+import org.pofk.chain.Model;
+import org.pofk.chain.Output;
+import org.pofk.report.DerivationDocument;
+import org.pofk.report.DerivationJson;
+import org.pofk.report.Style;
+import org.pofk.text.RefusedException;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
@@ -50,7 +60,27 @@ final class DeriveCommand implements Work {
     }
 
     @Override
-    public ExitCode run(Streams streams) {
-        return ExitCode.ANSWERED;
+    public ExitCode run(Streams streams) throws RefusedException, UsageException, WritingException {
+        int digits = showing.digits();
+        Format format = writing.format();
+        writing.save().check();
+        Model read = model.read();
+        List<Output> outputs = AskedOutputs.of(read.chain(), of);
+        Worker.Outcome<DerivedModel> outcome = Worker.within(budget.limit(), streams.notes(), published ->
+                Deriving.of(read, outputs, at.map(StepList::steps).orElse(List.of()), extras(), published));
+        DerivedModel derived = outcome.published().orElseThrow();
+        Style style = new Style(digits, showing.angles(), showing.convention(read));
+        writing.save().write(format == Format.JSON
+                ? DerivationJson.write(derived, digits)
+                : writing.text(DerivationDocument.result(derived, style)), streams);
+        return derived.isDecided() && outcome.finished() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
+    }
+
+    private Set<Deriving.Extra> extras() {
+        Set<Deriving.Extra> extras = EnumSet.of(Deriving.Extra.COMPARISON);
+        if (secondOpinion) {
+            extras.add(Deriving.Extra.SECOND_OPINION);
+        }
+        return extras;
     }
 }

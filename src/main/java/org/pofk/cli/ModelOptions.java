@@ -4,6 +4,14 @@ import java.nio.file.Path;
 import java.util.LinkedHashMap;
 import java.util.Map;
 import java.util.Optional;
+import org.pofk.chain.Model;
+import org.pofk.input.FileKind;
+import org.pofk.input.MatrixFileReader;
+import org.pofk.input.ModelReader;
+import org.pofk.input.Overrides;
+import org.pofk.input.Source;
+import org.pofk.input.TableOptions;
+import org.pofk.text.RefusedException;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
 
@@ -23,13 +31,33 @@ final class ModelOptions {
             description = "for a CSV file: rows or columns, which of the two sums to one")
     private Optional<Orientation> orientation = Optional.empty();
 
-    /** Which of the two sums to one. */
-    enum Orientation {
-        ROWS, COLUMNS;
+    @Option(names = "--separator", paramLabel = "SIGN",
+            description = "for a CSV file that can be read two ways: comma or semicolon")
+    private Optional<TableOptions.Separator> separator = Optional.empty();
 
-        @Override
-        public String toString() {
-            return Words.lowerCase(this);
+    @Option(names = "--names", paramLabel = "WHERE",
+            description = "for a CSV file that can be read two ways: where names stand, nowhere, row, column or both")
+    private Optional<TableOptions.NamesIn> names = Optional.empty();
+
+    /** The model as the file and the command line say it. */
+    Model read() throws RefusedException, UsageException {
+        Source source = Source.read(file);
+        if (FileKind.of(source) != FileKind.MATRIX) {
+            refuseTableOptions();
+            return ModelReader.read(source, Optional.ofNullable(file.toAbsolutePath().getParent()),
+                    new Overrides(values, start));
+        }
+        if (!values.isEmpty()) {
+            throw new UsageException("'" + file + "' is a table of numbers: it has no parameters for --set");
+        }
+        return MatrixFileReader.read(source, new MatrixFileReader.Options(
+                orientation.map(Orientation::convention), start, new TableOptions(separator, names)));
+    }
+
+    private void refuseTableOptions() throws UsageException {
+        if (orientation.isPresent() || separator.isPresent() || names.isPresent()) {
+            throw new UsageException("--orientation, --separator and --names are for CSV files; '" + file
+                    + "' says these itself, under 'matrix'");
         }
     }
 }

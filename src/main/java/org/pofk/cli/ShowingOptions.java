@@ -1,6 +1,8 @@
 package org.pofk.cli;
 
 import java.util.Optional;
+import org.pofk.chain.Model;
+import org.pofk.report.Style;
 import picocli.CommandLine.Option;
 
 /** How results are shown. */
@@ -13,31 +15,11 @@ final class ShowingOptions {
 
     @Option(names = "--angles", paramLabel = "UNIT", defaultValue = "radians",
             description = "radians or degrees; ${DEFAULT-VALUE} otherwise")
-    private Angles angles;
+    private Style.Angles angles;
 
     @Option(names = "--convention", paramLabel = "WAY",
             description = "columns: x(k+1) = A x(k); rows: p(k+1) = p(k) P; otherwise as the model is written")
-    private Optional<Convention> convention = Optional.empty();
-
-    /** The unit of an angle. */
-    enum Angles {
-        RADIANS, DEGREES;
-
-        @Override
-        public String toString() {
-            return Words.lowerCase(this);
-        }
-    }
-
-    /** Whether the moves out of a state stand in a column or in a row. */
-    enum Convention {
-        COLUMNS, ROWS;
-
-        @Override
-        public String toString() {
-            return Words.lowerCase(this);
-        }
-    }
+    private Optional<Orientation> convention = Optional.empty();
 
     int digits() throws UsageException {
         if (digits < 1 || digits > MOST_DIGITS) {
@@ -46,11 +28,12 @@ final class ShowingOptions {
         return digits;
     }
 
-    Angles angles() {
+    Style.Angles angles() {
         return angles;
     }
 
-    Optional<Convention> convention() {
-        return convention;
+    /** The convention asked for, else that of the model. */
+    Model.Convention convention(Model model) {
+        return convention.map(Orientation::convention).orElse(model.convention());
     }
 }

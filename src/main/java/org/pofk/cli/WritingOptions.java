@@ -1,7 +1,12 @@
 package org.pofk.cli;
 
+import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.util.Optional;
+import org.pofk.report.Document;
+import org.pofk.report.TextWriter;
+import org.pofk.text.Alphabet;
+import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
 
 /** How and where the answer is written. */
@@ -13,7 +18,7 @@ final class WritingOptions {
     @Option(names = "--plain", description = "text in ASCII characters only")
     private boolean plain;
 
-    @picocli.CommandLine.Mixin
+    @Mixin
     private SaveOptions save = new SaveOptions();
 
     /** The format asked for; a file's name and {@code --as} may not contradict each other. */
@@ -31,8 +36,10 @@ final class WritingOptions {
         return as.or(() -> named).orElse(Format.TEXT);
     }
 
-    boolean plain() {
-        return plain;
+    /** A document as text for eighty columns. */
+    String text(Document document) {
+        return (plain ? TextWriter.of(Alphabet.ASCII, StandardCharsets.UTF_8)
+                : TextWriter.of(Alphabet.UNICODE, StandardCharsets.UTF_8)).write(document);
     }
 
     SaveOptions save() {

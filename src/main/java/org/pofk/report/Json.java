@@ -4,6 +4,7 @@ import com.fasterxml.jackson.core.JsonFactory;
 import com.fasterxml.jackson.core.JsonGenerator;
 import com.fasterxml.jackson.core.util.DefaultIndenter;
 import com.fasterxml.jackson.core.util.DefaultPrettyPrinter;
+import com.fasterxml.jackson.core.util.Separators;
 import java.io.IOException;
 import java.io.StringWriter;
 import java.io.UncheckedIOException;
@@ -23,8 +24,9 @@ final class Json {
     static String ofObject(Consumer<Json> fields) {
         StringWriter text = new StringWriter();
         try (JsonGenerator generator = new JsonFactory().createGenerator(text)) {
-            generator.setPrettyPrinter(new DefaultPrettyPrinter()
-                    .withObjectIndenter(new DefaultIndenter("  ", "\n")).withoutSpacesInObjectEntries());
+            generator.setPrettyPrinter(new DefaultPrettyPrinter(Separators.createDefaultInstance()
+                    .withObjectFieldValueSpacing(Separators.Spacing.AFTER))
+                    .withObjectIndenter(new DefaultIndenter("  ", "\n")));
             Json json = new Json(generator);
             json.object(() -> fields.accept(json));
         } catch (IOException impossible) {

@@ -1,0 +1,62 @@
+package org.pofk.answer;
+
+import java.util.List;
+import java.util.Optional;
+import org.pofk.chain.Output;
+import org.pofk.modes.ClosedForm;
+import org.pofk.transform.Transform;
+
+/**
+ * What is known of one output. What wasn't reached within a budget, or wasn't asked for, is empty; what is there is
+ * proven.
+ *
+ * @param values at the steps asked for
+ */
+public record DerivedOutput(Output output, Optional<Transform> transform, Optional<LongRunChecks> longRun,
+        Optional<ClosedForm> closedForm, Optional<Comparison> comparison, Optional<PoleCheck> poleCheck,
+        Optional<SecondOpinion> secondOpinion, List<StepValue> values) {
+
+    public DerivedOutput {
+        values = List.copyOf(values);
+    }
+
+    /** Nothing is known yet. */
+    static DerivedOutput of(Output output) {
+        return new DerivedOutput(output, Optional.empty(), Optional.empty(), Optional.empty(), Optional.empty(),
+                Optional.empty(), Optional.empty(), List.of());
+    }
+
+    /** True when formula and long run are known: the answer proper. */
+    public boolean isDecided() {
+        return closedForm.isPresent() && longRun.isPresent();
+    }
+
+    DerivedOutput with(Transform found) {
+        return new DerivedOutput(output, Optional.of(found), longRun, closedForm, comparison, poleCheck,
+                secondOpinion, values);
+    }
+
+    DerivedOutput with(LongRunChecks found) {
+        return new DerivedOutput(output, transform, Optional.of(found), closedForm, comparison, poleCheck,
+                secondOpinion, values);
+    }
+
+    DerivedOutput with(ClosedForm found) {
+        return new DerivedOutput(output, transform, longRun, Optional.of(found), comparison, poleCheck,
+                secondOpinion, values);
+    }
+
+    DerivedOutput with(Comparison found, PoleCheck poles) {
+        return new DerivedOutput(output, transform, longRun, closedForm, Optional.of(found), Optional.of(poles),
+                secondOpinion, values);
+    }
+
+    DerivedOutput with(SecondOpinion found) {
+        return new DerivedOutput(output, transform, longRun, closedForm, comparison, poleCheck, Optional.of(found),
+                values);
+    }
+
+    DerivedOutput with(List<StepValue> found) {
+        return new DerivedOutput(output, transform, longRun, closedForm, comparison, poleCheck, secondOpinion, found);
+    }
+}

@@ -1,0 +1,109 @@
+package org.pofk.answer;
+
+import java.time.Duration;
+import java.util.List;
+import java.util.Optional;
+import java.util.Set;
+import java.util.function.Consumer;
+import org.pofk.chain.Model;
+import org.pofk.chain.Output;
+import org.pofk.chain.Structure;
+import org.pofk.modes.ClosedForm;
+import org.pofk.modes.StateModes;
+import org.pofk.transform.Transform;
+import org.pofk.transform.Transforms;
+
+/**
+ * Derives outputs of a model stage by stage, and after each stage publishes what is proven so far: whoever waits for
+ * it may stop at any time and keep that.
+ */
+public final class Deriving {
+    /** The closed form is compared with simulation up to this step. */
+    public static final int COMPARED_UP_TO = 60;
+    /** Runs of the random comparison, and its seed. */
+    private static final int RUNS = 10_000;
+    private static final long SEED = 1;
+    private static final Duration SECOND_OPINION_LIMIT = Duration.ofSeconds(20);
+
+    private final Consumer<DerivedModel> published;
+    private DerivedModel known;
+
+    private Deriving(DerivedModel known, Consumer<DerivedModel> published) {
+        this.known = known;
+        this.published = published;
+    }
+
+    /** What may be asked for besides formulas and long runs. */
+    public enum Extra { COMPARISON, STATE_MODES, SECOND_OPINION }
+
+    /** Everything about these outputs; {@code at} lists steps in ascending order whose values are wanted. */
+    public static DerivedModel of(Model model, List<Output> outputs, List<Integer> at, Set<Extra> extras,
+            Consumer<DerivedModel> published) {
+        Deriving deriving = new Deriving(new DerivedModel(model, Structure.of(model.chain()),
+                outputs.stream().map(DerivedOutput::of).toList(), Optional.empty()), published);
+        deriving.publish(deriving.known);
+        deriving.formulas(outputs);
+        if (!at.isEmpty()) {
+            deriving.values(at);
+        }
+        if (extras.contains(Extra.COMPARISON)) {
+            deriving.compare();
+        }
+        if (extras.contains(Extra.STATE_MODES)) {
+            deriving.publish(deriving.known.with(StateModes.of(model.chain())));
+        }
+        if (extras.contains(Extra.SECOND_OPINION)) {
+            deriving.askAnother();
+        }
+        return deriving.known;
+    }
+
+    private void publish(DerivedModel next) {
+        known = next;
+        published.accept(next);
+    }
+
+    private void formulas(List<Output> outputs) {
+        List<Transform> transforms = Transforms.of(known.model().chain(), outputs);
+        for (int i = 0; i < transforms.size(); i++) {
+            publish(known.with(i, known.outputs().get(i).with(transforms.get(i))));
+        }
+        LongRunChecks.Ground ground = LongRunChecks.Ground.of(known.model().chain());
+        for (int i = 0; i < transforms.size(); i++) {
+            publish(known.with(i, known.outputs().get(i).with(LongRunChecks.of(ground, transforms.get(i)))));
+            publish(known.with(i, known.outputs().get(i).with(ClosedForm.of(transforms.get(i)))));
+        }
+    }
+
+    private List<ClosedForm> closedForms() {
+        return known.outputs().stream().map(each -> each.closedForm().orElseThrow()).toList();
+    }
+
+    private void values(List<Integer> at) {
+        List<List<StepValue>> values = StepValues.of(known.model().chain(), closedForms(), at);
+        for (int i = 0; i < values.size(); i++) {
+            publish(known.with(i, known.outputs().get(i).with(values.get(i))));
+        }
+    }
+
+    private void compare() {
+        var chain = known.model().chain();
+        List<Output> outputs = known.outputs().stream().map(DerivedOutput::output).toList();
+        Optional<Simulation> simulation = chain.kind() == org.pofk.chain.Chain.Kind.CHAIN
+                ? Optional.of(Simulation.of(chain, outputs, List.of(1, 5, 20, COMPARED_UP_TO), RUNS, SEED))
+                : Optional.empty();
+        List<Comparison> comparisons = Comparison.of(chain, closedForms(), COMPARED_UP_TO, simulation);
+        for (int i = 0; i < comparisons.size(); i++) {
+            publish(known.with(i, known.outputs().get(i).with(comparisons.get(i),
+                    PoleCheck.of(chain, closedForms().get(i)))));
+        }
+    }
+
+    private void askAnother() {
+        for (int i = 0; i < known.outputs().size(); i++) {
+            ClosedForm form = closedForms().get(i);
+            publish(known.with(i, known.outputs().get(i).with(
+                    SecondOpinion.of(form.transform(), form.expansion(), SECOND_OPINION_LIMIT))));
+        }
+    }
+}

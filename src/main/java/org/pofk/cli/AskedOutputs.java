@@ -1,0 +1,26 @@
+package org.pofk.cli;
+
+import java.util.List;
+import org.pofk.chain.Chain;
+import org.pofk.chain.Output;
+import org.pofk.chain.Outputs;
+import org.pofk.text.Position;
+import org.pofk.text.RefusedException;
+
+/** The outputs a command line asks for. */
+final class AskedOutputs {
+    private AskedOutputs() {
+    }
+
+    /** Those named, else those of the model, else every state; a name that stands for nothing is a wrong usage. */
+    static List<Output> of(Chain chain, List<String> names) throws UsageException {
+        if (names.isEmpty()) {
+            return Outputs.byDefault(chain);
+        }
+        try {
+            return Outputs.named(chain, names, Position.ofWhole("--of"));
+        } catch (RefusedException unknown) {
+            throw new UsageException(unknown.getMessage());
+        }
+    }
+}

@@ -1,0 +1,50 @@
+package org.pofk.report;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.stream.IntStream;
+import org.pofk.chain.Chain;
+import org.pofk.chain.Model;
+import org.pofk.exact.Rational;
+import org.pofk.report.Document.Block;
+import org.pofk.report.Document.Heading;
+import org.pofk.report.Document.Items;
+import org.pofk.report.Document.Labelled;
+import org.pofk.report.Document.Paragraph;
+
+/** Which model a document is about, with what its author says about it. */
+final class ModelHead {
+    private ModelHead() {
+    }
+
+    static List<Block> of(Model model) {
+        List<Block> blocks = new ArrayList<>();
+        blocks.add(new Heading(1, Prose.name(model.title())));
+        blocks.add(new Paragraph(facts(model)));
+        model.about().document().ifPresent(document -> blocks.add(new Labelled("document", Prose.name(document)
+                .and(model.about().revision().map(revision -> ", revision " + revision).orElse("")))));
+        model.about().preparedBy().ifPresent(who -> blocks.add(new Labelled("prepared by", Prose.name(who))));
+        if (!model.about().assumptions().isEmpty()) {
+            blocks.add(new Paragraph("Assumptions"));
+            blocks.add(new Items(model.about().assumptions().stream().map(Prose::name).toList()));
+        }
+        return blocks;
+    }
+
+    private static Prose facts(Model model) {
+        Chain chain = model.chain();
+        Prose facts = Prose.name(model.origin().file()).and(": "
+                + (chain.kind() == Chain.Kind.CHAIN ? "" : "a recursion of ")
+                + (chain.size() == 1 ? "1 state" : chain.size() + " states") + ", one step is ")
+                .andName(model.step().is());
+        return start(chain).map(state -> facts.and(", starts in ").andName(state)).orElse(facts).and(".");
+    }
+
+    /** The state a chain starts in for certain. */
+    private static Optional<String> start(Chain chain) {
+        return chain.kind() == Chain.Kind.RECURSION ? Optional.empty()
+                : IntStream.range(0, chain.size()).filter(i -> chain.start().get(i).equals(Rational.ONE)).boxed()
+                        .map(chain.states()::get).findFirst();
+    }
+}

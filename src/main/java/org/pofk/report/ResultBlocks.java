@@ -1,0 +1,156 @@
+package org.pofk.report;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import org.pofk.answer.Comparison;
+import org.pofk.answer.DerivedOutput;
+import org.pofk.answer.HighPowers;
+import org.pofk.answer.LongRunChecks;
+import org.pofk.answer.SecondOpinion;
+import org.pofk.answer.Simulation;
+import org.pofk.exact.Decimals;
+import org.pofk.exact.Rational;
+import org.pofk.formula.Formula;
+import org.pofk.modes.ClosedForm;
+import org.pofk.modes.DecimalForm;
+import org.pofk.modes.Terms;
+import org.pofk.report.Document.Block;
+import org.pofk.report.Document.Display;
+import org.pofk.report.Document.Heading;
+import org.pofk.report.Document.Labelled;
+import org.pofk.report.Document.Relation;
+import org.pofk.transform.RecurrenceProof;
+import org.pofk.transform.Transform;
+
+/** What was found about one output: the formula, from where on it holds and why, the long run, how it was checked. */
+final class ResultBlocks {
+    private static final int ERROR_DIGITS = 2;
+
+    private final DerivedOutput output;
+    private final Style style;
+    private final List<Block> blocks = new ArrayList<>();
+
+    private ResultBlocks(DerivedOutput output, Style style) {
+        this.output = output;
+        this.style = style;
+    }
+
+    static List<Block> of(DerivedOutput output, Style style) {
+        ResultBlocks result = new ResultBlocks(output, style);
+        result.write();
+        return result.blocks;
+    }
+
+    private void write() {
+        blocks.add(new Heading(2, OutputProse.title(output.output())));
+        output.closedForm().ifPresent(this::formulas);
+        output.transform().ifPresent(this::holds);
+        output.longRun().ifPresent(this::longRun);
+        output.comparison().ifPresent(this::checked);
+        output.secondOpinion().ifPresent(this::secondOpinion);
+        if (!output.isDecided()) {
+            undecided();
+        }
+    }
+
+    private void label(String label, String text) {
+        blocks.add(new Labelled(label, text));
+    }
+
+    private void formulas(ClosedForm form) {
+        Optional<Formula> exact = form.exactFormula();
+        DecimalForm decimals = form.decimalForm(style.digits());
+        Formula shownExact = exact.orElseGet(form::formulaOverRoots);
+        boolean isSame = decimals.formula().equals(Optional.of(shownExact));
+        if (!isSame && decimals.formula().isPresent()) {
+            blocks.add(new Display(OutputProse.atStep(output.output()), Relation.ROUNDED, decimals.formula().get()));
+        }
+        blocks.add(new Display(OutputProse.atStep(output.output()), Relation.EQUAL, shownExact));
+        if (!isSame) {
+            label("decimals", promise(decimals));
+        }
+    }
+
+    private static String promise(DecimalForm decimals) {
+        String reason = decimals.reason().map(why -> "; " + why).orElse("");
+        if (decimals.formula().isEmpty()) {
+            return "none" + reason;
+        }
+        return "as printed within " + Decimals.of(decimals.errorBound(), ERROR_DIGITS).text()
+                + " of the exact value, for every k"
+                + decimals.upTo().map(last -> " up to " + last).orElse("") + reason;
+    }
+
+    private void holds(Transform transform) {
+        RecurrenceProof proof = transform.proof();
+        int order = transform.recurrence().degree();
+        String from = "for every k ≥ 0" + output.closedForm().filter(form -> form.withoutImpulsesFrom() > 0)
+                .map(form -> ", without the delta terms from k = " + form.withoutImpulsesFrom() + " on").orElse("");
+        label("holds", from + ". " + switch (proof.method()) {
+            case CHARACTERISTIC -> "The " + states(proof.order()) + " that take part need a recurrence of order "
+                    + order + ", so it is their characteristic polynomial, and Cayley–Hamilton proves it for ever; "
+                    + proof.comparedSteps() + " exact terms compared.";
+            case WINDOWS -> "All " + proof.comparedSteps() + " exact terms compared satisfy a recurrence of order "
+                    + order + "; " + states(proof.order())
+                    + " take part, so by Cayley–Hamilton it holds for ever.";
+            case VECTOR -> "The recurrence of order " + order + " annihilates the start itself, D(A) x(0) = 0, so it"
+                    + " holds for every output and for ever.";
+        });
+    }
+
+    private static String states(int count) {
+        return count == 1 ? "one state" : count + " states";
+    }
+
+    private void longRun(LongRunChecks checks) {
+        LongRunProse prose = new LongRunProse(style.digits());
+        label("long run", prose.of(checks.byPoles()));
+        checks.highPowers().stream().flatMap(verdict -> verdict.habits().stream())
+                .filter(stop -> stop.outcome() != HighPowers.Outcome.RIGHT).findFirst()
+                .ifPresent(stop -> label("beware", LongRunWarning.of(stop, style.digits())));
+    }
+
+    private void checked(Comparison comparison) {
+        Comparison.ExactPowers powers = comparison.exactPowers();
+        Comparison.DoubleStepping doubles = comparison.doubleStepping();
+        String exact = powers.largestDifference().isZero()
+                ? "equal to exact powers of A at k = 0 … " + powers.last()
+                : "differs from exact powers of A by " + small(powers.largestDifference()) + " at k = " + powers.at();
+        label("checked", exact + "; double-precision stepping is at most " + small(doubles.largestDifference())
+                + " off" + comparison.random().map(ResultBlocks::random).orElse(""));
+    }
+
+    private static String small(Rational difference) {
+        return Decimals.of(difference, ERROR_DIGITS).text();
+    }
+
+    private static String random(Simulation.Series series) {
+        long checked = series.checked();
+        return "; random runs: " + (checked == 0
+                ? "too few hits are expected, can't tell here"
+                : series.inside() + " of " + checked + " steps inside their 99.9 % intervals");
+    }
+
+    private void secondOpinion(SecondOpinion opinion) {
+        label("second opinion", "Symja: the factors multiply out: " + word(opinion.factors())
+                + "; the expansion adds up to Y(z): " + word(opinion.expansion()) + " ("
+                + SecondOpinion.NOT_CONFIRMED + ")");
+    }
+
+    private static String word(SecondOpinion.Verdict verdict) {
+        return switch (verdict) {
+            case CONFIRMED -> "confirmed";
+            case REFUSED -> "REFUSED";
+            case NOT_WITHIN_LIMIT -> "no second opinion within the limit";
+            case NOT_ASKED -> "not asked, a coefficient is kept as a quotient";
+        };
+    }
+
+    private void undecided() {
+        output.transform().ifPresent(transform -> blocks.add(new Display(Prose.of("Y(z)"), Relation.EQUAL,
+                RationalFunction.inZ(transform.y()))));
+        label("not decided", "within the budget" + (output.transform().isPresent()
+                ? "; the transform Y(z) above is proven" : "; nothing about this output is proven yet"));
+    }
+}
