@@ -1,9 +1,7 @@
 package org.pofk.formula;
 
 import java.util.ArrayList;
-import java.util.IdentityHashMap;
 import java.util.List;
-import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import org.pofk.formula.Formula.Call;
@@ -20,8 +18,6 @@ import org.pofk.text.Fault;
 import org.pofk.text.Places;
 import org.pofk.text.Position;
 import org.pofk.text.RefusedException;
-import org.pofk.text.Span;
-import org.pofk.text.Suggestion;
 
 /**
  * Reads a formula in ordinary notation by precedence: sums below signs below products and quotients (from the left)
@@ -37,20 +33,14 @@ public final class FormulaParser {
     /** Most nodes of the tree. */
     public static final int MOST_NODES = 20_000;
 
-    private final String text;
-    private final Places places;
-    private final List<Token> tokens;
-    private int next;
-    private int depth;
-    /** The height of every tree built so far: a long chain of divisions nests without nesting its text. */
-    private final Map<ParsedFormula, Integer> heights = new IdentityHashMap<>();
+    private final Cursor cursor;
+    private final NodeBuilder nodes;
     /** How the factor read last ends: decides what may stand behind it without a sign. */
     private Ending ending = Ending.CLOSED;
 
-    private FormulaParser(String text, Places places, Set<String> names) throws RefusedException {
-        this.text = text;
-        this.places = places;
-        this.tokens = Lexer.read(text, places, names);
+    private FormulaParser(Cursor cursor) {
+        this.cursor = cursor;
+        this.nodes = new NodeBuilder(cursor);
     }
 
     /** Reads a text that stands in its source as it is, beginning at {@code start}. */
@@ -66,12 +56,15 @@ public final class FormulaParser {
      */
     public static ParsedFormula parse(String text, Places places, Set<String> names) throws RefusedException {
         requireLength(text, places.at(0));
-        FormulaParser parser = new FormulaParser(text, places, names);
-        if (parser.peek().is(Kind.END)) {
-            throw parser.refused(0, "formula-empty", "a formula is missing here");
+        Cursor cursor = new Cursor(text, places, names);
+        if (cursor.sees(Kind.END)) {
+            throw cursor.refused(cursor.peek(), "formula-empty", "a formula is missing here");
         }
+        FormulaParser parser = new FormulaParser(cursor);
         ParsedFormula whole = parser.sum();
-        parser.requireEnd();
+        if (!cursor.sees(Kind.END)) {
+            throw parser.unexpected();
+        }
         return whole;
     }
 
@@ -84,46 +77,46 @@ public final class FormulaParser {
 
     private ParsedFormula sum() throws RefusedException {
         List<ParsedFormula> terms = new ArrayList<>();
-        if (peek().is(Kind.PLUS)) {
-            take();
+        if (cursor.sees(Kind.PLUS)) {
+            cursor.take();
         }
         terms.add(term());
-        while (peek().is(Kind.PLUS) || peek().is(Kind.MINUS)) {
-            Token sign = take();
+        while (cursor.sees(Kind.PLUS) || cursor.sees(Kind.MINUS)) {
+            Token sign = cursor.take();
             ParsedFormula term = term();
             terms.add(sign.is(Kind.PLUS) ? term : negation(sign, term));
         }
-        return terms.size() == 1 ? terms.get(0) : node(new Sum(formulas(terms)), terms);
+        return terms.size() == 1 ? terms.get(0) : nodes.node(new Sum(formulas(terms)), terms);
     }
 
     private ParsedFormula term() throws RefusedException {
-        if (!peek().is(Kind.MINUS)) {
+        if (!cursor.sees(Kind.MINUS)) {
             return product();
         }
-        enter();
-        Token sign = take();
+        nodes.enter();
+        Token sign = cursor.take();
         ParsedFormula negation = negation(sign, term());
-        depth--;
+        nodes.leave();
         return negation;
     }
 
     private ParsedFormula product() throws RefusedException {
-        Token first = peek();
+        Token first = cursor.peek();
         List<ParsedFormula> factors = new ArrayList<>(List.of(factor()));
         Optional<Token> division = Optional.empty();
         while (true) {
-            if (peek().is(Kind.TIMES)) {
-                take();
+            if (cursor.sees(Kind.TIMES)) {
+                cursor.take();
                 factors.add(signedFactor());
                 division = Optional.empty();
-            } else if (peek().is(Kind.DIVIDE)) {
-                division = Optional.of(take());
+            } else if (cursor.sees(Kind.DIVIDE)) {
+                division = Optional.of(cursor.take());
                 List<ParsedFormula> operands = List.of(joined(factors), signedFactor());
-                factors = new ArrayList<>(List.of(node(
+                factors = new ArrayList<>(List.of(nodes.node(
                         new Quotient(operands.get(0).formula(), operands.get(1).formula()), operands)));
-            } else if (peek().beginsOperand()) {
-                requireProductWithoutSign();
-                int behindDenominator = end();
+            } else if (cursor.peek().beginsOperand()) {
+                Juxtaposition.require(cursor, ending);
+                int behindDenominator = cursor.before().end();
                 factors.add(factor());
                 if (division.isPresent()) {
                     throw ambiguousDivision(first, division.get(), behindDenominator);
@@ -135,52 +128,52 @@ public final class FormulaParser {
     }
 
     private ParsedFormula joined(List<ParsedFormula> factors) throws RefusedException {
-        return factors.size() == 1 ? factors.get(0) : node(new Product(formulas(factors)), factors);
+        return factors.size() == 1 ? factors.get(0) : nodes.node(new Product(formulas(factors)), factors);
     }
 
     private ParsedFormula signedFactor() throws RefusedException {
-        if (!peek().is(Kind.MINUS)) {
+        if (!cursor.sees(Kind.MINUS)) {
             return factor();
         }
-        enter();
-        Token sign = take();
+        nodes.enter();
+        Token sign = cursor.take();
         ParsedFormula negation = negation(sign, signedFactor());
-        depth--;
+        nodes.leave();
         return negation;
     }
 
     private ParsedFormula factor() throws RefusedException {
         ParsedFormula base = atom();
-        if (peek().is(Kind.POWER) || peek().is(Kind.SUPERSCRIPT)) {
+        if (cursor.sees(Kind.POWER) || cursor.sees(Kind.SUPERSCRIPT)) {
             if (ending == Ending.ROOT) {
-                throw refused(peek().start(), "ambiguous-root", "a power right behind a root can be read in two ways:"
-                        + " write (√x)^k or √(x^k), with parentheses");
+                throw cursor.refused(cursor.peek(), "ambiguous-root", "a power right behind a root can be read in"
+                        + " two ways: write (√x)^k or √(x^k), with parentheses");
             }
             ParsedFormula exponent = exponent();
-            return node(new Power(base.formula(), exponent.formula()), List.of(base, exponent));
+            return nodes.node(new Power(base.formula(), exponent.formula()), List.of(base, exponent));
         }
         return base;
     }
 
     private ParsedFormula exponent() throws RefusedException {
-        if (peek().is(Kind.SUPERSCRIPT)) {
-            Token raised = take();
+        if (cursor.sees(Kind.SUPERSCRIPT)) {
+            Token raised = cursor.take();
             ending = Ending.CLOSED;
-            if (peek().is(Kind.POWER) || peek().is(Kind.SUPERSCRIPT)) {
-                throw refused(peek().start(), "ambiguous-power", "a power of a power needs parentheses");
+            if (cursor.sees(Kind.POWER) || cursor.sees(Kind.SUPERSCRIPT)) {
+                throw cursor.refused(cursor.peek(), "ambiguous-power", "a power of a power needs parentheses");
             }
-            return leaf(WrittenNumbers.integer(raised.text()), raised);
+            return nodes.leaf(WrittenNumbers.integer(raised.text()), raised);
         }
-        take();
-        enter();
+        cursor.take();
+        nodes.enter();
         ParsedFormula exponent = signedFactor();
         ending = ending.asExponent();
-        depth--;
+        nodes.leave();
         return exponent;
     }
 
     private ParsedFormula atom() throws RefusedException {
-        Token token = take();
+        Token token = cursor.take();
         return switch (token.kind()) {
             case NUMBER -> atom(WrittenNumbers.read(token.text()), token, Ending.NUMBER);
             case QUOTED -> atom(new Symbol(token.text()), token, Ending.NAME);
@@ -194,16 +187,16 @@ public final class FormulaParser {
 
     private ParsedFormula atom(Formula formula, Token token, Ending itsEnding) throws RefusedException {
         ending = itsEnding;
-        return leaf(formula, token);
+        return nodes.leaf(formula, token);
     }
 
     private ParsedFormula nameOrCall(Token name) throws RefusedException {
         Optional<Function> function = Words.function(name.text());
-        if (function.isPresent() && peek().is(Kind.OPEN)) {
+        if (function.isPresent() && cursor.sees(Kind.OPEN)) {
             return call(name, function.get());
         }
-        if (function.isPresent() && peek().beginsOperand()) {
-            throw refused(name.start(), "function-arguments",
+        if (function.isPresent() && cursor.peek().beginsOperand()) {
+            throw cursor.refused(name, "function-arguments",
                     "the argument of " + name.text() + " goes in parentheses: " + name.text() + "(…)");
         }
         Optional<Constant> constant = Words.constant(name.text());
@@ -215,199 +208,93 @@ public final class FormulaParser {
     }
 
     private ParsedFormula call(Token name, Function function) throws RefusedException {
-        enter();
-        Token open = take();
+        nodes.enter();
+        Token open = cursor.take();
         List<ParsedFormula> arguments = new ArrayList<>(List.of(sum()));
-        while (peek().is(Kind.COMMA)) {
-            take();
+        while (cursor.sees(Kind.COMMA)) {
+            cursor.take();
             arguments.add(sum());
         }
         requireClose(open);
-        depth--;
+        nodes.leave();
         ending = Ending.CLOSED;
         if (arguments.size() != function.arity()) {
-            throw refused(name.start(), "function-arguments", name.text() + " takes "
+            throw cursor.refused(name, "function-arguments", name.text() + " takes "
                     + (function.arity() == 1 ? "one argument" : "two arguments") + ", not " + arguments.size());
         }
-        return node(new Call(function, formulas(arguments)), arguments, span(name.start(), end()));
+        return nodes.node(new Call(function, formulas(arguments)), arguments, cursor.spanFrom(name));
     }
 
     private ParsedFormula parenthesis(Token open) throws RefusedException {
-        enter();
+        nodes.enter();
         ParsedFormula inner = sum();
         requireClose(open);
-        depth--;
+        nodes.leave();
         ending = Ending.CLOSED;
-        ParsedFormula enclosed = new ParsedFormula(inner.formula(), span(open.start(), end()), inner.parts());
-        heights.put(enclosed, heights.get(inner));
-        return enclosed;
+        return nodes.enclosed(inner, cursor.spanFrom(open));
     }
 
     private ParsedFormula root(Token sign) throws RefusedException {
-        enter();
-        Ending itsEnding = peek().is(Kind.OPEN) ? Ending.CLOSED : Ending.ROOT;
+        nodes.enter();
+        Ending itsEnding = cursor.sees(Kind.OPEN) ? Ending.CLOSED : Ending.ROOT;
         ParsedFormula radicand = atom();
-        depth--;
+        nodes.leave();
         ending = itsEnding;
-        return node(new Call(Function.SQRT, List.of(radicand.formula())), List.of(radicand),
-                span(sign.start(), end()));
-    }
-
-    /** Refuses what stands behind the last factor without a sign, unless that can only be a product. */
-    private void requireProductWithoutSign() throws RefusedException {
-        Token token = peek();
-        boolean beginsCall = token.is(Kind.NAME) && Words.function(token.text()).isPresent()
-                && tokens.get(next + 1).is(Kind.OPEN);
-        boolean isConstant = token.is(Kind.DEGREE)
-                || token.is(Kind.NAME) && Words.constant(token.text()).isPresent();
-        Token before = tokens.get(next - 1);
-        if (token.is(Kind.NUMBER)) {
-            throw refused(token.start(), "operator-missing",
-                    "between '" + before.text() + "' and '" + Words.shortened(token.text()) + "' a sign is missing");
-        }
-        if (beginsCall || ending == Ending.CLOSED || ending == Ending.NUMBER || ending == Ending.CONSTANT) {
-            return;
-        }
-        if (ending == Ending.NUMBER_EXPONENT && token.is(Kind.OPEN)) {
-            return;
-        }
-        if (ending.isExponent()) {
-            throw refused(token.start(), "ambiguous-power", "what stands behind the exponent " + before.text()
-                    + " can be read in two ways: write * for a product, or the whole exponent in parentheses");
-        }
-        if (ending == Ending.ROOT) {
-            throw refused(token.start(), "ambiguous-root", "what stands behind √" + before.text()
-                    + " can be read in two ways: write * for a product, or all under the root in parentheses");
-        }
-        if (isConstant || ending == Ending.LETTER && token.is(Kind.OPEN)) {
-            return;
-        }
-        throw token.is(Kind.OPEN) ? unknownFunction(before) : namesSideBySide(before, token);
-    }
-
-    private RefusedException unknownFunction(Token name) {
-        String suggestion = Suggestion.didYouMean(Words.FUNCTION_NAMES, name.text());
-        return refused(name.start(), "function-unknown", "no function is called '" + Words.shortened(name.text()) + "'"
-                + suggestion + (suggestion.isEmpty() ? "; a product is written with *" : ""));
-    }
-
-    private RefusedException namesSideBySide(Token first, Token second) {
-        String names = text.substring(first.start(), second.end());
-        return refused(second.start(), "operator-missing", "between '" + Words.shortened(first.text()) + "' and '"
-                + Words.shortened(second.text()) + "' a sign is missing"
-                + (names.contains("'") ? "" : "; a name with spaces is written in quotes: '"
-                        + Words.shortened(names) + "'"));
+        return nodes.node(new Call(Function.SQRT, List.of(radicand.formula())), List.of(radicand),
+                cursor.spanFrom(sign));
     }
 
     private RefusedException ambiguousDivision(Token first, Token division, int behindDenominator) {
-        String numerator = Words.shortened(text.substring(first.start(), division.start()).strip());
-        String denominator = Words.shortened(text.substring(division.end(), behindDenominator).strip());
-        String factor = Words.shortened(text.substring(behindDenominator, end()).strip());
-        return refused(division.start(), "ambiguous-division", "'"
-                + Words.shortened(text.substring(first.start(), end())) + "' can be read in two ways: write ("
-                + numerator + "/" + denominator + ")*" + factor + " or " + numerator + "/(" + denominator + "*" + factor
-                + ")");
+        String numerator = cursor.shown(first.start(), division.start());
+        String denominator = cursor.shown(division.end(), behindDenominator);
+        int end = cursor.before().end();
+        String factor = cursor.shown(behindDenominator, end);
+        return cursor.refused(division, "ambiguous-division", "'" + cursor.shown(first.start(), end)
+                + "' can be read in two ways: write (" + numerator + "/" + denominator + ")*" + factor
+                + " or " + numerator + "/(" + denominator + "*" + factor + ")");
     }
 
     private RefusedException missingOperand(Token found) {
-        next--;
-        if (found.is(Kind.END) && next > 0) {
-            Token before = tokens.get(next - 1);
-            return refused(before.start(), "operand-missing", "the formula ends after '" + before.text() + "'");
+        if (found.is(Kind.END) && !cursor.atStart()) {
+            return cursor.refused(cursor.before(), "operand-missing",
+                    "the formula ends after '" + cursor.before().text() + "'");
         }
-        return refused(found.start(), "operand-missing",
+        return cursor.refused(found, "operand-missing",
                 "a number, a name or a parenthesis is missing before '" + found.text() + "'");
     }
 
     private void requireClose(Token open) throws RefusedException {
-        if (peek().is(Kind.CLOSE)) {
-            take();
-        } else if (peek().is(Kind.END)) {
-            throw refused(open.start(), "parenthesis-open", "the parenthesis that opens here isn't closed");
-        } else {
+        if (cursor.sees(Kind.END)) {
+            throw cursor.refused(open, "parenthesis-open", "the parenthesis that opens here isn't closed");
+        }
+        if (!cursor.sees(Kind.CLOSE)) {
             throw unexpected();
         }
+        cursor.take();
     }
 
-    private void requireEnd() throws RefusedException {
-        if (!peek().is(Kind.END)) {
-            throw unexpected();
-        }
-    }
-
+    /** Behind a whole sum stands a comma or a parenthesis too many. */
     private RefusedException unexpected() {
-        Token token = peek();
+        Token token = cursor.peek();
         if (!token.is(Kind.COMMA)) {
-            return refused(token.start(), "parenthesis-extra", "nothing is open that '" + token.text() + "' closes");
+            return cursor.refused(token, "parenthesis-extra", "nothing is open that '" + token.text() + "' closes");
         }
-        Token before = tokens.get(next - 1);
-        Token after = tokens.get(next + 1);
-        boolean isDecimal = before.is(Kind.NUMBER) && after.is(Kind.NUMBER)
-                && before.end() == token.start() && token.end() == after.start();
+        Token before = cursor.before();
+        Token behind = cursor.peekBehind();
+        boolean isDecimal = before.is(Kind.NUMBER) && behind.is(Kind.NUMBER)
+                && before.end() == token.start() && token.end() == behind.start();
         return isDecimal
-                ? refused(token.start(), "decimal-comma", "a decimal comma: write "
-                        + Words.shortened(before.text() + "." + after.text()))
-                : refused(token.start(), "comma", "a comma stands only between the arguments of a function");
-    }
-
-    private Token peek() {
-        return tokens.get(next);
-    }
-
-    private Token take() {
-        return tokens.get(next++);
-    }
-
-    /** Offset after the token taken last. */
-    private int end() {
-        return tokens.get(next - 1).end();
-    }
-
-    private void enter() throws RefusedException {
-        if (++depth > DEEPEST) {
-            throw tooDeep();
-        }
+                ? cursor.refused(token, "decimal-comma", "a decimal comma: write "
+                        + Words.shortened(before.text() + "." + behind.text()))
+                : cursor.refused(token, "comma", "a comma stands only between the arguments of a function");
     }
 
     private ParsedFormula negation(Token minus, ParsedFormula operand) throws RefusedException {
-        return node(new Negation(operand.formula()), List.of(operand),
-                span(minus.start(), minus.end()).to(operand.span()));
-    }
-
-    private ParsedFormula leaf(Formula formula, Token token) throws RefusedException {
-        return node(formula, List.of(), span(token.start(), token.end()));
-    }
-
-    private ParsedFormula node(Formula formula, List<ParsedFormula> parts) throws RefusedException {
-        return node(formula, parts, parts.get(0).span().to(parts.get(parts.size() - 1).span()));
-    }
-
-    private ParsedFormula node(Formula formula, List<ParsedFormula> parts, Span span) throws RefusedException {
-        ParsedFormula node = new ParsedFormula(formula, span, parts);
-        int height = 1 + parts.stream().mapToInt(heights::get).max().orElse(0);
-        if (height > DEEPEST) {
-            throw tooDeep();
-        }
-        heights.put(node, height);
-        if (heights.size() > MOST_NODES) {
-            throw refused(peek().start(), "formula-too-large", "the formula has more than " + MOST_NODES + " parts");
-        }
-        return node;
-    }
-
-    private RefusedException tooDeep() {
-        return refused(peek().start(), "formula-too-deep", "the formula is nested more than " + DEEPEST + " deep");
+        return nodes.node(new Negation(operand.formula()), List.of(operand),
+                cursor.spanOf(minus).to(operand.span()));
     }
 
     private static List<Formula> formulas(List<ParsedFormula> parts) {
         return parts.stream().map(ParsedFormula::formula).toList();
-    }
-
-    private Span span(int start, int end) {
-        return new Span(places.at(start), places.at(end));
-    }
-
-    private RefusedException refused(int offset, String code, String message) {
-        return new RefusedException(List.of(new Fault(places.at(offset), code, message)));
     }
 }

@@ -187,7 +187,7 @@ class FormulaParserTest {
         String alphabet = "12.e+-*/^()√°'%, ,kzπcosbinomial²\0\ud835x";
         Random random = new Random(20265);
         int read = 0;
-        for (int i = 0; i < 20_000; i++) {
+        for (int i = 0; i < 8_000; i++) {
             StringBuilder text = new StringBuilder();
             for (int j = random.nextInt(12); j >= 0; j--) {
                 text.append(alphabet.charAt(random.nextInt(alphabet.length())));
@@ -201,6 +201,6 @@ class FormulaParserTest {
                 assertTrue(position.column() >= 21 && position.column() <= 21 + text.length(), refused.getMessage());
             }
         }
-        assertTrue(read > 500, "texts read: " + read);
+        assertTrue(read > 200, "texts read: " + read);
     }
 }

@@ -38,20 +38,20 @@ class PlainTextTest {
         return FormulaTrees.upTo(3);
     }
 
-    @Property(tries = 1000, edgeCases = EdgeCasesMode.NONE, seed = "20261")
+    @Property(tries = 600, edgeCases = EdgeCasesMode.NONE, seed = "20261")
     void whatIsPrintedIsReadAsTheSameTree(@ForAll("trees") Formula tree) throws RefusedException {
         assertEquals(FormulaTrees.asRead(tree), parsed(PlainText.UNICODE.write(tree)),
                 () -> PlainText.UNICODE.write(tree));
     }
 
-    @Property(tries = 500, edgeCases = EdgeCasesMode.NONE, seed = "20262")
+    @Property(tries = 300, edgeCases = EdgeCasesMode.NONE, seed = "20262")
     void whatIsPrintedInAsciiIsReadAsTheSameTreeExceptForGreekLetters(@ForAll("trees") Formula tree)
             throws RefusedException {
         String ascii = PlainText.ASCII.write(tree);
         assertEquals(parsed(PlainText.UNICODE.write(tree).replace("θ", "theta")), parsed(ascii), ascii);
     }
 
-    @Property(tries = 500, edgeCases = EdgeCasesMode.NONE, seed = "20263")
+    @Property(tries = 300, edgeCases = EdgeCasesMode.NONE, seed = "20263")
     void noPairOfParenthesesCanBeLeftOut(@ForAll("trees") Formula tree) throws RefusedException {
         String text = PlainText.ASCII.write(FormulaTrees.asRead(tree));
         Formula whole = parsed(text);
@@ -147,7 +147,7 @@ class PlainTextTest {
                         .stream().map(String::strip).toList());
     }
 
-    @Property(tries = 250, edgeCases = EdgeCasesMode.NONE, seed = "20264")
+    @Property(tries = 200, edgeCases = EdgeCasesMode.NONE, seed = "20264")
     void brokenLinesFitAndLoseNothing(@ForAll("trees") Formula tree) {
         String text = PlainText.UNICODE.write(tree);
         List<String> lines = PlainText.UNICODE.lines(tree, 50, 6);
