@@ -1,7 +1,9 @@
 package org.pofk.transform;
 
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.List;
+import java.util.stream.IntStream;
 import org.pofk.chain.Chain;
 import org.pofk.exact.Factorization;
 import org.pofk.exact.Polynomial;
@@ -26,10 +28,15 @@ public record StateTransform(Polynomial<Rational> recurrence, List<Polynomial<Ra
     public static StateTransform of(Chain chain) {
         Reduction reduction = Reduction.ofState(chain);
         Recurrence recurrence = Recurrences.ofState(reduction.reduced());
-        List<Polynomial<Rational>> numerators = new ArrayList<>(java.util.Collections.nCopies(chain.size(),
+        List<Polynomial<Rational>> numerators = new ArrayList<>(Collections.nCopies(chain.size(),
                 Polynomial.zero(recurrence.denominator().field())));
-        for (int place = 0; place < reduction.kept().size(); place++) {
-            numerators.set(reduction.kept().get(place), recurrence.numerators().get(place));
+        List<List<Integer>> blocks = reduction.lumpings().isEmpty()
+                ? IntStream.range(0, reduction.kept().size()).mapToObj(List::of).toList()
+                : reduction.lumpings().get(0).blocks();
+        for (int block = 0; block < blocks.size(); block++) {
+            Polynomial<Rational> share =
+                    recurrence.numerators().get(block).times(Rational.of(1, blocks.get(block).size()));
+            blocks.get(block).forEach(place -> numerators.set(reduction.kept().get(place), share));
         }
         return new StateTransform(recurrence.denominator(), numerators,
                 new DenominatorFactors(chain).of(recurrence.denominator()), recurrence.proof());
