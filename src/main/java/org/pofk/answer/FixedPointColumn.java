@@ -1,48 +1,62 @@
 package org.pofk.answer;
 
 import java.math.BigInteger;
-import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import org.pofk.chain.SparseMatrix;
 
-/** A column of a chain's matrix (or of one of its powers) from below, its entries that are not zero by ascending row. */
-record FixedPointColumn(List<Integer> rows, List<BigInteger> values) {
+/**
+ * A column of a chain's matrix (or of one of its powers) from below, its entries that are not zero by ascending row.
+ * Lives for one computation, so it holds plain arrays and is not handed out.
+ */
+final class FixedPointColumn {
+    private final int[] rows;
+    private final BigInteger[] values;
+
+    private FixedPointColumn(int[] rows, BigInteger[] values) {
+        this.rows = rows;
+        this.values = values;
+    }
 
     static List<FixedPointColumn> below(SparseMatrix matrix) {
         return matrix.columns().stream().map(column -> new FixedPointColumn(
-                column.stream().map(SparseMatrix.Entry::row).toList(),
-                column.stream().map(entry -> FixedPointState.below(entry.value())).toList())).toList();
+                column.stream().mapToInt(SparseMatrix.Entry::row).toArray(),
+                column.stream().map(entry -> FixedPointState.below(entry.value())).toArray(BigInteger[]::new))).toList();
     }
 
     /** The columns of M² from below, M given by its columns from below. */
     static List<FixedPointColumn> squared(List<FixedPointColumn> columns) {
-        return columns.stream().map(column -> of(FixedPointState.combination(columns, column.full(columns.size()))))
-                .toList();
+        return columns.stream().map(column -> column.image(columns)).toList();
     }
 
-    private static FixedPointColumn of(FixedPointState state) {
-        List<Integer> rows = new ArrayList<>();
-        List<BigInteger> values = new ArrayList<>();
-        for (int i = 0; i < state.components().size(); i++) {
-            if (state.components().get(i).signum() != 0) {
-                rows.add(i);
-                values.add(state.components().get(i));
-            }
-        }
-        return new FixedPointColumn(rows, values);
-    }
-
-    private List<BigInteger> full(int size) {
-        BigInteger[] all = new BigInteger[size];
-        java.util.Arrays.fill(all, BigInteger.ZERO);
-        addTo(all, BigInteger.ONE);
-        return List.of(all);
+    /** How many entries are not zero. */
+    int entries() {
+        return rows.length;
     }
 
     /** sums ← sums + weight · column. */
     void addTo(BigInteger[] sums, BigInteger weight) {
-        for (int i = 0; i < rows.size(); i++) {
-            sums[rows.get(i)] = sums[rows.get(i)].add(values.get(i).multiply(weight));
+        for (int i = 0; i < rows.length; i++) {
+            sums[rows[i]] = sums[rows[i]].add(values[i].multiply(weight));
         }
+    }
+
+    /** M times this column, rounded down. */
+    private FixedPointColumn image(List<FixedPointColumn> columns) {
+        BigInteger[] sums = new BigInteger[columns.size()];
+        Arrays.fill(sums, BigInteger.ZERO);
+        for (int i = 0; i < rows.length; i++) {
+            columns.get(rows[i]).addTo(sums, values[i]);
+        }
+        int[] filled = new int[sums.length];
+        int count = 0;
+        for (int i = 0; i < sums.length; i++) {
+            sums[i] = sums[i].shiftRight(FixedPointState.BITS);
+            if (sums[i].signum() != 0) {
+                filled[count++] = i;
+            }
+        }
+        int[] places = Arrays.copyOf(filled, count);
+        return new FixedPointColumn(places, Arrays.stream(places).mapToObj(i -> sums[i]).toArray(BigInteger[]::new));
     }
 }

@@ -67,13 +67,13 @@ record FixedPointState(List<BigInteger> components) {
         return new Ball(center, radius, BITS);
     }
 
-    /** An upper bound on the largest difference of a component from that of another such vector. */
-    Rational distanceAtMost(FixedPointState other) {
+    /** Proved: no component differs by more than this from that of another such vector. False decides nothing. */
+    boolean isWithin(Rational tolerance, FixedPointState other) {
         BigInteger largest = BigInteger.ZERO;
         for (int i = 0; i < components.size(); i++) {
             largest = largest.max(components.get(i).subtract(other.components.get(i)).abs());
         }
-        return new Rational(largest.add(missing().max(other.missing())), ONE);
+        return largest.add(missing().max(other.missing())).compareTo(below(tolerance)) <= 0;
     }
 
     /** The components of Σ column · weight, rounded down. */

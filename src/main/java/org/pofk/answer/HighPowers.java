@@ -107,7 +107,7 @@ public final class HighPowers {
     }
 
     private static boolean hardlyChanges(List<FixedPointState> states, int place) {
-        return states.get(place).distanceAtMost(states.get(place - 1)).compareTo(HABIT) <= 0;
+        return states.get(place).isWithin(HABIT, states.get(place - 1));
     }
 
     private Optional<Stop> stopStepByStep(Output output, List<Rational> values) {

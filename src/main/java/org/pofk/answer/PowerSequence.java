@@ -32,7 +32,7 @@ record PowerSequence(List<FixedPointState> steps, List<FixedPointState> doubling
     static PowerSequence of(Chain chain, int period, Rational tolerance) {
         List<FixedPointColumn> columns = FixedPointColumn.below(chain.matrix());
         FixedPointState start = FixedPointState.below(chain.start());
-        int entries = columns.stream().mapToInt(column -> column.rows().size()).sum();
+        int entries = columns.stream().mapToInt(FixedPointColumn::entries).sum();
         List<FixedPointState> steps = untilSettled(columns, start, Math.min(STEPS, MULTIPLICATIONS / entries), tolerance);
         List<FixedPointState> doubling = chain.size() <= SQUARED_UP_TO
                 ? squared(columns, start)
@@ -52,11 +52,11 @@ record PowerSequence(List<FixedPointState> steps, List<FixedPointState> doubling
     private static List<FixedPointState> untilSettled(List<FixedPointColumn> columns, FixedPointState start, int last,
             Rational tolerance) {
         List<FixedPointState> states = new ArrayList<>(List.of(start));
-        Rational change = Rational.ONE;
-        while (states.size() <= last && change.compareTo(tolerance) > 0) {
+        boolean isSettled = false;
+        while (states.size() <= last && !isSettled) {
             FixedPointState before = states.get(states.size() - 1);
             FixedPointState next = FixedPointState.combination(columns, before.components());
-            change = next.distanceAtMost(before);
+            isSettled = next.isWithin(tolerance, before);
             states.add(next);
         }
         return states;
