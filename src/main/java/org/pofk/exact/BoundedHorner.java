@@ -60,6 +60,7 @@ final class BoundedHorner {
         private final boolean onAxis;
         private final double slope;
         private final double lowest;
+        private final int precision;
         private final long reach;
         private final int reachExponent;
         private BigInteger real;
@@ -78,6 +79,7 @@ final class BoundedHorner {
             this.slope = Logarithms.approximate(modulus) - scale;
             this.reachExponent = Math.max(0, modulus.bitLength() - REACH_BITS);
             this.reach = Ball.shiftRightUp(modulus, reachExponent).longValueExact();
+            this.precision = precision;
             this.lowest = largestTerm() - precision;
         }
 
@@ -107,7 +109,7 @@ final class BoundedHorner {
                 valueStep(power, drop);
             }
             return new Evaluation(real, imaginary, error, unit(0), realSlope, imaginarySlope, slopeError, unit(1),
-                    (int) Math.ceil(lowest), degree);
+                    (int) Math.ceil(lowest) + precision, degree);
         }
 
         /** d ← d z + h, in the unit of h. */

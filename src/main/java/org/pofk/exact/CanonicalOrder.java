@@ -3,6 +3,7 @@ package org.pofk.exact;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
+import java.util.function.Function;
 
 /**
  * The order of roots. Real numbers: descending, decided by refinement, which ends because they differ. Numbers of the
@@ -15,6 +16,7 @@ import java.util.List;
  * follows angle and modulus wherever these differ by more than that.
  */
 final class CanonicalOrder {
+    private static final int COARSE_BITS = 48;
     private static final int BITS = 96;
     private static final int TIE_BITS = 64;
 
@@ -39,10 +41,34 @@ final class CanonicalOrder {
     }
 
     static List<EnclosedComplex> byAngle(List<EnclosedComplex> above) {
+        List<EnclosedComplex> guess = above.stream().sorted(Comparator.comparingDouble(z -> {
+            ComplexBall coarse = z.enclose(COARSE_BITS);
+            return Math.atan2(coarse.imaginary().middle().approximate(), coarse.real().middle().approximate());
+        })).toList();
+        return areFarApart(guess) ? guess : byAngleWithTies(above);
+    }
+
+    /** Proved: each angle is above the one before by 2^−TIE_BITS at least. Cheaper than angles; most often enough. */
+    private static boolean areFarApart(List<EnclosedComplex> ordered) {
+        Rational tolerance = Rational.TWO.pow(-TIE_BITS / 2);
+        for (int i = 1; i < ordered.size(); i++) {
+            ComplexBall before = ordered.get(i - 1).enclose(COARSE_BITS);
+            ComplexBall next = ordered.get(i).enclose(COARSE_BITS);
+            // |z| |w| sin of the difference, which is above its sine
+            Ball cross = before.real().times(next.imaginary()).minus(before.imaginary().times(next.real()));
+            Rational least = before.modulus().upper().times(next.modulus().upper()).times(tolerance);
+            if (cross.lower().compareTo(least) <= 0) {
+                return false;
+            }
+        }
+        return true;
+    }
+
+    private static List<EnclosedComplex> byAngleWithTies(List<EnclosedComplex> above) {
         List<EnclosedComplex> ordered = new ArrayList<>();
-        for (List<Keyed> sameAngle : groups(keyed(above, z -> z.argument()), Comparator.naturalOrder())) {
+        for (List<Keyed> sameAngle : groups(keyed(above, EnclosedComplex::argument), Comparator.naturalOrder())) {
             List<EnclosedComplex> group = sameAngle.stream().map(Keyed::number).toList();
-            for (List<Keyed> same : groups(keyed(group, z -> z.modulus()), Comparator.reverseOrder())) {
+            for (List<Keyed> same : groups(keyed(group, EnclosedComplex::modulus), Comparator.reverseOrder())) {
                 ordered.addAll(byParts(same.stream().map(Keyed::number).toList()));
             }
         }
@@ -53,7 +79,7 @@ final class CanonicalOrder {
     }
 
     private static List<Keyed> keyed(List<EnclosedComplex> numbers,
-            java.util.function.Function<EnclosedComplex, Enclosed> key) {
+            Function<EnclosedComplex, Enclosed> key) {
         if (numbers.size() < 2) {
             return numbers.stream().map(z -> new Keyed(z, Rational.ZERO)).toList();
         }

@@ -6,10 +6,10 @@ import java.util.OptionalInt;
 /**
  * p(z) = (real + i imaginary ± error) · 2^unit and p′(z) likewise, as found by {@link BoundedHorner}. Certified.
  *
- * @param noise log₂ of the size that rounding has in p(z), roughly; for choosing precisions only
+ * @param largest log₂ of the largest term of p(z), roughly; for choosing precisions only
  */
 record Evaluation(BigInteger real, BigInteger imaginary, long error, int unit,
-        BigInteger realSlope, BigInteger imaginarySlope, long slopeError, int slopeUnit, int noise, int degree) {
+        BigInteger realSlope, BigInteger imaginarySlope, long slopeError, int slopeUnit, int largest, int degree) {
 
     /** |p(z)| ≤ 2^this. */
     int valueExponent() {
@@ -38,6 +38,11 @@ record Evaluation(BigInteger real, BigInteger imaginary, long error, int unit,
     /** Rounding hides what p(z) is. */
     boolean isNoise() {
         return real.abs().max(imaginary.abs()).bitLength() <= bitLength(error) + 1;
+    }
+
+    /** Bits by which p′(z) lies below the largest term of p(z), roughly; for choosing precisions only. */
+    int loss() {
+        return largest - slopeExponent().orElse(0);
     }
 
     /** The disc of radius n·|p/p′| around z holds at least one root: it has radius ≤ 2^this. Empty as above. */

@@ -6,9 +6,10 @@ import java.math.BigInteger;
  * A disc that holds exactly one root ξ, and room around it: every other root is at least 2^gapExponent from ξ, and
  * radius · n ≤ 2^−8 · 2^gapExponent, so that Newton's iteration from the center converges. Certified.
  *
- * @param loss bits by which p′ at the root lies below the rounding of p at precision 0; for choosing precisions only
+ * @param loss as in {@link Evaluation#loss}
  */
 record Isolated(Disc disc, int gapExponent, int loss) {
+    private static final int LEAST_PRECISION = 32;
 
     /**
      * The same root in a disc of radius at most 2^goal, by Newton's iteration. With e = z − ξ and S = Σ 1/(z − ξ_j) over
@@ -29,22 +30,35 @@ record Isolated(Disc disc, int gapExponent, int loss) {
     }
 
     private Isolated step(BoundedHorner polynomial, int goal, int extraPrecision) {
-        int degreeLog = Evaluation.ceilingLog(polynomial.degree());
-        int radius = disc.radiusExponent();
-        int exactStep = 2 * radius + degreeLog - gapExponent + 2;
-        int wanted = Math.max(exactStep, goal - 3);
-        int precision = Math.max(32, loss + degreeLog + 6 - wanted) + extraPrecision;
+        int wanted = Math.max(exactStep(polynomial.degree()), goal - 3);
+        int precision = Math.max(LEAST_PRECISION, precisionFor(wanted, polynomial.degree()) + extraPrecision);
         Evaluation value = polynomial.at(disc.x(), disc.y(), disc.scale(), precision);
-        if (value.slopeExponent().isEmpty()) {
-            return this;
-        }
-        int slope = value.slopeExponent().getAsInt();
+        return value.slopeExponent().isPresent() ? after(value, wanted) : this;
+    }
+
+    private int precisionFor(int wanted, int degree) {
+        return loss + Evaluation.ceilingLog(degree) + 6 - wanted;
+    }
+
+    /** What the exact step leaves is at most 2^this. */
+    private int exactStep(int degree) {
+        return 2 * disc.radiusExponent() + Evaluation.ceilingLog(degree) - gapExponent + 2;
+    }
+
+    /** As close as one step from the center gets; p and p′ there are known, p′ not zero. */
+    Isolated after(Evaluation value) {
+        Isolated next = after(value, exactStep(value.degree()));
+        return next.disc.radiusExponent() < disc.radiusExponent() ? next : this;
+    }
+
+    private Isolated after(Evaluation value, int wanted) {
+        int slope = value.slopeExponent().orElseThrow();
         int scale = Math.max(1, 3 - wanted);
         Evaluation.Correction correction = value.correction(scale);
         int correctionExponent = correction.x().abs().add(correction.y().abs()).bitLength() + 1 - scale;
         int rounding = Math.max(value.errorExponent(), correctionExponent + value.slopeErrorExponent()) + 1 - slope;
-        int newRadius = Math.max(Math.max(exactStep, rounding), 2 - scale) + 2;
-        return new Isolated(moved(correction, scale, newRadius), gapExponent, value.noise() + precision - slope);
+        int radius = Math.max(Math.max(exactStep(value.degree()), rounding), 2 - scale) + 2;
+        return new Isolated(moved(correction, scale, radius), gapExponent, value.loss());
     }
 
     private Disc moved(Evaluation.Correction correction, int scale, int radiusExponent) {

@@ -4,7 +4,7 @@ import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import java.util.OptionalInt;
+import java.util.stream.Stream;
 
 /**
  * Tries to isolate all roots from guesses. Certified: n pairwise disjoint discs, each of radius n·|p/p′| around its
@@ -13,42 +13,45 @@ import java.util.OptionalInt;
  * misses zero. n²/2 comparisons and some n evaluations.
  */
 final class Isolation {
-    private static final int FIRST_PRECISION = 128;
-    private static final int MOST_ROUNDS = 12;
-    private static final int BITS_PER_DEGREE = 4;
+    private static final int MOST_ROUNDS = 10;
+    /** Bits below its largest term at which p is known in the end: enough for one step from a start in doubles. */
+    private static final int FIRST_ACCURACY = 110;
+    private static final int LEAST_PRECISION = 64;
+    private static final int BITS_PER_DEGREE = 8;
+    /** Relative size of a disc that needs no closer look at p, however small p is; doubled from round to round. */
+    private static final int FINE = 48;
+    /** Makes a sum of exponents fall when one of the points leaves it. */
+    private static final int FAR = 1 << 20;
     /** Room that Newton's iteration needs around a disc, see {@link Isolated}. */
     private static final int ROOM = 8;
 
     private final BoundedHorner polynomial;
     private final List<Point> points;
     private final int room;
+    private int precision;
+    private int round;
 
     /** A center on its way to a root. Mutable. */
     private static final class Point {
         private Disc disc;
-        private int precision;
-        private int loss;
+        private Optional<Evaluation> value = Optional.empty();
         private boolean isSettled;
         private int gapExponent;
 
-        Point(Start start, int precision) {
+        Point(Start start) {
             disc = new Disc(start.x(), start.y(), start.scale(), start.doubtExponent());
-            this.precision = precision;
         }
     }
 
-    private Isolation(BoundedHorner polynomial, List<Start> starts, int precision) {
+    private Isolation(BoundedHorner polynomial, List<Start> starts) {
         this.polynomial = polynomial;
-        this.points = starts.stream().map(start -> new Point(start, precision)).toList();
+        this.points = starts.stream().map(Point::new).toList();
         this.room = ROOM + Evaluation.ceilingLog(polynomial.degree());
+        this.precision = FIRST_ACCURACY + room;
     }
 
     /** The roots on the axis and above it; empty when the guesses don't lead to disjoint discs. */
     static Optional<List<Isolated>> attempt(BoundedHorner polynomial, List<Start> all) {
-        return attempt(polynomial, all, FIRST_PRECISION);
-    }
-
-    static Optional<List<Isolated>> attempt(BoundedHorner polynomial, List<Start> all, int precision) {
         List<Start> onAxis = all.stream().filter(Start::mayBeReal).map(Start::onAxis).toList();
         List<Start> above = all.stream().filter(s -> !s.mayBeReal() && s.isAbove()).toList();
         if (onAxis.size() + 2 * above.size() != polynomial.degree()) {
@@ -59,59 +62,71 @@ final class Isolation {
         if (starts.stream().anyMatch(s -> s.x().signum() == 0 && s.y().signum() == 0)) {
             return Optional.empty();
         }
-        return new Isolation(polynomial, starts, precision).settle();
+        return new Isolation(polynomial, starts).settle();
     }
 
     private Optional<List<Isolated>> settle() {
-        int before = Integer.MAX_VALUE;
-        int patience = 2;
-        for (int round = 0; round < MOST_ROUNDS; round++) {
-            points.stream().filter(point -> !point.isSettled).forEach(this::enclose);
+        findGaps();
+        // guesses that doubt themselves are no use: save the evaluations
+        boolean isHopeless = open().count() > Math.max(2, points.size() / 4);
+        points.forEach(point -> point.isSettled = false);
+        long before = Long.MAX_VALUE;
+        for (round = 0; round < MOST_ROUNDS && !isHopeless; round++) {
+            open().forEach(this::enclose);
             findGaps();
-            int open = (int) points.stream().filter(point -> !point.isSettled).count();
-            if (open == 0) {
-                return Optional.of(points.stream()
-                        .map(point -> new Isolated(point.disc, point.gapExponent, point.loss)).toList());
+            if (open().findAny().isEmpty()) {
+                return Optional.of(points.stream().map(Isolation::isolated).toList());
             }
-            patience -= open < before ? 0 : 1;
-            if (patience == 0) {
-                return Optional.empty();
-            }
-            before = open;
-            points.stream().filter(point -> !point.isSettled).forEach(this::move);
+            long radii = open().mapToLong(point -> point.disc.radiusExponent() + FAR).sum();
+            isHopeless = radii >= before;
+            before = radii;
+            open().forEach(this::move);
         }
         return Optional.empty();
     }
 
-    /** Evaluates with more precision as long as rounding hides p, within what a polynomial of this degree may need. */
-    private Evaluation evaluate(Point point) {
-        Disc disc = point.disc;
-        Evaluation value = polynomial.at(disc.x(), disc.y(), disc.scale(), point.precision);
-        while ((value.isNoise() || value.slopeExponent().isEmpty())
-                && point.precision < FIRST_PRECISION + BITS_PER_DEGREE * polynomial.degree()) {
-            point.precision *= 2;
-            value = polynomial.at(disc.x(), disc.y(), disc.scale(), point.precision);
-        }
-        return value;
+    private Stream<Point> open() {
+        return points.stream().filter(point -> !point.isSettled);
     }
 
-    /** Gives the point the disc that p/p′ proves. */
+    private static Isolated isolated(Point point) {
+        Evaluation value = point.value.orElseThrow();
+        return new Isolated(point.disc, point.gapExponent, value.loss()).after(value);
+    }
+
+    /**
+     * Gives the point the disc that p/p′ proves, with more precision as long as rounding hides them, within what a
+     * polynomial of this degree may need. The next point, often a neighbour, starts with what this one needed.
+     */
     private void enclose(Point point) {
-        Evaluation value = evaluate(point);
-        OptionalInt radius = value.radiusExponent();
+        int most = FIRST_ACCURACY + BITS_PER_DEGREE * polynomial.degree() << round;
         Disc disc = point.disc;
-        point.disc = new Disc(disc.x(), disc.y(), disc.scale(), radius.orElse(Integer.MAX_VALUE / 4));
-        point.loss = value.noise() + point.precision - value.slopeExponent().orElse(0);
+        Evaluation value = polynomial.at(disc.x(), disc.y(), disc.scale(), precision);
+        while (isHidden(value, disc) && precision < most) {
+            precision += precision / 2;
+            value = polynomial.at(disc.x(), disc.y(), disc.scale(), precision);
+        }
+        int radius = value.radiusExponent().orElse(Integer.MAX_VALUE / 4);
+        point.disc = new Disc(disc.x(), disc.y(), disc.scale(), radius);
+        point.value = Optional.of(value);
+        precision = value.slopeExponent().isPresent()
+                ? Math.max(LEAST_PRECISION, value.loss() + FIRST_ACCURACY + room)
+                : FIRST_ACCURACY + room;
+    }
+
+    private boolean isHidden(Evaluation value, Disc disc) {
+        return value.slopeExponent().isEmpty()
+                || value.isNoise() && value.radiusExponent().orElseThrow() > disc.leastExponent() - (FINE << round);
     }
 
     /** One step of Newton's iteration, where rounding doesn't hide p. */
     private void move(Point point) {
-        Evaluation value = evaluate(point);
+        Evaluation value = point.value.orElseThrow();
         if (value.isNoise() || value.slopeExponent().isEmpty()) {
             return;
         }
         Disc disc = point.disc;
-        int scale = Math.max(disc.scale(), point.precision - disc.leastExponent());
+        int scale = Math.max(disc.scale(), FIRST_ACCURACY - disc.leastExponent());
         Evaluation.Correction correction = value.correction(scale);
         BigInteger x = disc.x().shiftLeft(scale - disc.scale()).subtract(correction.x());
         BigInteger y = disc.isOnAxis()

@@ -22,12 +22,18 @@ final class RootIsolation {
         BoundedHorner horner = new BoundedHorner(whole);
         List<Start> starts = AberthInDoubles.starts(whole);
         Optional<List<Isolated>> isolated = Isolation.attempt(horner, starts);
+        if (isolated.isEmpty()) {
+            isolated = Isolation.attempt(horner, TridiagonalStarts.of(polynomial));
+        }
         PreciseAberth precise = new PreciseAberth(horner, NewtonPolygon.circles(whole), starts);
         for (int precision = FIRST_PRECISION; isolated.isEmpty(); precision *= 2) {
             if (precision == SUSPICIOUS_PRECISION) {
                 requireSquareFree(polynomial);
             }
-            isolated = Isolation.attempt(horner, precise.starts(precision), precision);
+            if (precision > Raising.MOST_BITS) {
+                throw new AssertionError("roots not isolated at " + precision + " bits: " + polynomial);
+            }
+            isolated = Isolation.attempt(horner, precise.starts(precision));
         }
         return located(horner, isolated.get());
     }
