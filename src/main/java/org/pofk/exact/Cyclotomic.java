@@ -103,12 +103,21 @@ public final class Cyclotomic {
         }
     }
 
-    /** The product of the cyclotomic polynomials among the candidates that divide a square-free polynomial. */
-    static List<IntegerPolynomial> factorsOf(IntegerPolynomial squareFree, Collection<Integer> candidates) {
+    /**
+     * The cyclotomic polynomials that divide a square-free polynomial without the roots ±1, the likely orders tried
+     * first. Their roots come with their inverses, so only common roots with the reversed polynomial count, and
+     * mostly there are none.
+     */
+    static List<IntegerPolynomial> factorsOf(IntegerPolynomial squareFree, Collection<Integer> likelyOrders) {
+        IntegerPolynomial rest = squareFree.greatestCommonDivisor(squareFree.reversed());
+        List<Integer> orders = new ArrayList<>(likelyOrders);
+        orders.addAll(ordersUpToDegree(rest.degree()));
         List<IntegerPolynomial> found = new ArrayList<>();
-        for (int order : candidates) {
-            if (divides(order, squareFree)) {
-                found.add(integerPolynomial(order));
+        for (int order : orders) {
+            if (divides(order, rest)) {
+                IntegerPolynomial factor = integerPolynomial(order);
+                found.add(factor);
+                rest = rest.quotientBy(factor).orElseThrow();
             }
         }
         return found;

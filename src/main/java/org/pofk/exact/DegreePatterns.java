@@ -16,10 +16,19 @@ final class DegreePatterns {
     private DegreePatterns() {
     }
 
-    /** Whether the degrees modulo up to 40 primes, ending after {@code patience} of no use in a row, prove it. */
+    /**
+     * Whether the degrees modulo up to 40 primes prove it, ending after {@code patience} in a row that brought nothing.
+     *
+     * @param squareFree without a rational root, of degree 2 at least
+     */
     static boolean proveIrreducible(IntegerPolynomial squareFree, int patience) {
         BitSet possible = new BitSet();
         possible.set(0, squareFree.degree() + 1);
+        possible.clear(1);
+        possible.clear(squareFree.degree() - 1);
+        if (possible.cardinality() == 2) {
+            return true;
+        }
         int useless = 0;
         int used = 0;
         for (int prime = FIRST_PRIME; used < PRIMES_AT_MOST && useless < patience;

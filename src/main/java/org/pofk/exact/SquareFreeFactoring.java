@@ -3,7 +3,6 @@ package org.pofk.exact;
 import java.util.ArrayList;
 import java.util.Collection;
 import java.util.List;
-import java.util.Optional;
 import org.pofk.exact.Factorization.Irreducible;
 
 /**
@@ -15,7 +14,9 @@ final class SquareFreeFactoring {
     /** Up to here full factorization takes less than half a second. */
     static final int FACTORED_DEGREE = 200;
     /** Where full factorization can follow, primes that bring nothing are given up soon. */
-    private static final int PATIENCE = 5;
+    private static final int SHORT_PATIENCE = 4;
+    /** A factor of degree 2 would seem possible by chance modulo 12 primes in a row for one polynomial in a thousand. */
+    private static final int LONG_PATIENCE = 12;
 
     /** A factor, and whether it is known to have none of its own. */
     record Piece(IntegerPolynomial polynomial, Irreducible irreducible) {
@@ -44,19 +45,15 @@ final class SquareFreeFactoring {
         if (!rest.isConstant()) {
             rest = divideOut(rest, RationalRoots.of(rest).stream().map(RationalRoots::linear).toList(), pieces);
         }
-        rest = divideOut(rest, Cyclotomic.factorsOf(rest, likelyOrders), pieces);
-        return divideOut(rest, Cyclotomic.factorsOf(rest, Cyclotomic.ordersUpToDegree(rest.degree())), pieces);
+        return divideOut(rest, Cyclotomic.factorsOf(rest, likelyOrders), pieces);
     }
 
     private static IntegerPolynomial divideOut(IntegerPolynomial polynomial, List<IntegerPolynomial> factors,
             List<Piece> pieces) {
         IntegerPolynomial rest = polynomial;
         for (IntegerPolynomial factor : factors) {
-            Optional<IntegerPolynomial> quotient = rest.quotientBy(factor);
-            if (quotient.isPresent()) {
-                pieces.add(Piece.proved(factor));
-                rest = quotient.get();
-            }
+            pieces.add(Piece.proved(factor));
+            rest = rest.quotientBy(factor).orElseThrow();
         }
         return rest;
     }
@@ -109,8 +106,7 @@ final class SquareFreeFactoring {
             return List.of();
         }
         boolean small = polynomial.degree() <= FACTORED_DEGREE;
-        if (polynomial.degree() <= 3
-                || DegreePatterns.proveIrreducible(polynomial, small ? PATIENCE : Integer.MAX_VALUE)) {
+        if (DegreePatterns.proveIrreducible(polynomial, small ? SHORT_PATIENCE : LONG_PATIENCE)) {
             return List.of(Piece.proved(polynomial));
         }
         return small
