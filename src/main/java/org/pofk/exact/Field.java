@@ -51,4 +51,12 @@ public interface Field<E> {
     default Polynomial<E> greatestCommonDivisor(Polynomial<E> a, Polynomial<E> b) {
         return Polynomial.euclid(this, a, b);
     }
+
+    /**
+     * The b of degree below that of the modulus with a·b ≡ 1; an {@link ArithmeticException} when they have a common
+     * root. The modulus isn't constant, the degree of a below its. A field with a fast way overrides it.
+     */
+    default Polynomial<E> inverseModulo(Polynomial<E> a, Polynomial<E> modulus) {
+        return Polynomial.inverseByEuclid(this, a, modulus);
+    }
 }

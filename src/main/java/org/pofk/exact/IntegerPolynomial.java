@@ -251,6 +251,31 @@ record IntegerPolynomial(List<BigInteger> coefficients) {
         return larger;
     }
 
+    /**
+     * The inverse 1/c · s, with s · this ≡ c modulo a polynomial of higher degree, by Euclid's
+     * algorithm without fractions: one common content a step instead of a gcd per coefficient. Nothing when the two
+     * have a common root.
+     */
+    Optional<Polynomial<Rational>> inverseModulo(IntegerPolynomial modulus) {
+        IntegerPolynomial larger = modulus;
+        IntegerPolynomial largerCofactor = new IntegerPolynomial(List.of());
+        IntegerPolynomial smaller = this;
+        IntegerPolynomial smallerCofactor = ofIntegers(1);
+        while (!smaller.isConstant()) {
+            PseudoDivision division = larger.pseudoDividedBy(smaller);
+            IntegerPolynomial next = largerCofactor.times(new IntegerPolynomial(List.of(division.factor)))
+                    .plus(division.quotient.times(smallerCofactor).negate());
+            BigInteger common = division.remainder.content().gcd(next.content());
+            larger = smaller;
+            largerCofactor = smallerCofactor;
+            smaller = division.remainder.dividedBy(common);
+            smallerCofactor = next.dividedBy(common);
+        }
+        return smaller.isZero()
+                ? Optional.empty()
+                : Optional.of(PrimitiveForm.polynomial(Rational.of(smaller.leading()).inverse(), smallerCofactor));
+    }
+
     /** The image modulo a prime below 2^31, coefficients in [0, prime). */
     ModularPolynomial modulo(int prime) {
         BigInteger modulus = BigInteger.valueOf(prime);

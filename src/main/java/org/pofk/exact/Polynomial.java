@@ -255,6 +255,29 @@ public record Polynomial<E>(Field<E> field, List<E> coefficients) {
         return larger.monic();
     }
 
+    /** Euclid's algorithm with monic remainders, which keeps them as short as they can be. */
+    static <E> Polynomial<E> inverseByEuclid(Field<E> field, Polynomial<E> a, Polynomial<E> modulus) {
+        Polynomial<E> larger = modulus;
+        Polynomial<E> largerCofactor = zero(field);
+        Polynomial<E> smaller = a;
+        Polynomial<E> smallerCofactor = one(field);
+        while (!smaller.isZero()) {
+            E scale = field.inverse(smaller.leading());
+            smaller = smaller.times(scale);
+            smallerCofactor = smallerCofactor.times(scale);
+            if (smaller.isConstant()) {
+                return smallerCofactor;
+            }
+            Polynomial.Division<E> division = larger.dividedBy(smaller);
+            Polynomial<E> nextCofactor = largerCofactor.minus(division.quotient().times(smallerCofactor));
+            larger = smaller;
+            largerCofactor = smallerCofactor;
+            smaller = division.remainder();
+            smallerCofactor = nextCofactor;
+        }
+        throw new ArithmeticException("no inverse: a common root with the modulus");
+    }
+
     /** Written out for the same reason as in {@link Rational}. */
     @Override
     public boolean equals(Object other) {

@@ -72,4 +72,12 @@ public enum RationalField implements Field<Rational> {
         }
         return PrimitiveForm.monic(PrimitiveForm.partOf(a).greatestCommonDivisor(PrimitiveForm.partOf(b)));
     }
+
+    @Override
+    public Polynomial<Rational> inverseModulo(Polynomial<Rational> a, Polynomial<Rational> modulus) {
+        PrimitiveForm form = PrimitiveForm.of(a);
+        return form.part().inverseModulo(PrimitiveForm.partOf(modulus))
+                .orElseThrow(() -> new ArithmeticException("no inverse: a common root with the modulus"))
+                .times(form.content().inverse());
+    }
 }

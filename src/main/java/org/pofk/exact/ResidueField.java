@@ -77,27 +77,12 @@ public record ResidueField<E>(Polynomial<E> modulus) implements Field<Polynomial
     }
 
     /**
-     * 1/a by the extended Euclidean algorithm; an {@link ArithmeticException} when a vanishes at some root of q.
-     * About d² operations, on numbers whose length grows d-fold: meant for small d.
+     * 1/a by the extended Euclidean algorithm; an {@link ArithmeticException} when a vanishes at some root of q. About
+     * d² operations on numbers whose length grows d-fold: meant for small d.
      */
     @Override
     public Polynomial<E> inverse(Polynomial<E> a) {
-        Polynomial<E> larger = modulus;
-        Polynomial<E> smaller = residue(a);
-        Polynomial<E> largerCofactor = zero();
-        Polynomial<E> smallerCofactor = one();
-        while (!smaller.isConstant()) {
-            Polynomial.Division<E> division = larger.dividedBy(smaller);
-            Polynomial<E> nextCofactor = largerCofactor.minus(division.quotient().times(smallerCofactor));
-            larger = smaller;
-            smaller = division.remainder();
-            largerCofactor = smallerCofactor;
-            smallerCofactor = nextCofactor;
-        }
-        if (smaller.isZero()) {
-            throw new ArithmeticException("no inverse: the element vanishes at a root of the modulus");
-        }
-        return residue(smallerCofactor.times(base().inverse(smaller.leading())));
+        return base().inverseModulo(residue(a), modulus);
     }
 
     /**
