@@ -182,13 +182,13 @@ class ClosedFormTest {
         assertTrue(form.exactFormula().isEmpty());
     }
 
-    /** The exact formula as a reader works it out, against the exact series; 250 random transforms. */
+    /** The exact formula as a reader works it out, against the exact series; 120 random transforms. */
     @Test
     void exactFormulasGiveTheSeries() {
         Random random = new Random(7_301);
         int exact = 0;
         int certified = 0;
-        for (int run = 0; run < 250; run++) {
+        for (int run = 0; run < 120; run++) {
             RandomTransform sample = RandomTransform.of(random);
             ClosedForm form = Samples.closedForm(sample.y(), sample.factors());
             assertConventions(form);
@@ -199,8 +199,8 @@ class ClosedFormTest {
                 certified++;
             }
         }
-        assertTrue(exact > 80, "exact: " + exact);
-        assertTrue(certified > 40, "not exact: " + certified);
+        assertTrue(exact > 40, "exact: " + exact);
+        assertTrue(certified > 20, "not exact: " + certified);
     }
 
     /** Every constant's enclosure agrees with its short form. */
@@ -208,7 +208,7 @@ class ClosedFormTest {
     void enclosuresHoldTheirShortForms() {
         Random random = new Random(99);
         int compared = 0;
-        for (int run = 0; run < 60; run++) {
+        for (int run = 0; run < 40; run++) {
             RandomTransform sample = RandomTransform.of(random);
             for (Mode mode : Samples.closedForm(sample.y(), sample.factors()).modes()) {
                 for (RealValue value : constants(mode)) {
@@ -220,7 +220,7 @@ class ClosedFormTest {
                 }
             }
         }
-        assertTrue(compared > 200, "compared: " + compared);
+        assertTrue(compared > 120, "compared: " + compared);
     }
 
     private static List<RealValue> constants(Mode mode) {
