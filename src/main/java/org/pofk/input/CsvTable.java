@@ -26,7 +26,7 @@ final class CsvTable {
     }
 
     static List<List<Node.Scalar>> rows(Source source, char separator) throws RefusedException {
-        YamlSyntax.refuseSpecialCharacters(source, new Faults());
+        ControlCharacters.refuse(source, new Faults());
         CsvTable table = new CsvTable(source, separator);
         while (table.at < source.text().length()) {
             table.readCell();

@@ -5,15 +5,16 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import org.pofk.chain.Model.Remark;
+import org.pofk.text.Position;
 
 /** A mapping whose keys are words of the file format. Keys that begin with {@code x-} are ignored. */
 final class Fields {
     private static final List<String> REMARKS = List.of("note", "source");
 
-    private final Map<String, Node> values;
+    private final Map<String, Node.Entry> entries;
 
-    private Fields(Map<String, Node> values) {
-        this.values = values;
+    private Fields(Map<String, Node.Entry> entries) {
+        this.entries = entries;
     }
 
     /**
@@ -21,16 +22,16 @@ final class Fields {
      * remark on {@code on}.
      */
     static Fields of(Node.Mapping mapping, String on, List<String> known, Reading reading) {
-        Map<String, Node> values = new LinkedHashMap<>();
+        Map<String, Node.Entry> entries = new LinkedHashMap<>();
         for (Node.Entry entry : mapping.entries()) {
             if (known.contains(entry.name())) {
-                values.put(entry.name(), entry.value());
+                entries.put(entry.name(), entry);
             } else if (!takeRemark(entry, on, reading) && !entry.name().startsWith("x-")) {
                 reading.fault(entry.key().position(), "unknown-key", "the key '" + Words.shortened(entry.name())
                         + "' isn't known here" + suggestion(known, entry.name(), reading));
             }
         }
-        return new Fields(values);
+        return new Fields(entries);
     }
 
     static boolean isRemark(Node.Entry entry) {
@@ -53,6 +54,11 @@ final class Fields {
     }
 
     Optional<Node> value(String key) {
-        return Optional.ofNullable(values.get(key));
+        return Optional.ofNullable(entries.get(key)).map(Node.Entry::value);
+    }
+
+    /** Where the key stands. */
+    Optional<Position> position(String key) {
+        return Optional.ofNullable(entries.get(key)).map(entry -> entry.key().position());
     }
 }

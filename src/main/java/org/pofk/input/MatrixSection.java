@@ -25,8 +25,8 @@ final class MatrixSection {
     private final Optional<List<? extends List<? extends Node>>> cells;
     private final List<Node.Scalar> names;
 
-    private MatrixSection(Node.Mapping written, Optional<Path> folder, Reading reading) {
-        this.place = written.position();
+    private MatrixSection(Node.Mapping written, Position place, Optional<Path> folder, Reading reading) {
+        this.place = place;
         this.reading = reading;
         this.fields = Fields.of(written, "matrix", KEYS, reading);
         this.orientation = fields.value("orientation")
@@ -39,8 +39,13 @@ final class MatrixSection {
         checkOneSource();
     }
 
-    static MatrixSection read(Node.Mapping written, Optional<Path> folder, Reading reading) {
-        return new MatrixSection(written, folder, reading);
+    /**
+     * Reads the section.
+     *
+     * @param place where its key stands
+     */
+    static MatrixSection read(Node.Mapping written, Position place, Optional<Path> folder, Reading reading) {
+        return new MatrixSection(written, place, folder, reading);
     }
 
     Optional<Orientation> orientation() {
@@ -71,7 +76,7 @@ final class MatrixSection {
         }
         if (rows.get().size() != states.size()) {
             reading.fault(place, "size-differs", "the matrix has " + rows.get().size()
-                    + " rows and columns, but there are " + states.size() + " states; these must be equal in number");
+                    + " rows and columns, but " + states.count() + "; these must be equal in number");
             return new SparseMatrix(nothing);
         }
         Optional<List<Integer>> found = order(states);

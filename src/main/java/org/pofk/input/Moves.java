@@ -23,7 +23,7 @@ final class Moves {
 
     static Moves read(Fields fields, Node.Mapping root, Optional<Path> folder, Reading reading) {
         if (fields.value("transitions").isPresent() == fields.value("matrix").isPresent()) {
-            reading.fault(fields.value("matrix").map(Node::position).orElse(root.position()), "moves-source",
+            reading.fault(fields.position("matrix").orElse(root.position()), "moves-source",
                     fields.value("matrix").isPresent()
                             ? "the file has both 'transitions' and 'matrix'; leave one of them out"
                             : "the file lacks the moves; write transitions: or matrix:");
@@ -32,7 +32,7 @@ final class Moves {
                 .flatMap(node -> reading.mapping(node, "'transitions'", "{STATE: {OTHER: 1/20, STATE: rest}}"));
         Optional<MatrixSection> matrix = fields.value("matrix")
                 .flatMap(node -> reading.mapping(node, "'matrix'", "{orientation: rows, entries: [[…], …]}"))
-                .map(node -> MatrixSection.read(node, folder, reading));
+                .map(node -> MatrixSection.read(node, fields.position("matrix").orElseThrow(), folder, reading));
         return new Moves(transitions, matrix, states(fields, transitions, matrix, reading), reading);
     }
 

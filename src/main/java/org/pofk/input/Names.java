@@ -13,8 +13,17 @@ final class Names {
     /** The name in canonical form. */
     static String canonical(String text) {
         String stripped = text.strip();
-        return Normalizer.isNormalized(stripped, Normalizer.Form.NFC) ? stripped
+        return isAscii(stripped) || Normalizer.isNormalized(stripped, Normalizer.Form.NFC) ? stripped
                 : Normalizer.normalize(stripped, Normalizer.Form.NFC);
+    }
+
+    private static boolean isAscii(String text) {
+        for (int i = 0; i < text.length(); i++) {
+            if (text.charAt(i) > 0x7F) {
+                return false;
+            }
+        }
+        return true;
     }
 
     /** Letters, digits and underscores, no digit first: what may stand in an expression without quotes. */

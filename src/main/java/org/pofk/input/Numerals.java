@@ -88,9 +88,9 @@ final class Numerals {
                     + "' has an exponent outside -400 to 400");
             return Optional.empty();
         }
-        Rational value = Rational.of(new BigDecimal(decimal.group(1)))
-                .times(Rational.of(10).pow(exponent.get()));
-        return Optional.of(decimal.group(3) == null ? value : value.times(Rational.of(1, 100)));
+        BigDecimal digits = new BigDecimal(decimal.group(1));
+        int percent = decimal.group(3) == null ? 0 : 2;
+        return Optional.of(Rational.of(digits.scaleByPowerOfTen(exponent.get() - percent)));
     }
 
     /** The written exponent, zero when there is none; nothing when it is out of range. */

@@ -64,8 +64,8 @@ final class StartSection {
         List<Optional<Share>> shares = new ArrayList<>();
         if (list.items().size() != states.size()) {
             reading.fault(list.position(), "size-differs", "the start has "
-                    + Words.count(list.items().size(), "number", "numbers") + ", but there are "
-                    + Words.count(states.size(), "state", "states") + "; these must be equal in number");
+                    + Words.count(list.items().size(), "number", "numbers") + ", but "
+                    + states.count() + "; these must be equal in number");
             return List.of();
         }
         for (Node item : list.items()) {

@@ -90,6 +90,12 @@ final class States {
         return places.containsKey(name);
     }
 
+    /** {@code there are 3 states}, with the line that lists them. */
+    String count() {
+        return (listed.isEmpty() ? "there are " : "line " + listed.get(0).position().line() + " lists ")
+                + Words.count(size(), "state", "states");
+    }
+
     /** The place of a state that is known to be there. */
     int place(String name) {
         return places.get(name);

@@ -54,14 +54,16 @@ final class YamlComposer {
     private void readEvents() throws RefusedException {
         LoadSettings settings = LoadSettings.builder().setUseMarks(true).setBufferSize(source.text().length() + 1)
                 .setCodePointLimit(source.text().length() + 1).build();
-        YamlSyntax.refuseSpecialCharacters(source, faults);
+        ControlCharacters.refuse(source, faults);
+        Optional<Event> last = Optional.empty();
         try {
             ParserImpl parser = new ParserImpl(settings, new StreamReader(settings, source.text()));
             while (parser.hasNext()) {
-                take(parser.next());
+                last = Optional.of(parser.next());
+                take(last.get());
             }
         } catch (YamlEngineException syntax) {
-            YamlSyntax.explain(syntax, source, faults);
+            YamlSyntax.explain(syntax, last, source, faults);
             faults.refuseIfAny();
         }
     }
