@@ -1,0 +1,88 @@
+package org.pofk.answer;
+
+import java.util.ArrayList;
+import java.util.HashSet;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.Set;
+import java.util.TreeMap;
+import java.util.stream.IntStream;
+import org.pofk.chain.Chain;
+import org.pofk.chain.Output;
+import org.pofk.chain.Reach;
+import org.pofk.chain.Structure;
+import org.pofk.chain.Structure.CommunicatingClass;
+import org.pofk.exact.Factoring;
+import org.pofk.exact.Factorization;
+import org.pofk.exact.Polynomial;
+import org.pofk.exact.Rational;
+import org.pofk.transform.Transform;
+
+/**
+ * Which eigenvalues of A don't show in an output, and why. The eigenvalues of A are those of its communicating classes;
+ * one is absent when it is no root of the output's recurrence. Exact.
+ *
+ * @param factors the minimal polynomials of the absent eigenvalues, by degree and then by coefficients; a factor not
+ *                proved irreducible stands for those of its roots that are absent
+ */
+public record AbsentEigenvalues(List<Absent> factors) {
+    /** Larger classes are not taken apart. */
+    public static final int STATES_IN_A_CLASS_AT_MOST = 100;
+
+    /** Why an eigenvalue is absent; the last reason that holds for one of the classes it belongs to. */
+    public enum Reason {
+        /** Only classes have it that the start never reaches. */
+        NOT_REACHED,
+        /** Only classes have it that the start never reaches or that reach no state the output reads. */
+        NOT_SEEN,
+        /** A class has it that is reached and seen, but the start or the output has no part in it. */
+        CANCELLED
+    }
+
+    /** One factor of det(zI − A). */
+    public record Absent(Polynomial<Rational> factor, Reason reason) {
+    }
+
+    public AbsentEigenvalues {
+        factors = List.copyOf(factors);
+    }
+
+    /** Empty when some class is too large. */
+    public static Optional<AbsentEigenvalues> of(Chain chain, Structure structure, Transform transform) {
+        if (structure.classes().stream().anyMatch(each -> each.states().size() > STATES_IN_A_CLASS_AT_MOST)) {
+            return Optional.empty();
+        }
+        Set<Integer> seeing = new HashSet<>(Reach.into(chain.matrix(), read(transform.output())));
+        Map<Polynomial<Rational>, Reason> reasons = new TreeMap<>(Factoring.CANONICAL_ORDER);
+        for (CommunicatingClass each : structure.classes()) {
+            Reason reason = !each.reached() ? Reason.NOT_REACHED
+                    : !seeing.contains(each.states().get(0)) ? Reason.NOT_SEEN : Reason.CANCELLED;
+            for (Polynomial<Rational> factor : missing(chain, each, transform.recurrence())) {
+                reasons.merge(factor, reason, (a, b) -> a.compareTo(b) >= 0 ? a : b);
+            }
+        }
+        List<Absent> absent = new ArrayList<>();
+        reasons.forEach((factor, reason) -> absent.add(new Absent(factor, reason)));
+        return Optional.of(new AbsentEigenvalues(absent));
+    }
+
+    private static List<Integer> read(Output output) {
+        return IntStream.range(0, output.coefficients().size())
+                .filter(state -> !output.coefficients().get(state).isZero()).boxed().toList();
+    }
+
+    /** The factors of a class's polynomial without those of the recurrence. */
+    private static List<Polynomial<Rational>> missing(Chain chain, CommunicatingClass each,
+            Polynomial<Rational> recurrence) {
+        Polynomial<Rational> left = ClassPolynomial.of(chain.matrix(), each.states());
+        Polynomial<Rational> common = left.greatestCommonDivisor(recurrence);
+        while (!common.isConstant()) {
+            left = left.dividedExactlyBy(common);
+            common = left.greatestCommonDivisor(recurrence);
+        }
+        return left.isConstant()
+                ? List.of()
+                : Factoring.of(left).factors().stream().map(Factorization.Factor::polynomial).toList();
+    }
+}
