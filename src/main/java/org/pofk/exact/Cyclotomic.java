@@ -29,13 +29,22 @@ public final class Cyclotomic {
 
     /** All n whose cyclotomic polynomial divides this one, ascending; none for the zero polynomial. */
     public static List<Integer> ordersDividing(Polynomial<Rational> polynomial) {
-        return ordersDividing(polynomial, ordersUpToDegree(polynomial.degree()));
+        IntegerPolynomial common = withInverses(PrimitiveForm.partOf(polynomial));
+        return ordersDividing(common, ordersUpToDegree(common.degree()));
     }
 
     /** Those of the candidate orders whose cyclotomic polynomial divides this one, ascending; none for zero. */
     public static List<Integer> ordersDividing(Polynomial<Rational> polynomial, Collection<Integer> candidates) {
-        IntegerPolynomial part = PrimitiveForm.partOf(polynomial);
+        return ordersDividing(withInverses(PrimitiveForm.partOf(polynomial)), candidates);
+    }
+
+    private static List<Integer> ordersDividing(IntegerPolynomial part, Collection<Integer> candidates) {
         return candidates.stream().distinct().sorted().filter(order -> divides(order, part)).toList();
+    }
+
+    /** The part whose roots come with their inverses, as roots of unity do; mostly there are none. */
+    private static IntegerPolynomial withInverses(IntegerPolynomial polynomial) {
+        return polynomial.greatestCommonDivisor(polynomial.reversed());
     }
 
     /** Whether the n-th cyclotomic polynomial divides this one, which isn't zero. */
@@ -105,11 +114,10 @@ public final class Cyclotomic {
 
     /**
      * The cyclotomic polynomials that divide a square-free polynomial without the roots ±1, the likely orders tried
-     * first. Their roots come with their inverses, so only common roots with the reversed polynomial count, and
-     * mostly there are none.
+     * first.
      */
     static List<IntegerPolynomial> factorsOf(IntegerPolynomial squareFree, Collection<Integer> likelyOrders) {
-        IntegerPolynomial rest = squareFree.greatestCommonDivisor(squareFree.reversed());
+        IntegerPolynomial rest = withInverses(squareFree);
         List<Integer> orders = new ArrayList<>(likelyOrders);
         orders.addAll(ordersUpToDegree(rest.degree()));
         List<IntegerPolynomial> found = new ArrayList<>();

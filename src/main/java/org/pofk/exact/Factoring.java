@@ -43,7 +43,8 @@ public final class Factoring {
 
     /**
      * The factorization over Q. A constant is its unit without factors; zero has none: an
-     * {@link ArithmeticException}. Measured on (z − 1) · irreducible: see the benchmark results.
+     * {@link ArithmeticException}. For (z − 1) · irreducible with coefficients of as many bits as the degree: 0.05 s of
+     * processor time at degree 100, 0.15 s at 200, 0.5 to 1 s at 400, 6 s at 1,000.
      */
     public static Factorization<Rational> of(Polynomial<Rational> polynomial, Hints hints) {
         if (polynomial.isZero()) {

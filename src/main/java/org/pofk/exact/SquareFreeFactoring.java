@@ -11,7 +11,7 @@ import org.pofk.exact.Factorization.Irreducible;
  * {@link #FACTORED_DEGREE}. Exact; what stays undecided is said so.
  */
 final class SquareFreeFactoring {
-    /** Up to here full factorization takes less than half a second. */
+    /** Up to here full factorization takes about a second. */
     static final int FACTORED_DEGREE = 200;
     /** Where full factorization can follow, primes that bring nothing are given up soon. */
     private static final int SHORT_PATIENCE = 4;

@@ -7,8 +7,8 @@ import java.util.function.ToIntFunction;
 /**
  * Counts the real roots of a square-free rational polynomial in an interval: the sign changes in the sequence f, f′
  * and the negated remainders that follow (Sturm 1835; Basu, Pollack and Roy, Algorithms in Real Algebraic Geometry,
- * chapter 2, from memory). Exact. About degree² products of numbers as long as degree · coefficient: for degrees of
- * some hundreds.
+ * chapter 2, from memory). Exact. About degree² products of numbers as long as degree · coefficient: for degrees up
+ * to about two hundred.
  */
 public final class Sturm {
     private final List<IntegerPolynomial> sequence;
