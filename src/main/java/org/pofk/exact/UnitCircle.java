@@ -70,8 +70,9 @@ public final class UnitCircle {
     }
 
     /**
-     * The roots inside, on and outside; a second at degree 100. Besides the self-reciprocal part, half of which lies on either side when not
-     * on the circle, no root mirrors another, and the Cauchy index of the cofactor decides (Routh and Hurwitz).
+     * The roots inside, on and outside; a second at degree 100. Besides the self-reciprocal part, half of which lies
+     * on either side when not on the circle, no root mirrors another, and the Cauchy index of the cofactor decides
+     * (Routh and Hurwitz).
      */
     public static Counts count(Polynomial<Rational> squareFree) {
         IntegerPolynomial part = PrimitiveForm.partOf(squareFree);
