@@ -35,6 +35,18 @@ final class CompressedRows {
         return value.clone();
     }
 
+    /** The matrix with these entries written out in full. */
+    long[][] dense(int[] entries) {
+        int size = begin.length - 1;
+        long[][] matrix = new long[size][size];
+        for (int row = 0; row < size; row++) {
+            for (int at = begin[row]; at < begin[row + 1]; at++) {
+                matrix[row][column[at]] = entries[at];
+            }
+        }
+        return matrix;
+    }
+
     /** True when sums of products of the entries of a row with residues stay below 2^63. */
     boolean isShort(int[] entries) {
         for (int row = 0; row + 1 < begin.length; row++) {

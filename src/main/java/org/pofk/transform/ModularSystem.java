@@ -2,6 +2,7 @@ package org.pofk.transform;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.Random;
 import org.pofk.transform.RecurrenceProof.Method;
 
@@ -111,6 +112,21 @@ final class ModularSystem {
             numerators.add(numerator);
         }
         return new ModularRecurrence(polynomial, numerators, Method.VECTOR, degree);
+    }
+
+    /**
+     * det(zI − A) by ascending power: the recurrence of a random reading of a random start when it needs all n orders,
+     * as it does unless an eigenvalue has several eigenvectors, else by elimination where that is allowed.
+     */
+    Optional<long[]> characteristicPolynomial(boolean eliminate) {
+        Random random = new Random(field.prime());
+        BerlekampMassey probe = probe(randomVector(random), random, size());
+        if (probe.order() == size()) {
+            return Optional.of(probe.recurrence());
+        }
+        return eliminate
+                ? Optional.of(HessenbergForm.characteristicPolynomial(field, rows.dense(entries)))
+                : Optional.empty();
     }
 
     /** The recurrence of a random reading of Aᵏ x, settled for some terms and from at least {@code windows} windows. */

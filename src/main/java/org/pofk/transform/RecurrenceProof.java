@@ -3,8 +3,10 @@ package org.pofk.transform;
 /**
  * Why a recurrence D of order d, found from finitely many terms, holds for every k.
  *
- * @param order         n, the states that take part (reached, lumped): by Cayley–Hamilton D(σ)y vanishes for ever
- *                      once it vanishes at k = 0 … n−1
+ * @param order         n, the order of a polynomial known to annihilate the sequence: for {@link Method#VECTOR} that of
+ *                      the one with D(A) x0 = 0, otherwise the states that take part (reached, lumped), whose
+ *                      characteristic polynomial it is (Cayley–Hamilton). D vanishes for ever once it vanishes at
+ *                      k = 0 … n−1
  * @param comparedSteps n + d, the terms y(0) … y(n+d−1) that were compared
  * @param primes        how many primes the comparison was made modulo; 0 when it was made in exact rationals
  * @param bits          bits of the product of these primes, above the bound on what could differ; 0 when exact

@@ -2,6 +2,7 @@ package org.pofk.transform;
 
 import java.math.BigInteger;
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.List;
 import java.util.function.Function;
 import java.util.stream.IntStream;
@@ -24,6 +25,10 @@ final class Recurrences {
     private static final long BELOW = 1L << 31;
     /** Pieces of work smaller than this take less than handing them to another thread. */
     private static final int PARALLEL_FROM = 40;
+
+    /** Up to this size the proof is made in rational numbers as well, as long as they stay short. */
+    private static final int REPEATABLE_UP_TO = 16;
+    private static final int REPEATABLE_BITS = 2048;
 
     /** What one prime says. */
     private record Modular(PrimeField field, List<ModularRecurrence> recurrences) {
@@ -75,9 +80,40 @@ final class Recurrences {
                 wanted = wanted.max(differenceBound(joined).shiftLeft(1));
             }
             if (remainders.product().compareTo(wanted) > 0) {
-                return original(joined);
+                return original(repeatable(joined, place));
             }
         }
+    }
+
+    /**
+     * The same with the proof in rational numbers where they stay short: all windows of a reading, or D(A) x0 = 0.
+     * It stands by itself, so a failure would be a fault of the proof modulo primes: an {@link AssertionError}.
+     */
+    private Recurrence repeatable(Recurrence joined, int place) {
+        int order = joined.denominator().degree();
+        long bits = (long) scaled.unit().bitLength() * (system.size() + order);
+        if (system.size() > REPEATABLE_UP_TO || bits > REPEATABLE_BITS) {
+            return joined;
+        }
+        boolean whole = system.readings().isEmpty();
+        int windows = whole ? 1 : system.size();
+        List<List<Rational>> states = ExactWindows.states(system, windows + order);
+        for (int sequence = 0; sequence < joined.numerators().size(); sequence++) {
+            List<Rational> terms = ExactWindows.terms(states, whole ? unit(sequence) : system.readings().get(place));
+            if (!ExactWindows.hold(joined.denominator(), terms, windows)
+                    || !ExactWindows.numerator(joined.denominator(), terms).equals(joined.numerators().get(sequence))) {
+                throw new AssertionError("a recurrence doesn't hold: " + joined + " for " + system);
+            }
+        }
+        return new Recurrence(joined.denominator(), joined.numerators(), whole
+                ? new RecurrenceProof(Method.VECTOR, order, 2 * order, 0, 0)
+                : new RecurrenceProof(Method.WINDOWS, system.size(), system.size() + order, 0, 0));
+    }
+
+    private List<Rational> unit(int place) {
+        List<Rational> unit = new ArrayList<>(Collections.nCopies(system.size(), Rational.ZERO));
+        unit.set(place, Rational.ONE);
+        return unit;
     }
 
     private Recurrence original(Recurrence joined) {
