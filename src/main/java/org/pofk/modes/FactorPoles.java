@@ -20,6 +20,7 @@ final class FactorPoles {
     private final NumberField field;
     private final boolean searched;
     private final Optional<Rational> squaredModulus;
+    private final Optional<CosineForm> cosines;
 
     /** A pole: base for a real one, modulus and angle for one of the upper half-plane. */
     record Pole(Root root, RealValue size, Optional<RealValue> angle, Optional<Rational> squaredModulus) {
@@ -35,6 +36,7 @@ final class FactorPoles {
         this.field = new NumberField(factor.polynomial(), roots);
         this.searched = isSearched(field);
         this.squaredModulus = field.squaredModulusCandidate();
+        this.cosines = CosineForm.of(factor.polynomial());
     }
 
     /** Every element is searched for short forms up to some degree; above, in fields where they are to be expected. */
@@ -66,8 +68,11 @@ final class FactorPoles {
     }
 
     private Pole real(Root root) {
-        Optional<Radical> base = searched ? lambda(root).radical() : Optional.empty();
-        return new Pole(root, RealValue.of(base, root.realPart()), Optional.empty(), Optional.empty());
+        Optional<Radical> radical = searched ? lambda(root).radical() : Optional.empty();
+        RealValue base = radical.isPresent()
+                ? RealValue.of(radical, root.realPart())
+                : new RealValue(cosines.map(form -> form.formula(root)), root.realPart());
+        return new Pole(root, base, Optional.empty(), Optional.empty());
     }
 
     private Pole pair(Root root) {

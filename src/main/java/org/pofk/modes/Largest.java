@@ -13,8 +13,19 @@ final class Largest {
     private Largest() {
     }
 
-    /** One of the values without its sign, exact form and all, where it is told apart from those that differ from it. */
+    /**
+     * One of the values without its sign, exact form and all, where it is told apart from those that differ from it.
+     * Nothing is enclosed before it is asked for where no value but zero has an exact form.
+     */
     static RealValue of(List<RealValue> values) {
+        boolean hasExact = values.stream().anyMatch(value -> value.exact().isPresent()
+                && value.rational().filter(Rational::isZero).isEmpty());
+        return hasExact ? toldApart(values) : new RealValue(Optional.empty(), values.stream()
+                .map(value -> value.enclosure().map(Ball::abs))
+                .reduce((a, b) -> Enclosed.combine(a, b, Largest::larger)).orElseThrow());
+    }
+
+    private static RealValue toldApart(List<RealValue> values) {
         List<RealValue> sizes = values.stream().map(Largest::withoutSign).toList();
         Rational least = sizes.stream().map(size -> ball(size).lower()).max(Rational::compareTo).orElseThrow();
         List<RealValue> candidates = sizes.stream().filter(size -> ball(size).upper().compareTo(least) >= 0).toList();
