@@ -1,0 +1,66 @@
+package org.pofk.answer;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import java.util.List;
+import java.util.Optional;
+import org.junit.jupiter.api.Test;
+import org.pofk.answer.HighPowers.Outcome;
+import org.pofk.answer.HighPowers.Plateau;
+import org.pofk.answer.HighPowers.Stop;
+import org.pofk.answer.HighPowers.Verdict;
+import org.pofk.answer.HighPowers.Way;
+import org.pofk.chain.Chain;
+import org.pofk.chain.Output;
+import org.pofk.exact.Rational;
+
+class HighPowersTest {
+
+    @Test
+    void comparingSuccessivePowersIsRightWhereTheSecondEigenvalueIsSmall() {
+        Verdict verdict = verdict(Chains.pumps(), 2);
+        assertFalse(verdict.habitMisleads());
+        assertEquals(2, verdict.habits().size());
+        assertEquals(Optional.empty(), verdict.plateau());
+    }
+
+    @Test
+    void squaringTakesOneValueOfACycleForALimit() {
+        Chain turns = Chains.chain("1 0", "0 1", "1 0");
+        List<Stop> habits = verdict(turns, 0).habits();
+        assertEquals(List.of(Outcome.MISLED_BY_CYCLE), habits.stream().map(Stop::outcome).toList());
+        assertEquals(Way.BY_SQUARING, habits.get(0).way());
+    }
+
+    @Test
+    void aNearlyReducibleChainSeemsSettledAtTheWrongValue() {
+        Verdict verdict = verdict(Chains.nearlyReducible(), 2);
+        assertTrue(verdict.habits().stream().allMatch(stop -> stop.outcome() == Outcome.MISLED_BY_SLOW_POLE));
+        Plateau plateau = verdict.plateau().orElseThrow();
+        assertTrue(plateau.from() <= 64 && plateau.to() >= 4096, plateau.toString());
+        assertTrue(plateau.value().upper().compareTo(Rational.of(1, 1_000_000)) < 0);
+        assertTrue(verdict.k() == 1L << 40 && verdict.within().compareTo(Rational.of(1, 1_000_000)) < 0);
+    }
+
+    @Test
+    void theStatesFromBelowHoldTheExactPowers() {
+        Chain pumps = Chains.pumps();
+        Output lost = Chains.state(pumps, 2);
+        List<Rational> exact = ExactSteps.of(pumps, List.of(lost), 64).values().get(0);
+        PowerSequence sequence = PowerSequence.of(pumps, 1, Rational.TWO.pow(-100));
+        for (int m = 0; m <= 6; m++) {
+            assertTrue(sequence.doubling().get(m).reading(lost).contains(exact.get(1 << m)));
+        }
+        for (int k = 0; k <= 64; k++) {
+            assertTrue(sequence.steps().get(k).reading(lost).contains(exact.get(k)));
+        }
+    }
+
+    private static Verdict verdict(Chain chain, int state) {
+        Output output = Chains.state(chain, state);
+        LongRun longRun = Chains.longRun(chain, output);
+        return HighPowers.of(chain, LongRunValues.of(longRun).size()).against(longRun, output).orElseThrow();
+    }
+}
