@@ -19,7 +19,7 @@ class ComparisonTest {
     void closedFormsOfRandomChainsEqualTheirExactPowers() {
         RandomChains chains = new RandomChains(13);
         int partialFractions = 0;
-        for (int round = 0; round < 100; round++) {
+        for (int round = 0; round < 80; round++) {
             Chain chain = chains.next();
             Comparison comparison = compare(chain, chains.output(chain), 30);
             assertEquals(Rational.ZERO, comparison.exactPowers().largestDifference(), "seed 13, round " + round);
@@ -27,7 +27,7 @@ class ComparisonTest {
             assertTrue(comparison.doubleStepping().largestDifference().compareTo(Rational.of(1, 1L << 40)) < 0);
             partialFractions += comparison.exactPowers().how() == Comparison.How.PARTIAL_FRACTIONS ? 1 : 0;
         }
-        assertTrue(partialFractions > 80);
+        assertTrue(partialFractions > 60);
     }
 
     @Test
