@@ -22,6 +22,12 @@ final class AberthInDoubles {
     private final double[] im;
     private final double[] doubt;
     private final boolean[] done;
+    private double valueRe;
+    private double valueIm;
+    private double slopeRe;
+    private double slopeIm;
+    private double spread;
+    private int exponent;
 
     private AberthInDoubles(BigInteger[] ascending, List<NewtonPolygon.Circle> circles) {
         int degree = ascending.length - 1;
@@ -84,74 +90,80 @@ final class AberthInDoubles {
         }
     }
 
-    /** z ← z − 1 / (p′/p − Σ 1/(z − z_j)). */
     private void move(int i) {
-        double x = re[i];
-        double y = im[i];
-        double size = Math.hypot(x, y);
-        double hr = 0;
-        double hi = 0;
-        double dr = 0;
-        double di = 0;
-        double spread = 0;
-        int exponent = exponents[mantissas.length - 1];
-        for (int k = mantissas.length - 1; k >= 0; k--) {
-            double nextDr = dr * x - di * y + hr;
-            di = dr * y + di * x + hi;
-            dr = nextDr;
-            double nextHr = hr * x - hi * y;
-            hi = hr * y + hi * x;
-            hr = nextHr;
-            double large = Math.max(Math.abs(dr) + Math.abs(di), Math.abs(hr) + Math.abs(hi));
-            while (large > LARGE || large < SMALL && large > 0 || exponents[k] - exponent > EXPONENT_STEP) {
-                int step = large > LARGE || exponents[k] - exponent > EXPONENT_STEP ? EXPONENT_STEP : -EXPONENT_STEP;
-                if (step < 0 && exponents[k] - exponent > 0) {
-                    break;
-                }
-                double factor = Math.scalb(1.0, -step);
-                dr *= factor;
-                di *= factor;
-                hr *= factor;
-                hi *= factor;
-                spread *= factor;
-                large *= factor;
-                exponent += step;
-            }
-            hr += mantissas[k] == 0 ? 0 : Math.scalb(mantissas[k], exponents[k] - exponent);
-            spread = spread * size + Math.abs(hr) + Math.abs(hi);
+        evaluate(re[i], im[i]);
+        double size = Math.hypot(valueRe, valueIm);
+        double noise = 4 * ROUNDING * spread;
+        doubt[i] = re.length * (size + noise) / Math.hypot(slopeRe, slopeIm);
+        done[i] = size <= noise;
+        if (size > 0) {
+            step(i, size);
         }
-        step(i, hr, hi, dr, di, spread);
     }
 
-    private void step(int i, double hr, double hi, double dr, double di, double spread) {
-        double value = Math.hypot(hr, hi);
-        double noise = 4 * ROUNDING * spread;
-        doubt[i] = re.length * (value + noise) / Math.hypot(dr, di);
-        if (value <= noise) {
-            done[i] = true;
+    /** p and p′ by Horner's rule, both times 2^−exponent, and a sum that bounds what rounding does to p. */
+    private void evaluate(double x, double y) {
+        double size = Math.hypot(x, y);
+        valueRe = 0;
+        valueIm = 0;
+        slopeRe = 0;
+        slopeIm = 0;
+        spread = 0;
+        exponent = exponents[exponents.length - 1];
+        for (int k = mantissas.length - 1; k >= 0; k--) {
+            double nextSlopeRe = slopeRe * x - slopeIm * y + valueRe;
+            slopeIm = slopeRe * y + slopeIm * x + valueIm;
+            slopeRe = nextSlopeRe;
+            double nextValueRe = valueRe * x - valueIm * y;
+            valueIm = valueRe * y + valueIm * x;
+            valueRe = nextValueRe;
+            rescale(exponents[k]);
+            valueRe += mantissas[k] == 0 ? 0 : Math.scalb(mantissas[k], exponents[k] - exponent);
+            spread = spread * size + Math.abs(valueRe) + Math.abs(valueIm);
         }
-        if (value == 0) {
-            return;
+    }
+
+    /** Keeps the numbers, and the coefficient that comes next, within the range of doubles. */
+    private void rescale(int nextExponent) {
+        double large = Math.max(Math.abs(slopeRe) + Math.abs(slopeIm), Math.abs(valueRe) + Math.abs(valueIm));
+        while (large > LARGE || nextExponent - exponent > EXPONENT_STEP) {
+            shift(EXPONENT_STEP);
+            large = Math.scalb(large, -EXPONENT_STEP);
         }
-        double scale = 1 / value;
-        double ur = hr * scale;
-        double ui = hi * scale;
-        double sr = (dr * ur + di * ui) * scale;
-        double si = (di * ur - dr * ui) * scale;
+        while (large < SMALL && large > 0 && nextExponent <= exponent) {
+            shift(-EXPONENT_STEP);
+            large = Math.scalb(large, EXPONENT_STEP);
+        }
+    }
+
+    private void shift(int step) {
+        double factor = Math.scalb(1.0, -step);
+        slopeRe *= factor;
+        slopeIm *= factor;
+        valueRe *= factor;
+        valueIm *= factor;
+        spread *= factor;
+        exponent += step;
+    }
+
+    /** z ← z − 1 / (p′/p − Σ 1/(z − z_j)). */
+    private void step(int i, double size) {
+        double unitRe = valueRe / size;
+        double unitIm = valueIm / size;
+        double sumRe = (slopeRe * unitRe + slopeIm * unitIm) / size;
+        double sumIm = (slopeIm * unitRe - slopeRe * unitIm) / size;
         for (int j = 0; j < re.length; j++) {
-            if (j != i) {
-                double ar = re[i] - re[j];
-                double ai = im[i] - im[j];
-                double square = ar * ar + ai * ai;
-                if (square > 0) {
-                    sr -= ar / square;
-                    si += ai / square;
-                }
+            double across = re[i] - re[j];
+            double up = im[i] - im[j];
+            double square = across * across + up * up;
+            if (square > 0) {
+                sumRe -= across / square;
+                sumIm += up / square;
             }
         }
-        double square = sr * sr + si * si;
-        double stepRe = sr / square;
-        double stepIm = -si / square;
+        double square = sumRe * sumRe + sumIm * sumIm;
+        double stepRe = sumRe / square;
+        double stepIm = -sumIm / square;
         if (Double.isFinite(stepRe) && Double.isFinite(stepIm)) {
             re[i] -= stepRe;
             im[i] -= stepIm;

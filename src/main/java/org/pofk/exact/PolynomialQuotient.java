@@ -1,6 +1,7 @@
 package org.pofk.exact;
 
 import java.util.Optional;
+import java.util.concurrent.atomic.AtomicInteger;
 import java.util.concurrent.atomic.AtomicReference;
 import java.util.function.Function;
 
@@ -12,6 +13,9 @@ public final class PolynomialQuotient {
     private final Polynomial<Rational> numerator;
     private final Polynomial<Rational> denominator;
     private final AtomicReference<Optional<Pair>> finest = new AtomicReference<>(Optional.empty());
+
+    /** Working bits beyond the goal that some point has needed: the next is likely to need them too. */
+    private final AtomicInteger guard = Raising.firstGuard();
 
     private record Pair(EnclosedPolynomial numerator, EnclosedPolynomial denominator) {
     }
@@ -32,11 +36,13 @@ public final class PolynomialQuotient {
 
     /** The value at λ, which the caller knows to be no root of the denominator. Real where λ is an exact real. */
     public EnclosedComplex at(EnclosedComplex point) {
-        return EnclosedComplex.raising(bits -> {
-            Pair pair = atScale(bits);
-            ComplexBall z = point.enclose(bits);
-            return pair.numerator.valueAt(z).dividedBy(pair.denominator.valueAt(z)).roundedTo(bits);
-        });
+        return new Raising<ComplexBall>(bits -> valueAt(point, bits), ComplexBall::isWithin, guard)::enclose;
+    }
+
+    private ComplexBall valueAt(EnclosedComplex point, int bits) {
+        Pair pair = atScale(bits);
+        ComplexBall z = point.enclose(bits);
+        return pair.numerator.valueAt(z).dividedBy(pair.denominator.valueAt(z)).roundedTo(bits);
     }
 
     /** The value at a real number; see {@link #at(EnclosedComplex)}. */

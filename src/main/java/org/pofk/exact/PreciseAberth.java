@@ -11,7 +11,7 @@ import java.util.List;
  */
 final class PreciseAberth {
     private static final int MOST_ROUNDS = 100;
-    private static final int FACTOR_BITS = 60;
+    private static final int FACTOR_BITS = 20;
     private static final double LARGEST_FACTOR = 0x1p40;
 
     private final BoundedHorner polynomial;
@@ -84,45 +84,44 @@ final class PreciseAberth {
         step(point, value);
     }
 
-    /** z ← z − w / (1 − w Σ 1/(z − z_j)), w = p/p′. */
+    /** z ← z − w f with f = 1 / (1 − w Σ 1/(z − z_j)), w = p/p′. */
     private void step(Point point, Evaluation value) {
         Evaluation.Correction newton = value.realSlope().signum() == 0 && value.imaginarySlope().signum() == 0
                 ? new Evaluation.Correction(BigInteger.ONE.shiftLeft(point.scale), BigInteger.ZERO)
                 : value.correction(point.scale);
-        double wr = asDouble(newton.x(), point.scale);
-        double wi = asDouble(newton.y(), point.scale);
-        double sr = 0;
-        double si = 0;
+        Factor factor = factor(point, asDouble(newton.x(), point.scale), asDouble(newton.y(), point.scale));
+        BigInteger factorX = BigInteger.valueOf(Math.round(Math.scalb(factor.re, FACTOR_BITS)));
+        BigInteger factorY = BigInteger.valueOf(Math.round(Math.scalb(factor.im, FACTOR_BITS)));
+        BigInteger x = newton.x().multiply(factorX).subtract(newton.y().multiply(factorY)).shiftRight(FACTOR_BITS);
+        BigInteger y = newton.x().multiply(factorY).add(newton.y().multiply(factorX)).shiftRight(FACTOR_BITS);
+        point.x = point.x.subtract(x);
+        point.y = point.y.subtract(y);
+        point.isDone = Math.max(x.bitLength(), y.bitLength()) <= 3;
+    }
+
+    private record Factor(double re, double im) {
+        static final Factor ONE = new Factor(1, 0);
+    }
+
+    private Factor factor(Point point, double wr, double wi) {
+        double sumRe = 0;
+        double sumIm = 0;
         for (Point other : points) {
-            if (other != point) {
-                int common = Math.max(point.scale, other.scale);
-                double ar = asDouble(difference(point.x, point.scale, other.x, other.scale), common);
-                double ai = asDouble(difference(point.y, point.scale, other.y, other.scale), common);
-                double largest = Math.max(Math.abs(ar), Math.abs(ai));
-                double square = (ar / largest) * (ar / largest) + (ai / largest) * (ai / largest);
-                if (largest > 0) {
-                    sr += ar / largest / square / largest;
-                    si -= ai / largest / square / largest;
-                }
+            int common = Math.max(point.scale, other.scale);
+            double across = asDouble(difference(point.x, point.scale, other.x, other.scale), common);
+            double up = asDouble(difference(point.y, point.scale, other.y, other.scale), common);
+            double largest = Math.max(Math.abs(across), Math.abs(up));
+            if (largest > 0) {
+                double square = (across / largest) * (across / largest) + (up / largest) * (up / largest);
+                sumRe += across / largest / square / largest;
+                sumIm -= up / largest / square / largest;
             }
         }
-        double br = 1 - (wr * sr - wi * si);
-        double bi = -(wr * si + wi * sr);
-        double square = br * br + bi * bi;
-        double fr = br / square;
-        double fi = -bi / square;
-        if (!(Math.abs(fr) + Math.abs(fi) < LARGEST_FACTOR)) {
-            fr = 1;
-            fi = 0;
-        }
-        BigInteger factorX = BigInteger.valueOf(Math.round(Math.scalb(fr, FACTOR_BITS - 40)));
-        BigInteger factorY = BigInteger.valueOf(Math.round(Math.scalb(fi, FACTOR_BITS - 40)));
-        int drop = FACTOR_BITS - 40;
-        BigInteger stepX = newton.x().multiply(factorX).subtract(newton.y().multiply(factorY)).shiftRight(drop);
-        BigInteger stepY = newton.x().multiply(factorY).add(newton.y().multiply(factorX)).shiftRight(drop);
-        point.x = point.x.subtract(stepX);
-        point.y = point.y.subtract(stepY);
-        point.isDone = Math.max(stepX.bitLength(), stepY.bitLength()) <= 3;
+        double re = 1 - (wr * sumRe - wi * sumIm);
+        double im = wr * sumIm + wi * sumRe;
+        double square = re * re + im * im;
+        Factor factor = new Factor(re / square, im / square);
+        return Math.abs(factor.re) + Math.abs(factor.im) < LARGEST_FACTOR ? factor : Factor.ONE;
     }
 
     private static BigInteger difference(BigInteger a, int aScale, BigInteger b, int bScale) {

@@ -1,6 +1,7 @@
 package org.pofk.exact;
 
 import java.util.Optional;
+import java.util.concurrent.atomic.AtomicInteger;
 import java.util.concurrent.atomic.AtomicReference;
 import java.util.function.IntFunction;
 
@@ -18,35 +19,45 @@ final class Raising<B> {
         boolean test(B enclosure, int bits);
     }
 
-    private record Found<B>(B enclosure, int guard) {
-    }
-
     private final IntFunction<B> atPrecision;
     private final Within<B> within;
-    private final AtomicReference<Optional<Found<B>>> finest = new AtomicReference<>(Optional.empty());
+    private final AtomicReference<Optional<B>> finest = new AtomicReference<>(Optional.empty());
+
+    private final AtomicInteger sharedGuard;
 
     Raising(IntFunction<B> atPrecision, Within<B> within) {
+        this(atPrecision, within, firstGuard());
+    }
+
+    /** @param sharedGuard bits that numbers of the same origin have needed so far; this one starts there, and adds */
+    Raising(IntFunction<B> atPrecision, Within<B> within, AtomicInteger sharedGuard) {
         this.atPrecision = atPrecision;
         this.within = within;
+        this.sharedGuard = sharedGuard;
+    }
+
+    static AtomicInteger firstGuard() {
+        return new AtomicInteger(FIRST_GUARD);
     }
 
     B enclose(int bits) {
-        Optional<Found<B>> known = finest.get();
-        if (known.isPresent() && within.test(known.get().enclosure, bits)) {
-            return known.get().enclosure;
+        Optional<B> known = finest.get();
+        if (known.isPresent() && within.test(known.get(), bits)) {
+            return known.get();
         }
-        int guard = known.map(Found::guard).orElse(FIRST_GUARD);
+        int guard = sharedGuard.get();
         while (guard < MOST_BITS) {
             try {
                 B enclosure = atPrecision.apply(bits + guard);
                 if (within.test(enclosure, bits)) {
-                    finest.set(Optional.of(new Found<>(enclosure, guard)));
+                    finest.set(Optional.of(enclosure));
+                    sharedGuard.accumulateAndGet(guard, Math::max);
                     return enclosure;
                 }
             } catch (NotSeparatedException tooCoarse) {
                 // more bits separate it from zero, or it is zero and the caller broke the contract
             }
-            guard *= 2;
+            guard += guard / 2;
         }
         throw new AssertionError("not enclosed to 2^-" + bits + " with " + guard + " more bits: zero not excluded?");
     }
