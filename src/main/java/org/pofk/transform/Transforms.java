@@ -4,7 +4,6 @@ import java.util.ArrayList;
 import java.util.List;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Output;
-import org.pofk.exact.Polynomial;
 import org.pofk.exact.Rational;
 
 /** The exact engine: Chain → Y(z) in lowest terms, factored, for any set of outputs at once. */
@@ -18,12 +17,21 @@ public final class Transforms {
         DenominatorFactors factors = new DenominatorFactors(chain);
         List<Transform> transforms = new ArrayList<>();
         for (int i = 0; i < outputs.size(); i++) {
-            Polynomial<Rational> recurrence = recurrences.get(i).denominator();
-            TransferFunction<Rational> y =
-                    new TransferFunction<>(recurrences.get(i).numerators().get(0).shiftedUp(1), recurrence);
-            transforms.add(new Transform(outputs.get(i), recurrence, y,
+            TransferFunction<Rational> y = inLowestTerms(recurrences.get(i));
+            transforms.add(new Transform(outputs.get(i), recurrences.get(i).denominator(), y,
                     factors.of(y.denominator()), recurrences.get(i).proof()));
         }
         return transforms;
+    }
+
+    /** Y(z) of each output, not factored. */
+    public static List<TransferFunction<Rational>> inLowestTerms(Chain chain, List<Output> outputs) {
+        return Recurrences.ofReadings(Reduction.of(chain, outputs).reduced()).stream()
+                .map(Transforms::inLowestTerms).toList();
+    }
+
+    /** z P/D, where a z may cancel. */
+    private static TransferFunction<Rational> inLowestTerms(Recurrence recurrence) {
+        return new TransferFunction<>(recurrence.numerators().get(0).shiftedUp(1), recurrence.denominator());
     }
 }
