@@ -241,7 +241,9 @@ record IntegerPolynomial(List<BigInteger> coefficients) {
         if (Math.min(degree(), other.degree()) >= RINGS_DEGREE) {
             return RingsAlgebra.greatestCommonDivisor(this, other);
         }
-        return ModularPolynomial.provesCoprime(this, other) ? ofIntegers(1) : FractionFreeEuclid.greatestCommonDivisor(this, other);
+        return ModularPolynomial.provesCoprime(this, other)
+                ? ofIntegers(1)
+                : FractionFreeEuclid.greatestCommonDivisor(this, other);
     }
 
     /** The image modulo a prime below 2^31, coefficients in [0, prime). */

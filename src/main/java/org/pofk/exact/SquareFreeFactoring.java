@@ -15,7 +15,7 @@ final class SquareFreeFactoring {
     static final int FACTORED_DEGREE = 200;
     /** Where full factorization can follow, primes that bring nothing are given up soon. */
     private static final int SHORT_PATIENCE = 4;
-    /** A factor of degree 2 would seem possible by chance modulo 12 primes in a row for one polynomial in a thousand. */
+    /** By chance a factor of degree 2 seems possible modulo 12 primes in a row for one polynomial in a thousand. */
     private static final int LONG_PATIENCE = 12;
 
     /** A factor, and whether it is known to have none of its own. */

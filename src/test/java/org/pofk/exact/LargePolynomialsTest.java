@@ -117,7 +117,8 @@ class LargePolynomialsTest {
         int found = 0;
         for (int run = 0; run < 200; run++) {
             List<Rational> roots = random.ints(random.nextInt(5), 0, 1 << 30).distinct()
-                    .mapToObj(number -> Rational.of(number - (1 << 29), 1 + number % 1_000)).distinct().sorted().toList();
+                    .mapToObj(number -> Rational.of(number - (1 << 29), 1 + number % 1_000)).distinct().sorted()
+                    .toList();
             Polynomial<Rational> product = Polynomial.ofIntegers(1 + random.nextInt(50), 0, 1);
             for (Rational root : roots) {
                 product = product.times(Polynomial.linear(RationalField.Q, root));

@@ -50,7 +50,8 @@ class ResidueFieldTest {
 
     @Test
     void valuesAtTheRootsOfAProductAreKeptApart() {
-        ResidueField<Rational> ring = new ResidueField<>(Polynomial.ofIntegers(-1, 1).times(Polynomial.ofIntegers(2, 0, 1)));
+        ResidueField<Rational> ring = new ResidueField<>(
+                Polynomial.ofIntegers(-1, 1).times(Polynomial.ofIntegers(2, 0, 1)));
         assertThrows(ArithmeticException.class, () -> ring.inverse(Polynomial.ofIntegers(-1, 1)));
         assertEquals(ring.one(), ring.multiply(ring.generator(), ring.inverse(ring.generator())));
         assertEquals(Polynomial.ofIntegers(-1, 1).times(Polynomial.ofIntegers(2, 1)),

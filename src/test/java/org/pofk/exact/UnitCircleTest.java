@@ -13,7 +13,8 @@ class UnitCircleTest {
     /** z^10 + z^9 − z^7 − z^6 − z^5 − z^4 − z^3 + z + 1 (Lehmer 1933, from memory): one root 1.176…, one inside. */
     @Test
     void lehmersPolynomialHasEightRootsOnTheCircle() {
-        assertEquals(new Counts(1, 8, 1), UnitCircle.count(Polynomial.ofIntegers(1, 1, 0, -1, -1, -1, -1, -1, 0, 1, 1)));
+        assertEquals(new Counts(1, 8, 1), UnitCircle.count(
+                Polynomial.ofIntegers(1, 1, 0, -1, -1, -1, -1, -1, 0, 1, 1)));
     }
 
     @Test
