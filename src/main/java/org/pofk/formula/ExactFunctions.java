@@ -48,7 +48,8 @@ final class ExactFunctions {
         BigInteger product = BigInteger.ONE;
         BigInteger smaller = p.numerator().min(n.numerator().subtract(p.numerator()));
         for (int i = 1; i <= smaller.intValue(); i++) {
-            product = product.multiply(n.numerator().subtract(BigInteger.valueOf(i - 1L))).divide(BigInteger.valueOf(i));
+            BigInteger next = n.numerator().subtract(BigInteger.valueOf(i - 1L));
+            product = product.multiply(next).divide(BigInteger.valueOf(i));
         }
         return Optional.of(Rational.of(product));
     }

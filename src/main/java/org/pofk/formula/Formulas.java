@@ -16,7 +16,7 @@ import org.pofk.formula.Formula.WrittenDecimal;
 /**
  * Builds formulas in the form in which one would write them: no terms zero, no factors one, one sign and one number in
  * front of a product, rational numbers worked out. Nothing else is changed: decimals stay as they are, terms stay in
- * order, nothing is multiplied out. Exact.
+ * order, nothing is multiplied out, and numbers of more than a thousand digits stay apart. Exact.
  */
 public final class Formulas {
     private static final int MOST_BITS = 4_096;
@@ -43,7 +43,7 @@ public final class Formulas {
         Rational total = Rational.ZERO;
         int place = -1;
         for (Formula term : terms.stream().flatMap(term -> termsOf(term).stream()).toList()) {
-            if (term instanceof Number number) {
+            if (term instanceof Number number && areShort(total, number.value())) {
                 total = total.plus(number.value());
                 place = place < 0 ? kept.size() : place;
             } else {
@@ -76,7 +76,7 @@ public final class Formulas {
             Formula unsigned = factor instanceof Negation negation ? negation.operand() : factor;
             coefficient = factor instanceof Negation ? coefficient.negate() : coefficient;
             for (Formula part : unsigned instanceof Product product ? product.factors() : List.of(unsigned)) {
-                if (part instanceof Number number) {
+                if (part instanceof Number number && areShort(coefficient, number.value())) {
                     coefficient = coefficient.times(number.value());
                 } else {
                     kept.add(part);
@@ -140,14 +140,24 @@ public final class Formulas {
         if (exponent.equals(number(1)) || base.equals(number(1))) {
             return base;
         }
-        if (base instanceof Number number && exponent instanceof Number times && isShort(number.value(), times.value())) {
+        if (base instanceof Number number && exponent instanceof Number times
+                && isShort(number.value(), times.value())) {
             return number(number.value().pow(times.value().numerator().intValueExact()));
         }
         return exponent.equals(number(0)) ? number(1) : new Power(base, exponent);
     }
 
+    /** True when two numbers may be put into one: when that is no long work, or one of them is as good as nothing. */
+    private static boolean areShort(Rational first, Rational second) {
+        return bits(first) + bits(second) <= MOST_BITS || bits(first) <= 2 || bits(second) <= 2;
+    }
+
+    private static long bits(Rational number) {
+        return (long) number.numerator().bitLength() + number.denominator().bitLength();
+    }
+
     private static boolean isShort(Rational base, Rational exponent) {
-        int bits = base.numerator().bitLength() + base.denominator().bitLength();
+        long bits = bits(base);
         return exponent.isInteger() && (exponent.signum() >= 0 || !base.isZero())
                 && exponent.abs().times(Rational.of(bits)).compareTo(Rational.of(MOST_BITS)) <= 0;
     }

@@ -7,8 +7,8 @@ import java.util.stream.Collectors;
 final class LatexNames {
     private static final String GREEK = "αβγδεζηθικλμνξπρστυφχψωΓΔΘΛΞΠΣΥΦΨΩ";
     private static final List<String> COMMANDS = List.of("alpha", "beta", "gamma", "delta", "varepsilon", "zeta", "eta",
-            "theta", "iota", "kappa", "lambda", "mu", "nu", "xi", "pi", "rho", "sigma", "tau", "upsilon", "varphi", "chi",
-            "psi", "omega", "Gamma", "Delta", "Theta", "Lambda", "Xi", "Pi", "Sigma", "Upsilon", "Phi", "Psi", "Omega");
+            "theta", "iota", "kappa", "lambda", "mu", "nu", "xi", "pi", "rho", "sigma", "tau", "upsilon", "varphi",
+            "chi", "psi", "omega", "Gamma", "Delta", "Theta", "Lambda", "Xi", "Pi", "Sigma", "Upsilon", "Phi", "Psi", "Omega");
 
     private LatexNames() {
     }

@@ -26,11 +26,14 @@ import org.pofk.text.Suggestion;
 
 /** Evaluates formulas to linear forms, collecting every fault; a part with a fault has no value. */
 final class LinearEvaluation {
-    /** Numerator and denominator together; keeps hostile formulas from costing more than seconds. */
-    private static final int MOST_BITS = 16_384;
+    /** Longest number, numerator and denominator together. */
+    private static final int MOST_BITS = 1 << 17;
+    /** Most word operations of one formula, counting the square of each number's length: well under a second. */
+    private static final long MOST_EFFORT = 50_000_000;
 
     private final Map<String, LinearForm> names;
     private final Faults faults = new Faults();
+    private long effort;
 
     private LinearEvaluation(Map<String, LinearForm> names) {
         this.names = names;
@@ -61,16 +64,22 @@ final class LinearEvaluation {
                 + " divide or be raised");
     }
 
-    /** The value unless a number in it has grown beyond all use. */
+    /** The value unless a number in it, or the work for all numbers so far, has grown beyond all use. */
     private Optional<LinearForm> bounded(ParsedFormula node, LinearForm form) {
-        boolean isLarge = Stream.concat(Stream.of(form.constant()), form.coefficients().values().stream())
-                .anyMatch(number -> bits(number) > MOST_BITS);
-        return isLarge ? tooLarge(node) : Optional.of(form);
+        boolean isBounded = Stream.concat(Stream.of(form.constant()), form.coefficients().values().stream())
+                .allMatch(this::isBounded);
+        return isBounded ? Optional.of(form) : tooLarge(node);
+    }
+
+    private boolean isBounded(Rational number) {
+        long words = bits(number) / Integer.SIZE;
+        effort += words * words;
+        return bits(number) <= MOST_BITS && effort <= MOST_EFFORT;
     }
 
     private Optional<LinearForm> tooLarge(ParsedFormula node) {
         return fault(node, "number-too-large", "the value of '" + shown(node)
-                + "' takes more than " + MOST_BITS + " bits to write as a fraction");
+                + "' is a fraction of too many digits to work with");
     }
 
     private static long bits(Rational number) {
@@ -137,9 +146,10 @@ final class LinearEvaluation {
                 for (LinearForm part : parts) {
                     constant = constant.plus(part.constant());
                     part.coefficients().forEach((name, value) -> coefficients.merge(name, value, Rational::plus));
-                    boolean isLarge = part.coefficients().keySet().stream()
-                            .anyMatch(name -> bits(coefficients.get(name)) > MOST_BITS);
-                    if (isLarge || bits(constant) > MOST_BITS) {
+                    boolean isBounded = Stream.concat(Stream.of(constant),
+                            part.coefficients().keySet().stream().map(coefficients::get))
+                            .allMatch(LinearEvaluation.this::isBounded);
+                    if (!isBounded) {
                         return tooLarge(node);
                     }
                 }

@@ -32,7 +32,8 @@ public record LinearForm(Rational constant, Map<String, Rational> coefficients) 
     /**
      * The value of a formula that is linear in what stands for itself in {@code names}; a parameter stands for a
      * constant, a set of states for a sum. Refused, with all faults and their places: names that aren't in the map,
-     * products and powers of names, divisions by zero, what has no exact value, and numbers of thousands of digits.
+     * products and powers of names, divisions by zero, what has no exact value, and numbers of tens of thousands of
+     * digits.
      */
     public static LinearForm evaluate(ParsedFormula formula, Map<String, LinearForm> names) throws RefusedException {
         return LinearEvaluation.of(formula, names);

@@ -120,7 +120,7 @@ public final class PlainText {
                 Piece piece = write(term);
                 boolean isFirst = text.isEmpty();
                 if (piece.binding == Binding.NEGATION && !isFirst) {
-                    text.append(' ').append(piece.text.charAt(0)).append(' ').append(piece.text, 1, piece.text.length());
+                    text.append(' ').append(piece.text.charAt(0)).append(' ').append(piece.text.substring(1));
                 } else {
                     text.append(isFirst ? "" : " + ").append(piece.at(Binding.NEGATION));
                 }

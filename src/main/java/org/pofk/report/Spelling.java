@@ -62,7 +62,8 @@ final class Spelling {
 
         @Override
         public String mathematics(Prose.Mathematics mathematics) {
-            return of(mathematics.formula()).replace(' ', NO_BREAK).replaceAll(NO_BREAK + "(?=[+−-]" + NO_BREAK + ")", " ");
+            return of(mathematics.formula()).replace(' ', NO_BREAK)
+                    .replaceAll(NO_BREAK + "(?=[+−-]" + NO_BREAK + ")", " ");
         }
     }
 }

@@ -46,7 +46,8 @@ class FormulaParserTest {
         "-2a; -(2*a)", "2a*b; 2*a*b", "a^2(b); (a^2)*(b)", "√2*a; sqrt(2)*a", "√2/a; sqrt(2)/a", "(√2)^a; sqrt(2)^a",
         "√(a + b)*c; sqrt(a + b)*c", "a²; a^2", "a⁻¹⁰; a^(-10)", "a²b; (a^2)*b", "2√3; 2*sqrt(3)", "+a - b; a - b",
         "30°*k; 30*deg*k", "30 deg k; 30*deg*k", "2 pi k/3; (2*pi*k)/3", "0.5^k cos(k); (0.5^k)*cos(k)",
-        "(a)(b)(c); a*b*c", "a(b + c); a*(b + c)", "2(b); 2*b", "2(-b); 2*(-b)", "k i; k*i", "3'both down'; 3*'both down'",
+        "(a)(b)(c); a*b*c", "a(b + c); a*(b + c)", "2(b); 2*b", "2(-b); 2*(-b)", "k i; k*i",
+        "3'both down'; 3*'both down'",
         "a − b · c × d ÷ e; a - ((b*c*d)/e)", "atan(a) + acos(b); arctan(a) + arccos(b)", "2e; 2*e", "2ea; 2*ea"
     })
     void precedenceIsThatOfOrdinaryNotation(String text, String withParentheses) throws RefusedException {
@@ -108,8 +109,8 @@ class FormulaParserTest {
 
     @Test
     void placesOfTextTakenFromElsewhereAreTheCallers() {
-        Fault fault = assertThrows(RefusedException.class,
-                () -> FormulaParser.parse("1 + * 2", offset -> new Position("a", 7, 2 * offset), Set.of())).faults().get(0);
+        Fault fault = assertThrows(RefusedException.class, () -> FormulaParser.parse("1 + * 2",
+                offset -> new Position("a", 7, 2 * offset), Set.of())).faults().get(0);
         assertEquals(new Position("a", 7, 8), fault.position());
         Position whole = Position.ofWhole("--set");
         assertEquals(whole, assertThrows(RefusedException.class, () -> FormulaParser.parse("1 +", whole))
@@ -122,13 +123,16 @@ class FormulaParserTest {
         "1/(2)k; ambiguous-division; 2", "1/3 pi; ambiguous-division; 2", "2*k/3z + 1; ambiguous-division; 4",
         "1/2°; ambiguous-division; 2", "0.5^2k; ambiguous-power; 6", "0.5^k z; ambiguous-power; 7",
         "0.5^k(1 + k); ambiguous-power; 6", "z²^3; ambiguous-power; 3", "√2k; ambiguous-root; 3",
-        "√2^k; ambiguous-root; 3", "√z(k); ambiguous-root; 3", "2 3; operator-missing; 3", "(z-1)2; operator-missing; 6",
+        "√2^k; ambiguous-root; 3", "√z(k); ambiguous-root; 3", "2 3; operator-missing; 3",
+        "(z-1)2; operator-missing; 6",
         "both down; operator-missing; 6", "k z; operator-missing; 3", "'a'(b); function-unknown; 1",
         "sgrt(2); function-unknown; 1", "1 + down(2); function-unknown; 5", "cos 2; function-arguments; 1",
         "cos(1, 2); function-arguments; 1", "binomial(k); function-arguments; 1", "; formula-empty; 1",
-        "1 +; operand-missing; 3", "* 2; operand-missing; 1", "a + * b; operand-missing; 5", "a ++ b; operand-missing; 4",
+        "1 +; operand-missing; 3", "* 2; operand-missing; 1", "a + * b; operand-missing; 5",
+        "a ++ b; operand-missing; 4",
         "(); operand-missing; 2", "cos(); operand-missing; 5", "2^; operand-missing; 2", "a//b; operand-missing; 3",
-        "((1); parenthesis-open; 1", "cos(1; parenthesis-open; 4", "(1)); parenthesis-extra; 4", "0,5; decimal-comma; 2",
+        "((1); parenthesis-open; 1", "cos(1; parenthesis-open; 4", "(1)); parenthesis-extra; 4",
+        "0,5; decimal-comma; 2",
         "cos(a), b; comma; 7", "[1]; character; 1", "x = 3; character; 3", "2 ± 3; character; 3", "a**b; power-sign; 2",
         "1.2.3; number-unreadable; 1", "1e5.2; number-unreadable; 1", "1e401; exponent-out-of-range; 2",
         "1e-1000000; exponent-out-of-range; 2", "1e99999999999999999999; exponent-out-of-range; 2",
@@ -147,8 +151,8 @@ class FormulaParserTest {
         assertEquals("no function is called 'sgrt'; did you mean 'sqrt'?", refused("sgrt(2)").message());
         assertEquals("no function is called 'down'; a product is written with *", refused("down(2)").message());
         assertEquals("a decimal comma: write 0.5", refused("0,5").message());
-        assertEquals("between 'both' and 'down' a sign is missing; a name with spaces is written in quotes: 'both down'",
-                refused("both down").message());
+        assertEquals("between 'both' and 'down' a sign is missing; a name with spaces is written in quotes:"
+                + " 'both down'", refused("both down").message());
         assertEquals("the exponent 'e401' lies outside -400 to 400", refused("1e401").message());
         assertEquals("'“' has no meaning in a formula: names are quoted with '", refused("“a”").message());
         assertEquals("the formula ends after '+'", refused("1 +").message());

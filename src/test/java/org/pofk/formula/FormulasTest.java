@@ -61,7 +61,8 @@ class FormulasTest {
 
     @Example
     void tidyingKeepsTheValue() {
-        Arbitrary<Formula> leaves = Arbitraries.oneOf(FormulaTrees.numbers(), Arbitraries.of("k", "z").map(Symbol::new));
+        Arbitrary<Formula> leaves = Arbitraries.oneOf(FormulaTrees.numbers(),
+                Arbitraries.of("k", "z").map(Symbol::new));
         int compared = 0;
         for (Formula tree : FormulaTrees.upTo(2, leaves).generator(1000).stream(new Random(20268)).limit(1000)
                 .map(Shrinkable::value).toList()) {
@@ -85,8 +86,8 @@ class FormulasTest {
 
     @Test
     void polynomialsAreWrittenFromTheHighestPowerDown() {
-        assertEquals("z^3 − 19/20·z^2 + z − 1/400", PlainText.UNICODE.write(Formulas.polynomial(
-                Polynomial.ofRationals(List.of(Rational.of(-1, 400), Rational.ONE, Rational.of(-19, 20), Rational.ONE)), Z)));
+        assertEquals("z^3 − 19/20·z^2 + z − 1/400", PlainText.UNICODE.write(Formulas.polynomial(Polynomial.ofRationals(
+                List.of(Rational.of(-1, 400), Rational.ONE, Rational.of(-19, 20), Rational.ONE)), Z)));
         assertEquals("−2z", PlainText.UNICODE.write(Formulas.polynomial(Polynomial.ofIntegers(0, -2), Z)));
         assertEquals("0", PlainText.UNICODE.write(Formulas.polynomial(Polynomial.ofIntegers(), Z)));
     }

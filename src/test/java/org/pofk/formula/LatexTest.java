@@ -56,7 +56,8 @@ class LatexTest {
         "(2^k)^j; \\left(2^{k}\\right)^{j}",
         "0.4 + 0.33 i; 0.4 + 0.33 \\mathrm{i}",
         "both + p_1 + 'both down' + Θ; \\mathrm{both} + \\text{p\\_1} + \\text{both down} + \\Theta",
-        "'50% & #1 {x} \\~^$'; \\text{50\\% \\& \\#1 \\{x\\} \\textbackslash{}\\textasciitilde{}\\textasciicircum{}\\$}",
+        "'50% & #1 {x} \\~^$'; "
+            + "\\text{50\\% \\& \\#1 \\{x\\} \\textbackslash{}\\textasciitilde{}\\textasciicircum{}\\$}",
         "arctan(x)*arccos(1/3); \\arctan\\left(x\\right) \\arccos\\left(\\frac{1}{3}\\right)"
     })
     void formulasAreSetAsInATextbook(String text, String latex) throws RefusedException {

@@ -80,9 +80,17 @@ class LinearFormTest {
 
     @Test
     void numbersThatOnlyGrowTogetherAreRefusedToo() {
-        assertEquals("number-too-large", faults("(3^999)".repeat(20)).get(0).code());
-        assertEquals("number-too-large", faults("1/7^2000 + 1/11^2000 + 1/13^2000").get(0).code());
-        assertEquals("number-too-large", faults("9".repeat(6000)).get(0).code());
-        assertEquals("number-too-large", faults("both/7^2000 + both/11^2000 + both/13^2000").get(0).code());
+        assertEquals("number-too-large", faults("(3^9999)".repeat(20)).get(0).code());
+        assertEquals("number-too-large", faults("1/7^20000 + 1/11^20000 + 1/13^20000").get(0).code());
+        assertEquals("number-too-large", faults("9".repeat(60_000)).get(0).code());
+        assertEquals("number-too-large", faults("both/7^20000 + both/11^20000 + both/13^20000").get(0).code());
+        assertEquals("number-too-large", faults("1/3^2000 + 1/7^2000 - ".repeat(1000) + "1").get(0).code(),
+                "many numbers of which none is too large");
+    }
+
+    @Test
+    void manyPartsInSeriesHaveTheirExactValue() throws RefusedException {
+        assertEquals(Rational.ONE.minus(Rational.of(9999, 10_000).pow(1000)),
+                evaluate("1 - (1 - 0.0001)^1000").constant());
     }
 }

@@ -40,14 +40,15 @@ class TextWriterTest {
     private static Document pumps() throws RefusedException {
         return new Document(List.of(
                 new Heading(1, Prose.of("Output ").andName("both down")),
-                new Paragraph(Prose.of("The output ").andName("both down").and(" settles at ").andFormula(formula("20/2447"))
+                new Paragraph(Prose.of("The output ").andName("both down").and(" settles at ")
+                        .andFormula(formula("20/2447"))
                         .and("; its formula is right to 6 places — for every k ≥ 0 — and its modes decay as ")
                         .andFormula(formula("sqrt(3)*0.4508^k - 5*cos(2 pi k/3)")).and(".")),
                 new Labelled("long run", Prose.formula(formula("20/2447")).and(" ≈ 0.00817327")),
                 new Labelled("holds", "for every k from 0 on, proved by comparing the first 6 steps with exact powers"),
                 new Labelled("a label that is far too long for its column", "text"),
-                new Display(Prose.of("p(k)"), Relation.ROUNDED, formula("0.008176 - 0.01726*0.4508^k + 0.009084*0.2317^k"
-                        + " - 0.01726*0.1508^k + 0.00984*0.117^k"), Prose.of("k ≥ 2")),
+                new Display(Prose.of("p(k)"), Relation.ROUNDED, formula("0.008176 - 0.01726*0.4508^k"
+                        + " + 0.009084*0.2317^k - 0.01726*0.1508^k + 0.00984*0.117^k"), Prose.of("k ≥ 2")),
                 new Items(List.of(Prose.of("short"), Prose.of("an item that is so long that it has to go on in a second"
                         + " line, which begins below its first word"))),
                 Table.ofText("Values", List.of("k", "exact", "decimal", "remark"), List.of(
