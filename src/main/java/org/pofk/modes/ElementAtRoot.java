@@ -79,13 +79,27 @@ record ElementAtRoot(NumberField field, Polynomial<Rational> element, Root root,
      * can fall into a smaller field: 2, and m where q(z) = g(z^m).
      */
     Optional<Radical> radical() {
-        Optional<Radical> found = surd().map(Radical::of);
+        Optional<Radical> found = surd().map(Radical::of)
+                .or(() -> monomialSize().map(size -> realSign() < 0 ? size.negate() : size));
         for (int exponent : new int[] {2, field.step(), 2 * field.step()}) {
             if (found.isEmpty() && exponent > 1) {
                 found = power(exponent).surd().flatMap(power -> rootOf(power, exponent));
             }
         }
         return found;
+    }
+
+    /** |c λ^i| where q(z) = z^m − a and h is the one term c λ^i: |c| · |a|^(i/m), with i in [−m/2, m/2]. */
+    Optional<Radical> monomialSize() {
+        int m = field.degree();
+        if (field.step() != m || element.lowestPower() != element.degree()) {
+            return Optional.empty();
+        }
+        Rational a = field.modulus().coefficient(0).abs();
+        boolean isTurned = 2 * element.degree() > m;
+        int exponent = isTurned ? element.degree() - m : element.degree();
+        Rational factor = isTurned ? element.leading().abs().times(a) : element.leading().abs();
+        return Optional.of(Radical.root(Surd.of(a.pow(exponent)), m).times(factor));
     }
 
     private Optional<Radical> rootOf(Surd power, int exponent) {

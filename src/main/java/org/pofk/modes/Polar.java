@@ -1,5 +1,6 @@
 package org.pofk.modes;
 
+import java.math.BigInteger;
 import java.util.Optional;
 import org.pofk.exact.Ball;
 import org.pofk.exact.EnclosedComplex;
@@ -12,7 +13,8 @@ import org.pofk.exact.Rational;
  * <p>Two ways. Where |λ|² is a rational s, the conjugate of h(λ) is h(s/λ), again in Q(λ): |h|², h/h̄ and the squared
  * cosine are elements of the field, so that a rational multiple of π is a root of unity h/h̄, proved by its power being
  * one. Otherwise the angle is a multiple of π/N exactly when h^N is real, which its minimal polynomial decides. What
- * N to try is read off an enclosure; only the proof counts. Exact.
+ * N to try is read off an enclosure; only the proof counts. In Q(λ) with λ^m rational a single term c λ^i has both
+ * without a search. Exact.
  */
 record Polar(Optional<Radical> modulus, Optional<Angle> angle) {
     private static final int GUESS_BITS = 96;
@@ -71,6 +73,11 @@ record Polar(Optional<Radical> modulus, Optional<Angle> angle) {
 
     private static Polar byRealPower(ElementAtRoot number) {
         NumberField field = number.field();
+        Optional<Radical> monomialSize = number.monomialSize();
+        if (monomialSize.isPresent()) {
+            return new Polar(monomialSize,
+                    Optional.of(new Angle.PiMultiple(PiGuess.nearest(number.enclosed(), field.degree()).fraction())));
+        }
         Optional<PiGuess> guess = PiGuess.of(number.enclosed(), Math.max(60, 2 * field.step()));
         if (guess.isEmpty()) {
             return NOTHING;
@@ -110,7 +117,7 @@ record Polar(Optional<Radical> modulus, Optional<Angle> angle) {
                 long numerator = Math.round(target * denominator);
                 if (Math.abs(target * denominator - numerator) < 1e-9) {
                     return Optional.of(new PiGuess(Rational.of(numerator, denominator)))
-                            .filter(guess -> guess.isOnlyOne(angle));
+                            .filter(guess -> guess.isOnlyOne(angle, guess.order()));
                 }
                 double inverse = 1 / rest;
                 long next = (long) Math.floor(inverse) * denominator + before;
@@ -121,11 +128,21 @@ record Polar(Optional<Radical> modulus, Optional<Angle> angle) {
             return Optional.empty();
         }
 
+        /** The multiple of π/order that the angle is known to be. */
+        static PiGuess nearest(EnclosedComplex number, int order) {
+            Ball angle = number.argument().enclose(GUESS_BITS);
+            Rational turns = angle.middle().times(Rational.of(order)).dividedBy(Ball.pi(GUESS_BITS).middle());
+            PiGuess nearest = new PiGuess(new Rational(turns.plus(Rational.HALF).floor(), BigInteger.valueOf(order)));
+            if (!nearest.isOnlyOne(angle, order)) {
+                throw new AssertionError(angle + " is no multiple of π/" + order);
+            }
+            return nearest;
+        }
+
         /** |angle − fraction π| is proved below 1/N, less than half of the distance π/N to the next multiple. */
-        private boolean isOnlyOne(Ball angle) {
+        private boolean isOnlyOne(Ball angle, int order) {
             Ball multiple = Ball.pi(GUESS_BITS).times(Ball.of(fraction, GUESS_BITS));
-            return angle.minus(multiple).abs().upper().times(Rational.of(fraction.denominator()))
-                    .compareTo(Rational.ONE) < 0;
+            return angle.minus(multiple).abs().upper().times(Rational.of(order)).compareTo(Rational.ONE) < 0;
         }
     }
 }

@@ -95,6 +95,24 @@ class ClosedFormTest {
     }
 
     @Test
+    void leakyCyclesOfAnyLengthAreExactInEveryPlace() {
+        int places = 0;
+        for (int n = 3; n <= 16; n++) {
+            Polynomial<Rational> denominator = Polynomial.monomial(RationalField.Q, Rational.ONE, n)
+                    .minus(Polynomial.constant(RationalField.Q, Rational.of(2, 3)));
+            for (int place = 1; place < n; place += 3) {
+                ClosedForm form = Samples.closedForm(new TransferFunction<>(
+                        Polynomial.monomial(RationalField.Q, Rational.ONE, place), denominator),
+                        Factoring.of(denominator));
+                assertTrue(form.isExactThroughout(), "length " + n + ", place " + place);
+                assertValues(form, 100);
+                places++;
+            }
+        }
+        assertEquals(44, places);
+    }
+
+    @Test
     void irrationalAngleIsAnArcCosineInEveryQuadrant() {
         assertEquals("cos(arccos(3/5)*k)", text(Samples.closedForm("0 -3/5 1", "1 -6/5 1")));
         assertEquals("cos(arccos(-3/5)*k)", text(Samples.closedForm("0 3/5 1", "1 6/5 1")));
