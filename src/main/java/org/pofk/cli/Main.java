@@ -8,6 +8,7 @@ public final class Main {
     }
 
     public static void main(String[] arguments) {
+        WarmUp.beginFor(arguments);
         System.exit(CommandLineRun.of(List.of(arguments), Streams.ofProcess()));
     }
 }
