@@ -1,15 +1,20 @@
 package org.pofk.cli;
 
+import java.util.ArrayList;
 import java.util.EnumSet;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
 import org.pofk.answer.DerivedModel;
 import org.pofk.answer.Deriving;
+import org.pofk.answer.InspectedModel;
+import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
 import org.pofk.report.DerivationDocument;
 import org.pofk.report.DerivationJson;
+import org.pofk.report.StructureDocument;
+import org.pofk.report.StructureJson;
 import org.pofk.report.Style;
 import org.pofk.text.RefusedException;
 import picocli.CommandLine.Command;
@@ -19,12 +24,14 @@ import picocli.CommandLine.Option;
 /** {@code pofk derive MODEL}: the formulas, here and now. */
 @Command(description = "Derives formulas p(k) that hold for every k, with their proof and the long run.")
 final class DeriveCommand implements Work {
+    private static final int DERIVED_UNASKED = 12;
+
     @Mixin
     private ModelOptions model;
 
     @Option(names = "--of", paramLabel = "NAME",
             description = "an output, a set or a state; repeatable; 'all' for every state")
-    private List<String> of = List.of();
+    private List<String> of = new ArrayList<>();
 
     @Option(names = "--at", paramLabel = "STEPS", converter = StepList.Converter.class,
             description = "also gives the values at these steps, like 0..20,100")
@@ -61,19 +68,34 @@ final class DeriveCommand implements Work {
 
     @Override
     public ExitCode run(Streams streams) throws RefusedException, UsageException, WritingException {
-        int digits = showing.digits();
+        Style style = showing.style();
         Format format = writing.format();
         writing.save().check();
         Model read = model.read();
+        if (isTooLargeForAll(read.chain())) {
+            InspectedModel inspected = InspectedModel.of(read, List.of());
+            writing.save().write(format == Format.JSON
+                    ? StructureJson.write(inspected, style.digits())
+                    : writing.text(StructureDocument.tooLargeForAll(inspected, style)), streams);
+            return ExitCode.ANSWERED;
+        }
         List<Output> outputs = AskedOutputs.of(read.chain(), of);
         Worker.Outcome<DerivedModel> outcome = Worker.within(budget.limit(), streams.notes(), published ->
                 Deriving.of(read, outputs, at.map(StepList::steps).orElse(List.of()), extras(), published));
-        DerivedModel derived = outcome.published().orElseThrow();
-        Style style = new Style(digits, showing.angles(), showing.convention(read));
+        if (outcome.published().isEmpty()) {
+            streams.notes().println("pofk: nothing was decided within the budget");
+            return ExitCode.NOT_DECIDED;
+        }
+        DerivedModel derived = outcome.published().get();
         writing.save().write(format == Format.JSON
-                ? DerivationJson.write(derived, digits)
+                ? DerivationJson.write(derived, style.digits())
                 : writing.text(DerivationDocument.result(derived, style)), streams);
         return derived.isDecided() && outcome.finished() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
+    }
+
+    /** So many formulas are no answer to somebody who didn't ask for them. */
+    private boolean isTooLargeForAll(Chain chain) {
+        return chain.size() > DERIVED_UNASKED && chain.outputs().isEmpty() && of.isEmpty();
     }
 
     private Set<Deriving.Extra> extras() {

@@ -21,15 +21,12 @@ final class ShowingOptions {
             description = "columns: x(k+1) = A x(k); rows: p(k+1) = p(k) P; otherwise as the model is written")
     private Optional<Orientation> convention = Optional.empty();
 
-    int digits() throws UsageException {
+    /** Digits and angles as asked for. */
+    Style style() throws UsageException {
         if (digits < 1 || digits > MOST_DIGITS) {
             throw new UsageException("--digits " + digits + " is not possible; 1 to " + MOST_DIGITS + " are");
         }
-        return digits;
-    }
-
-    Style.Angles angles() {
-        return angles;
+        return new Style(digits, angles);
     }
 
     /** The convention asked for, else that of the model. */

@@ -53,7 +53,7 @@ final class WarmUp {
             DerivedModel derived = Deriving.of(model, Outputs.byDefault(model.chain()), List.of(),
                     EnumSet.of(Deriving.Extra.COMPARISON), ignored -> { });
             TextWriter.of(Alphabet.UNICODE, java.nio.charset.StandardCharsets.UTF_8).write(
-                    DerivationDocument.result(derived, new Style(6, Style.Angles.RADIANS, model.convention())));
+                    DerivationDocument.result(derived, new Style(6, Style.Angles.RADIANS)));
         } catch (RefusedException | RuntimeException | Error told) {
             return;
         }

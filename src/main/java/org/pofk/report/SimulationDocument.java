@@ -1,0 +1,57 @@
+package org.pofk.report;
+
+import java.util.ArrayList;
+import java.util.List;
+import org.pofk.answer.Simulation;
+import org.pofk.answer.Simulation.Sample;
+import org.pofk.answer.Simulation.Series;
+import org.pofk.chain.Model;
+import org.pofk.report.Document.Block;
+import org.pofk.report.Document.Heading;
+import org.pofk.report.Document.Paragraph;
+import org.pofk.report.Document.Table;
+
+/** Random runs of a chain beside its exact values, as a document. */
+public final class SimulationDocument {
+    private SimulationDocument() {
+    }
+
+    public static Document of(Model model, Simulation simulation, Style style) {
+        List<Block> blocks = new ArrayList<>(ModelHead.of(model));
+        blocks.add(new Paragraph("Sampled: " + simulation.runs() + " runs, seed " + simulation.seed()
+                + ". Each interval holds the true value with 99.9 % confidence, per step, not jointly."));
+        for (Series series : simulation.series()) {
+            blocks.add(new Heading(2, OutputProse.title(series.output())));
+            blocks.add(table(series, style.digits()));
+            blocks.add(new Paragraph(summary(series)));
+        }
+        blocks.add(new Paragraph(Caution.TEXT));
+        return new Document(blocks);
+    }
+
+    private static Table table(Series series, int digits) {
+        return Table.ofText("", List.of("k", "sampled", "from", "to", "exact", "inside"),
+                series.samples().stream().map(sample -> row(sample, digits)).toList());
+    }
+
+    private static List<String> row(Sample sample, int digits) {
+        return List.of(String.valueOf(sample.k()), SampledNumber.text(sample.estimate()),
+                SampledNumber.text(sample.interval().lower()), SampledNumber.text(sample.interval().upper()),
+                SampledNumber.exact(sample, digits), switch (sample.verdict()) {
+                    case INSIDE -> "yes";
+                    case OUTSIDE -> "NO";
+                    case CANT_TELL -> "can't tell here";
+                });
+    }
+
+    private static String summary(Series series) {
+        String method = switch (series.method()) {
+            case CLOPPER_PEARSON -> "Intervals by Clopper and Pearson. ";
+            case HOEFFDING -> "Intervals by Hoeffding. ";
+        };
+        long unclear = series.samples().size() - series.checked();
+        return method + series.inside() + " of " + series.checked() + " steps hold the exact value"
+                + (unclear == 0 ? "." : "; at " + unclear + " fewer than " + Simulation.HITS_NEEDED
+                        + " hits are expected, which is no check.");
+    }
+}

@@ -1,0 +1,83 @@
+package org.pofk.cli;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
+
+import com.fasterxml.jackson.databind.JsonNode;
+import com.fasterxml.jackson.databind.ObjectMapper;
+import com.fasterxml.jackson.databind.node.ObjectNode;
+import com.networknt.schema.InputFormat;
+import com.networknt.schema.JsonSchema;
+import com.networknt.schema.JsonSchemaFactory;
+import com.networknt.schema.SpecVersion;
+import java.io.InputStream;
+import java.util.Set;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.MethodSource;
+
+/** What is written as JSON is what the schemas say. */
+class SchemaTest {
+    private static final ObjectMapper MAPPER = new ObjectMapper();
+
+    static java.util.List<String> patterns() {
+        return Patterns.names();
+    }
+
+    @ParameterizedTest
+    @MethodSource("patterns")
+    void derivationsKeepTheirSchema(String pattern) throws Exception {
+        Run run = Run.of("derive", "test-data/models/" + pattern + ".yaml", "--as", "json", "--at", "0..3,40",
+                "--show", "derivation");
+        assertEquals(0, run.exitCode(), run.notes());
+        assertEquals(Set.of(), schema("result").validate(MAPPER.readTree(run.answer())));
+    }
+
+    @ParameterizedTest
+    @MethodSource("patterns")
+    void inspectionsKeepTheirSchema(String pattern) throws Exception {
+        Run run = Run.of("inspect", "test-data/models/" + pattern + ".yaml", "--as", "json");
+        assertEquals(0, run.exitCode(), run.notes());
+        assertEquals(Set.of(), schema("structure").validate(MAPPER.readTree(run.answer())));
+    }
+
+    @Test
+    void simulationsKeepTheirSchema() throws Exception {
+        Run run = Run.of("simulate", "test-data/models/pump-pair.yaml", "--as", "json", "--runs", "200");
+        assertEquals(0, run.exitCode(), run.notes());
+        assertEquals(Set.of(), schema("simulation").validate(MAPPER.readTree(run.answer())));
+    }
+
+    @Test
+    void aResultWithAFieldMoreOrLessOrOfAnotherKindIsRefused() throws Exception {
+        JsonNode result = MAPPER.readTree(Run.of("derive", "test-data/models/pump-pair.yaml", "--as", "json").answer());
+        ObjectNode more = result.deepCopy();
+        more.put("surplus", 1);
+        ObjectNode less = result.deepCopy();
+        less.remove("step");
+        ObjectNode other = result.deepCopy();
+        ((ObjectNode) other.at("/outputs/0/transform")).putArray("numerator").add(0.5);
+        for (ObjectNode wrong : java.util.List.of(more, less, other)) {
+            assertFalse(schema("result").validate(wrong).isEmpty());
+        }
+    }
+
+    @ParameterizedTest
+    @org.junit.jupiter.params.provider.ValueSource(strings = {"result", "structure", "simulation"})
+    void schemasAreSchemas(String name) throws Exception {
+        JsonSchema metaschema = JsonSchemaFactory.getInstance(SpecVersion.VersionFlag.V202012)
+                .getSchema(com.networknt.schema.SchemaLocation.of(com.networknt.schema.SchemaId.V202012));
+        assertEquals(Set.of(), metaschema.validate(new String(stream(name).readAllBytes(),
+                java.nio.charset.StandardCharsets.UTF_8), InputFormat.JSON));
+    }
+
+    private static JsonSchema schema(String name) throws Exception {
+        try (InputStream stream = stream(name)) {
+            return JsonSchemaFactory.getInstance(SpecVersion.VersionFlag.V202012).getSchema(stream);
+        }
+    }
+
+    private static InputStream stream(String name) {
+        return SchemaTest.class.getResourceAsStream("/org/pofk/schema/" + name + ".schema.json");
+    }
+}
