@@ -1,5 +1,6 @@
 package org.pofk.input;
 
+import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -8,7 +9,9 @@ import org.pofk.formula.Formula;
 import org.pofk.formula.FormulaParser;
 import org.pofk.formula.LinearForm;
 import org.pofk.formula.ParsedFormula;
+import org.pofk.formula.PlainText;
 import org.pofk.text.Places;
+import org.pofk.text.Position;
 import org.pofk.text.RefusedException;
 
 /** Expressions in a model file: parsed and evaluated at their place in it. */
@@ -55,35 +58,42 @@ final class Expressions {
 
     private static boolean isUnambiguous(ParsedFormula parsed, String text, Places places, Set<String> names,
             Reading reading) {
-        if (names.stream().noneMatch(Numerals::isNumeral)) {
-            return true;
+        List<ParsedFormula> numbers = parsed.nodes().filter(Expressions::isNumber).toList();
+        Map<Position, Integer> offsets = numbers.isEmpty() ? Map.of() : offsets(text, places);
+        boolean unambiguous = true;
+        for (ParsedFormula number : numbers) {
+            String written = written(number, text, offsets);
+            if (names.contains(written)) {
+                refuseDoubtful(number, written, reading);
+                unambiguous = false;
+            }
         }
-        List<ParsedFormula> doubtful = parsed.nodes()
-                .filter(node -> isNumber(node) && names.contains(written(node, text, places))).toList();
-        for (ParsedFormula number : doubtful) {
-            String name = written(number, text, places);
-            reading.fault(number.position(), "state-or-number", "state or number? '" + name
-                    + "' is the name of a state; write \"'" + name + "'\" for the state"
-                    + (name.matches("[0-9]+") ? ", " + name + ".0 for the number" : "") + ", or a mapping such as {\""
-                    + name + "\": 1}");
-        }
-        return doubtful.isEmpty();
+        return unambiguous;
+    }
+
+    private static void refuseDoubtful(ParsedFormula number, String name, Reading reading) {
+        reading.fault(number.position(), "state-or-number", "state or number? '" + name
+                + "' is the name of a state; write \"'" + name + "'\" for the state"
+                + (name.matches("[0-9]+") ? ", " + name + ".0 for the number" : "") + ", or a mapping such as {\""
+                + name + "\": 1}");
     }
 
     private static boolean isNumber(ParsedFormula node) {
         return node.formula() instanceof Formula.Number || node.formula() instanceof Formula.WrittenDecimal;
     }
 
-    /** The characters of {@code text} that the node was read from; all of it where places don't tell them apart. */
-    private static String written(ParsedFormula node, String text, Places places) {
-        int start = 0;
-        while (start < text.length() && !places.at(start).equals(node.span().start())) {
-            start++;
+    private static Map<Position, Integer> offsets(String text, Places places) {
+        Map<Position, Integer> offsets = new HashMap<>();
+        for (int offset = 0; offset <= text.length(); offset++) {
+            offsets.putIfAbsent(places.at(offset), offset);
         }
-        int end = start;
-        while (end < text.length() && !places.at(end).equals(node.span().end())) {
-            end++;
-        }
-        return Names.canonical(text.substring(start, end));
+        return offsets;
+    }
+
+    /** The characters that the number was read from; in canonical form where places don't tell them apart. */
+    private static String written(ParsedFormula number, String text, Map<Position, Integer> offsets) {
+        int start = offsets.get(number.span().start());
+        int end = offsets.get(number.span().end());
+        return Names.canonical(end > start ? text.substring(start, end) : PlainText.ASCII.write(number.formula()));
     }
 }

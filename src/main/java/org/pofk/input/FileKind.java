@@ -34,7 +34,7 @@ public enum FileKind {
 
     /** A key at the top level: at the beginning of a line, or first in a JSON text. */
     private static Pattern key(String name) {
-        return Pattern.compile("(?m)^(?:\\s*\\{)?\\s*[\"']?" + name + "[\"']?\\s*:");
+        return Pattern.compile("(?m)(?:^|\\A\\s*\\{\\s*)[\"']?" + name + "[\"']?\\s*:");
     }
 
     /** What a source is; a text with faults is judged by what it seems to be. */

@@ -151,11 +151,17 @@ final class MatrixSection {
             return Optional.empty();
         }
         try {
-            return Optional.of(NamedTable.of(Source.read(folder.orElse(Path.of("")).resolve(file.get())), options));
+            return Optional.of(NamedTable.of(tableFile(folder, file.get()), options));
         } catch (RefusedException refused) {
             refused.faults().forEach(fault -> reading.faults().addAll(List.of(located(fault, node, file.get()))));
             return Optional.empty();
         }
+    }
+
+    /** The table, named in faults as a neighbour of the model. */
+    private Source tableFile(Optional<Path> folder, String file) throws RefusedException {
+        return Source.read(folder.orElse(Path.of("")).resolve(file),
+                Path.of(place.source()).resolveSibling(file).toString());
     }
 
     /** A fault of the file as a whole is shown where the model names the file. */

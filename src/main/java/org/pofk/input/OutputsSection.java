@@ -3,8 +3,8 @@ package org.pofk.input;
 import java.util.ArrayDeque;
 import java.util.ArrayList;
 import java.util.Deque;
+import java.util.HashSet;
 import java.util.LinkedHashMap;
-import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -29,6 +29,7 @@ final class OutputsSection {
     private final Reading reading;
     private final Map<String, LinearForm> names = new LinkedHashMap<>();
     private final Map<String, Node> written = new LinkedHashMap<>();
+    private final Set<String> allNames = new HashSet<>();
     private final Deque<String> open = new ArrayDeque<>();
 
     OutputsSection(States states, Chain.Kind kind, Map<String, List<Integer>> sets, ParameterValues parameters,
@@ -61,6 +62,9 @@ final class OutputsSection {
                 written.put(entry.name(), entry.value());
             }
         }
+        allNames.addAll(names.keySet());
+        allNames.addAll(parameters.faulty());
+        allNames.addAll(written.keySet());
     }
 
     private Output output(String name) {
@@ -72,11 +76,20 @@ final class OutputsSection {
         return new Output(name, coefficients, spread ? Rational.ZERO : form.constant(), definition(written.get(name)));
     }
 
-    private static String definition(Node node) {
-        return node.asMapping().map(mapping -> mapping.entries().stream()
-                        .map(entry -> entry.name() + ": " + entry.value().asScalar().map(Node.Scalar::text).orElse("…"))
-                        .collect(Collectors.joining(", ", "{", "}")))
-                .orElseGet(() -> node.asScalar().map(Node.Scalar::text).orElse("").strip());
+    /** How the file writes it, without remarks. */
+    private String definition(Node node) {
+        if (node.asMapping().isEmpty()) {
+            return node.asScalar().map(Node.Scalar::text).orElse("").strip();
+        }
+        List<Node.Entry> terms = node.asMapping().get().entries().stream()
+                .filter(entry -> isTerm(entry.name()) || !Fields.isRemark(entry)).toList();
+        return terms.size() == 1 && !isTerm(terms.get(0).name()) ? definition(terms.get(0).value())
+                : terms.stream().map(term -> term.name() + ": " + definition(term.value()))
+                        .collect(Collectors.joining(", ", "{", "}"));
+    }
+
+    private boolean isTerm(String name) {
+        return states.contains(name) || sets.containsKey(name);
     }
 
     /** Makes the output's form known; zero when it has faults, so that each fault is told once. */
@@ -104,7 +117,7 @@ final class OutputsSection {
             }
             return Optional.of(names.get(scalar.name()));
         }
-        return Expressions.parse(scalar, allNames(), reading).flatMap(this::evaluate);
+        return Expressions.parse(scalar, allNames, reading).flatMap(this::evaluate);
     }
 
     private Optional<LinearForm> evaluate(ParsedFormula parsed) {
@@ -133,7 +146,7 @@ final class OutputsSection {
     private LinearForm term(Node.Entry entry, String output) {
         String on = "output '" + output + "'";
         String name = entry.name();
-        if (states.contains(name) || sets.containsKey(name)) {
+        if (isTerm(name)) {
             return amounts.number(entry.value(), on).map(names.get(name)::times).orElse(LinearForm.ZERO);
         }
         if (name.equals("value")) {
@@ -150,12 +163,5 @@ final class OutputsSection {
 
     private boolean isName(String name) {
         return names.containsKey(name) || written.containsKey(name) && !open.contains(name);
-    }
-
-    private Set<String> allNames() {
-        Set<String> all = new LinkedHashSet<>(names.keySet());
-        all.addAll(parameters.faulty());
-        all.addAll(written.keySet());
-        return all;
     }
 }

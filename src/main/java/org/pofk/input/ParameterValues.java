@@ -13,14 +13,15 @@ import org.pofk.formula.ParsedFormula;
  *
  * @param known  value by name
  * @param faulty names whose definition has a fault: what uses them has no value, and no fault of its own
+ * @param names  all of them
  */
-record ParameterValues(Map<String, LinearForm> known, Set<String> faulty) {
-    static final ParameterValues NONE = new ParameterValues(Map.of(), Set.of());
+record ParameterValues(Map<String, LinearForm> known, Set<String> faulty, Set<String> names) {
+    static final ParameterValues NONE = of(Map.of(), Set.of());
 
-    Set<String> names() {
+    static ParameterValues of(Map<String, LinearForm> known, Set<String> faulty) {
         Set<String> names = new HashSet<>(known.keySet());
         names.addAll(faulty);
-        return names;
+        return new ParameterValues(known, faulty, names);
     }
 
     /** Whether the expression can be evaluated as far as parameters go. */

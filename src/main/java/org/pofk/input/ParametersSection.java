@@ -53,7 +53,7 @@ final class ParametersSection {
         Set<String> faulty = new HashSet<>(refused);
         declared.keySet().forEach(name -> value(name).ifPresentOrElse(
                 value -> known.put(name, LinearForm.constant(value)), () -> faulty.add(name)));
-        return new ParameterValues(known, faulty);
+        return ParameterValues.of(known, faulty);
     }
 
     private void declareAll(Node.Mapping mapping) {

@@ -31,7 +31,11 @@ public record Source(String name, String text, String sha256) {
 
     /** The text of a file; refused when it is missing, a folder, unreadable, above 16 MiB or not UTF-8. */
     public static Source read(Path file) throws RefusedException {
-        String name = file.toString();
+        return read(file, file.toString());
+    }
+
+    /** The same under another name. */
+    static Source read(Path file, String name) throws RefusedException {
         byte[] bytes = bytes(file, name);
         return new Source(name, StrictUtf8.decode(bytes, name), sha256(bytes));
     }
