@@ -111,7 +111,7 @@ record Features(String text, Model model, Structure structure, List<ClosedForm> 
 
     /** An eigenvalue of A that is no pole of some output, though every state is reached. */
     private boolean hasCancelledEigenvalue() {
-        Polynomial<Rational> characteristic = CharacteristicPolynomial.of(model.chain()).orElseThrow();
+        Polynomial<Rational> characteristic = CharacteristicPolynomial.of(model.chain()).orElseThrow().polynomial();
         return structure.unreached().isEmpty() && forms.stream().anyMatch(form -> {
             Polynomial<Rational> left = characteristic;
             Polynomial<Rational> common = left.greatestCommonDivisor(form.transform().y().denominator());
