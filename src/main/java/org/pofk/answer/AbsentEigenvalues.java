@@ -2,6 +2,7 @@ package org.pofk.answer;
 
 import java.util.ArrayList;
 import java.util.HashSet;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -54,17 +55,27 @@ public record AbsentEigenvalues(List<Absent> factors) {
             return Optional.empty();
         }
         Set<Integer> seeing = new HashSet<>(Reach.into(chain.matrix(), read(transform.output())));
-        Map<Polynomial<Rational>, Reason> reasons = new TreeMap<>(Factoring.CANONICAL_ORDER);
+        Map<CommunicatingClass, Reason> reasonOfClass = new LinkedHashMap<>();
         for (CommunicatingClass each : structure.classes()) {
-            Reason reason = !each.reached() ? Reason.NOT_REACHED
-                    : !seeing.contains(each.states().get(0)) ? Reason.NOT_SEEN : Reason.CANCELLED;
-            for (Polynomial<Rational> factor : missing(chain, each, transform.recurrence())) {
-                reasons.merge(factor, reason, (a, b) -> a.compareTo(b) >= 0 ? a : b);
-            }
+            reasonOfClass.put(each, !each.reached() ? Reason.NOT_REACHED
+                    : !seeing.contains(each.states().get(0)) ? Reason.NOT_SEEN : Reason.CANCELLED);
         }
+        if (transform.output().constant().isZero() && takesPart(reasonOfClass) == transform.recurrence().degree()) {
+            // without a constant the recurrence divides the product of these classes' polynomials, so it is that product
+            reasonOfClass.values().removeIf(reason -> reason == Reason.CANCELLED);
+        }
+        Map<Polynomial<Rational>, Reason> reasons = new TreeMap<>(Factoring.CANONICAL_ORDER);
+        reasonOfClass.forEach((each, reason) -> missing(chain, each, transform.recurrence()).forEach(
+                factor -> reasons.merge(factor, reason, (a, b) -> a.compareTo(b) >= 0 ? a : b)));
         List<Absent> absent = new ArrayList<>();
         reasons.forEach((factor, reason) -> absent.add(new Absent(factor, reason)));
         return Optional.of(new AbsentEigenvalues(absent));
+    }
+
+    /** How many states are in classes that are reached and seen. */
+    private static int takesPart(Map<CommunicatingClass, Reason> reasonOfClass) {
+        return reasonOfClass.entrySet().stream().filter(each -> each.getValue() == Reason.CANCELLED)
+                .mapToInt(each -> each.getKey().states().size()).sum();
     }
 
     private static List<Integer> read(Output output) {

@@ -13,8 +13,9 @@ import org.pofk.transform.Transform;
  * @param byPoles     from the poles of Y(z); exact, the one that is shown
  * @param byClasses   from the null spaces and weights of the closed classes; exact; empty for a recursion or above
  *                    {@link ClosedClassLongRun#UNKNOWNS_AT_MOST} unknowns
- * @param highPowers  how close certified high powers come, and where comparing two of them misleads; empty for a
- *                    recursion, where there is no long run, and for cycles longer than what was computed
+ * @param highPowers  how close high powers come (certified for a chain, exact for a recursion), and where comparing
+ *                    two of them misleads; empty where there is no long run, for cycles longer than what was computed,
+ *                    and for recursions of more than {@link RecursionPowers#STATES_AT_MOST} states
  * @param chainPeriod the period of the chain itself (least common multiple over the reached closed classes), of which
  *                    the output's is a divisor; 1 for a recursion
  */
@@ -48,7 +49,9 @@ public record LongRunChecks(LongRun byPoles, Optional<LongRun> byClasses, Option
                     + byClasses.get() + " from the classes of " + chain);
         }
         return new LongRunChecks(byPoles, byClasses,
-                ground.powers.flatMap(each -> each.against(byPoles, transform.output())),
+                chain.kind() == Chain.Kind.CHAIN
+                        ? ground.powers.flatMap(each -> each.against(byPoles, transform.output()))
+                        : RecursionPowers.against(chain, byPoles, transform.output()),
                 periodOf(chain, ground.structure));
     }
 

@@ -19,7 +19,7 @@ record PowerSequence(List<FixedPointState> steps, List<FixedPointState> doubling
     /** The last power of two reached by squaring. */
     static final int LAST_SQUARING = 40;
     /** Steps taken one by one cost at most this many multiplications. */
-    private static final int MULTIPLICATIONS = 2_000_000;
+    private static final int MULTIPLICATIONS = 500_000;
     private static final int STEPS = 1024;
 
     PowerSequence {

@@ -43,6 +43,13 @@ class AbsentEigenvaluesTest {
     }
 
     @Test
+    void thePoleOfAnOutputsConstantStandsForNoEigenvalue() {
+        Chain recursion = Chains.recursion("1 1", "1/2 1/4", "1/4 1/2");
+        Output shifted = new Output("shifted", Chains.numbers("1 1"), Rational.of(3), "s0 + s1 + 3");
+        assertEquals(Map.of("1/4", Reason.CANCELLED), reasons(recursion, shifted));
+    }
+
+    @Test
     void presentAndAbsentFactorsTogetherMakeUpTheCharacteristicPolynomialsOfRandomChains() {
         RandomChains chains = new RandomChains(3);
         int absent = 0;

@@ -146,6 +146,15 @@ class LongRunTest {
         assertEquals(new LongRun.Limit(Rational.of(3)), Chains.longRun(halving, output));
     }
 
+    @Test
+    void highPowersOfARecursionComeAsCloseAsItsPolesLet() {
+        Chain halving = Chains.recursion("1 0", "-1/2 0", "0 1");
+        LongRunChecks checks = LongRunChecks.of(LongRunChecks.Ground.of(halving),
+                Chains.transform(halving, Chains.state(halving, 0)));
+        assertEquals(Rational.TWO.pow(-256), checks.highPowers().orElseThrow().within());
+        assertEquals(Optional.empty(), checks.byClasses());
+    }
+
     private static LongRun last(String start, String... rows) {
         Chain recursion = Chains.recursion(start, rows);
         return Chains.longRun(recursion, Chains.state(recursion, recursion.size() - 1));

@@ -1,0 +1,32 @@
+package org.pofk.answer;
+
+import java.util.List;
+import java.util.Optional;
+import org.pofk.chain.Chain;
+import org.pofk.chain.Output;
+import org.pofk.exact.Rational;
+
+/** A recursion's long run held against exact powers at one high step. Exact. */
+final class RecursionPowers {
+    /** Larger recursions are not stepped. */
+    static final int STATES_AT_MOST = 40;
+    private static final int STEP = 256;
+    private static final int CYCLE_AT_MOST = 100;
+
+    private RecursionPowers() {
+    }
+
+    /** Empty when there is neither a limit nor a short cycle, or too many states. */
+    static Optional<HighPowers.Verdict> against(Chain recursion, LongRun longRun, Output output) {
+        List<Rational> values = LongRunValues.of(longRun);
+        if (values.isEmpty() || values.size() > CYCLE_AT_MOST || recursion.size() > STATES_AT_MOST) {
+            return Optional.empty();
+        }
+        List<Rational> steps = ExactSteps.of(recursion, List.of(output), STEP + values.size() - 1).values().get(0);
+        Rational within = Rational.ZERO;
+        for (int k = STEP; k < steps.size(); k++) {
+            within = Rational.max(within, steps.get(k).minus(values.get(k % values.size())).abs());
+        }
+        return Optional.of(new HighPowers.Verdict(STEP, values.size(), within, List.of(), Optional.empty()));
+    }
+}
