@@ -23,15 +23,19 @@ public record ClosedForm(Transform transform, Expansion<Rational> expansion, Lis
 
     /** Exact in what modes there are and in every short form; the constants left are certified enclosures. */
     public static ClosedForm of(Transform transform) {
+        return of(transform, new KnownPoles());
+    }
+
+    /** The same, for one of several outputs. */
+    public static ClosedForm of(Transform transform, KnownPoles known) {
         Expansion<Rational> expansion = PartialFractions.of(transform.y(), transform.factors());
-        List<Roots> roots = transform.factors().factors().stream().map(Factor::polynomial).map(Roots::of).toList();
+        List<Factor<Rational>> factors = transform.factors().factors();
         List<Mode> modes = new ArrayList<>(impulses(expansion.impulses()));
         for (Expansion.Part<Rational> part : expansion.parts()) {
-            int index = transform.factors().factors().indexOf(part.factor());
-            FactorPoles poles = new FactorPoles(index, part.factor(), roots.get(index));
-            modes.addAll(FactorModes.of(poles, part.coefficients()));
+            modes.addAll(FactorModes.of(factors.indexOf(part.factor()), known.of(part.factor()), part.coefficients()));
         }
-        return new ClosedForm(transform, expansion, roots, modes);
+        return new ClosedForm(transform, expansion, factors.stream().map(known::of).map(FactorPoles::roots).toList(),
+                modes);
     }
 
     private static List<Mode> impulses(List<Rational> values) {

@@ -67,7 +67,8 @@ record CosineForm(Rational center, Rational scale, Rational radicand, Rational t
 
     private Ball at(Rational fraction, int bits) {
         Ball angle = Ball.pi(bits).times(Ball.of(fraction, bits));
-        return Ball.of(center, bits).plus(Ball.of(scale, bits).times(Ball.of(radicand, bits).sqrt()).times(angle.cos()));
+        Ball amplitude = Ball.of(scale, bits).times(Ball.of(radicand, bits).sqrt());
+        return Ball.of(center, bits).plus(amplitude.times(angle.cos()));
     }
 
     /** With an angle below π/2. */

@@ -55,7 +55,7 @@ public record Derivation(List<ImpulseStep> impulses, List<FactorStep> factors) {
         for (Expansion.Part<Rational> part : form.expansion().parts()) {
             Factor<Rational> factor = part.factor();
             int index = form.transform().factors().factors().indexOf(factor);
-            FactorPoles poles = new FactorPoles(index, factor, form.roots().get(index));
+            FactorPoles poles = new FactorPoles(factor);
             steps.add(new FactorStep(index, Terms.polynomial(factor.polynomial(), TablePair.Z),
                     factor.multiplicity(), part.coefficients().stream().map(FormulaOverRoots::written).toList(),
                     collected.real.stream().filter(step -> step.mode().factor() == index).toList(),
@@ -65,7 +65,8 @@ public record Derivation(List<ImpulseStep> impulses, List<FactorStep> factors) {
         return new Derivation(collected.impulses, steps);
     }
 
-    private static PairStep pair(Mode.Oscillating mode, FactorPoles poles, Expansion.Coefficient<Rational> coefficient) {
+    private static PairStep pair(Mode.Oscillating mode, FactorPoles poles,
+            Expansion.Coefficient<Rational> coefficient) {
         CoefficientValues values = new CoefficientValues(poles, coefficient);
         FactorPoles.Pole pole = poles.poles().stream()
                 .filter(candidate -> candidate.root().index() == mode.root()).findFirst().orElseThrow();

@@ -15,14 +15,14 @@ final class FactorModes {
     private FactorModes() {
     }
 
-    /** The modes in the order root, power. */
-    static List<Mode> of(FactorPoles poles, List<Expansion.Coefficient<Rational>> coefficients) {
+    /** The modes in the order root, power; {@code index} is the factor's place in the denominator. */
+    static List<Mode> of(int index, FactorPoles poles, List<Expansion.Coefficient<Rational>> coefficients) {
         List<CoefficientValues> values = coefficients.stream().map(c -> new CoefficientValues(poles, c)).toList();
         List<Mode> modes = new ArrayList<>();
         for (FactorPoles.Pole pole : poles.poles()) {
             for (int power = 0; power < values.size(); power++) {
                 if (values.get(power).isPresent(pole.root())) {
-                    modes.add(mode(poles.index(), pole, power, values.get(power)));
+                    modes.add(mode(index, pole, power, values.get(power)));
                 }
             }
         }

@@ -15,7 +15,6 @@ import org.pofk.exact.Roots;
  * Exact; what has no short form is enclosed.
  */
 final class FactorPoles {
-    private final int index;
     private final Factor<Rational> factor;
     private final NumberField field;
     private final boolean searched;
@@ -29,11 +28,11 @@ final class FactorPoles {
         }
     }
 
-    /** {@code index} is the factor's place in the denominator. */
-    FactorPoles(int index, Factor<Rational> factor, Roots roots) {
-        this.index = index;
+    private List<Pole> poles = List.of();
+
+    FactorPoles(Factor<Rational> factor) {
         this.factor = factor;
-        this.field = new NumberField(factor.polynomial(), roots);
+        this.field = new NumberField(factor.polynomial(), Roots.of(factor.polynomial()));
         this.searched = isSearched(field);
         this.squaredModulus = field.squaredModulusCandidate();
         this.cosines = CosineForm.of(factor.polynomial());
@@ -43,10 +42,6 @@ final class FactorPoles {
     private static boolean isSearched(NumberField field) {
         return field.degree() <= NumberField.SEARCHED_UP_TO || field.step() == field.degree()
                 || !Cyclotomic.ordersDividing(field.modulus()).isEmpty();
-    }
-
-    int index() {
-        return index;
     }
 
     Factor<Rational> factor() {
@@ -61,10 +56,17 @@ final class FactorPoles {
         return searched;
     }
 
-    /** Real ones and one of each conjugate pair, in the order of the roots. */
-    List<Pole> poles() {
-        return field.roots().all().stream().filter(root -> root.index() <= root.conjugateIndex())
-                .map(root -> root.isReal() ? real(root) : pair(root)).toList();
+    /** Real ones and one of each conjugate pair, in the order of the roots; found once. */
+    synchronized List<Pole> poles() {
+        if (poles.isEmpty()) {
+            poles = field.roots().all().stream().filter(root -> root.index() <= root.conjugateIndex())
+                    .map(root -> root.isReal() ? real(root) : pair(root)).toList();
+        }
+        return poles;
+    }
+
+    Roots roots() {
+        return field.roots();
     }
 
     private Pole real(Root root) {

@@ -86,7 +86,7 @@ final class NumberField {
         return result;
     }
 
-    /** Decides whether λ^m is real, m = {@link #step}: it is a root of g, and there it is known. Costs the roots of g. */
+    /** Decides whether λ^m is real, m = {@link #step}: it is a root of g, and there it is known. Finds those once. */
     boolean hasRealStepPower(Root root) {
         if (step == 1) {
             return root.isReal();

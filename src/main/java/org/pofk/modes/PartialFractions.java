@@ -68,7 +68,7 @@ public final class PartialFractions<E> {
     }
 
     /** True for the factor z, whose terms are impulses. */
-    static <E> boolean isZ(Polynomial<E> factor) {
+    private static <E> boolean isZ(Polynomial<E> factor) {
         return factor.degree() == 1 && factor.field().isZero(factor.coefficient(0));
     }
 

@@ -10,8 +10,8 @@ import org.pofk.formula.Formula;
 /**
  * The modes of one pole (a real one, or a conjugate pair), to be written in decimals, each number with as many digits
  * as its share of the error allowed needs. Certified: Σ error of a number · its weight bounds what the terms are off
- * at every step, since C λ^n − C̃ λ̃^n = C (λ^n − λ̃^n) + (C − C̃) λ̃^n, and the same with cos(θn + φ), whose error is at
- * most n |θ − θ̃| + |φ − φ̃|.
+ * at every step. For C λ^n − C̃ λ̃^n = C (λ^n − λ̃^n) + (C − C̃) λ̃^n, and the same with cos(θn + φ), whose own error is
+ * at most n |θ − θ̃| + |φ − φ̃|.
  */
 final class PrintedPole {
     private static final int SIZE_BITS = 48;

@@ -5,7 +5,6 @@ import java.util.List;
 import org.pofk.chain.Chain;
 import org.pofk.exact.Factorization.Factor;
 import org.pofk.exact.Rational;
-import org.pofk.exact.Roots;
 import org.pofk.transform.StateTransform;
 
 /**
@@ -38,19 +37,21 @@ public record StateModes(StateTransform transform, List<VectorMode> modes) {
 
     /** The expansion of the chain's start. */
     public static StateModes of(Chain chain) {
+        return of(chain, new KnownPoles());
+    }
+
+    /** The same, where outputs of the chain have been derived. */
+    public static StateModes of(Chain chain, KnownPoles known) {
         StateTransform transform = StateTransform.of(chain);
+        List<Factor<Rational>> factors = transform.factors().factors();
         List<Expansion<Rational>> states =
                 PartialFractions.ofEach(transform.numerators(), transform.recurrence(), transform.factors());
         List<VectorMode> modes = new ArrayList<>(VectorModes.impulses(states));
-        int place = 0;
-        for (Factor<Rational> factor : transform.factors().factors()) {
-            if (!PartialFractions.isZ(factor.polynomial())) {
-                int part = place++;
-                FactorPoles poles = new FactorPoles(transform.factors().factors().indexOf(factor), factor,
-                        Roots.of(factor.polynomial()));
-                modes.addAll(VectorModes.of(poles,
-                        states.stream().map(state -> state.parts().get(part).coefficients()).toList()));
-            }
+        for (int part = 0; part < states.get(0).parts().size(); part++) {
+            int place = part;
+            Factor<Rational> factor = states.get(0).parts().get(part).factor();
+            modes.addAll(VectorModes.of(factors.indexOf(factor), known.of(factor),
+                    states.stream().map(state -> state.parts().get(place).coefficients()).toList()));
         }
         return new StateModes(transform, modes);
     }

@@ -30,7 +30,7 @@ final class VectorModes {
     }
 
     /** In the order root, power; {@code states} holds the coefficients of each state by power. */
-    static List<VectorMode> of(FactorPoles poles, List<List<Expansion.Coefficient<Rational>>> states) {
+    static List<VectorMode> of(int index, FactorPoles poles, List<List<Expansion.Coefficient<Rational>>> states) {
         List<List<CoefficientValues>> values = states.stream()
                 .map(state -> state.stream().map(c -> new CoefficientValues(poles, c)).toList()).toList();
         List<VectorMode> modes = new ArrayList<>();
@@ -39,7 +39,7 @@ final class VectorModes {
                 int p = power;
                 List<CoefficientValues> column = values.stream().map(state -> state.get(p)).toList();
                 if (column.stream().anyMatch(value -> value.isPresent(pole.root()))) {
-                    modes.add(mode(poles.index(), pole, power, column));
+                    modes.add(mode(index, pole, power, column));
                 }
             }
         }

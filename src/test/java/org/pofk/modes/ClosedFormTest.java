@@ -26,7 +26,8 @@ class ClosedFormTest {
     /** Published closed forms, each beside its transform. */
     @Test
     void publishedSequencesHaveTheirPublishedForms() {
-        // Fibonacci: F_k = (φ^k − ψ^k)/√5 (Binet 1843; Graham, Knuth, Patashnik, Concrete Mathematics, 6.123; from memory)
+        // Fibonacci: F_k = (φ^k − ψ^k)/√5 (Binet 1843; Graham, Knuth, Patashnik, Concrete Mathematics, section 6.6;
+        // from memory)
         assertExact("sqrt(5)/5*(1/2 + sqrt(5)/2)^k - sqrt(5)/5*(1/2 - sqrt(5)/2)^k", "0 1", "-1 -1 1");
         // Pell: ((1+√2)^k − (1−√2)^k)/(2√2) (OEIS A000129, formula section; from memory)
         assertExact("sqrt(2)/4*(1 + sqrt(2))^k - sqrt(2)/4*(1 - sqrt(2))^k", "0 1", "-1 -2 1");
@@ -269,6 +270,14 @@ class ClosedFormTest {
             assertTrue(off.upper().compareTo(Rational.TWO.pow(-bits)) < 0,
                     text(form) + " at " + k + " is " + value + ", not " + series.get(k));
         }
+    }
+
+    @Test
+    void outputThatIsAlwaysZeroIsZero() {
+        ClosedForm form = Samples.closedForm("0", "1");
+        assertTrue(form.modes().isEmpty() && form.isExactThroughout());
+        assertEquals("0", text(form));
+        assertEquals("0", PlainText.ASCII.write(form.decimalForm(6).formula().orElseThrow()));
     }
 
     private static void assertExact(String expected, String numerator, String denominator) {

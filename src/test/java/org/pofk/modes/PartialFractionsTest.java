@@ -29,8 +29,7 @@ class PartialFractionsTest {
 
     @Test
     void repeatedQuadraticHasTaylorCoefficientsNotAdicDigits() {
-        // z/(z²+1/4)²: with 1/(z²+1/4)² = Σ ∓2i/(z∓i/2) − 1/(z∓i/2)²  (residues −2i·… worked by hand: R_1 = 1/(2λ)² = −1,
-        // R_0 = −2/(2λ)³ = 4λ/(16λ⁴)·… = −2/(8λ³) = −1/(4λ³) = λ/(−4λ⁴) = −4λ)
+        // 1/(z² + 1/4)² at λ = ±i/2, by hand: R_1 = 1/(2λ)² = −1, R_0 = −2/(2λ)³ = −1/(4λ³) = −4λ as λ⁴ = 1/16
         Expansion<Rational> expansion = expand(Polynomial.ofIntegers(0, 1), factor("1/4 0 1", 2));
         assertEquals(Polynomial.ofIntegers(0, -4), coefficient(expansion, 0, 0));
         assertEquals(Polynomial.ofIntegers(-1), coefficient(expansion, 0, 1));
