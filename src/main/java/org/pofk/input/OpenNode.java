@@ -19,6 +19,9 @@ abstract sealed class OpenNode {
         return new OpenMapping(position);
     }
 
+    /** Where it begins. */
+    abstract Position position();
+
     /** The next value would be a key. */
     abstract boolean awaitsKey();
 
@@ -33,6 +36,11 @@ abstract sealed class OpenNode {
 
         OpenSequence(Position position) {
             this.position = position;
+        }
+
+        @Override
+        Position position() {
+            return position;
         }
 
         @Override
@@ -59,6 +67,11 @@ abstract sealed class OpenNode {
 
         OpenMapping(Position position) {
             this.position = position;
+        }
+
+        @Override
+        Position position() {
+            return position;
         }
 
         @Override

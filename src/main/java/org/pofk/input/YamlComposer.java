@@ -63,7 +63,7 @@ final class YamlComposer {
                 take(last.get());
             }
         } catch (YamlEngineException syntax) {
-            YamlSyntax.explain(syntax, last, source, faults);
+            YamlSyntax.explain(syntax, last, Optional.ofNullable(open.peek()).map(OpenNode::position), source, faults);
             faults.refuseIfAny();
         }
     }

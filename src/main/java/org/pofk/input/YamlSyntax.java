@@ -35,8 +35,10 @@ final class YamlSyntax {
      * Adds the fault that the library's exception stands for.
      *
      * @param last the event before it
+     * @param open where the innermost list or mapping begins that has not ended
      */
-    static void explain(YamlEngineException exception, Optional<Event> last, Source source, Faults faults) {
+    static void explain(YamlEngineException exception, Optional<Event> last, Optional<Position> open, Source source,
+            Faults faults) {
         if (exception instanceof YamlVersionException) {
             faults.add(new Position(source.name(), 1, 1), "yaml-version",
                     "only YAML 1.2 is read; leave the %YAML line out");
@@ -49,6 +51,10 @@ final class YamlSyntax {
         Position began = marked.getContextMark().map(mark -> place(source, mark)).orElse(at);
         String problem = Optional.ofNullable(marked.getProblem()).orElse("");
         String context = Optional.ofNullable(marked.getContext()).orElse("");
+        if (context.contains("flow node") && problem.contains("stream end")) {
+            faults.add(open.orElse(began), "unclosed-bracket", "the bracket that opens here is never closed");
+            return;
+        }
         YamlSyntax syntax = new YamlSyntax(source, faults);
         if (!syntax.isLateQuote(last, at) && !syntax.isCharacters(problem, at, began)) {
             syntax.isStructure(problem, context, at, began);

@@ -2,6 +2,7 @@ package org.pofk.input;
 
 import java.math.BigDecimal;
 import java.math.BigInteger;
+import java.text.Normalizer;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
@@ -45,7 +46,7 @@ final class SecondReading {
     private void row(Object from, Object to) {
         if (to instanceof Map<?, ?> moves) {
             moves.forEach((target, value) -> entry(from.toString(), target.toString(), value));
-            int written = (int) moves.keySet().stream().filter(key -> chain.states().contains(key.toString().strip()))
+            int written = (int) moves.keySet().stream().filter(key -> chain.states().contains(name(key)))
                     .count();
             int places = chain.matrix().columns().get(place(from.toString())).size();
             check(places <= written, from + " has " + places + " entries for " + written);
@@ -66,7 +67,7 @@ final class SecondReading {
     }
 
     private void entry(String from, String to, Object written) {
-        if (chain.states().contains(to.strip())) {
+        if (chain.states().contains(name(to))) {
             Rational value = chain.matrix().at(place(to), place(from));
             number(written.toString()).ifPresent(number ->
                     check(number.equals(value), from + " to " + to + ": " + value + " for " + written));
@@ -74,7 +75,11 @@ final class SecondReading {
     }
 
     private int place(String state) {
-        return chain.states().indexOf(state.strip());
+        return chain.states().indexOf(name(state));
+    }
+
+    private static String name(Object written) {
+        return Normalizer.normalize(written.toString().strip(), Normalizer.Form.NFC);
     }
 
     private void check(boolean holds, String difference) {
