@@ -18,6 +18,7 @@ import org.pofk.exact.Factoring;
 import org.pofk.exact.Factorization;
 import org.pofk.exact.Polynomial;
 import org.pofk.exact.Rational;
+import org.pofk.transform.CharacteristicPolynomial;
 import org.pofk.transform.Transform;
 
 /**
@@ -28,9 +29,6 @@ import org.pofk.transform.Transform;
  *                proved irreducible stands for those of its roots that are absent
  */
 public record AbsentEigenvalues(List<Absent> factors) {
-    /** Larger classes are not taken apart. */
-    public static final int STATES_IN_A_CLASS_AT_MOST = 100;
-
     /** Why an eigenvalue is absent; the last reason that holds for one of the classes it belongs to. */
     public enum Reason {
         /** Only classes have it that the start never reaches. */
@@ -49,11 +47,8 @@ public record AbsentEigenvalues(List<Absent> factors) {
         factors = List.copyOf(factors);
     }
 
-    /** Empty when some class is too large. */
+    /** Empty when a class is too large for its characteristic polynomial. */
     public static Optional<AbsentEigenvalues> of(Chain chain, Structure structure, Transform transform) {
-        if (structure.classes().stream().anyMatch(each -> each.states().size() > STATES_IN_A_CLASS_AT_MOST)) {
-            return Optional.empty();
-        }
         Set<Integer> seeing = new HashSet<>(Reach.into(chain.matrix(), read(transform.output())));
         Map<CommunicatingClass, Reason> reasonOfClass = new LinkedHashMap<>();
         for (CommunicatingClass each : structure.classes()) {
@@ -64,12 +59,23 @@ public record AbsentEigenvalues(List<Absent> factors) {
             // without a constant the recurrence divides the product of these classes' polynomials, so it is that product
             reasonOfClass.values().removeIf(reason -> reason == Reason.CANCELLED);
         }
+        return reasonOfClass.isEmpty()
+                ? Optional.of(new AbsentEigenvalues(List.of()))
+                : CharacteristicPolynomial.of(chain).map(whole -> of(whole, reasonOfClass, transform.recurrence()));
+    }
+
+    private static AbsentEigenvalues of(CharacteristicPolynomial whole, Map<CommunicatingClass, Reason> reasonOfClass,
+            Polynomial<Rational> recurrence) {
         Map<Polynomial<Rational>, Reason> reasons = new TreeMap<>(Factoring.CANONICAL_ORDER);
-        reasonOfClass.forEach((each, reason) -> missing(chain, each, transform.recurrence()).forEach(
-                factor -> reasons.merge(factor, reason, (a, b) -> a.compareTo(b) >= 0 ? a : b)));
+        for (CharacteristicPolynomial.Part part : whole.parts()) {
+            if (reasonOfClass.containsKey(part.states())) {
+                missing(part.polynomial(), recurrence).forEach(factor -> reasons.merge(factor,
+                        reasonOfClass.get(part.states()), (a, b) -> a.compareTo(b) >= 0 ? a : b));
+            }
+        }
         List<Absent> absent = new ArrayList<>();
         reasons.forEach((factor, reason) -> absent.add(new Absent(factor, reason)));
-        return Optional.of(new AbsentEigenvalues(absent));
+        return new AbsentEigenvalues(absent);
     }
 
     /** How many states are in classes that are reached and seen. */
@@ -84,9 +90,8 @@ public record AbsentEigenvalues(List<Absent> factors) {
     }
 
     /** The factors of a class's polynomial without those of the recurrence. */
-    private static List<Polynomial<Rational>> missing(Chain chain, CommunicatingClass each,
-            Polynomial<Rational> recurrence) {
-        Polynomial<Rational> left = ClassPolynomial.of(chain.matrix(), each.states());
+    private static List<Polynomial<Rational>> missing(Polynomial<Rational> ofClass, Polynomial<Rational> recurrence) {
+        Polynomial<Rational> left = ofClass;
         Polynomial<Rational> common = left.greatestCommonDivisor(recurrence);
         while (!common.isConstant()) {
             left = left.dividedExactlyBy(common);

@@ -10,7 +10,7 @@ import org.pofk.exact.Polynomial;
 import org.pofk.exact.Rational;
 
 /**
- * det(zI − A) of the part of A between given states, by the method of Faddeev and Le Verrier (Faddeev and Sominskii
+ * det(zI − A) of the part of A between given states, as a second way to it: the method of Faddeev and Le Verrier (Faddeev and Sominskii
  * 1949; from memory) on whole numbers: with M = L·A, B_0 = I, c_k = −tr(M B_(k−1))/k, which comes out whole, and
  * B_k = M B_(k−1) + c_k I. Exact; n² times the number of entries, on numbers of up to n · log L bits.
  */
