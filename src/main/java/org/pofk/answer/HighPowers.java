@@ -15,8 +15,8 @@ import org.pofk.exact.Rational;
 public final class HighPowers {
     /** What common practice takes for "no longer changes": six decimals. */
     public static final Rational HABIT = Rational.of(1, 2_000_000);
-    /** An accepted value may be wrong by this much before the habit is said to mislead. */
-    private static final Rational RIGHT_WITHIN = HABIT.times(Rational.of(20));
+    /** An accepted value may be wrong by this much, and by a tenth of what it should be, before a habit misleads. */
+    private static final Rational RIGHT_WITHIN = Rational.of(1, 100_000);
 
     private final PowerSequence sequence;
 
@@ -42,7 +42,7 @@ public final class HighPowers {
 
     /**
      * Powers of two over which no state changes by more than {@link #HABIT} from one to the next although the output
-     * is still farther than ten units of that size from its long run: within such a horizon it behaves as {@code value}.
+     * is wrong by more than a habit may be: within such a horizon it behaves as {@code value}.
      *
      * @param from first power of two, {@code to} the last
      */
@@ -131,11 +131,18 @@ public final class HighPowers {
     }
 
     private static Stop stop(Way way, long k, Ball value, List<Rational> values) {
-        boolean right = values.stream().allMatch(each -> farthest(value, each).compareTo(RIGHT_WITHIN) <= 0);
-        boolean rightForThisStep = farthest(value, values.get((int) (k % values.size()))).compareTo(RIGHT_WITHIN) <= 0;
+        boolean right = values.stream().allMatch(each -> isRight(value, each));
+        boolean rightForThisStep = isRight(value, values.get((int) (k % values.size())));
         Outcome outcome = right ? Outcome.RIGHT
                 : rightForThisStep ? Outcome.MISLED_BY_CYCLE : Outcome.MISLED_BY_SLOW_POLE;
         return new Stop(way, k, value, outcome);
+    }
+
+    /** A small probability has to be right in its own size too, not only in its decimals. */
+    private static boolean isRight(Ball value, Rational expected) {
+        Rational distance = farthest(value, expected);
+        return distance.compareTo(RIGHT_WITHIN) <= 0
+                && (expected.isZero() || distance.times(Rational.of(10)).compareTo(expected.abs()) <= 0);
     }
 
     private static Rational farthest(Ball ball, Rational value) {

@@ -45,6 +45,16 @@ class HighPowersTest {
     }
 
     @Test
+    void aRareFailureHasToBeRightInItsOwnSize() {
+        // 1e-7 in the long run; the first steps show 1e-10 and hardly change from one to the next
+        Chain interlock = Chains.chain("1 0", "0.9999999999 0.001", "0.0000000001 0.999");
+        Verdict verdict = verdict(interlock, 1);
+        assertTrue(verdict.habits().stream().allMatch(stop -> stop.outcome() == Outcome.MISLED_BY_SLOW_POLE));
+        assertTrue(verdict.habits().stream().allMatch(
+                stop -> stop.value().upper().compareTo(Rational.of(1, 1_000_000_000)) < 0));
+    }
+
+    @Test
     void theStatesFromBelowHoldTheExactPowers() {
         Chain pumps = Chains.pumps();
         Output lost = Chains.state(pumps, 2);
