@@ -10,27 +10,31 @@ import org.pofk.exact.Rational;
  * unless a larger prime's square hides in it.
  */
 record SquarePart(BigInteger root, BigInteger free) {
-    static final int PRIMES_BELOW = 4_096;
+    static final int PRIMES_BELOW = 1_000;
 
     static SquarePart of(BigInteger positive) {
-        BigInteger root = BigInteger.ONE;
-        BigInteger free = BigInteger.ONE;
+        SquarePart part = new SquarePart(BigInteger.ONE, BigInteger.ONE);
         BigInteger rest = positive;
-        for (int prime = 2; prime < PRIMES_BELOW && rest.bitLength() > 1; prime += prime == 2 ? 1 : 2) {
-            BigInteger divisor = BigInteger.valueOf(prime);
+        for (int divisor = 2; divisor < PRIMES_BELOW && rest.bitLength() > 1; divisor += divisor == 2 ? 1 : 2) {
             int power = 0;
-            for (BigInteger[] division = rest.divideAndRemainder(divisor); division[1].signum() == 0;
-                    division = rest.divideAndRemainder(divisor)) {
-                rest = division[0];
+            while (remainder(rest, divisor) == 0) {
+                rest = rest.divide(BigInteger.valueOf(divisor));
                 power++;
             }
-            root = root.multiply(divisor.pow(power / 2));
-            free = free.multiply(divisor.pow(power % 2));
+            part = power == 0 ? part : part.times(BigInteger.valueOf(divisor), power);
         }
         BigInteger last = rest.sqrt();
-        return last.multiply(last).equals(rest)
-                ? new SquarePart(root.multiply(last), free)
-                : new SquarePart(root, free.multiply(rest));
+        return last.multiply(last).equals(rest) ? part.times(last, 2) : part.times(rest, 1);
+    }
+
+    /** Most numbers fit a long, and most divisors don't divide. */
+    private static long remainder(BigInteger n, int divisor) {
+        return n.bitLength() < Long.SIZE ? n.longValue() % divisor : n.mod(BigInteger.valueOf(divisor)).longValue();
+    }
+
+    /** This times base^power. */
+    private SquarePart times(BigInteger base, int power) {
+        return new SquarePart(root.multiply(base.pow(power / 2)), free.multiply(base.pow(power % 2)));
     }
 
     /** √value for a rational value ≥ 0 that is a square. */
