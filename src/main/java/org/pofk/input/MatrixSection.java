@@ -139,7 +139,8 @@ final class MatrixSection {
     private boolean isAsLong(Node.Sequence row, int n) {
         if (row.items().size() != n) {
             reading.fault(row.position(), "not-square", "this row has " + Words.count(row.items().size(), "entry",
-                    "entries") + ", but there are " + Words.count(n, "row", "rows") + "; a matrix of moves is square");
+                    "entries") + ", but there are " + Words.count(n, "row", "rows") + "; a matrix of moves is square"
+                    + (row.items().size() == 2 * n ? ", and numbers have a decimal point, no comma" : ""));
         }
         return row.items().size() == n;
     }

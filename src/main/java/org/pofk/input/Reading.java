@@ -22,6 +22,7 @@ final class Reading {
     private final List<Remark> remarks = new ArrayList<>();
     private final List<String> changes = new ArrayList<>();
     private int suggestions;
+    private int count;
 
     Reading(Faults faults, Overrides overrides) {
         this.faults = faults;
@@ -78,7 +79,13 @@ final class Reading {
         return false;
     }
 
+    /** How many faults the sections have found so far. */
+    int count() {
+        return count;
+    }
+
     void fault(Position position, String code, String message) {
+        count++;
         faults.add(position, code, message);
     }
 

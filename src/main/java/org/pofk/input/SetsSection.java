@@ -48,10 +48,11 @@ final class SetsSection {
         if (known != null) {
             return known;
         }
+        int before = reading.count();
         open.push(name);
         SortedSet<Integer> members = of(written.get(name), name);
         open.pop();
-        if (members.isEmpty() && reading.faults().isEmpty()) {
+        if (members.isEmpty() && reading.count() == before) {
             reading.fault(written.get(name).position(), "empty-set", "the set '" + Words.shortened(name)
                     + "' holds no state; leave it out or name one");
         }
