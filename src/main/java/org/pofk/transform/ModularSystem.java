@@ -31,8 +31,37 @@ final class ModularSystem {
         isShort = rows.isShort(entries);
     }
 
-    private int size() {
+    /** n. */
+    int size() {
         return start.length;
+    }
+
+    PrimeField field() {
+        return field;
+    }
+
+    CompressedRows rows() {
+        return rows;
+    }
+
+    /** The entries in the order of the rows; not to be changed. */
+    int[] entries() {
+        return entries;
+    }
+
+    /** x(0); not to be changed. */
+    int[] start() {
+        return start;
+    }
+
+    /** One c for each reading; not to be changed. */
+    List<int[]> readings() {
+        return readings;
+    }
+
+    /** True when the entries are so small that a row's sum of products needs no reduction on the way. */
+    boolean isShort() {
+        return isShort;
     }
 
     /**

@@ -4,6 +4,7 @@ import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.Collections;
 import java.util.List;
+import java.util.Optional;
 import java.util.function.Function;
 import java.util.stream.IntStream;
 import org.pofk.exact.Polynomial;
@@ -72,7 +73,8 @@ final class Recurrences {
             List<Modular> taken = ofLargestOrder(place);
             ChineseRemainders remainders = new ChineseRemainders(taken.stream().map(Modular::field).toList());
             if (remainders.product().compareTo(wanted) <= 0) {
-                addPrimes(wanted.bitLength() - remainders.product().bitLength());
+                // The first prime alone tells how the others are best taken.
+                addPrimes(known.isEmpty() ? 1 : wanted.bitLength() - remainders.product().bitLength());
                 continue;
             }
             Recurrence joined = joined(remainders, taken.stream().map(one -> one.recurrences.get(place)).toList());
@@ -131,15 +133,36 @@ final class Recurrences {
     /** More primes, together of at least that many bits. */
     private void addPrimes(int bits) {
         List<PrimeField> fields = new ArrayList<>();
-        while (fields.size() <= bits / 30) {
+        while (fields.size() <= bits * 100L / 3099) {
             PrimeField field = PrimeField.of(PrimeField.primesBelow(nextBelow, 1).get(0));
             nextBelow = field.prime();
             if (residues.isDefinedModulo(field)) {
                 fields.add(field);
             }
         }
-        known.addAll(places(fields.size(), system.size())
-                .mapToObj(i -> new Modular(fields.get(i), method.apply(residues.modulo(fields.get(i))))).toList());
+        List<List<PrimeField>> groups = new ArrayList<>();
+        for (int from = 0; from < fields.size(); from += ModularLanes.WIDTH) {
+            groups.add(fields.subList(from, Math.min(fields.size(), from + ModularLanes.WIDTH)));
+        }
+        int order = orderForLanes();
+        known.addAll(places(groups.size(), system.size())
+                .mapToObj(i -> modulo(groups.get(i), order)).flatMap(List::stream).toList());
+    }
+
+    /** The largest order that windows showed, with which four primes go together; −1 where a vector proves it sooner. */
+    private int orderForLanes() {
+        int order = known.stream().flatMap(one -> one.recurrences.stream())
+                .mapToInt(recurrence -> recurrence.method() == Method.WINDOWS ? recurrence.order() : -1)
+                .max().orElse(-1);
+        return system.readings().isEmpty() ? -1 : order;
+    }
+
+    private List<Modular> modulo(List<PrimeField> group, int order) {
+        List<ModularSystem> systems = group.stream().map(residues::modulo).toList();
+        Optional<ModularLanes> lanes = order < 0 ? Optional.empty() : ModularLanes.of(systems);
+        List<List<ModularRecurrence>> found = lanes.map(four -> four.recurrences(order))
+                .orElseGet(() -> systems.stream().map(method).toList());
+        return IntStream.range(0, group.size()).mapToObj(i -> new Modular(group.get(i), found.get(i))).toList();
     }
 
     private static IntStream places(int count, int work) {

@@ -3,6 +3,7 @@ package org.pofk.transform;
 import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.stream.IntStream;
 import org.pofk.chain.SparseMatrix;
 import org.pofk.chain.SparseMatrix.Entry;
 import org.pofk.exact.Polynomial;
@@ -19,6 +20,7 @@ import org.pofk.exact.Rational;
 record ScaledSystem(LinearSystem system, CoefficientBounds bounds, BigInteger unit, BigInteger weight) {
     /** A unit longer than this is never the shorter way. */
     private static final int LONGEST_UNIT = 4096;
+    private static final int PARALLEL_FROM = 60;
 
     static ScaledSystem of(LinearSystem original) {
         BigInteger starts = CommonDenominator.of(original.start());
@@ -68,14 +70,14 @@ record ScaledSystem(LinearSystem system, CoefficientBounds bounds, BigInteger un
         if (unit.equals(BigInteger.ONE) && divisor.equals(BigInteger.ONE)) {
             return p;
         }
-        List<Rational> coefficients = new ArrayList<>(p.coefficients());
-        BigInteger denominator = divisor;
+        List<BigInteger> denominators = new ArrayList<>();
         for (int power = degree; power >= 0; power--) {
-            if (power < coefficients.size()) {
-                coefficients.set(power, p.coefficient(power).dividedBy(Rational.of(denominator)));
-            }
-            denominator = denominator.multiply(unit);
+            denominators.add(denominators.isEmpty()
+                    ? divisor : denominators.get(denominators.size() - 1).multiply(unit));
         }
-        return Polynomial.ofRationals(coefficients);
+        IntStream powers = IntStream.range(0, p.coefficients().size());
+        return Polynomial.ofRationals((degree < PARALLEL_FROM ? powers : powers.parallel())
+                .mapToObj(power -> p.coefficient(power).dividedBy(Rational.of(denominators.get(degree - power))))
+                .toList());
     }
 }

@@ -62,6 +62,27 @@ class BerlekampMasseyTest {
         assertTrue(same > 1000, "same: " + same);
     }
 
+    @Test
+    void fourPrimesTogetherSayWhatEachSaysAlone() {
+        LinearSystem system = ScaledSystem.of(Reduction.of(RandomSystems.sparseChain(4, 70, 6),
+                RandomSystems.sparseChain(4, 70, 6).outputs()).reduced()).system();
+        SystemResidues residues = new SystemResidues(system);
+        java.util.List<ModularSystem> systems = PrimeField.primesBelow(1L << 31, 4).stream()
+                .map(prime -> residues.modulo(PrimeField.of(prime))).toList();
+        ModularLanes lanes = ModularLanes.of(systems).orElseThrow();
+        for (int order : new int[] {70, 40}) {
+            for (int lane = 0; lane < 4; lane++) {
+                ModularRecurrence alone = systems.get(lane).recurrences().get(0);
+                ModularRecurrence together = lanes.recurrences(order).get(lane).get(0);
+                assertEquals(70, alone.order());
+                for (int power = 0; power < 70; power++) {
+                    assertEquals(alone.denominator(power), together.denominator(power));
+                    assertEquals(alone.numerator(0, power), together.numerator(0, power));
+                }
+            }
+        }
+    }
+
     private static long next(long[] recurrence, long[] terms, int k) {
         int order = recurrence.length - 1;
         long sum = 0;

@@ -50,7 +50,7 @@ final class RandomSystems {
             java.util.Arrays.fill(column, Rational.ZERO);
             int left = 1000;
             for (int move = 1; move < moves; move++) {
-                int weight = 1 + random.nextInt(1500 / moves);
+                int weight = 1 + random.nextInt(1000 / moves);
                 left -= weight;
                 int to = random.nextInt(size);
                 column[to] = column[to].plus(Rational.of(weight, 1000));
