@@ -14,7 +14,7 @@ import org.pofk.transform.Transform;
  */
 public record DerivedOutput(Output output, Optional<Transform> transform, Optional<LongRunChecks> longRun,
         Optional<ClosedForm> closedForm, Optional<Comparison> comparison, Optional<PoleCheck> poleCheck,
-        Optional<SecondOpinion> secondOpinion, List<StepValue> values) {
+        Optional<SecondOpinion> secondOpinion, Optional<AbsentEigenvalues> absent, List<StepValue> values) {
 
     public DerivedOutput {
         values = List.copyOf(values);
@@ -23,7 +23,7 @@ public record DerivedOutput(Output output, Optional<Transform> transform, Option
     /** Nothing is known yet. */
     static DerivedOutput of(Output output) {
         return new DerivedOutput(output, Optional.empty(), Optional.empty(), Optional.empty(), Optional.empty(),
-                Optional.empty(), Optional.empty(), List.of());
+                Optional.empty(), Optional.empty(), Optional.empty(), List.of());
     }
 
     /** True when formula and long run are known: the answer proper. */
@@ -33,30 +33,35 @@ public record DerivedOutput(Output output, Optional<Transform> transform, Option
 
     DerivedOutput with(Transform found) {
         return new DerivedOutput(output, Optional.of(found), longRun, closedForm, comparison, poleCheck,
-                secondOpinion, values);
+                secondOpinion, absent, values);
     }
 
     DerivedOutput with(LongRunChecks found) {
         return new DerivedOutput(output, transform, Optional.of(found), closedForm, comparison, poleCheck,
-                secondOpinion, values);
+                secondOpinion, absent, values);
     }
 
     DerivedOutput with(ClosedForm found) {
         return new DerivedOutput(output, transform, longRun, Optional.of(found), comparison, poleCheck,
-                secondOpinion, values);
+                secondOpinion, absent, values);
     }
 
     DerivedOutput with(Comparison found, PoleCheck poles) {
         return new DerivedOutput(output, transform, longRun, closedForm, Optional.of(found), Optional.of(poles),
-                secondOpinion, values);
+                secondOpinion, absent, values);
     }
 
     DerivedOutput with(SecondOpinion found) {
         return new DerivedOutput(output, transform, longRun, closedForm, comparison, poleCheck, Optional.of(found),
-                values);
+                absent, values);
+    }
+
+    DerivedOutput with(AbsentEigenvalues found) {
+        return new DerivedOutput(output, transform, longRun, closedForm, comparison, poleCheck, secondOpinion,
+                Optional.of(found), values);
     }
 
     DerivedOutput with(List<StepValue> found) {
-        return new DerivedOutput(output, transform, longRun, closedForm, comparison, poleCheck, secondOpinion, found);
+        return new DerivedOutput(output, transform, longRun, closedForm, comparison, poleCheck, secondOpinion, absent, found);
     }
 }

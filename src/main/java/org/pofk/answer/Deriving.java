@@ -43,6 +43,7 @@ public final class Deriving {
                 outputs.stream().map(DerivedOutput::of).toList(), Optional.empty()), published);
         deriving.publish(deriving.known);
         deriving.formulas(outputs);
+        deriving.absentEigenvalues();
         if (!at.isEmpty()) {
             deriving.values(at);
         }
@@ -72,6 +73,17 @@ public final class Deriving {
         for (int i = 0; i < transforms.size(); i++) {
             publish(known.with(i, known.outputs().get(i).with(LongRunChecks.of(ground, transforms.get(i)))));
             publish(known.with(i, known.outputs().get(i).with(ClosedForm.of(transforms.get(i)))));
+        }
+    }
+
+    private void absentEigenvalues() {
+        for (int i = 0; i < known.outputs().size(); i++) {
+            DerivedOutput output = known.outputs().get(i);
+            Optional<AbsentEigenvalues> absent = AbsentEigenvalues.of(known.model().chain(), known.structure(),
+                    output.transform().orElseThrow());
+            if (absent.isPresent()) {
+                publish(known.with(i, output.with(absent.get())));
+            }
         }
     }
 

@@ -13,6 +13,7 @@ import org.pofk.chain.Model;
 import org.pofk.chain.Output;
 import org.pofk.report.DerivationDocument;
 import org.pofk.report.DerivationJson;
+import org.pofk.report.Document;
 import org.pofk.report.StructureDocument;
 import org.pofk.report.StructureJson;
 import org.pofk.report.Style;
@@ -89,7 +90,7 @@ final class DeriveCommand implements Work {
         DerivedModel derived = outcome.published().get();
         writing.save().write(format == Format.JSON
                 ? DerivationJson.write(derived, style.digits())
-                : writing.text(DerivationDocument.result(derived, style)), streams);
+                : writing.text(document(derived, style)), streams);
         return derived.isDecided() && outcome.finished() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
     }
 
@@ -98,8 +99,19 @@ final class DeriveCommand implements Work {
         return chain.size() > DERIVED_UNASKED && chain.outputs().isEmpty() && of.isEmpty();
     }
 
+    private Document document(DerivedModel derived, Style style) {
+        return switch (show) {
+            case RESULT -> DerivationDocument.result(derived, style);
+            case DERIVATION -> DerivationDocument.derivation(derived, style, showing.convention(derived.model()));
+            case ALL -> DerivationDocument.all(derived, style, showing.convention(derived.model()));
+        };
+    }
+
     private Set<Deriving.Extra> extras() {
         Set<Deriving.Extra> extras = EnumSet.of(Deriving.Extra.COMPARISON);
+        if (show != Part.RESULT) {
+            extras.add(Deriving.Extra.STATE_MODES);
+        }
         if (secondOpinion) {
             extras.add(Deriving.Extra.SECOND_OPINION);
         }

@@ -7,7 +7,7 @@ import org.pofk.formula.Formula;
  * A mode as a term in k. An impulse is a multiple of δ(k − at); a phase written π is a minus sign in front of the
  * cosine; a pole written 1 leaves no power.
  */
-final class ModeFormula {
+public final class ModeFormula {
     private ModeFormula() {
     }
 
@@ -16,15 +16,15 @@ final class ModeFormula {
         return mode.accept(new Exact());
     }
 
-    static Formula impulse(Formula value, int at) {
+    public static Formula impulse(Formula value, int at) {
         return Terms.product(List.of(value, Terms.call(Formula.Function.DELTA, Terms.kMinus(at))));
     }
 
-    static Formula geometric(Formula coefficient, int power, Formula base) {
+    public static Formula geometric(Formula coefficient, int power, Formula base) {
         return Terms.product(List.of(coefficient, Terms.binomial(power), Terms.power(base, Terms.kMinus(power))));
     }
 
-    static Formula oscillating(Formula amplitude, int power, Formula modulus, Formula angle, Formula phase) {
+    public static Formula oscillating(Formula amplitude, int power, Formula modulus, Formula angle, Formula phase) {
         boolean turned = phase == Formula.Constant.PI;
         Formula turn = Terms.overDenominator(angle, Terms.kMinus(power));
         Formula argument = turned || Terms.isZero(phase) ? turn : new Formula.Sum(List.of(turn, phase));

@@ -9,8 +9,8 @@ import org.pofk.formula.Formula;
  * the pairs are those of Jury, Theory and Application of the z-Transform Method, 1964, from memory.
  */
 public record TablePair(Formula transform, Formula sequence) {
-    static final Formula.Symbol Z = new Formula.Symbol("z");
-    static final Formula.Symbol LAMBDA = new Formula.Symbol("λ");
+    public static final Formula.Symbol Z = new Formula.Symbol("z");
+    public static final Formula.Symbol LAMBDA = new Formula.Symbol("λ");
 
     /** z/(z − λ)^(p+1) ↔ binomial(k, p) λ^(k−p). */
     static TablePair ofPole(int power) {

@@ -2,8 +2,10 @@ package org.pofk.report;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.function.BiFunction;
 import org.pofk.answer.DerivedModel;
 import org.pofk.answer.DerivedOutput;
+import org.pofk.chain.Model.Convention;
 import org.pofk.report.Document.Block;
 import org.pofk.report.Document.Paragraph;
 
@@ -15,6 +17,26 @@ public final class DerivationDocument {
     /** The result alone. */
     public static Document result(DerivedModel derived, Style style) {
         List<Block> blocks = new ArrayList<>(ModelHead.of(derived.model()));
+        results(derived, style, blocks);
+        return ended(blocks);
+    }
+
+    /** The way to it alone, from the matrix to the closed form and the modes of the whole state. */
+    public static Document derivation(DerivedModel derived, Style style, Convention convention) {
+        List<Block> blocks = new ArrayList<>(ModelHead.of(derived.model()));
+        way(derived, style, convention, WayBlocks::withClosedForm, blocks);
+        return ended(blocks);
+    }
+
+    /** The result first, then the way to it. */
+    public static Document all(DerivedModel derived, Style style, Convention convention) {
+        List<Block> blocks = new ArrayList<>(ModelHead.of(derived.model()));
+        results(derived, style, blocks);
+        way(derived, style, convention, WayBlocks::of, blocks);
+        return ended(blocks);
+    }
+
+    private static void results(DerivedModel derived, Style style, List<Block> blocks) {
         for (DerivedOutput output : derived.outputs()) {
             blocks.addAll(ResultBlocks.of(output, style));
         }
@@ -22,6 +44,18 @@ public final class DerivationDocument {
         if (!listed.isEmpty()) {
             blocks.add(ValuesTable.of(listed, style.digits()));
         }
+    }
+
+    private static void way(DerivedModel derived, Style style, Convention convention,
+            BiFunction<DerivedOutput, Style, List<Block>> wayOf, List<Block> blocks) {
+        blocks.addAll(ChainBlocks.of(derived.model(), derived.outputs().stream().map(DerivedOutput::output).toList(),
+                convention));
+        derived.outputs().forEach(output -> blocks.addAll(wayOf.apply(output, style)));
+        derived.state().ifPresent(state -> blocks.addAll(
+                StateBlocks.of(state, derived.model().chain().states(), style)));
+    }
+
+    private static Document ended(List<Block> blocks) {
         blocks.add(new Paragraph(Caution.TEXT));
         return new Document(blocks);
     }

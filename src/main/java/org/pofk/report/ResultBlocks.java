@@ -12,9 +12,9 @@ import org.pofk.answer.Simulation;
 import org.pofk.exact.Decimals;
 import org.pofk.exact.Rational;
 import org.pofk.formula.Formula;
+import org.pofk.formula.PlainText;
 import org.pofk.modes.ClosedForm;
 import org.pofk.modes.DecimalForm;
-import org.pofk.modes.Terms;
 import org.pofk.report.Document.Block;
 import org.pofk.report.Document.Display;
 import org.pofk.report.Document.Heading;
@@ -26,6 +26,8 @@ import org.pofk.transform.Transform;
 /** What was found about one output: the formula, from where on it holds and why, the long run, how it was checked. */
 final class ResultBlocks {
     private static final int ERROR_DIGITS = 2;
+    /** A formula above this is no longer read by anybody. */
+    private static final int EXACT_SHOWN_UP_TO = 1200;
 
     private final DerivedOutput output;
     private final Style style;
@@ -47,6 +49,7 @@ final class ResultBlocks {
         output.closedForm().ifPresent(this::formulas);
         output.transform().ifPresent(this::holds);
         output.longRun().ifPresent(this::longRun);
+        output.absent().ifPresent(found -> blocks.add(new Labelled("eigenvalues", AbsentProse.of(found))));
         output.comparison().ifPresent(this::checked);
         output.secondOpinion().ifPresent(this::secondOpinion);
         if (!output.isDecided()) {
@@ -58,15 +61,27 @@ final class ResultBlocks {
         blocks.add(new Labelled(label, text));
     }
 
+    /** The formulas alone. */
+    static List<Block> formulas(DerivedOutput output, Style style) {
+        ResultBlocks result = new ResultBlocks(output, style);
+        output.closedForm().ifPresent(result::formulas);
+        return result.blocks;
+    }
+
     private void formulas(ClosedForm form) {
-        Optional<Formula> exact = form.exactFormula();
         DecimalForm decimals = form.decimalForm(style.digits());
-        Formula shownExact = exact.orElseGet(form::formulaOverRoots);
-        boolean isSame = decimals.formula().equals(Optional.of(shownExact));
+        Formula exact = form.exactFormula().orElseGet(form::formulaOverRoots);
+        boolean isSame = decimals.formula().equals(Optional.of(exact));
         if (!isSame && decimals.formula().isPresent()) {
             blocks.add(new Display(OutputProse.atStep(output.output()), Relation.ROUNDED, decimals.formula().get()));
         }
-        blocks.add(new Display(OutputProse.atStep(output.output()), Relation.EQUAL, shownExact));
+        int length = PlainText.UNICODE.write(exact).length();
+        if (length <= EXACT_SHOWN_UP_TO || decimals.formula().isEmpty()) {
+            blocks.add(new Display(OutputProse.atStep(output.output()), Relation.EQUAL, exact));
+        } else {
+            label("exact", "over the roots of the denominator's factors; with " + length
+                    + " characters too long to be shown, its parts are in the result as JSON");
+        }
         if (!isSame) {
             label("decimals", promise(decimals));
         }
@@ -87,20 +102,19 @@ final class ResultBlocks {
         int order = transform.recurrence().degree();
         String from = "for every k ≥ 0" + output.closedForm().filter(form -> form.withoutImpulsesFrom() > 0)
                 .map(form -> ", without the delta terms from k = " + form.withoutImpulsesFrom() + " on").orElse("");
-        label("holds", from + ". " + switch (proof.method()) {
-            case CHARACTERISTIC -> "The " + states(proof.order()) + " that take part need a recurrence of order "
-                    + order + ", so it is their characteristic polynomial, and Cayley–Hamilton proves it for ever; "
-                    + proof.comparedSteps() + " exact terms compared.";
-            case WINDOWS -> "All " + proof.comparedSteps() + " exact terms compared satisfy a recurrence of order "
-                    + order + "; " + states(proof.order())
-                    + " take part, so by Cayley–Hamilton it holds for ever.";
-            case VECTOR -> "The recurrence of order " + order + " annihilates the start itself, D(A) x(0) = 0, so it"
-                    + " holds for every output and for ever.";
+        label("holds", from + ": " + switch (proof.method()) {
+            case CHARACTERISTIC -> "the sequence needs a recurrence of order " + order + ", and " + states(proof.order())
+                    + ", so it is their characteristic polynomial (Cayley–Hamilton); " + proof.comparedSteps()
+                    + " exact terms compared";
+            case WINDOWS -> "all " + proof.comparedSteps() + " exact terms compared satisfy a recurrence of order "
+                    + order + ", and " + states(proof.order()) + " (Cayley–Hamilton)";
+            case VECTOR -> "a recurrence of order " + order + " annihilates the start itself, D(A) x(0) = 0, and so"
+                    + " every output";
         });
     }
 
     private static String states(int count) {
-        return count == 1 ? "one state" : count + " states";
+        return count == 1 ? "one state takes part" : count + " states take part";
     }
 
     private void longRun(LongRunChecks checks) {
@@ -129,7 +143,7 @@ final class ResultBlocks {
         long checked = series.checked();
         return "; random runs: " + (checked == 0
                 ? "too few hits are expected, can't tell here"
-                : series.inside() + " of " + checked + " steps inside their 99.9 % intervals");
+                : series.inside() + " of " + checked + " steps inside their 99.9 % intervals");
     }
 
     private void secondOpinion(SecondOpinion opinion) {

@@ -1,0 +1,107 @@
+package org.pofk.report;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.stream.Collectors;
+import java.util.stream.IntStream;
+import org.pofk.chain.Chain;
+import org.pofk.chain.Model;
+import org.pofk.chain.Model.Convention;
+import org.pofk.chain.Output;
+import org.pofk.exact.Rational;
+import org.pofk.report.Document.Block;
+import org.pofk.report.Document.Heading;
+import org.pofk.report.Document.Items;
+import org.pofk.report.Document.Labelled;
+import org.pofk.report.Document.Paragraph;
+import org.pofk.transform.Lumping;
+import org.pofk.transform.Reduction;
+
+/** What a derivation starts from: the matrix, the start, the outputs, and which states take part. */
+final class ChainBlocks {
+    private static final int WRITTEN_OUT_UP_TO = 12;
+    private static final int CHARACTERISTIC_UP_TO = 5;
+
+    private final Model model;
+    private final List<Output> outputs;
+    private final Convention convention;
+    private final List<Block> blocks = new ArrayList<>();
+
+    private ChainBlocks(Model model, List<Output> outputs, Convention convention) {
+        this.model = model;
+        this.outputs = outputs;
+        this.convention = convention;
+    }
+
+    static List<Block> of(Model model, List<Output> outputs, Convention convention) {
+        ChainBlocks chain = new ChainBlocks(model, outputs, convention);
+        chain.write();
+        return chain.blocks;
+    }
+
+    private void write() {
+        Chain chain = model.chain();
+        boolean columns = convention == Convention.COLUMNS;
+        MatrixBlocks matrix = new MatrixBlocks(chain.states(), chain.matrix(), convention);
+        blocks.add(new Heading(2, columns ? "From x(k+1) = A x(k) to Y(z)" : "From p(k+1) = p(k) P to Y(z)"));
+        blocks.addAll(matrix.of(columns ? "A" : "P"));
+        if (!model.changes().isEmpty()) {
+            blocks.add(new Items(model.changes().stream().map(Prose::name).toList()));
+        }
+        blocks.add(new Labelled(columns ? "x(0)" : "p(0)", vector(chain.start())));
+        for (Output output : outputs) {
+            blocks.add(new Labelled(Prose.of("c of ").andName(output.name()), vector(output.coefficients())
+                    .and(output.constant().isZero() ? "" : ", plus " + output.constant())));
+        }
+        blocks.add(new Labelled("transform", columns ? "Y(z) = c (zI − A)^−1 z x(0), the z kept in front"
+                : "Y(z) = z p(0) (zI − P)^−1 c, the z kept in front"));
+        if (chain.size() <= CHARACTERISTIC_UP_TO) {
+            blocks.add(matrix.characteristic(columns ? "zI − A" : "zI − P"));
+        }
+        takingPart(Reduction.of(chain, outputs));
+    }
+
+    private Prose vector(List<Rational> values) {
+        if (values.size() <= WRITTEN_OUT_UP_TO) {
+            return Prose.of(values.stream().map(Rational::toString).collect(Collectors.joining(", ", "(", ")")));
+        }
+        List<Prose> entries = IntStream.range(0, values.size()).filter(i -> !values.get(i).isZero())
+                .mapToObj(i -> Prose.of(values.get(i) + " at ").andName(model.chain().states().get(i))).toList();
+        return Prose.joined(entries, ", ").and(", 0 elsewhere");
+    }
+
+    private void takingPart(Reduction reduction) {
+        int size = model.chain().size();
+        List<Integer> kept = reduction.kept().stream().filter(state -> state < size).toList();
+        if (kept.size() < size) {
+            blocks.add(new Paragraph(Prose.of(kept.size() + " of " + size + " states take part (the start reaches them,"
+                    + " and they reach an output): ").and(names(kept))));
+        }
+        reduction.lumpings().forEach(lumping -> lumping(lumping, reduction));
+    }
+
+    private Prose names(List<Integer> states) {
+        return Prose.names(states.stream().map(this::name).toList());
+    }
+
+    private String name(int state) {
+        return state < model.chain().size() ? model.chain().states().get(state) : "1";
+    }
+
+    private void lumping(Lumping lumping, Reduction reduction) {
+        blocks.add(new Paragraph(switch (lumping.kind()) {
+            case EXACT -> "The start is the same throughout these blocks, and so stays the state; states of a block are"
+                    + " taken together: A U = U Ã, x(0) = U x̃(0), c̃ = c U.";
+            case ORDINARY -> "The outputs are the same throughout these blocks, and only their sums are needed; states"
+                    + " of a block are taken together: V A = Ã V, c = c̃ V, x̃(0) = V x(0).";
+        }));
+        boolean first = lumping.equals(reduction.lumpings().get(0));
+        blocks.add(new Items(IntStream.range(0, lumping.blocks().size()).mapToObj(i -> Prose.of("block "
+                + (i + 1) + ": ").and(first ? names(lumping.blocks().get(i).stream().map(reduction.kept()::get).toList())
+                        : Prose.of(lumping.blocks().get(i).stream().map(place -> "block " + (place + 1) + " above")
+                                .collect(Collectors.joining(", "))))).toList()));
+        List<String> blockNames = IntStream.rangeClosed(1, lumping.blocks().size()).mapToObj(i -> "block " + i).toList();
+        blocks.addAll(new MatrixBlocks(blockNames, lumping.after().matrix(), convention)
+                .of(convention == Convention.COLUMNS ? "Ã" : "P̃"));
+    }
+}

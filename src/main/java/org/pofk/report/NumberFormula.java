@@ -1,0 +1,49 @@
+package org.pofk.report;
+
+import java.util.List;
+import org.pofk.exact.Decimals;
+import org.pofk.exact.Enclosed;
+import org.pofk.exact.Rational;
+import org.pofk.formula.Formula;
+import org.pofk.formula.PlainText;
+import org.pofk.modes.RealValue;
+import org.pofk.modes.Terms;
+
+/** Constants of a derivation as they are shown: short exact forms as such, others in decimals. */
+record NumberFormula(Style style) {
+    /** A short exact form is no longer than a decimal would be, and a little. */
+    private static final int ROOM = 6;
+    private static final Rational DEGREES_IN_HALF_TURN = Rational.of(180);
+
+    Formula of(RealValue value) {
+        return value.exact().filter(this::isShort).orElseGet(() -> decimal(value.rational()
+                .map(Enclosed::of).orElse(value.enclosure())));
+    }
+
+    Formula of(Rational value) {
+        return of(RealValue.of(value));
+    }
+
+    /** An angle in the unit of the style; exact multiples of π stay as they are in radians. */
+    Formula angle(RealValue value) {
+        if (style.angles() == Style.Angles.RADIANS) {
+            return of(value);
+        }
+        if (value.rational().filter(Rational::isZero).isPresent()) {
+            return Terms.number(Rational.ZERO);
+        }
+        Enclosed degrees = value.enclosure().times(Enclosed.of(DEGREES_IN_HALF_TURN)).dividedBy(Enclosed.pi());
+        return Terms.product(List.of(decimal(degrees), Formula.Constant.DEGREE));
+    }
+
+    private boolean isShort(Formula exact) {
+        return PlainText.UNICODE.write(exact).length() <= style.digits() + ROOM;
+    }
+
+    private Formula decimal(Enclosed value) {
+        String text = Decimals.of(value, style.digits()).text();
+        return text.startsWith("-")
+                ? Terms.negated(new Formula.WrittenDecimal(text.substring(1)))
+                : new Formula.WrittenDecimal(text);
+    }
+}

@@ -1,0 +1,184 @@
+package org.pofk.report;
+
+import java.util.ArrayList;
+import java.util.LinkedHashSet;
+import java.util.List;
+import java.util.Set;
+import org.pofk.answer.DerivedOutput;
+import org.pofk.exact.Factorization;
+import org.pofk.exact.Factorization.Factor;
+import org.pofk.exact.Polynomial;
+import org.pofk.exact.Rational;
+import org.pofk.formula.Formula;
+import org.pofk.modes.ClosedForm;
+import org.pofk.modes.Derivation;
+import org.pofk.modes.Derivation.FactorStep;
+import org.pofk.modes.Derivation.PairStep;
+import org.pofk.modes.Expansion;
+import org.pofk.modes.Mode;
+import org.pofk.modes.TablePair;
+import org.pofk.modes.Terms;
+import org.pofk.report.Document.Block;
+import org.pofk.report.Document.Display;
+import org.pofk.report.Document.Heading;
+import org.pofk.report.Document.Paragraph;
+import org.pofk.report.Document.Relation;
+import org.pofk.report.Document.Table;
+
+/** The way of one output from Y(z) to the closed form. */
+final class WayBlocks {
+    private static final Prose Y = Prose.of("Y(z)");
+    private static final int WRITTEN_OUT_UP_TO = 40;
+
+    private final DerivedOutput output;
+    private final ClosedForm form;
+    private final NumberFormula numbers;
+    private final List<Block> blocks = new ArrayList<>();
+
+    private WayBlocks(DerivedOutput output, ClosedForm form, Style style) {
+        this.output = output;
+        this.form = form;
+        this.numbers = new NumberFormula(style);
+    }
+
+    static List<Block> of(DerivedOutput output, Style style) {
+        if (output.closedForm().isEmpty()) {
+            return List.of();
+        }
+        WayBlocks way = new WayBlocks(output, output.closedForm().get(), style);
+        way.write();
+        return way.blocks;
+    }
+
+    /** With the formula at its end, for a reader who has not seen it before. */
+    static List<Block> withClosedForm(DerivedOutput output, Style style) {
+        List<Block> blocks = new ArrayList<>(of(output, style));
+        blocks.addAll(ResultBlocks.formulas(output, style));
+        return blocks;
+    }
+
+    private void write() {
+        blocks.add(new Heading(2, Prose.of("From Y(z) to ").and(OutputProse.atStep(output.output()))));
+        transform();
+        Derivation derivation = form.derivation();
+        if (form.transform().y().denominator().degree() <= WRITTEN_OUT_UP_TO) {
+            expansion();
+        }
+        pairs(derivation);
+        terms(derivation);
+    }
+
+    private void transform() {
+        Formula y = RationalFunction.inZ(form.transform().y());
+        Factorization<Rational> factors = form.transform().factors();
+        if (form.transform().y().denominator().degree() > WRITTEN_OUT_UP_TO) {
+            blocks.add(new Paragraph("Y(z) in lowest terms has a denominator of degree "
+                    + form.transform().y().denominator().degree() + "; its coefficients are in the result as JSON."));
+            return;
+        }
+        blocks.add(new Display(Y, Relation.EQUAL, y));
+        if (!form.transform().y().denominator().isConstant()) {
+            blocks.add(new Display(Prose.of("denominator"), Relation.EQUAL, product(factors)));
+        }
+        boolean proved = factors.factors().stream()
+                .allMatch(factor -> factor.irreducible() == Factorization.Irreducible.PROVED);
+        blocks.add(new Paragraph(proved ? "No factor can be split further over the rational numbers; that is proved."
+                : "That the factors can't be split further isn't proved; nothing below depends on it."));
+    }
+
+    private static Formula product(Factorization<Rational> factors) {
+        return Terms.product(factors.factors().stream().map(WayBlocks::power).toList());
+    }
+
+    private static Formula power(Factor<Rational> factor) {
+        return Terms.power(RationalFunction.inZ(factor.polynomial()),
+                Terms.number(Rational.of(factor.multiplicity())));
+    }
+
+    /** Y(z) = impulses + z · Σ R/(z − λ)^(p+1), exact. */
+    private void expansion() {
+        List<Formula> fractions = new ArrayList<>();
+        form.expansion().parts().forEach(part -> fractions.add(fraction(part)));
+        List<Formula> terms = new ArrayList<>();
+        for (int at = 0; at < form.expansion().impulses().size(); at++) {
+            Rational value = form.expansion().impulses().get(at);
+            if (!value.isZero()) {
+                terms.add(Terms.product(List.of(Terms.number(value),
+                        Terms.power(RationalFunction.Z, Terms.number(Rational.of(-at))))));
+            }
+        }
+        if (!fractions.isEmpty()) {
+            terms.add(Terms.product(List.of(RationalFunction.Z, Terms.sum(fractions))));
+        }
+        blocks.add(new Display(Y, Relation.EQUAL, Terms.sum(terms)));
+    }
+
+    private static Formula fraction(Expansion.Part<Rational> part) {
+        Polynomial<Rational> factor = part.factor().polynomial();
+        boolean isLinear = factor.degree() == 1;
+        Formula pole = isLinear ? Terms.number(factor.coefficient(0).negate()) : TablePair.LAMBDA;
+        List<Formula> fractions = new ArrayList<>();
+        for (int power = 0; power < part.coefficients().size(); power++) {
+            Expansion.Coefficient<Rational> coefficient = part.coefficients().get(power);
+            if (!coefficient.isZero()) {
+                fractions.add(over(written(coefficient), Terms.power(
+                        Terms.sum(List.of(RationalFunction.Z, Terms.negated(pole))),
+                        Terms.number(Rational.of(power + 1L)))));
+            }
+        }
+        return isLinear ? Terms.sum(fractions)
+                : new Formula.RootSum(TablePair.LAMBDA, Terms.polynomial(factor, TablePair.LAMBDA), Terms.sum(fractions));
+    }
+
+    private static Formula over(Formula numerator, Formula denominator) {
+        return numerator instanceof Formula.Number number && number.value().signum() < 0
+                ? Terms.negated(new Formula.Quotient(Terms.number(number.value().negate()), denominator))
+                : new Formula.Quotient(numerator, denominator);
+    }
+
+    private static Formula written(Expansion.Coefficient<Rational> coefficient) {
+        Formula numerator = Terms.polynomial(coefficient.numerator(), TablePair.LAMBDA);
+        return coefficient.denominator().equals(Polynomial.one(coefficient.denominator().field()))
+                ? numerator
+                : new Formula.Quotient(numerator, Terms.polynomial(coefficient.denominator(), TablePair.LAMBDA));
+    }
+
+    private void pairs(Derivation derivation) {
+        Set<TablePair> pairs = new LinkedHashSet<>();
+        derivation.impulses().forEach(step -> pairs.add(step.pair()));
+        derivation.factors().forEach(step -> {
+            step.real().forEach(real -> pairs.add(real.pair()));
+            step.pairs().forEach(pair -> pairs.add(pair.pair()));
+        });
+        blocks.add(new Table(Prose.of("Table pairs used"), List.of(Prose.of("in z"), Prose.of("in k")),
+                pairs.stream().map(pair -> List.of(Prose.formula(pair.transform()), Prose.formula(pair.sequence())))
+                        .toList()));
+    }
+
+    private void terms(Derivation derivation) {
+        List<List<Prose>> rows = new ArrayList<>();
+        derivation.impulses().forEach(step -> rows.add(row("impulse", Prose.EMPTY, Prose.EMPTY, step.mode())));
+        for (FactorStep step : derivation.factors()) {
+            step.real().forEach(real -> rows.add(row("real", Prose.formula(numbers.of(real.mode().base())),
+                    Prose.formula(numbers.of(real.mode().coefficient())), real.mode())));
+            step.pairs().forEach(pair -> rows.add(pair(pair)));
+        }
+        boolean hasPairs = derivation.factors().stream().anyMatch(step -> !step.pairs().isEmpty());
+        blocks.add(new Table(Prose.of("Poles, coefficients and the terms they become" + (hasPairs
+                ? "; λ, R and their conjugates join to 2|R| |λ|^k cos(arg λ · k + arg R)" : "")), List.of(Prose.of("pole"), Prose.of("λ"), Prose.of("R"),
+                        Prose.of("term")), rows));
+    }
+
+    private List<Prose> row(String kind, Prose pole, Prose coefficient, Mode mode) {
+        return List.of(Prose.of(kind), pole, coefficient, Prose.formula(mode.accept(new ModeTerm(numbers))));
+    }
+
+    private List<Prose> pair(PairStep pair) {
+        return row("pair", polar(numbers.of(pair.mode().modulus()), numbers.angle(pair.mode().angle())),
+                polar(numbers.of(pair.modulus()), numbers.angle(pair.argument())), pair.mode());
+    }
+
+    private static Prose polar(Formula modulus, Formula angle) {
+        return Prose.formula(modulus).and(" at ").andFormula(angle);
+    }
+}
