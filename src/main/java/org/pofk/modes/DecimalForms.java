@@ -10,6 +10,7 @@ import java.util.Optional;
 import java.util.OptionalInt;
 import java.util.stream.Collectors;
 import org.pofk.exact.Rational;
+import org.pofk.formula.Formula;
 
 /**
  * Writes a closed form in decimals so that the formula as printed is within 10^−digits of p(k) at every k ≥ 0, proved.
@@ -98,9 +99,9 @@ final class DecimalForms {
         @Override
         public Boolean impulse(Mode.Impulse impulse) {
             Optional<Rational> weight = Optional.of(Rational.ONE);
-            sum.add(rule.weighted(impulse.value(), weight), weight)
-                    .ifPresent(value -> sum.term(ModeFormula.impulse(value, impulse.at())));
-            return rule.weighted(impulse.value(), weight).isPresent();
+            Optional<Formula> written = sum.add(rule.weighted(impulse.value(), weight), weight);
+            written.ifPresent(value -> sum.term(ModeFormula.impulse(value, impulse.at())));
+            return written.isPresent();
         }
 
         @Override

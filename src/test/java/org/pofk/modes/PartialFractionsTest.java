@@ -81,14 +81,14 @@ class PartialFractionsTest {
         assertEquals(expansion.recombined(), new TransferFunction<>(Polynomial.ofIntegers(0, 0, 1), q));
     }
 
-    /** The power series of N/D against traces, and the expansion brought back to N/D, on 500 random products. */
+    /** The power series of N/D against traces, and the expansion brought back to N/D, on 300 random products. */
     @Test
     void expansionOfRandomProductsRecombinesAndGivesTheSeries() {
         Random random = new Random(20240917);
         int repeated = 0;
         int poleAtZero = 0;
         int simpleQuadratics = 0;
-        for (int run = 0; run < 500; run++) {
+        for (int run = 0; run < 300; run++) {
             RandomTransform sample = RandomTransform.of(random);
             repeated += sample.hasRepeatedQuadratic() ? 1 : 0;
             poleAtZero += sample.y().denominator().lowestPower() > 0 ? 1 : 0;
@@ -100,9 +100,9 @@ class PartialFractionsTest {
                 assertEquals(series.get(k), expansion.valueAt(k), sample + " at " + k);
             }
         }
-        assertTrue(repeated > 100, "repeated quadratics: " + repeated);
-        assertTrue(poleAtZero > 100, "poles at zero: " + poleAtZero);
-        assertTrue(simpleQuadratics > 100, "others: " + simpleQuadratics);
+        assertTrue(repeated > 50, "repeated quadratics: " + repeated);
+        assertTrue(poleAtZero > 60, "poles at zero: " + poleAtZero);
+        assertTrue(simpleQuadratics > 60, "others: " + simpleQuadratics);
     }
 
     /** Over Q(√2) the same code splits z² − 1/2, which is irreducible over Q. */
