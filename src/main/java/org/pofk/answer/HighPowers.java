@@ -111,18 +111,18 @@ public final class HighPowers {
     }
 
     private Optional<Stop> stopStepByStep(Output output, List<Rational> values) {
-        return firstStop(sequence.steps()).map(place ->
+        return firstStop(sequence.steps(), PowerSequence.HIGH).map(place ->
                 stop(Way.STEP_BY_STEP, place, sequence.steps().get(place).reading(output), values));
     }
 
     private Optional<Stop> stopBySquaring(Output output, List<Rational> values) {
-        return firstStop(sequence.doubling()).map(place ->
+        return firstStop(sequence.doubling(), Integer.numberOfTrailingZeros(PowerSequence.HIGH)).map(place ->
                 stop(Way.BY_SQUARING, 1L << place, sequence.doubling().get(place).reading(output), values));
     }
 
-    /** The place of the first state that differs from the one before it by no more than the habit's tolerance. */
-    private static Optional<Integer> firstStop(List<FixedPointState> states) {
-        for (int place = 1; place < states.size(); place++) {
+    /** The place, from the given one on, of the first state that differs from the one before it by no more than the habit's tolerance. */
+    private static Optional<Integer> firstStop(List<FixedPointState> states, int firstPlace) {
+        for (int place = firstPlace; place < states.size(); place++) {
             if (hardlyChanges(states, place)) {
                 return Optional.of(place);
             }

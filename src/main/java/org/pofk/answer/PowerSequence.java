@@ -9,7 +9,8 @@ import org.pofk.exact.Rational;
  * The state of a chain at powers of two, x(1), x(2), x(4), …, and step by step until it hardly changes or the work
  * allows no more. Certified: from below, see {@link FixedPointState}.
  *
- * @param steps    x(0), x(1), x(2), … up to the first that differs from the one before by no more than the tolerance
+ * @param steps    x(0), x(1), x(2), … up to the first that differs from the one before by no more than the tolerance,
+ *                 not before x({@value #HIGH})
  * @param doubling in place m the state at k = 2^m
  * @param tail     states that follow the last power of two, step by step
  */
@@ -21,6 +22,8 @@ record PowerSequence(List<FixedPointState> steps, List<FixedPointState> doubling
     /** Steps taken one by one cost at most this many multiplications. */
     private static final int MULTIPLICATIONS = 500_000;
     private static final int STEPS = 1024;
+    /** Lower powers are nobody's idea of a high one. */
+    static final int HIGH = 8;
 
     PowerSequence {
         steps = List.copyOf(steps);
@@ -56,7 +59,7 @@ record PowerSequence(List<FixedPointState> steps, List<FixedPointState> doubling
         while (states.size() <= last && !isSettled) {
             FixedPointState before = states.get(states.size() - 1);
             FixedPointState next = FixedPointState.combination(columns, before.components());
-            isSettled = next.isWithin(tolerance, before);
+            isSettled = states.size() >= HIGH && next.isWithin(tolerance, before);
             states.add(next);
         }
         return states;

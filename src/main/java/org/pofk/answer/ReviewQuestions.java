@@ -31,7 +31,7 @@ final class ReviewQuestions {
         ReviewQuestions review = new ReviewQuestions(model, structure);
         review.askAboutReach();
         if (model.chain().kind() == Chain.Kind.CHAIN) {
-            review.askAboutLeaving();
+            review.askAboutLeaving(nearlyClosed);
             review.askAboutLongRun(nearlyClosed);
         }
         review.askAboutEntry();
@@ -45,7 +45,7 @@ final class ReviewQuestions {
         }
     }
 
-    private void askAboutLeaving() {
+    private void askAboutLeaving(List<NearlyClosed> nearlyClosed) {
         List<Integer> neverLeft = structure.absorbing();
         // with one state there is nothing to leave it for
         if (!neverLeft.isEmpty() && chain.size() > 1) {
@@ -57,9 +57,11 @@ final class ReviewQuestions {
             Rational leaving = Rational.ONE.minus(staying);
             boolean isHardlyLeft = leaving.signum() > 0 && leaving.compareTo(NearlyClosed.HARDLY) < 0;
             // a state to start in may well be a good one; one to end in is the question
-            if (isHardlyLeft && chain.start().get(state).isZero()) {
-                ask(Question.Kind.HARDLY_LEFT, named(List.of(state)) + " is left with a chance of only " + leaving
-                        + " a step: is it meant to have an exit at all?", List.of(state));
+            List<Integer> alone = List.of(state);
+            boolean isAskedAbout = nearlyClosed.stream().anyMatch(each -> each.states().equals(alone));
+            if (isHardlyLeft && chain.start().get(state).isZero() && !isAskedAbout) {
+                ask(Question.Kind.HARDLY_LEFT, named(alone) + " is left with a chance of only " + leaving
+                        + " a step: is it meant to have an exit at all?", alone);
             }
         }
     }
@@ -78,7 +80,8 @@ final class ReviewQuestions {
             }
         }
         for (NearlyClosed each : nearlyClosed) {
-            ask(Question.Kind.SETTLES_LATE, named(each.states()) + " are left with a chance of at most "
+            String verb = each.states().size() == 1 ? " is" : " are";
+            ask(Question.Kind.SETTLES_LATE, named(each.states()) + verb + " left with a chance of at most "
                     + each.leavingAtMost() + " a step, so the long run is reached late: is the long run what matters?",
                     each.states());
         }
