@@ -55,12 +55,12 @@ final class ModularPolynomial {
         return false;
     }
 
-    private static boolean isDefined(Polynomial<Rational> polynomial, BigInteger modulus) {
+    static boolean isDefined(Polynomial<Rational> polynomial, BigInteger modulus) {
         return polynomial.coefficients().stream()
                 .allMatch(coefficient -> coefficient.denominator().mod(modulus).signum() != 0);
     }
 
-    private static ModularPolynomial image(Polynomial<Rational> polynomial, int prime) {
+    static ModularPolynomial image(Polynomial<Rational> polynomial, int prime) {
         BigInteger modulus = BigInteger.valueOf(prime);
         return new ModularPolynomial(prime, polynomial.coefficients().stream().mapToLong(coefficient ->
                 coefficient.numerator().mod(modulus).longValueExact()
@@ -70,6 +70,11 @@ final class ModularPolynomial {
 
     int degree() {
         return ascending.length - 1;
+    }
+
+    /** The coefficient of z^power, zero above the degree. */
+    long coefficient(int power) {
+        return power < ascending.length ? ascending[power] : 0;
     }
 
     long valueAt(long point) {
@@ -132,7 +137,7 @@ final class ModularPolynomial {
         }
     }
 
-    private ModularPolynomial timesModulo(ModularPolynomial other, ModularPolynomial modulus) {
+    ModularPolynomial timesModulo(ModularPolynomial other, ModularPolynomial modulus) {
         if (degree() < 0 || other.degree() < 0) {
             return new ModularPolynomial(prime, new long[0]);
         }
@@ -145,7 +150,7 @@ final class ModularPolynomial {
         return new ModularPolynomial(prime, product).remainder(modulus);
     }
 
-    private ModularPolynomial powerModulo(long exponent, ModularPolynomial modulus) {
+    ModularPolynomial powerModulo(long exponent, ModularPolynomial modulus) {
         ModularPolynomial result = new ModularPolynomial(prime, new long[] {1});
         for (int bit = 63 - Long.numberOfLeadingZeros(exponent); bit >= 0; bit--) {
             result = result.timesModulo(result, modulus);

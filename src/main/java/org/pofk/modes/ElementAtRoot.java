@@ -36,6 +36,9 @@ record ElementAtRoot(NumberField field, Polynomial<Rational> element, Root root,
         if (element.isConstant()) {
             return Optional.of(Surd.of(element.coefficient(0)));
         }
+        if (field.provesHigherDegree(element, 1)) {
+            return Optional.empty();
+        }
         Polynomial<Rational> square = field.multiply(element, element);
         Rational s = square.coefficient(element.degree()).dividedBy(element.leading());
         Polynomial<Rational> rest = square.minus(element.times(s));
@@ -82,7 +85,7 @@ record ElementAtRoot(NumberField field, Polynomial<Rational> element, Root root,
         Optional<Radical> found = surd().map(Radical::of)
                 .or(() -> monomialSize().map(size -> realSign() < 0 ? size.negate() : size));
         for (int exponent : new int[] {2, field.step(), 2 * field.step()}) {
-            if (found.isEmpty() && exponent > 1) {
+            if (found.isEmpty() && exponent > 1 && !field.provesHigherDegree(element, exponent)) {
                 found = power(exponent).surd().flatMap(power -> rootOf(power, exponent));
             }
         }

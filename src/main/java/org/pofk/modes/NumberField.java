@@ -7,6 +7,7 @@ import java.util.Optional;
 import java.util.function.IntFunction;
 import org.pofk.exact.ComplexBall;
 import org.pofk.exact.Polynomial;
+import org.pofk.exact.QuadraticScreen;
 import org.pofk.exact.Rational;
 import org.pofk.exact.RationalField;
 import org.pofk.exact.ResidueField;
@@ -84,6 +85,11 @@ final class NumberField {
             }
         }
         return result;
+    }
+
+    /** Whether h^exponent is proved to be no root of a quadratic over Q; false says nothing. */
+    boolean provesHigherDegree(Polynomial<Rational> h, int exponent) {
+        return degree() > 2 && QuadraticScreen.provesHigherDegree(modulus(), h, exponent);
     }
 
     /** Decides whether λ^m is real, m = {@link #step}: it is a root of g, and there it is known. Finds those once. */
