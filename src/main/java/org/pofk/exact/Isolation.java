@@ -28,6 +28,7 @@ final class Isolation {
     private final BoundedHorner polynomial;
     private final List<Point> points;
     private final int room;
+    private final int leastPrecision;
     private int precision;
     private int round;
 
@@ -43,15 +44,24 @@ final class Isolation {
         }
     }
 
-    private Isolation(BoundedHorner polynomial, List<Start> starts) {
+    private Isolation(BoundedHorner polynomial, List<Start> starts, int leastPrecision) {
         this.polynomial = polynomial;
         this.points = starts.stream().map(Point::new).toList();
         this.room = ROOM + Evaluation.ceilingLog(polynomial.degree());
-        this.precision = FIRST_ACCURACY + room;
+        this.leastPrecision = leastPrecision;
+        this.precision = firstPrecision();
     }
 
     /** The roots on the axis and above it; empty when the guesses don't lead to disjoint discs. */
     static Optional<List<Isolated>> attempt(BoundedHorner polynomial, List<Start> all) {
+        return attempt(polynomial, all, LEAST_PRECISION);
+    }
+
+    /**
+     * The same, p evaluated with that many bits at least: what guesses found with them need, for roots much closer to
+     * each other than the precision chosen here would tell apart.
+     */
+    static Optional<List<Isolated>> attempt(BoundedHorner polynomial, List<Start> all, int leastPrecision) {
         List<Start> onAxis = all.stream().filter(Start::mayBeReal).map(Start::onAxis).toList();
         List<Start> above = all.stream().filter(s -> !s.mayBeReal() && s.isAbove()).toList();
         if (onAxis.size() + 2 * above.size() != polynomial.degree()) {
@@ -62,7 +72,7 @@ final class Isolation {
         if (starts.stream().anyMatch(s -> s.x().signum() == 0 && s.y().signum() == 0)) {
             return Optional.empty();
         }
-        return new Isolation(polynomial, starts).settle();
+        return new Isolation(polynomial, starts, leastPrecision).settle();
     }
 
     private Optional<List<Isolated>> settle() {
@@ -110,8 +120,12 @@ final class Isolation {
         point.disc = new Disc(disc.x(), disc.y(), disc.scale(), radius);
         point.value = Optional.of(value);
         precision = value.slopeExponent().isPresent()
-                ? Math.max(LEAST_PRECISION, value.loss() + FIRST_ACCURACY + room)
-                : FIRST_ACCURACY + room;
+                ? Math.max(leastPrecision, value.loss() + FIRST_ACCURACY + room)
+                : firstPrecision();
+    }
+
+    private int firstPrecision() {
+        return Math.max(leastPrecision, FIRST_ACCURACY + room);
     }
 
     private boolean isHidden(Evaluation value, Disc disc) {

@@ -33,7 +33,7 @@ final class RootIsolation {
             if (precision > Raising.MOST_BITS) {
                 throw new AssertionError("roots not isolated at " + precision + " bits: " + polynomial);
             }
-            isolated = Isolation.attempt(horner, precise.starts(precision));
+            isolated = Isolation.attempt(horner, precise.starts(precision), precision);
         }
         return located(horner, isolated.get());
     }

@@ -83,6 +83,28 @@ class RootsTest {
         holdsItsContract(polynomial, 128);
     }
 
+    /** Two real roots 10^−e apart and a pair 2·10^−e apart, among others that are far from each other. */
+    @ParameterizedTest
+    @ValueSource(ints = {20, 45, 120, 300})
+    void rootsFarCloserThanDoublesTellAreToldApart(int e) {
+        Rational gap = Rational.of(10).pow(-e);
+        Rational low = Rational.of(9, 10);
+        Rational high = low.plus(gap);
+        Polynomial<Rational> pair = Polynomial.ofIntegers(1, 2).pow(2).plus(Polynomial.ofRationals(
+                List.of(gap.times(gap).times(Rational.of(4)))));
+        Polynomial<Rational> polynomial = Polynomial.linear(RationalField.Q, low)
+                .times(Polynomial.linear(RationalField.Q, high)).times(pair)
+                .times(Polynomial.ofIntegers(5, 7, 5)).times(Polynomial.ofIntegers(5, -3, 5))
+                .times(Polynomial.ofIntegers(-11, 0, 17));
+        Roots roots = Roots.of(polynomial);
+        assertEquals(List.of(true, true, true, true, false), roots.all().subList(0, 5).stream().map(Root::isReal)
+                .toList());
+        assertTrue(roots.all().get(0).enclose(4 * e + 8).real().contains(high));
+        assertTrue(roots.all().get(1).enclose(4 * e + 8).real().contains(low));
+        assertTrue(roots.all().stream().filter(root -> root.enclose(4 * e + 8).imaginary().contains(gap)).count() == 1);
+        holdsItsContract(polynomial, 128);
+    }
+
     @Test
     void hugeAndSmallCoefficientsAndSizesOfRoots() {
         Rational huge = Rational.of(BigInteger.TEN.pow(900));
