@@ -5,6 +5,9 @@ import java.util.List;
 import org.pofk.exact.Factorization;
 import org.pofk.exact.Polynomial;
 import org.pofk.exact.Rational;
+import org.pofk.formula.Formula.Call;
+import org.pofk.formula.Formula.Constant;
+import org.pofk.formula.Formula.Function;
 import org.pofk.formula.Formula.Negation;
 import org.pofk.formula.Formula.Number;
 import org.pofk.formula.Formula.Power;
@@ -37,6 +40,14 @@ public final class Formulas {
         return text.startsWith("-") ? new Negation(new WrittenDecimal(text.substring(1))) : new WrittenDecimal(text);
     }
 
+    public static Formula call(Function function, Formula... arguments) {
+        return new Call(function, List.of(arguments));
+    }
+
+    public static Formula squareRoot(Formula radicand) {
+        return call(Function.SQRT, radicand);
+    }
+
     /** The sum: sums within it dissolved, zeros left out, all numbers added up where the first one stands. */
     public static Formula sum(List<Formula> terms) {
         List<Formula> kept = new ArrayList<>();
@@ -62,10 +73,6 @@ public final class Formulas {
 
     private static List<Formula> termsOf(Formula formula) {
         return formula instanceof Sum sum ? sum.terms() : List.of(formula);
-    }
-
-    public static Formula difference(Formula left, Formula right) {
-        return sum(List.of(left, negated(right)));
     }
 
     /** The product: products within it dissolved, its sign and all its numbers in one in front; zero times is zero. */
@@ -102,12 +109,32 @@ public final class Formulas {
         return coefficient.signum() < 0 ? new Negation(product) : product;
     }
 
+    /** factor · irrational as one fraction with its sign in front: −3√2/10. */
+    public static Formula fraction(Rational factor, Formula irrational) {
+        return quotient(product(number(Rational.of(factor.numerator())), irrational),
+                number(Rational.of(factor.denominator())));
+    }
+
+    /** value · factor, written over the value's denominator where it is a quotient: 2π/5 · k as 2πk/5. */
+    public static Formula overDenominator(Formula value, Formula factor) {
+        return value instanceof Quotient quotient
+                ? new Quotient(product(quotient.numerator(), factor), quotient.denominator())
+                : product(value, factor);
+    }
+
     /** The negation; that of a negation or a number is the formula or number itself, without or with the other sign. */
     public static Formula negated(Formula formula) {
         if (formula instanceof Negation negation) {
             return negation.operand();
         }
         return formula instanceof Number number ? number(number.value().negate()) : new Negation(formula);
+    }
+
+    /** −formula, in a sum with every sign turned. */
+    public static Formula opposite(Formula formula) {
+        return formula instanceof Sum sum
+                ? new Sum(sum.terms().stream().map(Formulas::negated).toList())
+                : negated(formula);
     }
 
     /** The quotient: a sign stands in front; a number over a number is a fraction, unless it divides by zero. */
@@ -129,6 +156,22 @@ public final class Formulas {
         return isNegative(numerator)
                 ? new Negation(new Quotient(negated(numerator), denominator))
                 : new Quotient(numerator, denominator);
+    }
+
+    public static boolean isZero(Formula formula) {
+        return formula instanceof Number number && number.value().isZero();
+    }
+
+    /** π, 2π/5, −π/3: as {@link #fraction} writes them. */
+    public static boolean isMultipleOfPi(Formula formula) {
+        if (formula instanceof Negation negation) {
+            return isMultipleOfPi(negation.operand());
+        }
+        if (formula instanceof Quotient quotient) {
+            return quotient.denominator() instanceof Number && isMultipleOfPi(quotient.numerator());
+        }
+        return formula == Constant.PI || formula instanceof Product product && product.factors().size() == 2
+                && product.factors().get(0) instanceof Number && product.factors().get(1) == Constant.PI;
     }
 
     private static boolean isNegative(Formula formula) {
@@ -177,10 +220,5 @@ public final class Formulas {
         factorization.factors().forEach(factor ->
                 factors.add(power(polynomial(factor.polynomial(), variable), number(factor.multiplicity()))));
         return product(factors);
-    }
-
-    /** The same formula built anew with the functions of this class, from the leaves up. */
-    public static Formula tidy(Formula formula) {
-        return formula.accept(Tidying.TIDYING);
     }
 }

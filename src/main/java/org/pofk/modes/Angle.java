@@ -3,6 +3,7 @@ package org.pofk.modes;
 import java.util.Optional;
 import org.pofk.exact.Rational;
 import org.pofk.formula.Formula;
+import org.pofk.formula.Formulas;
 
 /** An angle in (−π, π] with a short exact form. Exact. */
 sealed interface Angle {
@@ -17,8 +18,8 @@ sealed interface Angle {
         @Override
         public Formula formula() {
             return fraction.isZero()
-                    ? Terms.number(fraction)
-                    : Terms.scaled(fraction, Formula.Constant.PI);
+                    ? Formulas.number(fraction)
+                    : Formulas.fraction(fraction, Formula.Constant.PI);
         }
 
         @Override
@@ -31,8 +32,8 @@ sealed interface Angle {
     record ArcCosine(int sign, Radical cosine) implements Angle {
         @Override
         public Formula formula() {
-            Formula angle = Terms.call(Formula.Function.ARCCOS, cosine.formula());
-            return sign < 0 ? Terms.negated(angle) : angle;
+            Formula angle = Formulas.call(Formula.Function.ARCCOS, cosine.formula());
+            return sign < 0 ? Formulas.negated(angle) : angle;
         }
 
         @Override

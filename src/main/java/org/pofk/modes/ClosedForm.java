@@ -7,6 +7,7 @@ import org.pofk.exact.Factorization.Factor;
 import org.pofk.exact.Rational;
 import org.pofk.exact.Roots;
 import org.pofk.formula.Formula;
+import org.pofk.formula.Formulas;
 import org.pofk.transform.Transform;
 
 /**
@@ -56,7 +57,7 @@ public record ClosedForm(Transform transform, Expansion<Rational> expansion, Lis
     /** The formula in short exact forms; empty when some constant has none. Variable k. */
     public Optional<Formula> exactFormula() {
         return isExactThroughout()
-                ? Optional.of(Terms.sum(modes.stream().map(ModeFormula::exact).toList()))
+                ? Optional.of(Formulas.sum(modes.stream().map(ModeFormula::exact).toList()))
                 : Optional.empty();
     }
 

@@ -11,6 +11,7 @@ import org.pofk.exact.Rational;
 import org.pofk.exact.RationalField;
 import org.pofk.exact.Root;
 import org.pofk.formula.Formula;
+import org.pofk.formula.Formulas;
 
 /**
  * All roots of q as center + scale √radicand cos(turn · 2πj/order), j coprime to the order: the poles of walks to and
@@ -76,8 +77,8 @@ record CosineForm(Rational center, Rational scale, Rational radicand, Rational t
         boolean isObtuse = fraction.compareTo(Rational.HALF) > 0;
         Surd amplitude = Surd.of(Rational.ZERO, isObtuse ? scale.negate() : scale, radicand);
         Formula angle = new Angle.PiMultiple(isObtuse ? Rational.ONE.minus(fraction) : fraction).formula();
-        Formula cosine = Terms.product(List.of(amplitude.formula(), Terms.call(Formula.Function.COS, angle)));
-        return center.isZero() ? cosine : Terms.sum(List.of(Terms.number(center), cosine));
+        Formula cosine = Formulas.product(List.of(amplitude.formula(), Formulas.call(Formula.Function.COS, angle)));
+        return center.isZero() ? cosine : Formulas.sum(List.of(Formulas.number(center), cosine));
     }
 
     /** q(z + shift). */

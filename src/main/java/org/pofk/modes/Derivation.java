@@ -7,6 +7,7 @@ import org.pofk.exact.EnclosedComplex;
 import org.pofk.exact.Factorization.Factor;
 import org.pofk.exact.Rational;
 import org.pofk.formula.Formula;
+import org.pofk.formula.Formulas;
 
 /** The way from a factored transform to the closed form, step by step, to be written down. As exact as the form. */
 public record Derivation(List<ImpulseStep> impulses, List<FactorStep> factors) {
@@ -56,8 +57,8 @@ public record Derivation(List<ImpulseStep> impulses, List<FactorStep> factors) {
             Factor<Rational> factor = part.factor();
             int index = form.transform().factors().factors().indexOf(factor);
             FactorPoles poles = new FactorPoles(factor);
-            steps.add(new FactorStep(index, Terms.polynomial(factor.polynomial(), TablePair.Z),
-                    factor.multiplicity(), part.coefficients().stream().map(FormulaOverRoots::written).toList(),
+            steps.add(new FactorStep(index, Formulas.polynomial(factor.polynomial(), TablePair.Z),
+                    factor.multiplicity(), FormulaOverRoots.coefficients(part, form.transform().y()),
                     collected.real.stream().filter(step -> step.mode().factor() == index).toList(),
                     collected.pairs.stream().filter(mode -> mode.factor() == index)
                             .map(mode -> pair(mode, poles, part.coefficients().get(mode.power()))).toList()));

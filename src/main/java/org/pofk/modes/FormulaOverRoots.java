@@ -1,12 +1,21 @@
 package org.pofk.modes;
 
+import java.math.BigInteger;
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
+import java.util.stream.Stream;
 import org.pofk.exact.Polynomial;
 import org.pofk.exact.Rational;
 import org.pofk.formula.Formula;
+import org.pofk.formula.Formulas;
+import org.pofk.formula.PlainText;
+import org.pofk.transform.TransferFunction;
 
-/** The exact formula of every closed form: factors without short forms stand as sums over their roots. Exact. */
+/**
+ * The exact formula of every closed form: factors without short forms stand as sums over their roots, polynomials with
+ * whole coefficients and coefficients as quotients N(λ)/D′(λ) where that is shorter. Exact.
+ */
 final class FormulaOverRoots {
     private static final Formula.Symbol LAMBDA = TablePair.LAMBDA;
 
@@ -23,34 +32,65 @@ final class FormulaOverRoots {
             if (modes.stream().allMatch(Mode::isExact)) {
                 modes.forEach(mode -> terms.add(ModeFormula.exact(mode)));
             } else {
-                terms.add(overRoots(part));
+                terms.add(overRoots(part, form.transform().y()));
             }
         }
-        return Terms.sum(terms);
+        return Formulas.sum(terms);
     }
 
     /** Σ over q(λ) = 0 of Σ_p R_p(λ) binomial(k, p) λ^(k−p). */
-    static Formula.RootSum overRoots(Expansion.Part<Rational> part) {
+    private static Formula.RootSum overRoots(Expansion.Part<Rational> part, TransferFunction<Rational> y) {
+        List<Formula> coefficients = coefficients(part, y);
         List<Formula> body = new ArrayList<>();
-        for (int power = 0; power < part.coefficients().size(); power++) {
-            Expansion.Coefficient<Rational> coefficient = part.coefficients().get(power);
-            if (!coefficient.isZero()) {
-                body.add(Terms.product(List.of(written(coefficient), Terms.binomial(power),
-                        Terms.power(LAMBDA, Terms.kMinus(power)))));
-            }
+        for (int power = 0; power < coefficients.size(); power++) {
+            body.add(ModeFormula.geometric(coefficients.get(power), power, LAMBDA));
         }
-        return new Formula.RootSum(LAMBDA, polynomial(part.factor().polynomial()), Terms.sum(body));
+        return new Formula.RootSum(LAMBDA, equation(part.factor().polynomial()), Formulas.sum(body));
     }
 
-    /** R(λ). */
-    static Formula written(Expansion.Coefficient<Rational> coefficient) {
-        Formula numerator = polynomial(coefficient.numerator());
-        return coefficient.isReduced()
-                ? numerator
-                : new Formula.Quotient(numerator, polynomial(coefficient.denominator()));
+    /** A polynomial with the same roots. */
+    private static Formula equation(Polynomial<Rational> q) {
+        return shortest(List.of(written(q), written(q.times(content(q.coefficients().stream()).inverse()))));
     }
 
-    private static Formula polynomial(Polynomial<Rational> polynomial) {
-        return Terms.polynomial(polynomial, LAMBDA);
+    /** R_p(λ) by power p, each the shortest of the ways to write it. */
+    static List<Formula> coefficients(Expansion.Part<Rational> part, TransferFunction<Rational> y) {
+        boolean isSimple = part.factor().multiplicity() == 1;
+        return part.coefficients().stream().map(coefficient -> isSimple
+                ? shortest(List.of(quotient(coefficient), wholeQuotient(coefficient),
+                        wholeQuotient(PartialFractions.unreduced(y))))
+                : shortest(List.of(quotient(coefficient), wholeQuotient(coefficient)))).toList();
+    }
+
+    private static Formula quotient(Expansion.Coefficient<Rational> coefficient) {
+        return Formulas.quotient(written(coefficient.numerator()), written(coefficient.denominator()));
+    }
+
+    /** Both polynomials over what their coefficients have in common: whole ones without a common divisor. */
+    private static Formula wholeQuotient(Expansion.Coefficient<Rational> coefficient) {
+        if (coefficient.isZero()) {
+            return Formulas.number(0);
+        }
+        Rational factor = content(Stream.concat(coefficient.numerator().coefficients().stream(),
+                coefficient.denominator().coefficients().stream())).inverse();
+        return quotient(new Expansion.Coefficient<>(coefficient.numerator().times(factor),
+                coefficient.denominator().times(factor)));
+    }
+
+    /** The greatest rational number of which all are whole multiples; they are not all zero. */
+    private static Rational content(Stream<Rational> numbers) {
+        List<Rational> all = numbers.toList();
+        BigInteger divisor = all.stream().map(Rational::numerator).reduce(BigInteger.ZERO, BigInteger::gcd);
+        BigInteger denominator = all.stream().map(Rational::denominator)
+                .reduce(BigInteger.ONE, (a, b) -> a.divide(a.gcd(b)).multiply(b));
+        return new Rational(divisor, denominator);
+    }
+
+    private static Formula shortest(List<Formula> ways) {
+        return ways.stream().min(Comparator.comparing(way -> PlainText.UNICODE.write(way).length())).orElseThrow();
+    }
+
+    private static Formula written(Polynomial<Rational> polynomial) {
+        return Formulas.polynomial(polynomial, LAMBDA);
     }
 }

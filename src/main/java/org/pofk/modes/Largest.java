@@ -5,6 +5,7 @@ import java.util.Optional;
 import org.pofk.exact.Ball;
 import org.pofk.exact.Enclosed;
 import org.pofk.exact.Rational;
+import org.pofk.formula.Formulas;
 
 /** The largest absolute value of several numbers. Certified. */
 final class Largest {
@@ -46,7 +47,7 @@ final class Largest {
         }
         return ball(value).isPositive()
                 ? value
-                : new RealValue(value.exact().map(Terms::opposite), value.enclosure().map(Ball::abs));
+                : new RealValue(value.exact().map(Formulas::opposite), value.enclosure().map(Ball::abs));
     }
 
     private static Ball larger(Ball a, Ball b) {

@@ -2,13 +2,30 @@ package org.pofk.modes;
 
 import java.util.List;
 import org.pofk.formula.Formula;
+import org.pofk.formula.Formulas;
 
 /**
  * A mode as a term in k. An impulse is a multiple of δ(k − at); a phase written π is a minus sign in front of the
  * cosine; a pole written 1 leaves no power.
  */
 public final class ModeFormula {
+    private static final Formula K = new Formula.Symbol("k");
+
     private ModeFormula() {
+    }
+
+    /** k − shift. */
+    public static Formula kMinus(int shift) {
+        return Formulas.sum(List.of(K, Formulas.number(-shift)));
+    }
+
+    /** binomial(k, p): 1 for p = 0, k for p = 1. */
+    public static Formula binomial(int p) {
+        return switch (p) {
+            case 0 -> Formulas.number(1);
+            case 1 -> K;
+            default -> Formulas.call(Formula.Function.BINOMIAL, K, Formulas.number(p));
+        };
     }
 
     /** With every constant in its exact form, which it has. */
@@ -17,19 +34,19 @@ public final class ModeFormula {
     }
 
     public static Formula impulse(Formula value, int at) {
-        return Terms.product(List.of(value, Terms.call(Formula.Function.DELTA, Terms.kMinus(at))));
+        return Formulas.product(List.of(value, Formulas.call(Formula.Function.DELTA, kMinus(at))));
     }
 
     public static Formula geometric(Formula coefficient, int power, Formula base) {
-        return Terms.product(List.of(coefficient, Terms.binomial(power), Terms.power(base, Terms.kMinus(power))));
+        return Formulas.product(List.of(coefficient, binomial(power), Formulas.power(base, kMinus(power))));
     }
 
     public static Formula oscillating(Formula amplitude, int power, Formula modulus, Formula angle, Formula phase) {
         boolean turned = phase == Formula.Constant.PI;
-        Formula turn = Terms.overDenominator(angle, Terms.kMinus(power));
-        Formula argument = turned || Terms.isZero(phase) ? turn : new Formula.Sum(List.of(turn, phase));
-        return Terms.product(List.of(turned ? Terms.negated(amplitude) : amplitude, Terms.binomial(power),
-                Terms.power(modulus, Terms.kMinus(power)), Terms.call(Formula.Function.COS, argument)));
+        Formula turn = Formulas.overDenominator(angle, kMinus(power));
+        Formula argument = turned || Formulas.isZero(phase) ? turn : new Formula.Sum(List.of(turn, phase));
+        return Formulas.product(List.of(turned ? Formulas.negated(amplitude) : amplitude, binomial(power),
+                Formulas.power(modulus, kMinus(power)), Formulas.call(Formula.Function.COS, argument)));
     }
 
     private static final class Exact implements Mode.Visitor<Formula> {

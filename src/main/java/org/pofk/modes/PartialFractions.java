@@ -41,10 +41,24 @@ public final class PartialFractions<E> {
         if (y.numerator().isZero()) {
             return new Expansion<>(y.denominator().field(), List.of(), List.of());
         }
-        boolean startsAtZero = y.numerator().field().isZero(y.numerator().coefficient(0));
-        Polynomial<E> numerator = startsAtZero ? y.numerator().shiftedDown(1) : y.numerator();
-        Polynomial<E> denominator = startsAtZero ? y.denominator() : y.denominator().shiftedUp(1);
-        return new PartialFractions<>(denominator, factors).expand(numerator);
+        return new PartialFractions<>(denominatorOverZ(y), factors).expand(numeratorOverZ(y));
+    }
+
+    /** N(λ)/D′(λ) with Y(z)/z = N/D: the coefficient of every simple pole λ but zero, as it comes, not reduced. */
+    static <E> Expansion.Coefficient<E> unreduced(TransferFunction<E> y) {
+        return new Expansion.Coefficient<>(numeratorOverZ(y), denominatorOverZ(y).derivative());
+    }
+
+    private static <E> Polynomial<E> numeratorOverZ(TransferFunction<E> y) {
+        return startsWithZ(y) ? y.numerator().shiftedDown(1) : y.numerator();
+    }
+
+    private static <E> Polynomial<E> denominatorOverZ(TransferFunction<E> y) {
+        return startsWithZ(y) ? y.denominator() : y.denominator().shiftedUp(1);
+    }
+
+    private static <E> boolean startsWithZ(TransferFunction<E> y) {
+        return y.numerator().field().isZero(y.numerator().coefficient(0));
     }
 
     /**

@@ -6,6 +6,7 @@ import org.pofk.exact.Ball;
 import org.pofk.exact.Decimal;
 import org.pofk.exact.Rational;
 import org.pofk.formula.Formula;
+import org.pofk.formula.Formulas;
 
 /**
  * A constant as it stands in a formula in decimals, with a proved bound on how far that is from the constant.
@@ -24,7 +25,7 @@ record PrintedNumber(Formula formula, Rational error) {
         Decimal decimal = value.decimal(digits);
         Rational error = rational.map(r -> r.minus(decimal.value()).abs())
                 .orElseGet(() -> distance(value, decimal.value(), digits));
-        return new PrintedNumber(written(decimal.text()), error);
+        return new PrintedNumber(Formulas.decimal(decimal.text()), error);
     }
 
     /** In the exact form, which it has. */
@@ -40,7 +41,7 @@ record PrintedNumber(Formula formula, Rational error) {
     private static boolean isShort(Formula formula) {
         return formula instanceof Formula.Number number
                 ? number.value().toString().length() <= SHORT_FRACTION && !terminates(number.value())
-                : Terms.isMultipleOfPi(formula);
+                : Formulas.isMultipleOfPi(formula);
     }
 
     private static boolean terminates(Rational value) {
@@ -66,11 +67,5 @@ record PrintedNumber(Formula formula, Rational error) {
             ball = value.enclosure().enclose(bits);
         }
         return Rational.max(ball.upper().minus(printed).abs(), ball.lower().minus(printed).abs());
-    }
-
-    private static Formula written(String text) {
-        return text.startsWith("-")
-                ? Terms.negated(new Formula.WrittenDecimal(text.substring(1)))
-                : new Formula.WrittenDecimal(text);
     }
 }

@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Optional;
 import org.pofk.exact.Rational;
 import org.pofk.formula.Formula;
+import org.pofk.formula.Formulas;
 
 /** A formula in decimals as it grows term by term, with the bound on what it is off so far. */
 final class PrintedSum {
@@ -26,7 +27,7 @@ final class PrintedSum {
     }
 
     Formula formula() {
-        return Terms.sum(terms);
+        return Formulas.sum(terms);
     }
 
     Rational error() {

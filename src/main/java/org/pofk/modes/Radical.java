@@ -3,6 +3,7 @@ package org.pofk.modes;
 import java.util.Optional;
 import org.pofk.exact.Rational;
 import org.pofk.formula.Formula;
+import org.pofk.formula.Formulas;
 
 /**
  * scale · radicand^(1/degree), a real number with a short exact form. Canonical form: degree 1 has scale one (the
@@ -70,8 +71,8 @@ record Radical(Rational scale, Surd radicand, int degree) {
             return radicand.formula();
         }
         Formula root = degree == 2
-                ? Terms.squareRoot(radicand.formula())
-                : Terms.power(radicand.formula(), Terms.number(Rational.of(1, degree)));
-        return Terms.scaled(scale, root);
+                ? Formulas.squareRoot(radicand.formula())
+                : Formulas.power(radicand.formula(), Formulas.number(Rational.of(1, degree)));
+        return Formulas.fraction(scale, root);
     }
 }

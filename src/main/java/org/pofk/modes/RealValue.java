@@ -6,6 +6,7 @@ import org.pofk.exact.Decimals;
 import org.pofk.exact.Enclosed;
 import org.pofk.exact.Rational;
 import org.pofk.formula.Formula;
+import org.pofk.formula.Formulas;
 
 /**
  * A real constant of a closed form: its short exact form where there is one, and its decimals as far as asked.
@@ -16,7 +17,7 @@ public record RealValue(Optional<Formula> exact, Enclosed enclosure) {
     private static final int TOLD_FROM_ZERO_BITS = 1_024;
 
     public static RealValue of(Rational value) {
-        return new RealValue(Optional.of(Terms.number(value)), Enclosed.of(value));
+        return new RealValue(Optional.of(Formulas.number(value)), Enclosed.of(value));
     }
 
     static RealValue of(Optional<Radical> shortForm, Enclosed enclosure) {

@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Optional;
 import org.pofk.exact.Rational;
 import org.pofk.formula.Formula;
+import org.pofk.formula.Formulas;
 
 /**
  * u + v√d, a real number of degree at most two. Canonical form: d a positive integer with its cheap square part taken
@@ -72,11 +73,11 @@ record Surd(Rational u, Rational v, BigInteger d) {
     Formula formula() {
         List<Formula> terms = new ArrayList<>();
         if (!u.isZero() || v.isZero()) {
-            terms.add(Terms.number(u));
+            terms.add(Formulas.number(u));
         }
         if (!v.isZero()) {
-            terms.add(Terms.scaled(v, Terms.squareRoot(Terms.number(Rational.of(d)))));
+            terms.add(Formulas.fraction(v, Formulas.squareRoot(Formulas.number(Rational.of(d)))));
         }
-        return Terms.sum(terms);
+        return Formulas.sum(terms);
     }
 }

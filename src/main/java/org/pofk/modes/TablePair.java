@@ -1,8 +1,8 @@
 package org.pofk.modes;
 
 import java.util.List;
-import org.pofk.exact.Rational;
 import org.pofk.formula.Formula;
+import org.pofk.formula.Formulas;
 
 /**
  * A line of the table of transforms: {@code transform} in z (and the pole λ) belongs to {@code sequence} in k. Exact;
@@ -14,18 +14,14 @@ public record TablePair(Formula transform, Formula sequence) {
 
     /** z/(z − λ)^(p+1) ↔ binomial(k, p) λ^(k−p). */
     static TablePair ofPole(int power) {
-        Formula distance = new Formula.Sum(List.of(Z, Terms.negated(LAMBDA)));
+        Formula distance = new Formula.Sum(List.of(Z, Formulas.negated(LAMBDA)));
         Formula transform =
-                new Formula.Quotient(Z, Terms.power(distance, Terms.number(Rational.of(power + 1L))));
-        Formula sequence = Terms.product(List.of(Terms.binomial(power), Terms.power(LAMBDA, Terms.kMinus(power))));
-        return new TablePair(transform, sequence);
+                new Formula.Quotient(Z, Formulas.power(distance, Formulas.number(power + 1L)));
+        return new TablePair(transform, ModeFormula.geometric(Formulas.number(1), power, LAMBDA));
     }
 
     /** z^−at ↔ δ(k − at). */
     static TablePair ofImpulse(int at) {
-        Formula transform = at == 0
-                ? Terms.number(Rational.ONE)
-                : Terms.power(Z, Terms.number(Rational.of(-at)));
-        return new TablePair(transform, ModeFormula.impulse(Terms.number(Rational.ONE), at));
+        return new TablePair(Formulas.power(Z, Formulas.number(-at)), ModeFormula.impulse(Formulas.number(1), at));
     }
 }

@@ -5,8 +5,8 @@ import java.util.List;
 import org.pofk.answer.AbsentEigenvalues;
 import org.pofk.answer.AbsentEigenvalues.Absent;
 import org.pofk.answer.AbsentEigenvalues.Reason;
+import org.pofk.formula.Formulas;
 import org.pofk.modes.TablePair;
-import org.pofk.modes.Terms;
 
 /** Which eigenvalues of A are no part of an output, and why, in one line. */
 final class AbsentProse {
@@ -36,6 +36,6 @@ final class AbsentProse {
         return absent.factor().degree() == 1
                 ? Prose.of(absent.factor().coefficient(0).negate().toString())
                 : Prose.of("the " + absent.factor().degree() + " roots of ")
-                        .andFormula(Terms.polynomial(absent.factor(), TablePair.LAMBDA));
+                        .andFormula(Formulas.polynomial(absent.factor(), TablePair.LAMBDA));
     }
 }

@@ -7,7 +7,7 @@ import org.pofk.chain.Model.Convention;
 import org.pofk.chain.SparseMatrix;
 import org.pofk.exact.Rational;
 import org.pofk.formula.Formula;
-import org.pofk.modes.Terms;
+import org.pofk.formula.Formulas;
 import org.pofk.report.Document.Block;
 import org.pofk.report.Document.Paragraph;
 import org.pofk.report.Document.Table;
@@ -40,14 +40,14 @@ final class MatrixBlocks {
     /** zI − A. */
     Block characteristic(String caption) {
         return square(caption + ", " + direction(), (i, j) -> Prose.formula(i == j
-                ? Terms.sum(withoutZero(RationalFunction.Z, matrix.at(i, j).negate()))
-                : Terms.number(matrix.at(i, j).negate())));
+                ? Formulas.sum(withoutZero(RationalFunction.Z, matrix.at(i, j).negate()))
+                : Formulas.number(matrix.at(i, j).negate())));
     }
 
     private static List<Formula> withoutZero(Formula z, Rational constant) {
         return constant.isZero() ? List.of(z)
-                : List.of(z, constant.signum() < 0 ? Terms.negated(Terms.number(constant.negate()))
-                        : Terms.number(constant));
+                : List.of(z, constant.signum() < 0 ? Formulas.negated(Formulas.number(constant.negate()))
+                        : Formulas.number(constant));
     }
 
     private String direction() {

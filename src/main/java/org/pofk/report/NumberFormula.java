@@ -5,9 +5,9 @@ import org.pofk.exact.Decimals;
 import org.pofk.exact.Enclosed;
 import org.pofk.exact.Rational;
 import org.pofk.formula.Formula;
+import org.pofk.formula.Formulas;
 import org.pofk.formula.PlainText;
 import org.pofk.modes.RealValue;
-import org.pofk.modes.Terms;
 
 /** Constants of a derivation as they are shown: short exact forms as such, others in decimals. */
 record NumberFormula(Style style) {
@@ -30,10 +30,10 @@ record NumberFormula(Style style) {
             return of(value);
         }
         if (value.rational().filter(Rational::isZero).isPresent()) {
-            return Terms.number(Rational.ZERO);
+            return Formulas.number(0);
         }
         Enclosed degrees = value.enclosure().times(Enclosed.of(DEGREES_IN_HALF_TURN)).dividedBy(Enclosed.pi());
-        return Terms.product(List.of(decimal(degrees), Formula.Constant.DEGREE));
+        return Formulas.product(List.of(decimal(degrees), Formula.Constant.DEGREE));
     }
 
     private boolean isShort(Formula exact) {
@@ -41,9 +41,6 @@ record NumberFormula(Style style) {
     }
 
     private Formula decimal(Enclosed value) {
-        String text = Decimals.of(value, style.digits()).text();
-        return text.startsWith("-")
-                ? Terms.negated(new Formula.WrittenDecimal(text.substring(1)))
-                : new Formula.WrittenDecimal(text);
+        return Formulas.decimal(Decimals.of(value, style.digits()).text());
     }
 }

@@ -3,7 +3,7 @@ package org.pofk.report;
 import org.pofk.exact.Polynomial;
 import org.pofk.exact.Rational;
 import org.pofk.formula.Formula;
-import org.pofk.modes.Terms;
+import org.pofk.formula.Formulas;
 import org.pofk.transform.TransferFunction;
 
 /** Polynomials and their quotients in z as formulas. */
@@ -19,6 +19,6 @@ final class RationalFunction {
     }
 
     static Formula inZ(Polynomial<Rational> polynomial) {
-        return Terms.polynomial(polynomial, Z);
+        return Formulas.polynomial(polynomial, Z);
     }
 }

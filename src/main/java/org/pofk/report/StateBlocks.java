@@ -2,14 +2,13 @@ package org.pofk.report;
 
 import java.util.ArrayList;
 import java.util.List;
-import org.pofk.exact.Rational;
 import org.pofk.formula.Formula;
+import org.pofk.formula.Formulas;
 import org.pofk.modes.Mode;
 import org.pofk.modes.ModeFormula;
 import org.pofk.modes.RealValue;
 import org.pofk.modes.StateModes;
 import org.pofk.modes.StateModes.VectorMode;
-import org.pofk.modes.Terms;
 import org.pofk.report.Document.Block;
 import org.pofk.report.Document.Heading;
 import org.pofk.report.Document.Paragraph;
@@ -65,28 +64,29 @@ final class StateBlocks {
 
         @Override
         public Boolean impulse(Mode.Impulse impulse) {
-            return row(ModeFormula.impulse(Terms.number(Rational.ONE), impulse.at()), excitation(), mode.vector());
+            return row(ModeFormula.impulse(Formulas.number(1), impulse.at()), excitation(), mode.vector());
         }
 
         @Override
         public Boolean geometric(Mode.Geometric shape) {
-            return row(ModeFormula.geometric(Terms.number(Rational.ONE), shape.power(), numbers.of(shape.base())),
+            return row(ModeFormula.geometric(Formulas.number(1), shape.power(), numbers.of(shape.base())),
                     excitation(), mode.vector());
         }
 
         @Override
         public Boolean oscillating(Mode.Oscillating shape) {
-            Formula turn = Terms.overDenominator(numbers.angle(shape.angle()), Terms.kMinus(shape.power()));
-            List<Formula> damping = List.of(Terms.binomial(shape.power()),
-                    Terms.power(numbers.of(shape.modulus()), Terms.kMinus(shape.power())));
-            row(times(damping, Terms.call(Formula.Function.COS, turn)), excitation(), mode.vector());
-            return row(Terms.negated(times(damping, Terms.call(Formula.Function.SIN, turn))), Prose.EMPTY, mode.sine());
+            Formula turn = Formulas.overDenominator(numbers.angle(shape.angle()), ModeFormula.kMinus(shape.power()));
+            List<Formula> damping = List.of(ModeFormula.binomial(shape.power()),
+                    Formulas.power(numbers.of(shape.modulus()), ModeFormula.kMinus(shape.power())));
+            row(times(damping, Formulas.call(Formula.Function.COS, turn)), excitation(), mode.vector());
+            return row(Formulas.negated(times(damping, Formulas.call(Formula.Function.SIN, turn))), Prose.EMPTY,
+                    mode.sine());
         }
 
         private static Formula times(List<Formula> factors, Formula last) {
             List<Formula> all = new ArrayList<>(factors);
             all.add(last);
-            return Terms.product(all);
+            return Formulas.product(all);
         }
     }
 }

@@ -6,18 +6,16 @@ import java.util.List;
 import java.util.Set;
 import org.pofk.answer.DerivedOutput;
 import org.pofk.exact.Factorization;
-import org.pofk.exact.Factorization.Factor;
 import org.pofk.exact.Polynomial;
 import org.pofk.exact.Rational;
 import org.pofk.formula.Formula;
+import org.pofk.formula.Formulas;
 import org.pofk.modes.ClosedForm;
 import org.pofk.modes.Derivation;
 import org.pofk.modes.Derivation.FactorStep;
 import org.pofk.modes.Derivation.PairStep;
-import org.pofk.modes.Expansion;
 import org.pofk.modes.Mode;
 import org.pofk.modes.TablePair;
-import org.pofk.modes.Terms;
 import org.pofk.report.Document.Block;
 import org.pofk.report.Document.Display;
 import org.pofk.report.Document.Heading;
@@ -62,7 +60,7 @@ final class WayBlocks {
         transform();
         Derivation derivation = form.derivation();
         if (form.transform().y().denominator().degree() <= WRITTEN_OUT_UP_TO) {
-            expansion();
+            expansion(derivation);
         }
         pairs(derivation);
         terms(derivation);
@@ -78,7 +76,8 @@ final class WayBlocks {
         }
         blocks.add(new Display(Y, Relation.EQUAL, y));
         if (!form.transform().y().denominator().isConstant()) {
-            blocks.add(new Display(Prose.of("denominator"), Relation.EQUAL, product(factors)));
+            blocks.add(new Display(Prose.of("denominator"), Relation.EQUAL,
+                    Formulas.factored(factors, RationalFunction.Z)));
         }
         boolean proved = factors.factors().stream()
                 .allMatch(factor -> factor.irreducible() == Factorization.Irreducible.PROVED);
@@ -86,61 +85,40 @@ final class WayBlocks {
                 : "That the factors can't be split further isn't proved; nothing below depends on it."));
     }
 
-    private static Formula product(Factorization<Rational> factors) {
-        return Terms.product(factors.factors().stream().map(WayBlocks::power).toList());
-    }
-
-    private static Formula power(Factor<Rational> factor) {
-        return Terms.power(RationalFunction.inZ(factor.polynomial()),
-                Terms.number(Rational.of(factor.multiplicity())));
-    }
-
     /** Y(z) = impulses + z · Σ R/(z − λ)^(p+1), exact. */
-    private void expansion() {
+    private void expansion(Derivation derivation) {
         List<Formula> fractions = new ArrayList<>();
-        form.expansion().parts().forEach(part -> fractions.add(fraction(part)));
+        derivation.factors().forEach(step -> fractions.add(fraction(step)));
         List<Formula> terms = new ArrayList<>();
         for (int at = 0; at < form.expansion().impulses().size(); at++) {
             Rational value = form.expansion().impulses().get(at);
             if (!value.isZero()) {
-                terms.add(Terms.product(List.of(Terms.number(value),
-                        Terms.power(RationalFunction.Z, Terms.number(Rational.of(-at))))));
+                terms.add(Formulas.product(List.of(Formulas.number(value),
+                        Formulas.power(RationalFunction.Z, Formulas.number(-at)))));
             }
         }
         if (!fractions.isEmpty()) {
-            terms.add(Terms.product(List.of(RationalFunction.Z, Terms.sum(fractions))));
+            terms.add(Formulas.product(List.of(RationalFunction.Z, Formulas.sum(fractions))));
         }
-        blocks.add(new Display(Y, Relation.EQUAL, Terms.sum(terms)));
+        blocks.add(new Display(Y, Relation.EQUAL, Formulas.sum(terms)));
     }
 
-    private static Formula fraction(Expansion.Part<Rational> part) {
-        Polynomial<Rational> factor = part.factor().polynomial();
+    private Formula fraction(FactorStep step) {
+        Polynomial<Rational> factor = form.transform().factors().factors().get(step.factor()).polynomial();
         boolean isLinear = factor.degree() == 1;
-        Formula pole = isLinear ? Terms.number(factor.coefficient(0).negate()) : TablePair.LAMBDA;
+        Formula pole = isLinear ? Formulas.number(factor.coefficient(0).negate()) : TablePair.LAMBDA;
         List<Formula> fractions = new ArrayList<>();
-        for (int power = 0; power < part.coefficients().size(); power++) {
-            Expansion.Coefficient<Rational> coefficient = part.coefficients().get(power);
-            if (!coefficient.isZero()) {
-                fractions.add(over(written(coefficient), Terms.power(
-                        Terms.sum(List.of(RationalFunction.Z, Terms.negated(pole))),
-                        Terms.number(Rational.of(power + 1L)))));
+        for (int power = 0; power < step.coefficients().size(); power++) {
+            Formula coefficient = step.coefficients().get(power);
+            if (!Formulas.isZero(coefficient)) {
+                fractions.add(Formulas.quotient(coefficient, Formulas.power(
+                        Formulas.sum(List.of(RationalFunction.Z, Formulas.negated(pole))),
+                        Formulas.number(power + 1L))));
             }
         }
-        return isLinear ? Terms.sum(fractions)
-                : new Formula.RootSum(TablePair.LAMBDA, Terms.polynomial(factor, TablePair.LAMBDA), Terms.sum(fractions));
-    }
-
-    private static Formula over(Formula numerator, Formula denominator) {
-        return numerator instanceof Formula.Number number && number.value().signum() < 0
-                ? Terms.negated(new Formula.Quotient(Terms.number(number.value().negate()), denominator))
-                : new Formula.Quotient(numerator, denominator);
-    }
-
-    private static Formula written(Expansion.Coefficient<Rational> coefficient) {
-        Formula numerator = Terms.polynomial(coefficient.numerator(), TablePair.LAMBDA);
-        return coefficient.denominator().equals(Polynomial.one(coefficient.denominator().field()))
-                ? numerator
-                : new Formula.Quotient(numerator, Terms.polynomial(coefficient.denominator(), TablePair.LAMBDA));
+        return isLinear ? Formulas.sum(fractions)
+                : new Formula.RootSum(TablePair.LAMBDA, Formulas.polynomial(factor, TablePair.LAMBDA),
+                        Formulas.sum(fractions));
     }
 
     private void pairs(Derivation derivation) {

@@ -44,7 +44,7 @@ class FormulasTest {
         "0.5*2*x; 2·0.5·x", "a - (b + c); a − (b + c)", "--x; x", "2(0.5 + 0.5)^k; 2·(0.5 + 0.5)^k"
     })
     void tidyingDoesWhatIsObviousAndNothingElse(String text, String tidied) throws RefusedException {
-        assertEquals(tidied, PlainText.UNICODE.write(Formulas.tidy(parsed(text))));
+        assertEquals(tidied, PlainText.UNICODE.write(Tidying.tidy(parsed(text))));
     }
 
     @Provide
@@ -54,9 +54,9 @@ class FormulasTest {
 
     @Property(tries = 400, edgeCases = EdgeCasesMode.NONE, seed = "20267")
     void tidyingTwiceChangesNothing(@ForAll("trees") Formula tree) {
-        Formula tidied = Formulas.tidy(tree);
-        assertEquals(tidied, Formulas.tidy(tidied));
-        assertEquals(tidied, Formulas.tidy(FormulaTrees.asRead(tree)), "and how numbers were written doesn't matter");
+        Formula tidied = Tidying.tidy(tree);
+        assertEquals(tidied, Tidying.tidy(tidied));
+        assertEquals(tidied, Tidying.tidy(FormulaTrees.asRead(tree)), "and how numbers were written doesn't matter");
     }
 
     @Example
@@ -69,7 +69,7 @@ class FormulasTest {
             Optional<Rational> value = value(tree);
             if (value.isPresent()) {
                 compared++;
-                assertEquals(value, value(Formulas.tidy(tree)), () -> PlainText.UNICODE.write(tree));
+                assertEquals(value, value(Tidying.tidy(tree)), () -> PlainText.UNICODE.write(tree));
             }
         }
         assertTrue(compared > 500, "values compared: " + compared);
@@ -103,8 +103,19 @@ class FormulasTest {
     }
 
     @Test
-    void differencesAndSignedDecimalsArePrintedWithOneSign() {
-        assertEquals("−0.5 − z", PlainText.UNICODE.write(Formulas.difference(Formulas.decimal("-0.5"), Z)));
-        assertEquals("z + 0.5", PlainText.UNICODE.write(Formulas.difference(Z, Formulas.decimal("-0.5"))));
+    void signedDecimalsArePrintedWithOneSign() {
+        assertEquals("−0.5 − z", PlainText.UNICODE.write(
+                Formulas.sum(List.of(Formulas.decimal("-0.5"), Formulas.negated(Z)))));
+        assertEquals("z + 0.5", PlainText.UNICODE.write(
+                Formulas.sum(List.of(Z, Formulas.negated(Formulas.decimal("-0.5"))))));
+    }
+
+    @Test
+    void fractionsHaveTheirSignInFrontAndTheIrrationalAbove() {
+        assertEquals("−3·√2/10", PlainText.UNICODE.write(
+                Formulas.fraction(Rational.of(-3, 10), Formulas.squareRoot(Formulas.number(2)))));
+        Formula angle = Formulas.fraction(Rational.of(2, 5), Formula.Constant.PI);
+        assertTrue(Formulas.isMultipleOfPi(angle));
+        assertEquals("2π·k/5", PlainText.UNICODE.write(Formulas.overDenominator(angle, new Symbol("k"))));
     }
 }

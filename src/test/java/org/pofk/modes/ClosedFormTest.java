@@ -17,6 +17,7 @@ import org.pofk.exact.Polynomial;
 import org.pofk.exact.Rational;
 import org.pofk.exact.RationalField;
 import org.pofk.formula.Formula;
+import org.pofk.formula.Formulas;
 import org.pofk.formula.PlainText;
 import org.pofk.transform.TransferFunction;
 import org.pofk.transform.Transforms;
@@ -77,9 +78,9 @@ class ClosedFormTest {
             List<String> expected = new ArrayList<>();
             for (int j = 1; 2 * j < n; j++) {
                 Rational turn = Rational.of(2L * j, n);
-                expected.add(PlainText.ASCII.write(ModeFormula.oscillating(Terms.number(Rational.of(2, n)), 0,
-                        Terms.number(Rational.ONE), Terms.scaled(turn, Formula.Constant.PI),
-                        Terms.number(Rational.ZERO))));
+                expected.add(PlainText.ASCII.write(ModeFormula.oscillating(Formulas.number(Rational.of(2, n)), 0,
+                        Formulas.number(1), Formulas.fraction(turn, Formula.Constant.PI),
+                        Formulas.number(0))));
                 pairs++;
             }
             assertTrue(found.containsAll(expected), () -> found + " misses some of " + expected);

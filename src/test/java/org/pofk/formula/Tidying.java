@@ -17,17 +17,17 @@ import org.pofk.formula.Formula.WrittenDecimal;
 
 /** Builds a formula anew by {@link Formulas}; functions of numbers are worked out where their value is rational. */
 final class Tidying implements Formula.Visitor<Formula> {
-    static final Tidying TIDYING = new Tidying();
+    private static final Tidying TIDYING = new Tidying();
 
     private Tidying() {
     }
 
-    private Formula tidy(Formula formula) {
-        return formula.accept(this);
+    static Formula tidy(Formula formula) {
+        return formula.accept(TIDYING);
     }
 
     private List<Formula> all(List<Formula> formulas) {
-        return formulas.stream().map(this::tidy).toList();
+        return formulas.stream().map(Tidying::tidy).toList();
     }
 
     @Override
