@@ -19,7 +19,7 @@ record PowerSequence(List<FixedPointState> steps, List<FixedPointState> doubling
     static final int SQUARED_UP_TO = 40;
     /** The last power of two reached by squaring. */
     static final int LAST_SQUARING = 40;
-    /** Steps taken one by one cost at most this many multiplications. */
+    /** Steps taken one by one cost at most this many multiplications, or are one. */
     private static final int MULTIPLICATIONS = 500_000;
     private static final int STEPS = 1024;
     /** Lower powers are nobody's idea of a high one. */
@@ -39,7 +39,7 @@ record PowerSequence(List<FixedPointState> steps, List<FixedPointState> doubling
         List<FixedPointState> steps = untilSettled(columns, start, Math.min(STEPS, MULTIPLICATIONS / entries), tolerance);
         List<FixedPointState> doubling = chain.size() <= SQUARED_UP_TO
                 ? squared(columns, start)
-                : atPowersOfTwo(stepped(columns, start, MULTIPLICATIONS / entries));
+                : atPowersOfTwo(stepped(columns, start, Math.max(1, MULTIPLICATIONS / entries)));
         List<FixedPointState> tail = stepped(columns, doubling.get(doubling.size() - 1), period - 1);
         return new PowerSequence(steps, doubling, tail);
     }

@@ -122,14 +122,13 @@ public record Simulation(long seed, int runs, List<Series> series) {
             if (expectedHits.compareTo(Rational.of(HITS_NEEDED)) < 0) {
                 return Verdict.CANT_TELL;
             }
-            double middle = value.middle().approximate();
-            return interval.lower() <= middle && middle <= interval.upper() ? Verdict.INSIDE : Verdict.OUTSIDE;
+            return interval.overlaps(value) ? Verdict.INSIDE : Verdict.OUTSIDE;
         }
 
         /** The mean of independent readings between two bounds, each tail with half of what the confidence leaves. */
         private BinomialInterval hoeffding(double estimate, int runs) {
             double reach = (most - least) * Math.sqrt(Math.log(2 / (1 - CONFIDENCE)) / (2.0 * runs));
-            return new BinomialInterval(Math.max(least, estimate - reach), Math.min(most, estimate + reach));
+            return BinomialInterval.outward(Math.max(least, estimate - reach), Math.min(most, estimate + reach));
         }
     }
 }

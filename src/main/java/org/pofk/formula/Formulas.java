@@ -56,7 +56,7 @@ public final class Formulas {
         for (Formula term : terms.stream().flatMap(term -> termsOf(term).stream()).toList()) {
             if (term instanceof Number number && areShort(total, number.value())) {
                 total = total.plus(number.value());
-                place = place < 0 ? kept.size() : place;
+                place = place < 0 && !total.isZero() ? kept.size() : place;
             } else {
                 kept.add(term);
             }

@@ -66,6 +66,13 @@ public record ClosedForm(Transform transform, Expansion<Rational> expansion, Lis
         return FormulaOverRoots.of(this);
     }
 
+    /** The degrees of the factors that stand as sums over their roots in {@link #formulaOverRoots}. */
+    public List<Integer> degreesOverRoots() {
+        List<Factor<Rational>> factors = transform.factors().factors();
+        return modes.stream().filter(mode -> !mode.isExact()).map(mode -> mode.pole().get(0)).distinct().sorted()
+                .map(index -> factors.get(index).polynomial().degree()).toList();
+    }
+
     /** The way here from the factored transform. */
     public Derivation derivation() {
         return Derivation.of(this);

@@ -17,4 +17,9 @@ import org.pofk.formula.Formula;
  */
 public record DecimalForm(Optional<Formula> formula, Rational errorBound, Optional<Long> upTo,
         Optional<String> reason) {
+
+    /** True when every number in the formula is exactly the one meant: the formula equals p(k) at every k. */
+    public boolean isExact() {
+        return formula.isPresent() && errorBound.isZero();
+    }
 }

@@ -34,10 +34,11 @@ record Polar(Optional<Radical> modulus, Optional<Angle> angle) {
 
     /** Only the test that is cheap at any degree: λ^m real, where q(z) = g(z^m). */
     static Polar ofStepPower(ElementAtRoot root) {
-        return PiGuess.of(root.enclosed(), root.field().step())
-                .filter(guess -> root.field().step() % guess.order() == 0
-                        && root.field().hasRealStepPower(root.root()))
-                .map(guess -> new Polar(Optional.empty(), Optional.of(new Angle.PiMultiple(guess.fraction()))))
+        int step = root.field().step();
+        return PiGuess.of(root.enclosed(), step)
+                .filter(guess -> root.field().hasRealStepPower(root.root()))
+                .map(guess -> PiGuess.nearest(root.enclosed(), step))
+                .map(known -> new Polar(Optional.empty(), Optional.of(new Angle.PiMultiple(known.fraction()))))
                 .orElse(NOTHING);
     }
 

@@ -35,7 +35,7 @@ record JsonNumbers(Json json, int digits) {
     }
 
     String decimal(RealValue value) {
-        return value.rational().map(this::decimal).orElseGet(() -> Decimals.of(value.enclosure(), digits).text());
+        return value.decimal(digits).text();
     }
 
     String decimal(Rational value) {

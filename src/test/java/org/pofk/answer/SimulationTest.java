@@ -3,12 +3,14 @@ package org.pofk.answer;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import java.math.BigDecimal;
 import java.util.List;
 import org.junit.jupiter.api.Test;
 import org.pofk.answer.Simulation.Method;
 import org.pofk.answer.Simulation.Sample;
 import org.pofk.answer.Simulation.Verdict;
 import org.pofk.chain.Chain;
+import org.pofk.exact.Rational;
 
 class SimulationTest {
     private static final List<Integer> STEPS = List.of(0, 1, 2, 5, 10, 20);
@@ -29,6 +31,42 @@ class SimulationTest {
         assertEquals(Math.pow(0.0005, 1.0 / 50), BinomialInterval.of(50, 50, 0.999).lower(), 1e-9);
         assertEquals(0, BinomialInterval.of(0, 50, 0.999).lower());
         assertEquals(1, BinomialInterval.of(50, 50, 0.999).upper());
+    }
+
+    /** In doubles 1/3 is less than 1/3: as the upper end of an interval it would leave its own value out. */
+    @Test
+    void aSureReadingLiesInItsInterval() {
+        Simulation.Series sure = Simulation.of(Chains.pumps(), List.of(Chains.reading("1/3 1/3 1/3")), STEPS, 100, 1)
+                .series().get(0);
+        assertEquals(Method.HOEFFDING, sure.method());
+        assertEquals(STEPS.size(), sure.inside());
+    }
+
+    @Test
+    void intervalsKeepTheirConfidenceInExactNumbers() {
+        // P(hits or more | lower) ≤ α/2 and P(hits or fewer | upper) ≤ α/2
+        Rational tail = Rational.of(1, 2_000);
+        for (int runs : new int[] {10, 37, 60}) {
+            for (int hits = 1; hits < runs; hits += 3) {
+                BinomialInterval interval = BinomialInterval.of(hits, runs, 0.999);
+                Rational lower = Rational.of(new BigDecimal(interval.lower()));
+                Rational upper = Rational.of(new BigDecimal(interval.upper()));
+                assertTrue(chance(runs, hits, runs, lower).compareTo(tail) <= 0, hits + " of " + runs);
+                assertTrue(chance(runs, 0, hits, upper).compareTo(tail) <= 0, hits + " of " + runs);
+            }
+        }
+    }
+
+    private static Rational chance(int runs, int from, int to, Rational p) {
+        Rational sum = Rational.ZERO;
+        Rational binomial = Rational.ONE;
+        for (int hits = 0; hits <= to; hits++) {
+            if (hits >= from) {
+                sum = sum.plus(binomial.times(p.pow(hits)).times(Rational.ONE.minus(p).pow(runs - hits)));
+            }
+            binomial = binomial.times(Rational.of(runs - hits, hits + 1));
+        }
+        return sum;
     }
 
     @Test

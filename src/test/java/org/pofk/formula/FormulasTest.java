@@ -88,6 +88,8 @@ class FormulasTest {
     void polynomialsAreWrittenFromTheHighestPowerDown() {
         assertEquals("z^3 − 19/20·z^2 + z − 1/400", PlainText.UNICODE.write(Formulas.polynomial(Polynomial.ofRationals(
                 List.of(Rational.of(-1, 400), Rational.ONE, Rational.of(-19, 20), Rational.ONE)), Z)));
+        assertEquals("30z^3 − 10z − 3", PlainText.UNICODE.write(
+                Formulas.polynomial(Polynomial.ofIntegers(-3, -10, 0, 30), Z)));
         assertEquals("−2z", PlainText.UNICODE.write(Formulas.polynomial(Polynomial.ofIntegers(0, -2), Z)));
         assertEquals("0", PlainText.UNICODE.write(Formulas.polynomial(Polynomial.ofIntegers(), Z)));
     }

@@ -200,6 +200,7 @@ class ClosedFormTest {
         assertTrue(PlainText.ASCII.write(form.formulaOverRoots()).contains("^k"));
         assertFalse(form.isExactThroughout());
         assertTrue(form.exactFormula().isEmpty());
+        assertEquals(List.of(4), form.degreesOverRoots());
     }
 
     /** The exact formula as a reader works it out, against the exact series; 120 random transforms. */

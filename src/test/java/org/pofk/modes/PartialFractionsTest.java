@@ -53,6 +53,27 @@ class PartialFractionsTest {
         assertEquals(Rational.HALF, expansion.valueAt(2));
     }
 
+    /** N ≡ R · D′ modulo each simple factor. */
+    @Test
+    void unreducedQuotientsAreTheSameCoefficients() {
+        Random random = new Random(77);
+        int compared = 0;
+        for (int run = 0; run < 180; run++) {
+            RandomTransform sample = RandomTransform.of(random);
+            Expansion.Coefficient<Rational> unreduced = PartialFractions.unreduced(sample.y());
+            for (Expansion.Part<Rational> part : PartialFractions.of(sample.y(), sample.factors()).parts()) {
+                if (part.factor().multiplicity() == 1) {
+                    Polynomial<Rational> q = part.factor().polynomial();
+                    Expansion.Coefficient<Rational> own = part.coefficients().get(0);
+                    assertEquals(unreduced.numerator().times(own.denominator()).remainder(q),
+                            unreduced.denominator().times(own.numerator()).remainder(q), sample.y()::toString);
+                    compared++;
+                }
+            }
+        }
+        assertTrue(compared > 60, "compared " + compared);
+    }
+
     @Test
     void zeroHasNothing() {
         TransferFunction<Rational> zero =

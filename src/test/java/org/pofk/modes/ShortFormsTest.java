@@ -106,8 +106,9 @@ class ShortFormsTest {
     }
 
     @Test
-    void sumOverRootsCarriesTheReducedCoefficient() {
-        assertEquals("Σ[λ: λ^3 − 1/3·λ − 1/10 = 0] (−2970/329·λ^2 + 1830/329·λ + 660/329)·λ^k",
+    void sumOverRootsCarriesTheShortestCoefficient() {
+        // reduced it is −2970/329 λ² + 1830/329 λ + 660/329
+        assertEquals("Σ[λ: 30λ^3 − 10λ − 3 = 0] (3λ + 3)/(9λ^2 − 1)·λ^k",
                 PlainText.UNICODE.write(Samples.closedForm("0 1 1", "-1/10 -1/3 0 1").formulaOverRoots()));
     }
 
