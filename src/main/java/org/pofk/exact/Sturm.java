@@ -41,15 +41,6 @@ public final class Sturm {
         return atStart + changes(member -> member.signAt(from)) - changes(member -> member.signAt(to));
     }
 
-    /**
-     * The Cauchy index of numerator/denominator over the real line: jumps from −∞ to +∞ less jumps from +∞ to −∞.
-     * The numerator's degree is at most the denominator's.
-     */
-    static int cauchyIndex(IntegerPolynomial numerator, IntegerPolynomial denominator) {
-        Sturm sturm = new Sturm(remainders(denominator, numerator));
-        return sturm.changesAtMinusInfinity() - sturm.changesAtInfinity();
-    }
-
     private static List<IntegerPolynomial> remainders(IntegerPolynomial first, IntegerPolynomial second) {
         List<IntegerPolynomial> sequence = new ArrayList<>(List.of(first));
         IntegerPolynomial before = first;

@@ -1,7 +1,5 @@
 package org.pofk.exact;
 
-import java.math.BigInteger;
-import java.util.ArrayList;
 import java.util.List;
 
 /**
@@ -12,6 +10,7 @@ import java.util.List;
 public final class UnitCircle {
     private static final IntegerPolynomial ONE = IntegerPolynomial.ofIntegers(-1, 1);
     private static final IntegerPolynomial MINUS_ONE = IntegerPolynomial.ofIntegers(1, 1);
+    private static final int FIRST_BITS = 32;
 
     /** How many roots have modulus below, equal to and above one. */
     public record Counts(int inside, int on, int outside) {
@@ -70,9 +69,8 @@ public final class UnitCircle {
     }
 
     /**
-     * The roots inside, on and outside; a second at degree 100. Besides the self-reciprocal part, half of which lies
-     * on either side when not on the circle, no root mirrors another, and the Cauchy index of the cofactor decides
-     * (Routh and Hurwitz).
+     * The roots inside, on and outside. The self-reciprocal part has those on the circle, what it has besides lies half
+     * on either side; the cofactor has none on it, so discs around its roots clear the circle. Cost: {@link Roots}.
      */
     public static Counts count(Polynomial<Rational> squareFree) {
         IntegerPolynomial part = PrimitiveForm.partOf(squareFree);
@@ -83,43 +81,20 @@ public final class UnitCircle {
         IntegerPolynomial single = part.quotientBy(mirrored).orElseThrow();
         int on = onCircle(mirrored);
         int pairs = (mirrored.degree() - on) / 2;
-        int inside = (single.degree() + excessOfLeftHalfPlane(toHalfPlane(single))) / 2;
+        int inside = (int) Roots.of(PrimitiveForm.monic(single)).all().stream().filter(UnitCircle::isInside).count();
         return new Counts(inside + pairs, on, single.degree() - inside + pairs);
     }
 
-    /** (1 − s)^n · f((1 + s)/(1 − s)): the disc becomes the left half-plane. The degree stays, −1 being no root. */
-    private static IntegerPolynomial toHalfPlane(IntegerPolynomial polynomial) {
-        IntegerPolynomial onePlus = IntegerPolynomial.ofIntegers(1, 1);
-        IntegerPolynomial oneMinus = IntegerPolynomial.ofIntegers(1, -1);
-        IntegerPolynomial power = IntegerPolynomial.ofIntegers(1);
-        IntegerPolynomial result = new IntegerPolynomial(List.of(polynomial.leading()));
-        for (int i = polynomial.degree() - 1; i >= 0; i--) {
-            power = power.times(oneMinus);
-            result = result.times(onePlus).plus(power.times(new IntegerPolynomial(List.of(polynomial.coefficient(i)))));
+    /** Whether a root that is known not to lie on the circle lies inside: refined until its modulus differs from one. */
+    private static boolean isInside(Root root) {
+        for (int bits = FIRST_BITS; ; bits *= 2) {
+            Ball beyond = root.enclose(bits).modulus().minus(Ball.of(1, 0));
+            if (!beyond.containsZero()) {
+                return beyond.isNegative();
+            }
+            if (bits > Raising.MOST_BITS) {
+                throw new AssertionError("on the unit circle to within 2^-" + bits + ": " + root);
+            }
         }
-        return result;
-    }
-
-    /**
-     * Roots in the left less roots in the right half-plane, when no root is mirrored at the imaginary axis: with
-     * P(iω) = A(ω) + i B(ω) the argument turns by π times that number, read off as the Cauchy index of −B/A for even
-     * and A/B for odd degree (Gantmacher, The Theory of Matrices, volume 2, chapter XV; from memory).
-     */
-    private static int excessOfLeftHalfPlane(IntegerPolynomial polynomial) {
-        IntegerPolynomial real = onImaginaryAxis(polynomial, 0);
-        IntegerPolynomial imaginary = onImaginaryAxis(polynomial, 1);
-        return polynomial.degree() % 2 == 0
-                ? -Sturm.cauchyIndex(imaginary, real)
-                : Sturm.cauchyIndex(real, imaginary);
-    }
-
-    /** The terms of the powers first, first + 2, … with the signs +, −, +, …. */
-    private static IntegerPolynomial onImaginaryAxis(IntegerPolynomial polynomial, int first) {
-        List<BigInteger> all = new ArrayList<>();
-        for (int i = 0; i <= polynomial.degree(); i++) {
-            BigInteger coefficient = polynomial.coefficient(i);
-            all.add((i - first) % 2 != 0 ? BigInteger.ZERO : (i - first) % 4 == 0 ? coefficient : coefficient.negate());
-        }
-        return new IntegerPolynomial(all);
     }
 }

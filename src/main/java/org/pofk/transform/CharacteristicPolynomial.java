@@ -25,7 +25,7 @@ public record CharacteristicPolynomial(List<Part> parts) {
     /** The largest class that is worked out. */
     public static final int LARGEST_CLASS = 400;
     /** The most multiplications that elimination may take for one class. */
-    private static final double LARGEST_ELIMINATION = 4e9;
+    private static final long LARGEST_ELIMINATION = 4_000_000_000L;
 
     /** A class and the characteristic polynomial of the moves inside it, monic, its degree the number of states. */
     public record Part(CommunicatingClass states, Polynomial<Rational> polynomial) {
@@ -75,7 +75,8 @@ public record CharacteristicPolynomial(List<Part> parts) {
                 product = product.multiply(BigInteger.valueOf(field.prime()));
             }
         }
-        boolean eliminate = Math.pow(states.size(), 3) * fields.size() < LARGEST_ELIMINATION;
+        long size = states.size();
+        boolean eliminate = size * size * size * fields.size() < LARGEST_ELIMINATION;
         List<Optional<long[]>> images = fields.stream().parallel()
                 .map(field -> residues.modulo(field).characteristicPolynomial(eliminate)).toList();
         if (images.stream().anyMatch(Optional::isEmpty)) {

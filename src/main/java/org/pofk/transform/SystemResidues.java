@@ -4,7 +4,8 @@ import java.util.List;
 import org.pofk.exact.Rational;
 
 /**
- * A system ready to be taken modulo one prime after the other: each different number held once. Exact; a prime costs O(entries).
+ * A system ready to be taken modulo one prime after the other: each different number held once. Exact; a prime
+ * costs O(entries).
  */
 final class SystemResidues {
     private final RationalTable table = new RationalTable();
