@@ -1,7 +1,7 @@
 package org.pofk.report;
 
 import java.util.List;
-import org.pofk.exact.Decimals;
+import java.util.Optional;
 import org.pofk.exact.Enclosed;
 import org.pofk.exact.Rational;
 import org.pofk.formula.Formula;
@@ -16,8 +16,7 @@ record NumberFormula(Style style) {
     private static final Rational DEGREES_IN_HALF_TURN = Rational.of(180);
 
     Formula of(RealValue value) {
-        return value.exact().filter(this::isShort).orElseGet(() -> decimal(value.rational()
-                .map(Enclosed::of).orElse(value.enclosure())));
+        return value.exact().filter(this::isShort).orElseGet(() -> decimal(value));
     }
 
     Formula of(Rational value) {
@@ -33,14 +32,14 @@ record NumberFormula(Style style) {
             return Formulas.number(0);
         }
         Enclosed degrees = value.enclosure().times(Enclosed.of(DEGREES_IN_HALF_TURN)).dividedBy(Enclosed.pi());
-        return Formulas.product(List.of(decimal(degrees), Formula.Constant.DEGREE));
+        return Formulas.product(List.of(decimal(new RealValue(Optional.empty(), degrees)), Formula.Constant.DEGREE));
     }
 
     private boolean isShort(Formula exact) {
         return PlainText.UNICODE.write(exact).length() <= style.digits() + ROOM;
     }
 
-    private Formula decimal(Enclosed value) {
-        return Formulas.decimal(Decimals.of(value, style.digits()).text());
+    private Formula decimal(RealValue value) {
+        return Formulas.decimal(value.decimal(style.digits()).text());
     }
 }
