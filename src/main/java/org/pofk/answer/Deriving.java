@@ -9,6 +9,7 @@ import org.pofk.chain.Model;
 import org.pofk.chain.Output;
 import org.pofk.chain.Structure;
 import org.pofk.modes.ClosedForm;
+import org.pofk.modes.KnownPoles;
 import org.pofk.modes.StateModes;
 import org.pofk.transform.Transform;
 import org.pofk.transform.Transforms;
@@ -70,9 +71,10 @@ public final class Deriving {
             publish(known.with(i, known.outputs().get(i).with(transforms.get(i))));
         }
         LongRunChecks.Ground ground = LongRunChecks.Ground.of(known.model().chain());
+        KnownPoles poles = new KnownPoles();
         for (int i = 0; i < transforms.size(); i++) {
             publish(known.with(i, known.outputs().get(i).with(LongRunChecks.of(ground, transforms.get(i)))));
-            publish(known.with(i, known.outputs().get(i).with(ClosedForm.of(transforms.get(i)))));
+            publish(known.with(i, known.outputs().get(i).with(ClosedForm.of(transforms.get(i), poles))));
         }
     }
 

@@ -15,7 +15,7 @@ final class AbsentProse {
 
     static Prose of(AbsentEigenvalues found) {
         if (found.factors().isEmpty()) {
-            return Prose.of("none of A is absent");
+            return Prose.of("all of A's are in it");
         }
         List<Prose> reasons = new ArrayList<>();
         for (Reason reason : Reason.values()) {

@@ -25,7 +25,7 @@ record LongRunProse(int digits) implements LongRun.Visitor<String> {
     public String cycle(LongRun.Cycle cycle) {
         return "no limit; a cycle of " + cycle.period() + ": "
                 + cycle.values().stream().map(this::number).collect(Collectors.joining(", "))
-                + " for k ≡ " + residues(cycle.period()) + " (mod " + cycle.period() + "); its average is "
+                + " for k ≡ " + residues(cycle.period()) + " (mod " + cycle.period() + "); its average is "
                 + number(cycle.average());
     }
 

@@ -28,8 +28,11 @@ record NumberFormula(Style style) {
         if (style.angles() == Style.Angles.RADIANS) {
             return of(value);
         }
-        if (value.rational().filter(Rational::isZero).isPresent()) {
-            return Formulas.number(0);
+        Optional<Rational> halfTurns = value.exact().flatMap(PiMultiple::of);
+        if (halfTurns.isPresent()) {
+            Rational degrees = halfTurns.get().times(DEGREES_IN_HALF_TURN);
+            return degrees.isZero() ? Formulas.number(degrees)
+                    : Formulas.product(List.of(Formulas.number(degrees), Formula.Constant.DEGREE));
         }
         Enclosed degrees = value.enclosure().times(Enclosed.of(DEGREES_IN_HALF_TURN)).dividedBy(Enclosed.pi());
         return Formulas.product(List.of(decimal(new RealValue(Optional.empty(), degrees)), Formula.Constant.DEGREE));

@@ -73,7 +73,8 @@ final class ResultBlocks {
         Formula exact = form.exactFormula().orElseGet(form::formulaOverRoots);
         boolean isSame = decimals.formula().equals(Optional.of(exact));
         if (!isSame && decimals.formula().isPresent()) {
-            blocks.add(new Display(OutputProse.atStep(output.output()), Relation.ROUNDED, decimals.formula().get()));
+            blocks.add(new Display(OutputProse.atStep(output.output()),
+                    isExact(decimals) ? Relation.EQUAL : Relation.ROUNDED, decimals.formula().get()));
         }
         int length = PlainText.UNICODE.write(exact).length();
         if (length <= EXACT_SHOWN_UP_TO || decimals.formula().isEmpty()) {
@@ -82,9 +83,16 @@ final class ResultBlocks {
             label("exact", "over the roots of the denominator's factors; with " + length
                     + " characters too long to be shown, its parts are in the result as JSON");
         }
-        if (!isSame) {
+        if (style.angles() == Style.Angles.DEGREES) {
+            AnglesProse.of(form, style).ifPresent(angles -> blocks.add(new Labelled("in degrees", angles)));
+        }
+        if (!isSame && !isExact(decimals)) {
             label("decimals", promise(decimals));
         }
+    }
+
+    private static boolean isExact(DecimalForm decimals) {
+        return decimals.formula().isPresent() && decimals.errorBound().isZero() && decimals.upTo().isEmpty();
     }
 
     private static String promise(DecimalForm decimals) {
@@ -92,9 +100,9 @@ final class ResultBlocks {
         if (decimals.formula().isEmpty()) {
             return "none" + reason;
         }
-        return "as printed within " + Decimals.of(decimals.errorBound(), ERROR_DIGITS).text()
-                + " of the exact value, for every k"
-                + decimals.upTo().map(last -> " up to " + last).orElse("") + reason;
+        return "certified within " + Decimals.of(decimals.errorBound(), ERROR_DIGITS).text()
+                + decimals.upTo().map(last -> " for every k up to " + last).orElse(" for every k")
+                + ", computed as printed" + reason;
     }
 
     private void holds(Transform transform) {

@@ -93,8 +93,8 @@ final class WayBlocks {
         for (int at = 0; at < form.expansion().impulses().size(); at++) {
             Rational value = form.expansion().impulses().get(at);
             if (!value.isZero()) {
-                terms.add(Formulas.product(List.of(Formulas.number(value),
-                        Formulas.power(RationalFunction.Z, Formulas.number(-at)))));
+                terms.add(at == 0 ? Formulas.number(value) : Formulas.product(List.of(Formulas.number(value),
+                        Formulas.power(RationalFunction.Z, Formulas.number(Rational.of(-at))))));
             }
         }
         if (!fractions.isEmpty()) {

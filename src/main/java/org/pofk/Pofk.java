@@ -1,0 +1,41 @@
+package org.pofk;
+
+import java.nio.file.Path;
+import java.util.EnumSet;
+import java.util.List;
+import org.pofk.answer.DerivedModel;
+import org.pofk.answer.Deriving;
+import org.pofk.answer.InspectedModel;
+import org.pofk.chain.Model;
+import org.pofk.chain.Output;
+import org.pofk.chain.Outputs;
+import org.pofk.input.ModelReader;
+import org.pofk.input.Overrides;
+import org.pofk.text.Position;
+import org.pofk.text.RefusedException;
+
+/** The small face of the library: read a model, derive, ask. */
+public final class Pofk {
+    private Pofk() {
+    }
+
+    /** The model in a file; refused with every fault of the file. */
+    public static Model read(Path file) throws RefusedException {
+        return ModelReader.read(file, Overrides.NONE);
+    }
+
+    /** The outputs, sets or states of these names; refused when one of them stands for nothing, or for two. */
+    public static List<Output> outputs(Model model, String... names) throws RefusedException {
+        return Outputs.named(model.chain(), List.of(names), Position.ofWhole("names"));
+    }
+
+    /** Formulas, long runs and comparisons of these outputs. */
+    public static DerivedModel derive(Model model, List<Output> outputs) {
+        return Deriving.of(model, outputs, List.of(), EnumSet.of(Deriving.Extra.COMPARISON), published -> { });
+    }
+
+    /** Structure, long runs and a reviewer's questions. */
+    public static InspectedModel inspect(Model model) {
+        return InspectedModel.of(model, Outputs.byDefault(model.chain()));
+    }
+}
