@@ -82,7 +82,8 @@ final class DeriveCommand implements Work {
         }
         List<Output> outputs = AskedOutputs.of(read.chain(), of);
         Worker.Outcome<DerivedModel> outcome = Worker.within(budget.limit(), streams.notes(), published ->
-                Deriving.of(read, outputs, at.map(StepList::steps).orElse(List.of()), extras(), published));
+                Deriving.of(read, outputs, at.map(StepList::steps).orElse(List.of()), extras(read, format),
+                        published));
         if (outcome.published().isEmpty()) {
             streams.notes().println("pofk: nothing was decided within the budget");
             return ExitCode.NOT_DECIDED;
@@ -107,9 +108,10 @@ final class DeriveCommand implements Work {
         };
     }
 
-    private Set<Deriving.Extra> extras() {
+    /** The modes of the whole state are a vector each: as text for few states only, as data for any number. */
+    private Set<Deriving.Extra> extras(Model read, Format format) {
         Set<Deriving.Extra> extras = EnumSet.of(Deriving.Extra.COMPARISON);
-        if (show != Part.RESULT) {
+        if (show != Part.RESULT && (format == Format.JSON || read.chain().size() <= DERIVED_UNASKED)) {
             extras.add(Deriving.Extra.STATE_MODES);
         }
         if (secondOpinion) {

@@ -34,8 +34,8 @@ final class StateBlocks {
             states.forEach(name -> header.add(Prose.name(name)));
         }
         return List.of(new Heading(2, "The whole state"),
-                new Paragraph("The state at step k is the sum over these modes of the mode times its vector over the states; 'excited'"
-                        + " says how strongly the start excites it: the largest component."
+                new Paragraph("The state at step k is the sum over these modes of the mode times its vector over the"
+                        + " states; 'excited' says how strongly the start excites it: the largest component."
                         + (writtenOut ? "" : " The vectors of " + states.size() + " states are in the result as JSON.")),
                 new Table(Prose.EMPTY, header, blocks.rows));
     }
