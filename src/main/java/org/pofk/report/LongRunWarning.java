@@ -14,6 +14,6 @@ final class LongRunWarning {
                 : "squaring A until it no longer changes";
         String cause = stop.outcome() == HighPowers.Outcome.MISLED_BY_CYCLE ? "a cycle" : "a slow pole";
         return habit + " would have stopped at k = " + stop.k() + " with "
-                + Decimals.fixed(stop.value().middle(), digits).text() + ", misled by " + cause;
+                + (stop.value().containsZero() ? "0" : Decimals.of(stop.value().middle(), digits).text()) + ", misled by " + cause;
     }
 }
