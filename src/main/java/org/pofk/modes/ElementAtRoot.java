@@ -1,6 +1,7 @@
 package org.pofk.modes;
 
 import java.util.Optional;
+import java.util.stream.IntStream;
 import org.pofk.exact.Ball;
 import org.pofk.exact.ComplexBall;
 import org.pofk.exact.Enclosed;
@@ -116,12 +117,18 @@ record ElementAtRoot(NumberField field, Polynomial<Rational> element, Root root,
 
     /** Decides whether the value is real: it is a root of the minimal polynomial of h, and there it is known. */
     boolean isReal() {
-        if (root.isReal() || element.isConstant()) {
+        if (root.isReal() || element.isConstant() || isInStepPower() && field.hasRealStepPower(root)) {
             return true;
         }
         Polynomial<Rational> minimal = field.minimalPolynomial(element);
         return minimal.degree() < field.degree()
                 && NumberField.located(Roots.of(minimal), enclosed::enclose).isReal();
+    }
+
+    /** True for a polynomial in λ^m, q(z) = g(z^m). */
+    private boolean isInStepPower() {
+        return IntStream.rangeClosed(0, element.degree())
+                .allMatch(power -> power % field.step() == 0 || element.coefficient(power).isZero());
     }
 
     ComplexBall enclose(int bits) {
