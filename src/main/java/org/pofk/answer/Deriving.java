@@ -27,11 +27,13 @@ public final class Deriving {
     private static final Duration SECOND_OPINION_LIMIT = Duration.ofSeconds(20);
 
     private final Consumer<DerivedModel> published;
+    private final KnownPoles poles;
     private DerivedModel known;
 
     private Deriving(DerivedModel known, Consumer<DerivedModel> published) {
         this.known = known;
         this.published = published;
+        this.poles = new KnownPoles(() -> Eigenvalues.guesses(known.model().chain().matrix()));
     }
 
     /** What may be asked for besides formulas and long runs. */
@@ -52,7 +54,7 @@ public final class Deriving {
             deriving.compare();
         }
         if (extras.contains(Extra.STATE_MODES)) {
-            deriving.publish(deriving.known.with(StateModes.of(model.chain())));
+            deriving.publish(deriving.known.with(StateModes.of(model.chain(), deriving.poles)));
         }
         if (extras.contains(Extra.SECOND_OPINION)) {
             deriving.askAnother();
@@ -71,7 +73,6 @@ public final class Deriving {
             publish(known.with(i, known.outputs().get(i).with(transforms.get(i))));
         }
         LongRunChecks.Ground ground = LongRunChecks.Ground.of(known.model().chain());
-        KnownPoles poles = new KnownPoles();
         for (int i = 0; i < transforms.size(); i++) {
             publish(known.with(i, known.outputs().get(i).with(LongRunChecks.of(ground, transforms.get(i)))));
             publish(known.with(i, known.outputs().get(i).with(ClosedForm.of(transforms.get(i), poles))));

@@ -5,13 +5,10 @@ import java.util.List;
 import java.util.Optional;
 import org.apache.commons.math3.complex.Complex;
 import org.apache.commons.math3.exception.MathRuntimeException;
-import org.apache.commons.math3.linear.Array2DRowRealMatrix;
-import org.apache.commons.math3.linear.EigenDecomposition;
-import org.apache.commons.math3.linear.RealMatrix;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Output;
-import org.pofk.chain.SparseMatrix;
 import org.pofk.exact.ComplexBall;
+import org.pofk.exact.Guess;
 import org.pofk.exact.Root;
 import org.pofk.exact.Roots;
 import org.pofk.modes.ClosedForm;
@@ -56,12 +53,9 @@ public record PoleCheck(int poles, Optional<Double> largestDistance, Optional<St
 
     /** Those of A, and the one of the constant that an output may add. */
     private static List<Complex> eigenvalues(Chain chain, Output output) {
-        EigenDecomposition found = new EigenDecomposition(dense(chain.matrix()));
-        double[] real = found.getRealEigenvalues();
-        double[] imaginary = found.getImagEigenvalues();
         List<Complex> eigenvalues = new ArrayList<>();
-        for (int i = 0; i < real.length; i++) {
-            eigenvalues.add(new Complex(real[i], imaginary[i]));
+        for (Guess each : Eigenvalues.inDoubles(chain.matrix())) {
+            eigenvalues.add(new Complex(each.real(), each.imaginary()));
         }
         if (!output.constant().isZero()) {
             eigenvalues.add(Complex.ONE);
@@ -73,15 +67,5 @@ public record PoleCheck(int poles, Optional<Double> largestDistance, Optional<St
         Complex middle = new Complex(pole.real().middle().approximate(), pole.imaginary().middle().approximate());
         return eigenvalues.stream().mapToDouble(each -> each.subtract(middle).abs()).min()
                 .orElse(Double.POSITIVE_INFINITY);
-    }
-
-    private static RealMatrix dense(SparseMatrix matrix) {
-        double[][] entries = new double[matrix.size()][matrix.size()];
-        for (int j = 0; j < matrix.size(); j++) {
-            for (SparseMatrix.Entry entry : matrix.columns().get(j)) {
-                entries[entry.row()][j] = entry.value().approximate();
-            }
-        }
-        return new Array2DRowRealMatrix(entries, false);
     }
 }

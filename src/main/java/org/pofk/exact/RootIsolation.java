@@ -3,6 +3,7 @@ package org.pofk.exact;
 import java.math.BigInteger;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.Supplier;
 
 /**
  * Isolates the roots of a whole-number polynomial of degree 3 and more: guesses, cheap ones first, until
@@ -16,12 +17,20 @@ final class RootIsolation {
     private RootIsolation() {
     }
 
-    /** @param polynomial square-free, not zero at zero */
-    static RealAndAbove of(Polynomial<Rational> polynomial) {
+    /**
+     * @param polynomial square-free, not zero at zero
+     * @param guesses    asked for where the polynomial's own coefficients lead to no good guesses in doubles
+     */
+    static RealAndAbove of(Polynomial<Rational> polynomial, Supplier<List<Guess>> guesses) {
         BigInteger[] whole = BoundedHorner.wholeCoefficients(polynomial);
         BoundedHorner horner = new BoundedHorner(whole);
         List<Start> starts = AberthInDoubles.starts(whole);
         Optional<List<Isolated>> isolated = Isolation.attempt(horner, starts);
+        if (isolated.isEmpty()) {
+            List<Start> guessed = GuessedStarts.of(horner, guesses.get());
+            starts = guessed.isEmpty() ? starts : guessed;
+            isolated = Isolation.attempt(horner, guessed);
+        }
         if (isolated.isEmpty()) {
             isolated = Isolation.attempt(horner, TridiagonalStarts.of(polynomial));
         }

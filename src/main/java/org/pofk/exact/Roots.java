@@ -2,6 +2,7 @@ package org.pofk.exact;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.function.Supplier;
 
 /**
  * All roots of a square-free rational polynomial, each in a disc of its own. Canonical order: real roots descending,
@@ -20,11 +21,19 @@ public record Roots(List<Root> all) {
 
     /** The roots; none for a constant that isn't zero. An {@link IllegalArgumentException} when a root is repeated. */
     public static Roots of(Polynomial<Rational> squareFree) {
+        return of(squareFree, List::of);
+    }
+
+    /**
+     * The same, faster where all roots are known approximately among {@code guesses} (eigenvalues in doubles): the
+     * roots of a characteristic polynomial of some fifty states can't be told from its coefficients in doubles.
+     */
+    public static Roots of(Polynomial<Rational> squareFree, Supplier<List<Guess>> guesses) {
         if (squareFree.isZero()) {
             throw new IllegalArgumentException("every number is a root of zero");
         }
         Polynomial<Rational> monic = squareFree.monic();
-        RealAndAbove found = isolate(monic);
+        RealAndAbove found = isolate(monic, guesses);
         List<EnclosedComplex> real = CanonicalOrder.descending(found.real());
         List<EnclosedComplex> above = CanonicalOrder.byAngle(found.above());
         List<Root> roots = new ArrayList<>();
@@ -43,23 +52,23 @@ public record Roots(List<Root> all) {
         return new Roots(roots);
     }
 
-    private static RealAndAbove isolate(Polynomial<Rational> monic) {
+    private static RealAndAbove isolate(Polynomial<Rational> monic, Supplier<List<Guess>> guesses) {
         if (monic.coefficient(0).isZero()) {
-            return withZero(monic.shiftedDown(1));
+            return withZero(monic.shiftedDown(1), guesses);
         }
         return switch (monic.degree()) {
             case 0 -> new RealAndAbove(List.of(), List.of());
             case 1 -> new RealAndAbove(List.of(EnclosedComplex.of(monic.coefficient(0).negate())), List.of());
             case 2 -> QuadraticRoots.of(monic);
-            default -> RootIsolation.of(monic);
+            default -> RootIsolation.of(monic, guesses);
         };
     }
 
-    private static RealAndAbove withZero(Polynomial<Rational> rest) {
+    private static RealAndAbove withZero(Polynomial<Rational> rest, Supplier<List<Guess>> guesses) {
         if (rest.coefficient(0).isZero()) {
             throw new IllegalArgumentException("zero is a repeated root");
         }
-        RealAndAbove others = isolate(rest);
+        RealAndAbove others = isolate(rest, guesses);
         List<EnclosedComplex> real = new ArrayList<>(others.real());
         real.add(EnclosedComplex.of(Rational.ZERO));
         return new RealAndAbove(real, others.above());

@@ -56,7 +56,7 @@ public record Derivation(List<ImpulseStep> impulses, List<FactorStep> factors) {
         for (Expansion.Part<Rational> part : form.expansion().parts()) {
             Factor<Rational> factor = part.factor();
             int index = form.transform().factors().factors().indexOf(factor);
-            FactorPoles poles = new FactorPoles(factor);
+            FactorPoles poles = new FactorPoles(factor, form.roots().get(index));
             steps.add(new FactorStep(index, Formulas.polynomial(factor.polynomial(), TablePair.Z),
                     factor.multiplicity(), FormulaOverRoots.coefficients(part, form.transform().y()),
                     collected.real.stream().filter(step -> step.mode().factor() == index).toList(),

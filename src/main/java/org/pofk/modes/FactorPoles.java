@@ -30,9 +30,9 @@ final class FactorPoles {
 
     private List<Pole> poles = List.of();
 
-    FactorPoles(Factor<Rational> factor) {
+    FactorPoles(Factor<Rational> factor, Roots roots) {
         this.factor = factor;
-        this.field = new NumberField(factor.polynomial(), Roots.of(factor.polynomial()));
+        this.field = new NumberField(factor.polynomial(), roots);
         this.searched = isSearched(field);
         this.squaredModulus = field.squaredModulusCandidate();
         this.cosines = CosineForm.of(factor.polynomial());
