@@ -46,8 +46,13 @@ public record DerivedOutput(Output output, Optional<Transform> transform, Option
                 secondOpinion, absent, values);
     }
 
-    DerivedOutput with(Comparison found, PoleCheck poles) {
-        return new DerivedOutput(output, transform, longRun, closedForm, Optional.of(found), Optional.of(poles),
+    DerivedOutput with(Comparison found) {
+        return new DerivedOutput(output, transform, longRun, closedForm, Optional.of(found), poleCheck,
+                secondOpinion, absent, values);
+    }
+
+    DerivedOutput with(PoleCheck found) {
+        return new DerivedOutput(output, transform, longRun, closedForm, comparison, Optional.of(found),
                 secondOpinion, absent, values);
     }
 

@@ -37,7 +37,7 @@ public final class Deriving {
     }
 
     /** What may be asked for besides formulas and long runs. */
-    public enum Extra { COMPARISON, STATE_MODES, SECOND_OPINION }
+    public enum Extra { COMPARISON, POLE_CHECK, STATE_MODES, SECOND_OPINION }
 
     /** Everything about these outputs; {@code at} lists steps in ascending order whose values are wanted. */
     public static DerivedModel of(Model model, List<Output> outputs, List<Integer> at, Set<Extra> extras,
@@ -52,6 +52,9 @@ public final class Deriving {
         }
         if (extras.contains(Extra.COMPARISON)) {
             deriving.compare();
+        }
+        if (extras.contains(Extra.POLE_CHECK)) {
+            deriving.checkPoles();
         }
         if (extras.contains(Extra.STATE_MODES)) {
             deriving.publish(deriving.known.with(StateModes.of(model.chain(), deriving.poles)));
@@ -109,8 +112,14 @@ public final class Deriving {
                 : Optional.empty();
         List<Comparison> comparisons = Comparison.of(chain, closedForms(), COMPARED_UP_TO, simulation);
         for (int i = 0; i < comparisons.size(); i++) {
-            publish(known.with(i, known.outputs().get(i).with(comparisons.get(i),
-                    PoleCheck.of(chain, closedForms().get(i)))));
+            publish(known.with(i, known.outputs().get(i).with(comparisons.get(i))));
+        }
+    }
+
+    private void checkPoles() {
+        for (int i = 0; i < known.outputs().size(); i++) {
+            publish(known.with(i, known.outputs().get(i).with(
+                    PoleCheck.of(known.model().chain(), closedForms().get(i)))));
         }
     }
 

@@ -111,6 +111,9 @@ final class DeriveCommand implements Work {
     /** The modes of the whole state are a vector each: as text for few states only, as data for any number. */
     private Set<Deriving.Extra> extras(Model read, Format format) {
         Set<Deriving.Extra> extras = EnumSet.of(Deriving.Extra.COMPARISON);
+        if (show != Part.RESULT) {
+            extras.add(Deriving.Extra.POLE_CHECK);
+        }
         if (show != Part.RESULT && (format == Format.JSON || read.chain().size() <= DERIVED_UNASKED)) {
             extras.add(Deriving.Extra.STATE_MODES);
         }

@@ -64,6 +64,10 @@ final class WayBlocks {
         }
         pairs(derivation);
         terms(derivation);
+        output.poleCheck().ifPresent(check -> blocks.add(new Paragraph(check.largestDistance()
+                .map(distance -> "The eigenvalues of the matrix as found in doubles lie within "
+                        + SampledNumber.text(distance) + " of these poles; a comparison, no proof.")
+                .orElseGet(() -> "Not compared with eigenvalues in doubles: " + check.reason().orElse("")))));
     }
 
     private void transform() {

@@ -103,7 +103,7 @@ class DistributionTest {
 
     private static List<String> libraries() throws IOException {
         try (Stream<Path> files = Files.list(HOME.resolve("lib"))) {
-            return files.map(file -> file.getFileName().toString()).toList();
+            return files.map(file -> file.getFileName().toString()).filter(name -> name.endsWith(".jar")).toList();
         }
     }
 
