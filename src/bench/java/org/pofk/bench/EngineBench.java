@@ -23,8 +23,8 @@ import org.pofk.transform.Transforms;
 @BenchmarkMode(Mode.AverageTime)
 @OutputTimeUnit(TimeUnit.MILLISECONDS)
 @Fork(1)
-@Warmup(iterations = 5, time = 4)
-@Measurement(iterations = 5, time = 4)
+@Warmup(iterations = 4, time = 3)
+@Measurement(iterations = 5, time = 2)
 public class EngineBench {
     @Param({"100", "1000"})
     private int states;
