@@ -2,6 +2,7 @@ package org.pofk.answer;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.IntStream;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Output;
 import org.pofk.exact.Rational;
@@ -22,10 +23,12 @@ final class RecursionPowers {
         if (values.isEmpty() || values.size() > CYCLE_AT_MOST || recursion.size() > STATES_AT_MOST) {
             return Optional.empty();
         }
-        List<Rational> steps = ExactSteps.of(recursion, List.of(output), STEP + values.size() - 1).values().get(0);
+        List<Integer> cycle = IntStream.range(STEP, STEP + values.size()).boxed().toList();
+        List<Rational> powers = ExactSteps.at(recursion, List.of(output), cycle).values().get(0);
         Rational within = Rational.ZERO;
-        for (int k = STEP; k < steps.size(); k++) {
-            within = Rational.max(within, steps.get(k).minus(values.get(k % values.size())).abs());
+        for (int i = 0; i < powers.size(); i++) {
+            Rational reached = values.get(cycle.get(i) % values.size());
+            within = Rational.max(within, powers.get(i).minus(reached).abs());
         }
         return Optional.of(new HighPowers.Verdict(STEP, values.size(), within, List.of(), Optional.empty()));
     }

@@ -3,6 +3,7 @@ package org.pofk.cli;
 import java.io.BufferedOutputStream;
 import java.io.FileDescriptor;
 import java.io.FileOutputStream;
+import java.io.OutputStream;
 import java.io.PrintStream;
 import java.nio.charset.StandardCharsets;
 
@@ -16,17 +17,19 @@ public record Streams(PrintStream answer, PrintStream notes) {
 
     /** The streams of this process. */
     static Streams ofProcess() {
-        return new Streams(utf8(FileDescriptor.out), utf8(FileDescriptor.err));
+        PrintStream notes = utf8(new FileOutputStream(FileDescriptor.err));
+        return new Streams(utf8(new ToldOutput(new FileOutputStream(FileDescriptor.out), notes)), notes);
     }
 
-    private static PrintStream utf8(FileDescriptor descriptor) {
-        return new PrintStream(new BufferedOutputStream(new FileOutputStream(descriptor), 1 << 16), false,
-                StandardCharsets.UTF_8);
+    private static PrintStream utf8(OutputStream bytes) {
+        return new PrintStream(new BufferedOutputStream(bytes, 1 << 16), false, StandardCharsets.UTF_8);
     }
 
     /** Sends what is held back, and says whether everything arrived. */
     boolean flush() {
         notes.flush();
-        return !answer.checkError();
+        boolean arrived = !answer.checkError();
+        notes.flush();
+        return arrived;
     }
 }
