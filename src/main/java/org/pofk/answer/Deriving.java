@@ -43,7 +43,8 @@ public final class Deriving {
     public static DerivedModel of(Model model, List<Output> outputs, List<Integer> at, Set<Extra> extras,
             Consumer<DerivedModel> published) {
         Deriving deriving = new Deriving(new DerivedModel(model, Structure.of(model.chain()),
-                outputs.stream().map(DerivedOutput::of).toList(), Optional.empty()), published);
+                outputs.stream().map(DerivedOutput::of).toList(), Optional.empty(), new Wanted(at, extras)),
+                published);
         deriving.publish(deriving.known);
         deriving.formulas(outputs);
         deriving.absentEigenvalues();

@@ -39,20 +39,26 @@ public final class DerivationDocument {
     private static void results(DerivedModel derived, Style style, List<Block> blocks) {
         for (DerivedOutput output : derived.outputs()) {
             blocks.addAll(ResultBlocks.of(output, style));
+            blocks.addAll(MissingBlocks.checks(output, derived.wanted()));
         }
         List<DerivedOutput> listed = derived.outputs().stream().filter(output -> !output.values().isEmpty()).toList();
         if (!listed.isEmpty()) {
             blocks.add(ValuesTable.of(listed, style.digits()));
         }
+        blocks.addAll(MissingBlocks.values(derived));
     }
 
     private static void way(DerivedModel derived, Style style, Convention convention,
             BiFunction<DerivedOutput, Style, List<Block>> wayOf, List<Block> blocks) {
         blocks.addAll(ChainBlocks.of(derived.model(), derived.outputs().stream().map(DerivedOutput::output).toList(),
                 convention));
-        derived.outputs().forEach(output -> blocks.addAll(wayOf.apply(output, style)));
+        derived.outputs().forEach(output -> {
+            blocks.addAll(wayOf.apply(output, style));
+            blocks.addAll(MissingBlocks.way(output));
+        });
         derived.state().ifPresent(state -> blocks.addAll(
                 StateBlocks.of(state, derived.model().chain().states(), style)));
+        blocks.addAll(MissingBlocks.state(derived));
     }
 
     private static Document ended(List<Block> blocks) {

@@ -29,6 +29,9 @@ final class ResultBlocks {
     /** A formula above this is no longer read by anybody. */
     private static final int EXACT_SHOWN_UP_TO = 1200;
 
+    /** A coefficient and its power of z must fit in a line of eighty columns. */
+    private static final int COEFFICIENT_SHOWN_UP_TO = 50;
+
     private final DerivedOutput output;
     private final Style style;
     private final List<Block> blocks = new ArrayList<>();
@@ -170,9 +173,18 @@ final class ResultBlocks {
     }
 
     private void undecided() {
-        output.transform().ifPresent(transform -> blocks.add(new Display(Prose.of("Y(z)"), Relation.EQUAL,
-                RationalFunction.inZ(transform.y()))));
-        label("not decided", "within the budget" + (output.transform().isPresent()
-                ? "; the transform Y(z) above is proven" : "; nothing about this output is proven yet"));
+        if (output.transform().isEmpty()) {
+            label("not decided", "within the budget; nothing about this output is proven yet");
+            return;
+        }
+        Transform transform = output.transform().get();
+        int longest = RationalFunction.longestCoefficient(transform.y());
+        if (longest <= COEFFICIENT_SHOWN_UP_TO) {
+            blocks.add(new Display(Prose.of("Y(z)"), Relation.EQUAL, RationalFunction.inZ(transform.y())));
+            label("not decided", "within the budget; the transform Y(z) above is proven");
+        } else {
+            label("not decided", "within the budget; the transform Y(z) is proven, but its coefficients have up to "
+                    + longest + " characters, too long to be shown; they are in the result as JSON");
+        }
     }
 }
