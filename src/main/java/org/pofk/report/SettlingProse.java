@@ -1,17 +1,30 @@
 package org.pofk.report;
 
 import org.pofk.answer.Settling;
+import org.pofk.exact.Ball;
 import org.pofk.exact.Decimals;
+import org.pofk.exact.Enclosed;
+import org.pofk.exact.Rational;
 
 /** How an output approaches its long run, in words. */
 final class SettlingProse {
+    private static final int BITS = 64;
+
     private SettlingProse() {
     }
 
     static String of(Settling settling, int digits) {
         return "stays within 1e-" + settling.digits() + " of it from k = " + settling.from() + " on"
-                + settling.slowest().map(modulus -> "; slowest part decays like "
-                        + Decimals.of(modulus, digits).text() + "^k"
+                + settling.slowest().map(modulus -> "; slowest part decays like " + base(modulus, digits) + "^k"
                         + (settling.tied() > 1 ? ", shared by " + settling.tied() + " modes" : "")).orElse("");
+    }
+
+    /** A base just below one is told apart from it by what it lacks. */
+    private static String base(Enclosed modulus, int digits) {
+        Ball missing = Ball.of(1, BITS).minus(modulus.enclose(BITS));
+        boolean nearlyOne = missing.isPositive() && missing.upper().compareTo(Rational.of(1, 1000)) <= 0;
+        return nearlyOne
+                ? "(1 − " + Decimals.of(Enclosed.of(Rational.ONE).plus(modulus.negate()), digits).text() + ")"
+                : Decimals.of(modulus, digits).text();
     }
 }

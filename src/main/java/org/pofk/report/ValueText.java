@@ -1,5 +1,6 @@
 package org.pofk.report;
 
+import java.util.Optional;
 import org.pofk.answer.StepValue;
 import org.pofk.exact.Ball;
 import org.pofk.exact.Decimals;
@@ -9,7 +10,7 @@ import org.pofk.exact.Rational;
 final class ValueText {
     /** A certified value smaller than 2^−this is written 0: it may be. */
     private static final int SMALLEST_BITS = 4096;
-    private static final Rational NEARLY_ONE = Rational.of(999, 1000);
+    private static final Rational NEARLY_ONE = Rational.of(1, 1000);
 
     private ValueText() {
     }
@@ -21,12 +22,11 @@ final class ValueText {
         return mayBeZero(value) ? "0" : Decimals.of(value.enclosure(), digits).text();
     }
 
-    /** A probability: within 1e-3 of one, what it lacks to one is written to as many digits. */
-    static String probability(Rational value, int digits) {
-        boolean nearlyOne = value.compareTo(NEARLY_ONE) >= 0 && value.compareTo(Rational.ONE) < 0;
-        return nearlyOne
-                ? "1 − " + Decimals.of(Rational.ONE.minus(value), digits).text()
-                : Decimals.of(value, digits).text();
+    /** For the eye: within 1e-3 of one, what a value lacks to one is written to as many digits. */
+    static String forReading(StepValue value, int digits) {
+        Optional<Rational> missing = value.exact().map(Rational.ONE::minus)
+                .filter(rest -> rest.signum() > 0 && rest.compareTo(NEARLY_ONE) <= 0);
+        return missing.map(rest -> "1 − " + Decimals.of(rest, digits).text()).orElseGet(() -> decimal(value, digits));
     }
 
     private static boolean mayBeZero(StepValue value) {
