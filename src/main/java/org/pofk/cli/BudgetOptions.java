@@ -1,6 +1,7 @@
 package org.pofk.cli;
 
 import java.time.Duration;
+import java.time.Instant;
 import java.util.Optional;
 import picocli.CommandLine.Option;
 
@@ -10,8 +11,11 @@ final class BudgetOptions {
             description = "after this time, writes what is proven so far and ends with exit code 4")
     private Optional<Double> seconds = Optional.empty();
 
-    /** The limit, none where none was asked for. */
-    Optional<Duration> limit() throws UsageException {
+    /**
+     * What is left of the limit, none where none was asked for. The time since the run began counts, but never for
+     * more than half, however the system's clock was set meanwhile.
+     */
+    Optional<Duration> limit(Streams streams) throws UsageException {
         if (seconds.isEmpty()) {
             return Optional.empty();
         }
@@ -19,6 +23,9 @@ final class BudgetOptions {
         if (!(asked > 0 && asked <= Integer.MAX_VALUE)) {
             throw new UsageException("--budget takes a number of seconds above zero, like --budget 60");
         }
-        return Optional.of(Duration.ofNanos((long) (asked * 1e9)));
+        Duration limit = Duration.ofNanos((long) (asked * 1e9));
+        Duration left = limit.minus(Duration.between(streams.begun(), Instant.now()));
+        Duration least = limit.dividedBy(2);
+        return Optional.of(left.compareTo(least) < 0 ? least : left.compareTo(limit) > 0 ? limit : left);
     }
 }

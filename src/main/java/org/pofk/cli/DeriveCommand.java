@@ -81,7 +81,7 @@ final class DeriveCommand implements Work {
             return ExitCode.ANSWERED;
         }
         List<Output> outputs = AskedOutputs.of(read.chain(), of);
-        Worker.Outcome<DerivedModel> outcome = Worker.within(budget.limit(), streams.notes(), published ->
+        Worker.Outcome<DerivedModel> outcome = Worker.within(budget.limit(streams), streams.notes(), published ->
                 Deriving.of(read, outputs, at.map(StepList::steps).orElse(List.of()), extras(read, format),
                         published));
         if (outcome.published().isEmpty()) {

@@ -43,7 +43,7 @@ final class InspectCommand implements Work {
         writing.save().check();
         Model read = model.read();
         List<Output> outputs = of.isEmpty() ? read.chain().outputs() : AskedOutputs.of(read.chain(), of);
-        Worker.Outcome<InspectedModel> outcome = Worker.within(budget.limit(), streams.notes(), published -> {
+        Worker.Outcome<InspectedModel> outcome = Worker.within(budget.limit(streams), streams.notes(), published -> {
             published.accept(InspectedModel.of(read, List.of()));
             published.accept(InspectedModel.of(read, outputs));
         });

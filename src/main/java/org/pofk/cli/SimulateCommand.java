@@ -64,7 +64,7 @@ final class SimulateCommand implements Work {
                     + " probabilities, can be run at random; pofk derive takes it");
         }
         List<Output> outputs = AskedOutputs.of(read.chain(), of);
-        Worker.Outcome<Simulation> outcome = Worker.within(budget.limit(), streams.notes(), published ->
+        Worker.Outcome<Simulation> outcome = Worker.within(budget.limit(streams), streams.notes(), published ->
                 published.accept(Simulation.of(read.chain(), outputs, at.steps(), runs, seed)));
         if (outcome.published().isEmpty()) {
             streams.notes().println("pofk: the runs didn't end within the budget; fewer will, with --runs");

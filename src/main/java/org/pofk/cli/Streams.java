@@ -6,19 +6,28 @@ import java.io.FileOutputStream;
 import java.io.OutputStream;
 import java.io.PrintStream;
 import java.nio.charset.StandardCharsets;
+import java.time.Instant;
 
 /**
- * Where a run writes: the answer, and everything else. Both are UTF-8 whatever the machine's own encoding is.
+ * Where a run writes: the answer, and everything else. Both are UTF-8 whatever the machine's own encoding is. And when
+ * it began, for whoever waits for it counts the start of Java too.
  *
  * @param answer standard output
  * @param notes  standard error
+ * @param begun  by the system's clock
  */
-public record Streams(PrintStream answer, PrintStream notes) {
+public record Streams(PrintStream answer, PrintStream notes, Instant begun) {
+
+    /** A run that begins now. */
+    public Streams(PrintStream answer, PrintStream notes) {
+        this(answer, notes, Instant.now());
+    }
 
     /** The streams of this process. */
     static Streams ofProcess() {
         PrintStream notes = utf8(new FileOutputStream(FileDescriptor.err));
-        return new Streams(utf8(new ToldOutput(new FileOutputStream(FileDescriptor.out), notes)), notes);
+        return new Streams(utf8(new ToldOutput(new FileOutputStream(FileDescriptor.out), notes)), notes,
+                ProcessHandle.current().info().startInstant().orElseGet(Instant::now));
     }
 
     private static PrintStream utf8(OutputStream bytes) {
