@@ -74,11 +74,7 @@ final class DeriveCommand implements Work {
         writing.save().check();
         Model read = model.read();
         if (isTooLargeForAll(read.chain())) {
-            InspectedModel inspected = InspectedModel.of(read, List.of());
-            writing.save().write(format == Format.JSON
-                    ? StructureJson.write(inspected, style.digits())
-                    : writing.text(StructureDocument.tooLargeForAll(inspected, style)), streams);
-            return ExitCode.ANSWERED;
+            return askedForOutputs(read, style, format, streams);
         }
         List<Output> outputs = AskedOutputs.of(read.chain(), of);
         Worker.Outcome<DerivedModel> outcome = Worker.within(budget.limit(streams), streams.notes(), published ->
@@ -93,6 +89,18 @@ final class DeriveCommand implements Work {
                 ? DerivationJson.write(derived, style.digits())
                 : writing.text(document(derived, style)), streams);
         return derived.isDecided() && outcome.finished() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
+    }
+
+    private ExitCode askedForOutputs(Model read, Style style, Format format, Streams streams)
+            throws UsageException, WritingException {
+        InspectedModel inspected = InspectedModel.of(read, List.of());
+        if (format == Format.JSON) {
+            streams.notes().println("pofk: " + StructureDocument.askingForOutputs(read.chain()));
+            writing.save().write(StructureJson.write(CommandName.DERIVE.word(), inspected, style.digits()), streams);
+        } else {
+            writing.save().write(writing.text(StructureDocument.tooLargeForAll(inspected, style)), streams);
+        }
+        return ExitCode.ANSWERED;
     }
 
     /** So many formulas are no answer to somebody who didn't ask for them. */

@@ -2,7 +2,6 @@ package org.pofk.cli;
 
 import java.util.List;
 import java.util.Optional;
-import org.pofk.text.Suggestion;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Parameters;
@@ -59,9 +58,7 @@ final class HelpCommand implements Work {
 
     private static UsageException unknown(String asked) {
         TradeWords known = TradeWords.read();
-        List<String> first = known.entries().stream().map(entry -> entry.words().get(0)).toList();
         return new UsageException("nothing is known about '" + asked + "'"
-                + Suggestion.didYouMean(known.words(), asked) + "\nWords that lead further:\n  "
-                + String.join("\n  ", first));
+                + Meant.didYouMean(known.words(), asked) + "\nWhat there is:  pofk help");
     }
 }

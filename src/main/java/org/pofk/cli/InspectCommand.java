@@ -53,7 +53,7 @@ final class InspectCommand implements Work {
         }
         InspectedModel inspected = outcome.published().get();
         writing.save().write(format == Format.JSON
-                ? StructureJson.write(inspected, style.digits())
+                ? StructureJson.write(CommandName.INSPECT.word(), inspected, style.digits())
                 : writing.text(StructureDocument.of(inspected, style)), streams);
         return outcome.finished() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
     }

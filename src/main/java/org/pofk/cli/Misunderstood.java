@@ -4,7 +4,6 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
-import java.util.regex.Pattern;
 import java.util.stream.Collectors;
 import org.pofk.text.Suggestion;
 import picocli.CommandLine;
@@ -14,8 +13,6 @@ import picocli.CommandLine.UnmatchedArgumentException;
 
 /** What is wrong with a command line, and what may have been meant. */
 final class Misunderstood {
-    private static final Pattern WORDS = Pattern.compile("expected one of \\[([A-Z_, ]+)] \\(case-insensitive\\)");
-
     private Misunderstood() {
     }
 
@@ -37,7 +34,7 @@ final class Misunderstood {
         CommandLine command = misunderstood.getCommandLine();
         String message = misunderstood instanceof UnmatchedArgumentException unmatched
                 ? leftOver(command, unmatched.getUnmatched().get(0))
-                : asTyped(lowerCaseFirst(misunderstood.getMessage()));
+                : WrongValue.of(misunderstood).orElseGet(() -> lowerCaseFirst(misunderstood.getMessage()));
         return new UsageException(message + "\nAll options:  pofk help " + word(command));
     }
 
@@ -59,11 +56,6 @@ final class Misunderstood {
     private static String word(CommandLine command) {
         String name = command.getCommandName();
         return name.substring(name.indexOf(' ') + 1);
-    }
-
-    /** The parser lists the words of an option in capitals; they are typed in small letters. */
-    private static String asTyped(String message) {
-        return WORDS.matcher(message).replaceAll(words -> "expected one of " + words.group(1).toLowerCase(Locale.ROOT));
     }
 
     private static String lowerCaseFirst(String sentence) {

@@ -1,7 +1,12 @@
 package org.pofk.cli;
 
+import java.nio.charset.StandardCharsets;
+import java.util.ArrayList;
+import java.util.List;
 import java.util.Optional;
-import org.pofk.text.Suggestion;
+import org.pofk.report.Document;
+import org.pofk.report.TextWriter;
+import org.pofk.text.Alphabet;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Parameters;
@@ -34,20 +39,20 @@ final class NewCommand implements Work {
     }
 
     private ExitCode list(Streams streams) throws UsageException {
+        save.check();
         if (save.file().isPresent()) {
             throw new UsageException("which pattern is to be saved? The patterns:  pofk new");
         }
-        int width = Patterns.names().stream().mapToInt(String::length).max().orElse(0);
-        for (String name : Patterns.names()) {
-            String summary = Patterns.summary(Patterns.model(name).orElseThrow());
-            streams.answer().println(String.format("%-" + width + "s  %s", name, summary).stripTrailing());
-        }
-        streams.answer().println("\npofk new PATTERN shows one; with --save FILE it becomes a model of yours.");
+        List<Document.Block> blocks = new ArrayList<>();
+        Patterns.names().forEach(name -> blocks.add(new Document.Labelled(name,
+                Patterns.summary(Patterns.model(name).orElseThrow()))));
+        blocks.add(new Document.Paragraph("pofk new PATTERN shows one; with --save FILE it becomes a model of yours."));
+        streams.answer().print(TextWriter.of(Alphabet.UNICODE, StandardCharsets.UTF_8).write(new Document(blocks)));
         return ExitCode.ANSWERED;
     }
 
     private static UsageException unknown(String name) {
         return new UsageException("there is no pattern '" + name + "'"
-                + Suggestion.didYouMean(Patterns.names(), name) + "\nThe patterns:  pofk new");
+                + Meant.didYouMean(Patterns.names(), name) + "\nThe patterns:  pofk new");
     }
 }

@@ -2,7 +2,10 @@ package org.pofk.cli;
 
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
+import java.nio.file.AccessDeniedException;
+import java.nio.file.FileSystemException;
 import java.nio.file.Files;
+import java.nio.file.NoSuchFileException;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
 import java.util.Optional;
@@ -23,6 +26,9 @@ final class SaveOptions {
 
     /** Refuses a file that must not be replaced; asked before the work begins, and again when it is written. */
     void check() throws UsageException {
+        if (file.isEmpty() && replace) {
+            throw new UsageException("--replace replaces a file that --save FILE names; there is no --save");
+        }
         if (file.isPresent() && !replace && Files.exists(file.get())) {
             throw new UsageException("'" + file.get() + "' exists; --replace replaces it");
         }
@@ -30,23 +36,22 @@ final class SaveOptions {
 
     /** Writes to the file, or to the answer stream where none was asked for. */
     void write(String text, Streams streams) throws UsageException, WritingException {
+        check();
         if (file.isEmpty()) {
             streams.answer().print(text);
             return;
         }
-        check();
         try {
             writeWhole(file.get(), text);
         } catch (IOException failed) {
-            throw new WritingException("'" + file.get() + "' can't be written: " + reason(failed), failed);
+            throw new WritingException("'" + file.get() + "' can't be written: " + reason(failed, folder(file.get())), failed);
         }
         streams.notes().println("written: " + file.get());
     }
 
     /** Writes beside the file first, and moves it into its place when it is complete. */
     private static void writeWhole(Path file, String text) throws IOException {
-        Path folder = Optional.ofNullable(file.toAbsolutePath().getParent()).orElse(Path.of(""));
-        Path draft = Files.createTempFile(folder, ".pofk-", ".part");
+        Path draft = Files.createTempFile(folder(file), ".pofk-", ".part");
         try {
             Files.writeString(draft, text, StandardCharsets.UTF_8);
             Files.move(draft, file, StandardCopyOption.ATOMIC_MOVE, StandardCopyOption.REPLACE_EXISTING);
@@ -55,9 +60,20 @@ final class SaveOptions {
         }
     }
 
-    private static String reason(IOException failed) {
-        return failed instanceof java.nio.file.NoSuchFileException ? "there is no such folder"
-                : failed instanceof java.nio.file.AccessDeniedException ? "that isn't allowed there"
-                : String.valueOf(failed.getMessage());
+    private static Path folder(Path file) {
+        return Optional.ofNullable(file.toAbsolutePath().getParent()).orElse(Path.of(""));
+    }
+
+    /** In the system's words where it has some; they name the draft's file otherwise, which nobody knows. */
+    private static String reason(IOException failed, Path folder) {
+        if (failed instanceof NoSuchFileException) {
+            return Files.isDirectory(folder) ? "the system takes no new file in the folder '" + folder + "'"
+                    : "there is no such folder";
+        }
+        if (failed instanceof AccessDeniedException) {
+            return "that isn't allowed there";
+        }
+        return failed instanceof FileSystemException named && named.getReason() != null
+                ? "the system says: " + named.getReason() : String.valueOf(failed.getMessage());
     }
 }

@@ -1,6 +1,7 @@
 package org.pofk.report;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 import java.util.stream.IntStream;
@@ -20,7 +21,7 @@ final class ModelHead {
 
     static List<Block> of(Model model) {
         List<Block> blocks = new ArrayList<>();
-        blocks.add(new Heading(1, Prose.name(model.title())));
+        blocks.add(new Heading(1, title(model.title())));
         blocks.add(new Paragraph(facts(model)));
         model.about().document().ifPresent(document -> blocks.add(new Labelled("document", Prose.name(document)
                 .and(model.about().revision().map(revision -> ", revision " + revision).orElse("")))));
@@ -32,12 +33,19 @@ final class ModelHead {
         return blocks;
     }
 
+    /** A name whose words may stand in different lines, as other names' may not. */
+    private static Prose title(String title) {
+        return Prose.joined(Arrays.stream(title.strip().split(" +")).map(Prose::name).toList(), " ");
+    }
+
     private static Prose facts(Model model) {
         Chain chain = model.chain();
         Prose facts = Prose.name(model.origin().file()).and(": "
                 + (chain.kind() == Chain.Kind.CHAIN ? "" : "a recursion of ")
                 + (chain.size() == 1 ? "1 state" : chain.size() + " states") + ", one step is ")
-                .andName(model.step().is());
+                .andName(model.step().is())
+                .and(model.step().lasts().map(lasts -> Prose.of(" (lasts ").andName(lasts).and(")"))
+                        .orElse(Prose.EMPTY));
         return start(chain).map(state -> facts.and(", starts in ").andName(state)).orElse(facts).and(".");
     }
 

@@ -16,7 +16,8 @@ final class SampledNumber {
         return Decimals.of(Rational.of(new BigDecimal(sampled)), DIGITS).text();
     }
 
-    static String exact(Sample sample, int digits) {
+    /** Certified decimals of the true value. */
+    static String value(Sample sample, int digits) {
         return sample.exact().containsZero() ? "0" : Decimals.of(sample.exact().middle(), digits).text();
     }
 }

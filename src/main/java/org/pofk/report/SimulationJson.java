@@ -1,6 +1,7 @@
 package org.pofk.report;
 
 import java.util.List;
+import java.util.Optional;
 import org.pofk.answer.Simulation;
 import org.pofk.answer.Simulation.Sample;
 import org.pofk.answer.Simulation.Series;
@@ -35,7 +36,11 @@ public final class SimulationJson {
             json.text("estimate", SampledNumber.text(sample.estimate()));
             json.texts("interval", List.of(SampledNumber.text(sample.interval().lower()),
                     SampledNumber.text(sample.interval().upper())));
-            json.text("exact", SampledNumber.exact(sample, digits));
+            json.object("value", () -> {
+                json.text("exact", sample.exact().isExact()
+                        ? Optional.of(sample.exact().middle().toString()) : Optional.empty());
+                json.text("decimal", SampledNumber.value(sample, digits));
+            });
             json.text("inside", switch (sample.verdict()) {
                 case INSIDE -> "yes";
                 case OUTSIDE -> "no";

@@ -127,12 +127,16 @@ public final class StructureDocument {
         }
     }
 
-    /** For a model too large to derive every state of: what is known without, and how to ask for more. */
+    /** For a model too large to derive every state of: how to ask for more, and what is known without. */
     public static Document tooLargeForAll(InspectedModel inspected, Style style) {
         List<Block> blocks = new ArrayList<>(of(inspected, style).blocks());
-        Chain chain = inspected.model().chain();
-        blocks.add(blocks.size() - 1, new Paragraph("The model names no outputs and has " + chain.size()
-                + " states: say which formula is wanted, --of STATE or --of SET; --of all derives every state."));
+        blocks.add(ModelHead.of(inspected.model()).size(), new Paragraph(askingForOutputs(inspected.model().chain())));
         return new Document(blocks);
+    }
+
+    /** Why no formula is shown for a chain without outputs, and how to ask for one. */
+    public static String askingForOutputs(Chain chain) {
+        return "No formula yet: the model names no outputs and has " + chain.size() + " states. Say which formula is"
+                + " wanted, --of STATE or --of SET; --of all derives every state.";
     }
 }

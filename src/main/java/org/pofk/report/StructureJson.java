@@ -10,24 +10,27 @@ import org.pofk.answer.Question;
 import org.pofk.chain.Structure;
 import org.pofk.chain.Structure.CommunicatingClass;
 
-/** What {@code inspect} found, as JSON: format {@code pofk-structure}. */
+/** What {@code inspect} found, or {@code derive} without knowing which formula is wanted: {@code pofk-structure}. */
 public final class StructureJson {
     private final Json json;
+    private final String command;
     private final InspectedModel inspected;
     private final int digits;
 
-    private StructureJson(Json json, InspectedModel inspected, int digits) {
+    private StructureJson(Json json, String command, InspectedModel inspected, int digits) {
         this.json = json;
+        this.command = command;
         this.inspected = inspected;
         this.digits = digits;
     }
 
-    public static String write(InspectedModel inspected, int digits) {
-        return Json.ofObject(json -> new StructureJson(json, inspected, digits).fields());
+    /** The answer to the command of this name. */
+    public static String write(String command, InspectedModel inspected, int digits) {
+        return Json.ofObject(json -> new StructureJson(json, command, inspected, digits).fields());
     }
 
     private void fields() {
-        JsonHead.write(json, "pofk-structure", "inspect", inspected.model());
+        JsonHead.write(json, "pofk-structure", command, inspected.model());
         Structure structure = inspected.inspection().structure();
         json.list("classes", structure.classes(), this::communicating);
         json.texts("absorbing", names(structure.absorbing()));

@@ -9,6 +9,8 @@ import java.nio.file.Path;
 import java.util.List;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.condition.EnabledOnOs;
+import org.junit.jupiter.api.condition.OS;
 import org.junit.jupiter.api.io.TempDir;
 
 class SaveTest {
@@ -42,6 +44,14 @@ class SaveTest {
         Run run = Run.of("new", "pump-pair", "--save", folder.resolve("none/pumps.yaml").toString());
         assertEquals(5, run.exitCode());
         assertTrue(run.notes().contains("no such folder"), run.notes());
+    }
+
+    @Test
+    @EnabledOnOs(OS.LINUX)
+    void aFolderThatTakesNoFilesIsNotSaidToBeMissing() {
+        Run run = Run.of("new", "pump-pair", "--save", "/proc/pumps.yaml");
+        assertEquals(5, run.exitCode());
+        assertTrue(run.notes().contains("the system takes no new file in the folder '/proc'"), run.notes());
     }
 
     private List<Path> files() throws IOException {

@@ -51,6 +51,14 @@ class SchemaTest {
     }
 
     @Test
+    void aStructureShownInPlaceOfTooManyFormulasKeepsItsSchema() throws Exception {
+        Run run = Run.of("derive", "test-data/tables/conveyor.csv", "--orientation", "rows", "--start", "bay 1",
+                "--as", "json");
+        assertEquals(0, run.exitCode(), run.notes());
+        assertEquals(Set.of(), schema("structure").validate(MAPPER.readTree(run.answer())));
+    }
+
+    @Test
     void simulationsKeepTheirSchema() throws Exception {
         Run run = Run.of("simulate", "test-data/models/pump-pair.yaml", "--as", "json", "--runs", "200");
         assertEquals(0, run.exitCode(), run.notes());
