@@ -44,7 +44,8 @@ final class SaveOptions {
         try {
             writeWhole(file.get(), text);
         } catch (IOException failed) {
-            throw new WritingException("'" + file.get() + "' can't be written: " + reason(failed, folder(file.get())), failed);
+            throw new WritingException("'" + file.get() + "' can't be written: "
+                    + reason(failed, folder(file.get())), failed);
         }
         streams.notes().println("written: " + file.get());
     }

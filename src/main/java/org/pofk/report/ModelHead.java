@@ -44,7 +44,8 @@ final class ModelHead {
                 + (chain.kind() == Chain.Kind.CHAIN ? "" : "a recursion of ")
                 + (chain.size() == 1 ? "1 state" : chain.size() + " states") + ", one step is ")
                 .andName(model.step().is())
-                .and(model.step().lasts().map(lasts -> Prose.of(" (lasts ").andName(lasts).and(")"))
+                .and(model.step().lasts().filter(lasts -> !lasts.equals(model.step().is()))
+                        .map(lasts -> Prose.of(" (lasts ").andName(lasts).and(")"))
                         .orElse(Prose.EMPTY));
         return start(chain).map(state -> facts.and(", starts in ").andName(state)).orElse(facts).and(".");
     }

@@ -33,6 +33,7 @@ class ModelHeadTest {
         String shown = run.answer().substring(0, underline);
         assertEquals(TITLE, shown.replace("\n", " "));
         assertTrue(shown.lines().allMatch(line -> line.length() <= 80), shown);
-        assertTrue(run.answer().replaceAll("\\s+", " ").contains("one step is proof test (lasts 6 months)"), run.answer());
+        String inOneLine = run.answer().replaceAll("\\s+", " ");
+        assertTrue(inOneLine.contains("one step is proof test (lasts 6 months)"), inOneLine);
     }
 }
