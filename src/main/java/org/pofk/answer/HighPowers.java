@@ -15,7 +15,10 @@ import org.pofk.exact.Rational;
 public final class HighPowers {
     /** What common practice takes for "no longer changes": six decimals. */
     public static final Rational HABIT = Rational.of(1, 2_000_000);
-    /** An accepted value may be wrong by this much, and by a tenth of what it should be, before a habit misleads. */
+    /**
+     * An accepted value may be wrong by this much, of the value where that is above one, and by a tenth of what it
+     * should be, before a habit misleads.
+     */
     private static final Rational RIGHT_WITHIN = Rational.of(1, 100_000);
 
     private final PowerSequence sequence;
@@ -27,8 +30,11 @@ public final class HighPowers {
     /** The two ways in which successive powers are compared. */
     public enum Way { STEP_BY_STEP, BY_SQUARING }
 
-    /** What became of the value that a habit accepted. */
-    public enum Outcome { RIGHT, MISLED_BY_CYCLE, MISLED_BY_SLOW_POLE }
+    /**
+     * What became of the value that a habit accepted. By size: the states had settled to within what the habit looks
+     * at, the output is much larger or smaller than that, and twice as many steps would have been enough.
+     */
+    public enum Outcome { RIGHT, MISLED_BY_CYCLE, MISLED_BY_SLOW_POLE, MISLED_BY_SIZE }
 
     /**
      * Where comparing successive powers would have stopped, because no state changed by more than {@link #HABIT}.
@@ -111,13 +117,13 @@ public final class HighPowers {
     }
 
     private Optional<Stop> stopStepByStep(Output output, List<Rational> values) {
-        return firstStop(sequence.steps(), PowerSequence.HIGH).map(place ->
-                stop(Way.STEP_BY_STEP, place, sequence.steps().get(place).reading(output), values));
+        return firstStop(sequence.steps(), PowerSequence.HIGH)
+                .map(place -> stop(Way.STEP_BY_STEP, place, sequence.steps().get(place), output, values));
     }
 
     private Optional<Stop> stopBySquaring(Output output, List<Rational> values) {
-        return firstStop(sequence.doubling(), Integer.numberOfTrailingZeros(PowerSequence.HIGH)).map(place ->
-                stop(Way.BY_SQUARING, 1L << place, sequence.doubling().get(place).reading(output), values));
+        return firstStop(sequence.doubling(), Integer.numberOfTrailingZeros(PowerSequence.HIGH))
+                .map(place -> stop(Way.BY_SQUARING, 1L << place, sequence.doubling().get(place), output, values));
     }
 
     /** The place, from the given one on, of the first state that differs from the one before it by no more than the habit's tolerance. */
@@ -130,18 +136,32 @@ public final class HighPowers {
         return Optional.empty();
     }
 
-    private static Stop stop(Way way, long k, Ball value, List<Rational> values) {
-        boolean right = values.stream().allMatch(each -> isRight(value, each));
-        boolean rightForThisStep = isRight(value, values.get((int) (k % values.size())));
-        Outcome outcome = right ? Outcome.RIGHT
-                : rightForThisStep ? Outcome.MISLED_BY_CYCLE : Outcome.MISLED_BY_SLOW_POLE;
+    private Stop stop(Way way, long k, FixedPointState state, Output output, List<Rational> values) {
+        Ball value = state.reading(output);
+        if (values.stream().allMatch(each -> isRight(value, each))) {
+            return new Stop(way, k, value, Outcome.RIGHT);
+        }
+        Rational expected = values.get((int) (k % values.size()));
+        Outcome outcome = isRight(value, expected) ? Outcome.MISLED_BY_CYCLE
+                : isOnlyBySize(k, farthest(value, expected), output, values) ? Outcome.MISLED_BY_SIZE
+                : Outcome.MISLED_BY_SLOW_POLE;
         return new Stop(way, k, value, outcome);
     }
 
-    /** A small probability has to be right in its own size too, not only in its decimals. */
+    /** Whether the error is the habit's tolerance times a coefficient, and gone at the second power of two from k on. */
+    private boolean isOnlyBySize(long k, Rational distance, Output output, List<Rational> values) {
+        Rational largest = output.coefficients().stream().map(Rational::abs).reduce(Rational.ZERO, Rational::max);
+        int later = Math.min(sequence.doubling().size() - 1, Long.SIZE - Long.numberOfLeadingZeros(k) + 1);
+        Rational expected = values.get((int) ((1L << later) % values.size()));
+        return distance.compareTo(RIGHT_WITHIN.times(largest)) <= 0
+                && isRight(sequence.doubling().get(later).reading(output), expected);
+    }
+
+    /** A small probability has to be right in its own size too, not only in its decimals; so has a large value. */
     private static boolean isRight(Ball value, Rational expected) {
         Rational distance = farthest(value, expected);
-        return distance.compareTo(RIGHT_WITHIN) <= 0
+        Rational allowed = RIGHT_WITHIN.times(Rational.max(Rational.ONE, expected.abs()));
+        return distance.compareTo(allowed) <= 0
                 && (expected.isZero() || distance.times(Rational.of(10)).compareTo(expected.abs()) <= 0);
     }
 

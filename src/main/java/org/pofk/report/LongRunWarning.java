@@ -12,8 +12,13 @@ final class LongRunWarning {
         String habit = stop.way() == HighPowers.Way.STEP_BY_STEP
                 ? "comparing each state with the one before"
                 : "squaring A until it no longer changes";
-        String cause = stop.outcome() == HighPowers.Outcome.MISLED_BY_CYCLE ? "a cycle" : "a slow pole";
+        String cause = switch (stop.outcome()) {
+            case RIGHT -> throw new AssertionError("no warning is due at k = " + stop.k());
+            case MISLED_BY_CYCLE -> "misled by a cycle";
+            case MISLED_BY_SLOW_POLE -> "misled by a slow pole";
+            case MISLED_BY_SIZE -> "too early for an output of this size";
+        };
         return habit + " would have stopped at k = " + stop.k() + " with "
-                + (stop.value().containsZero() ? "0" : Decimals.of(stop.value().middle(), digits).text()) + ", misled by " + cause;
+                + (stop.value().containsZero() ? "0" : Decimals.of(stop.value().middle(), digits).text()) + ", " + cause;
     }
 }

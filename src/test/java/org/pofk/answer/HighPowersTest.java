@@ -55,6 +55,25 @@ class HighPowersTest {
     }
 
     @Test
+    void aLargeValueIsRightWhenItIsRightInItsOwnSize() {
+        // poles 1 and 1/5: the states are within 5e-7 and 5000 times that is more than 1e-5, but not of 36
+        Chain valve = Chains.chain("1 0", "0.9941056 0.7941056", "0.0058944 0.2058944");
+        Verdict verdict = verdict(valve, Chains.reading("0 5000"));
+        assertEquals(List.of(Outcome.RIGHT, Outcome.RIGHT), verdict.habits().stream().map(Stop::outcome).toList());
+        assertTrue(verdict.habits().stream().anyMatch(stop -> stop.value().middle().minus(Rational.of(36_84, 100)).abs()
+                .compareTo(Rational.of(1, 100_000)) > 0), "no stop is off by more than 1e-5: nothing was told apart");
+    }
+
+    @Test
+    void aQuickPoleIsNotBlamedForTheSizeOfAnOutput() {
+        // poles 1 and 1/2, half of the time in each state; the two halves of the output cancel
+        Chain switching = Chains.chain("1 0", "0.75 0.25", "0.25 0.75");
+        Verdict verdict = verdict(switching, Chains.reading("1000000 -1000000"));
+        assertTrue(verdict.habits().stream().anyMatch(stop -> stop.outcome() == Outcome.MISLED_BY_SIZE));
+        assertTrue(verdict.habits().stream().noneMatch(stop -> stop.outcome() == Outcome.MISLED_BY_SLOW_POLE));
+    }
+
+    @Test
     void theStatesFromBelowHoldTheExactPowers() {
         Chain pumps = Chains.pumps();
         Output lost = Chains.state(pumps, 2);
@@ -69,7 +88,10 @@ class HighPowersTest {
     }
 
     private static Verdict verdict(Chain chain, int state) {
-        Output output = Chains.state(chain, state);
+        return verdict(chain, Chains.state(chain, state));
+    }
+
+    private static Verdict verdict(Chain chain, Output output) {
         LongRun longRun = Chains.longRun(chain, output);
         return HighPowers.of(chain, LongRunValues.of(longRun).size()).against(longRun, output).orElseThrow();
     }
