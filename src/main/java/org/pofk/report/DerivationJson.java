@@ -108,7 +108,7 @@ public final class DerivationJson {
         json.object(() -> {
             json.count("k", value.k());
             json.text("exact", value.exact().map(Rational::toString));
-            json.text("decimal", ValueText.decimal(value, numbers.digits()));
+            json.text("decimal", ValueText.number(value, numbers.digits()));
         });
     }
 

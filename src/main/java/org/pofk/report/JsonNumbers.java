@@ -39,7 +39,7 @@ record JsonNumbers(Json json, int digits) {
     }
 
     String decimal(Rational value) {
-        return Decimals.of(value, digits).text();
+        return ValueText.number(value, digits);
     }
 
     /** {@code ["-1/2", "0", "1"]}; zero is {@code ["0"]}. */

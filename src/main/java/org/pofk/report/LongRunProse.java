@@ -46,8 +46,13 @@ record LongRunProse(int digits) implements LongRun.Visitor<String> {
         if (value.isInteger() || decimal.exact() && decimal.text().length() <= value.toString().length()) {
             return decimal.text();
         }
-        String sign = decimal.exact() ? " = " : " ≈ ";
-        return value.toString().length() <= LONGEST_FRACTION ? value + sign + decimal.text() : sign.strip() + " "
-                + decimal.text();
+        String text = ValueText.of(value, digits);
+        int length = value.toString().length();
+        if (length <= LONGEST_FRACTION) {
+            return value + (ValueText.isExact(value, digits) ? " = " : " ≈ ") + text;
+        }
+        return text + " (" + (ValueText.isExact(value, digits) ? "exactly" : "a fraction of "
+                + (value.numerator().abs().toString().length() + value.denominator().toString().length())
+                + " digits") + ")";
     }
 }

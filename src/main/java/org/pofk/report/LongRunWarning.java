@@ -1,7 +1,6 @@
 package org.pofk.report;
 
 import org.pofk.answer.HighPowers;
-import org.pofk.exact.Decimals;
 
 /** Where comparing two successive powers of A would have stopped at a wrong value. */
 final class LongRunWarning {
@@ -19,6 +18,6 @@ final class LongRunWarning {
             case MISLED_BY_SIZE -> "too early for an output of this size";
         };
         return habit + " would have stopped at k = " + stop.k() + " with "
-                + (stop.value().containsZero() ? "0" : Decimals.of(stop.value().middle(), digits).text()) + ", " + cause;
+                + (stop.value().containsZero() ? "0" : ValueText.of(stop.value().middle(), digits)) + ", " + cause;
     }
 }

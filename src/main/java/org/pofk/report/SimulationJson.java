@@ -17,7 +17,7 @@ public final class SimulationJson {
             JsonHead.write(json, "pofk-simulation", "simulate", model);
             json.count("runs", simulation.runs());
             json.text("seed", String.valueOf(simulation.seed()));
-            json.text("confidence", SampledNumber.text(Simulation.CONFIDENCE));
+            json.text("confidence", SampledNumber.number(Simulation.CONFIDENCE));
             json.list("outputs", simulation.series(), series -> series(json, series, digits));
         });
     }
@@ -33,13 +33,13 @@ public final class SimulationJson {
     private static void sample(Json json, Sample sample, int digits) {
         json.object(() -> {
             json.count("k", sample.k());
-            json.text("estimate", SampledNumber.text(sample.estimate()));
-            json.texts("interval", List.of(SampledNumber.text(sample.interval().lower()),
-                    SampledNumber.text(sample.interval().upper())));
+            json.text("estimate", SampledNumber.number(sample.estimate()));
+            json.texts("interval", List.of(SampledNumber.number(sample.interval().lower()),
+                    SampledNumber.number(sample.interval().upper())));
             json.object("value", () -> {
                 json.text("exact", sample.exact().isExact()
                         ? Optional.of(sample.exact().middle().toString()) : Optional.empty());
-                json.text("decimal", SampledNumber.value(sample, digits));
+                json.text("decimal", SampledNumber.valueNumber(sample, digits));
             });
             json.text("inside", switch (sample.verdict()) {
                 case INSIDE -> "yes";

@@ -1,38 +1,100 @@
 package org.pofk.report;
 
-import java.util.Optional;
 import org.pofk.answer.StepValue;
 import org.pofk.exact.Ball;
+import org.pofk.exact.Decimal;
 import org.pofk.exact.Decimals;
+import org.pofk.exact.Enclosed;
 import org.pofk.exact.Rational;
 
-/** A value at a step, in decimals. */
+/**
+ * A value in decimals. Between 0.999 and one, where it isn't its decimal, what it lacks to one has as many digits:
+ * {@code 1 − 3.00000e-7} where people read it, {@code 0.999999700000} where a program does.
+ */
 final class ValueText {
-    /** A certified value smaller than 2^−this is written 0: it may be. */
+    /** A certified value smaller than 2^−this is written 0, and one as near to one 1.00000: it may be. */
     private static final int SMALLEST_BITS = 4096;
-    private static final Rational NEARLY_ONE = Rational.of(1, 1000);
+    private static final int FIRST_BITS = 64;
+    private static final Rational NEARLY_ONE = Rational.of(999, 1000);
 
     private ValueText() {
     }
 
-    static String decimal(StepValue value, int digits) {
+    /** For people. */
+    static String of(Rational value, int digits) {
+        Decimal decimal = Decimals.of(value, digits);
+        return isNearlyOne(value) && !decimal.exact()
+                ? "1 − " + Decimals.of(Rational.ONE.minus(value), digits).text()
+                : decimal.text();
+    }
+
+    /** For people. */
+    static String of(StepValue value, int digits) {
         if (value.exact().isPresent()) {
-            return Decimals.of(value.exact().get(), digits).text();
+            return of(value.exact().get(), digits);
         }
-        return mayBeZero(value) ? "0" : Decimals.of(value.enclosure(), digits).text();
+        if (mayBeZero(value.enclosure())) {
+            return "0";
+        }
+        return isNearlyOne(value.enclosure())
+                ? "1 − " + Decimals.of(lack(value.enclosure()), digits).text()
+                : Decimals.of(value.enclosure(), digits).text();
     }
 
-    /** For the eye: within 1e-3 of one, what a value lacks to one is written to as many digits. */
-    static String forReading(StepValue value, int digits) {
-        Optional<Rational> missing = value.exact().map(Rational.ONE::minus)
-                .filter(rest -> rest.signum() > 0 && rest.compareTo(NEARLY_ONE) <= 0);
-        return missing.map(rest -> "1 − " + Decimals.of(rest, digits).text()).orElseGet(() -> decimal(value, digits));
+    /** Whether people read the value itself, not its decimals. */
+    static boolean isExact(Rational value, int digits) {
+        return Decimals.of(value, digits).exact()
+                || isNearlyOne(value) && Decimals.of(Rational.ONE.minus(value), digits).exact();
     }
 
-    private static boolean mayBeZero(StepValue value) {
-        Ball ball = value.enclosure().enclose(1);
-        for (int bits = 64; ball.containsZero() && bits <= SMALLEST_BITS; bits *= 2) {
-            ball = value.enclosure().enclose(bits);
+    /** For programs: always a number. */
+    static String number(Rational value, int digits) {
+        Decimal decimal = Decimals.of(value, digits);
+        return isNearlyOne(value) && !decimal.exact()
+                ? Decimals.fixed(value, places(Rational.ONE.minus(value), digits)).text()
+                : decimal.text();
+    }
+
+    /** For programs: always a number. */
+    static String number(StepValue value, int digits) {
+        if (value.exact().isPresent()) {
+            return number(value.exact().get(), digits);
+        }
+        if (mayBeZero(value.enclosure())) {
+            return "0";
+        }
+        return isNearlyOne(value.enclosure())
+                ? Decimals.fixed(value.enclosure(),
+                        places(Decimals.of(lack(value.enclosure()), digits).value(), digits)).text()
+                : Decimals.of(value.enclosure(), digits).text();
+    }
+
+    /** After the point, for so many digits of a number below one. */
+    private static int places(Rational small, int digits) {
+        int zeros = 0;
+        for (Rational x = small.times(Rational.of(10)); x.compareTo(Rational.ONE) < 0; x = x.times(Rational.of(10))) {
+            zeros++;
+        }
+        return zeros + digits;
+    }
+
+    private static Enclosed lack(Enclosed value) {
+        return Enclosed.of(Rational.ONE).plus(value.negate());
+    }
+
+    private static boolean isNearlyOne(Rational value) {
+        return value.compareTo(NEARLY_ONE) > 0 && value.compareTo(Rational.ONE) < 0;
+    }
+
+    private static boolean isNearlyOne(Enclosed value) {
+        return value.enclose(FIRST_BITS).lower().compareTo(NEARLY_ONE) > 0 && !mayBeZero(lack(value))
+                && lack(value).enclose(SMALLEST_BITS).lower().signum() > 0;
+    }
+
+    private static boolean mayBeZero(Enclosed value) {
+        Ball ball = value.enclose(1);
+        for (int bits = FIRST_BITS; ball.containsZero() && bits <= SMALLEST_BITS; bits *= 2) {
+            ball = value.enclose(bits);
         }
         return ball.containsZero();
     }

@@ -20,7 +20,7 @@ final class ValuesTable {
 
     private static List<Prose> row(List<DerivedOutput> outputs, int row, int digits) {
         List<Prose> cells = new ArrayList<>(List.of(Prose.of(String.valueOf(outputs.get(0).values().get(row).k()))));
-        outputs.forEach(output -> cells.add(Prose.of(ValueText.forReading(output.values().get(row), digits))));
+        outputs.forEach(output -> cells.add(Prose.of(ValueText.of(output.values().get(row), digits))));
         return cells;
     }
 }
