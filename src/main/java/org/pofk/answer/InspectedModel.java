@@ -45,7 +45,8 @@ public record InspectedModel(Model model, Inspection inspection, List<InspectedO
             for (Transform transform : Transforms.of(chain, outputs)) {
                 LongRunChecks longRun = LongRunChecks.of(ground, transform);
                 inspected.add(new InspectedOutput(transform.output(), longRun,
-                        Settling.of(ClosedForm.of(transform), longRun.byPoles(), SETTLED_DIGITS)));
+                        Settling.of(ClosedForm.of(transform), longRun.byPoles(),
+                                Settling.digitsFor(longRun.byPoles(), SETTLED_DIGITS))));
             }
         }
         Optional<ClosedClassLongRun> classes = chain.kind() == Chain.Kind.CHAIN

@@ -96,9 +96,14 @@ final class ReviewQuestions {
         }
         boolean anySource = model.notes().stream().anyMatch(note -> note.kind().equals("source"))
                 || model.parameters().stream().anyMatch(parameter -> parameter.source().isPresent());
-        if (!anySource) {
-            ask(Question.Kind.WITHOUT_SOURCE, "no number names a source: where do the " + inner()
-                    + " come from?", List.of());
+        long inner = inner();
+        if (!anySource && inner > 0) {
+            boolean isChain = chain.kind() == Chain.Kind.CHAIN;
+            String one = isChain ? "probability" : "coefficient";
+            String many = isChain ? "probabilities" : "coefficients";
+            ask(Question.Kind.WITHOUT_SOURCE, "no number names a source: where "
+                    + (inner == 1 ? "does the " + one + " come from?" : "do the " + inner + " " + many + " come from?"),
+                    List.of());
         }
         model.parameters().stream().filter(parameter -> anySource && parameter.source().isEmpty()
                 && parameter.definition().isEmpty()).forEach(parameter -> ask(Question.Kind.WITHOUT_SOURCE,
@@ -109,10 +114,10 @@ final class ReviewQuestions {
         }
     }
 
-    private String inner() {
-        long between = chain.matrix().columns().stream().flatMap(List::stream).map(SparseMatrix.Entry::value)
+    /** How many numbers of the matrix are none that a structure gives by itself. */
+    private long inner() {
+        return chain.matrix().columns().stream().flatMap(List::stream).map(SparseMatrix.Entry::value)
                 .filter(value -> !value.isOne()).count();
-        return between + (chain.kind() == Chain.Kind.CHAIN ? " probabilities" : " coefficients");
     }
 
     private void ask(Question.Kind kind, String text, List<Integer> states) {

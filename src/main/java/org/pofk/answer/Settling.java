@@ -15,11 +15,12 @@ import org.pofk.modes.ClosedForm;
  *                impulses are over
  * @param tied    how many modes have that modulus or one that agrees with it to {@value #TIED_BITS} bits; a pair counts
  *                once. Equal moduli can't be told apart by looking closer
+ * @param power   the highest power of k that one of these comes with
  * @param digits  of the promise below
  * @param from    |p(k) − long run| ≤ 10^−digits for every k from here on: a bound from the amplitudes, so it may hold
  *                earlier
  */
-public record Settling(Optional<Enclosed> slowest, int tied, int digits, BigInteger from) {
+public record Settling(Optional<Enclosed> slowest, int tied, int power, int digits, BigInteger from) {
     static final int TIED_BITS = 256;
 
     /** Empty when there is neither a limit nor a cycle. */
@@ -32,9 +33,21 @@ public record Settling(Optional<Enclosed> slowest, int tied, int digits, BigInte
         BigInteger from = DecayBound.of(decaying, digits).settledFrom(
                 BigInteger.valueOf(closedForm.withoutImpulsesFrom()));
         Optional<DecayingMode> slowest = decaying.stream().max((a, b) -> a.compareModulus(b, TIED_BITS));
-        int tied = (int) slowest.map(most -> decaying.stream()
-                .filter(each -> each.compareModulus(most, TIED_BITS) == 0).count()).orElse(0L).longValue();
-        return new Settling(slowest.map(DecayingMode::modulus), tied, digits, from);
+        List<DecayingMode> tied = slowest.map(most -> decaying.stream()
+                .filter(each -> each.compareModulus(most, TIED_BITS) == 0).toList()).orElse(List.of());
+        int power = tied.stream().mapToInt(DecayingMode::power).max().orElse(0);
+        return new Settling(slowest.map(DecayingMode::modulus), tied.size(), power, digits, from);
+    }
+
+    /** Enough digits to say something about a small long run: a thousandth of its smallest value other than zero. */
+    static int digitsFor(LongRun longRun, int atLeast) {
+        Optional<Rational> smallest = LongRunValues.of(longRun).stream().filter(value -> !value.isZero())
+                .map(Rational::abs).min(Rational::compareTo);
+        int digits = atLeast;
+        while (smallest.isPresent() && Rational.of(1000).compareTo(smallest.get().times(Rational.of(10).pow(digits))) > 0) {
+            digits++;
+        }
+        return digits;
     }
 
     /** A cycle too long to list is approached like a short one. */

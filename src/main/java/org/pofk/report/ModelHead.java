@@ -3,7 +3,6 @@ package org.pofk.report;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
-import java.util.Optional;
 import java.util.stream.IntStream;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
@@ -16,6 +15,8 @@ import org.pofk.report.Document.Paragraph;
 
 /** Which model a document is about, with what its author says about it. */
 final class ModelHead {
+    private static final int STARTS_SHOWN = 6;
+
     private ModelHead() {
     }
 
@@ -47,13 +48,18 @@ final class ModelHead {
                 .and(model.step().lasts().filter(lasts -> !lasts.equals(model.step().is()))
                         .map(lasts -> Prose.of(" (lasts ").andName(lasts).and(")"))
                         .orElse(Prose.EMPTY));
-        return start(chain).map(state -> facts.and(", starts in ").andName(state)).orElse(facts).and(".");
+        return facts.and(chain.kind() == Chain.Kind.CHAIN ? start(chain) : Prose.EMPTY).and(".");
     }
 
-    /** The state a chain starts in for certain. */
-    private static Optional<String> start(Chain chain) {
-        return chain.kind() == Chain.Kind.RECURSION ? Optional.empty()
-                : IntStream.range(0, chain.size()).filter(i -> chain.start().get(i).equals(Rational.ONE)).boxed()
-                        .map(chain.states()::get).findFirst();
+    /** The state a chain starts in for certain, or those it may start in with their probabilities. */
+    private static Prose start(Chain chain) {
+        List<Integer> all = IntStream.range(0, chain.size()).filter(i -> !chain.start().get(i).isZero()).boxed().toList();
+        List<Prose> shown = all.stream().limit(STARTS_SHOWN).map(i -> {
+            Rational chance = chain.start().get(i);
+            Prose state = Prose.name(chain.states().get(i));
+            return chance.isOne() ? state : state.and(" " + chance);
+        }).toList();
+        String rest = all.size() > STARTS_SHOWN ? " and " + (all.size() - STARTS_SHOWN) + " more" : "";
+        return Prose.of(", starts in ").and(Prose.joined(shown, ", ")).and(rest);
     }
 }

@@ -115,13 +115,18 @@ final class ResultBlocks {
                 .map(form -> ", without the delta terms from k = " + form.withoutImpulsesFrom() + " on").orElse("");
         label("holds", from + ": " + switch (proof.method()) {
             case CHARACTERISTIC -> "the sequence needs a recurrence of order " + order + ", and " + states(proof.order())
-                    + ", so it is their characteristic polynomial (Cayley–Hamilton); " + proof.comparedSteps()
-                    + " exact terms compared";
-            case WINDOWS -> "all " + proof.comparedSteps() + " exact terms compared satisfy a recurrence of order "
+                    + ", so it is their characteristic polynomial (Cayley–Hamilton); " + terms(proof.comparedSteps())
+                    + " compared";
+            case WINDOWS -> (proof.comparedSteps() == 1 ? "the one exact term compared satisfies"
+                    : "all " + terms(proof.comparedSteps()) + " compared satisfy") + " a recurrence of order "
                     + order + ", and " + states(proof.order()) + " (Cayley–Hamilton)";
             case VECTOR -> "a recurrence of order " + order + " annihilates the start itself, D(A) x(0) = 0, and so"
                     + " every output";
         });
+    }
+
+    private static String terms(int count) {
+        return count == 1 ? "1 exact term" : count + " exact terms";
     }
 
     private static String states(int count) {
@@ -154,6 +159,8 @@ final class ResultBlocks {
         long checked = series.checked();
         return "; random runs: " + (checked == 0
                 ? "too few hits are expected, can't tell here"
+                : checked == 1
+                ? "the one step checked is " + (series.inside() == 1 ? "inside" : "OUTSIDE") + " its 99.9 % interval"
                 : series.inside() + " of " + checked + " steps inside their 99.9 % intervals");
     }
 

@@ -1,5 +1,6 @@
 package org.pofk.report;
 
+import org.pofk.answer.LongRun;
 import org.pofk.answer.Settling;
 import org.pofk.exact.Ball;
 import org.pofk.exact.Decimals;
@@ -13,10 +14,19 @@ final class SettlingProse {
     private SettlingProse() {
     }
 
-    static String of(Settling settling, int digits) {
-        return "stays within 1e-" + settling.digits() + " of it from k = " + settling.from() + " on"
-                + settling.slowest().map(modulus -> "; slowest part decays like " + base(modulus, digits) + "^k"
+    static String of(Settling settling, LongRun longRun, int digits) {
+        String within = "within 1e-" + settling.digits();
+        String from = " from k = " + settling.from() + " on";
+        return (longRun instanceof LongRun.Limit
+                ? "stays " + within + " of it" + from
+                : "the cycle is reached to " + within + from)
+                + settling.slowest().map(modulus -> "; slowest part decays like "
+                        + power(settling.power()) + base(modulus, digits) + "^k"
                         + (settling.tied() > 1 ? ", shared by " + settling.tied() + " modes" : "")).orElse("");
+    }
+
+    private static String power(int power) {
+        return power == 0 ? "" : power == 1 ? "k·" : "k^" + power + "·";
     }
 
     /** A base just below one is told apart from it by what it lacks. */

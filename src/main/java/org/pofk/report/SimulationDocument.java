@@ -50,8 +50,13 @@ public final class SimulationDocument {
             case HOEFFDING -> "Intervals by Hoeffding. ";
         };
         long unclear = series.samples().size() - series.checked();
-        return method + series.inside() + " of " + series.checked() + " steps hold the exact value"
-                + (unclear == 0 ? "." : "; at " + unclear + " fewer than " + Simulation.HITS_NEEDED
-                        + " hits are expected, which is no check.");
+        String few = "fewer than " + Simulation.HITS_NEEDED + " hits are expected, which is no check.";
+        if (series.checked() == 0) {
+            return method + "At no step is the exact value checked: " + few;
+        }
+        String held = series.checked() == 1
+                ? (series.inside() == 1 ? "The one step checked holds" : "The one step checked does NOT hold")
+                : series.inside() + " of " + series.checked() + " steps hold";
+        return method + held + " the exact value" + (unclear == 0 ? "." : "; at " + unclear + " " + few);
     }
 }

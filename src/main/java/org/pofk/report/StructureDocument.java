@@ -105,7 +105,7 @@ public final class StructureDocument {
         blocks.add(new Heading(3, OutputProse.title(output.output())));
         blocks.add(new Labelled("long run", prose.of(checks.byPoles())));
         output.settling().ifPresent(settling -> blocks.add(new Labelled("settles",
-                SettlingProse.of(settling, style.digits()))));
+                SettlingProse.of(settling, checks.byPoles(), style.digits()))));
         blocks.add(new Labelled("found by", ways(checks)));
         checks.highPowers().stream().flatMap(verdict -> verdict.habits().stream())
                 .filter(stop -> stop.outcome() != HighPowers.Outcome.RIGHT)

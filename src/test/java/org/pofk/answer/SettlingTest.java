@@ -76,7 +76,22 @@ class SettlingTest {
     @Test
     void withoutDecayingModesTheLongRunIsThereAfterTheImpulses() {
         Chain turns = Chains.chain("1 0 0", "0 0 0", "1 0 1", "0 1 0");
-        assertEquals(new Settling(Optional.empty(), 0, 6, BigInteger.ONE), settling(turns, 0, 6));
+        assertEquals(new Settling(Optional.empty(), 0, 0, 6, BigInteger.ONE), settling(turns, 0, 6));
+    }
+
+    @Test
+    void aRepeatedSlowestPoleDecaysWithAPowerOfK() {
+        Chain stages = Chains.chain("1 0 0", "1/2 0 0", "1/2 1/2 0", "0 1/2 1");
+        assertEquals(0, settling(stages, 0, 6).power());
+        assertEquals(1, settling(stages, 1, 6).power());
+    }
+
+    @Test
+    void aSmallLongRunIsReachedToWithinAThousandthOfIt() {
+        assertEquals(6, Settling.digitsFor(new LongRun.Limit(Rational.ZERO), 6));
+        assertEquals(6, Settling.digitsFor(new LongRun.Limit(Rational.of(1, 1000)), 6));
+        assertEquals(10, Settling.digitsFor(new LongRun.Limit(Rational.of(3, 10_000_000)), 6));
+        assertEquals(8, Settling.digitsFor(new LongRun.Cycle(List.of(Rational.ONE, Rational.of(1, 100_000))), 6));
     }
 
     @Test
