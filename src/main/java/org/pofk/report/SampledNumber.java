@@ -12,17 +12,12 @@ final class SampledNumber {
     }
 
     static String text(double sampled) {
-        return ValueText.of(shortest(sampled), DIGITS);
+        return ValueText.of(Rational.of(new BigDecimal(sampled)), DIGITS);
     }
 
     /** For programs. */
     static String number(double sampled) {
-        return ValueText.number(shortest(sampled), DIGITS);
-    }
-
-    /** The shortest decimal that is this double: 0.9997 is not to be told from what it is short for. */
-    private static Rational shortest(double sampled) {
-        return Rational.of(BigDecimal.valueOf(sampled));
+        return ValueText.number(Rational.of(new BigDecimal(sampled)), DIGITS);
     }
 
     /** Certified decimals of the true value. */
