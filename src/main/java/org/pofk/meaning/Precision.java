@@ -1,0 +1,8 @@
+package org.pofk.meaning;
+
+import java.util.Optional;
+
+/** How precise the decimals of a text are: as their last place says, or finer where zeros were left off. */
+public record Precision(Optional<Carried> carried) {
+    public static final Precision AS_WRITTEN = new Precision(Optional.empty());
+}
