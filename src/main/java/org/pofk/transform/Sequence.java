@@ -31,13 +31,22 @@ public final class Sequence {
 
     /** The values of a transform of the chain. */
     public static Sequence of(Chain chain, Transform transform) {
-        Polynomial<Rational> recurrence = transform.recurrence();
+        return of(transform.recurrence(), transform.y(), CommonDenominator.of(chain.matrix().columns().stream()
+                .flatMap(List::stream).map(Entry::value).distinct().toList()));
+    }
+
+    /** The values of a sequence known by its transform alone. */
+    public static Sequence of(Transform transform) {
+        return of(transform.recurrence(), transform.y(),
+                CommonDenominator.of(transform.recurrence().coefficients()));
+    }
+
+    /** @param unit makes the coefficient of t^i in Q whole when multiplied by its i-th power */
+    private static Sequence of(Polynomial<Rational> recurrence, TransferFunction<Rational> y, BigInteger unit) {
         // Y = z P/D was only ever cancelled by a power of z; P/D needs it back.
-        int cancelled = recurrence.degree() - transform.y().denominator().degree();
-        Polynomial<Rational> p = transform.y().numerator().shiftedUp(cancelled).shiftedDown(
-                transform.y().numerator().isZero() ? 0 : 1);
-        BigInteger unit = CommonDenominator.of(chain.matrix().columns().stream().flatMap(List::stream)
-                .map(Entry::value).distinct().toList());
+        int cancelled = recurrence.degree() - y.denominator().degree();
+        Polynomial<Rational> p = y.numerator().shiftedUp(cancelled)
+                .shiftedDown(y.numerator().isZero() ? 0 : 1);
         int degree = recurrence.degree();
         List<Rational> turned = IntStream.rangeClosed(0, degree).mapToObj(i ->
                 recurrence.coefficient(degree - i).times(Rational.of(unit.pow(i)))).toList();
