@@ -1,6 +1,7 @@
 package org.pofk.formula;
 
 import java.util.List;
+import java.util.OptionalLong;
 import org.pofk.exact.Rational;
 
 /**
@@ -35,6 +36,8 @@ public sealed interface Formula {
         R call(Call call);
 
         R rootSum(RootSum rootSum);
+
+        R cases(Cases cases);
     }
 
     /** An exact rational number, any sign. */
@@ -147,6 +150,45 @@ public sealed interface Formula {
         @Override
         public <R> R accept(Visitor<R> visitor) {
             return visitor.rootSum(this);
+        }
+    }
+
+    /**
+     * A formula that reads differently at different steps k: {@code a} at k = 0, {@code b} from k = 1 on. Canonical
+     * form: at least one branch, in the order of steps, none overlapping, only the last without an end. At steps that
+     * no branch is for nothing is said.
+     */
+    record Cases(List<Branch> branches) implements Formula {
+
+        /** The formula for the steps {@code from} … {@code to}, both included, or from a step on. */
+        public record Branch(long from, OptionalLong to, Formula formula) {
+            public Branch {
+                if (from < 0 || to.isPresent() && to.getAsLong() < from) {
+                    throw new AssertionError("a branch for no step: " + from + " to " + to);
+                }
+            }
+
+            public boolean holdsAt(long k) {
+                return k >= from && (to.isEmpty() || k <= to.getAsLong());
+            }
+        }
+
+        public Cases {
+            branches = List.copyOf(branches);
+            if (branches.isEmpty()) {
+                throw new AssertionError("cases without a branch");
+            }
+            for (int i = 1; i < branches.size(); i++) {
+                OptionalLong end = branches.get(i - 1).to();
+                if (end.isEmpty() || end.getAsLong() >= branches.get(i).from()) {
+                    throw new AssertionError("branches not in the order of steps: " + branches);
+                }
+            }
+        }
+
+        @Override
+        public <R> R accept(Visitor<R> visitor) {
+            return visitor.cases(this);
         }
     }
 }

@@ -181,6 +181,7 @@ public final class FormulaParser {
             case NAME -> nameOrCall(token);
             case OPEN -> parenthesis(token);
             case ROOT -> root(token);
+            case BRACE_OPEN -> cases(token);
             default -> throw missingOperand(token);
         };
     }
@@ -215,7 +216,7 @@ public final class FormulaParser {
             cursor.take();
             arguments.add(sum());
         }
-        requireClose(open);
+        requireClose(open, Kind.CLOSE);
         nodes.leave();
         ending = Ending.CLOSED;
         if (arguments.size() != function.arity()) {
@@ -228,10 +229,24 @@ public final class FormulaParser {
     private ParsedFormula parenthesis(Token open) throws RefusedException {
         nodes.enter();
         ParsedFormula inner = sum();
-        requireClose(open);
+        requireClose(open, Kind.CLOSE);
         nodes.leave();
         ending = Ending.CLOSED;
         return nodes.enclosed(inner, cursor.spanFrom(open));
+    }
+
+    private ParsedFormula cases(Token open) throws RefusedException {
+        nodes.enter();
+        BranchList branches = new BranchList(cursor);
+        branches.add(sum());
+        while (cursor.sees(Kind.SEMICOLON)) {
+            cursor.take();
+            branches.add(sum());
+        }
+        requireClose(open, Kind.BRACE_CLOSE);
+        nodes.leave();
+        ending = Ending.CLOSED;
+        return branches.whole(nodes, open);
     }
 
     private ParsedFormula root(Token sign) throws RefusedException {
@@ -263,22 +278,29 @@ public final class FormulaParser {
                 "a number, a name or a parenthesis is missing before '" + found.text() + "'");
     }
 
-    private void requireClose(Token open) throws RefusedException {
+    private void requireClose(Token open, Kind close) throws RefusedException {
         if (cursor.sees(Kind.END)) {
-            throw cursor.refused(open, "parenthesis-open", "the parenthesis that opens here isn't closed");
+            throw cursor.refused(open, "parenthesis-open", "the "
+                    + (close == Kind.CLOSE ? "parenthesis" : "brace") + " that opens here isn't closed");
         }
-        if (!cursor.sees(Kind.CLOSE)) {
+        if (!cursor.sees(close)) {
             throw unexpected();
         }
         cursor.take();
     }
 
-    /** Behind a whole sum stands a comma or a parenthesis too many. */
+    /** Behind a whole sum stands a comma, a parenthesis too many or a sign of another place. */
     private RefusedException unexpected() {
         Token token = cursor.peek();
-        if (!token.is(Kind.COMMA)) {
-            return cursor.refused(token, "parenthesis-extra", "nothing is open that '" + token.text() + "' closes");
-        }
+        return switch (token.kind()) {
+            case CLOSE, BRACE_CLOSE -> cursor.refused(token, "parenthesis-extra",
+                    "nothing is open that '" + token.text() + "' closes");
+            case COMMA -> unexpectedComma(token);
+            default -> cursor.refused(token, "character", "'" + token.text() + "' has no meaning in a formula");
+        };
+    }
+
+    private RefusedException unexpectedComma(Token token) {
         Token before = cursor.before();
         Token behind = cursor.peekBehind();
         boolean isDecimal = before.is(Kind.NUMBER) && behind.is(Kind.NUMBER)

@@ -1,8 +1,10 @@
 package org.pofk.formula;
 
 import java.util.List;
+import java.util.stream.Collectors;
 import org.pofk.exact.Rational;
 import org.pofk.formula.Formula.Call;
+import org.pofk.formula.Formula.Cases;
 import org.pofk.formula.Formula.Constant;
 import org.pofk.formula.Formula.Negation;
 import org.pofk.formula.Formula.Number;
@@ -163,6 +165,20 @@ public final class Latex {
         public Piece rootSum(RootSum sum) {
             return new Piece("\\sum_{" + write(sum.variable()).text + ":\\, " + write(sum.polynomial()).text + " = 0} "
                     + write(sum.body()).at(Binding.PRODUCT), Binding.ROOT_SUM);
+        }
+
+        @Override
+        public Piece cases(Cases cases) {
+            return new Piece(cases.branches().stream().map(this::branch)
+                    .collect(Collectors.joining(" \\\\ ", "\\begin{cases} ", " \\end{cases}")), Binding.CALL);
+        }
+
+        private String branch(Cases.Branch branch) {
+            long from = branch.from();
+            String steps = branch.to().isEmpty() ? "k \\ge " + from
+                    : branch.to().getAsLong() == from ? "k = " + from
+                    : from + " \\le k \\le " + branch.to().getAsLong();
+            return write(branch.formula()).text + " & " + steps;
         }
     }
 }

@@ -18,6 +18,8 @@ final class Lexer {
     private final Set<String> names;
     private final List<Token> tokens = new ArrayList<>();
     private int at;
+    /** How many braces of formulas in cases are open. */
+    private int braces;
 
     private Lexer(String text, Places places, Set<String> names) {
         this.text = text;
@@ -44,11 +46,14 @@ final class Lexer {
             numberOrName(start);
         } else if (Words.beginsName(c)) {
             skipName();
-            add(Kind.NAME, Words.normalized(text.substring(start, at)), start);
+            String word = Words.normalized(text.substring(start, at));
+            add(braces > 0 && Words.OF_CASES.contains(word) ? Kind.FOR : Kind.NAME, word, start);
         } else if (c == '\'') {
             quoted(start);
         } else if (c == '⁻' || SUPERSCRIPTS.indexOf(c) >= 0) {
             superscript(start);
+        } else if ("=<>≤≥≠!".indexOf(c) >= 0) {
+            relation(c, start);
         } else {
             at += Character.charCount(c);
             add(sign(c, start), text.substring(start, at), start);
@@ -71,12 +76,37 @@ final class Lexer {
             case '(' -> Kind.OPEN;
             case ')' -> Kind.CLOSE;
             case ',' -> Kind.COMMA;
+            case ';' -> Kind.SEMICOLON;
+            case '{' -> {
+                braces++;
+                yield Kind.BRACE_OPEN;
+            }
+            case '}' -> {
+                braces--;
+                yield Kind.BRACE_CLOSE;
+            }
             case '√' -> Kind.ROOT;
             case '°' -> Kind.DEGREE;
             case '%' -> throw refused(start, "percent-sign",
                     "a percent sign belongs right behind a number, as in 30%");
             default -> throw refused(start, "character", describe(c) + " has no meaning in a formula" + hint(c));
         };
+    }
+
+    /** One of {@code = < <= > >= !=}, or the single character for it. */
+    private void relation(int c, int start) throws RefusedException {
+        at++;
+        boolean hasEqual = "<>!".indexOf(c) >= 0 && at < text.length() && text.charAt(at) == '=';
+        at += hasEqual ? 1 : 0;
+        if (c == '!' && !hasEqual) {
+            throw refused(start, "character", "'!' has no meaning in a formula");
+        }
+        add(Kind.RELATION, switch (c) {
+            case '≤' -> "<=";
+            case '≥' -> ">=";
+            case '≠' -> "!=";
+            default -> text.substring(start, at);
+        }, start);
     }
 
     private static String describe(int c) {
@@ -90,7 +120,7 @@ final class Lexer {
 
     private static String hint(int c) {
         return switch (c) {
-            case '[', ']', '{', '}' -> ": parentheses are ( and )";
+            case '[', ']' -> ": parentheses are ( and )";
             case '"', '‘', '’', '“', '”', '`' -> ": names are quoted with '";
             case '\\' -> ": this is ordinary notation, not LaTeX";
             default -> "";

@@ -50,7 +50,7 @@ final class LineBreaking {
             char before = text.charAt(i - 1);
             quoted ^= before == '\'';
             if (!quoted) {
-                parentheses += before == '(' || before == '[' ? 1 : before == ')' || before == ']' ? -1 : 0;
+                parentheses += "([{".indexOf(before) >= 0 ? 1 : ")]}".indexOf(before) >= 0 ? -1 : 0;
                 if ("+-−".indexOf(c) >= 0 && before == ' ') {
                     breaks.add(new Break(i, 2 * parentheses));
                 } else if ("·*".indexOf(c) >= 0 || c == '/' && before == ')'

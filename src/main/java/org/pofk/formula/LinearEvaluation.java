@@ -10,6 +10,7 @@ import java.util.Optional;
 import java.util.stream.Stream;
 import org.pofk.exact.Rational;
 import org.pofk.formula.Formula.Call;
+import org.pofk.formula.Formula.Cases;
 import org.pofk.formula.Formula.Constant;
 import org.pofk.formula.Formula.Negation;
 import org.pofk.formula.Formula.Number;
@@ -226,6 +227,11 @@ final class LinearEvaluation {
         @Override
         public Optional<LinearForm> rootSum(RootSum sum) {
             return noExactValue();
+        }
+
+        @Override
+        public Optional<LinearForm> cases(Cases cases) {
+            return fault(node, "not-linear", "a formula that differs from step to step has no single value");
         }
     }
 }

@@ -4,6 +4,7 @@ import java.util.List;
 import java.util.stream.Collectors;
 import org.pofk.exact.Rational;
 import org.pofk.formula.Formula.Call;
+import org.pofk.formula.Formula.Cases;
 import org.pofk.formula.Formula.Constant;
 import org.pofk.formula.Formula.Function;
 import org.pofk.formula.Formula.Negation;
@@ -190,6 +191,20 @@ public final class PlainText {
             String roots = alphabet.write(sum.variable().name()) + ": " + write(sum.polynomial()).text + " = 0";
             return new Piece(sign("Σ", "sum") + "[" + roots + "] " + write(sum.body()).at(Binding.QUOTIENT),
                     Binding.ROOT_SUM);
+        }
+
+        @Override
+        public Piece cases(Cases cases) {
+            return new Piece(cases.branches().stream().map(this::branch).collect(Collectors.joining("; ", "{", "}")),
+                    Binding.ATOM);
+        }
+
+        private String branch(Cases.Branch branch) {
+            long from = branch.from();
+            String steps = branch.to().isEmpty() ? "k " + sign("≥", ">=") + " " + from
+                    : branch.to().getAsLong() == from ? "k = " + from
+                    : from + sign(" ≤ k ≤ ", " <= k <= ") + branch.to().getAsLong();
+            return write(branch.formula()).text + " for " + steps;
         }
     }
 }

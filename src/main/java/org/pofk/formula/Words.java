@@ -4,6 +4,7 @@ import java.text.Normalizer;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
 import org.pofk.formula.Formula.Constant;
 import org.pofk.formula.Formula.Function;
 
@@ -17,6 +18,8 @@ final class Words {
             "delta", Function.DELTA);
     static final List<String> FUNCTION_NAMES =
             List.of("sqrt", "cos", "sin", "exp", "arctan", "arccos", "binomial", "delta", "atan", "acos");
+    /** The words between a branch of a formula in cases and its steps. */
+    static final Set<String> OF_CASES = Set.of("for", "otherwise");
 
     private Words() {
     }
@@ -60,7 +63,7 @@ final class Words {
         return !name.isEmpty() && beginsName(name.codePointAt(0))
                 && name.codePoints().allMatch(Words::continuesName)
                 && name.equals(normalized(name))
-                && !CONSTANTS.containsKey(name) && !FUNCTIONS.containsKey(name);
+                && !CONSTANTS.containsKey(name) && !FUNCTIONS.containsKey(name) && !OF_CASES.contains(name);
     }
 
     /** The text at most 24 characters long, its end replaced by an ellipsis otherwise. */

@@ -8,6 +8,7 @@ import java.util.List;
 import java.util.Objects;
 import java.util.Random;
 import java.util.Set;
+import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
@@ -137,12 +138,43 @@ class FormulaParserTest {
         "1.2.3; number-unreadable; 1", "1e5.2; number-unreadable; 1", "1e401; exponent-out-of-range; 2",
         "1e-1000000; exponent-out-of-range; 2", "1e99999999999999999999; exponent-out-of-range; 2",
         "50%%; percent-sign; 4", "x%; percent-sign; 2", "1e-3%; percent-sign; 5", "(1/3)%; percent-sign; 6",
+        "{1 for k = 0; parenthesis-open; 1", "{1}; cases-condition; 3", "{1 for}; cases-condition; 7",
+        "{1 for z = 0}; cases-condition; 8", "{1 for k}; cases-condition; 9", "{1 for k = z}; cases-condition; 12",
+        "{1 for k = 0.5}; cases-condition; 12", "{1 for k < 0}; cases-no-step; 8",
+        "{1 for 3 < k < 3}; cases-no-step; 8", "{1 for k != 2}; cases-no-step; 8",
+        "{1 for k = 1234567890}; cases-step-too-large; 12", "1}; parenthesis-extra; 2", "1 for k = 0; operator-missing; 7",
+        "1 <= 2; character; 3", "{1 for k = 0, 1}; comma; 13", "3!; character; 2",
         "1 + 'a; quote-open; 5", "''; name-empty; 1", "'  '; name-empty; 1", "2⁻; character; 2", "\\frac; character; 1"
     })
     void whatCannotBeReadIsRefusedInItsPlace(String text, String code, int column) {
         Fault fault = refused(Objects.requireNonNullElse(text, ""));
         assertEquals(code, fault.code(), fault::message);
         assertEquals(new Position("claims.yaml", 4, 20 + column), fault.position(), fault::message);
+    }
+
+    @Test
+    void casesAreReadInAnyOrderAndWithARest() throws RefusedException {
+        String canonical = "{1 for k = 0; 2 for 1 <= k <= 3; 3 for k >= 4}";
+        for (String text : List.of(canonical, "{3 for k>3; 2 for 0 < k < 4; 1 for k = 0}",
+                "{1 for 0 = k; 2 for 4 > k >= 1; 3 otherwise}", "{2 for 1≤k≤3; 3 for 4 ≤ k; 1 for k ≤ 0}",
+                "{1 for k < 1; 3 for k >= 4; 2 for otherwise}")) {
+            assertEquals(parsed(canonical), parsed(text), text);
+        }
+        assertEquals(parsed("{2 for k = 0; 1 for k = 1; 2 for k >= 2}"), parsed("{1 for k = 1; 2 otherwise}"));
+        assertEquals(parsed("2*{1 for k >= 1}^2"), parsed("2{1 for k != 0}^2"));
+        assertEquals(List.of("cases-overlap 4:37", "cases-order 4:50", "cases-no-step 4:51"), Stream.of(
+                "{1 for k = 0; 2 for k <= 3}", "{1 for k = 0; 2 otherwise; 2 for k = 3}",
+                "{1 for k = 0; 2 for k >= 1; 3 otherwise}").map(FormulaParserTest::refused).map(fault -> fault.code() + " "
+                        + fault.position().line() + ":" + fault.position().column()).toList());
+    }
+
+    @Test
+    void partsOfCasesAreTheFormulasOfTheBranches() throws RefusedException {
+        ParsedFormula cases = FormulaParser.parse("{k for k >= 1; 2 for k = 0}", START);
+        assertEquals(List.of(new Number(Rational.TWO), new Symbol("k")),
+                cases.parts().stream().map(ParsedFormula::formula).toList());
+        assertEquals(new Position("claims.yaml", 4, 36), cases.parts().get(0).position());
+        assertEquals(new Span(START, new Position("claims.yaml", 4, 48)), cases.span());
     }
 
     @Test

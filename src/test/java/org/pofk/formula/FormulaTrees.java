@@ -1,13 +1,16 @@
 package org.pofk.formula;
 
 import java.math.BigInteger;
+import java.util.ArrayList;
 import java.util.List;
+import java.util.OptionalLong;
 import net.jqwik.api.Arbitraries;
 import net.jqwik.api.Arbitrary;
 import net.jqwik.api.Combinators;
 import net.jqwik.api.Tuple;
 import org.pofk.exact.Rational;
 import org.pofk.formula.Formula.Call;
+import org.pofk.formula.Formula.Cases;
 import org.pofk.formula.Formula.Constant;
 import org.pofk.formula.Formula.Function;
 import org.pofk.formula.Formula.Negation;
@@ -45,12 +48,37 @@ final class FormulaTrees {
                 Tuple.of(3, several.map(Product::new)),
                 Tuple.of(2, Combinators.combine(part, part).as(Quotient::new)),
                 Tuple.of(2, Combinators.combine(part, part).as(Power::new)),
-                Tuple.of(1, calls(part)));
+                Tuple.of(1, calls(part)),
+                Tuple.of(1, cases(part)));
     }
 
     private static Arbitrary<Formula> calls(Arbitrary<Formula> part) {
         return Arbitraries.of(Function.values()).flatMap(function -> part.list().ofSize(function.arity())
                 .map(arguments -> new Call(function, arguments)));
+    }
+
+    /** One to four branches with gaps of up to two steps, the last with or without an end. */
+    private static Arbitrary<Formula> cases(Arbitrary<Formula> part) {
+        Arbitrary<Integer> few = Arbitraries.integers().between(0, 2);
+        return Combinators.combine(part, few, few).as(FormulaTrees::branch).list().ofMinSize(1).ofMaxSize(4)
+                .flatMap(branches -> Arbitraries.of(true, false).map(ends -> cases(branches, ends)));
+    }
+
+    /** A formula for some steps, counted from the end of the branch before. */
+    private static Cases.Branch branch(Formula formula, int gap, int more) {
+        return new Cases.Branch(gap, OptionalLong.of(gap + more), formula);
+    }
+
+    private static Formula cases(List<Cases.Branch> relative, boolean ends) {
+        List<Cases.Branch> branches = new ArrayList<>();
+        long free = 0;
+        for (Cases.Branch each : relative) {
+            OptionalLong to = branches.size() + 1 < relative.size() || ends
+                    ? OptionalLong.of(free + each.to().getAsLong()) : OptionalLong.empty();
+            branches.add(new Cases.Branch(free + each.from(), to, each.formula()));
+            free += each.to().getAsLong() + 1;
+        }
+        return new Cases(branches);
     }
 
     static Arbitrary<Formula> numbers() {
@@ -64,7 +92,7 @@ final class FormulaTrees {
 
     private static Arbitrary<Formula> symbols() {
         return Arbitraries.of("k", "z", "e", "e3", "E", "both", "x_1", "both down", "5", "2k", "it's", "π", "i", "deg",
-                "cos", "θ", "Überlauf", "泵一", "a+b", "1/2", "''", "\"", "_").map(Symbol::new);
+                "cos", "for", "otherwise", "θ", "Überlauf", "泵一", "a+b", "1/2", "''", "\"", "_").map(Symbol::new);
     }
 
     /** Negative numbers as negations, fractions as quotients: the tree that the printed text is read as. */
@@ -137,6 +165,12 @@ final class FormulaTrees {
         @Override
         public Formula rootSum(RootSum sum) {
             return new RootSum(sum.variable(), asRead(sum.polynomial()), asRead(sum.body()));
+        }
+
+        @Override
+        public Formula cases(Cases cases) {
+            return new Cases(cases.branches().stream()
+                    .map(branch -> new Cases.Branch(branch.from(), branch.to(), asRead(branch.formula()))).toList());
         }
     }
 }

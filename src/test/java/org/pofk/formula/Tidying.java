@@ -4,6 +4,7 @@ import java.util.List;
 import java.util.Optional;
 import org.pofk.exact.Rational;
 import org.pofk.formula.Formula.Call;
+import org.pofk.formula.Formula.Cases;
 import org.pofk.formula.Formula.Constant;
 import org.pofk.formula.Formula.Negation;
 import org.pofk.formula.Formula.Number;
@@ -88,5 +89,11 @@ final class Tidying implements Formula.Visitor<Formula> {
     @Override
     public Formula rootSum(RootSum sum) {
         return new RootSum(sum.variable(), tidy(sum.polynomial()), tidy(sum.body()));
+    }
+
+    @Override
+    public Formula cases(Cases cases) {
+        return new Cases(cases.branches().stream()
+                .map(branch -> new Cases.Branch(branch.from(), branch.to(), tidy(branch.formula()))).toList());
     }
 }

@@ -101,4 +101,10 @@ final class FormulaValue implements Formula.Visitor<Ball> {
     public Ball rootSum(Formula.RootSum rootSum) {
         throw new AssertionError("not to be worked out by hand: " + rootSum);
     }
+
+    @Override
+    public Ball cases(Formula.Cases cases) {
+        return cases.branches().stream().filter(branch -> branch.holdsAt(k)).findFirst().orElseThrow()
+                .formula().accept(this);
+    }
 }

@@ -113,5 +113,10 @@ record FractionInZ(Polynomial<Rational> numerator, Polynomial<Rational> denomina
         public FractionInZ rootSum(Formula.RootSum rootSum) {
             throw new AssertionError("no published expression sums over roots");
         }
+
+        @Override
+        public FractionInZ cases(Formula.Cases cases) {
+            throw new AssertionError("no published expression differs from step to step");
+        }
     }
 }
