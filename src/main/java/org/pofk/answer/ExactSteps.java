@@ -18,6 +18,9 @@ import org.pofk.exact.Rational;
  * @param values one list for each output, in their order; each by ascending step
  */
 record ExactSteps(List<List<Rational>> values) {
+    /** Steps that are never too many. */
+    static final int FEW = 1_000;
+
     ExactSteps {
         values = values.stream().map(List::copyOf).toList();
     }
