@@ -9,6 +9,7 @@ import org.pofk.text.Position;
 
 /** A mapping whose keys are words of the file format. Keys that begin with {@code x-} are ignored. */
 final class Fields {
+    private static final int MOST_LISTED = 16;
     private static final List<String> REMARKS = List.of("note", "source");
 
     private final Map<String, Node.Entry> entries;
@@ -50,7 +51,7 @@ final class Fields {
 
     private static String suggestion(List<String> known, String name, Reading reading) {
         String meant = reading.didYouMean(known, name);
-        return meant.isEmpty() ? "; known are " + String.join(", ", known) : meant;
+        return meant.isEmpty() && known.size() <= MOST_LISTED ? "; known are " + String.join(", ", known) : meant;
     }
 
     Optional<Node> value(String key) {

@@ -37,11 +37,11 @@ sealed interface Node {
     /**
      * A single value; empty and plain where nothing is written.
      *
-     * @param verbatim the text stands in the source as it is: on one line, without escapes
+     * @param written how it stands in the source, quotes and line breaks included, where that isn't just the text
      */
-    record Scalar(Position position, String text, Style style, boolean verbatim) implements Node {
+    record Scalar(Position position, String text, Style style, Optional<String> written) implements Node {
         Scalar(Position position, String text, Style style) {
-            this(position, text, style, true);
+            this(position, text, style, Optional.empty());
         }
 
         /** Nothing is written here. */
@@ -53,10 +53,18 @@ sealed interface Node {
             return style == Style.PLAIN;
         }
 
-        /** Where each character of the text stands; all at the beginning when the text is not verbatim. */
+        /** Inside double quotes, with a backslash: what it begins is no longer what stands in the file. */
+        boolean isEscaped() {
+            return written.filter(source -> source.startsWith("\"") && source.contains("\\")).isPresent();
+        }
+
+        /** Where each character of the text stands; all at the beginning when it is escaped. */
         Places places() {
-            if (!verbatim) {
+            if (isEscaped()) {
                 return offset -> position;
+            }
+            if (written.isPresent()) {
+                return ScalarPlaces.of(position, written.get(), text);
             }
             return Places.from(position.isWhole() || isPlain() ? position
                     : new Position(position.source(), position.line(), position.column() + 1), text);

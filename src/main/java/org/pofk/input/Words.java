@@ -27,6 +27,11 @@ final class Words {
         return list(words, "or");
     }
 
+    /** {@code a, b and c}. */
+    static String list(List<String> words) {
+        return list(words, "and");
+    }
+
     private static String list(List<String> words, String last) {
         int n = words.size();
         return n == 1 ? words.get(0)

@@ -87,9 +87,17 @@ final class YamlComposer {
         }
         refuseDecoration(event, event.getTag());
         add(new Node.Scalar(place, event.getValue(), event.isPlain() ? Node.Style.PLAIN : Node.Style.QUOTED,
-                isVerbatim(event)));
+                isVerbatim(event) ? Optional.empty() : Optional.of(written(event))));
     }
 
+    /** How the value stands in the source. */
+    private static String written(ScalarEvent event) {
+        Mark start = event.getStartMark().orElseThrow();
+        int length = event.getEndMark().orElseThrow().getIndex() - start.getIndex();
+        return new String(start.getBuffer(), start.getPointer(), length);
+    }
+
+    /** The text stands in the source as it is: on one line, without escapes. */
     private static boolean isVerbatim(ScalarEvent event) {
         Mark start = event.getStartMark().orElseThrow();
         Mark end = event.getEndMark().orElseThrow();

@@ -19,6 +19,11 @@ public final class Faults {
         return found.isEmpty();
     }
 
+    /** How many there are so far. */
+    public int count() {
+        return found.size();
+    }
+
     public List<Fault> list() {
         return List.copyOf(found);
     }

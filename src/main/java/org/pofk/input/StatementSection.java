@@ -1,0 +1,251 @@
+package org.pofk.input;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalLong;
+import java.util.function.BiFunction;
+import java.util.stream.IntStream;
+import org.pofk.chain.Model.Convention;
+import org.pofk.chain.Output;
+import org.pofk.claim.FormulaText;
+import org.pofk.claim.FormulaText.Notation;
+import org.pofk.claim.Statement;
+import org.pofk.claim.Statement.Component;
+import org.pofk.exact.Rational;
+
+/** What one claim states, by its kind. Nothing comes back where there are faults, or no model to hold it against. */
+final class StatementSection {
+    /** Stands where no output could be found, so that the rest of a claim is read for the sake of its faults. */
+    private static final Output UNKNOWN = new Output("", List.of(), Rational.ZERO, "");
+
+    private final Fields fields;
+    private final ClaimKind kind;
+    private final Node.Scalar subject;
+    private final ClaimNames names;
+    private final Convention convention;
+    private final Reading reading;
+    private final ClaimFormulas formulas;
+
+    private StatementSection(Fields fields, ClaimKind kind, Node.Scalar subject, ClaimNames names,
+            Convention convention, Reading reading) {
+        this.fields = fields;
+        this.kind = kind;
+        this.subject = subject;
+        this.names = names;
+        this.convention = convention;
+        this.reading = reading;
+        this.formulas = new ClaimFormulas(reading);
+    }
+
+    /**
+     * Reads the statement.
+     *
+     * @param subject    what it is about, as the file names it
+     * @param convention how the author writes matrices
+     */
+    static Optional<Statement> read(Fields fields, ClaimKind kind, Node.Scalar subject, ClaimNames names,
+            Convention convention, Reading reading) {
+        StatementSection section = new StatementSection(fields, kind, subject, names, convention, reading);
+        int before = reading.faults().count();
+        Optional<Statement> statement = section.statement();
+        return reading.faults().count() == before ? statement : Optional.empty();
+    }
+
+    private Optional<Statement> statement() {
+        return switch (kind) {
+            case PAIR -> pair();
+            case BOUND -> bound();
+            default -> content().flatMap(this::stated);
+        };
+    }
+
+    private Optional<Statement> stated(Content content) {
+        return switch (kind) {
+            case START -> Optional.of(new Statement.Start(components(content)));
+            case MATRIX -> Optional.of(new Statement.Matrix(convention, MatrixContent.read(content, names, formulas,
+                    reading)));
+            case CHARACTERISTIC_POLYNOMIAL -> polynomial(content, Statement.MatrixPolynomial.Which.CHARACTERISTIC);
+            case MINIMAL_POLYNOMIAL -> polynomial(content, Statement.MatrixPolynomial.Which.MINIMAL);
+            case TRANSFORM -> transform(content, Statement.TransformOf.Form.TRANSFORM);
+            case TRANSFORM_OVER_Z -> transform(content, Statement.TransformOf.Form.TRANSFORM_OVER_Z);
+            case EXPANSION -> transform(content, Statement.TransformOf.Form.EXPANSION);
+            case POLES -> poles(content);
+            case RESIDUES -> residues(content);
+            case FORMULA -> Optional.of(new Statement.PofK(ofOutputs(content, this::formula)));
+            case LONG_RUN -> Optional.of(new Statement.LongRunOf(ofOutputs(content, this::longRun)));
+            case EIGENVECTOR -> eigenvector(content);
+            case VALUE -> value(content);
+            case PAIR, BOUND -> throw new AssertionError(kind + " has no content");
+        };
+    }
+
+    /** What stands under {@code is}, {@code is-latex} or {@code are}; a fault unless exactly one does. */
+    private Optional<Content> content() {
+        List<String> given = ClaimKind.CONTENT.stream().filter(key -> fields.value(key).isPresent()).toList();
+        if (given.size() > 1) {
+            reading.fault(fields.position(given.get(1)).orElseThrow(), "stated-twice", "'" + given.get(0) + "' and '"
+                    + given.get(1) + "' both say what is claimed; leave one of them out");
+            return Optional.empty();
+        }
+        if (given.isEmpty()) {
+            reading.fault(subject.position(), "nothing-stated", "the " + kind.word() + " is missing: write "
+                    + ClaimExamples.of(kind));
+            return Optional.empty();
+        }
+        String key = given.get(0);
+        return fields.value(key)
+                .map(node -> new Content(node, key.equals("is-latex") ? Notation.LATEX : Notation.PLAIN));
+    }
+
+    private Optional<Output> output() {
+        return names.output(subject);
+    }
+
+    /** A number for each state: by name, or all in order. */
+    private List<Component> components(Content content) {
+        List<Component> components = new ArrayList<>();
+        if (content.node().asMapping().isPresent()) {
+            for (Node.Entry entry : content.node().asMapping().get().entries()) {
+                Optional<Integer> state = names.state(entry.key());
+                Optional<FormulaText> value = formulas.number(content.part(entry.value()), "a component");
+                state.ifPresent(place -> value.ifPresent(is -> components.add(new Component(place, is))));
+            }
+            return components;
+        }
+        List<FormulaText> numbers = numbers(content, "the " + kind.word());
+        IntStream.range(0, numbers.size()).forEach(i -> components.add(new Component(i, numbers.get(i))));
+        return components;
+    }
+
+    /** A list with one number for each state. */
+    private List<FormulaText> numbers(Content content, String what) {
+        Optional<Node.Sequence> list = reading.sequence(content.node(), what,
+                "[0.9, 0.1, 0] or a mapping such as {STATE: 0.9, OTHER: 0.1}");
+        List<Node> items = list.map(Node.Sequence::items).orElse(List.of());
+        if (list.isPresent() && names.states().filter(n -> n != items.size()).isPresent()) {
+            reading.fault(content.node().position(), "size-differs", "here " + (items.size() == 1 ? "is " : "are ")
+                    + Words.count(items.size(), "number", "numbers") + ", but the model has "
+                    + Words.count(names.states().get(), "state", "states"));
+        }
+        return items.stream().flatMap(item -> formulas.number(content.part(item), "a number").stream()).toList();
+    }
+
+    private Optional<Statement> polynomial(Content content, Statement.MatrixPolynomial.Which which) {
+        return formulas.inOneVariable(content, "a polynomial").map(is -> new Statement.MatrixPolynomial(which, is));
+    }
+
+    private Optional<Statement> transform(Content content, Statement.TransformOf.Form form) {
+        Optional<FormulaText> formula = formulas.inZ(content, "a transform");
+        return output().flatMap(output -> formula.map(is -> new Statement.TransformOf(output, form, is)));
+    }
+
+    private Optional<Statement> poles(Content content) {
+        List<Statement.Poles.Pole> poles = new PolesSection(formulas, reading).read(content);
+        return output().map(output -> new Statement.Poles(output, poles));
+    }
+
+    private Optional<Statement> residues(Content content) {
+        List<Statement.Residues.AtPole> coefficients = new ArrayList<>();
+        reading.mapping(content.node(), "residues", "{1: 0.0082, 0.45: -0.017}").ifPresent(mapping -> {
+            for (Node.Entry entry : mapping.entries()) {
+                Optional<FormulaText> pole = formulas.number(content.part(entry.key()), "a pole");
+                List<FormulaText> values = list(content.part(entry.value()));
+                pole.ifPresent(at -> coefficients.add(new Statement.Residues.AtPole(at, values)));
+            }
+        });
+        return output().map(output -> new Statement.Residues(output, coefficients));
+    }
+
+    /** One number, or a list of them that holds at least one. */
+    private List<FormulaText> list(Content content) {
+        Optional<Node.Sequence> list = content.node().asSequence();
+        if (list.isPresent() && list.get().items().isEmpty()) {
+            reading.fault(content.node().position(), "list-empty", "the list is empty; write at least one number");
+        }
+        return list.map(Node.Sequence::items).orElse(List.of(content.node())).stream()
+                .flatMap(item -> formulas.number(content.part(item), "a number").stream()).toList();
+    }
+
+    /** One part for the output that is named, or one for each name of a mapping where the claim is about all. */
+    private <T> List<T> ofOutputs(Content content, BiFunction<Output, Content, Optional<T>> part) {
+        if (!names.meansAll(subject.name())) {
+            return single(content, part);
+        }
+        List<T> parts = new ArrayList<>();
+        Optional<Node.Mapping> mapping = reading.mapping(content.node(), "the " + kind.word() + " of all",
+                "{STATE: …, OTHER: …}");
+        for (Node.Entry entry : mapping.map(Node.Mapping::entries).orElse(List.of())) {
+            Optional<Output> output = names.output(entry.key());
+            Optional<T> read = part.apply(output.orElse(UNKNOWN), content.part(entry.value()));
+            output.flatMap(known -> read).ifPresent(parts::add);
+        }
+        return parts;
+    }
+
+    private <T> List<T> single(Content content, BiFunction<Output, Content, Optional<T>> part) {
+        Optional<Output> output = output();
+        Optional<T> read = part.apply(output.orElse(UNKNOWN), content);
+        return output.flatMap(known -> read).stream().toList();
+    }
+
+    private Optional<Statement.PofK.Part> formula(Output output, Content content) {
+        return formulas.inK(content, "a formula").map(is -> new Statement.PofK.Part(output, is));
+    }
+
+    private Optional<Statement.LongRunOf.Part> longRun(Output output, Content content) {
+        boolean isNone = content.node().asScalar().filter(value -> value.text().strip().equals("none")).isPresent();
+        return Optional.of(new Statement.LongRunOf.Part(output, isNone ? List.of() : list(content)));
+    }
+
+    private Optional<Statement> eigenvector(Content content) {
+        Optional<FormulaText> eigenvalue = named("at", "the eigenvalue");
+        if (fields.value("at").isEmpty()) {
+            reading.fault(subject.position(), "key-missing", "the eigenvector's eigenvalue is missing: write at: 1");
+        }
+        List<Component> components = components(content);
+        return eigenvalue.map(at -> new Statement.Eigenvector(at, components));
+    }
+
+    private Optional<Statement> value(Content content) {
+        if (fields.value("at").isEmpty()) {
+            reading.fault(subject.position(), "key-missing", "the step of the value is missing: write at: 5");
+            return Optional.empty();
+        }
+        OptionalLong at = ClaimedSteps.step(fields.value("at").get(), reading);
+        Optional<FormulaText> formula = formulas.number(content, "a value");
+        Optional<Output> output = output();
+        return at.isEmpty() ? Optional.empty() : output.flatMap(known ->
+                formula.map(is -> new Statement.Value(known, at.getAsLong(), is)));
+    }
+
+    /** The number under a key of its own, in ordinary notation. */
+    private Optional<FormulaText> named(String key, String what) {
+        return fields.value(key).flatMap(node -> formulas.number(new Content(node, Notation.PLAIN), what));
+    }
+
+    private Optional<Statement> pair() {
+        Optional<FormulaText> radius = named("radius", "the radius");
+        Optional<FormulaText> angle = named("angle", "the angle");
+        Optional<FormulaText> amplitude = named("amplitude", "the amplitude");
+        Optional<FormulaText> phase = named("phase", "the phase");
+        if (List.of("radius", "angle", "amplitude", "phase").stream().noneMatch(key -> fields.value(key).isPresent())) {
+            reading.fault(subject.position(), "nothing-stated",
+                    "the pair is missing: write " + ClaimExamples.of(ClaimKind.PAIR));
+        }
+        return output().map(output -> new Statement.Pair(output, radius, angle, amplitude, phase));
+    }
+
+    private Optional<Statement> bound() {
+        boolean isLeast = fields.value("at least").isPresent();
+        if (isLeast == fields.value("at most").isPresent()) {
+            reading.fault(subject.position(), "bound-unclear", isLeast
+                    ? "a bound is either 'at least' or 'at most'; make two claims of it"
+                    : "the bound is missing: write " + ClaimExamples.of(ClaimKind.BOUND));
+        }
+        Optional<FormulaText> formula = named(isLeast ? "at least" : "at most", "a bound");
+        Statement.Bound.Direction direction =
+                isLeast ? Statement.Bound.Direction.AT_LEAST : Statement.Bound.Direction.AT_MOST;
+        return output().flatMap(output -> formula.map(is -> new Statement.Bound(output, direction, is)));
+    }
+}
