@@ -249,6 +249,11 @@ public record Ball(BigInteger center, BigInteger radius, int scale) {
         return ElementaryFunctions.sin(this);
     }
 
+    /** e^x; an {@link ArithmeticException} where x is beyond some half a million. */
+    public Ball exp() {
+        return ExponentialFunction.of(this);
+    }
+
     static BigInteger shiftRightUp(BigInteger value, int shift) {
         return value.negate().shiftRight(shift).negate();
     }

@@ -1,8 +1,12 @@
 package org.pofk.meaning;
 
+import java.math.BigInteger;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import org.pofk.exact.ComplexBall;
+import org.pofk.exact.EnclosedComplex;
 import org.pofk.exact.Rational;
 import org.pofk.exact.Root;
 
@@ -10,61 +14,252 @@ import org.pofk.exact.Root;
  * A complex number as an expression: rationals, decimals as written, roots of polynomials, π, i, square roots,
  * exponentials, arctan and arccos, put together by the four operations and whole powers. At face value a decimal is
  * what its digits denote, and the number is exact; spread, a decimal is every number within half a unit of its last
- * place. Immutable; parts are shared.
+ * place. Immutable; parts are shared. Made simpler only where it is plain: short rationals are folded, 0 and 1 go.
+ *
+ * <p>Two quantities are equal as objects when they are the same one; {@code a.minus(b).isZero()} compares numbers.
  */
-public interface Quantity {
+public final class Quantity {
+    /** Rationals longer than this are not multiplied out: what isn't folded costs nothing until it is asked for. */
+    private static final int FOLDED_BITS = 1 << 14;
 
-    static Quantity of(Rational value) {
-        throw new AssertionError("to come");
+    public static final Quantity ZERO = new Quantity(new Node.Number(Rational.ZERO));
+    public static final Quantity ONE = new Quantity(new Node.Number(Rational.ONE));
+    private static final Quantity PI = new Quantity(Node.Constant.PI);
+    private static final Quantity I = new Quantity(Node.Constant.I);
+
+    private final Node node;
+    private final EnclosedComplex enclosed;
+
+    private Quantity(Node node) {
+        this.node = node;
+        this.enclosed = EnclosedComplex.raising(scale -> Enclosing.atFaceValue(this, scale));
     }
 
-    static Quantity of(Written decimal) {
-        throw new AssertionError("to come");
+    static Quantity of(Node node) {
+        return new Quantity(node);
     }
 
-    static Quantity of(Root root) {
-        throw new AssertionError("to come");
+    public static Quantity of(Rational value) {
+        return new Quantity(new Node.Number(value));
     }
 
-    static Quantity pi() {
-        throw new AssertionError("to come");
+    public static Quantity of(long value) {
+        return of(Rational.of(value));
     }
 
-    static Quantity i() {
-        throw new AssertionError("to come");
+    public static Quantity of(Written decimal) {
+        return new Quantity(new Node.Decimal(decimal));
     }
 
-    Quantity plus(Quantity other);
+    public static Quantity of(Root root) {
+        return root.polynomial().degree() == 1
+                ? of(root.polynomial().coefficient(0).negate())
+                : new Quantity(new Node.AtRoot(root));
+    }
 
-    Quantity negate();
+    public static Quantity pi() {
+        return PI;
+    }
 
-    Quantity times(Quantity other);
+    public static Quantity i() {
+        return I;
+    }
+
+    /** The sum of all; zero for none. */
+    public static Quantity sum(List<Quantity> terms) {
+        Rational constant = Rational.ZERO;
+        List<Quantity> others = new ArrayList<>();
+        for (Quantity term : terms) {
+            Optional<Rational> value = term.rational();
+            if (value.isPresent() && isShort(constant) && isShort(value.get())) {
+                constant = constant.plus(value.get());
+            } else {
+                others.add(term);
+            }
+        }
+        if (!constant.isZero() || others.isEmpty()) {
+            others.add(of(constant));
+        }
+        return others.size() == 1 ? others.get(0) : new Quantity(new Node.Sum(others));
+    }
+
+    Node node() {
+        return node;
+    }
+
+    /** The value where this is written as a rational number and nothing else. */
+    public Optional<Rational> rational() {
+        return node instanceof Node.Number number ? Optional.of(number.value()) : Optional.empty();
+    }
+
+    /** The decimal this is, where it is one and nothing else. */
+    Optional<Written> writtenDecimal() {
+        return node instanceof Node.Decimal decimal ? Optional.of(decimal.written()) : Optional.empty();
+    }
+
+    private boolean is(Rational value) {
+        return rational().filter(value::equals).isPresent();
+    }
+
+    private static boolean isShort(Rational value) {
+        return length(value) <= FOLDED_BITS;
+    }
+
+    private static long length(Rational value) {
+        return Math.max(value.numerator().bitLength(), value.denominator().bitLength());
+    }
+
+    public Quantity plus(Quantity other) {
+        return sum(List.of(this, other));
+    }
+
+    public Quantity minus(Quantity other) {
+        return plus(other.negate());
+    }
+
+    public Quantity negate() {
+        return of(-1).times(this);
+    }
+
+    public Quantity times(Quantity other) {
+        if (is(Rational.ZERO) || other.is(Rational.ZERO)) {
+            return ZERO;
+        }
+        if (is(Rational.ONE)) {
+            return other;
+        }
+        if (rational().isPresent()) {
+            return other.scaled(rational().get());
+        }
+        if (other.rational().isPresent()) {
+            return other.times(this);
+        }
+        if (node == Node.Constant.I && other.node == Node.Constant.I) {
+            return of(-1);
+        }
+        return new Quantity(new Node.Product(this, other));
+    }
+
+    public Quantity times(Rational factor) {
+        return of(factor).times(this);
+    }
+
+    /** This times a rational that is neither 0 nor 1, taken together with the factor it may have already. */
+    private Quantity scaled(Rational factor) {
+        if (rational().isPresent() && isShort(factor) && isShort(rational().get())) {
+            return of(factor.times(rational().get()));
+        }
+        if (node instanceof Node.Product product && product.first().rational().isPresent()) {
+            return product.first().times(of(factor)).times(product.second());
+        }
+        return new Quantity(new Node.Product(of(factor), this));
+    }
 
     /** 1/this; whether this is zero is for the caller to know. */
-    Quantity inverse();
+    public Quantity inverse() {
+        return pow(-1);
+    }
 
-    Quantity pow(int exponent);
+    /** This over what the caller knows not to be zero. */
+    public Quantity dividedBy(Quantity other) {
+        return times(other.inverse());
+    }
+
+    /** This to a whole power; to the power 0 it is one. */
+    public Quantity pow(int exponent) {
+        if (exponent == 0) {
+            return ONE;
+        }
+        if (exponent == 1) {
+            return this;
+        }
+        return node.accept(new PowerRules(this, exponent));
+    }
+
+    static boolean foldsToPower(Rational value, int exponent) {
+        return length(value) * Math.abs((long) exponent) <= FOLDED_BITS;
+    }
 
     /** The main square root. */
-    Quantity squareRoot();
+    public Quantity squareRoot() {
+        Optional<Rational> value = rational();
+        if (value.isEmpty()) {
+            return new Quantity(new Node.SquareRoot(this));
+        }
+        if (value.get().signum() < 0) {
+            return I.times(of(value.get().negate()).squareRoot());
+        }
+        BigInteger top = value.get().numerator().sqrt();
+        BigInteger bottom = value.get().denominator().sqrt();
+        Rational root = new Rational(top, bottom.max(BigInteger.ONE));
+        return root.times(root).equals(value.get()) ? of(root) : new Quantity(new Node.SquareRoot(this));
+    }
 
     /** e^this: cos x and sin x are its parts for i x. */
-    Quantity exponential();
+    public Quantity exponential() {
+        return is(Rational.ZERO) ? ONE : new Quantity(new Node.Exponential(this));
+    }
 
-    Quantity conjugate();
+    /** cos of this, which is real. */
+    public Quantity cosine() {
+        return I.times(this).exponential().realPart();
+    }
+
+    /** sin of this, which is real. */
+    public Quantity sine() {
+        return I.negate().times(I.times(this).exponential()).realPart();
+    }
+
+    /** The angle in (−π/2, π/2) whose tangent this real number is. */
+    public Quantity arctangent() {
+        return is(Rational.ZERO) ? ZERO : new Quantity(new Node.Angle(Node.Angle.Inverse.TANGENT, this));
+    }
+
+    /** The angle in [0, π] whose cosine this real number of [−1, 1] is. */
+    public Quantity arccosine() {
+        return is(Rational.ONE) ? ZERO : new Quantity(new Node.Angle(Node.Angle.Inverse.COSINE, this));
+    }
+
+    public Quantity conjugate() {
+        return Conjugating.of(this);
+    }
+
+    public Quantity realPart() {
+        return conjugate() == this ? this : new Quantity(new Node.RealPart(this));
+    }
+
+    public Quantity imaginaryPart() {
+        return I.negate().times(this).realPart();
+    }
 
     /** At face value, both radii at most 2^−bits · max(1, |this|). */
-    ComplexBall enclose(int bits);
+    public ComplexBall enclose(int bits) {
+        return enclosed.enclose(bits);
+    }
 
     /** Holds every value the decimals allow; not smaller than that, with some 2^−bits of rounding. */
-    ComplexBall spread(int bits);
+    public ComplexBall spread(int bits) {
+        return Enclosing.spread(this, bits);
+    }
 
     /** Whether it is zero at face value: by a separation bound where it is algebraic, never read off decimals. */
-    Decision isZero();
+    public Decision isZero() {
+        return ZeroTest.of(this);
+    }
 
     /** The decimals in it, each once, in order of reading. */
-    List<Written> decimals();
+    public List<Written> decimals() {
+        return DecimalsWithin.of(this);
+    }
 
     /** This with other numbers in place of some decimals. */
-    Quantity with(Map<Written, Quantity> replacements);
+    public Quantity with(Map<Written, Quantity> replacements) {
+        return replacements.isEmpty() ? this : Rebuilding.with(this, replacements);
+    }
+
+    /** As a formula, for messages and assertions. */
+    @Override
+    public String toString() {
+        return Telling.text(this);
+    }
 }

@@ -1,0 +1,56 @@
+package org.pofk.meaning;
+
+import java.util.Optional;
+
+/**
+ * Whether a number is zero. No, when an enclosure excludes zero; yes, when an enclosure closer than a separation bound
+ * still holds it. Certified; what isn't seen to be algebraic, or needs more than {@link #MOST_BITS}, stays undecided
+ * unless some {@value #TRIED_BITS} bits exclude zero.
+ */
+public final class ZeroTest {
+    /** Beyond so many bits it isn't decided. */
+    public static final int MOST_BITS = 200_000;
+    private static final int FIRST_BITS = 96;
+    private static final int TRIED_BITS = 3072;
+
+    private ZeroTest() {
+    }
+
+    static Decision of(Quantity quantity) {
+        if (quantity.rational().isPresent()) {
+            return quantity.rational().get().isZero() ? Decision.YES : Decision.NO;
+        }
+        try {
+            return excluded(quantity, FIRST_BITS) ? Decision.NO : bySeparation(quantity);
+        } catch (UndecidedException undecided) {
+            return Decision.UNDECIDED;
+        }
+    }
+
+    private static boolean excluded(Quantity quantity, int bits) {
+        return !quantity.enclose(bits).containsZero();
+    }
+
+    private static Decision bySeparation(Quantity quantity) {
+        Optional<Long> bound = separation(quantity).filter(bits -> bits <= MOST_BITS);
+        // both parts within 2^−bits of zero: |x| < 2^(2 − bits)
+        int enough = bound.map(bits -> bits.intValue() + 3).orElse(TRIED_BITS);
+        for (int bits = 2 * FIRST_BITS; bits < enough; bits *= 2) {
+            if (excluded(quantity, bits)) {
+                return Decision.NO;
+            }
+        }
+        if (excluded(quantity, enough)) {
+            return Decision.NO;
+        }
+        return bound.isPresent() ? Decision.YES : Decision.UNDECIDED;
+    }
+
+    private static Optional<Long> separation(Quantity quantity) {
+        try {
+            return Heights.separation(quantity);
+        } catch (ArithmeticException beyondRange) {
+            return Optional.empty();
+        }
+    }
+}
