@@ -40,7 +40,7 @@ public record TruePole(Root root, int multiplicity, Quantity value, List<Quantit
 
     private static TruePole of(Root root, Expansion.Part<Rational> part) {
         Polynomial<Rational> q = part.factor().polynomial();
-        Quantity value = q.degree() == 1 ? Quantity.of(q.coefficient(0).negate()) : Quantity.of(root);
+        Quantity value = Quantity.of(root);
         return new TruePole(root, part.factor().multiplicity(), value, part.coefficients().stream()
                 .map(each -> at(value, q, each)).toList());
     }
@@ -68,12 +68,32 @@ public record TruePole(Root root, int multiplicity, Quantity value, List<Quantit
         return modulus(value);
     }
 
+    /** The angle of λ, in (0, π), or 0 and π for a real one. */
+    public Quantity angle() {
+        return angle(value);
+    }
+
     /** 2 |R_p|, what the pair comes to together. */
     public Quantity amplitude(int power) {
-        return Quantity.of(Rational.TWO).times(modulus(coefficients.get(power)));
+        return modulus(coefficients.get(power)).times(Rational.TWO);
+    }
+
+    /** The angle of R_p, which isn't zero, in (−π, π]. */
+    public Quantity phase(int power) {
+        return angle(coefficients.get(power));
     }
 
     private static Quantity modulus(Quantity number) {
         return number.times(number.conjugate()).squareRoot();
+    }
+
+    /** By its cosine and its side of the real axis; for a number whose side can't be told, that of a real one. */
+    private static Quantity angle(Quantity number) {
+        int side = Signs.of(number.imaginaryPart()).orElse(0);
+        if (side == 0) {
+            return Signs.of(number.realPart()).orElse(1) < 0 ? Quantity.pi() : Quantity.ZERO;
+        }
+        Quantity angle = number.realPart().dividedBy(modulus(number)).arccosine();
+        return side < 0 ? angle.negate() : angle;
     }
 }

@@ -11,8 +11,11 @@ import org.junit.jupiter.api.Test;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Output;
 import org.pofk.chain.Outputs;
+import org.pofk.exact.Ball;
 import org.pofk.exact.Polynomial;
 import org.pofk.exact.Rational;
+import org.pofk.meaning.Decision;
+import org.pofk.meaning.Quantity;
 
 /** What is true of a chain, each part against another way to it. */
 class TruthTest {
@@ -38,6 +41,75 @@ class TruthTest {
             }
         }
         assertTrue(compared >= 1_000, compared + " values");
+    }
+
+    @Test
+    void everyPoleComesWithItsMultiplicity() {
+        int compared = 0;
+        for (Chain chain : Models.all()) {
+            for (Output output : Outputs.byDefault(chain)) {
+                OutputTruth truth = Truth.of(chain).about(output);
+                int poles = truth.poles().stream().mapToInt(pole -> pole.multiplicity() * (pole.isReal() ? 1 : 2)).sum();
+                assertEquals(truth.y().denominator().degree(), poles + truth.poleAtZero());
+                compared++;
+            }
+        }
+        assertTrue(compared >= 80, compared + " outputs");
+    }
+
+    @Test
+    void polesAndCoefficientsAddUpToTheValues() {
+        int compared = 0;
+        for (Chain chain : Models.all()) {
+            for (Output output : Outputs.byDefault(chain)) {
+                OutputTruth truth = Truth.of(chain).about(output);
+                for (int k = 0; k <= 7; k++) {
+                    Ball sum = sum(truth, k).enclose(96).real();
+                    assertTrue(sum.contains(truth.valueAt(k)), output.name() + " at " + k);
+                    assertTrue(sum.radius().bitLength() < sum.scale() - 60, "tight");
+                    assertTrue(byAmplitudes(truth, k).enclose(96).real().overlaps(sum), output.name() + " at " + k);
+                    compared++;
+                }
+            }
+        }
+        assertTrue(compared >= 600, compared + " values");
+    }
+
+    private static Quantity sum(OutputTruth truth, int k) {
+        List<Quantity> terms = new ArrayList<>(List.of(impulse(truth, k)));
+        for (TruePole pole : truth.poles()) {
+            for (int p = 0; p < pole.multiplicity() && p <= k; p++) {
+                Quantity term = pole.coefficients().get(p).times(binomial(k, p)).times(pole.value().pow(k - p));
+                terms.add(pole.isReal() ? term : term.realPart().times(Rational.TWO));
+            }
+        }
+        return Quantity.sum(terms);
+    }
+
+    private static Quantity byAmplitudes(OutputTruth truth, int k) {
+        List<Quantity> terms = new ArrayList<>(List.of(impulse(truth, k)));
+        for (TruePole pole : truth.poles()) {
+            for (int p = 0; p < pole.multiplicity() && p <= k; p++) {
+                if (pole.coefficients().get(p).isZero() != Decision.YES) {
+                    Quantity turn = pole.angle().times(Quantity.of(k - p)).plus(pole.phase(p)).cosine();
+                    Quantity size = pole.amplitude(p).times(pole.isReal() ? Rational.HALF : Rational.ONE);
+                    terms.add(size.times(binomial(k, p)).times(pole.modulus().pow(k - p)).times(turn));
+                }
+            }
+        }
+        return Quantity.sum(terms);
+    }
+
+    private static Quantity impulse(OutputTruth truth, int k) {
+        return k < truth.impulses().size() ? Quantity.of(truth.impulses().get(k)) : Quantity.ZERO;
+    }
+
+    private static Rational binomial(int k, int p) {
+        Rational result = Rational.ONE;
+        for (int i = 0; i < p; i++) {
+            result = result.times(Rational.of(k - i, i + 1));
+        }
+        return result;
     }
 
     @Test
