@@ -2,8 +2,8 @@ package org.pofk.claim;
 
 import java.util.Optional;
 import java.util.OptionalInt;
-import org.pofk.claim.Judgement.Fit;
 import org.pofk.exact.Rational;
+import org.pofk.meaning.Fit;
 import org.pofk.meaning.Quantity;
 import org.pofk.meaning.Written;
 

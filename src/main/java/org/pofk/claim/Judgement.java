@@ -4,6 +4,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.OptionalLong;
 import org.pofk.exact.Decimal;
+import org.pofk.meaning.Fit;
 import org.pofk.meaning.Written;
 
 /**
@@ -29,15 +30,6 @@ public record Judgement(Verdict verdict, Optional<Difference> difference, Option
      * @param right as many digits as written, and as many more as it takes to see the difference
      */
     public record JudgedNumber(Written written, String right, Fit fit) {
-    }
-
-    /** How a written decimal goes with its right value. */
-    public enum Fit {
-        /** Within half a unit of the last place. */
-        RIGHT,
-        /** The digits of the right value, cut off instead of rounded. */
-        CUT_OFF,
-        WRONG
     }
 
     public Judgement {

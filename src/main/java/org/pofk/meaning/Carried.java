@@ -20,7 +20,7 @@ public record Carried(int count, Unit unit) {
     }
 
     /** e with 10^e ≤ value < 10^(e+1). */
-    private static int magnitude(Rational value) {
+    static int magnitude(Rational value) {
         int estimate = (int) Math.floor((value.numerator().bitLength() - value.denominator().bitLength()) * 0.30103);
         while (Rational.of(10).pow(estimate + 1).compareTo(value) <= 0) {
             estimate++;

@@ -247,6 +247,16 @@ public final class Quantity {
         return ZeroTest.of(this);
     }
 
+    /** Whether it is real at face value. */
+    public Decision isReal() {
+        return conjugate() == this ? Decision.YES : imaginaryPart().isZero();
+    }
+
+    /** The sign at face value of what is known to be real; empty where it isn't decided whether it is zero. */
+    public Optional<Integer> sign() {
+        return Sign.of(this);
+    }
+
     /** The decimals in it, each once, in order of reading. */
     public List<Written> decimals() {
         return DecimalsWithin.of(this);

@@ -14,16 +14,22 @@ import org.pofk.text.Span;
  */
 public record Written(String text, Rational value, Rational lastPlace, Span span) {
 
-    /** The decimal at a place of a text, as precise as its last place says, or as its author carries numbers. */
+    /**
+     * The decimal of a text: {@code 0.4508}, {@code 1.2e-3}, {@code 43.5%}; without a sign. Its last place is that of
+     * the last digit, or the finer one carried. A {@link NumberFormatException} for anything else.
+     */
     public static Written of(String text, Span span, Precision precision) {
-        BigDecimal digits = new BigDecimal(text);
-        Rational value = Rational.of(digits);
-        Rational written = Rational.of(10).pow(-digits.scale());
-        return new Written(text, value, precision.carried()
-                .map(carried -> Rational.min(written, carried.lastPlace(value))).orElse(written), span);
+        boolean percent = text.endsWith("%");
+        BigDecimal digits = new BigDecimal(percent ? text.substring(0, text.length() - 1).strip() : text);
+        Rational scale = percent ? Rational.of(1, 100) : Rational.ONE;
+        Rational value = Rational.of(digits).times(scale);
+        Rational written = Rational.of(10).pow(-digits.scale()).times(scale);
+        Rational lastPlace = precision.carried().map(carried -> Rational.min(written, carried.lastPlace(value)))
+                .orElse(written);
+        return new Written(text, value, lastPlace, span);
     }
 
-    /** True when a number lies within half a unit of the last place. */
+    /** Half a unit of the last place. */
     public Rational halfUnit() {
         return lastPlace.times(Rational.HALF);
     }

@@ -1,0 +1,27 @@
+package org.pofk.meaning;
+
+import java.util.Collections;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+
+/**
+ * What equations say about the decimals in them.
+ *
+ * @param numbers the decimals whose right value is determined, in the order in which they were solved for
+ * @param holds   whether all equations can hold with every decimal within half a unit of its last place
+ * @param failing the places, from 0 and ascending, of equations that can't; one solved for a wrong decimal is among them
+ */
+public record Solution(Map<Written, WrittenNumber> numbers, Decision holds, List<Integer> failing) {
+
+    public Solution {
+        numbers = Collections.unmodifiableMap(new LinkedHashMap<>(numbers));
+        failing = List.copyOf(failing);
+    }
+
+    /** The value a decimal should have, exactly; empty where it isn't determined. */
+    public Optional<Quantity> right(Written written) {
+        return Optional.ofNullable(numbers.get(written)).map(WrittenNumber::right);
+    }
+}

@@ -1,0 +1,56 @@
+package org.pofk.meaning;
+
+import java.util.Optional;
+import org.pofk.exact.Rational;
+
+/**
+ * A written decimal beside the value it should have. Certified.
+ *
+ * @param digits the right value to the last place written or carried, and further where it takes more to see how the
+ *               two differ; in the author's way, with an exponent or a percent sign where he writes one
+ */
+public record WrittenNumber(Written written, Quantity right, Fit fit, String digits) {
+
+    /** Half a unit is inclusive: a tie is right. {@code right} is real; one that isn't is wrong. */
+    public static WrittenNumber of(Written written, Quantity right) {
+        Fit fit = fit(written, right);
+        return new WrittenNumber(written, right, fit, RightDigits.of(written, right, fit));
+    }
+
+    private static Fit fit(Written written, Quantity right) {
+        if (within(written, right) != Decision.NO) {
+            return Fit.RIGHT;
+        }
+        return isCutOff(written, right) ? Fit.CUT_OFF : Fit.WRONG;
+    }
+
+    /** Whether a value is within half a unit of the last place, inclusive. */
+    static Decision within(Written written, Quantity right) {
+        Decision real = right.isReal();
+        if (real != Decision.YES) {
+            return real;
+        }
+        Quantity off = right.minus(Quantity.of(written.value()));
+        return between(off, written.halfUnit().negate(), written.halfUnit());
+    }
+
+    private static Decision between(Quantity real, Rational low, Rational high) {
+        Optional<Integer> aboveLow = real.minus(Quantity.of(low)).sign();
+        Optional<Integer> belowHigh = Quantity.of(high).minus(real).sign();
+        if (aboveLow.filter(sign -> sign < 0).isPresent() || belowHigh.filter(sign -> sign < 0).isPresent()) {
+            return Decision.NO;
+        }
+        return aboveLow.isPresent() && belowHigh.isPresent() ? Decision.YES : Decision.UNDECIDED;
+    }
+
+    /** value ≤ |right| < value + last place, and the sign right where the value has one. */
+    private static boolean isCutOff(Written written, Quantity right) {
+        Optional<Integer> sign = right.sign();
+        if (right.isReal() != Decision.YES || sign.isEmpty() || sign.get() < 0 && !written.value().isZero()) {
+            return false;
+        }
+        Quantity beyond = (sign.get() < 0 ? right.negate() : right).minus(Quantity.of(written.value()));
+        return beyond.sign().filter(s -> s >= 0).isPresent()
+                && Quantity.of(written.lastPlace()).minus(beyond).sign().filter(s -> s > 0).isPresent();
+    }
+}
