@@ -65,6 +65,11 @@ final class Scalars {
         return scalar.isAlike(e());
     }
 
+    /** Counts a step of work that isn't an operation here. */
+    void step() {
+        work.spend(1);
+    }
+
     private int rest(Object... key) {
         return rests.computeIfAbsent(List.of(key), unknown -> rests.size() + 1);
     }
