@@ -13,6 +13,7 @@ import org.pofk.exact.Rational;
 final class DecayBound {
     private static final int LEAST_BITS = 128;
     private static final int BITS_A_DIGIT = 4;
+    private static final int MOST_BITS = 1 << 17;
 
     private record Term(BigInteger amplitude, BigInteger modulus, int power) {
     }
@@ -27,10 +28,10 @@ final class DecayBound {
         this.bits = bits;
     }
 
-    /** The precision is raised until every modulus is bounded below one. */
+    /** The precision is raised until every modulus is bounded below one; modes that don't decay are a fault of ours. */
     static DecayBound of(List<DecayingMode> modes, int digits) {
         int bits = LEAST_BITS + BITS_A_DIGIT * digits;
-        while (true) {
+        while (bits <= MOST_BITS) {
             int tried = bits;
             List<Term> terms = modes.stream().map(mode -> new Term(above(mode.amplitude(), tried),
                     above(mode.modulus(), tried), mode.power())).toList();
@@ -42,6 +43,7 @@ final class DecayBound {
             }
             bits *= 2;
         }
+        throw new AssertionError("a mode doesn't decay, as far as " + MOST_BITS + " bits tell: " + modes);
     }
 
     /** The least multiple of 2^−bits seen to be at least the value. */

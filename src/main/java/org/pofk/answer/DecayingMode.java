@@ -20,6 +20,18 @@ record DecayingMode(Enclosed amplitude, Enclosed modulus, int power) {
                 .toList();
     }
 
+    /** The modes themselves. */
+    static List<Mode> decaying(ClosedForm closedForm) {
+        List<Boolean> stays = closedForm.transform().factors().factors().stream().map(DecayingMode::stays).toList();
+        return closedForm.modes().stream().filter(mode -> mode.accept(new Decay(stays)).isPresent()).toList();
+    }
+
+    /** One that does decay. */
+    static DecayingMode of(ClosedForm closedForm, Mode mode) {
+        List<Boolean> stays = closedForm.transform().factors().factors().stream().map(each -> false).toList();
+        return mode.accept(new Decay(stays)).orElseThrow();
+    }
+
     /** Whether all roots of a factor are roots of unity. */
     private static boolean stays(Factorization.Factor<Rational> factor) {
         return Cyclotomic.ordersDividing(factor.polynomial()).stream().mapToInt(Cyclotomic::totient).sum()

@@ -185,14 +185,14 @@ public record Ball(BigInteger center, BigInteger radius, int scale) {
     }
 
     /** x^exponent, any sign; x^0 is one. */
-    public Ball pow(int exponent) {
+    public Ball pow(long exponent) {
         Ball one = of(1, Math.max(scale, 0));
         if (exponent < 0) {
             return one.dividedBy(pow(Math.negateExact(exponent)));
         }
         Ball result = one;
         Ball square = this;
-        for (int left = exponent; left > 0; left >>= 1) {
+        for (long left = exponent; left > 0; left >>= 1) {
             if ((left & 1) == 1) {
                 result = result.times(square);
             }

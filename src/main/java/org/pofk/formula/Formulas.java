@@ -2,6 +2,7 @@ package org.pofk.formula;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import org.pofk.exact.Factorization;
 import org.pofk.exact.Polynomial;
 import org.pofk.exact.Rational;
@@ -172,6 +173,20 @@ public final class Formulas {
         }
         return formula == Constant.PI || formula instanceof Product product && product.factors().size() == 2
                 && product.factors().get(0) instanceof Number && product.factors().get(1) == Constant.PI;
+    }
+
+    /** The factor of π in what {@link #isMultipleOfPi} takes; nothing for other formulas. */
+    public static Optional<Rational> multipleOfPi(Formula formula) {
+        if (formula instanceof Negation negation) {
+            return multipleOfPi(negation.operand()).map(Rational::negate);
+        }
+        if (formula instanceof Quotient quotient && quotient.denominator() instanceof Number divisor) {
+            return multipleOfPi(quotient.numerator()).map(factor -> factor.dividedBy(divisor.value()));
+        }
+        if (formula instanceof Product product && isMultipleOfPi(product)) {
+            return Optional.of(((Number) product.factors().get(0)).value());
+        }
+        return formula == Constant.PI ? Optional.of(Rational.ONE) : Optional.empty();
     }
 
     private static boolean isNegative(Formula formula) {

@@ -1,0 +1,184 @@
+package org.pofk.answer;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalInt;
+import org.pofk.exact.Ball;
+import org.pofk.exact.Enclosed;
+import org.pofk.exact.Rational;
+import org.pofk.modes.ClosedForm;
+import org.pofk.modes.Mode;
+
+/**
+ * On which side of its limit a sum of decaying modes stays in the end, on the steps of one parity. Decided where one
+ * real mode outlasts all others, or a real pole and its negative, or one conjugate pair, whose cosine then takes both
+ * signs for ever; in general this is the positivity problem for linear recurrences, open from order six on (Ouaknine
+ * and Worrell 2014, from memory). Moduli that agree to {@value Settling#TIED_BITS} bits and aren't known to be equal
+ * are left undecided. Certified.
+ *
+ * @param from for {@code POSITIVE} and {@code NEGATIVE}, a step from which the sign is kept
+ */
+record EventualSign(Kind kind, long from) {
+    private static final int BITS = 512;
+    private static final int MOST_DOUBLINGS = 50;
+
+    /** {@code ZERO}: nothing decays. */
+    enum Kind { POSITIVE, NEGATIVE, BOTH_FOR_EVER, ZERO, UNDECIDED }
+
+    static EventualSign of(ClosedForm closedForm, int parity, long atLeast) {
+        List<Mode> modes = DecayingMode.decaying(closedForm);
+        if (modes.isEmpty()) {
+            return new EventualSign(Kind.ZERO, atLeast);
+        }
+        List<Weight> weights = modes.stream().map(mode -> Weight.of(closedForm, mode, parity)).toList();
+        List<Weight> slowest = slowest(weights);
+        int power = slowest.stream().mapToInt(Weight::power).max().orElseThrow();
+        List<Weight> top = slowest.stream().filter(weight -> weight.power == power).toList();
+        if (top.size() == 1 && top.get(0).oscillates) {
+            return onePole(slowest) ? new EventualSign(Kind.BOTH_FOR_EVER, 0) : undecided();
+        }
+        if (top.stream().anyMatch(weight -> weight.oscillates) || !onePoleUpToSign(slowest)) {
+            return undecided();
+        }
+        Ball sum = top.stream().map(weight -> weight.signed.enclose(BITS)).reduce(Ball::plus).orElseThrow();
+        OptionalInt sign = sum.sign();
+        if (sign.isEmpty() || sign.getAsInt() == 0) {
+            return undecided();
+        }
+        List<Weight> others = new ArrayList<>(weights);
+        others.removeAll(top);
+        Optional<Long> from = outlasting(sum.abs(), top.get(0), others, atLeast);
+        return from.map(k -> new EventualSign(sign.getAsInt() > 0 ? Kind.POSITIVE : Kind.NEGATIVE, k))
+                .orElseGet(EventualSign::undecided);
+    }
+
+    private static EventualSign undecided() {
+        return new EventualSign(Kind.UNDECIDED, 0);
+    }
+
+    private static List<Weight> slowest(List<Weight> weights) {
+        Weight most = weights.stream().max((a, b) -> a.mode.compareModulus(b.mode, Settling.TIED_BITS)).orElseThrow();
+        return weights.stream().filter(each -> each.mode.compareModulus(most.mode, Settling.TIED_BITS) == 0).toList();
+    }
+
+    private static boolean onePole(List<Weight> weights) {
+        return weights.stream().map(weight -> weight.pole).distinct().count() == 1;
+    }
+
+    /** One real pole, or two that are proved to be each other's negatives. */
+    private static boolean onePoleUpToSign(List<Weight> weights) {
+        List<Weight> firsts = weights.stream().filter(weight -> weight.power == 0 || onePole(weights)).toList();
+        return onePole(weights) || firsts.size() == weights.size() && weights.size() == 2
+                && weights.stream().noneMatch(weight -> weight.oscillates)
+                && weights.get(0).isNegativeOf(weights.get(1));
+    }
+
+    /**
+     * A step from which |sum| · binomial(k, p) r^(k−p) stays above all others together: where it is above them, and
+     * every other one's share falls from there on.
+     */
+    private static Optional<Long> outlasting(Ball sum, Weight top, List<Weight> others, long atLeast) {
+        long k = Math.max(atLeast, top.power) + 1;
+        for (Weight other : others) {
+            Optional<Long> falling = top.sharesFallFrom(other);
+            if (falling.isEmpty()) {
+                return Optional.empty();
+            }
+            k = Math.max(k, falling.get());
+        }
+        for (int i = 0; i < MOST_DOUBLINGS; i++) {
+            Ball rest = Ball.of(0, BITS);
+            for (Weight other : others) {
+                rest = rest.plus(top.share(other, k));
+            }
+            if (sum.minus(rest).isPositive()) {
+                return Optional.of(k);
+            }
+            k = 2 * k;
+        }
+        return Optional.empty();
+    }
+
+    /** A mode with what tells when it is outlasted; {@code signed} is its coefficient for the steps of the parity. */
+    private record Weight(Mode shape, DecayingMode mode, List<Integer> pole, int power, boolean oscillates,
+            Enclosed signed, Enclosed base, boolean inEvenFactor) {
+
+        static Weight of(ClosedForm form, Mode shape, int parity) {
+            DecayingMode decay = DecayingMode.of(form, shape);
+            boolean even = isEven(form, shape.pole().get(0));
+            return shape.accept(new Mode.Visitor<Weight>() {
+                @Override
+                public Weight impulse(Mode.Impulse impulse) {
+                    throw new AssertionError("impulses don't decay: " + impulse);
+                }
+
+                @Override
+                public Weight geometric(Mode.Geometric mode) {
+                    boolean negative = mode.base().enclosure().enclose(BITS).isNegative()
+                            && Math.floorMod(parity - mode.power(), 2) == 1;
+                    Enclosed coefficient = mode.coefficient().enclosure();
+                    return new Weight(shape, decay, shape.pole(), mode.power(), false,
+                            negative ? coefficient.negate() : coefficient, mode.base().enclosure(), even);
+                }
+
+                @Override
+                public Weight oscillating(Mode.Oscillating mode) {
+                    return new Weight(shape, decay, shape.pole(), mode.power(), true,
+                            mode.amplitude().enclosure(), mode.modulus().enclosure(), even);
+                }
+            });
+        }
+
+        /** Whether the factor is a polynomial in z², so that its real roots are pairs ±λ. */
+        private static boolean isEven(ClosedForm form, int factor) {
+            List<Rational> coefficients =
+                    form.transform().factors().factors().get(factor).polynomial().coefficients();
+            for (int i = 1; i < coefficients.size(); i += 2) {
+                if (!coefficients.get(i).isZero()) {
+                    return false;
+                }
+            }
+            return true;
+        }
+
+        /** Tied in modulus, of opposite sign, and roots of one even factor, or rational and opposite. */
+        boolean isNegativeOf(Weight other) {
+            if (pole.get(0).equals(other.pole.get(0))) {
+                return inEvenFactor;
+            }
+            Ball sum = base.enclose(BITS).plus(other.base.enclose(BITS));
+            return sum.isExact() && sum.containsZero();
+        }
+
+        /** The step from which binomial(k, q) s^(k−q) over binomial(k, p) r^(k−p) falls, this the p and r. */
+        Optional<Long> sharesFallFrom(Weight other) {
+            if (other.pole.equals(pole)) {
+                return Optional.of((long) power);
+            }
+            Ball ratio = other.mode.modulus().enclose(BITS).dividedBy(mode.modulus().enclose(BITS));
+            Ball gap = Ball.of(1, BITS).minus(ratio);
+            if (!gap.isPositive()) {
+                return Optional.empty();
+            }
+            Rational steps = Rational.of(other.power + 1L).dividedBy(gap.lower());
+            return steps.compareTo(Rational.of(Long.MAX_VALUE / 4)) > 0 ? Optional.empty()
+                    : Optional.of(Math.max(steps.floor().longValueExact() + 1, other.power));
+        }
+
+        /** The other's size at k in units of this one's binomial(k, p) r^(k−p). */
+        Ball share(Weight other, long k) {
+            Ball r = mode.modulus().enclose(BITS).roundedTo(BITS);
+            Ball ratio = other.mode.modulus().enclose(BITS).roundedTo(BITS).dividedBy(r);
+            Ball powers = ratio.pow(k - other.power).times(r.pow(power - other.power));
+            Rational binomials = Rational.ONE;
+            for (int i = 0; i < other.power; i++) {
+                binomials = binomials.times(Rational.of(k - i)).dividedBy(Rational.of(i + 1));
+            }
+            for (int i = 0; i < power; i++) {
+                binomials = binomials.dividedBy(Rational.of(k - i)).times(Rational.of(i + 1));
+            }
+            return powers.times(Ball.of(binomials, BITS)).times(other.mode.amplitude().enclose(BITS));
+        }
+    }
+}
