@@ -2,6 +2,7 @@ package org.pofk.claim;
 
 import java.math.BigDecimal;
 import java.math.MathContext;
+import java.util.Optional;
 import org.pofk.exact.Decimal;
 import org.pofk.exact.Decimals;
 import org.pofk.exact.Enclosed;
@@ -15,7 +16,9 @@ import org.pofk.meaning.Written;
  * significant digits as he has, else to as many significant digits. Certified, as {@link Decimals}.
  */
 final class AuthorDigits {
-    private static final int MOST_MORE = 40;
+    private static final Rational HUNDRED = Rational.of(100);
+    /** A number that is a decimal of so many digits is written out whatever the author's digits. */
+    private static final int SHORT = 4;
     private static final int LONGEST_PLAIN = 15;
     private static final int MAGNITUDE_BITS = 64;
 
@@ -24,18 +27,12 @@ final class AuthorDigits {
 
     /** The number as he would have written it. */
     static String like(Written written, Quantity right) {
-        return decimal(written, right, 0).text();
-    }
-
-    /** The same with as many more digits as it takes to see that it isn't what he wrote. */
-    static String apartFrom(Written written, Quantity right) {
-        for (int more = 0; more < MOST_MORE; more++) {
-            Decimal decimal = decimal(written, right, more);
-            if (decimal.value().compareTo(written.value()) != 0) {
-                return decimal.text();
-            }
+        if (written.text().endsWith("%")) {
+            Written whole = new Written(written.text().substring(0, written.text().length() - 1),
+                    written.value().times(HUNDRED), written.lastPlace().times(HUNDRED), written.span());
+            return decimal(whole, right.times(HUNDRED)).text() + "%";
         }
-        return like(written, right);
+        return decimal(written, right).text();
     }
 
     /** To so many significant digits; zero where it is known to be. */
@@ -44,17 +41,28 @@ final class AuthorDigits {
                 .orElseGet(() -> Decimals.of(real(right), digits)).text();
     }
 
-    private static Decimal decimal(Written written, Quantity right, int more) {
+    /** How many significant digits a decimal has. */
+    static int significant(Written written) {
+        return written.value().isZero() ? 1
+                : Math.max(1, magnitude(written.value()) - exponent(written.lastPlace()) + 1);
+    }
+
+    private static Decimal decimal(Written written, Quantity right) {
         if (isZero(right)) {
             return Decimal.ZERO;
         }
         int last = exponent(written.lastPlace());
-        int digits = written.value().isZero() ? 1 : Math.max(1, magnitude(written.value()) - last + 1);
+        int digits = significant(written);
+        Optional<Decimal> whole = right.rational().map(value -> Decimals.of(value, Math.max(digits + 2, SHORT)))
+                .filter(Decimal::exact);
+        if (whole.isPresent()) {
+            return whole.get();
+        }
         int size = magnitude(right.rational().orElseGet(() -> right.enclose(MAGNITUDE_BITS).real().middle()));
-        int shown = Math.min(Math.max(size - last + 1, Math.max(1, digits - 1)), digits + 2) + more;
+        int shown = Math.min(Math.max(size - last + 1, Math.max(1, digits - 1)), digits + 2);
         int places = Math.max(0, shown - 1 - size);
         boolean isPlain = written.text().indexOf('e') < 0 && written.text().indexOf('E') < 0;
-        return isPlain && places <= LONGEST_PLAIN + more ? fixed(right, places) : significantly(right, shown);
+        return isPlain && places <= LONGEST_PLAIN ? fixed(right, places) : significantly(right, shown);
     }
 
     private static Decimal fixed(Quantity right, int places) {

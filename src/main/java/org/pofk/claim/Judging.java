@@ -1,5 +1,11 @@
 package org.pofk.claim;
 
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalLong;
+import org.pofk.text.Fault;
+import org.pofk.text.RefusedException;
+
 /** Holds one claim against what is true. */
 public final class Judging implements Statement.Visitor<Judgement> {
     private final Claim claim;
@@ -17,12 +23,12 @@ public final class Judging implements Statement.Visitor<Judgement> {
 
     @Override
     public Judgement start(Statement.Start start) {
-        throw new AssertionError("to come");
+        return judged(() -> JudgedStart.of(start, claim, truth));
     }
 
     @Override
     public Judgement matrix(Statement.Matrix matrix) {
-        throw new AssertionError("to come");
+        return judged(() -> JudgedMatrix.of(matrix, claim, truth));
     }
 
     @Override
@@ -32,32 +38,32 @@ public final class Judging implements Statement.Visitor<Judgement> {
 
     @Override
     public Judgement transform(Statement.TransformOf transform) {
-        return JudgedTransform.of(transform, claim, truth);
+        return judged(() -> JudgedTransform.of(transform, claim, truth));
     }
 
     @Override
     public Judgement poles(Statement.Poles poles) {
-        throw new AssertionError("to come");
+        return judged(() -> JudgedPoles.of(poles, claim, truth));
     }
 
     @Override
     public Judgement residues(Statement.Residues residues) {
-        throw new AssertionError("to come");
+        return judged(() -> JudgedResidues.of(residues, claim, truth));
     }
 
     @Override
     public Judgement formula(Statement.PofK formula) {
-        return JudgedFormula.of(formula, claim, truth);
+        return judged(() -> JudgedFormula.of(formula, claim, truth));
     }
 
     @Override
     public Judgement pair(Statement.Pair pair) {
-        throw new AssertionError("to come");
+        return judged(() -> JudgedPair.of(pair, claim, truth));
     }
 
     @Override
     public Judgement longRun(Statement.LongRunOf longRun) {
-        throw new AssertionError("to come");
+        return judged(() -> JudgedLongRun.of(longRun, claim, truth));
     }
 
     @Override
@@ -67,11 +73,25 @@ public final class Judging implements Statement.Visitor<Judgement> {
 
     @Override
     public Judgement value(Statement.Value value) {
-        throw new AssertionError("to come");
+        return judged(() -> JudgedValue.of(value, claim, truth));
     }
 
     @Override
     public Judgement bound(Statement.Bound bound) {
         throw new AssertionError("to come");
+    }
+
+    /** A way to a judgement that ends where the claim means nothing. */
+    private interface Way {
+        Judgement judgement() throws RefusedException;
+    }
+
+    private static Judgement judged(Way way) {
+        try {
+            return way.judgement();
+        } catch (RefusedException meaningless) {
+            return new Judgement(Verdict.WRONG, Optional.empty(), OptionalLong.empty(), List.of(),
+                    meaningless.faults().stream().map(Fault::message).toList(), "");
+        }
     }
 }

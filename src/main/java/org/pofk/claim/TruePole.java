@@ -89,9 +89,9 @@ public record TruePole(Root root, int multiplicity, Quantity value, List<Quantit
 
     /** By its cosine and its side of the real axis; for a number whose side can't be told, that of a real one. */
     private static Quantity angle(Quantity number) {
-        int side = Signs.of(number.imaginaryPart()).orElse(0);
+        int side = number.imaginaryPart().sign().orElse(0);
         if (side == 0) {
-            return Signs.of(number.realPart()).orElse(1) < 0 ? Quantity.pi() : Quantity.ZERO;
+            return number.realPart().sign().orElse(1) < 0 ? Quantity.pi() : Quantity.ZERO;
         }
         Quantity angle = number.realPart().dividedBy(modulus(number)).arccosine();
         return side < 0 ? angle.negate() : angle;

@@ -67,6 +67,12 @@ public final class Sequence {
         return new Rational(value.numerator, value.denominator);
     }
 
+    /** Whether y(k) is this number, without taking out the common factor. */
+    public boolean isAt(long k, Rational value) {
+        Unreduced here = unreduced(k);
+        return here.numerator.multiply(value.denominator()).equals(here.denominator.multiply(value.numerator()));
+    }
+
     /** y(k) within 2^−scale of the ball's centre, for steps whose exact fraction would take too long to reduce. */
     public Ball enclose(long k, int scale) {
         Unreduced value = unreduced(k);

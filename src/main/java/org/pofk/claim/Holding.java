@@ -1,0 +1,139 @@
+package org.pofk.claim;
+
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.OptionalLong;
+import java.util.function.Function;
+import org.pofk.claim.Judgement.JudgedNumber;
+import org.pofk.meaning.Decision;
+import org.pofk.meaning.Equation;
+import org.pofk.meaning.Fit;
+import org.pofk.meaning.Quantity;
+import org.pofk.meaning.Written;
+import org.pofk.text.RefusedException;
+
+/** Holds the numbers of one claim against those they should be, and says what comes of it. */
+final class Holding {
+    private final Claim claim;
+    private final List<Held> held = new ArrayList<>();
+    private final List<String> remarks = new ArrayList<>();
+    private Decision besides = Decision.YES;
+
+    Holding(Claim claim) {
+        this.claim = claim;
+    }
+
+    /** What a number of the claim means. */
+    StatedNumber number(FormulaText text) throws RefusedException {
+        return StatedNumber.of(text, claim);
+    }
+
+    void hold(Held number) {
+        held.add(number);
+    }
+
+    void hold(StatedNumber stated, Quantity right) {
+        hold(new Held(stated, right));
+    }
+
+    void hold(FormulaText text, Quantity right) throws RefusedException {
+        hold(number(text), right);
+    }
+
+    void remark(String sentence) {
+        remarks.add(sentence);
+    }
+
+    /** Something else than a number is wrong. */
+    void wrong(String sentence) {
+        besides = Decision.NO;
+        remark(sentence);
+    }
+
+    /** Something else than a number isn't decided. */
+    void undecided(String sentence) {
+        besides = besides == Decision.YES ? Decision.UNDECIDED : besides;
+        remark(sentence);
+    }
+
+    /** The judgement; {@code right} makes the right statement of the right numbers, in the order held. */
+    Judgement judgement(Function<List<String>, String> right) {
+        return judgement(right, OptionalLong.empty());
+    }
+
+    /** The judgement of what is claimed for one step. */
+    Judgement judgement(Function<List<String>, String> right, OptionalLong step) {
+        List<Decision> exact = held.stream().map(Held::isExact).toList();
+        List<Equation> equations = new ArrayList<>();
+        for (int i = 0; i < held.size(); i++) {
+            if (exact.get(i) != Decision.YES) {
+                equations.addAll(held.get(i).equations());
+            }
+        }
+        RightDecimals decimals = RightDecimals.of(equations);
+        boolean isExact = equations.isEmpty();
+        Verdict verdict = besides == Decision.NO ? Verdict.WRONG
+                : isExact && besides == Decision.YES ? Verdict.EXACT
+                : besides == Decision.UNDECIDED ? Verdict.UNDECIDED
+                : Closeness.verdict(claim, held, decimals.areRight());
+        if (!isExact) {
+            Closeness.remarks(claim, held).forEach(this::remark);
+        }
+        List<JudgedNumber> numbers = judged(exact, decimals);
+        numbers.stream().filter(number -> number.fit() == Fit.CUT_OFF).forEach(number -> remark(
+                number.written().text() + " is cut off, not rounded: " + number.right()));
+        return new Judgement(verdict, NumberError.of(claim, held, step),
+                verdict == Verdict.WRONG ? step : OptionalLong.empty(), numbers, remarks,
+                right.apply(texts(exact, decimals)));
+    }
+
+    /** The decimals of exact numbers are right as they stand. */
+    private List<JudgedNumber> judged(List<Decision> exact, RightDecimals decimals) {
+        Map<Written, JudgedNumber> numbers = new LinkedHashMap<>();
+        decimals.judged().forEach(number -> numbers.put(number.written(), number));
+        for (int i = 0; i < held.size(); i++) {
+            if (exact.get(i) == Decision.YES) {
+                held.get(i).stated().value().decimals().forEach(written ->
+                        numbers.putIfAbsent(written, new JudgedNumber(written, written.text(), Fit.RIGHT)));
+            }
+        }
+        return numbers.values().stream()
+                .sorted((a, b) -> a.written().span().start().compareTo(b.written().span().start())).toList();
+    }
+
+    private List<String> texts(List<Decision> exact, RightDecimals decimals) {
+        List<String> texts = new ArrayList<>();
+        for (int i = 0; i < held.size(); i++) {
+            texts.add(exact.get(i) == Decision.YES || standsAsWritten(held.get(i), decimals)
+                    ? held.get(i).stated().text().text() : rightText(held.get(i), decimals));
+        }
+        return texts;
+    }
+
+    /** Right to its digits, and none of them cut off. */
+    private static boolean standsAsWritten(Held held, RightDecimals decimals) {
+        List<Written> written = held.stated().value().decimals();
+        return !written.isEmpty() && held.isRight() == Decision.YES
+                && written.stream().noneMatch(each -> decimals.fits(each, Fit.CUT_OFF));
+    }
+
+    private String rightText(Held held, RightDecimals decimals) {
+        FormulaText text = held.stated().text();
+        List<Written> written = held.stated().value().decimals();
+        if (written.size() == 1 && RightText.isSignedDecimal(text.parsed().formula())) {
+            return AuthorDigits.like(written.get(0), held.right());
+        }
+        Map<Written, String> replaced = new LinkedHashMap<>();
+        written.forEach(each -> decimals.right(each)
+                .ifPresent(value -> replaced.put(each, AuthorDigits.like(each, value))));
+        return Optional.of(replaced).filter(all -> !written.isEmpty() && all.size() == written.size())
+                .flatMap(all -> RightText.with(text, all)).orElseGet(() -> RightNumber.of(held.right(), writtenAnywhere()));
+    }
+
+    private List<Written> writtenAnywhere() {
+        return held.stream().flatMap(each -> each.stated().value().decimals().stream()).toList();
+    }
+}

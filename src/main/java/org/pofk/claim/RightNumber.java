@@ -1,0 +1,38 @@
+package org.pofk.claim;
+
+import java.util.List;
+import org.pofk.meaning.Decision;
+import org.pofk.meaning.Quantity;
+import org.pofk.meaning.Written;
+
+/** Right numbers where the author wrote none, in about as many digits as he writes. */
+final class RightNumber {
+    static final int DIGITS = 6;
+    private static final int BITS = 64;
+
+    private RightNumber() {
+    }
+
+    /**
+     * A fraction where the number is one and the author writes no decimals, else decimals: as the longest of his, or
+     * to some digits.
+     */
+    static String of(Quantity number, List<Written> decimals) {
+        if (number.rational().isPresent() && decimals.isEmpty()) {
+            return number.rational().get().toString();
+        }
+        int digits = decimals.stream().mapToInt(AuthorDigits::significant).max().orElse(DIGITS);
+        String real = AuthorDigits.significant(number.realPart(), digits);
+        if (isReal(number)) {
+            return real;
+        }
+        String imaginary = AuthorDigits.significant(number.imaginaryPart(), digits);
+        return (real.equals("0") ? "" : real) + (imaginary.startsWith("-") ? " - " + imaginary.substring(1)
+                : real.equals("0") ? imaginary : " + " + imaginary) + " i";
+    }
+
+    private static boolean isReal(Quantity number) {
+        return number.realPart() == number || number.enclose(BITS).imaginary().containsZero()
+                && number.imaginaryPart().isZero() == Decision.YES;
+    }
+}
