@@ -3,8 +3,8 @@ package org.pofk.meaning;
 import java.util.Optional;
 
 /**
- * Whether a number is zero. No, when an enclosure excludes zero; yes, when an enclosure closer than a separation bound
- * still holds it. Certified; what isn't seen to be algebraic, or needs more than {@link #MOST_BITS}, stays undecided
+ * Whether a number is zero. No, when an enclosure excludes zero; yes, when it is zero in canonical form, or when an
+ * enclosure closer than a separation bound still holds it. Certified; what isn't seen to be algebraic, or needs more than {@link #MOST_BITS}, stays undecided
  * unless some {@value #TRIED_BITS} bits exclude zero.
  */
 public final class ZeroTest {
@@ -21,7 +21,7 @@ public final class ZeroTest {
             return quantity.rational().get().isZero() ? Decision.YES : Decision.NO;
         }
         try {
-            return excluded(quantity, FIRST_BITS) ? Decision.NO : bySeparation(quantity);
+            return excluded(quantity, FIRST_BITS) ? Decision.NO : exactly(quantity);
         } catch (UndecidedException undecided) {
             return Decision.UNDECIDED;
         }
@@ -31,11 +31,29 @@ public final class ZeroTest {
         return !quantity.enclose(bits).containsZero();
     }
 
-    private static Decision bySeparation(Quantity quantity) {
-        Optional<Long> bound = separation(quantity).filter(bits -> bits <= MOST_BITS);
-        // both parts within 2^−bits of zero: |x| < 2^(2 − bits)
+    private static Decision exactly(Quantity quantity) {
+        Optional<Canonical.Form> form = Canonical.form(quantity);
+        if (form.isEmpty()) {
+            return bySeparation(quantity, fromHeights(quantity));
+        }
+        return form.get().isZero()
+                ? Decision.YES
+                : bySeparation(form.get().value(), Optional.of(form.get().separation()));
+    }
+
+    private static Optional<Long> fromHeights(Quantity quantity) {
+        try {
+            return Heights.separation(quantity);
+        } catch (ArithmeticException beyondRange) {
+            return Optional.empty();
+        }
+    }
+
+    private static Decision bySeparation(Quantity quantity, Optional<Long> separation) {
+        Optional<Long> bound = separation.filter(bits -> bits <= MOST_BITS);
+        // both parts within 2^(1 − bits) of zero: |x| < 2^(2 − bits)
         int enough = bound.map(bits -> bits.intValue() + 3).orElse(TRIED_BITS);
-        for (int bits = 2 * FIRST_BITS; bits < enough; bits *= 2) {
+        for (int bits = FIRST_BITS; bits < enough; bits *= 2) {
             if (excluded(quantity, bits)) {
                 return Decision.NO;
             }
@@ -44,13 +62,5 @@ public final class ZeroTest {
             return Decision.NO;
         }
         return bound.isPresent() ? Decision.YES : Decision.UNDECIDED;
-    }
-
-    private static Optional<Long> separation(Quantity quantity) {
-        try {
-            return Heights.separation(quantity);
-        } catch (ArithmeticException beyondRange) {
-            return Optional.empty();
-        }
     }
 }

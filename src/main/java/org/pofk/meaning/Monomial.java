@@ -1,0 +1,22 @@
+package org.pofk.meaning;
+
+/** A product of powers of generators as one number, ten bits for each exponent, so that a product is a sum. */
+final class Monomial {
+    static final long ONE = 0;
+    static final int MOST_GENERATORS = 6;
+    /** Exponents below half of what fits, so that a product of two fits. */
+    static final int MOST_DEGREE = 500;
+    private static final int BITS = 10;
+    private static final long MASK = (1L << BITS) - 1;
+
+    private Monomial() {
+    }
+
+    static long power(int generator, int exponent) {
+        return (long) exponent << (BITS * generator);
+    }
+
+    static int exponent(long monomial, int generator) {
+        return (int) (monomial >>> (BITS * generator) & MASK);
+    }
+}
