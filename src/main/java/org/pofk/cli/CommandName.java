@@ -12,6 +12,7 @@ enum CommandName {
     DERIVE(DeriveCommand::new),
     INSPECT(InspectCommand::new),
     SIMULATE(SimulateCommand::new),
+    CHECK(CheckCommand::new),
     NEW(NewCommand::new),
     HELP(HelpCommand::new),
     VERSION(VersionCommand::new);

@@ -4,6 +4,8 @@ package org.pofk.cli;
 enum ExitCode {
     /** Answered; also "never" and "no limit", where that is proved. */
     ANSWERED(0),
+    /** A claim is wrong. */
+    CLAIM_WRONG(1),
     /** The command line can't be understood, or a file exists and --replace wasn't given. */
     USAGE(2),
     /** The input can't be accepted. */

@@ -16,6 +16,8 @@ final class HelpCommand implements Work {
             "                        (also what  pofk MODEL  does)",
             "  pofk inspect MODEL    the structure: classes, periods, long run, warnings",
             "  pofk simulate MODEL   random walks with intervals, beside the exact values",
+            "  pofk check CLAIMS     a derivation made by hand: which steps are right, which",
+            "                        are wrong, and by which slip",
             "  pofk new              patterns to start a model from",
             "  pofk help COMMAND     the options of a command",
             "  pofk help WORDS       from a word of the trade to the command that answers it:",

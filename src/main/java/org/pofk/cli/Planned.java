@@ -6,7 +6,6 @@ import java.util.Optional;
 
 /** Commands that have a name and are not built yet: typing one says so, instead of guessing another. */
 enum Planned {
-    CHECK("checks a derivation made by hand, step by step, against the exact one"),
     REPORT("writes the derivation as a document"),
     DRAW("draws the state diagram and p(k)"),
     WHEN("says from which step a condition holds, and whether for ever"),

@@ -21,7 +21,7 @@ final class TakenBy {
             return Optional.of("'" + name + "' is " + kind.inWords() + switch (kind) {
                 case MODEL -> ": pofk derive, inspect and simulate take it";
                 case MATRIX -> ": pofk derive, inspect and simulate take it, with --orientation and --start";
-                case CLAIMS -> ": pofk check will take it";
+                case CLAIMS -> ": pofk check takes it";
                 case RESULT -> ": name the model it came from";
                 case OTHER -> "";
             });

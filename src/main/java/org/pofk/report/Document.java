@@ -28,6 +28,8 @@ public record Document(List<Block> blocks) {
         R display(Display display);
 
         R table(Table table);
+
+        R excerpt(Excerpt excerpt);
     }
 
     /** A heading, level 1 the highest. */
@@ -132,6 +134,25 @@ public record Document(List<Block> blocks) {
         @Override
         public <R> R accept(Visitor<R> visitor) {
             return visitor.table(this);
+        }
+    }
+
+    /**
+     * A line as somebody wrote it, with the part that is meant marked.
+     *
+     * @param from where the part begins, in UTF-16 units
+     * @param to   where it ends; at {@code from} where something is missing there
+     */
+    public record Excerpt(String line, int from, int to) implements Block {
+        public Excerpt {
+            if (from < 0 || to < from || to > line.length()) {
+                throw new IllegalArgumentException(from + " to " + to + " in a line of " + line.length());
+            }
+        }
+
+        @Override
+        public <R> R accept(Visitor<R> visitor) {
+            return visitor.excerpt(this);
         }
     }
 }

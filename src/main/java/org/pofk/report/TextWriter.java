@@ -152,6 +152,15 @@ public record TextWriter(Alphabet alphabet, Charset charset, int width) {
             }
         }
 
+        /** The line with its part marked below; of a longer one what is around the part. */
+        @Override
+        public List<String> excerpt(Document.Excerpt excerpt) {
+            return TextExcerpt.lines(spelling.shown(excerpt.line().substring(0, excerpt.from())),
+                    spelling.shown(excerpt.line().substring(excerpt.from(), excerpt.to())),
+                    spelling.shown(excerpt.line().substring(excerpt.to())), width - 2 * INDENT, line("…", "...")).stream()
+                    .map(each -> " ".repeat(2 * INDENT) + each).toList();
+        }
+
         @Override
         public List<String> table(Document.Table table) {
             List<String> lines = new ArrayList<>();

@@ -80,7 +80,7 @@ class SchemaTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"result", "structure", "simulation"})
+    @ValueSource(strings = {"result", "structure", "simulation", "verdicts"})
     void schemasAreSchemas(String name) throws Exception {
         JsonSchema metaschema = JsonSchemaFactory.getInstance(SpecVersion.VersionFlag.V202012)
                 .getSchema(com.networknt.schema.SchemaLocation.of(com.networknt.schema.SchemaId.V202012));

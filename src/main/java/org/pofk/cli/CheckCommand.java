@@ -1,0 +1,71 @@
+package org.pofk.cli;
+
+import java.nio.file.Path;
+import java.util.Optional;
+import org.pofk.claim.Claims;
+import org.pofk.claim.Verdict;
+import org.pofk.input.ClaimsReader;
+import org.pofk.input.ModelVariants;
+import org.pofk.input.Overrides;
+import org.pofk.input.Source;
+import org.pofk.report.ClaimsText;
+import org.pofk.report.ReviewDocument;
+import org.pofk.report.VerdictsJson;
+import org.pofk.slip.ReviewedClaims;
+import org.pofk.slip.Reviewing;
+import org.pofk.slip.Variants;
+import org.pofk.text.RefusedException;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
+import picocli.CommandLine.Parameters;
+
+/** {@code pofk check CLAIMS}: a derivation made by hand, held against the exact one. */
+@Command(description = {"Checks a derivation made by hand, step by step, against the exact one: which steps are",
+    "right, which are wrong, where, and by which slip. The steps stand in a claims file."})
+final class CheckCommand implements Work {
+    @Parameters(paramLabel = "CLAIMS", description = "a claims file (YAML or JSON); the model it names lies beside it")
+    private Path file;
+
+    @Mixin
+    private SettingOptions settings = new SettingOptions();
+
+    @Mixin
+    private WritingOptions writing;
+
+    @Mixin
+    private BudgetOptions budget;
+
+    @Mixin
+    private CommonOptions common;
+
+    @Override
+    public ExitCode run(Streams streams) throws RefusedException, UsageException, WritingException {
+        Format format = writing.format();
+        writing.save().check();
+        Source source = Source.read(file);
+        Overrides overrides = settings.overrides();
+        Claims claims = settings.read(() ->
+                ClaimsReader.read(source, Optional.ofNullable(file.getParent()), overrides));
+        Variants variants = ModelVariants.of(claims, overrides);
+        Worker.Outcome<ReviewedClaims> outcome = Worker.within(budget.limit(streams), streams.notes(), published ->
+                published.accept(Reviewing.of(claims, variants)));
+        if (outcome.published().isEmpty()) {
+            streams.notes().println("pofk: nothing was decided within the budget");
+            return ExitCode.NOT_DECIDED;
+        }
+        ReviewedClaims reviewed = outcome.published().get();
+        writing.save().write(format == Format.JSON ? VerdictsJson.write(reviewed)
+                : writing.text(ReviewDocument.of(reviewed, ClaimsText.of(source.text()),
+                        "pofk " + VersionCommand.version())), streams);
+        return code(reviewed, outcome.finished());
+    }
+
+    private static ExitCode code(ReviewedClaims reviewed, boolean finished) {
+        if (reviewed.findings().stream().anyMatch(finding -> finding.verdict() == Verdict.WRONG
+                || finding.verdict() == Verdict.CARRIED)) {
+            return ExitCode.CLAIM_WRONG;
+        }
+        return finished && reviewed.findings().stream().noneMatch(finding -> finding.verdict() == Verdict.UNDECIDED)
+                ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
+    }
+}

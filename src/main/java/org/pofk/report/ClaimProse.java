@@ -1,0 +1,39 @@
+package org.pofk.report;
+
+import java.util.Arrays;
+import org.pofk.claim.Claim;
+import org.pofk.claim.Statement;
+
+/** What a claim is, in a few words. */
+final class ClaimProse {
+    private ClaimProse() {
+    }
+
+    /** {@code formula of lost}, {@code value of lost at k = 5}, {@code matrix}. */
+    static Prose of(Claim claim) {
+        Prose kind = Prose.of(claim.kind());
+        if (claim.statement() instanceof Statement.Value value) {
+            return kind.and(" of ").andName(claim.of()).and(" at k = " + value.at());
+        }
+        if (claim.statement() instanceof Statement.Eigenvector eigenvector) {
+            return kind.and(" for ").andName(eigenvector.eigenvalue().text());
+        }
+        return isOfTheChain(claim.statement()) ? kind : kind.and(" of ").andName(claim.of());
+    }
+
+    /** {@code claim 3, eq. (5)}. */
+    static Prose number(Claim claim) {
+        return Prose.of("claim " + claim.number())
+                .and(claim.where().map(where -> Prose.of(", ").and(text(where))).orElse(Prose.EMPTY));
+    }
+
+    /** What an author wrote, broken into lines at its blanks only. */
+    static Prose text(String written) {
+        return Prose.joined(Arrays.stream(written.strip().split("\\s+")).map(Prose::name).toList(), " ");
+    }
+
+    private static boolean isOfTheChain(Statement statement) {
+        return statement instanceof Statement.Start || statement instanceof Statement.Matrix
+                || statement instanceof Statement.MatrixPolynomial;
+    }
+}

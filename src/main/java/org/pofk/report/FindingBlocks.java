@@ -1,0 +1,117 @@
+package org.pofk.report;
+
+import java.util.ArrayList;
+import java.util.List;
+import org.pofk.claim.Claim;
+import org.pofk.claim.FormulaText;
+import org.pofk.claim.Judgement;
+import org.pofk.claim.Judgement.Fit;
+import org.pofk.claim.Judgement.JudgedNumber;
+import org.pofk.claim.Verdict;
+import org.pofk.report.Document.Block;
+import org.pofk.report.Document.Heading;
+import org.pofk.report.Document.Labelled;
+import org.pofk.report.Document.Paragraph;
+import org.pofk.report.Document.Table;
+import org.pofk.slip.Finding;
+import org.pofk.slip.Slip;
+
+/** What is said of one claim that isn't plainly exact. */
+final class FindingBlocks {
+    private static final int MARKED_AT_MOST = 3;
+
+    private final Finding finding;
+    private final ClaimsText text;
+    private final List<Block> blocks = new ArrayList<>();
+
+    private FindingBlocks(Finding finding, ClaimsText text) {
+        this.finding = finding;
+        this.text = text;
+    }
+
+    static List<Block> of(Finding finding, ClaimsText text) {
+        FindingBlocks findings = new FindingBlocks(finding, text);
+        findings.write();
+        return findings.blocks;
+    }
+
+    private void write() {
+        Claim claim = finding.claim();
+        Judgement judgement = finding.judgement();
+        blocks.add(new Heading(3, Prose.of("Claim " + claim.number()).and(claim.where()
+                .map(where -> Prose.of(", ").and(ClaimProse.text(where))).orElse(Prose.EMPTY)).and(": ")
+                .and(ClaimProse.of(claim))));
+        blocks.add(new Labelled("verdict", VerdictProse.explained(finding)));
+        claim.within().ifPresent(within -> blocks.add(new Labelled("claimed", VerdictProse.claimed(within, claim))));
+        judgement.remarks().forEach(remark -> blocks.add(new Labelled("remark", remark)));
+        claim.note().ifPresent(note -> blocks.add(new Labelled("note", ClaimProse.text(note))));
+        slips();
+        if (finding.slips().isEmpty()) {
+            wrongNumbers();
+        }
+        finding.rest().ifPresent(rest -> blocks.add(new Labelled("unexplained", rest)));
+        right();
+    }
+
+    private void slips() {
+        List<Slip> slips = finding.slips();
+        if (slips.size() > 1) {
+            blocks.add(new Paragraph(finding.together()
+                    ? "These " + slips.size() + " slips together explain it; with all of them undone the claim is right."
+                    : "Each of these " + slips.size() + " slips alone would explain it, the simplest first."));
+        }
+        for (int i = 0; i < slips.size(); i++) {
+            slip(slips.get(i), slips.size() > 1 ? "Slip " + (i + 1) + ": " : "Slip: ");
+        }
+    }
+
+    private void slip(Slip slip, String label) {
+        blocks.add(new Paragraph(Prose.of(label + slip.kind().inWords() + ", ")
+                .andName(slip.span().start().toString())));
+        blocks.add(text.excerpt(slip.span(), finding.claim()));
+        if (!slip.found().isBlank()) {
+            blocks.add(new Labelled("found", ClaimProse.text(slip.found())));
+        }
+        if (!slip.right().isBlank()) {
+            blocks.add(new Labelled("right", ClaimProse.text(slip.right())));
+        }
+        if (!finding.together()) {
+            blocks.add(new Labelled("corrected", ClaimProse.text(slip.corrected())));
+        }
+    }
+
+    /** Where no slip says which number is wrong: in their line while they are few, in a table otherwise. */
+    private void wrongNumbers() {
+        List<JudgedNumber> wrong = finding.judgement().numbers().stream()
+                .filter(number -> number.fit() == Fit.WRONG).toList();
+        if (wrong.size() > MARKED_AT_MOST) {
+            blocks.add(new Table(Prose.EMPTY, List.of(Prose.of("found"), Prose.of("right"), Prose.of("place")),
+                    wrong.stream().map(number -> List.of(Prose.name(number.written().text()),
+                            Prose.name(number.right()),
+                            Prose.name(number.written().span().start().toString()))).toList()));
+            return;
+        }
+        for (JudgedNumber number : wrong) {
+            blocks.add(new Paragraph(Prose.of("A number is wrong, ")
+                    .andName(number.written().span().start().toString())));
+            blocks.add(text.excerpt(number.written().span(), finding.claim()));
+            blocks.add(new Labelled("found", Prose.name(number.written().text())));
+            blocks.add(new Labelled("right", Prose.name(number.right())));
+        }
+    }
+
+    /** The right statement, unless a slip's correction has shown it. */
+    private void right() {
+        boolean isShown = !finding.together()
+                && finding.slips().stream().anyMatch(slip -> slip.corrected().equals(finding.judgement().right()));
+        boolean isWrong = finding.verdict() == Verdict.WRONG || finding.verdict() == Verdict.CARRIED;
+        if (isWrong && !isShown && !finding.judgement().right().isBlank()) {
+            List<FormulaText> stated = StatedFormulas.of(finding.claim().statement());
+            if (finding.slips().isEmpty() && stated.size() == 1) {
+                blocks.add(new Labelled("stated", ClaimProse.text(stated.get(0).text())));
+            }
+            blocks.add(new Labelled(finding.slips().isEmpty() ? "should read" : "corrected",
+                    ClaimProse.text(finding.judgement().right())));
+        }
+    }
+}
