@@ -7,6 +7,10 @@ import org.pofk.claim.FormulaText;
 import org.pofk.claim.FormulaText.Notation;
 import org.pofk.formula.FormulaParser;
 import org.pofk.formula.ParsedFormula;
+import org.pofk.meaning.ExponentialSum;
+import org.pofk.meaning.Precision;
+import org.pofk.meaning.RationalForm;
+import org.pofk.meaning.WrittenPolynomial;
 import org.pofk.text.Places;
 import org.pofk.text.RefusedException;
 
@@ -21,37 +25,37 @@ final class ClaimFormulas {
         this.reading = reading;
     }
 
+    /** What a formula is read as, or refused as. */
+    private interface Meaning {
+        Object of(ParsedFormula formula) throws RefusedException;
+    }
+
     /** A number, without a variable. */
     Optional<FormulaText> number(Content content, String what) {
-        return formula(content, what).filter(formula -> hasOnly(Set.of(), formula, "a number belongs here"));
+        return formula(content, what).filter(this::isNumber);
     }
 
     /** A formula in k. */
     Optional<FormulaText> inK(Content content, String what) {
-        return formula(content, what).filter(formula -> hasOnly(Set.of("k"), formula, "a formula in k belongs here"));
+        return formula(content, what)
+                .filter(formula -> means(formula, parsed -> ExponentialSum.of(parsed, Precision.AS_WRITTEN)));
     }
 
     /** A formula in z. */
     Optional<FormulaText> inZ(Content content, String what) {
-        return formula(content, what).filter(formula -> hasOnly(Set.of("z"), formula, "a formula in z belongs here"));
+        return formula(content, what)
+                .filter(formula -> means(formula, parsed -> RationalForm.of(parsed, "z", Precision.AS_WRITTEN)));
     }
 
-    /** A formula in one variable, whatever its name. */
-    Optional<FormulaText> inOneVariable(Content content, String what) {
-        Optional<FormulaText> formula = formula(content, what);
-        if (formula.isPresent() && formula.get().parsed().symbols().isEmpty()) {
-            reading.fault(content.node().position(), "variable-missing",
-                    what + " needs a variable, as z or λ; here is none");
-            return Optional.empty();
-        }
-        return formula.filter(found -> hasOnly(Set.of(Expressions.symbols(found.parsed()).get(0)), found,
-                "one variable belongs here"));
+    /** A polynomial in one variable, whatever its name. */
+    Optional<FormulaText> polynomial(Content content, String what) {
+        return formula(content, what)
+                .filter(formula -> means(formula, parsed -> WrittenPolynomial.of(parsed, Precision.AS_WRITTEN)));
     }
 
     /** Reads what a text says at its places, after parts of it were read otherwise. */
-    Optional<FormulaText> numberIn(String text, Content.Text source, String what) {
-        return parsed(text, source.places(), source.notation())
-                .filter(formula -> hasOnly(Set.of(), formula, "a number belongs here"));
+    Optional<FormulaText> numberIn(String text, Content.Text source) {
+        return parsed(text, source.places(), source.notation()).filter(this::isNumber);
     }
 
     private Optional<FormulaText> formula(Content content, String what) {
@@ -93,11 +97,22 @@ final class ClaimFormulas {
         }
     }
 
-    private boolean hasOnly(Set<String> variables, FormulaText formula, String expected) {
-        List<ParsedFormula> others = formula.parsed().symbols().stream()
-                .filter(symbol -> !variables.contains(Expressions.name(symbol))).toList();
-        others.forEach(symbol -> reading.fault(symbol.position(), "unknown-variable", "'"
-                + Words.shortened(Expressions.name(symbol)) + "' has no meaning here; " + expected));
-        return others.isEmpty();
+    /** Whether a formula holds no name but that of the number e, and is the value of something. */
+    private boolean isNumber(FormulaText formula) {
+        List<ParsedFormula> names = formula.parsed().symbols().stream()
+                .filter(symbol -> !Expressions.name(symbol).equals("e")).toList();
+        names.forEach(symbol -> reading.fault(symbol.position(), "not-a-number", "'"
+                + Words.shortened(Expressions.name(symbol)) + "' has no value here, where a number belongs"));
+        return names.isEmpty() && means(formula, parsed -> ExponentialSum.of(parsed, Precision.AS_WRITTEN).valueAt(0));
+    }
+
+    private boolean means(FormulaText formula, Meaning meaning) {
+        try {
+            meaning.of(formula.parsed());
+            return true;
+        } catch (RefusedException refused) {
+            reading.faults().addAll(refused.faults());
+            return false;
+        }
     }
 }

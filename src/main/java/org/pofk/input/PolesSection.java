@@ -54,13 +54,13 @@ final class PolesSection {
     private List<FormulaText> values(String text, Content.Text source) {
         Matcher signs = BOTH_SIGNS.matcher(text);
         if (!signs.find()) {
-            return formulas.numberIn(text, source, "a pole").stream().toList();
+            return formulas.numberIn(text, source).stream().toList();
         }
         String padding = " ".repeat(signs.end() - signs.start() - 1);
         List<FormulaText> both = new ArrayList<>();
         for (String sign : List.of("+", "-")) {
             String one = text.substring(0, signs.start()) + sign + padding + text.substring(signs.end());
-            Optional<FormulaText> value = formulas.numberIn(one, source, "a pole");
+            Optional<FormulaText> value = formulas.numberIn(one, source);
             if (value.isEmpty()) {
                 return List.of();
             }

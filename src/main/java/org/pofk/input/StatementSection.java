@@ -132,7 +132,7 @@ final class StatementSection {
     }
 
     private Optional<Statement> polynomial(Content content, Statement.MatrixPolynomial.Which which) {
-        return formulas.inOneVariable(content, "a polynomial").map(is -> new Statement.MatrixPolynomial(which, is));
+        return formulas.polynomial(content, "a polynomial").map(is -> new Statement.MatrixPolynomial(which, is));
     }
 
     private Optional<Statement> transform(Content content, Statement.TransformOf.Form form) {
