@@ -35,8 +35,10 @@ final class BranchList {
             throw cursor.refused(first, "cases-order", "no branch can follow the one for all other steps");
         }
         if (!first.is(Kind.FOR)) {
-            throw cursor.refused(first, "cases-condition", "braces hold a formula in cases, as in {1 for k = 0;"
-                    + " 0.5^k for k >= 1}: behind the formula 'for' and its steps are missing");
+            throw cursor.refused(first, "cases-condition", cursor.rules().notation() == Notation.LATEX
+                    ? "behind a formula in cases & and its steps are missing, as in 0.5^k & k \\ge 1"
+                    : "braces hold a formula in cases, as in {1 for k = 0; 0.5^k for k >= 1}: behind the formula"
+                            + " 'for' and its steps are missing");
         }
         boolean isRest = cursor.take().text().equals(OTHERWISE);
         if (cursor.sees(Kind.FOR) && cursor.peek().text().equals(OTHERWISE)) {

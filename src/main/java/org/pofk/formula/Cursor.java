@@ -1,10 +1,10 @@
 package org.pofk.formula;
 
 import java.util.List;
-import java.util.Set;
 import org.pofk.formula.Token.Kind;
 import org.pofk.text.Fault;
 import org.pofk.text.Places;
+import org.pofk.text.Position;
 import org.pofk.text.RefusedException;
 import org.pofk.text.Span;
 
@@ -13,12 +13,30 @@ final class Cursor {
     private final String text;
     private final Places places;
     private final List<Token> tokens;
+    private final Rules rules;
+    private int first;
     private int next;
 
-    Cursor(String text, Places places, Set<String> names) throws RefusedException {
+    Cursor(String text, Places places, List<Token> tokens, Rules rules) {
         this.text = text;
         this.places = places;
-        this.tokens = Lexer.read(text, places, names);
+        this.tokens = tokens;
+        this.rules = rules;
+    }
+
+    Rules rules() {
+        return rules;
+    }
+
+    /** All tokens, ending with one {@link Kind#END}. */
+    List<Token> tokens() {
+        return tokens;
+    }
+
+    /** Leaves out the tokens before the one of this index. */
+    void beginAt(int index) {
+        first = index;
+        next = index;
     }
 
     /** The token that is read next. */
@@ -51,7 +69,7 @@ final class Cursor {
 
     /** True while nothing has been read. */
     boolean atStart() {
-        return next == 0;
+        return next == first;
     }
 
     /** What stands in the text from one offset to another, short enough to be shown. */
@@ -73,6 +91,10 @@ final class Cursor {
     }
 
     RefusedException refused(Token at, String code, String message) {
-        return new RefusedException(List.of(new Fault(places.at(at.start()), code, message)));
+        return refused(places.at(at.start()), code, message);
+    }
+
+    RefusedException refused(Position at, String code, String message) {
+        return new RefusedException(List.of(new Fault(at, code, message)));
     }
 }

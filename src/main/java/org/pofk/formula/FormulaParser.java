@@ -14,7 +14,6 @@ import org.pofk.formula.Formula.Quotient;
 import org.pofk.formula.Formula.Sum;
 import org.pofk.formula.Formula.Symbol;
 import org.pofk.formula.Token.Kind;
-import org.pofk.text.Fault;
 import org.pofk.text.Places;
 import org.pofk.text.Position;
 import org.pofk.text.RefusedException;
@@ -45,7 +44,7 @@ public final class FormulaParser {
 
     /** Reads a text that stands in its source as it is, beginning at {@code start}. */
     public static ParsedFormula parse(String text, Position start) throws RefusedException {
-        requireLength(text, start);
+        Limits.MODEL.require(text, offset -> start);
         return parse(text, Places.from(start, text), Set.of());
     }
 
@@ -55,8 +54,27 @@ public final class FormulaParser {
      * @param names known names; only those that begin with a digit matter, which would otherwise be read as products
      */
     public static ParsedFormula parse(String text, Places places, Set<String> names) throws RefusedException {
-        requireLength(text, places.at(0));
-        Cursor cursor = new Cursor(text, places, names);
+        Limits.MODEL.require(text, places);
+        return whole(new Cursor(text, places, Lexer.read(text, places, names), Rules.OF_MODELS));
+    }
+
+    /**
+     * Reads a formula of a claim: a left side that says what {@code reading} expects is dropped, characters that only
+     * look like others are refused.
+     *
+     * @param names the model's names, which may hold any letters
+     */
+    public static ParsedFormula parse(String text, Places places, Set<String> names, FormulaReading reading)
+            throws RefusedException {
+        Limits.CLAIM.require(text, places);
+        Cursor cursor = new Cursor(text, places, Lexer.readClaim(text, places, names, reading.plusMinus()),
+                new Rules(Notation.PLAIN, Limits.CLAIM, reading.unit()));
+        LeftSide.drop(cursor, reading.subject());
+        return whole(cursor);
+    }
+
+    /** Reads all tokens as one formula. */
+    static ParsedFormula whole(Cursor cursor) throws RefusedException {
         if (cursor.sees(Kind.END)) {
             throw cursor.refused(cursor.peek(), "formula-empty", "a formula is missing here");
         }
@@ -66,13 +84,6 @@ public final class FormulaParser {
             throw parser.unexpected();
         }
         return whole;
-    }
-
-    private static void requireLength(String text, Position start) throws RefusedException {
-        if (text.length() > LONGEST) {
-            throw new RefusedException(List.of(new Fault(start, "formula-too-long",
-                    "the formula has " + text.length() + " characters, more than " + LONGEST)));
-        }
     }
 
     private ParsedFormula sum() throws RefusedException {
@@ -162,14 +173,25 @@ public final class FormulaParser {
             if (cursor.sees(Kind.POWER) || cursor.sees(Kind.SUPERSCRIPT)) {
                 throw cursor.refused(cursor.peek(), "ambiguous-power", "a power of a power needs parentheses");
             }
-            return nodes.leaf(WrittenNumbers.integer(raised.text()), raised);
+            ParsedFormula exponent = nodes.leaf(WrittenNumbers.integer(raised.text()), raised);
+            requireBounded(exponent);
+            return exponent;
         }
         cursor.take();
         nodes.enter();
         ParsedFormula exponent = signedFactor();
         ending = ending.asExponent();
         nodes.leave();
+        requireBounded(exponent);
         return exponent;
+    }
+
+    private void requireBounded(ParsedFormula exponent) throws RefusedException {
+        Formula formula = exponent.formula() instanceof Negation negation ? negation.operand() : exponent.formula();
+        if (formula instanceof Formula.Number number && !cursor.rules().limits().allowsPower(number.value())) {
+            throw cursor.refused(exponent.position(), "power-too-large",
+                    "an exponent is at most " + Limits.LARGEST_POWER + " here");
+        }
     }
 
     private ParsedFormula atom() throws RefusedException {
@@ -200,7 +222,7 @@ public final class FormulaParser {
             throw cursor.refused(name, "function-arguments",
                     "the argument of " + name.text() + " goes in parentheses: " + name.text() + "(…)");
         }
-        Optional<Constant> constant = Words.constant(name.text());
+        Optional<Constant> constant = cursor.rules().constant(name.text());
         if (constant.isPresent()) {
             return atom(constant.get(), name, Ending.CONSTANT);
         }

@@ -10,15 +10,21 @@ final class Juxtaposition {
     private Juxtaposition() {
     }
 
-    /** Refuses the next token, which begins an operand, when it may not stand behind a factor that ends so. */
+    /**
+     * Refuses the next token, which begins an operand, when it may not stand behind a factor that ends so. In LaTeX
+     * names and exponents have their own ends, so that less is ambiguous.
+     */
     static void require(Cursor cursor, Ending ending) throws RefusedException {
         Token token = cursor.peek();
-        if (token.is(Kind.NUMBER)) {
+        if (token.is(Kind.NUMBER) && !(cursor.rules().notation() == Notation.LATEX && isApart(cursor, ending))) {
             throw signMissing(cursor, "");
         }
         boolean beginsCall = cursor.peekBehind().is(Kind.OPEN) && token.is(Kind.NAME)
                 && Words.function(token.text()).isPresent();
         if (beginsCall) {
+            return;
+        }
+        if (cursor.rules().notation() == Notation.LATEX && !(ending == Ending.NAME && token.is(Kind.OPEN))) {
             return;
         }
         switch (ending) {
@@ -30,6 +36,12 @@ final class Juxtaposition {
             case ROOT -> throw cursor.refused(token, "ambiguous-root", "what stands behind √" + cursor.before().text()
                     + " can be read in two ways: write * for a product, or all under the root in parentheses");
         }
+    }
+
+    /** In LaTeX a number may stand behind braces and parentheses, and a decimal behind a letter: no index has a point. */
+    private static boolean isApart(Cursor cursor, Ending ending) {
+        boolean isDecimal = cursor.peek().text().contains(".");
+        return ending == Ending.CLOSED && !cursor.before().text().isEmpty() || ending == Ending.LETTER && isDecimal;
     }
 
     private static boolean isConstant(Token token) {

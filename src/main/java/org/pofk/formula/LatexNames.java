@@ -1,6 +1,7 @@
 package org.pofk.formula;
 
 import java.util.List;
+import java.util.Optional;
 import java.util.stream.Collectors;
 
 /** Names in LaTeX mathematics: one letter in italics, Greek letters by command, words upright, all else as text. */
@@ -13,7 +14,32 @@ final class LatexNames {
     private LatexNames() {
     }
 
+    /** The letter of a command. */
+    static Optional<String> letter(String command) {
+        int index = COMMANDS.indexOf(command);
+        return index < 0 ? Optional.empty() : Optional.of(GREEK.substring(index, index + 1));
+    }
+
+    static boolean isGreek(int c) {
+        return GREEK.indexOf(c) >= 0;
+    }
+
+    /** The commands for Greek letters. */
+    static List<String> commands() {
+        return COMMANDS;
+    }
+
+    /**
+     * A name as it is set. One that reads as a constant, e or i or π, is marked as a name, which is seen only where the
+     * text is read again.
+     */
     static String write(String name) {
+        if (name.equals("e") || name.equals("i")) {
+            return "\\mathit{" + name + "}";
+        }
+        if (name.equals("π")) {
+            return "\\mathit{\\pi}";
+        }
         if (name.length() == 1 && GREEK.contains(name)) {
             return "\\" + COMMANDS.get(GREEK.indexOf(name));
         }

@@ -3,6 +3,7 @@ package org.pofk.formula;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Set;
+import org.pofk.formula.FormulaReading.PlusMinus;
 import org.pofk.formula.Token.Kind;
 import org.pofk.text.Fault;
 import org.pofk.text.Places;
@@ -16,25 +17,38 @@ final class Lexer {
     private final String text;
     private final Places places;
     private final Set<String> names;
+    private final Limits limits;
+    private final PlusMinus plusMinus;
     private final List<Token> tokens = new ArrayList<>();
     private int at;
     /** How many braces of formulas in cases are open. */
     private int braces;
 
-    private Lexer(String text, Places places, Set<String> names) {
+    private Lexer(String text, Places places, Set<String> names, Limits limits, PlusMinus plusMinus) {
         this.text = text;
         this.places = places;
         this.names = names;
+        this.limits = limits;
+        this.plusMinus = plusMinus;
     }
 
     /** The tokens, ending with one {@link Kind#END}; {@code names} are known names that may begin with a digit. */
     static List<Token> read(String text, Places places, Set<String> names) throws RefusedException {
-        Lexer lexer = new Lexer(text, places, names);
-        while (lexer.at < text.length()) {
-            lexer.readOne();
+        return new Lexer(text, places, names, Limits.MODEL, PlusMinus.REFUSED).all();
+    }
+
+    /** The same for a claim: a name that isn't known is refused where a letter of it only looks like another. */
+    static List<Token> readClaim(String text, Places places, Set<String> names, PlusMinus plusMinus)
+            throws RefusedException {
+        return new Lexer(text, places, names, Limits.CLAIM, plusMinus).all();
+    }
+
+    private List<Token> all() throws RefusedException {
+        while (at < text.length()) {
+            readOne();
         }
-        lexer.add(Kind.END, "", lexer.at);
-        return lexer.tokens;
+        add(Kind.END, "", at);
+        return tokens;
     }
 
     private void readOne() throws RefusedException {
@@ -47,16 +61,32 @@ final class Lexer {
         } else if (Words.beginsName(c)) {
             skipName();
             String word = Words.normalized(text.substring(start, at));
+            requireRealLetters(word, start);
             add(braces > 0 && Words.OF_CASES.contains(word) ? Kind.FOR : Kind.NAME, word, start);
         } else if (c == '\'') {
             quoted(start);
         } else if (c == '⁻' || SUPERSCRIPTS.indexOf(c) >= 0) {
             superscript(start);
-        } else if ("=<>≤≥≠!".indexOf(c) >= 0) {
+        } else if ("=<>≤≥≠≈!".indexOf(c) >= 0) {
             relation(c, start);
         } else {
             at += Character.charCount(c);
             add(sign(c, start), text.substring(start, at), start);
+        }
+    }
+
+    /** Refuses a letter of a claim that looks like one of ASCII where it stands alone or among letters of ASCII. */
+    private void requireRealLetters(String word, int start) throws RefusedException {
+        if (limits != Limits.CLAIM || names.contains(word)) {
+            return;
+        }
+        boolean isMixed = word.codePointCount(0, word.length()) == 1
+                || word.codePoints().anyMatch(c -> c < 0x80 && Character.isLetter(c));
+        for (int i = start; i < at && isMixed; i += Character.charCount(text.codePointAt(i))) {
+            int c = text.codePointAt(i);
+            if (LookAlikes.meant(c).isPresent()) {
+                throw refused(i, "look-alike", LookAlikes.described(c) + " isn't known here" + LookAlikes.wayOut(c));
+            }
         }
     }
 
@@ -87,9 +117,10 @@ final class Lexer {
             }
             case '√' -> Kind.ROOT;
             case '°' -> Kind.DEGREE;
+            case '±', '∓' -> plusMinus(c, start);
             case '%' -> throw refused(start, "percent-sign",
                     "a percent sign belongs right behind a number, as in 30%");
-            default -> throw refused(start, "character", describe(c) + " has no meaning in a formula" + hint(c));
+            default -> throw refused(start, "character", LookAlikes.described(c) + " has no meaning in a formula" + hint(c));
         };
     }
 
@@ -109,13 +140,11 @@ final class Lexer {
         }, start);
     }
 
-    private static String describe(int c) {
-        boolean isVisible = switch (Character.getType(c)) {
-            case Character.CONTROL, Character.FORMAT, Character.SURROGATE, Character.UNASSIGNED,
-                    Character.PRIVATE_USE -> false;
-            default -> true;
-        };
-        return isVisible ? "'" + Character.toString(c) + "'" : String.format("the character U+%04X", c);
+    private Kind plusMinus(int c, int start) throws RefusedException {
+        if (plusMinus == PlusMinus.REFUSED) {
+            throw refused(start, "character", LookAlikes.described(c) + " has no meaning in a formula");
+        }
+        return (c == '±') == (plusMinus == PlusMinus.PLUS) ? Kind.PLUS : Kind.MINUS;
     }
 
     private static String hint(int c) {
@@ -123,7 +152,7 @@ final class Lexer {
             case '[', ']' -> ": parentheses are ( and )";
             case '"', '‘', '’', '“', '”', '`' -> ": names are quoted with '";
             case '\\' -> ": this is ordinary notation, not LaTeX";
-            default -> "";
+            default -> LookAlikes.wayOut(c);
         };
     }
 
@@ -234,7 +263,7 @@ final class Lexer {
                 }
                 at++;
             } else if (Character.isISOControl(c)) {
-                throw refused(at - 1, "character", describe(c) + " can't be part of a name");
+                throw refused(at - 1, "character", LookAlikes.described(c) + " can't be part of a name");
             }
             name.append(c);
         }

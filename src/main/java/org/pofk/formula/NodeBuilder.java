@@ -19,7 +19,7 @@ final class NodeBuilder {
 
     /** Goes one level further into the text; to be matched by {@link #leave}. */
     void enter() throws RefusedException {
-        if (++depth > FormulaParser.DEEPEST) {
+        if (++depth > deepest()) {
             throw tooDeep();
         }
     }
@@ -39,7 +39,7 @@ final class NodeBuilder {
 
     ParsedFormula node(Formula formula, List<ParsedFormula> parts, Span span) throws RefusedException {
         int height = 1 + parts.stream().mapToInt(heights::get).max().orElse(0);
-        if (height > FormulaParser.DEEPEST) {
+        if (height > deepest()) {
             throw tooDeep();
         }
         return kept(new ParsedFormula(formula, span, parts), height);
@@ -59,8 +59,12 @@ final class NodeBuilder {
         return node;
     }
 
+    private int deepest() {
+        return cursor.rules().limits().deepest();
+    }
+
     private RefusedException tooDeep() {
         return cursor.refused(cursor.peek(), "formula-too-deep",
-                "the formula is nested more than " + FormulaParser.DEEPEST + " deep");
+                "the formula is nested more than " + deepest() + " deep");
     }
 }

@@ -1,5 +1,7 @@
 package org.pofk.formula;
 
+import java.util.List;
+import java.util.Optional;
 import java.util.OptionalLong;
 import org.pofk.formula.Token.Kind;
 import org.pofk.text.RefusedException;
@@ -45,7 +47,9 @@ record StepRange(long from, OptionalLong to) {
         if (!cursor.sees(Kind.RELATION)) {
             throw unreadable(cursor);
         }
-        return Relation.written(cursor.take().text());
+        Relation relation = Relation.written(cursor.peek().text()).orElseThrow(() -> unreadable(cursor));
+        cursor.take();
+        return relation;
     }
 
     private static long step(Cursor cursor) throws RefusedException {
@@ -80,15 +84,9 @@ record StepRange(long from, OptionalLong to) {
     private enum Relation {
         EQUAL, BELOW, AT_MOST, ABOVE, AT_LEAST, UNEQUAL;
 
-        static Relation written(String sign) {
-            return switch (sign) {
-                case "=" -> EQUAL;
-                case "<" -> BELOW;
-                case "<=" -> AT_MOST;
-                case ">" -> ABOVE;
-                case ">=" -> AT_LEAST;
-                default -> UNEQUAL;
-            };
+        static Optional<Relation> written(String sign) {
+            int index = List.of("=", "<", "<=", ">", ">=", "!=").indexOf(sign);
+            return index < 0 ? Optional.empty() : Optional.of(values()[index]);
         }
 
         /** The same with both sides exchanged. */

@@ -213,7 +213,7 @@ class FormulaParserTest {
     @Test
     void characterThatShowsNothingIsNamedByItsNumber() {
         assertEquals("the character U+0000 has no meaning in a formula", refused("\0").message());
-        assertEquals("the character U+202E has no meaning in a formula", refused("1 + \u202e2").message());
+        assertEquals("the character U+202E has no meaning in a formula: it shows nothing and can be taken out", refused("1 + \u202e2").message());
         assertEquals("the character U+D800 has no meaning in a formula", refused("\ud800").message());
         assertEquals("the character U+0007 can't be part of a name", refused("'a\u0007'").message());
     }
