@@ -2,12 +2,15 @@ package org.pofk.cli;
 
 import java.nio.file.Path;
 import java.util.Optional;
+import org.pofk.chain.Model;
 import org.pofk.claim.Claims;
 import org.pofk.claim.Verdict;
 import org.pofk.input.ClaimsReader;
+import org.pofk.input.ModelReader;
 import org.pofk.input.ModelVariants;
 import org.pofk.input.Overrides;
 import org.pofk.input.Source;
+import org.pofk.report.BlankClaims;
 import org.pofk.report.ClaimsText;
 import org.pofk.report.ReviewDocument;
 import org.pofk.report.VerdictsJson;
@@ -17,6 +20,7 @@ import org.pofk.slip.Variants;
 import org.pofk.text.RefusedException;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
+import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
 
 /** {@code pofk check CLAIMS}: a derivation made by hand, held against the exact one. */
@@ -25,6 +29,10 @@ import picocli.CommandLine.Parameters;
 final class CheckCommand implements Work {
     @Parameters(paramLabel = "CLAIMS", description = "a claims file (YAML or JSON); the model it names lies beside it")
     private Path file;
+
+    @Option(names = "--blank",
+            description = "writes an empty claims file instead, to be filled in, for the MODEL named in place of CLAIMS")
+    private boolean blank;
 
     @Mixin
     private SettingOptions settings = new SettingOptions();
@@ -40,6 +48,25 @@ final class CheckCommand implements Work {
 
     @Override
     public ExitCode run(Streams streams) throws RefusedException, UsageException, WritingException {
+        return blank ? writeBlank(streams) : check(streams);
+    }
+
+    private ExitCode writeBlank(Streams streams) throws RefusedException, UsageException, WritingException {
+        writing.save().check();
+        Overrides overrides = settings.overrides();
+        Model model = settings.read(() -> ModelReader.read(file, overrides));
+        writing.save().write(BlankClaims.of(model, fromClaims()), streams);
+        return ExitCode.ANSWERED;
+    }
+
+    /** The model's file as the claims file must name it: from where that is to be saved. */
+    private String fromClaims() {
+        return writing.save().file().flatMap(saved -> Optional.ofNullable(saved.toAbsolutePath().getParent()))
+                .map(folder -> folder.normalize().relativize(file.toAbsolutePath().normalize()).toString())
+                .orElse(file.toString()).replace('\\', '/');
+    }
+
+    private ExitCode check(Streams streams) throws RefusedException, UsageException, WritingException {
         Format format = writing.format();
         writing.save().check();
         Source source = Source.read(file);

@@ -52,7 +52,7 @@ enum ClaimKind implements Keyword {
 
     /** Every key that may stand in some step. */
     static List<String> keys() {
-        return Stream.of(words().stream(), LATER.stream(), CONTENT.stream(), COMMON.stream(),
+        return Stream.of(words().stream(), CONTENT.stream(), COMMON.stream(),
                 Arrays.stream(values()).flatMap(kind -> kind.own.stream())).flatMap(keys -> keys).distinct().toList();
     }
 

@@ -49,17 +49,18 @@ final class ClaimSection {
     }
 
     private Optional<Claim> read(Node.Mapping mapping, int number) {
-        int before = reading.count();
-        Fields fields = Fields.of(mapping, "claim " + number, ClaimKind.keys(), reading);
-        boolean hasUnknown = reading.count() > before;
-        List<ClaimKind> kinds = ClaimKind.words().stream().filter(word -> fields.value(word).isPresent())
-                .flatMap(word -> ClaimKind.of(word).stream()).toList();
-        List<String> later = ClaimKind.LATER.stream().filter(word -> fields.value(word).isPresent()).toList();
-        if (!later.isEmpty()) {
-            reading.fault(fields.position(later.get(0)).orElseThrow(), "kind-later", "'" + later.get(0)
+        Optional<Node.Entry> later = mapping.entries().stream()
+                .filter(entry -> ClaimKind.LATER.contains(entry.name())).findFirst();
+        if (later.isPresent()) {
+            reading.fault(later.get().key().position(), "kind-later", "'" + later.get().name()
                     + "' can't be checked yet; leave this claim out");
             return Optional.empty();
         }
+        int before = reading.count();
+        Fields fields = Fields.of(withoutCutFormulas(mapping), "claim " + number, ClaimKind.keys(), reading);
+        boolean hasUnknown = reading.count() > before;
+        List<ClaimKind> kinds = ClaimKind.words().stream().filter(word -> fields.value(word).isPresent())
+                .flatMap(word -> ClaimKind.of(word).stream()).toList();
         if (kinds.size() > 1) {
             reading.fault(fields.position(kinds.get(1).word()).orElseThrow(), "two-kinds", "a claim is of one kind, and"
                     + " this is '" + kinds.get(0).word() + "' and '" + kinds.get(1).word() + "'; make two claims of it");
@@ -90,6 +91,16 @@ final class ClaimSection {
                                 mapping.position())));
     }
 
+    /** In {@code {formula: lost, is: binomial(k, 2)}} YAML sees a key {@code 2)} without a value. */
+    private Node.Mapping withoutCutFormulas(Node.Mapping mapping) {
+        List<Node.Entry> cut = mapping.entries().stream().filter(entry -> entry.name().contains(")")
+                && entry.value().asScalar().filter(Node.Scalar::isAbsent).isPresent()).toList();
+        cut.forEach(entry -> reading.fault(entry.key().position(), "comma-outside-quotes", "the comma before this ends"
+                + " the value; a formula with a comma goes in single quotes"));
+        return new Node.Mapping(mapping.position(),
+                mapping.entries().stream().filter(entry -> !cut.contains(entry)).toList());
+    }
+
     private Optional<String> text(Fields fields, String key) {
         return fields.value(key).flatMap(node -> reading.text(node, "'" + key + "'"));
     }
@@ -97,9 +108,11 @@ final class ClaimSection {
     private void refuseKeysOfOthers(Fields fields, ClaimKind kind) {
         for (String key : ClaimKind.keys()) {
             if (fields.value(key).isPresent() && !kind.knows(key)) {
+                boolean isContent = ClaimKind.CONTENT.contains(key);
                 reading.fault(fields.position(key).orElseThrow(), "key-of-another-kind", "'" + key
-                        + "' has no meaning for the " + kind.word() + "; it belongs to "
-                        + Words.list(ClaimKind.knowing(key)));
+                        + "' has no meaning in a claim of the kind '" + kind.word() + "'; "
+                        + (isContent ? "write " + ClaimExamples.of(kind)
+                                : "it belongs to " + Words.list(ClaimKind.knowing(key))));
             }
         }
     }
@@ -113,11 +126,11 @@ final class ClaimSection {
         }
         boolean isAll = names.meansAll(subject.get().name());
         if (kind.subject() == ClaimKind.Subject.ALL && !subject.get().name().equals(ClaimNames.ALL)) {
-            reading.fault(subject.get().position(), "subject", "the " + kind.word() + " is that of the whole chain;"
+            reading.fault(subject.get().position(), "subject", "'" + kind.word() + "' is about the whole chain;"
                     + " write " + kind.word() + ": all");
         } else if (kind.subject() == ClaimKind.Subject.ONE && isAll) {
-            reading.fault(subject.get().position(), "subject", "'all' isn't possible here: the " + kind.word()
-                    + " belongs to one output, set or state; make a claim for each");
+            reading.fault(subject.get().position(), "subject", "'all' isn't possible here: '" + kind.word()
+                    + "' is about one output, set or state; make a claim for each");
         } else {
             return subject;
         }

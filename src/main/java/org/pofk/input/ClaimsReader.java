@@ -52,7 +52,7 @@ public final class ClaimsReader {
         Fields fields = Fields.of(root, "claims", KEYS, reading);
         checkVersion(fields, root);
         Optional<Model> model = model(fields, root);
-        Review review = fields.value("review").map(node -> ReviewSection.read(node, reading)).orElse(Review.NOTHING);
+        Review review = fields.value("review").filter(node -> !isAbsent(node)).map(node -> ReviewSection.read(node, reading)).orElse(Review.NOTHING);
         Convention convention = review.convention().or(() -> model.map(Model::convention)).orElse(Convention.COLUMNS);
         ClaimSection section = new ClaimSection(new ClaimNames(model.map(Model::chain), reading), review, convention,
                 reading);
@@ -65,10 +65,14 @@ public final class ClaimsReader {
     }
 
     private List<Node> items(Node node) {
-        boolean isAbsent = node.asScalar().filter(Node.Scalar::isAbsent).isPresent();
-        return isAbsent ? List.of()
+        return isAbsent(node) ? List.of()
                 : reading.sequence(node, "'claims'", "[{value: OUTPUT, at: 5, is: 0.008}]")
                         .map(Node.Sequence::items).orElse(List.of());
+    }
+
+    /** A section all of whose lines are commented out. */
+    private static boolean isAbsent(Node node) {
+        return node.asScalar().filter(Node.Scalar::isAbsent).isPresent();
     }
 
     private void checkVersion(Fields fields, Node.Mapping root) {

@@ -89,7 +89,7 @@ final class StatementSection {
             return Optional.empty();
         }
         if (given.isEmpty()) {
-            reading.fault(subject.position(), "nothing-stated", "the " + kind.word() + " is missing: write "
+            reading.fault(subject.position(), "nothing-stated", "nothing is stated here; write "
                     + ClaimExamples.of(kind));
             return Optional.empty();
         }
@@ -123,10 +123,8 @@ final class StatementSection {
         Optional<Node.Sequence> list = reading.sequence(content.node(), what,
                 "[0.9, 0.1, 0] or a mapping such as {STATE: 0.9, OTHER: 0.1}");
         List<Node> items = list.map(Node.Sequence::items).orElse(List.of());
-        if (list.isPresent() && names.states().filter(n -> n != items.size()).isPresent()) {
-            reading.fault(content.node().position(), "size-differs", "here " + (items.size() == 1 ? "is " : "are ")
-                    + Words.count(items.size(), "number", "numbers") + ", but the model has "
-                    + Words.count(names.states().get(), "state", "states"));
+        if (list.isPresent()) {
+            requireOneForEachState(content, items);
         }
         return items.stream().flatMap(item -> formulas.number(content.part(item), "a number").stream()).toList();
     }
@@ -173,6 +171,9 @@ final class StatementSection {
             return single(content, part);
         }
         List<T> parts = new ArrayList<>();
+        if (content.node().asSequence().isPresent()) {
+            return ofStatesInOrder(content, content.node().asSequence().get().items(), part);
+        }
         Optional<Node.Mapping> mapping = reading.mapping(content.node(), "the " + kind.word() + " of all",
                 "{STATE: …, OTHER: …}");
         for (Node.Entry entry : mapping.map(Node.Mapping::entries).orElse(List.of())) {
@@ -181,6 +182,25 @@ final class StatementSection {
             output.flatMap(known -> read).ifPresent(parts::add);
         }
         return parts;
+    }
+
+    private <T> List<T> ofStatesInOrder(Content content, List<Node> items,
+            BiFunction<Output, Content, Optional<T>> part) {
+        requireOneForEachState(content, items);
+        List<Output> states = names.everyState();
+        List<T> parts = new ArrayList<>();
+        for (int i = 0; i < items.size(); i++) {
+            part.apply(i < states.size() ? states.get(i) : UNKNOWN, content.part(items.get(i))).ifPresent(parts::add);
+        }
+        return parts;
+    }
+
+    private void requireOneForEachState(Content content, List<Node> items) {
+        if (names.states().filter(n -> n != items.size()).isPresent()) {
+            reading.fault(content.node().position(), "size-differs", "this list has "
+                    + Words.count(items.size(), "entry", "entries") + ", but the model has "
+                    + Words.count(names.states().get(), "state", "states"));
+        }
     }
 
     private <T> List<T> single(Content content, BiFunction<Output, Content, Optional<T>> part) {
@@ -231,7 +251,7 @@ final class StatementSection {
         Optional<FormulaText> phase = named("phase", "the phase");
         if (List.of("radius", "angle", "amplitude", "phase").stream().noneMatch(key -> fields.value(key).isPresent())) {
             reading.fault(subject.position(), "nothing-stated",
-                    "the pair is missing: write " + ClaimExamples.of(ClaimKind.PAIR));
+                    "nothing is stated here; write " + ClaimExamples.of(ClaimKind.PAIR));
         }
         return output().map(output -> new Statement.Pair(output, radius, angle, amplitude, phase));
     }
@@ -241,7 +261,7 @@ final class StatementSection {
         if (isLeast == fields.value("at most").isPresent()) {
             reading.fault(subject.position(), "bound-unclear", isLeast
                     ? "a bound is either 'at least' or 'at most'; make two claims of it"
-                    : "the bound is missing: write " + ClaimExamples.of(ClaimKind.BOUND));
+                    : "nothing is stated here; write " + ClaimExamples.of(ClaimKind.BOUND));
         }
         Optional<FormulaText> formula = named(isLeast ? "at least" : "at most", "a bound");
         Statement.Bound.Direction direction =

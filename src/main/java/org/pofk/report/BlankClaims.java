@@ -1,0 +1,138 @@
+package org.pofk.report;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.stream.Collectors;
+import org.pofk.chain.Chain;
+import org.pofk.chain.Model;
+import org.pofk.chain.Output;
+import org.pofk.chain.Outputs;
+import org.pofk.text.Columns;
+
+/**
+ * An empty claims file for a model: every kind of step stands in it as a comment, with the model's states and outputs,
+ * so that somebody who checks a derivation only uncomments the steps it has and fills in its numbers.
+ */
+public final class BlankClaims {
+    /** What is to be filled in. */
+    public static final String GAP = "…";
+
+    private static final int MATRIX_AT_MOST = 12;
+    private static final int STATES_UNASKED = 12;
+
+    private final Model model;
+    private final List<String> lines = new ArrayList<>();
+
+    private BlankClaims(Model model) {
+        this.model = model;
+    }
+
+    /**
+     * The text of the file.
+     *
+     * @param file the model's file as the claims file is to name it
+     */
+    public static String of(Model model, String file) {
+        BlankClaims blank = new BlankClaims(model);
+        blank.head(file);
+        blank.chain();
+        blank.outputs().forEach(blank::output);
+        return blank.lines.stream().map(line -> line + "\n").collect(Collectors.joining());
+    }
+
+    private void head(String file) {
+        lines.add("pofk-claims: 1");
+        lines.add("model: " + Yaml.name(file));
+        lines.add("");
+        says("Where the derivation states a step, take the '# ' off and put what it says in");
+        says("place of each " + GAP + "; where: says where it stands, as \"eq. (3)\". Leave out the other");
+        says("steps; the order is that of the derivation. Then:  pofk check THIS-FILE");
+        lines.add("review:");
+        List.of("document: " + GAP, "revision: " + GAP, "author: " + GAP, "reviewer: " + GAP, "date: " + GAP)
+                .forEach(this::open);
+        open("convention: " + (model.convention() == Model.Convention.COLUMNS ? "columns" : "rows")
+                + "       # columns: x(k+1) = A x(k); rows: p(k+1) = p(k) P");
+        open("carried: 4 significant    # how many digits the author carries; or: 4 decimals");
+        lines.add("");
+        lines.add("claims:");
+    }
+
+    private void says(String comment) {
+        lines.add("## " + comment);
+    }
+
+    private void open(String line) {
+        lines.add("  # " + line);
+    }
+
+    private Chain states() {
+        return model.chain();
+    }
+
+    private void chain() {
+        lines.add("");
+        says("The chain itself");
+        byState("start: all");
+        if (states().size() <= MATRIX_AT_MOST) {
+            open("- matrix: all");
+            open("  are:                  # the rows as written; states in the order "
+                    + states().states().stream().map(Yaml::name).collect(Collectors.joining(", ")));
+            String row = states().states().stream().map(state -> GAP).collect(Collectors.joining(", ", "[", "]"));
+            states().states().forEach(state -> open("    - " + row));
+        }
+        open("- {characteristic polynomial: all, is: '" + GAP + "', where: " + GAP + "}");
+        open("- {minimal polynomial: all, is: '" + GAP + "', where: " + GAP + "}");
+        open("- eigenvector: all");
+        open("  at: 1                 # the eigenvalue");
+        each();
+        byState("long run: all");
+        byState("formula: all");
+    }
+
+    /** A claim with one number, or one formula, for each state. */
+    private void byState(String claim) {
+        open("- " + claim);
+        each();
+    }
+
+    private void each() {
+        open("  are:");
+        states().states().forEach(state -> open("    " + Yaml.name(state) + ": " + GAP));
+    }
+
+    /** Those the model names, every state of a small one without; the first of a large one. */
+    private List<Output> outputs() {
+        List<Output> outputs = Outputs.byDefault(states());
+        return states().outputs().isEmpty() && outputs.size() > STATES_UNASKED ? outputs.subList(0, 1) : outputs;
+    }
+
+    private void output(Output output) {
+        String of = Yaml.name(output.name());
+        lines.add("");
+        says("About " + output.name().replaceAll("\\s+", " ")
+                + (outputs().size() < Outputs.byDefault(states()).size() ? ", and likewise about any other state" : ""));
+        String formula = ", is: '" + GAP + "'}";
+        aligned(List.of(
+                new Step("{transform: " + of + formula, "Y(z), in any form"),
+                new Step("{transform over z: " + of + formula, "Y(z)/z"),
+                new Step("{expansion: " + of + formula, "Y(z) as a sum of partial fractions"),
+                new Step("{poles: " + of + ", are: [" + GAP + "]}", "as 1, 0.45 (twice), 0.4 ± 0.33 i"),
+                new Step("{residues: " + of + ", are: {1: " + GAP + "}}", "by pole; [R0, R1] at a double one"),
+                new Step("{formula: " + of + formula, "in k; with for: k >= 1 where it begins later"),
+                new Step("{long run: " + of + ", is: " + GAP + "}", "or none, or are: [" + GAP + ", " + GAP
+                        + "] for a cycle"),
+                new Step("{value: " + of + ", at: 5, is: " + GAP + "}", "an estimate: within: 2%, safe side: above"),
+                new Step("{bound: " + of + ", at most: " + GAP + "}", "or at least; for: k >= 0")));
+        open("- {pair: " + of + ", radius: " + GAP + ", angle: " + GAP + ", amplitude: " + GAP + ", phase: " + GAP
+                + "}");
+    }
+
+    /** A claim on one line and what helps to fill it in. */
+    private record Step(String claim, String help) {
+    }
+
+    private void aligned(List<Step> steps) {
+        int widest = steps.stream().mapToInt(step -> Columns.width(step.claim)).max().orElse(0);
+        steps.forEach(step -> open("- " + Columns.left(step.claim, widest) + "  # " + step.help));
+    }
+}
