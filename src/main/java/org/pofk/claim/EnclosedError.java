@@ -1,0 +1,100 @@
+package org.pofk.claim;
+
+import java.math.BigInteger;
+import java.util.Map;
+import java.util.Optional;
+import org.pofk.exact.Ball;
+
+/**
+ * The size of an {@link ErrorCurve} with all numbers enclosed: at one step, over ranges of steps of a class, and from
+ * a step on. Certified: where a bound isn't found there is none.
+ */
+final class EnclosedError {
+    private final EnclosedWaves difference;
+    private final Map<Long, Ball> impulses;
+    private final Optional<Reference> reference;
+    private final int bits;
+    private final int classes;
+
+    /** p(k), for relative errors. */
+    record Reference(EnclosedWaves truth, Map<Long, Ball> impulses, Ball largest) {
+    }
+
+    EnclosedError(EnclosedWaves difference, Map<Long, Ball> impulses, Optional<Reference> reference, int bits) {
+        this.difference = difference;
+        this.impulses = impulses;
+        this.reference = reference;
+        this.bits = bits;
+        this.classes = common(difference.classes(), reference.map(p -> p.truth.classes()).orElse(1));
+    }
+
+    private static int common(int a, int b) {
+        return a / BigInteger.valueOf(a).gcd(BigInteger.valueOf(b)).intValue() * b;
+    }
+
+    int bits() {
+        return bits;
+    }
+
+    /** How many classes of k the bounds are given by. */
+    int classes() {
+        return classes;
+    }
+
+    boolean grows() {
+        return difference.grows();
+    }
+
+    /** claimed(k) − p(k), with its sign. */
+    Ball signedAt(long k) {
+        return withImpulse(difference.valueAt(k), impulses, k);
+    }
+
+    private static Ball withImpulse(Ball value, Map<Long, Ball> impulses, long k) {
+        Ball impulse = impulses.get(k);
+        return impulse == null ? value : value.plus(impulse);
+    }
+
+    /** Empty where p(k) can't be told from zero. */
+    Optional<Ball> at(long k) {
+        if (reference.isEmpty()) {
+            return Optional.of(signedAt(k).abs());
+        }
+        Reference p = reference.get();
+        Ball scale = impulses.containsKey(k) || p.impulses.containsKey(k)
+                ? Ball.of(1, bits).dividedBy(Intervals.power(p.largest, k)) : Ball.of(1, bits);
+        Ball error = scaled(difference.valueAt(k), impulses, scale, k);
+        Ball truth = scaled(p.truth.valueAt(k), p.impulses, scale, k);
+        return over(error, truth);
+    }
+
+    private static Ball scaled(Ball value, Map<Long, Ball> impulses, Ball scale, long k) {
+        Ball impulse = impulses.get(k);
+        return impulse == null ? value : value.plus(impulse.times(scale));
+    }
+
+    private static Optional<Ball> over(Ball error, Ball truth) {
+        return truth.containsZero() ? Optional.empty() : Optional.of(error.abs().dividedBy(truth.abs()));
+    }
+
+    /** Holds the error at all k of the class from first to last, none of which has an impulse. */
+    Optional<Ball> over(int residue, long first, long last) {
+        Ball error = difference.over(residue, first, last);
+        return reference.isEmpty() ? Optional.of(error.abs())
+                : over(error, reference.get().truth.over(residue, first, last));
+    }
+
+    /** Holds the error at all k of the class from first on. */
+    Optional<Ball> beyond(int residue, long first) {
+        Optional<Ball> error = difference.beyond(residue, first);
+        return reference.isEmpty() || error.isEmpty() ? error.map(Ball::abs)
+                : reference.get().truth.beyond(residue, first).flatMap(truth -> over(error.get(), truth));
+    }
+
+    /** What the error tends to in the class. */
+    Optional<Ball> limit(int residue) {
+        Optional<Ball> error = difference.limit(residue);
+        return reference.isEmpty() || error.isEmpty() ? error.map(Ball::abs)
+                : reference.get().truth.limit(residue).flatMap(truth -> over(error.get(), truth));
+    }
+}

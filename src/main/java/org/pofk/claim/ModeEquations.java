@@ -1,0 +1,204 @@
+package org.pofk.claim;
+
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.SortedMap;
+import java.util.TreeSet;
+import org.pofk.claim.ClaimedMode.ClaimedTerm;
+import org.pofk.claim.ClaimedMode.Shape;
+import org.pofk.claim.ModeEquation.About;
+import org.pofk.exact.Rational;
+import org.pofk.meaning.Decision;
+import org.pofk.meaning.Equation;
+import org.pofk.meaning.ExponentialSum;
+import org.pofk.meaning.ExponentialSum.Term;
+import org.pofk.meaning.Quantity;
+
+/**
+ * What must hold for a formula in k to be p(k): its bases and angles those of the true poles, for each pole and power
+ * of k the total coefficient the true one, the impulses the same. Coefficients are those of powers of k, so that
+ * binomial(k, p) λ^(k−p) on either side is no difference. Exact.
+ *
+ * @param fits false where a term has a shape that can't stand for its pole: a real power for a pair
+ */
+record ModeEquations(List<ModeEquation> equations, boolean fits) {
+
+    ModeEquations {
+        equations = List.copyOf(equations);
+    }
+
+    static ModeEquations of(ExponentialSum claimed, OutputTruth truth, ClaimedSteps steps) {
+        Building building = new Building();
+        MatchedModes matched = MatchedModes.of(claimed, truth.poles());
+        matched.byPole().forEach(building::pole);
+        matched.extra().forEach(building::extra);
+        building.impulses(claimed.impulses(), ErrorCurve.trueImpulses(truth), steps);
+        return new ModeEquations(building.equations, building.fits);
+    }
+
+    private static final class Building {
+        private final List<ModeEquation> equations = new ArrayList<>();
+        private boolean fits = true;
+
+        private void add(About about, Optional<TruePole> pole, long power, List<Term> terms, Quantity written,
+                Quantity right) {
+            equations.add(new ModeEquation(about, pole, power, terms, new Equation(written, right)));
+        }
+
+        /** Both parts of a complex equation. */
+        private void addComplex(About about, TruePole pole, long power, List<Term> terms, Quantity written,
+                Quantity right) {
+            add(about, Optional.of(pole), power, terms, written.realPart(), right.realPart());
+            add(about, Optional.of(pole), power, terms, written.imaginaryPart(), right.imaginaryPart());
+        }
+
+        void pole(TruePole pole, List<ClaimedTerm> terms) {
+            terms.forEach(term -> base(pole, term));
+            Map<Integer, List<ClaimedTerm>> byPower = new LinkedHashMap<>();
+            terms.forEach(term -> byPower.computeIfAbsent(term.term().power(), p -> new ArrayList<>()).add(term));
+            List<Quantity> right = PowersOfK.of(pole);
+            for (int power = 0; power < right.size(); power++) {
+                if (!byPower.containsKey(power) && right.get(power).isZero() != Decision.YES) {
+                    addComplex(About.COEFFICIENT, pole, power, List.of(), Quantity.ZERO, right.get(power));
+                }
+            }
+            byPower.forEach((power, own) -> coefficient(pole, power, own,
+                    power < right.size() ? right.get(power) : Quantity.ZERO));
+        }
+
+        private void base(TruePole pole, ClaimedTerm claimed) {
+            Term term = claimed.term();
+            List<Term> terms = List.of(term);
+            boolean isWrittenOut = Quantity.sum(List.of(term.base(), term.angle())).decimals().isEmpty();
+            if (claimed.shape() == Shape.OSCILLATION && !isWrittenOut) {
+                polarBase(pole, claimed);
+            } else if (claimed.shape() == Shape.REAL) {
+                fits &= pole.isReal();
+                add(About.BASE, Optional.of(pole), term.power(), terms, term.base(), pole.value().realPart());
+            } else {
+                fits &= claimed.shape() == Shape.OSCILLATION || !pole.isReal();
+                addComplex(About.BASE, pole, term.power(), terms, claimed.pole(),
+                        claimed.isBelow() ? pole.value().conjugate() : pole.value());
+            }
+        }
+
+        private void polarBase(TruePole pole, ClaimedTerm claimed) {
+            Term term = claimed.term();
+            List<Term> terms = List.of(term);
+            boolean isNegative = isNegative(term.base());
+            Quantity modulus = pole.modulus();
+            add(About.BASE, Optional.of(pole), term.power(), terms, term.base(),
+                    isNegative ? modulus.negate() : modulus);
+            if (term.angle().decimals().isEmpty()) {
+                Quantity direction = (claimed.isBelow() ? pole.value().conjugate() : pole.value())
+                        .dividedBy(isNegative ? modulus.negate() : modulus);
+                addComplex(About.ANGLE, pole, term.power(), terms, Angles.unit(term.angle()), direction);
+            } else {
+                Quantity angle = claimed.isBelow() ? pole.angle().negate() : pole.angle();
+                add(About.ANGLE, Optional.of(pole), term.power(), terms, term.angle(),
+                        Angles.near(isNegative ? angle.plus(Quantity.pi()) : angle, term.angle()));
+            }
+        }
+
+        private static boolean isNegative(Quantity real) {
+            return real.enclose(64).real().isNegative();
+        }
+
+        private void coefficient(TruePole pole, int power, List<ClaimedTerm> claimed, Quantity right) {
+            List<Term> terms = claimed.stream().map(ClaimedTerm::term).toList();
+            if (pole.isReal()) {
+                add(About.COEFFICIENT, Optional.of(pole), power, terms, Quantity.sum(terms.stream()
+                        .map(term -> term.coefficient().times(Angles.unit(term.phase()).realPart())).toList()), right);
+            } else if (claimed.stream().anyMatch(term -> term.shape() != Shape.OSCILLATION)) {
+                complexCoefficient(pole, power, claimed, right);
+            } else if (claimed.size() == 1) {
+                amplitude(pole, power, claimed.get(0), right.times(Rational.TWO));
+            } else if (claimed.size() == 2 && terms.stream().allMatch(term -> term.phase().decimals().isEmpty())) {
+                twoDirections(pole, power, claimed, right.times(Rational.TWO));
+            } else {
+                addComplex(About.COEFFICIENT, pole, power, terms, Quantity.sum(claimed.stream().map(term ->
+                        term.term().coefficient().times(direction(term))).toList()), right.times(Rational.TWO));
+            }
+        }
+
+        /** e^(iφ) for a term that turns as the pole does, its conjugate for one that turns the other way. */
+        private static Quantity direction(ClaimedTerm claimed) {
+            Quantity unit = Angles.unit(claimed.term().phase());
+            return claimed.isBelow() ? unit.conjugate() : unit;
+        }
+
+        /** For λ and its conjugate apart, each in both parts; an oscillation counts half for either. */
+        private void complexCoefficient(TruePole pole, int power, List<ClaimedTerm> claimed, Quantity right) {
+            List<Quantity> upper = new ArrayList<>();
+            List<Quantity> lower = new ArrayList<>();
+            for (ClaimedTerm each : claimed) {
+                Quantity coefficient = each.term().coefficient();
+                if (each.shape() == Shape.OSCILLATION) {
+                    Quantity half = coefficient.times(direction(each)).times(Rational.HALF);
+                    upper.add(half);
+                    lower.add(half.conjugate());
+                } else {
+                    (each.isBelow() ? lower : upper).add(coefficient);
+                }
+            }
+            List<Term> terms = claimed.stream().map(ClaimedTerm::term).toList();
+            addComplex(About.COEFFICIENT, pole, power, terms, Quantity.sum(upper), right);
+            addComplex(About.COEFFICIENT, pole, power, terms, Quantity.sum(lower), right.conjugate());
+        }
+
+        /** a cos(θk + φ) is Re(target λ^k/r^k): a the modulus, φ the angle of the target, or both turned by half. */
+        private void amplitude(TruePole pole, int power, ClaimedTerm claimed, Quantity target) {
+            Term term = claimed.term();
+            List<Term> terms = List.of(term);
+            if (term.phase().decimals().isEmpty()) {
+                Quantity turnedBack = target.times(direction(claimed).conjugate());
+                add(About.COEFFICIENT, Optional.of(pole), power, terms, term.coefficient(), turnedBack.realPart());
+                add(About.PHASE, Optional.of(pole), power, terms, Quantity.ZERO, turnedBack.imaginaryPart());
+                return;
+            }
+            boolean isNegative = isNegative(term.coefficient());
+            Quantity modulus = target.times(target.conjugate()).squareRoot();
+            add(About.COEFFICIENT, Optional.of(pole), power, terms, term.coefficient(),
+                    isNegative ? modulus.negate() : modulus);
+            if (target.isZero() != Decision.YES) {
+                Quantity angle = Angles.of(isNegative ? target.negate() : target);
+                add(About.PHASE, Optional.of(pole), power, terms, term.phase(),
+                        Angles.near(claimed.isBelow() ? angle.negate() : angle, term.phase()));
+            }
+        }
+
+        /** a e + b f = target for two directions: each coefficient by itself where they differ. */
+        private void twoDirections(TruePole pole, int power, List<ClaimedTerm> claimed, Quantity target) {
+            Quantity e = direction(claimed.get(0));
+            Quantity f = direction(claimed.get(1));
+            Quantity across = e.times(f.conjugate()).imaginaryPart();
+            Term first = claimed.get(0).term();
+            Term second = claimed.get(1).term();
+            if (across.isZero() != Decision.NO) {
+                addComplex(About.COEFFICIENT, pole, power, List.of(first, second), e.times(first.coefficient())
+                        .plus(f.times(second.coefficient())), target);
+                return;
+            }
+            add(About.COEFFICIENT, Optional.of(pole), power, List.of(first), first.coefficient(),
+                    target.times(f.conjugate()).imaginaryPart().dividedBy(across));
+            add(About.COEFFICIENT, Optional.of(pole), power, List.of(second), second.coefficient(),
+                    target.times(e.conjugate()).imaginaryPart().dividedBy(across).negate());
+        }
+
+        void extra(ClaimedTerm claimed) {
+            Term term = claimed.term();
+            add(About.NOTHING, Optional.empty(), term.power(), List.of(term), term.coefficient().realPart(),
+                    Quantity.ZERO);
+        }
+
+        void impulses(SortedMap<Long, Quantity> claimed, SortedMap<Long, Quantity> right, ClaimedSteps steps) {
+            TreeSet<Long> at = new TreeSet<>(claimed.keySet());
+            at.addAll(right.keySet());
+            at.stream().filter(steps::includes).forEach(k -> add(About.IMPULSE, Optional.empty(), k, List.of(),
+                    claimed.getOrDefault(k, Quantity.ZERO), right.getOrDefault(k, Quantity.ZERO)));
+        }
+    }
+}
