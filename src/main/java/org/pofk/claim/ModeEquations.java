@@ -119,9 +119,18 @@ record ModeEquations(List<ModeEquation> equations, boolean fits) {
             } else if (claimed.size() == 2 && terms.stream().allMatch(term -> term.phase().decimals().isEmpty())) {
                 twoDirections(pole, power, claimed, right.times(Rational.TWO));
             } else {
-                addComplex(About.COEFFICIENT, pole, power, terms, Quantity.sum(claimed.stream().map(term ->
-                        term.term().coefficient().times(direction(term))).toList()), right.times(Rational.TWO));
+                sumOfDirections(pole, power, claimed, right.times(Rational.TWO));
             }
+        }
+
+        /** Σ a e^(iφ) = target, both parts. */
+        private void sumOfDirections(TruePole pole, int power, List<ClaimedTerm> claimed, Quantity target) {
+            List<Term> terms = claimed.stream().map(ClaimedTerm::term).toList();
+            add(About.COEFFICIENT, Optional.of(pole), power, terms, Quantity.sum(claimed.stream().map(each ->
+                    direction(each).realPart().times(each.term().coefficient())).toList()), target.realPart());
+            add(About.COEFFICIENT, Optional.of(pole), power, terms, Quantity.sum(claimed.stream().map(each ->
+                    direction(each).imaginaryPart().times(each.term().coefficient())).toList()),
+                    target.imaginaryPart());
         }
 
         /** e^(iφ) for a term that turns as the pole does, its conjugate for one that turns the other way. */
@@ -178,8 +187,7 @@ record ModeEquations(List<ModeEquation> equations, boolean fits) {
             Term first = claimed.get(0).term();
             Term second = claimed.get(1).term();
             if (across.isZero() != Decision.NO) {
-                addComplex(About.COEFFICIENT, pole, power, List.of(first, second), e.times(first.coefficient())
-                        .plus(f.times(second.coefficient())), target);
+                sumOfDirections(pole, power, claimed, target);
                 return;
             }
             add(About.COEFFICIENT, Optional.of(pole), power, List.of(first), first.coefficient(),
