@@ -11,6 +11,7 @@ import java.util.PriorityQueue;
 import org.pofk.exact.Ball;
 import org.pofk.exact.Decimals;
 import org.pofk.exact.Rational;
+import org.pofk.meaning.Decision;
 import org.pofk.meaning.ExponentialSum;
 
 /**
@@ -18,10 +19,11 @@ import org.pofk.meaning.ExponentialSum;
  * through one by one until what is bounded beyond them is smaller; where poles are slow, ranges of k are halved, the
  * one with the largest bound first, until none can hold an error that is larger by more than a thousandth.
  *
- * @param upTo no error is larger; empty where the error isn't bounded, or no bound was found
- * @param at   where it is that large, to a thousandth
+ * @param atLeast some error is as large, or comes arbitrarily near to it
+ * @param upTo    no error is larger; empty where the error isn't bounded, or no bound was found
+ * @param at      where it is that large, to a thousandth
  */
-record LargestError(Kind kind, Optional<Rational> upTo, OptionalLong at) {
+record LargestError(Kind kind, Rational atLeast, Optional<Rational> upTo, OptionalLong at) {
     private static final int FIRST_BITS = 160;
     private static final int MOST_BITS = 2_048;
     private static final int STEPS = 384;
@@ -67,6 +69,24 @@ record LargestError(Kind kind, Optional<Rational> upTo, OptionalLong at) {
                 measure == Measure.RELATIVE, at));
     }
 
+    /** What has to be said besides the size. */
+    Optional<String> remark() {
+        return switch (kind) {
+            case REACHED, APPROACHED -> Optional.empty();
+            case AT_MOST -> Optional.of("the largest error is a bound: it may be smaller");
+            case UNBOUNDED -> Optional.of("the error grows beyond every bound");
+            case NOT_DECIDED -> Optional.of("no bound on the error was found");
+        };
+    }
+
+    /** Whether no error is larger than an amount. */
+    Decision isAtMost(Rational amount) {
+        if (upTo.isPresent() && upTo.get().compareTo(amount) <= 0) {
+            return Decision.YES;
+        }
+        return atLeast.compareTo(amount) > 0 || kind == Kind.UNBOUNDED ? Decision.NO : Decision.UNDECIDED;
+    }
+
     private static Rational roundedUp(Rational size) {
         return size.isZero() ? size : Rational.of(new BigDecimal(size.numerator())
                 .divide(new BigDecimal(size.denominator()), TWO_DIGITS_UP));
@@ -102,18 +122,26 @@ record LargestError(Kind kind, Optional<Rational> upTo, OptionalLong at) {
 
         LargestError result() {
             if (steps.to().isEmpty() && error.grows()) {
-                return new LargestError(Kind.UNBOUNDED, Optional.empty(), OptionalLong.empty());
+                return without(Kind.UNBOUNDED);
             }
             long next = goThroughFirst();
             if (blind) {
-                return new LargestError(Kind.NOT_DECIDED, Optional.empty(), OptionalLong.empty());
+                return without(Kind.NOT_DECIDED);
             }
             return next < 0 ? told(reached) : halve(next);
         }
 
         private LargestError told(Kind kind) {
-            return new LargestError(kind, Optional.of(new Rational(most, BigInteger.ONE.shiftLeft(error.bits()))),
+            return new LargestError(kind, number(least), Optional.of(number(most)),
                     kind == Kind.REACHED ? at : OptionalLong.empty());
+        }
+
+        private LargestError without(Kind kind) {
+            return new LargestError(kind, number(least), Optional.empty(), OptionalLong.empty());
+        }
+
+        private Rational number(BigInteger units) {
+            return new Rational(units, BigInteger.ONE.shiftLeft(error.bits()));
         }
 
         /** The step to go on from; negative when all is said. */
@@ -209,7 +237,7 @@ record LargestError(Kind kind, Optional<Rational> upTo, OptionalLong at) {
                 add(top.residue, top.first, middle - 1, ranges);
                 add(top.residue, middle + 1, top.last, ranges);
             }
-            return blind ? new LargestError(Kind.NOT_DECIDED, Optional.empty(), OptionalLong.empty()) : told(reached);
+            return blind ? without(Kind.NOT_DECIDED) : told(reached);
         }
 
         /** The first step of the class that isn't before k. */
@@ -241,7 +269,7 @@ record LargestError(Kind kind, Optional<Rational> upTo, OptionalLong at) {
             for (int residue = 0; residue < error.classes(); residue++) {
                 Optional<Ball> beyond = error.beyond(residue, first);
                 if (beyond.isEmpty()) {
-                    return new LargestError(Kind.NOT_DECIDED, Optional.empty(), OptionalLong.empty());
+                    return without(Kind.NOT_DECIDED);
                 }
                 most = most.max(high(beyond.get().roundedTo(error.bits())));
             }

@@ -39,6 +39,11 @@ record ModeEquations(List<ModeEquation> equations, boolean fits) {
         return new ModeEquations(building.equations, building.fits);
     }
 
+    /** Without what they are about. */
+    List<Equation> plain() {
+        return equations.stream().map(ModeEquation::equation).toList();
+    }
+
     private static final class Building {
         private final List<ModeEquation> equations = new ArrayList<>();
         private boolean fits = true;
