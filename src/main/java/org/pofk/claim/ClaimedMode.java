@@ -46,6 +46,11 @@ record ClaimedMode(List<ClaimedTerm> terms) {
             return atFaceValue.imaginary().isNegative();
         }
 
+        /** Whether two real terms are for the same power of k: written apart, they may stand for two near poles. */
+        boolean isRival(ClaimedTerm other) {
+            return shape == Shape.REAL && other.shape == Shape.REAL && term.power() == other.term.power();
+        }
+
         /** How far a number, or its conjugate where that is nearer, is from all that the decimals allow. */
         double distance(ComplexBall number) {
             ComplexBall near = isBelow() ? number.conjugate() : number;

@@ -41,11 +41,11 @@ final class JudgedPart {
     static boolean isRight(ExponentialSum claimed, Claim claim, OutputTruth truth) {
         ClaimedSteps steps = ClaimedSteps.of(claim.steps(), claimed.scope());
         if (claim.within().isPresent()) {
-            return ExactSequence.of(claimed, truth, steps) == Decision.YES
+            return steps.areExact(claimed, truth) == Decision.YES
                     || Approximation.of(claimed, truth, steps, claim).holds() == Decision.YES;
         }
         return Refutation.of(claimed, truth, steps, FIRST_STEPS).isEmpty()
-                && (ExactSequence.of(claimed, truth, steps) == Decision.YES
+                && (steps.areExact(claimed, truth) == Decision.YES
                 || isRounded(ModeEquations.of(claimed, truth, steps)));
     }
 
@@ -59,7 +59,7 @@ final class JudgedPart {
         }
         OptionalLong refuted = Refutation.of(claimed, truth, steps, FIRST_STEPS);
         if (refuted.isEmpty()) {
-            Decision exact = ExactSequence.of(claimed, truth, steps);
+            Decision exact = steps.areExact(claimed, truth);
             if (exact == Decision.YES) {
                 return exact();
             }
@@ -109,7 +109,7 @@ final class JudgedPart {
     }
 
     private Judgement approximate() {
-        if (ExactSequence.of(claimed, truth, steps) == Decision.YES) {
+        if (steps.areExact(claimed, truth) == Decision.YES) {
             return exact();
         }
         Approximation approximation = Approximation.of(claimed, truth, steps, claim);

@@ -15,7 +15,7 @@ import org.pofk.exact.Rational;
 record LeastStepAbove(OptionalLong step, boolean decided) {
     private static final int FIRST_BITS = 192;
     private static final int MOST_BITS = 1_536;
-    private static final int MOST_RANGES = 4_000;
+    private static final int MOST_RANGES = 1_000;
     private static final long FARTHEST = 1L << 52;
 
     static LeastStepAbove of(ErrorCurve curve, Rational bound, Claim.Steps steps) {
@@ -79,9 +79,12 @@ record LeastStepAbove(OptionalLong step, boolean decided) {
         /** Equal within the most bits counts as not above. */
         private boolean isAbove(long k) {
             for (int bits = FIRST_BITS; bits <= MOST_BITS; bits *= 2) {
-                Ball size = (bits == FIRST_BITS ? error : curve.enclose(bits)).signedAt(k).abs();
-                if (size.lower().compareTo(bound) > 0 || size.upper().compareTo(bound) <= 0) {
-                    return size.lower().compareTo(bound) > 0;
+                Optional<Ball> size = (bits == FIRST_BITS ? error : curve.enclose(bits)).at(k);
+                if (size.isPresent() && size.get().lower().compareTo(bound) > 0) {
+                    return true;
+                }
+                if (size.isPresent() && size.get().upper().compareTo(bound) <= 0) {
+                    return false;
                 }
             }
             return false;

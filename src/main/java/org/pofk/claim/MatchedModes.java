@@ -62,7 +62,8 @@ record MatchedModes(Map<TruePole, List<ClaimedTerm>> byPole, List<ClaimedTerm> e
         for (ExponentialSum.Term term : claimed.terms()) {
             ClaimedTerm each = ClaimedTerm.of(term);
             ComplexBall upper = each.isBelow() ? each.atFaceValue().conjugate() : each.atFaceValue();
-            groups.stream().filter(group -> group.get(0).distanceAtFaceValue(upper) < SAME).findFirst()
+            groups.stream().filter(group -> group.get(0).distanceAtFaceValue(upper) < SAME)
+                    .filter(group -> group.stream().noneMatch(each::isRival)).findFirst()
                     .orElseGet(() -> {
                         groups.add(new ArrayList<>());
                         return groups.get(groups.size() - 1);

@@ -50,7 +50,7 @@ record ModeEquations(List<ModeEquation> equations, boolean fits) {
 
         private void add(About about, Optional<TruePole> pole, long power, List<Term> terms, Quantity written,
                 Quantity right) {
-            equations.add(new ModeEquation(about, pole, power, terms, new Equation(written, right)));
+            equations.add(new ModeEquation(about, pole, power, terms, new Equation(written, right.realPart())));
         }
 
         /** Both parts of a complex equation. */

@@ -1,6 +1,7 @@
 package org.pofk.claim;
 
 import java.util.ArrayList;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -8,7 +9,6 @@ import org.pofk.claim.ModeEquation.About;
 import org.pofk.exact.Rational;
 import org.pofk.meaning.ExponentialSum;
 import org.pofk.meaning.ExponentialSum.Term;
-import org.pofk.meaning.Quantity;
 import org.pofk.meaning.Written;
 
 /**
@@ -38,20 +38,22 @@ final class RoundedPoles {
 
     /** The true modes with the poles that are written for them. */
     private static List<Wave> withRightCoefficients(ModeEquations modes, OutputTruth truth) {
-        Map<TruePole, Quantity> written = new java.util.LinkedHashMap<>();
+        Map<TruePole, Wave> written = new LinkedHashMap<>();
         modes.equations().stream().filter(each -> each.about() == About.BASE).forEach(each ->
                 written.putIfAbsent(each.pole().orElseThrow(), upper(each)));
         List<Wave> waves = new ArrayList<>();
         for (TruePole pole : truth.poles()) {
-            Wave.of(pole).forEach(wave -> waves.add(
-                    new Wave(wave.coefficient(), wave.power(), written.getOrDefault(pole, wave.base()))));
+            Wave.of(pole).forEach(wave -> {
+                Wave like = written.getOrDefault(pole, wave);
+                waves.add(new Wave(wave.coefficient(), wave.power(), like.base(), like.radius()));
+            });
         }
         return waves;
     }
 
-    /** The base as written, turned by the angle, on the side of the pole. */
-    private static Quantity upper(ModeEquation equation) {
-        Quantity base = Wave.of(equation.terms().get(0)).base();
-        return base.enclose(64).imaginary().isNegative() ? base.conjugate() : base;
+    /** What is written for the pole, on its side of the real axis. */
+    private static Wave upper(ModeEquation equation) {
+        Wave wave = Wave.of(equation.terms().get(0));
+        return wave.base().enclose(64).imaginary().isNegative() ? wave.conjugate() : wave;
     }
 }

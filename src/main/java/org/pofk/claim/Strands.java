@@ -44,7 +44,7 @@ final class Strands {
         for (int i = 0; i < waves.size(); i++) {
             Wave other = waves.get(i);
             if (other.power() == wave.power() && Wave.areEqual(other.base(), wave.base()) == Decision.YES) {
-                waves.set(i, new Wave(other.coefficient().plus(wave.coefficient()), wave.power(), other.base()));
+                waves.set(i, other.withCoefficient(other.coefficient().plus(wave.coefficient())));
                 return true;
             }
         }
@@ -53,9 +53,7 @@ final class Strands {
 
     /** The same real part, from the upper half-plane. */
     private static Wave normal(Wave wave) {
-        return wave.base().enclose(BITS).imaginary().isNegative()
-                ? new Wave(wave.coefficient().conjugate(), wave.power(), wave.base().conjugate())
-                : wave;
+        return wave.base().enclose(BITS).imaginary().isNegative() ? wave.conjugate() : wave;
     }
 
     private static boolean vanishes(Quantity number) {

@@ -1,5 +1,6 @@
 package org.pofk.claim;
 
+import java.util.Optional;
 import org.pofk.exact.Ball;
 import org.pofk.exact.ComplexBall;
 import org.pofk.meaning.Decision;
@@ -20,15 +21,17 @@ record Turn(Place place, int order) {
     /** Inside the unit circle, on it, outside, or not told from it. */
     enum Place { INSIDE, ON, OUTSIDE, NOT_DECIDED }
 
-    /** Of a number that isn't zero. */
-    static Turn of(Quantity base) {
+    static Turn of(Wave wave) {
+        Quantity base = wave.base();
         ComplexBall ball = base.enclose(BITS);
         if (isReal(base, ball)) {
             Ball size = ball.real().abs();
             Quantity beyond = ball.real().isNegative() ? base.plus(Quantity.ONE) : base.minus(Quantity.ONE);
             return new Turn(place(size, beyond), ball.real().isNegative() ? 2 : ball.real().isPositive() ? 1 : 0);
         }
-        Place place = place(ball.modulus(), base.times(base.conjugate()).minus(Quantity.ONE));
+        Place place = wave.radius().isPresent()
+                ? Turn.of(new Wave(wave.coefficient(), 0, wave.radius().get(), Optional.empty())).place
+                : place(ball.modulus(), base.times(base.conjugate()).minus(Quantity.ONE));
         return new Turn(place, place == Place.ON ? order(base, ball) : 0);
     }
 

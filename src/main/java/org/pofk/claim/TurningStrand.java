@@ -4,7 +4,7 @@ package org.pofk.claim;
 record TurningStrand(Strand strand, Turn turn, Turn turnOfOpposite) {
 
     static TurningStrand of(Strand strand) {
-        Turn turn = Turn.of(strand.wave().base());
-        return new TurningStrand(strand, turn, strand.nearlyOpposite().map(wave -> Turn.of(wave.base())).orElse(turn));
+        Turn turn = Turn.of(strand.wave());
+        return new TurningStrand(strand, turn, strand.nearlyOpposite().map(Turn::of).orElse(turn));
     }
 }

@@ -1,6 +1,7 @@
 package org.pofk.claim;
 
 import java.util.List;
+import java.util.Optional;
 import org.pofk.exact.ComplexBall;
 import org.pofk.exact.Rational;
 import org.pofk.meaning.Decision;
@@ -10,13 +11,16 @@ import org.pofk.meaning.Quantity;
 /**
  * The real part of coefficient · k^power · base^k, a part of a real sequence; a conjugate pair is one wave with twice
  * the coefficient of the upper one. Exact.
+ *
+ * @param radius a real number with the modulus of the base, where one is written
  */
-record Wave(Quantity coefficient, int power, Quantity base) {
+record Wave(Quantity coefficient, int power, Quantity base, Optional<Quantity> radius) {
     private static final int TOLD_APART_BITS = 96;
 
     /** What a term of a formula means. */
     static Wave of(ExponentialSum.Term term) {
-        return new Wave(turned(term.coefficient(), term.phase()), term.power(), turned(term.base(), term.angle()));
+        return new Wave(turned(term.coefficient(), term.phase()), term.power(), turned(term.base(), term.angle()),
+                Optional.of(term.base()).filter(base -> base.conjugate() == base));
     }
 
     /** number · e^(i angle). */
@@ -31,15 +35,25 @@ record Wave(Quantity coefficient, int power, Quantity base) {
         List<Quantity> coefficients = PowersOfK.of(pole);
         Rational doubled = pole.isReal() ? Rational.ONE : Rational.TWO;
         return java.util.stream.IntStream.range(0, coefficients.size())
-                .mapToObj(power -> new Wave(coefficients.get(power).times(doubled), power, pole.value())).toList();
+                .mapToObj(power -> new Wave(coefficients.get(power).times(doubled), power, pole.value(),
+                        Optional.empty())).toList();
     }
 
     Wave negate() {
-        return new Wave(coefficient.negate(), power, base);
+        return withCoefficient(coefficient.negate());
+    }
+
+    Wave withCoefficient(Quantity other) {
+        return new Wave(other, power, base, radius);
+    }
+
+    /** The same real part from the other half-plane. */
+    Wave conjugate() {
+        return new Wave(coefficient.conjugate(), power, base.conjugate(), radius);
     }
 
     Wave over(Quantity divisor) {
-        return new Wave(coefficient, power, base.dividedBy(divisor));
+        return new Wave(coefficient, power, base.dividedBy(divisor), radius.map(size -> size.dividedBy(divisor)));
     }
 
     /** Whether the two numbers are the same, where that can be proved. */

@@ -2,6 +2,7 @@ package org.pofk.claim;
 
 import java.util.ArrayList;
 import java.util.List;
+import org.pofk.exact.Decimal;
 import org.pofk.exact.Decimals;
 import org.pofk.exact.Rational;
 import org.pofk.formula.FormulaParser;
@@ -76,7 +77,8 @@ final class WrittenFormulas {
     private String pair(TruePole pole, int p) {
         String steps = p == 0 ? "k" : "(k-" + p + ")";
         Quantity doubled = pole.coefficients().get(p).times(Rational.TWO);
-        String size = binomial(p) + power(number(pole.modulus()), p);
+        boolean isOnCircle = pole.modulus().minus(Quantity.ONE).isZero() == Decision.YES;
+        String size = binomial(p) + power(isOnCircle ? "1" : number(pole.modulus()), p);
         return switch (notation) {
             case POLAR, POWERS_OF_K -> number(pole.amplitude(p)) + size + "*cos(" + number(pole.angle()) + "*" + steps
                     + " + " + number(pole.phase(p)) + ")";
@@ -109,9 +111,19 @@ final class WrittenFormulas {
     }
 
     private String number(Quantity value) {
-        String text = value.rational().isPresent() ? Decimals.of(value.rational().get(), digits).text()
-                : value.isZero() == Decision.YES ? "0"
-                : Decimals.of(bits -> value.enclose(bits).real(), digits).text();
-        return text.startsWith("-") ? "(" + text + ")" : text;
+        Decimal decimal = decimal(value, digits);
+        // what has no point is exact: a rounded number gets digits until it has one
+        for (int more = 1; !decimal.exact() && decimal.text().chars().noneMatch(c -> c == '.' || c == 'e'); more++) {
+            decimal = decimal(value, digits + more);
+        }
+        return decimal.text().startsWith("-") ? "(" + decimal.text() + ")" : decimal.text();
+    }
+
+    private static Decimal decimal(Quantity value, int digits) {
+        if (value.rational().isPresent()) {
+            return Decimals.of(value.rational().get(), digits);
+        }
+        return value.isZero() == Decision.YES ? Decimal.ZERO
+                : Decimals.of(bits -> value.enclose(bits).real(), digits);
     }
 }
