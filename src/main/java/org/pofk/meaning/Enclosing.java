@@ -72,7 +72,7 @@ final class Enclosing extends Walk<ComplexBall> {
 
     @Override
     public ComplexBall power(Node.Power power) {
-        return of(power.base()).pow(power.exponent());
+        return Powers.of(of(power.base()), power.exponent());
     }
 
     @Override

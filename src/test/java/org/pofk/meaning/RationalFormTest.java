@@ -7,7 +7,7 @@ import java.math.BigDecimal;
 import java.util.List;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
-import org.junit.jupiter.params.provider.ValueSource;
+import org.junit.jupiter.params.provider.MethodSource;
 import org.pofk.exact.ComplexBall;
 import org.pofk.exact.Rational;
 import org.pofk.formula.FormulaParser;
@@ -40,14 +40,7 @@ class RationalFormTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {
-        "0", "2/3", "z", "z*(0.0025 z + 0.00095)/((z-1)*(z-0.2317)*(z-0.4508))", "z/(z-1) + 2/(z-0.5)^2 - 0.1",
-        "1/(1 - 0.4 z^(-1))", "(0.2 + 0.3z^-1)/((1 - 0.4z^-1)(1 - z^-1)^2)", "z(0.1 + 0.5/(z-1))",
-        "1/(1 + 1/(1 + 1/z))", "((z+1)/(z-2))/((z-3)/(z+4))", "(1/(z-1) + 1/(z-0.5))^2", "(1/(z-1) + 1/(z-1)^2)^(-1)",
-        "z^3 - 1.8z^2 + 0.9z - 0.1", "3(z-1)(z-2) + (z-0.5)^2", "-z/(-z + 0.5)", "z*z/z^3", "(2z)^2/(4z)",
-        "sqrt(2) z/(z - cos(2pi/5))", "z/(z^2 - 2*0.5*cos(39.66 deg)*z + 0.25)", "e^(-0.1)*z/(z - exp(-0.1))",
-        "0.2z/(z - 0.3 - 0.2i) + 0.2z/(z - 0.3 + 0.2i)", "(z-1)^0", "0*z + z/(z-1)", "z - z", "z/(0.5 z - 0.5z + 1)"
-    })
+    @MethodSource("org.pofk.meaning.Notations#inZ")
     void meansAtEachPointWhatTheTextGives(String text) throws RefusedException {
         ParsedFormula formula = parsed(text);
         RationalForm form = RationalForm.of(formula, "z", Precision.AS_WRITTEN);
