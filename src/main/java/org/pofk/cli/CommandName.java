@@ -13,6 +13,7 @@ enum CommandName {
     INSPECT(InspectCommand::new),
     SIMULATE(SimulateCommand::new),
     CHECK(CheckCommand::new),
+    WHEN(WhenCommand::new),
     NEW(NewCommand::new),
     HELP(HelpCommand::new),
     VERSION(VersionCommand::new);

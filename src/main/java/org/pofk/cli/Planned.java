@@ -8,7 +8,6 @@ import java.util.Optional;
 enum Planned {
     REPORT("writes the derivation as a document"),
     DRAW("draws the state diagram and p(k)"),
-    WHEN("says from which step a condition holds, and whether for ever"),
     PASSAGE("says how long until a set of states is entered: law, mean, percentiles"),
     TOTAL("adds up what is spent or produced over steps"),
     DEPENDABILITY("says availability, mean time to failure and repair, and their kin"),

@@ -95,6 +95,10 @@ final class Json {
 
     void count(String field, long count) {
         name(field);
+        count(count);
+    }
+
+    void count(long count) {
         write(() -> generator.writeNumber(count));
     }
 

@@ -2,6 +2,7 @@ package org.pofk.cli;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.ObjectMapper;
@@ -63,6 +64,19 @@ class SchemaTest {
         Run run = Run.of("simulate", "test-data/models/pump-pair.yaml", "--as", "json", "--runs", "200");
         assertEquals(0, run.exitCode(), run.notes());
         assertEquals(Set.of(), schema("simulation").validate(MAPPER.readTree(run.answer())));
+    }
+
+    @ParameterizedTest
+    @ValueSource(strings = {"--at-least 0.99", "--at-most 1/1000", "--settles-within 1e-6", "--at-least 9"})
+    void answersToWhenKeepTheirSchema(String condition) throws Exception {
+        for (String pattern : Patterns.names()) {
+            String output = MAPPER.readTree(Run.of("inspect", "test-data/models/" + pattern + ".yaml", "--as", "json")
+                    .answer()).get("states").get(0).asText();
+            Run run = Run.of("when", "test-data/models/" + pattern + ".yaml", "--of", output,
+                    condition.split(" ")[0], condition.split(" ")[1], "--as", "json");
+            assertTrue(List.of(0, 4).contains(run.exitCode()), pattern + run.notes());
+            assertEquals(Set.of(), schema("when").validate(MAPPER.readTree(run.answer())), pattern);
+        }
     }
 
     @Test

@@ -1,0 +1,153 @@
+package org.pofk.answer;
+
+import java.math.BigInteger;
+import java.util.List;
+import java.util.Optional;
+import java.util.PriorityQueue;
+import org.pofk.chain.Chain;
+import org.pofk.chain.Output;
+import org.pofk.exact.Ball;
+import org.pofk.exact.Enclosed;
+import org.pofk.exact.Rational;
+import org.pofk.modes.ClosedForm;
+import org.pofk.transform.Sequence;
+import org.pofk.transform.Transform;
+import org.pofk.transform.Transforms;
+
+/**
+ * The highest value an output ever has, or comes near to. Certified: stretches of steps that can't hold a higher one
+ * are left out, all others halved down to single steps.
+ *
+ * @param value what is reached at {@code at}, or only approached as k grows
+ * @param at    the first step that reaches it; empty where it is a value of the long run that no step reaches
+ */
+public record Peak(StepValue value, Optional<Long> at) {
+    private static final int BITS = 256;
+    private static final int MOST_STRETCHES = 100_000;
+    private static final int MOST_DIGITS = 40;
+    private static final long MOST_CLASSES = 120;
+
+    /** A stretch of one residue class with the most its values can be. */
+    private record Stretch(long from, long to, long modulus, Rational atMost) {
+    }
+
+    /** Empty where the long run is none, or where the bounds on the work don't decide it. */
+    static Optional<Peak> highest(Chain chain, ClosedForm form, LongRun longRun) {
+        List<Rational> limits = LongRunValues.of(longRun);
+        return limits.isEmpty() ? Optional.empty() : new Search(chain, form, limits).highest();
+    }
+
+    /** The lowest, as the highest of the output with its sign turned. */
+    static Optional<Peak> lowest(Chain chain, Output output) {
+        Output turned = new Output(output.name(), output.coefficients().stream().map(Rational::negate).toList(),
+                output.constant().negate(), output.definition());
+        Transform transform = Transforms.of(chain, List.of(turned)).get(0);
+        return highest(chain, ClosedForm.of(transform), LongRun.of(chain, transform)).map(Peak::turned);
+    }
+
+    private Peak turned() {
+        return new Peak(new StepValue(value.k(), value.exact().map(Rational::negate), value.enclosure().negate()), at);
+    }
+
+    /** The search for one output. */
+    private static final class Search {
+        private final Chain chain;
+        private final ClosedForm form;
+        private final List<Rational> limits;
+        private final DecayingSum sum;
+        private final long modulus;
+        private final Rational longRun;
+        private Optional<Long> best = Optional.empty();
+        private Ball bestValue;
+
+        private Search(Chain chain, ClosedForm form, List<Rational> limits) {
+            this.chain = chain;
+            this.form = form;
+            this.limits = limits;
+            this.sum = DecayingSum.of(form, BITS);
+            this.modulus = sum.stride(limits.size(), Math.max(2L * limits.size(), MOST_CLASSES));
+            this.longRun = limits.stream().reduce(Rational::max).orElseThrow();
+            this.bestValue = Ball.of(longRun, BITS);
+        }
+
+        private Optional<Peak> highest() {
+            Optional<Sequence> exact = Optional.empty();
+            for (long k = 0; k < form.withoutImpulsesFrom() + 1L; k++) {
+                exact = Optional.of(exact.orElseGet(() -> Sequence.of(chain, form.transform())));
+                offer(k, Ball.of(exact.get().at(k), BITS));
+            }
+            for (int digits = 4; digits <= MOST_DIGITS; digits *= 2) {
+                Rational margin = Rational.of(10).pow(-digits);
+                long from = DecayBound.of(DecayingMode.of(form), digits)
+                        .settledFrom(BigInteger.valueOf(form.withoutImpulsesFrom())).longValueExact();
+                if (!searched(from)) {
+                    return Optional.empty();
+                }
+                if (bestValue.lower().compareTo(longRun.plus(margin)) > 0) {
+                    return best.filter(k -> k <= Integer.MAX_VALUE).map(k -> new Peak(value(k), best));
+                }
+            }
+            return approachedFromBelow() ? Optional.of(new Peak(new StepValue(0, Optional.of(longRun),
+                    Enclosed.of(longRun)), best)) : Optional.empty();
+        }
+
+        private StepValue value(long k) {
+            return StepValues.of(chain, List.of(form), List.of(Math.toIntExact(k))).get(0).get(0);
+        }
+
+        /** Every class that tends to the highest limit stays below it in the end. */
+        private boolean approachedFromBelow() {
+            for (long residue = 0; residue < modulus; residue++) {
+                if (limits.get((int) (residue % limits.size())).equals(longRun)) {
+                    EventualSign.Kind kind = EventualSign.of(form, (int) (residue % 2), form.withoutImpulsesFrom()).kind();
+                    if (kind != EventualSign.Kind.NEGATIVE && kind != EventualSign.Kind.ZERO) {
+                        return false;
+                    }
+                }
+            }
+            return true;
+        }
+
+        private void offer(long k, Ball value) {
+            if (value.lower().compareTo(bestValue.upper()) > 0
+                    || value.isExact() && value.lower().equals(bestValue.upper()) && best.isEmpty()) {
+                best = Optional.of(k);
+                bestValue = value;
+            }
+        }
+
+        private boolean searched(long to) {
+            PriorityQueue<Stretch> open = new PriorityQueue<>((a, b) -> b.atMost.compareTo(a.atMost) != 0
+                    ? b.atMost.compareTo(a.atMost) : Long.compare(a.from, b.from));
+            for (long residue = 0; residue < modulus; residue++) {
+                long from = form.withoutImpulsesFrom()
+                        + Math.floorMod(residue - form.withoutImpulsesFrom(), modulus);
+                if (from <= to) {
+                    open.add(stretch(from, to - Math.floorMod(to - residue, modulus)));
+                }
+            }
+            for (int looked = 0; !open.isEmpty(); looked++) {
+                Stretch next = open.poll();
+                if (next.atMost.compareTo(bestValue.upper()) <= 0) {
+                    return true;
+                }
+                if (looked > MOST_STRETCHES) {
+                    return false;
+                }
+                if (next.from < next.to) {
+                    long middle = next.from + (next.to - next.from) / modulus / 2 * modulus;
+                    open.add(stretch(next.from, middle));
+                    open.add(stretch(middle + modulus, next.to));
+                }
+            }
+            return true;
+        }
+
+        private Stretch stretch(long from, long to) {
+            Ball limit = Ball.of(limits.get((int) (from % limits.size())), BITS);
+            Ball all = limit.plus(sum.over(from, to, modulus));
+            offer(from, from == to ? all : limit.plus(sum.over(from, from, modulus)));
+            return new Stretch(from, to, modulus, all.upper());
+        }
+    }
+}

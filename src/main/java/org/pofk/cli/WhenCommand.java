@@ -1,0 +1,92 @@
+package org.pofk.cli;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.stream.Stream;
+import org.pofk.answer.When.Condition;
+import org.pofk.answer.WhenModel;
+import org.pofk.chain.Model;
+import org.pofk.chain.Output;
+import org.pofk.report.Style;
+import org.pofk.report.WhenDocument;
+import org.pofk.report.WhenJson;
+import org.pofk.text.RefusedException;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
+import picocli.CommandLine.Option;
+
+/** {@code pofk when MODEL}: from which step a condition holds. */
+@Command(description = {"Says at which step a condition on p(k) holds first, and from which on for ever;",
+    "or that it never does. Proved: no step is passed over."})
+final class WhenCommand implements Work {
+    @Mixin
+    private ModelOptions model;
+
+    @Option(names = "--of", paramLabel = "NAME", description = "an output, a set or a state; repeatable")
+    private List<String> of = new ArrayList<>();
+
+    @Option(names = "--at-least", paramLabel = "VALUE", converter = Amount.Converter.class,
+            description = "p(k) not below this: 0.99, 1/1000, 5%%")
+    private Optional<Amount> atLeast = Optional.empty();
+
+    @Option(names = "--at-most", paramLabel = "VALUE", converter = Amount.Converter.class,
+            description = "p(k) not above this")
+    private Optional<Amount> atMost = Optional.empty();
+
+    @Option(names = "--settles-within", paramLabel = "VALUE", converter = Amount.Converter.class,
+            description = "p(k) no farther than this from its long run; 1%% is a part of the long run")
+    private Optional<Amount> settlesWithin = Optional.empty();
+
+    @Mixin
+    private ShowingOptions showing;
+
+    @Mixin
+    private WritingOptions writing;
+
+    @Mixin
+    private BudgetOptions budget;
+
+    @Mixin
+    private CommonOptions common;
+
+    @Override
+    public ExitCode run(Streams streams) throws RefusedException, UsageException, WritingException {
+        Style style = showing.style();
+        Format format = writing.format();
+        writing.save().check();
+        WhenModel.Asked asked = asked();
+        Model read = model.read();
+        List<Output> outputs = AskedOutputs.of(read.chain(), of);
+        if (format == Format.JSON && outputs.size() != 1) {
+            throw new UsageException("as JSON one output is answered at a time; name it with --of");
+        }
+        Worker.Outcome<WhenModel> outcome = Worker.within(budget.limit(streams), streams.notes(), published ->
+                WhenModel.of(read, outputs, asked, published));
+        if (outcome.published().isEmpty()) {
+            streams.notes().println("pofk: nothing was decided within the budget");
+            return ExitCode.NOT_DECIDED;
+        }
+        WhenModel found = outcome.published().get();
+        writing.save().write(format == Format.JSON
+                ? WhenJson.write(read, found.answers().get(0), style.digits())
+                : writing.text(WhenDocument.of(found, style)), streams);
+        return found.isDecided() && outcome.finished() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
+    }
+
+    private WhenModel.Asked asked() throws UsageException {
+        List<WhenModel.Asked> all = Stream.of(
+                atLeast.map(amount -> new WhenModel.Asked(Condition.Kind.AT_LEAST, amount.value(), false)),
+                atMost.map(amount -> new WhenModel.Asked(Condition.Kind.AT_MOST, amount.value(), false)),
+                settlesWithin.map(amount -> new WhenModel.Asked(Condition.Kind.SETTLED, amount.value(),
+                        amount.isPercent()))).flatMap(Optional::stream).toList();
+        if (all.size() != 1) {
+            throw new UsageException("say what is wanted: one of --at-least VALUE, --at-most VALUE and"
+                    + " --settles-within VALUE");
+        }
+        if (all.get(0).kind() == Condition.Kind.SETTLED && all.get(0).bound().signum() <= 0) {
+            throw new UsageException("--settles-within takes a distance above zero, like 1e-6 or 1%");
+        }
+        return all.get(0);
+    }
+}

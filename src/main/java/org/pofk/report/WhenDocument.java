@@ -1,0 +1,113 @@
+package org.pofk.report;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import org.pofk.answer.Peak;
+import org.pofk.answer.When;
+import org.pofk.answer.When.ResidueClass;
+import org.pofk.answer.WhenModel;
+import org.pofk.exact.Decimals;
+import org.pofk.exact.Rational;
+import org.pofk.report.Document.Block;
+import org.pofk.report.Document.Heading;
+import org.pofk.report.Document.Labelled;
+import org.pofk.report.Document.Paragraph;
+import org.pofk.report.Document.Table;
+
+/** When outputs meet a condition, as a document. */
+public final class WhenDocument {
+    private final WhenModel found;
+    private final Style style;
+    private final List<Block> blocks = new ArrayList<>();
+
+    private WhenDocument(WhenModel found, Style style) {
+        this.found = found;
+        this.style = style;
+    }
+
+    public static Document of(WhenModel found, Style style) {
+        WhenDocument document = new WhenDocument(found, style);
+        document.blocks.addAll(ModelHead.of(found.model()));
+        found.answers().forEach(document::answer);
+        document.blocks.add(new Paragraph(Caution.TEXT));
+        return new Document(document.blocks);
+    }
+
+    private void answer(WhenModel.Answer answer) {
+        blocks.add(new Heading(2, OutputProse.title(answer.output())));
+        label("asked", asked(answer.when().condition()));
+        label("answer", inWords(answer.when()));
+        answer.nearest().ifPresent(peak -> label("nearest", nearest(peak, answer.when().condition())));
+        answer.when().first().ifPresent(first -> label("first", "k = " + first));
+        answer.when().forEverFrom().ifPresent(from -> label("for ever", "from k = " + from + " on"));
+        label("long run", new LongRunProse(style.digits()).of(answer.longRun()));
+        answer.settling().ifPresent(settling ->
+                label("settles", SettlingProse.of(settling, answer.longRun(), style.digits())));
+        if (answer.when().classes().size() > 1) {
+            blocks.add(classes(answer.when().classes()));
+        }
+        if (!answer.around().isEmpty()) {
+            blocks.add(Table.ofText("Values there", List.of("k", answer.output().name() + "(k)"),
+                    answer.around().stream().map(value -> List.of(String.valueOf(value.k()),
+                            ValueText.of(value, style.digits()))).toList()));
+        }
+    }
+
+    private void label(String label, String text) {
+        blocks.add(new Labelled(label, text));
+    }
+
+    private String asked(When.Condition condition) {
+        return switch (condition.kind()) {
+            case AT_LEAST -> "not below " + number(condition.bound());
+            case AT_MOST -> "not above " + number(condition.bound());
+            case SETTLED -> "within " + number(condition.bound()) + " of its long run";
+        };
+    }
+
+    /** Exact as a fraction where its decimals don't say it all. */
+    private String number(Rational value) {
+        return Decimals.of(value, style.digits()).exact() ? Decimals.of(value, style.digits()).text()
+                : value + " ≈ " + Decimals.of(value, style.digits()).text();
+    }
+
+    private String nearest(Peak peak, When.Condition condition) {
+        String value = peak.value().exact().map(this::number)
+                .orElseGet(() -> ValueText.of(peak.value(), style.digits()));
+        return (condition.kind() == When.Condition.Kind.AT_LEAST ? "the highest value is " : "the lowest value is ")
+                + value + peak.at().map(k -> ", at k = " + k).orElse(", approached as k grows and never reached");
+    }
+
+    private static String inWords(When when) {
+        return switch (when.reason()) {
+            case FOR_EVER -> when.forEverFrom().equals(Optional.of(0L)) ? "at every step"
+                    : when.first().equals(when.forEverFrom()) ? "from a step on for ever; not before"
+                    : "from a step on for ever; now and then before";
+            case ONLY_IN_SOME_CLASSES -> "for ever only at some steps of a cycle, see the table";
+            case AGAIN_AND_AGAIN -> "met and missed again and again, for ever";
+            case ONLY_FOR_A_WHILE -> "only for a while: from some step on never again";
+            case NEVER -> "never, proved for every k";
+            case NO_LONG_RUN -> "not decided: there is neither a limit nor a cycle to compare with";
+            case APPROACH_NOT_DECIDED -> "not decided: the value asked for is the long run itself, and nothing known"
+                    + " decides from which side it is approached in the end";
+            case TOO_MANY_STEPS -> "not decided: too many steps would have to be looked at";
+        };
+    }
+
+    private static Table classes(List<ResidueClass> classes) {
+        return Table.ofText("By step", List.of("k", "in the end", "first", "for ever from"), classes.stream()
+                .map(each -> List.of("≡ " + each.residue() + " mod " + each.modulus(), end(each.end()),
+                        each.first().map(String::valueOf).orElse("–"),
+                        each.forEverFrom().map(String::valueOf).orElse("–"))).toList());
+    }
+
+    private static String end(When.End end) {
+        return switch (end) {
+            case MET -> "met";
+            case FAILED -> "not met";
+            case BOTH_FOR_EVER -> "met now and then";
+            case APPROACH_NOT_DECIDED, TOO_MANY_STEPS -> "not decided";
+        };
+    }
+}
