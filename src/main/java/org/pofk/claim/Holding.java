@@ -4,7 +4,6 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
-import java.util.Optional;
 import java.util.OptionalLong;
 import java.util.function.Function;
 import org.pofk.claim.Judgement.JudgedNumber;
@@ -59,13 +58,13 @@ final class Holding {
         remark(sentence);
     }
 
-    /** The judgement; {@code right} makes the right statement of the right numbers, in the order held. */
-    Judgement judgement(Function<List<String>, String> right) {
+    /** The judgement; {@code right} makes the right statement of the right numbers. */
+    Judgement judgement(Function<RightTexts, String> right) {
         return judgement(right, OptionalLong.empty());
     }
 
     /** The judgement of what is claimed for one step. */
-    Judgement judgement(Function<List<String>, String> right, OptionalLong step) {
+    Judgement judgement(Function<RightTexts, String> right, OptionalLong step) {
         List<Decision> exact = held.stream().map(Held::isExact).toList();
         List<Equation> equations = new ArrayList<>();
         for (int i = 0; i < held.size(); i++) {
@@ -75,10 +74,9 @@ final class Holding {
         }
         RightDecimals decimals = RightDecimals.of(equations);
         boolean isExact = equations.isEmpty();
+        Verdict byNumbers = isExact ? Verdict.EXACT : Closeness.verdict(claim, held, decimals.areRight());
         Verdict verdict = besides == Decision.NO ? Verdict.WRONG
-                : isExact && besides == Decision.YES ? Verdict.EXACT
-                : besides == Decision.UNDECIDED ? Verdict.UNDECIDED
-                : Closeness.verdict(claim, held, decimals.areRight());
+                : besides == Decision.UNDECIDED && byNumbers != Verdict.WRONG ? Verdict.UNDECIDED : byNumbers;
         if (!isExact) {
             Closeness.remarks(claim, held).forEach(this::remark);
         }
@@ -87,7 +85,7 @@ final class Holding {
                 number.written().text() + " is cut off, not rounded: " + number.right()));
         return new Judgement(verdict, NumberError.of(claim, held, step),
                 verdict == Verdict.WRONG ? step : OptionalLong.empty(), numbers, remarks,
-                right.apply(texts(exact, decimals)));
+                right.apply(new RightTexts(held, exact, decimals)));
     }
 
     /** The decimals of exact numbers are right as they stand. */
@@ -102,38 +100,5 @@ final class Holding {
         }
         return numbers.values().stream()
                 .sorted((a, b) -> a.written().span().start().compareTo(b.written().span().start())).toList();
-    }
-
-    private List<String> texts(List<Decision> exact, RightDecimals decimals) {
-        List<String> texts = new ArrayList<>();
-        for (int i = 0; i < held.size(); i++) {
-            texts.add(exact.get(i) == Decision.YES || standsAsWritten(held.get(i), decimals)
-                    ? held.get(i).stated().text().text() : rightText(held.get(i), decimals));
-        }
-        return texts;
-    }
-
-    /** Right to its digits, and none of them cut off. */
-    private static boolean standsAsWritten(Held held, RightDecimals decimals) {
-        List<Written> written = held.stated().value().decimals();
-        return !written.isEmpty() && held.isRight() == Decision.YES
-                && written.stream().noneMatch(each -> decimals.fits(each, Fit.CUT_OFF));
-    }
-
-    private String rightText(Held held, RightDecimals decimals) {
-        FormulaText text = held.stated().text();
-        List<Written> written = held.stated().value().decimals();
-        if (written.size() == 1 && RightText.isSignedDecimal(text.parsed().formula())) {
-            return AuthorDigits.like(written.get(0), held.right());
-        }
-        Map<Written, String> replaced = new LinkedHashMap<>();
-        written.forEach(each -> decimals.right(each)
-                .ifPresent(value -> replaced.put(each, AuthorDigits.like(each, value))));
-        return Optional.of(replaced).filter(all -> !written.isEmpty() && all.size() == written.size())
-                .flatMap(all -> RightText.with(text, all)).orElseGet(() -> RightNumber.of(held.right(), writtenAnywhere()));
-    }
-
-    private List<Written> writtenAnywhere() {
-        return held.stream().flatMap(each -> each.stated().value().decimals().stream()).toList();
     }
 }

@@ -32,7 +32,7 @@ final class JudgedLongRun {
             }
             truth.about(part.output()).longRun().accept(judged.new Against(part.output().name(), numbers));
         }
-        return judged.holding.judgement(judged::right);
+        return judged.holding.judgement(texts -> judged.right(texts.all()));
     }
 
     private String right(List<String> texts) {

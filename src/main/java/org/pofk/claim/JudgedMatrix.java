@@ -2,7 +2,6 @@ package org.pofk.claim;
 
 import java.util.ArrayList;
 import java.util.List;
-import java.util.stream.Collectors;
 import org.pofk.chain.Model.Convention;
 import org.pofk.chain.SparseMatrix;
 import org.pofk.exact.Rational;
@@ -55,7 +54,7 @@ final class JudgedMatrix {
         if (wrong > 0 && isTransposed()) {
             holding.remark("it is the matrix turned: its rows stand in the columns");
         }
-        return holding.judgement(texts -> inRows(texts, size));
+        return holding.judgement(texts -> inRows(texts.all(), size));
     }
 
     private void remark(int i, int j) {
@@ -103,6 +102,6 @@ final class JudgedMatrix {
                 all.add(right(i, j).toString());
             }
         }
-        return all.stream().collect(Collectors.collectingAndThen(Collectors.toList(), texts -> inRows(texts, size)));
+        return inRows(all, size);
     }
 }

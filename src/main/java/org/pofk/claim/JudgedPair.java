@@ -41,7 +41,7 @@ final class JudgedPair {
         if (pairs.size() > 1 && radius.isEmpty() && angle.isEmpty()) {
             holding.undecided(stated.output().name() + " has " + pairs.size()
                     + " pairs; a radius or an angle tells which is meant");
-            return holding.judgement(texts -> String.join(", ", texts));
+            return holding.judgement(texts -> String.join(", ", texts.all()));
         }
         boolean isTurned = radius.filter(JudgedPair::isNegative).isPresent();
         Quantity halfTurn = isTurned ? Quantity.pi() : Quantity.ZERO;
@@ -59,7 +59,7 @@ final class JudgedPair {
         } else {
             holdAmplitude(meant, amplitude, phase);
         }
-        return holding.judgement(this::right);
+        return holding.judgement(texts -> right(texts.all()));
     }
 
     private void holdAmplitude(Candidate meant, Optional<StatedNumber> amplitude, Optional<StatedNumber> phase) {

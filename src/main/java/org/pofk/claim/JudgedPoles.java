@@ -46,7 +46,7 @@ final class JudgedPoles {
         List<String> missing = matching.unmatched().stream().map(place -> RightNumber.of(right.get(place), digits))
                 .toList();
         missing.forEach(text -> holding.wrong("the pole " + text + " is missing"));
-        return holding.judgement(texts -> Counted.of(texts, missing));
+        return holding.judgement(texts -> Counted.of(texts.all(), missing));
     }
 
     /** What a number is that isn't one of the poles left. */

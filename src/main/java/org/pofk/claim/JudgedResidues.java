@@ -46,7 +46,7 @@ final class JudgedResidues {
         matching.unmatched().stream().map(places::get).filter(place -> !isConjugateOfListed(place, matching))
                 .forEach(place -> holding.remark("nothing is stated for the pole "
                         + RightNumber.of(place.value(), List.of())));
-        return holding.judgement(texts -> right(texts));
+        return holding.judgement(texts -> right(texts.all()));
     }
 
     private boolean isConjugateOfListed(AllPoles.Place place, Matching matching) {

@@ -29,7 +29,7 @@ final class JudgedStart {
                 holding.wrong("the start in " + chain.states().get(state) + " is " + start + ", not zero");
             }
         }
-        return holding.judgement(texts -> right(chain, places, texts));
+        return holding.judgement(texts -> right(chain, places, texts.all()));
     }
 
     private static String right(Chain chain, Map<Integer, Integer> places, List<String> texts) {

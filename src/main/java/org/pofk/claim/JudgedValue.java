@@ -50,7 +50,7 @@ final class JudgedValue {
     private static Judgement against(Rational value, Statement.Value stated, Claim claim) throws RefusedException {
         Holding holding = new Holding(claim);
         holding.hold(stated.is(), Quantity.of(value));
-        return holding.judgement(texts -> stated.output().name() + " at " + stated.at() + ": " + texts.get(0),
+        return holding.judgement(texts -> stated.output().name() + " at " + stated.at() + ": " + texts.all().get(0),
                 OptionalLong.of(stated.at()));
     }
 

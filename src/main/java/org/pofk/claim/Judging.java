@@ -33,7 +33,7 @@ public final class Judging implements Statement.Visitor<Judgement> {
 
     @Override
     public Judgement polynomial(Statement.MatrixPolynomial polynomial) {
-        throw new AssertionError("to come");
+        return judged(() -> JudgedPolynomial.of(polynomial, claim, truth));
     }
 
     @Override

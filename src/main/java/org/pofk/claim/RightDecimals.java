@@ -19,6 +19,7 @@ import org.pofk.meaning.WrittenNumber;
  * for, and where that isn't possible, all values that the decimals allow are held against what should come out.
  */
 record RightDecimals(List<Equation> equations, Solution solution) {
+    private static final int BITS = 96;
 
     static RightDecimals of(List<Equation> equations) {
         return new RightDecimals(List.copyOf(equations), Equations.solve(equations));
@@ -61,6 +62,17 @@ record RightDecimals(List<Equation> equations, Solution solution) {
             right.put(written, number.right());
         }
         return equation.written().with(right).minus(equation.right()).isZero();
+    }
+
+    /** Whether the right values in the decimals' places make all equations hold. */
+    boolean mend() {
+        Map<Written, Quantity> right = new LinkedHashMap<>();
+        solution.numbers().forEach((written, number) -> right.put(written, number.right()));
+        return equations.stream().allMatch(equation -> {
+            Quantity mended = equation.written().with(right);
+            return mended.decimals().isEmpty() ? mended.minus(equation.right()).isZero() == Decision.YES
+                    : mended.spread(BITS).overlaps(equation.right().enclose(BITS));
+        });
     }
 
     /** Those whose right value is known, in order of reading. */

@@ -1,6 +1,8 @@
 package org.pofk.claim;
 
 import java.util.List;
+import org.pofk.exact.Rational;
+import org.pofk.formula.Formula;
 import org.pofk.meaning.Decision;
 import org.pofk.meaning.Quantity;
 import org.pofk.meaning.Written;
@@ -29,6 +31,17 @@ final class RightNumber {
         String imaginary = AuthorDigits.significant(number.imaginaryPart(), digits);
         return (real.equals("0") ? "" : real) + (imaginary.startsWith("-") ? " - " + imaginary.substring(1)
                 : real.equals("0") ? imaginary : " + " + imaginary) + " i";
+    }
+
+    /** Whether the author gives an angle in degrees. */
+    static boolean isInDegrees(FormulaText text) {
+        return text.parsed().nodes().anyMatch(node -> node.formula() == Formula.Constant.DEGREE);
+    }
+
+    /** An angle in degrees, as the author of a text writes them. */
+    static String inDegrees(Quantity angle, FormulaText text, List<Written> decimals) {
+        return of(angle.times(Rational.of(180)).dividedBy(Quantity.pi()), decimals)
+                + (text.notation() == FormulaText.Notation.LATEX ? "^{\\circ}" : " deg");
     }
 
     private static boolean isReal(Quantity number) {

@@ -2,13 +2,18 @@ package org.pofk.claim;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import org.pofk.exact.Factorization.Factor;
 import org.pofk.exact.Polynomial;
 import org.pofk.exact.Rational;
 import org.pofk.exact.Root;
+import org.pofk.formula.Formulas;
+
 import org.pofk.meaning.Quantity;
 import org.pofk.modes.ClosedForm;
 import org.pofk.modes.Expansion;
+import org.pofk.modes.Mode;
+import org.pofk.modes.RealValue;
 
 /**
  * A pole λ of Y(z) other than zero, with what it adds to p(k): Σ R_p · binomial(k, p) · λ^(k−p), and the conjugate of
@@ -18,10 +23,13 @@ import org.pofk.modes.Expansion;
  * @param multiplicity the length of {@code coefficients}
  * @param value        λ
  * @param coefficients R_0, R_1, …; the last one isn't zero
+ * @param modes        of a pair, the terms of the closed form it has, which know angles that are fractions of π
  */
-public record TruePole(Root root, int multiplicity, Quantity value, List<Quantity> coefficients) {
+public record TruePole(Root root, int multiplicity, Quantity value, List<Quantity> coefficients,
+        List<Mode.Oscillating> modes) {
     public TruePole {
         coefficients = List.copyOf(coefficients);
+        modes = List.copyOf(modes);
     }
 
     /** Those of a closed form, in the order of the factors and of their roots. */
@@ -29,20 +37,23 @@ public record TruePole(Root root, int multiplicity, Quantity value, List<Quantit
         List<Factor<Rational>> factors = form.transform().factors().factors();
         List<TruePole> poles = new ArrayList<>();
         for (Expansion.Part<Rational> part : form.expansion().parts()) {
-            for (Root root : form.roots().get(factors.indexOf(part.factor())).all()) {
+            int factor = factors.indexOf(part.factor());
+            for (Root root : form.roots().get(factor).all()) {
                 if (root.index() <= root.conjugateIndex()) {
-                    poles.add(of(root, part));
+                    poles.add(of(root, part, form.modes().stream()
+                            .filter(mode -> mode.pole().equals(List.of(factor, root.index())))
+                            .filter(Mode.Oscillating.class::isInstance).map(Mode.Oscillating.class::cast).toList()));
                 }
             }
         }
         return poles;
     }
 
-    private static TruePole of(Root root, Expansion.Part<Rational> part) {
+    private static TruePole of(Root root, Expansion.Part<Rational> part, List<Mode.Oscillating> modes) {
         Polynomial<Rational> q = part.factor().polynomial();
         Quantity value = Quantity.of(root);
         return new TruePole(root, part.factor().multiplicity(), value, part.coefficients().stream()
-                .map(each -> at(value, q, each)).toList());
+                .map(each -> at(value, q, each)).toList(), modes);
     }
 
     private static Quantity at(Quantity root, Polynomial<Rational> q, Expansion.Coefficient<Rational> coefficient) {
@@ -70,7 +81,8 @@ public record TruePole(Root root, int multiplicity, Quantity value, List<Quantit
 
     /** The angle of λ, in (0, π), or 0 and π for a real one. */
     public Quantity angle() {
-        return angle(value);
+        return modes.stream().map(Mode.Oscillating::angle).flatMap(angle -> partOfTurn(angle).stream()).findFirst()
+                .orElseGet(() -> angle(value));
     }
 
     /** 2 |R_p|, what the pair comes to together. */
@@ -80,7 +92,14 @@ public record TruePole(Root root, int multiplicity, Quantity value, List<Quantit
 
     /** The angle of R_p, which isn't zero, in (−π, π]. */
     public Quantity phase(int power) {
-        return angle(coefficients.get(power));
+        return modes.stream().filter(mode -> mode.power() == power).map(Mode.Oscillating::phase)
+                .flatMap(phase -> partOfTurn(phase).stream()).findFirst().orElseGet(() -> angle(coefficients.get(power)));
+    }
+
+    /** A fraction of π, or zero, where the angle is known to be one. */
+    private static Optional<Quantity> partOfTurn(RealValue angle) {
+        return angle.rational().map(Quantity::of).or(() -> angle.exact().flatMap(Formulas::multipleOfPi)
+                .map(fraction -> Quantity.pi().times(fraction)));
     }
 
     private static Quantity modulus(Quantity number) {

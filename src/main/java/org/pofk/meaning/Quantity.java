@@ -225,11 +225,11 @@ public final class Quantity {
     }
 
     public Quantity realPart() {
-        return conjugate() == this ? this : new Quantity(new Node.RealPart(this));
+        return ComplexParts.real(this);
     }
 
     public Quantity imaginaryPart() {
-        return I.negate().times(this).realPart();
+        return ComplexParts.imaginary(this);
     }
 
     /** At face value, both radii at most 2^−bits · max(1, |this|). */
