@@ -6,22 +6,24 @@ import java.util.Set;
 import org.pofk.claim.FormulaText;
 import org.pofk.claim.FormulaText.Notation;
 import org.pofk.formula.FormulaParser;
+import org.pofk.formula.FormulaReading;
+import org.pofk.formula.FormulaReading.Subject;
+import org.pofk.formula.LatexReader;
 import org.pofk.formula.ParsedFormula;
 import org.pofk.meaning.ExponentialSum;
 import org.pofk.meaning.Precision;
 import org.pofk.meaning.RationalForm;
 import org.pofk.meaning.WrittenPolynomial;
-import org.pofk.text.Places;
 import org.pofk.text.RefusedException;
 
 /** Formulas of claims: parsed at their place in the file, in the variable that belongs there. */
 final class ClaimFormulas {
-    /** Longest formula of a claim, in UTF-16 units. */
-    static final int LONGEST = 10_000;
-
+    private final Set<String> names;
     private final Reading reading;
 
-    ClaimFormulas(Reading reading) {
+    /** {@code names} are those of the model, which may stand left of an equals sign. */
+    ClaimFormulas(Set<String> names, Reading reading) {
+        this.names = names;
         this.reading = reading;
     }
 
@@ -32,35 +34,34 @@ final class ClaimFormulas {
 
     /** A number, without a variable. */
     Optional<FormulaText> number(Content content, String what) {
-        return formula(content, what).filter(this::isNumber);
+        return formula(content, Subject.NUMBER, what).filter(this::isNumber);
     }
 
     /** A formula in k. */
     Optional<FormulaText> inK(Content content, String what) {
-        return formula(content, what)
+        return formula(content, Subject.OF_K, what)
                 .filter(formula -> means(formula, parsed -> ExponentialSum.of(parsed, Precision.AS_WRITTEN)));
     }
 
-    /** A formula in z. */
-    Optional<FormulaText> inZ(Content content, String what) {
-        return formula(content, what)
+    /** A formula in z, for Y(z) or for Y(z)/z. */
+    Optional<FormulaText> inZ(Content content, Subject subject, String what) {
+        return formula(content, subject, what)
                 .filter(formula -> means(formula, parsed -> RationalForm.of(parsed, "z", Precision.AS_WRITTEN)));
     }
 
     /** A polynomial in one variable, whatever its name. */
     Optional<FormulaText> polynomial(Content content, String what) {
-        return formula(content, what)
+        return formula(content, Subject.NUMBER, what)
                 .filter(formula -> means(formula, parsed -> WrittenPolynomial.of(parsed, Precision.AS_WRITTEN)));
     }
 
     /** Reads what a text says at its places, after parts of it were read otherwise. */
     Optional<FormulaText> numberIn(String text, Content.Text source) {
-        return parsed(text, source.places(), source.notation()).filter(this::isNumber);
+        return parsed(text, source, Subject.NUMBER).filter(this::isNumber);
     }
 
-    private Optional<FormulaText> formula(Content content, String what) {
-        return text(content, what)
-                .flatMap(source -> parsed(source.text(), source.places(), source.notation()));
+    private Optional<FormulaText> formula(Content content, Subject subject, String what) {
+        return text(content, what).flatMap(source -> parsed(source.text(), source, subject));
     }
 
     /** The text that a formula is read from, or a fault. */
@@ -74,23 +75,16 @@ final class ClaimFormulas {
                     + " backslash begins; use single quotes");
             return Optional.empty();
         }
-        if (scalar.get().text().length() > LONGEST) {
-            reading.fault(content.node().position(), "formula-too-long", "the formula has "
-                    + scalar.get().text().length() + " characters, more than " + LONGEST);
-            return Optional.empty();
-        }
         return Optional.of(new Content.Text(scalar.get().text(), scalar.get().places(), content.notation()));
     }
 
-    private Optional<FormulaText> parsed(String text, Places places, Notation notation) {
-        if (notation == Notation.LATEX) {
-            reading.fault(places.at(0), "latex-later", "LaTeX can't be read yet; write the formula in ordinary"
-                    + " notation under 'is'");
-            return Optional.empty();
-        }
+    private Optional<FormulaText> parsed(String text, Content.Text source, Subject subject) {
+        FormulaReading how = FormulaReading.of(subject).with(FormulaReading.ImaginaryUnit.I_OR_J);
         try {
-            ParsedFormula parsed = FormulaParser.parse(text, places, Set.of());
-            return Optional.of(new FormulaText(text.strip(), notation, parsed));
+            ParsedFormula parsed = source.notation() == Notation.LATEX
+                    ? LatexReader.parse(text, source.places(), how)
+                    : FormulaParser.parse(text, source.places(), names, how);
+            return Optional.of(new FormulaText(text.strip(), source.notation(), parsed));
         } catch (RefusedException refused) {
             reading.faults().addAll(refused.faults());
             return Optional.empty();

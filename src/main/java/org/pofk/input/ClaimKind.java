@@ -7,17 +7,17 @@ import java.util.stream.Stream;
 
 /** The kinds of step that a claims file knows, what each is about, and what it may say besides. */
 enum ClaimKind implements Keyword {
-    START("start", Subject.ALL),
-    MATRIX("matrix", Subject.ALL),
+    START("start", Subject.ALL, "within"),
+    MATRIX("matrix", Subject.ALL, "within"),
     CHARACTERISTIC_POLYNOMIAL("characteristic polynomial", Subject.ALL),
     MINIMAL_POLYNOMIAL("minimal polynomial", Subject.ALL),
     TRANSFORM("transform", Subject.ONE),
     TRANSFORM_OVER_Z("transform over z", Subject.ONE),
     EXPANSION("expansion", Subject.ONE),
-    POLES("poles", Subject.ONE),
-    RESIDUES("residues", Subject.ONE),
+    POLES("poles", Subject.ONE, "within"),
+    RESIDUES("residues", Subject.ONE, "within"),
     FORMULA("formula", Subject.ONE_OR_ALL, "for", "within", "safe side"),
-    PAIR("pair", Subject.ONE, "radius", "angle", "amplitude", "phase"),
+    PAIR("pair", Subject.ONE, "radius", "angle", "amplitude", "phase", "within"),
     LONG_RUN("long run", Subject.ONE_OR_ALL, "within", "safe side"),
     EIGENVECTOR("eigenvector", Subject.ALL, "at"),
     VALUE("value", Subject.ONE, "at", "within", "safe side"),

@@ -1,8 +1,9 @@
 package org.pofk.input;
 
-import java.util.ArrayList;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Output;
 import org.pofk.chain.Outputs;
@@ -41,7 +42,7 @@ final class ClaimNames {
         if (chain.isEmpty()) {
             return Optional.empty();
         }
-        List<String> known = known();
+        Set<String> known = known();
         if (!known.contains(name.name())) {
             reading.fault(name.position(), "unknown-output", "there is no output, set or state '"
                     + Words.shortened(name.name()) + "'" + reading.known(known, name.name(), "there"));
@@ -65,10 +66,14 @@ final class ClaimNames {
         return place;
     }
 
-    private List<String> known() {
-        List<String> known = new ArrayList<>(chain.orElseThrow().outputs().stream().map(Output::name).toList());
-        known.addAll(chain.get().sets().keySet());
-        known.addAll(chain.get().states());
+    /** Every name of the model: its outputs, its sets, its states. */
+    Set<String> known() {
+        Set<String> known = new LinkedHashSet<>();
+        chain.ifPresent(model -> {
+            model.outputs().forEach(output -> known.add(output.name()));
+            known.addAll(model.sets().keySet());
+            known.addAll(model.states());
+        });
         return known;
     }
 }

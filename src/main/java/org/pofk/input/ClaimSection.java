@@ -78,10 +78,6 @@ final class ClaimSection {
         Optional<Within> within = fields.value("within").flatMap(this::within);
         Optional<SafeSide> side = fields.value("safe side")
                 .flatMap(node -> reading.keyword(node, "the safe side", Side.values())).map(word -> word.side);
-        if (fields.value("safe side").isPresent() && fields.value("within").isEmpty()) {
-            reading.fault(fields.position("safe side").orElseThrow(), "safe-side-alone", "a safe side counts only for"
-                    + " an approximation; say with 'within' how far off it may be, for example within: 2%");
-        }
         Optional<String> where = text(fields, "where");
         Optional<String> note = text(fields, "note");
         return subject(fields, kind).flatMap(subject ->

@@ -13,6 +13,7 @@ import org.pofk.claim.FormulaText.Notation;
 import org.pofk.claim.Statement;
 import org.pofk.claim.Statement.Component;
 import org.pofk.exact.Rational;
+import org.pofk.formula.FormulaReading.Subject;
 
 /** What one claim states, by its kind. Nothing comes back where there are faults, or no model to hold it against. */
 final class StatementSection {
@@ -35,7 +36,7 @@ final class StatementSection {
         this.names = names;
         this.convention = convention;
         this.reading = reading;
-        this.formulas = new ClaimFormulas(reading);
+        this.formulas = new ClaimFormulas(names.known(), reading);
     }
 
     /**
@@ -134,7 +135,8 @@ final class StatementSection {
     }
 
     private Optional<Statement> transform(Content content, Statement.TransformOf.Form form) {
-        Optional<FormulaText> formula = formulas.inZ(content, "a transform");
+        Optional<FormulaText> formula = formulas.inZ(content,
+                form == Statement.TransformOf.Form.TRANSFORM_OVER_Z ? Subject.OF_Z_OVER_Z : Subject.OF_Z, "a transform");
         return output().flatMap(output -> formula.map(is -> new Statement.TransformOf(output, form, is)));
     }
 

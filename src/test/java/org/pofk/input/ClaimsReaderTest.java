@@ -113,6 +113,18 @@ class ClaimsReaderTest {
     }
 
     @Test
+    void latexIsReadToTheSameTreeAsOrdinaryNotation() throws RefusedException {
+        Statement.PofK plain = (Statement.PofK) one("{formula: lost, is: 'lost(k) = 1/2 - 0.5*0.45^k*cos(0.3*k)'}")
+                .statement();
+        Statement.PofK latex = (Statement.PofK) one(
+                "{formula: lost, is-latex: 'p(k) = \\frac{1}{2} - 0.5\\cdot 0.45^{k}\\cos(0.3k)'}").statement();
+        assertEquals(plain.parts().get(0).is().parsed().formula(), latex.parts().get(0).is().parsed().formula());
+        Statement.Poles poles = (Statement.Poles) one("{poles: lost, is-latex: ['1', '0.4 \\pm 0.33 j (twice)']}")
+                .statement();
+        assertEquals(List.of(1, 2, 2), poles.poles().stream().map(Statement.Poles.Pole::multiplicity).toList());
+    }
+
+    @Test
     void aBackslashInsideDoubleQuotesIsRefused() {
         String refused = refused("{formula: lost, is-latex: \"\\frac{1}{2}\"}");
         assertEquals("claims.yaml:4:31: inside double quotes YAML changes what a backslash begins; use single quotes",
