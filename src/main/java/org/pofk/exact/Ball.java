@@ -254,6 +254,11 @@ public record Ball(BigInteger center, BigInteger radius, int scale) {
         return ExponentialFunction.of(this);
     }
 
+    /** The natural logarithm of a number known to be positive; a {@link NotSeparatedException} when it may be zero. */
+    public Ball log() {
+        return LogarithmFunction.of(this);
+    }
+
     static BigInteger shiftRightUp(BigInteger value, int shift) {
         return value.negate().shiftRight(shift).negate();
     }

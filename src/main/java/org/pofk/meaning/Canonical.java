@@ -97,8 +97,8 @@ final class Canonical extends Walk<Quotient> {
     }
 
     @Override
-    public Quotient squareRoot(Node.SquareRoot squareRoot) {
-        return root(of(squareRoot.radicand()), 2, Quantity.of(squareRoot));
+    public Quotient radical(Node.Radical radical) {
+        return root(of(radical.radicand()), radical.degree(), Quantity.of(radical));
     }
 
     /** The n-th root y of t/b, with c the denominator of t: s = c·b·y has sⁿ = cⁿ bⁿ⁻¹ t, which is whole. */
@@ -137,6 +137,11 @@ final class Canonical extends Walk<Quotient> {
                     .dividedBy(Quantity.ONE.plus(square).squareRoot());
         };
         return power(of(rotated), times.numerator().intValueExact());
+    }
+
+    @Override
+    public Quotient logarithm(Node.Logarithm logarithm) {
+        throw new BeyondTowerException();
     }
 
     @Override

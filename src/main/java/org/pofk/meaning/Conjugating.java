@@ -77,16 +77,22 @@ final class Conjugating {
             return base == power.base() ? whole : base.pow(power.exponent());
         }
 
-        /** A root of a positive rational is real; else the cut on the negative axis decides, and it stays as it is. */
+        /** A root of a positive number is real; else the cut on the negative axis decides, and it stays as it is. */
         @Override
-        public Quantity squareRoot(Node.SquareRoot squareRoot) {
-            return squareRoot.radicand().rational().isPresent() ? whole : Quantity.of(new Node.Conjugate(whole));
+        public Quantity radical(Node.Radical radical) {
+            boolean real = radical.degree() > 2 || radical.radicand().rational().isPresent();
+            return real ? whole : Quantity.of(new Node.Conjugate(whole));
         }
 
         @Override
         public Quantity exponential(Node.Exponential exponential) {
             Quantity exponent = conjugated(exponential.exponent());
             return exponent == exponential.exponent() ? whole : exponent.exponential();
+        }
+
+        @Override
+        public Quantity logarithm(Node.Logarithm logarithm) {
+            return whole;
         }
 
         @Override

@@ -62,7 +62,11 @@ final class Enclosing extends Walk<ComplexBall> {
 
     @Override
     public ComplexBall sum(Node.Sum sum) {
-        return sum.terms().stream().map(this::of).reduce(ComplexBall.of(Ball.of(0, scale)), ComplexBall::plus);
+        ComplexBall total = ComplexBall.of(Ball.of(0, scale));
+        for (Quantity term : sum.terms()) {
+            total = total.plus(of(term));
+        }
+        return total;
     }
 
     @Override
@@ -76,12 +80,15 @@ final class Enclosing extends Walk<ComplexBall> {
     }
 
     @Override
-    public ComplexBall squareRoot(Node.SquareRoot squareRoot) {
-        ComplexBall radicand = of(squareRoot.radicand());
+    public ComplexBall radical(Node.Radical radical) {
+        ComplexBall radicand = of(radical.radicand());
+        if (radical.degree() > 2) {
+            return ComplexBall.of(radicand.real().root(radical.degree()));
+        }
         boolean besideCut = !radicand.imaginary().isExact() && radicand.imaginary().containsZero()
                 && radicand.real().isNegative();
         return besideCut && cut == Cut.DECIDED
-                ? MainSquareRoot.besideCut(radicand, squareRoot.radicand().imaginaryPart().isZero())
+                ? MainSquareRoot.besideCut(radicand, radical.radicand().imaginaryPart().isZero())
                 : MainSquareRoot.of(radicand);
     }
 
@@ -92,6 +99,11 @@ final class Enclosing extends Walk<ComplexBall> {
         return exponent.imaginary().isExact() && exponent.imaginary().center().signum() == 0
                 ? ComplexBall.of(modulus)
                 : new ComplexBall(exponent.imaginary().cos(), exponent.imaginary().sin()).times(modulus);
+    }
+
+    @Override
+    public ComplexBall logarithm(Node.Logarithm logarithm) {
+        return ComplexBall.of(of(logarithm.of()).real().log());
     }
 
     @Override

@@ -2,7 +2,6 @@ package org.pofk.meaning;
 
 import java.math.BigInteger;
 import java.util.HashMap;
-import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -31,8 +30,8 @@ final class Heights extends Walk<Optional<Long>> {
     private final Turns.Reading turns = new Turns.Reading(same);
     private final boolean conjugates;
     private final Map<Polynomial<Rational>, Set<Integer>> roots = new HashMap<>();
-    private final Set<Integer> radicals = new HashSet<>();
-    private final Set<Integer> realRadicals = new HashSet<>();
+    private final Map<Integer, Integer> radicals = new HashMap<>();
+    private final Map<Integer, Integer> realRadicals = new HashMap<>();
     private final Map<Integer, BigInteger> anglesOver = new HashMap<>();
     private BigInteger order = BigInteger.ONE;
 
@@ -63,7 +62,10 @@ final class Heights extends Walk<Optional<Long>> {
         for (BigInteger over : anglesOver.values()) {
             degree = degree.multiply(over).shiftLeft(1);
         }
-        return degree.shiftLeft(realRadicals.size() + (conjugates ? 2 : 1) * radicals.size()).longValueExact();
+        for (int radical : realRadicals.values()) {
+            degree = degree.multiply(BigInteger.valueOf(radical));
+        }
+        return degree.shiftLeft((conjugates ? 2 : 1) * radicals.size()).longValueExact();
     }
 
     private void takeInOrder(BigInteger other) {
@@ -139,10 +141,10 @@ final class Heights extends Walk<Optional<Long>> {
     }
 
     @Override
-    public Optional<Long> squareRoot(Node.SquareRoot squareRoot) {
-        boolean rational = squareRoot.radicand().rational().isPresent();
-        (rational ? realRadicals : radicals).add(same.numberOf(squareRoot));
-        return of(squareRoot.radicand()).map(height -> Logarithm.divideUp(height, 2));
+    public Optional<Long> radical(Node.Radical radical) {
+        boolean real = radical.degree() > 2 || radical.radicand().rational().isPresent();
+        (real ? realRadicals : radicals).put(same.numberOf(radical), radical.degree());
+        return of(radical.radicand()).map(height -> Logarithm.divideUp(height, radical.degree()));
     }
 
     /** e^(iπ p/q) is a root of unity; for others see {@link #rotation}. */
@@ -176,6 +178,11 @@ final class Heights extends Walk<Optional<Long>> {
             BigInteger over = times.denominator().shiftLeft(1);
             return total.add(over).subtract(BigInteger.ONE).divide(over).longValueExact();
         });
+    }
+
+    @Override
+    public Optional<Long> logarithm(Node.Logarithm logarithm) {
+        return Optional.empty();
     }
 
     @Override

@@ -5,9 +5,12 @@ import java.util.IdentityHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import org.pofk.exact.Rational;
 
 /** Solves an equation for a decimal that occurs in it once, by undoing what is done to it from the outside in. Exact. */
 final class Isolating implements Node.Visitor<Optional<Quantity>> {
+    private static final Quantity QUARTER_TURN = Quantity.pi().times(Rational.HALF);
+
     private final Occurrences occurrences;
     private final Quantity target;
 
@@ -94,27 +97,65 @@ final class Isolating implements Node.Visitor<Optional<Quantity>> {
         return other.isZero() == Decision.NO ? goOn(with, target.dividedBy(other)) : Optional.empty();
     }
 
+    /** The real root with the sign that the base has at face value, where there are two. */
     @Override
     public Optional<Quantity> power(Node.Power power) {
-        return power.exponent() == -1 && target.isZero() == Decision.NO
-                ? goOn(power.base(), target.inverse())
+        Optional<Integer> sign = sign(target);
+        if (sign.isEmpty() || sign.get() == 0) {
+            return Optional.empty();
+        }
+        int degree = Math.abs(power.exponent());
+        Quantity raised = power.exponent() < 0 ? target.inverse() : target;
+        if (degree % 2 == 1) {
+            return goOn(power.base(), sign.get() < 0 ? raised.negate().root(degree).negate() : raised.root(degree));
+        }
+        boolean negative = sign(power.base()).filter(s -> s < 0).isPresent();
+        return sign.get() < 0
+                ? Optional.empty()
+                : goOn(power.base(), negative ? raised.root(degree).negate() : raised.root(degree));
+    }
+
+    /** The sign of what is real; empty for what isn't, and where it isn't decided. */
+    private static Optional<Integer> sign(Quantity quantity) {
+        return quantity.isReal() == Decision.YES ? quantity.sign() : Optional.empty();
+    }
+
+    private static boolean isPositive(Quantity quantity) {
+        return sign(quantity).filter(sign -> sign > 0).isPresent();
+    }
+
+    private static boolean isNotNegative(Quantity quantity) {
+        return sign(quantity).filter(sign -> sign >= 0).isPresent();
+    }
+
+    @Override
+    public Optional<Quantity> radical(Node.Radical radical) {
+        return isNotNegative(target) ? goOn(radical.radicand(), target.pow(radical.degree())) : Optional.empty();
+    }
+
+    /** Of a real exponent. */
+    @Override
+    public Optional<Quantity> exponential(Node.Exponential exponential) {
+        return isPositive(target) && exponential.exponent().isReal() == Decision.YES
+                ? goOn(exponential.exponent(), target.logarithm())
                 : Optional.empty();
     }
 
     @Override
-    public Optional<Quantity> squareRoot(Node.SquareRoot squareRoot) {
-        boolean main = target.isReal() == Decision.YES && target.sign().filter(sign -> sign >= 0).isPresent();
-        return main ? goOn(squareRoot.radicand(), target.pow(2)) : Optional.empty();
-    }
-
-    @Override
-    public Optional<Quantity> exponential(Node.Exponential exponential) {
-        return Optional.empty();
+    public Optional<Quantity> logarithm(Node.Logarithm logarithm) {
+        return sign(target).isPresent() ? goOn(logarithm.of(), target.exponential()) : Optional.empty();
     }
 
     @Override
     public Optional<Quantity> angle(Node.Angle angle) {
-        return Optional.empty();
+        return switch (angle.of()) {
+            case TANGENT -> isPositive(QUARTER_TURN.minus(target)) && isPositive(QUARTER_TURN.plus(target))
+                    ? goOn(angle.argument(), target.sine().dividedBy(target.cosine()))
+                    : Optional.empty();
+            case COSINE -> isNotNegative(target) && isNotNegative(Quantity.pi().minus(target))
+                    ? goOn(angle.argument(), target.cosine())
+                    : Optional.empty();
+        };
     }
 
     @Override
@@ -122,8 +163,30 @@ final class Isolating implements Node.Visitor<Optional<Quantity>> {
         return goOn(conjugate.of(), target.conjugate());
     }
 
+    /** cos x = target: of the x with this cosine, the one nearest to x at face value. */
     @Override
     public Optional<Quantity> realPart(Node.RealPart realPart) {
-        return Optional.empty();
+        if (!(realPart.of().node() instanceof Node.Exponential exponential)
+                || !isNotNegative(Quantity.ONE.minus(target)) || !isNotNegative(Quantity.ONE.plus(target))) {
+            return Optional.empty();
+        }
+        Quantity x = Quantity.i().negate().times(exponential.exponent());
+        return x.isReal() == Decision.YES
+                ? goOn(exponential.exponent(), Quantity.i().times(nearest(target.arccosine(), x)))
+                : Optional.empty();
+    }
+
+    /** Of ±angle + 2πn the nearest to x; any of them solves the equation, so doubles may choose. */
+    private static Quantity nearest(Quantity angle, Quantity x) {
+        double wanted = approximate(x);
+        double size = approximate(angle);
+        long up = Math.round((wanted - size) / (2 * Math.PI));
+        long down = Math.round((wanted + size) / (2 * Math.PI));
+        boolean isUp = Math.abs(size + 2 * Math.PI * up - wanted) <= Math.abs(-size + 2 * Math.PI * down - wanted);
+        return (isUp ? angle : angle.negate()).plus(Quantity.pi().times(Rational.of(2 * (isUp ? up : down))));
+    }
+
+    private static double approximate(Quantity real) {
+        return real.enclose(64).real().middle().approximate();
     }
 }

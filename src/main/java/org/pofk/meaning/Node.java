@@ -25,9 +25,11 @@ sealed interface Node {
 
         R power(Power power);
 
-        R squareRoot(SquareRoot squareRoot);
+        R radical(Radical radical);
 
         R exponential(Exponential exponential);
+
+        R logarithm(Logarithm logarithm);
 
         R angle(Angle angle);
 
@@ -98,11 +100,14 @@ sealed interface Node {
         }
     }
 
-    /** The main square root: real part not negative, and on the imaginary axis the upper one. */
-    record SquareRoot(Quantity radicand) implements Node {
+    /**
+     * The main root of a degree of two or more: for two, the real part isn't negative, and on the imaginary axis it is
+     * the upper one; for more, the positive root of a positive number.
+     */
+    record Radical(int degree, Quantity radicand) implements Node {
         @Override
         public <R> R accept(Visitor<R> visitor) {
-            return visitor.squareRoot(this);
+            return visitor.radical(this);
         }
     }
 
@@ -111,6 +116,14 @@ sealed interface Node {
         @Override
         public <R> R accept(Visitor<R> visitor) {
             return visitor.exponential(this);
+        }
+    }
+
+    /** The natural logarithm of a positive number. */
+    record Logarithm(Quantity of) implements Node {
+        @Override
+        public <R> R accept(Visitor<R> visitor) {
+            return visitor.logarithm(this);
         }
     }
 

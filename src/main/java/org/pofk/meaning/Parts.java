@@ -49,13 +49,18 @@ final class Parts implements Node.Visitor<List<Quantity>> {
     }
 
     @Override
-    public List<Quantity> squareRoot(Node.SquareRoot squareRoot) {
-        return List.of(squareRoot.radicand());
+    public List<Quantity> radical(Node.Radical radical) {
+        return List.of(radical.radicand());
     }
 
     @Override
     public List<Quantity> exponential(Node.Exponential exponential) {
         return List.of(exponential.exponent());
+    }
+
+    @Override
+    public List<Quantity> logarithm(Node.Logarithm logarithm) {
+        return List.of(logarithm.of());
     }
 
     @Override

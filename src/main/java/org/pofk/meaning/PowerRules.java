@@ -60,15 +60,22 @@ final class PowerRules implements Node.Visitor<Quantity> {
         return whole == (int) whole ? power.base().pow((int) whole) : asWritten();
     }
 
-    /** √x to an even power is a power of x. */
+    /** A root to a multiple of its degree is a power. */
     @Override
-    public Quantity squareRoot(Node.SquareRoot squareRoot) {
-        return exponent % 2 == 0 ? squareRoot.radicand().pow(exponent / 2) : asWritten();
+    public Quantity radical(Node.Radical radical) {
+        return exponent % radical.degree() == 0
+                ? radical.radicand().pow(exponent / radical.degree())
+                : asWritten();
     }
 
     @Override
     public Quantity exponential(Node.Exponential exponential) {
         return Quantity.of(exponent).times(exponential.exponent()).exponential();
+    }
+
+    @Override
+    public Quantity logarithm(Node.Logarithm logarithm) {
+        return asWritten();
     }
 
     @Override

@@ -2,86 +2,105 @@ package org.pofk.meaning;
 
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import java.util.TreeSet;
+import java.util.Set;
 
-/** Solving one decimal after the other: see {@link Equations}. */
+/**
+ * Equations solved for one decimal after the other: the first open one with a single unknown that can be isolated gives
+ * it, and it is put into the others. A decimal set free counts as known, and what is solved for then hangs on it.
+ */
 final class Propagation {
-    private static final int SPREAD_BITS = 96;
-
     private final List<Equation> equations;
-    private final Map<Written, Quantity> right = new LinkedHashMap<>();
-    private final Map<Written, WrittenNumber> numbers = new LinkedHashMap<>();
-    private final List<Integer> open = new ArrayList<>();
-    private final TreeSet<Integer> failing = new TreeSet<>();
-    private boolean undecided;
+    private final Map<Written, Quantity> right;
+    private final Map<Written, Integer> solvedBy;
+    private final Set<Written> free;
+    private final List<Integer> open;
 
-    private Propagation(List<Equation> equations) {
+    private Propagation(List<Equation> equations, Map<Written, Quantity> right, Map<Written, Integer> solvedBy,
+            Set<Written> free, List<Integer> open) {
         this.equations = equations;
+        this.right = right;
+        this.solvedBy = solvedBy;
+        this.free = free;
+        this.open = open;
+    }
+
+    /** With nothing set free. */
+    static Propagation of(List<Equation> equations) {
+        List<Integer> open = new ArrayList<>();
         for (int i = 0; i < equations.size(); i++) {
             open.add(i);
         }
+        Propagation propagation = new Propagation(equations, new LinkedHashMap<>(), new LinkedHashMap<>(),
+                new LinkedHashSet<>(), open);
+        propagation.solve();
+        return propagation;
     }
 
-    static Solution of(List<Equation> equations) {
-        Propagation propagation = new Propagation(equations);
-        while (propagation.solvesOne()) {
-            propagation.open.size();
+    /** The same with one more decimal set free. */
+    Propagation setting(Written decimal) {
+        Propagation next = new Propagation(equations, new LinkedHashMap<>(right), new LinkedHashMap<>(solvedBy),
+                new LinkedHashSet<>(free), new ArrayList<>(open));
+        next.free.add(decimal);
+        next.solve();
+        return next;
+    }
+
+    private void solve() {
+        Optional<Integer> next = solvable();
+        while (next.isPresent()) {
+            open.remove(next.get());
+            next = solvable();
         }
-        propagation.checkWhatIsLeft();
-        Decision holds = !propagation.failing.isEmpty() ? Decision.NO
-                : propagation.undecided ? Decision.UNDECIDED : Decision.YES;
-        return new Solution(propagation.numbers, holds, List.copyOf(propagation.failing));
     }
 
-    private List<Written> unknowns(int equation) {
-        return equations.get(equation).written().decimals().stream().filter(w -> !right.containsKey(w)).toList();
-    }
-
-    /** Takes the first open equation with one unknown that can be solved for it, and puts the unknown in the others. */
-    private boolean solvesOne() {
+    /** The first open equation that can be solved; its unknown is determined then. */
+    private Optional<Integer> solvable() {
         for (int equation : open) {
             List<Written> unknowns = unknowns(equation);
             if (unknowns.size() == 1) {
-                Optional<Quantity> value = solved(equation, unknowns.get(0));
+                Written unknown = unknowns.get(0);
+                Optional<Quantity> value = Isolating.solve(equations.get(equation).written().with(right), unknown,
+                        equations.get(equation).right());
                 if (value.isPresent()) {
-                    determine(equation, unknowns.get(0), value.get());
-                    return true;
+                    right.put(unknown, value.get());
+                    solvedBy.put(unknown, equation);
+                    return Optional.of(equation);
                 }
             }
         }
-        return false;
+        return Optional.empty();
     }
 
-    private Optional<Quantity> solved(int equation, Written unknown) {
-        Quantity written = equations.get(equation).written().with(right);
-        return Isolating.solve(written, unknown, equations.get(equation).right());
+    List<Integer> open() {
+        return open;
     }
 
-    private void determine(int equation, Written unknown, Quantity value) {
-        right.put(unknown, value);
-        numbers.put(unknown, WrittenNumber.of(unknown, value));
-        open.remove((Integer) equation);
-        note(equation, WrittenNumber.within(unknown, value));
+    Set<Written> free() {
+        return free;
     }
 
-    private void note(int equation, Decision holds) {
-        if (holds == Decision.NO) {
-            failing.add(equation);
-        }
-        undecided |= holds == Decision.UNDECIDED;
+    /** The decimals solved for, with values in which those set free may occur. */
+    Map<Written, Quantity> right() {
+        return right;
     }
 
-    private void checkWhatIsLeft() {
-        for (int equation : open) {
-            Quantity difference = equations.get(equation).written().with(right).minus(equations.get(equation).right());
-            note(equation, unknowns(equation).isEmpty() ? difference.isZero() : mayBeZero(difference));
-        }
+    /** The equation that gave a decimal's value. */
+    int solvedBy(Written decimal) {
+        return solvedBy.get(decimal);
     }
 
-    private static Decision mayBeZero(Quantity difference) {
-        return difference.spread(SPREAD_BITS).containsZero() ? Decision.YES : Decision.NO;
+    /** The decimals of an equation that are neither solved for nor free, in order of reading. */
+    List<Written> unknowns(int equation) {
+        return equations.get(equation).written().decimals().stream()
+                .filter(decimal -> !right.containsKey(decimal) && !free.contains(decimal)).toList();
+    }
+
+    /** written − right with all that is known put in. */
+    Quantity difference(int equation) {
+        return equations.get(equation).written().with(right).minus(equations.get(equation).right());
     }
 }

@@ -22,6 +22,9 @@ public final class Quantity {
     /** Rationals longer than this are not multiplied out: what isn't folded costs nothing until it is asked for. */
     private static final int FOLDED_BITS = 1 << 14;
 
+    /** Longer sums stay parts of a sum, so that putting one together term by term isn't quadratic. */
+    private static final int TERMS_TAKEN_APART = 64;
+
     public static final Quantity ZERO = new Quantity(new Node.Number(Rational.ZERO));
     public static final Quantity ONE = new Quantity(new Node.Number(Rational.ONE));
     private static final Quantity PI = new Quantity(Node.Constant.PI);
@@ -65,11 +68,11 @@ public final class Quantity {
         return I;
     }
 
-    /** The sum of all; zero for none. */
+    /** The sum of all; zero for none. Terms that are short sums themselves are taken apart. */
     public static Quantity sum(List<Quantity> terms) {
         Rational constant = Rational.ZERO;
         List<Quantity> others = new ArrayList<>();
-        for (Quantity term : terms) {
+        for (Quantity term : takenApart(terms)) {
             Optional<Rational> value = term.rational();
             if (value.isPresent() && isShort(constant) && isShort(value.get())) {
                 constant = constant.plus(value.get());
@@ -81,6 +84,18 @@ public final class Quantity {
             others.add(of(constant));
         }
         return others.size() == 1 ? others.get(0) : new Quantity(new Node.Sum(others));
+    }
+
+    private static List<Quantity> takenApart(List<Quantity> terms) {
+        List<Quantity> all = new ArrayList<>();
+        for (Quantity term : terms) {
+            if (term.node instanceof Node.Sum sum && sum.terms().size() + terms.size() <= TERMS_TAKEN_APART) {
+                all.addAll(sum.terms());
+            } else {
+                all.add(term);
+            }
+        }
+        return all;
     }
 
     Node node() {
@@ -101,7 +116,8 @@ public final class Quantity {
         return rational().filter(value::equals).isPresent();
     }
 
-    private static boolean isShort(Rational value) {
+    /** Whether it is folded with others. */
+    static boolean isShort(Rational value) {
         return length(value) <= FOLDED_BITS;
     }
 
@@ -125,34 +141,11 @@ public final class Quantity {
         if (is(Rational.ZERO) || other.is(Rational.ZERO)) {
             return ZERO;
         }
-        if (is(Rational.ONE)) {
-            return other;
-        }
-        if (rational().isPresent()) {
-            return other.scaled(rational().get());
-        }
-        if (other.rational().isPresent()) {
-            return other.times(this);
-        }
-        if (node == Node.Constant.I && other.node == Node.Constant.I) {
-            return of(-1);
-        }
-        return new Quantity(new Node.Product(this, other));
+        return Factored.of(this).times(Factored.of(other)).product();
     }
 
     public Quantity times(Rational factor) {
         return of(factor).times(this);
-    }
-
-    /** This times a rational that is neither 0 nor 1, taken together with the factor it may have already. */
-    private Quantity scaled(Rational factor) {
-        if (rational().isPresent() && isShort(factor) && isShort(rational().get())) {
-            return of(factor.times(rational().get()));
-        }
-        if (node instanceof Node.Product product && product.first().rational().isPresent()) {
-            return product.first().times(of(factor)).times(product.second());
-        }
-        return new Quantity(new Node.Product(of(factor), this));
     }
 
     /** 1/this; whether this is zero is for the caller to know. */
@@ -184,20 +177,33 @@ public final class Quantity {
     public Quantity squareRoot() {
         Optional<Rational> value = rational();
         if (value.isEmpty()) {
-            return new Quantity(new Node.SquareRoot(this));
+            return new Quantity(new Node.Radical(2, this));
         }
         if (value.get().signum() < 0) {
             return I.times(of(value.get().negate()).squareRoot());
         }
         BigInteger top = value.get().numerator().sqrt();
         BigInteger bottom = value.get().denominator().sqrt();
-        Rational root = new Rational(top, bottom.max(BigInteger.ONE));
-        return root.times(root).equals(value.get()) ? of(root) : new Quantity(new Node.SquareRoot(this));
+        Rational root = new Rational(top, bottom);
+        return root.times(root).equals(value.get()) ? of(root) : new Quantity(new Node.Radical(2, this));
+    }
+
+    /** The main square root for degree 2, and for a higher one the positive root of what is known to be positive. */
+    public Quantity root(int degree) {
+        return degree == 1 ? this : degree == 2 ? squareRoot() : new Quantity(new Node.Radical(degree, this));
+    }
+
+    /** The natural logarithm of what is known to be positive. */
+    public Quantity logarithm() {
+        return is(Rational.ONE) ? ZERO : new Quantity(new Node.Logarithm(this));
     }
 
     /** e^this: cos x and sin x are its parts for i x. */
     public Quantity exponential() {
-        return is(Rational.ZERO) ? ONE : new Quantity(new Node.Exponential(this));
+        if (is(Rational.ZERO)) {
+            return ONE;
+        }
+        return Exponent.wholeTimesLogarithm(this).orElseGet(() -> new Quantity(new Node.Exponential(this)));
     }
 
     /** cos of this, which is real. */
@@ -207,7 +213,7 @@ public final class Quantity {
 
     /** sin of this, which is real. */
     public Quantity sine() {
-        return I.negate().times(I.times(this).exponential()).realPart();
+        return minus(PI.times(Rational.HALF)).cosine();
     }
 
     /** The angle in (−π/2, π/2) whose tangent this real number is. */

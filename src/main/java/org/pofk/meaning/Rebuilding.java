@@ -52,13 +52,18 @@ final class Rebuilding extends Walk<Quantity> {
     }
 
     @Override
-    public Quantity squareRoot(Node.SquareRoot squareRoot) {
-        return of(squareRoot.radicand()).squareRoot();
+    public Quantity radical(Node.Radical radical) {
+        return of(radical.radicand()).root(radical.degree());
     }
 
     @Override
     public Quantity exponential(Node.Exponential exponential) {
         return of(exponential.exponent()).exponential();
+    }
+
+    @Override
+    public Quantity logarithm(Node.Logarithm logarithm) {
+        return of(logarithm.of()).logarithm();
     }
 
     @Override

@@ -30,7 +30,7 @@ final class RootOfUnity {
         }
         int n = order.intValueExact();
         int degree = Cyclotomic.totient(n);
-        if (degree > Tower.MOST_DEGREE) {
+        if (degree > Monomial.MOST_DEGREE) {
             throw new BeyondTowerException();
         }
         if (degree == 1) {

@@ -79,13 +79,18 @@ final class Same extends Walk<Integer> {
     }
 
     @Override
-    public Integer squareRoot(Node.SquareRoot squareRoot) {
-        return number(squareRoot, "square root", of(squareRoot.radicand()));
+    public Integer radical(Node.Radical radical) {
+        return number(radical, "root", radical.degree(), of(radical.radicand()));
     }
 
     @Override
     public Integer exponential(Node.Exponential exponential) {
         return number(exponential, "exponential", of(exponential.exponent()));
+    }
+
+    @Override
+    public Integer logarithm(Node.Logarithm logarithm) {
+        return number(logarithm, "logarithm", of(logarithm.of()));
     }
 
     @Override

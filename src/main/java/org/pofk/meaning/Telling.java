@@ -47,13 +47,20 @@ final class Telling extends Walk<String> {
     }
 
     @Override
-    public String squareRoot(Node.SquareRoot squareRoot) {
-        return "sqrt(" + of(squareRoot.radicand()) + ")";
+    public String radical(Node.Radical radical) {
+        return radical.degree() == 2
+                ? "sqrt(" + of(radical.radicand()) + ")"
+                : "(" + of(radical.radicand()) + ")^(1/" + radical.degree() + ")";
     }
 
     @Override
     public String exponential(Node.Exponential exponential) {
         return "exp(" + of(exponential.exponent()) + ")";
+    }
+
+    @Override
+    public String logarithm(Node.Logarithm logarithm) {
+        return "log(" + of(logarithm.of()) + ")";
     }
 
     @Override

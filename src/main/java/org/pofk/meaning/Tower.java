@@ -13,8 +13,8 @@ import org.pofk.exact.Rational;
  * round. Exact; a product of two elements with n terms takes n² products and as many for the rules.
  */
 final class Tower {
-    /** Beyond this degree products take longer than high precision does. */
-    static final int MOST_DEGREE = 192;
+    /** Products of more terms than that take longer than high precision does. */
+    private static final int MOST_PRODUCTS = 1 << 16;
     private static final int MOST_COEFFICIENT_BITS = 100_000;
 
     /**
@@ -40,9 +40,7 @@ final class Tower {
 
     /** The place of the new generator. */
     int add(Generator generator) {
-        int degree = generators.stream().mapToInt(Generator::degree).reduce(generator.degree(), Math::multiplyExact);
-        if (degree > MOST_DEGREE || generator.degree() > Monomial.MOST_DEGREE
-                || generators.size() == Monomial.MOST_GENERATORS) {
+        if (generator.degree() > Monomial.MOST_DEGREE || generators.size() == Monomial.MOST_GENERATORS) {
             throw new BeyondTowerException();
         }
         generators.add(generator);
@@ -52,6 +50,9 @@ final class Tower {
     Element times(Element a, Element b) {
         if (a.isRational() || b.isRational()) {
             return a.isRational() ? b.times(a.constant()) : a.times(b.constant());
+        }
+        if ((long) a.coefficients().size() * b.coefficients().size() > MOST_PRODUCTS) {
+            throw new BeyondTowerException();
         }
         Map<Long, BigInteger> product = new HashMap<>();
         a.coefficients().forEach((first, c) -> b.coefficients().forEach((second, d) ->
@@ -63,12 +64,19 @@ final class Tower {
     /** Applies the rules, of the last generator first, for its rule may bring in the earlier ones. */
     private void reduce(Map<Long, BigInteger> terms) {
         for (int index = generators.size() - 1; index >= 0; index--) {
-            int here = index;
-            int highest = terms.keySet().stream().mapToInt(monomial -> Monomial.exponent(monomial, here)).max().orElse(0);
-            for (int exponent = highest; exponent >= generators.get(index).degree(); exponent--) {
+            int degree = generators.get(index).degree();
+            for (int exponent = highest(terms, index); exponent >= degree; exponent = highest(terms, index)) {
                 lower(terms, index, exponent);
             }
         }
+    }
+
+    private static int highest(Map<Long, BigInteger> terms, int index) {
+        int highest = 0;
+        for (long monomial : terms.keySet()) {
+            highest = Math.max(highest, Monomial.exponent(monomial, index));
+        }
+        return highest;
     }
 
     private void lower(Map<Long, BigInteger> terms, int index, int exponent) {
@@ -145,15 +153,18 @@ final class Tower {
      * 3.14), where D counts the generators it needs.
      */
     long separation(Element element) {
-        long polynomial = height(element) - Logarithm.ofMagnitude(element.length());
-        int degree = degreeOfField(element);
-        return Logarithm.divideUp((degree - 1L) * Logarithm.ofMagnitude(element.length()) + degree * polynomial,
-                Logarithm.PER_BIT);
+        long length = Logarithm.ofMagnitude(element.length());
+        long polynomial = height(element) - length;
+        long degree = degreeOfField(element);
+        BigInteger bits = BigInteger.valueOf(degree - 1).multiply(BigInteger.valueOf(length))
+                .add(BigInteger.valueOf(degree).multiply(BigInteger.valueOf(polynomial)))
+                .divide(BigInteger.valueOf(Logarithm.PER_BIT)).add(BigInteger.ONE);
+        return bits.min(BigInteger.valueOf(Long.MAX_VALUE)).longValueExact();
     }
 
-    private int degreeOfField(Element element) {
+    private long degreeOfField(Element element) {
         boolean[] needed = new boolean[generators.size()];
-        int degree = 1;
+        long degree = 1;
         for (int i = generators.size() - 1; i >= 0; i--) {
             needed[i] |= element.degreeIn(i) > 0;
             if (needed[i]) {

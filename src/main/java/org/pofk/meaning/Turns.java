@@ -159,12 +159,17 @@ record Turns(Gaussian constant, Gaussian pi, Map<Integer, Gaussian> angles) {
         }
 
         @Override
-        public Optional<Turns> squareRoot(Node.SquareRoot squareRoot) {
+        public Optional<Turns> radical(Node.Radical radical) {
             return Optional.empty();
         }
 
         @Override
         public Optional<Turns> exponential(Node.Exponential exponential) {
+            return Optional.empty();
+        }
+
+        @Override
+        public Optional<Turns> logarithm(Node.Logarithm logarithm) {
             return Optional.empty();
         }
 

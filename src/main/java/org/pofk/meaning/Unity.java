@@ -69,8 +69,8 @@ final class Unity extends Walk<BigInteger> {
     }
 
     @Override
-    public BigInteger squareRoot(Node.SquareRoot squareRoot) {
-        return of(squareRoot.radicand());
+    public BigInteger radical(Node.Radical radical) {
+        return of(radical.radicand());
     }
 
     @Override
@@ -82,6 +82,11 @@ final class Unity extends Walk<BigInteger> {
         Rational halfTurns = exponent.get().pi().imaginary();
         BigInteger order = halfTurns.times(Rational.HALF).denominator();
         return exponent.get().angles().isEmpty() ? order : common(order, FOUR);
+    }
+
+    @Override
+    public BigInteger logarithm(Node.Logarithm logarithm) {
+        throw new BeyondTowerException();
     }
 
     @Override

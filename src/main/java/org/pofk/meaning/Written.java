@@ -29,6 +29,12 @@ public record Written(String text, Rational value, Rational lastPlace, Span span
         return new Written(text, value, lastPlace, span);
     }
 
+    /** The lower (−1) or the upper (1) half of the numbers this stands for. */
+    Written part(int side) {
+        Rational quarter = lastPlace.times(Rational.of(side, 4));
+        return new Written(text, value.plus(quarter), halfUnit(), span);
+    }
+
     /** Half a unit of the last place. */
     public Rational halfUnit() {
         return lastPlace.times(Rational.HALF);

@@ -1,7 +1,6 @@
 package org.pofk.meaning;
 
 import java.util.Optional;
-import org.pofk.exact.Rational;
 
 /**
  * A written decimal beside the value it should have. Certified.
@@ -26,21 +25,7 @@ public record WrittenNumber(Written written, Quantity right, Fit fit, String dig
 
     /** Whether a value is within half a unit of the last place, inclusive. */
     static Decision within(Written written, Quantity right) {
-        Decision real = right.isReal();
-        if (real != Decision.YES) {
-            return real;
-        }
-        Quantity off = right.minus(Quantity.of(written.value()));
-        return between(off, written.halfUnit().negate(), written.halfUnit());
-    }
-
-    private static Decision between(Quantity real, Rational low, Rational high) {
-        Optional<Integer> aboveLow = real.minus(Quantity.of(low)).sign();
-        Optional<Integer> belowHigh = Quantity.of(high).minus(real).sign();
-        if (aboveLow.filter(sign -> sign < 0).isPresent() || belowHigh.filter(sign -> sign < 0).isPresent()) {
-            return Decision.NO;
-        }
-        return aboveLow.isPresent() && belowHigh.isPresent() ? Decision.YES : Decision.UNDECIDED;
+        return Condition.within(0, written, right).holds();
     }
 
     /** value ≤ |right| < value + last place, and the sign right where the value has one. */
