@@ -32,13 +32,13 @@ public record Peak(StepValue value, Optional<Long> at) {
     }
 
     /** Empty where the long run is none, or where the bounds on the work don't decide it. */
-    static Optional<Peak> highest(Chain chain, ClosedForm form, LongRun longRun) {
+    public static Optional<Peak> highest(Chain chain, ClosedForm form, LongRun longRun) {
         List<Rational> limits = LongRunValues.of(longRun);
         return limits.isEmpty() ? Optional.empty() : new Search(chain, form, limits).highest();
     }
 
     /** The lowest, as the highest of the output with its sign turned. */
-    static Optional<Peak> lowest(Chain chain, Output output) {
+    public static Optional<Peak> lowest(Chain chain, Output output) {
         Output turned = new Output(output.name(), output.coefficients().stream().map(Rational::negate).toList(),
                 output.constant().negate(), output.definition());
         Transform transform = Transforms.of(chain, List.of(turned)).get(0);

@@ -68,7 +68,7 @@ public final class Judging implements Statement.Visitor<Judgement> {
 
     @Override
     public Judgement eigenvector(Statement.Eigenvector eigenvector) {
-        throw new AssertionError("to come");
+        return judged(() -> JudgedEigenvector.of(eigenvector, claim, truth));
     }
 
     @Override
@@ -78,7 +78,7 @@ public final class Judging implements Statement.Visitor<Judgement> {
 
     @Override
     public Judgement bound(Statement.Bound bound) {
-        throw new AssertionError("to come");
+        return judged(() -> JudgedBound.of(bound, claim, truth));
     }
 
     /** A way to a judgement that ends where the claim means nothing. */

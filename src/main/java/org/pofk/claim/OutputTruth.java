@@ -2,7 +2,9 @@ package org.pofk.claim;
 
 import java.util.List;
 import java.util.function.IntFunction;
+import java.util.stream.IntStream;
 import org.pofk.answer.LongRun;
+import org.pofk.chain.Chain;
 import org.pofk.chain.Output;
 import org.pofk.exact.Factoring;
 import org.pofk.exact.Polynomial;
@@ -21,9 +23,11 @@ import org.pofk.transform.Transforms;
  */
 public final class OutputTruth {
     /** Values up to here are found by stepping; beyond, each by itself. */
-    private static final int STEPPED = 400;
+    static final int STEPPED = 400;
 
     private final Output output;
+    private final boolean isOfChain;
+    private final Kept<Chain> chain;
     private final IntFunction<Rational> steps;
     private final Kept<TransferFunction<Rational>> y;
     private final Kept<Transform> transform;
@@ -32,9 +36,12 @@ public final class OutputTruth {
     private final Kept<ClosedForm> closedForm;
     private final Kept<List<TruePole>> poles;
 
-    private OutputTruth(Output output, IntFunction<Rational> steps, Kept<TransferFunction<Rational>> y,
-            Kept<Transform> transform, Kept<Sequence> sequence, Kept<LongRun> longRun, KnownPoles known) {
+    private OutputTruth(Output output, boolean isOfChain, Kept<Chain> chain, IntFunction<Rational> steps,
+            Kept<TransferFunction<Rational>> y, Kept<Transform> transform, Kept<Sequence> sequence,
+            Kept<LongRun> longRun, KnownPoles known) {
         this.output = output;
+        this.isOfChain = isOfChain;
+        this.chain = chain;
         this.steps = steps;
         this.y = y;
         this.transform = transform;
@@ -48,7 +55,7 @@ public final class OutputTruth {
     static OutputTruth of(Truth truth, Output output) {
         List<Output> alone = List.of(output);
         Kept<Transform> transform = new Kept<>(() -> Transforms.of(truth.chain(), alone).get(0));
-        return new OutputTruth(output, k -> output.of(truth.stateAt(k)),
+        return new OutputTruth(output, true, new Kept<>(truth::chain), k -> output.of(truth.stateAt(k)),
                 new Kept<>(() -> Transforms.inLowestTerms(truth.chain(), alone).get(0)), transform,
                 new Kept<>(() -> Sequence.of(truth.chain(), transform.get())),
                 new Kept<>(() -> LongRun.of(truth.chain(), transform.get())), truth.poles());
@@ -60,7 +67,10 @@ public final class OutputTruth {
      */
     public static OutputTruth of(Output output, TransferFunction<Rational> y) {
         Kept<Transform> transform = new Kept<>(() -> defining(output, y));
-        return new OutputTruth(output, new SteppedValues(y)::at, new Kept<>(() -> y), transform,
+        SteppedValues values = new SteppedValues(y);
+        Kept<Chain> chain = new Kept<>(() -> Companion.of(recurrence(y),
+                IntStream.range(0, recurrence(y).degree()).mapToObj(values::at).toList()));
+        return new OutputTruth(output, false, chain, values::at, new Kept<>(() -> y), transform,
                 new Kept<>(() -> Sequence.of(transform.get())), new Kept<>(() -> LongRun.of(transform.get())),
                 new KnownPoles());
     }
@@ -80,6 +90,16 @@ public final class OutputTruth {
 
     public Output output() {
         return output;
+    }
+
+    /** Whether it is an output of {@link #chain()}; otherwise that is a recursion whose first state is p(k). */
+    boolean isOfChain() {
+        return isOfChain;
+    }
+
+    /** What it comes from. */
+    Chain chain() {
+        return chain.get();
     }
 
     /** p(k), exactly; for a large k with log k products of polynomials. */

@@ -18,6 +18,11 @@ import org.pofk.meaning.Written;
  */
 record RightTexts(List<Held> held, List<Decision> exact, RightDecimals decimals) {
 
+    /** Whether every decimal is right to its digits. */
+    boolean areRight() {
+        return decimals.areRight() == Decision.YES;
+    }
+
     /** One text for each number, in the order held. */
     List<String> all() {
         List<String> texts = new ArrayList<>();
