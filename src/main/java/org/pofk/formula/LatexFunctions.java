@@ -172,7 +172,8 @@ final class LatexFunctions {
     }
 
     private static boolean isSign(Token token) {
-        return token.is(Kind.TIMES) || token.is(Kind.DIVIDE) || token.is(Kind.FOR);
+        return token.is(Kind.TIMES) || token.is(Kind.DIVIDE) || token.is(Kind.FOR)
+                || token.is(Kind.NUMBER) && token.text().contains("e");
     }
 
     private void requireClear(boolean isClear, String function, int start) throws RefusedException {

@@ -73,8 +73,9 @@ final class LatexGroups {
         scanner.skipSpaces();
         boolean isRaised = scanner.next() == '^';
         scanner.backTo(end);
-        boolean isPlain = inside.size() <= 1 || isOneParenthesis(inside)
-                || !isRaised && inside.stream().noneMatch(LatexGroups::mayChange);
+        boolean isPlain = inside.isEmpty() || inside.size() == 1 && inside.get(0).beginsOperand()
+                || isOneParenthesis(inside)
+                || !isRaised && inside.get(0).beginsOperand() && inside.stream().noneMatch(LatexGroups::mayChange);
         if (!isPlain) {
             throw scanner.refused(start, "braces",
                     "braces print nothing, so this has two readings: write ( and ) where they are meant");
@@ -92,6 +93,9 @@ final class LatexGroups {
     private static boolean isOneParenthesis(List<Token> tokens) {
         int depth = 0;
         int from = tokens.get(0).is(Kind.NAME) && Words.function(tokens.get(0).text()).isPresent() ? 1 : 0;
+        if (from == tokens.size() || !tokens.get(from).is(Kind.OPEN)) {
+            return false;
+        }
         for (int i = from; i < tokens.size(); i++) {
             depth += tokens.get(i).is(Kind.OPEN) ? 1 : tokens.get(i).is(Kind.CLOSE) ? -1 : 0;
             if (depth == 0) {
@@ -191,7 +195,7 @@ final class LatexGroups {
     /** Refuses a second exponent. */
     void requireNoScript() throws RefusedException {
         int at = scanner.offset();
-        scanner.skipBlanks();
+        scanner.skipSpaces();
         if (scanner.next() == '^' || scanner.next() == '_') {
             throw scanner.refused(scanner.offset(), "script-twice",
                     "what is raised already can't carry this too: use parentheses, and an index before the exponent");

@@ -2,6 +2,7 @@ package org.pofk.formula;
 
 import java.util.Map;
 import java.util.Optional;
+import java.util.OptionalInt;
 import java.util.Set;
 import org.pofk.formula.FormulaReading.ImaginaryUnit;
 import org.pofk.formula.Token.Kind;
@@ -108,6 +109,12 @@ final class LatexLetters {
         }
         if (word.toString().isBlank()) {
             throw scanner.refusedShowing(start, "name-empty", "holds no name");
+        }
+        OptionalInt disguised = LookAlikes.disguised(word.toString());
+        if (disguised.isPresent()) {
+            int c = disguised.getAsInt();
+            throw scanner.refused(start + scanner.since(start).indexOf(c), "look-alike",
+                    LookAlikes.described(c) + " isn't known here" + LookAlikes.wayOut(c));
         }
         return word.toString().strip();
     }

@@ -114,12 +114,19 @@ final class LatexNumbers {
     }
 
     /** Takes {@code \cdot 10^{-4}} where it stands here, into the number's exponent. */
-    private void powerOfTen() {
+    private void powerOfTen() throws RefusedException {
         int start = scanner.offset();
         String exponent = exponentOfTen();
         boolean isTaken = exponent.matches("-?0*[0-9]{1,3}")
                 && Math.abs(Integer.parseInt(exponent)) <= LARGEST_EXPONENT;
         if (isTaken) {
+            int end = scanner.offset();
+            scanner.skipBlanks();
+            if (scanner.next() == '^' || scanner.next() == '_') {
+                throw scanner.refused(scanner.offset(), "script-twice",
+                        "what is raised already can't carry this too: use parentheses");
+            }
+            scanner.backTo(end);
             digits.append('e').append(exponent);
         } else {
             scanner.backTo(start);

@@ -24,6 +24,8 @@ final class LatexTokens {
     private final LatexCases cases;
     private final FormulaReading reading;
     private int depth;
+    /** Where something that can carry an exponent has ended, or −1. */
+    private int nucleus = -1;
 
     private LatexTokens(String text, Places places, FormulaReading reading) {
         this.scanner = new LatexScanner(text, places);
@@ -63,6 +65,7 @@ final class LatexTokens {
             throw scanner.refused(scanner.offset(), "formula-too-deep",
                     "the formula is nested more than " + Limits.CLAIM.deepest() + " deep");
         }
+        nucleus = -1;
         scanner.skipSpaces();
         while (!seesCloser()) {
             item();
@@ -79,6 +82,12 @@ final class LatexTokens {
 
     /** One character, or one command with its arguments. */
     void item() throws RefusedException {
+        int before = scanner.tokens().size();
+        single();
+        nucleus = scanner.tokens().size() > before ? scanner.offset() : -1;
+    }
+
+    private void single() throws RefusedException {
         int start = scanner.offset();
         int c = scanner.next();
         if (c == '\\') {
@@ -98,10 +107,23 @@ final class LatexTokens {
         } else if (c == '(' || c == '[') {
             groups.parenthesis();
         } else if (c == '^') {
+            requireNucleus(start);
             groups.script();
         } else {
             scanner.skip();
             sign(c, start);
+        }
+    }
+
+    /** Refuses an exponent behind nothing, or behind a blank that is printed. */
+    private void requireNucleus(int start) throws RefusedException {
+        scanner.backTo(Math.max(0, nucleus));
+        scanner.skipBlanks();
+        boolean isRightBehind = nucleus >= 0 && scanner.offset() == start;
+        scanner.backTo(start);
+        if (!isRightBehind) {
+            throw scanner.refused(start, "operand-missing",
+                    "a number, a name or a parenthesis is missing before '^'");
         }
     }
 
@@ -138,7 +160,8 @@ final class LatexTokens {
     }
 
     private void namedCommand(String command, int start) throws RefusedException {
-        Optional<String> relation = LatexWords.relation(command);
+        Optional<String> relation = command.length() > 1
+                ? LatexWords.relation(command) : Optional.empty();
         if (TIMES.contains(command)) {
             scanner.add(Kind.TIMES, start);
         } else if (command.equals("div")) {

@@ -61,6 +61,9 @@ final class LeftSide {
     }
 
     private static String symbol(Token token) {
+        if (token.is(Kind.NAME) && Words.function(token.text()).isPresent()) {
+            return "?";
+        }
         return switch (token.kind()) {
             case NAME, QUOTED -> token.text().equals("k") || token.text().equals("z") ? token.text()
                     : INDEXED_BY_K.matcher(token.text()).matches() ? "K" : "N";

@@ -2,6 +2,7 @@ package org.pofk.formula;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.OptionalInt;
 import java.util.Set;
 import org.pofk.formula.FormulaReading.PlusMinus;
 import org.pofk.formula.Token.Kind;
@@ -75,18 +76,14 @@ final class Lexer {
         }
     }
 
-    /** Refuses a letter of a claim that looks like one of ASCII where it stands alone or among letters of ASCII. */
+    /** Refuses a letter of a claim that only looks like one of ASCII. */
     private void requireRealLetters(String word, int start) throws RefusedException {
-        if (limits != Limits.CLAIM || names.contains(word)) {
-            return;
-        }
-        boolean isMixed = word.codePointCount(0, word.length()) == 1
-                || word.codePoints().anyMatch(c -> c < 0x80 && Character.isLetter(c));
-        for (int i = start; i < at && isMixed; i += Character.charCount(text.codePointAt(i))) {
-            int c = text.codePointAt(i);
-            if (LookAlikes.meant(c).isPresent()) {
-                throw refused(i, "look-alike", LookAlikes.described(c) + " isn't known here" + LookAlikes.wayOut(c));
-            }
+        OptionalInt disguised = limits == Limits.CLAIM && !names.contains(word)
+                ? LookAlikes.disguised(text.substring(start, at)) : OptionalInt.empty();
+        if (disguised.isPresent()) {
+            int c = disguised.getAsInt();
+            throw refused(text.indexOf(c, start), "look-alike",
+                    LookAlikes.described(c) + " isn't known here" + LookAlikes.wayOut(c));
         }
     }
 

@@ -4,6 +4,7 @@ import java.text.Normalizer;
 import java.util.HashMap;
 import java.util.Map;
 import java.util.Optional;
+import java.util.OptionalInt;
 
 /**
  * Characters that look like one of ASCII and are another: letters of other alphabets, full-width and mathematical
@@ -38,6 +39,13 @@ final class LookAlikes {
         String compatible = Normalizer.normalize(Character.toString(c), Normalizer.Form.NFKC);
         return compatible.length() == 1 && compatible.charAt(0) > ' ' && compatible.charAt(0) < 0x7f
                 ? Optional.of(compatible.charAt(0)) : Optional.empty();
+    }
+
+    /** The first letter of a word that looks like one of ASCII where it stands alone or among letters of ASCII. */
+    static OptionalInt disguised(String word) {
+        boolean isMixed = word.codePointCount(0, word.length()) == 1
+                || word.codePoints().anyMatch(c -> c < 0x80 && Character.isLetter(c));
+        return isMixed ? word.codePoints().filter(c -> meant(c).isPresent()).findFirst() : OptionalInt.empty();
     }
 
     /** {@code 'а' (U+0430)}, or the number alone where nothing would be seen. */
