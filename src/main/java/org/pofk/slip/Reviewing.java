@@ -1,13 +1,52 @@
 package org.pofk.slip;
 
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalInt;
+import org.pofk.claim.Claim;
 import org.pofk.claim.Claims;
+import org.pofk.claim.Judgement;
+import org.pofk.claim.Judging;
+import org.pofk.claim.Truth;
+import org.pofk.claim.Verdict;
 
-/** Judges a derivation step by step, names the slips and what follows from them. */
+/**
+ * Judges a derivation step by step. A wrong step is carried when it is right for what an earlier wrong step implies;
+ * otherwise the slips that explain it are named.
+ */
 public final class Reviewing {
-    private Reviewing() {
+    private final Truth truth;
+    private final OtherTruths others;
+    private final List<Implied> implied = new ArrayList<>();
+
+    private Reviewing(Claims claims, Variants variants) {
+        this.truth = Truth.of(claims.model().chain());
+        this.others = new OtherTruths(claims.model(), variants, truth);
     }
 
     public static ReviewedClaims of(Claims claims, Variants variants) {
-        throw new AssertionError("to come");
+        Reviewing reviewing = new Reviewing(claims, variants);
+        return new ReviewedClaims(claims, claims.claims().stream().map(reviewing::finding).toList(),
+                NotStated.in(claims.claims()));
+    }
+
+    private Finding finding(Claim claim) {
+        Judgement judgement = Judging.of(claim, truth);
+        if (judgement.verdict() != Verdict.WRONG) {
+            return new Finding(claim, judgement, judgement.verdict(), OptionalInt.empty(), List.of(), false,
+                    Optional.empty());
+        }
+        OptionalInt from = Carrying.from(claim, truth, implied);
+        if (from.isPresent()) {
+            // what it implies is what the earlier step implies, as far as its own digits go
+            implied.addAll(Implied.of(claim, new Explanation(List.of(), false, List.of(), Optional.empty()), truth)
+                    .stream().map(own -> new Implied(from.getAsInt(), own.seen(), own.truth())).toList());
+            return new Finding(claim, judgement, Verdict.CARRIED, from, List.of(), false, Optional.empty());
+        }
+        Explanation explanation = Explaining.of(claim, judgement, truth, others);
+        implied.addAll(Implied.of(claim, explanation, truth));
+        return new Finding(claim, judgement, Verdict.WRONG, OptionalInt.empty(), explanation.slips(),
+                explanation.together(), explanation.rest());
     }
 }

@@ -1,0 +1,88 @@
+package org.pofk.slip;
+
+import java.util.Set;
+import org.pofk.claim.FormulaText;
+import org.pofk.formula.Formula;
+import org.pofk.formula.FormulaParser;
+import org.pofk.formula.FormulaReading;
+import org.pofk.formula.Latex;
+import org.pofk.formula.LatexReader;
+import org.pofk.formula.ParsedFormula;
+import org.pofk.formula.PlainText;
+import org.pofk.text.Places;
+import org.pofk.text.RefusedException;
+
+/** What an edit writes, in plain notation or in LaTeX. */
+enum AuthorNotation {
+    PLAIN("*", "(", ")", "(", ")", " deg", "1/2*") {
+        @Override
+        ParsedFormula parse(String text, Places places, FormulaReading reading) throws RefusedException {
+            return FormulaParser.parse(text, places, Set.of(), reading);
+        }
+
+        @Override
+        String write(Formula formula) {
+            return PlainText.ASCII.write(formula);
+        }
+    },
+    LATEX(" \\cdot ", "\\left(", "\\right)", "{", "}", "^{\\circ}", "\\frac{1}{2} \\cdot ") {
+        @Override
+        ParsedFormula parse(String text, Places places, FormulaReading reading) throws RefusedException {
+            return LatexReader.parse(text, places, reading);
+        }
+
+        @Override
+        String write(Formula formula) {
+            return Latex.write(formula);
+        }
+    };
+
+    private final String times;
+    private final String open;
+    private final String close;
+    private final String openExponent;
+    private final String closeExponent;
+    private final String degrees;
+    private final String half;
+
+    AuthorNotation(String times, String open, String close, String openExponent, String closeExponent, String degrees,
+            String half) {
+        this.times = times;
+        this.open = open;
+        this.close = close;
+        this.openExponent = openExponent;
+        this.closeExponent = closeExponent;
+        this.degrees = degrees;
+        this.half = half;
+    }
+
+    static AuthorNotation of(FormulaText.Notation notation) {
+        return notation == FormulaText.Notation.LATEX ? LATEX : PLAIN;
+    }
+
+    abstract ParsedFormula parse(String text, Places places, FormulaReading reading) throws RefusedException;
+
+    abstract String write(Formula formula);
+
+    String times() {
+        return times;
+    }
+
+    String enclosed(String text) {
+        return open + text + close;
+    }
+
+    String exponent(String text) {
+        return openExponent + text + closeExponent;
+    }
+
+    /** What makes degrees of the number before it. */
+    String degrees() {
+        return degrees;
+    }
+
+    /** One half, as a factor in front. */
+    String half() {
+        return half;
+    }
+}

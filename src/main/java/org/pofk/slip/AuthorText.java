@@ -1,0 +1,154 @@
+package org.pofk.slip;
+
+import java.util.Comparator;
+import java.util.IdentityHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.stream.Stream;
+import org.pofk.claim.FormulaText;
+import org.pofk.formula.Formula;
+import org.pofk.formula.FormulaReading;
+import org.pofk.formula.FormulaReading.ImaginaryUnit;
+import org.pofk.formula.FormulaReading.PlusMinus;
+import org.pofk.formula.FormulaReading.Subject;
+import org.pofk.formula.ParsedFormula;
+import org.pofk.text.Places;
+import org.pofk.text.Position;
+import org.pofk.text.RefusedException;
+import org.pofk.text.Span;
+
+/**
+ * A formula as its author wrote it, to be edited where its parts stand: what isn't touched keeps his notation. Offsets
+ * are UTF-16 units of the text; every part is known by its node in {@link #tree}, which is read from the text alone,
+ * and by its place in the file.
+ */
+final class AuthorText {
+    private static final String ALONE = "text";
+    private static final List<FormulaReading> READINGS = readings();
+
+    private final FormulaText written;
+    private final ParsedFormula tree;
+    private final FormulaReading reading;
+    private final Map<ParsedFormula, ParsedFormula> inFile = new IdentityHashMap<>();
+
+    /** A stretch of the text and what stands there instead. */
+    record Replacement(int start, int end, String text) {
+    }
+
+    private AuthorText(FormulaText written, ParsedFormula tree, FormulaReading reading) {
+        this.written = written;
+        this.tree = tree;
+        this.reading = reading;
+        pair(tree, written.parsed());
+    }
+
+    /** Nothing where the text alone isn't read as it was in its file. */
+    static Optional<AuthorText> of(FormulaText written) {
+        for (FormulaReading reading : READINGS) {
+            Optional<ParsedFormula> alone = parsed(written.text(), written.notation(), reading)
+                    .filter(tree -> tree.formula().equals(written.parsed().formula()));
+            if (alone.isPresent()) {
+                return Optional.of(new AuthorText(written, alone.get(), reading));
+            }
+        }
+        return Optional.empty();
+    }
+
+    /** How a text of a claim may have been read: its file says what it is, this only that it was so read. */
+    private static List<FormulaReading> readings() {
+        return Stream.of(Subject.values()).flatMap(subject -> Stream.of(PlusMinus.values()).flatMap(sign ->
+                Stream.of(ImaginaryUnit.values()).map(unit -> FormulaReading.of(subject).with(sign).with(unit))))
+                .toList();
+    }
+
+    private void pair(ParsedFormula alone, ParsedFormula placed) {
+        inFile.put(alone, placed);
+        for (int i = 0; i < alone.parts().size(); i++) {
+            pair(alone.parts().get(i), placed.parts().get(i));
+        }
+    }
+
+    FormulaText.Notation notation() {
+        return written.notation();
+    }
+
+    String text() {
+        return written.text();
+    }
+
+    /** The whole formula; its spans are columns of the text alone. */
+    ParsedFormula tree() {
+        return tree;
+    }
+
+    static int start(ParsedFormula node) {
+        return node.span().start().column() - 1;
+    }
+
+    static int end(ParsedFormula node) {
+        return node.span().end().column() - 1;
+    }
+
+    String text(ParsedFormula node) {
+        return text().substring(start(node), end(node));
+    }
+
+    /** The place in the file of a node, or of one put together from some. */
+    Span place(ParsedFormula node) {
+        return inFile.containsKey(node) ? inFile.get(node).span()
+                : place(node.parts().get(0)).to(place(node.parts().get(node.parts().size() - 1)));
+    }
+
+    Span place() {
+        return written.parsed().span();
+    }
+
+    /** The last character before an offset that isn't blank, or −1. */
+    int before(int offset) {
+        int at = offset - 1;
+        while (at >= 0 && Character.isWhitespace(text().charAt(at))) {
+            at--;
+        }
+        return at;
+    }
+
+    /** The text with other stretches in place of some, which don't overlap; nothing where that is no formula. */
+    Optional<FormulaText> with(List<Replacement> replacements) {
+        return read(replaced(text(), 0, replacements));
+    }
+
+    /** The text of one part with the replacements in it. */
+    String edited(ParsedFormula node, List<Replacement> replacements) {
+        return replaced(text(node), start(node), replacements);
+    }
+
+    /** From the last to the first, so that offsets stay; what is put in before a stretch comes after its replacement. */
+    private static String replaced(String text, int offset, List<Replacement> replacements) {
+        StringBuilder edited = new StringBuilder(text);
+        replacements.stream().sorted(Comparator.comparingInt(Replacement::start).thenComparingInt(Replacement::end)
+                .reversed()).forEach(each ->
+                edited.replace(each.start() - offset, each.end() - offset, each.text()));
+        return edited.toString();
+    }
+
+    /** Another text in the same notation. */
+    Optional<FormulaText> read(String text) {
+        return parsed(text, notation(), reading).map(parsed -> new FormulaText(text, notation(), parsed));
+    }
+
+    private static Optional<ParsedFormula> parsed(String text, FormulaText.Notation notation,
+            FormulaReading reading) {
+        Places alone = offset -> new Position(ALONE, 1, offset + 1);
+        try {
+            return Optional.of(AuthorNotation.of(notation).parse(text, alone, reading));
+        } catch (RefusedException refused) {
+            return Optional.empty();
+        }
+    }
+
+    /** Whether a name stands anywhere in a part. */
+    static boolean varies(ParsedFormula node) {
+        return node.formula() instanceof Formula.Symbol || node.parts().stream().anyMatch(AuthorText::varies);
+    }
+}

@@ -1,0 +1,208 @@
+package org.pofk.slip;
+
+import java.math.BigDecimal;
+import java.util.ArrayList;
+import java.util.LinkedHashSet;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.Set;
+import java.util.TreeMap;
+import org.pofk.claim.Claim;
+import org.pofk.claim.Judgement;
+import org.pofk.claim.Statement;
+import org.pofk.claim.Truth;
+import org.pofk.formula.Formula;
+import org.pofk.meaning.Fit;
+import org.pofk.modes.Mode;
+import org.pofk.slip.AuthorText.Replacement;
+import org.pofk.slip.FormulaSurvey.Constant;
+
+/** Every change of a statement's texts that may undo a slip; most are soon refuted. */
+final class Changes {
+    /** Above so many modes no missing term is tried. */
+    private static final int MOST_MODES = 40;
+    private static final int MOST_SWAPS = 400;
+    private static final int LEAST_DIGITS = 3;
+
+    private final Claim claim;
+    private final Judgement judgement;
+    private final Truth truth;
+    private final List<StatementPart> parts;
+    private final List<Optional<AuthorText>> texts;
+    private final List<Optional<Screen>> screens;
+    private final TrueNumber.Precisions digits;
+
+    Changes(Claim claim, Judgement judgement, Truth truth, List<Optional<AuthorText>> texts,
+            List<Optional<Screen>> screens) {
+        this.claim = claim;
+        this.judgement = judgement;
+        this.truth = truth;
+        this.parts = StatementPart.of(claim.statement());
+        this.texts = texts;
+        this.screens = screens;
+        this.digits = digits();
+    }
+
+    private TrueNumber.Precisions digits() {
+        int significant = 0;
+        int places = 0;
+        for (Optional<AuthorText> text : texts) {
+            for (Formula formula : text.stream().flatMap(each -> each.tree().nodes())
+                    .map(node -> node.formula()).toList()) {
+                if (formula instanceof Formula.WrittenDecimal decimal) {
+                    BigDecimal value = new BigDecimal(decimal.text());
+                    significant = Math.max(significant, value.precision());
+                    places = Math.max(places, value.scale());
+                }
+            }
+        }
+        return new TrueNumber.Precisions(significant, places);
+    }
+
+    /** Those within one text and those that concern two. */
+    List<Change> all() {
+        List<Change> changes = new ArrayList<>();
+        for (int part = 0; part < parts.size(); part++) {
+            changes.addAll(of(part));
+        }
+        changes.addAll(swaps());
+        return changes;
+    }
+
+    /** Those within one text. */
+    List<Change> of(int part) {
+        if (texts.get(part).isEmpty()) {
+            return List.of();
+        }
+        AuthorText text = texts.get(part).get();
+        FormulaSurvey survey = FormulaSurvey.of(text.tree());
+        List<Edit> edits = new ArrayList<>(new SignEdits(text).of(survey));
+        edits.addAll(ofKind(part, text, survey));
+        edits.addAll(new NumberEdits(text).of(survey, constant -> right(part, text, constant)));
+        return edits.stream().map(edit -> change(part, edit)).toList();
+    }
+
+    private List<Edit> ofKind(int part, AuthorText text, FormulaSurvey survey) {
+        List<Edit> edits = new ArrayList<>();
+        if (claim.statement() instanceof Statement.PofK formula) {
+            edits.addAll(new WaveEdits(text).of(survey));
+            edits.addAll(new StepEdits(text).of(survey));
+            edits.addAll(new SwapEdits(text).of(survey));
+            List<Mode> modes = truth.about(formula.parts().get(part).output()).closedForm().modes();
+            edits.addAll(modes.size() > MOST_MODES ? List.of() : new MissingEdits(text, digitsAdded()).ofSteps(modes));
+        } else if (claim.statement() instanceof Statement.TransformOf transform) {
+            edits.addAll(new ZEdits(text).of(survey));
+            edits.addAll(new SwapEdits(text).of(survey));
+            List<Mode> modes = truth.about(transform.output()).closedForm().modes();
+            int powerOfZ = transform.form() == Statement.TransformOf.Form.TRANSFORM_OVER_Z ? 0 : 1;
+            edits.addAll(modes.size() > MOST_MODES ? List.of()
+                    : new MissingEdits(text, digitsAdded()).ofTransform(modes, powerOfZ));
+        } else if (claim.statement() instanceof Statement.MatrixPolynomial) {
+            edits.addAll(new SwapEdits(text).of(survey));
+        } else if (claim.statement() instanceof Statement.Pair) {
+            String name = parts.get(part).name();
+            edits.addAll(name.equals("amplitude") ? new WaveEdits(text).ofAmplitude()
+                    : name.equals("radius") ? List.of() : new WaveEdits(text).ofAngle());
+        } else if (!(claim.statement() instanceof Statement.Poles)) {
+            edits.add(complement(text));
+        }
+        return edits;
+    }
+
+    /** Significant digits for numbers put in; 0 where the author writes no decimals. */
+    private int digitsAdded() {
+        return digits.significant() == 0 ? 0 : Math.max(LEAST_DIGITS, digits.significant());
+    }
+
+    private static Edit complement(AuthorText text) {
+        String found = text.text();
+        String right = Digits.isNumber(found)
+                ? BigDecimal.ONE.subtract(new BigDecimal(found)).toPlainString()
+                : "1 - " + AuthorNotation.of(text.notation()).enclosed(found);
+        return new Edit(SlipKind.COMPLEMENT_QUOTED, List.of(new Replacement(0, found.length(), right)), text.place(),
+                found, right);
+    }
+
+    /** Right numbers for a place: what the judgement found, what the right statement is made of, what would solve it. */
+    private List<String> right(int part, AuthorText text, Constant constant) {
+        String found = text.text(constant.node());
+        AuthorNotation notation = AuthorNotation.of(text.notation());
+        Set<String> right = new LinkedHashSet<>();
+        judgement.numbers().stream().filter(each -> each.fit() == Fit.WRONG
+                && each.written().span().equals(text.place(constant.node()))).forEach(each -> right.add(each.right()));
+        for (TrueNumber number : TrueNumbers.of(claim.statement(), part, constant.role(), truth)) {
+            right.addAll(number.absolute().inPlaceOf(found, digits, notation));
+            if (number.isNegative() && parts.size() > 1) {
+                right.addAll(number.inPlaceOf(found, digits, notation));
+            }
+        }
+        screens.get(part).ifPresent(screen -> SolvedNumbers.of(text, constant.node(), screen)
+                .forEach(number -> right.addAll(number.inPlaceOf(found, digits, notation))));
+        return new ArrayList<>(right);
+    }
+
+    /** The change of one text; where two poles are written as one with ±, of both. */
+    private Change change(int part, Edit edit) {
+        Change change = Change.of(part, named(part, edit));
+        if (claim.statement() instanceof Statement.Poles) {
+            for (int other = 0; other < parts.size(); other++) {
+                if (other != part && parts.get(other).text().parsed().span()
+                        .equals(parts.get(part).text().parsed().span())) {
+                    Map<Integer, List<Replacement>> both = new TreeMap<>(change.edits());
+                    both.put(other, edit.replacements());
+                    return new Change(change.kind(), new TreeMap<>(both), change.span(), change.found(),
+                            change.right());
+                }
+            }
+        }
+        return change;
+    }
+
+    /** What a slip is called in this part of the statement. */
+    private Edit named(int part, Edit edit) {
+        String name = parts.get(part).name();
+        SlipKind kind = edit.kind();
+        boolean pole = claim.statement() instanceof Statement.Poles || name.equals("pole")
+                || name.equals("radius") || name.equals("angle") || name.equals("eigenvalue");
+        if (kind == SlipKind.WRONG_COEFFICIENT && pole) {
+            kind = SlipKind.WRONG_POLE;
+        } else if (kind == SlipKind.SIGN_OF_A_TERM && name.equals("phase")) {
+            kind = SlipKind.SIGN_OF_THE_PHASE;
+        }
+        return new Edit(kind, edit.replacements(), edit.span(), edit.found(), edit.right());
+    }
+
+    /** Two texts of a list exchanged. */
+    private List<Change> swaps() {
+        List<Change> swaps = new ArrayList<>();
+        if (claim.statement() instanceof Statement.PofK || claim.statement() instanceof Statement.Pair
+                || claim.statement() instanceof Statement.Poles) {
+            return swaps;
+        }
+        for (int i = 0; i < parts.size(); i++) {
+            for (int j = i + 1; j < parts.size() && swaps.size() < MOST_SWAPS; j++) {
+                boolean poles = isPole(i) == isPole(j);
+                if (poles && texts.get(i).isPresent() && texts.get(j).isPresent()) {
+                    AuthorText a = texts.get(i).get();
+                    AuthorText b = texts.get(j).get();
+                    if (!a.text().equals(b.text())) {
+                        swaps.add(swap(i, a, j, b));
+                    }
+                }
+            }
+        }
+        return swaps;
+    }
+
+    private boolean isPole(int part) {
+        return parts.get(part).name().equals("pole") || parts.get(part).name().equals("eigenvalue");
+    }
+
+    private static Change swap(int i, AuthorText a, int j, AuthorText b) {
+        return new Change(SlipKind.COEFFICIENTS_SWAPPED, new TreeMap<>(Map.of(
+                i, List.of(new Replacement(0, a.text().length(), b.text())),
+                j, List.of(new Replacement(0, b.text().length(), a.text())))), a.place(),
+                a.text() + " and " + b.text(), b.text() + " and " + a.text());
+    }
+}

@@ -1,0 +1,138 @@
+package org.pofk.slip;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.Optional;
+import java.util.function.Supplier;
+import java.util.stream.Collectors;
+import java.util.stream.IntStream;
+import org.pofk.claim.Claim;
+import org.pofk.claim.FormulaText;
+import org.pofk.claim.Judgement;
+import org.pofk.claim.Judging;
+import org.pofk.claim.Statement;
+import org.pofk.claim.Truth;
+
+/**
+ * Finds the slips that explain one wrong claim: every candidate that isn't refuted at a few points is judged as the
+ * claim was, and those are slips that make it right. Deterministic; the work is bounded by a {@link Budget}.
+ */
+final class Explaining {
+    private static final int MOST_PAIRS = 60;
+
+    private final Claim claim;
+    private final Judgement judgement;
+    private final Truth truth;
+    private final List<StatementPart> parts;
+    private final List<Optional<AuthorText>> texts;
+    private final List<Optional<Screen>> screens;
+    private final List<Integer> wrongParts;
+    private final Budget budget = new Budget();
+
+    private Explaining(Claim claim, Judgement judgement, Truth truth) {
+        this.claim = claim;
+        this.judgement = judgement;
+        this.truth = truth;
+        this.parts = StatementPart.of(claim.statement());
+        this.texts = parts.stream().map(part -> AuthorText.of(part.text())).toList();
+        this.screens = IntStream.range(0, parts.size()).mapToObj(part -> Screen.of(claim, part, truth)).toList();
+        this.wrongParts = IntStream.range(0, parts.size()).filter(part -> screens.get(part)
+                .filter(screen -> !screen.mayBeRight(parts.get(part).text())).isPresent()).boxed().toList();
+    }
+
+    static Explanation of(Claim claim, Judgement judgement, Truth truth, OtherTruths others) {
+        return new Explaining(claim, judgement, truth).explained(others);
+    }
+
+    private Explanation explained(OtherTruths others) {
+        List<Candidate> found = new ArrayList<>();
+        List<Change> changes = new Changes(claim, judgement, truth, texts, screens).all().stream()
+                .sorted(Comparator.comparing(Change::kind)).toList();
+        List<Change> kept = new ArrayList<>();
+        for (Change change : changes) {
+            if (!repeats(found, change) && budget.screening() && mayBeRight(change)) {
+                kept.add(change);
+                candidate(List.of(change)).filter(this::isRight).ifPresent(found::add);
+            }
+        }
+        StructuralChanges.of(claim, truth).stream().filter(this::isRight).forEach(found::add);
+        List<Candidate> models = others.of(claim, judgement.right()).stream()
+                .filter(each -> budget.screening() && mayBeTrue(each) && isRight(each)).toList();
+        models.stream().filter(model -> found.stream().noneMatch(each -> each.kind() == model.kind()))
+                .forEach(found::add);
+        List<Slip> slips = found.stream().sorted(Comparator.comparing(Candidate::kind)).map(Candidate::slip).toList();
+        return slips.isEmpty() ? together(changes) : new Explanation(slips, false, models, Optional.empty());
+    }
+
+    /** Whether the same place with the same value, or the same kind at the same place, is named already. */
+    private static boolean repeats(List<Candidate> found, Change change) {
+        return found.stream().anyMatch(each -> each.span().equals(change.span())
+                && (each.kind() == change.kind() || each.right().equals(change.right())));
+    }
+
+    private boolean mayBeRight(Change change) {
+        return change.edits().keySet().containsAll(wrongParts)
+                && change.edits().keySet().stream().allMatch(part -> mayBeRight(change, part));
+    }
+
+    private boolean mayBeRight(Change change, int part) {
+        Optional<FormulaText> text = texts.get(part).flatMap(own -> change.textOf(own, part));
+        return text.isPresent() && screens.get(part).map(screen -> screen.mayBeRight(text.get())).orElse(true);
+    }
+
+    private boolean mayBeTrue(Candidate candidate) {
+        Truth other = candidate.truth().get();
+        List<StatementPart> own = StatementPart.of(candidate.claim().statement());
+        return IntStream.range(0, own.size()).allMatch(part -> Screen.of(candidate.claim(), part, other)
+                .map(screen -> screen.mayBeRight(own.get(part).text())).orElse(true));
+    }
+
+    private boolean isRight(Candidate candidate) {
+        return budget.judgement() && Judging.of(candidate.claim(), candidate.truth().get()).isRight();
+    }
+
+    private Optional<Candidate> candidate(List<Change> changes) {
+        Change first = changes.get(0);
+        return Change.made(claim.statement(), changes).map(statement -> new Candidate(first.kind(), first.span(),
+                first.found(), first.right(), corrected(statement), Candidate.with(claim, statement), () -> truth));
+    }
+
+    /** A statement as its author would write it: its text, or its texts by name. */
+    static Supplier<String> corrected(Statement statement) {
+        List<StatementPart> all = StatementPart.of(statement);
+        return () -> all.size() == 1 ? all.get(0).text().text()
+                : all.stream().map(part -> part.text().text()).collect(Collectors.joining(", "));
+    }
+
+    /** Two slips, or one in each wrong part of the statement, that explain it together. */
+    private Explanation together(List<Change> changes) {
+        Optional<List<Change>> several = wrongParts.size() > 1 ? inEachPart(changes) : Optional.empty();
+        if (several.isEmpty()) {
+            several = new Pairs(texts, screens, changes, budget).found().stream().limit(MOST_PAIRS)
+                    .filter(pair -> candidate(pair).filter(this::isRight).isPresent()).findFirst();
+        }
+        if (several.isEmpty()) {
+            return new Explanation(List.of(), false, List.of(), Optional.of(Rest.of(claim, judgement, truth)));
+        }
+        List<Change> all = several.get();
+        Candidate whole = candidate(all).orElseThrow();
+        List<Slip> slips = all.stream().map(change -> new Slip(change.kind(), change.span(), change.found(),
+                change.right(), whole.corrected().get())).toList();
+        return new Explanation(slips, true, List.of(), Optional.empty());
+    }
+
+    /** The simplest change of each wrong part that makes this part right. */
+    private Optional<List<Change>> inEachPart(List<Change> changes) {
+        List<Change> chosen = new ArrayList<>();
+        for (int part : wrongParts) {
+            Optional<Change> first = changes.stream().filter(change -> change.edits().keySet().equals(java.util.Set
+                    .of(part)) && budget.screening() && mayBeRight(change, part)).findFirst();
+            if (first.isEmpty()) {
+                return Optional.empty();
+            }
+            chosen.add(first.get());
+        }
+        return candidate(chosen).filter(this::isRight).isPresent() ? Optional.of(chosen) : Optional.empty();
+    }
+}

@@ -1,0 +1,170 @@
+package org.pofk.slip;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import org.pofk.exact.Ball;
+import org.pofk.exact.Enclosed;
+import org.pofk.exact.Rational;
+import org.pofk.formula.Formula;
+import org.pofk.formula.Formulas;
+import org.pofk.modes.Mode;
+import org.pofk.modes.ModeFormula;
+import org.pofk.modes.RealValue;
+import org.pofk.slip.AuthorText.Replacement;
+
+/** One term of the right formula added at the end, with its numbers as the author would write them. */
+final class MissingEdits {
+    private final AuthorText text;
+    private final AuthorNotation notation;
+    private final int digits;
+
+    /** @param digits significant digits of decimals; 0 where the author writes none */
+    MissingEdits(AuthorText text, int digits) {
+        this.text = text;
+        this.notation = AuthorNotation.of(text.notation());
+        this.digits = digits;
+    }
+
+    /** One edit for each mode, in k. */
+    List<Edit> ofSteps(List<Mode> modes) {
+        List<Edit> edits = new ArrayList<>();
+        for (Mode mode : modes) {
+            edits.add(added(kind(mode), mode.accept(new InSteps())));
+            mode.accept(new OtherShapes()).forEach(term -> edits.add(added(SlipKind.TERM_MISSING, term)));
+        }
+        return edits;
+    }
+
+    /** One edit for each real mode, in z, times a power of z: 0 where the author expands Y(z)/z. */
+    List<Edit> ofTransform(List<Mode> modes, int powerOfZ) {
+        List<Edit> edits = new ArrayList<>();
+        for (Mode mode : modes) {
+            mode.accept(new InZ(powerOfZ)).ifPresent(term -> edits.add(added(kind(mode), term)));
+        }
+        return edits;
+    }
+
+    private static SlipKind kind(Mode mode) {
+        if (mode.pole().isEmpty()) {
+            return SlipKind.IMPULSE_MISSING;
+        }
+        return SlipKind.TERM_MISSING;
+    }
+
+    private Edit added(SlipKind kind, Formula term) {
+        boolean negative = term instanceof Formula.Negation;
+        String written = notation.write(negative ? ((Formula.Negation) term).operand() : term);
+        String right = (negative ? "- " : "+ ") + written;
+        int end = text.text().length();
+        return new Edit(kind, List.of(new Replacement(end, end, " " + right)), text.place(), text.text(), right);
+    }
+
+    private Formula number(RealValue value) {
+        if (digits == 0 && value.exact().isPresent()) {
+            return value.exact().get();
+        }
+        boolean whole = value.rational().filter(Rational::isInteger).isPresent();
+        return whole ? value.exact().orElseThrow() : Formulas.decimal(value.decimal(digits == 0 ? 6 : digits).text());
+    }
+
+    /** The term in k. */
+    private final class InSteps implements Mode.Visitor<Formula> {
+        @Override
+        public Formula impulse(Mode.Impulse impulse) {
+            return ModeFormula.impulse(number(impulse.value()), impulse.at());
+        }
+
+        @Override
+        public Formula geometric(Mode.Geometric mode) {
+            return ModeFormula.geometric(number(mode.coefficient()), mode.power(), number(mode.base()));
+        }
+
+        @Override
+        public Formula oscillating(Mode.Oscillating mode) {
+            return ModeFormula.oscillating(number(mode.amplitude()), mode.power(), number(mode.modulus()),
+                    number(mode.angle()), number(mode.phase()));
+        }
+    }
+
+    /** The term in z, times a power of z. */
+    private final class InZ implements Mode.Visitor<Optional<Formula>> {
+        private static final Formula.Symbol Z = new Formula.Symbol("z");
+
+        private final int powerOfZ;
+
+        InZ(int powerOfZ) {
+            this.powerOfZ = powerOfZ;
+        }
+
+        @Override
+        public Optional<Formula> impulse(Mode.Impulse impulse) {
+            int power = impulse.at() + 1 - powerOfZ;
+            Formula value = number(impulse.value());
+            return Optional.of(power == 0 ? value
+                    : Formulas.quotient(value, Formulas.power(Z, Formulas.number(power))));
+        }
+
+        @Override
+        public Optional<Formula> geometric(Mode.Geometric mode) {
+            Formula above = Formulas.product(number(mode.coefficient()), Formulas.power(Z, Formulas.number(powerOfZ)));
+            Formula below = Formulas.power(Formulas.sum(List.of(Z, Formulas.opposite(number(mode.base())))),
+                    Formulas.number(mode.power() + 1));
+            return Optional.of(Formulas.quotient(above, below));
+        }
+
+        @Override
+        public Optional<Formula> oscillating(Mode.Oscillating mode) {
+            return Optional.empty();
+        }
+    }
+
+    /** Parts of a mode as others write it: c k^p r^k, and the cosine and the sine without a phase. */
+    private final class OtherShapes implements Mode.Visitor<List<Formula>> {
+        private static final Formula.Symbol K = new Formula.Symbol("k");
+
+        @Override
+        public List<Formula> impulse(Mode.Impulse impulse) {
+            return List.of();
+        }
+
+        @Override
+        public List<Formula> geometric(Mode.Geometric mode) {
+            if (mode.power() == 0) {
+                return List.of();
+            }
+            Formula base = number(mode.base());
+            List<Formula> terms = new ArrayList<>();
+            Optional<Rational> exact = mode.base().rational().filter(value -> mode.coefficient().rational().isPresent());
+            for (int power = 1; power <= mode.power(); power++) {
+                // the highest power of k in binomial(k, p) r^(k−p), and the lower ones as far as p = 2 has them
+                Rational weight = power == mode.power() ? factorial(power).inverse() : Rational.HALF.negate();
+                int p = mode.power();
+                RealValue value = exact.map(r -> RealValue.of(mode.coefficient().rational().get().times(weight)
+                        .dividedBy(r.pow(p)))).orElseGet(() -> new RealValue(Optional.empty(),
+                                mode.coefficient().enclosure().times(Enclosed.of(weight))
+                                        .dividedBy(mode.base().enclosure().map(ball -> ball.pow(p)))));
+                terms.add(Formulas.product(List.of(number(value), Formulas.power(K, Formulas.number(power)),
+                        Formulas.power(base, K))));
+            }
+            return terms;
+        }
+
+        private static Rational factorial(int n) {
+            return n < 2 ? Rational.ONE : Rational.of(n).times(factorial(n - 1));
+        }
+
+        @Override
+        public List<Formula> oscillating(Mode.Oscillating mode) {
+            return List.of(part(mode, Formula.Function.COS, mode.phase().enclosure().map(Ball::cos)),
+                    part(mode, Formula.Function.SIN, mode.phase().enclosure().map(Ball::sin).negate()));
+        }
+
+        private Formula part(Mode.Oscillating mode, Formula.Function function, Enclosed share) {
+            RealValue value = new RealValue(Optional.empty(), mode.amplitude().enclosure().times(share));
+            return Formulas.product(List.of(number(value), ModeFormula.binomial(mode.power()),
+                    Formulas.power(number(mode.modulus()), ModeFormula.kMinus(mode.power())), Formulas.call(function,
+                            Formulas.overDenominator(number(mode.angle()), ModeFormula.kMinus(mode.power())))));
+        }
+    }
+}

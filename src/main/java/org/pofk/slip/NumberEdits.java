@@ -1,0 +1,81 @@
+package org.pofk.slip;
+
+import java.math.BigDecimal;
+import java.util.ArrayList;
+import java.util.LinkedHashSet;
+import java.util.List;
+import java.util.Set;
+import org.pofk.formula.ParsedFormula;
+import org.pofk.slip.AuthorText.Replacement;
+import org.pofk.slip.FormulaSurvey.Constant;
+import org.pofk.slip.FormulaSurvey.Role;
+
+/** One number replaced by another: by one with digits transposed or the point moved, or by a right one. */
+final class NumberEdits {
+    private final AuthorText text;
+    private final AuthorNotation notation;
+
+    NumberEdits(AuthorText text) {
+        this.text = text;
+        this.notation = AuthorNotation.of(text.notation());
+    }
+
+    /** The right numbers that may stand in the place of one. */
+    @FunctionalInterface
+    interface Right {
+        List<String> inPlaceOf(Constant constant);
+    }
+
+    List<Edit> of(FormulaSurvey survey, Right right) {
+        List<Edit> edits = new ArrayList<>();
+        for (Constant constant : survey.literals()) {
+            if (constant.role() == Role.SHIFT) {
+                continue;
+            }
+            String found = text.text(constant.node());
+            if (Digits.isNumber(found)) {
+                Digits.transposed(found).forEach(other ->
+                        edits.add(edit(SlipKind.DIGITS_TRANSPOSED, constant.node(), other)));
+                if (new BigDecimal(found).signum() != 0) {
+                    Digits.pointMoved(found).forEach(other ->
+                            edits.add(edit(SlipKind.DECIMAL_POINT_MOVED, constant.node(), other)));
+                }
+            }
+            edits.addAll(replaced(constant, right));
+        }
+        for (Constant constant : survey.fractions()) {
+            if (constant.role() != Role.SHIFT) {
+                edits.addAll(replaced(constant, right));
+            }
+        }
+        return edits;
+    }
+
+    private List<Edit> replaced(Constant constant, Right right) {
+        String found = text.text(constant.node());
+        Set<String> others = new LinkedHashSet<>(right.inPlaceOf(constant));
+        others.remove(found);
+        return others.stream().map(other -> edit(
+                Digits.compared(found, other.startsWith("-") ? other.substring(1) : other).orElse(generic(constant)),
+                constant.node(), other)).toList();
+    }
+
+    static SlipKind generic(Constant constant) {
+        return constant.role() == Role.POLE || constant.role() == Role.ANGLE
+                ? SlipKind.WRONG_POLE : SlipKind.WRONG_COEFFICIENT;
+    }
+
+    private Edit edit(SlipKind kind, ParsedFormula node, String right) {
+        boolean simple = right.chars().allMatch(c -> Character.isLetterOrDigit(c) || c == '.');
+        boolean alone = node == text.tree();
+        boolean keeps = !simple && !alone && (right.startsWith("-") || !text.text(node).startsWith("("));
+        return new Edit(kind, List.of(new Replacement(AuthorText.start(node), AuthorText.end(node),
+                keeps && needsParentheses(right) ? notation.enclosed(right) : right)), text.place(node),
+                text.text(node), right);
+    }
+
+    /** A sign, a sum or a quotient in place of a number. */
+    private static boolean needsParentheses(String right) {
+        return right.chars().anyMatch(c -> "+-/* ".indexOf(c) >= 0) && !right.matches("[0-9.]+[eE][-+]?[0-9]+");
+    }
+}

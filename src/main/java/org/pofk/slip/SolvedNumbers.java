@@ -1,0 +1,99 @@
+package org.pofk.slip;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.function.IntFunction;
+import org.pofk.claim.FormulaText;
+import org.pofk.exact.Ball;
+import org.pofk.exact.Rational;
+import org.pofk.formula.ParsedFormula;
+import org.pofk.meaning.Precision;
+import org.pofk.meaning.Quantity;
+import org.pofk.slip.AuthorText.Replacement;
+
+/**
+ * The number that a place of a formula should hold, from the formula's value at one point, all other numbers taken as
+ * they stand: the formula is taken to be (a t + b)/(c t + 1) in t, the number less what stands there, and is evaluated
+ * at t = 0, 1, 2. A guess: whether it is right is judged.
+ */
+final class SolvedNumbers {
+    private static final int BITS = 256;
+    private static final int POINTS = 3;
+    private static final int LONGEST_FRACTION_BITS = 64;
+
+    private SolvedNumbers() {
+    }
+
+    /** One guess for each of the first points, the place's own value added by {@code value}. */
+    static List<TrueNumber> of(AuthorText text, ParsedFormula node, Screen screen) {
+        List<TrueNumber> guesses = new ArrayList<>();
+        List<Optional<IntFunction<Quantity>>> shifted = new ArrayList<>();
+        for (String other : List.of("", "+1", "+2")) {
+            shifted.add(with(text, node, other).flatMap(screen.probe()::read));
+        }
+        Optional<Ball> own = value(text, node);
+        if (own.isEmpty() || shifted.stream().anyMatch(Optional::isEmpty)) {
+            return guesses;
+        }
+        for (int i = 0; i < Math.min(POINTS, screen.truth().size()); i++) {
+            int point = i;
+            try {
+                List<Ball> values = shifted.stream()
+                        .map(each -> each.orElseThrow().apply(point).enclose(BITS).real()).toList();
+                step(values, Ball.of(screen.truth().get(i), BITS)).map(own.get()::plus).map(SolvedNumbers::number)
+                        .ifPresent(guesses::add);
+            } catch (ArithmeticException unusable) {
+                // a pole at this point, or the number doesn't matter there
+                continue;
+            }
+        }
+        return guesses;
+    }
+
+    private static Optional<FormulaText> with(AuthorText text, ParsedFormula node, String more) {
+        String changed = AuthorNotation.of(text.notation()).enclosed(text.text(node) + more);
+        return text.with(List.of(new Replacement(AuthorText.start(node), AuthorText.end(node), changed)));
+    }
+
+    /** The value that stands there, read as a formula in k without k. */
+    private static Optional<Ball> value(AuthorText text, ParsedFormula node) {
+        return text.read(text.text(node)).flatMap(read -> ConstantText.value(read, Precision.AS_WRITTEN))
+                .map(number -> number.enclose(BITS).real());
+    }
+
+    /** t. */
+    private static Optional<Ball> step(List<Ball> values, Ball right) {
+        Ball f0 = values.get(0);
+        Ball f1 = values.get(1);
+        Ball f2 = values.get(2);
+        Ball c = f1.times(2).minus(f0).minus(f2).dividedBy(f2.minus(f1).times(2));
+        Ball a = f1.times(c.plus(Ball.of(1, BITS))).minus(f0);
+        return Optional.of(f0.minus(right).dividedBy(c.times(right).minus(a)));
+    }
+
+    private static TrueNumber number(Ball ball) {
+        Rational simplest = simplest(ball.lower(), ball.upper());
+        boolean simple = simplest.numerator().bitLength() + simplest.denominator().bitLength() < LONGEST_FRACTION_BITS;
+        return simple ? TrueNumber.of(simplest)
+                : new TrueNumber(Optional.empty(), bits -> Ball.of(ball.middle(), Math.max(bits, 0)));
+    }
+
+    /** The rational of smallest denominator between two, by continued fractions. */
+    static Rational simplest(Rational low, Rational high) {
+        if (low.signum() <= 0 && high.signum() >= 0) {
+            return Rational.ZERO;
+        }
+        if (high.signum() < 0) {
+            return simplest(high.negate(), low.negate()).negate();
+        }
+        Rational whole = Rational.of(low.floor());
+        if (whole.equals(low)) {
+            return whole;
+        }
+        if (Rational.of(high.floor()).compareTo(whole) > 0) {
+            return whole.plus(Rational.ONE);
+        }
+        return whole.plus(simplest(high.minus(whole).inverse(), low.minus(whole).inverse()).inverse());
+    }
+}

@@ -1,0 +1,158 @@
+package org.pofk.slip;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import org.pofk.claim.Claim;
+import org.pofk.claim.FormulaText;
+import org.pofk.claim.OutputTruth;
+import org.pofk.claim.Statement;
+import org.pofk.claim.TruePole;
+import org.pofk.claim.Truth;
+import org.pofk.exact.Rational;
+import org.pofk.formula.Formula;
+import org.pofk.formula.Formulas;
+
+/** Lists with an item more or less: poles with other multiplicities, a pole missing or too many; long runs scaled. */
+final class StructuralChanges {
+    private static final int DIGITS = 6;
+
+    private final Claim claim;
+    private final Truth truth;
+    private final List<Candidate> candidates = new ArrayList<>();
+
+    private StructuralChanges(Claim claim, Truth truth) {
+        this.claim = claim;
+        this.truth = truth;
+    }
+
+    static List<Candidate> of(Claim claim, Truth truth) {
+        StructuralChanges changes = new StructuralChanges(claim, truth);
+        if (claim.statement() instanceof Statement.Poles poles) {
+            changes.poles(poles);
+        } else if (claim.statement() instanceof Statement.LongRunOf longRun) {
+            changes.scaled(longRun);
+        }
+        return changes.candidates;
+    }
+
+    private void poles(Statement.Poles stated) {
+        List<Statement.Poles.Pole> poles = stated.poles();
+        for (int i = 0; i < poles.size(); i++) {
+            Statement.Poles.Pole own = poles.get(i);
+            OutputTruth about = truth.about(stated.output());
+            int most = about.poles().stream().mapToInt(TruePole::multiplicity).max().orElse(1);
+            for (int times = 1; times <= Math.max(most, about.poleAtZero()); times++) {
+                if (times != own.multiplicity()) {
+                    List<Statement.Poles.Pole> changed = new ArrayList<>(poles);
+                    changed.set(i, new Statement.Poles.Pole(own.value(), times));
+                    add(SlipKind.REPEATED_POLE_AS_SIMPLE, own.value(), times(own), times(changed.get(i)),
+                            stated, changed);
+                }
+            }
+            List<Statement.Poles.Pole> without = new ArrayList<>(poles);
+            without.remove(i);
+            if (!without.isEmpty()) {
+                add(SlipKind.WRONG_POLE, own.value(), own.value().text(), "no such pole", stated, without);
+            }
+        }
+        missing(stated);
+    }
+
+    private static String times(Statement.Poles.Pole pole) {
+        return pole.multiplicity() == 1 ? pole.value().text()
+                : pole.value().text() + (pole.multiplicity() == 2 ? " (twice)"
+                        : " (" + pole.multiplicity() + " times)");
+    }
+
+    private void missing(Statement.Poles stated) {
+        OutputTruth about = truth.about(stated.output());
+        List<Missing> added = new ArrayList<>();
+        if (about.poleAtZero() > 0) {
+            added.add(new Missing("0", about.poleAtZero()));
+        }
+        for (TruePole pole : about.poles()) {
+            for (String text : texts(pole)) {
+                added.add(new Missing(text, pole.multiplicity()));
+            }
+        }
+        for (int i = 0; i < added.size(); i++) {
+            plus(stated, List.of(added.get(i)));
+            if (i + 1 < added.size()) {
+                plus(stated, List.of(added.get(i), added.get(i + 1)));
+            }
+        }
+    }
+
+    private record Missing(String text, int multiplicity) {
+    }
+
+    private void plus(Statement.Poles stated, List<Missing> missing) {
+        FormulaText last = stated.poles().get(stated.poles().size() - 1).value();
+        List<Statement.Poles.Pole> changed = new ArrayList<>(stated.poles());
+        for (Missing each : missing) {
+            Optional<FormulaText> read = AuthorText.of(last).flatMap(text -> text.read(each.text()));
+            if (read.isEmpty()) {
+                return;
+            }
+            changed.add(new Statement.Poles.Pole(read.get(), each.multiplicity()));
+        }
+        add(SlipKind.TERM_MISSING, last, last.text(), String.join(", ", missing.stream().map(Missing::text).toList()),
+                stated, changed);
+    }
+
+    private List<String> texts(TruePole pole) {
+        AuthorNotation notation = AuthorNotation.of(StatementPart.of(claim.statement()).get(0).text().notation());
+        if (pole.root().polynomial().degree() == 1) {
+            return List.of(notation.write(Formulas.number(
+                    pole.root().polynomial().coefficient(0).negate())));
+        }
+        String real = decimal(TrueNumber.realPart(pole.value()));
+        if (pole.isReal()) {
+            return List.of(real);
+        }
+        String imaginary = decimal(TrueNumber.imaginaryPart(pole.value()));
+        return List.of(real + " + " + imaginary + "*i", real + " - " + imaginary + "*i");
+    }
+
+    private static String decimal(TrueNumber number) {
+        return number.inPlaceOf("0.0", new TrueNumber.Precisions(DIGITS, DIGITS), AuthorNotation.PLAIN).stream()
+                .reduce((first, last) -> last).orElse("0");
+    }
+
+    private void add(SlipKind kind, FormulaText at, String found, String right, Statement.Poles stated,
+            List<Statement.Poles.Pole> changed) {
+        Statement statement = new Statement.Poles(stated.output(), changed);
+        candidates.add(new Candidate(kind, at.parsed().span(), found, right,
+                () -> String.join(", ", changed.stream().map(StructuralChanges::times).toList()),
+                Candidate.with(claim, statement), () -> truth));
+    }
+
+    /** All values over their sum. */
+    private void scaled(Statement.LongRunOf stated) {
+        if (stated.parts().size() < 2 || stated.parts().stream().anyMatch(part -> part.values().size() != 1)) {
+            return;
+        }
+        List<String> texts = stated.parts().stream().map(part -> part.values().get(0).text()).toList();
+        String sum = "(" + String.join(" + ", texts.stream().map(text -> "(" + text + ")").toList()) + ")";
+        List<Statement.LongRunOf.Part> parts = new ArrayList<>();
+        for (Statement.LongRunOf.Part part : stated.parts()) {
+            Optional<FormulaText> scaled = AuthorText.of(part.values().get(0))
+                    .flatMap(text -> text.read("(" + text.text() + ")/" + sum));
+            if (scaled.isEmpty()) {
+                return;
+            }
+            parts.add(new Statement.LongRunOf.Part(part.output(), List.of(scaled.get())));
+        }
+        String right = String.join(", ", stated.parts().stream().map(part -> right(part)).toList());
+        candidates.add(new Candidate(SlipKind.EIGENVECTOR_NOT_SCALED, OtherTruths.place(stated),
+                String.join(", ", texts), right, () -> right,
+                Candidate.with(claim, new Statement.LongRunOf(parts)), () -> truth));
+    }
+
+    private String right(Statement.LongRunOf.Part part) {
+        Formula value = truth.about(part.output()).longRun() instanceof org.pofk.answer.LongRun.Limit limit
+                ? Formulas.number(limit.value()) : Formulas.number(Rational.ZERO);
+        return AuthorNotation.of(part.values().get(0).notation()).write(value);
+    }
+}

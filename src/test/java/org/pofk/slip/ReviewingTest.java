@@ -1,0 +1,100 @@
+package org.pofk.slip;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import java.util.List;
+import java.util.OptionalInt;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
+import org.junit.jupiter.params.provider.MethodSource;
+import org.pofk.claim.Verdict;
+
+/** A review names the slip, its place and what is right there, says what is carried, and finds nothing in what is right. */
+class ReviewingTest {
+    private static ReviewedClaims reviewed(String model, String... lines) {
+        return Reviewing.of(Slipped.claims(model, lines), Variants.NONE);
+    }
+
+    private static Slip first(Finding finding) {
+        assertEquals(Verdict.WRONG, finding.verdict(), finding::toString);
+        assertFalse(finding.slips().isEmpty(), finding::toString);
+        assertFalse(finding.together());
+        return finding.slips().get(0);
+    }
+
+    @ParameterizedTest
+    @MethodSource("org.pofk.slip.Slipped#formulas")
+    void aSlipInAFormulaIsNamedFirst(Slipped slipped) {
+        isNamedFirst(slipped);
+    }
+
+    @ParameterizedTest
+    @MethodSource("org.pofk.slip.Slipped#lists")
+    void aSlipInAListIsNamedFirst(Slipped slipped) {
+        isNamedFirst(slipped);
+    }
+
+    private static void isNamedFirst(Slipped slipped) {
+        Slip slip = first(Reviewing.of(slipped.claims(), Variants.NONE).findings().get(0));
+        assertEquals(slipped.kind(), slip.kind());
+        assertEquals(slipped.found(), slip.found());
+        assertEquals(slipped.instead(), slip.right());
+        assertTrue(slip.corrected().contains(slipped.right()), slip::corrected);
+        assertEquals(4, slip.span().start().line());
+    }
+
+    @ParameterizedTest
+    @MethodSource("org.pofk.slip.Slipped#formulas")
+    void aRightFormulaHasNoSlip(Slipped slipped) {
+        hasNoSlip(slipped);
+    }
+
+    @ParameterizedTest
+    @MethodSource("org.pofk.slip.Slipped#lists")
+    void aRightListHasNoSlip(Slipped slipped) {
+        hasNoSlip(slipped);
+    }
+
+    private static void hasNoSlip(Slipped slipped) {
+        Finding finding = Reviewing.of(slipped.rightClaims(), Variants.NONE).findings().get(0);
+        assertTrue(finding.judgement().isRight(), finding::toString);
+        assertEquals(List.of(), finding.slips());
+    }
+
+    @ParameterizedTest
+    @CsvSource(delimiter = '|', textBlock = """
+            pump-pair    | {long run: lost, is: 0.1386}                  | OUTPUT_MISREAD     | one
+            pump-pair    | {long run: lost, is: 0.991824}                | COMPLEMENT_QUOTED  | 0.991824
+            pump-pair    | {value: lost, at: 2, is: 0.006708}            | INDEX_SHIFTED      | p(3)
+            pump-pair    | {start: all, are: {one: 1}}                   | START_MISREAD      | start one
+            pump-pair    | {value: lost, at: 1, is: 0.0200}              | START_MISREAD      | start one
+            pump-pair    | {matrix: all, are: [[0.9025, 0.095, 0.0025], [0.6, 0.38, 0.02], [0, 0.6, 0.4]]} | MATRIX_TRANSPOSED | the matrix transposed
+            valve-rotation | {long run: V1 on duty, is: 1/5}             | LONG_RUN_OF_A_CYCLE | the average over a cycle
+            """)
+    void aClaimThatIsTrueOfSomethingElseSaysOfWhat(String model, String line, SlipKind kind, String found) {
+        Slip slip = first(reviewed(model, line).findings().get(0));
+        assertEquals(kind, slip.kind());
+        assertEquals(found, slip.found());
+    }
+
+    @Test
+    void whatFollowsFromAnEarlierWrongStepIsCarriedAndNamesTheFirst() {
+        List<Finding> findings = reviewed("pump-pair", "{start: all, are: {one: 1}}",
+                "{value: lost, at: 1, is: 0.02}", "{value: one, at: 1, is: 0.38}").findings();
+        assertEquals(Verdict.WRONG, findings.get(0).verdict());
+        assertEquals(OptionalInt.of(1), findings.get(1).carriedFrom());
+        assertEquals(OptionalInt.of(1), findings.get(2).carriedFrom());
+        assertEquals(List.of(), findings.get(2).slips());
+    }
+
+    @Test
+    void whatADerivationLeavesOutIsSaid() {
+        List<String> missing = reviewed("pump-pair", "{long run: lost, is: 0.008176}").notStated();
+        assertTrue(missing.contains("the start"), missing::toString);
+        assertTrue(missing.contains("the formula of lost"), missing::toString);
+        assertFalse(missing.contains("the long run of lost"), missing::toString);
+    }
+}
