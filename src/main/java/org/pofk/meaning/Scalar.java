@@ -1,5 +1,6 @@
 package org.pofk.meaning;
 
+import java.math.BigInteger;
 import java.util.Optional;
 import org.pofk.exact.Rational;
 
@@ -15,6 +16,7 @@ import org.pofk.exact.Rational;
  * @param weight   at least the number of its parts, and of 64-bit words of its value
  */
 record Scalar(Quantity quantity, Rational factor, int rest, Optional<Rational> face, boolean real, int weight) {
+    private static final int MOST_BITS = 29;
 
     boolean isAlike(Scalar other) {
         return rest == other.rest && factor.equals(other.factor);
@@ -29,9 +31,10 @@ record Scalar(Quantity quantity, Rational factor, int rest, Optional<Rational> f
         return rest == Scalars.NO_REST && factor.isOne();
     }
 
-    /** The value at face value where it is a whole number of no more than nine digits. */
+    /** The value at face value where it is a whole number; more than nine digits are too large. */
     Optional<Integer> whole() {
-        return face.filter(Rational::isInteger).map(Rational::numerator)
-                .filter(number -> number.bitLength() <= 29).map(java.math.BigInteger::intValue);
+        Optional<BigInteger> number = face.filter(Rational::isInteger).map(Rational::numerator);
+        number.ifPresent(value -> Work.within(value.bitLength(), MOST_BITS));
+        return number.map(BigInteger::intValueExact);
     }
 }

@@ -174,14 +174,15 @@ final class Scalars {
      */
     Optional<Scalar> power(Scalar a, Rational exponent) {
         int roots = exponent.denominator().getLowestSetBit();
-        if (exponent.denominator().bitCount() != 1 || roots > MOST_ROOTS || exponent.numerator().bitLength() > 29) {
+        if (exponent.denominator().bitCount() != 1 || roots > MOST_ROOTS) {
             return Optional.empty();
         }
+        int times = of(Rational.of(exponent.numerator())).whole().orElseThrow();
         Scalar root = a;
         for (int i = 0; i < roots; i++) {
             root = squareRoot(root);
         }
-        return Optional.of(pow(root, exponent.numerator().intValueExact()));
+        return Optional.of(pow(root, times));
     }
 
     Scalar squareRoot(Scalar a) {
