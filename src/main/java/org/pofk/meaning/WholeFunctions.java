@@ -1,5 +1,6 @@
 package org.pofk.meaning;
 
+import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -69,10 +70,19 @@ final class WholeFunctions {
         PolarSum polynomial = fallingProduct(n, p, part.span());
         SortedMap<Long, Scalar> impulses = new TreeMap<>();
         for (long k = 0; n.valueAt(k) < 0; k++) {
-            impulses.put(k, scalars.negate(arithmetic.valueAt(polynomial, k)));
+            impulses.put(k, scalars.rational(valueBelowZero(n.valueAt(k), p).negate()));
             Work.within(k, PolarArithmetic.MOST_IMPULSES);
         }
         return arithmetic.sum(List.of(polynomial, new PolarSum(List.of(), impulses, Scope.ALL)));
+    }
+
+    /** The polynomial n (n − 1) … (n − p + 1)/p! at a whole n. */
+    private static Rational valueBelowZero(long n, int p) {
+        BigInteger value = BigInteger.ONE;
+        for (int i = 1; i <= p; i++) {
+            value = value.multiply(BigInteger.valueOf(n - i + 1)).divide(BigInteger.valueOf(i));
+        }
+        return Rational.of(value);
     }
 
     private PolarSum fallingProduct(Affine.Whole n, int p, Span span) {
