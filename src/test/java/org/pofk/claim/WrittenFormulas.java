@@ -111,6 +111,11 @@ final class WrittenFormulas {
     }
 
     private String number(Quantity value) {
+        return number(value, digits);
+    }
+
+    /** To so many significant digits, in parentheses where it is negative. */
+    static String number(Quantity value, int digits) {
         Decimal decimal = decimal(value, digits);
         // what has no point is exact: a rounded number gets digits until it has one
         for (int more = 1; !decimal.exact() && decimal.text().chars().noneMatch(c -> c == '.' || c == 'e'); more++) {
