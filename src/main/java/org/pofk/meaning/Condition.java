@@ -28,16 +28,12 @@ record Condition(int equation, Quantity off, Rational half) {
         if (half.isZero()) {
             return off.isZero();
         }
-        Decision real = off.isReal();
-        if (real != Decision.YES) {
-            return real;
-        }
-        Optional<Integer> above = off.plus(Quantity.of(half)).sign();
-        Optional<Integer> below = Quantity.of(half).minus(off).sign();
+        Optional<Integer> above = off.realPart().plus(Quantity.of(half)).sign();
+        Optional<Integer> below = Quantity.of(half).minus(off.realPart()).sign();
         if (above.filter(sign -> sign < 0).isPresent() || below.filter(sign -> sign < 0).isPresent()) {
             return Decision.NO;
         }
-        return above.isPresent() && below.isPresent() ? Decision.YES : Decision.UNDECIDED;
+        return above.isPresent() && below.isPresent() ? off.isReal() : Decision.UNDECIDED;
     }
 
     /**

@@ -9,6 +9,8 @@ import java.util.Map;
  * where a quantity is real for plain reasons. Exact; each part once.
  */
 final class Conjugating {
+    private static final int SIGN_BITS = 64;
+
     private final Map<Quantity, Quantity> known = new IdentityHashMap<>();
 
     private Conjugating() {
@@ -80,7 +82,9 @@ final class Conjugating {
         /** A root of a positive number is real; else the cut on the negative axis decides, and it stays as it is. */
         @Override
         public Quantity radical(Node.Radical radical) {
-            boolean real = radical.degree() > 2 || radical.radicand().rational().isPresent();
+            Quantity radicand = radical.radicand();
+            boolean real = radical.degree() > 2 || radicand.rational().isPresent()
+                    || radicand.isWrittenReal() && radicand.enclose(SIGN_BITS).real().isPositive();
             return real ? whole : Quantity.of(new Node.Conjugate(whole));
         }
 

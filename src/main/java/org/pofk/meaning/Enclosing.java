@@ -10,6 +10,8 @@ import org.pofk.exact.ComplexBall;
  * spread, both sides of the cut are held.
  */
 final class Enclosing extends Walk<ComplexBall> {
+    private static final int SUSPECT_SCALE = 1000;
+
     private final int scale;
     private final Function<Written, Ball> decimals;
     private final Cut cut;
@@ -74,9 +76,16 @@ final class Enclosing extends Walk<ComplexBall> {
         return of(product.first()).times(of(product.second()));
     }
 
+    /** A divisor still not told from zero when precision has been raised is asked whether it is zero. */
     @Override
     public ComplexBall power(Node.Power power) {
-        return Powers.of(of(power.base()), power.exponent());
+        ComplexBall base = of(power.base());
+        boolean suspect = power.exponent() < 0 && base.containsZero() && scale > SUSPECT_SCALE
+                && cut == Cut.DECIDED;
+        if (suspect && power.base().isZero() == Decision.YES) {
+            throw new UndecidedException("what a quotient is: its divisor is zero");
+        }
+        return Powers.of(base, power.exponent());
     }
 
     @Override

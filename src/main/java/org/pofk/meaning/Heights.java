@@ -44,7 +44,7 @@ final class Heights extends Walk<Optional<Long>> {
      * beyond the range of a long.
      */
     static Optional<Long> separation(Quantity quantity) {
-        Heights heights = new Heights(Conjugation.within(quantity));
+        Heights heights = new Heights(Within.conjugation(quantity));
         return heights.of(quantity).map(height ->
                 Logarithm.divideUp(Math.multiplyExact(heights.degree(), height), Logarithm.PER_BIT));
     }

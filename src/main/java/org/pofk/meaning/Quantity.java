@@ -238,7 +238,10 @@ public final class Quantity {
         return ComplexParts.imaginary(this);
     }
 
-    /** At face value, both radii at most 2^−bits · max(1, |this|). */
+    /**
+     * At face value, both radii at most 2^−bits · max(1, |this|). An {@link ArithmeticException} where there is no such
+     * number (a divisor that is zero, the arccos of 2), or where it hangs on something undecided.
+     */
     public ComplexBall enclose(int bits) {
         return enclosed.enclose(bits);
     }
@@ -248,14 +251,24 @@ public final class Quantity {
         return Enclosing.spread(this, bits);
     }
 
-    /** Whether it is zero at face value: by a separation bound where it is algebraic, never read off decimals. */
+    /**
+     * Whether it is zero at face value: in canonical form or by a separation bound where it is algebraic, never read off
+     * decimals. Not decided also where there is no such number, as with a divisor that is zero.
+     */
     public Decision isZero() {
         return ZeroTest.of(this);
     }
 
     /** Whether it is real at face value. */
     public Decision isReal() {
-        return conjugate() == this ? Decision.YES : imaginaryPart().isZero();
+        return isWrittenReal() ? Decision.YES : imaginaryPart().isZero();
+    }
+
+    /** Whether it is seen to be its own conjugate without working anything out. */
+    boolean isWrittenReal() {
+        Quantity conjugate = conjugate();
+        Same same = new Same();
+        return conjugate == this || same.of(this).equals(same.of(conjugate));
     }
 
     /** The sign at face value of what is known to be real; empty where it isn't decided whether it is zero. */

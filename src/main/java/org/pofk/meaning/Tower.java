@@ -149,8 +149,9 @@ final class Tower {
 
     /**
      * b such that the numerator of an element has modulus ≥ 2^−b as a number, unless that is zero: Liouville's
-     * inequality for the polynomial, |f(γ)| ≥ Σ|c|^(1−D) · 2^(−D Σ degree · height) (Waldschmidt 2000, proposition
-     * 3.14), where D counts the generators it needs.
+     * inequality for the polynomial, |f(γ)| ≥ (Σ|c|)^(1−D) · 2^(−D Σ degree · height), from the product formula and
+     * |f| ≤ Σ|c| Π max(1, |γᵢ|)^degree at each of the other places (Waldschmidt 2000, section 3.5). D is the product of
+     * the degrees of the generators it needs.
      */
     long separation(Element element) {
         long length = Logarithm.ofMagnitude(element.length());

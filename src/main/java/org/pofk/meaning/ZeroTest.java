@@ -10,6 +10,8 @@ import java.util.Optional;
 public final class ZeroTest {
     /** Beyond so many bits it isn't decided. */
     public static final int MOST_BITS = 200_000;
+    /** The same with exponentials and angles, whose series take the square of the time. */
+    public static final int MOST_BITS_OF_ANGLES = 10_000;
     private static final int FIRST_BITS = 96;
     private static final int TRIED_BITS = 3072;
 
@@ -22,7 +24,7 @@ public final class ZeroTest {
         }
         try {
             return excluded(quantity, FIRST_BITS) ? Decision.NO : exactly(quantity);
-        } catch (UndecidedException undecided) {
+        } catch (ArithmeticException noSuchNumber) {
             return Decision.UNDECIDED;
         }
     }
@@ -50,7 +52,8 @@ public final class ZeroTest {
     }
 
     private static Decision bySeparation(Quantity quantity, Optional<Long> separation) {
-        Optional<Long> bound = separation.filter(bits -> bits <= MOST_BITS);
+        int most = Within.series(quantity) ? MOST_BITS_OF_ANGLES : MOST_BITS;
+        Optional<Long> bound = separation.filter(bits -> bits <= most);
         // both parts within 2^(1 − bits) of zero: |x| < 2^(2 − bits)
         int enough = bound.map(bits -> bits.intValue() + 3).orElse(TRIED_BITS);
         for (int bits = FIRST_BITS; bits < enough; bits *= 2) {

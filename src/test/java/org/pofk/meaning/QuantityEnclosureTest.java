@@ -104,7 +104,7 @@ class QuantityEnclosureTest {
     @Test
     void enclosuresHoldWhatAnotherLibraryFinds() {
         int compared = 0;
-        for (int i = 0; i < 400; i++) {
+        for (int i = 0; i < 160; i++) {
             Both number = drawn(1 + i % 4);
             if (ApcomplexMath.abs(number.other).compareTo(new Apfloat("1e30")) < 0) {
                 ComplexBall ball = number.quantity.enclose(BITS);
@@ -114,7 +114,7 @@ class QuantityEnclosureTest {
                 compared++;
             }
         }
-        assertTrue(compared >= 380, "compared " + compared);
+        assertTrue(compared >= 150, "compared " + compared);
     }
 
     private static Written written(String text, int column) {

@@ -235,4 +235,20 @@ class QuantityZeroTest {
         assertEquals(Decision.UNDECIDED, pi.times(pi).squareRoot().minus(pi).isZero());
         assertEquals(Decision.NO, fraction(-1, 5).exponential().minus(Quantity.of(Rational.parse("0.8187"))).isZero());
     }
+
+    @Test
+    void whatIsNoNumberIsUndecided() {
+        Quantity nothing = root(2).times(root(3)).minus(root(6));
+        assertEquals(Decision.UNDECIDED, nothing.inverse().minus(Quantity.ONE).isZero());
+        assertEquals(Decision.UNDECIDED, Quantity.of(2).arccosine().isZero());
+    }
+
+    @Test
+    void modulusOfAComplexRootIsReal() {
+        Quantity root = Quantity.of(Roots.of(polynomial(1, 3, 0, 0, 0, 2, 0, 1, 0, 0, 0, 0, 0, 1)).all().get(4));
+        Quantity modulus = root.times(root.conjugate()).squareRoot();
+        assertEquals(Decision.YES, modulus.isReal());
+        assertEquals(Decision.YES, root.pow(2).plus(root.conjugate().pow(2)).isReal());
+        assertEquals(Decision.NO, root.isReal());
+    }
 }
