@@ -176,6 +176,14 @@ public record Ball(BigInteger center, BigInteger radius, int scale) {
         return new Ball(parts[0], spread.add(BigInteger.valueOf(parts[1].abs().signum())), common);
     }
 
+    /** Quotient by a whole number that isn't zero. */
+    public Ball dividedBy(long divisor) {
+        BigInteger exact = BigInteger.valueOf(divisor);
+        BigInteger[] parts = center.divideAndRemainder(exact);
+        BigInteger spread = radius.signum() == 0 ? radius : divideUp(radius, exact.abs());
+        return new Ball(parts[0], parts[1].signum() == 0 ? spread : spread.add(BigInteger.ONE), scale);
+    }
+
     /** |x|. */
     public Ball abs() {
         if (containsZero()) {

@@ -74,7 +74,7 @@ final class ElementaryFunctions {
         Ball sum = reduced;
         for (int i = 1; magnitude(power).compareTo(BigInteger.TWO) > 0; i++) {
             power = power.times(square).negate();
-            sum = sum.plus(power.dividedBy(Ball.of(2L * i + 1, power.scale())));
+            sum = sum.plus(power.dividedBy(2L * i + 1));
         }
         return sum.widened(magnitude(power)).timesPowerOfTwo(HALVINGS).roundedTo(x.scale());
     }
@@ -131,7 +131,7 @@ final class ElementaryFunctions {
         Ball term = Ball.of(1, x.scale());
         Ball sum = term;
         for (int i = 1; magnitude(term).compareTo(BigInteger.TWO) > 0; i++) {
-            term = term.times(square).dividedBy(Ball.of((2L * i - 1) * (2L * i), x.scale())).negate();
+            term = term.times(square).dividedBy((2L * i - 1) * (2L * i)).negate();
             sum = sum.plus(term);
         }
         return sum.widened(magnitude(term));

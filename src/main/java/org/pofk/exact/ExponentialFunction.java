@@ -49,7 +49,7 @@ final class ExponentialFunction {
         Ball term = Ball.of(1, x.scale());
         Ball sum = term;
         for (int i = 1; term.center().add(term.radius()).compareTo(BigInteger.TWO) > 0; i++) {
-            term = term.times(x).dividedBy(Ball.of(i, x.scale()));
+            term = term.times(x).dividedBy(i);
             sum = sum.plus(term);
         }
         return sum.widened(term.center().abs().add(term.radius()));

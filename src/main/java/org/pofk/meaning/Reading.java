@@ -54,6 +54,9 @@ final class Reading<T> {
             } catch (RefusedPart refused) {
                 faults.addAll(refused.faults());
             }
+            if (!faults.isEmpty() && scalars.isExhausted()) {
+                break;
+            }
         }
         if (!faults.isEmpty()) {
             throw new RefusedPart(faults);

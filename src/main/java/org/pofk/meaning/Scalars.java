@@ -62,7 +62,12 @@ final class Scalars {
     }
 
     boolean isE(Scalar scalar) {
-        return scalar.isAlike(e());
+        return scalar.factor().isOne() && scalar.rest() == rest("exp", Rational.ONE, NO_REST);
+    }
+
+    /** True when the work for the whole formula has been too much. */
+    boolean isExhausted() {
+        return work.spent() > Work.MOST;
     }
 
     /** Counts a step of work that isn't an operation here. */
@@ -196,6 +201,7 @@ final class Scalars {
     }
 
     Scalar exponential(Scalar a) {
+        work.spend(a.weight());
         Ball size = a.quantity().enclose(GLANCE).modulus();
         long most = size.upper().compareTo(Rational.of(MOST_WEIGHT)) > 0
                 ? MOST_WEIGHT : size.upper().floor().longValueExact();
@@ -240,7 +246,7 @@ final class Scalars {
         if (a.face().isPresent()) {
             return a.face().get().isZero() ? Decision.YES : Decision.NO;
         }
-        work.spend(10);
+        work.spend(a.weight());
         return a.quantity().enclose(GLANCE).containsZero() ? a.quantity().isZero() : Decision.NO;
     }
 
@@ -249,7 +255,7 @@ final class Scalars {
         if (a.face().isPresent()) {
             return a.face().get().signum() >= 0;
         }
-        work.spend(10);
+        work.spend(a.weight());
         ComplexBall value = a.quantity().enclose(GLANCE);
         return value.real().isPositive();
     }

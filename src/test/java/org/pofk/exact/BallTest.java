@@ -44,6 +44,7 @@ class BallTest {
         assertTrue(a.ball.minus(b.ball).contains(a.number.minus(b.number)));
         assertTrue(a.ball.times(b.ball).contains(a.number.times(b.number)));
         assertTrue(a.ball.times(-7).contains(a.number.times(Rational.of(-7))));
+        assertTrue(a.ball.dividedBy(-7).contains(a.number.dividedBy(Rational.of(-7))));
         assertTrue(a.ball.abs().contains(a.number.abs()));
         assertTrue(a.ball.negate().contains(a.number.negate()));
         if (b.ball.containsZero()) {

@@ -3,6 +3,7 @@ package org.pofk.meaning;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import java.math.BigInteger;
 import java.util.List;
 import java.util.Optional;
 import org.junit.jupiter.api.Test;
@@ -88,5 +89,29 @@ class StepEvaluationTest {
     void whatHasNoValueGivesNothing(String text) throws RefusedException {
         assertEquals(Optional.empty(), StepEvaluation.atFaceValue(parsed(text), 0, 128));
         assertEquals(Optional.empty(), StepEvaluation.spread(parsed(text), Precision.AS_WRITTEN, 0, 128));
+    }
+
+    @Test
+    void aPowerOfAWideBallHasThePowersOfItsEndsAsEnds() {
+        Rational low = Rational.of(7, 20);
+        Rational high = Rational.of(9, 20);
+        Rational slack = Rational.HALF.pow(60);
+        int checked = 0;
+        for (int exponent = -12; exponent <= 12; exponent++) {
+            for (int sign = -1; sign <= 1; sign += 2) {
+                Rational a = low.times(Rational.of(sign));
+                Rational b = high.times(Rational.of(sign));
+                Ball base = new Ball(Ball.of(a.plus(b).times(Rational.HALF), 128).center(),
+                        Ball.of(high.minus(low).times(Rational.HALF), 128).center().add(BigInteger.TWO), 128);
+                Ball power = Powers.of(base, exponent);
+                Rational least = Rational.min(a.pow(exponent), b.pow(exponent));
+                Rational most = Rational.max(a.pow(exponent), b.pow(exponent));
+                assertTrue(power.contains(least) && power.contains(most), base + " ^ " + exponent);
+                assertTrue(power.lower().compareTo(least.minus(slack)) > 0
+                        && power.upper().compareTo(most.plus(slack)) < 0, base + " ^ " + exponent);
+                checked++;
+            }
+        }
+        assertEquals(50, checked);
     }
 }
