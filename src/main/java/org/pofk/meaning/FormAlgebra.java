@@ -93,7 +93,7 @@ final class FormAlgebra implements Algebra<List<FormSummand>> {
     @Override
     public List<FormSummand> call(Formula.Function function, List<List<FormSummand>> arguments, ParsedFormula part) {
         throw RefusedPart.at(part, "not-rational", "has " + variable
-                + " in a function: a formula in " + variable + " is made of sums, products, quotients and whole powers");
+                + " in a function: a formula in " + variable + " has sums, products, quotients and whole powers");
     }
 
     @Override

@@ -178,7 +178,8 @@ final class FormArithmetic {
 
     /** The summand times the line: what is left above it. */
     private FormSummand above(FormSummand summand, List<FormFactor> line) {
-        List<FormFactor> left = new ArrayList<>(summand.factors().stream().filter(factor -> !factor.isBelow()).toList());
+        List<FormFactor> left = new ArrayList<>(summand.factors());
+        left.removeIf(FormFactor::isBelow);
         List<FormFactor> own = gathered(summand.below());
         for (FormFactor factor : line) {
             int place = indexOf(own, factor);

@@ -58,7 +58,7 @@ public record RationalForm(List<Summand> summands) {
         summands = List.copyOf(summands);
     }
 
-    /** The meaning of a formula in the variable of this name; refused, with the place, where it isn't rational in it. */
+    /** What a formula means in the variable of this name; refused, with the place, where it isn't rational in it. */
     public static RationalForm of(ParsedFormula formula, String variable, Precision precision)
             throws RefusedException {
         return of(formula, variable, precision, new Work());

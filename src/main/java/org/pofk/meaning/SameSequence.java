@@ -13,10 +13,10 @@ import org.pofk.exact.Rational;
  *
  * <p>The formula without its impulses is a sum of m functions k^p λ^k; it obeys a recurrence of order m whose
  * characteristic polynomial is the product of the z − λ. The sequence obeys one of order n. Their difference obeys the
- * recurrence with the product of both polynomials, of order m + n and monic: once m + n values in a row are zero, so are
- * all that follow. So the steps are compared up to the first m + n in a row without an impulse; at an impulse later on
- * the difference is the impulse itself. At most (m + n)·(1 + number of impulses) steps are compared. Exact: each value
- * is compared by an enclosure first, and where that holds the true value, by {@link Quantity#isZero}.
+ * one with the product of both polynomials, of order m + n and monic: once m + n values in a row are zero, so are all
+ * that follow. So the steps are compared up to the first m + n in a row without an impulse; at an impulse later on the
+ * difference is the impulse itself. At most (m + n)·(1 + number of impulses) steps are compared. Exact: each value is
+ * compared by an enclosure first, and where that holds the true value, by {@link Quantity#isZero}.
  */
 public final class SameSequence {
     private static final int GLANCE = 128;

@@ -16,7 +16,8 @@ import org.pofk.exact.Rational;
 final class Scalars {
     static final int NO_REST = 0;
     private static final int MOST_BITS = 1 << 14;
-    private static final int MOST_WEIGHT = 1 << 15;
+    /** Heaviest number, and so the most that one step spends. */
+    static final int MOST_WEIGHT = 1 << 15;
     private static final int GLANCE = 64;
     private static final int MOST_ROOTS = 6;
 

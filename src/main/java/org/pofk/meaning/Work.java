@@ -1,7 +1,8 @@
 package org.pofk.meaning;
 
 /**
- * Counts the work of reading one formula, in operations with numbers and glances at their parts, so that hostile text ends at once.
+ * Counts the work of reading one formula, in operations with numbers and glances at their parts, so that hostile
+ * text ends at once.
  * Mutable; lives for one reading.
  */
 final class Work {

@@ -35,7 +35,8 @@ public record WrittenPolynomial(String variable, List<Quantity> coefficients) {
             throws RefusedException {
         try {
             FormArithmetic arithmetic = new FormArithmetic(scalars);
-            return arithmetic.sum(form, formula.span()).stream().flatMap(whole -> arithmetic.multipliedOut(whole).stream())
+            return arithmetic.sum(form, formula.span()).stream()
+                    .flatMap(whole -> arithmetic.multipliedOut(whole).stream())
                     .map(Scalar::quantity).toList();
         } catch (TooLargeException tooLarge) {
             throw refused(formula, "formula-too-large", "this polynomial is too large to be multiplied out");

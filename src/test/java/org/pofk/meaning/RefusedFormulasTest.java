@@ -48,7 +48,8 @@ class RefusedFormulasTest {
         "delta(k-10^7) | step-too-late 7", "0^(k-1) | division-by-zero 1", "0^(-k) | division-by-zero 1",
         "0.2*0.5^n | name-unknown 9", "z/(z-1) | 'name-unknown 1, name-unknown 4'", "arccos(1.2)^k | no-cosine 8",
         "arccos(i)^k | number-not-real 8", "n + k^k + 1/k | 'name-unknown 1, power-of-k 5, divisor-not-a-power 13'",
-        "k^400 | formula-too-large 1", "(1 + 0.5^k)^400 | formula-too-large 1", "2 + 0.5^(10^9*k) | formula-too-large 5",
+        "k^400 | formula-too-large 1", "(1 + 0.5^k)^400 | formula-too-large 1",
+        "2 + 0.5^(10^9*k) | formula-too-large 5",
         "2^(10^10) | formula-too-large 1", "{1 for k <= 5000; 0.5^k for k > 5000} | formula-too-large 1"
     })
     void whatIsNoExponentialSumIsRefusedAtItsPlace(String text, String expected) {
@@ -57,7 +58,8 @@ class RefusedFormulasTest {
 
     @ParameterizedTest
     @CsvSource(delimiter = '|', value = {
-        "z^k | name-unknown 3", "Z/(z-1) | name-unknown 1", "2^z | exponent-not-whole 3", "z^(1/2) | exponent-not-whole 3",
+        "z^k | name-unknown 3", "Z/(z-1) | name-unknown 1", "2^z | exponent-not-whole 3",
+        "z^(1/2) | exponent-not-whole 3",
         "cos(z) | not-rational 1", "delta(z) | not-rational 1", "z/(z - z) | division-by-zero 3",
         "1/(1/(z-1) - 1/(z-1)) | division-by-zero 3", "{z for k = 0} | not-rational 1",
         "(z^2 + 1)^300 + 1 | formula-too-large 1", "z^401 + 1 | formula-too-large 1"
@@ -94,9 +96,12 @@ class RefusedFormulasTest {
                 "sqrt(".repeat(150) + "2" + ")".repeat(150) + "^k", "(k+1)^100*(k+1)^100", "(1+k+0.5^k+cos(k))^50",
                 "(1-delta(k)-delta(k-1))^90*0.5^k", "1e400^k*1e400^k*1e-400^k", "((1e400)^1000)^k",
                 joined(3_000, i -> "0." + (i + 1000) + "^k", "+"), joined(60, i -> "(1+0." + (i + 10) + "^k)", "*"),
-                joined(100, i -> "cos(0." + (i + 100) + "k)", "*"), joined(900, i -> "delta(k-" + i + ")", "+") + "+k^9",
-                "(" + joined(900, i -> "delta(k-" + i + ")", "+") + ")^20", "binomial(k-900, 90)", "binomial(2000, 999)^k",
-                "((((((((3^9)^9)^9)^9)^9)^9)^9)^9)*k", "1" + "/3".repeat(150), "1/(" + "1+1/(".repeat(80) + "k" + ")".repeat(81));
+                joined(100, i -> "cos(0." + (i + 100) + "k)", "*"), joined(900, i -> "delta(k-" + i + ")",
+                "+") + "+k^9",
+                "(" + joined(900, i -> "delta(k-" + i + ")", "+") + ")^20", "binomial(k-900, 90)",
+                "binomial(2000, 999)^k",
+                "((((((((3^9)^9)^9)^9)^9)^9)^9)^9)*k",
+                "1" + "/3".repeat(150), "1/(" + "1+1/(".repeat(80) + "k" + ")".repeat(81));
     }
 
     private static String joined(int count, java.util.function.IntFunction<String> part, String sign) {
@@ -114,7 +119,7 @@ class RefusedFormulasTest {
         } catch (RefusedException refused) {
             assertTrue(refused.faults().size() <= 2, refused.getMessage());
         }
-        assertTrue(work.spent() <= Work.MOST + PolarArithmetic.MOST_TERMS, work.spent() + " steps");
+        assertTrue(work.spent() <= Work.MOST + Scalars.MOST_WEIGHT, work.spent() + " steps");
     }
 
     @ParameterizedTest
@@ -127,6 +132,6 @@ class RefusedFormulasTest {
         } catch (RefusedException refused) {
             assertTrue(!refused.faults().isEmpty());
         }
-        assertTrue(work.spent() <= Work.MOST + FormArithmetic.MOST_SUMMANDS, work.spent() + " steps");
+        assertTrue(work.spent() <= Work.MOST + Scalars.MOST_WEIGHT, work.spent() + " steps");
     }
 }
