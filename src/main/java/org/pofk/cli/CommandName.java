@@ -14,6 +14,7 @@ enum CommandName {
     SIMULATE(SimulateCommand::new),
     CHECK(CheckCommand::new),
     WHEN(WhenCommand::new),
+    PASSAGE(PassageCommand::new),
     NEW(NewCommand::new),
     HELP(HelpCommand::new),
     VERSION(VersionCommand::new);

@@ -8,7 +8,6 @@ import java.util.Optional;
 enum Planned {
     REPORT("writes the derivation as a document"),
     DRAW("draws the state diagram and p(k)"),
-    PASSAGE("says how long until a set of states is entered: law, mean, percentiles"),
     TOTAL("adds up what is spent or produced over steps"),
     DEPENDABILITY("says availability, mean time to failure and repair, and their kin"),
     COMPARE("sets two models side by side"),

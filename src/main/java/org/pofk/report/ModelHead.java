@@ -3,10 +3,8 @@ package org.pofk.report;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
-import java.util.stream.IntStream;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
-import org.pofk.exact.Rational;
 import org.pofk.report.Document.Block;
 import org.pofk.report.Document.Heading;
 import org.pofk.report.Document.Items;
@@ -15,8 +13,6 @@ import org.pofk.report.Document.Paragraph;
 
 /** Which model a document is about, with what its author says about it. */
 final class ModelHead {
-    private static final int STARTS_SHOWN = 6;
-
     private ModelHead() {
     }
 
@@ -48,18 +44,7 @@ final class ModelHead {
                 .and(model.step().lasts().filter(lasts -> !lasts.equals(model.step().is()))
                         .map(lasts -> Prose.of(" (lasts ").andName(lasts).and(")"))
                         .orElse(Prose.EMPTY));
-        return facts.and(chain.kind() == Chain.Kind.CHAIN ? start(chain) : Prose.EMPTY).and(".");
-    }
-
-    /** The state a chain starts in for certain, or those it may start in with their probabilities. */
-    private static Prose start(Chain chain) {
-        List<Integer> all = IntStream.range(0, chain.size()).filter(i -> !chain.start().get(i).isZero()).boxed().toList();
-        List<Prose> shown = all.stream().limit(STARTS_SHOWN).map(i -> {
-            Rational chance = chain.start().get(i);
-            Prose state = Prose.name(chain.states().get(i));
-            return chance.isOne() ? state : state.and(" " + chance);
-        }).toList();
-        String rest = all.size() > STARTS_SHOWN ? " and " + (all.size() - STARTS_SHOWN) + " more" : "";
-        return Prose.of(", starts in ").and(Prose.joined(shown, ", ")).and(rest);
+        return facts.and(chain.kind() == Chain.Kind.CHAIN
+                ? Prose.of(", starts in ").and(StartProse.of(chain)) : Prose.EMPTY).and(".");
     }
 }

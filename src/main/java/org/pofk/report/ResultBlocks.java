@@ -33,16 +33,18 @@ final class ResultBlocks {
     private static final int COEFFICIENT_SHOWN_UP_TO = 50;
 
     private final DerivedOutput output;
+    private final Prose left;
     private final Style style;
     private final List<Block> blocks = new ArrayList<>();
 
-    private ResultBlocks(DerivedOutput output, Style style) {
+    private ResultBlocks(DerivedOutput output, Prose left, Style style) {
         this.output = output;
+        this.left = left;
         this.style = style;
     }
 
     static List<Block> of(DerivedOutput output, Style style) {
-        ResultBlocks result = new ResultBlocks(output, style);
+        ResultBlocks result = new ResultBlocks(output, OutputProse.atStep(output.output()), style);
         result.write();
         return result.blocks;
     }
@@ -66,7 +68,12 @@ final class ResultBlocks {
 
     /** The formulas alone. */
     static List<Block> formulas(DerivedOutput output, Style style) {
-        ResultBlocks result = new ResultBlocks(output, style);
+        return formulas(output, OutputProse.atStep(output.output()), style);
+    }
+
+    /** The formulas alone, with what they are called. */
+    static List<Block> formulas(DerivedOutput output, Prose left, Style style) {
+        ResultBlocks result = new ResultBlocks(output, left, style);
         output.closedForm().ifPresent(result::formulas);
         return result.blocks;
     }
@@ -76,12 +83,12 @@ final class ResultBlocks {
         Formula exact = form.exactFormula().orElseGet(form::formulaOverRoots);
         boolean isSame = decimals.formula().equals(Optional.of(exact));
         if (!isSame && decimals.formula().isPresent()) {
-            blocks.add(new Display(OutputProse.atStep(output.output()),
+            blocks.add(new Display(left,
                     isExact(decimals) ? Relation.EQUAL : Relation.ROUNDED, decimals.formula().get()));
         }
         int length = PlainText.UNICODE.write(exact).length();
         if (length <= EXACT_SHOWN_UP_TO || decimals.formula().isEmpty()) {
-            blocks.add(new Display(OutputProse.atStep(output.output()), Relation.EQUAL, exact));
+            blocks.add(new Display(left, Relation.EQUAL, exact));
         } else {
             label("exact", "over the roots of the denominator's factors; with " + length
                     + " characters too long to be shown, its parts are in the result as JSON");

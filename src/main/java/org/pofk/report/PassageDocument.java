@@ -1,0 +1,152 @@
+package org.pofk.report;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.stream.IntStream;
+import org.pofk.answer.DerivedOutput;
+import org.pofk.answer.Passage;
+import org.pofk.answer.PassageMoments;
+import org.pofk.answer.Percentile;
+import org.pofk.chain.Chain;
+import org.pofk.chain.Model;
+import org.pofk.exact.Decimals;
+import org.pofk.exact.Enclosed;
+import org.pofk.exact.Rational;
+import org.pofk.report.Document.Block;
+import org.pofk.report.Document.Heading;
+import org.pofk.report.Document.Labelled;
+import org.pofk.report.Document.Paragraph;
+import org.pofk.report.Document.Table;
+
+/** Whether and when a set of states is first entered, as a document. */
+public final class PassageDocument {
+    /** Above so many states the table of all starts is left out. */
+    private static final int STATES_AT_MOST = 40;
+
+    private final Chain chain;
+    private final Passage passage;
+    private final Style style;
+    private final List<Block> blocks = new ArrayList<>();
+
+    private PassageDocument(Chain chain, Passage passage, Style style) {
+        this.chain = chain;
+        this.passage = passage;
+        this.style = style;
+    }
+
+    /** @param chain with the start that was asked about */
+    public static Document of(Model model, Chain chain, Passage passage, Style style) {
+        PassageDocument document = new PassageDocument(chain, passage, style);
+        document.blocks.addAll(ModelHead.of(model));
+        document.write();
+        document.blocks.add(new Paragraph(Caution.TEXT));
+        return new Document(document.blocks);
+    }
+
+    private void write() {
+        blocks.add(new Heading(2, Prose.of("First passage into ").and(names(passage.into()))));
+        blocks.add(new Paragraph(Prose.of("T is the first step k ≥ 0 at the end of which the chain is in ")
+                .and(names(passage.into())).and(", from ").and(StartProse.of(chain))
+                .and(passage.avoiding().isEmpty() ? Prose.EMPTY
+                        : Prose.of("; entering ").and(names(passage.avoiding())).and(" first ends the wait"))
+                .and(".")));
+        moments();
+        passage.percentiles().forEach(each -> label(percent(each.p()), percentile(each)));
+        passage.settling().flatMap(settling -> settling.slowest()).ifPresent(slowest -> label("decay",
+                "in the long run P(T > k) falls by the factor " + Decimals.of(slowest, style.digits()).text()
+                        + " a step"));
+        passage.returns().ifPresent(this::returns);
+        label("visits", passage.visits().map(visits -> number(visits) + " steps are expected to be spent there")
+                .orElse("infinitely many steps are expected to be spent there"));
+        formula("Law", "P(T = k)", passage.law());
+        formula("Distribution", "P(T ≤ k)", passage.distribution());
+        formula("Survival", "P(T > k)", passage.survival());
+        values();
+        if (chain.size() <= STATES_AT_MOST) {
+            fromEach();
+        }
+    }
+
+    private Prose names(List<Integer> states) {
+        return Prose.names(states.stream().map(chain.states()::get).toList());
+    }
+
+    private void label(String label, String text) {
+        blocks.add(new Labelled(label, text));
+    }
+
+    private void moments() {
+        PassageMoments moments = passage.moments();
+        label("ever", moments.isCertain() ? "with probability 1"
+                : moments.probability().isZero() ? "never: it can't be reached from there"
+                : "with probability " + number(moments.probability()));
+        if (moments.isCertain()) {
+            label("mean", number(moments.mean().orElseThrow()));
+            spread(moments, "");
+        } else if (!moments.probability().isZero()) {
+            label("mean", "infinite, since it may never happen; given that it does, "
+                    + number(moments.mean().orElseThrow()));
+            spread(moments, "given that it happens, ");
+        }
+    }
+
+    private void spread(PassageMoments moments, String given) {
+        Rational variance = moments.variance().orElseThrow();
+        label("variance", given + number(variance) + (variance.isZero() ? "" : "; standard deviation "
+                + Decimals.of(Enclosed.of(variance).map(ball -> ball.sqrt()), style.digits()).text()));
+    }
+
+    /** Exact as a fraction where its decimals don't say it all. */
+    private String number(Rational value) {
+        String decimals = ValueText.of(value, style.digits());
+        return ValueText.isExact(value, style.digits()) ? decimals : value + " ≈ " + decimals;
+    }
+
+    private static String percent(Rational share) {
+        return Decimals.of(share.times(Rational.of(100)), 6).text() + " %";
+    }
+
+    private static String percentile(Percentile percentile) {
+        if (percentile.k().isPresent()) {
+            return "has happened by k = " + percentile.k().getAsInt() + ", not before";
+        }
+        return switch (percentile.reason().orElseThrow()) {
+            case NEVER -> "never: the probability stays below that";
+            case BEYOND_TWO_BILLION_STEPS -> "not within two billion steps";
+            case NOT_DECIDED -> "not decided: the probability comes too close to that at a step too far away";
+        };
+    }
+
+    private void returns(Passage.Return back) {
+        label("return", back.probability().isOne()
+                ? "certain, after " + number(back.mean().orElseThrow()) + " steps in the mean"
+                : back.probability().isZero() ? "never"
+                : "with probability " + number(back.probability()) + "; given that, after "
+                        + number(back.mean().orElseThrow()) + " steps in the mean");
+    }
+
+    private void formula(String title, String left, DerivedOutput output) {
+        blocks.add(new Heading(3, title));
+        blocks.addAll(ResultBlocks.formulas(output, Prose.of(left), style));
+    }
+
+    private void values() {
+        List<Integer> steps = passage.law().values().stream().map(value -> value.k()).toList();
+        if (!steps.isEmpty()) {
+            blocks.add(Table.ofText("Step by step", List.of("k", "P(T = k)", "P(T ≤ k)", "hazard"),
+                    IntStream.range(0, steps.size()).mapToObj(i -> List.of(String.valueOf(steps.get(i)),
+                            ValueText.of(passage.law().values().get(i), style.digits()),
+                            ValueText.of(passage.distribution().values().get(i), style.digits()),
+                            i < passage.hazards().size() ? passage.hazards().get(i).value().map(value ->
+                                    ValueText.of(value, style.digits())).orElse("–") : "–")).toList()));
+        }
+    }
+
+    private void fromEach() {
+        blocks.add(new Table(Prose.of("From each state"),
+                List.of(Prose.of("from"), Prose.of("ever"), Prose.of("mean, given that")),
+                IntStream.range(0, chain.size()).mapToObj(i -> List.of(Prose.name(chain.states().get(i)),
+                        Prose.of(number(passage.fromEach().probabilities().get(i))),
+                        Prose.of(passage.fromEach().means().get(i).map(this::number).orElse("–")))).toList()));
+    }
+}
