@@ -53,8 +53,8 @@ public final class PassageDocument {
         moments();
         passage.percentiles().forEach(each -> label(percent(each.p()), percentile(each)));
         passage.settling().flatMap(settling -> settling.slowest()).ifPresent(slowest -> label("decay",
-                "in the long run P(T > k) falls by the factor " + Decimals.of(slowest, style.digits()).text()
-                        + " a step"));
+                "in the long run " + (passage.moments().isCertain() ? "P(T > k)" : "what P(T > k) is above its limit")
+                        + " falls by the factor " + Decimals.of(slowest, style.digits()).text() + " a step"));
         passage.returns().ifPresent(this::returns);
         label("visits", passage.visits().map(visits -> number(visits) + " steps are expected to be spent there")
                 .orElse("infinitely many steps are expected to be spent there"));

@@ -12,12 +12,16 @@ import com.networknt.schema.JsonSchema;
 import com.networknt.schema.JsonSchemaFactory;
 import com.networknt.schema.SpecVersion;
 import java.io.InputStream;
+import java.nio.file.Path;
 import java.util.List;
 import java.util.Set;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
 import org.junit.jupiter.params.provider.ValueSource;
+import org.pofk.Pofk;
+import org.pofk.chain.Chain;
+import org.pofk.chain.Outputs;
 
 /** What is written as JSON is what the schemas say. */
 class SchemaTest {
@@ -67,15 +71,23 @@ class SchemaTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"--at-least 0.99", "--at-most 1/1000", "--settles-within 1e-6", "--at-least 9"})
-    void answersToWhenKeepTheirSchema(String condition) throws Exception {
-        for (String pattern : Patterns.names()) {
-            String output = MAPPER.readTree(Run.of("inspect", "test-data/models/" + pattern + ".yaml", "--as", "json")
-                    .answer()).get("states").get(0).asText();
-            Run run = Run.of("when", "test-data/models/" + pattern + ".yaml", "--of", output,
-                    condition.split(" ")[0], condition.split(" ")[1], "--as", "json");
-            assertTrue(List.of(0, 4).contains(run.exitCode()), pattern + run.notes());
-            assertEquals(Set.of(), schema("when").validate(MAPPER.readTree(run.answer())), pattern);
+    @MethodSource("patterns")
+    void answersToWhenAndPassageKeepTheirSchema(String pattern) throws Exception {
+        Path file = Path.of("test-data", "models", pattern + ".yaml");
+        Chain chain = Pofk.read(file).chain();
+        List<List<String>> conditions = List.of(List.of("--at-least", "0.99"), List.of("--at-most", "1/1000"),
+                List.of("--settles-within", "1e-6"), List.of("--at-least", "9"));
+        for (List<String> condition : conditions) {
+            Run run = Run.of("when", file.toString(), "--of", Outputs.byDefault(chain).get(0).name(),
+                    condition.get(0), condition.get(1), "--as", "json");
+            assertTrue(List.of(0, 4).contains(run.exitCode()), run.notes());
+            assertEquals(Set.of(), schema("when").validate(MAPPER.readTree(run.answer())));
+        }
+        Run passage = Run.of("passage", file.toString(), "--into", chain.states().get(chain.size() - 1), "--at",
+                "0..3", "--as", "json");
+        assertEquals(chain.kind() == Chain.Kind.CHAIN ? 0 : 2, passage.exitCode(), passage.notes());
+        if (passage.exitCode() == 0) {
+            assertEquals(Set.of(), schema("passage").validate(MAPPER.readTree(passage.answer())));
         }
     }
 
