@@ -1,6 +1,7 @@
 package org.pofk.meaning;
 
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.List;
 import java.util.Optional;
 import java.util.stream.Stream;
@@ -50,7 +51,7 @@ final class FormArithmetic {
 
     private List<Scalar> times(List<Scalar> a, List<Scalar> b) {
         int size = a.isEmpty() || b.isEmpty() ? 0 : Work.within((long) a.size() + b.size() - 1, LARGEST_DEGREE + 1);
-        List<Scalar> product = new ArrayList<>(java.util.Collections.nCopies(size, Scalars.of(0)));
+        List<Scalar> product = new ArrayList<>(Collections.nCopies(size, Scalars.of(0)));
         for (int i = 0; i < a.size(); i++) {
             for (int j = 0; j < b.size(); j++) {
                 product.set(i + j, scalars.plus(product.get(i + j), scalars.times(a.get(i), b.get(j))));
@@ -96,7 +97,7 @@ final class FormArithmetic {
 
     private static List<Scalar> shifted(List<Scalar> coefficients, int power) {
         Work.within((long) coefficients.size() + power, LARGEST_DEGREE + 1);
-        return Stream.concat(java.util.Collections.nCopies(power, Scalars.of(0)).stream(), coefficients.stream())
+        return Stream.concat(Collections.nCopies(power, Scalars.of(0)).stream(), coefficients.stream())
                 .toList();
     }
 

@@ -4,6 +4,7 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.function.BiFunction;
 import java.util.stream.Stream;
 import org.pofk.exact.Ball;
 import org.pofk.exact.ComplexBall;
@@ -106,7 +107,7 @@ final class Scalars {
     }
 
     private static <T> Optional<T> both(Optional<Rational> a, Optional<Rational> b,
-            java.util.function.BiFunction<Rational, Rational, T> f) {
+            BiFunction<Rational, Rational, T> f) {
         return a.flatMap(x -> b.map(y -> f.apply(x, y)));
     }
 
