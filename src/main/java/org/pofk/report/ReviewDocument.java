@@ -96,7 +96,7 @@ public final class ReviewDocument {
         blocks.add(new Paragraph(summary()));
         boolean hasPlaces = reviewed.findings().stream().anyMatch(finding -> finding.claim().where().isPresent());
         boolean hasErrors = reviewed.findings().stream()
-                .anyMatch(finding -> finding.judgement().difference().isPresent());
+                .anyMatch(finding -> VerdictProse.largestError(finding).isPresent());
         List<Prose> header = new ArrayList<>(List.of(Prose.of("claim")));
         if (hasPlaces) {
             header.add(Prose.of("where"));
@@ -119,7 +119,7 @@ public final class ReviewDocument {
         row.add(ClaimProse.of(finding.claim()));
         row.add(Prose.of(VerdictProse.of(finding)));
         if (hasErrors) {
-            row.add(Prose.of(finding.judgement().difference().map(VerdictProse::of).orElse("")));
+            row.add(Prose.of(VerdictProse.largestError(finding).orElse("")));
         }
         return row;
     }

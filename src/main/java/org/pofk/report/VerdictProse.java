@@ -2,6 +2,7 @@ package org.pofk.report;
 
 import java.math.BigDecimal;
 import java.util.Locale;
+import java.util.Optional;
 import org.pofk.claim.Claim;
 import org.pofk.claim.Claim.SafeSide;
 import org.pofk.claim.Claim.Within;
@@ -52,8 +53,7 @@ final class VerdictProse {
                 ? ", first at " + step(judgement.firstWrongStep().getAsLong()) : "")
                 + (finding.carriedFrom().isPresent()
                 ? ", but what follows from claim " + finding.carriedFrom().getAsInt() : "")
-                + judgement.difference().map(difference -> "; " + off(finding.verdict())
-                        + (isOfOneStep ? size(difference) : of(difference))).orElse(""));
+                + largestError(finding).map(error -> "; " + off(finding.verdict()) + error).orElse(""));
     }
 
     private static String step(long k) {
@@ -73,10 +73,13 @@ final class VerdictProse {
                 ? ", not below the true value" : ", not above the true value").orElse("");
     }
 
-    /** {@code 2.1e-4, at k = 2}; a relative error in per cent. */
-    static String of(Judgement.Difference difference) {
-        return size(difference) + (difference.at().isPresent() ? ", at " + step(difference.at().getAsLong())
-                : ", approached as k grows");
+    /** {@code 2.1e-4, at k = 2}; a relative error in per cent; nothing for what is exact. */
+    static Optional<String> largestError(Finding finding) {
+        boolean isOverSteps = finding.claim().statement() instanceof Statement.PofK;
+        return finding.judgement().difference().filter(difference -> finding.verdict() != Verdict.EXACT)
+                .map(difference -> size(difference) + (!isOverSteps ? ""
+                        : difference.at().isPresent() ? ", at " + step(difference.at().getAsLong())
+                        : ", approached as k grows"));
     }
 
     /** {@code 2.1e-4}, or {@code 1.3 %} of the true value. */
