@@ -24,8 +24,8 @@ import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
 
 /** {@code pofk check CLAIMS}: a derivation made by hand, held against the exact one. */
-@Command(description = {"Checks a derivation made by hand, step by step, against the exact one: which steps are",
-    "right, which are wrong, where, and by which slip. The steps stand in a claims file."})
+@Command(description = {"Checks a derivation made by hand, step by step, against the exact one: which",
+    "steps are right, which are wrong, where, and by which slip."})
 final class CheckCommand implements Work {
     @Parameters(paramLabel = "CLAIMS", description = "a claims file (YAML or JSON); the model it names lies beside it")
     private Path file;
@@ -75,7 +75,7 @@ final class CheckCommand implements Work {
                 ClaimsReader.read(source, Optional.ofNullable(file.getParent()), overrides));
         Variants variants = ModelVariants.of(claims, overrides);
         Worker.Outcome<ReviewedClaims> outcome = Worker.within(budget.limit(streams), streams.notes(), published ->
-                published.accept(Reviewing.of(claims, variants)));
+                published.accept(Reviewing.of(claims, variants, published)));
         if (outcome.published().isEmpty()) {
             streams.notes().println("pofk: nothing was decided within the budget");
             return ExitCode.NOT_DECIDED;

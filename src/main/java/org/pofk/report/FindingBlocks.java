@@ -6,6 +6,7 @@ import org.pofk.claim.Claim;
 import org.pofk.claim.FormulaText;
 import org.pofk.claim.Judgement;
 import org.pofk.claim.Judgement.JudgedNumber;
+import org.pofk.claim.Statement;
 import org.pofk.claim.Verdict;
 import org.pofk.meaning.Fit;
 import org.pofk.report.Document.Block;
@@ -15,6 +16,7 @@ import org.pofk.report.Document.Paragraph;
 import org.pofk.report.Document.Table;
 import org.pofk.slip.Finding;
 import org.pofk.slip.Slip;
+import org.pofk.text.Span;
 
 /** What is said of one claim that isn't plainly exact. */
 final class FindingBlocks {
@@ -46,7 +48,7 @@ final class FindingBlocks {
         judgement.remarks().forEach(remark -> blocks.add(new Labelled("remark", remark)));
         claim.note().ifPresent(note -> blocks.add(new Labelled("note", ClaimProse.text(note))));
         slips();
-        if (finding.slips().isEmpty()) {
+        if (isWrong() && finding.slips().isEmpty()) {
             wrongNumbers();
         }
         finding.rest().ifPresent(rest -> blocks.add(new Labelled("unexplained", rest)));
@@ -66,8 +68,7 @@ final class FindingBlocks {
     }
 
     private void slip(Slip slip, String label) {
-        blocks.add(new Paragraph(Prose.of(label + slip.kind().inWords() + ", ")
-                .andName(slip.span().start().toString())));
+        blocks.add(new Paragraph(label + slip.kind().inWords() + ", " + place(slip.span())));
         blocks.add(text.excerpt(slip.span(), finding.claim()));
         if (!slip.found().isBlank()) {
             blocks.add(new Labelled("found", ClaimProse.text(slip.found())));
@@ -88,30 +89,43 @@ final class FindingBlocks {
             blocks.add(new Table(Prose.EMPTY, List.of(Prose.of("found"), Prose.of("right"), Prose.of("place")),
                     wrong.stream().map(number -> List.of(Prose.name(number.written().text()),
                             Prose.name(number.right()),
-                            Prose.name(number.written().span().start().toString()))).toList()));
+                            Prose.of(place(number.written().span())))).toList()));
             return;
         }
         for (JudgedNumber number : wrong) {
-            blocks.add(new Paragraph(Prose.of("A number is wrong, ")
-                    .andName(number.written().span().start().toString())));
+            blocks.add(new Paragraph("A number is wrong, " + place(number.written().span())));
             blocks.add(text.excerpt(number.written().span(), finding.claim()));
             blocks.add(new Labelled("found", Prose.name(number.written().text())));
             blocks.add(new Labelled("right", Prose.name(number.right())));
         }
     }
 
+    private static String place(Span span) {
+        return "line " + span.start().line() + ", column " + span.start().column();
+    }
+
+    private boolean isWrong() {
+        return finding.verdict() == Verdict.WRONG || finding.verdict() == Verdict.CARRIED;
+    }
+
     /** The right statement, unless a slip's correction has shown it. */
     private void right() {
+        String right = finding.judgement().right();
         boolean isShown = !finding.together()
-                && finding.slips().stream().anyMatch(slip -> slip.corrected().equals(finding.judgement().right()));
-        boolean isWrong = finding.verdict() == Verdict.WRONG || finding.verdict() == Verdict.CARRIED;
-        if (isWrong && !isShown && !finding.judgement().right().isBlank()) {
+                && finding.slips().stream().anyMatch(slip -> slip.corrected().equals(right));
+        boolean isOneNumber = finding.claim().statement() instanceof Statement.Value && isWrong()
+                && finding.judgement().numbers().stream().anyMatch(number -> number.fit() == Fit.WRONG);
+        if (right.isBlank() || isShown || isOneNumber) {
+            return;
+        }
+        if (finding.verdict() == Verdict.APPROXIMATE) {
+            blocks.add(new Labelled("true value", ClaimProse.text(right)));
+        } else if (isWrong()) {
             List<FormulaText> stated = StatedFormulas.of(finding.claim().statement());
             if (finding.slips().isEmpty() && stated.size() == 1) {
                 blocks.add(new Labelled("stated", ClaimProse.text(stated.get(0).text())));
             }
-            blocks.add(new Labelled(finding.slips().isEmpty() ? "should read" : "corrected",
-                    ClaimProse.text(finding.judgement().right())));
+            blocks.add(new Labelled(finding.slips().isEmpty() ? "should read" : "corrected", ClaimProse.text(right)));
         }
     }
 }

@@ -5,6 +5,7 @@ import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.stream.Collectors;
 import org.pofk.chain.Model;
 import org.pofk.claim.Claims;
 import org.pofk.claim.Verdict;
@@ -94,6 +95,12 @@ public final class ReviewDocument {
             return;
         }
         blocks.add(new Paragraph(summary()));
+        if (!reviewed.notReached().isEmpty()) {
+            blocks.add(new Paragraph("Stopped before " + (reviewed.notReached().size() == 1 ? "claim " : "claims ")
+                    + reviewed.notReached().stream().map(claim -> String.valueOf(claim.number()))
+                            .collect(Collectors.joining(", ")) + ": the budget was used up. Nothing is said of "
+                    + (reviewed.notReached().size() == 1 ? "it." : "them.")));
+        }
         boolean hasPlaces = reviewed.findings().stream().anyMatch(finding -> finding.claim().where().isPresent());
         boolean hasErrors = reviewed.findings().stream()
                 .anyMatch(finding -> VerdictProse.largestError(finding).isPresent());
@@ -150,8 +157,10 @@ public final class ReviewDocument {
         }
     }
 
+    /** All but those of which the table says everything. */
     private static boolean needsWords(Finding finding) {
-        return finding.verdict() != Verdict.EXACT || !finding.judgement().remarks().isEmpty();
+        boolean isPlainlyRight = finding.verdict() == Verdict.EXACT || finding.verdict() == Verdict.ROUNDED;
+        return !isPlainlyRight || !finding.judgement().remarks().isEmpty();
     }
 
     private void notStated() {

@@ -37,6 +37,7 @@ public final class VerdictsJson {
         json.list("claims", reviewed.findings(), this::finding);
         count("firstWrong", reviewed.firstWrong()
                 .map(first -> OptionalLong.of(first.claim().number())).orElse(OptionalLong.empty()));
+        json.list("notReached", reviewed.notReached(), claim -> json.count(claim.number()));
         json.texts("notStated", reviewed.notStated());
     }
 

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalInt;
+import java.util.function.Consumer;
 import org.pofk.claim.Claim;
 import org.pofk.claim.Claims;
 import org.pofk.claim.Judgement;
@@ -26,9 +27,19 @@ public final class Reviewing {
     }
 
     public static ReviewedClaims of(Claims claims, Variants variants) {
+        return of(claims, variants, ignored -> { });
+    }
+
+    /** The same; what is found so far is published after each step. */
+    public static ReviewedClaims of(Claims claims, Variants variants, Consumer<ReviewedClaims> published) {
         Reviewing reviewing = new Reviewing(claims, variants);
-        return new ReviewedClaims(claims, claims.claims().stream().map(reviewing::finding).toList(),
-                NotStated.in(claims.claims()));
+        List<String> notStated = NotStated.in(claims.claims());
+        List<Finding> findings = new ArrayList<>();
+        for (Claim claim : claims.claims()) {
+            findings.add(reviewing.finding(claim));
+            published.accept(new ReviewedClaims(claims, findings, notStated));
+        }
+        return new ReviewedClaims(claims, findings, notStated);
     }
 
     private Finding finding(Claim claim) {

@@ -26,7 +26,8 @@ class ReadmeTest {
     private static final Pattern CONSOLE = Pattern.compile("(?s)```console\\n(.*?)```");
     private static final Pattern COMMAND = Pattern.compile("(?m)^\\$ (.*)$");
     private static final Pattern BY_MAVEN = Pattern.compile("mvn -q -B compile exec:java -Dexec.args=\"(.*)\"");
-    private static final Pattern MODEL = Pattern.compile("(?s)```yaml\\n(.*?)```");
+    private static final Pattern MODEL = Pattern.compile("(?s)```yaml\\n(pofk: .*?)```");
+    private static final Pattern CLAIMS = Pattern.compile("(?s)```yaml\\n(pofk-claims: .*?)```");
 
     /** A command line of the README and what is shown below it. */
     record Example(String command, String shown) {
@@ -59,7 +60,7 @@ class ReadmeTest {
     @Test
     void everyBuiltCommandThatReadsAModelHasAnExample() throws IOException {
         List<String> commands = examples().stream().map(example -> example.arguments().get(0)).toList();
-        assertTrue(commands.containsAll(List.of("derive", "inspect", "simulate", "help")), commands.toString());
+        assertTrue(commands.containsAll(List.of("derive", "inspect", "simulate", "check", "help")), commands.toString());
         assertTrue(examples().get(0).command().startsWith("mvn "));
     }
 
@@ -71,6 +72,11 @@ class ReadmeTest {
         Model pattern = ModelReader.read(Path.of("test-data/models/pump-pair.yaml"), Overrides.NONE);
         assertEquals(pattern.chain(), shown.chain());
         assertEquals(pattern.title(), shown.title());
+    }
+
+    @Test
+    void theClaimsShownAreThoseThatAreChecked() throws IOException {
+        assertEquals(List.of(Files.readString(Path.of("test-data/claims/pump-pair.yaml"))), blocks(CLAIMS));
     }
 
     private static List<String> blocks(Pattern pattern) throws IOException {

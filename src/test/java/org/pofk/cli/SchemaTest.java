@@ -91,6 +91,14 @@ class SchemaTest {
         }
     }
 
+    @ParameterizedTest
+    @ValueSource(strings = {"pump-pair", "right"})
+    void verdictsKeepTheirSchema(String claims) throws Exception {
+        Run run = Run.of("check", "test-data/claims/" + claims + ".yaml", "--as", "json");
+        assertEquals(claims.equals("right") ? 0 : 1, run.exitCode(), run.notes());
+        assertEquals(Set.of(), schema("verdicts").validate(MAPPER.readTree(run.answer())));
+    }
+
     @Test
     void aResultWithAFieldMoreOrLessOrOfAnotherKindIsRefused() throws Exception {
         JsonNode result = MAPPER.readTree(Run.of("derive", "test-data/models/pump-pair.yaml", "--as", "json").answer());

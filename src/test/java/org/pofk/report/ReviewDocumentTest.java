@@ -15,6 +15,7 @@ import java.util.List;
 import java.util.Set;
 import java.util.stream.IntStream;
 import org.junit.jupiter.api.Test;
+import org.pofk.claim.Claims;
 import org.pofk.slip.ReviewedClaims;
 import org.pofk.text.Alphabet;
 import org.pofk.text.Columns;
@@ -47,8 +48,18 @@ class ReviewDocumentTest {
     }
 
     @Test
+    void whatWasNotReachedIsNamed() throws Exception {
+        ReviewedClaims all = MadeUpReview.review();
+        ReviewedClaims some = new ReviewedClaims(all.claims(), all.findings().subList(0, 6), all.notStated());
+        assertTrue(text(some, Alphabet.UNICODE).contains("\nStopped before claims 7, 8: the budget was used up."));
+        assertEquals(Set.of(), problems(some));
+    }
+
+    @Test
     void aFileWithoutClaimsSaysSo() throws Exception {
-        ReviewedClaims none = new ReviewedClaims(MadeUpReview.review().claims(), List.of(), List.of());
+        Claims claims = MadeUpReview.review().claims();
+        ReviewedClaims none = new ReviewedClaims(
+                new Claims(claims.model(), claims.origin(), claims.review(), List.of()), List.of(), List.of());
         assertTrue(text(none, Alphabet.UNICODE).contains("\nNo claims yet: the file states no step of a derivation.\n"));
         assertEquals(Set.of(), problems(none));
     }
