@@ -108,13 +108,12 @@ final class FindingBlocks {
         return finding.verdict() == Verdict.WRONG || finding.verdict() == Verdict.CARRIED;
     }
 
-    /** The right statement, unless a slip's correction has shown it. */
+    /** The right statement, unless a slip or its one number has shown it. */
     private void right() {
         String right = finding.judgement().right();
-        boolean isShown = !finding.together()
-                && finding.slips().stream().anyMatch(slip -> slip.corrected().equals(right));
         boolean isOneNumber = finding.claim().statement() instanceof Statement.Value && isWrong()
                 && finding.judgement().numbers().stream().anyMatch(number -> number.fit() == Fit.WRONG);
+        boolean isShown = !finding.slips().isEmpty() && !finding.together();
         if (right.isBlank() || isShown || isOneNumber) {
             return;
         }
