@@ -30,6 +30,14 @@ public final class Latex {
         return formula.accept(Writer.WRITER).text;
     }
 
+    /**
+     * The formula on lines of about {@code width} digits: broken before its outermost signs, within a term only where
+     * that is longer than a line.
+     */
+    public static List<String> lines(Formula formula, int width) {
+        return LatexLines.of(formula, width);
+    }
+
     /** How tightly a text holds together: what binds less than its place asks for is put in parentheses. */
     private enum Binding { SUM, NEGATION, ROOT_SUM, PRODUCT, POWER_OF_TEN, FRACTION, POWER, CALL, ATOM }
 

@@ -23,7 +23,7 @@ final class LatexLetters {
     private static final Map<String, String> VARIANTS = Map.of("phi", "φ", "epsilon", "ε", "vartheta", "θ",
             "varrho", "ρ", "varsigma", "σ", "varpi", "π");
     private static final Map<String, String> ESCAPES = Map.of("textbackslash", "\\", "textasciicircum", "^",
-            "textasciitilde", "~", "textunderscore", "_", "_", "_", "%", "%");
+            "textasciitilde", "~", "textasciigrave", "`", "textunderscore", "_", "_", "_", "%", "%");
     private static final Map<Integer, String> LETTER_FORMS = Map.of((int) 'ϕ', "φ", (int) 'ϵ', "ε", (int) 'ϑ', "θ");
 
     private final LatexScanner scanner;
@@ -128,6 +128,9 @@ final class LatexLetters {
         if (c == '\\') {
             return escaped(at);
         }
+        if (scanner.takes("{}")) {
+            return "";
+        }
         if ("{$%#&_^".indexOf(c) >= 0 || Character.isISOControl(c) && c != '\n'
                 || Character.getType(c) == Character.FORMAT) {
             throw scanner.refused(at, "character", LookAlikes.described(c) + " can't stand in a name"
@@ -142,6 +145,13 @@ final class LatexLetters {
         scanner.skipCommand(command);
         if (command.length() == 1 && "{}$&#%_ ".contains(command)) {
             return command;
+        }
+        if (command.equals("ensuremath") && scanner.takes("{")) {
+            Optional<String> letter = greek(scanner.command());
+            letter.ifPresent(each -> scanner.skipCommand(scanner.command()));
+            if (letter.isPresent() && scanner.takes("}")) {
+                return letter.get();
+            }
         }
         Optional<String> letter = greek(command).or(() -> Optional.ofNullable(ESCAPES.get(command)));
         if (letter.isEmpty()) {

@@ -2,7 +2,6 @@ package org.pofk.formula;
 
 import java.util.List;
 import java.util.Optional;
-import java.util.stream.Collectors;
 
 /** Names in LaTeX mathematics: one letter in italics, Greek letters by command, words upright, all else as text. */
 final class LatexNames {
@@ -46,20 +45,6 @@ final class LatexNames {
         if (name.matches("[A-Za-z]")) {
             return name;
         }
-        return name.matches("[A-Za-z0-9]+") ? "\\mathrm{" + name + "}" : "\\text{" + escaped(name) + "}";
-    }
-
-    private static String escaped(String name) {
-        return name.codePoints().mapToObj(LatexNames::escaped).collect(Collectors.joining());
-    }
-
-    private static String escaped(int c) {
-        return switch (c) {
-            case '{', '}', '$', '&', '#', '%', '_' -> "\\" + (char) c;
-            case '\\' -> "\\textbackslash{}";
-            case '^' -> "\\textasciicircum{}";
-            case '~' -> "\\textasciitilde{}";
-            default -> Character.toString(c);
-        };
+        return name.matches("[A-Za-z0-9]+") ? "\\mathrm{" + name + "}" : "\\text{" + LatexText.of(name) + "}";
     }
 }

@@ -1,0 +1,129 @@
+package org.pofk.report;
+
+import java.nio.charset.StandardCharsets;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Locale;
+import org.pofk.text.Alphabet;
+
+/**
+ * A table in LaTeX that goes on over pages with its header repeated. Numbers are aligned as in text; a table that is too
+ * wide has its widest column of text broken into lines, and else its columns dealt to several tables, each beginning
+ * with the first column.
+ */
+final class LatexTable {
+    /** Characters on a line of a table. */
+    private static final int WIDTH = 80;
+    private static final int GAP = 3;
+    private static final int NARROWEST_TEXT = 24;
+
+    private record Column(TextColumn plain, int room, String header, List<String> cells) {
+        boolean isBroken() {
+            return room < plain.width();
+        }
+
+        String kind() {
+            return isBroken() ? String.format(Locale.ROOT, "p{%.3f\\linewidth}", room / (double) WIDTH)
+                    : plain.isNumeric() ? "r" : "l";
+        }
+    }
+
+    private LatexTable() {
+    }
+
+    static List<String> lines(Document.Table table) {
+        Spelling spelling = new Spelling(Alphabet.UNICODE, StandardCharsets.UTF_8);
+        List<Column> columns = new ArrayList<>();
+        for (int j = 0; j < table.header().size(); j++) {
+            int column = j;
+            TextColumn plain = TextColumn.of(spelling.of(table.header().get(j)),
+                    table.rows().stream().map(row -> spelling.of(row.get(column))).toList());
+            List<String> cells = new ArrayList<>();
+            for (int i = 0; i < table.rows().size(); i++) {
+                cells.add(LatexSpelling.of(table.rows().get(i).get(j)) + padding(plain, plain.texts().get(i)));
+            }
+            columns.add(new Column(plain, plain.width(), LatexSpelling.of(table.header().get(j)), cells));
+        }
+        return folded(fitted(columns), table.rows().size());
+    }
+
+    /** What brings a number's point below the others' points: room for the digits that it hasn't. */
+    private static String padding(TextColumn column, String text) {
+        int missing = text.length() - text.stripTrailing().length();
+        if (!column.isNumeric() || missing == 0) {
+            return "";
+        }
+        return "\\phantom{" + (text.contains(".") ? "0" : ".") + "0".repeat(missing - 1) + "}";
+    }
+
+    private static List<Column> fitted(List<Column> columns) {
+        List<Column> fitted = new ArrayList<>(columns);
+        int widest = -1;
+        for (int j = 0; j < columns.size(); j++) {
+            boolean isWider = widest < 0 || columns.get(j).room > columns.get(widest).room;
+            widest = !columns.get(j).plain.isNumeric() && isWider ? j : widest;
+        }
+        int excess = total(columns) - WIDTH;
+        if (excess > 0 && widest >= 0) {
+            fitted.set(widest, narrowed(columns.get(widest),
+                    Math.max(NARROWEST_TEXT, columns.get(widest).room - excess)));
+        }
+        if (total(fitted) > WIDTH && fitted.size() > 1) {
+            fitted.set(0, narrowed(fitted.get(0), WIDTH / 2 - GAP));
+        }
+        for (int j = 0; j < fitted.size(); j++) {
+            fitted.set(j, narrowed(fitted.get(j), j == 0 ? WIDTH : WIDTH - fitted.get(0).room - GAP));
+        }
+        return fitted;
+    }
+
+    private static Column narrowed(Column column, int most) {
+        return column.room <= most ? column : new Column(column.plain, most, column.header, column.cells);
+    }
+
+    private static int total(List<Column> columns) {
+        return columns.stream().mapToInt(Column::room).sum() + GAP * (columns.size() - 1);
+    }
+
+    private static List<String> folded(List<Column> columns, int rows) {
+        List<String> lines = new ArrayList<>();
+        List<Column> group = new ArrayList<>(List.of(columns.get(0)));
+        for (Column column : columns.subList(1, columns.size())) {
+            if (group.size() > 1 && total(group) + GAP + column.room > WIDTH) {
+                lines.addAll(part(group, rows));
+                group = new ArrayList<>(List.of(columns.get(0)));
+            }
+            group.add(column);
+        }
+        lines.addAll(part(group, rows));
+        return lines;
+    }
+
+    private static List<String> part(List<Column> group, int rows) {
+        List<String> lines = new ArrayList<>();
+        lines.add("{\\small\\renewcommand{\\arraystretch}{1.25}");
+        lines.add("\\begin{longtable}{@{}" + String.join("", group.stream().map(Column::kind).toList()) + "@{}}");
+        lines.add("\\toprule");
+        lines.add(row(group.stream().map(column -> column.isBroken() ? broken(column.header) : column.header).toList()));
+        lines.add("\\midrule");
+        lines.add("\\endhead");
+        lines.add("\\bottomrule");
+        lines.add("\\endfoot");
+        for (int i = 0; i < rows; i++) {
+            int row = i;
+            lines.add(row(group.stream().map(column -> column.isBroken() ? broken(column.cells.get(row))
+                    : column.cells.get(row)).toList()));
+        }
+        lines.add("\\end{longtable}}");
+        return lines;
+    }
+
+    private static String broken(String cell) {
+        return "{\\raggedright " + cell + "\\par}";
+    }
+
+    private static String row(List<String> cells) {
+        return String.join(" & ", cells.stream().map(cell -> cell.startsWith("[") ? "{" + cell + "}" : cell).toList())
+                + " \\\\";
+    }
+}

@@ -1,0 +1,130 @@
+package org.pofk.report;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertThrows;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+import static org.junit.jupiter.api.Assertions.fail;
+
+import java.io.File;
+import java.io.IOException;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.EnumSet;
+import java.util.List;
+import java.util.regex.Pattern;
+import org.junit.jupiter.api.Assumptions;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.ValueSource;
+import org.pofk.Pofk;
+import org.pofk.answer.DerivedModel;
+import org.pofk.answer.Deriving;
+import org.pofk.chain.Model;
+import org.pofk.chain.Outputs;
+import org.pofk.formula.Formula;
+import org.pofk.formula.FormulaParser;
+import org.pofk.report.Document.Display;
+import org.pofk.report.Document.Excerpt;
+import org.pofk.report.Document.Heading;
+import org.pofk.report.Document.Items;
+import org.pofk.report.Document.Labelled;
+import org.pofk.report.Document.Paragraph;
+import org.pofk.report.Document.Relation;
+import org.pofk.report.Document.Table;
+import org.pofk.text.Position;
+import org.pofk.text.RefusedException;
+
+class LatexWriterTest {
+    private static final Pattern OVERFULL = Pattern.compile("Overfull .hbox \\(([0-9]+)\\.");
+    private static final String HARD = "50% & rising_#1 {x} \\~^$ \"θ\" Überlauf ⟨α⟩ --flag [1] <<a>>";
+
+    @TempDir
+    private Path folder;
+
+    private static Formula formula(String text) throws RefusedException {
+        return FormulaParser.parse(text, new Position("test", 1, 1)).formula();
+    }
+
+    private static Document derived(String pattern) throws RefusedException {
+        Model model = Pofk.read(Path.of("test-data", "models", pattern + ".yaml"));
+        DerivedModel derived = Deriving.of(model, Outputs.byDefault(model.chain()), List.of(0, 1, 2, 5),
+                EnumSet.of(Deriving.Extra.COMPARISON, Deriving.Extra.STATE_MODES), published -> { });
+        return DerivationDocument.all(derived, new Style(6, Style.Angles.DEGREES), Model.Convention.COLUMNS);
+    }
+
+    private static Document everything() throws RefusedException {
+        List<List<String>> rows = new ArrayList<>();
+        for (int i = 0; i < 120; i++) {
+            rows.add(List.of(HARD, i + ".25", "-1/7", "a long remark on how this came to be, row " + i));
+        }
+        Prose name = Prose.name(HARD);
+        return new Document(List.of(new Heading(1, name), new Heading(3, Prose.of("x").andName(HARD)),
+                new Paragraph(Prose.of("Up to 3 % of ").and(name).and(" as ").andFormula(formula("1/2 - 'a_b'^k"))),
+                new Labelled(name, name), new Labelled("long run", "20/2447"),
+                new Items(List.of(name, Prose.of("[2] second"))),
+                new Display(Prose.of("Y(z)"), Relation.EQUAL, formula("z*(" + "0.0025*z^9 + ".repeat(20) + "1)/((z-1)*("
+                        + "0.25*z + ".repeat(30) + "2))"), Prose.of("k ≥ 2")),
+                new Display(name.and("(k)"), Relation.ROUNDED, formula("0.5^k + ".repeat(60) + "1")),
+                new Display(Prose.EMPTY, Relation.EQUAL, formula("9".repeat(300) + " + {1 for k = 0; 2 for k >= 1}")),
+                new Excerpt("  is: '0.5^k' # " + HARD, 6, 13), new Excerpt("x".repeat(300), 100, 200),
+                Table.ofText("numbers", List.of("name", "x", "y", "remark"), rows)));
+    }
+
+    private void assertCompiles(Document document) throws RefusedException, IOException, InterruptedException {
+        requirePdflatex();
+        Files.writeString(folder.resolve("a.tex"), LatexWriter.article(document), StandardCharsets.UTF_8);
+        String log = "";
+        for (int run = 0; run < 2; run++) {
+            Process process = new ProcessBuilder("pdflatex", "-interaction=nonstopmode", "-halt-on-error", "a.tex")
+                    .directory(folder.toFile()).redirectErrorStream(true).start();
+            log = new String(process.getInputStream().readAllBytes(), StandardCharsets.ISO_8859_1);
+            assertEquals(0, process.waitFor(), log);
+        }
+        assertTrue(OVERFULL.matcher(log).results().allMatch(found -> Integer.parseInt(found.group(1)) < 5), log);
+        assertFalse(log.contains("undefined"), log);
+    }
+
+    /** Skips where LaTeX isn't installed, fails there on the machine that checks everything. */
+    private static void requirePdflatex() {
+        boolean isInstalled = Arrays.stream(System.getenv().getOrDefault("PATH", "").split(File.pathSeparator))
+                .anyMatch(each -> Files.isExecutable(Path.of(each, "pdflatex")));
+        if (!isInstalled && System.getenv("CI") != null) {
+            fail("pdflatex isn't installed");
+        }
+        Assumptions.assumeTrue(isInstalled, "pdflatex isn't installed");
+    }
+
+    @ParameterizedTest
+    @ValueSource(strings = {"pump-pair", "proof-tested-interlock", "tandem-presses", "tunnel-ventilation"})
+    void derivationsCompileWithoutOverfullLines(String pattern) throws Exception {
+        assertCompiles(derived(pattern));
+    }
+
+    @Test
+    void everyBlockWithAnyNameCompiles() throws Exception {
+        assertCompiles(everything());
+    }
+
+    @Test
+    void aPartForAnotherDocumentSaysWhatItNeeds() throws RefusedException {
+        String part = LatexWriter.fragment(everything());
+        assertTrue(part.startsWith("% To be put into a document by \\input; needs \\usepackage[T1]{fontenc} and the"
+                + " packages amsmath, booktabs, longtable.\n"), part);
+        assertFalse(part.contains("\\begin{document}"));
+        assertTrue(LatexWriter.article(everything()).contains(part.substring(part.indexOf('\n') + 1)));
+        assertEquals(part, LatexWriter.fragment(everything()));
+    }
+
+    @Test
+    void whatCannotBeSetIsRefusedWithItsCharacters() {
+        Document document = new Document(List.of(new Paragraph(Prose.name("泵一 and 泵\u0007"))));
+        assertEquals("LaTeX: these characters can't be set: '泵' U+6CF5, '一' U+4E00, U+0007; rename what holds them, or"
+                + " write another format", assertThrows(RefusedException.class, () -> LatexWriter.article(document))
+                .getMessage());
+    }
+}
