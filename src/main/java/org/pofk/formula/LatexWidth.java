@@ -76,7 +76,7 @@ final class LatexWidth implements Formula.Visitor<Double> {
 
     @Override
     public Double call(Formula.Call call) {
-        return (call.function() == Formula.Function.SQRT ? 0 : 4) + PARENTHESES + total(call.arguments());
+        return (call.function() == Formula.Function.SQRT ? 0 : 3) + PARENTHESES + total(call.arguments());
     }
 
     @Override

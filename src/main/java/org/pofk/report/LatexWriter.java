@@ -21,7 +21,7 @@ public final class LatexWriter {
     /** The packages that what is written needs. */
     public static final List<String> PACKAGES = List.of("amsmath", "booktabs", "longtable");
     /** Digits on a line of a display. */
-    private static final int WIDTH = 72;
+    private static final int WIDTH = 76;
     private static final int LONGEST_UNDERLINED = 30;
 
     private LatexWriter() {
