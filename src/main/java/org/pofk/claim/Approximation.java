@@ -33,8 +33,7 @@ record Approximation(Decision holds, Optional<Judgement.Difference> difference, 
         if (claim.safeSide().isPresent()) {
             SafeSide safe = SafeSide.of(claimed, truth, steps.range(), claim.safeSide().get());
             if (safe.holds() == Decision.NO) {
-                remarks.add("at k = " + safe.step().getAsLong() + " it lies "
-                        + (claim.safeSide().get() == Claim.SafeSide.ABOVE ? "below" : "above") + " the true value");
+                remarks.add(safe.told(claim.safeSide().get()));
                 wrong = wrong.isEmpty() || wrong.getAsLong() > safe.step().getAsLong() ? safe.step() : wrong;
             }
             holds = holds == Decision.NO || safe.holds() == Decision.NO ? Decision.NO

@@ -3,6 +3,7 @@ package org.pofk.claim;
 import java.util.List;
 import org.pofk.exact.Ball;
 import org.pofk.exact.ComplexBall;
+import org.pofk.exact.NotSeparatedException;
 import org.pofk.meaning.ExponentialSum.Term;
 import org.pofk.meaning.Quantity;
 
@@ -33,7 +34,17 @@ record ClaimedMode(List<ClaimedTerm> terms) {
     record ClaimedTerm(Term term, Shape shape, Quantity pole, ComplexBall atFaceValue, ComplexBall spread) {
         static ClaimedTerm of(Term term) {
             Quantity pole = Wave.of(term).base();
-            return new ClaimedTerm(term, shape(term), pole, pole.enclose(BITS), pole.spread(BITS));
+            ComplexBall atFaceValue = pole.enclose(BITS);
+            return new ClaimedTerm(term, shape(term), pole, atFaceValue, spread(pole, atFaceValue));
+        }
+
+        /** The face value where a divisor may be zero: it is only for guesses. */
+        private static ComplexBall spread(Quantity pole, ComplexBall atFaceValue) {
+            try {
+                return pole.spread(BITS);
+            } catch (NotSeparatedException dividedByZero) {
+                return atFaceValue;
+            }
         }
 
         private static Shape shape(Term term) {

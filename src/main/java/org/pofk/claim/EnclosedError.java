@@ -3,6 +3,7 @@ package org.pofk.claim;
 import java.math.BigInteger;
 import java.util.Map;
 import java.util.Optional;
+import java.util.function.LongPredicate;
 import org.pofk.exact.Ball;
 
 /**
@@ -17,7 +18,8 @@ final class EnclosedError {
     private final int classes;
 
     /** p(k), for relative errors. */
-    record Reference(EnclosedWaves truth, Map<Long, Ball> impulses, Ball largest) {
+    record Reference(EnclosedWaves truth, Map<Long, Ball> impulses, Ball largest, LongPredicate vanishes,
+            LongPredicate agrees) {
     }
 
     EnclosedError(EnclosedWaves difference, Map<Long, Ball> impulses, Optional<Reference> reference, int bits) {
@@ -55,7 +57,12 @@ final class EnclosedError {
         return impulse == null ? value : value.plus(impulse);
     }
 
-    /** Empty where p(k) can't be told from zero. */
+    /** True where p(k) is zero and the formula isn't: there is no relative error, however large. */
+    boolean isInfiniteAt(long k) {
+        return reference.filter(p -> p.vanishes.test(k) && !p.agrees.test(k)).isPresent();
+    }
+
+    /** Empty where p(k) can't be told from zero, unless both are zero: then there is no error. */
     Optional<Ball> at(long k) {
         if (reference.isEmpty()) {
             return Optional.of(signedAt(k).abs());
@@ -65,7 +72,8 @@ final class EnclosedError {
                 ? Ball.of(1, bits).dividedBy(Intervals.power(p.largest, k)) : Ball.of(1, bits);
         Ball error = scaled(difference.valueAt(k), impulses, scale, k);
         Ball truth = scaled(p.truth.valueAt(k), p.impulses, scale, k);
-        return over(error, truth);
+        return truth.containsZero() && p.vanishes.test(k) && p.agrees.test(k)
+                ? Optional.of(Ball.of(0, bits)) : over(error, truth);
     }
 
     private static Ball scaled(Ball value, Map<Long, Ball> impulses, Ball scale, long k) {

@@ -5,9 +5,11 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.SortedMap;
 import java.util.TreeMap;
+import java.util.function.LongPredicate;
 import java.util.stream.Collectors;
 import java.util.stream.Stream;
 import org.pofk.exact.Ball;
+import org.pofk.meaning.Decision;
 import org.pofk.meaning.ExponentialSum;
 import org.pofk.meaning.Quantity;
 
@@ -22,8 +24,14 @@ import org.pofk.meaning.Quantity;
  */
 record ErrorCurve(List<TurningStrand> difference, SortedMap<Long, Quantity> impulses, Optional<Reference> reference) {
 
-    /** p(k) with its largest modulus. */
-    record Reference(List<TurningStrand> truth, SortedMap<Long, Quantity> impulses, Quantity largest) {
+    /**
+     * p(k) with its largest modulus.
+     *
+     * @param vanishes where p(k) is zero
+     * @param agrees   where, that being so, the formula is zero too
+     */
+    record Reference(List<TurningStrand> truth, SortedMap<Long, Quantity> impulses, Quantity largest,
+            LongPredicate vanishes, LongPredicate agrees) {
     }
 
     static ErrorCurve absolute(ExponentialSum claimed, OutputTruth truth) {
@@ -44,7 +52,8 @@ record ErrorCurve(List<TurningStrand> difference, SortedMap<Long, Quantity> impu
         List<Wave> claimedWaves = claimedWaves(claimed).stream().map(wave -> wave.over(largest)).toList();
         return new ErrorCurve(turning(Strands.ofDifference(claimedWaves, trueWaves)),
                 difference(claimed.impulses(), trueImpulses(truth)), Optional.of(new Reference(
-                        turning(Strands.ofDifference(trueWaves, List.of())), trueImpulses(truth), largest)));
+                        turning(Strands.ofDifference(trueWaves, List.of())), trueImpulses(truth), largest,
+                        k -> truth.valueAt(k).isZero(), k -> claimed.valueAt(k).isZero() == Decision.YES)));
     }
 
     static List<Wave> claimedWaves(ExponentialSum claimed) {
@@ -82,7 +91,7 @@ record ErrorCurve(List<TurningStrand> difference, SortedMap<Long, Quantity> impu
     EnclosedError enclose(int bits) {
         return new EnclosedError(EnclosedWaves.of(difference, bits), balls(impulses, bits),
                 reference.map(p -> new EnclosedError.Reference(EnclosedWaves.of(p.truth, bits),
-                        balls(p.impulses, bits), p.largest.enclose(bits).real().roundedTo(bits))), bits);
+                        balls(p.impulses, bits), p.largest.enclose(bits).real().roundedTo(bits), p.vanishes, p.agrees)), bits);
     }
 
     private static Map<Long, Ball> balls(Map<Long, Quantity> values, int bits) {

@@ -6,7 +6,6 @@ import java.util.Optional;
 import java.util.OptionalLong;
 import java.util.stream.Collectors;
 import java.util.stream.IntStream;
-import org.pofk.exact.Ball;
 import org.pofk.exact.Rational;
 import org.pofk.meaning.ExponentialSum;
 import org.pofk.meaning.Precision;
@@ -17,7 +16,6 @@ import org.pofk.text.RefusedException;
 final class JudgedFormula {
     /** Steps at which the sum over all states is held against one. */
     private static final int SUMMED_STEPS = 16;
-    private static final int BITS = 96;
 
     private JudgedFormula() {
     }
@@ -90,8 +88,8 @@ final class JudgedFormula {
         for (long k = claim.steps().from(); k < claim.steps().from() + SUMMED_STEPS; k++) {
             long step = k;
             if (sums.stream().allMatch(sum -> sum.scope().includes(step))) {
-                Ball sum = Quantity.sum(sums.stream().map(each -> each.valueAt(step)).toList()).spread(BITS).real();
-                if (!sum.contains(Rational.ONE)) {
+                Quantity sum = Quantity.sum(sums.stream().map(each -> each.valueAt(step)).toList());
+                if (!Spread.mayBe(sum, Quantity.ONE)) {
                     return Optional.of(k);
                 }
             }

@@ -4,9 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalLong;
-import java.util.stream.Collectors;
 import org.pofk.claim.Judgement.JudgedNumber;
-import org.pofk.exact.Decimals;
 import org.pofk.meaning.Decision;
 import org.pofk.meaning.ExponentialSum;
 import org.pofk.meaning.Fit;
@@ -44,9 +42,10 @@ final class JudgedPart {
             return steps.areExact(claimed, truth) == Decision.YES
                     || Approximation.of(claimed, truth, steps, claim).holds() == Decision.YES;
         }
-        return Refutation.of(claimed, truth, steps, FIRST_STEPS).isEmpty()
+        return Refutation.of(Loosened.of(claimed), truth, steps, FIRST_STEPS).isEmpty()
                 && (steps.areExact(claimed, truth) == Decision.YES
-                || isRounded(ModeEquations.of(claimed, truth, steps)));
+                || isRounded(ModeEquations.of(claimed, truth, steps)) && claim.safeSide().filter(side ->
+                SafeSide.of(claimed, truth, steps.range(), side).holds() != Decision.YES).isEmpty());
     }
 
     private static boolean isRounded(ModeEquations modes) {
@@ -57,7 +56,7 @@ final class JudgedPart {
         if (claim.within().isPresent()) {
             return approximate();
         }
-        OptionalLong refuted = Refutation.of(claimed, truth, steps, FIRST_STEPS);
+        OptionalLong refuted = Refutation.of(Loosened.of(claimed), truth, steps, FIRST_STEPS);
         if (refuted.isEmpty()) {
             Decision exact = steps.areExact(claimed, truth);
             if (exact == Decision.YES) {
@@ -69,7 +68,7 @@ final class JudgedPart {
         if (refuted.isEmpty() && modes.fits() && numbers.rounded() != Decision.NO) {
             return rounded(modes, numbers, numbers.rounded() == Decision.YES ? Verdict.ROUNDED : Verdict.UNDECIDED);
         }
-        return wrong(modes, numbers, refuted);
+        return wrong(modes, numbers);
     }
 
     private Judgement exact() {
@@ -86,21 +85,24 @@ final class JudgedPart {
     private Judgement rounded(ModeEquations modes, RightNumbers numbers, Verdict verdict) {
         List<JudgedNumber> judged = numbers.judged();
         List<String> remarks = new ArrayList<>();
-        String cutOff = judged.stream().filter(number -> number.fit() == Fit.CUT_OFF)
-                .map(number -> number.written().text()).collect(Collectors.joining(", "));
-        if (!cutOff.isEmpty()) {
-            remarks.add("cut off instead of rounded: " + cutOff);
-        }
+        judged.stream().filter(number -> number.fit() == Fit.CUT_OFF).forEach(number ->
+                remarks.add(number.written().text() + " is cut off, not rounded: " + number.right()));
         LargestError largest = LargestError.of(claimed, truth, steps.range());
         largest.remark().ifPresent(remarks::add);
         RoundedPoles.remark(claimed, modes, truth, steps).ifPresent(remarks::add);
-        return new Judgement(verdict, largest.difference(Measure.ABSOLUTE), OptionalLong.empty(), judged, remarks,
+        Optional<SafeSide> unsafe = safeSide().filter(side -> side.holds() == Decision.NO);
+        unsafe.ifPresent(side -> remarks.add(side.told(claim.safeSide().orElseThrow())));
+        return new Judgement(unsafe.isPresent() ? Verdict.WRONG : verdict, largest.difference(Measure.ABSOLUTE),
+                unsafe.map(SafeSide::step).orElse(OptionalLong.empty()), judged, remarks,
                 MendedFormula.of(text, judged));
     }
 
-    private Judgement wrong(ModeEquations modes, RightNumbers numbers, OptionalLong refuted) {
-        OptionalLong first = refuted.isPresent() ? refuted
-                : Refutation.of(claimed, truth, steps, MORE_STEPS);
+    private Optional<SafeSide> safeSide() {
+        return claim.safeSide().map(side -> SafeSide.of(claimed, truth, steps.range(), side));
+    }
+
+    private Judgement wrong(ModeEquations modes, RightNumbers numbers) {
+        OptionalLong first = Refutation.of(claimed, truth, steps, MORE_STEPS);
         LargestError largest = LargestError.of(claimed, truth, steps.range());
         List<String> remarks = new ArrayList<>();
         largest.remark().ifPresent(remarks::add);
@@ -121,10 +123,5 @@ final class JudgedPart {
         String right = verdict == Verdict.APPROXIMATE ? text.text() : RightFormula.ofTruth(text, truth);
         return new Judgement(verdict, approximation.difference(), approximation.firstWrongStep(), List.of(),
                 approximation.remarks(), right);
-    }
-
-    /** To so many significant digits. */
-    static String shown(org.pofk.exact.Rational value, int digits) {
-        return Decimals.of(value, digits).text();
     }
 }

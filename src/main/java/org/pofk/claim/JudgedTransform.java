@@ -5,7 +5,6 @@ import java.util.List;
 import java.util.Optional;
 import java.util.OptionalLong;
 import org.pofk.claim.Judgement.JudgedNumber;
-import org.pofk.exact.NotSeparatedException;
 import org.pofk.exact.Polynomial;
 import org.pofk.exact.Rational;
 import org.pofk.formula.Formula;
@@ -24,7 +23,6 @@ import org.pofk.text.RefusedException;
  */
 final class JudgedTransform {
     private static final String VARIABLE = "z";
-    private static final int BITS = 96;
     private static final List<Rational> POINTS = List.of(Rational.of(2), Rational.of(5), Rational.of(-3),
             Rational.of(13, 10), Rational.of(101, 100), Rational.of(-11, 10));
 
@@ -48,9 +46,13 @@ final class JudgedTransform {
     }
 
     /** Whether it is right, at less cost than the judgement where it is not. */
-    static boolean isRight(Statement.TransformOf stated, Claim claim, Truth truth) throws RefusedException {
-        JudgedTransform judged = read(stated, claim, truth);
-        return !judged.isRefuted() && (judged.isExact() == Decision.YES || judged.isRounded());
+    static boolean isRight(Statement.TransformOf stated, Claim claim, Truth truth) {
+        try {
+            JudgedTransform judged = read(stated, claim, truth);
+            return !judged.isRefuted() && (judged.isExact() == Decision.YES || judged.isRounded());
+        } catch (RefusedException unreadable) {
+            return false;
+        }
     }
 
     private static JudgedTransform read(Statement.TransformOf stated, Claim claim, Truth truth)
@@ -91,14 +93,9 @@ final class JudgedTransform {
 
     /** Whether no numbers that the decimals stand for give the true value at some point. */
     private boolean isRefuted() {
-        return POINTS.stream().anyMatch(z -> {
-            try {
-                return !target.fraction().denominator().valueAt(z).isZero() && !form.valueAt(Quantity.of(z))
-                        .spread(BITS).overlaps(target.valueAt(z).enclose(BITS));
-            } catch (NotSeparatedException besideAPole) {
-                return false;
-            }
-        });
+        RationalForm loosened = Loosened.of(form);
+        return POINTS.stream().filter(z -> !target.fraction().denominator().valueAt(z).isZero())
+                .anyMatch(z -> !Spread.mayBe(loosened.valueAt(Quantity.of(z)), target.valueAt(z)));
     }
 
     /** Two fractions are the same when they agree at more points than the degree of their difference's numerator. */

@@ -74,7 +74,7 @@ record LargestError(Kind kind, Rational atLeast, Optional<Rational> upTo, Option
         return switch (kind) {
             case REACHED, APPROACHED -> Optional.empty();
             case AT_MOST -> Optional.of("the largest error is a bound: it may be smaller");
-            case UNBOUNDED -> Optional.of("the error grows beyond every bound");
+            case UNBOUNDED -> Optional.of("the error is beyond every bound");
             case NOT_DECIDED -> Optional.of("no bound on the error was found");
         };
     }
@@ -107,6 +107,7 @@ record LargestError(Kind kind, Rational atLeast, Optional<Rational> upTo, Option
         /** No error looked at is more. */
         private BigInteger most = BigInteger.ZERO;
         private boolean blind;
+        private boolean infinite;
 
         Search(EnclosedError error, long lastImpulse, Claim.Steps steps) {
             this.error = error;
@@ -117,7 +118,7 @@ record LargestError(Kind kind, Rational atLeast, Optional<Rational> upTo, Option
 
         /** Whether the precision was enough to tell the size. */
         boolean isSharp() {
-            return !blind && (most.signum() == 0 || most.bitLength() > error.bits() / 4);
+            return infinite || !blind && (most.signum() == 0 || most.bitLength() > error.bits() / 4);
         }
 
         LargestError result() {
@@ -126,7 +127,7 @@ record LargestError(Kind kind, Rational atLeast, Optional<Rational> upTo, Option
             }
             long next = goThroughFirst();
             if (blind) {
-                return without(Kind.NOT_DECIDED);
+                return without(infinite ? Kind.UNBOUNDED : Kind.NOT_DECIDED);
             }
             return next < 0 ? told(reached) : halve(next);
         }
@@ -151,7 +152,7 @@ record LargestError(Kind kind, Rational atLeast, Optional<Rational> upTo, Option
             }
             long end = Math.max(steps.from() + STEPS, Math.min(lastImpulse + 1, steps.from() + 4L * STEPS));
             long check = Math.max(steps.from() + 4, lastImpulse + 1);
-            for (long k = steps.from(); k < end; k++) {
+            for (long k = steps.from(); k < end && !blind; k++) {
                 if (steps.to().isPresent() && k > steps.to().getAsLong()) {
                     return -1;
                 }
@@ -170,6 +171,7 @@ record LargestError(Kind kind, Rational atLeast, Optional<Rational> upTo, Option
             Optional<Ball> value = error.at(k);
             if (value.isEmpty()) {
                 blind = true;
+                infinite |= error.isInfiniteAt(k);
                 return;
             }
             Ball size = value.get().roundedTo(error.bits());

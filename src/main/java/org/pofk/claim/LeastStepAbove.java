@@ -80,7 +80,7 @@ record LeastStepAbove(OptionalLong step, boolean decided) {
         private boolean isAbove(long k) {
             for (int bits = FIRST_BITS; bits <= MOST_BITS; bits *= 2) {
                 Optional<Ball> size = (bits == FIRST_BITS ? error : curve.enclose(bits)).at(k);
-                if (size.isPresent() && size.get().lower().compareTo(bound) > 0) {
+                if (size.isEmpty() && error.isInfiniteAt(k) || size.isPresent() && size.get().lower().compareTo(bound) > 0) {
                     return true;
                 }
                 if (size.isPresent() && size.get().upper().compareTo(bound) <= 0) {

@@ -2,7 +2,6 @@ package org.pofk.claim;
 
 import java.util.List;
 import java.util.Optional;
-import org.pofk.exact.Ball;
 import org.pofk.meaning.Equation;
 import org.pofk.meaning.ExponentialSum.Term;
 
@@ -14,8 +13,6 @@ import org.pofk.meaning.ExponentialSum.Term;
  * @param terms the terms it is about; none where a mode is missing
  */
 record ModeEquation(About about, Optional<TruePole> pole, long power, List<Term> terms, Equation equation) {
-    private static final int BITS = 96;
-
     /** What of a mode is meant. */
     enum About {
         BASE, ANGLE, COEFFICIENT, PHASE,
@@ -31,7 +28,6 @@ record ModeEquation(About about, Optional<TruePole> pole, long power, List<Term>
 
     /** Whether no numbers that the decimals stand for make it hold. Certified when true. */
     boolean isRefuted() {
-        Ball written = equation.written().spread(BITS).real();
-        return !written.overlaps(equation.right().enclose(BITS).real());
+        return !Spread.mayBe(equation.written(), equation.right());
     }
 }

@@ -20,8 +20,6 @@ import org.pofk.meaning.WrittenNumber;
  *                decimal that serves in several equations has to be right in each, not with one value in all
  */
 record RightNumbers(List<Equation> equations, Solution solution, Decision rounded) {
-    private static final int BITS = 96;
-
     static RightNumbers of(List<Equation> equations) {
         Solution solution = Equations.solve(equations);
         return new RightNumbers(List.copyOf(equations), solution, rounded(equations, solution));
@@ -34,22 +32,17 @@ record RightNumbers(List<Equation> equations, Solution solution, Decision rounde
         Map<Written, Quantity> loosened = new HashMap<>();
         solution.numbers().forEach((written, number) -> {
             if (number.fit() == Fit.CUT_OFF) {
-                loosened.put(written, Quantity.of(new Written(written.text(), written.value(),
-                        written.lastPlace().plus(written.lastPlace()), written.span())));
+                loosened.put(written, Loosened.of(written));
             }
         });
         for (int failing : solution.failing()) {
             Equation equation = equations.get(failing);
             if (equation.written().decimals().isEmpty()
-                    || !mayHold(equation.written().with(loosened), equation.right())) {
+                    || !Spread.mayBe(equation.written().with(loosened), equation.right())) {
                 return Decision.NO;
             }
         }
         return solution.failing().isEmpty() ? solution.holds() : Decision.YES;
-    }
-
-    private static boolean mayHold(Quantity written, Quantity right) {
-        return written.spread(BITS).overlaps(right.enclose(BITS));
     }
 
     /** Whether right decimals in place of the written ones make the statement true. */
@@ -59,7 +52,7 @@ record RightNumbers(List<Equation> equations, Solution solution, Decision rounde
             Quantity written = equation.written().with(right);
             return written.decimals().isEmpty()
                     ? written.minus(equation.right()).isZero() == Decision.YES
-                    : mayHold(written, equation.right());
+                    : Spread.mayBe(written, equation.right());
         });
     }
 

@@ -87,7 +87,7 @@ final class RootMatching {
         for (int power = factor.degree(); power >= 0; power--) {
             value = value.times(zero.value()).plus(factor.coefficients().get(power));
         }
-        return value.spread(BITS).containsZero();
+        return Spread.mayBe(value, Quantity.ZERO);
     }
 
     /** How near the nearest zero is to one of a factor. */

@@ -28,6 +28,12 @@ record SafeSide(Decision holds, OptionalLong step) {
         return new Search(claimed, truth, steps, side).result();
     }
 
+    /** Where it doesn't hold, in one sentence. */
+    String told(Claim.SafeSide side) {
+        return "at k = " + step.getAsLong() + " it lies " + (side == Claim.SafeSide.ABOVE ? "below" : "above")
+                + " the true value";
+    }
+
     private static final class Search {
         private final ExponentialSum claimed;
         private final OutputTruth truth;

@@ -84,11 +84,17 @@ final class WrittenFormulas {
                     + " + " + number(pole.phase(p)) + ")";
             case DEGREES -> number(pole.amplitude(p)) + size + "*cos(" + degrees(pole.angle()) + "*" + steps
                     + " + " + degrees(pole.phase(p)) + ")";
-            case COSINE_AND_SINE -> "1" + size + "*(" + number(doubled.realPart()) + "*cos(" + number(pole.angle())
-                    + "*" + steps + ") + " + number(doubled.imaginaryPart().negate()) + "*sin("
-                    + number(pole.angle()) + "*" + steps + "))";
+            case COSINE_AND_SINE -> "1" + size + "*(" + String.join(" + ", List.of(
+                    turning(doubled.realPart(), "cos", pole, steps),
+                    turning(doubled.imaginaryPart().negate(), "sin", pole, steps)).stream()
+                    .filter(part -> !part.isEmpty()).toList()) + ")";
             case COMPLEX -> complex(pole, p, "+") + " + " + complex(pole, p, "-");
         };
+    }
+
+    private String turning(Quantity coefficient, String function, TruePole pole, String steps) {
+        return coefficient.isZero() == Decision.YES ? ""
+                : number(coefficient) + "*" + function + "(" + number(pole.angle()) + "*" + steps + ")";
     }
 
     private String complex(TruePole pole, int p, String sign) {
