@@ -212,4 +212,40 @@ class JudgedFormulaTest {
                 .map(Judgement.JudgedNumber::right).toList());
         assertEquals("0.008176 - 0.01726*0.4508^k + 0.009084*0.2317^k", judgement.right());
     }
+
+    @Test
+    void formulasOfAllStatesSumToOneOrThatIsSaid() {
+        Truth truth = Truth.of(Models.pattern("pump-pair"));
+        Judgement right = all(truth, "");
+        assertEquals(Verdict.ROUNDED, right.verdict(), right::toString);
+        Judgement wrong = all(truth, " + 0.01");
+        assertEquals(Verdict.WRONG, wrong.verdict());
+        assertTrue(wrong.remarks().contains("the probabilities over all states don't sum to one at k = 0"),
+                wrong::toString);
+    }
+
+    /** All states, the last with something added. */
+    private static Judgement all(Truth truth, String added) {
+        List<Output> states = Outputs.states(truth.chain());
+        List<Statement.PofK.Part> parts = new ArrayList<>();
+        for (Output state : states) {
+            String text = WrittenFormulas.of(truth.about(state), WrittenFormulas.Notation.POLAR, 5);
+            parts.add(new Statement.PofK.Part(state, WrittenFormulas.parsed(
+                    parts.size() == states.size() - 1 ? text + added : text)));
+        }
+        return Judging.of(new Claim(1, "formula", "all", new Statement.PofK(parts), Optional.empty(), Claim.Steps.ALL,
+                Optional.empty(), Optional.empty(), Optional.empty(), Optional.empty(),
+                new Position("claims.yaml", 1, 1)), truth);
+    }
+
+    @Test
+    void theModesThatDifferAreTold() throws RefusedException {
+        Case wrong = pumps("0.008176 - 0.01726*0.4805^k + 0.009084*0.2317^k");
+        Statement.PofK.Part part = new Statement.PofK.Part(wrong.output, WrittenFormulas.parsed(wrong.text));
+        List<ModeDifferences.Entry> different = ModeDifferences.of(claim(wrong.output, wrong.text, Claim.Steps.ALL,
+                Optional.empty(), Optional.empty()), part, wrong.truth).different();
+        assertEquals(1, different.size(), different::toString);
+        assertEquals(ModeDifferences.Difference.BASE, different.get(0).difference());
+        assertEquals(1, different.get(0).terms().size());
+    }
 }
