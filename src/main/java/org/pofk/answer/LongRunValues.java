@@ -4,11 +4,11 @@ import java.util.List;
 import org.pofk.exact.Rational;
 
 /** The values a long run takes in turn: one for a limit, a whole period for a cycle, none where there is neither. */
-final class LongRunValues implements LongRun.Visitor<List<Rational>> {
+public final class LongRunValues implements LongRun.Visitor<List<Rational>> {
     private LongRunValues() {
     }
 
-    static List<Rational> of(LongRun longRun) {
+    public static List<Rational> of(LongRun longRun) {
         return longRun.accept(new LongRunValues());
     }
 

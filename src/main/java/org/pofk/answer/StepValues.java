@@ -9,7 +9,7 @@ import org.pofk.exact.Rational;
 import org.pofk.modes.ClosedForm;
 
 /** Values of outputs at given steps: exact by stepping as far as that is quick, certified from the modes beyond. */
-final class StepValues {
+public final class StepValues {
     /** A longer fraction is read by nobody, and reducing it takes the square of its length. */
     private static final long BITS_AT_MOST = 10_000;
     /** Steps times entries times what an entry costs, in machine words of a number: a second or less. */
@@ -20,7 +20,7 @@ final class StepValues {
     }
 
     /** One list for each closed form, in their order, each by ascending step. */
-    static List<List<StepValue>> of(Chain chain, List<ClosedForm> closedForms, List<Integer> steps) {
+    public static List<List<StepValue>> of(Chain chain, List<ClosedForm> closedForms, List<Integer> steps) {
         List<Integer> stepped = stepped(chain, steps);
         ExactSteps exact = ExactSteps.at(chain,
                 closedForms.stream().map(each -> each.transform().output()).toList(), stepped);

@@ -30,6 +30,8 @@ public record Document(List<Block> blocks) {
         R table(Table table);
 
         R excerpt(Excerpt excerpt);
+
+        R figure(Figure figure);
     }
 
     /** A heading, level 1 the highest. */
@@ -153,6 +155,14 @@ public record Document(List<Block> blocks) {
         @Override
         public <R> R accept(Visitor<R> visitor) {
             return visitor.excerpt(this);
+        }
+    }
+
+    /** A drawing; a format that has none says in words what is seen. */
+    public record Figure(Prose caption, Chart chart) implements Block {
+        @Override
+        public <R> R accept(Visitor<R> visitor) {
+            return visitor.figure(this);
         }
     }
 }

@@ -149,6 +149,11 @@ public final class LatexWriter {
         }
 
         @Override
+        public List<String> figure(Document.Figure figure) {
+            return List.of("", LatexSpelling.of(figure.caption()), "", LatexSpelling.of(figure.chart().alternative()));
+        }
+
+        @Override
         public List<String> table(Document.Table table) {
             List<String> lines = new ArrayList<>(List.of(""));
             if (!table.caption().isEmpty()) {

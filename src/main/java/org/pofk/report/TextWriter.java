@@ -161,6 +161,16 @@ public record TextWriter(Alphabet alphabet, Charset charset, int width) {
                     .map(each -> " ".repeat(2 * INDENT) + each).toList();
         }
 
+        /** What is seen, in words: a picture of characters is read by nobody, least of all aloud. */
+        @Override
+        public List<String> figure(Document.Figure figure) {
+            List<String> lines = new ArrayList<>(Wrapping.lines(spelling.of(Prose.of("Figure: ").and(figure.caption())),
+                    width));
+            Wrapping.lines(spelling.of(figure.chart().alternative()), width - INDENT)
+                    .forEach(each -> lines.add(" ".repeat(INDENT) + each));
+            return lines;
+        }
+
         @Override
         public List<String> table(Document.Table table) {
             List<String> lines = new ArrayList<>();
