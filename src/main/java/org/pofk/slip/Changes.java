@@ -79,7 +79,7 @@ final class Changes {
         FormulaSurvey survey = FormulaSurvey.of(text.tree());
         List<Edit> edits = new ArrayList<>(new SignEdits(text).of(survey));
         edits.addAll(ofKind(part, text, survey));
-        edits.addAll(new NumberEdits(text).of(survey, constant -> right(part, text, constant)));
+        edits.addAll(new NumberEdits(text).of(survey, constant -> right(part, text, survey, constant)));
         return edits.stream().map(edit -> change(part, edit)).toList();
     }
 
@@ -125,7 +125,7 @@ final class Changes {
     }
 
     /** Right numbers for a place: what the judgement found, what the right statement is made of, what would solve it. */
-    private List<String> right(int part, AuthorText text, Constant constant) {
+    private List<String> right(int part, AuthorText text, FormulaSurvey survey, Constant constant) {
         String found = text.text(constant.node());
         AuthorNotation notation = AuthorNotation.of(text.notation());
         Set<String> right = new LinkedHashSet<>();
@@ -139,7 +139,9 @@ final class Changes {
         }
         screens.get(part).ifPresent(screen -> SolvedNumbers.of(text, constant.node(), screen)
                 .forEach(number -> right.addAll(number.inPlaceOf(found, digits, notation))));
-        return new ArrayList<>(right);
+        boolean partOfFraction = constant.isLiteral() && survey.fractions().stream()
+                .anyMatch(fraction -> fraction.node().nodes().anyMatch(node -> node == constant.node()));
+        return right.stream().filter(number -> !partOfFraction || !number.contains("/")).toList();
     }
 
     /** The change of one text; where two poles are written as one with ±, of both. */

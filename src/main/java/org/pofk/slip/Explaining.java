@@ -61,7 +61,7 @@ final class Explaining {
                 .filter(each -> budget.screening() && mayBeTrue(each) && isRight(each)).toList();
         models.stream().filter(model -> found.stream().noneMatch(each -> each.kind() == model.kind()))
                 .forEach(found::add);
-        List<Slip> slips = found.stream().sorted(Comparator.comparing(Candidate::kind)).map(Candidate::slip).toList();
+        List<Slip> slips = Told.of(found, parts).stream().map(Candidate::slip).toList();
         return slips.isEmpty() ? together(changes) : new Explanation(slips, false, models, Optional.empty());
     }
 

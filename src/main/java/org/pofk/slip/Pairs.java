@@ -4,9 +4,9 @@ import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
-import java.util.function.IntFunction;
 import org.pofk.claim.FormulaText;
-import org.pofk.meaning.Quantity;
+import org.pofk.exact.Ball;
+import org.pofk.exact.Rational;
 
 /**
  * Pairs of changes of one formula whose effects at a few points add up to what it is off by: changes in different terms
@@ -51,7 +51,7 @@ final class Pairs {
         if (own.isEmpty()) {
             return List.of();
         }
-        List<Double> right = screen.truth().stream().map(value -> value.approximate()).toList();
+        List<Double> right = screen.probe().right().stream().map(value -> value.approximate()).toList();
         List<Double> open = open(screen, text);
         List<Seen> seen = new ArrayList<>();
         for (Change change : changes) {
@@ -89,31 +89,18 @@ final class Pairs {
     }
 
     private static List<Double> open(Screen screen, AuthorText text) {
-        List<Double> open = new ArrayList<>();
-        IntFunction<Quantity> values = text.read(text.text()).flatMap(screen.probe()::read).orElseThrow();
-        for (int i = 0; i < screen.truth().size(); i++) {
-            try {
-                open.add(values.apply(i).spread(BITS).real().radius().doubleValue()
-                        * Math.pow(2, -values.apply(i).spread(BITS).real().scale()));
-            } catch (ArithmeticException unusable) {
-                open.add(0.0);
-            }
-        }
-        return open;
+        return text.read(text.text()).stream().flatMap(read -> screen.open(read).stream())
+                .map(open -> open.map(Rational::approximate).orElse(0.0)).toList();
     }
 
     private static Optional<List<Double>> values(Screen screen, FormulaText text) {
-        Optional<IntFunction<Quantity>> read = screen.probe().read(text);
-        if (read.isEmpty()) {
-            return Optional.empty();
-        }
         List<Double> values = new ArrayList<>();
-        for (int i = 0; i < screen.truth().size(); i++) {
-            try {
-                values.add(read.get().apply(i).enclose(BITS).real().middle().approximate());
-            } catch (ArithmeticException unusable) {
+        for (int i = 0; i < screen.probe().points().size(); i++) {
+            Optional<Ball> value = screen.probe().faceValue(text, i, BITS);
+            if (value.isEmpty()) {
                 return Optional.empty();
             }
+            values.add(value.get().middle().approximate());
         }
         return Optional.of(values);
     }

@@ -3,13 +3,13 @@ package org.pofk.slip;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import java.util.function.IntFunction;
 import org.pofk.claim.FormulaText;
 import org.pofk.exact.Ball;
+import org.pofk.exact.ComplexBall;
+import org.pofk.exact.NotSeparatedException;
 import org.pofk.exact.Rational;
 import org.pofk.formula.ParsedFormula;
-import org.pofk.meaning.Precision;
-import org.pofk.meaning.Quantity;
+import org.pofk.meaning.StepEvaluation;
 import org.pofk.slip.AuthorText.Replacement;
 
 /**
@@ -28,24 +28,21 @@ final class SolvedNumbers {
     /** One guess for each of the first points, the place's own value added by {@code value}. */
     static List<TrueNumber> of(AuthorText text, ParsedFormula node, Screen screen) {
         List<TrueNumber> guesses = new ArrayList<>();
-        List<Optional<IntFunction<Quantity>>> shifted = new ArrayList<>();
+        List<Optional<FormulaText>> shifted = new ArrayList<>();
         for (String other : List.of("", "+1", "+2")) {
-            shifted.add(with(text, node, other).flatMap(screen.probe()::read));
+            shifted.add(with(text, node, other));
         }
-        Optional<Ball> own = value(text, node);
+        Optional<Ball> own = value(node);
         if (own.isEmpty() || shifted.stream().anyMatch(Optional::isEmpty)) {
             return guesses;
         }
-        for (int i = 0; i < Math.min(POINTS, screen.truth().size()); i++) {
+        for (int i = 0; i < Math.min(POINTS, screen.probe().points().size()); i++) {
             int point = i;
-            try {
-                List<Ball> values = shifted.stream()
-                        .map(each -> each.orElseThrow().apply(point).enclose(BITS).real()).toList();
-                step(values, Ball.of(screen.truth().get(i), BITS)).map(own.get()::plus).map(SolvedNumbers::number)
-                        .ifPresent(guesses::add);
-            } catch (ArithmeticException unusable) {
-                // a pole at this point, or the number doesn't matter there
-                continue;
+            List<Optional<Ball>> values = shifted.stream()
+                    .map(each -> screen.probe().faceValue(each.orElseThrow(), point, BITS)).toList();
+            if (values.stream().allMatch(Optional::isPresent)) {
+                step(values.stream().map(Optional::get).toList(), Ball.of(screen.probe().right().get(i), BITS))
+                        .map(own.get()::plus).map(SolvedNumbers::number).ifPresent(guesses::add);
             }
         }
         return guesses;
@@ -56,20 +53,23 @@ final class SolvedNumbers {
         return text.with(List.of(new Replacement(AuthorText.start(node), AuthorText.end(node), changed)));
     }
 
-    /** The value that stands there, read as a formula in k without k. */
-    private static Optional<Ball> value(AuthorText text, ParsedFormula node) {
-        return text.read(text.text(node)).flatMap(read -> ConstantText.value(read, Precision.AS_WRITTEN))
-                .map(number -> number.enclose(BITS).real());
+    /** The value that stands there. */
+    private static Optional<Ball> value(ParsedFormula node) {
+        return StepEvaluation.atFaceValue(node, 0, BITS).map(ComplexBall::real);
     }
 
-    /** t. */
+    /** t; nothing where the number doesn't matter at the point. */
     private static Optional<Ball> step(List<Ball> values, Ball right) {
         Ball f0 = values.get(0);
         Ball f1 = values.get(1);
         Ball f2 = values.get(2);
-        Ball c = f1.times(2).minus(f0).minus(f2).dividedBy(f2.minus(f1).times(2));
-        Ball a = f1.times(c.plus(Ball.of(1, BITS))).minus(f0);
-        return Optional.of(f0.minus(right).dividedBy(c.times(right).minus(a)));
+        try {
+            Ball c = f1.times(2).minus(f0).minus(f2).dividedBy(f2.minus(f1).times(2));
+            Ball a = f1.times(c.plus(Ball.of(1, BITS))).minus(f0);
+            return Optional.of(f0.minus(right).dividedBy(c.times(right).minus(a)));
+        } catch (NotSeparatedException none) {
+            return Optional.empty();
+        }
     }
 
     private static TrueNumber number(Ball ball) {

@@ -32,6 +32,18 @@ class ReviewingTest {
     }
 
     @ParameterizedTest
+    @MethodSource("org.pofk.slip.Slipped#transforms")
+    void aSlipInATransformIsNamedFirst(Slipped slipped) {
+        isNamedFirst(slipped);
+    }
+
+    @ParameterizedTest
+    @MethodSource("org.pofk.slip.Slipped#transforms")
+    void aRightTransformHasNoSlip(Slipped slipped) {
+        hasNoSlip(slipped);
+    }
+
+    @ParameterizedTest
     @MethodSource("org.pofk.slip.Slipped#lists")
     void aSlipInAListIsNamedFirst(Slipped slipped) {
         isNamedFirst(slipped);
@@ -88,6 +100,31 @@ class ReviewingTest {
         assertEquals(OptionalInt.of(1), findings.get(1).carriedFrom());
         assertEquals(OptionalInt.of(1), findings.get(2).carriedFrom());
         assertEquals(List.of(), findings.get(2).slips());
+    }
+
+    @ParameterizedTest
+    @CsvSource(delimiter = '|', textBlock = """
+            0.008176 + 0.01726*0.4580^k + 0.009084*0.2317^k | SIGN_OF_A_TERM    | DIGITS_TRANSPOSED
+            0.008176 - 0.01762*0.4508^k + 0.009804*0.2317^k | DIGITS_TRANSPOSED | DIGITS_TRANSPOSED
+            0.008176 - 0.1726*0.4508^k - 0.009084*0.2317^k  | SIGN_OF_A_TERM    | DECIMAL_POINT_MOVED
+            """)
+    void twoSlipsInOneFormulaAreNamedTogether(String formula, SlipKind first, SlipKind second) {
+        Finding finding = reviewed("pump-pair", "{formula: lost, is: '" + formula + "'}").findings().get(0);
+        assertTrue(finding.together(), finding::toString);
+        assertEquals(List.of(first, second), finding.slips().stream().map(Slip::kind).sorted().toList());
+        finding.slips().forEach(slip ->
+                assertEquals("0.008176 - 0.01726*0.4508^k + 0.009084*0.2317^k", slip.corrected()));
+    }
+
+    @Test
+    void aFormulaFromAWrongTransformIsCarriedAndSoIsItsLongRun() {
+        List<Finding> findings = reviewed("pump-pair", "{transform: lost, is: 'z*(0.0025 z + 0.0095)/((z-1)*(z^2-0.6825 z+0.10445))'}",
+                "{formula: lost, is: '0.028441 - 0.062126*0.4508^k + 0.033685*0.2317^k'}",
+                "{long run: lost, is: 0.02844}").findings();
+        assertEquals(Verdict.WRONG, findings.get(0).verdict());
+        assertEquals(SlipKind.DECIMAL_POINT_MOVED, findings.get(0).slips().get(0).kind());
+        assertEquals(OptionalInt.of(1), findings.get(2).carriedFrom());
+        assertEquals(OptionalInt.of(1), findings.get(1).carriedFrom());
     }
 
     @Test

@@ -1,0 +1,42 @@
+package org.pofk.slip;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import org.pofk.text.Span;
+
+/**
+ * Which of the explanations found are told, simplest first: a number that is merely wrong isn't told where something
+ * more telling explains the same place, and nothing twice for a part and for what it stands in.
+ */
+final class Told {
+    private Told() {
+    }
+
+    static List<Candidate> of(List<Candidate> found, List<StatementPart> parts) {
+        List<Candidate> told = new ArrayList<>();
+        for (Candidate each : found.stream().sorted(Comparator.comparing(Candidate::kind)).toList()) {
+            boolean known = told.stream().anyMatch(other -> (isMerelyWrong(each) || each.kind() == other.kind())
+                    && isAtOnePlace(each, other, parts));
+            if (!known) {
+                told.add(each);
+            }
+        }
+        return told;
+    }
+
+    static boolean isMerelyWrong(Candidate candidate) {
+        return candidate.kind() == SlipKind.WRONG_POLE || candidate.kind() == SlipKind.WRONG_COEFFICIENT;
+    }
+
+    /** One place within the other, neither of them a whole text of several parts. */
+    private static boolean isAtOnePlace(Candidate each, Candidate other, List<StatementPart> parts) {
+        boolean whole = !each.span().equals(other.span())
+                && parts.stream().anyMatch(part -> part.text().parsed().span().equals(other.span()));
+        return !whole && (contains(each.span(), other.span()) || contains(other.span(), each.span()));
+    }
+
+    private static boolean contains(Span outer, Span inner) {
+        return outer.start().compareTo(inner.start()) <= 0 && inner.end().compareTo(outer.end()) <= 0;
+    }
+}
