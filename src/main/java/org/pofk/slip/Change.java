@@ -43,6 +43,14 @@ record Change(SlipKind kind, SortedMap<Integer, List<Replacement>> edits, Span s
         return edits.containsKey(part) ? text.with(edits.get(part)) : Optional.empty();
     }
 
+    /** Both changes as one, named as the first. */
+    Change with(Change other) {
+        SortedMap<Integer, List<Replacement>> all = new TreeMap<>();
+        List.of(this, other).forEach(change -> change.edits.forEach((part, replacements) ->
+                all.computeIfAbsent(part, each -> new ArrayList<>()).addAll(replacements)));
+        return new Change(kind, all, span, found, right);
+    }
+
     /** Whether two changes touch different stretches. */
     boolean isApartFrom(Change other) {
         return edits.entrySet().stream().noneMatch(mine -> other.edits.getOrDefault(mine.getKey(), List.of()).stream()

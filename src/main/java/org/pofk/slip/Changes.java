@@ -188,7 +188,9 @@ final class Changes {
                 if (poles && texts.get(i).isPresent() && texts.get(j).isPresent()) {
                     AuthorText a = texts.get(i).get();
                     AuthorText b = texts.get(j).get();
-                    if (!a.text().equals(b.text())) {
+                    boolean unit = claim.statement() instanceof Statement.Start
+                            && (a.text().equals("0") || b.text().equals("0"));
+                    if (!a.text().equals(b.text()) && !unit) {
                         swaps.add(swap(i, a, j, b));
                     }
                 }

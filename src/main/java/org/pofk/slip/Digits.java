@@ -40,6 +40,13 @@ final class Digits {
         return exponent < 0 ? text.length() : exponent;
     }
 
+    /** Whether two numbers differ in the place of the point alone: 0.50 and 0.05. */
+    static boolean isPointMoved(String a, String b) {
+        return new BigDecimal(a).signum() != 0 && new BigDecimal(b).signum() != 0
+                && new BigDecimal(a).stripTrailingZeros().unscaledValue()
+                        .equals(new BigDecimal(b).stripTrailingZeros().unscaledValue());
+    }
+
     /** The same digits with the point up to three places to the left or right. */
     static List<String> pointMoved(String text) {
         List<String> results = new ArrayList<>();
@@ -68,7 +75,7 @@ final class Digits {
         if (written.signum() == 0 || meant.signum() == 0 || written.compareTo(meant) == 0) {
             return Optional.empty();
         }
-        if (transposed(found).stream().anyMatch(each -> agrees(each, meant))) {
+        if (transposed(found).stream().anyMatch(each -> agrees(each, meant) && !isPointMoved(found, each))) {
             return Optional.of(SlipKind.DIGITS_TRANSPOSED);
         }
         if (pointMoved(found).stream().anyMatch(each -> agrees(each, meant))) {

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
 import java.util.function.Supplier;
 import java.util.stream.Collectors;
 import java.util.stream.IntStream;
@@ -61,6 +62,9 @@ final class Explaining {
                 .filter(each -> budget.screening() && mayBeTrue(each) && isRight(each)).toList();
         models.stream().filter(model -> found.stream().noneMatch(each -> each.kind() == model.kind()))
                 .forEach(found::add);
+        if (found.stream().allMatch(Told::isMerelyWrong)) {
+            Totals.of(claim, judgement.right(), truth).ifPresent(found::add);
+        }
         List<Slip> slips = Told.of(found, parts).stream().map(Candidate::slip).toList();
         return slips.isEmpty() ? together(changes) : new Explanation(slips, false, models, Optional.empty());
     }
@@ -126,8 +130,7 @@ final class Explaining {
     private Optional<List<Change>> inEachPart(List<Change> changes) {
         List<Change> chosen = new ArrayList<>();
         for (int part : wrongParts) {
-            Optional<Change> first = changes.stream().filter(change -> change.edits().keySet().equals(java.util.Set
-                    .of(part)) && budget.screening() && mayBeRight(change, part)).findFirst();
+            Optional<Change> first = changes.stream().filter(change -> change.edits().keySet().equals(Set.of(part)) && budget.screening() && mayBeRight(change, part)).findFirst();
             if (first.isEmpty()) {
                 return Optional.empty();
             }

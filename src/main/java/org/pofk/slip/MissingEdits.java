@@ -15,6 +15,8 @@ import org.pofk.slip.AuthorText.Replacement;
 
 /** One term of the right formula added at the end, with its numbers as the author would write them. */
 final class MissingEdits {
+    private static final int DIGITS = 6;
+
     private final AuthorText text;
     private final AuthorNotation notation;
     private final int digits;
@@ -40,16 +42,14 @@ final class MissingEdits {
     List<Edit> ofTransform(List<Mode> modes, int powerOfZ) {
         List<Edit> edits = new ArrayList<>();
         for (Mode mode : modes) {
-            mode.accept(new InZ(powerOfZ)).ifPresent(term -> edits.add(added(kind(mode), term)));
+            mode.accept(new InZ(powerOfZ)).ifPresent(term -> edits.add(added(SlipKind.TERM_MISSING, term)));
         }
         return edits;
     }
 
     private static SlipKind kind(Mode mode) {
-        if (mode.pole().isEmpty()) {
-            return SlipKind.IMPULSE_MISSING;
-        }
-        return SlipKind.TERM_MISSING;
+        return mode instanceof Mode.Impulse impulse && impulse.at() == 0
+                ? SlipKind.IMPULSE_MISSING : SlipKind.TERM_MISSING;
     }
 
     private Edit added(SlipKind kind, Formula term) {
@@ -65,7 +65,9 @@ final class MissingEdits {
             return value.exact().get();
         }
         boolean whole = value.rational().filter(Rational::isInteger).isPresent();
-        return whole ? value.exact().orElseThrow() : Formulas.decimal(value.decimal(digits == 0 ? 6 : digits).text());
+        int shown = digits == 0 ? DIGITS : digits;
+        return whole ? value.exact().orElseThrow()
+                : Formulas.decimal(TrueNumber.padded(value.decimal(shown).text(), shown));
     }
 
     /** The term in k. */

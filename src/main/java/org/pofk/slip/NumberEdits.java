@@ -34,8 +34,9 @@ final class NumberEdits {
             }
             String found = text.text(constant.node());
             if (Digits.isNumber(found)) {
-                Digits.transposed(found).forEach(other ->
-                        edits.add(edit(SlipKind.DIGITS_TRANSPOSED, constant.node(), other)));
+                Digits.transposed(found).stream()
+                        .filter(other -> !Digits.isPointMoved(found, other) || hasOtherPrecision(survey, constant))
+                        .forEach(other -> edits.add(edit(SlipKind.DIGITS_TRANSPOSED, constant.node(), other)));
                 if (new BigDecimal(found).signum() != 0) {
                     Digits.pointMoved(found).forEach(other ->
                             edits.add(edit(SlipKind.DECIMAL_POINT_MOVED, constant.node(), other)));
@@ -49,6 +50,20 @@ final class NumberEdits {
             }
         }
         return edits;
+    }
+
+    /**
+     * Whether 0.050 beside 0.333 is rather 0.500 with its digits transposed than 0.50 with the point moved: when the
+     * author writes all other numbers to as many places, or else to another number of digits.
+     */
+    private boolean hasOtherPrecision(FormulaSurvey survey, Constant constant) {
+        List<BigDecimal> others = survey.literals().stream().filter(each -> each != constant)
+                .map(each -> text.text(each.node())).filter(each -> Digits.isNumber(each) && each.contains("."))
+                .map(BigDecimal::new).toList();
+        BigDecimal own = new BigDecimal(text.text(constant.node()));
+        boolean samePlaces = others.stream().map(BigDecimal::scale).distinct().count() == 1;
+        return !others.isEmpty() && (samePlaces ? others.get(0).scale() == own.scale()
+                : others.stream().noneMatch(other -> other.precision() == own.precision()));
     }
 
     private List<Edit> replaced(Constant constant, Right right) {

@@ -107,10 +107,17 @@ record OtherChain(SlipKind kind, String found, String right, Chain chain) {
                 }
             }
         }
+        for (Model.Parameter own : model.parameters()) {
+            for (Rational rate : Rates.behind(own)) {
+                variants.with(own.name(), rate).ifPresent(chain -> others.add(new OtherChain(
+                        SlipKind.RATE_AS_PROBABILITY, own.name() + " = " + rate, own.name() + " = " + own.value(),
+                        chain)));
+            }
+        }
         return others;
     }
 
-    private static Optional<Rational> number(String text) {
+    static Optional<Rational> number(String text) {
         try {
             return Optional.of(Rational.parse(text));
         } catch (NumberFormatException symbolic) {

@@ -10,11 +10,13 @@ import org.pofk.exact.Rational;
 
 /**
  * Pairs of changes of one formula whose effects at a few points add up to what it is off by: changes in different terms
- * add, those in different factors multiply. Doubles order them; whether a pair explains anything is judged.
+ * add, those in different factors multiply, and those within one term are tried out. Doubles order them; whether a pair
+ * explains anything is judged.
  */
 final class Pairs {
     private static final int BITS = 96;
     private static final int MOST_CHANGES = 500;
+    private static final int MOST_TRIED = 4_000;
     private static final double NOISE = 1e-11;
 
     private final List<Optional<AuthorText>> texts;
@@ -71,8 +73,42 @@ final class Pairs {
                 }
             }
         }
+        scored.addAll(withinTerms(text, screen, seen));
         return scored.stream().sorted(Comparator.comparingInt(Scored::order).thenComparingDouble(Scored::miss))
                 .map(Scored::pair).toList();
+    }
+
+    /** Pairs of changes within one term, as many as the work allows. */
+    private static List<Scored> withinTerms(AuthorText text, Screen screen, List<Seen> seen) {
+        List<FormulaSurvey.Term> terms = FormulaSurvey.of(text.tree()).summands();
+        List<Scored> scored = new ArrayList<>();
+        int left = MOST_TRIED;
+        for (FormulaSurvey.Term term : terms) {
+            List<Change> own = seen.stream().map(Seen::change).filter(change -> isWithin(term, change)).toList();
+            for (int i = 0; i < own.size(); i++) {
+                for (int j = i + 1; j < own.size() && left > 0; j++) {
+                    Change a = own.get(i);
+                    Change b = own.get(j);
+                    if (a.isApartFrom(b)) {
+                        left--;
+                        boolean fits = a.with(b).textOf(text, a.edits().firstKey()).filter(screen::mayBeRight)
+                                .isPresent();
+                        if (fits) {
+                            scored.add(new Scored(List.of(a, b), 0, a.kind().ordinal() + b.kind().ordinal()));
+                        }
+                    }
+                }
+            }
+        }
+        return scored;
+    }
+
+    private static boolean isWithin(FormulaSurvey.Term term, Change change) {
+        int start = AuthorText.start(term.node());
+        int end = AuthorText.end(term.node());
+        // the sign of a term stands before it
+        return change.edits().values().stream().flatMap(List::stream)
+                .allMatch(each -> start - 2 <= each.start() && each.end() <= end);
     }
 
     /** How far both changes together leave the formula off, in units of what its decimals leave open; worst point. */

@@ -48,7 +48,7 @@ public final class Reviewing {
             return new Finding(claim, judgement, judgement.verdict(), OptionalInt.empty(), List.of(), false,
                     Optional.empty());
         }
-        OptionalInt from = Carrying.from(claim, truth, implied);
+        OptionalInt from = Carrying.from(claim, judgement, implied);
         if (from.isPresent()) {
             // what it implies is what the earlier step implies, as far as its own digits go
             implied.addAll(Implied.of(claim, new Explanation(List.of(), false, List.of(), Optional.empty()), truth)

@@ -1,5 +1,6 @@
 package org.pofk.slip;
 
+import java.math.BigDecimal;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -9,8 +10,8 @@ import org.pofk.claim.OutputTruth;
 import org.pofk.claim.Statement;
 import org.pofk.claim.TruePole;
 import org.pofk.claim.Truth;
+import org.pofk.exact.Decimals;
 import org.pofk.exact.Rational;
-import org.pofk.formula.Formula;
 import org.pofk.formula.Formulas;
 
 /** Lists with an item more or less: poles with other multiplicities, a pole missing or too many; long runs scaled. */
@@ -128,31 +129,45 @@ final class StructuralChanges {
                 Candidate.with(claim, statement), () -> truth));
     }
 
-    /** All values over their sum. */
+    /** All values over their sum: as quotients where they are exact, else in decimals, which rounding may shorten by one. */
     private void scaled(Statement.LongRunOf stated) {
         if (stated.parts().size() < 2 || stated.parts().stream().anyMatch(part -> part.values().size() != 1)) {
             return;
         }
-        List<String> texts = stated.parts().stream().map(part -> part.values().get(0).text()).toList();
-        String sum = "(" + String.join(" + ", texts.stream().map(text -> "(" + text + ")").toList()) + ")";
-        List<Statement.LongRunOf.Part> parts = new ArrayList<>();
-        for (Statement.LongRunOf.Part part : stated.parts()) {
-            Optional<FormulaText> scaled = AuthorText.of(part.values().get(0))
-                    .flatMap(text -> text.read("(" + text.text() + ")/" + sum));
-            if (scaled.isEmpty()) {
-                return;
-            }
-            parts.add(new Statement.LongRunOf.Part(part.output(), List.of(scaled.get())));
+        List<FormulaText> texts = stated.parts().stream().map(part -> part.values().get(0)).toList();
+        List<Rational> values = texts.stream().map(FaceValue::number).flatMap(Optional::stream).toList();
+        Rational sum = values.stream().reduce(Rational.ZERO, Rational::plus);
+        if (values.size() < texts.size() || sum.signum() <= 0 || sum.isOne()) {
+            return;
         }
-        String right = String.join(", ", stated.parts().stream().map(part -> right(part)).toList());
-        candidates.add(new Candidate(SlipKind.EIGENVECTOR_NOT_SCALED, OtherTruths.place(stated),
-                String.join(", ", texts), right, () -> right,
-                Candidate.with(claim, new Statement.LongRunOf(parts)), () -> truth));
+        List<Rational> shares = values.stream().map(value -> value.dividedBy(sum)).toList();
+        AuthorNotation notation = AuthorNotation.of(texts.get(0).notation());
+        int digits = texts.stream().map(FormulaText::text).filter(text -> Digits.isNumber(text) && text.contains("."))
+                .mapToInt(text -> new BigDecimal(text).precision()).max().orElse(0);
+        if (digits == 0) {
+            scaled(stated, shares.stream().map(share -> notation.write(Formulas.number(share))).toList());
+        } else {
+            for (int shown = digits; shown >= Math.max(1, digits - 1); shown--) {
+                int significant = shown;
+                scaled(stated, shares.stream().map(share -> share.isZero() ? "0"
+                        : TrueNumber.padded(Decimals.of(share, significant).text(), significant)).toList());
+            }
+        }
     }
 
-    private String right(Statement.LongRunOf.Part part) {
-        Formula value = truth.about(part.output()).longRun() instanceof org.pofk.answer.LongRun.Limit limit
-                ? Formulas.number(limit.value()) : Formulas.number(Rational.ZERO);
-        return AuthorNotation.of(part.values().get(0).notation()).write(value);
+    private void scaled(Statement.LongRunOf stated, List<String> shares) {
+        List<Statement.LongRunOf.Part> parts = new ArrayList<>();
+        for (int i = 0; i < shares.size(); i++) {
+            Statement.LongRunOf.Part own = stated.parts().get(i);
+            String share = shares.get(i);
+            AuthorText.of(own.values().get(0)).flatMap(text -> text.read(share)).ifPresent(text ->
+                    parts.add(new Statement.LongRunOf.Part(own.output(), List.of(text))));
+        }
+        String right = String.join(", ", shares);
+        if (parts.size() == shares.size()) {
+            candidates.add(new Candidate(SlipKind.EIGENVECTOR_NOT_SCALED, OtherTruths.place(stated),
+                    String.join(", ", stated.parts().stream().map(part -> part.values().get(0).text()).toList()),
+                    right, () -> right, Candidate.with(claim, new Statement.LongRunOf(parts)), () -> truth));
+        }
     }
 }

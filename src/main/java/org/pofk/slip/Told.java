@@ -3,6 +3,7 @@ package org.pofk.slip;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
+import java.util.stream.Stream;
 import org.pofk.text.Span;
 
 /**
@@ -29,10 +30,12 @@ final class Told {
         return candidate.kind() == SlipKind.WRONG_POLE || candidate.kind() == SlipKind.WRONG_COEFFICIENT;
     }
 
-    /** One place within the other, neither of them a whole text of several parts. */
+    /** One place within the other, unless the other is all of a text. */
     private static boolean isAtOnePlace(Candidate each, Candidate other, List<StatementPart> parts) {
-        boolean whole = !each.span().equals(other.span())
-                && parts.stream().anyMatch(part -> part.text().parsed().span().equals(other.span()));
+        boolean whole = !each.span().equals(other.span()) && Stream.concat(
+                parts.stream().map(part -> part.text().parsed().span()),
+                Stream.of(parts.get(0).text().parsed().span().to(parts.get(parts.size() - 1).text().parsed().span())))
+                .anyMatch(other.span()::equals);
         return !whole && (contains(each.span(), other.span()) || contains(other.span(), each.span()));
     }
 

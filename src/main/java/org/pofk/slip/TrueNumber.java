@@ -71,7 +71,15 @@ record TrueNumber(Optional<Formula> exact, Enclosed enclosure) {
         }
         String text = rational().map(value -> Decimals.fixed(value, places))
                 .orElseGet(() -> Decimals.fixed(enclosure, places)).text();
-        return Optional.of(text).filter(each -> new BigDecimal(each).signum() != 0);
+        return Optional.of(text).filter(each -> new BigDecimal(each).signum() != 0)
+                .map(each -> new BigDecimal(each).setScale(places).toPlainString());
+    }
+
+    /** A decimal with zeros at its end, for as many significant digits. */
+    static String padded(String decimal, int digits) {
+        BigDecimal value = new BigDecimal(decimal);
+        return decimal.contains("e") || value.signum() == 0 || value.precision() >= digits ? decimal
+                : value.setScale(value.scale() + digits - value.precision()).toPlainString();
     }
 
     private Optional<String> significant(int digits) {
@@ -79,7 +87,7 @@ record TrueNumber(Optional<Formula> exact, Enclosed enclosure) {
             return Optional.empty();
         }
         return Optional.of(rational().map(value -> Decimals.of(value, digits))
-                .orElseGet(() -> Decimals.of(enclosure, digits)).text());
+                .orElseGet(() -> Decimals.of(enclosure, digits)).text()).map(text -> padded(text, digits));
     }
 
     /** The most digits and places that an author writes in one claim. */

@@ -1,0 +1,83 @@
+package org.pofk.slip;
+
+import java.util.List;
+import java.util.Optional;
+import org.pofk.chain.Chain;
+import org.pofk.chain.Output;
+import org.pofk.chain.Outputs;
+import org.pofk.claim.Claim;
+import org.pofk.claim.FormulaText;
+import org.pofk.claim.Statement;
+import org.pofk.claim.Truth;
+import org.pofk.exact.Ball;
+import org.pofk.exact.ComplexBall;
+import org.pofk.exact.Decimals;
+import org.pofk.exact.Rational;
+import org.pofk.meaning.Precision;
+import org.pofk.meaning.StepEvaluation;
+
+/** Probabilities stated for every state that can't add up to one, whatever their decimals leave open. Certified. */
+final class Totals {
+    private static final int BITS = 96;
+    private static final int DIGITS = 6;
+    private static final int STEPS = 10;
+
+    private Totals() {
+    }
+
+    /** The first step at which the total isn't one; nothing where there is none, or not every state is spoken of. */
+    static Optional<Candidate> of(Claim claim, String right, Truth truth) {
+        if (truth.chain().kind() != Chain.Kind.CHAIN) {
+            return Optional.empty();
+        }
+        Precision precision = new Precision(claim.carried());
+        if (claim.statement() instanceof Statement.LongRunOf longRun
+                && isEveryState(longRun.parts().stream().map(Statement.LongRunOf.Part::output).toList(), truth)
+                && longRun.parts().stream().allMatch(part -> part.values().size() == 1)) {
+            return total(longRun.parts().stream().map(part -> part.values().get(0)).toList(), precision, 0)
+                    .map(total -> candidate(claim, "a total of " + total, right, truth));
+        }
+        if (claim.statement() instanceof Statement.Start start) {
+            return total(start.components().stream().map(Statement.Component::is).toList(), precision, 0)
+                    .map(total -> candidate(claim, "a total of " + total, right, truth));
+        }
+        if (claim.statement() instanceof Statement.PofK formula
+                && isEveryState(formula.parts().stream().map(Statement.PofK.Part::output).toList(), truth)) {
+            for (long k = claim.steps().from(); k < claim.steps().from() + STEPS; k++) {
+                long step = k;
+                Optional<String> total =
+                        total(formula.parts().stream().map(Statement.PofK.Part::is).toList(), precision, k);
+                if (total.isPresent()) {
+                    return total.map(wrong ->
+                            candidate(claim, "a total of " + wrong + " at k = " + step, right, truth));
+                }
+            }
+        }
+        return Optional.empty();
+    }
+
+    private static boolean isEveryState(List<Output> outputs, Truth truth) {
+        List<List<Rational>> stated = outputs.stream().map(Output::coefficients).toList();
+        List<List<Rational>> states = Outputs.states(truth.chain()).stream().map(Output::coefficients).toList();
+        return stated.size() == states.size() && stated.containsAll(states);
+    }
+
+    /** The total where it can't be one. */
+    private static Optional<String> total(List<FormulaText> texts, Precision precision, long k) {
+        Ball total = Ball.of(0, BITS);
+        for (FormulaText text : texts) {
+            Optional<Ball> value = StepEvaluation.spread(text.parsed(), precision, k, BITS).map(ComplexBall::real);
+            if (value.isEmpty()) {
+                return Optional.empty();
+            }
+            total = total.plus(value.get());
+        }
+        return total.contains(Rational.ONE) ? Optional.empty()
+                : Optional.of(Decimals.of(total.middle(), DIGITS).text());
+    }
+
+    private static Candidate candidate(Claim claim, String found, String right, Truth truth) {
+        return new Candidate(SlipKind.NOT_SUMMING_TO_ONE, OtherTruths.place(claim.statement()), found, "a total of 1",
+                () -> right, claim, () -> truth);
+    }
+}
