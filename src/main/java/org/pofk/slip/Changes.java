@@ -77,7 +77,9 @@ final class Changes {
         }
         AuthorText text = texts.get(part).get();
         FormulaSurvey survey = FormulaSurvey.of(text.tree());
-        List<Edit> edits = new ArrayList<>(new SignEdits(text).of(survey));
+        // the sign of a pair's angle turned is that of its phase turned
+        boolean isAngle = claim.statement() instanceof Statement.Pair && parts.get(part).name().equals("angle");
+        List<Edit> edits = new ArrayList<>(isAngle ? List.of() : new SignEdits(text).of(survey));
         edits.addAll(ofKind(part, text, survey));
         edits.addAll(new NumberEdits(text).of(survey, constant -> right(part, text, survey, constant)));
         return edits.stream().map(edit -> change(part, edit)).toList();

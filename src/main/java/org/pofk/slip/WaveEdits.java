@@ -19,6 +19,8 @@ import org.pofk.slip.FormulaSurvey.Term;
 /** What goes wrong with a conjugate pair: its amplitude, sine and cosine, degrees and radians. */
 final class WaveEdits {
     private static final int BITS = 128;
+    /** A little more than 2π. */
+    private static final Rational FULL_TURN = Rational.of(64, 10);
 
     private final AuthorText text;
     private final AuthorNotation notation;
@@ -233,6 +235,10 @@ final class WaveEdits {
         Ball factor = Ball.pi(BITS).dividedBy(Ball.of(180, BITS));
         Ball turn = direction.signum() > 0 ? factor : Ball.of(1, BITS).dividedBy(factor);
         Rational turned = turn.middle().times(Rational.of(value));
+        if (direction.signum() < 0 && part.parts().isEmpty() && turned.compareTo(FULL_TURN) > 0) {
+            // no one means an angle of many turns
+            return Optional.empty();
+        }
         MathContext digits = new MathContext(Math.max(value.precision(), 2));
         String rounded = new BigDecimal(turned.numerator()).divide(new BigDecimal(turned.denominator()), digits)
                 .toPlainString();
