@@ -29,6 +29,7 @@ final class Explaining {
     private final List<Optional<AuthorText>> texts;
     private final List<Optional<Screen>> screens;
     private final List<Integer> wrongParts;
+    private final Optional<PairScreen> pair;
     private final Budget budget = new Budget();
 
     private Explaining(Claim claim, Judgement judgement, Truth truth) {
@@ -38,6 +39,7 @@ final class Explaining {
         this.parts = StatementPart.of(claim.statement());
         this.texts = parts.stream().map(part -> AuthorText.of(part.text())).toList();
         this.screens = IntStream.range(0, parts.size()).mapToObj(part -> Screen.of(claim, part, truth)).toList();
+        this.pair = PairScreen.of(claim, truth);
         this.wrongParts = IntStream.range(0, parts.size()).filter(part -> screens.get(part)
                 .filter(screen -> !screen.mayBeRight(parts.get(part).text())).isPresent()).boxed().toList();
     }
@@ -82,7 +84,8 @@ final class Explaining {
 
     private boolean mayBeRight(Change change, int part) {
         Optional<FormulaText> text = texts.get(part).flatMap(own -> change.textOf(own, part));
-        return text.isPresent() && screens.get(part).map(screen -> screen.mayBeRight(text.get())).orElse(true);
+        return text.isPresent() && pair.map(screen -> screen.mayBeRight(part, text.get())).orElse(true)
+                && screens.get(part).map(screen -> screen.mayBeRight(text.get())).orElse(true);
     }
 
     private boolean mayBeTrue(Candidate candidate) {
@@ -106,7 +109,13 @@ final class Explaining {
     static Supplier<String> corrected(Statement statement) {
         List<StatementPart> all = StatementPart.of(statement);
         return () -> all.size() == 1 ? all.get(0).text().text()
-                : all.stream().map(part -> part.text().text()).collect(Collectors.joining(", "));
+                : all.stream().map(part -> named(statement, part)).collect(Collectors.joining(", "));
+    }
+
+    private static String named(Statement statement, StatementPart part) {
+        boolean hasNames = statement instanceof Statement.Pair || statement instanceof Statement.LongRunOf
+                || statement instanceof Statement.PofK;
+        return (hasNames ? part.name() + ": " : "") + part.text().text();
     }
 
     /** Two slips, or one in each wrong part of the statement, that explain it together. */

@@ -3,7 +3,6 @@ package org.pofk.slip;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
-import java.util.stream.Stream;
 import org.pofk.text.Span;
 
 /**
@@ -30,12 +29,10 @@ final class Told {
         return candidate.kind() == SlipKind.WRONG_POLE || candidate.kind() == SlipKind.WRONG_COEFFICIENT;
     }
 
-    /** One place within the other, unless the other is all of a text. */
+    /** One place within the other, unless the other is all of the statement. */
     private static boolean isAtOnePlace(Candidate each, Candidate other, List<StatementPart> parts) {
-        boolean whole = !each.span().equals(other.span()) && Stream.concat(
-                parts.stream().map(part -> part.text().parsed().span()),
-                Stream.of(parts.get(0).text().parsed().span().to(parts.get(parts.size() - 1).text().parsed().span())))
-                .anyMatch(other.span()::equals);
+        Span all = parts.get(0).text().parsed().span().to(parts.get(parts.size() - 1).text().parsed().span());
+        boolean whole = !each.span().equals(other.span()) && other.span().equals(all);
         return !whole && (contains(each.span(), other.span()) || contains(other.span(), each.span()));
     }
 

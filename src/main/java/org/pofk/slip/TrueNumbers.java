@@ -29,6 +29,11 @@ final class TrueNumbers {
         return statement.accept(new Kinds(part, role, truth));
     }
 
+    /** Those of one role in the modes of the output that a statement is about. */
+    static List<TrueNumber> ofRole(Statement statement, Role role, Truth truth) {
+        return Outcomes.only(statement).map(output -> new Kinds(0, role, truth).modes(output, role)).orElse(List.of());
+    }
+
     /** What an output's modes are made of. */
     private record ModeNumbers(Role role, List<TrueNumber> found) implements Mode.Visitor<Boolean> {
         private boolean add(RealValue value) {

@@ -127,6 +127,22 @@ class ReviewingTest {
         assertEquals(OptionalInt.of(1), findings.get(1).carriedFrom());
     }
 
+    @ParameterizedTest
+    @CsvSource(delimiter = '|', textBlock = """
+            60 deg | 1.0583  | -19.107 deg | SIGN_OF_THE_PHASE
+            60     | 1.0583  | 19.107 deg  | DEGREES_AS_RADIANS
+            60 deg | 0.52915 | 19.107 deg  | PAIR_NOT_DOUBLED
+            60 deg | 2.1166  | 19.107 deg  | PAIR_DOUBLED_TWICE
+            60 deg | 1.0538  | 19.107 deg  | DIGITS_TRANSPOSED
+            66 deg | 1.0583  | 19.107 deg  | WRONG_POLE
+            """)
+    void aSlipInAPairIsTheOnlyOneNamed(String angle, String amplitude, String phase, SlipKind kind) {
+        Finding finding = reviewed("level-controller", "{pair: deviation, radius: 0.8, angle: " + angle
+                + ", amplitude: " + amplitude + ", phase: " + phase + "}").findings().get(0);
+        assertEquals(kind, first(finding).kind());
+        assertEquals(1, finding.slips().size(), finding.slips()::toString);
+    }
+
     @Test
     void whatADerivationLeavesOutIsSaid() {
         List<String> missing = reviewed("pump-pair", "{long run: lost, is: 0.008176}").notStated();
