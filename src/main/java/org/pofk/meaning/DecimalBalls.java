@@ -15,12 +15,20 @@ sealed interface DecimalBalls {
 
     Ball of(String text);
 
+    /** For decimals that are degrees. */
+    DecimalBalls inDegrees();
+
     /** What the digits denote. */
     record FaceValue(int scale) implements DecimalBalls {
         @Override
         public Ball of(String text) {
             BigDecimal digits = new BigDecimal(text);
             return between(digits.unscaledValue(), digits.unscaledValue(), digits.scale(), scale);
+        }
+
+        @Override
+        public DecimalBalls inDegrees() {
+            return this;
         }
     }
 
@@ -35,6 +43,11 @@ sealed interface DecimalBalls {
             BigInteger tenths = digits.unscaledValue().multiply(BigInteger.TEN);
             BigInteger half = BigInteger.valueOf(5);
             return between(tenths.subtract(half), tenths.add(half), digits.scale() + 1, scale);
+        }
+
+        @Override
+        public DecimalBalls inDegrees() {
+            return new Spread(precision.inDegrees(), scale);
         }
 
         private int carriedScale(BigDecimal digits) {

@@ -94,9 +94,11 @@ final class DirectEvaluation implements Formula.Visitor<ComplexBall> {
 
     @Override
     public ComplexBall product(Formula.Product product) {
-        ComplexBall total = product.factors().get(0).accept(this);
-        for (Formula factor : product.factors().subList(1, product.factors().size())) {
-            total = times(total, factor.accept(this));
+        boolean isAngle = product.factors().contains(Formula.Constant.DEGREE);
+        ComplexBall total = real(Ball.of(1, scale));
+        for (Formula factor : product.factors()) {
+            total = times(total, isAngle && factor instanceof Formula.WrittenDecimal decimal
+                    ? real(decimals.inDegrees().of(decimal.text())) : factor.accept(this));
         }
         return total;
     }

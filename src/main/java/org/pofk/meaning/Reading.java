@@ -37,20 +37,26 @@ final class Reading<T> {
     }
 
     private T meaning(ParsedFormula part) {
+        return meaning(part, precision);
+    }
+
+    /** @param precision that of a decimal, where this part is one */
+    private T meaning(ParsedFormula part, Precision precision) {
         try {
-            return part.formula().accept(new Part(part));
+            return part.formula().accept(new Part(part, precision));
         } catch (TooLargeException tooLarge) {
             throw RefusedPart.at(part, "formula-too-large", "is too large to be worked out: give it in fewer terms,"
                     + " smaller powers or numbers");
         }
     }
 
-    private List<T> meanings(List<ParsedFormula> parts) {
+    /** @param precision that of the decimals among these parts */
+    private List<T> meanings(List<ParsedFormula> parts, Precision precision) {
         List<T> meanings = new ArrayList<>();
         List<Fault> faults = new ArrayList<>();
         for (ParsedFormula part : parts) {
             try {
-                meanings.add(meaning(part));
+                meanings.add(meaning(part, precision));
             } catch (RefusedPart refused) {
                 faults.addAll(refused.faults());
             }
@@ -67,9 +73,17 @@ final class Reading<T> {
     /** Reads one part, its own parts by way of the reading around it. */
     private final class Part implements Formula.Visitor<T> {
         private final ParsedFormula part;
+        private final Precision ofDecimal;
 
-        Part(ParsedFormula part) {
+        Part(ParsedFormula part, Precision ofDecimal) {
             this.part = part;
+            this.ofDecimal = ofDecimal;
+        }
+
+        /** That of the decimals among the operands: a product with degrees in it is an angle. */
+        private Precision ofDecimals() {
+            return part.parts().stream().anyMatch(each -> each.formula() == Formula.Constant.DEGREE)
+                    ? precision.inDegrees() : precision;
         }
 
         private T constant(Scalar value) {
@@ -78,7 +92,7 @@ final class Reading<T> {
 
         /** By numbers where all parts are numbers, else by the algebra. */
         private T either(Function<List<Scalar>, Scalar> ofNumbers, Function<List<T>, T> ofMeanings) {
-            List<T> meanings = meanings(part.parts());
+            List<T> meanings = meanings(part.parts(), ofDecimals());
             List<Scalar> numbers = meanings.stream().map(algebra::asConstant).flatMap(Optional::stream).toList();
             return numbers.size() == meanings.size() ? constant(ofNumbers.apply(numbers)) : ofMeanings.apply(meanings);
         }
@@ -90,7 +104,7 @@ final class Reading<T> {
 
         @Override
         public T decimal(Formula.WrittenDecimal decimal) {
-            return constant(scalars.decimal(Written.of(decimal.text(), part.span(), precision)));
+            return constant(scalars.decimal(Written.of(decimal.text(), part.span(), ofDecimal)));
         }
 
         @Override
@@ -150,7 +164,7 @@ final class Reading<T> {
 
         @Override
         public T cases(Formula.Cases cases) {
-            return algebra.cases(cases, meanings(part.parts()), part);
+            return algebra.cases(cases, meanings(part.parts(), precision), part);
         }
     }
 }

@@ -121,6 +121,22 @@ class ExponentialSumTest {
         assertEquals(List.of(0L, 2L), LongStream.range(0, 9).filter(ending.scope()::includes).boxed().toList());
     }
 
+    /** Four decimals of a probability are no four decimals of a degree. */
+    @Test
+    void decimalsAreNotCarriedForDegrees() throws RefusedException {
+        Precision decimals = new Precision(Optional.of(new Carried(4, Carried.Unit.DECIMALS)));
+        Precision significant = new Precision(Optional.of(new Carried(6, Carried.Unit.SIGNIFICANT)));
+        ParsedFormula formula = FormulaParser.parse("0.5*0.3^k*cos(32.95 deg*k)", new Position("test", 1, 1));
+        assertEquals(Rational.of(1, 100), lastPlaceOfTheAngle(formula, decimals));
+        assertEquals(Rational.of(1, 10_000), lastPlaceOfTheAngle(formula, significant));
+        assertTrue(StepEvaluation.spread(formula, decimals, 1, 128).orElseThrow().real().radius().compareTo(
+                StepEvaluation.spread(formula, significant, 1, 128).orElseThrow().real().radius()) > 0);
+    }
+
+    private static Rational lastPlaceOfTheAngle(ParsedFormula formula, Precision precision) throws RefusedException {
+        return ExponentialSum.of(formula, precision).terms().get(0).angle().decimals().get(0).lastPlace();
+    }
+
     @Test
     void carriedDigitsMakeDecimalsFiner() throws RefusedException {
         Precision four = new Precision(Optional.of(new Carried(4, Carried.Unit.DECIMALS)));
