@@ -6,12 +6,12 @@ import org.pofk.exact.Rational;
 import org.pofk.transform.TransferFunction;
 
 /** Y(z) = Σ y(k) z^(−k), by long division. Exact; the degree of the denominator times the number of terms. */
-final class PowerSeries {
+public final class PowerSeries {
     private PowerSeries() {
     }
 
     /** y(0) … y(last). */
-    static List<Rational> of(TransferFunction<Rational> y, int last) {
+    public static List<Rational> of(TransferFunction<Rational> y, int last) {
         int degree = y.denominator().degree();
         List<Rational> values = new ArrayList<>();
         for (int k = 0; k <= last; k++) {

@@ -82,8 +82,8 @@ final class CheckCommand implements Work {
         }
         ReviewedClaims reviewed = outcome.published().get();
         writing.save().write(format == Format.JSON ? VerdictsJson.write(reviewed)
-                : writing.text(ReviewDocument.of(reviewed, ClaimsText.of(source.text()),
-                        "pofk " + VersionCommand.version())), streams);
+                : writing.written(ReviewDocument.of(reviewed, ClaimsText.of(source.text()),
+                        "pofk " + VersionCommand.version()), format), streams);
         return code(reviewed, outcome.finished());
     }
 

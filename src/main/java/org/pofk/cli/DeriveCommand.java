@@ -87,18 +87,19 @@ final class DeriveCommand implements Work {
         DerivedModel derived = outcome.published().get();
         writing.save().write(format == Format.JSON
                 ? DerivationJson.write(derived, style.digits())
-                : writing.text(document(derived, style)), streams);
+                : writing.written(document(derived, style), format), streams);
         return derived.isDecided() && outcome.finished() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
     }
 
     private ExitCode askedForOutputs(Model read, Style style, Format format, Streams streams)
-            throws UsageException, WritingException {
+            throws RefusedException, UsageException, WritingException {
         InspectedModel inspected = InspectedModel.of(read, List.of());
         if (format == Format.JSON) {
             streams.notes().println("pofk: " + StructureDocument.askingForOutputs(read.chain()));
             writing.save().write(StructureJson.write(CommandName.DERIVE.word(), inspected, style.digits()), streams);
         } else {
-            writing.save().write(writing.text(StructureDocument.tooLargeForAll(inspected, style)), streams);
+            writing.save().write(writing.written(StructureDocument.tooLargeForAll(inspected, style), format),
+                    streams);
         }
         return ExitCode.ANSWERED;
     }

@@ -54,7 +54,7 @@ final class InspectCommand implements Work {
         InspectedModel inspected = outcome.published().get();
         writing.save().write(format == Format.JSON
                 ? StructureJson.write(CommandName.INSPECT.word(), inspected, style.digits())
-                : writing.text(StructureDocument.of(inspected, style)), streams);
+                : writing.written(StructureDocument.of(inspected, style), format), streams);
         return outcome.finished() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
     }
 }

@@ -78,7 +78,7 @@ final class PassageCommand implements Work {
         Passage passage = outcome.published().get();
         writing.save().write(format == Format.JSON
                 ? PassageJson.write(read, chain, passage, style.digits())
-                : writing.text(PassageDocument.of(read, chain, passage, style)), streams);
+                : writing.written(PassageDocument.of(read, chain, passage, style), format), streams);
         return ExitCode.ANSWERED;
     }
 

@@ -73,7 +73,7 @@ final class SimulateCommand implements Work {
         Simulation simulation = outcome.published().get();
         writing.save().write(format == Format.JSON
                 ? SimulationJson.write(read, simulation, style.digits())
-                : writing.text(SimulationDocument.of(read, simulation, style)), streams);
+                : writing.written(SimulationDocument.of(read, simulation, style), format), streams);
         return ExitCode.ANSWERED;
     }
 }

@@ -70,7 +70,7 @@ final class WhenCommand implements Work {
         WhenModel found = outcome.published().get();
         writing.save().write(format == Format.JSON
                 ? WhenJson.write(read, found.answers().get(0), style.digits())
-                : writing.text(WhenDocument.of(found, style)), streams);
+                : writing.written(WhenDocument.of(found, style), format), streams);
         return found.isDecided() && outcome.finished() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
     }
 

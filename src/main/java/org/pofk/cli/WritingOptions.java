@@ -2,10 +2,15 @@ package org.pofk.cli;
 
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
+import java.util.Arrays;
 import java.util.Optional;
+import java.util.stream.Collectors;
 import org.pofk.report.Document;
+import org.pofk.report.HtmlWriter;
+import org.pofk.report.LatexWriter;
 import org.pofk.report.TextWriter;
 import org.pofk.text.Alphabet;
+import org.pofk.text.RefusedException;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
 
@@ -18,6 +23,9 @@ final class WritingOptions {
     @Option(names = "--plain", description = "text in ASCII characters only")
     private boolean plain;
 
+    @Option(names = "--fragment", description = "LaTeX to be put into a document of yours by \\input, not a whole one")
+    private boolean fragment;
+
     @Mixin
     private SaveOptions save = new SaveOptions();
 
@@ -27,19 +35,29 @@ final class WritingOptions {
         Optional<Format> named = file.flatMap(Format::of);
         if (file.isPresent() && named.isEmpty() && as.isEmpty()) {
             throw new UsageException("what is '" + file.get() + "' to hold? Name it with an ending of "
-                    + String.join(", ", Format.endings()) + ", or say --as text or --as json");
+                    + String.join(", ", Format.endings()) + ", or say --as " + Arrays.stream(Format.values())
+                    .map(Format::toString).collect(Collectors.joining(", ")));
         }
         if (as.isPresent() && named.isPresent() && as.get() != named.get()) {
             throw new UsageException("--as " + as.get() + " and the name '" + file.orElseThrow()
                     + "' ask for two different formats");
         }
-        return as.or(() -> named).orElse(Format.TEXT);
+        Format format = as.or(() -> named).orElse(Format.TEXT);
+        if (fragment && format != Format.LATEX) {
+            throw new UsageException("--fragment is a part of a LaTeX document; there is no --as latex");
+        }
+        return format;
     }
 
-    /** A document as text for eighty columns. */
-    String text(Document document) {
-        return (plain ? TextWriter.of(Alphabet.ASCII, StandardCharsets.UTF_8)
-                : TextWriter.of(Alphabet.UNICODE, StandardCharsets.UTF_8)).write(document);
+    /** A document in a format that shows one. */
+    String written(Document document, Format format) throws RefusedException {
+        return switch (format) {
+            case TEXT -> (plain ? TextWriter.of(Alphabet.ASCII, StandardCharsets.UTF_8)
+                    : TextWriter.of(Alphabet.UNICODE, StandardCharsets.UTF_8)).write(document);
+            case HTML -> HtmlWriter.write(document);
+            case LATEX -> fragment ? LatexWriter.fragment(document) : LatexWriter.article(document);
+            case JSON -> throw new AssertionError("JSON is written from results, not from a document");
+        };
     }
 
     SaveOptions save() {

@@ -18,14 +18,14 @@ public final class DerivationDocument {
     public static Document result(DerivedModel derived, Style style) {
         List<Block> blocks = new ArrayList<>(ModelHead.of(derived.model()));
         results(derived, style, blocks);
-        return ended(blocks);
+        return ended(blocks, derived);
     }
 
     /** The way to it alone, from the matrix to the closed form and the modes of the whole state. */
     public static Document derivation(DerivedModel derived, Style style, Convention convention) {
         List<Block> blocks = new ArrayList<>(ModelHead.of(derived.model()));
         way(derived, style, convention, WayBlocks::withClosedForm, blocks);
-        return ended(blocks);
+        return ended(blocks, derived);
     }
 
     /** The result first, then the way to it. */
@@ -33,7 +33,7 @@ public final class DerivationDocument {
         List<Block> blocks = new ArrayList<>(ModelHead.of(derived.model()));
         results(derived, style, blocks);
         way(derived, style, convention, WayBlocks::of, blocks);
-        return ended(blocks);
+        return ended(blocks, derived);
     }
 
     private static void results(DerivedModel derived, Style style, List<Block> blocks) {
@@ -61,8 +61,9 @@ public final class DerivationDocument {
         blocks.addAll(MissingBlocks.state(derived));
     }
 
-    private static Document ended(List<Block> blocks) {
+    private static Document ended(List<Block> blocks, DerivedModel derived) {
         blocks.add(new Paragraph(Caution.TEXT));
-        return new Document(blocks);
+        return new Document(blocks, derived.outputs().stream()
+                .flatMap(output -> output.transform().map(OutputSequence::of).stream()).toList());
     }
 }

@@ -1,13 +1,40 @@
 package org.pofk.report;
 
 import java.util.List;
+import org.pofk.exact.Rational;
 import org.pofk.formula.Formula;
 
-/** What is shown, in order, independent of the format it is written in. */
-public record Document(List<Block> blocks) {
+/**
+ * What is shown, in order, independent of the format it is written in.
+ *
+ * @param sequences what a writer whose readers can calculate may offer any step of
+ */
+public record Document(List<Block> blocks, List<Sequence> sequences) {
 
     public Document {
         blocks = List.copyOf(blocks);
+        sequences = List.copyOf(sequences);
+    }
+
+    public Document(List<Block> blocks) {
+        this(blocks, List.of());
+    }
+
+    /**
+     * A sequence as the recurrence it satisfies: y(k+d) = −Σ recurrence_i · y(k+i) for every k ≥ 0. Exact.
+     *
+     * @param left       what the displays of its formulas have on their left
+     * @param recurrence the coefficients of y(k) … y(k+d−1) where that of y(k+d) is one
+     * @param first      y(0) … y(d−1)
+     */
+    public record Sequence(Prose left, List<Rational> recurrence, List<Rational> first) {
+        public Sequence {
+            recurrence = List.copyOf(recurrence);
+            first = List.copyOf(first);
+            if (recurrence.size() != first.size()) {
+                throw new IllegalArgumentException(first.size() + " values for an order of " + recurrence.size());
+            }
+        }
     }
 
     /** One block; each writer handles every variant. */

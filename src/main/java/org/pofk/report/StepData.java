@@ -1,0 +1,57 @@
+package org.pofk.report;
+
+import java.math.BigInteger;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.stream.Collectors;
+import org.pofk.exact.Rational;
+import org.pofk.report.Document.Sequence;
+
+/**
+ * A sequence in integers: y(k) = u(k) / (divisor · scale^k) with u(k + d) = Σ recurrence_i · u(k + i), so that a script
+ * gets at any y(k) exactly without a fraction on the way. Exact.
+ *
+ * @param recurrence d integers
+ * @param first      u(0) … u(d − 1)
+ */
+record StepData(BigInteger scale, BigInteger divisor, List<BigInteger> recurrence, List<BigInteger> first) {
+    /** What is longer makes the page large for few. */
+    private static final int MOST_CHARACTERS = 40_000;
+
+    /** Nothing where its numbers are too long for a page. */
+    static Optional<StepData> of(Sequence sequence) {
+        int order = sequence.first().size();
+        BigInteger scale = commonDenominator(sequence.recurrence());
+        BigInteger divisor = commonDenominator(sequence.first());
+        List<BigInteger> recurrence = new ArrayList<>();
+        List<BigInteger> first = new ArrayList<>();
+        for (int i = 0; i < order; i++) {
+            recurrence.add(whole(sequence.recurrence().get(i).negate().times(Rational.of(scale.pow(order - i)))));
+            first.add(whole(sequence.first().get(i).times(Rational.of(divisor.multiply(scale.pow(i))))));
+        }
+        StepData data = new StepData(scale, divisor, recurrence, first);
+        return data.attributes().length() <= MOST_CHARACTERS ? Optional.of(data) : Optional.empty();
+    }
+
+    private static BigInteger commonDenominator(List<Rational> numbers) {
+        return numbers.stream().map(Rational::denominator).reduce(BigInteger.ONE,
+                (a, b) -> a.divide(a.gcd(b)).multiply(b));
+    }
+
+    private static BigInteger whole(Rational number) {
+        if (!number.isInteger()) {
+            throw new AssertionError("not an integer: " + number);
+        }
+        return number.numerator();
+    }
+
+    String attributes() {
+        return " data-scale=\"" + scale + "\" data-divisor=\"" + divisor + "\" data-recurrence=\"" + list(recurrence)
+                + "\" data-first=\"" + list(first) + "\"";
+    }
+
+    private static String list(List<BigInteger> numbers) {
+        return numbers.stream().map(BigInteger::toString).collect(Collectors.joining(" "));
+    }
+}
