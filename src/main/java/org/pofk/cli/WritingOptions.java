@@ -2,9 +2,7 @@ package org.pofk.cli;
 
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
-import java.util.Arrays;
 import java.util.Optional;
-import java.util.stream.Collectors;
 import org.pofk.report.Document;
 import org.pofk.report.HtmlWriter;
 import org.pofk.report.LatexWriter;
@@ -35,8 +33,7 @@ final class WritingOptions {
         Optional<Format> named = file.flatMap(Format::of);
         if (file.isPresent() && named.isEmpty() && as.isEmpty()) {
             throw new UsageException("what is '" + file.get() + "' to hold? Name it with an ending of "
-                    + String.join(", ", Format.endings()) + ", or say --as " + Arrays.stream(Format.values())
-                    .map(Format::toString).collect(Collectors.joining(", ")));
+                    + String.join(", ", Format.endings()) + ", or say with --as");
         }
         if (as.isPresent() && named.isPresent() && as.get() != named.get()) {
             throw new UsageException("--as " + as.get() + " and the name '" + file.orElseThrow()

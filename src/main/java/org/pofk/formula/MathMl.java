@@ -1,6 +1,7 @@
 package org.pofk.formula;
 
 import java.util.List;
+import java.util.regex.Pattern;
 import java.util.stream.Collectors;
 import org.pofk.exact.Rational;
 import org.pofk.formula.Formula.Call;
@@ -24,6 +25,7 @@ import org.pofk.text.Xml;
  */
 public final class MathMl {
     private static final String TIMES = "<mo>\u2062</mo>";
+    private static final Pattern TALL = Pattern.compile("<m(frac|sqrt|under|table)");
     private static final String APPLIED = "<mo>\u2061</mo>";
 
     private MathMl() {
@@ -58,9 +60,9 @@ public final class MathMl {
         return new Piece(elements(formula), Latex.write(formula));
     }
 
-    /** The formula's terms, and what in them is wider than {@code width} digits, as pieces that follow each other. */
-    public static List<Piece> pieces(Formula formula, int width) {
-        return MathMlPieces.of(formula, width);
+    /** The formula's terms in their order, each in pieces where it is wider than {@code width} digits. */
+    public static List<List<Piece>> terms(Formula formula, int width) {
+        return MathMlPieces.terms(formula, width);
     }
 
     static String elements(Formula formula) {
@@ -72,13 +74,19 @@ public final class MathMl {
         return "<mo form=\"infix\">" + sign + "</mo>";
     }
 
+    /** Between brackets, which are stretched only where what is between them is high: that sets them apart from it. */
+    static String enclosed(String open, String elements, String close) {
+        String start = TALL.matcher(elements).find() ? "<mo>" : "<mo stretchy=\"false\">";
+        return "<mrow>" + start + open + "</mo>" + elements + start + close + "</mo></mrow>";
+    }
+
     /** How tightly a text holds together: what binds less than its place asks for is put in parentheses. */
     private enum Binding { SUM, NEGATION, ROOT_SUM, PRODUCT, POWER_OF_TEN, FRACTION, POWER, CALL, ATOM }
 
     /** Elements in a row; an atom is one element. */
     private record Part(String text, Binding binding) {
         String at(Binding least) {
-            return binding.compareTo(least) >= 0 ? text : "<mrow><mo>(</mo>" + text + "<mo>)</mo></mrow>";
+            return binding.compareTo(least) >= 0 ? text : enclosed("(", text, ")");
         }
 
         /** As one element. */
@@ -127,13 +135,10 @@ public final class MathMl {
                     + decimal(new WrittenDecimal(parts[1])).text + "</mrow></msup>", Binding.POWER_OF_TEN);
         }
 
-        /** One letter in italics, a word upright. */
+        /** One letter in italics, a word upright. (As text beside a sign, words would count as blanks.) */
         @Override
         public Part symbol(Symbol symbol) {
-            String name = Xml.escaped(symbol.name());
-            boolean isWord = symbol.name().codePointCount(0, symbol.name().length()) == 1
-                    || symbol.name().matches("[A-Za-z0-9]+");
-            return atom(isWord ? "<mi>" + name + "</mi>" : "<mtext>" + name + "</mtext>");
+            return atom("<mi>" + Xml.escaped(symbol.name().replace(' ', '\u00a0')) + "</mi>");
         }
 
         @Override
@@ -189,10 +194,11 @@ public final class MathMl {
 
         /** A dot where side by side would read as another number, a mixed fraction, or a function of an argument. */
         private static String separator(Formula before, String factor) {
-            String bare = factor.replaceFirst("^(<mrow>|<msup>)+", "");
+            String bare = factor.replaceFirst("^(<mrow>|<msup>)+", "").replace(" stretchy=\"false\"", "");
             boolean beginsWithNumber = bare.startsWith("<mn>") || bare.startsWith("<mfrac>")
                     || bare.startsWith("<mo>(</mo><mfrac>") && isPlainNumber(before);
-            boolean looksLikeArgument = before instanceof Symbol && bare.startsWith("<mo>(</mo>");
+            boolean looksLikeArgument = before instanceof Symbol && bare.startsWith("<mo>(</mo>")
+                    && !bare.startsWith("<mo>(</mo><mfrac l");
             return beginsWithNumber || looksLikeArgument ? "<mo>·</mo>" : TIMES;
         }
 
@@ -214,10 +220,11 @@ public final class MathMl {
             return new Part(switch (call.function()) {
                 case SQRT -> "<msqrt>" + argument + "</msqrt>";
                 case COS, SIN, EXP, ARCTAN, ARCCOS -> "<mi>" + Words.nameOf(call.function()) + "</mi>" + APPLIED
-                        + "<mrow><mo>(</mo>" + argument + "<mo>)</mo></mrow>";
-                case BINOMIAL -> "<mrow><mo>(</mo><mfrac linethickness=\"0\">" + write(call.arguments().get(0)).element()
-                        + write(call.arguments().get(1)).element() + "</mfrac><mo>)</mo></mrow>";
-                case DELTA -> "<mi>δ</mi><mrow><mo>[</mo>" + argument + "<mo>]</mo></mrow>";
+                        + enclosed("(", argument, ")");
+                case BINOMIAL -> enclosed("(", "<mfrac linethickness=\"0\">"
+                        + write(call.arguments().get(0)).element() + write(call.arguments().get(1)).element()
+                        + "</mfrac>", ")");
+                case DELTA -> "<mi>δ</mi>" + enclosed("[", argument, "]");
             }, Binding.CALL);
         }
 

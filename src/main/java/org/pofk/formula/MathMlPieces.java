@@ -25,7 +25,7 @@ final class MathMlPieces {
 
     static List<Piece> of(Formula formula, double width) {
         if (formula instanceof Sum sum) {
-            return terms(sum, width);
+            return terms(sum, width).stream().flatMap(List::stream).toList();
         }
         if (LatexWidth.of(formula) <= width) {
             return List.of(MathMl.write(formula));
@@ -53,19 +53,19 @@ final class MathMlPieces {
     }
 
     /** Each term with the sign before it. */
-    private static List<Piece> terms(Sum sum, double width) {
-        List<Piece> pieces = new ArrayList<>();
-        for (Formula term : sum.terms()) {
+    static List<List<Piece>> terms(Formula formula, double width) {
+        List<List<Piece>> terms = new ArrayList<>();
+        for (Formula term : formula instanceof Sum sum ? sum.terms() : List.of(formula)) {
             Optional<Formula> subtracted = subtracted(term);
-            if (pieces.isEmpty()) {
-                pieces.addAll(term instanceof Sum ? wrapped(term, width) : of(term, width));
+            if (terms.isEmpty()) {
+                terms.add(term instanceof Sum ? wrapped(term, width) : of(term, width));
             } else if (subtracted.isPresent()) {
-                pieces.addAll(behind(new Piece(MathMl.infix("−"), "- "), term(subtracted.get(), width)));
+                terms.add(behind(new Piece(MathMl.infix("−"), "- "), term(subtracted.get(), width)));
             } else {
-                pieces.addAll(behind(new Piece(MathMl.infix("+"), "+ "), term(term, width)));
+                terms.add(behind(new Piece(MathMl.infix("+"), "+ "), term(term, width)));
             }
         }
-        return pieces;
+        return terms;
     }
 
     private static List<Piece> term(Formula term, double width) {
@@ -116,10 +116,10 @@ final class MathMlPieces {
             return rootSum(sum, polynomial, width);
         }
         Piece variable = MathMl.write(sum.variable());
-        Piece polynomial = new Piece("<mi>q</mi><mo>(</mo>" + variable.elements() + "<mo>)</mo>",
+        Piece polynomial = new Piece("<mi>q</mi>" + MathMl.enclosed("(", variable.elements(), ")"),
                 "q(" + variable.latex() + ")");
         List<Piece> pieces = new ArrayList<>(rootSum(sum, polynomial, width));
-        pieces.addAll(behind(new Piece("<mtext>\u00a0with\u00a0</mtext>" + polynomial.elements() + "<mo>=</mo>",
+        pieces.addAll(behind(new Piece("<mi>\u00a0with\u00a0</mi>" + polynomial.elements() + "<mo>=</mo>",
                 "\\text{ with } " + polynomial.latex() + " = "), of(sum.polynomial(), width)));
         return pieces;
     }

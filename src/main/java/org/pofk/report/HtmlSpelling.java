@@ -18,6 +18,8 @@ final class HtmlSpelling {
     static final int NARROW = 30;
     private static final Pattern OF_A_VARIABLE = Pattern.compile("([A-Za-z]?)\\(([kz])\\)");
 
+    private static final Pattern RAISED = Pattern.compile("\\^([−-]?[0-9]+|[A-Za-z])");
+
     private HtmlSpelling() {
     }
 
@@ -25,10 +27,16 @@ final class HtmlSpelling {
         return prose.parts().stream().map(part -> part.accept(new Text())).collect(Collectors.joining());
     }
 
-    /** Pieces that follow each other, with blanks where a line may end. */
-    static String displayed(List<Piece> pieces) {
-        return pieces.stream().map(piece -> "<span class=\"piece\">" + piece.displayed() + "</span>")
-                .collect(Collectors.joining(" "));
+    /** Terms that follow each other, a line ending between them sooner than within one. */
+    static String displayed(List<List<Piece>> terms) {
+        return joined(terms.stream().map(pieces -> joined(pieces.stream().map(Piece::displayed).toList(), "piece"))
+                .toList(), "term");
+    }
+
+    /** Blanks where a line may end; a span around each where there are several. */
+    private static String joined(List<String> all, String kind) {
+        return all.size() == 1 ? all.get(0) : all.stream()
+                .map(each -> "<span class=\"" + kind + "\">" + each + "</span>").collect(Collectors.joining(" "));
     }
 
     /** Prose as mathematics: words upright, {@code Y(z)} as a function of a variable. */
@@ -39,7 +47,8 @@ final class HtmlSpelling {
     private static final class Text implements Prose.Visitor<String> {
         @Override
         public String words(Prose.Words words) {
-            return Xml.escaped(words.text().replace(" %", Spelling.NO_BREAK + "%"));
+            return RAISED.matcher(Xml.escaped(words.text().replace(" %", Spelling.NO_BREAK + "%")))
+                    .replaceAll("<sup>$1</sup>");
         }
 
         @Override
@@ -49,10 +58,8 @@ final class HtmlSpelling {
 
         @Override
         public String mathematics(Prose.Mathematics mathematics) {
-            List<Piece> pieces = MathMl.pieces(mathematics.formula(), NARROW);
-            String whole = MathMl.write(mathematics.formula()).inLine();
-            return pieces.size() == 1 ? whole : pieces.stream()
-                    .map(piece -> "<span class=\"piece\">" + piece.inLine() + "</span>").collect(Collectors.joining(" "));
+            return joined(MathMl.terms(mathematics.formula(), NARROW).stream().flatMap(List::stream)
+                    .map(Piece::inLine).toList(), "piece");
         }
     }
 
@@ -60,9 +67,10 @@ final class HtmlSpelling {
         @Override
         public String words(Prose.Words words) {
             Matcher function = OF_A_VARIABLE.matcher(words.text());
-            return !function.matches() ? "<mtext>" + Xml.escaped(words.text()).replace(' ', Spelling.NO_BREAK) + "</mtext>"
+            return !function.matches() ? "<mi>" + Xml.escaped(words.text().replace(' ', Spelling.NO_BREAK)) + "</mi>"
                     : (function.group(1).isEmpty() ? "" : "<mi>" + function.group(1) + "</mi>")
-                    + "<mrow><mo>(</mo><mi>" + function.group(2) + "</mi><mo>)</mo></mrow>";
+                    + "<mo stretchy=\"false\">(</mo><mi>" + function.group(2)
+                    + "</mi><mo stretchy=\"false\">)</mo>";
         }
 
         @Override

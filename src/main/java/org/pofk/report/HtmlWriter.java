@@ -122,14 +122,14 @@ public final class HtmlWriter {
         /** What stands left and its relation, then a piece a term; the script finds the whole in the attributes. */
         @Override
         public List<String> display(Display display) {
-            List<Piece> pieces = new ArrayList<>();
+            List<List<Piece>> pieces = new ArrayList<>();
             if (!display.left().isEmpty()) {
                 boolean isExact = display.relation() == Relation.EQUAL;
-                pieces.add(new Piece(HtmlSpelling.inMathematics(display.left()) + "<mo form=\"infix\">"
+                pieces.add(List.of(new Piece(HtmlSpelling.inMathematics(display.left()) + "<mo form=\"infix\">"
                         + (isExact ? "=" : "≈") + "</mo>",
-                        LatexSpelling.inMathematics(display.left()) + (isExact ? " =" : " \\approx")));
+                        LatexSpelling.inMathematics(display.left()) + (isExact ? " =" : " \\approx"))));
             }
-            pieces.addAll(MathMl.pieces(display.right(), HtmlSpelling.NARROW));
+            pieces.addAll(MathMl.terms(display.right(), HtmlSpelling.NARROW));
             List<String> html = new ArrayList<>(List.of("<div class=\"display\"" + extras.attributes(display) + ">",
                     "<p class=\"formula\">" + HtmlSpelling.displayed(pieces) + "</p>"));
             if (!display.condition().isEmpty()) {
@@ -137,6 +137,12 @@ public final class HtmlWriter {
             }
             html.add("</div>");
             return html;
+        }
+
+        @Override
+        public List<String> figure(Document.Figure figure) {
+            return List.of("<figure><figcaption>" + HtmlSpelling.of(figure.caption()) + "</figcaption><p>"
+                    + HtmlSpelling.of(figure.chart().alternative()) + "</p></figure>");
         }
 
         @Override
