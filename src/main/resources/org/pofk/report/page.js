@@ -147,7 +147,7 @@
   // The pieces of a formula in one element again, without their notes.
   function mathMl(display) {
     const math = Array.from(display.querySelectorAll(".formula math > semantics > mrow"))
-      .map(function (row) { return row.outerHTML; });
+      .map(function (row) { return row.outerHTML.replace(/&nbsp;/g, "\u00a0"); });
     return "<math xmlns=\"http://www.w3.org/1998/Math/MathML\" display=\"block\">" + math.join("") + "</math>";
   }
 
