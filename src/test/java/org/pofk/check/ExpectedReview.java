@@ -46,7 +46,7 @@ record ExpectedReview(Path claims, List<Line> lines) {
     /** Every derivation of the folder that has its expectation, by name. */
     static List<ExpectedReview> all() throws IOException {
         try (Stream<Path> files = Files.list(FOLDER)) {
-            List<Path> expected = files.filter(file -> file.getFileName().toString().endsWith(ENDING)).sorted().toList();
+            List<Path> expected = files.filter(file -> file.toString().endsWith(ENDING)).sorted().toList();
             return expected.stream().map(ExpectedReview::read).toList();
         }
     }
