@@ -32,7 +32,7 @@ import org.pofk.text.RefusedException;
  * it was reviewed, and every verdict and every slip must come out as it went in.
  */
 class HandDerivationsTest {
-    private static final int DERIVATIONS = 20;
+    private static final int DERIVATIONS = 40;
     private static final int SLIPS = 32;
 
     private static final Map<ExpectedReview, List<Finding>> REVIEWED = new LinkedHashMap<>();
