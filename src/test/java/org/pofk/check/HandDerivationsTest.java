@@ -67,7 +67,7 @@ class HandDerivationsTest {
         assertEquals(expected.lines().stream().map(line -> verdict(line.number(), line.verdict(),
                         line.carriedFrom().orElse(0))).toList(),
                 REVIEWED.get(expected).stream().map(finding -> verdict(finding.claim().number(), finding.verdict(),
-                        finding.carriedFrom().orElse(0))).toList());
+                        finding.carriedFrom().orElse(0))).toList(), expected.toString());
     }
 
     private static String verdict(int number, Verdict verdict, int carriedFrom) {
@@ -83,7 +83,7 @@ class HandDerivationsTest {
                 unnamed.add(line.number() + " " + kind + ", named: " + kinds(finding));
             }
         });
-        assertEquals(List.of(), unnamed);
+        assertEquals(List.of(), unnamed, expected.toString());
     }
 
     @Test
