@@ -56,13 +56,13 @@ final class FormulaSlips {
             case INDEX_SHIFTED -> shifted(random.nextBoolean() ? 1 : -1);
             case COEFFICIENTS_SWAPPED -> swapped();
             case IMPULSE_MISSING -> withoutTerm(token -> token.plain().equals("delta(k)"));
-            case TERM_MISSING -> withoutTerm(token -> token.role() == Role.SIGN && !hasImpulseAtStart(token.term()));
+            case TERM_MISSING -> withoutTerm(token -> token.role() == Role.SIGN && !isImpulseAtStart(token.term()));
             case REPEATED_POLE_AS_SIMPLE -> asSimple();
             case POWER_NOT_LOWERED -> exchangedOne(token -> token.role() == Role.EXPONENT
                     && token.plain().matches("\\(k-[1-9]\\)") && hasFactorInK(token.term()),
                     token -> Token.of(Role.EXPONENT, token.term(), "k", "{k}"));
-            case Z_LOST -> onePieceLost();
-            case Z_DOUBLED -> Optional.of(tokens.stream().map(token -> token.role() == Role.Z
+            case Z_LOST -> hasZInEveryTerm() ? onePieceLost() : Optional.empty();
+            case Z_DOUBLED -> !hasZInEveryTerm() ? Optional.empty() : Optional.of(tokens.stream().map(token -> token.role() == Role.Z
                     && token.plain().equals("z") ? Token.of(Role.Z, token.term(), "z^2", "z^{2}") : token).toList());
             case DIGITS_TRANSPOSED -> exchangedOne(FormulaSlips::hasTwoDigits, this::transposed);
             case DECIMAL_POINT_MOVED -> exchangedOne(FormulaSlips::hasTwoDigits, this::pointMoved);
@@ -129,8 +129,17 @@ final class FormulaSlips {
                 .compareTo(BigDecimal.ONE.movePointLeft(30)) < 0;
     }
 
-    private boolean hasImpulseAtStart(int term) {
-        return tokens.stream().anyMatch(token -> token.term() == term && token.plain().equals("delta(k)"));
+    /** In k an impulse at the start, in z a term that is a number alone. */
+    private boolean isImpulseAtStart(int term) {
+        boolean isTransform = tokens.stream().anyMatch(token -> token.role() == Role.POLE);
+        return isTransform ? tokens.stream().noneMatch(token -> token.term() == term && token.role() == Role.POLE)
+                : tokens.stream().anyMatch(token -> token.term() == term && token.plain().equals("delta(k)"));
+    }
+
+    /** A z is lost, or there twice, in all of a sum or not at all. */
+    private boolean hasZInEveryTerm() {
+        return tokens.stream().map(Token::term).distinct()
+                .allMatch(term -> tokens.stream().anyMatch(token -> token.term() == term && token.role() == Role.Z));
     }
 
     /** All amplitudes of the one pair there is; a pair of pairs is left alone. */

@@ -1,0 +1,86 @@
+package org.pofk.check;
+
+import static org.junit.jupiter.api.Assertions.assertAll;
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.Collections;
+import java.util.List;
+import java.util.Random;
+import org.junit.jupiter.api.Tag;
+import org.junit.jupiter.api.Test;
+import org.pofk.slip.SlipKind;
+
+/**
+ * How reliable the check is, measured: right derivations of every published case and pattern, written in many
+ * notations, and the same with slips put into their text. What is counted as wrong is proven wrong by arithmetic of
+ * these tests' own; what can't be told from a rounding isn't counted.
+ */
+class CheckMeasurementTest {
+    private static final long SEED = 20_261_201L;
+
+    @Test
+    @Tag("soak")
+    void rightClaimsPassAndSlipsAreNamed() {
+        Measurement measurement = measured(1, 10, 6);
+        measurement.write(Path.of("target", "check-measurement.txt"));
+        requireAll(measurement, 5_000);
+    }
+
+    /** The same several times over, with other choices each time. */
+    @Test
+    @Tag("soak")
+    void rightClaimsPassAndSlipsAreNamedManyTimesOver() {
+        int rounds = 6;
+        long begun = System.nanoTime();
+        Measurement measurement = measured(rounds, 19, 1);
+        long minutes = (System.nanoTime() - begun) / 60_000_000_000L;
+        measurement.write(Path.of("target", "check-measurement-soak.txt"));
+        requireAll(measurement, rounds * 5_000);
+        assertTrue(minutes <= measurement.claims() / 5_000, () -> minutes + " minutes for " + measurement.claims()
+                + " claims");
+    }
+
+    /** One claim in so many of the wrong ones; what is misread in the models of these tests is always taken. */
+    static void measure(Subject subject, int formulas, int oneIn, Random random, Measurement measurement) {
+        measurement.addRight(RightClaims.of(subject, formulas, random));
+        List<Claimed> slips = new ArrayList<>(WrongClaims.of(subject, random));
+        slips.addAll(WrongClaims.twice(subject, random));
+        slips.addAll(WrongClaims.approximations(subject, random));
+        sampled(slips, oneIn, random).forEach(measurement::addWrong);
+        List<Claimed> misread = Misreadings.of(subject, random);
+        boolean isOwn = subject.file().toString().contains("resources");
+        sampled(misread, isOwn ? 1 : oneIn, random).forEach(measurement::addWrong);
+    }
+
+    private static List<Claimed> sampled(List<Claimed> claims, int oneIn, Random random) {
+        Collections.shuffle(claims, random);
+        return claims.subList(0, (claims.size() + oneIn - 1) / oneIn);
+    }
+
+    private static Measurement measured(int rounds, int formulas, int oneIn) {
+        Measurement measurement = new Measurement();
+        for (int round = 0; round < rounds; round++) {
+            for (Subject subject : Subject.all()) {
+                Random random = new Random(SEED + 1_000L * round + subject.toString().hashCode());
+                measure(subject, formulas, oneIn, random, measurement);
+            }
+        }
+        return measurement;
+    }
+
+    private static void requireAll(Measurement measured, int claims) {
+        String figures = "\n" + measured.summary();
+        assertAll(
+                () -> assertTrue(measured.claims() >= claims, () -> measured.claims() + " claims" + figures),
+                () -> assertEquals(SlipKind.values().length, measured.kinds(), () -> "kinds of slip" + figures),
+                () -> assertEquals(0, measured.faults(), () -> "faults of the tool" + figures),
+                () -> assertEquals(0, measured.falseAlarms(), () -> "right claims not passed" + figures),
+                () -> assertEquals(0, measured.passed(), () -> "wrong claims passed" + figures),
+                () -> assertTrue(measured.namedFirstShare() >= 95, () -> "named first" + figures),
+                () -> assertTrue(measured.namedShare() >= 99, () -> "named" + figures),
+                () -> assertTrue(measured.uncountedShare() <= 10, () -> "edits not counted" + figures));
+    }
+}
