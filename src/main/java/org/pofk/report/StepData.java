@@ -17,7 +17,7 @@ import org.pofk.report.Document.Sequence;
  */
 record StepData(BigInteger scale, BigInteger divisor, List<BigInteger> recurrence, List<BigInteger> first) {
     /** What is longer makes the page large for few. */
-    private static final int MOST_CHARACTERS = 40_000;
+    private static final int MOST_CHARACTERS = 200_000;
 
     /** Nothing where its numbers are too long for a page. */
     static Optional<StepData> of(Sequence sequence) {

@@ -1,7 +1,10 @@
 "use strict";
 (function () {
-  // Steps beyond which a value has more bits than a browser works out while somebody waits.
+  // Beyond these a browser is at work for longer than somebody waits: bits of a value, and of all that are multiplied.
   const MOST_BITS = 600000;
+  const MOST_WORK = 2800000;
+  // Up to this order squaring is quicker than going step by step.
+  const SQUARED_UP_TO = 12;
   const LONGEST_FRACTION = 60;
   const DIGITS = 15;
 
@@ -42,11 +45,25 @@
     return result;
   }
 
+  function stepped(s, k) {
+    const last = s.first.slice();
+    for (let i = s.first.length; i <= k; i++) {
+      let next = 0n;
+      s.recurrence.forEach(function (c, j) { next += c * last[j]; });
+      last.shift();
+      last.push(next);
+    }
+    return last[last.length - 1];
+  }
+
   // y(k) as numerator and positive denominator, not in lowest terms.
   function value(s, k) {
     const below = s.divisor * s.scale ** BigInt(k);
     if (k < s.first.length) {
       return [s.first[k], below];
+    }
+    if (s.first.length > SQUARED_UP_TO) {
+      return [stepped(s, k), below];
     }
     const weights = power(k, s.recurrence);
     let above = 0n;
@@ -131,7 +148,8 @@
     const s = sequence(field);
     const input = field.querySelector("input");
     const output = field.querySelector("output");
-    const most = Math.min(999999999, Math.floor(MOST_BITS / Math.max(1, bits(s.scale))));
+    const most = Math.min(999999999, Math.floor(
+      Math.min(MOST_BITS, MOST_WORK / Math.max(1, s.first.length)) / Math.max(1, bits(s.scale))));
     input.addEventListener("input", function () {
       const text = input.value.trim();
       const isStep = /^[0-9]+$/.test(text);
