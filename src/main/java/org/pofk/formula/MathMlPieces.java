@@ -18,7 +18,8 @@ import org.pofk.formula.MathMl.Piece;
  * parentheses of several pieces, a whole number in parts.
  */
 final class MathMlPieces {
-    private static final double SLACK = 3;
+    /** What lies over or under a stroke is set smaller and reads badly beside one. */
+    private static final double STACKED = 1.5;
 
     private MathMlPieces() {
     }
@@ -27,27 +28,26 @@ final class MathMlPieces {
         if (formula instanceof Sum sum) {
             return terms(sum, width).stream().flatMap(List::stream).toList();
         }
-        if (LatexWidth.of(formula) <= width) {
+        if (LatexWidth.of(formula) <= (formula instanceof Quotient ? STACKED * width : width)) {
             return List.of(MathMl.write(formula));
         }
-        double inner = Math.max(12, width - SLACK);
         if (formula instanceof Negation negation) {
-            return behind(new Piece("<mo form=\"prefix\">−</mo>", "-"), wrapped(negation.operand(), inner));
+            return behind(new Piece("<mo form=\"prefix\">−</mo>", "-"), wrapped(negation.operand(), width));
         } else if (formula instanceof Product product) {
-            return product(product, inner);
+            return product(product, width);
         } else if (formula instanceof Quotient quotient) {
-            return ratio(wrapped(quotient.numerator(), inner), wrapped(quotient.denominator(), inner));
-        } else if (formula instanceof Power power && LatexWidth.of(power.base()) > inner / 2) {
+            return ratio(wrapped(quotient.numerator(), width), wrapped(quotient.denominator(), width));
+        } else if (formula instanceof Power power && LatexWidth.of(power.base()) > width / 2) {
             Piece exponent = MathMl.write(power.exponent());
-            return inParentheses(of(power.base(), inner), new Piece("<msup><mo form=\"postfix\">)</mo><mrow>"
+            return inParentheses(of(power.base(), width), new Piece("<msup><mo form=\"postfix\">)</mo><mrow>"
                     + exponent.elements() + "</mrow></msup>", "\\Bigr)^{" + exponent.latex() + "}"));
         } else if (formula instanceof Formula.RootSum sum) {
-            return rootSum(sum, inner);
+            return rootSum(sum, width);
         } else if (formula instanceof Formula.Cases cases) {
-            return cases.branches().size() == 1 ? of(cases.branches().get(0).formula(), inner)
+            return cases.branches().size() == 1 ? of(cases.branches().get(0).formula(), width)
                     : List.of(MathMl.write(formula));
         } else if (formula instanceof Number number) {
-            return number(number, inner);
+            return number(number, width);
         }
         return List.of(MathMl.write(formula));
     }
@@ -69,7 +69,7 @@ final class MathMlPieces {
     }
 
     private static List<Piece> term(Formula term, double width) {
-        return term instanceof Sum || subtracted(term).isPresent() ? wrapped(term, width) : of(term, width - SLACK);
+        return term instanceof Sum || subtracted(term).isPresent() ? wrapped(term, width) : of(term, width);
     }
 
     /** What a term takes away, or nothing. */
@@ -119,8 +119,9 @@ final class MathMlPieces {
         Piece polynomial = new Piece("<mi>q</mi>" + MathMl.enclosed("(", variable.elements(), ")"),
                 "q(" + variable.latex() + ")");
         List<Piece> pieces = new ArrayList<>(rootSum(sum, polynomial, width));
-        pieces.addAll(behind(new Piece("<mi>\u00a0with\u00a0</mi>" + polynomial.elements() + "<mo>=</mo>",
-                "\\text{ with } " + polynomial.latex() + " = "), of(sum.polynomial(), width)));
+        pieces.add(new Piece("<mi>\u00a0with\u00a0</mi>" + polynomial.elements() + MathMl.infix("="),
+                "\\text{ with } " + polynomial.latex() + " = "));
+        pieces.addAll(of(sum.polynomial(), width));
         return pieces;
     }
 
@@ -130,7 +131,7 @@ final class MathMlPieces {
                 + "<mo>=</mo><mn>0</mn></mrow></munder>",
                 "\\sum_{" + variable.latex() + ":\\, " + polynomial.latex() + " = 0} ");
         List<Piece> pieces = new ArrayList<>(List.of(sign));
-        pieces.addAll(wrapped(sum.body(), width));
+        pieces.addAll(sum.body() instanceof Product product ? of(product, width) : wrapped(sum.body(), width));
         return pieces;
     }
 
