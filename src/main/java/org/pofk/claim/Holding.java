@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.OptionalLong;
 import java.util.function.Function;
 import org.pofk.claim.Judgement.JudgedNumber;
@@ -19,10 +20,19 @@ final class Holding {
     private final Claim claim;
     private final List<Held> held = new ArrayList<>();
     private final List<String> remarks = new ArrayList<>();
+    private final Extent extent;
     private Decision besides = Decision.YES;
 
+    /** How much is asked: all of a judgement, or its verdict alone, which costs less. */
+    enum Extent { WHOLE, VERDICT }
+
     Holding(Claim claim) {
+        this(claim, Extent.WHOLE);
+    }
+
+    Holding(Claim claim, Extent extent) {
         this.claim = claim;
+        this.extent = extent;
     }
 
     /** What a number of the claim means. */
@@ -77,6 +87,9 @@ final class Holding {
         Verdict byNumbers = isExact ? Verdict.EXACT : Closeness.verdict(claim, held, decimals.areRight());
         Verdict verdict = besides == Decision.NO ? Verdict.WRONG
                 : besides == Decision.UNDECIDED && byNumbers != Verdict.WRONG ? Verdict.UNDECIDED : byNumbers;
+        if (extent == Extent.VERDICT) {
+            return new Judgement(verdict, Optional.empty(), OptionalLong.empty(), List.of(), List.of(), "");
+        }
         if (!isExact) {
             Closeness.remarks(claim, held).forEach(this::remark);
         }

@@ -19,13 +19,23 @@ final class JudgedPair {
     private final Holding holding;
     private final List<String> names = new ArrayList<>();
 
-    private JudgedPair(Statement.Pair stated, Claim claim) {
+    private JudgedPair(Statement.Pair stated, Holding holding) {
         this.stated = stated;
-        this.holding = new Holding(claim);
+        this.holding = holding;
     }
 
     static Judgement of(Statement.Pair stated, Claim claim, Truth truth) throws RefusedException {
-        return new JudgedPair(stated, claim).judgement(truth.about(stated.output()));
+        return new JudgedPair(stated, new Holding(claim)).judgement(truth.about(stated.output()));
+    }
+
+    /** Whether it is right, at less cost than the judgement. */
+    static boolean isRight(Statement.Pair stated, Claim claim, Truth truth) {
+        try {
+            return new JudgedPair(stated, new Holding(claim, Holding.Extent.VERDICT))
+                    .judgement(truth.about(stated.output())).isRight();
+        } catch (RefusedException meaningless) {
+            return false;
+        }
     }
 
     private Judgement judgement(OutputTruth truth) throws RefusedException {

@@ -26,6 +26,9 @@ public final class Judging implements Statement.Visitor<Judgement> {
         if (claim.statement() instanceof Statement.PofK formula) {
             return JudgedFormula.isRight(formula, claim, truth);
         }
+        if (claim.statement() instanceof Statement.Pair pair) {
+            return JudgedPair.isRight(pair, claim, truth);
+        }
         return claim.statement() instanceof Statement.TransformOf transform
                 ? JudgedTransform.isRight(transform, claim, truth)
                 : of(claim, truth).isRight();

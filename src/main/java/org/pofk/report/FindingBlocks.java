@@ -74,7 +74,7 @@ final class FindingBlocks {
             blocks.add(new Labelled("found", ClaimProse.text(slip.found())));
         }
         if (!slip.right().isBlank()) {
-            blocks.add(new Labelled("right", ClaimProse.text(slip.right())));
+            blocks.add(new Labelled(slip.found().isBlank() ? "add" : "right", ClaimProse.text(slip.right())));
         }
         if (!finding.together()) {
             blocks.add(new Labelled("corrected", ClaimProse.text(slip.corrected())));

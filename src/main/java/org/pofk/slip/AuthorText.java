@@ -49,10 +49,27 @@ final class AuthorText {
             Optional<ParsedFormula> alone = parsed(written.text(), written.notation(), reading)
                     .filter(tree -> tree.formula().equals(written.parsed().formula()));
             if (alone.isPresent()) {
-                return Optional.of(new AuthorText(written, alone.get(), reading));
+                return Optional.of(new AuthorText(written, bare(written.text(), alone.get()), reading));
             }
         }
         return Optional.empty();
+    }
+
+    /** With every single number without the parentheses it stands in alone, so that it is what is replaced. */
+    private static ParsedFormula bare(String text, ParsedFormula node) {
+        if (!node.parts().isEmpty()) {
+            return new ParsedFormula(node.formula(), node.span(),
+                    node.parts().stream().map(part -> bare(text, part)).toList());
+        }
+        int start = start(node);
+        int end = end(node);
+        boolean number = node.formula() instanceof Formula.WrittenDecimal || node.formula() instanceof Formula.Number;
+        while (number && text.charAt(start) == '(' && text.charAt(end - 1) == ')') {
+            start++;
+            end--;
+        }
+        return new ParsedFormula(node.formula(), new Span(new Position(ALONE, 1, start + 1),
+                new Position(ALONE, 1, end + 1)), List.of());
     }
 
     /** How a text of a claim may have been read: its file says what it is, this only that it was so read. */

@@ -33,8 +33,8 @@ final class Carrying {
         for (Implied each : implied) {
             Optional<Claim> seen = each.seen().apply(claim);
             if (seen.isPresent()) {
-                Judgement there = Judging.of(seen.get(), each.truth().get());
-                if (there.isRight() || !nearlyRight && isNear(seen.get(), there)) {
+                if (Judging.isRight(seen.get(), each.truth().get()) || !nearlyRight
+                        && isNear(seen.get(), Judging.of(seen.get(), each.truth().get()))) {
                     return OptionalInt.of(each.from());
                 }
             }

@@ -180,8 +180,7 @@ final class Changes {
     /** Two texts of a list exchanged. */
     private List<Change> swaps() {
         List<Change> swaps = new ArrayList<>();
-        if (claim.statement() instanceof Statement.PofK || claim.statement() instanceof Statement.Pair
-                || claim.statement() instanceof Statement.Poles) {
+        if (!(claim.statement() instanceof Statement.Residues)) {
             return swaps;
         }
         for (int i = 0; i < parts.size(); i++) {
@@ -190,9 +189,7 @@ final class Changes {
                 if (poles && texts.get(i).isPresent() && texts.get(j).isPresent()) {
                     AuthorText a = texts.get(i).get();
                     AuthorText b = texts.get(j).get();
-                    boolean unit = claim.statement() instanceof Statement.Start
-                            && (a.text().equals("0") || b.text().equals("0"));
-                    if (!a.text().equals(b.text()) && !unit) {
+                    if (!a.text().equals(b.text())) {
                         swaps.add(swap(i, a, j, b));
                     }
                 }

@@ -5,14 +5,11 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
-import java.util.function.Supplier;
-import java.util.stream.Collectors;
 import java.util.stream.IntStream;
 import org.pofk.claim.Claim;
 import org.pofk.claim.FormulaText;
 import org.pofk.claim.Judgement;
 import org.pofk.claim.Judging;
-import org.pofk.claim.Statement;
 import org.pofk.claim.Truth;
 
 /**
@@ -50,13 +47,18 @@ final class Explaining {
 
     private Explanation explained(OtherTruths others) {
         List<Candidate> found = new ArrayList<>();
+        List<Meaning> meanings = new ArrayList<>();
         List<Change> changes = new Changes(claim, judgement, truth, texts, screens).all().stream()
                 .sorted(Comparator.comparing(Change::kind)).toList();
-        List<Change> kept = new ArrayList<>();
         for (Change change : changes) {
             if (!repeats(found, change) && budget.screening() && mayBeRight(change)) {
-                kept.add(change);
-                candidate(List.of(change)).filter(this::isRight).ifPresent(found::add);
+                Optional<Candidate> candidate = candidate(List.of(change));
+                Optional<Meaning> meaning = candidate.map(each -> Meaning.of(each.claim()));
+                if (candidate.isPresent() && !repeats(found, meanings, candidate.get(), meaning.get())
+                        && isRight(candidate.get())) {
+                    found.add(candidate.get());
+                    meanings.add(meaning.get());
+                }
             }
         }
         StructuralChanges.of(claim, truth).stream().filter(this::isRight).forEach(found::add);
@@ -75,6 +77,13 @@ final class Explaining {
     private static boolean repeats(List<Candidate> found, Change change) {
         return found.stream().anyMatch(each -> each.span().equals(change.span())
                 && (each.kind() == change.kind() || each.right().equals(change.right())));
+    }
+
+    /** Whether what would be said is named already: by the same kind, or by a more telling one. */
+    private static boolean repeats(List<Candidate> found, List<Meaning> meanings, Candidate candidate,
+            Meaning meaning) {
+        return IntStream.range(0, found.size()).anyMatch(i -> (found.get(i).kind() == candidate.kind()
+                || Told.isMerelyWrong(candidate)) && meanings.get(i).isLike(meaning));
     }
 
     private boolean mayBeRight(Change change) {
@@ -96,26 +105,13 @@ final class Explaining {
     }
 
     private boolean isRight(Candidate candidate) {
-        return budget.judgement() && Judging.of(candidate.claim(), candidate.truth().get()).isRight();
+        return budget.judgement() && Judging.isRight(candidate.claim(), candidate.truth().get());
     }
 
     private Optional<Candidate> candidate(List<Change> changes) {
         Change first = changes.get(0);
         return Change.made(claim.statement(), changes).map(statement -> new Candidate(first.kind(), first.span(),
-                first.found(), first.right(), corrected(statement), Candidate.with(claim, statement), () -> truth));
-    }
-
-    /** A statement as its author would write it: its text, or its texts by name. */
-    static Supplier<String> corrected(Statement statement) {
-        List<StatementPart> all = StatementPart.of(statement);
-        return () -> all.size() == 1 ? all.get(0).text().text()
-                : all.stream().map(part -> named(statement, part)).collect(Collectors.joining(", "));
-    }
-
-    private static String named(Statement statement, StatementPart part) {
-        boolean hasNames = statement instanceof Statement.Pair || statement instanceof Statement.LongRunOf
-                || statement instanceof Statement.PofK;
-        return (hasNames ? part.name() + ": " : "") + part.text().text();
+                first.found(), first.right(), () -> StatementText.of(statement), Candidate.with(claim, statement), () -> truth));
     }
 
     /** Two slips, or one in each wrong part of the statement, that explain it together. */

@@ -30,21 +30,31 @@ final class MissingEdits {
 
     /** One edit for each mode, in k. */
     List<Edit> ofSteps(List<Mode> modes) {
+        StatedPoles stated = StatedPoles.ofSteps(text, digits);
         List<Edit> edits = new ArrayList<>();
         for (Mode mode : modes) {
-            edits.add(added(kind(mode), mode.accept(new InSteps())));
-            mode.accept(new OtherShapes()).forEach(term -> edits.add(added(SlipKind.TERM_MISSING, term)));
+            if (!stated.have(mode)) {
+                edits.add(added(kind(mode), mode.accept(new InSteps())));
+                mode.accept(new OtherShapes()).forEach(term -> edits.add(added(SlipKind.TERM_MISSING, term)));
+            }
         }
         return edits;
     }
 
-    /** One edit for each real mode, in z, times a power of z: 0 where the author expands Y(z)/z. */
+    /** One edit for each mode, in z, times a power of z: 0 where the author expands Y(z)/z. */
     List<Edit> ofTransform(List<Mode> modes, int powerOfZ) {
+        StatedPoles stated = StatedPoles.ofTransform(text, digits);
         List<Edit> edits = new ArrayList<>();
         for (Mode mode : modes) {
-            mode.accept(new InZ(powerOfZ)).ifPresent(term -> edits.add(added(SlipKind.TERM_MISSING, term)));
+            if (!stated.have(mode)) {
+                mode.accept(new InZ(powerOfZ)).forEach(term -> edits.add(added(SlipKind.TERM_MISSING, term)));
+            }
         }
         return edits;
+    }
+
+    private boolean isComplex() {
+        return text.tree().nodes().anyMatch(node -> node.formula() == Formula.Constant.I);
     }
 
     private static SlipKind kind(Mode mode) {
@@ -57,7 +67,7 @@ final class MissingEdits {
         String written = notation.write(negative ? ((Formula.Negation) term).operand() : term);
         String right = (negative ? "- " : "+ ") + written;
         int end = text.text().length();
-        return new Edit(kind, List.of(new Replacement(end, end, " " + right)), text.place(), text.text(), right);
+        return new Edit(kind, List.of(new Replacement(end, end, " " + right)), text.place(), "", right);
     }
 
     private Formula number(RealValue value) {
@@ -90,7 +100,7 @@ final class MissingEdits {
     }
 
     /** The term in z, times a power of z. */
-    private final class InZ implements Mode.Visitor<Optional<Formula>> {
+    private final class InZ implements Mode.Visitor<List<Formula>> {
         private static final Formula.Symbol Z = new Formula.Symbol("z");
 
         private final int powerOfZ;
@@ -100,24 +110,25 @@ final class MissingEdits {
         }
 
         @Override
-        public Optional<Formula> impulse(Mode.Impulse impulse) {
+        public List<Formula> impulse(Mode.Impulse impulse) {
             int power = impulse.at() + 1 - powerOfZ;
             Formula value = number(impulse.value());
-            return Optional.of(power == 0 ? value
+            return List.of(power == 0 ? value
                     : Formulas.quotient(value, Formulas.power(Z, Formulas.number(power))));
         }
 
         @Override
-        public Optional<Formula> geometric(Mode.Geometric mode) {
+        public List<Formula> geometric(Mode.Geometric mode) {
             Formula above = Formulas.product(number(mode.coefficient()), Formulas.power(Z, Formulas.number(powerOfZ)));
             Formula below = Formulas.power(Formulas.sum(List.of(Z, Formulas.opposite(number(mode.base())))),
                     Formulas.number(mode.power() + 1));
-            return Optional.of(Formulas.quotient(above, below));
+            return List.of(Formulas.quotient(above, below));
         }
 
         @Override
-        public Optional<Formula> oscillating(Mode.Oscillating mode) {
-            return Optional.empty();
+        public List<Formula> oscillating(Mode.Oscillating mode) {
+            PairTerms pair = new PairTerms(mode, MissingEdits.this::number);
+            return isComplex() ? pair.inZ(powerOfZ) : pair.together(powerOfZ).stream().toList();
         }
     }
 
@@ -158,7 +169,8 @@ final class MissingEdits {
 
         @Override
         public List<Formula> oscillating(Mode.Oscillating mode) {
-            return List.of(part(mode, Formula.Function.COS, mode.phase().enclosure().map(Ball::cos)),
+            return isComplex() ? new PairTerms(mode, MissingEdits.this::number).inSteps()
+                    : List.of(part(mode, Formula.Function.COS, mode.phase().enclosure().map(Ball::cos)),
                     part(mode, Formula.Function.SIN, mode.phase().enclosure().map(Ball::sin).negate()));
         }
 

@@ -4,7 +4,9 @@ import java.math.BigDecimal;
 import java.util.ArrayList;
 import java.util.LinkedHashSet;
 import java.util.List;
+import java.util.Optional;
 import java.util.Set;
+import org.pofk.formula.Formula;
 import org.pofk.formula.ParsedFormula;
 import org.pofk.slip.AuthorText.Replacement;
 import org.pofk.slip.FormulaSurvey.Constant;
@@ -42,11 +44,11 @@ final class NumberEdits {
                             edits.add(edit(SlipKind.DECIMAL_POINT_MOVED, constant.node(), other)));
                 }
             }
-            edits.addAll(replaced(constant, right));
+            edits.addAll(replaced(survey, constant, right));
         }
         for (Constant constant : survey.fractions()) {
             if (constant.role() != Role.SHIFT) {
-                edits.addAll(replaced(constant, right));
+                edits.addAll(replaced(survey, constant, right));
             }
         }
         return edits;
@@ -66,13 +68,33 @@ final class NumberEdits {
                 : others.stream().noneMatch(other -> other.precision() == own.precision()));
     }
 
-    private List<Edit> replaced(Constant constant, Right right) {
+    private List<Edit> replaced(FormulaSurvey survey, Constant constant, Right right) {
         String found = text.text(constant.node());
         Set<String> others = new LinkedHashSet<>(right.inPlaceOf(constant));
         others.remove(found);
-        return others.stream().map(other -> edit(
-                Digits.compared(found, other.startsWith("-") ? other.substring(1) : other).orElse(generic(constant)),
-                constant.node(), other)).toList();
+        return others.stream().map(other -> {
+            SlipKind kind = Digits.compared(found, other.startsWith("-") ? other.substring(1) : other)
+                    .orElse(generic(constant));
+            return signed(survey, constant, kind, other).orElseGet(() -> edit(kind, constant.node(), other));
+        }).toList();
+    }
+
+    /** Another number with the other sign, where its sign stands before it: − 0.1331 made + 0.2906. */
+    private Optional<Edit> signed(FormulaSurvey survey, Constant constant, SlipKind kind, String right) {
+        ParsedFormula node = constant.node();
+        if (node == text.tree() || !right.startsWith("-") || right.indexOf('+') >= 0 || right.lastIndexOf('-') > 0) {
+            return Optional.empty();
+        }
+        String size = right.substring(1);
+        return survey.terms().stream().filter(term -> leading(term.unsigned(), node)).findFirst().map(term ->
+                new Edit(kind, List.of(new SignEdits(text).sign(term), new Replacement(AuthorText.start(node),
+                        AuthorText.end(node), size)), text.place(node),
+                        (term.isNegative() ? "-" : "") + text.text(node), (term.isNegative() ? "" : "-") + size));
+    }
+
+    private static boolean leading(ParsedFormula whole, ParsedFormula node) {
+        return whole == node || (whole.formula() instanceof Formula.Product
+                || whole.formula() instanceof Formula.Quotient) && leading(whole.parts().get(0), node);
     }
 
     static SlipKind generic(Constant constant) {

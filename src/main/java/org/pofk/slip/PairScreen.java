@@ -26,10 +26,10 @@ final class PairScreen {
     private static final Rational NOISE = Rational.TWO.pow(-48);
 
     private final List<StatementPart> parts;
-    private final List<List<Ball>> right;
+    private final List<List<Rational>> right;
     private final Precision precision;
 
-    private PairScreen(List<StatementPart> parts, List<List<Ball>> right, Precision precision) {
+    private PairScreen(List<StatementPart> parts, List<List<Rational>> right, Precision precision) {
         this.parts = parts;
         this.right = right;
         this.precision = precision;
@@ -45,7 +45,7 @@ final class PairScreen {
                 new Precision(claim.carried())));
     }
 
-    private static List<Ball> values(Claim claim, StatementPart part, Truth truth) {
+    private static List<Rational> values(Claim claim, StatementPart part, Truth truth) {
         boolean turns = part.name().equals("angle") || part.name().equals("phase");
         Role role = switch (part.name()) {
             case "radius" -> Role.POLE;
@@ -53,13 +53,13 @@ final class PairScreen {
             case "angle" -> Role.ANGLE;
             default -> Role.PHASE;
         };
-        List<Ball> values = new ArrayList<>();
+        List<Rational> values = new ArrayList<>();
         for (TrueNumber number : TrueNumbers.ofRole(claim.statement(), role, truth)) {
             Ball value = number.enclosure().enclose(BITS);
             for (int n = turns ? -HALF_TURNS : 0; n <= (turns ? HALF_TURNS : 0); n++) {
                 Ball turned = value.plus(Ball.pi(BITS).times(n));
-                values.add(turned);
-                values.add(turned.negate());
+                values.add(turned.middle());
+                values.add(turned.middle().negate());
             }
         }
         return values;
@@ -74,11 +74,12 @@ final class PairScreen {
     private boolean isNearAny(int part, FormulaText text) {
         Optional<Ball> value = StepEvaluation.spread(text.parsed(), precision, 0, BITS).map(ComplexBall::real);
         return value.isEmpty() || right.get(part).isEmpty()
-                || right.get(part).stream().anyMatch(each -> isNear(value.get(), each));
+                || isNearAny(value.get(), right.get(part));
     }
 
-    private static boolean isNear(Ball spread, Ball right) {
-        Rational open = spread.upper().minus(spread.lower()).times(Rational.HALF);
-        return spread.middle().minus(right.middle()).abs().compareTo(open.times(ALLOWANCE).plus(NOISE)) <= 0;
+    private static boolean isNearAny(Ball spread, List<Rational> right) {
+        Rational open = spread.upper().minus(spread.lower()).times(Rational.HALF).times(ALLOWANCE).plus(NOISE);
+        Rational middle = spread.middle();
+        return right.stream().anyMatch(each -> middle.minus(each).abs().compareTo(open) <= 0);
     }
 }

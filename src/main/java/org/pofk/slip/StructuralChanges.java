@@ -47,7 +47,7 @@ final class StructuralChanges {
                 if (times != own.multiplicity()) {
                     List<Statement.Poles.Pole> changed = new ArrayList<>(poles);
                     changed.set(i, new Statement.Poles.Pole(own.value(), times));
-                    add(SlipKind.REPEATED_POLE_AS_SIMPLE, own.value(), times(own), times(changed.get(i)),
+                    add(SlipKind.REPEATED_POLE_AS_SIMPLE, own.value(), StatementText.pole(own), StatementText.pole(changed.get(i)),
                             stated, changed);
                 }
             }
@@ -58,12 +58,6 @@ final class StructuralChanges {
             }
         }
         missing(stated);
-    }
-
-    private static String times(Statement.Poles.Pole pole) {
-        return pole.multiplicity() == 1 ? pole.value().text()
-                : pole.value().text() + (pole.multiplicity() == 2 ? " (twice)"
-                        : " (" + pole.multiplicity() + " times)");
     }
 
     private void missing(Statement.Poles stated) {
@@ -98,7 +92,7 @@ final class StructuralChanges {
             }
             changed.add(new Statement.Poles.Pole(read.get(), each.multiplicity()));
         }
-        add(SlipKind.TERM_MISSING, last, last.text(), String.join(", ", missing.stream().map(Missing::text).toList()),
+        add(SlipKind.TERM_MISSING, last, "", String.join(", ", missing.stream().map(Missing::text).toList()),
                 stated, changed);
     }
 
@@ -125,7 +119,7 @@ final class StructuralChanges {
             List<Statement.Poles.Pole> changed) {
         Statement statement = new Statement.Poles(stated.output(), changed);
         candidates.add(new Candidate(kind, at.parsed().span(), found, right,
-                () -> String.join(", ", changed.stream().map(StructuralChanges::times).toList()),
+                () -> StatementText.of(statement),
                 Candidate.with(claim, statement), () -> truth));
     }
 

@@ -16,8 +16,10 @@ final class Told {
     static List<Candidate> of(List<Candidate> found, List<StatementPart> parts) {
         List<Candidate> told = new ArrayList<>();
         for (Candidate each : found.stream().sorted(Comparator.comparing(Candidate::kind)).toList()) {
-            boolean known = told.stream().anyMatch(other -> (isMerelyWrong(each) || each.kind() == other.kind())
-                    && isAtOnePlace(each, other, parts));
+            // that a total is wrong doesn't say by which number it comes right
+            boolean known = told.stream().filter(other -> other.kind() != SlipKind.NOT_SUMMING_TO_ONE)
+                    .anyMatch(other -> (isMerelyWrong(each) || each.kind() == other.kind())
+                            && isAtOnePlace(each, other, parts));
             if (!known) {
                 told.add(each);
             }

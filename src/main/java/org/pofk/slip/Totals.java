@@ -3,6 +3,7 @@ package org.pofk.slip;
 import java.util.List;
 import java.util.Optional;
 import org.pofk.chain.Chain;
+import org.pofk.chain.Model;
 import org.pofk.chain.Output;
 import org.pofk.chain.Outputs;
 import org.pofk.claim.Claim;
@@ -15,6 +16,7 @@ import org.pofk.exact.Decimals;
 import org.pofk.exact.Rational;
 import org.pofk.meaning.Precision;
 import org.pofk.meaning.StepEvaluation;
+import org.pofk.text.Span;
 
 /** Probabilities stated for every state that can't add up to one, whatever their decimals leave open. Certified. */
 final class Totals {
@@ -41,6 +43,9 @@ final class Totals {
             return total(start.components().stream().map(Statement.Component::is).toList(), precision, 0)
                     .map(total -> candidate(claim, "a total of " + total, right, truth));
         }
+        if (claim.statement() instanceof Statement.Matrix matrix) {
+            return ofMoves(claim, matrix, precision, right, truth);
+        }
         if (claim.statement() instanceof Statement.PofK formula
                 && isEveryState(formula.parts().stream().map(Statement.PofK.Part::output).toList(), truth)) {
             for (long k = claim.steps().from(); k < claim.steps().from() + STEPS; k++) {
@@ -54,6 +59,31 @@ final class Totals {
             }
         }
         return Optional.empty();
+    }
+
+    /** The first state from which the probabilities don't add up to one. */
+    private static Optional<Candidate> ofMoves(Claim claim, Statement.Matrix matrix, Precision precision,
+            String right, Truth truth) {
+        List<String> states = truth.chain().states();
+        List<List<FormulaText>> rows = matrix.rows();
+        for (int from = 0; from < states.size() && from < rows.size(); from++) {
+            int j = from;
+            boolean byRow = matrix.convention() == Model.Convention.ROWS;
+            if (!byRow && rows.stream().anyMatch(row -> row.size() <= j)) {
+                return Optional.empty();
+            }
+            List<FormulaText> moves = byRow ? rows.get(j) : rows.stream().map(row -> row.get(j)).toList();
+            Optional<String> total = total(moves, precision, 0);
+            if (total.isPresent()) {
+                return Optional.of(candidate(claim, place(moves), "from " + states.get(j) + " a total of "
+                        + total.get(), right, truth));
+            }
+        }
+        return Optional.empty();
+    }
+
+    private static Span place(List<FormulaText> texts) {
+        return texts.get(0).parsed().span().to(texts.get(texts.size() - 1).parsed().span());
     }
 
     private static boolean isEveryState(List<Output> outputs, Truth truth) {
@@ -77,7 +107,11 @@ final class Totals {
     }
 
     private static Candidate candidate(Claim claim, String found, String right, Truth truth) {
-        return new Candidate(SlipKind.NOT_SUMMING_TO_ONE, OtherTruths.place(claim.statement()), found, "a total of 1",
-                () -> right, claim, () -> truth);
+        return candidate(claim, OtherTruths.place(claim.statement()), found, right, truth);
+    }
+
+    private static Candidate candidate(Claim claim, Span place, String found, String right, Truth truth) {
+        return new Candidate(SlipKind.NOT_SUMMING_TO_ONE, place, found, "a total of 1", () -> right, claim,
+                () -> truth);
     }
 }

@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Optional;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
+import org.pofk.claim.FormulaText;
 import org.pofk.claim.OutputTruth;
 import org.pofk.claim.Statement;
 import org.pofk.claim.TruePole;
@@ -12,6 +13,7 @@ import org.pofk.claim.Truth;
 import org.pofk.answer.LongRun;
 import org.pofk.exact.Enclosed;
 import org.pofk.exact.Rational;
+import org.pofk.formula.Formula;
 import org.pofk.modes.Mode;
 import org.pofk.modes.RealValue;
 import org.pofk.slip.FormulaSurvey.Role;
@@ -106,6 +108,8 @@ final class TrueNumbers {
                 numbers.addAll(modes(transform.output(), Role.COEFFICIENT));
                 numbers.addAll(modes(transform.output(), Role.POLE));
             }
+            numbers.addAll(complex(transform.is(), transform.output(), Role.COEFFICIENT));
+            numbers.addAll(complex(transform.is(), transform.output(), Role.POLE));
             return numbers;
         }
 
@@ -140,7 +144,10 @@ final class TrueNumbers {
 
         @Override
         public List<TrueNumber> formula(Statement.PofK formula) {
-            return modes(formula.parts().get(part).output(), role);
+            Statement.PofK.Part own = formula.parts().get(part);
+            List<TrueNumber> numbers = new ArrayList<>(modes(own.output(), role));
+            numbers.addAll(complex(own.is(), own.output(), role));
+            return numbers;
         }
 
         @Override
@@ -196,6 +203,15 @@ final class TrueNumbers {
         @Override
         public List<TrueNumber> bound(Statement.Bound bound) {
             return List.of();
+        }
+
+        /** Real and imaginary parts, for an author who writes them. */
+        private List<TrueNumber> complex(FormulaText text, Output output, Role wanted) {
+            List<Mode> modes = truth.about(output).closedForm().modes();
+            boolean complex = text.parsed().nodes().anyMatch(node -> node.formula() == Formula.Constant.I);
+            return !complex || modes.size() > MOST_MODES ? List.of()
+                    : modes.stream().filter(Mode.Oscillating.class::isInstance)
+                            .flatMap(mode -> PairTerms.numbers((Mode.Oscillating) mode, wanted).stream()).toList();
         }
 
         private List<TrueNumber> modes(Output output, Role wanted) {
