@@ -15,6 +15,7 @@ enum CommandName {
     CHECK(CheckCommand::new),
     WHEN(WhenCommand::new),
     PASSAGE(PassageCommand::new),
+    DRAW(DrawCommand::new),
     NEW(NewCommand::new),
     HELP(HelpCommand::new),
     VERSION(VersionCommand::new);

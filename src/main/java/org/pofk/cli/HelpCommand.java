@@ -18,6 +18,7 @@ final class HelpCommand implements Work {
             "  pofk simulate MODEL   random walks with intervals, beside the exact values",
             "  pofk check CLAIMS     a derivation made by hand: which steps are right, which",
             "                        are wrong, and by which slip",
+            "  pofk draw MODEL       p(k) over steps, its poles, or the states, as a figure",
             "  pofk new              patterns to start a model from",
             "  pofk help COMMAND     the options of a command",
             "  pofk help WORDS       from a word of the trade to the command that answers it:",

@@ -36,13 +36,18 @@ final class SaveOptions {
 
     /** Writes to the file, or to the answer stream where none was asked for. */
     void write(String text, Streams streams) throws UsageException, WritingException {
+        write(text.getBytes(StandardCharsets.UTF_8), streams);
+    }
+
+    /** The same for what isn't text, or is UTF-8 already. */
+    void write(byte[] bytes, Streams streams) throws UsageException, WritingException {
         check();
         if (file.isEmpty()) {
-            streams.answer().print(text);
+            streams.answer().writeBytes(bytes);
             return;
         }
         try {
-            writeWhole(file.get(), text);
+            writeWhole(file.get(), bytes);
         } catch (IOException failed) {
             throw new WritingException("'" + file.get() + "' can't be written: "
                     + reason(failed, folder(file.get())), failed);
@@ -51,10 +56,10 @@ final class SaveOptions {
     }
 
     /** Writes beside the file first, and moves it into its place when it is complete. */
-    private static void writeWhole(Path file, String text) throws IOException {
+    private static void writeWhole(Path file, byte[] bytes) throws IOException {
         Path draft = Files.createTempFile(folder(file), ".pofk-", ".part");
         try {
-            Files.writeString(draft, text, StandardCharsets.UTF_8);
+            Files.write(draft, bytes);
             Files.move(draft, file, StandardCopyOption.ATOMIC_MOVE, StandardCopyOption.REPLACE_EXISTING);
         } finally {
             Files.deleteIfExists(draft);

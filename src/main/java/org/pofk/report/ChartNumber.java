@@ -15,10 +15,15 @@ final class ChartNumber {
     static String of(Rational value, int digits) {
         Decimal decimal = Decimals.of(value, LONGEST);
         String fraction = value.toString();
-        if (decimal.exact() && decimal.text().length() <= Math.max(LONGEST, fraction.length())) {
+        if (decimal.exact()) {
             return minus(decimal.text());
         }
         return minus(fraction.length() <= LONGEST ? fraction : Decimals.of(value, digits).text());
+    }
+
+    /** Whether {@link #of} writes the number itself. */
+    static boolean isExact(Rational value) {
+        return Decimals.of(value, LONGEST).exact() || value.toString().length() <= LONGEST;
     }
 
     /** With a minus sign proper. */

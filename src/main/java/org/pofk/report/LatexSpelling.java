@@ -26,6 +26,11 @@ final class LatexSpelling {
         return prose.parts().stream().map(part -> part.accept(new Text())).collect(Collectors.joining());
     }
 
+    /** In one line whatever its length. */
+    static String unbroken(Prose prose) {
+        return of(prose).replace("\\allowbreak{}", "");
+    }
+
     /** Prose within mathematics: words upright, {@code Y(z)} as mathematics. */
     static String inMathematics(Prose prose) {
         return prose.parts().stream().map(part -> part.accept(new InMathematics())).collect(Collectors.joining());

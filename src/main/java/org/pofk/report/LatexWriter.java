@@ -18,8 +18,7 @@ import org.pofk.text.RefusedException;
  * every run.
  */
 public final class LatexWriter {
-    /** The packages that what is written needs. */
-    public static final List<String> PACKAGES = List.of("amsmath", "booktabs", "longtable");
+    private static final List<String> PACKAGES = List.of("amsmath", "booktabs", "longtable");
     /** Digits on a line of a display. */
     private static final int WIDTH = 76;
     private static final int LONGEST_UNDERLINED = 30;
@@ -32,7 +31,7 @@ public final class LatexWriter {
         List<String> lines = new ArrayList<>(List.of("\\documentclass[11pt,a4paper]{article}",
                 "\\usepackage[utf8]{inputenc}", "\\usepackage[T1]{fontenc}", "\\usepackage{lmodern}",
                 "\\usepackage[margin=25mm]{geometry}"));
-        PACKAGES.forEach(each -> lines.add("\\usepackage{" + each + "}"));
+        packages(document).forEach(each -> lines.add("\\usepackage{" + each + "}"));
         lines.addAll(List.of("\\allowdisplaybreaks", "\\setlength{\\parindent}{0pt}",
                 "\\setlength{\\parskip}{6pt plus 2pt}", "\\setlength{\\emergencystretch}{4em}",
                 "\\begin{document}"));
@@ -44,9 +43,15 @@ public final class LatexWriter {
     /** The contents alone, to be put into another document. */
     public static String fragment(Document document) throws RefusedException {
         List<String> lines = new ArrayList<>(List.of("% To be put into a document by \\input; needs"
-                + " \\usepackage[T1]{fontenc} and the packages " + String.join(", ", PACKAGES) + "."));
+                + " \\usepackage[T1]{fontenc} and the packages " + String.join(", ", packages(document)) + "."));
         lines.addAll(body(document));
         return String.join("\n", lines) + "\n";
+    }
+
+    /** What the document needs; the one for figures only where there are some. */
+    private static List<String> packages(Document document) {
+        boolean hasFigures = document.blocks().stream().anyMatch(Document.Figure.class::isInstance);
+        return hasFigures ? Stream.concat(PACKAGES.stream(), Stream.of(TikzChart.PACKAGE)).toList() : PACKAGES;
     }
 
     private static List<String> body(Document document) throws RefusedException {
@@ -150,7 +155,12 @@ public final class LatexWriter {
 
         @Override
         public List<String> figure(Document.Figure figure) {
-            return List.of("", LatexSpelling.of(figure.caption()), "", LatexSpelling.of(figure.chart().alternative()));
+            List<String> lines = new ArrayList<>(List.of("", "\\begin{center}",
+                    "\\begin{minipage}{\\linewidth}\\centering"));
+            lines.addAll(TikzChart.lines(figure.chart()));
+            lines.addAll(List.of("\\par\\smallskip", LatexSpelling.of(figure.caption()),
+                    "\\end{minipage}", "\\end{center}"));
+            return lines;
         }
 
         @Override

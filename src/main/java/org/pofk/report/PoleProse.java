@@ -40,7 +40,7 @@ final class PoleProse {
         List<Chart.Pole> once = poles.stream().filter(pole -> pole.root().index() <= pole.root().conjugateIndex())
                 .toList();
         return once.size() > LISTED ? poles.size() + " different ones"
-                : once.stream().map(PoleProse::both).collect(Collectors.joining(", "));
+                : once.stream().map(pole -> both(pole) + times(pole.multiplicity())).collect(Collectors.joining(", "));
     }
 
     private static String place(Chart.Side side) {
@@ -51,9 +51,9 @@ final class PoleProse {
         };
     }
 
-    /** A pole, or it and its conjugate: {@code 0.2 ± 0.55i (twice)}. */
-    private static String both(Chart.Pole pole) {
-        return text(pole, " ± ") + times(pole.multiplicity());
+    /** A pole, or it and its conjugate: {@code 0.2 ± 0.55i}. */
+    static String both(Chart.Pole pole) {
+        return text(pole, " ± ");
     }
 
     static String times(int multiplicity) {

@@ -111,6 +111,20 @@ class LatexWriterTest {
     }
 
     @Test
+    void figuresCompileWithAnyName() throws Exception {
+        List<Document.Block> figures = new ArrayList<>();
+        for (DerivedModel each : List.of(PatternCharts.hard(), PatternCharts.derived("tandem-presses"),
+                PatternCharts.derived("standby-trio"), PatternCharts.derived("level-controller"),
+                PatternCharts.derived("storage-cavern"))) {
+            PatternCharts.charts(each).forEach(chart -> figures.add(new Document.Figure(chart.title(), chart)));
+        }
+        assertEquals(15, figures.size());
+        assertCompiles(new Document(figures));
+        assertTrue(LatexWriter.fragment(new Document(figures)).startsWith("% To be put into a document by \\input; needs"
+                + " \\usepackage[T1]{fontenc} and the packages amsmath, booktabs, longtable, tikz.\n"));
+    }
+
+    @Test
     void aPartForAnotherDocumentSaysWhatItNeeds() throws RefusedException {
         String part = LatexWriter.fragment(everything());
         assertTrue(part.startsWith("% To be put into a document by \\input; needs \\usepackage[T1]{fontenc} and the"
