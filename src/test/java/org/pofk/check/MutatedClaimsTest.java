@@ -7,6 +7,7 @@ import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Random;
+import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
 import org.pofk.claim.Claims;
 import org.pofk.slip.Finding;
@@ -29,6 +30,7 @@ class MutatedClaimsTest {
     private int judged;
 
     @Test
+    @Tag("soak")
     void damagedClaimsAreRefusedAtAPlaceOrJudged() {
         Random random = new Random(SEED);
         List<String> escaped = new ArrayList<>();
