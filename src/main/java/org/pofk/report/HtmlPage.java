@@ -45,7 +45,7 @@ final class HtmlPage {
                 + Base64.getEncoder().encodeToString(bytes("mathematics.woff2")) + ") format(\"woff2\"); }\n"
                 + text("page.css") + IntStream.rangeClosed(1, HtmlTable.MOST_MOVED)
                         .mapToObj(digits -> "tbody .in" + digits + " { padding-left: calc(.3rem + " + digits + "ch); }\n")
-                        .collect(Collectors.joining());
+                        .collect(Collectors.joining()) + SvgChart.sheet();
     }
 
     private static String hash(String text) {

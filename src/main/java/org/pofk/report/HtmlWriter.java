@@ -141,8 +141,8 @@ public final class HtmlWriter {
 
         @Override
         public List<String> figure(Document.Figure figure) {
-            return List.of("<figure><figcaption>" + HtmlSpelling.of(figure.caption()) + "</figcaption><p>"
-                    + HtmlSpelling.of(figure.chart().alternative()) + "</p></figure>");
+            return List.of("<figure>" + SvgChart.part(figure.chart()) + "<figcaption>"
+                    + HtmlSpelling.of(figure.caption()) + "</figcaption></figure>");
         }
 
         @Override

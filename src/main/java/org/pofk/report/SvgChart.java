@@ -20,6 +20,7 @@ public final class SvgChart {
     private static final int LINE = 20;
     private static final String FONTS = "Source Sans 3, Noto Sans, Segoe UI, Helvetica Neue, Arial, sans-serif";
     private static final int ID_LENGTH = 8;
+    private static final String PART = "chart";
 
     private SvgChart() {
     }
@@ -37,10 +38,18 @@ public final class SvgChart {
                 .filter(each -> !each.name().equals("style")).toList()).with("font-family", "SansSerif").write();
     }
 
-    /** A part of a page that shows the title itself, on the page's ground; ids differ for charts that differ. */
+    /**
+     * A part of a page that shows the title itself, on the page's ground and with {@link #sheet} among its styles; ids
+     * differ for charts that differ.
+     */
     public static String part(Chart chart) {
         Picture picture = Pictures.of(chart);
-        return root(chart, picture, 0, "part").holding(shapes(picture)).write();
+        return root(chart, picture, 0, "part").with("class", PART).holding(shapes(picture)).write();
+    }
+
+    /** The styles of all parts of a page. */
+    public static String sheet() {
+        return style("." + PART) + "." + PART + "{max-width:100%;height:auto}\n";
     }
 
     private static SvgElement titled(Chart chart) {
@@ -55,7 +64,9 @@ public final class SvgChart {
                     Picture.Anchor.START, Prose.of(title.get(i)), Ink.TEXT, TITLE_SIZE, Picture.Setting.BOLD)));
         }
         all.addAll(shapes(picture));
-        return root(chart, picture, above, "file").holding(all);
+        SvgElement root = root(chart, picture, above, "file").with("style", "max-width:100%;height:auto");
+        return root.holding(List.of(SvgElement.of("style").saying(style("#" + root.attributes().get("id")))))
+                .holding(all);
     }
 
     private static List<SvgElement> shapes(Picture picture) {
@@ -76,10 +87,9 @@ public final class SvgChart {
         return SvgElement.of("svg").with("xmlns", "http://www.w3.org/2000/svg").with("id", id).with("role", "img")
                 .with("aria-labelledby", id + "-title " + id + "-desc").with("width", width).with("height", height)
                 .with("viewBox", "0 " + SvgElement.number(-above) + " " + width + " " + height)
-                .with("style", "max-width:100%;height:auto").with("font-family", FONTS)
+                .with("font-family", FONTS)
                 .holding(List.of(SvgElement.of("title").with("id", id + "-title").saying(title),
-                        SvgElement.of("desc").with("id", id + "-desc").saying(seen),
-                        SvgElement.of("style").saying(style("#" + id))));
+                        SvgElement.of("desc").with("id", id + "-desc").saying(seen)));
     }
 
     /** The colours on a light and on a dark ground. */

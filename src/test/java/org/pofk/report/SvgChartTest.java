@@ -280,7 +280,9 @@ class SvgChartTest {
         String id = DrawnSvg.of(file).root().getAttribute("id");
         assertTrue(file.contains("@media (prefers-color-scheme:dark){#" + id + "{"), file);
         assertTrue(file.contains("<!-- Exact for the model as entered."), file);
-        assertFalse(SvgChart.part(chart).contains("class=\"f-paper\""));
+        String part = SvgChart.part(chart);
+        assertFalse(part.contains("class=\"f-paper\"") || part.contains("style"), part);
+        assertTrue(part.contains("class=\"chart\"") && SvgChart.sheet().contains(".chart .f-blue{fill:var(--blue)}"), part);
         assertFalse(SvgChart.light(chart).contains("<style"));
         assertNotEquals(file, SvgChart.part(chart));
     }
