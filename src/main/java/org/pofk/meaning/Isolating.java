@@ -9,6 +9,8 @@ import org.pofk.exact.Rational;
 
 /** Solves an equation for a decimal that occurs in it once, by undoing what is done to it from the outside in. Exact. */
 final class Isolating implements Node.Visitor<Optional<Quantity>> {
+    /** Highest power that is undone: the root of a higher one costs its degree in digits, and nobody writes it. */
+    private static final int MOST_DEGREE = 64;
     private static final Quantity QUARTER_TURN = Quantity.pi().times(Rational.HALF);
 
     private final Occurrences occurrences;
@@ -97,7 +99,7 @@ final class Isolating implements Node.Visitor<Optional<Quantity>> {
         return other.isZero() == Decision.NO ? goOn(with, target.dividedBy(other)) : Optional.empty();
     }
 
-    /** The real root with the sign that the base has at face value, where there are two. */
+    /** The real root with the sign that the base has at face value, where there are two; of a degree worth its work. */
     @Override
     public Optional<Quantity> power(Node.Power power) {
         Optional<Integer> sign = sign(target);
@@ -105,6 +107,9 @@ final class Isolating implements Node.Visitor<Optional<Quantity>> {
             return Optional.empty();
         }
         int degree = Math.abs(power.exponent());
+        if (degree > MOST_DEGREE) {
+            return Optional.empty();
+        }
         Quantity raised = power.exponent() < 0 ? target.inverse() : target;
         if (degree % 2 == 1) {
             return goOn(power.base(), sign.get() < 0 ? raised.negate().root(degree).negate() : raised.root(degree));
