@@ -67,7 +67,7 @@ final class CheckCommand implements Work {
     }
 
     private ExitCode check(Streams streams) throws RefusedException, UsageException, WritingException {
-        Format format = writing.format();
+        Format format = writing.formatOfDocument();
         writing.save().check();
         Source source = Source.read(file);
         Overrides overrides = settings.overrides();

@@ -14,6 +14,7 @@ import org.pofk.chain.Output;
 import org.pofk.report.DerivationDocument;
 import org.pofk.report.DerivationJson;
 import org.pofk.report.Document;
+import org.pofk.report.NotebookWriter;
 import org.pofk.report.StructureDocument;
 import org.pofk.report.StructureJson;
 import org.pofk.report.Style;
@@ -85,14 +86,23 @@ final class DeriveCommand implements Work {
             return ExitCode.NOT_DECIDED;
         }
         DerivedModel derived = outcome.published().get();
-        writing.save().write(format == Format.JSON
-                ? DerivationJson.write(derived, style.digits())
-                : writing.written(document(derived, style), format), streams);
+        writing.save().write(written(derived, style, format), streams);
         return derived.isDecided() && outcome.finished() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
+    }
+
+    private String written(DerivedModel derived, Style style, Format format) throws RefusedException {
+        return switch (format) {
+            case JSON -> DerivationJson.write(derived, style.digits());
+            case NOTEBOOK -> NotebookWriter.write(derived, style, showing.convention(derived.model()));
+            case TEXT, HTML, LATEX -> writing.written(document(derived, style), format);
+        };
     }
 
     private ExitCode askedForOutputs(Model read, Style style, Format format, Streams streams)
             throws RefusedException, UsageException, WritingException {
+        if (format == Format.NOTEBOOK) {
+            throw new UsageException("which outputs is the notebook to be about? Name them with --of");
+        }
         InspectedModel inspected = InspectedModel.of(read, List.of());
         if (format == Format.JSON) {
             streams.notes().println("pofk: " + StructureDocument.askingForOutputs(read.chain()));

@@ -8,7 +8,7 @@ import java.util.Optional;
 
 /** What an answer can be written as. */
 enum Format {
-    TEXT(".txt"), JSON(".json"), HTML(".html"), LATEX(".tex");
+    TEXT(".txt"), JSON(".json"), HTML(".html"), LATEX(".tex"), NOTEBOOK(".ipynb");
 
     private final String ending;
 

@@ -39,7 +39,7 @@ final class InspectCommand implements Work {
     @Override
     public ExitCode run(Streams streams) throws RefusedException, UsageException, WritingException {
         Style style = showing.style();
-        Format format = writing.format();
+        Format format = writing.formatOfDocument();
         writing.save().check();
         Model read = model.read();
         List<Output> outputs = of.isEmpty() ? read.chain().outputs() : AskedOutputs.of(read.chain(), of);

@@ -60,7 +60,7 @@ final class PassageCommand implements Work {
     @Override
     public ExitCode run(Streams streams) throws RefusedException, UsageException, WritingException {
         Style style = showing.style();
-        Format format = writing.format();
+        Format format = writing.formatOfDocument();
         writing.save().check();
         Model read = model.read();
         Chain chain = started(read.chain());

@@ -53,7 +53,7 @@ final class SimulateCommand implements Work {
     @Override
     public ExitCode run(Streams streams) throws RefusedException, UsageException, WritingException {
         Style style = showing.style();
-        Format format = writing.format();
+        Format format = writing.formatOfDocument();
         writing.save().check();
         if (runs < 1 || runs > MOST_RUNS) {
             throw new UsageException("--runs " + runs + " is not possible; 1 to " + MOST_RUNS + " are");

@@ -53,7 +53,7 @@ final class WhenCommand implements Work {
     @Override
     public ExitCode run(Streams streams) throws RefusedException, UsageException, WritingException {
         Style style = showing.style();
-        Format format = writing.format();
+        Format format = writing.formatOfDocument();
         writing.save().check();
         WhenModel.Asked asked = asked();
         Model read = model.read();

@@ -27,6 +27,15 @@ final class WritingOptions {
     @Mixin
     private SaveOptions save = new SaveOptions();
 
+    /** The format asked for where a notebook is none. */
+    Format formatOfDocument() throws UsageException {
+        Format format = format();
+        if (format == Format.NOTEBOOK) {
+            throw new UsageException("a notebook is written by derive alone");
+        }
+        return format;
+    }
+
     /** The format asked for; a file's name and {@code --as} may not contradict each other. */
     Format format() throws UsageException {
         Optional<Path> file = save.file();
@@ -53,7 +62,7 @@ final class WritingOptions {
                     : TextWriter.of(Alphabet.UNICODE, StandardCharsets.UTF_8)).write(document);
             case HTML -> HtmlWriter.write(document);
             case LATEX -> fragment ? LatexWriter.fragment(document) : LatexWriter.article(document);
-            case JSON -> throw new AssertionError("JSON is written from results, not from a document");
+            case JSON, NOTEBOOK -> throw new AssertionError(format + " is written from results, not from a document");
         };
     }
 

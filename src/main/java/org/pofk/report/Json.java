@@ -14,6 +14,8 @@ import java.util.function.Consumer;
 
 /** Writes a JSON text in memory, the same characters for the same content on every machine. */
 final class Json {
+    private static final DefaultIndenter INDENTER = new DefaultIndenter("  ", "\n");
+
     private final JsonGenerator generator;
 
     private Json(JsonGenerator generator) {
@@ -22,11 +24,23 @@ final class Json {
 
     /** A text whose outermost value is an object; ends with a line feed. */
     static String ofObject(Consumer<Json> fields) {
+        return written(printer(), fields);
+    }
+
+    /** The same with every element of a list on a line of its own. */
+    static String ofObjectOverLines(Consumer<Json> fields) {
+        return written(printer().withArrayIndenter(INDENTER), fields);
+    }
+
+    private static DefaultPrettyPrinter printer() {
+        return new DefaultPrettyPrinter(Separators.createDefaultInstance()
+                .withObjectFieldValueSpacing(Separators.Spacing.AFTER)).withObjectIndenter(INDENTER);
+    }
+
+    private static String written(DefaultPrettyPrinter printer, Consumer<Json> fields) {
         StringWriter text = new StringWriter();
         try (JsonGenerator generator = new JsonFactory().createGenerator(text)) {
-            generator.setPrettyPrinter(new DefaultPrettyPrinter(Separators.createDefaultInstance()
-                    .withObjectFieldValueSpacing(Separators.Spacing.AFTER))
-                    .withObjectIndenter(new DefaultIndenter("  ", "\n")));
+            generator.setPrettyPrinter(printer);
             Json json = new Json(generator);
             json.object(() -> fields.accept(json));
         } catch (IOException impossible) {

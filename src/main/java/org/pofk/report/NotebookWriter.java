@@ -1,0 +1,114 @@
+package org.pofk.report;
+
+import java.util.ArrayList;
+import java.util.List;
+import org.pofk.answer.DerivedModel;
+import org.pofk.answer.DerivedOutput;
+import org.pofk.chain.Model.Convention;
+import org.pofk.modes.ClosedForm;
+import org.pofk.report.Document.Block;
+import org.pofk.report.Document.Heading;
+import org.pofk.report.Document.Paragraph;
+
+/**
+ * A derivation as a notebook that proves it again: its prose and formulas are those of the document, its code needs
+ * nothing but Python's own library, takes the numbers of the model and of the formula alone from here, and ends with
+ * an error where a claim doesn't hold. Nothing in it is decided by a number that was rounded.
+ */
+public final class NotebookWriter {
+    private static final String WHAT_IT_DOES = "The cells of code step the matrix in exact fractions and prove the"
+            + " formulas again, independently of the program that wrote them; they need Python's own library alone and"
+            + " end with an error where something doesn't hold.";
+
+    private final List<Notebook.Cell> cells = new ArrayList<>();
+    private final DerivedModel derived;
+    private final Style style;
+    private final Convention convention;
+
+    private NotebookWriter(DerivedModel derived, Style style, Convention convention) {
+        this.derived = derived;
+        this.style = style;
+        this.convention = convention;
+    }
+
+    /** The notebook as JSON, nbformat 4.5, nothing of it run. */
+    public static String write(DerivedModel derived, Style style, Convention convention) {
+        NotebookWriter writer = new NotebookWriter(derived, style, convention);
+        writer.chain();
+        derived.outputs().forEach(writer::output);
+        writer.text(List.of(new Paragraph(Caution.TEXT)));
+        return new Notebook(writer.cells).write();
+    }
+
+    private void text(List<Block> blocks) {
+        cells.add(new Notebook.Cell(Notebook.Kind.MARKDOWN, MarkdownWriter.write(blocks)));
+    }
+
+    private void text(String paragraph) {
+        text(List.of(new Paragraph(paragraph)));
+    }
+
+    private void code(String source) {
+        cells.add(new Notebook.Cell(Notebook.Kind.CODE, source));
+    }
+
+    private void chain() {
+        List<Block> head = new ArrayList<>(ModelHead.of(derived.model()));
+        head.add(new Paragraph(WHAT_IT_DOES));
+        text(head);
+        text(ChainBlocks.of(derived.model(), derived.outputs().stream().map(DerivedOutput::output).toList(),
+                convention));
+        text("The model in exact fractions:");
+        code(Python.tools("numbers"));
+        code(PythonChain.of(derived.model().chain(), convention));
+        text("Stepping it, and counting the states that take part:");
+        code(Python.tools("steps"));
+        text(List.of(new Heading(2, "How the formulas are proved again"), new Paragraph("A matrix of n states"
+                + " annihilates y(k) by its characteristic polynomial (Cayley–Hamilton). So a recurrence of order d"
+                + " that holds at k = 0 … n − 1 holds at every k, and a closed form that satisfies a recurrence of"
+                + " order d and equals y(k) at k = 0 … n + d − 1 equals it at every k."), new Paragraph("A closed form"
+                + " is evaluated without its roots: what the roots λ of a factor q add, the sum of R(λ) λ^k, is the"
+                + " trace of R(x) x^k in Q[x]/(q).")));
+        code(Python.tools("polynomials"));
+        code(Python.tools("proof"));
+        text("A long run is proved by the poles: those on the unit circle are simple roots of unity, all others lie"
+                + " inside.");
+        code(Python.tools("long_run"));
+        if (derived.outputs().stream().flatMap(output -> output.closedForm().stream())
+                .anyMatch(form -> PythonFormulas.of(form, style.digits()).needsDecimals())) {
+            text("Roots, cosines and π to 100 digits, for formulas as they are printed:");
+            code(Python.tools("decimals"));
+        }
+        code(Python.tools("printed"));
+        code(Python.tools("figure"));
+    }
+
+    private void output(DerivedOutput output) {
+        List<Block> way = WayBlocks.of(output, style);
+        text(way.isEmpty() ? List.of(new Heading(2, OutputProse.title(output.output()))) : way);
+        output.transform().ifPresent(transform -> {
+            text("The terms, the recurrence and Y(z) proved again:");
+            code(PythonOutput.transform(transform));
+        });
+        output.closedForm().ifPresent(form -> {
+            text(PythonOutput.isEvaluated(form) ? "The closed form proved again:"
+                    : "A factor of high degree has its coefficient as a quotient that is not reduced here. The closed"
+                    + " form is not evaluated; what proves it again is the recurrence with Y(z) above, the parts it"
+                    + " falls into and its long run are not.");
+            if (PythonOutput.isEvaluated(form)) {
+                code(PythonOutput.parts(form));
+            }
+        });
+        text(ResultBlocks.of(output, style));
+        output.closedForm().ifPresent(this::printed);
+        output.longRun().ifPresent(checks -> code(output.closedForm().filter(PythonOutput::isEvaluated).isPresent()
+                ? PythonLongRun.of(checks.byPoles()) : PythonLongRun.FIGURE_ALONE));
+    }
+
+    private void printed(ClosedForm form) {
+        PythonFormulas formulas = PythonFormulas.of(form, style.digits());
+        text(formulas.isEmpty() ? "The formula has neither short exact forms nor decimals for every number of it; what"
+                + " is proved above is the whole of it." : "The formulas as printed, at the first steps:");
+        formulas.cells().forEach(this::code);
+    }
+}
