@@ -15,6 +15,7 @@ import org.pofk.meaning.Decision;
 import org.pofk.meaning.Equation;
 import org.pofk.meaning.ExponentialSum;
 import org.pofk.meaning.ExponentialSum.Term;
+import org.pofk.meaning.PolarForm;
 import org.pofk.meaning.Quantity;
 
 /**
@@ -78,8 +79,12 @@ record ModeEquations(List<ModeEquation> equations, boolean fits) {
             Term term = claimed.term();
             List<Term> terms = List.of(term);
             boolean isWrittenOut = Quantity.sum(List.of(term.base(), term.angle())).decimals().isEmpty();
+            Optional<PolarForm> polar = PolarForm.of(term.base()).filter(PolarForm::isTurnedByDecimals);
             if (claimed.shape() == Shape.OSCILLATION && !isWrittenOut) {
-                polarBase(pole, claimed);
+                polarBase(pole, claimed, new PolarForm(term.base(), term.angle()));
+            } else if (claimed.shape() == Shape.COMPLEX && polar.isPresent()) {
+                fits &= !pole.isReal();
+                polarBase(pole, claimed, polar.get());
             } else if (claimed.shape() == Shape.REAL) {
                 fits &= pole.isReal();
                 add(About.BASE, Optional.of(pole), term.power(), terms, term.base(), pole.value().realPart());
@@ -90,21 +95,21 @@ record ModeEquations(List<ModeEquation> equations, boolean fits) {
             }
         }
 
-        private void polarBase(TruePole pole, ClaimedTerm claimed) {
+        private void polarBase(TruePole pole, ClaimedTerm claimed, PolarForm written) {
             Term term = claimed.term();
             List<Term> terms = List.of(term);
-            boolean isNegative = isNegative(term.base());
+            boolean isNegative = isNegative(written.modulus());
             Quantity modulus = pole.modulus();
-            add(About.BASE, Optional.of(pole), term.power(), terms, term.base(),
+            add(About.BASE, Optional.of(pole), term.power(), terms, written.modulus(),
                     isNegative ? modulus.negate() : modulus);
-            if (term.angle().decimals().isEmpty()) {
+            if (!written.isTurnedByDecimals()) {
                 Quantity direction = (claimed.isBelow() ? pole.value().conjugate() : pole.value())
                         .dividedBy(isNegative ? modulus.negate() : modulus);
-                addComplex(About.ANGLE, pole, term.power(), terms, Angles.unit(term.angle()), direction);
+                addComplex(About.ANGLE, pole, term.power(), terms, Angles.unit(written.angle()), direction);
             } else {
                 Quantity angle = claimed.isBelow() ? pole.angle().negate() : pole.angle();
-                add(About.ANGLE, Optional.of(pole), term.power(), terms, term.angle(),
-                        Angles.near(isNegative ? angle.plus(Quantity.pi()) : angle, term.angle()));
+                add(About.ANGLE, Optional.of(pole), term.power(), terms, written.angle(),
+                        Angles.near(isNegative ? angle.plus(Quantity.pi()) : angle, written.angle()));
             }
         }
 
@@ -159,11 +164,33 @@ record ModeEquations(List<ModeEquation> equations, boolean fits) {
                 }
             }
             List<Term> terms = claimed.stream().map(ClaimedTerm::term).toList();
-            addComplex(About.COEFFICIENT, pole, power, terms, Quantity.sum(upper), right);
-            addComplex(About.COEFFICIENT, pole, power, terms, Quantity.sum(lower), right.conjugate());
+            oneOfPair(pole, power, terms, Quantity.sum(upper), right);
+            oneOfPair(pole, power, terms, Quantity.sum(lower), right.conjugate());
         }
 
-        /** a cos(θk + φ) is Re(target λ^k/r^k): a the modulus, φ the angle of the target, or both turned by half. */
+        private void oneOfPair(TruePole pole, int power, List<Term> terms, Quantity written, Quantity right) {
+            Optional<PolarForm> polar = PolarForm.of(written).filter(PolarForm::isTurnedByDecimals);
+            if (polar.isPresent()) {
+                polarCoefficient(pole, power, terms, polar.get(), right);
+            } else {
+                addComplex(About.COEFFICIENT, pole, power, terms, written, right);
+            }
+        }
+
+        /** a e^(iφ) = target: a the modulus, φ the angle of the target, or both turned by half. */
+        private void polarCoefficient(TruePole pole, int power, List<Term> terms, PolarForm written,
+                Quantity target) {
+            boolean isNegative = isNegative(written.modulus());
+            Quantity modulus = target.times(target.conjugate()).squareRoot();
+            add(About.COEFFICIENT, Optional.of(pole), power, terms, written.modulus(),
+                    isNegative ? modulus.negate() : modulus);
+            if (target.isZero() != Decision.YES) {
+                add(About.PHASE, Optional.of(pole), power, terms, written.angle(),
+                        Angles.near(Angles.of(isNegative ? target.negate() : target), written.angle()));
+            }
+        }
+
+        /** a cos(θk + φ) is Re(target λ^k/r^k), so that a e^(iφ) is the target, or its conjugate from below. */
         private void amplitude(TruePole pole, int power, ClaimedTerm claimed, Quantity target) {
             Term term = claimed.term();
             List<Term> terms = List.of(term);
@@ -173,15 +200,8 @@ record ModeEquations(List<ModeEquation> equations, boolean fits) {
                 add(About.PHASE, Optional.of(pole), power, terms, Quantity.ZERO, turnedBack.imaginaryPart());
                 return;
             }
-            boolean isNegative = isNegative(term.coefficient());
-            Quantity modulus = target.times(target.conjugate()).squareRoot();
-            add(About.COEFFICIENT, Optional.of(pole), power, terms, term.coefficient(),
-                    isNegative ? modulus.negate() : modulus);
-            if (target.isZero() != Decision.YES) {
-                Quantity angle = Angles.of(isNegative ? target.negate() : target);
-                add(About.PHASE, Optional.of(pole), power, terms, term.phase(),
-                        Angles.near(claimed.isBelow() ? angle.negate() : angle, term.phase()));
-            }
+            polarCoefficient(pole, power, terms, new PolarForm(term.coefficient(), term.phase()),
+                    claimed.isBelow() ? target.conjugate() : target);
         }
 
         /** a e + b f = target for two directions: each coefficient by itself where they differ. */

@@ -6,6 +6,7 @@ import org.pofk.exact.ComplexBall;
 import org.pofk.exact.Rational;
 import org.pofk.meaning.Decision;
 import org.pofk.meaning.ExponentialSum;
+import org.pofk.meaning.PolarForm;
 import org.pofk.meaning.Quantity;
 
 /**
@@ -20,7 +21,7 @@ record Wave(Quantity coefficient, int power, Quantity base, Optional<Quantity> r
     /** What a term of a formula means. */
     static Wave of(ExponentialSum.Term term) {
         return new Wave(turned(term.coefficient(), term.phase()), term.power(), turned(term.base(), term.angle()),
-                Optional.of(term.base()).filter(base -> base.conjugate() == base));
+                PolarForm.of(term.base()).map(PolarForm::modulus));
     }
 
     /** number · e^(i angle). */

@@ -55,4 +55,14 @@ record Condition(int equation, Quantity off, Rational half) {
             return Decision.UNDECIDED;
         }
     }
+
+    /** Whether it is seen to have a value for every value of its decimals. */
+    boolean isDefinedEverywhere() {
+        try {
+            off.spread(SPREAD_BITS);
+            return true;
+        } catch (ArithmeticException notEverywhereDefined) {
+            return false;
+        }
+    }
 }

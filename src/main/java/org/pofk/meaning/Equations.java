@@ -5,6 +5,7 @@ import java.util.Comparator;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.SortedMap;
 import java.util.TreeSet;
 
 /**
@@ -14,7 +15,8 @@ import java.util.TreeSet;
  * it exactly; it is put into the others, whatever is written. Where only equations with several unknowns are left, as
  * with a factor taken out, one unknown is taken at face value and the others are judged given it: the one that leaves
  * the fewest others wrong, of equals the one in the most equations, then the first. Whether all can hold together is
- * then decided for every value that the unknown stands for ({@link Holding}).
+ * then decided for every value that the unknown stands for ({@link Holding}). In an equation that has its decimals to
+ * itself, a coefficient in two parts, the others may take up what one is off: where it can hold, all are right.
  */
 public final class Equations {
     /** Unknowns that are tried as the one to be taken at face value. */
@@ -59,11 +61,17 @@ public final class Equations {
 
     private static Solution solution(Propagation propagation) {
         Map<Written, WrittenNumber> numbers = new LinkedHashMap<>();
-        propagation.right().forEach((decimal, value) ->
-                numbers.put(decimal, WrittenNumber.of(decimal, value.with(FaceValues.of(propagation.free())))));
+        SortedMap<Integer, Decision> holding = Holding.of(propagation);
+        propagation.right().forEach((decimal, value) -> {
+            int equation = propagation.solvedBy(decimal);
+            Quantity atFaceValue = value.with(FaceValues.of(propagation.free()));
+            boolean isShared = propagation.standsAlone(equation) && holding.get(equation) == Decision.YES;
+            numbers.put(decimal, isShared ? WrittenNumber.nearest(decimal, atFaceValue)
+                    : WrittenNumber.of(decimal, atFaceValue));
+        });
         TreeSet<Integer> failing = new TreeSet<>();
         boolean undecided = false;
-        for (Map.Entry<Integer, Decision> equation : Holding.of(propagation).entrySet()) {
+        for (Map.Entry<Integer, Decision> equation : holding.entrySet()) {
             if (equation.getValue() == Decision.NO) {
                 failing.add(equation.getKey());
             }

@@ -9,8 +9,9 @@ import java.util.SortedMap;
 import java.util.TreeMap;
 
 /**
- * Whether equations can hold with every decimal within half a unit, once what can be solved is. Conditions without free
- * decimals stand for themselves; those that share a free decimal can hold when some value of it, within half a unit,
+ * Whether equations can hold with every decimal within half a unit, once what can be solved is. An equation whose
+ * decimals are in no other is decided by itself: it can hold where it takes both signs over all that they stand for.
+ * Conditions without free decimals stand for themselves; those that share a free decimal can hold when some value of it, within half a unit,
  * suits them all: that at face value, or one found by halving its interval, pieces that suit one condition nowhere
  * being left out.
  */
@@ -29,7 +30,9 @@ final class Holding {
         Holding holding = new Holding(propagation);
         List<Condition> shared = new ArrayList<>();
         for (Condition condition : holding.conditions()) {
-            if (condition.off().decimals().stream().anyMatch(propagation.free()::contains)) {
+            if (propagation.standsAlone(condition.equation())) {
+                holding.note(condition, holding.ofSpread(condition));
+            } else if (condition.off().decimals().stream().anyMatch(propagation.free()::contains)) {
                 shared.add(condition);
             } else {
                 holding.note(condition, condition.holds());
@@ -78,6 +81,16 @@ final class Holding {
         }
     }
 
+    /** That of an equation whose decimals are its own: at face value, or for some of the values they all stand for. */
+    private Decision ofSpread(Condition condition) {
+        if (condition.holds() == Decision.YES) {
+            return Decision.YES;
+        }
+        Condition asWritten = Condition.zero(condition.equation(),
+                propagation.differenceAsWritten(condition.equation()));
+        return asWritten.everywhere(Map.of()) == Decision.NO ? Decision.NO : changesSign(asWritten);
+    }
+
     private Optional<Written> firstFree(Condition condition) {
         List<Written> within = condition.off().decimals();
         return propagation.free().stream().filter(within::contains).findFirst();
@@ -119,6 +132,9 @@ final class Holding {
 
     /** A real number that hangs on decimals continuously and takes both signs at the ends of them is zero between. */
     private static Decision changesSign(Condition condition) {
+        if (!condition.isDefinedEverywhere()) {
+            return Decision.UNDECIDED;
+        }
         List<Written> decimals = condition.off().decimals();
         boolean negative = false;
         boolean positive = false;

@@ -1,12 +1,14 @@
 package org.pofk.meaning;
 
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
+import java.util.stream.IntStream;
 
 /**
  * Equations solved for one decimal after the other: the first open one with a single unknown that can be isolated gives
@@ -91,6 +93,18 @@ final class Propagation {
     /** The equation that gave a decimal's value. */
     int solvedBy(Written decimal) {
         return solvedBy.get(decimal);
+    }
+
+    /** Whether an equation has several decimals, and none of them is in another equation. */
+    boolean standsAlone(int equation) {
+        List<Written> own = equations.get(equation).written().decimals();
+        return own.size() > 1 && IntStream.range(0, equations.size()).filter(other -> other != equation)
+                .allMatch(other -> Collections.disjoint(equations.get(other).written().decimals(), own));
+    }
+
+    /** written − right as it stands. */
+    Quantity differenceAsWritten(int equation) {
+        return equations.get(equation).written().minus(equations.get(equation).right());
     }
 
     /** The decimals of an equation that are neither solved for nor free, in order of reading. */

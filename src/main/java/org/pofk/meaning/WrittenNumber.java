@@ -1,6 +1,7 @@
 package org.pofk.meaning;
 
 import java.util.Optional;
+import org.pofk.exact.Rational;
 
 /**
  * A written decimal beside the value it should have. Certified.
@@ -14,6 +15,17 @@ public record WrittenNumber(Written written, Quantity right, Fit fit, String dig
     public static WrittenNumber of(Written written, Quantity right) {
         Fit fit = fit(written, right);
         return new WrittenNumber(written, right, fit, RightDigits.of(written, right, fit));
+    }
+
+    /** Right: with the value it stands for that is nearest to a real number, itself where it stands for that. */
+    static WrittenNumber nearest(Written written, Quantity real) {
+        WrittenNumber number = of(written, real);
+        if (number.fit == Fit.RIGHT) {
+            return number;
+        }
+        boolean isAbove = real.minus(Quantity.of(written.value())).sign().filter(sign -> sign > 0).isPresent();
+        Rational end = isAbove ? written.value().plus(written.halfUnit()) : written.value().minus(written.halfUnit());
+        return new WrittenNumber(written, Quantity.of(end), Fit.RIGHT, written.text());
     }
 
     private static Fit fit(Written written, Quantity right) {
