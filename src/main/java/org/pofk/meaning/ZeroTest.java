@@ -1,11 +1,13 @@
 package org.pofk.meaning;
 
 import java.util.Optional;
+import org.pofk.exact.Rational;
 
 /**
  * Whether a number is zero. No, when an enclosure excludes zero; yes, when it is zero in canonical form, or when an
- * enclosure closer than a separation bound still holds it. Certified; what isn't seen to be algebraic, or needs more than {@link #MOST_BITS}, stays undecided
- * unless some {@value #TRIED_BITS} bits exclude zero.
+ * enclosure closer than a separation bound still holds it; sums of angles by how far they turn. Certified; what isn't
+ * seen to be algebraic, or needs more than {@link #MOST_BITS}, stays undecided unless some {@value #TRIED_BITS} bits
+ * exclude zero.
  */
 public final class ZeroTest {
     /** Beyond so many bits it isn't decided. */
@@ -34,13 +36,19 @@ public final class ZeroTest {
     }
 
     private static Decision exactly(Quantity quantity) {
-        Optional<Canonical.Form> form = Canonical.form(quantity);
+        Optional<Canonical.Form> form = Canonical.form(quantity).or(() -> ofTurn(quantity));
         if (form.isEmpty()) {
             return bySeparation(quantity, fromHeights(quantity));
         }
         return form.get().isZero()
                 ? Decision.YES
                 : bySeparation(form.get().value(), Optional.of(form.get().separation()));
+    }
+
+    /** That of e^(ix) − 1 for a sum x of angles: with |x| < 1 it is zero only where x is. */
+    private static Optional<Canonical.Form> ofTurn(Quantity angle) {
+        return Within.series(angle) && angle.enclose(FIRST_BITS).modulus().upper().compareTo(Rational.ONE) < 0
+                ? Canonical.form(Quantity.i().times(angle).exponential().minus(Quantity.ONE)) : Optional.empty();
     }
 
     private static Optional<Long> fromHeights(Quantity quantity) {
