@@ -14,6 +14,7 @@ import org.pofk.answer.StepValue;
 import org.pofk.answer.StepValues;
 import org.pofk.answer.When;
 import org.pofk.chain.Chain;
+import org.pofk.exact.Ball;
 import org.pofk.exact.Rational;
 import org.pofk.modes.ClosedForm;
 import org.pofk.modes.Mode;
@@ -37,6 +38,8 @@ public final class CourseChart {
     private static final int INTERVALS = 6;
     private static final int STEP_INTERVALS = 10;
     private static final int SIGN_BITS = 64;
+    private static final int DRAWN_BITS = 32;
+    private static final int MOST_BITS = 4096;
 
     private CourseChart() {
     }
@@ -108,7 +111,20 @@ public final class CourseChart {
 
     /** The value, or the middle of a narrow enclosure. */
     static Rational near(StepValue value) {
-        return value.exact().orElseGet(() -> value.enclosure().enclose(SIGN_BITS).middle());
+        return value.exact().orElseGet(() -> rounded(value));
+    }
+
+    /** The value to some nine digits, which is what can be drawn; zero for what can't be told from it. */
+    static Rational rounded(StepValue value) {
+        Ball ball = value.enclosure().enclose(SIGN_BITS);
+        for (int bits = 2 * SIGN_BITS; isCoarse(ball) && bits <= MOST_BITS; bits *= 2) {
+            ball = value.enclosure().enclose(bits);
+        }
+        return ball.middle();
+    }
+
+    private static boolean isCoarse(Ball ball) {
+        return !ball.isExact() && ball.radius().shiftLeft(DRAWN_BITS).compareTo(ball.center().abs()) > 0;
     }
 
     /** A power of ten, at most a fiftieth of what the outputs move over. */

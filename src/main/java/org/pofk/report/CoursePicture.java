@@ -85,7 +85,7 @@ final class CoursePicture {
     }
 
     private Point place(StepValue value) {
-        return place(Rational.of(value.k()), CourseChart.near(value));
+        return place(Rational.of(value.k()), CourseChart.rounded(value));
     }
 
     private void axes() {
@@ -180,7 +180,7 @@ final class CoursePicture {
     }
 
     private Prose name(Chart.Curve curve) {
-        return Prose.name(TextWidth.cut(curve.name(), SIZE, WIDEST_LABEL / 1.06));
+        return Prose.name(TextWidth.cut(curve.name(), SIZE, WIDEST_LABEL / TextWidth.BOLD));
     }
 
     /** {@code → 23/2813}; empty without a long run, or where there is no room for it. */
@@ -193,7 +193,7 @@ final class CoursePicture {
     }
 
     private double labelWidth(Chart.Curve curve) {
-        return Math.max(TextWidth.of(TextWidth.text(name(curve)), SIZE) * 1.06,
+        return Math.max(TextWidth.of(TextWidth.text(name(curve)), SIZE) * TextWidth.BOLD,
                 tendency(curve).map(text -> TextWidth.of(text, SMALL)).orElse(0.0));
     }
 

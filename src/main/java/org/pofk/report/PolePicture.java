@@ -81,7 +81,7 @@ final class PolePicture {
         String names = String.join(", ", set.outputs());
         double room = plot.width() + LEFT / 2.0;
         shapes.add(new Label(new Point(plot.x() - LEFT + 14, plot.y() - 34), Anchor.START,
-                Prose.name(TextWidth.cut(names, SIZE, room)), Ink.TEXT, SIZE, Setting.BOLD));
+                Prose.name(TextWidth.cut(names, SIZE, room / TextWidth.BOLD)), Ink.TEXT, SIZE, Setting.BOLD));
     }
 
     private static Label text(double x, double y, Anchor anchor, String words, int size) {

@@ -120,12 +120,12 @@ public final class SvgChart {
         for (String word : title.split(" +")) {
             String last = lines.get(lines.size() - 1);
             String longer = last.isEmpty() ? word : last + " " + word;
-            if (last.isEmpty() || lines.size() == 3 || TextWidth.of(longer, TITLE_SIZE) * 1.06 <= width) {
+            if (last.isEmpty() || lines.size() == 3 || TextWidth.of(longer, TITLE_SIZE) * TextWidth.BOLD <= width) {
                 lines.set(lines.size() - 1, longer);
             } else {
                 lines.add(word);
             }
         }
-        return lines.stream().map(line -> TextWidth.cut(line, TITLE_SIZE, width / 1.06)).toList();
+        return lines.stream().map(line -> TextWidth.cut(line, TITLE_SIZE, width / TextWidth.BOLD)).toList();
     }
 }

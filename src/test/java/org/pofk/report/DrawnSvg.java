@@ -69,7 +69,8 @@ record DrawnSvg(Element root) {
     private static Text text(Element element) {
         String words = element.getTextContent();
         int size = Integer.parseInt(element.getAttribute("font-size"));
-        double width = TextWidth.of(words, size);
+        double width = TextWidth.of(words, size)
+                * (element.getAttribute("font-weight").equals("bold") ? TextWidth.BOLD : 1);
         double x = number(element, "x");
         double y = number(element, "y");
         double left = switch (element.getAttribute("text-anchor")) {
