@@ -16,6 +16,8 @@ final class HelpCommand implements Work {
             "                        (also what  pofk MODEL  does)",
             "  pofk inspect MODEL    the structure: classes, periods, long run, warnings",
             "  pofk simulate MODEL   random walks with intervals, beside the exact values",
+            "  pofk when MODEL       from which step a condition holds, and whether for ever",
+            "  pofk passage MODEL    how long until a set of states is first entered",
             "  pofk check CLAIMS     a derivation made by hand: which steps are right, which",
             "                        are wrong, and by which slip",
             "  pofk draw MODEL       p(k) over steps, its poles, or the states, as a figure",

@@ -19,8 +19,8 @@ import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
 
 /** {@code pofk passage MODEL}: how long until a set of states is entered. */
-@Command(description = {"Says whether and when a set of states is first entered: the law of the first passage as a",
-    "formula, mean, variance and percentiles, and the same from every state."})
+@Command(description = {"Says whether and when a set of states is first entered: the law of the first",
+    "passage as a formula, mean, variance and percentiles; and from every state."})
 final class PassageCommand implements Work {
     @Mixin
     private ModelOptions model;
