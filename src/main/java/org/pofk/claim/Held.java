@@ -2,25 +2,15 @@ package org.pofk.claim;
 
 import java.util.ArrayList;
 import java.util.List;
-import org.pofk.exact.Rational;
 import org.pofk.meaning.Decision;
 import org.pofk.meaning.Equation;
 import org.pofk.meaning.Quantity;
 
 /** A number of a claim beside the one it should be. */
 record Held(StatedNumber stated, Quantity right) {
-    private static final int BITS = 64;
-
-    /**
-     * Whether they are the same number, decimals at face value. Fractions of π are compared as angles: what is less
-     * than a turn and turns nothing is zero.
-     */
+    /** Whether they are the same number, decimals at face value. */
     Decision isExact() {
-        Quantity error = error();
-        Decision isZero = error.isZero();
-        return isZero == Decision.UNDECIDED && error.enclose(BITS).modulus().upper().compareTo(Rational.ONE) < 0
-                && Quantity.i().times(error).exponential().minus(Quantity.ONE).isZero() == Decision.YES
-                ? Decision.YES : isZero;
+        return error().isZero();
     }
 
     /** Whether each of its decimals is right to its digits. */

@@ -42,10 +42,13 @@ final class JudgedPart {
             return steps.areExact(claimed, truth) == Decision.YES
                     || Approximation.of(claimed, truth, steps, claim).holds() == Decision.YES;
         }
-        return Refutation.of(Loosened.of(claimed), truth, steps, FIRST_STEPS).isEmpty()
-                && (steps.areExact(claimed, truth) == Decision.YES
-                || isRounded(ModeEquations.of(claimed, truth, steps)) && claim.safeSide().filter(side ->
-                SafeSide.of(claimed, truth, steps.range(), side).holds() != Decision.YES).isEmpty());
+        if (Refutation.of(Loosened.of(claimed), truth, steps, FIRST_STEPS).isPresent()) {
+            return false;
+        }
+        ModeEquations modes = ModeEquations.of(claimed, truth, steps);
+        return modes.areExact() == Decision.YES || steps.areExact(claimed, truth) == Decision.YES
+                || isRounded(modes) && claim.safeSide().filter(side ->
+                SafeSide.of(claimed, truth, steps.range(), side).holds() != Decision.YES).isEmpty();
     }
 
     private static boolean isRounded(ModeEquations modes) {
@@ -57,13 +60,11 @@ final class JudgedPart {
             return approximate();
         }
         OptionalLong refuted = Refutation.of(Loosened.of(claimed), truth, steps, FIRST_STEPS);
-        if (refuted.isEmpty()) {
-            Decision exact = steps.areExact(claimed, truth);
-            if (exact == Decision.YES) {
-                return exact();
-            }
-        }
         ModeEquations modes = ModeEquations.of(claimed, truth, steps);
+        if (refuted.isEmpty()
+                && (modes.areExact() == Decision.YES || steps.areExact(claimed, truth) == Decision.YES)) {
+            return exact();
+        }
         RightNumbers numbers = RightNumbers.of(modes.plain());
         if (refuted.isEmpty() && modes.fits() && numbers.rounded() != Decision.NO) {
             return rounded(modes, numbers, numbers.rounded() == Decision.YES ? Verdict.ROUNDED : Verdict.UNDECIDED);
@@ -94,7 +95,7 @@ final class JudgedPart {
         unsafe.ifPresent(side -> remarks.add(side.told(claim.safeSide().orElseThrow())));
         return new Judgement(unsafe.isPresent() ? Verdict.WRONG : verdict, largest.difference(Measure.ABSOLUTE),
                 unsafe.map(SafeSide::step).orElse(OptionalLong.empty()), judged, remarks,
-                MendedFormula.of(text, judged));
+                RightText.of(text, judged).orElse(text.text()));
     }
 
     private Optional<SafeSide> safeSide() {

@@ -8,8 +8,6 @@ import org.pofk.exact.Polynomial;
 import org.pofk.exact.Rational;
 import org.pofk.formula.Formula;
 import org.pofk.formula.Formulas;
-import org.pofk.formula.Latex;
-import org.pofk.formula.PlainText;
 import org.pofk.meaning.Decision;
 import org.pofk.meaning.Precision;
 import org.pofk.meaning.Quantity;
@@ -132,7 +130,7 @@ final class JudgedPolynomial {
                     Formulas.power(symbol, Formulas.number(power))));
         }
         Formula sum = Formulas.sum(terms);
-        return stated.is().notation() == FormulaText.Notation.LATEX ? Latex.write(sum) : PlainText.ASCII.write(sum);
+        return RightFormula.written(sum, stated.is());
     }
 
     private static Formula number(Rational value, List<Written> decimals) {

@@ -4,7 +4,9 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalLong;
+import java.util.stream.Stream;
 import org.pofk.claim.Judgement.JudgedNumber;
+import org.pofk.exact.Factoring;
 import org.pofk.exact.Polynomial;
 import org.pofk.exact.Rational;
 import org.pofk.formula.Formula;
@@ -13,8 +15,8 @@ import org.pofk.meaning.Decision;
 import org.pofk.meaning.Fit;
 import org.pofk.meaning.Precision;
 import org.pofk.meaning.Quantity;
-import org.pofk.meaning.RationalForm;
 import org.pofk.meaning.RationalForm.Factor;
+import org.pofk.meaning.RationalForm;
 import org.pofk.text.RefusedException;
 
 /**
@@ -84,10 +86,12 @@ final class JudgedTransform {
             judged.stream().filter(number -> number.fit() == Fit.CUT_OFF).forEach(number ->
                     remarks.add(number.written().text() + " is cut off, not rounded: " + number.right()));
             return new Judgement(numbers.rounded() == Decision.YES ? Verdict.ROUNDED : Verdict.UNDECIDED,
-                    Optional.empty(), OptionalLong.empty(), judged, remarks, MendedFormula.of(stated.is(), judged));
+                    Optional.empty(), OptionalLong.empty(), judged, remarks,
+                    RightText.of(stated.is(), judged).orElse(stated.is().text()));
         }
-        String right = equations.fits() && numbers.isMended() ? MendedFormula.of(stated.is(), judged)
-                : MendedFormula.written(rightFormula(), stated.is());
+        String right = Optional.of(judged).filter(each -> equations.fits() && numbers.isMended())
+                .flatMap(each -> RightText.of(stated.is(), each))
+                .orElseGet(() -> RightFormula.written(rightFormula(), stated.is()));
         return new Judgement(Verdict.WRONG, Optional.empty(), OptionalLong.empty(), judged, remarks, right);
     }
 
@@ -144,7 +148,7 @@ final class JudgedTransform {
     }
 
     private List<JudgedNumber> decimals() {
-        return form.summands().stream().flatMap(summand -> java.util.stream.Stream.concat(
+        return form.summands().stream().flatMap(summand -> Stream.concat(
                 summand.front().decimals().stream(), summand.factors().stream()
                         .flatMap(factor -> Quantity.sum(factor.coefficients()).decimals().stream()))).distinct()
                 .map(written -> new JudgedNumber(written, written.text(), Fit.RIGHT)).toList();
@@ -170,8 +174,8 @@ final class JudgedTransform {
     private Formula rightFormula() {
         Formula.Symbol z = new Formula.Symbol(VARIABLE);
         Polynomial<Rational> numerator = target.fraction().numerator();
-        Formula below = Formulas.factored(org.pofk.exact.Factoring.of(target.fraction().denominator()), z);
+        Formula below = Formulas.factored(Factoring.of(target.fraction().denominator()), z);
         return numerator.isZero() ? Formulas.number(0)
-                : Formulas.quotient(Formulas.factored(org.pofk.exact.Factoring.of(numerator), z), below);
+                : Formulas.quotient(Formulas.factored(Factoring.of(numerator), z), below);
     }
 }

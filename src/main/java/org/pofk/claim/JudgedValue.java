@@ -50,8 +50,7 @@ final class JudgedValue {
     private static Judgement against(Rational value, Statement.Value stated, Claim claim) throws RefusedException {
         Holding holding = new Holding(claim);
         holding.hold(stated.is(), Quantity.of(value));
-        return holding.judgement(texts -> stated.output().name() + " at " + stated.at() + ": " + texts.all().get(0),
-                OptionalLong.of(stated.at()));
+        return holding.judgement(texts -> texts.all().get(0), OptionalLong.of(stated.at()));
     }
 
     private static Judgement alike(Judgement low, Judgement high) {

@@ -45,6 +45,17 @@ record ModeEquations(List<ModeEquation> equations, boolean fits) {
         return equations.stream().map(ModeEquation::equation).toList();
     }
 
+    /** Whether all hold at face value, each in the numbers of its own mode only. The formula then is p(k). */
+    Decision areExact() {
+        Decision all = fits ? Decision.YES : Decision.NO;
+        for (int i = 0; i < equations.size() && all != Decision.NO; i++) {
+            Equation equation = equations.get(i).equation();
+            Decision one = equation.written().minus(equation.right()).isZero();
+            all = one == Decision.YES ? all : one;
+        }
+        return all;
+    }
+
     private static final class Building {
         private final List<ModeEquation> equations = new ArrayList<>();
         private boolean fits = true;
@@ -126,7 +137,7 @@ record ModeEquations(List<ModeEquation> equations, boolean fits) {
                 complexCoefficient(pole, power, claimed, right);
             } else if (claimed.size() == 1) {
                 amplitude(pole, power, claimed.get(0), right.times(Rational.TWO));
-            } else if (claimed.size() == 2 && terms.stream().allMatch(term -> term.phase().decimals().isEmpty())) {
+            } else if (claimed.size() == 2) {
                 twoDirections(pole, power, claimed, right.times(Rational.TWO));
             } else {
                 sumOfDirections(pole, power, claimed, right.times(Rational.TWO));
@@ -211,14 +222,23 @@ record ModeEquations(List<ModeEquation> equations, boolean fits) {
             Quantity across = e.times(f.conjugate()).imaginaryPart();
             Term first = claimed.get(0).term();
             Term second = claimed.get(1).term();
-            if (across.isZero() != Decision.NO) {
+            if (Spread.mayBe(across, Quantity.ZERO)) {
                 sumOfDirections(pole, power, claimed, target);
                 return;
             }
-            add(About.COEFFICIENT, Optional.of(pole), power, List.of(first), first.coefficient(),
-                    target.times(f.conjugate()).imaginaryPart().dividedBy(across));
-            add(About.COEFFICIENT, Optional.of(pole), power, List.of(second), second.coefficient(),
-                    target.times(e.conjugate()).imaginaryPart().dividedBy(across).negate());
+            alongOne(pole, power, first, across, target.times(f.conjugate()).imaginaryPart());
+            alongOne(pole, power, second, across, target.times(e.conjugate()).imaginaryPart().negate());
+        }
+
+        /** a · across = size, as a = size/across where only a is written in decimals. */
+        private void alongOne(TruePole pole, int power, Term term, Quantity across, Quantity size) {
+            if (across.decimals().isEmpty() && size.decimals().isEmpty()) {
+                add(About.COEFFICIENT, Optional.of(pole), power, List.of(term), term.coefficient(),
+                        size.dividedBy(across));
+            } else {
+                add(About.COEFFICIENT, Optional.of(pole), power, List.of(term),
+                        term.coefficient().times(across).minus(size), Quantity.ZERO);
+            }
         }
 
         void extra(ClaimedTerm claimed) {

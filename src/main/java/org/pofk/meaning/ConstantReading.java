@@ -39,13 +39,13 @@ final class ConstantReading {
             return scalars.exponential(exponent);
         }
         if (exponent.face().isEmpty()) {
-            throw RefusedPart.at(part.parts().get(1), "exponent-not-whole", "is no whole number: an exponent is a whole"
-                    + " number or a half, and other powers are written with exp(…)");
+            throw RefusedPart.at(part.parts().get(1), "exponent-not-whole", "is no fraction: an exponent is a whole"
+                    + " number or a fraction, and other powers are written with exp(…)");
         }
         return power(base, exponent.face().get(), part);
     }
 
-    /** A number to a rational power, by main square roots; 0^0 is one. */
+    /** A number to a rational power, by main roots; 0^0 is one. */
     Scalar power(Scalar base, Rational exponent, ParsedFormula part) {
         if (exponent.signum() < 0) {
             requireNotZero(base, part.parts().get(0));
@@ -54,8 +54,8 @@ final class ConstantReading {
             return Scalars.of(0);
         }
         return scalars.power(base, exponent).orElseThrow(() -> RefusedPart.at(part, "exponent-not-whole",
-                "is to the power " + exponent + ": whole numbers and halves are understood; write the root as a"
-                        + " number, or the power with exp(…)"));
+                "is to the power " + exponent + ": besides whole numbers and halves only roots of positive numbers, up to"
+                        + " the 64th, are understood; write the root as a number, or the power with exp(…)"));
     }
 
     Scalar call(Formula.Function function, List<Scalar> arguments, ParsedFormula part) {

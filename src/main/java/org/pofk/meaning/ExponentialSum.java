@@ -19,8 +19,8 @@ import org.pofk.text.Span;
  * What a formula in k means: Σ coefficient · k^power · base^k · cos(angle · k + phase) plus impulses.
  *
  * <p>Products are multiplied out; terms whose power, base, angle and phase are written alike (the same at face value,
- * decimals to the same last place, factors in any order) are one. Bases that are equal but written differently may
- * still stand apart, so {@link #order} is a bound. r^k cos(θk + φ) stays one term, with its numbers as written; sin x
+ * decimals to the same last place, factors in any order) are one, but for real bases in decimals at two places, which
+ * may stand for two near numbers. Bases that are equal may so stand apart, and {@link #order} is a bound. r^k cos(θk + φ) stays one term, with its numbers as written; sin x
  * is cos(x − π/2); a product of two cosines is two terms. binomial(n, p) is its polynomial in k.
  *
  * @param terms    in the order of writing; no coefficient is zero as written

@@ -1,6 +1,7 @@
 package org.pofk.meaning;
 
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -80,7 +81,14 @@ final class PolarArithmetic {
                 scalars.times(value, valueAt(b, step)), scalars::plus));
         b.impulses().forEach((step, value) -> impulses.merge(step,
                 scalars.times(valueOfTerms(a, step), value), scalars::plus));
-        return tidy(terms, impulses, a.scope().and(b.scope()));
+        return tidy(uncancelled(terms), impulses, a.scope().and(b.scope()));
+    }
+
+    /** Without terms that cancel by being multiplied out, as in (1 − x)(1 + x). */
+    private List<PolarTerm> uncancelled(List<PolarTerm> terms) {
+        Map<List<Object>, Scalar> totals = new HashMap<>();
+        terms.forEach(term -> totals.merge(term.atFaceValue(), term.coefficient(), scalars::plus));
+        return terms.stream().filter(term -> !totals.get(term.atFaceValue()).isPlainZero()).toList();
     }
 
     /** The place of a term that is multiplied out: that of the one among several, of both where both are. */

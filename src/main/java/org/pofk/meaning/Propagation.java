@@ -65,8 +65,10 @@ final class Propagation {
             List<Written> unknowns = unknowns(equation);
             if (unknowns.size() == 1) {
                 Written unknown = unknowns.get(0);
-                Optional<Quantity> value = Isolating.solve(equations.get(equation).written().with(right), unknown,
-                        equations.get(equation).right());
+                Quantity written = equations.get(equation).written().with(right);
+                Optional<Quantity> value = isExact(written, unknown, equations.get(equation).right())
+                        ? Optional.of(Quantity.of(unknown.value()))
+                        : Isolating.solve(written, unknown, equations.get(equation).right());
                 if (value.isPresent()) {
                     right.put(unknown, value.get());
                     solvedBy.put(unknown, equation);
@@ -75,6 +77,11 @@ final class Propagation {
             }
         }
         return Optional.empty();
+    }
+
+    /** Whether the equation holds with its only decimal at face value. */
+    private static boolean isExact(Quantity written, Written unknown, Quantity target) {
+        return written.decimals().equals(List.of(unknown)) && written.minus(target).isZero() == Decision.YES;
     }
 
     List<Integer> open() {

@@ -6,8 +6,8 @@ import org.pofk.exact.Enclosed;
 import org.pofk.exact.Rational;
 
 /**
- * The digits of the value a written decimal should have, written as its author writes: plain, with an exponent, or as
- * a percentage. Certified.
+ * The digits of the value a written decimal should have: its own where they are right, else as its author writes:
+ * plain, with an exponent, or as a percentage. Certified.
  */
 final class RightDigits {
     private RightDigits() {
@@ -21,7 +21,10 @@ final class RightDigits {
         String digits = text(written, right, 0);
         // rounded alike though it is wrong, or rounded the other way in a tie: one place more shows it
         boolean alike = denoted(digits).equals(written.value());
-        return alike == (fit == Fit.RIGHT) ? digits : text(written, right, 1);
+        if (alike && fit == Fit.RIGHT) {
+            return written.text();
+        }
+        return alike || fit == Fit.RIGHT ? text(written, right, 1) : digits;
     }
 
     private static Rational denoted(String digits) {

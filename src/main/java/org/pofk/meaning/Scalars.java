@@ -1,5 +1,6 @@
 package org.pofk.meaning;
 
+import java.math.BigInteger;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
@@ -20,7 +21,7 @@ final class Scalars {
     /** Heaviest number, and so the most that one step spends. */
     static final int MOST_WEIGHT = 1 << 15;
     private static final int GLANCE = 64;
-    private static final int MOST_ROOTS = 6;
+    private static final BigInteger LARGEST_ROOT = BigInteger.valueOf(64);
 
     private final Map<List<Object>, Integer> rests = new HashMap<>();
     private final Work work;
@@ -176,20 +177,28 @@ final class Scalars {
     }
 
     /**
-     * a to a rational power whose denominator is a power of two, by main square roots; nothing for other
-     * denominators. a isn't zero where the exponent is negative.
+     * a to a rational power: by main square roots, and where a is seen to be positive by its positive root of any small
+     * degree; nothing for other exponents. a isn't zero where the exponent is negative.
      */
     Optional<Scalar> power(Scalar a, Rational exponent) {
         int roots = exponent.denominator().getLowestSetBit();
-        if (exponent.denominator().bitCount() != 1 || roots > MOST_ROOTS) {
+        BigInteger odd = exponent.denominator().shiftRight(roots);
+        if (exponent.denominator().compareTo(LARGEST_ROOT) > 0
+                || !odd.equals(BigInteger.ONE) && !(a.real() && isNotNegative(a))) {
             return Optional.empty();
         }
         int times = of(Rational.of(exponent.numerator())).whole().orElseThrow();
-        Scalar root = a;
+        Scalar root = root(a, odd.intValueExact());
         for (int i = 0; i < roots; i++) {
             root = squareRoot(root);
         }
         return Optional.of(pow(root, times));
+    }
+
+    /** The positive root of what is positive. */
+    private Scalar root(Scalar a, int degree) {
+        return degree == 1 ? a : made(a.quantity().root(degree), Rational.ONE, rest("root", degree, a.factor(), a.rest()),
+                Optional.empty(), true, a.weight() + (long) degree);
     }
 
     Scalar squareRoot(Scalar a) {

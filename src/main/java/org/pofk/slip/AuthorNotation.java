@@ -1,36 +1,19 @@
 package org.pofk.slip;
 
-import java.util.Set;
 import org.pofk.claim.FormulaText;
 import org.pofk.formula.Formula;
-import org.pofk.formula.FormulaParser;
-import org.pofk.formula.FormulaReading;
 import org.pofk.formula.Latex;
-import org.pofk.formula.LatexReader;
-import org.pofk.formula.ParsedFormula;
 import org.pofk.formula.PlainText;
-import org.pofk.text.Places;
-import org.pofk.text.RefusedException;
 
 /** What an edit writes, in plain notation or in LaTeX. */
 enum AuthorNotation {
     PLAIN("*", "(", ")", "(", ")", " deg", "1/2*") {
-        @Override
-        ParsedFormula parse(String text, Places places, FormulaReading reading) throws RefusedException {
-            return FormulaParser.parse(text, places, Set.of(), reading);
-        }
-
         @Override
         String write(Formula formula) {
             return PlainText.ASCII.write(formula);
         }
     },
     LATEX(" \\cdot ", "\\left(", "\\right)", "{", "}", "^{\\circ}", "\\frac{1}{2} \\cdot ") {
-        @Override
-        ParsedFormula parse(String text, Places places, FormulaReading reading) throws RefusedException {
-            return LatexReader.parse(text, places, reading);
-        }
-
         @Override
         String write(Formula formula) {
             return Latex.write(formula);
@@ -59,8 +42,6 @@ enum AuthorNotation {
     static AuthorNotation of(FormulaText.Notation notation) {
         return notation == FormulaText.Notation.LATEX ? LATEX : PLAIN;
     }
-
-    abstract ParsedFormula parse(String text, Places places, FormulaReading reading) throws RefusedException;
 
     abstract String write(Formula formula);
 

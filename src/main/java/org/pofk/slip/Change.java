@@ -6,9 +6,10 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.SortedMap;
 import java.util.TreeMap;
+import org.pofk.claim.AuthorText;
+import org.pofk.claim.AuthorText.Replacement;
 import org.pofk.claim.FormulaText;
 import org.pofk.claim.Statement;
-import org.pofk.slip.AuthorText.Replacement;
 import org.pofk.text.Span;
 
 /**

@@ -8,6 +8,8 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.TreeMap;
+import org.pofk.claim.AuthorText;
+import org.pofk.claim.AuthorText.Replacement;
 import org.pofk.claim.Claim;
 import org.pofk.claim.Judgement;
 import org.pofk.claim.Statement;
@@ -15,7 +17,6 @@ import org.pofk.claim.Truth;
 import org.pofk.formula.Formula;
 import org.pofk.meaning.Fit;
 import org.pofk.modes.Mode;
-import org.pofk.slip.AuthorText.Replacement;
 import org.pofk.slip.FormulaSurvey.Constant;
 
 /** Every change of a statement's texts that may undo a slip; most are soon refuted. */

@@ -1,7 +1,8 @@
 package org.pofk.slip;
 
 import java.util.List;
-import org.pofk.slip.AuthorText.Replacement;
+import org.pofk.claim.AuthorText;
+import org.pofk.claim.AuthorText.Replacement;
 import org.pofk.text.Span;
 
 /**

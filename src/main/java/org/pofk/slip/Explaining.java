@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.Set;
 import java.util.stream.IntStream;
+import org.pofk.claim.AuthorText;
 import org.pofk.claim.Claim;
 import org.pofk.claim.FormulaText;
 import org.pofk.claim.Judgement;

@@ -10,6 +10,7 @@ import java.util.stream.IntStream;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Output;
 import org.pofk.chain.SparseMatrix;
+import org.pofk.claim.AuthorText;
 import org.pofk.claim.FormulaText;
 import org.pofk.claim.OutputTruth;
 import org.pofk.claim.Statement;

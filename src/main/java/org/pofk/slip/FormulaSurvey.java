@@ -3,6 +3,7 @@ package org.pofk.slip;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import org.pofk.claim.AuthorText;
 import org.pofk.formula.Formula;
 import org.pofk.formula.ParsedFormula;
 

@@ -3,6 +3,8 @@ package org.pofk.slip;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import org.pofk.claim.AuthorText;
+import org.pofk.claim.AuthorText.Replacement;
 import org.pofk.exact.Ball;
 import org.pofk.exact.Enclosed;
 import org.pofk.exact.Rational;
@@ -11,7 +13,6 @@ import org.pofk.formula.Formulas;
 import org.pofk.modes.Mode;
 import org.pofk.modes.ModeFormula;
 import org.pofk.modes.RealValue;
-import org.pofk.slip.AuthorText.Replacement;
 
 /** One term of the right formula added at the end, with its numbers as the author would write them. */
 final class MissingEdits {

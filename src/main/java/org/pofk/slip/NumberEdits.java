@@ -6,9 +6,10 @@ import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
+import org.pofk.claim.AuthorText;
+import org.pofk.claim.AuthorText.Replacement;
 import org.pofk.formula.Formula;
 import org.pofk.formula.ParsedFormula;
-import org.pofk.slip.AuthorText.Replacement;
 import org.pofk.slip.FormulaSurvey.Constant;
 import org.pofk.slip.FormulaSurvey.Role;
 

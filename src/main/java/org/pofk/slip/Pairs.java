@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
+import org.pofk.claim.AuthorText;
 import org.pofk.claim.FormulaText;
 import org.pofk.exact.Ball;
 import org.pofk.exact.Rational;

@@ -2,9 +2,10 @@ package org.pofk.slip;
 
 import java.util.ArrayList;
 import java.util.List;
+import org.pofk.claim.AuthorText;
+import org.pofk.claim.AuthorText.Replacement;
 import org.pofk.formula.Formula;
 import org.pofk.formula.ParsedFormula;
-import org.pofk.slip.AuthorText.Replacement;
 import org.pofk.slip.FormulaSurvey.Role;
 import org.pofk.slip.FormulaSurvey.Term;
 import org.pofk.text.Position;

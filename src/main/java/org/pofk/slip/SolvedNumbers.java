@@ -3,6 +3,8 @@ package org.pofk.slip;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import org.pofk.claim.AuthorText;
+import org.pofk.claim.AuthorText.Replacement;
 import org.pofk.claim.FormulaText;
 import org.pofk.exact.Ball;
 import org.pofk.exact.ComplexBall;
@@ -10,7 +12,6 @@ import org.pofk.exact.NotSeparatedException;
 import org.pofk.exact.Rational;
 import org.pofk.formula.ParsedFormula;
 import org.pofk.meaning.StepEvaluation;
-import org.pofk.slip.AuthorText.Replacement;
 
 /**
  * The number that a place of a formula should hold, from the formula's value at one point, all other numbers taken as

@@ -3,10 +3,11 @@ package org.pofk.slip;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import org.pofk.claim.AuthorText;
+import org.pofk.claim.AuthorText.Replacement;
 import org.pofk.exact.Rational;
 import org.pofk.formula.Formula;
 import org.pofk.formula.ParsedFormula;
-import org.pofk.slip.AuthorText.Replacement;
 import org.pofk.slip.FormulaSurvey.Term;
 
 /**

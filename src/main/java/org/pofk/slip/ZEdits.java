@@ -2,10 +2,11 @@ package org.pofk.slip;
 
 import java.util.ArrayList;
 import java.util.List;
+import org.pofk.claim.AuthorText;
+import org.pofk.claim.AuthorText.Replacement;
 import org.pofk.exact.Rational;
 import org.pofk.formula.Formula;
 import org.pofk.formula.ParsedFormula;
-import org.pofk.slip.AuthorText.Replacement;
 import org.pofk.slip.FormulaSurvey.Term;
 
 /** A transform times z, or over z: as a whole, or one of its terms. */

@@ -60,7 +60,7 @@ class EquationsTest {
         List<Quantity> right = List.of(fraction(1, 3), fraction(1, 18), fraction(1, 40));
         Solution solution = Equations.solve(equations(factor, parts, right));
         assertEquals(Decision.YES, solution.holds());
-        assertEquals(List.of("0.667", "0.111", "0.05"), parts.stream()
+        assertEquals(List.of("0.667", "0.111", "0.050"), parts.stream()
                 .map(part -> solution.numbers().get(part).digits()).toList());
     }
 

@@ -41,7 +41,7 @@ class RefusedFormulasTest {
         "2 + k^k | power-of-k 5", "2^(k^2) | argument-not-linear 3", "2^3^k | argument-not-linear 3",
         "cos(k^2) | argument-not-linear 5", "exp(0.5^k) | argument-not-linear 5", "sqrt(k) | function-of-k 1",
         "sqrt(0.5^k) | function-of-k 1", "arctan(k) | function-of-k 1", "k^0.5 | exponent-not-whole 3",
-        "0.5^(k/3) | exponent-not-whole 1", "2^(sqrt(2)*k) | exponent-not-whole 3", "2^pi*k | exponent-not-whole 3",
+        "(-0.5)^(k/3) | exponent-not-whole 1", "2^(sqrt(2)*k) | exponent-not-whole 3", "2^pi*k | exponent-not-whole 3",
         "binomial(k, k) | binomial-argument 13", "binomial(k, -1) | binomial-argument 13",
         "binomial(5-k, 2) | binomial-argument 10", "binomial(k/2, 2) | argument-not-whole 10",
         "binomial(k^2, 2) | argument-not-linear 10", "delta(k/2) | argument-not-whole 7",

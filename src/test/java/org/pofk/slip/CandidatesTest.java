@@ -10,6 +10,7 @@ import java.util.OptionalLong;
 import java.util.stream.IntStream;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
+import org.pofk.claim.AuthorText;
 import org.pofk.claim.Claim;
 import org.pofk.claim.Judgement;
 import org.pofk.claim.Truth;

@@ -1,17 +1,19 @@
-package org.pofk.slip;
+package org.pofk.claim;
 
 import java.util.Comparator;
 import java.util.IdentityHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
 import java.util.stream.Stream;
-import org.pofk.claim.FormulaText;
 import org.pofk.formula.Formula;
+import org.pofk.formula.FormulaParser;
 import org.pofk.formula.FormulaReading;
 import org.pofk.formula.FormulaReading.ImaginaryUnit;
 import org.pofk.formula.FormulaReading.PlusMinus;
 import org.pofk.formula.FormulaReading.Subject;
+import org.pofk.formula.LatexReader;
 import org.pofk.formula.ParsedFormula;
 import org.pofk.text.Places;
 import org.pofk.text.Position;
@@ -23,7 +25,7 @@ import org.pofk.text.Span;
  * are UTF-16 units of the text; every part is known by its node in {@link #tree}, which is read from the text alone,
  * and by its place in the file.
  */
-final class AuthorText {
+public final class AuthorText {
     private static final String ALONE = "text";
     private static final List<FormulaReading> READINGS = readings();
 
@@ -33,7 +35,7 @@ final class AuthorText {
     private final Map<ParsedFormula, ParsedFormula> inFile = new IdentityHashMap<>();
 
     /** A stretch of the text and what stands there instead. */
-    record Replacement(int start, int end, String text) {
+    public record Replacement(int start, int end, String text) {
     }
 
     private AuthorText(FormulaText written, ParsedFormula tree, FormulaReading reading) {
@@ -44,7 +46,7 @@ final class AuthorText {
     }
 
     /** Nothing where the text alone isn't read as it was in its file. */
-    static Optional<AuthorText> of(FormulaText written) {
+    public static Optional<AuthorText> of(FormulaText written) {
         for (FormulaReading reading : READINGS) {
             Optional<ParsedFormula> alone = parsed(written.text(), written.notation(), reading)
                     .filter(tree -> tree.formula().equals(written.parsed().formula()));
@@ -86,43 +88,43 @@ final class AuthorText {
         }
     }
 
-    FormulaText.Notation notation() {
+    public FormulaText.Notation notation() {
         return written.notation();
     }
 
-    String text() {
+    public String text() {
         return written.text();
     }
 
     /** The whole formula; its spans are columns of the text alone. */
-    ParsedFormula tree() {
+    public ParsedFormula tree() {
         return tree;
     }
 
-    static int start(ParsedFormula node) {
+    public static int start(ParsedFormula node) {
         return node.span().start().column() - 1;
     }
 
-    static int end(ParsedFormula node) {
+    public static int end(ParsedFormula node) {
         return node.span().end().column() - 1;
     }
 
-    String text(ParsedFormula node) {
+    public String text(ParsedFormula node) {
         return text().substring(start(node), end(node));
     }
 
     /** The place in the file of a node, or of one put together from some. */
-    Span place(ParsedFormula node) {
+    public Span place(ParsedFormula node) {
         return inFile.containsKey(node) ? inFile.get(node).span()
                 : place(node.parts().get(0)).to(place(node.parts().get(node.parts().size() - 1)));
     }
 
-    Span place() {
+    public Span place() {
         return written.parsed().span();
     }
 
     /** The last character before an offset that isn't blank, or −1. */
-    int before(int offset) {
+    public int before(int offset) {
         int at = offset - 1;
         while (at >= 0 && Character.isWhitespace(text().charAt(at))) {
             at--;
@@ -131,12 +133,12 @@ final class AuthorText {
     }
 
     /** The text with other stretches in place of some, which don't overlap; nothing where that is no formula. */
-    Optional<FormulaText> with(List<Replacement> replacements) {
+    public Optional<FormulaText> with(List<Replacement> replacements) {
         return read(replaced(text(), 0, replacements));
     }
 
     /** The text of one part with the replacements in it. */
-    String edited(ParsedFormula node, List<Replacement> replacements) {
+    public String edited(ParsedFormula node, List<Replacement> replacements) {
         return replaced(text(node), start(node), replacements);
     }
 
@@ -150,7 +152,7 @@ final class AuthorText {
     }
 
     /** Another text in the same notation. */
-    Optional<FormulaText> read(String text) {
+    public Optional<FormulaText> read(String text) {
         return parsed(text, notation(), reading).map(parsed -> new FormulaText(text, notation(), parsed));
     }
 
@@ -158,14 +160,15 @@ final class AuthorText {
             FormulaReading reading) {
         Places alone = offset -> new Position(ALONE, 1, offset + 1);
         try {
-            return Optional.of(AuthorNotation.of(notation).parse(text, alone, reading));
+            return Optional.of(notation == FormulaText.Notation.LATEX ? LatexReader.parse(text, alone, reading)
+                    : FormulaParser.parse(text, alone, Set.of(), reading));
         } catch (RefusedException refused) {
             return Optional.empty();
         }
     }
 
     /** Whether a name stands anywhere in a part. */
-    static boolean varies(ParsedFormula node) {
+    public static boolean varies(ParsedFormula node) {
         return node.formula() instanceof Formula.Symbol || node.parts().stream().anyMatch(AuthorText::varies);
     }
 }
