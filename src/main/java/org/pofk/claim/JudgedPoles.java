@@ -2,6 +2,8 @@ package org.pofk.claim;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
+import java.util.stream.IntStream;
 import org.pofk.meaning.Decision;
 import org.pofk.meaning.Quantity;
 import org.pofk.meaning.Written;
@@ -38,6 +40,7 @@ final class JudgedPoles {
             int partner = matching.partners().get(i);
             if (partner >= 0) {
                 holding.hold(stated.get(i), right.get(partner));
+                other(i, partner, matching, right).ifPresent(holding::wrong);
             } else {
                 holding.wrong(surplus(stated.get(i), right, poles.output().name()));
             }
@@ -49,6 +52,19 @@ final class JudgedPoles {
         return holding.judgement(texts -> Counted.of(texts.all(), missing));
     }
 
+    /** What is to be said where a number stands for several poles that aren't the same. */
+    private Optional<String> other(int place, int partner, Matching matching, List<Quantity> right) {
+        return IntStream.range(0, place).filter(i -> stated.get(i) == stated.get(place))
+                .map(matching.partners()::get)
+                .filter(i -> i >= 0 && right.get(i).minus(right.get(partner)).isZero() == Decision.NO).mapToObj(i ->
+                        stated.get(place).text().text() + " isn't one pole several times; two near ones are "
+                                + told(right.get(i)) + " and " + told(right.get(partner))).findFirst();
+    }
+
+    private static String told(Quantity pole) {
+        return RightNumber.of(pole, List.of());
+    }
+
     /** What a number is that isn't one of the poles left. */
     private String surplus(StatedNumber number, List<Quantity> right, String output) {
         String text = number.text().text();
@@ -56,8 +72,7 @@ final class JudgedPoles {
             return text + " is a pole of lower multiplicity";
         }
         boolean isEigenvalue = truth.characteristicPolynomial()
-                .map(polynomial -> EigenvaluesOf.distinct(polynomial).stream().anyMatch(value -> isMeant(number, value)))
-                .orElse(false);
+                .map(EigenvaluesOf::distinct).orElse(List.of()).stream().anyMatch(value -> isMeant(number, value));
         return text + (isEigenvalue ? " is an eigenvalue of the matrix, but cancels: it is no pole of " + output
                 : " is no pole of " + output);
     }

@@ -30,8 +30,14 @@ final class JudgedResidues {
         for (Statement.Residues.AtPole entry : stated.coefficients()) {
             poles.add(holding.number(entry.pole()));
         }
+        List<Quantity> first = new ArrayList<>();
+        for (Statement.Residues.AtPole entry : stated.coefficients()) {
+            first.add(entry.coefficients().isEmpty() ? Quantity.ZERO
+                    : holding.number(entry.coefficients().get(0)).value());
+        }
         Matching matching = Matching.of(poles.stream().map(StatedNumber::value).toList(),
-                places.stream().map(AllPoles.Place::value).toList());
+                places.stream().map(AllPoles.Place::value).toList(),
+                (i, j) -> Guesses.distance(first.get(i), places.get(j).coefficients().get(0)));
         for (int i = 0; i < poles.size(); i++) {
             int partner = matching.partners().get(i);
             if (partner < 0) {

@@ -20,20 +20,43 @@ record Matching(List<Integer> partners, List<Integer> unmatched) {
         unmatched = List.copyOf(unmatched);
     }
 
-    private record Pair(int stated, int right, double distance) {
+    private record Pair(int stated, int right, double beyond, double apart, double distance) {
+    }
+
+    /** How far what belongs to a stated number, by place, is from what belongs to a right one. */
+    interface Apart {
+        double between(int stated, int right);
     }
 
     static Matching of(List<Quantity> stated, List<Quantity> right) {
         List<Pair> pairs = new ArrayList<>();
         for (int i = 0; i < stated.size(); i++) {
             for (int j = 0; j < right.size(); j++) {
-                pairs.add(new Pair(i, j, Guesses.distance(stated.get(i), right.get(j))));
+                pairs.add(new Pair(i, j, 0, 0, Guesses.distance(stated.get(i), right.get(j))));
             }
         }
-        pairs.sort(Comparator.comparingDouble(Pair::distance));
-        Integer[] partners = new Integer[stated.size()];
+        return of(stated.size(), right.size(), pairs);
+    }
+
+    /** Those that the digits of a stated number allow are equally near; what belongs to them tells which is meant. */
+    static Matching of(List<Quantity> stated, List<Quantity> right, Apart others) {
+        List<Pair> pairs = new ArrayList<>();
+        for (int i = 0; i < stated.size(); i++) {
+            for (int j = 0; j < right.size(); j++) {
+                double distance = Guesses.distance(stated.get(i), right.get(j));
+                double beyond = Spread.mayBe(stated.get(i), right.get(j)) ? 0 : distance;
+                pairs.add(new Pair(i, j, beyond, others.between(i, j), distance));
+            }
+        }
+        return of(stated.size(), right.size(), pairs);
+    }
+
+    private static Matching of(int stated, int right, List<Pair> pairs) {
+        pairs.sort(Comparator.comparingDouble(Pair::beyond).thenComparingDouble(Pair::apart)
+                .thenComparingDouble(Pair::distance));
+        Integer[] partners = new Integer[stated];
         Arrays.fill(partners, -1);
-        boolean[] taken = new boolean[right.size()];
+        boolean[] taken = new boolean[right];
         for (Pair pair : pairs) {
             if (partners[pair.stated] < 0 && !taken[pair.right]) {
                 partners[pair.stated] = pair.right;
@@ -41,7 +64,7 @@ record Matching(List<Integer> partners, List<Integer> unmatched) {
             }
         }
         return new Matching(Arrays.asList(partners),
-                IntStream.range(0, right.size()).filter(j -> !taken[j]).boxed().toList());
+                IntStream.range(0, right).filter(j -> !taken[j]).boxed().toList());
     }
 
     /** The place of the number that is nearest to one; there is at least one. */

@@ -37,8 +37,11 @@ final class RightText {
                 .forEach(node -> places.put(text.place(node), node));
         List<AuthorText.Replacement> replacements = new ArrayList<>();
         decimals.forEach((decimal, right) -> Optional.ofNullable(places.get(decimal.span())).ifPresent(node -> {
-            int start = AuthorText.start(node);
-            replacements.add(new AuthorText.Replacement(start, AuthorText.end(node),
+            // braces of LaTeX around it stay
+            int before = Math.max(0, text.text(node).indexOf(decimal.text()));
+            int start = AuthorText.start(node) + before;
+            int end = before > 0 ? start + decimal.text().length() : AuthorText.end(node);
+            replacements.add(new AuthorText.Replacement(start, end,
                     right.startsWith("-") && start > 0 ? "(" + right + ")" : right));
         }));
         return replacements.size() == decimals.size() ? text.with(replacements).map(FormulaText::text)

@@ -66,9 +66,9 @@ final class Propagation {
             if (unknowns.size() == 1) {
                 Written unknown = unknowns.get(0);
                 Quantity written = equations.get(equation).written().with(right);
-                Optional<Quantity> value = isExact(written, unknown, equations.get(equation).right())
-                        ? Optional.of(Quantity.of(unknown.value()))
-                        : Isolating.solve(written, unknown, equations.get(equation).right());
+                Quantity target = equations.get(equation).right();
+                Optional<Quantity> value = Isolating.solve(written, unknown, target).map(solved ->
+                        isExact(written, unknown, target) ? Quantity.of(unknown.value()) : solved);
                 if (value.isPresent()) {
                     right.put(unknown, value.get());
                     solvedBy.put(unknown, equation);
