@@ -2,6 +2,7 @@ package org.pofk.slip;
 
 import java.util.ArrayList;
 import java.util.List;
+import org.pofk.claim.AuthorText;
 import org.pofk.exact.Ball;
 import org.pofk.exact.Rational;
 import org.pofk.meaning.ExponentialSum;
