@@ -64,16 +64,45 @@ final class EnclosedError {
 
     /** Empty where p(k) can't be told from zero, unless both are zero: then there is no error. */
     Optional<Ball> at(long k) {
+        return at(k, difference.valueAt(k), reference.map(p -> p.truth.valueAt(k)));
+    }
+
+    private Optional<Ball> at(long k, Ball off, Optional<Ball> value) {
         if (reference.isEmpty()) {
-            return Optional.of(signedAt(k).abs());
+            return Optional.of(withImpulse(off, impulses, k).abs());
         }
         Reference p = reference.get();
         Ball scale = impulses.containsKey(k) || p.impulses.containsKey(k)
                 ? Ball.of(1, bits).dividedBy(Intervals.power(p.largest, k)) : Ball.of(1, bits);
-        Ball error = scaled(difference.valueAt(k), impulses, scale, k);
-        Ball truth = scaled(p.truth.valueAt(k), p.impulses, scale, k);
+        Ball error = scaled(off, impulses, scale, k);
+        Ball truth = scaled(value.orElseThrow(), p.impulses, scale, k);
         return truth.containsZero() && p.vanishes.test(k) && p.agrees.test(k)
                 ? Optional.of(Ball.of(0, bits)) : over(error, truth);
+    }
+
+    /** The errors at k = first, first + 1, …, each found from the one before. */
+    Stepping from(long first) {
+        return new Stepping(first);
+    }
+
+    /** Goes through the steps one by one. */
+    final class Stepping {
+        private final EnclosedWaves.Stepping differences;
+        private final Optional<EnclosedWaves.Stepping> values;
+        private long k;
+
+        private Stepping(long first) {
+            differences = difference.from(first);
+            values = reference.map(p -> p.truth.from(first));
+            k = first;
+        }
+
+        /** As {@link #at} has it at the step reached; then one further. */
+        Optional<Ball> next() {
+            Optional<Ball> error = at(k, differences.next(), values.map(EnclosedWaves.Stepping::next));
+            k++;
+            return error;
+        }
     }
 
     private static Ball scaled(Ball value, Map<Long, Ball> impulses, Ball scale, long k) {

@@ -152,6 +152,7 @@ record LargestError(Kind kind, Rational atLeast, Optional<Rational> upTo, Option
             }
             long end = Math.max(steps.from() + STEPS, Math.min(lastImpulse + 1, steps.from() + 4L * STEPS));
             long check = Math.max(steps.from() + 4, lastImpulse + 1);
+            EnclosedError.Stepping stepping = error.from(steps.from());
             for (long k = steps.from(); k < end && !blind; k++) {
                 if (steps.to().isPresent() && k > steps.to().getAsLong()) {
                     return -1;
@@ -162,13 +163,16 @@ record LargestError(Kind kind, Rational atLeast, Optional<Rational> upTo, Option
                     }
                     check += Math.max(4, (check - steps.from()) / 4);
                 }
-                look(k);
+                look(k, stepping.next());
             }
             return end;
         }
 
         private void look(long k) {
-            Optional<Ball> value = error.at(k);
+            look(k, error.at(k));
+        }
+
+        private void look(long k, Optional<Ball> value) {
             if (value.isEmpty()) {
                 blind = true;
                 infinite |= error.isInfiniteAt(k);

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalLong;
+import java.util.stream.IntStream;
 import org.pofk.exact.Ball;
 import org.pofk.meaning.Decision;
 import org.pofk.meaning.ExponentialSum;
@@ -42,6 +43,7 @@ record SafeSide(Decision holds, OptionalLong step) {
         private final ErrorCurve curve;
         private final EnclosedError error;
         private final EnclosedWaves unscaled;
+        private final EnclosedWaves scaled;
         private int ranges;
         private boolean undecided;
 
@@ -53,14 +55,14 @@ record SafeSide(Decision holds, OptionalLong step) {
             this.curve = ErrorCurve.absolute(claimed, truth);
             this.error = curve.enclose(FIRST_BITS);
             this.unscaled = EnclosedWaves.of(curve.difference(), FIRST_BITS);
+            this.scaled = scaled();
         }
 
         SafeSide result() {
             long end = Math.max(curve.lastImpulse() + 1, steps.from() + STEPS);
-            EnclosedWaves scaled = scaled();
             long check = Math.max(steps.from() + 4, curve.lastImpulse() + 1);
             for (long k = steps.from(); k < end; k++) {
-                if (isPast(k) || k == check && isSettled(scaled, k)) {
+                if (isPast(k) || k == check && isSettled(k)) {
                     return told();
                 }
                 if (k == check) {
@@ -70,7 +72,7 @@ record SafeSide(Decision holds, OptionalLong step) {
                     return new SafeSide(Decision.NO, OptionalLong.of(k));
                 }
             }
-            return halved(scaled, end);
+            return halved(end);
         }
 
         private boolean isPast(long k) {
@@ -81,15 +83,17 @@ record SafeSide(Decision holds, OptionalLong step) {
             return new SafeSide(undecided ? Decision.UNDECIDED : Decision.YES, OptionalLong.empty());
         }
 
-        private SafeSide halved(EnclosedWaves scaled, long first) {
+        private SafeSide halved(long first) {
             long last = first;
-            while (!isPast(last) && !isSettled(scaled, last)) {
+            while (!isPast(last) && !isSettled(last) && !isLost(last)) {
                 last *= 2;
                 if (last > FARTHEST) {
                     return new SafeSide(Decision.UNDECIDED, OptionalLong.empty());
                 }
             }
-            OptionalLong across = across(first, steps.to().isPresent() ? steps.to().getAsLong() : last);
+            // a class that is lost from a step on has one within a period
+            OptionalLong across = across(first, steps.to().isPresent() ? steps.to().getAsLong()
+                    : last + scaled.classes());
             undecided |= ranges > MOST_RANGES;
             return across.isPresent() ? new SafeSide(Decision.NO, across) : told();
         }
@@ -107,8 +111,12 @@ record SafeSide(Decision holds, OptionalLong step) {
         }
 
         private boolean keepsSide(long first, long last) {
-            for (int residue = 0; residue < unscaled.classes(); residue++) {
-                if (!isSafe(unscaled.over(residue, first, last))) {
+            return keepsSide(unscaled, first, last) || keepsSide(scaled, first, last);
+        }
+
+        private boolean keepsSide(EnclosedWaves waves, long first, long last) {
+            for (int residue = 0; residue < waves.classes(); residue++) {
+                if (!isSafe(waves.over(residue, first, last))) {
                     return false;
                 }
             }
@@ -125,6 +133,10 @@ record SafeSide(Decision holds, OptionalLong step) {
         }
 
         private boolean isAcross(long k) {
+            Ball seen = k > curve.lastImpulse() ? scaled.valueAt(k) : Ball.of(0, FIRST_BITS);
+            if (!seen.containsZero()) {
+                return isUnsafe(seen);
+            }
             for (int bits = FIRST_BITS; bits <= MOST_BITS; bits *= 2) {
                 Ball difference = (bits == FIRST_BITS ? error : curve.enclose(bits)).signedAt(k);
                 if (isSafe(difference) || isUnsafe(difference)) {
@@ -142,7 +154,13 @@ record SafeSide(Decision holds, OptionalLong step) {
             return claimed.valueAt(k).minus(Quantity.of(truth.valueAt(k))).isZero() == Decision.YES;
         }
 
-        private boolean isSettled(EnclosedWaves scaled, long k) {
+        /** Whether it is on the wrong side at all steps of a class from one on. */
+        private boolean isLost(long k) {
+            return IntStream.range(0, scaled.classes()).anyMatch(residue ->
+                    scaled.beyond(residue, k).filter(this::isUnsafe).isPresent());
+        }
+
+        private boolean isSettled(long k) {
             for (int residue = 0; residue < scaled.classes(); residue++) {
                 Optional<Ball> beyond = scaled.beyond(residue, k);
                 if (beyond.isEmpty() || !isSafe(beyond.get())) {

@@ -29,6 +29,8 @@ final class Approximations {
     }
 
     private static final BigDecimal SLOW = new BigDecimal("0.93");
+    /** More than all poles but the one at one, rounded or not, come to where the steps end. */
+    private static final BigDecimal STAYS = new BigDecimal("0.0001");
 
     private Approximations() {
     }
@@ -66,10 +68,12 @@ final class Approximations {
         BigDecimal largest = BigDecimal.ZERO;
         boolean isAbove = true;
         boolean isBelow = true;
+        BigDecimal last = BigDecimal.ZERO;
         for (int k = 0; k <= Steps.LAST; k += k < 40 ? 1 : 20) {
             BigDecimal error = formula.apply(Near.exactly(k)).minus(values.get(k)).real();
             BigDecimal size = isRelative ? error.divide(values.get(k).real(), Near.CENTRE) : error;
             largest = largest.max(size.abs());
+            last = error.abs();
             isAbove &= error.signum() >= 0 && error.abs().compareTo(BigDecimal.ONE.movePointLeft(40)) > 0;
             isBelow &= error.signum() <= 0 && error.abs().compareTo(BigDecimal.ONE.movePointLeft(40)) > 0;
         }
@@ -81,7 +85,7 @@ final class Approximations {
         String amount = isRelative ? within.movePointRight(2).toPlainString() + "%" : within.toPlainString();
         List<String> keys = new ArrayList<>(List.of("formula", Claimed.quoted(output.name()), "is",
                 Claimed.quoted(text), "within", amount));
-        if (isAbove || isBelow) {
+        if ((isAbove || isBelow) && last.compareTo(STAYS) > 0) {
             keys.addAll(List.of("safe side", isAbove == (room == Room.ENOUGH) ? "above" : "below"));
         }
         boolean isRight = room == Room.ENOUGH;

@@ -5,11 +5,12 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.nio.file.Path;
 import java.util.List;
+import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import org.pofk.meaning.Fit;
 
-/** Formulas with every decimal right to its digits are rounded in whatever form they are written. */
+/** Formulas with every decimal right to its digits are rounded in whatever form they are written; what rounding costs. */
 class RoundedFormsTest {
     private static final Path FOLDER = Path.of("test-data/published");
 
@@ -101,5 +102,17 @@ class RoundedFormsTest {
     })
     void conjugateExponentialsAreWrongInOneSignOrDigit(String model, String claim) {
         assertWrong(model, claim);
+    }
+
+    @Test
+    void theSafeSideIsLostWhereARoundedPoleOvertakes() {
+        String text = "formula: 'fixed', is: '1 + 0.39720*0.25000^k - 1.3612*POLE^k - 0.028888*(-0.30902)^k',"
+                + " within: 0.0089, safe side: above";
+        Judgement larger = judged("full-sib-mating", text.replace("POLE", "0.80902"));
+        assertEquals(Verdict.WRONG, larger.verdict(), larger::toString);
+        // 1.3612 * 0.80902^k is more than 1.37082 * 0.8090169944^k where k > log(1.37082/1.3612)/log(0.80902/0.80901…)
+        assertEquals(1896, larger.firstWrongStep().getAsLong());
+        Judgement smaller = judged("full-sib-mating", text.replace("POLE", "0.80901"));
+        assertEquals(Verdict.APPROXIMATE, smaller.verdict(), smaller::toString);
     }
 }
