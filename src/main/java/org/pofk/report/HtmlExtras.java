@@ -1,5 +1,6 @@
 package org.pofk.report;
 
+import java.nio.charset.StandardCharsets;
 import java.util.List;
 import java.util.Optional;
 import org.pofk.formula.Latex;
@@ -9,6 +10,7 @@ import org.pofk.report.Document.Block;
 import org.pofk.report.Document.Display;
 import org.pofk.report.Document.Relation;
 import org.pofk.report.Document.Sequence;
+import org.pofk.text.Alphabet;
 import org.pofk.text.Xml;
 
 /**
@@ -62,9 +64,15 @@ final class HtmlExtras {
         return block instanceof Display display && display.left().equals(sequence.left());
     }
 
+    private static String leftOf(Sequence sequence) {
+        return new Spelling(Alphabet.UNICODE, StandardCharsets.UTF_8).of(sequence.left())
+                .replace(Spelling.NO_BREAK, ' ');
+    }
+
     private String field(Sequence sequence, StepData data) {
         String id = "step-" + (document.sequences().indexOf(sequence) + 1);
-        return "<div class=\"step\" hidden=\"hidden\"" + data.attributes() + "><p><label for=\"" + id + "\">"
+        return "<div class=\"step\" hidden=\"hidden\"" + data.attributes() + attribute("left", leftOf(sequence))
+                + "><p><label for=\"" + id + "\">"
                 + HtmlSpelling.of(sequence.left()) + " at step k =</label> <input id=\"" + id
                 + "\" type=\"text\" inputmode=\"numeric\" autocomplete=\"off\" maxlength=\"9\"/></p>"
                 + "<output for=\"" + id + "\"></output></div>";

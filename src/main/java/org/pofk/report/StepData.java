@@ -5,6 +5,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.stream.Collectors;
+import java.util.stream.IntStream;
 import org.pofk.exact.Rational;
 import org.pofk.report.Document.Sequence;
 
@@ -19,11 +20,14 @@ record StepData(BigInteger scale, BigInteger divisor, List<BigInteger> recurrenc
     /** What is longer makes the page large for few. */
     private static final int MOST_CHARACTERS = 200_000;
 
+    private static final int PRIMES_BELOW = 1000;
+
     /** Nothing where its numbers are too long for a page. */
     static Optional<StepData> of(Sequence sequence) {
         int order = sequence.first().size();
-        BigInteger scale = commonDenominator(sequence.recurrence());
-        BigInteger divisor = commonDenominator(sequence.first());
+        BigInteger scale = scale(sequence.recurrence());
+        BigInteger divisor = commonDenominator(IntStream.range(0, order)
+                .mapToObj(i -> sequence.first().get(i).times(Rational.of(scale.pow(i)))).toList());
         List<BigInteger> recurrence = new ArrayList<>();
         List<BigInteger> first = new ArrayList<>();
         for (int i = 0; i < order; i++) {
@@ -32,6 +36,30 @@ record StepData(BigInteger scale, BigInteger divisor, List<BigInteger> recurrenc
         }
         StepData data = new StepData(scale, divisor, recurrence, first);
         return data.attributes().length() <= MOST_CHARACTERS ? Optional.of(data) : Optional.empty();
+    }
+
+    /**
+     * An integer whose power d − i every coefficient i is to be multiplied by to be one: of small primes as few as that
+     * takes, of what else is in the denominators all.
+     */
+    private static BigInteger scale(List<Rational> recurrence) {
+        BigInteger scale = BigInteger.ONE;
+        List<BigInteger> rest = new ArrayList<>(recurrence.stream().map(Rational::denominator).toList());
+        for (int prime = 2; prime < PRIMES_BELOW; prime++) {
+            int needed = 0;
+            for (int i = 0; i < rest.size(); i++) {
+                int times = 0;
+                BigInteger[] divided = rest.get(i).divideAndRemainder(BigInteger.valueOf(prime));
+                while (divided[1].signum() == 0) {
+                    times++;
+                    rest.set(i, divided[0]);
+                    divided = divided[0].divideAndRemainder(BigInteger.valueOf(prime));
+                }
+                needed = Math.max(needed, -Math.floorDiv(-times, rest.size() - i));
+            }
+            scale = scale.multiply(BigInteger.valueOf(prime).pow(needed));
+        }
+        return scale.multiply(rest.stream().reduce(BigInteger.ONE, (a, b) -> a.divide(a.gcd(b)).multiply(b)));
     }
 
     private static BigInteger commonDenominator(List<Rational> numbers) {

@@ -137,10 +137,15 @@
     return text;
   }
 
+  // In every figure the mark of this step, which a figure names in the mark's title.
   function marked(field, k) {
-    const section = field.closest("section") || document;
-    section.querySelectorAll("svg [data-k]").forEach(function (point) {
-      point.classList.toggle("chosen", k !== null && point.dataset.k === String(k));
+    const name = field.dataset.left.replace(/\(k\)$/, "(" + k + ")");
+    document.querySelectorAll("figure svg title").forEach(function (title) {
+      const text = title.textContent.replace(/\u00a0/g, " ");
+      const isOfOutput = text.startsWith(field.dataset.left.replace(/k\)$/, ""));
+      if (isOfOutput && title.parentNode.nodeName !== "svg") {
+        title.parentNode.classList.toggle("chosen", k !== null && text.startsWith(name + " "));
+      }
     });
   }
 

@@ -14,6 +14,7 @@ import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 import org.junit.jupiter.api.AfterAll;
 import org.junit.jupiter.api.BeforeAll;
+import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.TestInstance;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -96,6 +97,20 @@ class BrowserTest {
             isExact(values.get(k), shown);
         }
         return 1;
+    }
+
+    @Test
+    void theStepIsMarkedInTheFigureAndNoOther() throws Exception {
+        Path page = Files.writeString(folder.resolve("marked.html"),
+                HtmlWriter.write(Pages.document(Pages.derived("pump-pair"))));
+        browser.open(page);
+        for (int k : List.of(2, 5)) {
+            browser.type("#step-1", String.valueOf(k));
+            JsonNode marked = browser.run("return Array.from(document.querySelectorAll('svg .chosen > title'))"
+                    + ".map(title => title.textContent);");
+            assertEquals(1, marked.size(), marked.toString());
+            assertTrue(marked.get(0).asText().startsWith("lost(" + k + ")"), marked.toString());
+        }
     }
 
     private static void isExact(Rational value, String shown) {

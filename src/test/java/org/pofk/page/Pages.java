@@ -4,6 +4,7 @@ import java.io.IOException;
 import java.io.UncheckedIOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.ArrayList;
 import java.util.EnumSet;
 import java.util.HashMap;
 import java.util.List;
@@ -14,8 +15,11 @@ import org.pofk.answer.DerivedModel;
 import org.pofk.answer.Deriving;
 import org.pofk.chain.Model;
 import org.pofk.chain.Outputs;
+import org.pofk.report.CourseChart;
 import org.pofk.report.DerivationDocument;
 import org.pofk.report.Document;
+import org.pofk.report.PoleChart;
+import org.pofk.report.StateChart;
 import org.pofk.report.Style;
 import org.pofk.text.RefusedException;
 
@@ -53,6 +57,11 @@ final class Pages {
     }
 
     static Document document(DerivedModel derived) {
-        return DerivationDocument.all(derived, new Style(6, Style.Angles.DEGREES), Model.Convention.COLUMNS);
+        Document words = DerivationDocument.all(derived, new Style(6, Style.Angles.DEGREES), Model.Convention.COLUMNS);
+        List<Document.Block> blocks = new ArrayList<>(words.blocks());
+        CourseChart.of(derived).ifPresent(chart -> blocks.add(new Document.Figure(chart.title(), chart)));
+        PoleChart.of(derived).ifPresent(chart -> blocks.add(new Document.Figure(chart.title(), chart)));
+        StateChart.of(derived.model()).ifPresent(chart -> blocks.add(new Document.Figure(chart.title(), chart)));
+        return new Document(blocks, words.sequences());
     }
 }
