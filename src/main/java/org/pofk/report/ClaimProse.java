@@ -23,8 +23,13 @@ final class ClaimProse {
 
     /** {@code claim 3, eq. (5)}. */
     static Prose number(Claim claim) {
-        return Prose.of("claim " + claim.number())
-                .and(claim.where().map(where -> Prose.of(", ").and(text(where))).orElse(Prose.EMPTY));
+        return Prose.of("claim " + claim.number()).and(place(claim));
+    }
+
+    /** {@code , eq. (5)}; {@code , at 6} where a number alone would read as a claim's. */
+    static Prose place(Claim claim) {
+        return claim.where().map(where -> Prose.of(where.strip().matches("[0-9.]+[a-z]?") ? ", at " : ", ")
+                .and(text(where))).orElse(Prose.EMPTY);
     }
 
     /** What an author wrote, broken into lines at its blanks only. */

@@ -16,6 +16,7 @@ import org.pofk.report.Document.Paragraph;
 import org.pofk.report.Document.Table;
 import org.pofk.slip.Finding;
 import org.pofk.slip.Slip;
+import org.pofk.slip.SlipKind;
 import org.pofk.text.Span;
 
 /** What is said of one claim that isn't plainly exact. */
@@ -40,19 +41,26 @@ final class FindingBlocks {
     private void write() {
         Claim claim = finding.claim();
         Judgement judgement = finding.judgement();
-        blocks.add(new Heading(3, Prose.of("Claim " + claim.number()).and(claim.where()
-                .map(where -> Prose.of(", ").and(ClaimProse.text(where))).orElse(Prose.EMPTY)).and(": ")
+        blocks.add(new Heading(3, Prose.of("Claim " + claim.number()).and(ClaimProse.place(claim)).and(": ")
                 .and(ClaimProse.of(claim))));
         blocks.add(new Labelled("verdict", VerdictProse.explained(finding)));
         claim.within().ifPresent(within -> blocks.add(new Labelled("claimed", VerdictProse.claimed(within, claim))));
-        judgement.remarks().forEach(remark -> blocks.add(new Labelled("remark", remark)));
+        if (!slipSaysAll()) {
+            judgement.remarks().forEach(remark -> blocks.add(new Labelled("remark", remark)));
+        }
         claim.note().ifPresent(note -> blocks.add(new Labelled("note", ClaimProse.text(note))));
+        finding.rest().ifPresent(rest -> blocks.add(new Labelled("unexplained", rest)));
         slips();
-        if (isWrong() && finding.slips().isEmpty()) {
+        if (finding.verdict() == Verdict.WRONG && finding.slips().isEmpty()) {
             wrongNumbers();
         }
-        finding.rest().ifPresent(rest -> blocks.add(new Labelled("unexplained", rest)));
         right();
+    }
+
+    /** What is said entry by entry of a matrix says nothing more where it is turned. */
+    private boolean slipSaysAll() {
+        return finding.claim().statement() instanceof Statement.Matrix && !finding.slips().isEmpty()
+                && finding.slips().get(0).kind() == SlipKind.MATRIX_TRANSPOSED;
     }
 
     private void slips() {

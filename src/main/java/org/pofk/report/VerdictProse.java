@@ -77,6 +77,7 @@ final class VerdictProse {
     static Optional<String> largestError(Finding finding) {
         boolean isOverSteps = finding.claim().statement() instanceof Statement.PofK;
         return finding.judgement().difference().filter(difference -> finding.verdict() != Verdict.EXACT)
+                .filter(difference -> new BigDecimal(difference.size().text()).signum() != 0)
                 .map(difference -> size(difference) + (!isOverSteps ? ""
                         : difference.at().isPresent() ? ", at " + step(difference.at().getAsLong())
                         : ", approached as k grows"));

@@ -27,7 +27,10 @@ final class Carrying {
     }
 
     /** The first earlier step that a claim follows from. */
-    static OptionalInt from(Claim claim, Judgement judgement, List<Implied> implied) {
+    static OptionalInt from(Claim claim, Judgement judgement, Truth truth, List<Implied> implied) {
+        if (isOnTheWrongSideOnly(claim, truth)) {
+            return OptionalInt.empty();
+        }
         // what is nearly right doesn't follow from an earlier step just because that is nearly right too
         boolean nearlyRight = isNear(claim, judgement);
         for (Implied each : implied) {
@@ -40,6 +43,13 @@ final class Carrying {
             }
         }
         return OptionalInt.empty();
+    }
+
+    /** An approximation near enough to the truth itself, that only lies on its unsafe side. */
+    private static boolean isOnTheWrongSideOnly(Claim claim, Truth truth) {
+        return claim.safeSide().isPresent() && Judging.isRight(new Claim(claim.number(), claim.kind(), claim.of(),
+                claim.statement(), claim.where(), claim.steps(), claim.carried(), claim.within(), Optional.empty(),
+                claim.note(), claim.position()), truth);
     }
 
     /** Wrong, but every decimal there is has a right value, and each is within a few units of its last place. */

@@ -70,8 +70,13 @@ final class Explaining {
         if (found.stream().allMatch(Told::isMerelyWrong)) {
             Totals.of(claim, judgement.right(), truth).ifPresent(found::add);
         }
-        List<Slip> slips = Told.of(found, parts).stream().map(Candidate::slip).toList();
-        return slips.isEmpty() ? together(changes) : new Explanation(slips, false, models, Optional.empty());
+        List<Candidate> told = Told.of(found, parts);
+        if (told.isEmpty()) {
+            return together(changes);
+        }
+        // what follows from a claim follows from what explains it first
+        return new Explanation(told.stream().map(Candidate::slip).toList(), false,
+                models.stream().filter(model -> model.kind() == told.get(0).kind()).toList(), Optional.empty());
     }
 
     /** Whether the same place with the same value, or the same kind at the same place, is named already. */

@@ -116,6 +116,12 @@ final class FaceValue {
                 .flatMap(FaceValue::formula);
     }
 
+    /** z² − 2 r cos θ z + r². */
+    private static Polynomial<Rational> quadratic(Rational radius, Rational cosine) {
+        return polynomial(List.of(radius.times(radius), radius.times(cosine).times(Rational.TWO).negate(),
+                Rational.ONE));
+    }
+
     private static Rational middle(Ball ball) {
         return SolvedNumbers.simplest(ball.lower(), ball.upper());
     }
@@ -169,7 +175,7 @@ final class FaceValue {
             return polynomial(List.of(base.negate(), Rational.ONE));
         }
         Rational cosine = of(term.angle().cosine());
-        return polynomial(List.of(base.times(base), base.times(cosine).times(Rational.TWO).negate(), Rational.ONE));
+        return quadratic(base, cosine);
     }
 
     /** y(k+d) by the recurrence from y(0) … y(d−1), which are the states. */

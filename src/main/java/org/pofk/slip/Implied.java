@@ -9,6 +9,7 @@ import java.util.function.Supplier;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
+import org.pofk.chain.Outputs;
 import org.pofk.chain.SparseMatrix;
 import org.pofk.claim.Claim;
 import org.pofk.claim.Statement;
@@ -31,7 +32,28 @@ record Implied(int from, Function<Claim, Optional<Claim>> seen, Supplier<Truth> 
         }
         claim.statement().accept(new AtFaceValue(truth)).forEach(each ->
                 implied.add(new Implied(claim.number(), each.seen(), each.truth())));
+        if (claim.statement() instanceof Statement.Pair && !explanation.together()) {
+            explanation.slips().stream().limit(1).filter(slip -> Digits.isNumber(slip.found())).forEach(slip ->
+                    implied.add(new Implied(claim.number(), later -> mended(claim, slip, later), () -> truth)));
+        }
         return implied;
+    }
+
+    /** A later formula of the same output with the wrong number of a pair, wherever it stands in it, made right. */
+    private static Optional<Claim> mended(Claim pair, Slip slip, Claim later) {
+        if (!(later.statement() instanceof Statement.PofK)
+                || !Outcomes.of(later.statement()).equals(Outcomes.of(pair.statement()))) {
+            return Optional.empty();
+        }
+        StatementPart part = StatementPart.of(later.statement()).get(0);
+        return AuthorText.of(part.text()).flatMap(text -> {
+            String right = AuthorNotation.of(text.notation()).enclosed(slip.right());
+            List<AuthorText.Replacement> mended = text.tree().nodes()
+                    .filter(node -> node.parts().isEmpty() && text.text(node).equals(slip.found()))
+                    .map(node -> new AuthorText.Replacement(AuthorText.start(node), AuthorText.end(node), right))
+                    .toList();
+            return mended.isEmpty() ? Optional.empty() : text.with(mended);
+        }).map(part.with()).map(statement -> Candidate.with(later, statement));
     }
 
     /** A later claim about the output that was misread is about the other one too. */
@@ -134,17 +156,38 @@ record Implied(int from, Function<Claim, Optional<Claim>> seen, Supplier<Truth> 
 
         @Override
         public List<Step> pair(Statement.Pair pair) {
+            // what a formula takes over from it is seen by its numbers
             return List.of();
         }
 
         @Override
         public List<Step> longRun(Statement.LongRunOf longRun) {
-            return List.of();
+            List<Optional<Rational>> values = new ArrayList<>();
+            for (Output state : Outputs.states(truth.chain())) {
+                values.add(longRun.parts().stream().filter(part -> part.values().size() == 1
+                        && part.output().coefficients().equals(state.coefficients())
+                        && part.output().constant().isZero()).findFirst()
+                        .flatMap(part -> FaceValue.number(part.values().get(0))));
+            }
+            return settled(values);
+        }
+
+        /** Every output's long run follows from those of all states. */
+        private static List<Step> settled(List<Optional<Rational>> values) {
+            return values.stream().anyMatch(Optional::isEmpty) ? List.of() : List.of(new Step(later ->
+                    Optional.of(later).filter(each -> each.statement() instanceof Statement.LongRunOf),
+                    Step.known(OtherTruths.constant(values.stream().flatMap(Optional::stream).toList()))));
         }
 
         @Override
         public List<Step> eigenvector(Statement.Eigenvector eigenvector) {
-            return List.of();
+            boolean atOne = FaceValue.number(eigenvector.eigenvalue()).filter(Rational::isOne).isPresent();
+            List<Optional<Rational>> values = new ArrayList<>(Collections.nCopies(truth.chain().size(),
+                    Optional.of(Rational.ZERO)));
+            eigenvector.components().forEach(each -> values.set(each.state(), FaceValue.number(each.is())));
+            Rational sum = values.stream().flatMap(Optional::stream).reduce(Rational.ZERO, Rational::plus);
+            return !atOne || sum.isZero() ? List.of()
+                    : settled(values.stream().map(value -> value.map(each -> each.dividedBy(sum))).toList());
         }
 
         @Override

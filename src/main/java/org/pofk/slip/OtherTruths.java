@@ -5,6 +5,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
 import java.util.function.Supplier;
 import java.util.stream.IntStream;
 import org.pofk.answer.LongRun;
@@ -25,9 +26,10 @@ final class OtherTruths {
     private final List<OtherChain> chains;
     private final Map<OtherChain, Truth> known = new LinkedHashMap<>();
 
-    OtherTruths(Model model, Variants variants, Truth truth) {
+    OtherTruths(Model model, Variants variants, Truth truth, Set<SlipKind> contradicted) {
         this.truth = truth;
-        this.chains = OtherChain.allOf(model, variants);
+        this.chains = OtherChain.allOf(model, variants).stream()
+                .filter(other -> !contradicted.contains(other.kind())).toList();
     }
 
     /** All that a claim may be true of; {@code right} is what it should say. */

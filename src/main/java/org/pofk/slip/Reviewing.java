@@ -1,14 +1,17 @@
 package org.pofk.slip;
 
 import java.util.ArrayList;
+import java.util.EnumSet;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalInt;
+import java.util.Set;
 import java.util.function.Consumer;
 import org.pofk.claim.Claim;
 import org.pofk.claim.Claims;
 import org.pofk.claim.Judgement;
 import org.pofk.claim.Judging;
+import org.pofk.claim.Statement;
 import org.pofk.claim.Truth;
 import org.pofk.claim.Verdict;
 
@@ -23,7 +26,22 @@ public final class Reviewing {
 
     private Reviewing(Claims claims, Variants variants) {
         this.truth = Truth.of(claims.model().chain());
-        this.others = new OtherTruths(claims.model(), variants, truth);
+        this.others = new OtherTruths(claims.model(), variants, truth, contradicted(claims));
+    }
+
+    /** Whose file states the start or the matrix rightly hasn't misread it. */
+    private Set<SlipKind> contradicted(Claims claims) {
+        Set<SlipKind> contradicted = EnumSet.noneOf(SlipKind.class);
+        for (Claim claim : claims.claims()) {
+            if (claim.statement() instanceof Statement.Start && Judging.isRight(claim, truth)) {
+                contradicted.add(SlipKind.START_MISREAD);
+            } else if (claim.statement() instanceof Statement.Matrix && Judging.isRight(claim, truth)) {
+                // the right matrix may still be turned when it is used
+                contradicted.addAll(List.of(SlipKind.RATE_AS_PROBABILITY, SlipKind.TWO_EVENT_MOVE_FORGOTTEN,
+                        SlipKind.ABSORBING_STATE_LEFT));
+            }
+        }
+        return contradicted;
     }
 
     public static ReviewedClaims of(Claims claims, Variants variants) {
@@ -48,7 +66,7 @@ public final class Reviewing {
             return new Finding(claim, judgement, judgement.verdict(), OptionalInt.empty(), List.of(), false,
                     Optional.empty());
         }
-        OptionalInt from = Carrying.from(claim, judgement, implied);
+        OptionalInt from = Carrying.from(claim, judgement, truth, implied);
         if (from.isPresent()) {
             // what it implies is what the earlier step implies, as far as its own digits go
             implied.addAll(Implied.of(claim, new Explanation(List.of(), false, List.of(), Optional.empty()), truth)
