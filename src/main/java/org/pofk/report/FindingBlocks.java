@@ -119,7 +119,8 @@ final class FindingBlocks {
     /** The right statement, unless a slip or its one number has shown it. */
     private void right() {
         String right = finding.judgement().right();
-        boolean isOneNumber = finding.claim().statement() instanceof Statement.Value && isWrong()
+        boolean isOneNumber = finding.claim().statement() instanceof Statement.Value
+                && finding.verdict() == Verdict.WRONG
                 && finding.judgement().numbers().stream().anyMatch(number -> number.fit() == Fit.WRONG);
         boolean isShown = !finding.slips().isEmpty() && !finding.together();
         if (right.isBlank() || isShown || isOneNumber) {

@@ -58,9 +58,9 @@ final class NotStated {
         }
     }
 
-    /** Whether a claim of a kind speaks of an output, alone or among others. */
+    /** Whether a claim of a kind speaks of an output: alone, among others, or by all states. */
     private boolean has(String output, String kind) {
-        return claims.stream().anyMatch(claim -> claim.kind().equals(kind)
-                && Outcomes.of(claim.statement()).stream().anyMatch(each -> each.name().equals(output)));
+        return claims.stream().anyMatch(claim -> claim.kind().equals(kind) && (claim.of().equals("all")
+                || Outcomes.of(claim.statement()).stream().anyMatch(each -> each.name().equals(output))));
     }
 }
