@@ -11,6 +11,7 @@ import org.pofk.chain.Model;
 import org.pofk.chain.Output;
 import org.pofk.chain.Outputs;
 import org.pofk.chain.SparseMatrix;
+import org.pofk.claim.AuthorText;
 import org.pofk.claim.Claim;
 import org.pofk.claim.Statement;
 import org.pofk.claim.Truth;

@@ -8,7 +8,9 @@ import java.util.Optional;
 import java.util.stream.Collectors;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
+import org.pofk.claim.Claims;
 import org.pofk.input.ClaimsReader;
+import org.pofk.input.ModelVariants;
 import org.pofk.input.Overrides;
 import org.pofk.input.Source;
 import org.pofk.text.RefusedException;
@@ -34,11 +36,31 @@ class NamedSlipsTest {
             inventory-policy    | {transform over z: '0', is: '-0.2640/z + 0.2857/(z - 1)'}           | TERM_MISSING
             """)
     void theSlipsOfOneClaimAreNamed(String model, String claim, String kinds) throws RefusedException {
-        String text = "pofk-claims: 1\nmodel: " + model + ".yaml\nreview: {convention: columns}\nclaims:\n  - " + claim
-                + "\n";
-        Finding finding = Reviewing.of(ClaimsReader.read(Source.ofText("claims.yaml", text),
-                Optional.of(Path.of("test-data/published")), Overrides.NONE), Variants.NONE).findings().get(0);
+        Finding finding = finding("test-data/published", model, "columns", claim);
         List<SlipKind> named = finding.slips().stream().map(Slip::kind).toList();
         assertEquals(kinds, named.stream().map(SlipKind::name).collect(Collectors.joining(", ")), finding::toString);
+    }
+
+    @ParameterizedTest
+    @CsvSource(delimiter = '|', quoteCharacter = '`', textBlock = """
+            sluice-actuator | rows    | {matrix: all, are: [[0.95, 0.05, 0], [0, 0.5, 0.5], [0.8, 0, 0.2]]} | RATE_AS_PROBABILITY
+            compressor-pair | rows    | {matrix: all, are: [[0.82, 0.18, 0], [0.45, 0.5, 0.05], [0.25, 0.5, 0.25]]} | TWO_EVENT_MOVE_FORGOTTEN
+            mixer-seal      | columns | {matrix: all, are: [[3/4, 0, 0, 1/4], [1/4, 3/4, 0, 0], [0, 1/4, 3/4, 0], [0, 0, 1/4, 3/4]]} | ABSORBING_STATE_LEFT
+            relay-link      | rows    | {matrix: all, are: [[0.3, 0.7], [0.8, 0.3]]}                        | NOT_SUMMING_TO_ONE
+            ../models/pump-pair | columns | {long run: all, are: {both: 1, one: 0.1625, none: 0.009583}}    | EIGENVECTOR_NOT_SCALED
+            """)
+    void aMisreadChainIsNamedFirst(String model, String convention, String claim, SlipKind kind)
+            throws RefusedException {
+        Finding finding = finding("test-data/claims", model, convention, claim);
+        assertEquals(kind, finding.slips().get(0).kind(), finding::toString);
+    }
+
+    private static Finding finding(String folder, String model, String convention, String claim)
+            throws RefusedException {
+        String text = "pofk-claims: 1\nmodel: " + model + ".yaml\nreview: {carried: 4 significant, convention: " + convention
+                + "}\nclaims:\n  - " + claim + "\n";
+        Claims claims = ClaimsReader.read(Source.ofText("claims.yaml", text), Optional.of(Path.of(folder)),
+                Overrides.NONE);
+        return Reviewing.of(claims, ModelVariants.of(claims, Overrides.NONE)).findings().get(0);
     }
 }
