@@ -35,6 +35,18 @@ final class Angles {
         return whole == 0 ? angle : angle.plus(Quantity.pi().times(Quantity.of(2 * whole)));
     }
 
+    /**
+     * The phase with whole turns added that its author would write: the nearest to the stated one, or where that is far
+     * off it and past half a turn, which the stated one isn't, the one of at most half a turn.
+     */
+    static Quantity phaseLike(Quantity stated, Quantity phase) {
+        Quantity near = near(phase, stated);
+        double written = approximate(stated);
+        double turned = approximate(near);
+        boolean isPast = Math.abs(written) <= Math.PI && Math.abs(turned) > Math.PI;
+        return isPast && Math.abs(turned - written) > Math.PI / 2 ? near(phase, Quantity.ZERO) : near;
+    }
+
     private static double approximate(Quantity real) {
         return real.enclose(BITS).real().middle().approximate();
     }

@@ -73,7 +73,7 @@ final class Closeness {
         return number.times(number.conjugate());
     }
 
-    private static Decision isSafe(Held held, SafeSide side) {
+    static Decision isSafe(Held held, SafeSide side) {
         Quantity error = held.error().realPart();
         return isNotNegative(side == SafeSide.ABOVE ? error : error.times(Rational.of(-1)));
     }

@@ -98,7 +98,7 @@ final class Holding {
                 number.written().text() + " is cut off, not rounded: " + number.right()));
         return new Judgement(verdict, NumberError.of(claim, held, step),
                 verdict == Verdict.WRONG ? step : OptionalLong.empty(), numbers, remarks,
-                right.apply(new RightTexts(held, exact, decimals)));
+                right.apply(new RightTexts(claim, held, exact, decimals)));
     }
 
     /** The decimals of exact numbers are right as they stand. */

@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.TreeMap;
+import java.util.stream.Collectors;
 import org.pofk.exact.Polynomial;
 import org.pofk.exact.Rational;
 import org.pofk.exact.Root;
@@ -20,6 +21,9 @@ import org.pofk.text.RefusedException;
  * others follow, and are held against what is stated. States without a number have zero.
  */
 final class JudgedEigenvector {
+    /** How many eigenvalues a remark lists. */
+    private static final int MOST_TOLD = 12;
+
     private final Statement.Eigenvector stated;
     private final Truth truth;
     private final Holding holding;
@@ -47,7 +51,16 @@ final class JudgedEigenvector {
         List<Root> eigenvalues = EigenvaluesOf.roots(annihilating);
         Root nearest = eigenvalues.get(Matching.nearest(eigenvalue.value(),
                 eigenvalues.stream().map(Quantity::of).toList()));
-        holding.hold(eigenvalue, Quantity.of(nearest));
+        Held meant = new Held(eigenvalue, Quantity.of(nearest));
+        if (meant.isRight() == Decision.NO) {
+            String sentence = eigenvalue.text().text() + " is no eigenvalue; " + told(eigenvalues);
+            if (RightNumber.isReal(meant.right()) != RightNumber.isReal(eigenvalue.value())) {
+                holding.wrong(sentence);
+                return holding.judgement(texts -> "");
+            }
+            holding.remark(sentence);
+        }
+        holding.hold(meant);
         Optional<Eigenspace> space = Eigenspace.of(truth.chain().matrix(), nearest);
         if (space.isEmpty()) {
             holding.undecided("the eigenspace isn't worked out: a polynomial isn't known to be irreducible");
@@ -56,6 +69,12 @@ final class JudgedEigenvector {
         List<Quantity> right = right(space.get());
         hold(right);
         return holding.judgement(texts -> String.join(", ", texts(right, texts.areRight())));
+    }
+
+    private static String told(List<Root> eigenvalues) {
+        return (eigenvalues.size() > MOST_TOLD ? "some eigenvalues are " : "the eigenvalues are ")
+                + eigenvalues.stream().limit(MOST_TOLD).map(each -> RightNumber.of(Quantity.of(each), List.of()))
+                .collect(Collectors.joining(", "));
     }
 
     private Quantity at(int state) {

@@ -78,7 +78,7 @@ final class JudgedPair {
         amplitude.ifPresent(a -> hold("amplitude", a, isOpposite ? size.negate() : size));
         Quantity right = meant.isMirrored ? meant.pole.phase(0).negate() : meant.pole.phase(0);
         Quantity turned = isOpposite ? right.plus(Quantity.pi()) : right;
-        phase.ifPresent(p -> hold("phase", p, near(p, turned)));
+        phase.ifPresent(p -> hold("phase", p, Angles.phaseLike(p.value(), turned)));
     }
 
     private Optional<StatedNumber> number(Optional<FormulaText> text) throws RefusedException {

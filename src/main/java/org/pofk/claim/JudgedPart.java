@@ -107,6 +107,8 @@ final class JudgedPart {
         LargestError largest = LargestError.of(claimed, truth, steps.range());
         List<String> remarks = new ArrayList<>();
         largest.remark().ifPresent(remarks::add);
+        modes.unlike().stream().filter(pole -> !pole.isReal()).forEach(pole -> remarks.add("the pole "
+                + RightNumber.of(pole.value(), List.of()) + " and its conjugate turn; a term without cosine or sine can't stand for them"));
         return new Judgement(Verdict.WRONG, largest.difference(Measure.ABSOLUTE), first, numbers.judged(), remarks,
                 RightFormula.of(text, truth, modes, numbers));
     }

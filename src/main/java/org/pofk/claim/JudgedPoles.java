@@ -36,11 +36,14 @@ final class JudgedPoles {
         }
         List<Quantity> right = AllPoles.repeated(truth.about(poles.output()));
         Matching matching = Matching.of(stated.stream().map(StatedNumber::value).toList(), right);
+        boolean arePaired = matching.unmatched().isEmpty() && !matching.partners().contains(-1);
         for (int i = 0; i < stated.size(); i++) {
             int partner = matching.partners().get(i);
             if (partner >= 0) {
                 holding.hold(stated.get(i), right.get(partner));
-                other(i, partner, matching, right).ifPresent(holding::wrong);
+                Optional<String> other = other(i, partner, matching, right);
+                other.ifPresent(holding::wrong);
+                arePaired &= other.isEmpty();
             } else {
                 holding.wrong(surplus(stated.get(i), right, poles.output().name()));
             }
@@ -49,7 +52,8 @@ final class JudgedPoles {
         List<String> missing = matching.unmatched().stream().map(place -> RightNumber.of(right.get(place), digits))
                 .toList();
         missing.forEach(text -> holding.wrong("the pole " + text + " is missing"));
-        return holding.judgement(texts -> Counted.of(texts.all(), missing));
+        Judgement judgement = holding.judgement(texts -> Counted.of(texts.all(), missing));
+        return arePaired ? judgement : judgement.withoutDifference();
     }
 
     /** What is to be said where a number stands for several poles that aren't the same. */

@@ -37,6 +37,11 @@ public record Judgement(Verdict verdict, Optional<Difference> difference, Option
         remarks = List.copyOf(remarks);
     }
 
+    /** The same where how far the numbers are off says nothing of how far the claim is. */
+    Judgement withoutDifference() {
+        return new Judgement(verdict, Optional.empty(), firstWrongStep, numbers, remarks, right);
+    }
+
     public boolean isRight() {
         return verdict == Verdict.EXACT || verdict == Verdict.ROUNDED || verdict == Verdict.APPROXIMATE;
     }

@@ -23,12 +23,19 @@ import org.pofk.meaning.Quantity;
  * of k the total coefficient the true one, the impulses the same. Coefficients are those of powers of k, so that
  * binomial(k, p) λ^(k−p) on either side is no difference. Exact.
  *
- * @param fits false where a term has a shape that can't stand for its pole: a real power for a pair
+ * @param unlike the poles that a term is meant for whose shape can't stand for them: a real power for a pair. None of
+ *               the numbers there is held against anything
  */
-record ModeEquations(List<ModeEquation> equations, boolean fits) {
+record ModeEquations(List<ModeEquation> equations, List<TruePole> unlike) {
 
     ModeEquations {
         equations = List.copyOf(equations);
+        unlike = List.copyOf(unlike);
+    }
+
+    /** Whether every term has a shape that can stand for its pole. */
+    boolean fits() {
+        return unlike.isEmpty();
     }
 
     static ModeEquations of(ExponentialSum claimed, OutputTruth truth, ClaimedSteps steps) {
@@ -37,7 +44,7 @@ record ModeEquations(List<ModeEquation> equations, boolean fits) {
         matched.byPole().forEach(building::pole);
         matched.extra().forEach(building::extra);
         building.impulses(claimed.impulses(), ErrorCurve.trueImpulses(truth), steps);
-        return new ModeEquations(building.equations, building.fits);
+        return new ModeEquations(building.equations, building.unlike);
     }
 
     /** Without what they are about. */
@@ -47,7 +54,7 @@ record ModeEquations(List<ModeEquation> equations, boolean fits) {
 
     /** Whether all hold at face value, each in the numbers of its own mode only. The formula then is p(k). */
     Decision areExact() {
-        Decision all = fits ? Decision.YES : Decision.NO;
+        Decision all = fits() ? Decision.YES : Decision.NO;
         for (int i = 0; i < equations.size() && all != Decision.NO; i++) {
             Equation equation = equations.get(i).equation();
             Decision one = equation.written().minus(equation.right()).isZero();
@@ -58,7 +65,7 @@ record ModeEquations(List<ModeEquation> equations, boolean fits) {
 
     private static final class Building {
         private final List<ModeEquation> equations = new ArrayList<>();
-        private boolean fits = true;
+        private final List<TruePole> unlike = new ArrayList<>();
 
         private void add(About about, Optional<TruePole> pole, long power, List<Term> terms, Quantity written,
                 Quantity right) {
@@ -73,6 +80,10 @@ record ModeEquations(List<ModeEquation> equations, boolean fits) {
         }
 
         void pole(TruePole pole, List<ClaimedTerm> terms) {
+            if (!terms.stream().allMatch(term -> isLike(pole, term))) {
+                unlike.add(pole);
+                return;
+            }
             terms.forEach(term -> base(pole, term));
             Map<Integer, List<ClaimedTerm>> byPower = new LinkedHashMap<>();
             terms.forEach(term -> byPower.computeIfAbsent(term.term().power(), p -> new ArrayList<>()).add(term));
@@ -86,6 +97,10 @@ record ModeEquations(List<ModeEquation> equations, boolean fits) {
                     power < right.size() ? right.get(power) : Quantity.ZERO));
         }
 
+        private static boolean isLike(TruePole pole, ClaimedTerm term) {
+            return term.shape() == Shape.OSCILLATION || pole.isReal() == (term.shape() == Shape.REAL);
+        }
+
         private void base(TruePole pole, ClaimedTerm claimed) {
             Term term = claimed.term();
             List<Term> terms = List.of(term);
@@ -94,13 +109,10 @@ record ModeEquations(List<ModeEquation> equations, boolean fits) {
             if (claimed.shape() == Shape.OSCILLATION && !isWrittenOut) {
                 polarBase(pole, claimed, new PolarForm(term.base(), term.angle()));
             } else if (claimed.shape() == Shape.COMPLEX && polar.isPresent()) {
-                fits &= !pole.isReal();
                 polarBase(pole, claimed, polar.get());
             } else if (claimed.shape() == Shape.REAL) {
-                fits &= pole.isReal();
                 add(About.BASE, Optional.of(pole), term.power(), terms, term.base(), pole.value().realPart());
             } else {
-                fits &= claimed.shape() == Shape.OSCILLATION || !pole.isReal();
                 addComplex(About.BASE, pole, term.power(), terms, claimed.pole(),
                         claimed.isBelow() ? pole.value().conjugate() : pole.value());
             }
@@ -197,7 +209,7 @@ record ModeEquations(List<ModeEquation> equations, boolean fits) {
                     isNegative ? modulus.negate() : modulus);
             if (target.isZero() != Decision.YES) {
                 add(About.PHASE, Optional.of(pole), power, terms, written.angle(),
-                        Angles.near(Angles.of(isNegative ? target.negate() : target), written.angle()));
+                        Angles.phaseLike(written.angle(), Angles.of(isNegative ? target.negate() : target)));
             }
         }
 

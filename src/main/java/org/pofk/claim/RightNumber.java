@@ -44,7 +44,7 @@ final class RightNumber {
                 + (text.notation() == FormulaText.Notation.LATEX ? "^{\\circ}" : " deg");
     }
 
-    private static boolean isReal(Quantity number) {
+    static boolean isReal(Quantity number) {
         return number.realPart() == number || number.enclose(BITS).imaginary().containsZero()
                 && number.imaginaryPart().isZero() == Decision.YES;
     }

@@ -16,7 +16,7 @@ import org.pofk.meaning.Written;
  *
  * @param exact whether each number held is exactly right
  */
-record RightTexts(List<Held> held, List<Decision> exact, RightDecimals decimals) {
+record RightTexts(Claim claim, List<Held> held, List<Decision> exact, RightDecimals decimals) {
 
     /** Whether every decimal is right to its digits. */
     boolean areRight() {
@@ -47,15 +47,21 @@ record RightTexts(List<Held> held, List<Decision> exact, RightDecimals decimals)
     /** Right to its digits, and none of them cut off. */
     private boolean standsAsWritten(Held number) {
         List<Written> written = number.stated().value().decimals();
-        return !written.isEmpty() && number.isRight() == Decision.YES
+        return !written.isEmpty() && !isUnsafe(number) && number.isRight() == Decision.YES
                 && written.stream().noneMatch(each -> decimals.fits(each, Fit.CUT_OFF));
+    }
+
+    private boolean isUnsafe(Held number) {
+        return claim.safeSide().filter(side -> Closeness.isSafe(number, side) == Decision.NO).isPresent();
     }
 
     private String text(Held number) {
         FormulaText text = number.stated().text();
         List<Written> written = number.stated().value().decimals();
-        if (written.size() == 1 && RightText.isSignedDecimal(text.parsed().formula())) {
-            return AuthorDigits.like(written.get(0), number.right());
+        if (written.size() == 1 && RightText.isSignedDecimal(text.parsed().formula())
+                && RightNumber.isReal(number.right())) {
+            return isUnsafe(number) ? SafeDigits.of(claim, written.get(0), number)
+                    : AuthorDigits.like(written.get(0), number.right());
         }
         boolean isSolved = !written.isEmpty() && written.stream().allMatch(each -> decimals.right(each).isPresent());
         return Optional.of(text).filter(each -> isSolved).flatMap(each -> mended(each, written))

@@ -11,7 +11,7 @@ import org.pofk.formula.Formula.Function;
 /** The words of the formula language, and which words can stand for a name without quotes. */
 final class Words {
     private static final Map<String, Constant> CONSTANTS = Map.of("pi", Constant.PI, "π", Constant.PI,
-            "i", Constant.I, "deg", Constant.DEGREE);
+            "i", Constant.I, "deg", Constant.DEGREE, "degree", Constant.DEGREE, "degrees", Constant.DEGREE);
     private static final Map<String, Function> FUNCTIONS = Map.of("sqrt", Function.SQRT, "cos", Function.COS,
             "sin", Function.SIN, "exp", Function.EXP, "arctan", Function.ARCTAN, "atan", Function.ARCTAN,
             "arccos", Function.ARCCOS, "acos", Function.ARCCOS, "binomial", Function.BINOMIAL,

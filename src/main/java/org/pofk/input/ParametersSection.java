@@ -18,8 +18,8 @@ import org.pofk.text.Position;
 /** The section {@code parameters}: named numbers, which may be defined by one another without going in a circle. */
 final class ParametersSection {
     private static final List<String> KEYS = List.of("value", "from", "to", "meaning");
-    private static final Set<String> RESERVED = Set.of("k", "z", "i", "pi", "π", "deg", "delta", "rest", "sqrt", "cos",
-            "sin", "exp", "arctan", "atan", "arccos", "acos", "binomial");
+    private static final Set<String> RESERVED = Set.of("k", "z", "i", "pi", "π", "deg", "degree", "degrees", "delta", "rest",
+            "sqrt", "cos", "sin", "exp", "arctan", "atan", "arccos", "acos", "binomial");
 
     private final Reading reading;
     private final Map<String, Declaration> declared = new LinkedHashMap<>();

@@ -34,6 +34,9 @@ final class OtherTruths {
 
     /** All that a claim may be true of; {@code right} is what it should say. */
     List<Candidate> of(Claim claim, String right) {
+        if (StatementPart.of(claim.statement()).isEmpty()) {
+            return List.of();
+        }
         List<Candidate> candidates = new ArrayList<>();
         Span place = place(claim.statement());
         Supplier<String> corrected = () -> right;

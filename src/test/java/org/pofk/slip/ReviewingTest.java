@@ -49,6 +49,13 @@ class ReviewingTest {
         isNamedFirst(slipped);
     }
 
+    @Test
+    void noneWhereThereIsALimitIsWrongWithoutASlip() {
+        Finding finding = reviewed("pump-pair", "{long run: lost, is: none}").findings().get(0);
+        assertEquals(Verdict.WRONG, finding.verdict());
+        assertTrue(finding.slips().isEmpty());
+    }
+
     private static void isNamedFirst(Slipped slipped) {
         Slip slip = first(Reviewing.of(slipped.claims(), Variants.NONE).findings().get(0));
         assertEquals(slipped.kind(), slip.kind());
