@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Optional;
 import org.pofk.exact.Ball;
 import org.pofk.exact.ComplexBall;
+import org.pofk.exact.Rational;
 
 /**
  * A sum of waves with all numbers enclosed: its values, and intervals that hold its values over whole ranges of k. In a
@@ -13,6 +14,8 @@ import org.pofk.exact.ComplexBall;
  */
 final class EnclosedWaves {
     private static final int MOST_CLASSES = 720;
+    /** Powers that may be more than some e^64 times each other are bounded each by itself. */
+    private static final Rational MOST_APART = Rational.of(64);
 
     private final List<Line> lines;
     private final int bits;
@@ -135,20 +138,29 @@ final class EnclosedWaves {
         Optional<Ball> theirs = direction(opposite, residue);
         if (ours.isPresent() && theirs.isPresent() && opposite.modulus.isPositive()) {
             Ball ratio = near.modulus.dividedBy(opposite.modulus);
+            if (ratio.minus(Ball.of(1, bits)).abs().upper().times(Rational.of(last)).compareTo(MOST_APART) > 0) {
+                return apart(near, opposite, residue, first, last);
+            }
             Ball growth = Intervals.hull(Intervals.power(ratio, first), Intervals.power(ratio, last))
                     .minus(Ball.of(1, bits));
             return ours.get().plus(theirs.get()).times(powers(near, first, last))
                     .minus(theirs.get().times(powers(opposite, first, last)).times(growth));
         }
         if (first == 0) {
-            return over(near, residue, first, last).plus(over(opposite, residue, first, last));
+            return apart(near, opposite, residue, first, last);
         }
         Ball larger = Intervals.hull(near.modulus, opposite.modulus);
         Ball rest = near.coefficient.plus(opposite.coefficient).modulus().times(powers(near, first, last));
-        Ball apart = near.base.minus(opposite.base).modulus();
-        Ball moved = opposite.coefficient.modulus().times(apart).times(kPower(last, near.power + 1))
+        Ball distance = near.base.minus(opposite.base).modulus();
+        Ball moved = opposite.coefficient.modulus().times(distance).times(kPower(last, near.power + 1))
                 .times(Intervals.hull(Intervals.power(larger, first - 1), Intervals.power(larger, last - 1)));
-        return Intervals.symmetric(rest.plus(moved));
+        Ball together = Intervals.symmetric(rest.plus(moved));
+        Ball apart = apart(near, opposite, residue, first, last);
+        return together.upper().compareTo(apart.abs().upper()) <= 0 ? together : apart;
+    }
+
+    private Ball apart(Enclosed near, Enclosed opposite, int residue, long first, long last) {
+        return over(near, residue, first, last).plus(over(opposite, residue, first, last));
     }
 
     /** The real coefficient a wave has in a class of k, before r^k; empty where it has none. */
@@ -198,7 +210,7 @@ final class EnclosedWaves {
             return Optional.empty();
         }
         if (wave.power > 0) {
-            Ball step = Ball.of(org.pofk.exact.Rational.of(first + 1, first), bits).pow(wave.power);
+            Ball step = Ball.of(Rational.of(first + 1, first), bits).pow(wave.power);
             if (!Ball.of(1, bits).minus(step.times(wave.modulus)).isPositive()) {
                 return Optional.empty();
             }

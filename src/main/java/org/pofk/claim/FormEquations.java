@@ -245,14 +245,41 @@ record FormEquations(List<FormEquation> equations, boolean fits) {
             }
             QuantityPolynomials.Division division = QuantityPolynomials.divide(numerator, denominator);
             if (!full.isEmpty()) {
-                List<Quantity> right = target.partAt(new RootCounts(full));
+                int zeros = full.keySet().stream().anyMatch(FormPole::isZero) ? 0 : powersOfZ(numerator);
+                List<Quantity> own = QuantityPolynomials.divide(numerator.subList(zeros, numerator.size()), denominator)
+                        .remainder();
+                List<Quantity> right = overZ(target.partAt(new RootCounts(full)), zeros, denominator);
                 Optional<Span> span = group.size() == 1 ? Optional.of(group.get(0).span()) : Optional.empty();
                 for (int power = 0; power < denominator.size() - 1; power++) {
-                    add(About.PART, span, QuantityPolynomials.coefficient(division.remainder(), power),
+                    add(About.PART, span, QuantityPolynomials.coefficient(own, power),
                             QuantityPolynomials.coefficient(right, power));
                 }
             }
             return division.quotient();
+        }
+
+        /** How often z can be taken out as written. */
+        private static int powersOfZ(List<Quantity> polynomial) {
+            int zeros = 0;
+            while (zeros + 1 < polynomial.size()
+                    && polynomial.get(zeros).rational().filter(Rational::isZero).isPresent()) {
+                zeros++;
+            }
+            return zeros;
+        }
+
+        /**
+         * The polynomial that times a power of z leaves a remainder by d, where d(0) isn't zero: with d = d₀ + z e, 1/z
+         * is −e/d₀. So c z/(z − λ) says what c is, not c λ.
+         */
+        private static List<Quantity> overZ(List<Quantity> remainder, int zeros, List<Quantity> denominator) {
+            List<Quantity> over = remainder;
+            List<Quantity> inverse = QuantityPolynomials.times(denominator.subList(1, denominator.size()),
+                    denominator.get(0).inverse().negate());
+            for (int i = 0; i < zeros; i++) {
+                over = QuantityPolynomials.divide(QuantityPolynomials.times(over, inverse), denominator).remainder();
+            }
+            return over;
         }
 
         /** The numerator multiplied out, over leading coefficients below the line. */

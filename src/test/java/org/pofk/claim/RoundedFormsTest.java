@@ -8,6 +8,7 @@ import java.util.List;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
+import org.pofk.exact.Rational;
 import org.pofk.meaning.Fit;
 
 /** Formulas with every decimal right to its digits are rounded in whatever form they are written; what rounding costs. */
@@ -102,6 +103,25 @@ class RoundedFormsTest {
     })
     void conjugateExponentialsAreWrongInOneSignOrDigit(String model, String claim) {
         assertWrong(model, claim);
+    }
+
+    @Test
+    void complexPartialFractionsBesideAConstantAreRoundedInEveryDecimal() {
+        String text = "expansion: '0', is: '0.2857*z/(z - 1) + (-0.01083 + 0.4184*i)*z/(z - (0.09200 + 0.2434*i))"
+                + " + (-0.01083 - 0.4184*i)*z/(z - (0.09200 - 0.2434*i)) - 0.2640'";
+        assertRounded("inventory-policy", text);
+        assertWrong("inventory-policy", text.replace("-0.01083 - 0.4184", "-0.01083 - 0.4148"));
+    }
+
+    @Test
+    void aSlowPoleBesideAFastOneOfNearlyNoWeightIsBoundedClosely() {
+        Claims claims = Judged.read(Path.of("test-data/models"), "storage-cavern", "", List.of("{formula: 'thinned', is:"
+                + " '0.333326667 + 0.142857143*0.999999400^k - 0.476183810*0.999999400^k + 0.142857143*0.995000000^k"
+                + " - 0.142857143*0.995000000^k'}"));
+        Judgement judgement = Judging.of(claims.claims().get(0), Truth.of(claims.model().chain()));
+        assertEquals(Verdict.ROUNDED, judgement.verdict(), judgement::toString);
+        assertTrue(judgement.difference().orElseThrow().size().value().compareTo(Rational.parse("1e-5")) < 0,
+                judgement::toString);
     }
 
     @Test
