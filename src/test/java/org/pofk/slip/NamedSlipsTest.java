@@ -29,6 +29,8 @@ class NamedSlipsTest {
             chebyshev-T         | {formula: 'y(k)', is: '(1/2)*((3/5) - (4/5*sqrt(1))*i)^k'}          | TERM_MISSING
             chebyshev-T         | {formula: 'y', is: '(0.5)*(0.6 + 0.8*i)^k'}                         | TERM_MISSING
             gaussian-one-plus-i | {formula: 'y(k+1)', is: '(0.500000 - 0.500000*i)*(1 + 1.000000*i)^k'} | TERM_MISSING
+            gaussian-one-plus-i | {formula: 'y(k+1)', is: '2*1.41421^(k-1)*cos(0.0785398*(k-1))'}     | DECIMAL_POINT_MOVED
+            rearrange-front-3   | {formula: 'identity', is: '0.33333*delta(k) - 0.50000*0.38533^k + 0.16667'} | SIGN_OF_A_TERM, WRONG_POLE
             reflecting-walk-5   | {transform: 'at4', is: '(0.15200)/((z - 1)*(z + 1)*(z - 0.70711)*(z + 0.70711))'} | DIGITS_TRANSPOSED
             reflecting-walk-5   | {transform: 'at4', is: '(0.1200)/((z - 1)*(z + 1)*(z - 0.7071)*(z + 0.7071))'} | ROUNDED_TOO_EARLY
             cycle-5             | {formula: '0', is: '0.2000000000 + 0.04000000000*0.3090169944^k + 0.4000000000*(-0.8090169944)^k'} | DECIMAL_POINT_MOVED
