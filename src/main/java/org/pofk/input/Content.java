@@ -10,6 +10,11 @@ record Content(Node node, Notation notation) {
     record Text(String text, Places places, Notation notation) {
     }
 
+    /** Whether it is one text of LaTeX, which may hold a list or a matrix. */
+    boolean isLatexText() {
+        return notation == Notation.LATEX && node.asScalar().isPresent();
+    }
+
     /** A part of it. */
     Content part(Node inner) {
         return new Content(inner, notation);

@@ -27,6 +27,11 @@ final class PolesSection {
         List<Node> written = content.node().asSequence().map(Node.Sequence::items)
                 .orElse(List.of(content.node()));
         List<Pole> poles = new ArrayList<>();
+        if (content.isLatexText()) {
+            formulas.text(content, "a pole").ifPresent(text -> LatexGrid.list(text.text()).forEach(entry -> poles.addAll(
+                    poles(new Content.Text(entry, text.places(), text.notation()), content.node()))));
+            return poles;
+        }
         for (Node node : written) {
             formulas.text(content.part(node), "a pole").ifPresent(text -> poles.addAll(poles(text, node)));
         }

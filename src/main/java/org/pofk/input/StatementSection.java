@@ -121,13 +121,22 @@ final class StatementSection {
 
     /** A list with one number for each state. */
     private List<FormulaText> numbers(Content content, String what) {
+        if (content.isLatexText()) {
+            return formulas.text(content, what).map(text -> inLatex(text, content)).orElse(List.of());
+        }
         Optional<Node.Sequence> list = reading.sequence(content.node(), what,
                 "[0.9, 0.1, 0] or a mapping such as {STATE: 0.9, OTHER: 0.1}");
         List<Node> items = list.map(Node.Sequence::items).orElse(List.of());
         if (list.isPresent()) {
-            requireOneForEachState(content, items);
+            requireOneForEachState(content, items.size());
         }
         return items.stream().flatMap(item -> formulas.number(content.part(item), "a number").stream()).toList();
+    }
+
+    private List<FormulaText> inLatex(Content.Text text, Content content) {
+        List<String> entries = LatexGrid.list(text.text());
+        requireOneForEachState(content, entries.size());
+        return entries.stream().flatMap(entry -> formulas.numberIn(entry, text).stream()).toList();
     }
 
     private Optional<Statement> polynomial(Content content, Statement.MatrixPolynomial.Which which) {
@@ -188,7 +197,7 @@ final class StatementSection {
 
     private <T> List<T> ofStatesInOrder(Content content, List<Node> items,
             BiFunction<Output, Content, Optional<T>> part) {
-        requireOneForEachState(content, items);
+        requireOneForEachState(content, items.size());
         List<Output> states = names.everyState();
         List<T> parts = new ArrayList<>();
         for (int i = 0; i < items.size(); i++) {
@@ -197,10 +206,10 @@ final class StatementSection {
         return parts;
     }
 
-    private void requireOneForEachState(Content content, List<Node> items) {
-        if (names.states().filter(n -> n != items.size()).isPresent()) {
+    private void requireOneForEachState(Content content, int size) {
+        if (names.states().filter(n -> n != size).isPresent()) {
             reading.fault(content.node().position(), "size-differs", "this list has "
-                    + Words.count(items.size(), "entry", "entries") + ", but the model has "
+                    + Words.count(size, "entry", "entries") + ", but the model has "
                     + Words.count(names.states().get(), "state", "states"));
         }
     }

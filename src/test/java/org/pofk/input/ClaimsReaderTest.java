@@ -16,6 +16,7 @@ import org.pofk.claim.Claim;
 import org.pofk.claim.Claim.SafeSide;
 import org.pofk.claim.Claim.Steps;
 import org.pofk.claim.Claims;
+import org.pofk.claim.FormulaText;
 import org.pofk.claim.Statement;
 import org.pofk.exact.Rational;
 import org.pofk.formula.ParsedFormula;
@@ -38,6 +39,39 @@ class ClaimsReaderTest {
 
     private static String refused(String claim) {
         return assertThrows(RefusedException.class, () -> one(claim), claim).getMessage();
+    }
+
+    private static String texts(Statement statement) {
+        return statement instanceof Statement.Matrix matrix
+                ? matrix.rows().stream().map(row -> row.stream().map(FormulaText::text).toList()).toList().toString()
+                : statement instanceof Statement.Poles poles ? poles.poles().stream()
+                .map(pole -> pole.value().text() + "*" + pole.multiplicity()).toList().toString()
+                : ((Statement.Start) statement).components().stream().map(each -> each.is().text()).toList().toString();
+    }
+
+    @ParameterizedTest
+    @CsvSource(delimiter = '|', quoteCharacter = '"', value = {
+        "{matrix: all, is-latex: '\\begin{pmatrix} 0.9 & 0{,}6 & 0 \\\\ 0.1 & \\frac{2}{5} & 0 \\\\ 0 & 0 & 1 \\end{pmatrix}'} "
+                + "| [[0.9, 0{,}6, 0], [0.1, \\frac{2}{5}, 0], [0, 0, 1]]",
+        "{matrix: all, is-latex: '\\begin{bmatrix}1&0&0\\\\0&1&0\\\\0&0&1\\\\\\end{bmatrix}'} "
+                + "| [[1, 0, 0], [0, 1, 0], [0, 0, 1]]",
+        "{start: all, is-latex: '\\begin{pmatrix} 1 \\\\ 0 \\\\ 0 \\end{pmatrix}'} | [1, 0, 0]",
+        "{start: all, is-latex: '1, 0, 0'} | [1, 0, 0]",
+        "{poles: lost, is-latex: '1, 0{,}2317, 0{,}4508 (twice), 0.4 \\pm 0.33\\,i'} "
+                + "| [1*1, 0{,}2317*1, 0{,}4508*2, 0.4 +   0.33\\,i*1, 0.4 -   0.33\\,i*1]",
+        "{poles: lost, is-latex: '1,0.2317;0.4508'} | [1*1, 0.2317*1, 0.4508*1]",
+        "{poles: lost, is-latex: '\\frac{1}{2}'} | [\\frac{1}{2}*1]"
+    })
+    void matricesVectorsAndListsOfPolesAreReadFromLatex(String claim, String texts) throws RefusedException {
+        Claim read = read("review: {convention: columns}\nclaims:\n  - " + claim + "\n").claims().get(0);
+        assertEquals(texts, texts(read.statement()));
+    }
+
+    @Test
+    void aMatrixInLatexThatIsNoneIsToldItsForm() {
+        assertTrue(refused("{matrix: all, is-latex: '1, 0, 0'}").contains("\\begin{pmatrix} 0.9 & 0.2"));
+        assertTrue(refused("{matrix: all, is-latex: '\\begin{pmatrix} 1 & 0 \\\\ 0 & 1 \\end{pmatrix}'}")
+                .contains("the matrix has 2 rows of 2, but the model has 3 states"));
     }
 
     @Test
