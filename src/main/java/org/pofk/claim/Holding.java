@@ -6,7 +6,9 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalLong;
+import java.util.Set;
 import java.util.function.Function;
+import java.util.stream.Collectors;
 import org.pofk.claim.Judgement.JudgedNumber;
 import org.pofk.meaning.Decision;
 import org.pofk.meaning.Equation;
@@ -101,10 +103,18 @@ final class Holding {
                 right.apply(new RightTexts(claim, held, exact, decimals)));
     }
 
+    /** Real where a number that isn't belongs: its decimals have no right values of their own. */
+    private static boolean lacksAPart(Held number) {
+        return RightNumber.isReal(number.stated().value()) && !RightNumber.isReal(number.right());
+    }
+
     /** The decimals of exact numbers are right as they stand. */
     private List<JudgedNumber> judged(List<Decision> exact, RightDecimals decimals) {
         Map<Written, JudgedNumber> numbers = new LinkedHashMap<>();
-        decimals.judged().forEach(number -> numbers.put(number.written(), number));
+        Set<Written> halves = held.stream().filter(Holding::lacksAPart)
+                .flatMap(each -> each.stated().value().decimals().stream()).collect(Collectors.toSet());
+        decimals.judged().stream().filter(number -> !halves.contains(number.written()))
+                .forEach(number -> numbers.put(number.written(), number));
         for (int i = 0; i < held.size(); i++) {
             if (exact.get(i) == Decision.YES) {
                 held.get(i).stated().value().decimals().forEach(written ->

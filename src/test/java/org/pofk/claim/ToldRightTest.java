@@ -45,6 +45,13 @@ class ToldRightTest {
     }
 
     @Test
+    void aRealNumberInPlaceOfAComplexOneHasNoRightDecimals() {
+        Judgement judgement = judged("{residues: slipping, are: {0.35 + 0.1323 i: -0.0456}}");
+        assertEquals(List.of("0.35", "0.1323"),
+                judgement.numbers().stream().map(number -> number.written().text()).toList());
+    }
+
+    @Test
     void anEigenvectorAtNoEigenvalueIsToldTheEigenvalues() {
         Judgement judgement = judged("{eigenvector: all, at: 0.5, are: [1, 1, 1]}");
         assertEquals(Verdict.WRONG, judgement.verdict());
