@@ -11,8 +11,14 @@ import java.util.regex.Pattern;
  * spaces as there is text, so that its characters keep their places.
  */
 final class LatexGrid {
-    private static final Pattern MATRIX =
-            Pattern.compile("(?s)\\s*\\\\begin\\s*\\{([pbvBV]?matrix)\\}(.*)\\\\end\\s*\\{\\1\\}\\s*");
+    /** The environment by name, perhaps in brackets and right of an equals sign. */
+    private static final Pattern MATRIX = Pattern.compile("(?s)(?:[^=&]*=)?\\s*(?:\\\\left\\s*[(\\[]|[(\\[])?\\s*"
+            + "\\\\begin\\s*\\{(?:([pbB]?matrix)\\}|(array)\\}\\s*\\{[^{}]*\\})(.*)\\\\end\\s*\\{(?:\\1|\\2)\\}"
+            + "\\s*(?:\\\\right\\s*[)\\]]|[)\\]])?\\s*");
+    private static final Pattern BRACKETS =
+            Pattern.compile("(?s)\\s*(?:\\\\left\\s*)?(?:\\(|\\[|\\\\\\{)(.*?)(?:\\\\right\\s*)?(?:\\)|\\]|\\\\\\})\\s*");
+    private static final Pattern TRANSPOSED =
+            Pattern.compile("\\^\\s*\\{?\\s*(?:T|\\\\top|\\\\(?:mathrm|mathsf|text)\\s*\\{?\\s*T\\s*\\}?)\\s*\\}?\\s*$");
     private static final Pattern POINT = Pattern.compile("\\.|\\{\\s*,\\s*\\}");
 
     private final String text;
@@ -28,13 +34,21 @@ final class LatexGrid {
     /** The rows of what stands between {@code \begin{pmatrix}} and its end; empty where the text is something else. */
     static Optional<List<List<String>>> matrix(String text) {
         Matcher matrix = MATRIX.matcher(text);
-        return matrix.matches() ? Optional.of(new LatexGrid(text, matrix.start(2)).rows(matrix.end(2))) : Optional.empty();
+        return matrix.matches() ? Optional.of(new LatexGrid(text, matrix.start(3)).rows(matrix.end(3)))
+                : Optional.empty();
     }
 
     /** The entries of a vector or of a list with commas or semicolons; the text alone where it has none. */
     static List<String> list(String text) {
-        return matrix(text).map(rows -> rows.stream().flatMap(List::stream).toList())
-                .orElseGet(() -> new LatexGrid(text, 0).entries());
+        Optional<List<List<String>>> vector = matrix(TRANSPOSED.matcher(text).replaceFirst(""));
+        if (vector.isPresent()) {
+            return vector.get().stream().flatMap(List::stream).toList();
+        }
+        Matcher brackets = BRACKETS.matcher(TRANSPOSED.matcher(text).replaceFirst(""));
+        List<String> within = brackets.matches()
+                ? new LatexGrid(text, brackets.start(1)).entries(brackets.end(1)) : List.of();
+        List<String> entries = within.size() > 1 ? within : new LatexGrid(text, 0).entries(text.length());
+        return entries.size() > 1 ? entries : List.of(text);
     }
 
     private List<List<String>> rows(int end) {
@@ -56,22 +70,25 @@ final class LatexGrid {
         return rows;
     }
 
-    private List<String> entries() {
+    /** Those up to an end; none where a bracket closes that doesn't open here. */
+    private List<String> entries(int end) {
         boolean hasPoints = POINT.matcher(text).find();
         int depth = 0;
-        for (int at = 0; at < text.length(); at++) {
+        for (int at = start; at < end; at++) {
             char c = text.charAt(at);
             if (c == '\\') {
                 at++;
             } else if ("{([".indexOf(c) >= 0) {
                 depth++;
             } else if ("})]".indexOf(c) >= 0) {
-                depth--;
+                if (--depth < 0) {
+                    return List.of();
+                }
             } else if (depth == 0 && (c == ';' || c == ',' && (hasPoints || !isBeforeDigit(at)))) {
                 cell(at, at + 1);
             }
         }
-        cell(text.length(), text.length());
+        cell(end, end);
         return row;
     }
 
