@@ -23,24 +23,22 @@ final class SafeDigits {
 
     /** The right value of a real number that is one decimal; the claim names a side. */
     static String of(Claim claim, Written written, Held number) {
-        boolean isPercent = written.text().endsWith("%");
-        Rational unit = isPercent ? Rational.of(1, 100) : Rational.ONE;
-        int least = Math.max(0, places(written.lastPlace().dividedBy(unit)));
+        int least = Math.max(0, places(written.lastPlace()));
         Ball ball = number.right().enclose(BITS).real();
         Rational end = number.right().rational().orElse(
-                claim.safeSide().orElseThrow() == Claim.SafeSide.ABOVE ? ball.upper() : ball.lower()).dividedBy(unit);
+                claim.safeSide().orElseThrow() == Claim.SafeSide.ABOVE ? ball.upper() : ball.lower());
         RoundingMode toSide = claim.safeSide().orElseThrow() == Claim.SafeSide.ABOVE
                 ? RoundingMode.CEILING : RoundingMode.FLOOR;
         for (int places = least; places <= least + MORE_PLACES; places++) {
             BigDecimal safe = rounded(end, places, toSide);
             boolean isNear = claim.within().isPresent()
-                    ? isClaimed(claim, number, Rational.of(safe).times(unit))
+                    ? isClaimed(claim, number, Rational.of(safe))
                     : safe.equals(rounded(end, places, RoundingMode.HALF_EVEN));
             if (isNear) {
-                return told(safe, isPercent);
+                return safe.toPlainString();
             }
         }
-        return told(rounded(end, least + 1, toSide), isPercent);
+        return rounded(end, least + 1, toSide).toPlainString();
     }
 
     private static boolean isClaimed(Claim claim, Held number, Rational value) {
@@ -50,10 +48,6 @@ final class SafeDigits {
 
     private static BigDecimal rounded(Rational value, int places, RoundingMode mode) {
         return new BigDecimal(value.numerator()).divide(new BigDecimal(value.denominator()), places, mode);
-    }
-
-    private static String told(BigDecimal value, boolean isPercent) {
-        return (value.signum() == 0 ? "0" : value.toPlainString()) + (isPercent ? "%" : "");
     }
 
     /** p of 10^−p. */

@@ -22,12 +22,12 @@ final class PolesSection {
         this.reading = reading;
     }
 
-    /** All poles of a list, or the one of a single value; faults for those that can't be read. */
+    /** All poles of a list, or of one text with commas; faults for those that can't be read. */
     List<Pole> read(Content content) {
         List<Node> written = content.node().asSequence().map(Node.Sequence::items)
                 .orElse(List.of(content.node()));
         List<Pole> poles = new ArrayList<>();
-        if (content.isLatexText()) {
+        if (content.node().asScalar().isPresent()) {
             formulas.text(content, "a pole").ifPresent(text -> LatexGrid.list(text.text()).forEach(entry -> poles.addAll(
                     poles(new Content.Text(entry, text.places(), text.notation()), content.node()))));
             return poles;

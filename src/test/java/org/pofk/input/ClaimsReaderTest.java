@@ -61,6 +61,7 @@ class ClaimsReaderTest {
                 + "| [1*1, 0{,}2317*1, 0{,}4508*2, 0.4 +   0.33\\,i*1, 0.4 -   0.33\\,i*1]",
         "{poles: lost, is-latex: '1,0.2317;0.4508'} | [1*1, 0.2317*1, 0.4508*1]",
         "{poles: lost, is-latex: '\\left\\{1, (0.5 - 0.1)\\right\\}'} | [1*1, (0.5 - 0.1)*1]",
+        "{poles: lost, is: '1, 0.2317, 0.4508 (twice)'} | [1*1, 0.2317*1, 0.4508*2]",
         "{poles: lost, is-latex: '(1), (0.5)'} | [(1)*1, (0.5)*1]",
         "{poles: lost, is-latex: '(1 - 0.5)'} | [(1 - 0.5)*1]",
         "{start: all, is-latex: '(1, 0, 0)^{\\mathrm{T}}'} | [1, 0, 0]",
@@ -68,7 +69,7 @@ class ClaimsReaderTest {
         "{start: all, is-latex: '\\begin{pmatrix} 1 & 0 & 0 \\end{pmatrix}^\\top'} | [1, 0, 0]",
         "{poles: lost, is-latex: '\\frac{1}{2}'} | [\\frac{1}{2}*1]"
     })
-    void matricesVectorsAndListsOfPolesAreReadFromLatex(String claim, String texts) throws RefusedException {
+    void matricesVectorsAndListsOfPolesAreReadFromOneText(String claim, String texts) throws RefusedException {
         Claim read = read("review: {convention: columns}\nclaims:\n  - " + claim + "\n").claims().get(0);
         assertEquals(texts, texts(read.statement()));
     }
