@@ -111,7 +111,8 @@ final class Explaining {
     }
 
     private boolean isRight(Candidate candidate) {
-        return budget.judgement() && Judging.isRight(candidate.claim(), candidate.truth().get());
+        return budget.judgement() && Judging.isRight(candidate.claim(), candidate.truth().get())
+                && TightBound.isTight(candidate.claim(), candidate.truth().get());
     }
 
     private Optional<Candidate> candidate(List<Change> changes) {
