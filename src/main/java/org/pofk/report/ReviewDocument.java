@@ -108,7 +108,7 @@ public final class ReviewDocument {
         if (hasPlaces) {
             header.add(Prose.of("where"));
         }
-        header.addAll(List.of(Prose.of("states"), Prose.of("verdict")));
+        header.addAll(List.of(Prose.of("what it states"), Prose.of("verdict")));
         if (hasErrors) {
             header.add(Prose.of("largest error"));
         }

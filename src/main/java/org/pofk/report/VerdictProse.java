@@ -36,7 +36,7 @@ final class VerdictProse {
     static String meaning(Verdict verdict) {
         return switch (verdict) {
             case EXACT -> "identical for every k it is claimed for, proved";
-            case ROUNDED -> "every number in it is right to the digits written";
+            case ROUNDED -> "every number in it is right to the digits written, or cut off where that is said";
             case APPROXIMATE -> "no further off than it is claimed to be, and on the side claimed to be safe";
             case CARRIED -> "wrong, but what follows from an earlier wrong step";
             case WRONG -> "not what it claims to be";
