@@ -88,7 +88,7 @@ class DistributionTest {
         String notice = Files.readString(HOME.resolve("NOTICE"));
         List<String> texts = java.util.regex.Pattern.compile("licences/[A-Za-z0-9.-]+\\.(txt|md)").matcher(notice)
                 .results().map(java.util.regex.MatchResult::group).distinct().toList();
-        assertEquals(9, texts.size());
+        assertEquals(10, texts.size());
         for (String text : texts) {
             assertTrue(Files.size(HOME.resolve(text)) > 1000, text);
         }
