@@ -78,7 +78,7 @@ final class WhenSearch {
 
     When answer() {
         if (limits.isEmpty()) {
-            return new When(condition, firstWithin(UNDECIDED_SEARCHED_UP_TO), Optional.empty(), List.of(), false,
+            return new When(condition, firstWithin(ExactSteps.FEW), Optional.empty(), List.of(), false,
                     Reason.NO_LONG_RUN);
         }
         List<ResidueClass> classes = new ArrayList<>();
@@ -150,7 +150,7 @@ final class WhenSearch {
     }
 
     private Optional<Long> firstWithin(long last) {
-        for (long k = 0; k <= Math.min(last, EXACT_UP_TO); k++) {
+        for (long k = 0; k <= last; k++) {
             if (condition.kind() != When.Condition.Kind.SETTLED
                     && condition.around(Rational.ZERO).contains(exact.get().at(k))) {
                 return Optional.of(k);
