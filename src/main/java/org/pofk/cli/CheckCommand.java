@@ -38,13 +38,10 @@ final class CheckCommand implements Work {
     private SettingOptions settings = new SettingOptions();
 
     @Mixin
-    private WritingOptions writing;
+    private WritingOptions writing = new WritingOptions(CommandName.CHECK, Format.JSON);
 
     @Mixin
-    private BudgetOptions budget;
-
-    @Mixin
-    private CommonOptions common;
+    private RunOptions run;
 
     @Override
     public ExitCode run(Streams streams) throws RefusedException, UsageException, WritingException {
@@ -52,38 +49,35 @@ final class CheckCommand implements Work {
     }
 
     private ExitCode writeBlank(Streams streams) throws RefusedException, UsageException, WritingException {
-        writing.save().check();
+        SaveOptions save = writing.destinationOfYaml("an empty claims file");
         Overrides overrides = settings.overrides();
         Model model = settings.read(() -> ModelReader.read(file, overrides));
-        writing.save().write(BlankClaims.of(model, fromClaims()), streams);
+        save.write(BlankClaims.of(model, fromClaims(save)), streams);
         return ExitCode.ANSWERED;
     }
 
     /** The model's file as the claims file must name it: from where that is to be saved. */
-    private String fromClaims() {
-        return writing.save().file().flatMap(saved -> Optional.ofNullable(saved.toAbsolutePath().getParent()))
+    private String fromClaims(SaveOptions save) {
+        return save.file().flatMap(saved -> Optional.ofNullable(saved.toAbsolutePath().getParent()))
                 .map(folder -> folder.normalize().relativize(file.toAbsolutePath().normalize()).toString())
                 .orElse(file.toString()).replace('\\', '/');
     }
 
     private ExitCode check(Streams streams) throws RefusedException, UsageException, WritingException {
-        Format format = writing.formatOfDocument();
-        writing.save().check();
+        Destination destination = writing.destination(file);
         Source source = Source.read(file);
         Overrides overrides = settings.overrides();
         Claims claims = settings.read(() ->
                 ClaimsReader.read(source, Optional.ofNullable(file.getParent()), overrides));
         Variants variants = ModelVariants.of(claims, overrides);
-        Worker.Outcome<ReviewedClaims> outcome = Worker.within(budget.limit(streams), streams.notes(), published ->
+        Worker.Outcome<ReviewedClaims> outcome = run.within(streams, published ->
                 published.accept(Reviewing.of(claims, variants, published)));
         if (outcome.published().isEmpty()) {
-            streams.notes().println("pofk: nothing was decided within the budget");
-            return ExitCode.NOT_DECIDED;
+            return run.undecided(streams);
         }
         ReviewedClaims reviewed = outcome.published().get();
-        writing.save().write(format == Format.JSON ? VerdictsJson.write(reviewed)
-                : writing.written(ReviewDocument.of(reviewed, ClaimsText.of(source.text()),
-                        "pofk " + VersionCommand.version()), format), streams);
+        destination.write(Answer.of(() -> ReviewDocument.of(reviewed, ClaimsText.of(source.text()),
+                "pofk " + VersionCommand.version())).with(Format.JSON, () -> VerdictsJson.write(reviewed)), streams);
         return code(reviewed, outcome.finished());
     }
 

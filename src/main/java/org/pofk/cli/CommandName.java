@@ -42,8 +42,10 @@ enum CommandName {
 
     /** The command with its options, ready to be parsed; made only for the command asked for, for a quick start. */
     CommandLine commandLine() {
-        return new CommandLine(work.get()).setCommandName("pofk " + word()).setUsageHelpWidth(80)
+        CommandLine command = new CommandLine(work.get()).setCommandName("pofk " + word()).setUsageHelpWidth(80)
                 .setCaseInsensitiveEnumValuesAllowed(true)
                 .setColorScheme(CommandLine.Help.defaultColorScheme(CommandLine.Help.Ansi.OFF));
+        OfferedFormats.nameIn(command.getCommandSpec());
+        return command;
     }
 }

@@ -29,7 +29,7 @@ final class DeriveCommand implements Work {
     private static final int DERIVED_UNASKED = 12;
 
     @Mixin
-    private ModelOptions model;
+    private AnswerOptions options = new AnswerOptions(CommandName.DERIVE, Format.JSON, Format.NOTEBOOK);
 
     @Option(names = "--of", paramLabel = "NAME",
             description = "an output, a set or a state; repeatable; 'all' for every state")
@@ -46,18 +46,6 @@ final class DeriveCommand implements Work {
     @Option(names = "--second-opinion", description = "asks a general algebra system whether it agrees")
     private boolean secondOpinion;
 
-    @Mixin
-    private ShowingOptions showing;
-
-    @Mixin
-    private WritingOptions writing;
-
-    @Mixin
-    private BudgetOptions budget;
-
-    @Mixin
-    private CommonOptions common;
-
     /** How much is shown. */
     enum Part {
         RESULT, DERIVATION, ALL;
@@ -70,47 +58,42 @@ final class DeriveCommand implements Work {
 
     @Override
     public ExitCode run(Streams streams) throws RefusedException, UsageException, WritingException {
-        Style style = showing.style();
-        Format format = writing.format();
-        writing.save().check();
-        Model read = model.read();
+        Style style = options.style();
+        Destination destination = options.destination();
+        Model read = options.model();
         if (isTooLargeForAll(read.chain())) {
-            return askedForOutputs(read, style, format, streams);
+            return askedForOutputs(read, style, destination, streams);
         }
         List<Output> outputs = AskedOutputs.of(read.chain(), of);
-        Worker.Outcome<DerivedModel> outcome = Worker.within(budget.limit(streams), streams.notes(), published ->
-                Deriving.of(read, outputs, at.map(StepList::steps).orElse(List.of()), extras(read, format),
+        Worker.Outcome<DerivedModel> outcome = options.within(streams, published ->
+                Deriving.of(read, outputs, at.map(StepList::steps).orElse(List.of()), extras(read, destination),
                         published));
         if (outcome.published().isEmpty()) {
-            streams.notes().println("pofk: nothing was decided within the budget");
-            return ExitCode.NOT_DECIDED;
+            return options.undecided(streams);
         }
         DerivedModel derived = outcome.published().get();
-        writing.save().write(written(derived, style, format), streams);
+        destination.write(answer(derived, style), streams);
         return derived.isDecided() && outcome.finished() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
     }
 
-    private String written(DerivedModel derived, Style style, Format format) throws RefusedException {
-        return switch (format) {
-            case JSON -> DerivationJson.write(derived, style.digits());
-            case NOTEBOOK -> NotebookWriter.write(derived, style, showing.convention(derived.model()));
-            case TEXT, HTML, LATEX -> writing.written(document(derived, style), format);
-        };
+    private Answer answer(DerivedModel derived, Style style) {
+        return Answer.of(() -> document(derived, style))
+                .with(Format.JSON, () -> DerivationJson.write(derived, style.digits()))
+                .with(Format.NOTEBOOK, () -> NotebookWriter.write(derived, style,
+                        options.convention(derived.model())));
     }
 
-    private ExitCode askedForOutputs(Model read, Style style, Format format, Streams streams)
+    private ExitCode askedForOutputs(Model read, Style style, Destination destination, Streams streams)
             throws RefusedException, UsageException, WritingException {
-        if (format == Format.NOTEBOOK) {
+        if (destination.takes(Format.NOTEBOOK)) {
             throw new UsageException("which outputs is the notebook to be about? Name them with --of");
         }
         InspectedModel inspected = InspectedModel.of(read, List.of());
-        if (format == Format.JSON) {
+        if (destination.takes(Format.JSON)) {
             streams.notes().println("pofk: " + StructureDocument.askingForOutputs(read.chain()));
-            writing.save().write(StructureJson.write(CommandName.DERIVE.word(), inspected, style.digits()), streams);
-        } else {
-            writing.save().write(writing.written(StructureDocument.tooLargeForAll(inspected, style), format),
-                    streams);
         }
+        destination.write(Answer.of(() -> StructureDocument.tooLargeForAll(inspected, style)).with(Format.JSON,
+                () -> StructureJson.write(CommandName.DERIVE.word(), inspected, style.digits())), streams);
         return ExitCode.ANSWERED;
     }
 
@@ -122,18 +105,18 @@ final class DeriveCommand implements Work {
     private Document document(DerivedModel derived, Style style) {
         return switch (show) {
             case RESULT -> DerivationDocument.result(derived, style);
-            case DERIVATION -> DerivationDocument.derivation(derived, style, showing.convention(derived.model()));
-            case ALL -> DerivationDocument.all(derived, style, showing.convention(derived.model()));
+            case DERIVATION -> DerivationDocument.derivation(derived, style, options.convention(derived.model()));
+            case ALL -> DerivationDocument.all(derived, style, options.convention(derived.model()));
         };
     }
 
     /** The modes of the whole state are a vector each: as text for few states only, as data for any number. */
-    private Set<Deriving.Extra> extras(Model read, Format format) {
+    private Set<Deriving.Extra> extras(Model read, Destination destination) {
         Set<Deriving.Extra> extras = EnumSet.of(Deriving.Extra.COMPARISON);
         if (show != Part.RESULT) {
             extras.add(Deriving.Extra.POLE_CHECK);
         }
-        if (show != Part.RESULT && (format == Format.JSON || read.chain().size() <= DERIVED_UNASKED)) {
+        if (show != Part.RESULT && (destination.takes(Format.JSON) || read.chain().size() <= DERIVED_UNASKED)) {
             extras.add(Deriving.Extra.STATE_MODES);
         }
         if (secondOpinion) {

@@ -53,10 +53,7 @@ final class DrawCommand implements Work {
     private SaveOptions save = new SaveOptions();
 
     @Mixin
-    private BudgetOptions budget;
-
-    @Mixin
-    private CommonOptions common;
+    private RunOptions run;
 
     /** What can be drawn. */
     enum Figure {
@@ -133,7 +130,7 @@ final class DrawCommand implements Work {
             throw new UsageException("these are " + outputs.size() + " outputs; " + CourseChart.MOST_CURVES
                     + " at most can be told apart in a figure; name those that matter with --of");
         }
-        Worker.Outcome<Chart> outcome = Worker.within(budget.limit(streams), streams.notes(), published -> {
+        Worker.Outcome<Chart> outcome = run.within(streams, published -> {
             DerivedModel derived = Deriving.of(read, outputs, List.of(), EnumSet.noneOf(Deriving.Extra.class),
                     partly -> { });
             published.accept(what == Figure.COURSE

@@ -2,13 +2,18 @@ package org.pofk.cli;
 
 import java.nio.file.Path;
 import java.util.Arrays;
+import java.util.Collection;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
+import java.util.Set;
 
 /** What an answer can be written as. */
 enum Format {
     TEXT(".txt"), JSON(".json"), HTML(".html"), LATEX(".tex"), NOTEBOOK(".ipynb");
+
+    /** What any document can be written as. */
+    static final Set<Format> OF_DOCUMENTS = Set.of(TEXT, HTML, LATEX);
 
     private final String ending;
 
@@ -22,8 +27,8 @@ enum Format {
         return Arrays.stream(values()).filter(format -> name.endsWith(format.ending)).findFirst();
     }
 
-    static List<String> endings() {
-        return Arrays.stream(values()).map(format -> format.ending).toList();
+    static List<String> endings(Collection<Format> formats) {
+        return formats.stream().map(format -> format.ending).toList();
     }
 
     /** As typed: {@code json}. */

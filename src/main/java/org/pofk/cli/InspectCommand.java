@@ -18,43 +18,28 @@ import picocli.CommandLine.Option;
     "the long run in three ways, with warnings where a habit misleads; what a reviewer would ask."})
 final class InspectCommand implements Work {
     @Mixin
-    private ModelOptions model;
+    private AnswerOptions options = new AnswerOptions(CommandName.INSPECT, Format.JSON);
 
     @Option(names = "--of", paramLabel = "NAME",
             description = "an output, a set or a state whose long run is wanted; repeatable")
     private List<String> of = new ArrayList<>();
 
-    @Mixin
-    private ShowingOptions showing;
-
-    @Mixin
-    private WritingOptions writing;
-
-    @Mixin
-    private BudgetOptions budget;
-
-    @Mixin
-    private CommonOptions common;
-
     @Override
     public ExitCode run(Streams streams) throws RefusedException, UsageException, WritingException {
-        Style style = showing.style();
-        Format format = writing.formatOfDocument();
-        writing.save().check();
-        Model read = model.read();
+        Style style = options.style();
+        Destination destination = options.destination();
+        Model read = options.model();
         List<Output> outputs = of.isEmpty() ? read.chain().outputs() : AskedOutputs.of(read.chain(), of);
-        Worker.Outcome<InspectedModel> outcome = Worker.within(budget.limit(streams), streams.notes(), published -> {
+        Worker.Outcome<InspectedModel> outcome = options.within(streams, published -> {
             published.accept(InspectedModel.of(read, List.of()));
             published.accept(InspectedModel.of(read, outputs));
         });
         if (outcome.published().isEmpty()) {
-            streams.notes().println("pofk: nothing was decided within the budget");
-            return ExitCode.NOT_DECIDED;
+            return options.undecided(streams);
         }
         InspectedModel inspected = outcome.published().get();
-        writing.save().write(format == Format.JSON
-                ? StructureJson.write(CommandName.INSPECT.word(), inspected, style.digits())
-                : writing.written(StructureDocument.of(inspected, style), format), streams);
+        destination.write(Answer.of(() -> StructureDocument.of(inspected, style)).with(Format.JSON,
+                () -> StructureJson.write(CommandName.INSPECT.word(), inspected, style.digits())), streams);
         return outcome.finished() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
     }
 }

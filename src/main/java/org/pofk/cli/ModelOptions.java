@@ -34,6 +34,11 @@ final class ModelOptions {
             description = "for a CSV file that can be read two ways: where names stand, nowhere, row, column or both")
     private Optional<TableOptions.NamesIn> names = Optional.empty();
 
+    /** The model's file. */
+    Path file() {
+        return file;
+    }
+
     /** The model as the file and the command line say it. */
     Model read() throws RefusedException, UsageException {
         Overrides overrides = settings.overrides();

@@ -23,7 +23,7 @@ import picocli.CommandLine.Option;
     "passage as a formula, mean, variance and percentiles; and from every state."})
 final class PassageCommand implements Work {
     @Mixin
-    private ModelOptions model;
+    private AnswerOptions options = new AnswerOptions(CommandName.PASSAGE, Format.JSON);
 
     @Option(names = "--into", paramLabel = "NAME", required = true,
             description = "a state or set to be entered; repeatable")
@@ -45,40 +45,25 @@ final class PassageCommand implements Work {
             description = "also gives law, distribution and hazard at these steps, like 0..20,100")
     private Optional<StepList> at = Optional.empty();
 
-    @Mixin
-    private ShowingOptions showing;
-
-    @Mixin
-    private WritingOptions writing;
-
-    @Mixin
-    private BudgetOptions budget;
-
-    @Mixin
-    private CommonOptions common;
-
     @Override
     public ExitCode run(Streams streams) throws RefusedException, UsageException, WritingException {
-        Style style = showing.style();
-        Format format = writing.formatOfDocument();
-        writing.save().check();
-        Model read = model.read();
+        Style style = options.style();
+        Destination destination = options.destination();
+        Model read = options.model();
         Chain chain = started(read.chain());
         Set<Integer> target = states(read.chain(), into, "--into");
         Set<Integer> avoided = states(read.chain(), avoiding, "--avoiding");
         requireApart(chain, target, avoided);
         List<Rational> shares = shares();
-        Worker.Outcome<Passage> outcome = Worker.within(budget.limit(streams), streams.notes(), published ->
+        Worker.Outcome<Passage> outcome = options.within(streams, published ->
                 published.accept(Passage.of(chain, target, avoided, shares,
                         at.map(StepList::steps).orElse(List.of()))));
         if (outcome.published().isEmpty()) {
-            streams.notes().println("pofk: nothing was decided within the budget");
-            return ExitCode.NOT_DECIDED;
+            return options.undecided(streams);
         }
         Passage passage = outcome.published().get();
-        writing.save().write(format == Format.JSON
-                ? PassageJson.write(read, chain, passage, style.digits())
-                : writing.written(PassageDocument.of(read, chain, passage, style), format), streams);
+        destination.write(Answer.of(() -> PassageDocument.of(read, chain, passage, style))
+                .with(Format.JSON, () -> PassageJson.write(read, chain, passage, style.digits())), streams);
         return ExitCode.ANSWERED;
     }
 

@@ -21,7 +21,7 @@ final class SimulateCommand implements Work {
     private static final int MOST_RUNS = 100_000_000;
 
     @Mixin
-    private ModelOptions model;
+    private AnswerOptions options = new AnswerOptions(CommandName.SIMULATE, Format.JSON);
 
     @Option(names = "--of", paramLabel = "NAME", description = "an output, a set or a state; repeatable")
     private List<String> of = new ArrayList<>();
@@ -38,42 +38,28 @@ final class SimulateCommand implements Work {
             description = "what the random numbers begin from; ${DEFAULT-VALUE} otherwise")
     private long seed;
 
-    @Mixin
-    private ShowingOptions showing;
-
-    @Mixin
-    private WritingOptions writing;
-
-    @Mixin
-    private BudgetOptions budget;
-
-    @Mixin
-    private CommonOptions common;
-
     @Override
     public ExitCode run(Streams streams) throws RefusedException, UsageException, WritingException {
-        Style style = showing.style();
-        Format format = writing.formatOfDocument();
-        writing.save().check();
+        Style style = options.style();
+        Destination destination = options.destination();
         if (runs < 1 || runs > MOST_RUNS) {
             throw new UsageException("--runs " + runs + " is not possible; 1 to " + MOST_RUNS + " are");
         }
-        Model read = model.read();
+        Model read = options.model();
         if (read.chain().kind() == Chain.Kind.RECURSION) {
             throw new UsageException("'" + read.origin().file() + "' is a recursion: only a chain, whose entries are"
                     + " probabilities, can be run at random; pofk derive takes it");
         }
         List<Output> outputs = AskedOutputs.of(read.chain(), of);
-        Worker.Outcome<Simulation> outcome = Worker.within(budget.limit(streams), streams.notes(), published ->
+        Worker.Outcome<Simulation> outcome = options.within(streams, published ->
                 published.accept(Simulation.of(read.chain(), outputs, at.steps(), runs, seed)));
         if (outcome.published().isEmpty()) {
             streams.notes().println("pofk: the runs didn't end within the budget; fewer will, with --runs");
             return ExitCode.NOT_DECIDED;
         }
         Simulation simulation = outcome.published().get();
-        writing.save().write(format == Format.JSON
-                ? SimulationJson.write(read, simulation, style.digits())
-                : writing.written(SimulationDocument.of(read, simulation, style), format), streams);
+        destination.write(Answer.of(() -> SimulationDocument.of(read, simulation, style))
+                .with(Format.JSON, () -> SimulationJson.write(read, simulation, style.digits())), streams);
         return ExitCode.ANSWERED;
     }
 }

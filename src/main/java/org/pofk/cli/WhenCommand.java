@@ -21,7 +21,7 @@ import picocli.CommandLine.Option;
     "or that it never does. Proved: no step is passed over."})
 final class WhenCommand implements Work {
     @Mixin
-    private ModelOptions model;
+    private AnswerOptions options = new AnswerOptions(CommandName.WHEN, Format.JSON);
 
     @Option(names = "--of", paramLabel = "NAME", description = "an output, a set or a state; repeatable")
     private List<String> of = new ArrayList<>();
@@ -38,39 +38,24 @@ final class WhenCommand implements Work {
             description = "p(k) no farther than this from its long run; 1%% is a part of the long run")
     private Optional<Amount> settlesWithin = Optional.empty();
 
-    @Mixin
-    private ShowingOptions showing;
-
-    @Mixin
-    private WritingOptions writing;
-
-    @Mixin
-    private BudgetOptions budget;
-
-    @Mixin
-    private CommonOptions common;
-
     @Override
     public ExitCode run(Streams streams) throws RefusedException, UsageException, WritingException {
-        Style style = showing.style();
-        Format format = writing.formatOfDocument();
-        writing.save().check();
+        Style style = options.style();
+        Destination destination = options.destination();
         WhenModel.Asked asked = asked();
-        Model read = model.read();
+        Model read = options.model();
         List<Output> outputs = AskedOutputs.of(read.chain(), of);
-        if (format == Format.JSON && outputs.size() != 1) {
+        if (destination.takes(Format.JSON) && outputs.size() != 1) {
             throw new UsageException("as JSON one output is answered at a time; name it with --of");
         }
-        Worker.Outcome<WhenModel> outcome = Worker.within(budget.limit(streams), streams.notes(), published ->
+        Worker.Outcome<WhenModel> outcome = options.within(streams, published ->
                 WhenModel.of(read, outputs, asked, published));
         if (outcome.published().isEmpty()) {
-            streams.notes().println("pofk: nothing was decided within the budget");
-            return ExitCode.NOT_DECIDED;
+            return options.undecided(streams);
         }
         WhenModel found = outcome.published().get();
-        writing.save().write(format == Format.JSON
-                ? WhenJson.write(read, found.answers().get(0), style.digits())
-                : writing.written(WhenDocument.of(found, style), format), streams);
+        destination.write(Answer.of(() -> WhenDocument.of(found, style))
+                .with(Format.JSON, () -> WhenJson.write(read, found.answers().get(0), style.digits())), streams);
         return found.isDecided() && outcome.finished() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
     }
 

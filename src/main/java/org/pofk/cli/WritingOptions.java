@@ -1,19 +1,19 @@
 package org.pofk.cli;
 
-import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
+import java.util.EnumSet;
+import java.util.List;
 import java.util.Optional;
-import org.pofk.report.Document;
-import org.pofk.report.HtmlWriter;
-import org.pofk.report.LatexWriter;
-import org.pofk.report.TextWriter;
+import java.util.Set;
 import org.pofk.text.Alphabet;
-import org.pofk.text.RefusedException;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
 
 /** How and where the answer is written. */
 final class WritingOptions {
+    private final CommandName command;
+    private final Set<Format> offered;
+
     @Option(names = "--as", paramLabel = "FORMAT",
             description = "${COMPLETION-CANDIDATES}; otherwise from the name of the file, or text")
     private Optional<Format> as = Optional.empty();
@@ -27,46 +27,61 @@ final class WritingOptions {
     @Mixin
     private SaveOptions save = new SaveOptions();
 
-    /** The format asked for where a notebook is none. */
-    Format formatOfDocument() throws UsageException {
-        Format format = format();
-        if (format == Format.NOTEBOOK) {
-            throw new UsageException("a notebook is written by derive alone");
-        }
-        return format;
+    /** For a command that writes the formats of any document and some besides. */
+    WritingOptions(CommandName command, Format... besides) {
+        this.command = command;
+        this.offered = EnumSet.copyOf(Format.OF_DOCUMENTS);
+        this.offered.addAll(List.of(besides));
     }
 
-    /** The format asked for; a file's name and {@code --as} may not contradict each other. */
-    Format format() throws UsageException {
+    /** The formats this command writes, as they are typed. */
+    List<String> offered() {
+        return offered.stream().map(Format::toString).toList();
+    }
+
+    /**
+     * As what and where to the answer is written, about the model or the claims in a file. Refused where that
+     * contradicts itself, isn't offered, or where a file isn't to be replaced.
+     */
+    Destination destination(Path about) throws UsageException {
+        Format format = format();
+        save.check();
+        return new Destination(format, plain ? Alphabet.ASCII : Alphabet.UNICODE,
+                fragment ? Destination.LatexPart.FRAGMENT : Destination.LatexPart.ARTICLE, save);
+    }
+
+    /** Where a file of YAML goes, which this command writes in place of its answer. */
+    SaveOptions destinationOfYaml(String what) throws UsageException {
+        if (as.isPresent() || plain || fragment) {
+            throw new UsageException(what + " is YAML; --as, --plain and --fragment are for the answer of "
+                    + command.word());
+        }
+        if (save.file().flatMap(Format::of).isPresent()) {
+            throw new UsageException(what + " is YAML; give '" + save.file().get() + "' an ending of .yaml");
+        }
+        save.check();
+        return save;
+    }
+
+    private Format format() throws UsageException {
         Optional<Path> file = save.file();
         Optional<Format> named = file.flatMap(Format::of);
         if (file.isPresent() && named.isEmpty() && as.isEmpty()) {
             throw new UsageException("what is '" + file.get() + "' to hold? Name it with an ending of "
-                    + String.join(", ", Format.endings()) + ", or say with --as");
+                    + String.join(", ", Format.endings(offered)) + ", or say with --as");
         }
         if (as.isPresent() && named.isPresent() && as.get() != named.get()) {
             throw new UsageException("--as " + as.get() + " and the name '" + file.orElseThrow()
                     + "' ask for two different formats");
         }
         Format format = as.or(() -> named).orElse(Format.TEXT);
+        if (!offered.contains(format)) {
+            throw new UsageException(command.word() + " writes no " + format + "; it writes "
+                    + Words.listed(offered(), "and"));
+        }
         if (fragment && format != Format.LATEX) {
             throw new UsageException("--fragment is a part of a LaTeX document; there is no --as latex");
         }
         return format;
-    }
-
-    /** A document in a format that shows one. */
-    String written(Document document, Format format) throws RefusedException {
-        return switch (format) {
-            case TEXT -> (plain ? TextWriter.of(Alphabet.ASCII, StandardCharsets.UTF_8)
-                    : TextWriter.of(Alphabet.UNICODE, StandardCharsets.UTF_8)).write(document);
-            case HTML -> HtmlWriter.write(document);
-            case LATEX -> fragment ? LatexWriter.fragment(document) : LatexWriter.article(document);
-            case JSON, NOTEBOOK -> throw new AssertionError(format + " is written from results, not from a document");
-        };
-    }
-
-    SaveOptions save() {
-        return save;
     }
 }

@@ -1,6 +1,6 @@
 package org.pofk.cli;
 
-import java.util.Arrays;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.regex.Matcher;
@@ -42,21 +42,22 @@ final class WrongValue {
             return Optional.empty();
         }
         return Optional.of(message.group(1) + ": "
-                + said(type(option), misunderstood.getValue()).orElse(message.group(2)));
+                + said(option, misunderstood.getValue()).orElse(message.group(2)));
     }
 
     private static Class<?> type(ArgSpec option) {
         return option.typeInfo().isOptional() ? option.typeInfo().getAuxiliaryTypes()[0] : option.typeInfo().getType();
     }
 
-    private static Optional<String> said(Class<?> type, String value) {
+    private static Optional<String> said(OptionSpec option, String value) {
         if (value == null) {
             return Optional.empty();
         }
+        Class<?> type = type(option);
         if (type.isEnum()) {
-            List<String> known = Arrays.stream(type.getEnumConstants())
-                    .map(constant -> Words.lowerCase((Enum<?>) constant)).toList();
-            return Optional.of("'" + value + "' isn't known; " + oneOf(known) + Suggestion.didYouMean(known, value));
+            List<String> known = known(option);
+            return Optional.of("'" + value + "' isn't known; " + Words.listed(known, "or")
+                    + Suggestion.didYouMean(known, value));
         }
         if (type == int.class || type == long.class) {
             return Optional.of(value.matches("[-+]?\\d+") ? value + " is too large"
@@ -66,9 +67,9 @@ final class WrongValue {
                 : Optional.empty();
     }
 
-    /** {@code result, derivation or all}. */
-    private static String oneOf(List<String> known) {
-        int last = known.size() - 1;
-        return String.join(", ", known.subList(0, last)) + " or " + known.get(last);
+    private static List<String> known(OptionSpec option) {
+        List<String> known = new ArrayList<>();
+        option.completionCandidates().forEach(known::add);
+        return known;
     }
 }
