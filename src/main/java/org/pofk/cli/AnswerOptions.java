@@ -48,6 +48,11 @@ final class AnswerOptions {
         return model.read();
     }
 
+    /** What the command line puts in place of the file's own words. */
+    SettingOptions settings() {
+        return model.settings();
+    }
+
     /** Does the work within the budget; what it publishes last is kept. */
     <T> Worker.Outcome<T> within(Streams streams, Consumer<Consumer<T>> work) throws UsageException {
         return run.within(streams, work);

@@ -77,7 +77,7 @@ final class CheckCommand implements Work {
         }
         ReviewedClaims reviewed = outcome.published().get();
         destination.write(Answer.of(() -> ReviewDocument.of(reviewed, ClaimsText.of(source.text()),
-                "pofk " + VersionCommand.version())).with(Format.JSON, () -> VerdictsJson.write(reviewed)), streams);
+                VersionCommand.program())).with(Format.JSON, () -> VerdictsJson.write(reviewed)), streams);
         return code(reviewed, outcome.finished());
     }
 

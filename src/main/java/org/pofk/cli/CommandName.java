@@ -15,6 +15,7 @@ enum CommandName {
     CHECK(CheckCommand::new),
     WHEN(WhenCommand::new),
     PASSAGE(PassageCommand::new),
+    REPORT(ReportCommand::new),
     DRAW(DrawCommand::new),
     NEW(NewCommand::new),
     HELP(HelpCommand::new),

@@ -20,6 +20,8 @@ final class HelpCommand implements Work {
             "  pofk passage MODEL    how long until a set of states is first entered",
             "  pofk check CLAIMS     a derivation made by hand: which steps are right, which",
             "                        are wrong, and by which slip",
+            "  pofk report MODEL     the document to hand in: results first, then the whole",
+            "                        derivation, how it was checked, and what it stands on",
             "  pofk draw MODEL       p(k) over steps, its poles, or the states, as a figure",
             "  pofk new              patterns to start a model from",
             "  pofk help COMMAND     the options of a command",

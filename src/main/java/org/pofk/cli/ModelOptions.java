@@ -39,6 +39,11 @@ final class ModelOptions {
         return file;
     }
 
+    /** What the command line puts in place of the file's own words. */
+    SettingOptions settings() {
+        return settings;
+    }
+
     /** The model as the file and the command line say it. */
     Model read() throws RefusedException, UsageException {
         Overrides overrides = settings.overrides();

@@ -1,19 +1,15 @@
 package org.pofk.cli;
 
-import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import java.util.Set;
-import java.util.TreeSet;
+import java.util.function.Supplier;
 import org.pofk.answer.Passage;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
-import org.pofk.exact.Rational;
 import org.pofk.report.PassageDocument;
 import org.pofk.report.PassageJson;
 import org.pofk.report.Style;
 import org.pofk.text.RefusedException;
-import org.pofk.text.Suggestion;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
@@ -25,21 +21,8 @@ final class PassageCommand implements Work {
     @Mixin
     private AnswerOptions options = new AnswerOptions(CommandName.PASSAGE, Format.JSON);
 
-    @Option(names = "--into", paramLabel = "NAME", required = true,
-            description = "a state or set to be entered; repeatable")
-    private List<String> into = new ArrayList<>();
-
-    @Option(names = "--avoiding", paramLabel = "NAME",
-            description = "a state or set that ends the wait without success; repeatable")
-    private List<String> avoiding = new ArrayList<>();
-
-    @Option(names = "--from", paramLabel = "STATE", description = "the state waited in first; otherwise the start")
-    private Optional<String> from = Optional.empty();
-
-    @Option(names = "--percentile", paramLabel = "SHARE", converter = Amount.Converter.class,
-            description = "the step by which it has happened with this probability; repeatable; 50%%, 90%% and 99%%"
-                    + " otherwise")
-    private List<Amount> percentiles = new ArrayList<>();
+    @Mixin
+    private PassageOptions passage = new PassageOptions();
 
     @Option(names = "--at", paramLabel = "STEPS", converter = StepList.Converter.class,
             description = "also gives law, distribution and hazard at these steps, like 0..20,100")
@@ -49,78 +32,19 @@ final class PassageCommand implements Work {
     public ExitCode run(Streams streams) throws RefusedException, UsageException, WritingException {
         Style style = options.style();
         Destination destination = options.destination();
+        if (!passage.isAsked()) {
+            throw new UsageException("what is to be entered? Name a state or set with --into NAME");
+        }
         Model read = options.model();
-        Chain chain = started(read.chain());
-        Set<Integer> target = states(read.chain(), into, "--into");
-        Set<Integer> avoided = states(read.chain(), avoiding, "--avoiding");
-        requireApart(chain, target, avoided);
-        List<Rational> shares = shares();
-        Worker.Outcome<Passage> outcome = options.within(streams, published ->
-                published.accept(Passage.of(chain, target, avoided, shares,
-                        at.map(StepList::steps).orElse(List.of()))));
+        Chain chain = passage.started(read.chain());
+        Supplier<Passage> work = passage.work(chain, at.map(StepList::steps).orElse(List.of()));
+        Worker.Outcome<Passage> outcome = options.within(streams, published -> published.accept(work.get()));
         if (outcome.published().isEmpty()) {
             return options.undecided(streams);
         }
-        Passage passage = outcome.published().get();
-        destination.write(Answer.of(() -> PassageDocument.of(read, chain, passage, style))
-                .with(Format.JSON, () -> PassageJson.write(read, chain, passage, style.digits())), streams);
+        Passage found = outcome.published().get();
+        destination.write(Answer.of(() -> PassageDocument.of(read, chain, found, style))
+                .with(Format.JSON, () -> PassageJson.write(read, chain, found, style.digits())), streams);
         return ExitCode.ANSWERED;
-    }
-
-    private Chain started(Chain chain) throws UsageException {
-        if (chain.kind() != Chain.Kind.CHAIN) {
-            throw new UsageException("a passage needs a chain of probabilities; this model is a recursion");
-        }
-        if (from.isEmpty()) {
-            return chain;
-        }
-        int state = chain.states().indexOf(from.get());
-        if (state < 0) {
-            throw new UsageException("--from: there is no state '" + from.get() + "'"
-                    + Suggestion.didYouMean(chain.states(), from.get()));
-        }
-        List<Rational> start = new ArrayList<>();
-        for (int i = 0; i < chain.size(); i++) {
-            start.add(i == state ? Rational.ONE : Rational.ZERO);
-        }
-        return new Chain(chain.kind(), chain.states(), chain.matrix(), start, chain.sets(), chain.outputs());
-    }
-
-    private static Set<Integer> states(Chain chain, List<String> names, String option) throws UsageException {
-        Set<Integer> states = new TreeSet<>();
-        for (String name : names) {
-            if (chain.sets().containsKey(name)) {
-                states.addAll(chain.sets().get(name));
-            } else if (chain.states().contains(name)) {
-                states.add(chain.states().indexOf(name));
-            } else {
-                List<String> known = new ArrayList<>(chain.states());
-                known.addAll(chain.sets().keySet());
-                throw new UsageException(option + ": there is no state or set '" + name + "'"
-                        + Suggestion.didYouMean(known, name));
-            }
-        }
-        return states;
-    }
-
-    private static void requireApart(Chain chain, Set<Integer> target, Set<Integer> avoided) throws UsageException {
-        for (int state : avoided) {
-            if (target.contains(state)) {
-                throw new UsageException("'" + chain.states().get(state)
-                        + "' can't be entered and avoided; name it under --into or --avoiding");
-            }
-        }
-    }
-
-    private List<Rational> shares() throws UsageException {
-        List<Rational> shares = percentiles.isEmpty()
-                ? List.of(Rational.HALF, Rational.of(9, 10), Rational.of(99, 100))
-                : percentiles.stream().map(Amount::value).sorted().distinct().toList();
-        for (Rational share : shares) {
-            if (share.signum() <= 0 || share.compareTo(Rational.ONE) > 0) {
-                throw new UsageException("--percentile takes a probability above 0 and up to 1, like 90%, not " + share);
-            }
-        }
-        return shares;
     }
 }

@@ -15,8 +15,13 @@ final class VersionCommand implements Work {
 
     @Override
     public ExitCode run(Streams streams) {
-        streams.answer().println("pofk " + version());
+        streams.answer().println(program());
         return ExitCode.ANSWERED;
+    }
+
+    /** What documents say wrote them, {@code pofk 0.1.0}. */
+    static String program() {
+        return "pofk " + version();
     }
 
     /** The version the build gave, {@code 0.1.0}. */

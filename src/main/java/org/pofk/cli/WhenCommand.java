@@ -2,9 +2,6 @@ package org.pofk.cli;
 
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Optional;
-import java.util.stream.Stream;
-import org.pofk.answer.When.Condition;
 import org.pofk.answer.WhenModel;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
@@ -26,17 +23,8 @@ final class WhenCommand implements Work {
     @Option(names = "--of", paramLabel = "NAME", description = "an output, a set or a state; repeatable")
     private List<String> of = new ArrayList<>();
 
-    @Option(names = "--at-least", paramLabel = "VALUE", converter = Amount.Converter.class,
-            description = "p(k) not below this: 0.99, 1/1000, 5%%")
-    private Optional<Amount> atLeast = Optional.empty();
-
-    @Option(names = "--at-most", paramLabel = "VALUE", converter = Amount.Converter.class,
-            description = "p(k) not above this")
-    private Optional<Amount> atMost = Optional.empty();
-
-    @Option(names = "--settles-within", paramLabel = "VALUE", converter = Amount.Converter.class,
-            description = "p(k) no farther than this from its long run; 1%% is a part of the long run")
-    private Optional<Amount> settlesWithin = Optional.empty();
+    @Mixin
+    private ConditionOptions conditions = new ConditionOptions();
 
     @Override
     public ExitCode run(Streams streams) throws RefusedException, UsageException, WritingException {
@@ -60,17 +48,10 @@ final class WhenCommand implements Work {
     }
 
     private WhenModel.Asked asked() throws UsageException {
-        List<WhenModel.Asked> all = Stream.of(
-                atLeast.map(amount -> new WhenModel.Asked(Condition.Kind.AT_LEAST, amount.value(), false)),
-                atMost.map(amount -> new WhenModel.Asked(Condition.Kind.AT_MOST, amount.value(), false)),
-                settlesWithin.map(amount -> new WhenModel.Asked(Condition.Kind.SETTLED, amount.value(),
-                        amount.isPercent()))).flatMap(Optional::stream).toList();
+        List<WhenModel.Asked> all = conditions.asked();
         if (all.size() != 1) {
             throw new UsageException("say what is wanted: one of --at-least VALUE, --at-most VALUE and"
                     + " --settles-within VALUE");
-        }
-        if (all.get(0).kind() == Condition.Kind.SETTLED && all.get(0).bound().signum() <= 0) {
-            throw new UsageException("--settles-within takes a distance above zero, like 1e-6 or 1%");
         }
         return all.get(0);
     }

@@ -73,6 +73,11 @@ public record Document(List<Block> blocks, List<Sequence> sequences) {
         }
     }
 
+    /** The same block in a document whose headings lie one level deeper. */
+    static Block lowered(Block block) {
+        return block instanceof Heading heading ? new Heading(heading.level() + 1, heading.text()) : block;
+    }
+
     /** Running text; broken into lines by the writer. */
     public record Paragraph(Prose text) implements Block {
         public Paragraph(String text) {

@@ -12,7 +12,7 @@ import org.pofk.report.Document.Paragraph;
 
 /** What was asked for and a budget left no time for, each where it would have stood. */
 final class MissingBlocks {
-    private static final String NOT_DECIDED = "not decided within the budget";
+    static final String NOT_DECIDED = "not decided within the budget";
     private static final int LISTED_STEPS = 6;
 
     private MissingBlocks() {

@@ -34,9 +34,23 @@ public final class NotebookWriter {
     /** The notebook as JSON, nbformat 4.5, nothing of it run. */
     public static String write(DerivedModel derived, Style style, Convention convention) {
         NotebookWriter writer = new NotebookWriter(derived, style, convention);
+        List<Block> head = new ArrayList<>(ModelHead.of(derived.model()));
+        head.add(new Paragraph(WHAT_IT_DOES));
+        writer.text(head);
         writer.chain();
         derived.outputs().forEach(writer::output);
         writer.text(List.of(new Paragraph(Caution.TEXT)));
+        return new Notebook(writer.cells).write();
+    }
+
+    /** The same between the first page of a report with its answers, and what the report stands on. */
+    public static String write(Report report, Style style, Convention convention) {
+        NotebookWriter writer = new NotebookWriter(report.derived(), style, convention);
+        writer.text(ReportDocument.before(report, style));
+        writer.text(WHAT_IT_DOES);
+        writer.chain();
+        report.derived().outputs().forEach(writer::output);
+        writer.text(ReportDocument.after(report));
         return new Notebook(writer.cells).write();
     }
 
@@ -53,9 +67,6 @@ public final class NotebookWriter {
     }
 
     private void chain() {
-        List<Block> head = new ArrayList<>(ModelHead.of(derived.model()));
-        head.add(new Paragraph(WHAT_IT_DOES));
-        text(head);
         text(ChainBlocks.of(derived.model(), derived.outputs().stream().map(DerivedOutput::output).toList(),
                 convention));
         text("The model in exact fractions:");

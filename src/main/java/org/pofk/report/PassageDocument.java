@@ -38,13 +38,35 @@ public final class PassageDocument {
     public static Document of(Model model, Chain chain, Passage passage, Style style) {
         PassageDocument document = new PassageDocument(chain, passage, style);
         document.blocks.addAll(ModelHead.of(model));
+        document.blocks.add(new Heading(2, document.title()));
         document.write();
         document.blocks.add(new Paragraph(Caution.TEXT));
         return new Document(document.blocks);
     }
 
+    /** The same as a part of a report. */
+    public static ReportSection section(Chain chain, Passage passage, Style style) {
+        PassageDocument document = new PassageDocument(chain, passage, style);
+        document.write();
+        return new ReportSection(document.title(), List.of(new Labelled(Prose.of("first into ")
+                .and(document.names(passage.into())), Prose.of(document.inBrief()))), document.blocks,
+                ReportSection.Standing.ANSWERED);
+    }
+
+    private Prose title() {
+        return Prose.of("First passage into ").and(names(passage.into()));
+    }
+
+    /** Whether and when, in a line. */
+    private String inBrief() {
+        PassageMoments moments = passage.moments();
+        return moments.probability().isZero() ? "never: it can't be reached from there"
+                : (moments.isCertain() ? "certain" : "with probability " + number(moments.probability())
+                        + "; given that it happens") + ", after " + number(moments.mean().orElseThrow())
+                        + " steps in the mean";
+    }
+
     private void write() {
-        blocks.add(new Heading(2, Prose.of("First passage into ").and(names(passage.into()))));
         blocks.add(new Paragraph(Prose.of("T is the first step k ≥ 0 at the end of which the chain is in ")
                 .and(names(passage.into())).and(", from ").and(StartProse.of(chain))
                 .and(passage.avoiding().isEmpty() ? Prose.EMPTY

@@ -46,6 +46,28 @@ public final class ReviewDocument {
         return new Document(document.blocks);
     }
 
+    /** The verdicts and what is found as a part of a report about the same model. */
+    public static ReportSection section(ReviewedClaims reviewed, ClaimsText text, String program) {
+        ReviewDocument document = new ReviewDocument(reviewed, text, program);
+        document.review();
+        document.verdicts();
+        document.findings();
+        document.notStated();
+        return new ReportSection(Prose.of("Check of a derivation made by hand"),
+                List.of(new Labelled(Prose.of("check of ").andName(reviewed.claims().origin().file()),
+                        document.summary())),
+                document.blocks.stream().map(Document::lowered).toList(), standing(reviewed));
+    }
+
+    private static ReportSection.Standing standing(ReviewedClaims reviewed) {
+        boolean isWrong = reviewed.findings().stream().anyMatch(finding -> finding.verdict() == Verdict.WRONG
+                || finding.verdict() == Verdict.CARRIED);
+        boolean isOpen = !reviewed.notReached().isEmpty() || reviewed.findings().stream()
+                .anyMatch(finding -> finding.verdict() == Verdict.UNDECIDED);
+        return isWrong ? ReportSection.Standing.CLAIM_WRONG
+                : isOpen ? ReportSection.Standing.NOT_DECIDED : ReportSection.Standing.ANSWERED;
+    }
+
     private void write() {
         head();
         verdicts();
@@ -55,16 +77,21 @@ public final class ReviewDocument {
         blocks.add(new Paragraph(Caution.TEXT));
     }
 
-    private void head() {
-        Claims claims = reviewed.claims();
-        Claims.Review review = claims.review();
-        Model model = claims.model();
-        blocks.add(new Heading(1, "Check of a derivation"));
+    private void review() {
+        Claims.Review review = reviewed.claims().review();
         label("document", review.document());
         label("revision", review.revision());
         label("author", review.author());
         label("reviewer", review.reviewer());
         label("date", review.date());
+    }
+
+    private void head() {
+        Claims claims = reviewed.claims();
+        Claims.Review review = claims.review();
+        Model model = claims.model();
+        blocks.add(new Heading(1, "Check of a derivation"));
+        review();
         blocks.add(new Labelled("model", ClaimProse.text(model.title())));
         blocks.add(new Labelled("step", Prose.name(model.step().is())
                 .and(model.step().lasts().filter(lasts -> !lasts.equals(model.step().is()))

@@ -18,15 +18,24 @@ public final class SimulationDocument {
 
     public static Document of(Model model, Simulation simulation, Style style) {
         List<Block> blocks = new ArrayList<>(ModelHead.of(model));
-        blocks.add(new Paragraph("Sampled: " + simulation.runs() + " runs, seed " + simulation.seed()
-                + ". Each interval holds the true value with 99.9 % confidence, per step, not jointly."));
+        blocks.add(sampled(simulation.runs(), simulation.seed()));
         for (Series series : simulation.series()) {
             blocks.add(new Heading(2, OutputProse.title(series.output())));
-            blocks.add(table(series, style.digits()));
-            blocks.add(new Paragraph(summary(series)));
+            blocks.addAll(series(series, style));
         }
         blocks.add(new Paragraph(Caution.TEXT));
         return new Document(blocks);
+    }
+
+    /** How the runs were made. */
+    static Block sampled(int runs, long seed) {
+        return new Paragraph("Sampled: " + runs + " runs, seed " + seed
+                + ". Each interval holds the true value with 99.9 % confidence, per step, not jointly.");
+    }
+
+    /** One output's samples beside its exact values. */
+    static List<Block> series(Series series, Style style) {
+        return List.of(table(series, style.digits()), new Paragraph(summary(series)));
     }
 
     private static Table table(Series series, int digits) {

@@ -29,13 +29,43 @@ public final class WhenDocument {
     public static Document of(WhenModel found, Style style) {
         WhenDocument document = new WhenDocument(found, style);
         document.blocks.addAll(ModelHead.of(found.model()));
-        found.answers().forEach(document::answer);
+        found.answers().forEach(answer -> {
+            document.blocks.add(new Heading(2, OutputProse.title(answer.output())));
+            document.answer(answer);
+        });
         document.blocks.add(new Paragraph(Caution.TEXT));
         return new Document(document.blocks);
     }
 
+    /** The same as a part of a report. */
+    public static ReportSection section(WhenModel found, Style style) {
+        WhenDocument document = new WhenDocument(found, style);
+        List<Labelled> key = new ArrayList<>();
+        found.answers().forEach(answer -> {
+            document.blocks.add(new Heading(3, OutputProse.title(answer.output())));
+            document.answer(answer);
+            key.add(new Labelled(Prose.name(answer.output().name()).and(" "
+                    + document.asked(answer.when().condition())), Prose.of(inBrief(answer.when()))));
+        });
+        return new ReportSection(Prose.of(title(found.asked(), style)), key, document.blocks,
+                found.isDecided() ? ReportSection.Standing.ANSWERED : ReportSection.Standing.NOT_DECIDED);
+    }
+
+    /** What is asked of all outputs. */
+    public static String title(WhenModel.Asked asked, Style style) {
+        String bound = asked.relative() ? percent(asked.bound()) + " of the long run" : number(asked.bound(), style);
+        return "When p(k) is " + switch (asked.kind()) {
+            case AT_LEAST -> "not below " + bound;
+            case AT_MOST -> "not above " + bound;
+            case SETTLED -> asked.relative() ? "within " + bound : "within " + bound + " of its long run";
+        };
+    }
+
+    private static String percent(Rational share) {
+        return Decimals.of(share.times(Rational.of(100)), 6).text() + " %";
+    }
+
     private void answer(WhenModel.Answer answer) {
-        blocks.add(new Heading(2, OutputProse.title(answer.output())));
         label("asked", asked(answer.when().condition()));
         label("answer", inWords(answer.when()));
         answer.nearest().ifPresent(peak -> label("nearest", nearest(peak, answer.when().condition())));
@@ -68,6 +98,10 @@ public final class WhenDocument {
 
     /** Exact as a fraction where its decimals don't say it all. */
     private String number(Rational value) {
+        return number(value, style);
+    }
+
+    private static String number(Rational value, Style style) {
         return Decimals.of(value, style.digits()).exact() ? Decimals.of(value, style.digits()).text()
                 : value + " ≈ " + Decimals.of(value, style.digits()).text();
     }
@@ -77,6 +111,16 @@ public final class WhenDocument {
                 .orElseGet(() -> ValueText.of(peak.value(), style.digits()));
         return (condition.kind() == When.Condition.Kind.AT_LEAST ? "the highest value is " : "the lowest value is ")
                 + value + peak.at().map(k -> ", at k = " + k).orElse(", approached as k grows and never reached");
+    }
+
+    /** With the step, in a line. */
+    private static String inBrief(When when) {
+        boolean isForEver = when.forEverFrom().isPresent() && when.forEverFrom().get() > 0;
+        return isForEver ? "for ever from k = " + when.forEverFrom().get() + " on"
+                + (when.first().equals(when.forEverFrom()) ? ", not before"
+                        : when.first().map(first -> "; first at k = " + first).orElse(""))
+                : inWords(when) + when.first().filter(first -> when.forEverFrom().isEmpty())
+                        .map(first -> "; first at k = " + first).orElse("");
     }
 
     private static String inWords(When when) {

@@ -1,0 +1,147 @@
+package org.pofk.cli;
+
+import java.util.ArrayList;
+import java.util.EnumSet;
+import java.util.List;
+import java.util.Optional;
+import java.util.Set;
+import java.util.function.Consumer;
+import java.util.stream.Stream;
+import org.pofk.answer.DerivedModel;
+import org.pofk.answer.Deriving;
+import org.pofk.chain.Chain;
+import org.pofk.chain.Model;
+import org.pofk.chain.Output;
+import org.pofk.report.NotebookWriter;
+import org.pofk.report.Provenance;
+import org.pofk.report.Report;
+import org.pofk.report.ReportDocument;
+import org.pofk.report.ReportSection;
+import org.pofk.report.Style;
+import org.pofk.text.RefusedException;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
+import picocli.CommandLine.Model.CommandSpec;
+import picocli.CommandLine.Option;
+import picocli.CommandLine.Spec;
+
+/** {@code pofk report MODEL}: the document to hand in. */
+@Command(description = {"Writes the document to hand in: results first, then the whole derivation, worked,",
+    "with figures, how it was checked, and what it stands on."})
+final class ReportCommand implements Work {
+    private static final int REPORTED_UNASKED = 12;
+
+    @Spec
+    private CommandSpec command;
+
+    @Mixin
+    private AnswerOptions options = new AnswerOptions(CommandName.REPORT, Format.NOTEBOOK);
+
+    @Option(names = "--of", paramLabel = "NAME",
+            description = "an output, a set or a state; repeatable; 'all' for every state")
+    private List<String> of = new ArrayList<>();
+
+    @Option(names = "--at", paramLabel = "STEPS", converter = StepList.Converter.class, defaultValue = "0..10,20,50",
+            description = "the steps of the table of values; ${DEFAULT-VALUE} otherwise")
+    private StepList at;
+
+    @Option(names = "--show", paramLabel = "DEPTH", defaultValue = "full",
+            description = "brief or full; ${DEFAULT-VALUE} otherwise")
+    private Depth show;
+
+    @Mixin
+    private ConditionOptions conditions = new ConditionOptions();
+
+    @Mixin
+    private PassageOptions passage = new PassageOptions();
+
+    @Mixin
+    private ClaimsOptions claims = new ClaimsOptions();
+
+    /** How much of the way is shown. */
+    enum Depth {
+        BRIEF(Report.Depth.BRIEF), FULL(Report.Depth.FULL);
+
+        private final Report.Depth depth;
+
+        Depth(Report.Depth depth) {
+            this.depth = depth;
+        }
+
+        @Override
+        public String toString() {
+            return Words.lowerCase(this);
+        }
+    }
+
+    @Override
+    public ExitCode run(Streams streams) throws RefusedException, UsageException, WritingException {
+        Style style = options.style();
+        Destination destination = options.destination();
+        Model read = options.model();
+        requireFew(read.chain());
+        List<Output> outputs = AskedOutputs.of(read.chain(), of);
+        List<AskedSection> sections = sections(read, outputs, style);
+        Provenance provenance = provenance(read, sections);
+        Worker.Outcome<Report> outcome = options.within(streams, published ->
+                find(read, outputs, sections, provenance, published));
+        if (outcome.published().isEmpty()) {
+            return options.undecided(streams);
+        }
+        Report report = outcome.published().get();
+        destination.write(Answer.of(() -> ReportDocument.of(report, show.depth, style, options.convention(read)))
+                .with(Format.NOTEBOOK, () -> NotebookWriter.write(report, style, options.convention(read))), streams);
+        return code(report, outcome.finished());
+    }
+
+    /** Everything a report can say besides what is derived; an answer more is a line more. */
+    private List<AskedSection> sections(Model read, List<Output> outputs, Style style)
+            throws RefusedException, UsageException {
+        return Stream.of(conditions.sections(read, outputs, style),
+                passage.sections(read.chain(), at.steps(), style),
+                claims.sections(read, options.settings())).flatMap(List::stream).toList();
+    }
+
+    private void requireFew(Chain chain) throws UsageException {
+        if (chain.size() > REPORTED_UNASKED && chain.outputs().isEmpty() && of.isEmpty()) {
+            throw new UsageException("what is the report to be about? The model names no outputs and has "
+                    + chain.size() + " states; name those that matter with --of STATE or --of SET");
+        }
+    }
+
+    private Provenance provenance(Model read, List<AskedSection> sections) {
+        return new Provenance(VersionCommand.program(), TypedLine.of("report", command.commandLine().getParseResult()
+                .originalArgs()), Stream.concat(Stream.of(read.origin()), sections.stream()
+                        .flatMap(section -> section.files().stream())).distinct().toList());
+    }
+
+    private void find(Model read, List<Output> outputs, List<AskedSection> sections, Provenance provenance,
+            Consumer<Report> published) {
+        List<ReportSection> answers = new ArrayList<>(sections.stream()
+                .map(section -> ReportSection.notReached(section.title())).toList());
+        DerivedModel derived = Deriving.of(read, outputs, at.steps(), extras(read), partly ->
+                published.accept(new Report(partly, answers, provenance)));
+        for (int i = 0; i < sections.size(); i++) {
+            answers.set(i, sections.get(i).work().get());
+            published.accept(new Report(derived, answers, provenance));
+        }
+    }
+
+    private Set<Deriving.Extra> extras(Model read) {
+        Set<Deriving.Extra> extras = EnumSet.of(Deriving.Extra.COMPARISON);
+        if (show == Depth.FULL) {
+            extras.addAll(Set.of(Deriving.Extra.POLE_CHECK, Deriving.Extra.SECOND_OPINION));
+        }
+        return extras;
+    }
+
+    private static ExitCode code(Report report, boolean finished) {
+        Optional<ReportSection.Standing> worst = report.answers().stream().map(ReportSection::standing)
+                .max(java.util.Comparator.naturalOrder());
+        if (worst.equals(Optional.of(ReportSection.Standing.CLAIM_WRONG))) {
+            return ExitCode.CLAIM_WRONG;
+        }
+        return finished && report.derived().isDecided() && !worst.equals(Optional.of(ReportSection.Standing.NOT_DECIDED))
+                ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
+    }
+}

@@ -1,0 +1,29 @@
+package org.pofk.report;
+
+import java.util.List;
+import org.pofk.report.Document.Block;
+import org.pofk.report.Document.Labelled;
+
+/**
+ * The place an answer has in a report: a line or two on the first page, and a section of its own.
+ *
+ * @param title      of the section
+ * @param keyFigures for the first page
+ * @param blocks     of the section, headings in it from the third level on
+ */
+public record ReportSection(Prose title, List<Labelled> keyFigures, List<Block> blocks, Standing standing) {
+
+    /** What is to be said of the whole section when the program ends. */
+    public enum Standing { ANSWERED, NOT_DECIDED, CLAIM_WRONG }
+
+    public ReportSection {
+        keyFigures = List.copyOf(keyFigures);
+        blocks = List.copyOf(blocks);
+    }
+
+    /** For what a budget left no time. */
+    public static ReportSection notReached(Prose title) {
+        return new ReportSection(title, List.of(new Labelled(title, Prose.of(MissingBlocks.NOT_DECIDED))),
+                List.of(new Document.Paragraph("Not decided within the budget.")), Standing.NOT_DECIDED);
+    }
+}
