@@ -42,6 +42,9 @@ public final class Deriving {
     /** Everything about these outputs; {@code at} lists steps in ascending order whose values are wanted. */
     public static DerivedModel of(Model model, List<Output> outputs, List<Integer> at, Set<Extra> extras,
             Consumer<DerivedModel> published) {
+        if (model.schedule().isPresent()) {
+            throw new IllegalArgumentException(model.origin() + " has a schedule, of which these formulas know nothing");
+        }
         Deriving deriving = new Deriving(new DerivedModel(model, Structure.of(model.chain()),
                 outputs.stream().map(DerivedOutput::of).toList(), Optional.empty(), new Wanted(at, extras)),
                 published);

@@ -6,13 +6,15 @@ import java.util.Optional;
 /**
  * A chain with what its author says about it: all that a model file holds.
  *
+ * @param schedule   actions and phases, which the chain alone knows nothing of
  * @param parameters parameters in the order of the file
  * @param notes      notes and sources on entries, in the order of the file
  * @param changes    every change made to rounded rows on entry ({@code sums: rescale}, {@code give to diagonal}),
  *                   and what each {@code rest} came to, one line each
  */
 public record Model(String title, Step step, Convention convention, About about, Chain chain,
-        List<Parameter> parameters, List<Remark> notes, List<String> changes, Origin origin) {
+        Optional<Schedule> schedule, List<Parameter> parameters, List<Remark> notes, List<String> changes,
+        Origin origin) {
 
     /** How the author writes a matrix: moves out of a state stand in a column or in a row. */
     public enum Convention { COLUMNS, ROWS }

@@ -51,7 +51,7 @@ final class CheckCommand implements Work {
     private ExitCode writeBlank(Streams streams) throws RefusedException, UsageException, WritingException {
         SaveOptions save = writing.destinationOfYaml("an empty claims file");
         Overrides overrides = settings.overrides();
-        Model model = settings.read(() -> ModelReader.read(file, overrides));
+        Model model = ScheduleRefusal.unlessScheduled(settings.read(() -> ModelReader.read(file, overrides)));
         save.write(BlankClaims.of(model, fromClaims(save)), streams);
         return ExitCode.ANSWERED;
     }
@@ -69,6 +69,7 @@ final class CheckCommand implements Work {
         Overrides overrides = settings.overrides();
         Claims claims = settings.read(() ->
                 ClaimsReader.read(source, Optional.ofNullable(file.getParent()), overrides));
+        ScheduleRefusal.unlessScheduled(claims.model());
         Variants variants = ModelVariants.of(claims, overrides);
         Worker.Outcome<ReviewedClaims> outcome = run.within(streams, published ->
                 published.accept(Reviewing.of(claims, variants, published)));

@@ -44,8 +44,13 @@ final class ModelOptions {
         return settings;
     }
 
-    /** The model as the file and the command line say it. */
+    /** The model as the file and the command line say it; not one with a schedule, of which most commands know nothing. */
     Model read() throws RefusedException, UsageException {
+        return ScheduleRefusal.unlessScheduled(readWithSchedule());
+    }
+
+    /** The model as the file and the command line say it, its schedule included. */
+    Model readWithSchedule() throws RefusedException, UsageException {
         Overrides overrides = settings.overrides();
         Source source = Source.read(file);
         return settings.read(() -> read(source, overrides));

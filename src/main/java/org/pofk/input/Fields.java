@@ -9,7 +9,7 @@ import org.pofk.text.Position;
 
 /** A mapping whose keys are words of the file format. Keys that begin with {@code x-} are ignored. */
 final class Fields {
-    private static final int MOST_LISTED = 16;
+    private static final int MOST_LISTED = 24;
     private static final List<String> REMARKS = List.of("note", "source");
 
     private final Map<String, Node.Entry> entries;

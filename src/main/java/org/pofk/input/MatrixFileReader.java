@@ -50,8 +50,8 @@ public final class MatrixFileReader {
         List<Rational> start = start(states, head, reading);
         faults.refuseIfAny();
         return new Model(head.title(), head.step(), options.orientation().orElseThrow(), About.NOTHING,
-                new Chain(Chain.Kind.CHAIN, states.names(), matrix, start, Map.of(), List.of()), List.of(), List.of(),
-                reading.changes(), new Origin(source.name(), source.sha256()));
+                new Chain(Chain.Kind.CHAIN, states.names(), matrix, start, Map.of(), List.of()), Optional.empty(), List.of(),
+                List.of(), reading.changes(), new Origin(source.name(), source.sha256()));
     }
 
     private static MatrixGrid grid(NamedTable table, Source source, Reading reading) {

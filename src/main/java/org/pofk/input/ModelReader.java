@@ -11,6 +11,7 @@ import org.pofk.chain.Model.Convention;
 import org.pofk.chain.Model.Origin;
 import org.pofk.chain.Model.Parameter;
 import org.pofk.chain.Output;
+import org.pofk.chain.Schedule;
 import org.pofk.chain.SparseMatrix;
 import org.pofk.exact.Rational;
 import org.pofk.text.Faults;
@@ -22,7 +23,8 @@ import org.pofk.text.RefusedException;
  */
 public final class ModelReader {
     private static final List<String> KEYS = List.of("pofk", "title", "kind", "step", "convention", "states", "start",
-            "transitions", "matrix", "sums", "sets", "outputs", "parameters", "about");
+            "transitions", "matrix", "sums", "sets", "outputs", "parameters", "about", "actions", "schedule", "moves",
+            "phases", "repeat");
 
     private final Source source;
     private final Optional<Path> folder;
@@ -72,11 +74,13 @@ public final class ModelReader {
             return Optional.empty();
         }
         Chain chain = chain(fields, root, head, section.values(), moves);
+        Optional<Schedule> schedule = ScheduleSections.read(fields, moves.states(), head,
+                new Amounts(section.values(), reading), chain.matrix(), reading);
         NameClashes.check(root, moves.states(), reading);
         Convention convention = head.convention()
                 .or(() -> moves.orientation().map(Head.Orientation::convention)).orElse(Convention.COLUMNS);
-        return Optional.of(new Model(head.title(), head.step(), convention, head.about(), chain, parameters,
-                reading.remarks(), reading.changes(), new Origin(source.name(), source.sha256())));
+        return Optional.of(new Model(head.title(), head.step(), convention, head.about(), chain, schedule,
+                parameters, reading.remarks(), reading.changes(), new Origin(source.name(), source.sha256())));
     }
 
     private void refuseWithoutStates(Node.Mapping root) {

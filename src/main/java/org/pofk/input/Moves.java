@@ -22,14 +22,17 @@ final class Moves {
     }
 
     static Moves read(Fields fields, Node.Mapping root, Optional<Path> folder, Reading reading) {
-        if (fields.value("transitions").isPresent() == fields.value("matrix").isPresent()) {
+        Optional<Node> own = fields.value("transitions").or(() -> fields.value("matrix").isPresent()
+                ? Optional.empty() : ScheduleSections.firstMoves(fields));
+        if (own.isPresent() == fields.value("matrix").isPresent()) {
             reading.fault(fields.position("matrix").orElse(root.position()), "moves-source",
                     fields.value("matrix").isPresent()
                             ? "the file has both 'transitions' and 'matrix'; leave one of them out"
                             : "the file lacks the moves; write transitions: or matrix:");
         }
-        Optional<Node.Mapping> transitions = fields.value("transitions")
-                .flatMap(node -> reading.mapping(node, "'transitions'", "{STATE: {OTHER: 1/20, STATE: rest}}"));
+        Optional<Node.Mapping> transitions = own.flatMap(node -> reading.mapping(node,
+                fields.value("transitions").isPresent() ? "'transitions'" : "an entry of 'moves'",
+                "{STATE: {OTHER: 1/20, STATE: rest}}"));
         Optional<MatrixSection> matrix = fields.value("matrix")
                 .flatMap(node -> reading.mapping(node, "'matrix'", "{orientation: rows, entries: [[…], …]}"))
                 .map(node -> MatrixSection.read(node, fields.position("matrix").orElseThrow(), folder, reading));

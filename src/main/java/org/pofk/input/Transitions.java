@@ -10,23 +10,43 @@ import org.pofk.chain.Chain;
 import org.pofk.chain.SparseMatrix;
 import org.pofk.chain.SparseMatrix.Entry;
 import org.pofk.exact.Rational;
+import org.pofk.text.Position;
 
-/** The section {@code transitions}: from each state a mapping of states to probabilities, or {@code stays}. */
+/**
+ * Moves as {@code transitions}, an action or an entry of {@code moves} hold them: from each state a mapping of states
+ * to probabilities, or {@code stays}.
+ */
 final class Transitions {
     private static final String STAYS = "stays";
+    private static final String ALL = "transitions";
 
     private final Node.Mapping written;
     private final States states;
     private final Head head;
     private final Amounts amounts;
     private final Reading reading;
+    private final String section;
+    private final String in;
 
     Transitions(Node.Mapping written, States states, Head head, Amounts amounts, Reading reading) {
+        this(written, states, head, amounts, reading, ALL, "");
+    }
+
+    private Transitions(Node.Mapping written, States states, Head head, Amounts amounts, Reading reading,
+            String section, String in) {
+        this.section = section;
+        this.in = in;
         this.written = written;
         this.states = states;
         this.head = head;
         this.amounts = amounts;
         this.reading = reading;
+    }
+
+    /** The moves of an action, or of an entry of {@code moves}, called {@code section} in messages. */
+    static Transitions named(String section, Node.Mapping written, States states, Head head, Amounts amounts,
+            Reading reading) {
+        return new Transitions(written, states, head, amounts, reading, section, section + ", ");
     }
 
     /** The states in the order of their entries. */
@@ -40,11 +60,41 @@ final class Transitions {
     }
 
     SparseMatrix matrix() {
-        List<List<Entry>> columns = new ArrayList<>(Collections.nCopies(states.size(), List.of()));
         Set<String> given = new HashSet<>();
+        SparseMatrix matrix = over(new SparseMatrix(Collections.nCopies(states.size(), List.of())), given);
+        for (Node.Scalar state : states.listed()) {
+            if (!given.contains(state.name())) {
+                reading.fault(state.position(), "state-without-entry", "the state '" + Words.shortened(state.name())
+                        + "' has no entry under transitions; write '" + Words.shortened(state.name())
+                        + ": stays' when nothing leaves it");
+            }
+        }
+        return matrix;
+    }
+
+    /** The moves given; a fault at {@code place} unless there are some from every state. */
+    SparseMatrix complete(Position place) {
+        Set<String> given = new HashSet<>();
+        SparseMatrix matrix = over(new SparseMatrix(Collections.nCopies(states.size(), List.of())), given);
+        List<String> missing = states.names().stream().filter(name -> !given.contains(name)).toList();
+        if (!missing.isEmpty()) {
+            reading.fault(place, "state-without-entry", in + "the state '" + Words.shortened(missing.get(0))
+                    + "' has no entry; only where the model has transitions of its own does a state not named here"
+                    + " move as it does there");
+        }
+        return matrix;
+    }
+
+    /** The moves given, and those of another matrix from every state not named. */
+    SparseMatrix over(SparseMatrix others) {
+        return over(others, new HashSet<>());
+    }
+
+    private SparseMatrix over(SparseMatrix others, Set<String> given) {
+        List<List<Entry>> columns = new ArrayList<>(others.columns());
         for (Node.Entry entry : written.entries()) {
             if (!states.contains(entry.name()) && isRemark(entry)) {
-                Fields.takeRemark(entry, "transitions", reading);
+                Fields.takeRemark(entry, section, reading);
                 continue;
             }
             given.add(entry.name());
@@ -53,13 +103,6 @@ final class Transitions {
                 columns.set(from.get(), column(entry, from.get()));
             } else {
                 checkTargets(entry);
-            }
-        }
-        for (Node.Scalar state : states.listed()) {
-            if (!given.contains(state.name())) {
-                reading.fault(state.position(), "state-without-entry", "the state '" + Words.shortened(state.name())
-                        + "' has no entry under transitions; write '" + Words.shortened(state.name())
-                        + ": stays' when nothing leaves it");
             }
         }
         return new SparseMatrix(columns);
@@ -84,13 +127,13 @@ final class Transitions {
         boolean allRead = true;
         for (Node.Entry move : withoutRemarks(moves, entry.name())) {
             Optional<Integer> to = target(move.key());
-            Optional<Share> share = amounts.share(move.value(), to.orElse(from), on(entry, move));
+            Optional<Share> share = amounts.share(move.value(), to.orElse(from), in + on(entry, move));
             allRead &= to.isPresent() && share.isPresent();
             if (to.isPresent()) {
                 share.ifPresent(shares::add);
             }
         }
-        Distribution distribution = Distribution.ofMoves("from '" + entry.name() + "'", entry.key().position(), shares,
+        Distribution distribution = Distribution.ofMoves(in + "from '" + entry.name() + "'", entry.key().position(), shares,
                 from, states);
         if (!allRead) {
             distribution.eachIsSound(reading);
@@ -103,7 +146,7 @@ final class Transitions {
         List<Entry> column = new ArrayList<>();
         for (Node.Entry move : withoutRemarks(coefficients, entry.name())) {
             Optional<Integer> to = target(move.key());
-            Optional<Rational> value = amounts.number(move.value(), on(entry, move));
+            Optional<Rational> value = amounts.number(move.value(), in + on(entry, move));
             if (to.isPresent()) {
                 value.ifPresent(number -> column.add(new Entry(to.get(), number)));
             }
@@ -114,7 +157,7 @@ final class Transitions {
     /** The moves; what is a remark on them goes to the remarks. */
     private List<Node.Entry> withoutRemarks(Node.Mapping moves, String from) {
         return moves.entries().stream()
-                .filter(move -> states.contains(move.name()) || !Fields.takeRemark(move, "from '" + from + "'", reading))
+                .filter(move -> states.contains(move.name()) || !Fields.takeRemark(move, in + "from '" + from + "'", reading))
                 .toList();
     }
 
