@@ -11,10 +11,12 @@ import java.util.Optional;
  * @param notes      notes and sources on entries, in the order of the file
  * @param changes    every change made to rounded rows on entry ({@code sums: rescale}, {@code give to diagonal}),
  *                   and what each {@code rest} came to, one line each
+ * @param written    the entries of the chain's matrix as the file writes them, in its order; none for what stays
+ * @param tables     the tables that the file names
  */
 public record Model(String title, Step step, Convention convention, About about, Chain chain,
         Optional<Schedule> schedule, List<Parameter> parameters, List<Remark> notes, List<String> changes,
-        Origin origin) {
+        List<Written> written, Origin origin, List<Origin> tables) {
 
     /** How the author writes a matrix: moves out of a state stand in a column or in a row. */
     public enum Convention { COLUMNS, ROWS }
@@ -35,6 +37,10 @@ public record Model(String title, Step step, Convention convention, About about,
             Optional<String> to, Optional<String> meaning, Optional<String> source) {
     }
 
+    /** An entry of the matrix as the file writes it, between two states by their places: {@code rest}, {@code 0.095}. */
+    public record Written(int from, int to, String text) {
+    }
+
     /** A note or source on an entry of the file. */
     public record Remark(String on, String kind, String text) {
     }
@@ -47,5 +53,7 @@ public record Model(String title, Step step, Convention convention, About about,
         parameters = List.copyOf(parameters);
         notes = List.copyOf(notes);
         changes = List.copyOf(changes);
+        written = List.copyOf(written);
+        tables = List.copyOf(tables);
     }
 }

@@ -57,6 +57,13 @@ final class Amounts {
         return value.get().asScalar();
     }
 
+    /** The number as it is written, without the remarks beside it. */
+    static Optional<String> written(Node node) {
+        Optional<Node> value = node.asMapping().map(mapping -> mapping.entries().stream()
+                .filter(entry -> entry.name().equals("value")).map(Node.Entry::value).findFirst()).orElse(Optional.of(node));
+        return value.flatMap(Node::asScalar).map(scalar -> scalar.text().strip());
+    }
+
     private Optional<Rational> number(Node.Scalar scalar) {
         if (isRest(scalar)) {
             reading.fault(scalar.position(), "rest-not-here",

@@ -36,6 +36,7 @@ record Distribution(String from, String link, Position position, List<Share> sha
         if (!eachIsSound(reading)) {
             return entries();
         }
+        diagonal.ifPresent(from -> shares.forEach(share -> reading.written().add(share.from(from))));
         return shares.stream().filter(Share::isRest).findFirst()
                 .map(rest -> withRest(rest, reading)).orElseGet(() -> withoutRest(sums, reading));
     }

@@ -41,6 +41,7 @@ record MatrixGrid(List<List<Optional<MatrixGrid.Cell>>> rows, Position place) {
             reading.faults().addAll(trial.faults().list());
         }
         reading.changes().addAll(trial.changes());
+        reading.written().addAll(trial.written());
         return matrix;
     }
 
@@ -88,6 +89,7 @@ record MatrixGrid(List<List<Optional<MatrixGrid.Cell>>> rows, Position place) {
             line.get(to).ifPresent(cell -> shares.add(cell.to(target)));
         }
         if (head.kind() == Chain.Kind.RECURSION) {
+            shares.forEach(share -> reading.written().add(share.from(state)));
             return shares.stream().map(share -> new Entry(share.state(), share.amount())).toList();
         }
         String name = "from '" + states.names().get(state) + "' (" + (orientation == Orientation.ROWS ? "row "

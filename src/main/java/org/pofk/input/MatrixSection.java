@@ -7,6 +7,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.stream.IntStream;
 import org.pofk.chain.Chain;
+import org.pofk.chain.Model;
 import org.pofk.chain.SparseMatrix;
 import org.pofk.input.Head.Orientation;
 import org.pofk.text.Fault;
@@ -161,8 +162,10 @@ final class MatrixSection {
 
     /** The table, named in faults as a neighbour of the model. */
     private Source tableFile(Optional<Path> folder, String file) throws RefusedException {
-        return Source.read(folder.orElse(Path.of("")).resolve(file),
+        Source table = Source.read(folder.orElse(Path.of("")).resolve(file),
                 Path.of(place.source()).resolveSibling(file).toString());
+        reading.tables().add(new Model.Origin(table.name(), table.sha256()));
+        return table;
     }
 
     /** A fault of the file as a whole is shown where the model names the file. */

@@ -74,13 +74,15 @@ public final class ModelReader {
             return Optional.empty();
         }
         Chain chain = chain(fields, root, head, section.values(), moves);
+        List<Model.Written> written = List.copyOf(reading.written());
         Optional<Schedule> schedule = ScheduleSections.read(fields, moves.states(), head,
                 new Amounts(section.values(), reading), chain.matrix(), reading);
         NameClashes.check(root, moves.states(), reading);
         Convention convention = head.convention()
                 .or(() -> moves.orientation().map(Head.Orientation::convention)).orElse(Convention.COLUMNS);
         return Optional.of(new Model(head.title(), head.step(), convention, head.about(), chain, schedule,
-                parameters, reading.remarks(), reading.changes(), new Origin(source.name(), source.sha256())));
+                parameters, reading.remarks(), reading.changes(), written,
+                new Origin(source.name(), source.sha256()), reading.tables()));
     }
 
     private void refuseWithoutStates(Node.Mapping root) {

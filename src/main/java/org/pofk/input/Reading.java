@@ -6,12 +6,14 @@ import java.util.Collection;
 import java.util.Deque;
 import java.util.List;
 import java.util.Optional;
+import org.pofk.chain.Model.Origin;
 import org.pofk.chain.Model.Remark;
+import org.pofk.chain.Model.Written;
 import org.pofk.text.Faults;
 import org.pofk.text.Position;
 import org.pofk.text.Suggestion;
 
-/** What the sections of one model share while it is read: faults, remarks and changes. Mutable; one for a reading. */
+/** What the sections of one model share while it is read: faults, remarks, changes and what was read. Mutable; one for a reading. */
 final class Reading {
     private static final int MOST_SUGGESTIONS = 100;
     private static final int LONGEST_CHAIN = 200;
@@ -21,6 +23,8 @@ final class Reading {
     private final Overrides overrides;
     private final List<Remark> remarks = new ArrayList<>();
     private final List<String> changes = new ArrayList<>();
+    private final List<Written> written = new ArrayList<>();
+    private final List<Origin> tables = new ArrayList<>();
     private int suggestions;
     private int count;
 
@@ -43,6 +47,14 @@ final class Reading {
 
     List<String> changes() {
         return changes;
+    }
+
+    List<Written> written() {
+        return written;
+    }
+
+    List<Origin> tables() {
+        return tables;
     }
 
     /**

@@ -1,6 +1,7 @@
 package org.pofk.input;
 
 import java.util.Optional;
+import org.pofk.chain.Model.Written;
 import org.pofk.exact.Rational;
 import org.pofk.text.Position;
 
@@ -15,6 +16,11 @@ record Share(int state, Optional<Rational> value, Position position, String writ
 
     boolean isRest() {
         return value.isEmpty();
+    }
+
+    /** Kept as it is written, as a move out of a state. */
+    Written from(int origin) {
+        return new Written(origin, state, written);
     }
 
     /** The value, zero for {@code rest}. */

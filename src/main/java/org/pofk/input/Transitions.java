@@ -9,6 +9,7 @@ import java.util.Set;
 import org.pofk.chain.Chain;
 import org.pofk.chain.SparseMatrix;
 import org.pofk.chain.SparseMatrix.Entry;
+import org.pofk.chain.Model.Written;
 import org.pofk.exact.Rational;
 import org.pofk.text.Position;
 
@@ -119,7 +120,7 @@ final class Transitions {
             return List.of();
         }
         return head.kind() == Chain.Kind.CHAIN ? moves(entry, entry.value().asMapping().get(), from)
-                : coefficients(entry, entry.value().asMapping().get());
+                : coefficients(entry, entry.value().asMapping().get(), from);
     }
 
     private List<Entry> moves(Node.Entry entry, Node.Mapping moves, int from) {
@@ -142,13 +143,14 @@ final class Transitions {
         return distribution.complete(head.sums(), reading);
     }
 
-    private List<Entry> coefficients(Node.Entry entry, Node.Mapping coefficients) {
+    private List<Entry> coefficients(Node.Entry entry, Node.Mapping coefficients, int from) {
         List<Entry> column = new ArrayList<>();
         for (Node.Entry move : withoutRemarks(coefficients, entry.name())) {
             Optional<Integer> to = target(move.key());
             Optional<Rational> value = amounts.number(move.value(), in + on(entry, move));
             if (to.isPresent()) {
                 value.ifPresent(number -> column.add(new Entry(to.get(), number)));
+                Amounts.written(move.value()).ifPresent(text -> reading.written().add(new Written(from, to.get(), text)));
             }
         }
         return column;

@@ -74,6 +74,6 @@ class InspectionTest {
     private static Model model(Chain chain, Model.About about, List<Model.Remark> remarks, List<String> changes) {
         return new Model("invented", new Model.Step("1 shift", Optional.empty(), Optional.empty()),
                 Model.Convention.COLUMNS, about, chain, Optional.empty(), List.of(), remarks, changes,
-                new Model.Origin("invented.yaml", ""));
+                List.of(), new Model.Origin("invented.yaml", ""), List.of());
     }
 }
