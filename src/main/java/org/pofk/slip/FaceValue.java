@@ -40,10 +40,7 @@ final class FaceValue {
 
     /** The rational a number is, or one that is as good as it. */
     static Rational of(Quantity number) {
-        return number.rational().orElseGet(() -> {
-            Ball ball = number.enclose(BITS).real();
-            return SolvedNumbers.simplest(ball.lower(), ball.upper());
-        });
+        return number.rational().orElseGet(() -> SimplestFraction.in(number.enclose(BITS).real()));
     }
 
     static Optional<Rational> number(FormulaText text) {
@@ -123,7 +120,7 @@ final class FaceValue {
     }
 
     private static Rational middle(Ball ball) {
-        return SolvedNumbers.simplest(ball.lower(), ball.upper());
+        return SimplestFraction.in(ball);
     }
 
     private static Polynomial<Rational> polynomial(List<Rational> coefficients) {

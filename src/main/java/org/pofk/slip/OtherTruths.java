@@ -1,7 +1,6 @@
 package org.pofk.slip;
 
 import java.util.ArrayList;
-import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -10,7 +9,6 @@ import java.util.function.Supplier;
 import java.util.stream.IntStream;
 import org.pofk.answer.LongRun;
 import org.pofk.chain.Chain;
-import org.pofk.chain.Model;
 import org.pofk.chain.Output;
 import org.pofk.chain.Outputs;
 import org.pofk.chain.SparseMatrix;
@@ -20,16 +18,17 @@ import org.pofk.claim.Truth;
 import org.pofk.exact.Rational;
 import org.pofk.text.Span;
 
-/** What a claim may be true of instead: another chain, another output, the average of a cycle. Kept for all claims. */
+/** What a claim may be true of instead: another chain, another output, the average of a cycle. */
 final class OtherTruths {
+    private final ModelTruths known;
     private final Truth truth;
-    private final List<OtherChain> chains;
-    private final Map<OtherChain, Truth> known = new LinkedHashMap<>();
+    private final Set<SlipKind> contradicted;
 
-    OtherTruths(Model model, Variants variants, Truth truth, Set<SlipKind> contradicted) {
-        this.truth = truth;
-        this.chains = OtherChain.allOf(model, variants).stream()
-                .filter(other -> !contradicted.contains(other.kind())).toList();
+    /** Without those that the derivation itself contradicts. */
+    OtherTruths(ModelTruths known, Set<SlipKind> contradicted) {
+        this.known = known;
+        this.truth = known.truth();
+        this.contradicted = contradicted;
     }
 
     /** All that a claim may be true of; {@code right} is what it should say. */
@@ -41,12 +40,12 @@ final class OtherTruths {
         Span place = place(claim.statement());
         Supplier<String> corrected = () -> right;
         boolean atStep = claim.statement() instanceof Statement.Value;
-        for (OtherChain other : chains) {
-            if (atStep && other.kind() == SlipKind.INDEX_SHIFTED) {
-                continue;
+        for (OtherChain other : known.others()) {
+            boolean isLeftOut = contradicted.contains(other.kind()) || atStep && other.kind() == SlipKind.INDEX_SHIFTED;
+            if (!isLeftOut) {
+                candidates.add(new Candidate(other.kind(), place, other.found(), other.right(), corrected, claim,
+                        () -> known.of(other)));
             }
-            candidates.add(new Candidate(other.kind(), place, other.found(), other.right(), corrected, claim,
-                    () -> known.computeIfAbsent(other, each -> Truth.of(each.chain()))));
         }
         if (Outcomes.only(claim.statement()).isPresent()) {
             Output own = Outcomes.only(claim.statement()).get();

@@ -28,11 +28,14 @@ final class PairScreen {
     private final List<StatementPart> parts;
     private final List<List<Rational>> right;
     private final Precision precision;
+    private final List<Integer> wrong;
 
     private PairScreen(List<StatementPart> parts, List<List<Rational>> right, Precision precision) {
         this.parts = parts;
         this.right = right;
         this.precision = precision;
+        this.wrong = IntStream.range(0, parts.size()).filter(part -> !isNearAny(part, parts.get(part).text())).boxed()
+                .toList();
     }
 
     /** For a claim about a pair. */
@@ -67,8 +70,7 @@ final class PairScreen {
 
     /** Whether every part may be right, with another text in the place of one. */
     boolean mayBeRight(int changed, FormulaText text) {
-        return IntStream.range(0, parts.size())
-                .allMatch(part -> isNearAny(part, part == changed ? text : parts.get(part).text()));
+        return wrong.stream().allMatch(part -> part == changed) && isNearAny(changed, text);
     }
 
     private boolean isNearAny(int part, FormulaText text) {

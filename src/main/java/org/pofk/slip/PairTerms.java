@@ -20,7 +20,6 @@ import org.pofk.modes.RealValue;
  */
 final class PairTerms {
     private static final int BITS = 256;
-    private static final int LONGEST_FRACTION_BITS = 64;
     private static final Formula.Symbol Z = new Formula.Symbol("z");
 
     private final Mode.Oscillating mode;
@@ -107,18 +106,12 @@ final class PairTerms {
 
     private static RealValue guessed(Enclosed value) {
         Ball ball = value.enclose(BITS);
-        Optional<Rational> own = simple(ball);
+        Optional<Rational> own = SimplestFraction.shortIn(ball);
         if (own.isPresent()) {
             return RealValue.of(own.get());
         }
-        Optional<Formula> root = simple(ball.times(ball)).map(square ->
+        Optional<Formula> root = SimplestFraction.shortIn(ball.times(ball)).map(square ->
                 Formulas.squareRoot(Formulas.number(square)));
         return new RealValue(root.map(size -> ball.isNegative() ? Formulas.negated(size) : size), value);
-    }
-
-    private static Optional<Rational> simple(Ball ball) {
-        Rational simplest = SolvedNumbers.simplest(ball.lower(), ball.upper());
-        return Optional.of(simplest).filter(value ->
-                value.numerator().bitLength() + value.denominator().bitLength() < LONGEST_FRACTION_BITS);
     }
 }

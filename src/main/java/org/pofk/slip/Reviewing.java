@@ -24,9 +24,9 @@ public final class Reviewing {
     private final OtherTruths others;
     private final List<Implied> implied = new ArrayList<>();
 
-    private Reviewing(Claims claims, Variants variants) {
-        this.truth = Truth.of(claims.model().chain());
-        this.others = new OtherTruths(claims.model(), variants, truth, contradicted(claims));
+    private Reviewing(Claims claims, ModelTruths known) {
+        this.truth = known.truth();
+        this.others = new OtherTruths(known, contradicted(claims));
     }
 
     /** Whose file states the start or the matrix rightly hasn't misread it. */
@@ -50,7 +50,12 @@ public final class Reviewing {
 
     /** The same; what is found so far is published after each step. */
     public static ReviewedClaims of(Claims claims, Variants variants, Consumer<ReviewedClaims> published) {
-        Reviewing reviewing = new Reviewing(claims, variants);
+        return of(claims, ModelTruths.of(claims.model(), variants), published);
+    }
+
+    /** The same of one of several derivations about a model, for which what is true of it is found once. */
+    public static ReviewedClaims of(Claims claims, ModelTruths known, Consumer<ReviewedClaims> published) {
+        Reviewing reviewing = new Reviewing(claims, known);
         List<String> notStated = NotStated.in(claims.claims());
         List<Finding> findings = new ArrayList<>();
         for (Claim claim : claims.claims()) {

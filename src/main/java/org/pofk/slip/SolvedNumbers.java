@@ -9,7 +9,6 @@ import org.pofk.claim.FormulaText;
 import org.pofk.exact.Ball;
 import org.pofk.exact.ComplexBall;
 import org.pofk.exact.NotSeparatedException;
-import org.pofk.exact.Rational;
 import org.pofk.formula.ParsedFormula;
 import org.pofk.meaning.StepEvaluation;
 
@@ -21,7 +20,6 @@ import org.pofk.meaning.StepEvaluation;
 final class SolvedNumbers {
     private static final int BITS = 256;
     private static final int POINTS = 3;
-    private static final int LONGEST_FRACTION_BITS = 64;
 
     private SolvedNumbers() {
     }
@@ -74,27 +72,7 @@ final class SolvedNumbers {
     }
 
     private static TrueNumber number(Ball ball) {
-        Rational simplest = simplest(ball.lower(), ball.upper());
-        boolean simple = simplest.numerator().bitLength() + simplest.denominator().bitLength() < LONGEST_FRACTION_BITS;
-        return simple ? TrueNumber.of(simplest)
-                : new TrueNumber(Optional.empty(), bits -> Ball.of(ball.middle(), Math.max(bits, 0)));
-    }
-
-    /** The rational of smallest denominator between two, by continued fractions. */
-    static Rational simplest(Rational low, Rational high) {
-        if (low.signum() <= 0 && high.signum() >= 0) {
-            return Rational.ZERO;
-        }
-        if (high.signum() < 0) {
-            return simplest(high.negate(), low.negate()).negate();
-        }
-        Rational whole = Rational.of(low.floor());
-        if (whole.equals(low)) {
-            return whole;
-        }
-        if (Rational.of(high.floor()).compareTo(whole) > 0) {
-            return whole.plus(Rational.ONE);
-        }
-        return whole.plus(simplest(high.minus(whole).inverse(), low.minus(whole).inverse()).inverse());
+        return SimplestFraction.shortIn(ball).map(TrueNumber::of).orElseGet(() ->
+                new TrueNumber(Optional.empty(), bits -> Ball.of(ball.middle(), Math.max(bits, 0))));
     }
 }

@@ -68,7 +68,7 @@ public record CharacteristicPolynomial(List<Part> parts) {
         List<PrimeField> fields = new ArrayList<>();
         long below = 1L << 31;
         for (BigInteger product = BigInteger.ONE; product.compareTo(wanted) <= 0; ) {
-            PrimeField field = PrimeField.of(PrimeField.primesBelow(below, 1).get(0));
+            PrimeField field = PrimeField.below(below);
             below = field.prime();
             if (residues.isDefinedModulo(field)) {
                 fields.add(field);

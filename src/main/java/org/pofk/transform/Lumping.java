@@ -88,7 +88,7 @@ public record Lumping(Kind kind, List<List<Integer>> blocks, LinearSystem before
         BigInteger denominator = CommonDenominator.of(givers.stream().flatMap(List::stream).map(Entry::value)
                 .distinct().toList());
         for (long below = 1L << 31; ; ) {
-            PrimeField field = PrimeField.of(PrimeField.primesBelow(below, 1).get(0));
+            PrimeField field = PrimeField.below(below);
             below = field.prime();
             if (field.of(denominator) != 0) {
                 List<List<Integer>> blocks =

@@ -1,8 +1,8 @@
 package org.pofk.transform;
 
 import java.math.BigInteger;
-import java.util.ArrayList;
-import java.util.List;
+import java.util.Map;
+import java.util.concurrent.ConcurrentHashMap;
 import org.pofk.exact.Rational;
 
 /**
@@ -14,21 +14,25 @@ import org.pofk.exact.Rational;
  */
 record PrimeField(long prime, long inverse) {
     private static final int LARGEST_TRIAL_DIVISOR = 46_341;
+    /** Every derivation starts with the same few. */
+    private static final Map<Long, PrimeField> FOUND = new ConcurrentHashMap<>();
 
     /** The field of that many elements. */
     static PrimeField of(long prime) {
         return new PrimeField(prime, Long.divideUnsigned(-1L, prime));
     }
 
-    /** The largest primes below {@code below} (at most 2^31), descending. */
-    static List<Long> primesBelow(long below, int count) {
-        List<Long> primes = new ArrayList<>(count);
-        for (long candidate = (below - 2) | 1; primes.size() < count; candidate -= 2) {
-            if (isPrime(candidate)) {
-                primes.add(candidate);
-            }
+    /** That of the largest prime below {@code below} (at most 2^31); found once for all. */
+    static PrimeField below(long below) {
+        return FOUND.computeIfAbsent(below, PrimeField::found);
+    }
+
+    private static PrimeField found(long below) {
+        long candidate = (below - 2) | 1;
+        while (!isPrime(candidate)) {
+            candidate -= 2;
         }
-        return primes;
+        return of(candidate);
     }
 
     private static boolean isPrime(long odd) {

@@ -134,7 +134,7 @@ final class Recurrences {
     private void addPrimes(int bits) {
         List<PrimeField> fields = new ArrayList<>();
         while (fields.size() <= bits * 100L / 3099) {
-            PrimeField field = PrimeField.of(PrimeField.primesBelow(nextBelow, 1).get(0));
+            PrimeField field = PrimeField.below(nextBelow);
             nextBelow = field.prime();
             if (residues.isDefinedModulo(field)) {
                 fields.add(field);

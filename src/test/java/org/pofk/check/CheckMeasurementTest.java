@@ -9,6 +9,11 @@ import java.util.ArrayList;
 import java.util.Collections;
 import java.util.List;
 import java.util.Random;
+import java.util.concurrent.Callable;
+import java.util.concurrent.ExecutionException;
+import java.util.concurrent.ExecutorService;
+import java.util.concurrent.Executors;
+import java.util.concurrent.Future;
 import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
 import org.pofk.slip.SlipKind;
@@ -69,14 +74,30 @@ class CheckMeasurementTest {
         return claims.subList(0, (claims.size() + oneIn - 1) / oneIn);
     }
 
+    /** Every model by itself, as many at a time as there are processors; put together in the order of the models. */
     private static Measurement measured(int rounds, int formulas, int oneIn) {
-        Measurement measurement = new Measurement();
-        for (int round = 0; round < rounds; round++) {
-            for (Subject subject : Subject.all()) {
-                Random random = new Random(SEED + 1_000L * round + subject.toString().hashCode());
-                measure(subject, formulas, oneIn, random, measurement);
+        ExecutorService processors = Executors.newFixedThreadPool(Runtime.getRuntime().availableProcessors());
+        try {
+            List<Callable<Measurement>> tasks = new ArrayList<>();
+            for (int round = 0; round < rounds; round++) {
+                long seed = SEED + 1_000L * round;
+                Subject.all().forEach(subject -> tasks.add(() -> measured(subject, seed, formulas, oneIn)));
             }
+            Measurement all = new Measurement();
+            for (Future<Measurement> one : processors.invokeAll(tasks)) {
+                all.add(one.get());
+            }
+            return all;
+        } catch (InterruptedException | ExecutionException e) {
+            throw new AssertionError(e);
+        } finally {
+            processors.shutdownNow();
         }
+    }
+
+    private static Measurement measured(Subject subject, long seed, int formulas, int oneIn) {
+        Measurement measurement = new Measurement();
+        measure(subject, formulas, oneIn, new Random(seed + subject.toString().hashCode()), measurement);
         return measurement;
     }
 

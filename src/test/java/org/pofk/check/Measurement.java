@@ -24,6 +24,12 @@ final class Measurement {
         private int claims;
         private int named;
         private int first;
+
+        private void add(Score other) {
+            claims += other.claims;
+            named += other.named;
+            first += other.first;
+        }
     }
 
     private final Map<String, Integer> rightByShape = new TreeMap<>();
@@ -38,6 +44,22 @@ final class Measurement {
     private int uncounted;
     private int pairs;
     private int pairsNamed;
+
+    /** What another one has counted. */
+    void add(Measurement other) {
+        other.rightByShape.forEach((shape, count) -> rightByShape.merge(shape, count, Integer::sum));
+        other.bySlip.forEach((kind, score) -> bySlip.computeIfAbsent(kind, none -> new Score()).add(score));
+        falseAlarms.addAll(other.falseAlarms);
+        passed.addAll(other.passed);
+        faults.addAll(other.faults);
+        misnamed.addAll(other.misnamed);
+        right += other.right;
+        wrong += other.wrong;
+        edits += other.edits;
+        uncounted += other.uncounted;
+        pairs += other.pairs;
+        pairsNamed += other.pairsNamed;
+    }
 
     /** Claims that are right; all about one model. */
     void addRight(List<Claimed> claims) {

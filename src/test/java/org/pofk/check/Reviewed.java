@@ -2,13 +2,10 @@ package org.pofk.check;
 
 import java.nio.file.Path;
 import java.util.List;
-import java.util.Map;
 import java.util.Optional;
-import org.pofk.chain.Chain;
 import org.pofk.claim.Claims;
-import org.pofk.exact.Rational;
 import org.pofk.input.ClaimsReader;
-import org.pofk.input.ModelReader;
+import org.pofk.input.ModelVariants;
 import org.pofk.input.Overrides;
 import org.pofk.input.Source;
 import org.pofk.slip.Finding;
@@ -26,25 +23,16 @@ final class Reviewed {
 
     /** A finding for each claim. */
     static List<Finding> findings(List<Claimed> claims) {
-        Path model = claims.get(0).subject().file();
-        String text = Claimed.file(claims, model.getFileName().toString());
+        Subject subject = claims.get(0).subject();
+        String text = Claimed.file(claims, subject.file().getFileName().toString());
         try {
-            return findings(read(text, model.getParent()), model);
+            return Reviewing.of(read(text, subject.file().getParent()), subject.known(), ignored -> { }).findings();
         } catch (RefusedException e) {
             throw new AssertionError("refused: " + e.getMessage() + "\n" + text, e);
         }
     }
 
-    static List<Finding> findings(Claims claims, Path model) {
-        return Reviewing.of(claims, (parameter, value) -> variant(model, parameter, value)).findings();
-    }
-
-    private static Optional<Chain> variant(Path model, String parameter, Rational value) {
-        try {
-            return Optional.of(ModelReader.read(model,
-                    new Overrides(Map.of(parameter, value.toString()), Optional.empty())).chain());
-        } catch (RefusedException e) {
-            return Optional.empty();
-        }
+    static List<Finding> findings(Claims claims) {
+        return Reviewing.of(claims, ModelVariants.of(claims, Overrides.NONE)).findings();
     }
 }

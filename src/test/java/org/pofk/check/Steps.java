@@ -1,23 +1,31 @@
 package org.pofk.check;
 
+import java.math.BigDecimal;
 import java.math.BigInteger;
+import java.util.AbstractList;
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Output;
 import org.pofk.exact.Rational;
 
 /**
  * The state of a chain after each of so many steps, by multiplying out in whole numbers over one denominator: exact,
- * and naive on purpose.
+ * and naive on purpose. A step is taken when it is first asked for, and no fraction is put in lowest terms for it.
  */
 final class Steps {
     static final int LAST = 200;
 
+    private final BigInteger[][] matrix;
+    private final BigInteger entries;
     private final List<BigInteger[]> numerators = new ArrayList<>();
     private final List<BigInteger> denominators = new ArrayList<>();
 
-    private Steps() {
+    private Steps(BigInteger[][] matrix, BigInteger entries) {
+        this.matrix = matrix;
+        this.entries = entries;
     }
 
     static Steps of(Chain chain) {
@@ -35,13 +43,9 @@ final class Steps {
             }
         }
         BigInteger start = chain.start().stream().reduce(BigInteger.ONE, Steps::commonMultiple, BigInteger::max);
-        Steps steps = new Steps();
+        Steps steps = new Steps(matrix, entries);
         steps.numerators.add(chain.start().stream().map(x -> over(x, start)).toArray(BigInteger[]::new));
         steps.denominators.add(start);
-        for (int k = 0; k < LAST; k++) {
-            steps.numerators.add(product(matrix, steps.numerators.get(k)));
-            steps.denominators.add(steps.denominators.get(k).multiply(entries));
-        }
         return steps;
     }
 
@@ -51,6 +55,14 @@ final class Steps {
 
     private static BigInteger over(Rational value, BigInteger denominator) {
         return value.numerator().multiply(denominator.divide(value.denominator()));
+    }
+
+    private void stepTo(int k) {
+        while (numerators.size() <= k) {
+            int last = numerators.size() - 1;
+            numerators.add(product(matrix, numerators.get(last)));
+            denominators.add(denominators.get(last).multiply(entries));
+        }
     }
 
     private static BigInteger[] product(BigInteger[][] matrix, BigInteger[] vector) {
@@ -67,24 +79,46 @@ final class Steps {
         return product;
     }
 
-    /** p(k) of an output. */
-    Rational value(Output output, int k) {
-        Rational sum = output.constant();
-        for (int i = 0; i < output.coefficients().size(); i++) {
-            if (!output.coefficients().get(i).isZero()) {
-                sum = sum.plus(output.coefficients().get(i)
-                        .times(new Rational(numerators.get(k)[i], denominators.get(k))));
-            }
+    /** A fraction that need not be in lowest terms. */
+    private record Fraction(BigInteger numerator, BigInteger denominator) {
+        Rational reduced() {
+            return new Rational(numerator, denominator);
         }
-        return sum;
+
+        Near near() {
+            return Near.exactly(new BigDecimal(numerator)).over(Near.exactly(new BigDecimal(denominator)));
+        }
     }
 
-    /** p(0) … p({@value #LAST}) as numbers of seventy digits. */
-    List<Near> values(Output output) {
-        List<Near> values = new ArrayList<>();
-        for (int k = 0; k <= LAST; k++) {
-            values.add(Near.of(value(output, k)));
+    private Fraction fraction(Output output, int k) {
+        stepTo(k);
+        BigInteger common = output.coefficients().stream().reduce(output.constant().denominator(),
+                Steps::commonMultiple, BigInteger::max);
+        BigInteger sum = over(output.constant(), common).multiply(denominators.get(k));
+        for (int i = 0; i < output.coefficients().size(); i++) {
+            sum = sum.add(over(output.coefficients().get(i), common).multiply(numerators.get(k)[i]));
         }
-        return values;
+        return new Fraction(sum, common.multiply(denominators.get(k)));
+    }
+
+    /** p(k) of an output. */
+    Rational value(Output output, int k) {
+        return fraction(output, k).reduced();
+    }
+
+    /** p(0) … p({@value #LAST}) as numbers of sixty digits, each worked out when it is first looked at. */
+    List<Near> values(Output output) {
+        Map<Integer, Near> known = new HashMap<>();
+        return new AbstractList<>() {
+            @Override
+            public Near get(int k) {
+                return known.computeIfAbsent(k, asked -> fraction(output, asked).near());
+            }
+
+            @Override
+            public int size() {
+                return LAST + 1;
+            }
+        };
     }
 }

@@ -24,6 +24,7 @@ import org.pofk.exact.Rational;
 import org.pofk.input.ModelReader;
 import org.pofk.input.Overrides;
 import org.pofk.modes.ClosedForm;
+import org.pofk.slip.ModelTruths;
 import org.pofk.text.RefusedException;
 import org.pofk.transform.Transforms;
 
@@ -42,6 +43,7 @@ final class Subject {
     private final Map<Output, List<Near>> transforms = new HashMap<>();
     private final Map<Output, List<Rational>> longRuns = new HashMap<>();
     private Steps steps;
+    private ModelTruths known;
 
     private Subject(Path file, Model model, Chain chain) {
         this.file = file;
@@ -79,12 +81,7 @@ final class Subject {
 
     /** The model with another value of a parameter. */
     Subject withParameter(String name, BigDecimal value) {
-        try {
-            Overrides overrides = new Overrides(Map.of(name, value.toPlainString()), Optional.empty());
-            return mistakenFor(ModelReader.read(file, overrides).chain());
-        } catch (RefusedException e) {
-            throw new AssertionError(file.toString(), e);
-        }
+        return mistakenFor(variant(name, Rational.of(value)).orElseThrow());
     }
 
     Path file() {
@@ -97,6 +94,23 @@ final class Subject {
 
     Chain chain() {
         return chain;
+    }
+
+    /** What the tool finds to be true of the model, kept for all claims about it. */
+    ModelTruths known() {
+        if (known == null) {
+            known = ModelTruths.of(model, this::variant);
+        }
+        return known;
+    }
+
+    private Optional<Chain> variant(String parameter, Rational value) {
+        try {
+            Overrides overrides = new Overrides(Map.of(parameter, value.toString()), Optional.empty());
+            return Optional.of(ModelReader.read(file, overrides).chain());
+        } catch (RefusedException e) {
+            return Optional.empty();
+        }
     }
 
     /** A few outputs, smallest transforms first, each with a name that stands for one thing. */

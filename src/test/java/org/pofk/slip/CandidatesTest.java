@@ -66,9 +66,9 @@ class CandidatesTest {
 
     @org.junit.jupiter.api.Test
     void theSimplestRationalBetweenTwoIsFound() {
-        assertEquals(org.pofk.exact.Rational.of(133, 4500), SolvedNumbers.simplest(
+        assertEquals(org.pofk.exact.Rational.of(133, 4500), SimplestFraction.between(
                 org.pofk.exact.Rational.parse("0.0295555555"), org.pofk.exact.Rational.parse("0.0295555556")));
-        assertEquals(org.pofk.exact.Rational.of(-1, 3), SolvedNumbers.simplest(
+        assertEquals(org.pofk.exact.Rational.of(-1, 3), SimplestFraction.between(
                 org.pofk.exact.Rational.parse("-0.334"), org.pofk.exact.Rational.parse("-0.332")));
     }
 }

@@ -67,8 +67,9 @@ class BerlekampMasseyTest {
         LinearSystem system = ScaledSystem.of(Reduction.of(RandomSystems.sparseChain(4, 70, 6),
                 RandomSystems.sparseChain(4, 70, 6).outputs()).reduced()).system();
         SystemResidues residues = new SystemResidues(system);
-        java.util.List<ModularSystem> systems = PrimeField.primesBelow(1L << 31, 4).stream()
-                .map(prime -> residues.modulo(PrimeField.of(prime))).toList();
+        java.util.List<ModularSystem> systems = java.util.stream.Stream.iterate(PrimeField.below(1L << 31),
+                        field -> PrimeField.below(field.prime())).limit(4)
+                .map(residues::modulo).toList();
         ModularLanes lanes = ModularLanes.of(systems).orElseThrow();
         for (int order : new int[] {70, 40}) {
             for (int lane = 0; lane < 4; lane++) {
