@@ -74,7 +74,9 @@ final class HtmlExtras {
         return "<div class=\"step\" hidden=\"hidden\"" + data.attributes() + attribute("left", leftOf(sequence))
                 + "><p><label for=\"" + id + "\">"
                 + HtmlSpelling.of(sequence.left()) + " at step k =</label> <input id=\"" + id
-                + "\" type=\"text\" inputmode=\"numeric\" autocomplete=\"off\" maxlength=\"9\"/></p>"
-                + "<output for=\"" + id + "\"></output></div>";
+                + "\" class=\"at\" type=\"text\" inputmode=\"numeric\" autocomplete=\"off\" maxlength=\"9\"/></p>"
+                + "<p><label for=\"" + id + "-target\">or the first step at which it reaches</label> <input id=\"" + id
+                + "-target\" class=\"target\" type=\"text\" autocomplete=\"off\" maxlength=\"40\"/></p>"
+                + "<output for=\"" + id + " " + id + "-target\"></output></div>";
     }
 }

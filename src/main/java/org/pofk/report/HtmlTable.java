@@ -18,6 +18,9 @@ final class HtmlTable {
     /** The style has rules for moving in by up to so many digits. */
     static final int MOST_MOVED = 12;
 
+    /** Words up to so many characters stand in one line. */
+    private static final int SHORT = 18;
+
     private final Document.Table table;
     private final String id;
 
@@ -69,7 +72,7 @@ final class HtmlTable {
         for (String text : texts) {
             int moved = Math.min(MOST_MOVED, longest - beforePoint(text));
             classes.add(isOfDecimals ? " class=\"number" + (moved > 0 ? " in" + moved : "") + "\""
-                    : isOfNumbers ? " class=\"number right\"" : "");
+                    : isOfNumbers ? " class=\"number right\"" : text.length() <= SHORT ? " class=\"short\"" : "");
         }
         return classes;
     }

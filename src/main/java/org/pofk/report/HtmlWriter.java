@@ -141,8 +141,9 @@ public final class HtmlWriter {
 
         @Override
         public List<String> figure(Document.Figure figure) {
-            return List.of("<figure>" + SvgChart.part(figure.chart()) + "<figcaption>"
-                    + HtmlSpelling.of(figure.caption()) + "</figcaption></figure>");
+            return List.of("<figure><div class=\"wide\" role=\"group\" aria-label=\"Figure\" tabindex=\"0\">"
+                    + SvgChart.part(figure.chart()) + "</div><figcaption>" + HtmlSpelling.of(figure.caption())
+                    + "</figcaption></figure>");
         }
 
         @Override

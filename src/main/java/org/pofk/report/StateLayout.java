@@ -29,7 +29,10 @@ record StateLayout(List<Box> nodes, List<List<String>> lines, List<Bend> bends, 
     private static final double LINE_HEIGHT = 16;
     private static final double GROWTH = 1.12;
     private static final int TRIES = 9;
-    private static final double LOOP = 54;
+    /** How far a move to itself goes out, and how far to the sides at its feet and between. */
+    private static final double LOOP = 37;
+    private static final double LOOP_FOOT = 8;
+    private static final double LOOP_SIDE = 28;
     private static final double[] THERE_AND_BACK = {0.15, 0.2, 0.11, 0.26, 0.34};
     private static final double[] ONE_WAY = {0.06, -0.06, 0.14, -0.14, 0.24, -0.24, 0.36, -0.36};
     private static final double[] ALONG = {0.5, 0.42, 0.58, 0.34, 0.66, 0.26, 0.74, 0.2, 0.8};
@@ -108,22 +111,22 @@ record StateLayout(List<Box> nodes, List<List<String>> lines, List<Bend> bends, 
         return new StateLayout(nodes, lines, chosen, labelled(diagram, chosen));
     }
 
-    /** Outward from the middle; the middle state of one alone, upward. */
+    /** Outward from the middle, the middle state of one alone upward; from inside the box, so that it meets its edge. */
     private static Bend loop(Box node) {
         double length = StrictMath.hypot(node.centerX(), node.centerY());
         double outX = length < 1 ? 0 : node.centerX() / length;
         double outY = length < 1 ? -1 : node.centerY() / length;
-        double reachX = node.width() / 2;
-        double reachY = node.height() / 2;
-        double reach = Math.min(Math.abs(outX) < 1e-9 ? 1e9 : reachX / Math.abs(outX),
-                Math.abs(outY) < 1e-9 ? 1e9 : reachY / Math.abs(outY));
-        double side = 15;
-        double baseX = node.centerX() + outX * reach;
-        double baseY = node.centerY() + outY * reach;
-        double[] x = {baseX - outY * side - outX * 14, baseX - outY * 26 + outX * LOOP, baseX + outY * 26 + outX * LOOP,
-            baseX + outY * side - outX * 14};
-        double[] y = {baseY + outX * side - outY * 14, baseY + outX * 26 + outY * LOOP, baseY - outX * 26 + outY * LOOP,
-            baseY - outX * side - outY * 14};
+        double reach = Math.min(Math.abs(outX) < 1e-9 ? 1e9 : node.width() / 2 / Math.abs(outX),
+                Math.abs(outY) < 1e-9 ? 1e9 : node.height() / 2 / Math.abs(outY));
+        double far = (reach + LOOP) * 4 / 3;
+        double[] along = {0, far, far, 0};
+        double[] aside = {LOOP_FOOT, LOOP_SIDE, -LOOP_SIDE, -LOOP_FOOT};
+        double[] x = new double[4];
+        double[] y = new double[4];
+        for (int i = 0; i < 4; i++) {
+            x[i] = node.centerX() + outX * along[i] - outY * aside[i];
+            y[i] = node.centerY() + outY * along[i] + outX * aside[i];
+        }
         return new Bend(x, y).outside(node.grown(1), node.grown(2));
     }
 

@@ -101,7 +101,7 @@ public final class SvgChart {
         String uses = Arrays.stream(Ink.values()).map(SvgShapes::name).map(name -> scope + " .f-" + name
                 + "{fill:var(--" + name + ")}" + scope + " .s-" + name + "{stroke:var(--" + name + ")}")
                 .collect(Collectors.joining("\n"));
-        return "\n" + scope + "{" + light + "}\n@media (prefers-color-scheme:dark){" + scope + "{" + dark + "}}\n" + uses
+        return "\n" + scope + "{" + light + "}\n@media screen and (prefers-color-scheme:dark){" + scope + "{" + dark + "}}\n" + uses
                 + "\n";
     }
 

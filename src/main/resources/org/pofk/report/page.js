@@ -3,6 +3,8 @@
   // Beyond these a browser is at work for longer than somebody waits: bits of a value, and of all that are multiplied.
   const MOST_BITS = 600000;
   const MOST_WORK = 2800000;
+  // Bits of all values that are stepped through in search of a target.
+  const MOST_SEARCHED = 3e9;
   // Up to this order squaring is quicker than going step by step.
   const SQUARED_UP_TO = 12;
   const LONGEST_FRACTION = 60;
@@ -137,32 +139,116 @@
     return text;
   }
 
-  // In every figure the mark of this step, which a figure names in the mark's title.
+  // A written number as numerator and positive denominator: 0.005, 5e-3, 1/200, 0.5 %; null for anything else.
+  function written(text) {
+    const found = /^([-\u2212]?)(?:(\d+)\/(\d+)|(\d+)(?:\.(\d+))?(?:e([-\u2212+]?\d{1,2}))?)(\s*%)?$/i.exec(text);
+    if (!found || found[3] && BigInt(found[3]) === 0n) {
+      return null;
+    }
+    const behind = found[5] || "";
+    const power = Number((found[6] || "0").replace("\u2212", "-")) - behind.length - (found[7] ? 2 : 0);
+    let above = BigInt(found[2] || found[4] + behind);
+    let below = BigInt(found[3] || 1);
+    above *= power > 0 ? 10n ** BigInt(power) : 1n;
+    below *= power < 0 ? 10n ** BigInt(-power) : 1n;
+    return [found[1] ? -above : above, below];
+  }
+
+  // The first step, up to the last one looked at, at which y is at the target or on its other side; else -1.
+  function reaches(s, target, last) {
+    const next = s.first.slice();
+    let below = s.divisor;
+    for (let k = 0; k <= last; k++) {
+      const ahead = (next.length === 0 ? 0n : next[0]) * target[1] - target[0] * below;
+      if (ahead === 0n || (ahead > 0n) !== startsAbove(s, target)) {
+        return k;
+      }
+      let after = 0n;
+      s.recurrence.forEach(function (c, j) { after += c * next[j]; });
+      next.push(after);
+      next.shift();
+      below *= s.scale;
+    }
+    return -1;
+  }
+
+  function startsAbove(s, target) {
+    return (s.first.length === 0 ? 0n : s.first[0]) * target[1] > target[0] * s.divisor;
+  }
+
+  // A step named in the title of a mark: its output, up to the parenthesis, and the step; null in other titles.
+  function stepOf(title, output) {
+    const text = title.textContent.replace(/\u00a0/g, " ");
+    const found = text.startsWith(output) ? /^(\d+)\) /.exec(text.slice(output.length)) : null;
+    return found && title.parentNode.dataset.x !== undefined ? Number(found[1]) : null;
+  }
+
+  // In every figure the mark of this step; a line across where the figure has steps around it but no mark for it.
   function marked(field, k) {
-    const name = field.dataset.left.replace(/\(k\)$/, "(" + k + ")");
-    document.querySelectorAll("figure svg title").forEach(function (title) {
-      const text = title.textContent.replace(/\u00a0/g, " ");
-      const isOfOutput = text.startsWith(field.dataset.left.replace(/k\)$/, ""));
-      if (isOfOutput && title.parentNode.nodeName !== "svg") {
-        title.parentNode.classList.toggle("chosen", k !== null && text.startsWith(name + " "));
+    const output = field.dataset.left.replace(/k\)$/, "");
+    document.querySelectorAll("figure svg").forEach(function (svg) {
+      svg.querySelectorAll("line.chosen").forEach(function (line) {
+        if (line.dataset.of === output) {
+          line.remove();
+        }
+      });
+      const marks = Array.from(svg.querySelectorAll("title")).map(function (title) {
+        return {step: stepOf(title, output), mark: title.parentNode};
+      }).filter(function (each) { return each.step !== null; });
+      marks.forEach(function (each) { each.mark.classList.toggle("chosen", each.step === k); });
+      const before = marks.filter(function (each) { return each.step <= k; }).pop();
+      const after = marks.find(function (each) { return each.step >= k; });
+      if (k !== null && before && after && before.step < k && after.step > k) {
+        const part = (k - before.step) / (after.step - before.step);
+        const x = Number(before.mark.dataset.x) * (1 - part) + Number(after.mark.dataset.x) * part;
+        across(svg, x, output);
       }
     });
   }
 
+  function across(svg, x, output) {
+    const heights = Array.from(svg.querySelectorAll("[data-y]")).map(function (mark) { return Number(mark.dataset.y); });
+    const line = document.createElementNS("http://www.w3.org/2000/svg", "line");
+    const put = {x1: x, x2: x, y1: Math.min.apply(null, heights), y2: Math.max.apply(null, heights), "class": "chosen"};
+    Object.keys(put).forEach(function (name) { line.setAttribute(name, put[name]); });
+    line.dataset.of = output;
+    svg.append(line);
+  }
+
   function stepField(field) {
     const s = sequence(field);
-    const input = field.querySelector("input");
+    const at = field.querySelector(".at");
+    const target = field.querySelector(".target");
     const output = field.querySelector("output");
     const most = Math.min(999999999, Math.floor(
       Math.min(MOST_BITS, MOST_WORK / Math.max(1, s.first.length)) / Math.max(1, bits(s.scale))));
-    input.addEventListener("input", function () {
-      const text = input.value.trim();
+    const last = Math.min(most, Math.floor(Math.sqrt(MOST_SEARCHED / (bits(s.scale) * (s.first.length + 2)))));
+    const answered = function (input, isRight, text, k) {
+      input.setAttribute("aria-invalid", String(!isRight));
+      output.textContent = text;
+      marked(field, k);
+    };
+    at.addEventListener("input", function () {
+      const text = at.value.trim();
       const isStep = /^[0-9]+$/.test(text);
       const isWithin = isStep && Number(text) <= most;
-      input.setAttribute("aria-invalid", String(text !== "" && !isWithin));
-      output.textContent = text === "" ? "" : !isStep ? "A step is a whole number from 0 on."
-        : !isWithin ? "Up to step " + most + " here; pofk derive --at " + text + " goes on." : shown(s, Number(text));
-      marked(field, isWithin ? Number(text) : null);
+      target.value = "";
+      target.setAttribute("aria-invalid", "false");
+      answered(at, text === "" || isWithin, text === "" ? "" : !isStep ? "A step is a whole number from 0 on."
+        : !isWithin ? "Up to step " + most + " here; pofk derive --at " + text + " goes on." : shown(s, Number(text)),
+        isWithin ? Number(text) : null);
+    });
+    target.addEventListener("input", function () {
+      const text = target.value.trim();
+      const number = written(text);
+      at.value = "";
+      at.setAttribute("aria-invalid", "false");
+      const k = number ? reaches(s, number, last) : -1;
+      answered(target, text === "" || number !== null, text === "" ? ""
+        : !number ? "A number like 0.005, 1/200, 0.5 % or 5e-3."
+        : k < 0 ? "Not up to step " + last + "; pofk when " + (startsAbove(s, number) ? "--at-most " : "--at-least ")
+          + text.replace(/\s/g, "") + " decides it for every step."
+        : "at k = " + k + ", where it is " + shown(s, k).replace(/^= /, ""), k < 0 ? null : k);
     });
     field.hidden = false;
   }
