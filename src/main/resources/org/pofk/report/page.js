@@ -208,7 +208,7 @@
 
   function across(svg, x, output) {
     const heights = Array.from(svg.querySelectorAll("[data-y]")).map(function (mark) { return Number(mark.dataset.y); });
-    const line = document.createElementNS("http://www.w3.org/2000/svg", "line");
+    const line = document.createElementNS(svg.namespaceURI, "line");
     const put = {x1: x, x2: x, y1: Math.min.apply(null, heights), y2: Math.max.apply(null, heights), "class": "chosen"};
     Object.keys(put).forEach(function (name) { line.setAttribute(name, put[name]); });
     line.dataset.of = output;

@@ -1,6 +1,7 @@
 package org.pofk.page;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import com.fasterxml.jackson.databind.JsonNode;
@@ -9,9 +10,12 @@ import java.math.BigDecimal;
 import java.math.BigInteger;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
+import java.util.stream.IntStream;
 import org.junit.jupiter.api.AfterAll;
 import org.junit.jupiter.api.BeforeAll;
 import org.junit.jupiter.api.Test;
@@ -29,12 +33,15 @@ import org.pofk.report.HtmlWriter;
 @TestInstance(TestInstance.Lifecycle.PER_CLASS)
 class BrowserTest {
     private static final int FAR = 400;
+    /** What the field takes. */
+    private static final int TARGET_LENGTH = 40;
     private static final Pattern SHOWN =
             Pattern.compile("[=≈] (−?[0-9.]+(?:e-?[0-9]+)?)(?: = (−?[0-9]+)/([0-9]+))?(; 1 minus it .*)?");
 
     @TempDir
     private Path folder;
     private Browser browser;
+    private int targets;
 
     static List<String> patterns() {
         return Pages.patterns();
@@ -66,6 +73,7 @@ class BrowserTest {
             fields += readsOffExactValues(derived.outputs().get(i), i + 1);
         }
         assertTrue(fields > 0, "no field for a step");
+        assertTrue(targets > 0, "no target");
         copiesEveryFormula();
         for (JsonNode entry : browser.console()) {
             throw new AssertionError(entry.toString());
@@ -98,7 +106,32 @@ class BrowserTest {
                     + "').closest('.step').querySelector('output').textContent;").asText();
             isExact(values.get(k), shown);
         }
+        for (Rational target : List.of(values.get(3), values.get(Pages.LAST_VALUE), Rational.of(1, 100))) {
+            readsOffTheFirstStep(field, target, values);
+        }
         return 1;
+    }
+
+    /** At which the values are at the target or on its other side, as far as they are known here. */
+    private void readsOffTheFirstStep(String field, Rational target, List<Rational> values) throws IOException {
+        String typed = target.toString();
+        if (typed.length() > TARGET_LENGTH) {
+            return;
+        }
+        int startsAt = values.get(0).compareTo(target);
+        int first = 0;
+        while (first < values.size() && startsAt != 0 && values.get(first).compareTo(target) == startsAt) {
+            first++;
+        }
+        browser.type(field + "-target", typed);
+        String shown = browser.run("return document.querySelector('" + field
+                + "').closest('.step').querySelector('output').textContent;").asText();
+        if (first < values.size()) {
+            assertTrue(shown.startsWith("at k = " + first + ","), shown + " for " + typed + ", not " + first);
+        } else {
+            assertFalse(IntStream.range(0, first).anyMatch(k -> shown.startsWith("at k = " + k + ",")), shown);
+        }
+        targets++;
     }
 
     @Test
@@ -112,6 +145,30 @@ class BrowserTest {
                     + ".map(title => title.textContent);");
             assertEquals(1, marked.size(), marked.toString());
             assertTrue(marked.get(0).asText().startsWith("lost(" + k + ")"), marked.toString());
+        }
+    }
+
+    /** However a number is written; what is none is refused, and what isn't reached is no step. */
+    @Test
+    void aTargetIsReadAsWritten() throws Exception {
+        Path page = Files.writeString(folder.resolve("targets.html"),
+                HtmlWriter.write(Pages.document(Pages.derived("pump-pair"))));
+        browser.open(page);
+        Map<String, String> answers = new LinkedHashMap<>();
+        for (String typed : List.of("0.005", "5e-3", "1/200", "0.5 %")) {
+            answers.put(typed, "at k = 2, where it is ");
+        }
+        for (String typed : List.of("0,005", "1/0", "--1", "about 1", "1/2.5")) {
+            answers.put(typed, "A number like");
+        }
+        answers.put("0.9", "Not up to step ");
+        answers.put("-1", "Not up to step ");
+        for (Map.Entry<String, String> answer : answers.entrySet()) {
+            browser.type("#step-1-target", answer.getKey());
+            String shown = browser.run("return document.querySelector('.step output').textContent;").asText();
+            assertTrue(shown.startsWith(answer.getValue()), answer.getKey() + ": " + shown);
+            assertEquals(answer.getValue().startsWith("at") ? 1 : 0,
+                    browser.run("return document.querySelectorAll('svg .chosen').length;").asInt(), answer.getKey());
         }
     }
 

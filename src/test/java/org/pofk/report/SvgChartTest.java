@@ -278,7 +278,7 @@ class SvgChartTest {
         Chart chart = PatternCharts.course("pump-pair");
         String file = SvgChart.file(chart);
         String id = DrawnSvg.of(file).root().getAttribute("id");
-        assertTrue(file.contains("@media (prefers-color-scheme:dark){#" + id + "{"), file);
+        assertTrue(file.contains("@media screen and (prefers-color-scheme:dark){#" + id + "{"), file);
         assertTrue(file.contains("<!-- Exact for the model as entered."), file);
         String part = SvgChart.part(chart);
         assertFalse(part.contains("class=\"f-paper\"") || part.contains("style"), part);
