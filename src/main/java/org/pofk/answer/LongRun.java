@@ -71,12 +71,12 @@ public sealed interface LongRun {
      */
     static LongRun of(Chain chain, Transform transform) {
         return chain.kind() == Chain.Kind.CHAIN
-                ? LongRunByPoles.ofChain(Structure.of(chain), transform)
+                ? LongRunByPoles.ofChain(Structure.of(chain), transform.y())
                 : of(transform);
     }
 
     /** The long run of any output, from where its poles lie. */
     static LongRun of(Transform transform) {
-        return LongRunByPoles.ofRecursion(transform);
+        return LongRunByPoles.ofRecursion(transform.y(), transform.factors());
     }
 }

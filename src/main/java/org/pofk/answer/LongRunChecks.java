@@ -41,7 +41,7 @@ public record LongRunChecks(LongRun byPoles, Optional<LongRun> byClasses, Option
     public static LongRunChecks of(Ground ground, Transform transform) {
         Chain chain = ground.chain;
         LongRun byPoles = chain.kind() == Chain.Kind.CHAIN
-                ? LongRunByPoles.ofChain(ground.structure, transform)
+                ? LongRunByPoles.ofChain(ground.structure, transform.y())
                 : LongRun.of(transform);
         Optional<LongRun> byClasses = ground.classes.map(each -> each.of(transform.output()));
         if (byClasses.isPresent() && !byClasses.get().equals(byPoles)) {

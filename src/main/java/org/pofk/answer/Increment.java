@@ -1,0 +1,70 @@
+package org.pofk.answer;
+
+import java.util.ArrayList;
+import java.util.Collections;
+import java.util.HashSet;
+import java.util.List;
+import java.util.Set;
+import org.pofk.chain.Chain;
+import org.pofk.chain.Costs;
+import org.pofk.chain.Output;
+import org.pofk.chain.SparseMatrix;
+import org.pofk.exact.Rational;
+
+/**
+ * What is added up, as what one step adds in expectation: g(k) = constant + c x(k) + m x(k−1) for k ≥ 1, and
+ * g(0) = constant + c x(0) + atStart. Exact.
+ *
+ * @param name       what is added up: a state, a set, an output, {@code costs}
+ * @param definition how the model writes it, or the name itself
+ * @param atState    c: from the state at the end of the step, one a state
+ * @param byMove     m: from the move made in the step, by the state it is made from, weighed with its probabilities
+ * @param constant   zero for a chain, where a constant is spread over all states
+ */
+public record Increment(String name, String definition, List<Rational> atState, List<Rational> byMove,
+        Rational atStart, Rational constant) {
+    public Increment {
+        atState = List.copyOf(atState);
+        byMove = List.copyOf(byMove);
+    }
+
+    /** The value of an output at the end of each step: for a state or a set, the steps spent there. */
+    public static Increment ofOutput(Output output) {
+        return new Increment(output.name(), output.definition(), output.coefficients(),
+                zeros(output.coefficients().size()), Rational.ZERO, output.constant());
+    }
+
+    /** The moves into a set from outside; a start inside it is none. */
+    public static Increment ofEntries(Chain chain, Output set) {
+        Set<Integer> inside = new HashSet<>();
+        for (int state = 0; state < chain.size(); state++) {
+            if (!set.coefficients().get(state).isZero()) {
+                inside.add(state);
+            }
+        }
+        List<Rational> entering = zeros(chain.size());
+        for (int state = 0; state < chain.size(); state++) {
+            if (!inside.contains(state)) {
+                entering.set(state, chain.matrix().columns().get(state).stream()
+                        .filter(entry -> inside.contains(entry.row())).map(SparseMatrix.Entry::value)
+                        .reduce(Rational.ZERO, Rational::plus));
+            }
+        }
+        return new Increment(set.name(), set.definition(), zeros(chain.size()), entering, Rational.ZERO,
+                Rational.ZERO);
+    }
+
+    /** What a step costs. */
+    public static Increment ofCosts(Chain chain, Costs costs) {
+        List<Rational> byMove = zeros(chain.size());
+        for (Costs.Move move : costs.moves()) {
+            byMove.set(move.from(), byMove.get(move.from())
+                    .plus(move.cost().times(chain.matrix().at(move.to(), move.from()))));
+        }
+        return new Increment("costs", "costs", costs.eachStep(), byMove, costs.atStart(), Rational.ZERO);
+    }
+
+    private static List<Rational> zeros(int size) {
+        return new ArrayList<>(Collections.nCopies(size, Rational.ZERO));
+    }
+}

@@ -1,0 +1,28 @@
+package org.pofk.chain;
+
+import java.util.List;
+import java.util.Optional;
+import org.pofk.exact.Rational;
+
+/**
+ * What a chain costs, or yields where it is negative: the state at the end of each step, the moves made in it, and the
+ * start. Exact; amounts of one unit.
+ *
+ * @param unit     what amounts are counted in: {@code kEUR}
+ * @param eachStep of the state at the end of a step, one a state; the start, k = 0, counts as one
+ * @param moves    of moves, each time they are made; at most one entry for each pair of states
+ * @param atStart  once, at k = 0
+ * @param discount the rate d a step: what is due at the end of step k counts (1 + d)^−k of it today; not negative
+ */
+public record Costs(String unit, List<Rational> eachStep, List<Move> moves, Rational atStart,
+        Optional<Rational> discount) {
+
+    /** What one move costs each time it is made. */
+    public record Move(int from, int to, Rational cost) {
+    }
+
+    public Costs {
+        eachStep = List.copyOf(eachStep);
+        moves = List.copyOf(moves);
+    }
+}
