@@ -22,8 +22,8 @@ public final class Deriving {
     /** The closed form is compared with simulation up to this step. */
     public static final int COMPARED_UP_TO = 60;
     /** Runs of the random comparison, and its seed. */
-    private static final int RUNS = 10_000;
-    private static final long SEED = 1;
+    public static final int RUNS = 10_000;
+    public static final long SEED = 1;
     private static final Duration SECOND_OPINION_LIMIT = Duration.ofSeconds(20);
 
     private final Consumer<DerivedModel> published;

@@ -40,7 +40,7 @@ public record Settling(Optional<Enclosed> slowest, int tied, int power, int digi
     }
 
     /** Enough digits to say something about a small long run: a thousandth of its smallest value other than zero. */
-    static int digitsFor(LongRun longRun, int atLeast) {
+    public static int digitsFor(LongRun longRun, int atLeast) {
         Optional<Rational> smallest = LongRunValues.of(longRun).stream().filter(value -> !value.isZero())
                 .map(Rational::abs).min(Rational::compareTo);
         int digits = atLeast;

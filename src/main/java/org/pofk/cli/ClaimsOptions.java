@@ -11,6 +11,7 @@ import org.pofk.input.Overrides;
 import org.pofk.input.Source;
 import org.pofk.report.ClaimsText;
 import org.pofk.report.Prose;
+import org.pofk.report.ReportSection;
 import org.pofk.report.ReviewDocument;
 import org.pofk.slip.Reviewing;
 import org.pofk.slip.Variants;
@@ -37,7 +38,8 @@ final class ClaimsOptions {
                     + "', than this report, '" + read.origin().file() + "'");
         }
         Variants variants = ModelVariants.of(claims, overrides);
-        return List.of(new AskedSection(Prose.of("Check of a derivation made by hand"), List.of(claims.origin()),
+        return List.of(new AskedSection(ReportSection.Place.CHECKS,
+                Prose.of("Check of a derivation made by hand"), List.of(claims.origin()),
                 () -> ReviewDocument.section(Reviewing.of(claims, variants, partly -> { }),
                         ClaimsText.of(source.text()), VersionCommand.program())));
     }

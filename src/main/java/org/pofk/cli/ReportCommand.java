@@ -1,6 +1,8 @@
 package org.pofk.cli;
 
 import java.util.ArrayList;
+import java.util.Collections;
+import java.util.Comparator;
 import java.util.EnumSet;
 import java.util.List;
 import java.util.Optional;
@@ -9,9 +11,12 @@ import java.util.function.Consumer;
 import java.util.stream.Stream;
 import org.pofk.answer.DerivedModel;
 import org.pofk.answer.Deriving;
+import org.pofk.answer.KeyFigures;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
+import org.pofk.report.Chart;
+import org.pofk.report.CourseChart;
 import org.pofk.report.NotebookWriter;
 import org.pofk.report.Provenance;
 import org.pofk.report.Report;
@@ -111,33 +116,35 @@ final class ReportCommand implements Work {
 
     private Provenance provenance(Model read, List<AskedSection> sections) {
         return new Provenance(VersionCommand.program(), TypedLine.of("report", command.commandLine().getParseResult()
-                .originalArgs()), Stream.concat(Stream.of(read.origin()), sections.stream()
-                        .flatMap(section -> section.files().stream())).distinct().toList());
+                .originalArgs()), Stream.of(
+                        Stream.of(read.origin()), read.tables().stream(), sections.stream().flatMap(section ->
+                        section.files().stream())).flatMap(files -> files).distinct().toList());
     }
 
     private void find(Model read, List<Output> outputs, List<AskedSection> sections, Provenance provenance,
             Consumer<Report> published) {
         List<ReportSection> answers = new ArrayList<>(sections.stream()
-                .map(section -> ReportSection.notReached(section.title())).toList());
-        DerivedModel derived = Deriving.of(read, outputs, at.steps(), extras(read), partly ->
-                published.accept(new Report(partly, answers, provenance)));
+                .map(section -> ReportSection.notReached(section.place(), section.title())).toList());
+        List<KeyFigures> none = Collections.nCopies(outputs.size(), KeyFigures.NONE);
+        DerivedModel derived = Deriving.of(read, outputs, at.steps(), extras(), partly ->
+                published.accept(new Report(partly, none, Optional.empty(), answers, provenance)));
+        List<KeyFigures> figures = derived.outputs().stream().map(each -> KeyFigures.of(read.chain(), each)).toList();
+        Optional<Chart.Course> course = CourseChart.of(derived);
+        published.accept(new Report(derived, figures, course, answers, provenance));
         for (int i = 0; i < sections.size(); i++) {
             answers.set(i, sections.get(i).work().get());
-            published.accept(new Report(derived, answers, provenance));
+            published.accept(new Report(derived, figures, course, answers, provenance));
         }
     }
 
-    private Set<Deriving.Extra> extras(Model read) {
-        Set<Deriving.Extra> extras = EnumSet.of(Deriving.Extra.COMPARISON);
-        if (show == Depth.FULL) {
-            extras.addAll(Set.of(Deriving.Extra.POLE_CHECK, Deriving.Extra.SECOND_OPINION));
-        }
-        return extras;
+    private Set<Deriving.Extra> extras() {
+        return show == Depth.BRIEF ? Set.of() : EnumSet.of(Deriving.Extra.COMPARISON, Deriving.Extra.POLE_CHECK,
+                Deriving.Extra.SECOND_OPINION);
     }
 
     private static ExitCode code(Report report, boolean finished) {
         Optional<ReportSection.Standing> worst = report.answers().stream().map(ReportSection::standing)
-                .max(java.util.Comparator.naturalOrder());
+                .max(Comparator.naturalOrder());
         if (worst.equals(Optional.of(ReportSection.Standing.CLAIM_WRONG))) {
             return ExitCode.CLAIM_WRONG;
         }

@@ -21,6 +21,8 @@ import org.pofk.transform.Reduction;
 final class ChainBlocks {
     private static final int WRITTEN_OUT_UP_TO = 12;
     private static final int CHARACTERISTIC_UP_TO = 5;
+    /** A wider matrix doesn't fit a page. */
+    private static final int WORKED_UP_TO = 8;
 
     private final Model model;
     private final List<Output> outputs;
@@ -39,15 +41,64 @@ final class ChainBlocks {
         return chain.blocks;
     }
 
+    /** The same where the moves, with what was changed on entry, have been listed before. */
+    static List<Block> worked(Model model, List<Output> outputs, Convention convention) {
+        ChainBlocks chain = new ChainBlocks(model, outputs, convention);
+        chain.writeWorked();
+        return chain.blocks;
+    }
+
     private void write() {
-        Chain chain = model.chain();
-        boolean columns = convention == Convention.COLUMNS;
-        MatrixBlocks matrix = new MatrixBlocks(chain.states(), chain.matrix(), convention);
-        blocks.add(new Heading(2, columns ? "From x(k+1) = A x(k) to Y(z)" : "From p(k+1) = p(k) P to Y(z)"));
-        blocks.addAll(matrix.of(columns ? "A" : "P"));
+        heading();
+        blocks.addAll(matrix().of(symbol()));
         if (!model.changes().isEmpty()) {
             blocks.add(new Items(model.changes().stream().map(Prose::name).toList()));
         }
+        vectors();
+        if (model.chain().size() <= CHARACTERISTIC_UP_TO) {
+            blocks.add(matrix().characteristic("zI − " + symbol()));
+        }
+        takingPart(Reduction.of(model.chain(), outputs));
+    }
+
+    private void writeWorked() {
+        heading();
+        int size = model.chain().size();
+        boolean isWrittenOut = size <= WORKED_UP_TO;
+        if (isWrittenOut) {
+            blocks.addAll(matrix().of(symbol()));
+        } else {
+            blocks.add(new Paragraph(symbol() + " is " + size + " × " + size + " with "
+                    + model.chain().matrix().columns().stream().mapToInt(List::size).sum() + " entries that are not"
+                    + " zero, those of the table of transitions; neither it nor zI − " + symbol() + " is written out"
+                    + " above " + WORKED_UP_TO + " states."));
+        }
+        vectors();
+        if (isWrittenOut) {
+            blocks.add(matrix().characteristic("zI − " + symbol()));
+        }
+        takingPart(Reduction.of(model.chain(), outputs));
+    }
+
+    private boolean isByColumns() {
+        return convention == Convention.COLUMNS;
+    }
+
+    private String symbol() {
+        return isByColumns() ? "A" : "P";
+    }
+
+    private MatrixBlocks matrix() {
+        return new MatrixBlocks(model.chain().states(), model.chain().matrix(), convention);
+    }
+
+    private void heading() {
+        blocks.add(new Heading(2, isByColumns() ? "From x(k+1) = A x(k) to Y(z)" : "From p(k+1) = p(k) P to Y(z)"));
+    }
+
+    private void vectors() {
+        Chain chain = model.chain();
+        boolean columns = isByColumns();
         blocks.add(new Labelled(columns ? "x(0)" : "p(0)", vector(chain.start())));
         for (Output output : outputs) {
             blocks.add(new Labelled(Prose.of("c of ").andName(output.name()), vector(output.coefficients())
@@ -55,10 +106,6 @@ final class ChainBlocks {
         }
         blocks.add(new Labelled("transform", columns ? "Y(z) = c (zI − A)^−1 z x(0), the z kept in front"
                 : "Y(z) = z p(0) (zI − P)^−1 c, the z kept in front"));
-        if (chain.size() <= CHARACTERISTIC_UP_TO) {
-            blocks.add(matrix.characteristic(columns ? "zI − A" : "zI − P"));
-        }
-        takingPart(Reduction.of(chain, outputs));
     }
 
     private Prose vector(List<Rational> values) {

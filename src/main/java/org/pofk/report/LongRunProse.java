@@ -4,6 +4,7 @@ import java.util.List;
 import java.util.stream.Collectors;
 import java.util.stream.IntStream;
 import org.pofk.answer.LongRun;
+import org.pofk.answer.LongRunChecks;
 import org.pofk.exact.Decimal;
 import org.pofk.exact.Decimals;
 import org.pofk.exact.Rational;
@@ -14,6 +15,14 @@ record LongRunProse(int digits) implements LongRun.Visitor<String> {
 
     String of(LongRun longRun) {
         return longRun.accept(this);
+    }
+
+    /** How it was found. */
+    static String ways(LongRunChecks checks) {
+        return "the poles of Y(z)"
+                + (checks.byClasses().isPresent() ? ", the null spaces of the closed classes" : "")
+                + checks.highPowers().map(verdict -> ", and powers up to k = " + verdict.k() + ", within "
+                        + Decimals.of(verdict.within(), 2).text()).orElse("");
     }
 
     @Override

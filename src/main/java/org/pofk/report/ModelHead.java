@@ -17,12 +17,7 @@ final class ModelHead {
     }
 
     static List<Block> of(Model model) {
-        List<Block> blocks = new ArrayList<>();
-        blocks.add(new Heading(1, title(model.title())));
-        blocks.add(new Paragraph(facts(model)));
-        model.about().document().ifPresent(document -> blocks.add(new Labelled("document", Prose.name(document)
-                .and(model.about().revision().map(revision -> ", revision " + revision).orElse("")))));
-        model.about().preparedBy().ifPresent(who -> blocks.add(new Labelled("prepared by", Prose.name(who))));
+        List<Block> blocks = new ArrayList<>(withoutAssumptions(model));
         if (!model.about().assumptions().isEmpty()) {
             blocks.add(new Paragraph("Assumptions"));
             blocks.add(new Items(model.about().assumptions().stream().map(Prose::name).toList()));
@@ -30,9 +25,20 @@ final class ModelHead {
         return blocks;
     }
 
+    /** The same where these stand elsewhere. */
+    static List<Block> withoutAssumptions(Model model) {
+        List<Block> blocks = new ArrayList<>();
+        blocks.add(new Heading(1, words(model.title())));
+        blocks.add(new Paragraph(facts(model)));
+        model.about().document().ifPresent(document -> blocks.add(new Labelled("document", Prose.name(document)
+                .and(model.about().revision().map(revision -> ", revision " + revision).orElse("")))));
+        model.about().preparedBy().ifPresent(who -> blocks.add(new Labelled("prepared by", Prose.name(who))));
+        return blocks;
+    }
+
     /** A name whose words may stand in different lines, as other names' may not. */
-    private static Prose title(String title) {
-        return Prose.joined(Arrays.stream(title.strip().split(" +")).map(Prose::name).toList(), " ");
+    static Prose words(String text) {
+        return Prose.joined(Arrays.stream(text.strip().split(" +")).map(Prose::name).toList(), " ");
     }
 
     private static Prose facts(Model model) {

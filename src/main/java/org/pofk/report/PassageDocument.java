@@ -48,7 +48,7 @@ public final class PassageDocument {
     public static ReportSection section(Chain chain, Passage passage, Style style) {
         PassageDocument document = new PassageDocument(chain, passage, style);
         document.write();
-        return new ReportSection(document.title(), List.of(new Labelled(Prose.of("first into ")
+        return new ReportSection(ReportSection.Place.RESULTS, document.title(), List.of(new Labelled(Prose.of("first into ")
                 .and(document.names(passage.into())), Prose.of(document.inBrief()))), document.blocks,
                 ReportSection.Standing.ANSWERED);
     }

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.stream.Collectors;
+import org.pofk.answer.PoleCheck;
 import org.pofk.answer.StepValue;
 import org.pofk.exact.Enclosed;
 import org.pofk.modes.RealValue;
@@ -19,6 +20,14 @@ final class PoleProse {
     static Prose of(List<Chart.PoleSet> sets) {
         return Prose.joined(sets.stream().map(set -> Prose.names(set.outputs()).and(": " + poles(set.poles()) + "."))
                 .toList(), " ");
+    }
+
+    /** How far the eigenvalues of the matrix, as doubles have them, lie from the poles. */
+    static String of(PoleCheck check) {
+        return check.largestDistance()
+                .map(distance -> "The eigenvalues of the matrix as found in doubles lie within "
+                        + SampledNumber.text(distance) + " of these poles; a comparison, no proof.")
+                .orElseGet(() -> "Not compared with eigenvalues in doubles: " + check.reason().orElse(""));
     }
 
     private static String poles(List<Chart.Pole> poles) {

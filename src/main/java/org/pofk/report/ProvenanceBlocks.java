@@ -6,6 +6,7 @@ import org.pofk.chain.Model;
 import org.pofk.report.Document.Block;
 import org.pofk.report.Document.Heading;
 import org.pofk.report.Document.Labelled;
+import org.pofk.report.Document.Paragraph;
 
 /** What ties a report to its input. */
 final class ProvenanceBlocks {
@@ -13,11 +14,12 @@ final class ProvenanceBlocks {
     }
 
     static List<Block> of(Provenance provenance) {
-        List<Block> blocks = new ArrayList<>(List.of(new Heading(2, "How this report was made"),
+        List<Block> blocks = new ArrayList<>(List.of(new Heading(2, "What this report stands on"),
                 new Labelled("program", Prose.name(provenance.program())),
-                new Labelled("command line", Prose.name(provenance.commandLine()))));
+                new Labelled("command line", ModelHead.words(provenance.commandLine()))));
+        blocks.add(new Paragraph("What was read, by its SHA-256:"));
         for (Model.Origin file : provenance.files()) {
-            blocks.add(new Labelled(Prose.name(file.file()), Prose.of("SHA-256 ").andName(file.sha256())));
+            blocks.add(new Labelled(Prose.name(file.file()), Prose.name(file.sha256())));
         }
         return blocks;
     }

@@ -2,25 +2,35 @@ package org.pofk.report;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.stream.IntStream;
 import org.pofk.answer.DerivedOutput;
+import org.pofk.answer.KeyFigures;
 import org.pofk.answer.LongRun;
-import org.pofk.answer.Settling;
+import org.pofk.answer.StepValue;
+import org.pofk.chain.Model;
+import org.pofk.formula.Formula;
+import org.pofk.formula.PlainText;
 import org.pofk.modes.ClosedForm;
 import org.pofk.report.Document.Block;
 import org.pofk.report.Document.Heading;
+import org.pofk.report.Document.Items;
 import org.pofk.report.Document.Labelled;
 import org.pofk.report.Document.Paragraph;
 
-/** The first page: the question, the result, where it holds, and the caution. */
+/** The first page: the question, the result with where it holds, the answers, and the caution. */
 final class ReportSummary {
-    private static final int SETTLED_DIGITS = 6;
+    private static final int VALUES_SHOWN = 4;
+    /** A longer exact formula stands in the derivation alone. */
+    private static final int EXACT_SHOWN_UP_TO = 220;
 
     private final Report report;
+    private final Model model;
     private final Style style;
     private final List<Block> blocks = new ArrayList<>();
 
     private ReportSummary(Report report, Style style) {
         this.report = report;
+        this.model = report.derived().model();
         this.style = style;
     }
 
@@ -31,8 +41,15 @@ final class ReportSummary {
     }
 
     private void write() {
-        blocks.addAll(ModelHead.of(report.derived().model()));
-        report.derived().outputs().forEach(this::output);
+        blocks.addAll(ModelHead.withoutAssumptions(model));
+        blocks.add(new Heading(2, "Question"));
+        List<Prose> questions = report.derived().outputs().stream()
+                .map(output -> QuestionProse.of(output.output(), model)).toList();
+        blocks.add(questions.size() == 1 ? new Paragraph(questions.get(0)) : new Items(questions));
+        blocks.add(new Heading(2, "Result"));
+        for (int i = 0; i < report.derived().outputs().size(); i++) {
+            output(report.derived().outputs().get(i), report.figures().get(i));
+        }
         if (!report.answers().isEmpty()) {
             blocks.add(new Heading(2, "Answers"));
             report.answers().forEach(answer -> blocks.addAll(answer.keyFigures()));
@@ -40,18 +57,50 @@ final class ReportSummary {
         blocks.add(new Paragraph(Caution.TEXT));
     }
 
-    private void output(DerivedOutput output) {
-        blocks.add(new Heading(2, Prose.of("Result: ").and(OutputProse.title(output.output()))));
-        blocks.addAll(ResultBlocks.formulas(output, style));
-        output.longRun().ifPresent(checks -> {
-            LongRun longRun = checks.byPoles();
-            blocks.add(new Labelled("long run", new LongRunProse(style.digits()).of(longRun)));
-            output.closedForm().flatMap(form -> settling(form, longRun)).ifPresent(settling -> blocks.add(
-                    new Labelled("settles", SettlingProse.of(settling, longRun, style.digits()))));
+    private void output(DerivedOutput output, KeyFigures figures) {
+        if (report.derived().outputs().size() > 1) {
+            blocks.add(new Heading(3, OutputProse.title(output.output())));
+        }
+        output.closedForm().ifPresent(form -> {
+            blocks.addAll(isShort(form) ? ResultBlocks.formulas(output, style)
+                    : ResultBlocks.decimals(output, style));
+            label("holds", holds(form));
         });
+        if (!output.isDecided()) {
+            label("formula", MissingBlocks.NOT_DECIDED);
+        }
+        output.longRun().ifPresent(checks -> longRun(checks.byPoles(), figures));
+        if (!output.values().isEmpty()) {
+            label("values", values(output.values()));
+        }
     }
 
-    private static java.util.Optional<Settling> settling(ClosedForm form, LongRun longRun) {
-        return Settling.of(form, longRun, SETTLED_DIGITS);
+    private static boolean isShort(ClosedForm form) {
+        Formula exact = form.exactFormula().orElseGet(form::formulaOverRoots);
+        return PlainText.UNICODE.write(exact).length() <= EXACT_SHOWN_UP_TO;
+    }
+
+    private static String holds(ClosedForm form) {
+        int from = form.withoutImpulsesFrom();
+        return "for every k ≥ 0, proved" + (from > 0 ? "; without the delta terms from k = " + from + " on" : "");
+    }
+
+    private void longRun(LongRun longRun, KeyFigures figures) {
+        label("long run", new LongRunProse(style.digits()).of(longRun));
+        figures.settling().ifPresent(settling -> label("settles",
+                SettlingProse.of(settling, longRun, style.digits())));
+        figures.highest().ifPresent(peak -> label("highest", ValueText.of(peak.value(), style.digits())
+                + peak.at().map(k -> " at k = " + k).orElse(", approached as k grows and never reached")));
+    }
+
+    /** A few, spread over those that are listed later. */
+    private String values(List<StepValue> all) {
+        int last = all.size() - 1;
+        return String.join("; ", IntStream.range(0, VALUES_SHOWN).map(i -> i * last / (VALUES_SHOWN - 1)).distinct()
+                .mapToObj(all::get).map(value -> ValueText.of(value, style.digits()) + " at k = " + value.k()).toList());
+    }
+
+    private void label(String label, String text) {
+        blocks.add(new Labelled(label, text));
     }
 }

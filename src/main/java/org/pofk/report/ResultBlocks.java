@@ -3,14 +3,10 @@ package org.pofk.report;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import org.pofk.answer.Comparison;
 import org.pofk.answer.DerivedOutput;
 import org.pofk.answer.HighPowers;
 import org.pofk.answer.LongRunChecks;
-import org.pofk.answer.SecondOpinion;
-import org.pofk.answer.Simulation;
 import org.pofk.exact.Decimals;
-import org.pofk.exact.Rational;
 import org.pofk.formula.Formula;
 import org.pofk.formula.PlainText;
 import org.pofk.modes.ClosedForm;
@@ -55,8 +51,8 @@ final class ResultBlocks {
         output.transform().ifPresent(this::holds);
         output.longRun().ifPresent(this::longRun);
         output.absent().ifPresent(found -> blocks.add(new Labelled("eigenvalues", AbsentProse.of(found))));
-        output.comparison().ifPresent(this::checked);
-        output.secondOpinion().ifPresent(this::secondOpinion);
+        output.comparison().ifPresent(comparison -> label("checked", CheckProse.of(comparison)));
+        output.secondOpinion().ifPresent(opinion -> label("second opinion", CheckProse.of(opinion)));
         if (!output.isDecided()) {
             undecided();
         }
@@ -69,6 +65,13 @@ final class ResultBlocks {
     /** The formulas alone. */
     static List<Block> formulas(DerivedOutput output, Style style) {
         return formulas(output, OutputProse.atStep(output.output()), style);
+    }
+
+    /** The formula in decimals alone, with what it promises. */
+    static List<Block> decimals(DerivedOutput output, Style style) {
+        ResultBlocks result = new ResultBlocks(output, OutputProse.atStep(output.output()), style);
+        output.closedForm().ifPresent(form -> result.decimals(form.decimalForm(style.digits())));
+        return result.blocks;
     }
 
     /** The formulas alone, with what they are called. */
@@ -99,6 +102,13 @@ final class ResultBlocks {
         if (!isSame && !isExact(decimals)) {
             label("decimals", promise(decimals));
         }
+    }
+
+    private void decimals(DecimalForm decimals) {
+        decimals.formula().ifPresent(formula -> blocks.add(new Display(left,
+                isExact(decimals) ? Relation.EQUAL : Relation.ROUNDED, formula)));
+        label("decimals", promise(decimals));
+        label("exact", "see the derivation");
     }
 
     private static boolean isExact(DecimalForm decimals) {
@@ -146,44 +156,6 @@ final class ResultBlocks {
         checks.highPowers().stream().flatMap(verdict -> verdict.habits().stream())
                 .filter(stop -> stop.outcome() != HighPowers.Outcome.RIGHT).findFirst()
                 .ifPresent(stop -> label("beware", LongRunWarning.of(stop, style.digits())));
-    }
-
-    private void checked(Comparison comparison) {
-        Comparison.ExactPowers powers = comparison.exactPowers();
-        Comparison.DoubleStepping doubles = comparison.doubleStepping();
-        String exact = powers.largestDifference().isZero()
-                ? "equal to exact powers of A at k = 0 … " + powers.last()
-                : "differs from exact powers of A by " + small(powers.largestDifference()) + " at k = " + powers.at();
-        label("checked", exact + "; double-precision stepping is at most " + small(doubles.largestDifference())
-                + " off" + comparison.random().map(ResultBlocks::random).orElse(""));
-    }
-
-    private static String small(Rational difference) {
-        return Decimals.of(difference, ERROR_DIGITS).text();
-    }
-
-    private static String random(Simulation.Series series) {
-        long checked = series.checked();
-        return "; random runs: " + (checked == 0
-                ? "too few hits are expected, can't tell here"
-                : checked == 1
-                ? "the one step checked is " + (series.inside() == 1 ? "inside" : "OUTSIDE") + " its 99.9 % interval"
-                : series.inside() + " of " + checked + " steps inside their 99.9 % intervals");
-    }
-
-    private void secondOpinion(SecondOpinion opinion) {
-        label("second opinion", "Symja: the factors multiply out: " + word(opinion.factors())
-                + "; the expansion adds up to Y(z): " + word(opinion.expansion()) + " ("
-                + SecondOpinion.NOT_CONFIRMED + ")");
-    }
-
-    private static String word(SecondOpinion.Verdict verdict) {
-        return switch (verdict) {
-            case CONFIRMED -> "confirmed";
-            case REFUSED -> "REFUSED";
-            case NOT_WITHIN_LIMIT -> "no second opinion within the limit";
-            case NOT_ASKED -> "not asked, a coefficient is kept as a quotient";
-        };
     }
 
     private void undecided() {

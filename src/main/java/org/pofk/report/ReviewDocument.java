@@ -53,7 +53,7 @@ public final class ReviewDocument {
         document.verdicts();
         document.findings();
         document.notStated();
-        return new ReportSection(Prose.of("Check of a derivation made by hand"),
+        return new ReportSection(ReportSection.Place.CHECKS, Prose.of("Check of a derivation made by hand"),
                 List.of(new Labelled(Prose.of("check of ").andName(reviewed.claims().origin().file()),
                         document.summary())),
                 document.blocks.stream().map(Document::lowered).toList(), standing(reviewed));

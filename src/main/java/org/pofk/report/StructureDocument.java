@@ -12,7 +12,6 @@ import org.pofk.answer.RecursionPoles;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Structure;
 import org.pofk.chain.Structure.CommunicatingClass;
-import org.pofk.exact.Decimals;
 import org.pofk.report.Document.Block;
 import org.pofk.report.Document.Heading;
 import org.pofk.report.Document.Items;
@@ -106,17 +105,10 @@ public final class StructureDocument {
         blocks.add(new Labelled("long run", prose.of(checks.byPoles())));
         output.settling().ifPresent(settling -> blocks.add(new Labelled("settles",
                 SettlingProse.of(settling, checks.byPoles(), style.digits()))));
-        blocks.add(new Labelled("found by", ways(checks)));
+        blocks.add(new Labelled("found by", LongRunProse.ways(checks)));
         checks.highPowers().stream().flatMap(verdict -> verdict.habits().stream())
                 .filter(stop -> stop.outcome() != HighPowers.Outcome.RIGHT)
                 .forEach(stop -> blocks.add(new Labelled("beware", LongRunWarning.of(stop, style.digits()))));
-    }
-
-    private static String ways(LongRunChecks checks) {
-        return "the poles of Y(z)"
-                + (checks.byClasses().isPresent() ? ", the null spaces of the closed classes" : "")
-                + checks.highPowers().map(verdict -> ", and powers up to k = " + verdict.k() + ", within "
-                        + Decimals.of(verdict.within(), 2).text()).orElse("");
     }
 
     private void questions() {

@@ -64,10 +64,48 @@ final class WayBlocks {
         }
         pairs(derivation);
         terms(derivation);
-        output.poleCheck().ifPresent(check -> blocks.add(new Paragraph(check.largestDistance()
-                .map(distance -> "The eigenvalues of the matrix as found in doubles lie within "
-                        + SampledNumber.text(distance) + " of these poles; a comparison, no proof.")
-                .orElseGet(() -> "Not compared with eigenvalues in doubles: " + check.reason().orElse("")))));
+        output.poleCheck().ifPresent(check -> blocks.add(new Paragraph(PoleProse.of(check))));
+    }
+
+    /**
+     * The same worked: the pair of the table named with each term, conjugate pairs joined step by step, and the closed
+     * form at the end. The comparison with eigenvalues is left to the checks.
+     */
+    static List<Block> worked(DerivedOutput output, Style style) {
+        if (output.closedForm().isEmpty()) {
+            return List.of();
+        }
+        WayBlocks way = new WayBlocks(output, output.closedForm().get(), style);
+        way.writeWorked();
+        way.blocks.add(new Paragraph("Together, exact and in decimals:"));
+        way.blocks.addAll(ResultBlocks.formulas(output, style));
+        return way.blocks;
+    }
+
+    /** What is done in the same way for every output. */
+    static List<Block> rule(List<DerivedOutput> outputs) {
+        List<Block> rule = new ArrayList<>(List.of(new Heading(2, "From Y(z) to a formula in k"), new Paragraph("Y(z)/z"
+                + " is split into fractions over the poles λ of Y(z). Multiplied by the z that was kept outside, each of"
+                + " them is a line of the table of transforms, and stands for a term in k.")));
+        if (outputs.stream().flatMap(output -> output.closedForm().stream())
+                .anyMatch(form -> form.derivation().factors().stream().anyMatch(step -> !step.pairs().isEmpty()))) {
+            rule.add(new Paragraph("A complex pole λ comes with its conjugate, its coefficient R with that of R. The two"
+                    + " terms join: R λ^n + conj(R) conj(λ)^n = 2|R| |λ|^n cos(n arg λ + arg R), where the sign of arg R"
+                    + " is that of the imaginary part of R."));
+        }
+        return rule;
+    }
+
+    private void writeWorked() {
+        blocks.add(new Heading(3, OutputProse.atStep(output.output())));
+        transform();
+        Derivation derivation = form.derivation();
+        if (form.transform().y().denominator().degree() <= WRITTEN_OUT_UP_TO) {
+            expansion(derivation);
+        }
+        WayTables tables = new WayTables(derivation, numbers);
+        blocks.addAll(tables.blocks());
+        blocks.addAll(PairBlocks.of(derivation, numbers));
     }
 
     private void transform() {

@@ -42,12 +42,15 @@ public final class WhenDocument {
         WhenDocument document = new WhenDocument(found, style);
         List<Labelled> key = new ArrayList<>();
         found.answers().forEach(answer -> {
-            document.blocks.add(new Heading(3, OutputProse.title(answer.output())));
-            document.answer(answer);
+            if (found.answers().size() > 1) {
+                document.blocks.add(new Heading(3, OutputProse.title(answer.output())));
+            }
+            document.met(answer);
+            document.steps(answer);
             key.add(new Labelled(Prose.name(answer.output().name()).and(" "
                     + document.asked(answer.when().condition())), Prose.of(inBrief(answer.when()))));
         });
-        return new ReportSection(Prose.of(title(found.asked(), style)), key, document.blocks,
+        return new ReportSection(ReportSection.Place.RESULTS, Prose.of(title(found.asked(), style)), key, document.blocks,
                 found.isDecided() ? ReportSection.Standing.ANSWERED : ReportSection.Standing.NOT_DECIDED);
     }
 
@@ -66,14 +69,26 @@ public final class WhenDocument {
     }
 
     private void answer(WhenModel.Answer answer) {
+        met(answer);
+        longRun(answer);
+        steps(answer);
+    }
+
+    private void met(WhenModel.Answer answer) {
         label("asked", asked(answer.when().condition()));
         label("answer", inWords(answer.when()));
         answer.nearest().ifPresent(peak -> label("nearest", nearest(peak, answer.when().condition())));
         answer.when().first().ifPresent(first -> label("first", "k = " + first));
         answer.when().forEverFrom().ifPresent(from -> label("for ever", "from k = " + from + " on"));
+    }
+
+    private void longRun(WhenModel.Answer answer) {
         label("long run", new LongRunProse(style.digits()).of(answer.longRun()));
         answer.settling().ifPresent(settling ->
                 label("settles", SettlingProse.of(settling, answer.longRun(), style.digits())));
+    }
+
+    private void steps(WhenModel.Answer answer) {
         if (answer.when().classes().size() > 1) {
             blocks.add(classes(answer.when().classes()));
         }

@@ -1,0 +1,72 @@
+package org.pofk.report;
+
+import java.util.ArrayList;
+import java.util.List;
+import org.pofk.formula.Formula;
+import org.pofk.formula.Formulas;
+import org.pofk.modes.Derivation;
+import org.pofk.modes.Derivation.PairStep;
+import org.pofk.modes.RealValue;
+import org.pofk.report.Document.Block;
+import org.pofk.report.Document.Display;
+import org.pofk.report.Document.Labelled;
+import org.pofk.report.Document.Paragraph;
+import org.pofk.report.Document.Relation;
+
+/** How the two terms of a conjugate pair of poles join to one that oscillates, step by step. */
+final class PairBlocks {
+    static final int WORKED_UP_TO = 6;
+
+    private final NumberFormula numbers;
+    private final List<Block> blocks = new ArrayList<>();
+
+    private PairBlocks(NumberFormula numbers) {
+        this.numbers = numbers;
+    }
+
+    /** Nothing where all poles are real. */
+    static List<Block> of(Derivation derivation, NumberFormula numbers) {
+        List<PairStep> pairs = derivation.factors().stream().flatMap(step -> step.pairs().stream()).toList();
+        PairBlocks all = new PairBlocks(numbers);
+        pairs.stream().limit(WORKED_UP_TO).forEach(all::pair);
+        if (pairs.size() > WORKED_UP_TO) {
+            all.blocks.add(new Paragraph("The other " + (pairs.size() - WORKED_UP_TO) + " pairs of the table join in the"
+                    + " same way."));
+        }
+        return all.blocks;
+    }
+
+    private void pair(PairStep pair) {
+        Formula angle = numbers.angle(pair.mode().angle());
+        Formula argument = numbers.angle(pair.argument());
+        blocks.add(new Paragraph(Prose.of("The pair λ = ").and(WayTables.polar(numbers.of(pair.mode().modulus()), angle))
+                .and(pair.mode().power() == 0 ? ":" : ", its fraction of power " + (pair.mode().power() + 1) + ":")));
+        label("R", Prose.formula(rectangular(pair.real(), pair.imaginary())));
+        label("|R|", Prose.formula(numbers.of(pair.modulus())).and(", and twice that is ")
+                .andFormula(numbers.of(pair.mode().amplitude())));
+        label("arg R", Prose.formula(argument).and(", " + quadrant(sign(pair.real()), sign(pair.imaginary()))));
+        blocks.add(new Display(Prose.of("both terms"), Relation.EQUAL, pair.mode().accept(new ModeTerm(numbers))));
+    }
+
+    private Formula rectangular(RealValue real, RealValue imaginary) {
+        return Formulas.sum(List.of(numbers.of(real), Formulas.product(List.of(numbers.of(imaginary), Formula.Constant.I))));
+    }
+
+    /** Of what is certified; zero only where that is known. */
+    private int sign(RealValue value) {
+        return value.decimal(numbers.style().digits()).value().signum();
+    }
+
+    private static String quadrant(int real, int imaginary) {
+        if (imaginary == 0) {
+            return real < 0 ? "since R is real and negative" : "since R is real and positive";
+        }
+        String above = imaginary > 0 ? "above" : "below";
+        return "since R lies " + above + " the real axis" + (real > 0 ? ", right of the imaginary axis"
+                : real < 0 ? ", left of the imaginary axis" : ", on the imaginary axis");
+    }
+
+    private void label(String label, Prose text) {
+        blocks.add(new Labelled(label, text));
+    }
+}

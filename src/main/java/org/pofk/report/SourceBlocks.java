@@ -1,0 +1,83 @@
+package org.pofk.report;
+
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Set;
+import java.util.stream.Collectors;
+import org.pofk.chain.Model;
+import org.pofk.chain.Model.Written;
+import org.pofk.formula.FormulaParser;
+import org.pofk.report.Document.Block;
+import org.pofk.report.Document.Heading;
+import org.pofk.report.Document.Items;
+import org.pofk.report.Document.Paragraph;
+import org.pofk.text.Position;
+import org.pofk.text.RefusedException;
+
+/**
+ * The numbers of a model that name no source. A source stands for all that it is written on: the model, its moves, the
+ * moves out of a state, one move, a parameter. What a rest came to and a certain move need none; an expression in
+ * parameters has theirs.
+ */
+final class SourceBlocks {
+    private static final Set<String> GIVEN = Set.of("rest", "0", "1");
+    private static final Set<String> ON_ALL = Set.of("model", "transitions", "matrix");
+    private static final int LISTED_UP_TO = 30;
+
+    private final Model model;
+    private final Set<String> sourced;
+
+    private SourceBlocks(Model model) {
+        this.model = model;
+        this.sourced = model.notes().stream().filter(note -> note.kind().equals("source")).map(Model.Remark::on)
+                .collect(Collectors.toSet());
+    }
+
+    static List<Block> of(Model model) {
+        return new SourceBlocks(model).blocks();
+    }
+
+    private List<Block> blocks() {
+        List<Prose> open = new ArrayList<>();
+        moves().forEach((from, moves) -> open.add(Prose.of("from ").andName(from).and(": ")
+                .and(Prose.joined(moves, ", "))));
+        model.parameters().stream().filter(each -> each.source().isEmpty() && each.definition().isEmpty())
+                .forEach(each -> open.add(Prose.of("parameter ").andName(each.name()).and(" = " + each.value())));
+        Heading heading = new Heading(3, "Numbers without a source");
+        return open.isEmpty() ? List.of(heading, new Paragraph("None: every number of the moves and every parameter"
+                + " names one, or follows from those that do."))
+                : open.size() > LISTED_UP_TO ? List.of(heading, new Paragraph("The moves out of " + open.size()
+                        + " states and parameters name none; too many to be listed here."))
+                : List.of(heading, new Items(open));
+    }
+
+    /** The moves without one, by the state they lead out of. */
+    private Map<String, List<Prose>> moves() {
+        Map<String, List<Prose>> open = new LinkedHashMap<>();
+        if (sourced.stream().anyMatch(ON_ALL::contains)) {
+            return open;
+        }
+        List<String> states = model.chain().states();
+        for (Written each : model.written()) {
+            String from = "from '" + states.get(each.from()) + "'";
+            String to = states.get(each.to());
+            if (!GIVEN.contains(each.text()) && isNumber(each.text()) && !sourced.contains(from)
+                    && !sourced.contains(from + " to '" + to + "'")) {
+                open.computeIfAbsent(states.get(each.from()), none -> new ArrayList<>())
+                        .add(Prose.of("to ").andName(to).and(" ").andName(each.text()));
+            }
+        }
+        return open;
+    }
+
+    /** Whether no parameter is in it. */
+    private static boolean isNumber(String text) {
+        try {
+            return FormulaParser.parse(text, Position.ofWhole("model")).symbols().isEmpty();
+        } catch (RefusedException notInNumbers) {
+            return true;
+        }
+    }
+}
