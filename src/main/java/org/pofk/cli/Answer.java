@@ -33,15 +33,20 @@ final class Answer {
         return more;
     }
 
-    Document document() {
-        return document.get();
+    /** As text in a format, a document's in the form asked for. */
+    String written(Format format, DocumentForms documents) throws RefusedException {
+        return switch (format) {
+            case TEXT -> documents.text(document.get());
+            case HTML -> documents.html(document.get());
+            case LATEX -> documents.latex(document.get());
+            case JSON, CSV, NOTEBOOK -> form(format).text();
+        };
     }
 
-    /** In a format that is no document's. */
-    String written(Format format) throws RefusedException {
+    private Form form(Format format) {
         if (!forms.containsKey(format)) {
             throw new AssertionError("an answer was offered as " + format + " and can't be written so");
         }
-        return forms.get(format).text();
+        return forms.get(format);
     }
 }

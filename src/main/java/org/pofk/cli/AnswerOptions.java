@@ -1,6 +1,7 @@
 package org.pofk.cli;
 
 import java.util.function.Consumer;
+import java.util.function.Function;
 import org.pofk.chain.Model;
 import org.pofk.report.Style;
 import org.pofk.text.RefusedException;
@@ -56,6 +57,12 @@ final class AnswerOptions {
     /** Does the work within the budget; what it publishes last is kept. */
     <T> Worker.Outcome<T> within(Streams streams, Consumer<Consumer<T>> work) throws UsageException {
         return run.within(streams, work);
+    }
+
+    /** The same, and who waits is told what is published. */
+    <T> Worker.Outcome<T> within(Streams streams, Function<T, String> soFar, Consumer<Consumer<T>> work)
+            throws UsageException {
+        return run.within(streams, soFar, work);
     }
 
     /** Says that the budget ran out before anything was decided. */

@@ -12,8 +12,10 @@ import org.pofk.input.Overrides;
 import org.pofk.input.Source;
 import org.pofk.report.BlankClaims;
 import org.pofk.report.ClaimsText;
+import org.pofk.report.CsvWriter;
 import org.pofk.report.ReviewDocument;
 import org.pofk.report.VerdictsJson;
+import org.pofk.report.VerdictsTable;
 import org.pofk.slip.ReviewedClaims;
 import org.pofk.slip.Reviewing;
 import org.pofk.slip.Variants;
@@ -38,7 +40,7 @@ final class CheckCommand implements Work {
     private SettingOptions settings = new SettingOptions();
 
     @Mixin
-    private WritingOptions writing = new WritingOptions(CommandName.CHECK, Format.JSON);
+    private WritingOptions writing = new WritingOptions(CommandName.CHECK, Format.JSON, Format.CSV);
 
     @Mixin
     private RunOptions run;
@@ -78,7 +80,8 @@ final class CheckCommand implements Work {
         }
         ReviewedClaims reviewed = outcome.published().get();
         destination.write(Answer.of(() -> ReviewDocument.of(reviewed, ClaimsText.of(source.text()),
-                VersionCommand.program())).with(Format.JSON, () -> VerdictsJson.write(reviewed)), streams);
+                VersionCommand.program())).with(Format.JSON, () -> VerdictsJson.write(reviewed))
+                .with(Format.CSV, () -> CsvWriter.write(VerdictsTable.of(reviewed))), streams);
         return code(reviewed, outcome.finished());
     }
 

@@ -6,13 +6,16 @@ import java.util.List;
 import java.util.Optional;
 import java.util.Set;
 import org.pofk.answer.DerivedModel;
+import org.pofk.answer.DerivedOutput;
 import org.pofk.answer.Deriving;
 import org.pofk.answer.InspectedModel;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
+import org.pofk.report.CsvWriter;
 import org.pofk.report.DerivationDocument;
 import org.pofk.report.DerivationJson;
+import org.pofk.report.DerivationTable;
 import org.pofk.report.Document;
 import org.pofk.report.NotebookWriter;
 import org.pofk.report.StructureDocument;
@@ -29,7 +32,7 @@ final class DeriveCommand implements Work {
     private static final int DERIVED_UNASKED = 12;
 
     @Mixin
-    private AnswerOptions options = new AnswerOptions(CommandName.DERIVE, Format.JSON, Format.NOTEBOOK);
+    private AnswerOptions options = new AnswerOptions(CommandName.DERIVE, Format.JSON, Format.CSV, Format.NOTEBOOK);
 
     @Option(names = "--of", paramLabel = "NAME",
             description = "an output, a set or a state; repeatable; 'all' for every state")
@@ -65,8 +68,8 @@ final class DeriveCommand implements Work {
             return askedForOutputs(read, style, destination, streams);
         }
         List<Output> outputs = AskedOutputs.of(read.chain(), of);
-        Worker.Outcome<DerivedModel> outcome = options.within(streams, published ->
-                Deriving.of(read, outputs, at.map(StepList::steps).orElse(List.of()), extras(read, destination),
+        Worker.Outcome<DerivedModel> outcome = options.within(streams, DeriveCommand::soFar, published ->
+                Deriving.of(read, outputs, destination.steps(at), extras(read, destination),
                         published));
         if (outcome.published().isEmpty()) {
             return options.undecided(streams);
@@ -76,17 +79,24 @@ final class DeriveCommand implements Work {
         return derived.isDecided() && outcome.finished() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
     }
 
+    private static String soFar(DerivedModel derived) {
+        long found = derived.outputs().stream().filter(DerivedOutput::isDecided).count();
+        return found + " of " + derived.outputs().size() + " outputs derived";
+    }
+
     private Answer answer(DerivedModel derived, Style style) {
         return Answer.of(() -> document(derived, style))
                 .with(Format.JSON, () -> DerivationJson.write(derived, style.digits()))
+                .with(Format.CSV, () -> CsvWriter.write(DerivationTable.of(derived, style.digits())))
                 .with(Format.NOTEBOOK, () -> NotebookWriter.write(derived, style,
                         options.convention(derived.model())));
     }
 
     private ExitCode askedForOutputs(Model read, Style style, Destination destination, Streams streams)
             throws RefusedException, UsageException, WritingException {
-        if (destination.takes(Format.NOTEBOOK)) {
-            throw new UsageException("which outputs is the notebook to be about? Name them with --of");
+        if (destination.takes(Format.NOTEBOOK) || destination.takes(Format.CSV)) {
+            throw new UsageException("which outputs is the " + (destination.takes(Format.CSV) ? "table" : "notebook")
+                    + " to be about? Name them with --of");
         }
         InspectedModel inspected = InspectedModel.of(read, List.of());
         if (destination.takes(Format.JSON)) {

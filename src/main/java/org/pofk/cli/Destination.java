@@ -1,45 +1,54 @@
 package org.pofk.cli;
 
 import java.nio.charset.StandardCharsets;
-import org.pofk.report.HtmlWriter;
-import org.pofk.report.LatexWriter;
-import org.pofk.report.TextWriter;
-import org.pofk.text.Alphabet;
+import java.nio.file.Path;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.stream.IntStream;
 import org.pofk.text.RefusedException;
 
 /** As what an answer is written, and where to. */
 final class Destination {
-    private final Format format;
-    private final Alphabet alphabet;
-    private final LatexPart latex;
+    private static final int LAST_OF_A_TABLE = 20;
+
+    private final List<Target> targets;
+    private final DocumentForms forms;
     private final SaveOptions save;
 
-    /** How much of a LaTeX document is written. */
-    enum LatexPart { ARTICLE, FRAGMENT }
+    /** A format, and the file it goes to; to the screen where there is none. */
+    record Target(Format format, Optional<Path> file) {
+    }
 
-    Destination(Format format, Alphabet alphabet, LatexPart latex, SaveOptions save) {
-        this.format = format;
-        this.alphabet = alphabet;
-        this.latex = latex;
+    Destination(List<Target> targets, DocumentForms forms, SaveOptions save) {
+        this.targets = List.copyOf(targets);
+        this.forms = forms;
         this.save = save;
     }
 
     /** Whether the answer is to be written in this format. */
     boolean takes(Format asked) {
-        return format == asked;
+        return targets.stream().anyMatch(target -> target.format == asked);
     }
 
+    /** The steps asked for; the first ones where none were and a table of values is to be written. */
+    List<Integer> steps(Optional<StepList> asked) {
+        return asked.map(StepList::steps).orElse(takes(Format.CSV)
+                ? IntStream.rangeClosed(0, LAST_OF_A_TABLE).boxed().toList() : List.of());
+    }
+
+    /** Writes the answer in every format asked for, or, where one of them fails, nothing. */
     void write(Answer answer, Streams streams) throws RefusedException, UsageException, WritingException {
-        save.write(written(answer), streams);
-    }
-
-    private String written(Answer answer) throws RefusedException {
-        return switch (format) {
-            case TEXT -> TextWriter.of(alphabet, StandardCharsets.UTF_8).write(answer.document());
-            case HTML -> HtmlWriter.write(answer.document());
-            case LATEX -> latex == LatexPart.FRAGMENT ? LatexWriter.fragment(answer.document())
-                    : LatexWriter.article(answer.document());
-            case JSON, NOTEBOOK -> answer.written(format);
-        };
+        Map<Path, byte[]> files = new LinkedHashMap<>();
+        for (Target target : targets) {
+            byte[] bytes = answer.written(target.format, forms).getBytes(StandardCharsets.UTF_8);
+            if (target.file.isEmpty()) {
+                streams.answer().writeBytes(bytes);
+            } else {
+                files.put(target.file.get(), bytes);
+            }
+        }
+        save.write(files, streams);
     }
 }

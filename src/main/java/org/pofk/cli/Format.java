@@ -10,7 +10,7 @@ import java.util.Set;
 
 /** What an answer can be written as. */
 enum Format {
-    TEXT(".txt"), JSON(".json"), HTML(".html"), LATEX(".tex"), NOTEBOOK(".ipynb");
+    TEXT(".txt"), JSON(".json"), CSV(".csv"), HTML(".html"), LATEX(".tex"), NOTEBOOK(".ipynb");
 
     /** What any document can be written as. */
     static final Set<Format> OF_DOCUMENTS = Set.of(TEXT, HTML, LATEX);
@@ -25,6 +25,11 @@ enum Format {
     static Optional<Format> of(Path file) {
         String name = file.toString().toLowerCase(Locale.ROOT);
         return Arrays.stream(values()).filter(format -> name.endsWith(format.ending)).findFirst();
+    }
+
+    /** {@code .json}. */
+    String ending() {
+        return ending;
     }
 
     static List<String> endings(Collection<Format> formats) {

@@ -5,9 +5,11 @@ import java.util.List;
 import org.pofk.answer.InspectedModel;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
-import org.pofk.report.Style;
+import org.pofk.report.CsvWriter;
 import org.pofk.report.StructureDocument;
 import org.pofk.report.StructureJson;
+import org.pofk.report.StructureTable;
+import org.pofk.report.Style;
 import org.pofk.text.RefusedException;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
@@ -18,7 +20,7 @@ import picocli.CommandLine.Option;
     "the long run in three ways, with warnings where a habit misleads; what a reviewer would ask."})
 final class InspectCommand implements Work {
     @Mixin
-    private AnswerOptions options = new AnswerOptions(CommandName.INSPECT, Format.JSON);
+    private AnswerOptions options = new AnswerOptions(CommandName.INSPECT, Format.JSON, Format.CSV);
 
     @Option(names = "--of", paramLabel = "NAME",
             description = "an output, a set or a state whose long run is wanted; repeatable")
@@ -39,7 +41,8 @@ final class InspectCommand implements Work {
         }
         InspectedModel inspected = outcome.published().get();
         destination.write(Answer.of(() -> StructureDocument.of(inspected, style)).with(Format.JSON,
-                () -> StructureJson.write(CommandName.INSPECT.word(), inspected, style.digits())), streams);
+                () -> StructureJson.write(CommandName.INSPECT.word(), inspected, style.digits()))
+                .with(Format.CSV, () -> CsvWriter.write(StructureTable.of(inspected, style.digits()))), streams);
         return outcome.finished() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
     }
 }

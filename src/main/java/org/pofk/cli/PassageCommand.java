@@ -1,13 +1,14 @@
 package org.pofk.cli;
 
-import java.util.List;
 import java.util.Optional;
 import java.util.function.Supplier;
 import org.pofk.answer.Passage;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
+import org.pofk.report.CsvWriter;
 import org.pofk.report.PassageDocument;
 import org.pofk.report.PassageJson;
+import org.pofk.report.PassageTable;
 import org.pofk.report.Style;
 import org.pofk.text.RefusedException;
 import picocli.CommandLine.Command;
@@ -19,7 +20,7 @@ import picocli.CommandLine.Option;
     "passage as a formula, mean, variance and percentiles; and from every state."})
 final class PassageCommand implements Work {
     @Mixin
-    private AnswerOptions options = new AnswerOptions(CommandName.PASSAGE, Format.JSON);
+    private AnswerOptions options = new AnswerOptions(CommandName.PASSAGE, Format.JSON, Format.CSV);
 
     @Mixin
     private PassageOptions passage = new PassageOptions();
@@ -37,14 +38,15 @@ final class PassageCommand implements Work {
         }
         Model read = options.model();
         Chain chain = passage.started(read.chain());
-        Supplier<Passage> work = passage.work(chain, at.map(StepList::steps).orElse(List.of()));
+        Supplier<Passage> work = passage.work(chain, destination.steps(at));
         Worker.Outcome<Passage> outcome = options.within(streams, published -> published.accept(work.get()));
         if (outcome.published().isEmpty()) {
             return options.undecided(streams);
         }
         Passage found = outcome.published().get();
         destination.write(Answer.of(() -> PassageDocument.of(read, chain, found, style))
-                .with(Format.JSON, () -> PassageJson.write(read, chain, found, style.digits())), streams);
+                .with(Format.JSON, () -> PassageJson.write(read, chain, found, style.digits()))
+                .with(Format.CSV, () -> CsvWriter.write(PassageTable.of(read, chain, found, style.digits()))), streams);
         return ExitCode.ANSWERED;
     }
 }

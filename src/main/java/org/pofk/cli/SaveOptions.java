@@ -1,13 +1,10 @@
 package org.pofk.cli;
 
-import java.io.IOException;
 import java.nio.charset.StandardCharsets;
-import java.nio.file.AccessDeniedException;
-import java.nio.file.FileSystemException;
 import java.nio.file.Files;
-import java.nio.file.NoSuchFileException;
 import java.nio.file.Path;
-import java.nio.file.StandardCopyOption;
+import java.util.Collection;
+import java.util.Map;
 import java.util.Optional;
 import picocli.CommandLine.Option;
 
@@ -17,7 +14,7 @@ final class SaveOptions {
             description = "writes the answer to a file, whole or not at all, instead of to the screen")
     private Optional<Path> file = Optional.empty();
 
-    @Option(names = "--replace", description = "lets --save replace a file that exists")
+    @Option(names = "--replace", description = "lets a saved file replace one that exists")
     private boolean replace;
 
     Optional<Path> file() {
@@ -27,10 +24,24 @@ final class SaveOptions {
     /** Refuses a file that must not be replaced; asked before the work begins, and again when it is written. */
     void check() throws UsageException {
         if (file.isEmpty() && replace) {
-            throw new UsageException("--replace replaces a file that --save FILE names; there is no --save");
+            throw new UsageException("--replace replaces a file that exists; nothing is saved here");
         }
-        if (file.isPresent() && !replace && Files.exists(file.get())) {
-            throw new UsageException("'" + file.get() + "' exists; --replace replaces it");
+        check(file.stream().toList());
+    }
+
+    /** Refuses files of which one must not be replaced, and what is no ordinary file. */
+    void check(Collection<Path> files) throws UsageException {
+        for (Path each : files) {
+            if (Files.isDirectory(each)) {
+                throw new UsageException("'" + each + "' is a folder; name a file in it");
+            }
+            if (Files.exists(each) && !Files.isRegularFile(each)) {
+                throw new UsageException("'" + each + "' is no ordinary file; without --save,  > " + each
+                        + "  sends the answer there");
+            }
+            if (!replace && Files.exists(each)) {
+                throw new UsageException("'" + each + "' exists; --replace replaces it");
+            }
         }
     }
 
@@ -44,42 +55,15 @@ final class SaveOptions {
         check();
         if (file.isEmpty()) {
             streams.answer().writeBytes(bytes);
-            return;
-        }
-        try {
-            writeWhole(file.get(), bytes);
-        } catch (IOException failed) {
-            throw new WritingException("'" + file.get() + "' can't be written: "
-                    + reason(failed, folder(file.get())), failed);
-        }
-        streams.notes().println("written: " + file.get());
-    }
-
-    /** Writes beside the file first, and moves it into its place when it is complete. */
-    private static void writeWhole(Path file, byte[] bytes) throws IOException {
-        Path draft = Files.createTempFile(folder(file), ".pofk-", ".part");
-        try {
-            Files.write(draft, bytes);
-            Files.move(draft, file, StandardCopyOption.ATOMIC_MOVE, StandardCopyOption.REPLACE_EXISTING);
-        } finally {
-            Files.deleteIfExists(draft);
+        } else {
+            write(Map.of(file.get(), bytes), streams);
         }
     }
 
-    private static Path folder(Path file) {
-        return Optional.ofNullable(file.toAbsolutePath().getParent()).orElse(Path.of(""));
-    }
-
-    /** In the system's words where it has some; they name the draft's file otherwise, which nobody knows. */
-    private static String reason(IOException failed, Path folder) {
-        if (failed instanceof NoSuchFileException) {
-            return Files.isDirectory(folder) ? "the system takes no new file in the folder '" + folder + "'"
-                    : "there is no such folder";
-        }
-        if (failed instanceof AccessDeniedException) {
-            return "that isn't allowed there";
-        }
-        return failed instanceof FileSystemException named && named.getReason() != null
-                ? "the system says: " + named.getReason() : String.valueOf(failed.getMessage());
+    /** Writes all of these files or none, in their order. */
+    void write(Map<Path, byte[]> files, Streams streams) throws UsageException, WritingException {
+        check(files.keySet());
+        WholeFiles.write(files);
+        files.keySet().forEach(each -> streams.notes().println("written: " + each));
     }
 }

@@ -6,8 +6,10 @@ import org.pofk.answer.Simulation;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
+import org.pofk.report.CsvWriter;
 import org.pofk.report.SimulationDocument;
 import org.pofk.report.SimulationJson;
+import org.pofk.report.SimulationTable;
 import org.pofk.report.Style;
 import org.pofk.text.RefusedException;
 import picocli.CommandLine.Command;
@@ -21,7 +23,7 @@ final class SimulateCommand implements Work {
     private static final int MOST_RUNS = 100_000_000;
 
     @Mixin
-    private AnswerOptions options = new AnswerOptions(CommandName.SIMULATE, Format.JSON);
+    private AnswerOptions options = new AnswerOptions(CommandName.SIMULATE, Format.JSON, Format.CSV);
 
     @Option(names = "--of", paramLabel = "NAME", description = "an output, a set or a state; repeatable")
     private List<String> of = new ArrayList<>();
@@ -59,7 +61,9 @@ final class SimulateCommand implements Work {
         }
         Simulation simulation = outcome.published().get();
         destination.write(Answer.of(() -> SimulationDocument.of(read, simulation, style))
-                .with(Format.JSON, () -> SimulationJson.write(read, simulation, style.digits())), streams);
+                .with(Format.JSON, () -> SimulationJson.write(read, simulation, style.digits()))
+                .with(Format.CSV, () -> CsvWriter.write(SimulationTable.of(read, simulation, style.digits()))),
+                streams);
         return ExitCode.ANSWERED;
     }
 }

@@ -15,19 +15,24 @@ import java.time.Instant;
  * @param answer standard output
  * @param notes  standard error
  * @param begun  by the system's clock
+ * @param progress of what takes long
  */
-public record Streams(PrintStream answer, PrintStream notes, Instant begun) {
+public record Streams(PrintStream answer, PrintStream notes, Instant begun, Progress progress) {
+    /** Says that standard error is a terminal; set by whoever starts Java, which can't tell. */
+    private static final String TERMINAL = "pofk.terminal";
 
-    /** A run that begins now. */
+    /** A run that begins now and is watched by nobody. */
     public Streams(PrintStream answer, PrintStream notes) {
-        this(answer, notes, Instant.now());
+        this(answer, notes, Instant.now(), Progress.UNSEEN);
     }
 
     /** The streams of this process. */
     static Streams ofProcess() {
         PrintStream notes = utf8(new FileOutputStream(FileDescriptor.err));
         return new Streams(utf8(new ToldOutput(new FileOutputStream(FileDescriptor.out), notes)), notes,
-                ProcessHandle.current().info().startInstant().orElseGet(Instant::now));
+                ProcessHandle.current().info().startInstant().orElseGet(Instant::now),
+                Boolean.getBoolean(TERMINAL) || System.console() != null
+                        ? Progress.onTerminal(notes) : Progress.UNSEEN);
     }
 
     private static PrintStream utf8(OutputStream bytes) {

@@ -5,9 +5,11 @@ import java.util.List;
 import org.pofk.answer.WhenModel;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
+import org.pofk.report.CsvWriter;
 import org.pofk.report.Style;
 import org.pofk.report.WhenDocument;
 import org.pofk.report.WhenJson;
+import org.pofk.report.WhenTable;
 import org.pofk.text.RefusedException;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
@@ -18,7 +20,7 @@ import picocli.CommandLine.Option;
     "or that it never does. Proved: no step is passed over."})
 final class WhenCommand implements Work {
     @Mixin
-    private AnswerOptions options = new AnswerOptions(CommandName.WHEN, Format.JSON);
+    private AnswerOptions options = new AnswerOptions(CommandName.WHEN, Format.JSON, Format.CSV);
 
     @Option(names = "--of", paramLabel = "NAME", description = "an output, a set or a state; repeatable")
     private List<String> of = new ArrayList<>();
@@ -36,14 +38,16 @@ final class WhenCommand implements Work {
         if (destination.takes(Format.JSON) && outputs.size() != 1) {
             throw new UsageException("as JSON one output is answered at a time; name it with --of");
         }
-        Worker.Outcome<WhenModel> outcome = options.within(streams, published ->
+        Worker.Outcome<WhenModel> outcome = options.within(streams, partly ->
+                partly.answers().size() + " of " + outputs.size() + " outputs answered", published ->
                 WhenModel.of(read, outputs, asked, published));
         if (outcome.published().isEmpty()) {
             return options.undecided(streams);
         }
         WhenModel found = outcome.published().get();
         destination.write(Answer.of(() -> WhenDocument.of(found, style))
-                .with(Format.JSON, () -> WhenJson.write(read, found.answers().get(0), style.digits())), streams);
+                .with(Format.JSON, () -> WhenJson.write(read, found.answers().get(0), style.digits()))
+                .with(Format.CSV, () -> CsvWriter.write(WhenTable.of(found, style.digits()))), streams);
         return found.isDecided() && outcome.finished() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
     }
 

@@ -1,6 +1,5 @@
 package org.pofk.cli;
 
-import java.io.PrintStream;
 import java.time.Duration;
 import java.util.Optional;
 import java.util.concurrent.CompletableFuture;
@@ -9,13 +8,14 @@ import java.util.concurrent.TimeUnit;
 import java.util.concurrent.TimeoutException;
 import java.util.concurrent.atomic.AtomicReference;
 import java.util.function.Consumer;
+import java.util.function.Function;
 
 /**
  * Work in a thread of its own that publishes what it has proven, so that a limit of time leaves a part of the answer
  * instead of none. The thread is a daemon: what can't be interrupted ends with the process.
  */
 final class Worker {
-    private static final Duration UNTIL_FIRST_WORD = Duration.ofSeconds(5);
+    private static final Duration BETWEEN_WORDS = Duration.ofSeconds(1);
     private static final long STACK = 256L << 20;
 
     private Worker() {
@@ -25,8 +25,13 @@ final class Worker {
     record Outcome<T>(Optional<T> published, boolean finished) {
     }
 
-    /** Runs the work until it ends or the limit is reached; a failure in it is thrown here. */
-    static <T> Outcome<T> within(Optional<Duration> limit, PrintStream notes, Consumer<Consumer<T>> work) {
+    /**
+     * Runs the work until it ends or the limit is reached; a failure in it is thrown here.
+     *
+     * @param soFar what to tell who waits of what is published; may be empty
+     */
+    static <T> Outcome<T> within(Optional<Duration> limit, Progress progress, Function<T, String> soFar,
+            Consumer<Consumer<T>> work) {
         AtomicReference<T> published = new AtomicReference<>();
         CompletableFuture<Void> end = new CompletableFuture<>();
         Thread thread = new Thread(null, () -> {
@@ -39,26 +44,35 @@ final class Worker {
         }, "work", STACK);
         thread.setDaemon(true);
         thread.start();
-        boolean finished = waited(end, limit, notes);
-        return new Outcome<>(Optional.ofNullable(published.get()), finished);
+        try {
+            boolean finished = waited(end, limit, elapsed -> progress.told(elapsed, limit,
+                    Optional.ofNullable(published.get()).map(soFar).orElse("")));
+            return new Outcome<>(Optional.ofNullable(published.get()), finished);
+        } finally {
+            progress.ended();
+        }
     }
 
-    private static boolean waited(CompletableFuture<Void> end, Optional<Duration> limit, PrintStream notes) {
-        Duration first = limit.filter(given -> given.compareTo(UNTIL_FIRST_WORD) < 0).orElse(UNTIL_FIRST_WORD);
-        if (ended(end, first)) {
-            return true;
+    private static boolean waited(CompletableFuture<Void> end, Optional<Duration> limit, Consumer<Duration> told) {
+        long begun = System.nanoTime();
+        Duration elapsed = Duration.ZERO;
+        while (limit.isEmpty() || elapsed.compareTo(limit.get()) < 0) {
+            Duration left = limit.orElse(BETWEEN_WORDS).minus(limit.isEmpty() ? Duration.ZERO : elapsed);
+            if (ended(end, left.compareTo(BETWEEN_WORDS) < 0 ? left : BETWEEN_WORDS)) {
+                return true;
+            }
+            if (Thread.currentThread().isInterrupted()) {
+                return false;
+            }
+            elapsed = Duration.ofNanos(System.nanoTime() - begun);
+            told.accept(elapsed);
         }
-        if (limit.isPresent()) {
-            return ended(end, limit.get().minus(first));
-        }
-        notes.println("still at work; Ctrl-C stops it, --budget SECONDS limits it and keeps what is proven");
-        notes.flush();
-        return ended(end, Duration.ofDays(365_000));
+        return false;
     }
 
     private static boolean ended(CompletableFuture<Void> end, Duration limit) {
         try {
-            end.get(limit.toMillis(), TimeUnit.MILLISECONDS);
+            end.get(limit.toNanos(), TimeUnit.NANOSECONDS);
             return true;
         } catch (TimeoutException notYet) {
             return false;

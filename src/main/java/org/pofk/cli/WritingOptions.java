@@ -1,6 +1,8 @@
 package org.pofk.cli;
 
+import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.ArrayList;
 import java.util.EnumSet;
 import java.util.List;
 import java.util.Optional;
@@ -14,9 +16,15 @@ final class WritingOptions {
     private final CommandName command;
     private final Set<Format> offered;
 
-    @Option(names = "--as", paramLabel = "FORMAT",
-            description = "${COMPLETION-CANDIDATES}; otherwise from the name of the file, or text")
-    private Optional<Format> as = Optional.empty();
+    @Option(names = "--as", paramLabel = "FORMAT", split = ",", splitSynopsisLabel = ",",
+            description = "${COMPLETION-CANDIDATES}; otherwise from the name of the file, or text;"
+                    + " several go into a folder, with --save-in")
+    private List<Format> as = new ArrayList<>();
+
+    @Option(names = "--save-in", paramLabel = "FOLDER",
+            description = "writes a file for each format of --as into a folder, all or none, named after the model"
+                    + " and the command")
+    private Optional<Path> folder = Optional.empty();
 
     @Option(names = "--plain", description = "text in ASCII characters only")
     private boolean plain;
@@ -44,16 +52,46 @@ final class WritingOptions {
      * contradicts itself, isn't offered, or where a file isn't to be replaced.
      */
     Destination destination(Path about) throws UsageException {
-        Format format = format();
-        save.check();
-        return new Destination(format, plain ? Alphabet.ASCII : Alphabet.UNICODE,
-                fragment ? Destination.LatexPart.FRAGMENT : Destination.LatexPart.ARTICLE, save);
+        List<Destination.Target> targets = folder.isPresent() ? inFolder(folder.get(), about)
+                : List.of(new Destination.Target(format(), save.file()));
+        for (Destination.Target target : targets) {
+            requireOffered(target.format());
+        }
+        if (fragment && targets.stream().noneMatch(target -> target.format() == Format.LATEX)) {
+            throw new UsageException("--fragment is a part of a LaTeX document; there is no --as latex");
+        }
+        save.check(targets.stream().flatMap(target -> target.file().stream()).toList());
+        return new Destination(targets, new DocumentForms(plain ? Alphabet.ASCII : Alphabet.UNICODE,
+                fragment ? DocumentForms.LatexPart.FRAGMENT : DocumentForms.LatexPart.ARTICLE), save);
+    }
+
+    private List<Destination.Target> inFolder(Path folder, Path about) throws UsageException {
+        if (save.file().isPresent()) {
+            throw new UsageException("--save names one file, --save-in a folder of them; one of the two is enough");
+        }
+        if (as.isEmpty()) {
+            throw new UsageException("which formats are to be saved in '" + folder + "'? Say  --as "
+                    + String.join(",", offered()) + "  or some of them");
+        }
+        if (!Files.isDirectory(folder)) {
+            throw new UsageException("there is no folder '" + folder + "'");
+        }
+        String name = about.getFileName().toString().replaceFirst("(?<=.)\\.[^.]*$", "") + "-" + command.word();
+        return as.stream().distinct().map(format -> new Destination.Target(format,
+                Optional.of(folder.resolve(name + format.ending())))).toList();
+    }
+
+    private void requireOffered(Format format) throws UsageException {
+        if (!offered.contains(format)) {
+            throw new UsageException(command.word() + " writes no " + format + "; it writes "
+                    + Words.listed(offered(), "and"));
+        }
     }
 
     /** Where a file of YAML goes, which this command writes in place of its answer. */
     SaveOptions destinationOfYaml(String what) throws UsageException {
-        if (as.isPresent() || plain || fragment) {
-            throw new UsageException(what + " is YAML; --as, --plain and --fragment are for the answer of "
+        if (!as.isEmpty() || folder.isPresent() || plain || fragment) {
+            throw new UsageException(what + " is YAML; --as, --save-in, --plain and --fragment are for the answer of "
                     + command.word());
         }
         if (save.file().flatMap(Format::of).isPresent()) {
@@ -64,24 +102,21 @@ final class WritingOptions {
     }
 
     private Format format() throws UsageException {
+        save.check();
         Optional<Path> file = save.file();
+        if (as.size() > 1) {
+            throw new UsageException("several formats are several files; name a folder for them with --save-in");
+        }
+        Optional<Format> said = as.stream().findFirst();
         Optional<Format> named = file.flatMap(Format::of);
-        if (file.isPresent() && named.isEmpty() && as.isEmpty()) {
+        if (file.isPresent() && named.isEmpty() && said.isEmpty()) {
             throw new UsageException("what is '" + file.get() + "' to hold? Name it with an ending of "
                     + String.join(", ", Format.endings(offered)) + ", or say with --as");
         }
-        if (as.isPresent() && named.isPresent() && as.get() != named.get()) {
-            throw new UsageException("--as " + as.get() + " and the name '" + file.orElseThrow()
+        if (said.isPresent() && named.isPresent() && said.get() != named.get()) {
+            throw new UsageException("--as " + said.get() + " and the name '" + file.orElseThrow()
                     + "' ask for two different formats");
         }
-        Format format = as.or(() -> named).orElse(Format.TEXT);
-        if (!offered.contains(format)) {
-            throw new UsageException(command.word() + " writes no " + format + "; it writes "
-                    + Words.listed(offered(), "and"));
-        }
-        if (fragment && format != Format.LATEX) {
-            throw new UsageException("--fragment is a part of a LaTeX document; there is no --as latex");
-        }
-        return format;
+        return said.or(() -> named).orElse(Format.TEXT);
     }
 }

@@ -46,7 +46,8 @@ final class WrongValue {
     }
 
     private static Class<?> type(ArgSpec option) {
-        return option.typeInfo().isOptional() ? option.typeInfo().getAuxiliaryTypes()[0] : option.typeInfo().getType();
+        return option.typeInfo().isOptional() || option.typeInfo().isCollection()
+                ? option.typeInfo().getAuxiliaryTypes()[0] : option.typeInfo().getType();
     }
 
     private static Optional<String> said(OptionSpec option, String value) {

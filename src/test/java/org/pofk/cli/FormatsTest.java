@@ -3,11 +3,15 @@ package org.pofk.cli;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import com.fasterxml.jackson.databind.JsonNode;
+import com.fasterxml.jackson.databind.ObjectMapper;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Set;
+import java.util.stream.Collectors;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -30,6 +34,40 @@ class FormatsTest {
         Run fragment = run(command, "--as", "latex", "--fragment");
         assertTrue(fragment.answer().startsWith("% ") && !fragment.answer().contains("\\documentclass"));
         assertEquals(page.exitCode(), article.exitCode());
+        Run table = run(command, "--as", "csv");
+        List<String> lines = table.answer().lines().toList();
+        assertTrue(lines.size() > 1, table.notes());
+        assertEquals(Set.of(fields(lines.get(0))), lines.stream().map(FormatsTest::fields).collect(Collectors.toSet()));
+        assertEquals(page.exitCode(), table.exitCode());
+    }
+
+    /** How many there are in a record whose quoted fields hold no quotes. */
+    private static int fields(String line) {
+        return line.replaceAll("\"[^\"]*\"", "").split(",", -1).length;
+    }
+
+    @ParameterizedTest
+    @ValueSource(strings = {"pump-pair", "level-controller", "valve-rotation", "relined-main"})
+    void theTableHoldsTheSameValuesAsTheResult(String pattern) throws IOException {
+        String command = "derive test-data/models/" + pattern + ".yaml --at 0..9,60";
+        List<String> inResult = new ArrayList<>();
+        for (JsonNode output : new ObjectMapper().readTree(run(command, "--as", "json").answer()).get("outputs")) {
+            output.get("values").forEach(value -> inResult.add(output.get("name").asText() + "," + value.get("k")
+                    + "," + value.get("exact").asText() + "," + value.get("decimal").asText()));
+        }
+        List<String> inTable = run(command, "--as", "csv").answer().lines().skip(1)
+                .map(line -> pattern.equals("relined-main") ? line.replaceFirst("(,[0-9]+),[0-9]+,", "$1,") : line)
+                .toList();
+        assertTrue(inTable.size() >= 11);
+        assertEquals(inResult, inTable);
+    }
+
+    @Test
+    void withoutStepsTheTableIsOfTheFirstOnesAndAskedStepsStay() {
+        assertEquals(1 + 21, run("derive test-data/models/pump-pair.yaml", "--of", "lost", "--as", "csv").answer()
+                .lines().count());
+        assertEquals(1 + 1, run("derive test-data/models/pump-pair.yaml", "--of", "lost", "--as", "csv", "--at", "7")
+                .answer().lines().count());
     }
 
     private static Run run(String command, String... options) {

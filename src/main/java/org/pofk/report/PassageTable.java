@@ -1,0 +1,61 @@
+package org.pofk.report;
+
+import java.util.List;
+import java.util.Optional;
+import org.pofk.answer.DerivedOutput;
+import org.pofk.answer.Passage;
+import org.pofk.answer.PassageMoments;
+import org.pofk.chain.Chain;
+import org.pofk.chain.Model;
+import org.pofk.exact.Rational;
+
+/**
+ * A first passage as rows that each say one number: law, distribution, survival and hazard by step, with an empty
+ * {@code from}, which stands for the start asked about; the percentiles; probability and mean from every state.
+ */
+public final class PassageTable {
+    private static final List<Prose> START = List.of(Prose.EMPTY);
+
+    private final StepColumns steps;
+    private final Rows rows;
+
+    private PassageTable(StepColumns steps, Rows rows) {
+        this.steps = steps;
+        this.rows = rows;
+    }
+
+    /** @param chain with the start that was asked about; {@code digits} are the significant digits of decimals */
+    public static Document.Table of(Model model, Chain chain, Passage passage, int digits) {
+        StepColumns steps = StepColumns.of(model);
+        Rows rows = new Rows(digits, Rows.words("quantity", "from"), steps.header(), Rows.words("exact", "decimal"));
+        PassageTable table = new PassageTable(steps, rows);
+        table.byStep("law", passage.law());
+        table.byStep("distribution", passage.distribution());
+        table.byStep("survival", passage.survival());
+        passage.hazards().forEach(hazard ->
+                rows.add(Rows.words("hazard"), START, steps.cells(hazard.k()), rows.value(hazard.value())));
+        table.moments(passage.moments());
+        passage.percentiles().stream().filter(each -> each.k().isPresent()).forEach(each -> rows.add(
+                Rows.words("percentile"), START, steps.cells(each.k().getAsInt()), rows.value(each.p())));
+        for (int i = 0; i < chain.size(); i++) {
+            table.number("probability", chain.states().get(i), Optional.of(passage.fromEach().probabilities().get(i)));
+            table.number("mean given that it happens", chain.states().get(i), passage.fromEach().means().get(i));
+        }
+        return rows.table();
+    }
+
+    private void byStep(String quantity, DerivedOutput output) {
+        output.values().forEach(value ->
+                rows.add(Rows.words(quantity), START, steps.cells(value.k()), rows.value(value)));
+    }
+
+    private void moments(PassageMoments moments) {
+        rows.add(Rows.words("probability"), START, steps.none(), rows.value(moments.probability()));
+        rows.add(Rows.words("mean given that it happens"), START, steps.none(), rows.value(moments.mean()));
+        rows.add(Rows.words("variance given that it happens"), START, steps.none(), rows.value(moments.variance()));
+    }
+
+    private void number(String quantity, String state, Optional<Rational> value) {
+        rows.add(Rows.words(quantity), List.of(Prose.name(state)), steps.none(), rows.value(value));
+    }
+}

@@ -1,0 +1,56 @@
+package org.pofk.report;
+
+import java.util.List;
+import java.util.Locale;
+import java.util.Optional;
+import org.pofk.answer.When;
+import org.pofk.answer.WhenModel;
+
+/**
+ * When outputs meet a condition: a row for each output, whose {@code residue} is empty, and where its steps end in
+ * different ways one for each residue of k. An empty step is none, or one that isn't decided: {@code answer} says which.
+ */
+public final class WhenTable {
+    private final StepColumns steps;
+    private final Rows rows;
+
+    private WhenTable(StepColumns steps, Rows rows) {
+        this.steps = steps;
+        this.rows = rows;
+    }
+
+    /** @param digits significant digits of decimals */
+    public static Document.Table of(WhenModel found, int digits) {
+        StepColumns steps = StepColumns.of(found.model());
+        Rows rows = new Rows(digits, Rows.words("output", "condition", "exact", "decimal", "residue", "modulus",
+                "answer"), first(steps.header(), "first"), first(steps.header(), "for ever from"));
+        WhenTable table = new WhenTable(steps, rows);
+        found.answers().forEach(table::answer);
+        return rows.table();
+    }
+
+    /** {@code first k}, {@code first time (h)}. */
+    private static List<Prose> first(List<Prose> header, String word) {
+        return header.stream().map(each -> Prose.of(word + " ").and(each)).toList();
+    }
+
+    private void answer(WhenModel.Answer answer) {
+        When when = answer.when();
+        add(answer, Rows.words("", "", inWords(when.reason())), when.first(), when.forEverFrom());
+        if (when.classes().size() > 1) {
+            when.classes().forEach(each -> add(answer, Rows.words(String.valueOf(each.residue()),
+                    String.valueOf(each.modulus()), inWords(each.end())), each.first(), each.forEverFrom()));
+        }
+    }
+
+    private void add(WhenModel.Answer answer, List<Prose> middle, Optional<Long> first, Optional<Long> forEverFrom) {
+        rows.add(List.of(Prose.name(answer.output().name()),
+                Prose.of(inWords(answer.when().condition().kind()))), rows.value(answer.when().condition().bound()),
+                middle, first.map(steps::cells).orElse(steps.none()), forEverFrom.map(steps::cells).orElse(steps.none()));
+    }
+
+    /** {@code NOT_DECIDED} is written {@code not decided}. */
+    private static String inWords(Enum<?> constant) {
+        return constant.name().toLowerCase(Locale.ROOT).replace('_', ' ');
+    }
+}
