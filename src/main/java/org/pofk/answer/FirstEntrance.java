@@ -26,7 +26,8 @@ public record FirstEntrance(List<Rational> probabilities, List<Optional<Rational
         means = List.copyOf(means);
     }
 
-    static FirstEntrance of(Chain chain, Set<Integer> into, Set<Integer> avoiding) {
+    /** That of a set, before the states of another one. */
+    public static FirstEntrance of(Chain chain, Set<Integer> into, Set<Integer> avoiding) {
         List<Integer> open = open(chain.matrix(), into, avoiding);
         Map<Integer, Integer> place = StationaryDistribution.placeOf(open);
         List<Rational> entering = open.stream().map(state -> chain.matrix().columns().get(state).stream()

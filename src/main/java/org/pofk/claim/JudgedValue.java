@@ -24,7 +24,7 @@ final class JudgedValue {
     static Judgement of(Statement.Value stated, Claim claim, Truth truth) throws RefusedException {
         OutputTruth output = truth.about(stated.output());
         if (stated.at() <= EXACT) {
-            return against(output.valueAt(stated.at()), stated, claim);
+            return exactly(output.valueAt(stated.at()), stated, claim);
         }
         Ball value = FarValue.enclose(output, stated.at(), BITS);
         StatedNumber number = StatedNumber.of(stated.is(), claim);
@@ -32,7 +32,7 @@ final class JudgedValue {
         if (value.overlaps(face)) {
             return meeting(number, value, stated, claim, output);
         }
-        return alike(against(value.lower(), stated, claim), against(value.upper(), stated, claim));
+        return between(value, stated, claim);
     }
 
     /** The stated number can't be told from the value by enclosures. */
@@ -41,24 +41,17 @@ final class JudgedValue {
         Quantity face = AtFaceValue.of(number.value());
         if (face.rational().isPresent() && stated.at() <= COMPARED
                 && output.sequence().isAt(stated.at(), face.rational().get())) {
-            return against(face.rational().get(), stated, claim);
+            return exactly(face.rational().get(), stated, claim);
         }
-        Judgement judgement = alike(against(value.lower(), stated, claim), against(value.upper(), stated, claim));
-        return judgement.verdict() == Verdict.EXACT ? undecided(judgement) : judgement;
+        return between(value, stated, claim);
     }
 
-    private static Judgement against(Rational value, Statement.Value stated, Claim claim) throws RefusedException {
-        Holding holding = new Holding(claim);
-        holding.hold(stated.is(), Quantity.of(value));
-        return holding.judgement(texts -> texts.all().get(0), OptionalLong.of(stated.at()));
+    private static Judgement exactly(Rational value, Statement.Value stated, Claim claim) throws RefusedException {
+        return JudgedAnswer.between(value, value, stated.is(), claim, OptionalLong.of(stated.at()), List.of());
     }
 
-    private static Judgement alike(Judgement low, Judgement high) {
-        return low.verdict() == high.verdict() ? low : undecided(low);
-    }
-
-    private static Judgement undecided(Judgement judgement) {
-        return new Judgement(Verdict.UNDECIDED, judgement.difference(), OptionalLong.empty(), List.of(),
-                List.of("the value is too near to what is stated for enclosures to tell"), judgement.right());
+    private static Judgement between(Ball value, Statement.Value stated, Claim claim) throws RefusedException {
+        return JudgedAnswer.between(value.lower(), value.upper(), stated.is(), claim, OptionalLong.of(stated.at()),
+                List.of());
     }
 }

@@ -94,6 +94,11 @@ public final class Judging implements Statement.Visitor<Judgement> {
         return judged(() -> JudgedBound.of(bound, claim, truth));
     }
 
+    @Override
+    public Judgement answer(AnswerOf answer) {
+        return judged(() -> JudgedAnswer.of(answer, claim, truth));
+    }
+
     /** A way to a judgement that ends where the claim means nothing. */
     private interface Way {
         Judgement judgement() throws RefusedException;

@@ -1,6 +1,8 @@
 package org.pofk.claim;
 
 import java.util.List;
+import java.util.Map;
+import java.util.concurrent.ConcurrentHashMap;
 import java.util.function.IntFunction;
 import java.util.stream.IntStream;
 import org.pofk.answer.LongRun;
@@ -9,6 +11,7 @@ import org.pofk.chain.Output;
 import org.pofk.exact.Factoring;
 import org.pofk.exact.Polynomial;
 import org.pofk.exact.Rational;
+import org.pofk.exact.RationalField;
 import org.pofk.modes.ClosedForm;
 import org.pofk.modes.KnownPoles;
 import org.pofk.transform.RecurrenceProof;
@@ -35,6 +38,8 @@ public final class OutputTruth {
     private final Kept<LongRun> longRun;
     private final Kept<ClosedForm> closedForm;
     private final Kept<List<TruePole>> poles;
+    private final Kept<OutputTruth> sums = new Kept<>(this::summed);
+    private final Map<Claim.Within, Answer> settled = new ConcurrentHashMap<>();
 
     private OutputTruth(Output output, boolean isOfChain, Kept<Chain> chain, IntFunction<Rational> steps,
             Kept<TransferFunction<Rational>> y, Kept<Transform> transform, Kept<Sequence> sequence,
@@ -129,6 +134,22 @@ public final class OutputTruth {
 
     public ClosedForm closedForm() {
         return closedForm.get();
+    }
+
+    /** S(k) = p(0) + … + p(k): its transform is Y(z) z/(z − 1). */
+    OutputTruth sums() {
+        return sums.get();
+    }
+
+    private OutputTruth summed() {
+        Polynomial<Rational> lessOne = new Polynomial<>(RationalField.Q, List.of(Rational.ONE.negate(), Rational.ONE));
+        return of(output, new TransferFunction<>(y.get().numerator().shiftedUp(1),
+                y.get().denominator().times(lessOne)));
+    }
+
+    /** The least step from which p(k) stays within a distance of its long run for ever. */
+    Answer settledFrom(Claim.Within distance) {
+        return settled.computeIfAbsent(distance, each -> SettledFrom.of(this, each));
     }
 
     public LongRun longRun() {

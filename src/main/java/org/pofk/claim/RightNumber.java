@@ -1,6 +1,7 @@
 package org.pofk.claim;
 
 import java.util.List;
+import java.util.Optional;
 import org.pofk.exact.Rational;
 import org.pofk.formula.Formula;
 import org.pofk.meaning.Decision;
@@ -11,17 +12,21 @@ import org.pofk.meaning.Written;
 final class RightNumber {
     static final int DIGITS = 6;
     private static final int BITS = 64;
+    /** What is longer is read by nobody. */
+    private static final int LONGEST_FRACTION = 60;
 
     private RightNumber() {
     }
 
     /**
-     * A fraction where the number is one and the author writes no decimals, else decimals: as the longest of his, or
+     * A fraction where the number is a short one and the author writes no decimals, else decimals: as the longest of his, or
      * to some digits.
      */
     static String of(Quantity number, List<Written> decimals) {
-        if (number.rational().isPresent() && decimals.isEmpty()) {
-            return number.rational().get().toString();
+        Optional<String> fraction = number.rational().map(Rational::toString)
+                .filter(text -> decimals.isEmpty() && text.length() <= LONGEST_FRACTION);
+        if (fraction.isPresent()) {
+            return fraction.get();
         }
         int digits = decimals.stream().mapToInt(AuthorDigits::significant).max().orElse(DIGITS);
         String real = AuthorDigits.significant(number.realPart(), digits);

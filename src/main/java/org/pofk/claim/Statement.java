@@ -5,7 +5,9 @@ import java.util.Optional;
 import org.pofk.chain.Output;
 
 /** What one claim states: one variant for each kind of step of a derivation. */
-public sealed interface Statement {
+public sealed interface Statement permits Statement.Start, Statement.Matrix, Statement.MatrixPolynomial,
+        Statement.TransformOf, Statement.Poles, Statement.Residues, Statement.PofK, Statement.Pair, Statement.LongRunOf,
+        Statement.Eigenvector, Statement.Value, Statement.Bound, AnswerOf {
 
     <R> R accept(Visitor<R> visitor);
 
@@ -34,6 +36,8 @@ public sealed interface Statement {
         R value(Value value);
 
         R bound(Bound bound);
+
+        R answer(AnswerOf answer);
     }
 
     /** A quantity stated for a state: its place in the chain's states. */

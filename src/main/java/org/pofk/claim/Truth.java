@@ -4,7 +4,9 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
 import java.util.concurrent.ConcurrentHashMap;
+import org.pofk.answer.FirstEntrance;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Output;
 import org.pofk.exact.Polynomial;
@@ -21,6 +23,7 @@ public final class Truth {
     private final Chain chain;
     private final List<List<Rational>> states = new ArrayList<>();
     private final Map<Output, OutputTruth> outputs = new ConcurrentHashMap<>();
+    private final Map<Set<Integer>, FirstEntrance> entrances = new ConcurrentHashMap<>();
     private final KnownPoles poles = new KnownPoles();
     private final Kept<Optional<Polynomial<Rational>>> characteristic;
     private final Kept<Polynomial<Rational>> minimal;
@@ -64,6 +67,16 @@ public final class Truth {
     /** The monic polynomial m of least degree with m(A) = 0. */
     public Polynomial<Rational> minimalPolynomial() {
         return minimal.get();
+    }
+
+    /** The answer to what a claim answers. */
+    public Answer answer(AnswerOf asked) {
+        return Answers.of(asked, this);
+    }
+
+    /** How often and how soon a set of states is entered from each state. */
+    FirstEntrance entrance(Set<Integer> into) {
+        return entrances.computeIfAbsent(into, each -> FirstEntrance.of(chain, each, Set.of()));
     }
 
     KnownPoles poles() {

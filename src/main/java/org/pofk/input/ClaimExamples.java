@@ -19,7 +19,9 @@ final class ClaimExamples {
             case FORMULA -> "is: '0.2 + 0.1*0.45^k', or with 'all' are: {STATE: …, OTHER: …}";
             case PAIR -> "radius: 0.52, angle: 39.7 deg, amplitude: 0.66, phase: -119 deg";
             case LONG_RUN -> "is: 0.0082, is: none, or with 'all' are: {STATE: 0.85, OTHER: 0.15}";
-            case VALUE -> "is: 0.0082";
+            case VALUE, SUM, MEAN -> "is: 0.0082";
+            case SETTLING_STEP -> "is: 12";
+            case MEAN_PASSAGE -> "is: 8.462";
             case BOUND -> "at most: 0.01, or at least: 0.9";
         };
     }

@@ -20,14 +20,16 @@ enum ClaimKind implements Keyword {
     PAIR("pair", Subject.ONE, "radius", "angle", "amplitude", "phase", "within"),
     LONG_RUN("long run", Subject.ONE_OR_ALL, "within", "safe side"),
     EIGENVECTOR("eigenvector", Subject.ALL, "at"),
-    VALUE("value", Subject.ONE, "at", "within", "safe side"),
-    BOUND("bound", Subject.ONE, "at least", "at most", "for");
+    VALUE("value", Subject.ONE, "at", "given", "within", "safe side"),
+    BOUND("bound", Subject.ONE, "at least", "at most", "for"),
+    SETTLING_STEP("settling step", Subject.ONE, "within"),
+    MEAN_PASSAGE("mean passage", Subject.ALL, "into", "from", "given", "within", "safe side"),
+    SUM("sum", Subject.ONE, "from", "to", "within", "safe side"),
+    MEAN("mean", Subject.ONE, "from", "to", "within", "safe side");
 
     /** What a step can be about. */
     enum Subject { ONE, ALL, ONE_OR_ALL }
 
-    /** Kinds that have a name and can't be checked yet. */
-    static final List<String> LATER = List.of("settling step", "mean passage", "sum");
     /** What may stand in a step of any kind. */
     private static final List<String> COMMON = List.of("carried", "where", "note");
     static final List<String> CONTENT = List.of("is", "is-latex", "are");

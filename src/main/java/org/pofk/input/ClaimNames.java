@@ -26,6 +26,11 @@ final class ClaimNames {
         return chain.map(Chain::size);
     }
 
+    /** What the names are those of. */
+    Optional<Chain> chain() {
+        return chain;
+    }
+
     List<Output> everyState() {
         return chain.map(Outputs::states).orElse(List.of());
     }

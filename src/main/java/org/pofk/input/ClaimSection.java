@@ -49,13 +49,6 @@ final class ClaimSection {
     }
 
     private Optional<Claim> read(Node.Mapping mapping, int number) {
-        Optional<Node.Entry> later = mapping.entries().stream()
-                .filter(entry -> ClaimKind.LATER.contains(entry.name())).findFirst();
-        if (later.isPresent()) {
-            reading.fault(later.get().key().position(), "kind-later", "'" + later.get().name()
-                    + "' can't be checked yet; leave this claim out");
-            return Optional.empty();
-        }
         int before = reading.count();
         Fields fields = Fields.of(withoutCutFormulas(mapping), "claim " + number, ClaimKind.keys(), reading);
         boolean hasUnknown = reading.count() > before;
@@ -75,13 +68,15 @@ final class ClaimSection {
         refuseKeysOfOthers(fields, kind);
         Optional<Steps> steps = fields.value("for").flatMap(node -> ClaimedSteps.read(node, reading));
         Optional<Carried> carried = fields.value("carried").flatMap(node -> ReviewSection.carried(node, reading));
-        Optional<Within> within = fields.value("within").flatMap(this::within);
+        Optional<Within> close = fields.value("within").flatMap(this::within);
+        // how close something settles isn't how far off the claim may be
+        Optional<Within> within = kind == ClaimKind.SETTLING_STEP ? Optional.empty() : close;
         Optional<SafeSide> side = fields.value("safe side")
                 .flatMap(node -> reading.keyword(node, "the safe side", Side.values())).map(word -> word.side);
         Optional<String> where = text(fields, "where");
         Optional<String> note = text(fields, "note");
         return subject(fields, kind).flatMap(subject ->
-                StatementSection.read(fields, kind, subject, names, convention, reading)
+                StatementSection.read(fields, kind, subject, close, names, convention, reading)
                         .map(statement -> new Claim(number, kind.word(), subject.name(), statement, where,
                                 steps.orElse(Steps.ALL), carried.or(review::carried), within, side, note,
                                 mapping.position())));

@@ -22,11 +22,11 @@ final class ClaimedSteps {
     private ClaimedSteps() {
     }
 
-    /** A single step, or a fault. */
-    static OptionalLong step(Node node, Reading reading) {
-        Optional<String> text = reading.text(node, "'at'");
+    /** A single step under a key, or a fault. */
+    static OptionalLong step(Node node, String key, Reading reading) {
+        Optional<String> text = reading.text(node, "'" + key + "'");
         if (text.isPresent() && (!text.get().matches("\\d{1,10}") || Long.parseLong(text.get()) > LAST)) {
-            reading.fault(node.position(), "step-unreadable", "'at' is a step, a whole number from 0 to " + LAST
+            reading.fault(node.position(), "step-unreadable", "'" + key + "' is a step, a whole number from 0 to " + LAST
                     + ", not " + node.inWords());
             return OptionalLong.empty();
         }

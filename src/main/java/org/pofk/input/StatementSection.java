@@ -5,9 +5,11 @@ import java.util.List;
 import java.util.Optional;
 import java.util.OptionalLong;
 import java.util.function.BiFunction;
+import java.util.function.Function;
 import java.util.stream.IntStream;
 import org.pofk.chain.Model.Convention;
 import org.pofk.chain.Output;
+import org.pofk.claim.Claim.Within;
 import org.pofk.claim.FormulaText;
 import org.pofk.claim.FormulaText.Notation;
 import org.pofk.claim.Statement;
@@ -27,9 +29,11 @@ final class StatementSection {
     private final Convention convention;
     private final Reading reading;
     private final ClaimFormulas formulas;
+    private final Optional<Within> within;
+    private final AnswerSection answers;
 
-    private StatementSection(Fields fields, ClaimKind kind, Node.Scalar subject, ClaimNames names,
-            Convention convention, Reading reading) {
+    private StatementSection(Fields fields, ClaimKind kind, Node.Scalar subject, Optional<Within> within,
+            ClaimNames names, Convention convention, Reading reading) {
         this.fields = fields;
         this.kind = kind;
         this.subject = subject;
@@ -37,17 +41,20 @@ final class StatementSection {
         this.convention = convention;
         this.reading = reading;
         this.formulas = new ClaimFormulas(names.known(), reading);
+        this.within = within;
+        this.answers = new AnswerSection(fields, kind, subject, names, reading);
     }
 
     /**
      * Reads the statement.
      *
      * @param subject    what it is about, as the file names it
+     * @param within     what the file says under that key
      * @param convention how the author writes matrices
      */
-    static Optional<Statement> read(Fields fields, ClaimKind kind, Node.Scalar subject, ClaimNames names,
-            Convention convention, Reading reading) {
-        StatementSection section = new StatementSection(fields, kind, subject, names, convention, reading);
+    static Optional<Statement> read(Fields fields, ClaimKind kind, Node.Scalar subject, Optional<Within> within,
+            ClaimNames names, Convention convention, Reading reading) {
+        StatementSection section = new StatementSection(fields, kind, subject, within, names, convention, reading);
         int before = reading.faults().count();
         Optional<Statement> statement = section.statement();
         return reading.faults().count() == before ? statement : Optional.empty();
@@ -77,6 +84,9 @@ final class StatementSection {
             case LONG_RUN -> Optional.of(new Statement.LongRunOf(ofOutputs(content, this::longRun)));
             case EIGENVECTOR -> eigenvector(content);
             case VALUE -> value(content);
+            case SETTLING_STEP -> answer(content, is -> answers.settling(is, within));
+            case MEAN_PASSAGE -> answer(content, answers::passage);
+            case SUM, MEAN -> answer(content, answers::overSteps);
             case PAIR, BOUND -> throw new AssertionError(kind + " has no content");
         };
     }
@@ -243,11 +253,19 @@ final class StatementSection {
             reading.fault(subject.position(), "key-missing", "the step of the value is missing: write at: 5");
             return Optional.empty();
         }
-        OptionalLong at = ClaimedSteps.step(fields.value("at").get(), reading);
+        OptionalLong at = ClaimedSteps.step(fields.value("at").get(), "at", reading);
         Optional<FormulaText> formula = formulas.number(content, "a value");
         Optional<Output> output = output();
-        return at.isEmpty() ? Optional.empty() : output.flatMap(known ->
-                formula.map(is -> new Statement.Value(known, at.getAsLong(), is)));
+        if (at.isEmpty() || formula.isEmpty() || output.isEmpty()) {
+            return Optional.empty();
+        }
+        Optional<Node> given = fields.value("given");
+        return given.isEmpty() ? Optional.of(new Statement.Value(output.get(), at.getAsLong(), formula.get()))
+                : answers.conditional(given.get(), output.get(), at.getAsLong(), formula.get());
+    }
+
+    private Optional<Statement> answer(Content content, Function<FormulaText, Optional<Statement>> statement) {
+        return formulas.number(content, "a number").flatMap(statement);
     }
 
     /** The number under a key of its own, in ordinary notation. */

@@ -87,6 +87,16 @@ public final class BlankClaims {
         each();
         byState("long run: all");
         byState("formula: all");
+        if (states().kind() == Chain.Kind.CHAIN) {
+            open("- {mean passage: all, into: " + set() + ", is: " + GAP + "}    # from the start; or from: STATE");
+        }
+    }
+
+    /** A name for a set to put another one in the place of: the last state whose name stands for nothing else. */
+    private String set() {
+        return states().states().stream().filter(name -> !states().sets().containsKey(name)
+                && states().outputs().stream().noneMatch(output -> output.name().equals(name)))
+                .reduce((first, last) -> last).map(Yaml::name).orElse(GAP);
     }
 
     /** A claim with one number, or one formula, for each state. */
@@ -122,7 +132,11 @@ public final class BlankClaims {
                 new Step("{long run: " + of + ", is: " + GAP + "}", "or none, or are: [" + GAP + ", " + GAP
                         + "] for a cycle"),
                 new Step("{value: " + of + ", at: 5, is: " + GAP + "}", "an estimate: within: 2%, safe side: above"),
-                new Step("{bound: " + of + ", at most: " + GAP + "}", "or at least; for: k >= 0")));
+                new Step("{value: " + of + ", given: " + set() + ", at: 5, is: " + GAP + "}", "given that set then"),
+                new Step("{bound: " + of + ", at most: " + GAP + "}", "or at least; for: k >= 0"),
+                new Step("{settling step: " + of + ", within: 1%, is: " + GAP + "}", "of the long run, for ever"),
+                new Step("{sum: " + of + ", to: 12, is: " + GAP + "}", "of k = 0 to 12; from: 1 to begin later"),
+                new Step("{mean: " + of + ", from: 1, to: 12, is: " + GAP + "}", "over these steps, both counted")));
         open("- {pair: " + of + ", radius: " + GAP + ", angle: " + GAP + ", amplitude: " + GAP + ", phase: " + GAP
                 + "}");
     }

@@ -1,6 +1,7 @@
 package org.pofk.report;
 
 import java.util.Arrays;
+import org.pofk.claim.AnswerOf;
 import org.pofk.claim.Claim;
 import org.pofk.claim.Statement;
 
@@ -14,6 +15,9 @@ final class ClaimProse {
         Prose kind = Prose.of(claim.kind());
         if (claim.statement() instanceof Statement.Value value) {
             return kind.and(" of ").andName(claim.of()).and(" at k = " + value.at());
+        }
+        if (claim.statement() instanceof AnswerOf asked) {
+            return kind.and(asked.asked(new AskedProse(claim)));
         }
         if (claim.statement() instanceof Statement.Eigenvector eigenvector) {
             return kind.and(" for ").andName(eigenvector.eigenvalue().text());

@@ -2,6 +2,7 @@ package org.pofk.report;
 
 import java.util.ArrayList;
 import java.util.List;
+import org.pofk.claim.AnswerOf;
 import org.pofk.claim.Claim;
 import org.pofk.claim.FormulaText;
 import org.pofk.claim.Judgement;
@@ -76,7 +77,7 @@ final class FindingBlocks {
     }
 
     private void slip(Slip slip, String label) {
-        blocks.add(new Paragraph(label + slip.kind().inWords() + ", " + place(slip.span())));
+        blocks.add(new Paragraph(label + words(slip.kind()) + ", " + place(slip.span())));
         blocks.add(text.excerpt(slip.span(), finding.claim()));
         if (!slip.found().isBlank()) {
             blocks.add(new Labelled("found", ClaimProse.text(slip.found())));
@@ -87,6 +88,14 @@ final class FindingBlocks {
         if (!finding.together()) {
             blocks.add(new Labelled("corrected", ClaimProse.text(slip.corrected())));
         }
+    }
+
+    /** A number that stands alone is no coefficient. */
+    private String words(SlipKind kind) {
+        Statement statement = finding.claim().statement();
+        boolean isAlone = statement instanceof Statement.Value || statement instanceof Statement.Bound
+                || statement instanceof AnswerOf;
+        return isAlone && kind == SlipKind.WRONG_COEFFICIENT ? "the number is wrong" : kind.inWords();
     }
 
     /** Where no slip says which number is wrong: in their line while they are few, in a table otherwise. */
@@ -119,7 +128,8 @@ final class FindingBlocks {
     /** The right statement, unless a slip or its one number has shown it. */
     private void right() {
         String right = finding.judgement().right();
-        boolean isOneNumber = finding.claim().statement() instanceof Statement.Value
+        Statement statement = finding.claim().statement();
+        boolean isOneNumber = (statement instanceof Statement.Value || statement instanceof AnswerOf)
                 && finding.verdict() == Verdict.WRONG
                 && finding.judgement().numbers().stream().anyMatch(number -> number.fit() == Fit.WRONG);
         boolean isShown = !finding.slips().isEmpty() && !finding.together();

@@ -3,6 +3,7 @@ package org.pofk.report;
 import java.util.List;
 import java.util.Optional;
 import java.util.stream.Stream;
+import org.pofk.claim.AnswerOf;
 import org.pofk.claim.FormulaText;
 import org.pofk.claim.Statement;
 
@@ -75,5 +76,10 @@ final class StatedFormulas implements Statement.Visitor<Stream<FormulaText>> {
     @Override
     public Stream<FormulaText> bound(Statement.Bound bound) {
         return Stream.of(bound.is());
+    }
+
+    @Override
+    public Stream<FormulaText> answer(AnswerOf answer) {
+        return Stream.of(answer.is());
     }
 }

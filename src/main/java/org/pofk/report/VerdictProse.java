@@ -67,10 +67,14 @@ final class VerdictProse {
 
     /** {@code within 2 %, above the true value}. */
     static String claimed(Within within, Claim claim) {
-        String amount = within.relative() ? Decimals.of(within.amount().times(HUNDRED), PLACES).text() + " %"
-                : Decimals.of(within.amount(), PLACES).text();
-        return "within " + amount + claim.safeSide().map(side -> side == SafeSide.ABOVE
+        return amount(within) + claim.safeSide().map(side -> side == SafeSide.ABOVE
                 ? ", not below the true value" : ", not above the true value").orElse("");
+    }
+
+    /** {@code within 2 %}. */
+    static String amount(Within within) {
+        return "within " + (within.relative() ? Decimals.of(within.amount().times(HUNDRED), PLACES).text() + " %"
+                : Decimals.of(within.amount(), PLACES).text());
     }
 
     /** {@code 2.1e-4, at k = 2}; a relative error in per cent; nothing for what is exact. */

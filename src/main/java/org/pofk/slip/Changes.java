@@ -8,6 +8,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.TreeMap;
+import org.pofk.claim.AnswerOf;
 import org.pofk.claim.AuthorText;
 import org.pofk.claim.AuthorText.Replacement;
 import org.pofk.claim.Claim;
@@ -107,6 +108,8 @@ final class Changes {
             String name = parts.get(part).name();
             edits.addAll(name.equals("amplitude") ? new WaveEdits(text).ofAmplitude()
                     : name.equals("radius") ? List.of() : new WaveEdits(text).ofAngle());
+        } else if (claim.statement() instanceof AnswerOf asked) {
+            edits.addAll(new AnswerEdits(text).of(asked));
         } else if (!(claim.statement() instanceof Statement.Poles)) {
             edits.add(complement(text));
         }
@@ -118,7 +121,7 @@ final class Changes {
         return digits.significant() == 0 ? 0 : Math.max(LEAST_DIGITS, digits.significant());
     }
 
-    private static Edit complement(AuthorText text) {
+    static Edit complement(AuthorText text) {
         String found = text.text();
         String right = Digits.isNumber(found)
                 ? BigDecimal.ONE.subtract(new BigDecimal(found)).toPlainString()

@@ -11,6 +11,7 @@ import org.pofk.chain.Model;
 import org.pofk.chain.Output;
 import org.pofk.chain.Outputs;
 import org.pofk.chain.SparseMatrix;
+import org.pofk.claim.AnswerOf;
 import org.pofk.claim.AuthorText;
 import org.pofk.claim.Claim;
 import org.pofk.claim.Statement;
@@ -198,6 +199,11 @@ record Implied(int from, Function<Claim, Optional<Claim>> seen, Supplier<Truth> 
 
         @Override
         public List<Step> bound(Statement.Bound bound) {
+            return List.of();
+        }
+
+        @Override
+        public List<Step> answer(AnswerOf answer) {
             return List.of();
         }
     }

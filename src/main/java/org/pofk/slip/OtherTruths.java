@@ -12,6 +12,7 @@ import org.pofk.chain.Chain;
 import org.pofk.chain.Output;
 import org.pofk.chain.Outputs;
 import org.pofk.chain.SparseMatrix;
+import org.pofk.claim.AnswerOf;
 import org.pofk.claim.Claim;
 import org.pofk.claim.Statement;
 import org.pofk.claim.Truth;
@@ -39,7 +40,8 @@ final class OtherTruths {
         List<Candidate> candidates = new ArrayList<>();
         Span place = place(claim.statement());
         Supplier<String> corrected = () -> right;
-        boolean atStep = claim.statement() instanceof Statement.Value;
+        // these have steps of their own that may be shifted
+        boolean atStep = claim.statement() instanceof Statement.Value || claim.statement() instanceof AnswerOf;
         for (OtherChain other : known.others()) {
             boolean isLeftOut = contradicted.contains(other.kind()) || atStep && other.kind() == SlipKind.INDEX_SHIFTED;
             if (!isLeftOut) {
@@ -58,6 +60,10 @@ final class OtherTruths {
         }
         if (claim.statement() instanceof Statement.LongRunOf longRun) {
             candidates.addAll(ofCycle(claim, longRun, place, corrected));
+        }
+        if (claim.statement() instanceof AnswerOf asked) {
+            OtherAnswers.of(asked, truth.chain()).forEach(other -> candidates.add(new Candidate(other.kind(), place,
+                    other.found(), other.right(), corrected, Candidate.with(claim, other.statement()), () -> truth)));
         }
         if (claim.statement() instanceof Statement.Value value) {
             for (long at : new long[] {value.at() - 1, value.at() + 1}) {

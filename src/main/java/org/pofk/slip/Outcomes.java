@@ -4,6 +4,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.function.UnaryOperator;
 import org.pofk.chain.Output;
+import org.pofk.claim.AnswerOf;
 import org.pofk.claim.Statement;
 
 /** The one output a statement is about, and the same statement about another. */
@@ -87,6 +88,11 @@ final class Outcomes {
         public List<Output> bound(Statement.Bound bound) {
             return List.of(bound.output());
         }
+
+        @Override
+        public List<Output> answer(AnswerOf answer) {
+            return answer.asked(new AnswerOutputs.Named());
+        }
     }
 
     private record Changed(UnaryOperator<Output> change) implements Statement.Visitor<Statement> {
@@ -151,6 +157,11 @@ final class Outcomes {
         @Override
         public Statement bound(Statement.Bound bound) {
             return new Statement.Bound(change.apply(bound.output()), bound.direction(), bound.is());
+        }
+
+        @Override
+        public Statement answer(AnswerOf answer) {
+            return answer.asked(new AnswerOutputs.Changed(change));
         }
     }
 }

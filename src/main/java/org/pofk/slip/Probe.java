@@ -3,6 +3,7 @@ package org.pofk.slip;
 import java.util.List;
 import java.util.Optional;
 import java.util.stream.LongStream;
+import org.pofk.claim.AnswerOf;
 import org.pofk.claim.Claim;
 import org.pofk.claim.FormulaText;
 import org.pofk.claim.OutputTruth;
@@ -50,7 +51,8 @@ record Probe(String variable, List<Rational> points, List<Rational> right, Preci
                     precision));
         }
         boolean placed = claim.statement() instanceof Statement.Start || claim.statement() instanceof Statement.Matrix
-                || claim.statement() instanceof Statement.LongRunOf || claim.statement() instanceof Statement.Value;
+                || claim.statement() instanceof Statement.LongRunOf || claim.statement() instanceof Statement.Value
+                || claim.statement() instanceof AnswerOf;
         List<TrueNumber> right = placed
                 ? TrueNumbers.of(claim.statement(), part, FormulaSurvey.Role.COEFFICIENT, truth) : List.of();
         return right.size() == 1 ? right.get(0).rational().map(number ->

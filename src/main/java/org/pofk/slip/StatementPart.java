@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.Function;
+import org.pofk.claim.AnswerOf;
 import org.pofk.claim.FormulaText;
 import org.pofk.claim.Statement;
 
@@ -133,6 +134,11 @@ record StatementPart(FormulaText text, String name, Function<FormulaText, Statem
         public List<StatementPart> bound(Statement.Bound bound) {
             return List.of(new StatementPart(bound.is(), "",
                     text -> new Statement.Bound(bound.output(), bound.direction(), text)));
+        }
+
+        @Override
+        public List<StatementPart> answer(AnswerOf answer) {
+            return List.of(new StatementPart(answer.is(), "", answer::stating));
         }
 
         private interface Replacing<T> {

@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Optional;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
+import org.pofk.claim.AnswerOf;
 import org.pofk.claim.FormulaText;
 import org.pofk.claim.OutputTruth;
 import org.pofk.claim.Statement;
@@ -203,6 +204,11 @@ final class TrueNumbers {
         @Override
         public List<TrueNumber> bound(Statement.Bound bound) {
             return List.of();
+        }
+
+        @Override
+        public List<TrueNumber> answer(AnswerOf answer) {
+            return truth.answer(answer).exact().map(TrueNumber::of).stream().toList();
         }
 
         /** Real and imaginary parts, for an author who writes them. */
