@@ -19,13 +19,20 @@ final class ModeValues {
     private static final int WANTED_BITS = 64;
 
     private final List<Mode> modes;
+    private final Rational unit;
 
-    private ModeValues(List<Mode> modes) {
+    private ModeValues(List<Mode> modes, Rational unit) {
         this.modes = modes;
+        this.unit = unit;
     }
 
     static ModeValues of(ClosedForm closedForm) {
-        return new ModeValues(closedForm.modes());
+        return new ModeValues(closedForm.modes(), Rational.ONE);
+    }
+
+    /** The same over the k-th power of a positive number. */
+    ModeValues inUnitsOf(Rational positive) {
+        return new ModeValues(modes, positive);
     }
 
     /** No sum at k = 0, 1, … is farther than this from the value in that place. */
@@ -58,17 +65,17 @@ final class ModeValues {
     private Ball sum(int k, int bits) {
         Ball sum = Ball.of(Rational.ZERO, bits);
         for (Mode mode : modes) {
-            sum = sum.plus(mode.accept(new AtStep(k, bits)));
+            sum = sum.plus(mode.accept(new AtStep(k, unit, bits)));
         }
         return sum;
     }
 
     /** A mode's value at k. */
-    private record AtStep(int k, int bits) implements Mode.Visitor<Ball> {
+    private record AtStep(int k, Rational unit, int bits) implements Mode.Visitor<Ball> {
 
         @Override
         public Ball impulse(Mode.Impulse impulse) {
-            return k == impulse.at() ? ball(impulse.value()) : Ball.of(Rational.ZERO, bits);
+            return k == impulse.at() ? ball(impulse.value()).times(Ball.of(unit.pow(-k), bits)) : Ball.of(Rational.ZERO, bits);
         }
 
         @Override
@@ -76,7 +83,7 @@ final class ModeValues {
             return k < geometric.power()
                     ? Ball.of(Rational.ZERO, bits)
                     : ball(geometric.coefficient()).times(binomial(geometric.power()))
-                            .times(ball(geometric.base()).pow(k - geometric.power()));
+                            .times(power(geometric.base(), k - geometric.power()));
         }
 
         @Override
@@ -85,8 +92,15 @@ final class ModeValues {
             return steps < 0
                     ? Ball.of(Rational.ZERO, bits)
                     : ball(oscillating.amplitude()).times(binomial(oscillating.power()))
-                            .times(ball(oscillating.modulus()).pow(steps))
+                            .times(power(oscillating.modulus(), steps))
                             .times(ball(oscillating.angle()).times(steps).plus(ball(oscillating.phase())).cos());
+        }
+
+        /** base^steps over unit^k. */
+        private Ball power(RealValue base, int steps) {
+            return unit.isOne() ? ball(base).pow(steps)
+                    : ball(base).times(Ball.of(unit.inverse(), bits)).pow(steps)
+                            .times(Ball.of(unit.pow(steps - k), bits));
         }
 
         private Ball ball(RealValue value) {

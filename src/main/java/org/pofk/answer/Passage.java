@@ -15,6 +15,7 @@ import org.pofk.exact.Rational;
  * @param law          f(k) = P(T = k), with what it stands on
  * @param distribution F(k) = P(T ≤ k)
  * @param survival     P(T > k), "not yet"
+ * @param happening    law and distribution given that the set is entered, where that is neither certain nor impossible
  * @param moments      of T, given that the set is entered
  * @param settling     how P(T > k) approaches what it tends to: its slowest mode is the rate of decay in the long run
  * @param percentiles  of T, those asked for
@@ -24,8 +25,12 @@ import org.pofk.exact.Rational;
  * @param visits       the expected number of steps k ≥ 0 spent in the set; empty where that is infinite
  */
 public record Passage(List<Integer> into, List<Integer> avoiding, DerivedOutput law, DerivedOutput distribution,
-        DerivedOutput survival, PassageMoments moments, Optional<Settling> settling, List<Percentile> percentiles,
+        DerivedOutput survival, Optional<Happening> happening, PassageMoments moments, Optional<Settling> settling, List<Percentile> percentiles,
         List<Hazard> hazards, FirstEntrance fromEach, Optional<Return> returns, Optional<Rational> visits) {
+
+    /** f(k) and F(k) over the probability that T is finite. */
+    public record Happening(DerivedOutput law, DerivedOutput distribution) {
+    }
 
     /** P(T = k | T ≥ k); empty where T ≥ k has probability zero. */
     public record Hazard(int k, Optional<Rational> value) {

@@ -31,7 +31,13 @@ final class PassageAnalysis {
     }
 
     Passage passage(List<Rational> percentiles, List<Integer> steps) {
-        List<Output> outputs = List.of(stopped.law(), stopped.distribution(), stopped.survival());
+        FirstEntrance fromEach = FirstEntrance.of(chain, into, avoiding);
+        List<Output> outputs = new ArrayList<>(List.of(stopped.law(), stopped.distribution(), stopped.survival()));
+        Rational ever = ever(fromEach);
+        if (!ever.isZero() && !ever.isOne()) {
+            outputs.add(over(stopped.law(), ever, "P(T = k | T < ∞)"));
+            outputs.add(over(stopped.distribution(), ever, "P(T ≤ k | T < ∞)"));
+        }
         List<Transform> transforms = Transforms.of(stopped.chain(), outputs);
         KnownPoles poles = new KnownPoles(() -> Eigenvalues.guesses(stopped.chain().matrix()));
         LongRunChecks.Ground ground = LongRunChecks.Ground.of(stopped.chain());
@@ -43,10 +49,22 @@ final class PassageAnalysis {
                 .toList();
         PassageMoments moments = PassageMoments.of(transforms.get(0).y());
         Percentile.Finder finder = new Percentile.Finder(stopped.chain(), forms.get(1), moments.probability());
-        FirstEntrance fromEach = FirstEntrance.of(chain, into, avoiding);
-        return new Passage(sorted(into), sorted(avoiding), derived.get(0), derived.get(1), derived.get(2), moments,
+        return new Passage(sorted(into), sorted(avoiding), derived.get(0), derived.get(1), derived.get(2),
+                derived.size() > 3 ? Optional.of(new Passage.Happening(derived.get(3), derived.get(4)))
+                        : Optional.empty(), moments,
                 Settling.of(forms.get(2), derived.get(2).longRun().orElseThrow().byPoles(), SETTLED_DIGITS),
                 percentiles.stream().map(finder::of).toList(), hazards(steps), fromEach, returns(fromEach), visits());
+    }
+
+    private Rational ever(FirstEntrance fromEach) {
+        return IntStream.range(0, chain.size())
+                .mapToObj(i -> chain.start().get(i).times(fromEach.probabilities().get(i)))
+                .reduce(Rational.ZERO, Rational::plus);
+    }
+
+    private static Output over(Output output, Rational probability, String definition) {
+        return new Output(output.name() + " given that it happens", output.coefficients().stream()
+                .map(weight -> weight.dividedBy(probability)).toList(), Rational.ZERO, definition);
     }
 
     private static List<Integer> sorted(Set<Integer> states) {

@@ -56,4 +56,10 @@ public record Model(String title, Step step, Convention convention, About about,
         written = List.copyOf(written);
         tables = List.copyOf(tables);
     }
+
+    /** The same model with another chain. */
+    public Model with(Chain other) {
+        return new Model(title, step, convention, about, other, schedule, parameters, notes, changes, written, origin,
+                tables);
+    }
 }

@@ -17,8 +17,13 @@ final class AskedOutputs {
         if (names.isEmpty()) {
             return Outputs.byDefault(chain);
         }
+        return of(chain, names, "--of");
+    }
+
+    /** Those named under an option. */
+    static List<Output> of(Chain chain, List<String> names, String option) throws UsageException {
         try {
-            return Outputs.named(chain, names, Position.ofWhole("--of"));
+            return Outputs.named(chain, names, Position.ofWhole(option));
         } catch (RefusedException unknown) {
             throw new UsageException(unknown.getMessage());
         }

@@ -5,18 +5,25 @@ import java.util.EnumSet;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
+import org.pofk.answer.ConditionalModel;
 import org.pofk.answer.DerivedModel;
 import org.pofk.answer.DerivedOutput;
 import org.pofk.answer.Deriving;
+import org.pofk.answer.Given;
 import org.pofk.answer.InspectedModel;
+import org.pofk.answer.Known;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
+import org.pofk.report.ConditionalDocument;
+import org.pofk.report.ConditionalJson;
+import org.pofk.report.ConditionalTable;
 import org.pofk.report.CsvWriter;
 import org.pofk.report.DerivationDocument;
 import org.pofk.report.DerivationJson;
 import org.pofk.report.DerivationTable;
 import org.pofk.report.Document;
+import org.pofk.report.GivenProse;
 import org.pofk.report.NotebookWriter;
 import org.pofk.report.StructureDocument;
 import org.pofk.report.StructureJson;
@@ -49,6 +56,9 @@ final class DeriveCommand implements Work {
     @Option(names = "--second-opinion", description = "asks a general algebra system whether it agrees")
     private boolean secondOpinion;
 
+    @Mixin
+    private GivenOptions given = new GivenOptions();
+
     /** How much is shown. */
     enum Part {
         RESULT, DERIVATION, ALL;
@@ -64,18 +74,31 @@ final class DeriveCommand implements Work {
         Style style = options.style();
         Destination destination = options.destination();
         Model read = options.model();
+        Optional<Integer> step = given.at();
+        if (given.isAsked() && step.isEmpty()) {
+            return conditional(read, style, destination, streams);
+        }
+        if (step.isEmpty()) {
+            return derive(read, Optional.empty(), style, destination, streams);
+        }
+        Optional<Known> known = given.known(read, step.get());
+        return known.isEmpty() ? given.nothing(read, step.get(), CommandName.DERIVE, destination, streams)
+                : derive(known.get().model(), known, style, destination, streams);
+    }
+
+    private ExitCode derive(Model read, Optional<Known> known, Style style, Destination destination, Streams streams)
+            throws RefusedException, UsageException, WritingException {
         if (isTooLargeForAll(read.chain())) {
             return askedForOutputs(read, style, destination, streams);
         }
         List<Output> outputs = AskedOutputs.of(read.chain(), of);
         Worker.Outcome<DerivedModel> outcome = options.within(streams, DeriveCommand::soFar, published ->
-                Deriving.of(read, outputs, destination.steps(at), extras(read, destination),
-                        published));
+                Deriving.of(read, outputs, destination.steps(at), extras(read, destination), published));
         if (outcome.published().isEmpty()) {
             return options.undecided(streams);
         }
         DerivedModel derived = outcome.published().get();
-        destination.write(answer(derived, style), streams);
+        destination.write(answer(derived, known, style), streams);
         return derived.isDecided() && outcome.finished() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
     }
 
@@ -84,9 +107,29 @@ final class DeriveCommand implements Work {
         return found + " of " + derived.outputs().size() + " outputs derived";
     }
 
-    private Answer answer(DerivedModel derived, Style style) {
-        return Answer.of(() -> document(derived, style))
-                .with(Format.JSON, () -> DerivationJson.write(derived, style.digits()))
+    private ExitCode conditional(Model read, Style style, Destination destination, Streams streams)
+            throws RefusedException, UsageException, WritingException {
+        if (destination.takes(Format.NOTEBOOK) || show != Part.RESULT || secondOpinion) {
+            throw new UsageException("with --given at k itself derive shows its result, without the way"
+                    + " to it; with --given-at STEP everything is there");
+        }
+        Given what = given.given(read.chain());
+        List<Output> outputs = AskedOutputs.of(read.chain(), of);
+        Worker.Outcome<ConditionalModel> outcome = options.within(streams, published ->
+                ConditionalModel.of(read, what, outputs, destination.steps(at), published));
+        if (outcome.published().isEmpty()) {
+            return options.undecided(streams);
+        }
+        ConditionalModel found = outcome.published().get();
+        destination.write(Answer.of(() -> ConditionalDocument.of(found, style))
+                .with(Format.JSON, () -> ConditionalJson.write(found, style.digits()))
+                .with(Format.CSV, () -> CsvWriter.write(ConditionalTable.of(found, style.digits()))), streams);
+        return found.isDecided() && outcome.finished() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
+    }
+
+    private Answer answer(DerivedModel derived, Optional<Known> known, Style style) {
+        return Answer.of(() -> GivenProse.in(document(derived, style), known, style))
+                .with(Format.JSON, () -> DerivationJson.write(derived, known, style.digits()))
                 .with(Format.CSV, () -> CsvWriter.write(DerivationTable.of(derived, style.digits())))
                 .with(Format.NOTEBOOK, () -> NotebookWriter.write(derived, style,
                         options.convention(derived.model())));

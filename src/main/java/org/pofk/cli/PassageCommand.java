@@ -2,10 +2,13 @@ package org.pofk.cli;
 
 import java.util.Optional;
 import java.util.function.Supplier;
+import org.pofk.answer.Given;
+import org.pofk.answer.Known;
 import org.pofk.answer.Passage;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
 import org.pofk.report.CsvWriter;
+import org.pofk.report.GivenProse;
 import org.pofk.report.PassageDocument;
 import org.pofk.report.PassageJson;
 import org.pofk.report.PassageTable;
@@ -29,6 +32,9 @@ final class PassageCommand implements Work {
             description = "also gives law, distribution and hazard at these steps, like 0..20,100")
     private Optional<StepList> at = Optional.empty();
 
+    @Mixin
+    private GivenOptions given = new GivenOptions();
+
     @Override
     public ExitCode run(Streams streams) throws RefusedException, UsageException, WritingException {
         Style style = options.style();
@@ -37,15 +43,28 @@ final class PassageCommand implements Work {
             throw new UsageException("what is to be entered? Name a state or set with --into NAME");
         }
         Model read = options.model();
-        Chain chain = passage.started(read.chain());
-        Supplier<Passage> work = passage.work(chain, destination.steps(at));
+        Model started = read.with(passage.started(read.chain()));
+        Optional<Integer> step = given.at();
+        if (step.isEmpty()) {
+            Optional<Given> atTheEnd = given.isAsked() ? Optional.of(given.given(started.chain())) : Optional.empty();
+            return passage(read, started.chain(), Optional.empty(), atTheEnd, style, destination, streams);
+        }
+        Optional<Known> known = given.known(started, step.get());
+        return known.isEmpty() ? given.nothing(started, step.get(), CommandName.PASSAGE, destination, streams)
+                : passage(known.get().model(), known.get().model().chain(), known, Optional.empty(), style,
+                        destination, streams);
+    }
+
+    private ExitCode passage(Model read, Chain chain, Optional<Known> known, Optional<Given> atTheEnd, Style style,
+            Destination destination, Streams streams) throws RefusedException, UsageException, WritingException {
+        Supplier<Passage> work = passage.work(chain, atTheEnd, destination.steps(at));
         Worker.Outcome<Passage> outcome = options.within(streams, published -> published.accept(work.get()));
         if (outcome.published().isEmpty()) {
             return options.undecided(streams);
         }
         Passage found = outcome.published().get();
-        destination.write(Answer.of(() -> PassageDocument.of(read, chain, found, style))
-                .with(Format.JSON, () -> PassageJson.write(read, chain, found, style.digits()))
+        destination.write(Answer.of(() -> GivenProse.in(PassageDocument.of(read, chain, found, style), known, style))
+                .with(Format.JSON, () -> PassageJson.write(read, chain, known, found, style.digits()))
                 .with(Format.CSV, () -> CsvWriter.write(PassageTable.of(read, chain, found, style.digits()))), streams);
         return ExitCode.ANSWERED;
     }

@@ -6,6 +6,7 @@ import java.util.Optional;
 import java.util.Set;
 import java.util.TreeSet;
 import java.util.function.Supplier;
+import org.pofk.answer.Given;
 import org.pofk.answer.Passage;
 import org.pofk.chain.Chain;
 import org.pofk.exact.Rational;
@@ -44,9 +45,24 @@ final class PassageOptions {
 
     /** Finds the passage, of a chain that is started, at these steps; what was typed is checked before. */
     Supplier<Passage> work(Chain chain, List<Integer> at) throws UsageException {
+        return work(chain, Optional.empty(), at);
+    }
+
+    /** The same given what is known when it ends: what else is entered then ends the wait without success. */
+    Supplier<Passage> work(Chain chain, Optional<Given> atTheEnd, List<Integer> at) throws UsageException {
         Set<Integer> target = states(chain, into, "--into");
         Set<Integer> avoided = states(chain, avoiding, "--avoiding");
         requireApart(chain, target, avoided);
+        if (atTheEnd.isPresent()) {
+            avoided.addAll(target);
+            avoided.addAll(atTheEnd.get().never());
+            target.retainAll(atTheEnd.get().in());
+            avoided.removeAll(target);
+            if (target.isEmpty()) {
+                throw new UsageException("--given: none of the states under --into is one of those known to be"
+                        + " entered, so that has probability zero and nothing is defined given it");
+            }
+        }
         List<Rational> shares = shares();
         return () -> Passage.of(chain, target, avoided, shares, at);
     }

@@ -2,10 +2,13 @@ package org.pofk.cli;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
+import org.pofk.answer.Known;
 import org.pofk.answer.WhenModel;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
 import org.pofk.report.CsvWriter;
+import org.pofk.report.GivenProse;
 import org.pofk.report.Style;
 import org.pofk.report.WhenDocument;
 import org.pofk.report.WhenJson;
@@ -28,12 +31,29 @@ final class WhenCommand implements Work {
     @Mixin
     private ConditionOptions conditions = new ConditionOptions();
 
+    @Mixin
+    private GivenOptions given = new GivenOptions();
+
     @Override
     public ExitCode run(Streams streams) throws RefusedException, UsageException, WritingException {
         Style style = options.style();
         Destination destination = options.destination();
         WhenModel.Asked asked = asked();
         Model read = options.model();
+        Optional<Integer> step = given.at();
+        if (given.isAsked() && step.isEmpty()) {
+            throw new UsageException("say with --given-at STEP when that is known");
+        }
+        if (step.isEmpty()) {
+            return when(read, Optional.empty(), asked, style, destination, streams);
+        }
+        Optional<Known> known = given.known(read, step.get());
+        return known.isEmpty() ? given.nothing(read, step.get(), CommandName.WHEN, destination, streams)
+                : when(known.get().model(), known, asked, style, destination, streams);
+    }
+
+    private ExitCode when(Model read, Optional<Known> known, WhenModel.Asked asked, Style style,
+            Destination destination, Streams streams) throws RefusedException, UsageException, WritingException {
         List<Output> outputs = AskedOutputs.of(read.chain(), of);
         if (destination.takes(Format.JSON) && outputs.size() != 1) {
             throw new UsageException("as JSON one output is answered at a time; name it with --of");
@@ -45,8 +65,8 @@ final class WhenCommand implements Work {
             return options.undecided(streams);
         }
         WhenModel found = outcome.published().get();
-        destination.write(Answer.of(() -> WhenDocument.of(found, style))
-                .with(Format.JSON, () -> WhenJson.write(read, found.answers().get(0), style.digits()))
+        destination.write(Answer.of(() -> GivenProse.in(WhenDocument.of(found, style), known, style))
+                .with(Format.JSON, () -> WhenJson.write(read, known, found.answers().get(0), style.digits()))
                 .with(Format.CSV, () -> CsvWriter.write(WhenTable.of(found, style.digits()))), streams);
         return found.isDecided() && outcome.finished() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
     }

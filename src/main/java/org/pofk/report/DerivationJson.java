@@ -1,6 +1,8 @@
 package org.pofk.report;
 
+import java.util.Optional;
 import org.pofk.answer.DerivedModel;
+import org.pofk.answer.Known;
 
 /** What {@code derive} found, as JSON: format {@code pofk-result}. */
 public final class DerivationJson {
@@ -14,11 +16,17 @@ public final class DerivationJson {
 
     /** The text; {@code digits} are the significant digits of decimals. */
     public static String write(DerivedModel derived, int digits) {
-        return Json.ofObject(json -> new DerivationJson(json, digits).fields(derived));
+        return write(derived, Optional.empty(), digits);
     }
 
-    private void fields(DerivedModel derived) {
+    /** The same, with what is known of the start. */
+    public static String write(DerivedModel derived, Optional<Known> known, int digits) {
+        return Json.ofObject(json -> new DerivationJson(json, digits).fields(derived, known));
+    }
+
+    private void fields(DerivedModel derived, Optional<Known> known) {
         JsonHead.write(json, "pofk-result", "derive", derived.model());
+        new JsonGiven(json).write(known);
         json.list("outputs", derived.outputs(), new JsonOutput(json, digits)::write);
         JsonModes modes = new JsonModes(json, new JsonNumbers(json, digits));
         json.optional("state", derived.state(), state ->

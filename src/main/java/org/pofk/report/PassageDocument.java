@@ -83,6 +83,10 @@ public final class PassageDocument {
         formula("Law", "P(T = k)", passage.law());
         formula("Distribution", "P(T ≤ k)", passage.distribution());
         formula("Survival", "P(T > k)", passage.survival());
+        passage.happening().ifPresent(happening -> {
+            formula("Law, given that it happens", "P(T = k | T < ∞)", happening.law());
+            formula("Distribution, given that it happens", "P(T ≤ k | T < ∞)", happening.distribution());
+        });
         values();
         if (chain.size() <= STATES_AT_MOST) {
             fromEach();

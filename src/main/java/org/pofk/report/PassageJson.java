@@ -3,6 +3,7 @@ package org.pofk.report;
 import java.util.Locale;
 import java.util.Optional;
 import java.util.stream.IntStream;
+import org.pofk.answer.Known;
 import org.pofk.answer.Passage;
 import org.pofk.answer.PassageMoments;
 import org.pofk.answer.Percentile;
@@ -21,18 +22,20 @@ public final class PassageJson {
     }
 
     /** @param chain with the start that was asked about; {@code digits} are the significant digits of decimals */
-    public static String write(Model model, Chain chain, Passage passage, int digits) {
-        return Json.ofObject(json -> new PassageJson(json, digits).fields(model, chain, passage));
+    public static String write(Model model, Chain chain, Optional<Known> known, Passage passage,
+            int digits) {
+        return Json.ofObject(json -> new PassageJson(json, digits).fields(model, chain, known, passage));
     }
 
-    private void fields(Model model, Chain chain, Passage passage) {
+    private void fields(Model model, Chain chain, Optional<Known> known, Passage passage) {
         JsonHead.write(json, "pofk-passage", "passage", model);
+        new JsonGiven(json).write(known);
         json.texts("into", passage.into().stream().map(chain.states()::get).toList());
         json.texts("avoiding", passage.avoiding().stream().map(chain.states()::get).toList());
         json.object("from", () -> IntStream.range(0, chain.size()).filter(i -> !chain.start().get(i).isZero())
                 .forEach(i -> json.text(chain.states().get(i), chain.start().get(i).toString())));
         json.text("word", "exact");
-        moments(passage.moments());
+        moments(passage);
         json.optional("return", passage.returns(), back -> json.object(() -> {
             json.text("probability", back.probability().toString());
             json.text("mean", back.mean().map(Rational::toString));
@@ -55,7 +58,8 @@ public final class PassageJson {
     }
 
     /** Mean and variance of T; null where T may be infinite, with those given that it isn't. */
-    private void moments(PassageMoments moments) {
+    private void moments(Passage passage) {
+        PassageMoments moments = passage.moments();
         Optional<PassageMoments> certain = Optional.of(moments).filter(PassageMoments::isCertain);
         json.text("probability", moments.probability().toString());
         json.text("mean", certain.flatMap(PassageMoments::mean).map(Rational::toString));
@@ -65,6 +69,8 @@ public final class PassageJson {
         json.object("givenThatItHappens", () -> {
             json.text("mean", moments.mean().map(Rational::toString));
             json.text("variance", moments.variance().map(Rational::toString));
+            json.optional("law", passage.happening(), happening -> outputs.write(happening.law()));
+            json.optional("distribution", passage.happening(), happening -> outputs.write(happening.distribution()));
         });
     }
 

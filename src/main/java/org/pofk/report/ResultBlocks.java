@@ -41,12 +41,19 @@ final class ResultBlocks {
 
     static List<Block> of(DerivedOutput output, Style style) {
         ResultBlocks result = new ResultBlocks(output, OutputProse.atStep(output.output()), style);
-        result.write();
+        result.write(new Heading(2, OutputProse.title(output.output())));
         return result.blocks;
     }
 
-    private void write() {
-        blocks.add(new Heading(2, OutputProse.title(output.output())));
+    /** The same under another heading, with what the formula is called. */
+    static List<Block> of(DerivedOutput output, Heading heading, Prose left, Style style) {
+        ResultBlocks result = new ResultBlocks(output, left, style);
+        result.write(heading);
+        return result.blocks;
+    }
+
+    private void write(Heading heading) {
+        blocks.add(heading);
         output.closedForm().ifPresent(this::formulas);
         output.transform().ifPresent(this::holds);
         output.longRun().ifPresent(this::longRun);

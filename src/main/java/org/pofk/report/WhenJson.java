@@ -2,6 +2,7 @@ package org.pofk.report;
 
 import java.util.Locale;
 import java.util.Optional;
+import org.pofk.answer.Known;
 import org.pofk.answer.When;
 import org.pofk.answer.WhenModel;
 import org.pofk.chain.Model;
@@ -17,13 +18,14 @@ public final class WhenJson {
     }
 
     /** The text for one answer; {@code digits} are the significant digits of decimals. */
-    public static String write(Model model, WhenModel.Answer answer, int digits) {
-        return Json.ofObject(json -> new WhenJson(json, digits).fields(model, answer));
+    public static String write(Model model, Optional<Known> known, WhenModel.Answer answer, int digits) {
+        return Json.ofObject(json -> new WhenJson(json, digits).fields(model, known, answer));
     }
 
-    private void fields(Model model, WhenModel.Answer answer) {
+    private void fields(Model model, Optional<Known> known, WhenModel.Answer answer) {
         When when = answer.when();
         JsonHead.write(json, "pofk-when", "when", model);
+        new JsonGiven(json).write(known);
         json.text("output", answer.output().name());
         json.text("word", when.decided() ? "exact" : "undecided");
         json.object("condition", () -> {

@@ -91,6 +91,32 @@ class SchemaTest {
         }
     }
 
+    /** By what is known: at k itself with the quotient's own schema, at a step with that of the question. */
+    @ParameterizedTest
+    @ValueSource(strings = {"pump-pair", "valve-rotation", "kiln-campaign", "relined-main"})
+    void answersGivenWhatIsKnownKeepTheirSchema(String pattern) throws Exception {
+        Path file = Path.of("test-data", "models", pattern + ".yaml");
+        Chain chain = Pofk.read(file).chain();
+        String last = chain.states().get(chain.size() - 1);
+        String output = Outputs.byDefault(chain).get(0).name();
+        for (String option : List.of("--given", "--given-never")) {
+            assertKeeps("conditional", "derive", file, "--of", output, option, last, "--at", "0..3,1000000");
+        }
+        assertKeeps("conditional", "derive", file, "--of", output, "--given", last, "--given-never", last,
+                "--given-at", "4");
+        assertKeeps("result", "derive", file, "--of", output, "--given-at", "2", "--given-never", last);
+        assertKeeps("when", "when", file, "--of", output, "--given-at", "2", "--given-never", last, "--at-least", "9");
+        assertKeeps("passage", "passage", file, "--into", last, "--given-at", "2", "--given-never", last);
+    }
+
+    private static void assertKeeps(String schema, String command, Path file, String... options) throws Exception {
+        List<String> arguments = new java.util.ArrayList<>(List.of(command, file.toString(), "--as", "json"));
+        arguments.addAll(List.of(options));
+        Run run = Run.of(arguments.toArray(String[]::new));
+        assertEquals(0, run.exitCode(), run.notes());
+        assertEquals(Set.of(), schema(schema).validate(MAPPER.readTree(run.answer())), () -> arguments + "");
+    }
+
     @ParameterizedTest
     @ValueSource(strings = {"pump-pair", "right"})
     void verdictsKeepTheirSchema(String claims) throws Exception {
@@ -114,7 +140,7 @@ class SchemaTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"result", "structure", "simulation", "verdicts"})
+    @ValueSource(strings = {"result", "structure", "simulation", "verdicts", "conditional"})
     void schemasAreSchemas(String name) throws Exception {
         JsonSchema metaschema = JsonSchemaFactory.getInstance(SpecVersion.VersionFlag.V202012)
                 .getSchema(com.networknt.schema.SchemaLocation.of(com.networknt.schema.SchemaId.V202012));

@@ -1,0 +1,125 @@
+package org.pofk.report;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.stream.IntStream;
+import org.pofk.answer.Conditional;
+import org.pofk.answer.ConditionalLongRun;
+import org.pofk.answer.ConditionalModel;
+import org.pofk.answer.Given;
+import org.pofk.chain.Model;
+import org.pofk.chain.Output;
+import org.pofk.exact.Rational;
+import org.pofk.formula.Formula;
+import org.pofk.modes.RealValue;
+import org.pofk.report.Document.Block;
+import org.pofk.report.Document.Heading;
+import org.pofk.report.Document.Labelled;
+import org.pofk.report.Document.Paragraph;
+import org.pofk.report.Document.Table;
+
+/** Outputs given what is known at the same step, as a document: quotients of formulas that are shown and proved. */
+public final class ConditionalDocument {
+    private final ConditionalModel found;
+    private final Style style;
+    private final Prose given;
+    private final List<Block> blocks = new ArrayList<>();
+
+    private ConditionalDocument(ConditionalModel found, Style style) {
+        this.found = found;
+        this.style = style;
+        this.given = GivenProse.of(found.given(), "k");
+    }
+
+    public static Document of(ConditionalModel found, Style style) {
+        ConditionalDocument document = new ConditionalDocument(found, style);
+        document.blocks.addAll(ModelHead.of(found.model()));
+        document.write();
+        document.blocks.add(new Paragraph(Caution.TEXT));
+        return new Document(document.blocks);
+    }
+
+    /** What is given has probability zero at the step: nothing follows from it. */
+    public static Document ofNothing(Model model, Given given, int at) {
+        List<Block> blocks = new ArrayList<>(ModelHead.of(model));
+        blocks.add(new Paragraph(Prose.of("Given ").and(GivenProse.of(given, "step " + at)).and(
+                ": that has probability zero, proved, so nothing is defined given it.")));
+        return new Document(blocks);
+    }
+
+    private void write() {
+        found.outputs().forEach(this::output);
+        blocks.addAll(ResultBlocks.of(found.event(), new Heading(2, Prose.of("D(k) = P(").and(given).and(")")),
+                Prose.of("D(k)"), style));
+        values();
+    }
+
+    private void output(Conditional output) {
+        Output asked = output.joint().output();
+        blocks.add(new Heading(2, OutputProse.title(asked).and(", given ").and(given)));
+        label("is", isShare(asked)
+                ? Prose.of("N(k)/D(k): the probability of ").andName(asked.name()).and(" at k together with ").and(given)
+                        .and(", over that of ").and(given)
+                : Prose.of("N(k)/D(k): the mean of ").andName(asked.name()).and(" at k, counted where ").and(given)
+                        .and(", over the probability of that"));
+        label("defined", Prose.of(found.possible().map(GivenProse::impossible)
+                .orElse("wherever D(k) isn't zero; which steps these are repeats too late to be listed")));
+        output.longRun().ifPresent(longRun -> label("long run", longRun(longRun)));
+        blocks.addAll(ResultBlocks.of(output.joint(), new Heading(3, Prose.of("N(k) for ").andName(asked.name())),
+                Prose.of("N(k)"), style));
+    }
+
+    private static boolean isShare(Output output) {
+        return output.coefficients().stream().allMatch(value -> value.isZero() || value.isOne());
+    }
+
+    private void label(String label, Prose text) {
+        blocks.add(new Labelled(label, text));
+    }
+
+    private Prose longRun(ConditionalLongRun longRun) {
+        return switch (longRun.kind()) {
+            case LIMIT -> Prose.of("tends to ").and(number(longRun.values().get(0).orElseThrow()));
+            case CYCLE -> Prose.of("no limit; a cycle of " + longRun.values().size() + ": ").and(cycle(longRun));
+            case CYCLE_OR_LIMIT -> Prose.of("tends to values by residue of k, of which it isn't decided whether they"
+                    + " are equal: ").and(cycle(longRun));
+            case IMPOSSIBLE_IN_THE_END -> Prose.of("none: from some step on what is given has probability zero");
+            case PERIOD_TOO_LONG -> Prose.of("not decided: the moves go through cycles whose common period is too long");
+        };
+    }
+
+    private Prose cycle(ConditionalLongRun longRun) {
+        List<Prose> values = longRun.values().stream().map(value ->
+                value.map(this::number).orElse(Prose.of("undefined"))).toList();
+        return Prose.joined(values, ", ").and(" for k ≡ " + (values.size() <= 3
+                ? String.join(", ", IntStream.range(0, values.size()).mapToObj(String::valueOf).toList())
+                : "0, 1, …, " + (values.size() - 1)) + " (mod " + values.size() + ")");
+    }
+
+    private Prose number(RealValue value) {
+        Optional<Rational> rational = value.rational();
+        if (rational.isPresent()) {
+            return Prose.of(new LongRunProse(style.digits()).number(rational.get()));
+        }
+        String decimal = value.decimal(style.digits()).text();
+        Optional<Formula> exact = value.exact();
+        return exact.map(formula -> Prose.formula(formula).and(" ≈ " + decimal)).orElse(Prose.of(decimal));
+    }
+
+    private void values() {
+        if (found.outputs().isEmpty() || found.outputs().get(0).values().isEmpty()) {
+            return;
+        }
+        List<Prose> header = new ArrayList<>(List.of(Prose.of("k")));
+        found.outputs().forEach(output -> header.add(Prose.name(output.joint().output().name())));
+        List<Conditional.At> first = found.outputs().get(0).values();
+        blocks.add(new Table(Prose.of("Values at the end of step k, given that"), header,
+                IntStream.range(0, first.size()).mapToObj(row -> {
+                    List<Prose> cells = new ArrayList<>(List.of(Prose.of(String.valueOf(first.get(row).k()))));
+                    found.outputs().forEach(output -> cells.add(Prose.of(output.values().get(row).value()
+                            .map(value -> ValueText.of(value, style.digits())).orElse("–"))));
+                    return cells;
+                }).toList()));
+    }
+}

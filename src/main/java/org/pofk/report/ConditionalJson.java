@@ -1,0 +1,90 @@
+package org.pofk.report;
+
+import java.util.List;
+import java.util.Locale;
+import java.util.Optional;
+import org.pofk.answer.Conditional;
+import org.pofk.answer.ConditionalLongRun;
+import org.pofk.answer.ConditionalModel;
+import org.pofk.answer.Given;
+import org.pofk.answer.PossibleSteps;
+import org.pofk.chain.Model;
+import org.pofk.exact.Rational;
+
+/** Outputs given what is known at the same step, as JSON: format {@code pofk-conditional}. */
+public final class ConditionalJson {
+    private static final String FORMAT = "pofk-conditional";
+
+    private final Json json;
+    private final JsonOutput outputs;
+    private final JsonNumbers numbers;
+
+    private ConditionalJson(Json json, int digits) {
+        this.json = json;
+        this.outputs = new JsonOutput(json, digits);
+        this.numbers = new JsonNumbers(json, digits);
+    }
+
+    /** The text; {@code digits} are the significant digits of decimals. */
+    public static String write(ConditionalModel found, int digits) {
+        return Json.ofObject(json -> new ConditionalJson(json, digits).fields(found));
+    }
+
+    /** What is given has probability zero at the step. */
+    public static String ofNothing(Model model, String command, Given given, int at) {
+        return Json.ofObject(json -> {
+            JsonHead.write(json, FORMAT, command, model);
+            new JsonGiven(json).write(given, Optional.of(at), Optional.of(Rational.ZERO));
+            json.name("event");
+            json.nothing();
+            json.name("impossible");
+            json.nothing();
+            json.list("outputs", List.of(), each -> { });
+        });
+    }
+
+    private void fields(ConditionalModel found) {
+        JsonHead.write(json, FORMAT, "derive", found.model());
+        new JsonGiven(json).write(found.given(), Optional.empty(), Optional.empty());
+        json.name("event");
+        outputs.write(found.event());
+        json.optional("impossible", found.possible(), this::impossible);
+        json.list("outputs", found.outputs(), this::output);
+    }
+
+    private void impossible(PossibleSteps possible) {
+        json.object(() -> {
+            json.list("steps", possible.impossibleBefore(), json::count);
+            json.count("from", possible.from());
+            json.count("period", possible.period());
+            json.list("residues", possible.impossibleResidues(), json::count);
+        });
+    }
+
+    private void output(Conditional output) {
+        json.object(() -> {
+            json.text("name", output.joint().output().name());
+            json.text("word", output.joint().isDecided() && output.longRun().isPresent() ? "exact" : "undecided");
+            json.name("joint");
+            outputs.write(output.joint());
+            json.optional("longRun", output.longRun(), this::longRun);
+            json.list("values", output.values(), this::value);
+        });
+    }
+
+    private void longRun(ConditionalLongRun longRun) {
+        json.object(() -> {
+            json.text("kind", longRun.kind().name().toLowerCase(Locale.ROOT).replace('_', ' '));
+            json.list("values", longRun.values(), value ->
+                    value.ifPresentOrElse(numbers::number, json::nothing));
+        });
+    }
+
+    private void value(Conditional.At at) {
+        json.object(() -> {
+            json.count("k", at.k());
+            json.text("exact", at.value().flatMap(value -> value.exact()).map(Rational::toString));
+            json.text("decimal", at.value().map(value -> ValueText.number(value, numbers.digits())));
+        });
+    }
+}
