@@ -16,7 +16,7 @@ import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
 import org.pofk.report.Chart;
-import org.pofk.report.CourseChart;
+import org.pofk.report.CourseCharts;
 import org.pofk.report.NotebookWriter;
 import org.pofk.report.Provenance;
 import org.pofk.report.Report;
@@ -127,13 +127,13 @@ final class ReportCommand implements Work {
                 .map(section -> ReportSection.notReached(section.place(), section.title())).toList());
         List<KeyFigures> none = Collections.nCopies(outputs.size(), KeyFigures.NONE);
         DerivedModel derived = Deriving.of(read, outputs, at.steps(), extras(), partly ->
-                published.accept(new Report(partly, none, Optional.empty(), answers, provenance)));
+                published.accept(new Report(partly, none, List.of(), answers, provenance)));
         List<KeyFigures> figures = derived.outputs().stream().map(each -> KeyFigures.of(read.chain(), each)).toList();
-        Optional<Chart.Course> course = CourseChart.of(derived);
-        published.accept(new Report(derived, figures, course, answers, provenance));
+        List<Chart.Course> courses = CourseCharts.of(derived, figures);
+        published.accept(new Report(derived, figures, courses, answers, provenance));
         for (int i = 0; i < sections.size(); i++) {
             answers.set(i, sections.get(i).work().get());
-            published.accept(new Report(derived, figures, course, answers, provenance));
+            published.accept(new Report(derived, figures, courses, answers, provenance));
         }
     }
 

@@ -1,7 +1,6 @@
 package org.pofk.report;
 
 import java.util.List;
-import java.util.Optional;
 import org.pofk.answer.DerivedModel;
 import org.pofk.answer.KeyFigures;
 
@@ -9,10 +8,10 @@ import org.pofk.answer.KeyFigures;
  * What a report is written of, as far as it is found.
  *
  * @param figures one for each output of {@code derived}, in their order
- * @param course  the outputs over steps, where they can be drawn
+ * @param courses the outputs over steps, those of a like size together, where they can be drawn
  * @param answers in the order of the report
  */
-public record Report(DerivedModel derived, List<KeyFigures> figures, Optional<Chart.Course> course,
+public record Report(DerivedModel derived, List<KeyFigures> figures, List<Chart.Course> courses,
         List<ReportSection> answers, Provenance provenance) {
 
     /** How much of the way is shown. */
@@ -20,6 +19,7 @@ public record Report(DerivedModel derived, List<KeyFigures> figures, Optional<Ch
 
     public Report {
         figures = List.copyOf(figures);
+        courses = List.copyOf(courses);
         answers = List.copyOf(answers);
         if (figures.size() != derived.outputs().size()) {
             throw new IllegalArgumentException(figures.size() + " figures of " + derived.outputs().size() + " outputs");

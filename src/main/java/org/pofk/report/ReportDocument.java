@@ -34,6 +34,8 @@ public final class ReportDocument {
         document.blocks.addAll(before(report, style));
         if (depth == Depth.FULL) {
             document.derivation();
+        } else {
+            document.blocks.addAll(ReportSummary.longFormulas(report, style));
         }
         document.blocks.addAll(ProofBlocks.of(report.derived()));
         if (depth == Depth.FULL) {
@@ -62,7 +64,8 @@ public final class ReportDocument {
         DerivedModel derived = report.derived();
         List<DerivedOutput> listed = derived.outputs().stream().filter(output -> !output.values().isEmpty()).toList();
         List<Block> blocks = new ArrayList<>();
-        report.course().ifPresent(chart -> blocks.add(new Figure(Prose.of("Course over steps"), chart)));
+        report.courses().forEach(chart -> blocks.add(new Figure(Prose.of("Course of ").and(Prose.names(chart.curves()
+                .stream().map(Chart.Curve::name).toList())).and(" over steps"), chart)));
         if (!listed.isEmpty()) {
             blocks.add(ValuesTable.of(listed, style.digits()));
         }

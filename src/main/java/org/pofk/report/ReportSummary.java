@@ -22,6 +22,7 @@ final class ReportSummary {
     private static final int VALUES_SHOWN = 4;
     /** A longer exact formula stands in the derivation alone. */
     private static final int EXACT_SHOWN_UP_TO = 220;
+    private static final int TERMS_SHOWN_UP_TO = 12;
 
     private final Report report;
     private final Model model;
@@ -62,8 +63,7 @@ final class ReportSummary {
             blocks.add(new Heading(3, OutputProse.title(output.output())));
         }
         output.closedForm().ifPresent(form -> {
-            blocks.addAll(isShort(form) ? ResultBlocks.formulas(output, style)
-                    : ResultBlocks.decimals(output, style));
+            formulas(output, form);
             label("holds", holds(form));
         });
         if (!output.isDecided()) {
@@ -75,9 +75,32 @@ final class ReportSummary {
         }
     }
 
-    private static boolean isShort(ClosedForm form) {
+    private void formulas(DerivedOutput output, ClosedForm form) {
+        if (isShort(form, report)) {
+            blocks.addAll(ResultBlocks.formulas(output, style));
+        } else if (form.modes().size() <= TERMS_SHOWN_UP_TO) {
+            blocks.addAll(ResultBlocks.decimals(output, style));
+        } else {
+            label("formula", "a sum of " + form.modes().size() + " terms, too many for this page; it stands below");
+        }
+    }
+
+    /** So that all of them have room. */
+    private static boolean isShort(ClosedForm form, Report report) {
         Formula exact = form.exactFormula().orElseGet(form::formulaOverRoots);
-        return PlainText.UNICODE.write(exact).length() <= EXACT_SHOWN_UP_TO;
+        return PlainText.UNICODE.write(exact).length() * report.derived().outputs().size() <= EXACT_SHOWN_UP_TO;
+    }
+
+    /** The formulas that are too long for the first page, where no derivation ends with them. */
+    static List<Block> longFormulas(Report report, Style style) {
+        List<DerivedOutput> left = report.derived().outputs().stream()
+                .filter(output -> output.closedForm().filter(form -> !isShort(form, report)).isPresent()).toList();
+        List<Block> blocks = new ArrayList<>();
+        if (!left.isEmpty()) {
+            blocks.add(new Heading(2, "Formulas in full"));
+            left.forEach(output -> blocks.addAll(ResultBlocks.formulas(output, style)));
+        }
+        return blocks;
     }
 
     private static String holds(ClosedForm form) {

@@ -115,7 +115,7 @@ final class ResultBlocks {
         decimals.formula().ifPresent(formula -> blocks.add(new Display(left,
                 isExact(decimals) ? Relation.EQUAL : Relation.ROUNDED, formula)));
         label("decimals", promise(decimals));
-        label("exact", "see the derivation");
+        label("exact", "too long for this page; it stands below");
     }
 
     private static boolean isExact(DecimalForm decimals) {

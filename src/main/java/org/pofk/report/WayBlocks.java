@@ -27,6 +27,8 @@ import org.pofk.report.Document.Table;
 final class WayBlocks {
     private static final Prose Y = Prose.of("Y(z)");
     private static final int WRITTEN_OUT_UP_TO = 40;
+    private static final int READABLE_DEGREE = 12;
+    private static final int READABLE_COEFFICIENT = 40;
 
     private final DerivedOutput output;
     private final ClosedForm form;
@@ -98,13 +100,18 @@ final class WayBlocks {
 
     private void writeWorked() {
         blocks.add(new Heading(3, OutputProse.atStep(output.output())));
-        transform();
         Derivation derivation = form.derivation();
-        if (form.transform().y().denominator().degree() <= WRITTEN_OUT_UP_TO) {
+        int longest = RationalFunction.longestCoefficient(form.transform().y());
+        int degree = form.transform().y().denominator().degree();
+        if (degree <= READABLE_DEGREE && longest <= READABLE_COEFFICIENT) {
+            transform();
             expansion(derivation);
+        } else {
+            blocks.add(new Paragraph("Y(z) in lowest terms has a denominator of degree " + degree + " and coefficients of"
+                    + " up to " + longest + " characters; neither it nor its expansion can be read, and both are in the"
+                    + " result of derive as JSON."));
         }
-        WayTables tables = new WayTables(derivation, numbers);
-        blocks.addAll(tables.blocks());
+        blocks.addAll(new WayTables(derivation, numbers).blocks());
         blocks.addAll(PairBlocks.of(derivation, numbers));
     }
 

@@ -46,7 +46,9 @@ public final class WhenDocument {
                 document.blocks.add(new Heading(3, OutputProse.title(answer.output())));
             }
             document.met(answer);
-            document.steps(answer);
+            if (answer.when().classes().size() > 1 || answer.around().size() > 1) {
+                document.steps(answer);
+            }
             key.add(new Labelled(Prose.name(answer.output().name()).and(" "
                     + document.asked(answer.when().condition())), Prose.of(inBrief(answer.when()))));
         });
