@@ -33,12 +33,13 @@ final class Answer {
         return more;
     }
 
-    /** As text in a format, a document's in the form asked for. */
+    /** As text in a format, a document's in the form asked for; what becomes a PDF as LaTeX. */
     String written(Format format, DocumentForms documents) throws RefusedException {
         return switch (format) {
             case TEXT -> documents.text(document.get());
             case HTML -> documents.html(document.get());
             case LATEX -> documents.latex(document.get());
+            case PDF -> documents.article(document.get());
             case JSON, CSV, NOTEBOOK -> form(format).text();
         };
     }

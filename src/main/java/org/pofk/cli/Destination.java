@@ -15,15 +15,17 @@ final class Destination {
 
     private final List<Target> targets;
     private final DocumentForms forms;
+    private final Optional<Pdflatex> pdflatex;
     private final SaveOptions save;
 
-    /** A format, and the file it goes to; to the screen where there is none. */
+    /** A format, and the file it goes to; to the screen where there is none. What can't be made a PDF stays LaTeX. */
     record Target(Format format, Optional<Path> file) {
     }
 
-    Destination(List<Target> targets, DocumentForms forms, SaveOptions save) {
+    Destination(List<Target> targets, DocumentForms forms, Optional<Pdflatex> pdflatex, SaveOptions save) {
         this.targets = List.copyOf(targets);
         this.forms = forms;
+        this.pdflatex = pdflatex;
         this.save = save;
     }
 
@@ -42,7 +44,7 @@ final class Destination {
     void write(Answer answer, Streams streams) throws RefusedException, UsageException, WritingException {
         Map<Path, byte[]> files = new LinkedHashMap<>();
         for (Target target : targets) {
-            byte[] bytes = answer.written(target.format, forms).getBytes(StandardCharsets.UTF_8);
+            byte[] bytes = bytes(target.format, answer.written(target.format, forms));
             if (target.file.isEmpty()) {
                 streams.answer().writeBytes(bytes);
             } else {
@@ -50,5 +52,16 @@ final class Destination {
             }
         }
         save.write(files, streams);
+        Optional<Path> article = targets.stream().filter(target -> target.format == Format.PDF)
+                .flatMap(target -> target.file.stream()).findFirst();
+        if (pdflatex.isEmpty() && article.isPresent()) {
+            throw new WritingException("pdflatex isn't installed, so there is no PDF; the article for it is '"
+                    + article.get() + "'. Where it is installed:  pdflatex " + article.get().getFileName() + "  , twice");
+        }
+    }
+
+    private byte[] bytes(Format format, String text) throws WritingException {
+        return format == Format.PDF && pdflatex.isPresent() ? pdflatex.get().pdf(text)
+                : text.getBytes(StandardCharsets.UTF_8);
     }
 }

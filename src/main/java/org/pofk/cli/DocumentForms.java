@@ -23,6 +23,10 @@ record DocumentForms(Alphabet alphabet, LatexPart latex) {
     }
 
     String latex(Document document) throws RefusedException {
-        return latex == LatexPart.FRAGMENT ? LatexWriter.fragment(document) : LatexWriter.article(document);
+        return latex == LatexPart.FRAGMENT ? LatexWriter.fragment(document) : article(document);
+    }
+
+    String article(Document document) throws RefusedException {
+        return LatexWriter.article(document);
     }
 }

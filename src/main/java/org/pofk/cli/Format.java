@@ -10,10 +10,10 @@ import java.util.Set;
 
 /** What an answer can be written as. */
 enum Format {
-    TEXT(".txt"), JSON(".json"), CSV(".csv"), HTML(".html"), LATEX(".tex"), NOTEBOOK(".ipynb");
+    TEXT(".txt"), JSON(".json"), CSV(".csv"), HTML(".html"), LATEX(".tex"), PDF(".pdf"), NOTEBOOK(".ipynb");
 
     /** What any document can be written as. */
-    static final Set<Format> OF_DOCUMENTS = Set.of(TEXT, HTML, LATEX);
+    static final Set<Format> OF_DOCUMENTS = Set.of(TEXT, HTML, LATEX, PDF);
 
     private final String ending;
 

@@ -4,6 +4,10 @@ package org.pofk.cli;
 final class WritingException extends Exception {
     private static final long serialVersionUID = 1L;
 
+    WritingException(String message) {
+        super(message);
+    }
+
     WritingException(String message, Throwable cause) {
         super(message, cause);
     }

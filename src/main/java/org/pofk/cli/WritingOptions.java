@@ -52,17 +52,28 @@ final class WritingOptions {
      * contradicts itself, isn't offered, or where a file isn't to be replaced.
      */
     Destination destination(Path about) throws UsageException {
-        List<Destination.Target> targets = folder.isPresent() ? inFolder(folder.get(), about)
+        List<Destination.Target> asked = folder.isPresent() ? inFolder(folder.get(), about)
                 : List.of(new Destination.Target(format(), save.file()));
-        for (Destination.Target target : targets) {
-            requireOffered(target.format());
+        for (Destination.Target target : asked) {
+            requireOffered(target);
         }
+        Optional<Pdflatex> pdflatex = asked.stream().anyMatch(target -> target.format() == Format.PDF)
+                ? Pdflatex.installed() : Optional.empty();
+        List<Destination.Target> targets = pdflatex.isPresent() ? asked
+                : asked.stream().map(WritingOptions::asArticle).toList();
         if (fragment && targets.stream().noneMatch(target -> target.format() == Format.LATEX)) {
             throw new UsageException("--fragment is a part of a LaTeX document; there is no --as latex");
         }
         save.check(targets.stream().flatMap(target -> target.file().stream()).toList());
         return new Destination(targets, new DocumentForms(plain ? Alphabet.ASCII : Alphabet.UNICODE,
-                fragment ? DocumentForms.LatexPart.FRAGMENT : DocumentForms.LatexPart.ARTICLE), save);
+                fragment ? DocumentForms.LatexPart.FRAGMENT : DocumentForms.LatexPart.ARTICLE), pdflatex, save);
+    }
+
+    /** The LaTeX of a PDF, beside where that was to be. */
+    private static Destination.Target asArticle(Destination.Target target) {
+        return target.format() != Format.PDF ? target : new Destination.Target(Format.PDF, target.file().map(file ->
+                file.resolveSibling(file.getFileName().toString().replaceFirst("(?i)\\.pdf$", "")
+                        + Format.LATEX.ending())));
     }
 
     private List<Destination.Target> inFolder(Path folder, Path about) throws UsageException {
@@ -81,10 +92,13 @@ final class WritingOptions {
                 Optional.of(folder.resolve(name + format.ending())))).toList();
     }
 
-    private void requireOffered(Format format) throws UsageException {
-        if (!offered.contains(format)) {
-            throw new UsageException(command.word() + " writes no " + format + "; it writes "
+    private void requireOffered(Destination.Target target) throws UsageException {
+        if (!offered.contains(target.format())) {
+            throw new UsageException(command.word() + " writes no " + target.format() + "; it writes "
                     + Words.listed(offered(), "and"));
+        }
+        if (target.format() == Format.PDF && target.file().isEmpty()) {
+            throw new UsageException("a PDF goes to a file: --save FILE.pdf");
         }
     }
 

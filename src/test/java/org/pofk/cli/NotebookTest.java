@@ -2,26 +2,23 @@ package org.pofk.cli;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
-import static org.junit.jupiter.api.Assertions.fail;
 
-import java.io.File;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
-import java.util.Arrays;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.stream.Collectors;
 import java.util.stream.IntStream;
 import java.util.stream.Stream;
-import org.junit.jupiter.api.Assumptions;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
+import org.pofk.page.Installed;
 
 /**
  * Notebooks written are the ones kept in {@code notebooks-export}, follow nbformat, run, and fail where one number of
@@ -128,7 +125,7 @@ class NotebookTest {
 
     /** One line for each program: its name, whether it ended or failed, and the error. */
     private List<String> run(Map<String, String> programs) throws IOException, InterruptedException {
-        require("python3");
+        Installed.require("python3", "notebooks aren't run");
         List<String> command = new ArrayList<>(List.of("python3", DRIVER.toAbsolutePath().toString()));
         for (Map.Entry<String, String> each : programs.entrySet()) {
             Files.writeString(folder.resolve(each.getKey() + ".py"), each.getValue());
@@ -143,7 +140,7 @@ class NotebookTest {
 
     @Test
     void jupyterRunsIt() throws Exception {
-        require("jupyter-nbconvert");
+        Installed.require("jupyter-nbconvert", "no notebook is run as one");
         String notebook = Files.readString(KEPT.resolve("kiln-campaign.ipynb"));
         assertEquals(0, converted("right", notebook));
         assertTrue(Files.readString(folder.resolve("right-executed.ipynb")).contains("image/svg+xml"));
@@ -155,16 +152,6 @@ class NotebookTest {
                 name + "-executed.ipynb", name + ".ipynb").directory(folder.toFile()).redirectErrorStream(true).start();
         process.getInputStream().readAllBytes();
         return process.waitFor();
-    }
-
-    /** Skips where a program isn't installed, fails there on the machine that checks everything. */
-    private static void require(String program) {
-        boolean isInstalled = Arrays.stream(System.getenv().getOrDefault("PATH", "").split(File.pathSeparator))
-                .anyMatch(each -> Files.isExecutable(Path.of(each, program)));
-        if (!isInstalled && System.getenv("CI") != null) {
-            fail(program + " isn't installed");
-        }
-        Assumptions.assumeTrue(isInstalled, program + " isn't installed");
     }
 
     @Test

@@ -49,8 +49,8 @@ class BrowserTest {
 
     @BeforeAll
     void start() throws IOException {
-        Installed.require("chromium");
-        Installed.require("chromedriver");
+        Installed.require("chromium", "no page is looked at");
+        Installed.require("chromedriver", "no page is looked at");
         browser = Browser.started();
     }
 

@@ -8,17 +8,18 @@ import org.junit.jupiter.api.Assertions;
 import org.junit.jupiter.api.Assumptions;
 
 /** Programs of others that some tests run. */
-final class Installed {
+public final class Installed {
     private Installed() {
     }
 
-    /** Skips the test without the program; where everything is to be tested, it fails. */
-    static void require(String program) {
-        boolean isInstalled = Arrays.stream(System.getenv("PATH").split(File.pathSeparator))
+    /** Skips the test without the program, and says what isn't tested then; where everything is to be, it fails. */
+    public static void require(String program, String leftOut) {
+        boolean isInstalled = Arrays.stream(System.getenv().getOrDefault("PATH", "").split(File.pathSeparator))
                 .anyMatch(folder -> Files.isExecutable(Path.of(folder, program)));
+        String message = program + " isn't installed: " + leftOut;
         if (!isInstalled && System.getenv("CI") != null) {
-            Assertions.fail(program + " isn't installed");
+            Assertions.fail(message);
         }
-        Assumptions.assumeTrue(isInstalled, program + " isn't installed");
+        Assumptions.assumeTrue(isInstalled, message);
     }
 }

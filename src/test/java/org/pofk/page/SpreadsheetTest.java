@@ -80,7 +80,7 @@ class SpreadsheetTest {
 
     @Test
     void aSpreadsheetCalculatesTheFormulasAsTheyAreMeant() throws Exception {
-        Installed.require("soffice");
+        Installed.require("soffice", "no spreadsheet calculates");
         List<Column> columns = new ArrayList<>(traps());
         columns.addAll(ofPatterns());
         columns.removeIf(column -> OpenFormula.write(column.formula, "A1").isEmpty());

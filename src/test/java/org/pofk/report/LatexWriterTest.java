@@ -4,19 +4,15 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
-import static org.junit.jupiter.api.Assertions.fail;
 
-import java.io.File;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
-import java.util.Arrays;
 import java.util.EnumSet;
 import java.util.List;
 import java.util.regex.Pattern;
-import org.junit.jupiter.api.Assumptions;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -28,6 +24,7 @@ import org.pofk.chain.Model;
 import org.pofk.chain.Outputs;
 import org.pofk.formula.Formula;
 import org.pofk.formula.FormulaParser;
+import org.pofk.page.Installed;
 import org.pofk.report.Document.Display;
 import org.pofk.report.Document.Excerpt;
 import org.pofk.report.Document.Heading;
@@ -76,7 +73,7 @@ class LatexWriterTest {
     }
 
     private void assertCompiles(Document document) throws RefusedException, IOException, InterruptedException {
-        requirePdflatex();
+        Installed.require("pdflatex", "documents as LaTeX aren't compiled");
         Files.writeString(folder.resolve("a.tex"), LatexWriter.article(document), StandardCharsets.UTF_8);
         String log = "";
         for (int run = 0; run < 2; run++) {
@@ -87,16 +84,6 @@ class LatexWriterTest {
         }
         assertTrue(OVERFULL.matcher(log).results().allMatch(found -> Integer.parseInt(found.group(1)) < 5), log);
         assertFalse(log.contains("undefined"), log);
-    }
-
-    /** Skips where LaTeX isn't installed, fails there on the machine that checks everything. */
-    private static void requirePdflatex() {
-        boolean isInstalled = Arrays.stream(System.getenv().getOrDefault("PATH", "").split(File.pathSeparator))
-                .anyMatch(each -> Files.isExecutable(Path.of(each, "pdflatex")));
-        if (!isInstalled && System.getenv("CI") != null) {
-            fail("pdflatex isn't installed");
-        }
-        Assumptions.assumeTrue(isInstalled, "pdflatex isn't installed");
     }
 
     @ParameterizedTest
