@@ -25,11 +25,14 @@ public record Model(String title, Step step, Convention convention, About about,
     public record Step(String is, Optional<String> lasts, Optional<String> first) {
     }
 
-    /** Where the model comes from, carried into reports; never invented. */
+    /** What stands or falls with what is modelled, where a caution more is due. */
+    public enum Concern { PROTECTIVE_FUNCTION, STRUCTURE }
+
+    /** Where the model comes from and what it concerns, carried into reports; never invented. */
     public record About(Optional<String> document, Optional<String> revision, Optional<String> preparedBy,
-            List<String> assumptions) {
+            List<String> assumptions, Optional<Concern> concerns) {
         public static final About NOTHING =
-                new About(Optional.empty(), Optional.empty(), Optional.empty(), List.of());
+                new About(Optional.empty(), Optional.empty(), Optional.empty(), List.of(), Optional.empty());
     }
 
     /** A named value; {@code value} is its exact number as text. */

@@ -5,6 +5,7 @@ import java.util.Locale;
 import java.util.Optional;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model.About;
+import org.pofk.chain.Model.Concern;
 import org.pofk.chain.Model.Convention;
 import org.pofk.chain.Model.Step;
 
@@ -28,6 +29,25 @@ record Head(String title, Step step, Chain.Kind kind, Optional<Convention> conve
         @Override
         public String word() {
             return name().toLowerCase(Locale.ROOT);
+        }
+    }
+
+    private enum Concerned implements Keyword {
+        PROTECTIVE_FUNCTION(Concern.PROTECTIVE_FUNCTION), STRUCTURE(Concern.STRUCTURE);
+
+        private final Concern concern;
+
+        Concerned(Concern concern) {
+            this.concern = concern;
+        }
+
+        @Override
+        public String word() {
+            return name().toLowerCase(Locale.ROOT).replace('_', ' ');
+        }
+
+        Concern concern() {
+            return concern;
         }
     }
 
@@ -105,9 +125,11 @@ record Head(String title, Step step, Chain.Kind kind, Optional<Convention> conve
             return About.NOTHING;
         }
         Fields parts = Fields.of(mapping.get(), "about",
-                List.of("document", "revision", "prepared by", "assumptions"), reading);
+                List.of("document", "revision", "prepared by", "assumptions", "concerns"), reading);
         return new About(text(parts, "document", reading), text(parts, "revision", reading),
-                text(parts, "prepared by", reading), assumptions(parts, reading));
+                text(parts, "prepared by", reading), assumptions(parts, reading),
+                parts.value("concerns").flatMap(subject -> reading.keyword(subject, "what the model concerns",
+                        Concerned.values())).map(Concerned::concern));
     }
 
     private static Optional<String> text(Fields parts, String key, Reading reading) {

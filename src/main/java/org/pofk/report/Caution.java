@@ -1,5 +1,8 @@
 package org.pofk.report;
 
+import org.pofk.chain.Model;
+import org.pofk.report.Document.Paragraph;
+
 /** What every answer about failure ends with. */
 final class Caution {
     static final String TEXT = "Exact for the model as entered. Whether the model fits the plant, and what may be done"
@@ -7,5 +10,20 @@ final class Caution {
             + " licensed, person.";
 
     private Caution() {
+    }
+
+    /** With what is to be added about what the model says it concerns. */
+    static Paragraph of(Model model) {
+        return new Paragraph(TEXT + model.about().concerns().map(concern -> " " + switch (concern) {
+            case PROTECTIVE_FUNCTION -> "Not a safety integrity claim: architecture limits, systematic failures and"
+                    + " common cause are judged by the governing functional-safety standard.";
+            case STRUCTURE -> "Doesn't replace an inspection or load rating by a licensed engineer.";
+        }).orElse(""));
+    }
+
+    /** Whether a paragraph is one of these. */
+    static boolean isOne(Paragraph paragraph) {
+        return paragraph.text().parts().stream().findFirst()
+                .filter(part -> part instanceof Prose.Words words && words.text().startsWith(TEXT)).isPresent();
     }
 }

@@ -36,7 +36,7 @@ public final class ConditionalDocument {
         ConditionalDocument document = new ConditionalDocument(found, style);
         document.blocks.addAll(ModelHead.of(found.model()));
         document.write();
-        document.blocks.add(new Paragraph(Caution.TEXT));
+        document.blocks.add(Caution.of(found.model()));
         return new Document(document.blocks);
     }
 

@@ -7,7 +7,6 @@ import org.pofk.answer.DerivedModel;
 import org.pofk.answer.DerivedOutput;
 import org.pofk.chain.Model.Convention;
 import org.pofk.report.Document.Block;
-import org.pofk.report.Document.Paragraph;
 
 /** What {@code derive} found, as a document. */
 public final class DerivationDocument {
@@ -62,7 +61,7 @@ public final class DerivationDocument {
     }
 
     private static Document ended(List<Block> blocks, DerivedModel derived) {
-        blocks.add(new Paragraph(Caution.TEXT));
+        blocks.add(Caution.of(derived.model()));
         return new Document(blocks, derived.outputs().stream()
                 .flatMap(output -> output.transform().map(OutputSequence::of).stream()).toList());
     }

@@ -100,7 +100,7 @@ public final class HtmlWriter {
 
         @Override
         public List<String> paragraph(Document.Paragraph paragraph) {
-            boolean isCaution = paragraph.equals(new Document.Paragraph(Caution.TEXT));
+            boolean isCaution = Caution.isOne(paragraph);
             if (isCaution) {
                 closeSection();
             }

@@ -39,7 +39,7 @@ public final class NotebookWriter {
         writer.text(head);
         writer.chain();
         derived.outputs().forEach(writer::output);
-        writer.text(List.of(new Paragraph(Caution.TEXT)));
+        writer.text(List.of(Caution.of(derived.model())));
         return new Notebook(writer.cells).write();
     }
 

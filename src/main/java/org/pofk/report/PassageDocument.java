@@ -40,7 +40,7 @@ public final class PassageDocument {
         document.blocks.addAll(ModelHead.of(model));
         document.blocks.add(new Heading(2, document.title()));
         document.write();
-        document.blocks.add(new Paragraph(Caution.TEXT));
+        document.blocks.add(Caution.of(model));
         return new Document(document.blocks);
     }
 

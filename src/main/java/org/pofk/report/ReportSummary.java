@@ -55,7 +55,7 @@ final class ReportSummary {
             blocks.add(new Heading(2, "Answers"));
             report.answers().forEach(answer -> blocks.addAll(answer.keyFigures()));
         }
-        blocks.add(new Paragraph(Caution.TEXT));
+        blocks.add(Caution.of(model));
     }
 
     private void output(DerivedOutput output, KeyFigures figures) {

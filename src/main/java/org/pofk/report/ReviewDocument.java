@@ -74,7 +74,7 @@ public final class ReviewDocument {
         findings();
         notStated();
         signature();
-        blocks.add(new Paragraph(Caution.TEXT));
+        blocks.add(Caution.of(reviewed.claims().model()));
     }
 
     private void review() {

@@ -23,7 +23,7 @@ public final class SimulationDocument {
             blocks.add(new Heading(2, OutputProse.title(series.output())));
             blocks.addAll(series(series, style));
         }
-        blocks.add(new Paragraph(Caution.TEXT));
+        blocks.add(Caution.of(model));
         return new Document(blocks);
     }
 

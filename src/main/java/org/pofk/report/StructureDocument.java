@@ -47,7 +47,7 @@ public final class StructureDocument {
             longRuns();
         }
         questions();
-        blocks.add(new Paragraph(Caution.TEXT));
+        blocks.add(Caution.of(inspected.model()));
     }
 
     private void structure() {

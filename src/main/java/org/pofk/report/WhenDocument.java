@@ -12,7 +12,6 @@ import org.pofk.exact.Rational;
 import org.pofk.report.Document.Block;
 import org.pofk.report.Document.Heading;
 import org.pofk.report.Document.Labelled;
-import org.pofk.report.Document.Paragraph;
 import org.pofk.report.Document.Table;
 
 /** When outputs meet a condition, as a document. */
@@ -33,7 +32,7 @@ public final class WhenDocument {
             document.blocks.add(new Heading(2, OutputProse.title(answer.output())));
             document.answer(answer);
         });
-        document.blocks.add(new Paragraph(Caution.TEXT));
+        document.blocks.add(Caution.of(found.model()));
         return new Document(document.blocks);
     }
 

@@ -13,7 +13,7 @@ import org.pofk.exact.Rational;
 
 class InspectionTest {
     private static final Model.About ASSUMED = new Model.About(Optional.empty(), Optional.empty(), Optional.empty(),
-            List.of("repairs as good as new"));
+            List.of("repairs as good as new"), Optional.empty());
     private static final Model.Remark SOURCE = new Model.Remark("transitions", "source", "log book");
 
     @Test

@@ -24,6 +24,7 @@ import org.pofk.input.Source;
 /** What the README shows is what the program prints. */
 class ReadmeTest {
     private static final Pattern CONSOLE = Pattern.compile("(?s)```console\\n(.*?)```");
+    private static final Pattern FIRST_PAGE = Pattern.compile("(?s)```first-page\\n\\$ (.*?)\\n(.*?)```");
     private static final Pattern COMMAND = Pattern.compile("(?m)^\\$ (.*)$");
     private static final Pattern BY_MAVEN = Pattern.compile("mvn -q -B compile exec:java -Dexec.args=\"(.*)\"");
     private static final Pattern MODEL = Pattern.compile("(?s)```yaml\\n(pofk: .*?)```");
@@ -55,6 +56,15 @@ class ReadmeTest {
     void anExamplePrintsWhatIsShown(Example example) {
         Run run = Run.of(example.arguments());
         assertEquals(example.shown(), run.answer() + run.notes());
+    }
+
+    @Test
+    void theFirstPageShownIsThatOfTheReport() throws IOException {
+        List<MatchResult> pages = FIRST_PAGE.matcher(Files.readString(Path.of("README.md"))).results().toList();
+        assertEquals(1, pages.size());
+        Run run = Run.of(new Example(pages.get(0).group(1), "").arguments());
+        assertEquals(0, run.exitCode(), run.notes());
+        assertTrue(run.answer().startsWith(pages.get(0).group(2)), run.answer());
     }
 
     @Test

@@ -180,7 +180,8 @@ class ModelReaderTest {
     void whatTheAuthorSaysIsCarried() throws RefusedException {
         Model model = model("in-words.yaml");
         assertEquals(new Model.About(Optional.of("PN-12"), Optional.of("B"), Optional.of("A. Smith"),
-                List.of("repairs start at once", "no two failures in one step")), model.about());
+                List.of("repairs start at once", "no two failures in one step"),
+                Optional.of(Model.Concern.PROTECTIVE_FUNCTION)), model.about());
         assertEquals(List.of("model", "model", "transitions", "from 'Ventil A'"),
                 model.notes().stream().map(Remark::on).toList());
         assertEquals("1 inspection", model.step().is());
