@@ -37,8 +37,8 @@ final class CheckProse {
         long checked = series.checked();
         return checked == 0 ? "too few hits are expected, can't tell here"
                 : checked == 1
-                ? "the one step checked is " + (series.inside() == 1 ? "inside" : "OUTSIDE") + " its 99.9 % interval"
-                : series.inside() + " of " + checked + " steps inside their 99.9 % intervals";
+                ? "the one step checked is " + (series.inside() == 1 ? "inside" : "OUTSIDE") + " its 99.9 % interval"
+                : series.inside() + " of " + checked + " steps inside their 99.9 % intervals";
     }
 
     static String of(SecondOpinion opinion) {
