@@ -52,6 +52,12 @@ public record Model(String title, Step step, Convention convention, About about,
     public record Origin(String file, String sha256) {
     }
 
+    /** The same model, as if it had been read from another file. */
+    public Model readFrom(Origin other) {
+        return new Model(title, step, convention, about, chain, schedule, parameters, notes, changes, written, other,
+                tables);
+    }
+
     public Model {
         parameters = List.copyOf(parameters);
         notes = List.copyOf(notes);

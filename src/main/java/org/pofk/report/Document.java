@@ -1,6 +1,9 @@
 package org.pofk.report;
 
+import java.util.ArrayList;
 import java.util.List;
+import java.util.Set;
+import java.util.stream.Collectors;
 import org.pofk.exact.Rational;
 import org.pofk.formula.Formula;
 
@@ -8,16 +11,39 @@ import org.pofk.formula.Formula;
  * What is shown, in order, independent of the format it is written in.
  *
  * @param sequences what a writer whose readers can calculate may offer any step of
+ * @param changed   the places of blocks that differ from an earlier issue; a writer puts a rule in the margin there
  */
-public record Document(List<Block> blocks, List<Sequence> sequences) {
+public record Document(List<Block> blocks, List<Sequence> sequences, Set<Integer> changed) {
 
     public Document {
         blocks = List.copyOf(blocks);
         sequences = List.copyOf(sequences);
+        changed = Set.copyOf(changed);
+    }
+
+    public Document(List<Block> blocks, List<Sequence> sequences) {
+        this(blocks, sequences, Set.of());
     }
 
     public Document(List<Block> blocks) {
         this(blocks, List.of());
+    }
+
+    /** Whether the block at a place differs from an earlier issue. */
+    boolean isChanged(int place) {
+        return changed.contains(place);
+    }
+
+    Document withChanged(Set<Integer> places) {
+        return new Document(blocks, sequences, places);
+    }
+
+    /** With more blocks before the one at a place, or at the end; these don't count as changed. */
+    Document with(int place, List<Block> more) {
+        List<Block> all = new ArrayList<>(blocks);
+        all.addAll(place, more);
+        return new Document(all, sequences, changed.stream().map(each -> each < place ? each : each + more.size())
+                .collect(Collectors.toSet()));
     }
 
     /**

@@ -56,7 +56,8 @@ public final class HtmlWriter {
             if (blocks.get(i) instanceof Labelled && !continues) {
                 lines.add("<dl class=\"facts\">");
             }
-            lines.addAll(blocks.get(i).accept(new Blocks()));
+            List<String> html = blocks.get(i).accept(new Blocks());
+            lines.addAll(document.isChanged(i) ? changed(html) : html);
             if (blocks.get(i) instanceof Labelled && !goesOn) {
                 lines.add("</dl>");
             }
@@ -66,6 +67,18 @@ public final class HtmlWriter {
         if (contents.size() >= LISTED_FROM) {
             lines.add(firstSection(), "<nav aria-label=\"Sections\"><ul>" + String.join("", contents) + "</ul></nav>");
         }
+    }
+
+    /** With a rule in the margin for the eye and a word for the ear; a label in its list keeps its place there. */
+    private static List<String> changed(List<String> html) {
+        String word = "<span class=\"unseen\">Changed: </span>";
+        if (html.get(0).startsWith("<dt>")) {
+            return List.of("<dt class=\"changed\">" + word + html.get(0).substring("<dt>".length()));
+        }
+        List<String> changed = new ArrayList<>(List.of("<div class=\"changed\">" + word));
+        changed.addAll(html);
+        changed.add("</div>");
+        return changed;
     }
 
     private int firstSection() {

@@ -32,6 +32,7 @@ public final class LatexWriter {
                 "\\usepackage[utf8]{inputenc}", "\\usepackage[T1]{fontenc}", "\\usepackage{lmodern}",
                 "\\usepackage[margin=25mm]{geometry}"));
         packages(document).forEach(each -> lines.add("\\usepackage{" + each + "}"));
+        lines.addAll(changes(document));
         lines.addAll(List.of("\\allowdisplaybreaks", "\\setlength{\\parindent}{0pt}",
                 "\\setlength{\\parskip}{6pt plus 2pt}", "\\setlength{\\emergencystretch}{4em}",
                 "\\begin{document}"));
@@ -44,6 +45,11 @@ public final class LatexWriter {
     public static String fragment(Document document) throws RefusedException {
         List<String> lines = new ArrayList<>(List.of("% To be put into a document by \\input; needs"
                 + " \\usepackage[T1]{fontenc} and the packages " + String.join(", ", packages(document)) + "."));
+        if (!document.changed().isEmpty()) {
+            lines.add("\\ifdefined\\pofkchangedbox\\else");
+            lines.addAll(changes(document));
+            lines.add("\\fi");
+        }
         lines.addAll(body(document));
         return String.join("\n", lines) + "\n";
     }
@@ -54,22 +60,44 @@ public final class LatexWriter {
         return hasFigures ? Stream.concat(PACKAGES.stream(), Stream.of(TikzChart.PACKAGE)).toList() : PACKAGES;
     }
 
+    /** What rules in the margin need, where there are any. */
+    private static List<String> changes(Document document) {
+        return document.changed().isEmpty() ? List.of() : LatexChanges.DEFINITIONS;
+    }
+
     private static List<String> body(Document document) throws RefusedException {
         List<String> lines = new ArrayList<>();
-        List<Block> blocks = document.blocks();
-        for (int i = 0; i < blocks.size(); i++) {
-            boolean continues = i > 0 && blocks.get(i - 1) instanceof Labelled && blocks.get(i) instanceof Labelled;
-            boolean goesOn = i + 1 < blocks.size() && blocks.get(i + 1) instanceof Labelled;
-            if (blocks.get(i) instanceof Labelled && !continues) {
+        for (int i = 0; i < document.blocks().size(); i++) {
+            boolean isChanged = document.isChanged(i);
+            Block block = document.blocks().get(i);
+            boolean isBoxed = isChanged && !(block instanceof Document.Table);
+            boolean isFirst = !(block instanceof Labelled) || !isOfOneList(document, i - 1);
+            boolean isLast = !(block instanceof Labelled) || !isOfOneList(document, i);
+            if (isBoxed && isFirst) {
+                lines.addAll(List.of("", "\\begin{pofkchanged}"));
+            }
+            if (block instanceof Labelled && isFirst) {
                 lines.addAll(List.of("", "\\begin{description}", "\\setlength{\\itemsep}{0pt}"));
             }
-            lines.addAll(blocks.get(i).accept(new Lines()));
-            if (blocks.get(i) instanceof Labelled && !goesOn) {
+            List<String> latex = block.accept(new Lines());
+            lines.addAll(isChanged ? LatexChanges.table(latex) : latex);
+            if (block instanceof Labelled && isLast) {
                 lines.add("\\end{description}");
+            }
+            if (isBoxed && isLast) {
+                lines.add("\\end{pofkchanged}");
             }
         }
         requireSettable(lines);
         return lines;
+    }
+
+    /** Whether a label and the next stand in one list: both have changed, or neither has. */
+    private static boolean isOfOneList(Document document, int place) {
+        List<Block> blocks = document.blocks();
+        return place >= 0 && place + 1 < blocks.size() && blocks.get(place) instanceof Labelled
+                && blocks.get(place + 1) instanceof Labelled
+                && document.isChanged(place) == document.isChanged(place + 1);
     }
 
     /** Refuses what the fonts don't have; everything else is in ASCII or a letter that they have. */

@@ -28,8 +28,23 @@ public final class ReportDocument {
         this.convention = convention;
     }
 
-    /** What is brief leaves out how the formulas were derived and checked, not why they hold. */
+    /**
+     * What is brief leaves out how the formulas were derived and checked, not why they hold. What is other than in the
+     * same report of an earlier model is marked, and said before all results; a file's name alone is no difference.
+     */
     public static Document of(Report report, Depth depth, Style style, Convention convention) {
+        Document document = alone(report.alone(), depth, style, convention);
+        return report.since().map(earlier -> DocumentDifference
+                .marked(alone(earlier.asMadeLike(report), depth, style, convention), document)
+                .with(firstSection(document.blocks()), ChangeBlocks.of(earlier, report, style))).orElse(document);
+    }
+
+    private static int firstSection(List<Block> blocks) {
+        return (int) blocks.stream().takeWhile(block -> !(block instanceof Heading heading) || heading.level() < 2)
+                .count();
+    }
+
+    private static Document alone(Report report, Depth depth, Style style, Convention convention) {
         ReportDocument document = new ReportDocument(report, style, convention);
         document.blocks.addAll(before(report, style));
         if (depth == Depth.FULL) {
@@ -46,10 +61,12 @@ public final class ReportDocument {
                 .flatMap(output -> output.transform().map(OutputSequence::of).stream()).toList());
     }
 
-    /** The first page, the values, each answer in a section of its own, and what was modelled. */
+    /** The first page, what has changed, the values, each answer in a section of its own, and what was modelled. */
     static List<Block> before(Report report, Style style) {
         DerivedModel derived = report.derived();
         List<Block> blocks = new ArrayList<>(ReportSummary.of(report, style));
+        report.since().ifPresent(earlier -> blocks.addAll(firstSection(blocks),
+                ChangeBlocks.of(earlier, report, style)));
         blocks.addAll(values(report, style));
         blocks.addAll(sections(report, Place.RESULTS));
         blocks.addAll(ModelBlocks.of(derived.model(), outputs(derived), derived.structure()));

@@ -69,7 +69,7 @@ final class ReportSummary {
         if (!output.isDecided()) {
             label("formula", MissingBlocks.NOT_DECIDED);
         }
-        output.longRun().ifPresent(checks -> longRun(checks.byPoles(), figures));
+        blocks.addAll(facts(output, figures, style));
         if (!output.values().isEmpty()) {
             label("values", values(output.values()));
         }
@@ -108,12 +108,19 @@ final class ReportSummary {
         return "for every k ≥ 0, proved" + (from > 0 ? "; without the delta terms from k = " + from + " on" : "");
     }
 
-    private void longRun(LongRun longRun, KeyFigures figures) {
-        label("long run", new LongRunProse(style.digits()).of(longRun));
-        figures.settling().ifPresent(settling -> label("settles",
-                SettlingProse.of(settling, longRun, style.digits())));
-        figures.highest().ifPresent(peak -> label("highest", ValueText.of(peak.value(), style.digits())
-                + peak.at().map(k -> " at k = " + k).orElse(", approached as k grows and never reached")));
+    /** Where an output tends to, when it is there, and how high it gets. */
+    static List<Labelled> facts(DerivedOutput output, KeyFigures figures, Style style) {
+        List<Labelled> facts = new ArrayList<>();
+        output.longRun().ifPresent(checks -> {
+            LongRun longRun = checks.byPoles();
+            facts.add(new Labelled("long run", new LongRunProse(style.digits()).of(longRun)));
+            figures.settling().ifPresent(settling -> facts.add(new Labelled("settles",
+                    SettlingProse.of(settling, longRun, style.digits()))));
+            figures.highest().ifPresent(peak -> facts.add(new Labelled("highest", ValueText.of(peak.value(),
+                    style.digits()) + peak.at().map(k -> " at k = " + k)
+                    .orElse(", approached as k grows and never reached"))));
+        });
+        return facts;
     }
 
     /** A few, spread over those that are listed later. */

@@ -19,21 +19,29 @@ import org.pofk.text.Columns;
 public record TextWriter(Alphabet alphabet, Charset charset, int width) {
     private static final int INDENT = 2;
     private static final int LONGEST_LABEL = 24;
+    private static final String CHANGED = "| ";
 
     /** Eighty columns. */
     public static TextWriter of(Alphabet alphabet, Charset charset) {
         return new TextWriter(alphabet, charset, 80);
     }
 
-    /** The document's lines, each ended by a line feed. */
+    /** The document's lines, each ended by a line feed; a margin for what has changed only where something has. */
     public String write(Document document) {
+        return document.changed().isEmpty() ? written(document, "", "")
+                : new TextWriter(alphabet, charset, width - CHANGED.length()).written(document, CHANGED,
+                        " ".repeat(CHANGED.length()));
+    }
+
+    private String written(Document document, String beforeChanged, String beforeOthers) {
         List<String> lines = new ArrayList<>();
         for (int i = 0; i < document.blocks().size(); i++) {
             Block block = document.blocks().get(i);
             if (i > 0 && needsBlankLine(document.blocks().get(i - 1), block)) {
                 lines.add("");
             }
-            lines.addAll(block.accept(new Lines(labelWidth(document.blocks(), i))));
+            String before = document.isChanged(i) ? beforeChanged : beforeOthers;
+            block.accept(new Lines(labelWidth(document.blocks(), i))).forEach(line -> lines.add(before + line));
         }
         StringBuilder text = new StringBuilder();
         lines.forEach(line -> text.append(line.stripTrailing()).append('\n'));

@@ -1,0 +1,26 @@
+package org.pofk.chain;
+
+import java.util.List;
+
+/**
+ * What one statement of a model is about: {@code MOVE both, one} is the move from both to one.
+ *
+ * @param of names of states, outputs and the like, as many as the subject needs
+ */
+public record Entry(Subject subject, List<String> of) {
+
+    /** In the order in which a reader is told of them. */
+    public enum Subject {
+        TITLE, DOCUMENT, REVISION, PREPARED_BY, ASSUMPTION, KIND, STEP, STEP_LASTS, FIRST_STEP, STATE, START,
+        PARAMETER, DEFINITION, RANGE, MEANING, SOURCE, MOVE, ACTION, ACTION_MOVE, PHASE, PHASE_MOVE, AFTER_PHASES, SET,
+        OUTPUT, NOTE
+    }
+
+    public Entry {
+        of = List.copyOf(of);
+    }
+
+    static Entry of(Subject subject, String... of) {
+        return new Entry(subject, List.of(of));
+    }
+}

@@ -1,0 +1,50 @@
+package org.pofk.chain;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.LinkedHashSet;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.Set;
+
+/**
+ * What a later model says otherwise than an earlier one, entry by entry, in exact values. Nothing for two models that
+ * say the same, whatever their files look like.
+ *
+ * @param changes by subject, then in the order of the later model, what is gone last
+ * @param renamed the later name of a state by its earlier one
+ */
+public record ModelChanges(List<Change> changes, Map<String, String> renamed) {
+
+    /** An entry with its values; empty in a model without it. A renamed state's entries bear the later name. */
+    public record Change(Entry entry, Optional<String> before, Optional<String> after) {
+    }
+
+    public ModelChanges {
+        changes = List.copyOf(changes);
+        renamed = Map.copyOf(renamed);
+    }
+
+    public static ModelChanges of(Model before, Model after) {
+        Map<String, String> renamed = RenamedStates.of(before.chain(), after.chain());
+        Map<Entry, String> was = ModelEntries.of(before, renamed);
+        Map<Entry, String> is = ModelEntries.of(after, Map.of());
+        Set<Entry> all = new LinkedHashSet<>(is.keySet());
+        all.addAll(was.keySet());
+        List<Change> changes = new ArrayList<>();
+        for (Entry entry : all) {
+            Change change = new Change(entry, Optional.ofNullable(was.get(entry)), Optional.ofNullable(is.get(entry)));
+            if (!change.before().equals(change.after())) {
+                changes.add(change);
+            }
+        }
+        changes.sort(Comparator.comparing(change -> change.entry().subject()));
+        return new ModelChanges(changes, renamed);
+    }
+
+    /** Whether both models say the same. */
+    public boolean isEmpty() {
+        return changes.isEmpty();
+    }
+}

@@ -1,0 +1,77 @@
+package org.pofk.report;
+
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Set;
+import java.util.TreeSet;
+import org.pofk.report.Document.Block;
+import org.pofk.report.Document.Heading;
+
+/**
+ * Which blocks of a document differ from an earlier one: those outside a longest common subsequence (Wagner and Fischer,
+ * 1974) of the blocks below the same headings. A title, the heading of level 1, is no such heading, and no heading is
+ * said to differ. Time is the product of the lengths of the sections compared.
+ */
+final class DocumentDifference {
+    private DocumentDifference() {
+    }
+
+    /** The later document, what differs in it marked. */
+    static Document marked(Document before, Document after) {
+        Map<List<Object>, List<Integer>> sections = sections(before.blocks());
+        Set<Integer> changed = new TreeSet<>();
+        sections(after.blocks()).forEach((headings, places) ->
+                changed.addAll(differing(before.blocks(), sections.getOrDefault(headings, List.of()), after.blocks(), places)));
+        return after.withChanged(changed);
+    }
+
+    /** Places of blocks by the headings they stand below; headings that are there again are counted. */
+    private static Map<List<Object>, List<Integer>> sections(List<Block> blocks) {
+        Map<List<Object>, List<Integer>> sections = new HashMap<>();
+        Map<List<Object>, Integer> again = new HashMap<>();
+        List<Object> path = List.of();
+        List<Heading> headings = new ArrayList<>();
+        for (int i = 0; i < blocks.size(); i++) {
+            if (blocks.get(i) instanceof Heading heading) {
+                headings.removeIf(above -> above.level() >= heading.level());
+                if (heading.level() > 1) {
+                    headings.add(heading);
+                }
+                path = List.copyOf(headings);
+                List<Object> counted = new ArrayList<>(path);
+                counted.add(again.merge(path, 1, Integer::sum));
+                path = counted;
+            } else {
+                sections.computeIfAbsent(path, some -> new ArrayList<>()).add(i);
+            }
+        }
+        return sections;
+    }
+
+    private static List<Integer> differing(List<Block> before, List<Integer> from, List<Block> after,
+            List<Integer> to) {
+        int[][] common = new int[from.size() + 1][to.size() + 1];
+        for (int i = from.size() - 1; i >= 0; i--) {
+            for (int j = to.size() - 1; j >= 0; j--) {
+                common[i][j] = before.get(from.get(i)).equals(after.get(to.get(j))) ? common[i + 1][j + 1] + 1
+                        : Math.max(common[i + 1][j], common[i][j + 1]);
+            }
+        }
+        List<Integer> differing = new ArrayList<>();
+        int i = 0;
+        for (int j = 0; j < to.size(); j++) {
+            while (i < from.size() && common[i][j] == common[i + 1][j]) {
+                i++;
+            }
+            boolean isCommon = i < from.size() && before.get(from.get(i)).equals(after.get(to.get(j)));
+            if (isCommon) {
+                i++;
+            } else {
+                differing.add(to.get(j));
+            }
+        }
+        return differing;
+    }
+}

@@ -1,0 +1,34 @@
+package org.pofk.report;
+
+import java.util.List;
+
+/**
+ * A rule in the margin beside what has changed, in plain TeX that every LaTeX has: what is beside the rule is set in a
+ * box, a high one in pieces, so that pages may end within it. A table, which can't stand in a box, gets the rule in its
+ * rows.
+ */
+final class LatexChanges {
+    /** Leave alone those who read LaTeX without a TeX: to them the environment is one they don't know. */
+    static final List<String> DEFINITIONS = List.of("\\makeatletter",
+            "\\newbox\\pofkchangedbox \\newbox\\pofkchangedpart",
+            "\\@namedef{pofkchangedrule}#1{\\par\\noindent\\llap{\\vrule width 1.2pt height\\ht#1 depth\\dp#1\\hskip 8pt}"
+                    + "\\box#1\\par}",
+            "\\@namedef{pofkchanged}{\\par\\setbox\\pofkchangedbox\\vbox\\bgroup\\hsize\\linewidth\\@parboxrestore"
+                    + "\\parskip6pt plus 2pt}",
+            "\\@namedef{endpofkchanged}{\\par\\egroup\\splittopskip=10pt"
+                    + "\\loop\\ifdim\\ht\\pofkchangedbox>.5\\textheight"
+                    + "\\setbox\\pofkchangedpart\\vsplit\\pofkchangedbox to .25\\textheight"
+                    + "\\setbox\\pofkchangedpart\\vbox{\\unvbox\\pofkchangedpart}"
+                    + "\\pofkchangedrule\\pofkchangedpart\\repeat\\pofkchangedrule\\pofkchangedbox}",
+            "\\makeatother");
+    private static final String FIRST_COLUMN = "\\begin{longtable}{@{";
+
+    private LatexChanges() {
+    }
+
+    /** The lines of a table, with the rule beside its rows. */
+    static List<String> table(List<String> lines) {
+        return lines.stream().map(line -> line.startsWith(FIRST_COLUMN) ? FIRST_COLUMN
+                + "\\hskip-9.2pt\\vrule width 1.2pt\\hskip8pt" + line.substring(FIRST_COLUMN.length()) : line).toList();
+    }
+}
