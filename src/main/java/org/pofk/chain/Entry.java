@@ -12,7 +12,7 @@ public record Entry(Subject subject, List<String> of) {
     /** In the order in which a reader is told of them. */
     public enum Subject {
         TITLE, DOCUMENT, REVISION, PREPARED_BY, ASSUMPTION, KIND, STEP, STEP_LASTS, FIRST_STEP, STATE, START,
-        PARAMETER, DEFINITION, RANGE, MEANING, SOURCE, MOVE, ACTION, ACTION_MOVE, PHASE, PHASE_MOVE, AFTER_PHASES, SET,
+        PARAMETER, DEFINITION, RANGE, MEANING, MOVE, ACTION, ACTION_MOVE, PHASE, PHASE_MOVE, AFTER_PHASES, SET,
         OUTPUT, NOTE
     }
 

@@ -43,6 +43,12 @@ public record ModelChanges(List<Change> changes, Map<String, String> renamed) {
         return new ModelChanges(changes, renamed);
     }
 
+    /** The earlier chain with the later names of its states. */
+    public Chain renamed(Chain before) {
+        return new Chain(before.kind(), before.states().stream().map(name -> renamed.getOrDefault(name, name)).toList(),
+                before.matrix(), before.start(), before.sets(), before.outputs());
+    }
+
     /** Whether both models say the same. */
     public boolean isEmpty() {
         return changes.isEmpty();

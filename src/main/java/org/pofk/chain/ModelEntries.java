@@ -119,13 +119,12 @@ final class ModelEntries {
     private void parameters() {
         for (Model.Parameter parameter : model.parameters()) {
             String name = parameter.name();
-            put(parameter.value(), Subject.PARAMETER, name);
+            put(number(Rational.parse(parameter.value())), Subject.PARAMETER, name);
             put(parameter.definition().filter(text -> !text.equals(parameter.value())), Subject.DEFINITION, name);
             if (parameter.from().isPresent() || parameter.to().isPresent()) {
                 put("from " + parameter.from().orElse("−∞") + " to " + parameter.to().orElse("∞"), Subject.RANGE, name);
             }
             put(parameter.meaning(), Subject.MEANING, name);
-            put(parameter.source(), Subject.SOURCE, name);
         }
     }
 

@@ -1,5 +1,6 @@
 package org.pofk.cli;
 
+import java.nio.file.Path;
 import java.util.function.Consumer;
 import java.util.function.Function;
 import org.pofk.chain.Model;
@@ -47,6 +48,11 @@ final class AnswerOptions {
     /** The model as the file and the command line say it. */
     Model model() throws RefusedException, UsageException {
         return model.read();
+    }
+
+    /** Another model's file, read as the model's own is. */
+    Model modelIn(Path other) throws RefusedException, UsageException {
+        return ScheduleRefusal.unlessScheduled(model.readAsWell(other));
     }
 
     /** What the command line puts in place of the file's own words. */

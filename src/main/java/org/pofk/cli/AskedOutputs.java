@@ -1,5 +1,6 @@
 package org.pofk.cli;
 
+import java.util.ArrayList;
 import java.util.List;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Output;
@@ -27,5 +28,22 @@ final class AskedOutputs {
         } catch (RefusedException unknown) {
             throw new UsageException(unknown.getMessage());
         }
+    }
+
+    /** Of those named the ones that stand for something here; without names the model's, or none of too many states. */
+    static List<Output> thoseOf(Chain chain, List<String> names) {
+        if (names.isEmpty()) {
+            return chain.outputs().isEmpty() && chain.size() > ReportCommand.REPORTED_UNASKED ? List.of()
+                    : Outputs.byDefault(chain);
+        }
+        List<Output> outputs = new ArrayList<>();
+        for (String name : names) {
+            try {
+                outputs.addAll(Outputs.named(chain, List.of(name), Position.ofWhole("--of")));
+            } catch (RefusedException unknown) {
+                continue;
+            }
+        }
+        return outputs;
     }
 }

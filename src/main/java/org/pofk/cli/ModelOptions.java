@@ -51,19 +51,24 @@ final class ModelOptions {
 
     /** The model as the file and the command line say it, its schedule included. */
     Model readWithSchedule() throws RefusedException, UsageException {
-        Overrides overrides = settings.overrides();
-        Source source = Source.read(file);
-        return settings.read(() -> read(source, overrides));
+        return readAsWell(file);
     }
 
-    private Model read(Source source, Overrides overrides) throws RefusedException, UsageException {
+    /** Another file, as this one is read; its schedule included. */
+    Model readAsWell(Path other) throws RefusedException, UsageException {
+        Overrides overrides = settings.overrides();
+        Source source = Source.read(other);
+        return settings.read(() -> read(other, source, overrides));
+    }
+
+    private Model read(Path path, Source source, Overrides overrides) throws RefusedException, UsageException {
         if (FileKind.of(source) != FileKind.MATRIX) {
             refuseTableOptions();
-            return ModelReader.read(source, Optional.ofNullable(file.toAbsolutePath().getParent()),
+            return ModelReader.read(source, Optional.ofNullable(path.toAbsolutePath().getParent()),
                     overrides);
         }
         if (!overrides.parameters().isEmpty()) {
-            throw new UsageException("'" + file + "' is a table of numbers: it has no parameters for --set");
+            throw new UsageException("'" + path + "' is a table of numbers: it has no parameters for --set");
         }
         return MatrixFileReader.read(source, new MatrixFileReader.Options(
                 orientation.map(Orientation::convention), settings.start(), new TableOptions(separator, names)));

@@ -1,22 +1,17 @@
 package org.pofk.cli;
 
 import java.util.ArrayList;
-import java.util.Collections;
 import java.util.Comparator;
 import java.util.EnumSet;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
-import java.util.function.Consumer;
 import java.util.stream.Stream;
-import org.pofk.answer.DerivedModel;
 import org.pofk.answer.Deriving;
-import org.pofk.answer.KeyFigures;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
+import org.pofk.chain.ModelChanges;
 import org.pofk.chain.Output;
-import org.pofk.report.Chart;
-import org.pofk.report.CourseCharts;
 import org.pofk.report.NotebookWriter;
 import org.pofk.report.Provenance;
 import org.pofk.report.Report;
@@ -34,7 +29,7 @@ import picocli.CommandLine.Spec;
 @Command(description = {"Writes the document to hand in: results first, then the whole derivation, worked,",
     "with figures, how it was checked, and what it stands on."})
 final class ReportCommand implements Work {
-    private static final int REPORTED_UNASKED = 12;
+    static final int REPORTED_UNASKED = 12;
 
     @Spec
     private CommandSpec command;
@@ -63,6 +58,9 @@ final class ReportCommand implements Work {
     @Mixin
     private ClaimsOptions claims = new ClaimsOptions();
 
+    @Mixin
+    private SinceOptions since = new SinceOptions();
+
     /** How much of the way is shown. */
     enum Depth {
         BRIEF(Report.Depth.BRIEF), FULL(Report.Depth.FULL);
@@ -85,11 +83,13 @@ final class ReportCommand implements Work {
         Destination destination = options.destination();
         Model read = options.model();
         requireFew(read.chain());
-        List<Output> outputs = AskedOutputs.of(read.chain(), of);
-        List<AskedSection> sections = sections(read, outputs, style);
-        Provenance provenance = provenance(read, sections);
-        Worker.Outcome<Report> outcome = options.within(streams, published ->
-                find(read, outputs, sections, provenance, published));
+        AskedReport asked = asked(read, style);
+        Optional<AskedReport> earlier = earlier(read, style);
+        Provenance provenance = provenance(Stream.concat(asked.files(), earlier.stream().flatMap(AskedReport::files)));
+        Worker.Outcome<Report> outcome = options.within(streams, published -> {
+            Report report = asked.find(provenance, published);
+            earlier.ifPresent(each -> each.find(provenance, found -> published.accept(report.since(found))));
+        });
         if (outcome.published().isEmpty()) {
             return options.undecided(streams);
         }
@@ -114,27 +114,39 @@ final class ReportCommand implements Work {
         }
     }
 
-    private Provenance provenance(Model read, List<AskedSection> sections) {
-        return new Provenance(VersionCommand.program(), TypedLine.of("report", command.commandLine().getParseResult()
-                .originalArgs()), Stream.of(
-                        Stream.of(read.origin()), read.tables().stream(), sections.stream().flatMap(section ->
-                        section.files().stream())).flatMap(files -> files).distinct().toList());
+    private AskedReport asked(Model read, Style style) throws RefusedException, UsageException {
+        List<Output> outputs = AskedOutputs.of(read.chain(), of);
+        return new AskedReport(read, outputs, sections(read, outputs, style), at.steps(), extras());
     }
 
-    private void find(Model read, List<Output> outputs, List<AskedSection> sections, Provenance provenance,
-            Consumer<Report> published) {
-        List<ReportSection> answers = new ArrayList<>(sections.stream()
-                .map(section -> ReportSection.notReached(section.place(), section.title())).toList());
-        List<KeyFigures> none = Collections.nCopies(outputs.size(), KeyFigures.NONE);
-        DerivedModel derived = Deriving.of(read, outputs, at.steps(), extras(), partly ->
-                published.accept(new Report(partly, none, List.of(), answers, provenance)));
-        List<KeyFigures> figures = derived.outputs().stream().map(each -> KeyFigures.of(read.chain(), each)).toList();
-        List<Chart.Course> courses = CourseCharts.of(derived, figures);
-        published.accept(new Report(derived, figures, courses, answers, provenance));
-        for (int i = 0; i < sections.size(); i++) {
-            answers.set(i, sections.get(i).work().get());
-            published.accept(new Report(derived, figures, courses, answers, provenance));
+    /** The same of the model of an earlier issue, as far as it can be asked of that one; states by their later names. */
+    private Optional<AskedReport> earlier(Model later, Style style) throws RefusedException, UsageException {
+        Optional<Model> read = since.model(options);
+        if (read.isEmpty()) {
+            return Optional.empty();
         }
+        Model model = read.get();
+        Chain chain = ModelChanges.of(model, later).renamed(model.chain());
+        List<Output> outputs = AskedOutputs.thoseOf(chain, of);
+        List<AskedSection> sections = new ArrayList<>(conditions.sections(model, outputs, style));
+        sections.addAll(whereAsked(() -> passage.sections(chain, at.steps(), style)));
+        sections.addAll(whereAsked(() -> claims.sections(model, options.settings())));
+        return Optional.of(new AskedReport(model, outputs, sections, at.steps(), extras()));
+    }
+
+    /** None about names that the earlier model doesn't have, or by a derivation that is about the later one. */
+    private static List<AskedSection> whereAsked(SettingOptions.FileReading<List<AskedSection>> sections)
+            throws RefusedException {
+        try {
+            return sections.read();
+        } catch (UsageException notOfThatModel) {
+            return List.of();
+        }
+    }
+
+    private Provenance provenance(Stream<Model.Origin> files) {
+        return new Provenance(VersionCommand.program(), TypedLine.of("report", command.commandLine().getParseResult()
+                .originalArgs()), files.distinct().toList());
     }
 
     private Set<Deriving.Extra> extras() {

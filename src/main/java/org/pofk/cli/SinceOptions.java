@@ -6,15 +6,15 @@ import org.pofk.chain.Model;
 import org.pofk.text.RefusedException;
 import picocli.CommandLine.Option;
 
-/** The model that a report was issued of before. */
+/** The model of an earlier issue of a report. */
 final class SinceOptions {
     @Option(names = "--since", paramLabel = "OLD",
-            description = "the model of an earlier issue: what has changed in the input, each result before and now,"
-                    + " a rule in the margin beside what differs")
+            description = "the model file of an earlier issue: the report then says what has changed in the input and"
+                    + " each result before and now, and has a rule in the margin beside what differs")
     private Optional<Path> file = Optional.empty();
 
     /** Read as the model itself is, with what the command line puts in place of its words; its faults are its own. */
-    Optional<Model> read(ModelOptions model) throws RefusedException, UsageException {
-        return file.isEmpty() ? Optional.empty() : Optional.of(model.read(file.get()));
+    Optional<Model> model(AnswerOptions options) throws RefusedException, UsageException {
+        return file.isEmpty() ? Optional.empty() : Optional.of(options.modelIn(file.get()));
     }
 }

@@ -6,11 +6,13 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.stream.IntStream;
+import java.util.stream.Stream;
 import org.pofk.answer.DerivedOutput;
 import org.pofk.answer.KeyFigures;
 import org.pofk.answer.StepValue;
 import org.pofk.chain.Model;
 import org.pofk.chain.ModelChanges;
+import org.pofk.chain.ModelChanges.Change;
 import org.pofk.exact.Decimals;
 import org.pofk.exact.Rational;
 import org.pofk.modes.FormulaShape;
@@ -24,7 +26,11 @@ import org.pofk.transform.Transform;
 /** What is other than in an earlier issue: the input, then each result before and after. */
 final class ChangeBlocks {
     private static final Prose NOTHING = Prose.of("–");
+    private static final String BEFORE = "before";
+    private static final String NOW = "now";
     private static final int CHANGE_DIGITS = 3;
+    /** What fits into a column of a table with two of its kind. */
+    private static final int SHORT = 24;
 
     private final Report before;
     private final Report after;
@@ -49,14 +55,15 @@ final class ChangeBlocks {
         Model old = before.derived().model();
         blocks.add(new Heading(2, old.about().revision().map(revision -> Prose.of("Changes since revision ")
                 .andName(revision)).orElseGet(() -> Prose.of("Changes since ").andName(old.origin().file()))));
-        blocks.add(file("before", old.origin()));
-        blocks.add(file("now", after.derived().model().origin()));
+        blocks.add(file(BEFORE, old.origin()));
+        blocks.add(file(NOW, after.derived().model().origin()));
         input();
         List<Found> was = Found.in(before);
         List<Found> is = Found.in(after);
-        is.forEach(now -> output(was.stream().filter(old -> isSame(old, now)).findFirst(), Optional.of(now), now.name()));
-        was.stream().filter(old -> is.stream().noneMatch(now -> isSame(old, now)))
-                .forEach(old -> output(Optional.of(old), Optional.empty(), old.name()));
+        is.forEach(now -> output(was.stream().filter(each -> isSame(each, now)).findFirst(), Optional.of(now),
+                now.name()));
+        was.stream().filter(gone -> is.stream().noneMatch(now -> isSame(gone, now)))
+                .forEach(gone -> output(Optional.of(gone), Optional.empty(), gone.name()));
         answers();
         blocks.add(new Paragraph("What differs from this report of the earlier file has a rule in the margin, where the"
                 + " format has one."));
@@ -91,32 +98,57 @@ final class ChangeBlocks {
         return changes.renamed().getOrDefault(old.name(), old.name()).equals(now.name());
     }
 
+    /** Short values in a table, longer words below each other. */
     private void input() {
         if (changes.isEmpty()) {
             blocks.add(new Paragraph("Nothing has changed in the input: every exact value and every word is the same."));
             return;
         }
-        blocks.add(new Table(Prose.of("What has changed in the input"), header("entry"), changes.changes().stream()
-                .map(change -> List.of(EntryProse.of(change.entry()), named(change.before()), named(change.after())))
-                .toList()));
+        blocks.add(new Heading(3, "What has changed in the input"));
+        List<Change> inTable = changes.changes().stream().filter(ChangeBlocks::isShort).toList();
+        if (!inTable.isEmpty()) {
+            blocks.add(new Table(Prose.EMPTY, List.of(Prose.of("entry"), Prose.of(BEFORE), Prose.of(NOW)),
+                    inTable.stream().map(change -> List.of(EntryProse.of(change.entry()), named(change.before()),
+                            named(change.after()))).toList()));
+        }
+        changes.changes().stream().filter(change -> !isShort(change)).forEach(change ->
+                beforeAndNow(EntryProse.of(change.entry()), change.before().map(Prose::name),
+                        change.after().map(Prose::name)));
     }
 
-    private static List<Prose> header(String first) {
-        return List.of(Prose.of(first), Prose.of("before"), Prose.of("now"));
+    private static boolean isShort(Change change) {
+        return Stream.concat(change.before().stream(), change.after().stream()).allMatch(text -> text.length() <= SHORT);
     }
 
     private static Prose named(Optional<String> value) {
         return value.map(Prose::name).orElse(NOTHING);
     }
 
+    private void beforeAndNow(Prose label, Optional<Prose> was, Optional<Prose> is) {
+        if (was.isPresent() && was.equals(is)) {
+            blocks.add(new Labelled(label, was.get().and(", as before")));
+        } else {
+            was.ifPresent(text -> blocks.add(new Labelled(label.and(is.isPresent() ? ", " + BEFORE : ", gone"), text)));
+            is.ifPresent(text -> blocks.add(new Labelled(label.and(was.isPresent() ? ", " + NOW : ", new"), text)));
+        }
+    }
+
     private void output(Optional<Found> old, Optional<Found> now, String name) {
-        List<List<Prose>> rows = new ArrayList<>();
-        rows.add(row(Prose.of("formula"), old.flatMap(Found::shape), now.flatMap(Found::shape)));
-        pair(old.map(each -> each.facts(style)).orElse(List.of()), now.map(each -> each.facts(style)).orElse(List.of()))
-                .forEach((label, texts) -> rows.add(row(label, texts.get(0), texts.get(1))));
-        values(values(old), values(now), name, rows);
-        blocks.add(new Table(Prose.of("Results for ").andName(name).and(": ").and(compared(old, now)),
-                List.of(Prose.of("result"), Prose.of("before"), Prose.of("now"), Prose.of("change")), rows));
+        blocks.add(new Heading(3, Prose.name(name).and(": ").and(compared(old, now))));
+        beforeAndNow(Prose.of("formula"), old.flatMap(Found::shape), now.flatMap(Found::shape));
+        pairs(old.map(each -> each.facts(style)), now.map(each -> each.facts(style)));
+        Map<Integer, StepValue> was = values(old);
+        Map<Integer, StepValue> is = values(now);
+        List<Integer> steps = List.copyOf(is.isEmpty() ? was.keySet() : is.keySet());
+        if (!steps.isEmpty()) {
+            blocks.add(new Table(Prose.EMPTY, List.of(Prose.of("k"), Prose.of(BEFORE), Prose.of(NOW), Prose.of("change")),
+                    steps.stream().map(k -> row(k, Optional.ofNullable(was.get(k)), Optional.ofNullable(is.get(k))))
+                            .toList()));
+        }
+    }
+
+    private List<Prose> row(int k, Optional<StepValue> was, Optional<StepValue> is) {
+        return List.of(Prose.of(String.valueOf(k)), shown(was), shown(is), Prose.of(difference(was, is)));
     }
 
     /** Which of the formula's shape and numbers are other ones. */
@@ -127,27 +159,12 @@ final class ChangeBlocks {
         Optional<Prose> was = old.get().shape();
         Optional<Prose> is = now.get().shape();
         if (was.isEmpty() || is.isEmpty()) {
-            return MissingBlocks.NOT_DECIDED;
+            return "the formula is " + MissingBlocks.NOT_DECIDED;
         }
         boolean isSame = old.get().output().transform().map(Transform::y)
                 .equals(now.get().output().transform().map(Transform::y));
         return isSame ? "the formula is the same" : was.equals(is)
                 ? "the formula has the same shape, with other numbers" : "the formula has another shape";
-    }
-
-    private static List<Prose> row(Prose name, Optional<Prose> was, Optional<Prose> is) {
-        return List.of(name, was.orElse(NOTHING), is.orElse(NOTHING),
-                Prose.of(was.equals(is) ? "none" : "changed"));
-    }
-
-    private void values(Map<Integer, StepValue> was, Map<Integer, StepValue> is, String name,
-            List<List<Prose>> rows) {
-        for (int k : (is.isEmpty() ? was : is).keySet()) {
-            Optional<StepValue> earlier = Optional.ofNullable(was.get(k));
-            Optional<StepValue> later = Optional.ofNullable(is.get(k));
-            rows.add(List.of(Prose.name(name).and("(" + k + ")"), shown(earlier), shown(later),
-                    Prose.of(difference(earlier, later))));
-        }
     }
 
     private static Map<Integer, StepValue> values(Optional<Found> found) {
@@ -169,27 +186,25 @@ final class ChangeBlocks {
         }
         Rational difference = to.get().minus(from.get());
         return difference.isZero() ? "none" : (difference.signum() > 0 ? "+" : "")
-                + Decimals.of(difference, CHANGE_DIGITS).text();
+                + ChartNumber.minus(Decimals.of(difference, CHANGE_DIGITS).text());
     }
 
     private void answers() {
         List<Labelled> was = before.answers().stream().flatMap(answer -> answer.keyFigures().stream()).toList();
         List<Labelled> is = after.answers().stream().flatMap(answer -> answer.keyFigures().stream()).toList();
-        if (was.isEmpty() && is.isEmpty()) {
-            return;
+        if (!was.isEmpty() || !is.isEmpty()) {
+            blocks.add(new Heading(3, "Answers"));
+            pairs(Optional.of(was), Optional.of(is));
         }
-        List<List<Prose>> rows = new ArrayList<>();
-        pair(was, is).forEach((label, texts) -> rows.add(row(label, texts.get(0), texts.get(1))));
-        blocks.add(new Table(Prose.of("Answers"),
-                List.of(Prose.of("answer"), Prose.of("before"), Prose.of("now"), Prose.of("change")), rows));
     }
 
-    /** What stands behind each label, before and after, in the later order. */
-    private static Map<Prose, List<Optional<Prose>>> pair(List<Labelled> was, List<Labelled> is) {
-        Map<Prose, List<Optional<Prose>>> pairs = new LinkedHashMap<>();
-        is.forEach(now -> pairs.put(now.label(), List.of(text(was, now.label()), Optional.of(now.text()))));
-        was.forEach(old -> pairs.putIfAbsent(old.label(), List.of(Optional.of(old.text()), Optional.empty())));
-        return pairs;
+    /** What stands behind each label, in the later order. */
+    private void pairs(Optional<List<Labelled>> earlier, Optional<List<Labelled>> later) {
+        List<Labelled> was = earlier.orElse(List.of());
+        List<Labelled> is = later.orElse(List.of());
+        is.forEach(now -> beforeAndNow(now.label(), text(was, now.label()), Optional.of(now.text())));
+        was.stream().filter(gone -> text(is, gone.label()).isEmpty())
+                .forEach(gone -> beforeAndNow(gone.label(), Optional.of(gone.text()), Optional.empty()));
     }
 
     private static Optional<Prose> text(List<Labelled> all, Prose label) {

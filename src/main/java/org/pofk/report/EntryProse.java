@@ -26,7 +26,6 @@ final class EntryProse {
             case DEFINITION -> named("definition of ", of);
             case RANGE -> named("range of ", of);
             case MEANING -> named("meaning of ", of);
-            case SOURCE -> named("source of ", of);
             case MOVE -> move(of);
             case ACTION -> named("action ", of);
             case ACTION_MOVE, PHASE_MOVE -> Prose.name(of.get(0)).and(": ").and(move(of.subList(1, of.size())));

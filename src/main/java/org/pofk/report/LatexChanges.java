@@ -14,7 +14,9 @@ final class LatexChanges {
             "\\@namedef{pofkchangedrule}#1{\\par\\noindent\\llap{\\vrule width 1.2pt height\\ht#1 depth\\dp#1\\hskip 8pt}"
                     + "\\box#1\\par}",
             "\\@namedef{pofkchanged}{\\par\\setbox\\pofkchangedbox\\vbox\\bgroup\\hsize\\linewidth\\@parboxrestore"
-                    + "\\parskip6pt plus 2pt}",
+                    + "\\parskip4pt plus 2pt\\def\\@listi{\\leftmargin\\leftmargini\\topsep0pt\\partopsep0pt\\parsep4pt"
+                    + "\\itemsep0pt}\\abovedisplayskip3pt\\belowdisplayskip3pt\\abovedisplayshortskip0pt"
+                    + "\\belowdisplayshortskip3pt}",
             "\\@namedef{endpofkchanged}{\\par\\egroup\\splittopskip=10pt"
                     + "\\loop\\ifdim\\ht\\pofkchangedbox>.5\\textheight"
                     + "\\setbox\\pofkchangedpart\\vsplit\\pofkchangedbox to .25\\textheight"

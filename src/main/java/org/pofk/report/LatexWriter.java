@@ -77,10 +77,13 @@ public final class LatexWriter {
                 lines.addAll(List.of("", "\\begin{pofkchanged}"));
             }
             if (block instanceof Labelled && isFirst) {
-                lines.addAll(List.of("", "\\begin{description}", "\\setlength{\\itemsep}{0pt}"));
+                lines.addAll(List.of("", "\\begin{description}"));
             }
             List<String> latex = block.accept(new Lines());
             lines.addAll(isChanged ? LatexChanges.table(latex) : latex);
+            if (block instanceof Labelled && isFirst) {
+                lines.add("\\setlength{\\itemsep}{0pt}");
+            }
             if (block instanceof Labelled && isLast) {
                 lines.add("\\end{description}");
             }

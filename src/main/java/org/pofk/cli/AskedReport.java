@@ -1,0 +1,53 @@
+package org.pofk.cli;
+
+import java.util.ArrayList;
+import java.util.Collections;
+import java.util.List;
+import java.util.Set;
+import java.util.function.Consumer;
+import java.util.stream.Stream;
+import org.pofk.answer.DerivedModel;
+import org.pofk.answer.Deriving;
+import org.pofk.answer.KeyFigures;
+import org.pofk.chain.Model;
+import org.pofk.chain.Output;
+import org.pofk.report.Chart;
+import org.pofk.report.CourseCharts;
+import org.pofk.report.Provenance;
+import org.pofk.report.Report;
+import org.pofk.report.ReportSection;
+
+/**
+ * A report that is asked for, before anything is found.
+ *
+ * @param at     the steps of the table of values
+ * @param extras what else is derived
+ */
+record AskedReport(Model model, List<Output> outputs, List<AskedSection> sections, List<Integer> at,
+        Set<Deriving.Extra> extras) {
+
+    /** What is read for it: the model, its tables, what its sections are about. */
+    Stream<Model.Origin> files() {
+        return Stream.of(Stream.of(model.origin()), model.tables().stream(),
+                sections.stream().flatMap(section -> section.files().stream())).flatMap(files -> files);
+    }
+
+    /** Finds what it says, and publishes all that is found by then, again and again. */
+    Report find(Provenance provenance, Consumer<Report> published) {
+        List<ReportSection> answers = new ArrayList<>(sections.stream()
+                .map(section -> ReportSection.notReached(section.place(), section.title())).toList());
+        List<KeyFigures> none = Collections.nCopies(outputs.size(), KeyFigures.NONE);
+        DerivedModel derived = Deriving.of(model, outputs, at, extras, partly ->
+                published.accept(new Report(partly, none, List.of(), answers, provenance)));
+        List<KeyFigures> figures = derived.outputs().stream().map(each -> KeyFigures.of(model.chain(), each)).toList();
+        List<Chart.Course> courses = CourseCharts.of(derived, figures);
+        Report report = new Report(derived, figures, courses, answers, provenance);
+        published.accept(report);
+        for (int i = 0; i < sections.size(); i++) {
+            answers.set(i, sections.get(i).work().get());
+            report = new Report(derived, figures, courses, answers, provenance);
+            published.accept(report);
+        }
+        return report;
+    }
+}
