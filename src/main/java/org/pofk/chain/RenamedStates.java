@@ -7,8 +7,8 @@ import java.util.Optional;
 
 /**
  * States that bear another name in a later chain: gone by name here, new by name there, with the same start, the same
- * chance to stay, and the same moves from and to every state that both chains name. Decided on exact numbers; of
- * several that fit, in the order of the chains.
+ * chance to stay, and the same moves from and to every state that both chains name, one at least. Decided on exact
+ * numbers; of several that fit, in the order of the chains.
  */
 final class RenamedStates {
     private final Chain before;
@@ -39,7 +39,9 @@ final class RenamedStates {
 
     private boolean isSame(int was, int is) {
         List<String> kept = before.states().stream().filter(after.states()::contains).toList();
-        return before.start().get(was).equals(after.start().get(is))
+        boolean isJoined = kept.stream().map(before.states()::indexOf).anyMatch(there ->
+                !before.matrix().at(was, there).isZero() || !before.matrix().at(there, was).isZero());
+        return isJoined && before.start().get(was).equals(after.start().get(is))
                 && before.matrix().at(was, was).equals(after.matrix().at(is, is))
                 && kept.stream().allMatch(name -> {
                     int there = before.states().indexOf(name);

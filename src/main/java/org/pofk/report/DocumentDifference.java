@@ -7,12 +7,13 @@ import java.util.Map;
 import java.util.Set;
 import java.util.TreeSet;
 import org.pofk.report.Document.Block;
+import org.pofk.report.Document.Figure;
 import org.pofk.report.Document.Heading;
 
 /**
  * Which blocks of a document differ from an earlier one: those outside a longest common subsequence (Wagner and Fischer,
  * 1974) of the blocks below the same headings. A title, the heading of level 1, is no such heading, and no heading is
- * said to differ. Time is the product of the lengths of the sections compared.
+ * said to differ. Figures are the same where the same is drawn and said. Time is the product of the lengths of the sections compared.
  */
 final class DocumentDifference {
     private DocumentDifference() {
@@ -21,10 +22,17 @@ final class DocumentDifference {
     /** The later document, what differs in it marked. */
     static Document marked(Document before, Document after) {
         Map<List<Object>, List<Integer>> sections = sections(before.blocks());
+        List<Object> was = before.blocks().stream().map(DocumentDifference::shown).toList();
+        List<Object> is = after.blocks().stream().map(DocumentDifference::shown).toList();
         Set<Integer> changed = new TreeSet<>();
         sections(after.blocks()).forEach((headings, places) ->
-                changed.addAll(differing(before.blocks(), sections.getOrDefault(headings, List.of()), after.blocks(), places)));
+                changed.addAll(differing(was, sections.getOrDefault(headings, List.of()), is, places)));
         return after.withChanged(changed);
+    }
+
+    /** What is equal for blocks that show the same: a figure's certified numbers aren't, but what they look like is. */
+    private static Object shown(Block block) {
+        return block instanceof Figure figure ? List.of(figure.caption(), SvgChart.part(figure.chart())) : block;
     }
 
     /** Places of blocks by the headings they stand below; headings that are there again are counted. */
@@ -50,7 +58,7 @@ final class DocumentDifference {
         return sections;
     }
 
-    private static List<Integer> differing(List<Block> before, List<Integer> from, List<Block> after,
+    private static List<Integer> differing(List<Object> before, List<Integer> from, List<Object> after,
             List<Integer> to) {
         int[][] common = new int[from.size() + 1][to.size() + 1];
         for (int i = from.size() - 1; i >= 0; i--) {

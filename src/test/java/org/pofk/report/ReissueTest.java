@@ -1,0 +1,200 @@
+package org.pofk.report;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.HashSet;
+import java.util.List;
+import java.util.Set;
+import java.util.stream.IntStream;
+import java.util.stream.Stream;
+import org.junit.jupiter.api.Test;
+import org.pofk.Pofk;
+import org.pofk.answer.DerivedModel;
+import org.pofk.answer.KeyFigures;
+import org.pofk.chain.Model;
+import org.pofk.report.Document.Block;
+import org.pofk.report.Document.Heading;
+import org.pofk.report.Document.Labelled;
+import org.pofk.report.Document.Table;
+import org.pofk.text.Alphabet;
+import org.pofk.text.RefusedException;
+
+/** Reports issued again. */
+class ReissueTest {
+    private static final Style STYLE = new Style(6, Style.Angles.RADIANS);
+    private static final Path ISSUES = Path.of("test-data/issues");
+
+    private static Report report(DerivedModel derived) {
+        List<KeyFigures> figures = derived.outputs().stream()
+                .map(output -> KeyFigures.of(derived.model().chain(), output)).toList();
+        return new Report(derived, figures, CourseCharts.of(derived, figures), List.of(), new Provenance("pofk",
+                "pofk report", List.of(derived.model().origin())));
+    }
+
+    private static Report report(String issue) throws RefusedException {
+        return report(PatternCharts.derived(Pofk.read(ISSUES.resolve(issue + ".yaml"))));
+    }
+
+    private static Document document(Report report) {
+        return ReportDocument.of(report, Report.Depth.FULL, STYLE, Model.Convention.COLUMNS);
+    }
+
+    /** Twice from the start, so that nothing is the same because it is the same object. */
+    @Test
+    void aModelAgainstItselfHasNoChangeAndNoMark() throws Exception {
+        for (String pattern : List.of("pump-pair", "burner-start", "deck-condition", "kiln-campaign")) {
+            Path file = Path.of("test-data/models", pattern + ".yaml");
+            Report earlier = report(PatternCharts.derived(Pofk.read(file)));
+            Document document = document(report(PatternCharts.derived(Pofk.read(file))).since(earlier));
+            assertEquals(List.of(), document.changed().stream().map(document.blocks()::get).toList(), pattern);
+            String text = TextWriter.of(Alphabet.UNICODE, StandardCharsets.UTF_8).write(document);
+            assertTrue(text.contains("Nothing has changed in the input"), pattern);
+            assertFalse(text.contains("another shape") || text.contains("other numbers"), pattern);
+            assertEquals(earlier.derived().outputs().size(), text.split("the formula is the same", -1).length - 1);
+        }
+    }
+
+    @Test
+    void whatIsNotMarkedStoodInTheEarlierReportAndWhatStoodThereIsNotMarked() throws Exception {
+        Report earlier = report("booster-station-a");
+        Report later = report("booster-station-b");
+        List<Block> before = document(earlier.asMadeLike(later)).blocks();
+        Document document = document(later.since(earlier));
+        Set<Block> old = new HashSet<>(before);
+        int section = section(document.blocks()).size();
+        int marked = 0;
+        for (int i = 0; i < document.blocks().size(); i++) {
+            Block block = document.blocks().get(i);
+            boolean isOfSection = i >= start(document.blocks()) && i < start(document.blocks()) + section;
+            if (!isOfSection && !(block instanceof Heading) && !(block instanceof Document.Figure) && !document.isChanged(i)) {
+                assertTrue(old.contains(block), block.toString());
+            }
+            assertFalse(document.isChanged(i) && (block instanceof Heading || isOfSection), block.toString());
+            marked += document.isChanged(i) ? 1 : 0;
+        }
+        assertTrue(marked > 20 && marked < document.blocks().size() - 20, marked + " marks");
+    }
+
+    private static int start(List<Block> blocks) {
+        return (int) blocks.stream().takeWhile(block -> !isOfChanges(block)).count();
+    }
+
+    private static boolean isOfChanges(Block block) {
+        return block instanceof Heading heading && TextWidth.text(heading.text()).startsWith("Changes since");
+    }
+
+    private static List<Block> section(List<Block> blocks) {
+        int start = start(blocks);
+        List<Block> section = new ArrayList<>(List.of(blocks.get(start)));
+        blocks.subList(start + 1, blocks.size()).stream()
+                .takeWhile(block -> !(block instanceof Heading heading && heading.level() <= 2)).forEach(section::add);
+        return section;
+    }
+
+    @Test
+    void theOtherWayAroundBeforeAndNowChangePlaces() throws Exception {
+        Report a = report("booster-station-a");
+        Report b = report("booster-station-b");
+        Set<List<String>> there = said(section(document(b.since(a)).blocks()));
+        Set<List<String>> back = said(section(document(a.since(b)).blocks()));
+        Set<List<String>> turned = new HashSet<>();
+        for (List<String> line : back) {
+            turned.add(turned(line));
+        }
+        assertEquals(there, turned);
+        assertTrue(there.size() > 20, there.size() + " lines");
+    }
+
+    private static List<String> turned(List<String> line) {
+        List<String> turned = new ArrayList<>(line);
+        if (line.size() == 2) {
+            String label = line.get(0);
+            turned.set(0, label.endsWith("before") ? label.replaceAll("before$", "now")
+                    : label.endsWith("now") ? label.replaceAll("now$", "before")
+                    : label.endsWith(", new") ? label.replaceAll("new$", "gone") : label.replaceAll("gone$", "new"));
+        } else {
+            turned.set(1, line.get(2));
+            turned.set(2, line.get(1));
+        }
+        if (line.size() == 4 && !line.get(3).equals("none")) {
+            turned.set(3, line.get(3).startsWith("+") ? "−" + line.get(3).substring(1)
+                    : line.get(3).startsWith("−") ? "+" + line.get(3).substring(1) : line.get(3));
+        }
+        return turned;
+    }
+
+    /** The rows of tables and the labelled lines; a state that was renamed goes by one name. */
+    private static Set<List<String>> said(List<Block> section) {
+        Set<List<String>> said = new HashSet<>();
+        for (Block block : section) {
+            if (block instanceof Table table) {
+                table.rows().forEach(row -> said.add(row.stream().map(TextWidth::text).toList()));
+            } else if (block instanceof Labelled labelled) {
+                said.add(List.of(TextWidth.text(labelled.label()), TextWidth.text(labelled.text())));
+            }
+        }
+        return said;
+    }
+
+    @Test
+    void everyFormatHasItsMark() throws Exception {
+        Document document = document(report("booster-station-b").since(report("booster-station-a")));
+        String text = TextWriter.of(Alphabet.UNICODE, StandardCharsets.UTF_8).write(document);
+        assertTrue(text.lines().filter(line -> line.startsWith("| ")).count() > 50);
+        assertTrue(text.lines().allMatch(line -> line.isEmpty() || line.startsWith("| ") || line.startsWith("  ")));
+        assertEquals(document.changed().size(), HtmlWriter.write(document).split("class=\"changed\"", -1).length - 1);
+        String latex = LatexWriter.article(document);
+        assertTrue(latex.contains("\\begin{pofkchanged}") && latex.contains("\\@namedef{pofkchanged}"));
+        assertEquals(latex.split("\\\\begin\\{pofkchanged}", -1).length, latex.split("\\\\end\\{pofkchanged}", -1).length);
+        String unmarked = LatexWriter.article(document(report("booster-station-b")));
+        assertFalse(unmarked.contains("pofkchanged"));
+    }
+
+    /** Blocks taken out, put in and changed at random: what is left of the earlier ones is never marked, in any order. */
+    @Test
+    void theMarksAreThoseOutsideALongestCommonSubsequence() {
+        java.util.Random random = new java.util.Random(20311);
+        int marks = 0;
+        for (int round = 0; round < 300; round++) {
+            List<Integer> before = random.ints(random.nextInt(9), 0, 4).boxed().toList();
+            List<Integer> after = random.ints(random.nextInt(9), 0, 4).boxed().toList();
+            Document marked = DocumentDifference.marked(paragraphs(before), paragraphs(after));
+            List<Integer> kept = IntStream.range(0, after.size()).filter(i -> !marked.isChanged(i)).mapToObj(after::get)
+                    .toList();
+            assertTrue(isWithin(kept, before), before + " " + after + " " + kept);
+            assertEquals(longest(before, after), kept.size(), before + " " + after);
+            marks += after.size() - kept.size();
+        }
+        assertTrue(marks > 300, marks + " marks");
+    }
+
+    private static Document paragraphs(List<Integer> numbers) {
+        return new Document(Stream.concat(Stream.of(new Heading(2, "here")),
+                numbers.stream().map(i -> new Document.Paragraph("paragraph " + i))).skip(1).map(Block.class::cast).toList());
+    }
+
+    private static boolean isWithin(List<Integer> part, List<Integer> whole) {
+        int found = 0;
+        for (int number : whole) {
+            found += found < part.size() && part.get(found) == number ? 1 : 0;
+        }
+        return found == part.size();
+    }
+
+    /** By trying every part of the shorter one. */
+    private static int longest(List<Integer> one, List<Integer> other) {
+        int longest = 0;
+        for (int chosen = 0; chosen < 1 << one.size(); chosen++) {
+            int which = chosen;
+            List<Integer> part = IntStream.range(0, one.size()).filter(i -> (which >> i & 1) == 1).mapToObj(one::get)
+                    .toList();
+            longest = isWithin(part, other) ? Math.max(longest, part.size()) : longest;
+        }
+        return longest;
+    }
+}
