@@ -9,7 +9,14 @@ import org.pofk.exact.Rational;
 record Band(Optional<Rational> low, Optional<Rational> high) {
 
     /** How numbers lie to a band. */
-    enum Relation { INSIDE, OUTSIDE, EITHER }
+    enum Relation {
+        INSIDE, OUTSIDE, EITHER;
+
+        /** Inside both, outside one of them, or that isn't told. */
+        Relation and(Relation other) {
+            return this == OUTSIDE || other == OUTSIDE ? OUTSIDE : this == INSIDE ? other : this;
+        }
+    }
 
     boolean contains(Rational value) {
         return low.stream().allMatch(bound -> bound.compareTo(value) <= 0)

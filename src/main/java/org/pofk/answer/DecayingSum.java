@@ -20,6 +20,7 @@ final class DecayingSum {
     private static final Rational MOST_TURN = Rational.of(3);
     /** An angle multiplied by a step needs as many more bits. */
     private static final int STEP_BITS = Long.SIZE;
+    private static final int UNIT_BITS = 96;
 
     private final List<Term> terms;
     private final int bits;
@@ -34,8 +35,23 @@ final class DecayingSum {
                 .map(mode -> mode.accept(new TermOf(bits))).toList(), bits);
     }
 
+    /** The same over the k-th power of a positive number, not below any modulus. */
+    static DecayingSum inUnits(ClosedForm closedForm, Rational unit, int bits) {
+        return new DecayingSum(of(closedForm, bits).terms.stream().map(term -> term.over(unit, bits)).toList(), bits);
+    }
+
+    /** A number just above the modulus of every mode that dies out; one where none does. */
+    static Rational unitAbove(ClosedForm closedForm) {
+        return DecayingMode.of(closedForm).stream().map(mode -> mode.modulus().enclose(UNIT_BITS).upper())
+                .reduce(Rational::max).map(most -> most.plus(Rational.TWO.pow(-UNIT_BITS))).orElse(Rational.ONE);
+    }
+
     /** size · binomial(k, p) · modulus^(k−p) · cos(angle (k−p) + phase); for a real mode the angle is 0 or π. */
     private record Term(Ball size, Ball modulus, int power, Ball angle, Ball phase, Optional<Rational> turns) {
+        Term over(Rational unit, int bits) {
+            return new Term(size.times(Ball.of(unit.pow(-power), bits)), modulus.times(Ball.of(unit.inverse(), bits)),
+                    power, angle, phase, turns);
+        }
     }
 
     /** Turns: the angle over 2π, where that is known to be rational. */

@@ -2,9 +2,11 @@ package org.pofk.answer;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.LongStream;
 import org.pofk.chain.Chain;
 import org.pofk.exact.Rational;
 import org.pofk.modes.ClosedForm;
+import org.pofk.transform.Sequence;
 
 /**
  * At which steps an output meets a condition: the first one, and the one from which it does for ever. Proved: no step
@@ -78,6 +80,22 @@ public record When(Condition condition, Optional<Long> first, Optional<Long> for
 
     /** The answer for one output. */
     public static When of(Chain chain, ClosedForm closedForm, LongRun longRun, Condition condition) {
-        return new WhenSearch(chain, closedForm, longRun, condition).answer();
+        List<Rational> limits = LongRunValues.of(longRun);
+        if (limits.isEmpty()) {
+            return new When(condition, firstOfFew(chain, closedForm, condition), Optional.empty(), List.of(), false,
+                    Reason.NO_LONG_RUN);
+        }
+        WhenSearch search = new WhenSearch(List.of(new Constraint(chain, closedForm, limits, condition::around)),
+                WhenSearch.Possible.ALWAYS);
+        return WhenSummary.of(condition, search.classes(search.modulus(limits.size())));
+    }
+
+    private static Optional<Long> firstOfFew(Chain chain, ClosedForm form, Condition condition) {
+        if (condition.kind == Condition.Kind.SETTLED) {
+            return Optional.empty();
+        }
+        Sequence exact = Sequence.of(chain, form.transform());
+        Band band = condition.around(Rational.ZERO);
+        return LongStream.rangeClosed(0, ExactSteps.FEW).filter(k -> band.contains(exact.at(k))).boxed().findFirst();
     }
 }

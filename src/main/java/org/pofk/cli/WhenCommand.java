@@ -3,10 +3,13 @@ package org.pofk.cli;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import org.pofk.answer.ConditionalWhen;
+import org.pofk.answer.Given;
 import org.pofk.answer.Known;
 import org.pofk.answer.WhenModel;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
+import org.pofk.report.ConditionalWhenDocument;
 import org.pofk.report.CsvWriter;
 import org.pofk.report.GivenProse;
 import org.pofk.report.Style;
@@ -42,7 +45,7 @@ final class WhenCommand implements Work {
         Model read = options.model();
         Optional<Integer> step = given.at();
         if (given.isAsked() && step.isEmpty()) {
-            throw new UsageException("say with --given-at STEP when that is known");
+            return conditional(read, asked, style, destination, streams);
         }
         if (step.isEmpty()) {
             return when(read, Optional.empty(), asked, style, destination, streams);
@@ -54,10 +57,7 @@ final class WhenCommand implements Work {
 
     private ExitCode when(Model read, Optional<Known> known, WhenModel.Asked asked, Style style,
             Destination destination, Streams streams) throws RefusedException, UsageException, WritingException {
-        List<Output> outputs = AskedOutputs.of(read.chain(), of);
-        if (destination.takes(Format.JSON) && outputs.size() != 1) {
-            throw new UsageException("as JSON one output is answered at a time; name it with --of");
-        }
+        List<Output> outputs = outputs(read, destination);
         Worker.Outcome<WhenModel> outcome = options.within(streams, partly ->
                 partly.answers().size() + " of " + outputs.size() + " outputs answered", published ->
                 WhenModel.of(read, outputs, asked, published));
@@ -69,6 +69,30 @@ final class WhenCommand implements Work {
                 .with(Format.JSON, () -> WhenJson.write(read, known, found.answers().get(0), style.digits()))
                 .with(Format.CSV, () -> CsvWriter.write(WhenTable.of(found, style.digits()))), streams);
         return found.isDecided() && outcome.finished() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
+    }
+
+    private ExitCode conditional(Model read, WhenModel.Asked asked, Style style, Destination destination,
+            Streams streams) throws RefusedException, UsageException, WritingException {
+        List<Output> outputs = outputs(read, destination);
+        Given what = given.given(read.chain());
+        Worker.Outcome<ConditionalWhen> outcome = options.within(streams, published ->
+                ConditionalWhen.of(read, what, outputs, asked, published));
+        if (outcome.published().isEmpty()) {
+            return options.undecided(streams);
+        }
+        ConditionalWhen found = outcome.published().get();
+        destination.write(Answer.of(() -> ConditionalWhenDocument.of(found, style))
+                .with(Format.JSON, () -> WhenJson.write(found, style.digits()))
+                .with(Format.CSV, () -> CsvWriter.write(WhenTable.of(found, style.digits()))), streams);
+        return found.isDecided() && outcome.finished() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
+    }
+
+    private List<Output> outputs(Model read, Destination destination) throws UsageException {
+        List<Output> outputs = AskedOutputs.of(read.chain(), of);
+        if (destination.takes(Format.JSON) && outputs.size() != 1) {
+            throw new UsageException("as JSON one output is answered at a time; name it with --of");
+        }
+        return outputs;
     }
 
     private WhenModel.Asked asked() throws UsageException {

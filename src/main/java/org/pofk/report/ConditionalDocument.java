@@ -2,17 +2,12 @@ package org.pofk.report;
 
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Optional;
 import java.util.stream.IntStream;
 import org.pofk.answer.Conditional;
-import org.pofk.answer.ConditionalLongRun;
 import org.pofk.answer.ConditionalModel;
 import org.pofk.answer.Given;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
-import org.pofk.exact.Rational;
-import org.pofk.formula.Formula;
-import org.pofk.modes.RealValue;
 import org.pofk.report.Document.Block;
 import org.pofk.report.Document.Heading;
 import org.pofk.report.Document.Labelled;
@@ -65,7 +60,7 @@ public final class ConditionalDocument {
                         .and(", over the probability of that"));
         label("defined", Prose.of(found.possible().map(GivenProse::impossible)
                 .orElse("wherever D(k) isn't zero; which steps these are repeats too late to be listed")));
-        output.longRun().ifPresent(longRun -> label("long run", longRun(longRun)));
+        output.longRun().ifPresent(longRun -> label("long run", new ConditionalLongRunProse(style.digits()).of(longRun)));
         blocks.addAll(ResultBlocks.of(output.joint(), new Heading(3, Prose.of("N(k) for ").andName(asked.name())),
                 Prose.of("N(k)"), style));
     }
@@ -76,35 +71,6 @@ public final class ConditionalDocument {
 
     private void label(String label, Prose text) {
         blocks.add(new Labelled(label, text));
-    }
-
-    private Prose longRun(ConditionalLongRun longRun) {
-        return switch (longRun.kind()) {
-            case LIMIT -> Prose.of("tends to ").and(number(longRun.values().get(0).orElseThrow()));
-            case CYCLE -> Prose.of("no limit; a cycle of " + longRun.values().size() + ": ").and(cycle(longRun));
-            case CYCLE_OR_LIMIT -> Prose.of("tends to values by residue of k, of which it isn't decided whether they"
-                    + " are equal: ").and(cycle(longRun));
-            case IMPOSSIBLE_IN_THE_END -> Prose.of("none: from some step on what is given has probability zero");
-            case PERIOD_TOO_LONG -> Prose.of("not decided: the moves go through cycles whose common period is too long");
-        };
-    }
-
-    private Prose cycle(ConditionalLongRun longRun) {
-        List<Prose> values = longRun.values().stream().map(value ->
-                value.map(this::number).orElse(Prose.of("undefined"))).toList();
-        return Prose.joined(values, ", ").and(" for k ≡ " + (values.size() <= 3
-                ? String.join(", ", IntStream.range(0, values.size()).mapToObj(String::valueOf).toList())
-                : "0, 1, …, " + (values.size() - 1)) + " (mod " + values.size() + ")");
-    }
-
-    private Prose number(RealValue value) {
-        Optional<Rational> rational = value.rational();
-        if (rational.isPresent()) {
-            return Prose.of(new LongRunProse(style.digits()).number(rational.get()));
-        }
-        String decimal = value.decimal(style.digits()).text();
-        Optional<Formula> exact = value.exact();
-        return exact.map(formula -> Prose.formula(formula).and(" ≈ " + decimal)).orElse(Prose.of(decimal));
     }
 
     private void values() {

@@ -1,10 +1,8 @@
 package org.pofk.report;
 
 import java.util.List;
-import java.util.Locale;
 import java.util.Optional;
 import org.pofk.answer.Conditional;
-import org.pofk.answer.ConditionalLongRun;
 import org.pofk.answer.ConditionalModel;
 import org.pofk.answer.Given;
 import org.pofk.answer.PossibleSteps;
@@ -17,12 +15,12 @@ public final class ConditionalJson {
 
     private final Json json;
     private final JsonOutput outputs;
-    private final JsonNumbers numbers;
+    private final int digits;
 
     private ConditionalJson(Json json, int digits) {
         this.json = json;
         this.outputs = new JsonOutput(json, digits);
-        this.numbers = new JsonNumbers(json, digits);
+        this.digits = digits;
     }
 
     /** The text; {@code digits} are the significant digits of decimals. */
@@ -67,16 +65,8 @@ public final class ConditionalJson {
             json.text("word", output.joint().isDecided() && output.longRun().isPresent() ? "exact" : "undecided");
             json.name("joint");
             outputs.write(output.joint());
-            json.optional("longRun", output.longRun(), this::longRun);
+            json.optional("longRun", output.longRun(), new JsonConditionalLongRun(json, digits)::write);
             json.list("values", output.values(), this::value);
-        });
-    }
-
-    private void longRun(ConditionalLongRun longRun) {
-        json.object(() -> {
-            json.text("kind", longRun.kind().name().toLowerCase(Locale.ROOT).replace('_', ' '));
-            json.list("values", longRun.values(), value ->
-                    value.ifPresentOrElse(numbers::number, json::nothing));
         });
     }
 
@@ -84,7 +74,7 @@ public final class ConditionalJson {
         json.object(() -> {
             json.count("k", at.k());
             json.text("exact", at.value().flatMap(value -> value.exact()).map(Rational::toString));
-            json.text("decimal", at.value().map(value -> ValueText.number(value, numbers.digits())));
+            json.text("decimal", at.value().map(value -> ValueText.number(value, digits)));
         });
     }
 }

@@ -105,10 +105,14 @@ public final class WhenDocument {
     }
 
     private String asked(When.Condition condition) {
+        return asked(condition, style);
+    }
+
+    static String asked(When.Condition condition, Style style) {
         return switch (condition.kind()) {
-            case AT_LEAST -> "not below " + number(condition.bound());
-            case AT_MOST -> "not above " + number(condition.bound());
-            case SETTLED -> "within " + number(condition.bound()) + " of its long run";
+            case AT_LEAST -> "not below " + number(condition.bound(), style);
+            case AT_MOST -> "not above " + number(condition.bound(), style);
+            case SETTLED -> "within " + number(condition.bound(), style) + " of its long run";
         };
     }
 
@@ -139,7 +143,7 @@ public final class WhenDocument {
                         .map(first -> "; first at k = " + first).orElse("");
     }
 
-    private static String inWords(When when) {
+    static String inWords(When when) {
         return switch (when.reason()) {
             case FOR_EVER -> when.forEverFrom().equals(Optional.of(0L)) ? "at every step"
                     : when.first().equals(when.forEverFrom()) ? "from a step on for ever; not before"
@@ -155,7 +159,7 @@ public final class WhenDocument {
         };
     }
 
-    private static Table classes(List<ResidueClass> classes) {
+    static Table classes(List<ResidueClass> classes) {
         return Table.ofText("By step", List.of("k", "in the end", "first", "for ever from"), classes.stream()
                 .map(each -> List.of("≡ " + each.residue() + " mod " + each.modulus(), end(each.end()),
                         each.first().map(String::valueOf).orElse("–"),

@@ -2,13 +2,19 @@ package org.pofk.report;
 
 import java.util.Locale;
 import java.util.Optional;
+import org.pofk.answer.ConditionalWhen;
 import org.pofk.answer.Known;
+import org.pofk.answer.StepValue;
 import org.pofk.answer.When;
 import org.pofk.answer.WhenModel;
 import org.pofk.chain.Model;
+import org.pofk.chain.Output;
 
 /** When an output meets a condition, as JSON: format {@code pofk-when}. */
 public final class WhenJson {
+    private static final String FORMAT = "pofk-when";
+    private static final String COMMAND = "when";
+
     private final Json json;
     private final int digits;
 
@@ -22,11 +28,41 @@ public final class WhenJson {
         return Json.ofObject(json -> new WhenJson(json, digits).fields(model, known, answer));
     }
 
+    /** The text for the one answer given what is known at k. */
+    public static String write(ConditionalWhen found, int digits) {
+        return Json.ofObject(json -> new WhenJson(json, digits).fields(found));
+    }
+
     private void fields(Model model, Optional<Known> known, WhenModel.Answer answer) {
-        When when = answer.when();
-        JsonHead.write(json, "pofk-when", "when", model);
+        JsonHead.write(json, FORMAT, COMMAND, model);
         new JsonGiven(json).write(known);
-        json.text("output", answer.output().name());
+        met(answer.output(), answer.when());
+        json.optional("nearest", answer.nearest(), peak -> json.object(() -> {
+            step("k", peak.at());
+            json.text("exact", peak.value().exact().map(Object::toString));
+            json.text("decimal", ValueText.number(peak.value(), digits));
+        }));
+        json.name("longRun");
+        new JsonLongRun(json).write(answer.longRun());
+        json.list("values", answer.around(), value -> value(value.k(), Optional.of(value)));
+    }
+
+    private void fields(ConditionalWhen found) {
+        ConditionalWhen.Answer answer = found.answers().get(0);
+        JsonHead.write(json, FORMAT, COMMAND, found.model());
+        new JsonGiven(json).write(found.given(), Optional.empty(), Optional.empty());
+        met(answer.output(), answer.when());
+        json.name("nearest");
+        json.nothing();
+        json.name("longRun");
+        json.nothing();
+        json.name("conditionalLongRun");
+        new JsonConditionalLongRun(json, digits).write(answer.longRun());
+        json.list("values", answer.around(), at -> value(at.k(), at.value()));
+    }
+
+    private void met(Output output, When when) {
+        json.text("output", output.name());
         json.text("word", when.decided() ? "exact" : "undecided");
         json.object("condition", () -> {
             json.text("kind", word(when.condition().kind()));
@@ -42,18 +78,14 @@ public final class WhenJson {
             step("forEverFrom", each.forEverFrom());
         }));
         json.text("reason", word(when.reason()));
-        json.optional("nearest", answer.nearest(), peak -> json.object(() -> {
-            step("k", peak.at());
-            json.text("exact", peak.value().exact().map(Object::toString));
-            json.text("decimal", ValueText.number(peak.value(), digits));
-        }));
-        json.name("longRun");
-        new JsonLongRun(json).write(answer.longRun());
-        json.list("values", answer.around(), value -> json.object(() -> {
-            json.count("k", value.k());
-            json.text("exact", value.exact().map(Object::toString));
-            json.text("decimal", ValueText.number(value, digits));
-        }));
+    }
+
+    private void value(int k, Optional<StepValue> value) {
+        json.object(() -> {
+            json.count("k", k);
+            json.text("exact", value.flatMap(StepValue::exact).map(Object::toString));
+            json.text("decimal", value.map(each -> ValueText.number(each, digits)));
+        });
     }
 
     private void step(String field, Optional<Long> step) {

@@ -3,8 +3,11 @@ package org.pofk.report;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
+import org.pofk.answer.ConditionalWhen;
 import org.pofk.answer.When;
 import org.pofk.answer.WhenModel;
+import org.pofk.chain.Model;
+import org.pofk.chain.Output;
 
 /**
  * When outputs meet a condition: a row for each output, whose {@code residue} is empty, and where its steps end in
@@ -21,12 +24,22 @@ public final class WhenTable {
 
     /** @param digits significant digits of decimals */
     public static Document.Table of(WhenModel found, int digits) {
-        StepColumns steps = StepColumns.of(found.model());
-        Rows rows = new Rows(digits, Rows.words("output", "condition", "exact", "decimal", "residue", "modulus",
-                "answer"), first(steps.header(), "first"), first(steps.header(), "for ever from"));
-        WhenTable table = new WhenTable(steps, rows);
-        found.answers().forEach(table::answer);
-        return rows.table();
+        WhenTable table = of(found.model(), digits);
+        found.answers().forEach(answer -> table.answer(answer.output(), answer.when()));
+        return table.rows.table();
+    }
+
+    /** The same given what is known at k. */
+    public static Document.Table of(ConditionalWhen found, int digits) {
+        WhenTable table = of(found.model(), digits);
+        found.answers().forEach(answer -> table.answer(answer.output(), answer.when()));
+        return table.rows.table();
+    }
+
+    private static WhenTable of(Model model, int digits) {
+        StepColumns steps = StepColumns.of(model);
+        return new WhenTable(steps, new Rows(digits, Rows.words("output", "condition", "exact", "decimal", "residue",
+                "modulus", "answer"), first(steps.header(), "first"), first(steps.header(), "for ever from")));
     }
 
     /** {@code first k}, {@code first time (h)}. */
@@ -34,18 +47,18 @@ public final class WhenTable {
         return header.stream().map(each -> Prose.of(word + " ").and(each)).toList();
     }
 
-    private void answer(WhenModel.Answer answer) {
-        When when = answer.when();
-        add(answer, Rows.words("", "", inWords(when.reason())), when.first(), when.forEverFrom());
+    private void answer(Output output, When when) {
+        add(output, when, Rows.words("", "", inWords(when.reason())), when.first(), when.forEverFrom());
         if (when.classes().size() > 1) {
-            when.classes().forEach(each -> add(answer, Rows.words(String.valueOf(each.residue()),
+            when.classes().forEach(each -> add(output, when, Rows.words(String.valueOf(each.residue()),
                     String.valueOf(each.modulus()), inWords(each.end())), each.first(), each.forEverFrom()));
         }
     }
 
-    private void add(WhenModel.Answer answer, List<Prose> middle, Optional<Long> first, Optional<Long> forEverFrom) {
-        rows.add(List.of(Prose.name(answer.output().name()),
-                Prose.of(inWords(answer.when().condition().kind()))), rows.value(answer.when().condition().bound()),
+    private void add(Output output, When when, List<Prose> middle, Optional<Long> first,
+            Optional<Long> forEverFrom) {
+        rows.add(List.of(Prose.name(output.name()),
+                Prose.of(inWords(when.condition().kind()))), rows.value(when.condition().bound()),
                 middle, first.map(steps::cells).orElse(steps.none()), forEverFrom.map(steps::cells).orElse(steps.none()));
     }
 

@@ -22,6 +22,8 @@ class ConditionalTest {
     private static final long SEED = 20_261_203;
     private static final int CHAINS = 50;
     private static final int STEPS = 30;
+    private static final int WHEN_CHAINS = 120;
+    private static final int WHEN_STEPS = 120;
     /** Classes left with probability 10^−8 a step have died out by then, and a double pole's 1/k is small. */
     private static final int FAR = 2_000_000_000;
     private static final Rational NEAR = Rational.of(1, 10_000);
@@ -42,7 +44,7 @@ class ConditionalTest {
             Set<Integer> never = random.nextInt(2) == 0 ? subset(random, chain.size()) : Set.of();
             Given given = new Given(List.of("in"), in, List.of(), never);
             ConditionalModel found = ConditionalModel.of(model(chain), given, List.of(output), steps(), each -> { });
-            List<Optional<Rational>> stepped = stepped(chain, output, given);
+            List<Optional<Rational>> stepped = stepped(chain, output, given, STEPS + 1);
             List<Conditional.At> values = found.outputs().get(0).values();
             for (int k = 0; k <= STEPS; k++) {
                 assertEquals(stepped.get(k), values.get(k).value().map(value -> value.exact().orElseThrow()),
@@ -58,6 +60,63 @@ class ConditionalTest {
         }
         assertTrue(compared == CHAINS * (STEPS + 1) && undefined > 300 && limits > 20 && cycles > 8,
                 compared + " values, " + undefined + " undefined, " + limits + " limits, " + cycles + " cycles");
+    }
+
+    /** Random chains, sets and bounds, each step's value by hand in fractions; the limit from the far answer above. */
+    @Test
+    void whenIsThatOfSteppingInFractions() {
+        RandomChains chains = new RandomChains(SEED + 1);
+        Random random = new Random(SEED + 1);
+        int compared = 0;
+        int forEver = 0;
+        int inClasses = 0;
+        int settled = 0;
+        for (int i = 0; i < WHEN_CHAINS; i++) {
+            Chain chain = chains.next();
+            Output output = chains.output(chain);
+            Set<Integer> never = random.nextInt(2) == 0 ? subset(random, chain.size()) : Set.of();
+            Given given = new Given(List.of("in"), subset(random, chain.size()), List.of(), never);
+            List<Optional<Rational>> values = stepped(chain, output, given, WHEN_STEPS);
+            When.Condition.Kind kind = When.Condition.Kind.values()[random.nextInt(3)];
+            Rational bound = kind == When.Condition.Kind.SETTLED ? Rational.of(10).pow(-1 - random.nextInt(4))
+                    : values.get(random.nextInt(8)).map(value -> value.plus(Rational.of(random.nextInt(3) - 1, 97)))
+                            .orElse(Rational.HALF);
+            ConditionalWhen.Answer answer = ConditionalWhen.of(model(chain), given, List.of(output),
+                    new WhenModel.Asked(kind, bound, false), each -> { }).answers().get(0);
+            assertTrue(answer.when().decided(), () -> chain + " " + given + " " + answer);
+            for (int k = 0; k < WHEN_STEPS; k++) {
+                assertHolds(answer.when(), k, holds(answer, values.get(k), k), chain + " " + given + " " + answer);
+                compared++;
+            }
+            forEver += answer.when().forEverFrom().isPresent() ? 1 : 0;
+            inClasses += answer.when().reason() == When.Reason.ONLY_IN_SOME_CLASSES ? 1 : 0;
+            settled += kind == When.Condition.Kind.SETTLED ? 1 : 0;
+        }
+        assertTrue(compared == WHEN_CHAINS * WHEN_STEPS && forEver > 40 && inClasses > 8 && settled > 25, compared
+                + " steps, " + forEver + " for ever, " + inClasses + " in classes, " + settled + " settled");
+    }
+
+    private static boolean holds(ConditionalWhen.Answer answer, Optional<Rational> value, int k) {
+        Rational bound = answer.when().condition().bound();
+        return value.isPresent() && switch (answer.when().condition().kind()) {
+            case AT_LEAST -> value.get().compareTo(bound) >= 0;
+            case AT_MOST -> value.get().compareTo(bound) <= 0;
+            case SETTLED -> {
+                List<Optional<RealValue>> limits = answer.longRun().values();
+                yield !limits.isEmpty() && limits.get(k % limits.size()).isPresent() && value.get()
+                        .minus(limits.get(k % limits.size()).get().enclosure().enclose(400).middle()).abs()
+                        .compareTo(bound) <= 0;
+            }
+        };
+    }
+
+    private static void assertHolds(When when, long k, boolean holds, String message) {
+        assertTrue(!holds || when.first().stream().anyMatch(first -> first <= k), () -> message + " at " + k);
+        assertTrue(holds || when.first().stream().noneMatch(first -> first == k), () -> message + " at " + k);
+        assertTrue(holds || when.forEverFrom().stream().noneMatch(from -> from <= k), () -> message + " at " + k);
+        assertTrue(!holds || when.forEverFrom().stream().noneMatch(from -> from == k + 1), () -> message + " at " + k);
+        when.classes().stream().filter(each -> k % each.modulus() == each.residue()).forEach(each ->
+                assertTrue(holds || each.forEverFrom().stream().noneMatch(from -> from <= k), message + " at " + k));
     }
 
     private static List<Integer> steps() {
@@ -81,10 +140,10 @@ class ConditionalTest {
         return subset;
     }
 
-    private static List<Optional<Rational>> stepped(Chain chain, Output output, Given given) {
+    private static List<Optional<Rational>> stepped(Chain chain, Output output, Given given, int count) {
         List<Optional<Rational>> values = new ArrayList<>();
         List<Rational> state = new ArrayList<>(chain.start());
-        for (int k = 0; k <= STEPS; k++) {
+        for (int k = 0; k < count; k++) {
             given.never().forEach(each -> state.set(each, Rational.ZERO));
             Rational above = Rational.ZERO;
             Rational below = Rational.ZERO;
