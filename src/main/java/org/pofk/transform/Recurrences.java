@@ -40,6 +40,7 @@ final class Recurrences {
     private final ScaledSystem scaled;
     private final SystemResidues residues;
     private final CoefficientBounds bounds;
+    private Optional<ExactWindows> exact = Optional.empty();
     private final List<Modular> known = new ArrayList<>();
     private long nextBelow = BELOW;
 
@@ -99,11 +100,11 @@ final class Recurrences {
         }
         boolean whole = system.readings().isEmpty();
         int windows = whole ? 1 : system.size();
-        List<List<Rational>> states = ExactWindows.states(system, windows + order);
+        ExactWindows terms = exact.orElseGet(() -> ExactWindows.of(system));
+        exact = Optional.of(terms);
         for (int sequence = 0; sequence < joined.numerators().size(); sequence++) {
-            List<Rational> terms = ExactWindows.terms(states, whole ? unit(sequence) : system.readings().get(place));
-            if (!ExactWindows.hold(joined.denominator(), terms, windows)
-                    || !ExactWindows.numerator(joined.denominator(), terms).equals(joined.numerators().get(sequence))) {
+            if (!terms.hold(joined.denominator(), joined.numerators().get(sequence),
+                    whole ? unit(sequence) : system.readings().get(place), windows)) {
                 throw new AssertionError("a recurrence doesn't hold: " + joined + " for " + system);
             }
         }

@@ -9,6 +9,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Random;
+import java.util.function.Supplier;
 import org.junit.jupiter.api.Test;
 import org.pofk.answer.When.Condition;
 import org.pofk.answer.When.Condition.Kind;
@@ -26,8 +27,6 @@ class WhenTest {
     private static final long SEED = 20_261_202;
     private static final int CHAINS = 1_000;
     private static final int STEPS = 10_000;
-    /** Stepping in doubles is far closer than this on chains of a few states. */
-    private static final double CLOSE = 1e-11;
 
     @Test
     void agreesWithSteppingTenThousandTimes() {
@@ -43,11 +42,11 @@ class WhenTest {
             Transform transform = Transforms.of(chain, List.of(output)).get(0);
             ClosedForm form = ClosedForm.of(transform);
             LongRun longRun = LongRun.of(chain, transform);
-            double[] values = stepped(chain, output);
-            Condition condition = condition(random, values, longRun);
+            Stepped values = Stepped.of(chain, output);
+            Condition condition = condition(random, values);
             When when = When.of(chain, form, longRun, condition);
             assertTrue(when.decided(), () -> chain + " " + condition);
-            compared += assertAgrees(chain + " " + condition + " " + when, when, values, longRun);
+            compared += assertAgrees(() -> chain + " " + condition + " " + when, when, values, longRun);
             met += when.reason() == Reason.FOR_EVER ? 1 : 0;
             never += when.reason() == Reason.NEVER ? 1 : 0;
             inClasses += when.reason() == Reason.ONLY_IN_SOME_CLASSES ? 1 : 0;
@@ -56,59 +55,79 @@ class WhenTest {
                 met + " for ever, " + never + " never, " + inClasses + " in classes, " + compared + " steps");
     }
 
-    private static double[] stepped(Chain chain, Output output) {
-        double[] state = chain.start().stream().mapToDouble(Rational::approximate).toArray();
-        double[] weights = output.coefficients().stream().mapToDouble(Rational::approximate).toArray();
-        double[] values = new double[STEPS];
-        for (int k = 0; k < STEPS; k++) {
-            double[] next = new double[state.length];
-            for (int j = 0; j < state.length; j++) {
-                values[k] += weights[j] * state[j];
-                for (SparseMatrix.Entry entry : chain.matrix().columns().get(j)) {
-                    next[entry.row()] += entry.value().approximate() * state[j];
+    /** Twice an output's values in units of 2^−60, from below in each state, and by how much each may be off. Certified. */
+    private record Stepped(long[] values, long[] off) {
+        static final int BITS = 60;
+        private static final long ONE = 1L << BITS;
+
+        /** For coefficients that are multiples of a half and at most two. */
+        static Stepped of(Chain chain, Output output) {
+            int[][] rows = chain.matrix().columns().stream().map(column -> column.stream()
+                    .mapToInt(SparseMatrix.Entry::row).toArray()).toArray(int[][]::new);
+            long[][] shares = chain.matrix().columns().stream().map(column -> column.stream()
+                    .mapToLong(entry -> units(entry.value(), BITS)).toArray()).toArray(long[][]::new);
+            long[] twice = output.coefficients().stream().mapToLong(weight -> units(weight, 1)).toArray();
+            long[] state = chain.start().stream().mapToLong(share -> units(share, BITS)).toArray();
+            Stepped stepped = new Stepped(new long[STEPS], new long[STEPS]);
+            for (int k = 0; k < STEPS; k++) {
+                long missing = ONE;
+                long[] next = new long[state.length];
+                for (int j = 0; j < state.length; j++) {
+                    stepped.values[k] += twice[j] * state[j];
+                    missing -= state[j];
+                    for (int i = 0; i < rows[j].length; i++) {
+                        next[rows[j][i]] += Math.multiplyHigh(state[j] << 2, shares[j][i] << 2);
+                    }
                 }
+                stepped.off[k] = 4 * missing + 8;
+                state = next;
             }
-            state = next;
+            return stepped;
         }
-        return values;
+
+        /** The largest whole number of units that is not above a number. */
+        static long units(Rational value, int bits) {
+            return value.times(Rational.TWO.pow(bits)).floor().longValueExact();
+        }
     }
 
-    private static Condition condition(Random random, double[] values, LongRun longRun) {
+    private static Condition condition(Random random, Stepped stepped) {
         if (random.nextInt(4) == 0) {
             return new Condition(Kind.SETTLED, Rational.of(10).pow(-1 - random.nextInt(7)));
         }
-        double near = values[random.nextInt(12)];
-        double far = values[STEPS - 1 - random.nextInt(12)];
+        double near = stepped.values[random.nextInt(12)] / (2.0 * Stepped.ONE);
+        double far = stepped.values[STEPS - 1 - random.nextInt(12)] / (2.0 * Stepped.ONE);
         Rational bound = Rational.of(Math.round((near + (far - near) * random.nextDouble()) * 1e6) * 2 + 1, 2_000_000);
         return new Condition(random.nextBoolean() ? Kind.AT_LEAST : Kind.AT_MOST, bound);
     }
 
     /** How many steps were far enough from the bound to be compared. */
-    private static int assertAgrees(String message, When when, double[] values, LongRun longRun) {
-        List<Rational> limits = LongRunValues.of(longRun);
+    private static int assertAgrees(Supplier<String> message, When when, Stepped stepped, LongRun longRun) {
+        long[] limits = LongRunValues.of(longRun).stream().mapToLong(limit -> Stepped.units(limit, Stepped.BITS + 1))
+                .toArray();
+        long bound = Stepped.units(when.condition().bound(), Stepped.BITS + 1);
         int compared = 0;
         Optional<Integer> lastFailed = Optional.empty();
         for (int k = 0; k < STEPS; k++) {
-            double limit = limits.get(k % limits.size()).approximate();
-            double bound = when.condition().bound().approximate();
-            double margin = switch (when.condition().kind()) {
-                case AT_LEAST -> values[k] - bound;
-                case AT_MOST -> bound - values[k];
-                case SETTLED -> bound - Math.abs(values[k] - limit);
+            long limit = limits[k % limits.length];
+            long margin = switch (when.condition().kind()) {
+                case AT_LEAST -> stepped.values[k] - bound;
+                case AT_MOST -> bound - stepped.values[k];
+                case SETTLED -> bound - Math.abs(stepped.values[k] - limit);
             };
-            if (Math.abs(margin) < CLOSE) {
+            if (Math.abs(margin) <= stepped.off[k]) {
                 continue;
             }
             compared++;
             boolean holds = margin > 0;
             long step = k;
-            assertFalse(holds && when.first().stream().allMatch(first -> step < first), () -> message + " at " + step);
-            assertFalse(!holds && when.first().stream().anyMatch(first -> step == first), () -> message + " at " + step);
+            assertFalse(holds && when.first().stream().allMatch(first -> step < first), () -> message.get() + " at " + step);
+            assertFalse(!holds && when.first().stream().anyMatch(first -> step == first), () -> message.get() + " at " + step);
             assertFalse(!holds && when.forEverFrom().stream().anyMatch(from -> step >= from),
-                    () -> message + " at " + step);
+                    () -> message.get() + " at " + step);
             when.classes().stream().filter(each -> step % each.modulus() == each.residue()).forEach(each ->
                     assertFalse(!holds && each.forEverFrom().stream().anyMatch(from -> step >= from),
-                            () -> message + " at " + step));
+                            () -> message.get() + " at " + step));
             if (!holds) {
                 lastFailed = Optional.of(k);
             }
@@ -159,7 +178,9 @@ class WhenTest {
     void aTargetTouchedExactlyCounts() {
         Chain chain = chain(new Rational[][] {{Rational.HALF, Rational.ZERO}, {Rational.HALF, Rational.ONE}});
         assertEquals(Optional.of(3L), ask(chain, Kind.AT_LEAST, Rational.of(7, 8)).first());
-        assertEquals(Optional.of(2L), ask(chain, Kind.AT_MOST, Rational.of(3, 4)).first().map(k -> 2L));
+        assertEquals(Optional.of(0L), ask(chain, Kind.AT_MOST, Rational.of(7, 8)).first());
+        // 1 − 2^−k is 7/8 at k = 3, and 7/8 is still met there and not at k = 4
+        assertEquals(Optional.of(4L), ask(chain, Kind.AT_LEAST, Rational.of(15, 16)).forEverFrom());
         assertEquals(Reason.ONLY_FOR_A_WHILE, ask(chain, Kind.AT_MOST, Rational.of(7, 8)).reason());
     }
 

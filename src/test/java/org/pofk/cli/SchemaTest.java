@@ -106,6 +106,7 @@ class SchemaTest {
                 "--given-at", "4");
         assertKeeps("result", "derive", file, "--of", output, "--given-at", "2", "--given-never", last);
         assertKeeps("when", "when", file, "--of", output, "--given-at", "2", "--given-never", last, "--at-least", "9");
+        assertKeeps("when", "when", file, "--of", output, "--given", last, "--settles-within", "1e-3");
         assertKeeps("passage", "passage", file, "--into", last, "--given-at", "2", "--given-never", last);
     }
 

@@ -29,14 +29,14 @@ class RecurrenceProofTest {
             for (int reading = 0; reading < system.readings().size(); reading++) {
                 Polynomial<Rational> recurrence = Transforms.of(chain, chain.outputs()).get(reading).recurrence();
                 int count = system.size() + recurrence.degree();
-                List<Rational> terms = ExactWindows.terms(ExactWindows.states(system, count),
+                List<Rational> terms = RationalWindows.terms(RationalWindows.states(system, count),
                         system.readings().get(reading));
-                assertTrue(ExactWindows.hold(recurrence, terms, system.size()));
+                assertTrue(RationalWindows.hold(recurrence, terms, system.size()));
                 // Below z's multiplicity a term is free: it is an impulse, and only the numerator knows it.
                 for (int at = recurrence.lowestPower(); at < count; at++) {
                     List<Rational> tampered = new ArrayList<>(terms);
                     tampered.set(at, terms.get(at).plus(Rational.of(1, 1_000_000_007)));
-                    assertFalse(ExactWindows.hold(recurrence, tampered, system.size()));
+                    assertFalse(RationalWindows.hold(recurrence, tampered, system.size()));
                     broken++;
                 }
             }
@@ -54,14 +54,21 @@ class RecurrenceProofTest {
             LinearSystem system = Reduction.of(chain, chain.outputs()).reduced();
             Transform transform = Transforms.of(chain, chain.outputs()).get(0);
             int degree = transform.recurrence().degree();
-            List<Rational> terms = ExactWindows.terms(ExactWindows.states(system, system.size() + degree),
+            List<Rational> terms = RationalWindows.terms(RationalWindows.states(system, system.size() + degree),
                     system.readings().get(0));
             if (degree > 0) {
                 List<Rational> coefficients = new ArrayList<>(transform.recurrence().coefficients());
                 int at = random.nextInt(degree);
                 coefficients.set(at, coefficients.get(at).plus(Rational.of(1, 97)));
-                assertFalse(ExactWindows.hold(Polynomial.ofRationals(coefficients), terms, system.size()));
+                assertFalse(RationalWindows.hold(Polynomial.ofRationals(coefficients), terms, system.size()));
                 broken++;
+                Polynomial<Rational> numerator = RationalWindows.numerator(transform.recurrence(), terms);
+                List<Rational> reading = system.readings().get(0);
+                ExactWindows windows = ExactWindows.of(system);
+                assertTrue(windows.hold(transform.recurrence(), numerator, reading, system.size()));
+                assertFalse(windows.hold(Polynomial.ofRationals(coefficients), numerator, reading, system.size()));
+                assertFalse(windows.hold(transform.recurrence(), numerator.plus(Polynomial.ofRationals(
+                        List.of(Rational.of(1, 97)))), reading, system.size()));
             }
         }
         assertTrue(broken > 300, "broken: " + broken);
@@ -128,9 +135,9 @@ class RecurrenceProofTest {
             assertEquals(BigInteger.ONE, CommonDenominator.of(characteristic.coefficients().stream()
                     .map(value -> value.times(Rational.of(bounds.scale()))).toList()));
             for (List<Rational> reading : scaled.system().readings()) {
-                List<Rational> terms = ExactWindows.terms(
-                        ExactWindows.states(scaled.system(), chain.size()), reading);
-                for (Rational coefficient : ExactWindows.numerator(characteristic, terms).coefficients()) {
+                List<Rational> terms = RationalWindows.terms(
+                        RationalWindows.states(scaled.system(), chain.size()), reading);
+                for (Rational coefficient : RationalWindows.numerator(characteristic, terms).coefficients()) {
                     assertTrue(coefficient.abs().compareTo(Rational.of(bounds.numerator())) <= 0);
                     compared++;
                 }
