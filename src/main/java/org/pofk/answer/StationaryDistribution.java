@@ -11,12 +11,12 @@ import org.pofk.exact.Rational;
  * The only vector of a closed class with A v = v and components that sum to one: the null space of A − I, found by
  * setting the first component to one and solving for the others. Exact; one {@link LinearEquations}.
  */
-final class StationaryDistribution {
+public final class StationaryDistribution {
     private StationaryDistribution() {
     }
 
     /** One component for each state of the class, in its order. */
-    static List<Rational> of(SparseMatrix matrix, List<Integer> closedClass) {
+    public static List<Rational> of(SparseMatrix matrix, List<Integer> closedClass) {
         List<Integer> others = closedClass.subList(1, closedClass.size());
         Map<Integer, Integer> place = placeOf(others);
         List<List<SparseMatrix.Entry>> columns = new ArrayList<>();

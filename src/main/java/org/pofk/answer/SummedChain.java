@@ -45,8 +45,9 @@ public record SummedChain(Chain recursion, Output step, Output total) {
                 increment.constant().isZero() ? Rational.ZERO : Rational.ONE));
         Chain recursion = new Chain(Chain.Kind.RECURSION, names(chain), new SparseMatrix(columns), start, chain.sets(),
                 List.of());
-        return new SummedChain(recursion, new Output("step", step, Rational.ZERO, increment.definition()),
-                new Output("total", total, Rational.ZERO, "sum of " + increment.definition()));
+        SummedName names = SummedName.of(increment, factor);
+        return new SummedChain(recursion, new Output(names.step(), step, Rational.ZERO, names.ofStep()),
+                new Output(names.total(), total, Rational.ZERO, names.ofTotal()));
     }
 
     private static List<String> names(Chain chain) {

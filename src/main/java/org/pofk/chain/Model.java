@@ -7,6 +7,7 @@ import java.util.Optional;
  * A chain with what its author says about it: all that a model file holds.
  *
  * @param schedule   actions and phases, which the chain alone knows nothing of
+ * @param costs      what states and moves cost, which the chain alone knows nothing of
  * @param parameters parameters in the order of the file
  * @param notes      notes and sources on entries, in the order of the file
  * @param changes    every change made to rounded rows on entry ({@code sums: rescale}, {@code give to diagonal}),
@@ -15,8 +16,8 @@ import java.util.Optional;
  * @param tables     the tables that the file names
  */
 public record Model(String title, Step step, Convention convention, About about, Chain chain,
-        Optional<Schedule> schedule, List<Parameter> parameters, List<Remark> notes, List<String> changes,
-        List<Written> written, Origin origin, List<Origin> tables) {
+        Optional<Schedule> schedule, Optional<Costs> costs, List<Parameter> parameters, List<Remark> notes,
+        List<String> changes, List<Written> written, Origin origin, List<Origin> tables) {
 
     /** How the author writes a matrix: moves out of a state stand in a column or in a row. */
     public enum Convention { COLUMNS, ROWS }

@@ -15,6 +15,7 @@ enum CommandName {
     CHECK(CheckCommand::new),
     WHEN(WhenCommand::new),
     PASSAGE(PassageCommand::new),
+    TOTAL(TotalCommand::new),
     REPORT(ReportCommand::new),
     DRAW(DrawCommand::new),
     NEW(NewCommand::new),

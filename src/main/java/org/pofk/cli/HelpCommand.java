@@ -18,6 +18,7 @@ final class HelpCommand implements Work {
             "  pofk simulate MODEL   random walks with intervals, beside the exact values",
             "  pofk when MODEL       from which step a condition holds, and whether for ever",
             "  pofk passage MODEL    how long until a set of states is first entered",
+            "  pofk total MODEL      steps spent in states, entries and costs, added up",
             "  pofk check CLAIMS     a derivation made by hand: which steps are right, which",
             "                        are wrong, and by which slip",
             "  pofk report MODEL     the document to hand in: results first, then the whole",

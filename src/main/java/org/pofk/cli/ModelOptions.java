@@ -51,11 +51,28 @@ final class ModelOptions {
 
     /** The model as the file and the command line say it, its schedule included. */
     Model readWithSchedule() throws RefusedException, UsageException {
-        return readAsWell(file);
+        return refusingEachStart(readForEachStart());
+    }
+
+    /** The same where the command takes a start in each state in turn. */
+    Model readForEachStart() throws RefusedException, UsageException {
+        return readFile(file);
     }
 
     /** Another file, as this one is read; its schedule included. */
     Model readAsWell(Path other) throws RefusedException, UsageException {
+        return refusingEachStart(readFile(other));
+    }
+
+    private Model refusingEachStart(Model read) throws UsageException {
+        if (settings.overrides().isStartEach() && !read.chain().states().contains(Overrides.EACH)) {
+            throw new UsageException("--start each is a start in each state in turn, which derive alone takes; name one"
+                    + " state");
+        }
+        return read;
+    }
+
+    private Model readFile(Path other) throws RefusedException, UsageException {
         Overrides overrides = settings.overrides();
         Source source = Source.read(other);
         return settings.read(() -> read(other, source, overrides));

@@ -6,7 +6,6 @@ import java.util.Optional;
 
 /** Commands that have a name and are not built yet: typing one says so, instead of guessing another. */
 enum Planned {
-    TOTAL("adds up what is spent or produced over steps"),
     DEPENDABILITY("says availability, mean time to failure and repair, and their kin"),
     COMPARE("sets two models side by side"),
     FIND("finds the parameter value that meets a target"),

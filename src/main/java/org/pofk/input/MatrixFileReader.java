@@ -47,11 +47,11 @@ public final class MatrixFileReader {
         faults.refuseIfAny();
         Head head = Head.ofTable(source.fileName());
         SparseMatrix matrix = matrix(grid(table, source, reading), options, states, head, reading);
-        List<Rational> start = start(states, head, reading);
+        List<Rational> start = start(states, matrix, head, reading);
         faults.refuseIfAny();
         return new Model(head.title(), head.step(), options.orientation().orElseThrow(), About.NOTHING,
-                new Chain(Chain.Kind.CHAIN, states.names(), matrix, start, Map.of(), List.of()), Optional.empty(), List.of(),
-                List.of(), reading.changes(), reading.written(), new Origin(source.name(), source.sha256()), List.of());
+                new Chain(Chain.Kind.CHAIN, states.names(), matrix, start, Map.of(), List.of()), Optional.empty(),
+                Optional.empty(), List.of(), List.of(), reading.changes(), reading.written(), new Origin(source.name(), source.sha256()), List.of());
     }
 
     private static MatrixGrid grid(NamedTable table, Source source, Reading reading) {
@@ -73,13 +73,13 @@ public final class MatrixFileReader {
         return grid.matrix(orientation, option, states, head, reading);
     }
 
-    private static List<Rational> start(States states, Head head, Reading reading) {
+    private static List<Rational> start(States states, SparseMatrix matrix, Head head, Reading reading) {
         if (reading.overrides().start().isEmpty()) {
             reading.fault(Position.ofWhole(Overrides.START_OPTION), "start-missing", "a table doesn't say where the "
                     + "chain starts; say --start STATE, for example --start '" + states.names().get(0) + "'");
             return List.of();
         }
-        return new StartSection(states, head, new Amounts(ParameterValues.NONE, reading), reading)
+        return new StartSection(states, Map.of(), matrix, head, new Amounts(ParameterValues.NONE, reading), reading)
                 .vector(Optional.empty(), Position.ofWhole(Overrides.START_OPTION));
     }
 }

@@ -6,6 +6,7 @@ import java.util.Map;
 import java.util.Optional;
 import org.pofk.chain.Chain;
 import org.pofk.chain.ChainCheck;
+import org.pofk.chain.Costs;
 import org.pofk.chain.Model;
 import org.pofk.chain.Model.Convention;
 import org.pofk.chain.Model.Origin;
@@ -24,7 +25,7 @@ import org.pofk.text.RefusedException;
 public final class ModelReader {
     private static final List<String> KEYS = List.of("pofk", "title", "kind", "step", "convention", "states", "start",
             "transitions", "matrix", "sums", "sets", "outputs", "parameters", "about", "actions", "schedule", "moves",
-            "phases", "repeat");
+            "phases", "repeat", "costs");
 
     private final Source source;
     private final Optional<Path> folder;
@@ -77,10 +78,13 @@ public final class ModelReader {
         List<Model.Written> written = List.copyOf(reading.written());
         Optional<Schedule> schedule = ScheduleSections.read(fields, moves.states(), head,
                 new Amounts(section.values(), reading), chain.matrix(), reading);
+        Optional<Costs> costs = fields.value("costs").flatMap(node -> new CostsSection(moves.states(), chain.sets(),
+                CostsSection.MoveFinder.of(chain.matrix(), written), new Amounts(section.values(), reading), reading)
+                .read(node, head));
         NameClashes.check(root, moves.states(), reading);
         Convention convention = head.convention()
                 .or(() -> moves.orientation().map(Head.Orientation::convention)).orElse(Convention.COLUMNS);
-        return Optional.of(new Model(head.title(), head.step(), convention, head.about(), chain, schedule,
+        return Optional.of(new Model(head.title(), head.step(), convention, head.about(), chain, schedule, costs,
                 parameters, reading.remarks(), reading.changes(), written,
                 new Origin(source.name(), source.sha256()), reading.tables()));
     }
@@ -95,10 +99,10 @@ public final class ModelReader {
         States states = moves.states();
         Amounts amounts = new Amounts(parameters, reading);
         SparseMatrix matrix = moves.matrix(head, amounts);
-        List<Rational> start = new StartSection(states, head, amounts, reading)
-                .vector(fields.value("start"), root.position());
         Map<String, List<Integer>> sets = fields.value("sets")
                 .map(node -> new SetsSection(states, reading).read(node)).orElse(Map.of());
+        List<Rational> start = new StartSection(states, sets, matrix, head, amounts, reading)
+                .vector(fields.value("start"), root.position());
         List<Output> outputs = fields.value("outputs")
                 .map(node -> new OutputsSection(states, head.kind(), sets, parameters, reading).read(node))
                 .orElse(List.of());

@@ -3,21 +3,35 @@ package org.pofk.input;
 import java.util.ArrayList;
 import java.util.Collections;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import org.pofk.chain.Chain;
+import org.pofk.chain.SparseMatrix;
 import org.pofk.chain.SparseMatrix.Entry;
 import org.pofk.exact.Rational;
 import org.pofk.text.Position;
 
-/** The section {@code start}: a state, a mapping of states to probabilities, or a list of them. */
+/**
+ * The section {@code start}: a state, a mapping of states to probabilities, a list of them, or the long run of a closed
+ * part.
+ */
 final class StartSection {
+    private static final String LONG_RUN = "long run";
+    private static final String LONG_RUN_OF = "long run of";
+
     private final States states;
+    private final Map<String, List<Integer>> sets;
+    private final SparseMatrix matrix;
     private final Head head;
     private final Amounts amounts;
     private final Reading reading;
 
-    StartSection(States states, Head head, Amounts amounts, Reading reading) {
+    /** @param matrix of the moves, for a start in their long run */
+    StartSection(States states, Map<String, List<Integer>> sets, SparseMatrix matrix, Head head, Amounts amounts,
+            Reading reading) {
         this.states = states;
+        this.sets = sets;
+        this.matrix = matrix;
         this.head = head;
         this.amounts = amounts;
         this.reading = reading;
@@ -43,12 +57,32 @@ final class StartSection {
                 .orElseGet(() -> inState(start.asScalar().orElseThrow()));
     }
 
+    /** In a state, or in what a word stands for that names none. */
     private List<Rational> inState(Node.Scalar name) {
+        if (head.kind() == Chain.Kind.CHAIN && !states.contains(name.name())) {
+            if (name.name().equals(LONG_RUN)) {
+                return LongRunStart.ofChain(name, states, sets, matrix, reading);
+            }
+            if (name.name().startsWith(LONG_RUN_OF + " ")) {
+                return LongRunStart.ofPart(new Node.Scalar(name.position(),
+                        name.name().substring(LONG_RUN_OF.length()), name.style()), states, sets, matrix, reading);
+            }
+            if (reading.overrides().isStartEach()) {
+                return Collections.nCopies(states.size(), Rational.of(1, states.size()));
+            }
+        }
         return states.find(name, reading).map(state -> vector(List.of(new Entry(state, Rational.ONE))))
                 .orElse(List.of());
     }
 
     private List<Rational> fromMapping(Node.Mapping mapping) {
+        Optional<Node.Entry> part = mapping.entries().stream().filter(entry -> entry.name().equals(LONG_RUN_OF)
+                && !states.contains(LONG_RUN_OF) && head.kind() == Chain.Kind.CHAIN).findFirst();
+        if (part.isPresent()) {
+            Fields.of(mapping, "start", List.of(LONG_RUN_OF), reading);
+            return reading.scalar(part.get().value(), "the part whose long run is the start")
+                    .map(name -> LongRunStart.ofPart(name, states, sets, matrix, reading)).orElse(List.of());
+        }
         List<Optional<Share>> shares = new ArrayList<>();
         for (Node.Entry entry : mapping.entries()) {
             if (states.contains(entry.name()) || !Fields.takeRemark(entry, "start", reading)) {

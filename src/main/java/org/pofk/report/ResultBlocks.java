@@ -31,12 +31,19 @@ final class ResultBlocks {
     private final DerivedOutput output;
     private final Prose left;
     private final Style style;
+    private final String states;
     private final List<Block> blocks = new ArrayList<>();
 
     private ResultBlocks(DerivedOutput output, Prose left, Style style) {
+        this(output, left, style, "states");
+    }
+
+    /** @param states what the components of the state vector are */
+    private ResultBlocks(DerivedOutput output, Prose left, Style style, String states) {
         this.output = output;
         this.left = left;
         this.style = style;
+        this.states = states;
     }
 
     static List<Block> of(DerivedOutput output, Style style) {
@@ -85,6 +92,14 @@ final class ResultBlocks {
     static List<Block> formulas(DerivedOutput output, Prose left, Style style) {
         ResultBlocks result = new ResultBlocks(output, left, style);
         output.closedForm().ifPresent(result::formulas);
+        return result.blocks;
+    }
+
+    /** The formulas of a total, from where on they hold and why. */
+    static List<Block> ofTotal(DerivedOutput output, Style style) {
+        ResultBlocks result = new ResultBlocks(output, OutputProse.atStep(output.output()), style, "states and sums");
+        output.closedForm().ifPresent(result::formulas);
+        output.transform().ifPresent(result::holds);
         return result.blocks;
     }
 
@@ -153,8 +168,8 @@ final class ResultBlocks {
         return count == 1 ? "1 exact term" : count + " exact terms";
     }
 
-    private static String states(int count) {
-        return count == 1 ? "one state takes part" : count + " states take part";
+    private String states(int count) {
+        return count == 1 ? "one state takes part" : count + " " + states + " take part";
     }
 
     private void longRun(LongRunChecks checks) {

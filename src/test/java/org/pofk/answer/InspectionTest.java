@@ -73,7 +73,7 @@ class InspectionTest {
 
     private static Model model(Chain chain, Model.About about, List<Model.Remark> remarks, List<String> changes) {
         return new Model("invented", new Model.Step("1 shift", Optional.empty(), Optional.empty()),
-                Model.Convention.COLUMNS, about, chain, Optional.empty(), List.of(), remarks, changes,
-                List.of(), new Model.Origin("invented.yaml", ""), List.of());
+                Model.Convention.COLUMNS, about, chain, Optional.empty(), Optional.empty(), List.of(),
+                remarks, changes, List.of(), new Model.Origin("invented.yaml", ""), List.of());
     }
 }

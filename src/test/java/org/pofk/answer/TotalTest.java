@@ -274,11 +274,11 @@ class TotalTest {
     void aRecursionIsAddedUpWithItsConstantAndItsGrowthIsToldInWords() {
         Chain doubling = Chains.recursion("1", "2");
         Output output = new Output("y", List.of(Rational.ONE), Rational.of(3), "x + 3");
-        Total total = Total.of(doubling, Increment.ofOutput(output), List.of(3));
+        Total total = Total.of(doubling, Increment.ofValues(output), List.of(3));
         // 1 + 2 + 4 + 8 and four times three
         assertEquals(Optional.of(Rational.of(27)), total.total().values().get(0).exact());
         assertEquals(Rational.ZERO, total.growth().perStep());
-        Total constant = Total.of(Chains.recursion("1", "1/2"), Increment.ofOutput(output), List.of());
+        Total constant = Total.of(Chains.recursion("1", "1/2"), Increment.ofValues(output), List.of());
         assertEquals(Rational.of(3), constant.growth().perStep());
         assertEquals(new LongRun.Limit(Rational.of(5)), constant.growth().beyond());
     }

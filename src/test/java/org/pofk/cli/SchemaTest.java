@@ -119,6 +119,15 @@ class SchemaTest {
     }
 
     @ParameterizedTest
+    @ValueSource(strings = {"models/pump-pair", "models/valve-rotation", "models/relined-main",
+        "models/level-controller", "costs/pump-pair"})
+    void totalsKeepTheirSchema(String model) throws Exception {
+        Run run = Run.of("total", "test-data/" + model + ".yaml", "--to", "0,7", "--as", "json");
+        assertEquals(0, run.exitCode(), run.notes());
+        assertEquals(Set.of(), schema("total").validate(MAPPER.readTree(run.answer())));
+    }
+
+    @ParameterizedTest
     @ValueSource(strings = {"pump-pair", "right"})
     void verdictsKeepTheirSchema(String claims) throws Exception {
         Run run = Run.of("check", "test-data/claims/" + claims + ".yaml", "--as", "json");
@@ -141,7 +150,7 @@ class SchemaTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"result", "structure", "simulation", "verdicts", "conditional"})
+    @ValueSource(strings = {"result", "structure", "simulation", "verdicts", "conditional", "total"})
     void schemasAreSchemas(String name) throws Exception {
         JsonSchema metaschema = JsonSchemaFactory.getInstance(SpecVersion.VersionFlag.V202012)
                 .getSchema(com.networknt.schema.SchemaLocation.of(com.networknt.schema.SchemaId.V202012));

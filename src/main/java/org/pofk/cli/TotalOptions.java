@@ -1,0 +1,79 @@
+package org.pofk.cli;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import org.pofk.answer.Increment;
+import org.pofk.answer.TotalModel;
+import org.pofk.chain.Chain;
+import org.pofk.chain.Model;
+import org.pofk.chain.Output;
+import picocli.CommandLine.Option;
+
+/** What is added up, and up to which steps. */
+final class TotalOptions {
+    private static final int ADDED_UNASKED = 12;
+
+    @Option(names = "--of", paramLabel = "NAME", description = "a state, a set or an output; repeatable")
+    private List<String> of = new ArrayList<>();
+
+    @Option(names = "--entries", description = "counts the moves into it from outside instead of the steps spent there")
+    private boolean entries;
+
+    @Option(names = "--costs", description = "adds up the costs of the model; the same without --of, where it has some")
+    private boolean costs;
+
+    @Option(names = "--to", paramLabel = "STEPS", converter = StepList.Converter.class,
+            description = "also gives the totals up to these steps, like 52,104 or 0..20")
+    private Optional<StepList> to = Optional.empty();
+
+    /** Ascending. */
+    List<Integer> steps() {
+        return to.map(StepList::steps).orElse(List.of());
+    }
+
+    /** What is asked for, in the order of the answer. */
+    List<TotalModel.Asked> asked(Model model) throws UsageException {
+        List<TotalModel.Asked> asked = new ArrayList<>();
+        if (costs && model.costs().isEmpty()) {
+            throw new UsageException("'" + model.origin().file() + "' names no costs; write for example"
+                    + " costs: {unit: kEUR, each step in: {STATE: 12}}");
+        }
+        boolean namesNothing = of.isEmpty() && !entries;
+        if (!of.isEmpty() || entries || namesNothing && model.costs().isEmpty()) {
+            for (Output output : outputs(model.chain())) {
+                asked.add(TotalModel.Asked.of(increment(model.chain(), output)));
+            }
+        }
+        if (costs || namesNothing) {
+            asked.addAll(TotalModel.costs(model));
+        }
+        return asked;
+    }
+
+    private List<Output> outputs(Chain chain) throws UsageException {
+        if (of.isEmpty() && chain.outputs().isEmpty() && chain.size() > ADDED_UNASKED) {
+            throw new UsageException("which of " + chain.size() + " states is it to be added up for? Name states or sets"
+                    + " with --of");
+        }
+        return AskedOutputs.of(chain, of);
+    }
+
+    private Increment increment(Chain chain, Output output) throws UsageException {
+        if (entries) {
+            return entries(chain, output);
+        }
+        return chain.kind() == Chain.Kind.CHAIN ? Increment.ofOutput(output) : Increment.ofValues(output);
+    }
+
+    private static Increment entries(Chain chain, Output output) throws UsageException {
+        if (chain.kind() == Chain.Kind.RECURSION) {
+            throw new UsageException("--entries counts moves of a chain of probabilities; this model is a recursion");
+        }
+        if (!Increment.isSet(output)) {
+            throw new UsageException("'" + output.name() + "' weighs states and can't be entered; --entries takes a"
+                    + " state or a set");
+        }
+        return Increment.ofEntries(chain, output);
+    }
+}
