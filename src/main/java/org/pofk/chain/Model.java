@@ -69,7 +69,7 @@ public record Model(String title, Step step, Convention convention, About about,
 
     /** The same model with another chain. */
     public Model with(Chain other) {
-        return new Model(title, step, convention, about, other, schedule, parameters, notes, changes, written, origin,
-                tables);
+        return new Model(title, step, convention, about, other, schedule, costs, parameters, notes, changes, written,
+                origin, tables);
     }
 }

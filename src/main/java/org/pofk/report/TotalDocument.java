@@ -41,7 +41,7 @@ public final class TotalDocument {
             keyFigures.addAll(TotalBlocks.keyFigures(found.model(), total, style).stream().limit(1)
                     .map(each -> new Labelled(Prose.name(total.total().output().name()), each.text())).toList());
         }
-        return new ReportSection(title, keyFigures, blocks, found.isComplete() ? ReportSection.Standing.ANSWERED
-                : ReportSection.Standing.NOT_DECIDED);
+        return new ReportSection(ReportSection.Place.RESULTS, title, keyFigures, blocks, found.isComplete()
+                ? ReportSection.Standing.ANSWERED : ReportSection.Standing.NOT_DECIDED);
     }
 }

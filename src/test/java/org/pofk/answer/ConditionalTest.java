@@ -218,7 +218,7 @@ class ConditionalTest {
 
     private static Model model(Chain chain) {
         return new Model("random", new Model.Step("1 step", Optional.empty(), Optional.empty()),
-                Model.Convention.COLUMNS, Model.About.NOTHING, chain, Optional.empty(), List.of(), List.of(),
+                Model.Convention.COLUMNS, Model.About.NOTHING, chain, Optional.empty(), Optional.empty(), List.of(), List.of(),
                 List.of(), List.of(), new Model.Origin("none", "0"), List.of());
     }
 }
