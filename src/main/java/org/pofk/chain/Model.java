@@ -55,8 +55,8 @@ public record Model(String title, Step step, Convention convention, About about,
 
     /** The same model, as if it had been read from another file. */
     public Model readFrom(Origin other) {
-        return new Model(title, step, convention, about, chain, schedule, parameters, notes, changes, written, other,
-                tables);
+        return new Model(title, step, convention, about, chain, schedule, costs, parameters, notes, changes, written,
+                other, tables);
     }
 
     public Model {
