@@ -9,12 +9,14 @@ import org.pofk.claim.AnswerOf.MeanPassage;
 import org.pofk.claim.AnswerOf.MeanPassage.Beginning;
 import org.pofk.claim.AnswerOf.MeanPassage.Cases;
 import org.pofk.claim.Statement;
+import org.pofk.claim.Truth;
 
 /**
  * Questions that a number may answer instead of the one it is claimed to answer: the joint probability, the value at
  * the end, a term less, another state to begin in.
  */
 final class OtherAnswers implements AnswerOf.Question<List<OtherAnswers.Other>> {
+    private final Truth truth;
     private final Chain chain;
 
     /**
@@ -26,13 +28,14 @@ final class OtherAnswers implements AnswerOf.Question<List<OtherAnswers.Other>> 
     record Other(SlipKind kind, String found, String right, Statement statement) {
     }
 
-    private OtherAnswers(Chain chain) {
-        this.chain = chain;
+    private OtherAnswers(Truth truth) {
+        this.truth = truth;
+        this.chain = truth.chain();
     }
 
-    /** All of them, for a chain; whether the number answers one is to be judged. */
-    static List<Other> of(AnswerOf asked, Chain chain) {
-        return asked.asked(new OtherAnswers(chain));
+    /** All of them; whether the number answers one is to be judged. */
+    static List<Other> of(AnswerOf asked, Truth truth) {
+        return asked.asked(new OtherAnswers(truth));
     }
 
     /** A step too early or too late is a number that is wrong by one. */
@@ -77,7 +80,8 @@ final class OtherAnswers implements AnswerOf.Question<List<OtherAnswers.Other>> 
         }
         others.add(sum(sum, SlipKind.INDEX_SHIFTED, first, last + 1));
         others.add(sum(sum, SlipKind.INDEX_SHIFTED, first + 1, last + 1));
-        if (first > 0) {
+        // where the term before is zero, the last one is merely missing
+        if (first > 0 && !truth.about(sum.output()).valueAt(first - 1).isZero()) {
             others.add(sum(sum, SlipKind.INDEX_SHIFTED, first - 1, last));
             others.add(sum(sum, SlipKind.INDEX_SHIFTED, first - 1, last - 1));
         }

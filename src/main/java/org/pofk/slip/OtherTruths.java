@@ -62,7 +62,7 @@ final class OtherTruths {
             candidates.addAll(ofCycle(claim, longRun, place, corrected));
         }
         if (claim.statement() instanceof AnswerOf asked) {
-            OtherAnswers.of(asked, truth.chain()).forEach(other -> candidates.add(new Candidate(other.kind(), place,
+            OtherAnswers.of(asked, truth).forEach(other -> candidates.add(new Candidate(other.kind(), place,
                     other.found(), other.right(), corrected, Candidate.with(claim, other.statement()), () -> truth)));
         }
         if (claim.statement() instanceof Statement.Value value) {

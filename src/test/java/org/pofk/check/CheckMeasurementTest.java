@@ -60,8 +60,10 @@ class CheckMeasurementTest {
     /** One claim in so many of the wrong ones; what is misread in the models of these tests is always taken. */
     static void measure(Subject subject, int formulas, int oneIn, Random random, Measurement measurement) {
         measurement.addRight(RightClaims.of(subject, formulas, random));
+        measurement.addRight(AnswerClaims.right(subject, random));
         List<Claimed> slips = new ArrayList<>(WrongClaims.of(subject, random));
         slips.addAll(WrongClaims.twice(subject, random));
+        slips.addAll(AnswerClaims.wrong(subject, random));
         slips.addAll(WrongClaims.approximations(subject, random));
         sampled(slips, oneIn, random).forEach(measurement::addWrong);
         List<Claimed> misread = Misreadings.of(subject, random);
