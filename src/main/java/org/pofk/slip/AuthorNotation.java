@@ -12,11 +12,21 @@ enum AuthorNotation {
         String write(Formula formula) {
             return PlainText.ASCII.write(formula);
         }
+
+        @Override
+        String root(String text) {
+            return "sqrt(" + text + ")";
+        }
     },
     LATEX(" \\cdot ", "\\left(", "\\right)", "{", "}", "^{\\circ}", "\\frac{1}{2} \\cdot ") {
         @Override
         String write(Formula formula) {
             return Latex.write(formula);
+        }
+
+        @Override
+        String root(String text) {
+            return "\\sqrt{" + text + "}";
         }
     };
 
@@ -44,6 +54,9 @@ enum AuthorNotation {
     }
 
     abstract String write(Formula formula);
+
+    /** The square root of what a text says. */
+    abstract String root(String text);
 
     String times() {
         return times;

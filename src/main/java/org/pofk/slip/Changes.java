@@ -8,6 +8,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.TreeMap;
+import java.util.stream.Stream;
 import org.pofk.claim.AnswerOf;
 import org.pofk.claim.AuthorText;
 import org.pofk.claim.AuthorText.Replacement;
@@ -83,6 +84,8 @@ final class Changes {
         boolean isAngle = claim.statement() instanceof Statement.Pair && parts.get(part).name().equals("angle");
         List<Edit> edits = new ArrayList<>(isAngle ? List.of() : new SignEdits(text).of(survey));
         edits.addAll(ofKind(part, text, survey));
+        claim.safeSide().filter(side -> Digits.isNumber(text.text())).ifPresent(side ->
+                edits.addAll(toTheSafeSide(text, side)));
         edits.addAll(new NumberEdits(text).of(survey, constant -> right(part, text, survey, constant)));
         return edits.stream().map(edit -> change(part, edit)).toList();
     }
@@ -91,6 +94,7 @@ final class Changes {
         List<Edit> edits = new ArrayList<>();
         if (claim.statement() instanceof Statement.PofK formula) {
             edits.addAll(new WaveEdits(text).of(survey));
+            edits.addAll(new PolarEdits(text).of(survey));
             edits.addAll(new StepEdits(text).of(survey));
             edits.addAll(new SwapEdits(text).of(survey));
             List<Mode> modes = truth.about(formula.parts().get(part).output()).closedForm().modes();
@@ -106,14 +110,40 @@ final class Changes {
             edits.addAll(new SwapEdits(text).of(survey));
         } else if (claim.statement() instanceof Statement.Pair) {
             String name = parts.get(part).name();
-            edits.addAll(name.equals("amplitude") ? new WaveEdits(text).ofAmplitude()
-                    : name.equals("radius") ? List.of() : new WaveEdits(text).ofAngle());
+            edits.addAll(ofPair(name, text));
         } else if (claim.statement() instanceof AnswerOf asked) {
             edits.addAll(new AnswerEdits(text).of(asked));
         } else if (!(claim.statement() instanceof Statement.Poles)) {
             edits.add(complement(text));
         }
         return edits;
+    }
+
+    private static List<Edit> ofPair(String name, AuthorText text) {
+        PolarEdits polar = new PolarEdits(text);
+        List<Edit> edits = new ArrayList<>(switch (name) {
+            case "amplitude" -> new WaveEdits(text).ofAmplitude();
+            case "radius" -> polar.ofRadius();
+            case "angle" -> polar.ofAngle();
+            default -> polar.ofPhase();
+        });
+        edits.addAll(name.equals("angle") || name.equals("phase") ? new WaveEdits(text).ofAngle() : List.of());
+        return edits;
+    }
+
+    /** A decimal one unit of its last place further to the safe side, or less where more digits are needed. */
+    private List<Edit> toTheSafeSide(AuthorText text, Claim.SafeSide side) {
+        BigDecimal found = new BigDecimal(text.text());
+        BigDecimal next = side == Claim.SafeSide.ABOVE ? found.add(found.ulp()) : found.subtract(found.ulp());
+        return Stream.of(next.toPlainString(), judgement.right()).filter(Digits::isNumber)
+                .filter(right -> isBetween(new BigDecimal(right), found, next))
+                .map(right -> new Edit(SlipKind.ROUNDED_TO_THE_UNSAFE_SIDE,
+                        List.of(new Replacement(0, text.text().length(), right)), text.place(), text.text(), right))
+                .toList();
+    }
+
+    private static boolean isBetween(BigDecimal value, BigDecimal first, BigDecimal last) {
+        return value.compareTo(first.min(last)) >= 0 && value.compareTo(first.max(last)) <= 0;
     }
 
     /** Significant digits for numbers put in; 0 where the author writes no decimals. */
@@ -173,7 +203,10 @@ final class Changes {
         SlipKind kind = edit.kind();
         boolean pole = claim.statement() instanceof Statement.Poles || name.equals("pole")
                 || name.equals("radius") || name.equals("angle") || name.equals("eigenvalue");
-        if (kind == SlipKind.WRONG_COEFFICIENT && pole) {
+        if (kind == SlipKind.WRONG_COEFFICIENT && claim.statement() instanceof Statement.Residues residues && !pole
+                && ResidueFactors.isOneLeftOut(claim, residues, part, truth)) {
+            kind = SlipKind.RESIDUE_WITHOUT_A_FACTOR;
+        } else if (kind == SlipKind.WRONG_COEFFICIENT && pole) {
             kind = SlipKind.WRONG_POLE;
         } else if (kind == SlipKind.SIGN_OF_A_TERM && name.equals("phase")) {
             kind = SlipKind.SIGN_OF_THE_PHASE;

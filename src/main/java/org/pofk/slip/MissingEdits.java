@@ -3,6 +3,8 @@ package org.pofk.slip;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.Function;
+import java.util.stream.Collectors;
 import org.pofk.claim.AuthorText;
 import org.pofk.claim.AuthorText.Replacement;
 import org.pofk.exact.Ball;
@@ -37,8 +39,10 @@ final class MissingEdits {
             if (!stated.have(mode)) {
                 edits.add(added(kind(mode), mode.accept(new InSteps())));
                 mode.accept(new OtherShapes()).forEach(term -> edits.add(added(SlipKind.TERM_MISSING, term)));
+                isNegativePole(mode).ifPresent(pole -> edits.add(added(SlipKind.SIGN_OF_A_POLE, turned(pole))));
             }
         }
+        edits.addAll(impulses(modes, stated, new InSteps()::impulse));
         return edits;
     }
 
@@ -51,7 +55,32 @@ final class MissingEdits {
                 mode.accept(new InZ(powerOfZ)).forEach(term -> edits.add(added(SlipKind.TERM_MISSING, term)));
             }
         }
+        edits.addAll(impulses(modes, stated, impulse -> new InZ(powerOfZ).impulse(impulse).get(0)));
         return edits;
+    }
+
+    /** All of several impulses at once, which go when the pole at zero is left out. */
+    private List<Edit> impulses(List<Mode> modes, StatedPoles stated, Function<Mode.Impulse, Formula> term) {
+        List<Mode.Impulse> missing = modes.stream().filter(mode -> !stated.have(mode))
+                .filter(Mode.Impulse.class::isInstance).map(Mode.Impulse.class::cast).toList();
+        if (missing.size() < 2) {
+            return List.of();
+        }
+        String right = missing.stream().map(impulse -> written(term.apply(impulse))).collect(Collectors.joining(" "));
+        return List.of(added(SlipKind.IMPULSE_MISSING, right));
+    }
+
+    private static Optional<Mode.Geometric> isNegativePole(Mode mode) {
+        return Optional.of(mode).filter(Mode.Geometric.class::isInstance).map(Mode.Geometric.class::cast)
+                .filter(pole -> pole.power() == 0 && pole.base().rational().filter(base -> base.signum() < 0).isPresent());
+    }
+
+    /** What a negative pole's term is more than that of its opposite. */
+    private Formula turned(Mode.Geometric mode) {
+        Formula k = new Formula.Symbol("k");
+        RealValue opposite = RealValue.of(mode.base().rational().orElseThrow().negate());
+        return Formulas.product(number(mode.coefficient()), Formulas.sum(List.of(
+                Formulas.power(number(mode.base()), k), Formulas.negated(Formulas.power(number(opposite), k)))));
     }
 
     private boolean isComplex() {
@@ -64,9 +93,16 @@ final class MissingEdits {
     }
 
     private Edit added(SlipKind kind, Formula term) {
+        return added(kind, written(term));
+    }
+
+    /** With its sign. */
+    private String written(Formula term) {
         boolean negative = term instanceof Formula.Negation;
-        String written = notation.write(negative ? ((Formula.Negation) term).operand() : term);
-        String right = (negative ? "- " : "+ ") + written;
+        return (negative ? "- " : "+ ") + notation.write(negative ? ((Formula.Negation) term).operand() : term);
+    }
+
+    private Edit added(SlipKind kind, String right) {
         int end = text.text().length();
         return new Edit(kind, List.of(new Replacement(end, end, " " + right)), text.place(), "", right);
     }

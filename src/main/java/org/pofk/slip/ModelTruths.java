@@ -4,6 +4,9 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
+import java.util.regex.Matcher;
+import java.util.regex.Pattern;
 import org.pofk.chain.Model;
 import org.pofk.claim.Truth;
 
@@ -12,6 +15,8 @@ import org.pofk.claim.Truth;
  * derived when it is first asked for and kept, for all derivations about the model.
  */
 public final class ModelTruths {
+    private static final Pattern WHOLE = Pattern.compile("([0-9]{1,6})\\b(?![.,/])");
+
     private final Model model;
     private final Variants variants;
     private final Truth truth;
@@ -39,6 +44,17 @@ public final class ModelTruths {
             others.addAll(OtherChain.allOf(model, variants));
         }
         return List.copyOf(others);
+    }
+
+    /**
+     * The steps that somebody may take for a step who counts time instead, or the other way about: as many times as the
+     * number before the unit in what a step lasts.
+     */
+    List<Long> stepsTakenFor(long step) {
+        Optional<Long> units = model.step().lasts().map(lasts -> WHOLE.matcher(lasts.strip())).filter(Matcher::lookingAt)
+                .map(found -> Long.parseLong(found.group(1))).filter(count -> count > 1);
+        return units.map(count -> step % count == 0 ? List.of(step * count, step / count) : List.of(step * count))
+                .orElse(List.of());
     }
 
     /** That of another chain. */

@@ -65,7 +65,17 @@ final class OtherTruths {
             OtherAnswers.of(asked, truth).forEach(other -> candidates.add(new Candidate(other.kind(), place,
                     other.found(), other.right(), corrected, Candidate.with(claim, other.statement()), () -> truth)));
         }
+        if (claim.statement() instanceof Statement.Bound bound) {
+            candidates.add(new Candidate(SlipKind.LONG_RUN_FOR_THE_LARGEST, place, "the long run", right, corrected,
+                    Candidate.with(claim, new Statement.LongRunOf(List.of(
+                            new Statement.LongRunOf.Part(bound.output(), List.of(bound.is()))))), () -> truth));
+        }
         if (claim.statement() instanceof Statement.Value value) {
+            for (long at : known.stepsTakenFor(value.at())) {
+                candidates.add(new Candidate(SlipKind.TIME_FOR_STEPS, place, "p(" + at + ")",
+                        "p(" + value.at() + ")", corrected, Candidate.with(claim,
+                                new Statement.Value(value.output(), at, value.is())), () -> truth));
+            }
             for (long at : new long[] {value.at() - 1, value.at() + 1}) {
                 if (at >= 0) {
                     candidates.add(new Candidate(SlipKind.INDEX_SHIFTED, place, "p(" + at + ")",

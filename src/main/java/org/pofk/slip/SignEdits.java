@@ -70,11 +70,11 @@ final class SignEdits {
         AuthorNotation notation = AuthorNotation.of(text.notation());
         if (base.formula() instanceof Formula.Negation) {
             String without = text.text(base.parts().get(0));
-            return new Edit(SlipKind.WRONG_POLE, List.of(whole(base, without)), text.place(base), text.text(base),
+            return new Edit(SlipKind.SIGN_OF_A_POLE, List.of(whole(base, without)), text.place(base), text.text(base),
                     without);
         }
         String turned = notation.enclosed("-" + text.text(base));
-        return new Edit(SlipKind.WRONG_POLE, List.of(whole(base, turned)), text.place(base), text.text(base), turned);
+        return new Edit(SlipKind.SIGN_OF_A_POLE, List.of(whole(base, turned)), text.place(base), text.text(base), turned);
     }
 
     private Edit withoutMinus(ParsedFormula minus) {

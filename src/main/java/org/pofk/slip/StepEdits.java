@@ -7,6 +7,7 @@ import org.pofk.claim.AuthorText;
 import org.pofk.claim.AuthorText.Replacement;
 import org.pofk.exact.Rational;
 import org.pofk.formula.Formula;
+import org.pofk.formula.Formulas;
 import org.pofk.formula.ParsedFormula;
 import org.pofk.slip.FormulaSurvey.Term;
 
@@ -34,10 +35,30 @@ final class StepEdits {
                         List.of(shift), text.place(power), text.text(power), text.edited(power, List.of(shift)))));
             }
         }
+        text.tree().nodes().filter(StepEdits::isPowerOfK).forEach(power -> edits.add(asBinomial(power)));
         for (Term term : survey.summands()) {
             edits.addAll(asRepeated(survey, term));
         }
         return edits;
+    }
+
+    private static boolean isPowerOfK(ParsedFormula node) {
+        return node.formula() instanceof Formula.Power power && power.base() instanceof Formula.Symbol symbol
+                && symbol.name().equals("k") && power.exponent() instanceof Formula.Number number
+                && (number.value().equals(Rational.TWO) || number.value().equals(Rational.of(3)));
+    }
+
+    /** k^2 as k (k − 1), k^3 as k (k − 1) (k − 2). */
+    private Edit asBinomial(ParsedFormula power) {
+        boolean isSquare = ((Formula.Power) power.formula()).exponent().equals(Formulas.number(2));
+        String name = text.text(power.parts().get(0));
+        String right = name + notation.times() + notation.enclosed(name + " - 1")
+                + (isSquare ? "" : notation.times() + notation.enclosed(name + " - 2"));
+        // what stands in braces of LaTeX alone stands there with them
+        boolean isBraced = text.text(power).startsWith("{");
+        return new Edit(SlipKind.POWER_FOR_BINOMIAL, List.of(new Replacement(AuthorText.start(power),
+                AuthorText.end(power), isBraced ? notation.exponent(right) : notation.enclosed(right))),
+                text.place(power), text.text(power).replaceAll("^\\{|\\}$", ""), right);
     }
 
     /** In a term with a factor k or binomial(k, p) outside its power, lowering is what was forgotten. */
