@@ -19,13 +19,14 @@ import org.pofk.transform.Transforms;
  * are left out, all others halved down to single steps.
  *
  * @param value what is reached at {@code at}, or only approached as k grows
- * @param at    the first step that reaches it; empty where it is a value of the long run that no step reaches
+ * @param at    the first step that reaches it, or beyond step 200 one of them; empty where it is a value of the long run that is approached
  */
 public record Peak(StepValue value, Optional<Long> at) {
     private static final int BITS = 256;
     private static final int MOST_STRETCHES = 100_000;
     private static final int MOST_DIGITS = 40;
     private static final long MOST_CLASSES = 120;
+    private static final long STEPPED_UP_TO = 200;
 
     /** A stretch of one residue class with the most its values can be. */
     private record Stretch(long from, long to, long modulus, Rational atMost) {
@@ -74,7 +75,9 @@ public record Peak(StepValue value, Optional<Long> at) {
             Optional<Sequence> exact = Optional.empty();
             for (long k = 0; k < form.withoutImpulsesFrom() + 1L; k++) {
                 exact = Optional.of(exact.orElseGet(() -> Sequence.of(chain, form.transform())));
-                offer(k, Ball.of(exact.get().at(k), BITS));
+                Rational value = exact.get().at(k);
+                offer(k, Ball.of(value, BITS));
+                reached(k, value);
             }
             for (int digits = 4; digits <= MOST_DIGITS; digits *= 2) {
                 Rational margin = Rational.of(10).pow(-digits);
@@ -84,11 +87,22 @@ public record Peak(StepValue value, Optional<Long> at) {
                     return Optional.empty();
                 }
                 if (bestValue.lower().compareTo(longRun.plus(margin)) > 0) {
-                    return best.filter(k -> k <= Integer.MAX_VALUE).map(k -> new Peak(value(k), best));
+                    return best.filter(k -> k <= Integer.MAX_VALUE).map(this::first).map(k -> new Peak(value(k),
+                            Optional.of(k)));
                 }
             }
             return approachedFromBelow() ? Optional.of(new Peak(new StepValue(0, Optional.of(longRun),
                     Enclosed.of(longRun)), best)) : Optional.empty();
+        }
+
+        /** An earlier step with the same value, which bounds can't tell apart, where stepping so far is quick. */
+        private long first(long reached) {
+            if (reached > STEPPED_UP_TO) {
+                return reached;
+            }
+            List<Rational> values = ExactSteps.of(chain, List.of(form.transform().output()), (int) reached).values()
+                    .get(0);
+            return values.indexOf(values.get((int) reached));
         }
 
         private StepValue value(long k) {
@@ -103,9 +117,20 @@ public record Peak(StepValue value, Optional<Long> at) {
                     if (kind != EventualSign.Kind.NEGATIVE && kind != EventualSign.Kind.ZERO) {
                         return false;
                     }
+                    if (kind == EventualSign.Kind.ZERO) {
+                        reached(form.withoutImpulsesFrom()
+                                + Math.floorMod(residue - form.withoutImpulsesFrom(), modulus), longRun);
+                    }
                 }
             }
             return true;
+        }
+
+        /** Whether the highest value of the long run is that of an early step itself. */
+        private void reached(long k, Rational value) {
+            if (value.equals(longRun) && bestValue.contains(longRun) && best.filter(earlier -> earlier <= k).isEmpty()) {
+                best = Optional.of(k);
+            }
         }
 
         private void offer(long k, Ball value) {

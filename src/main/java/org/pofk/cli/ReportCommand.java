@@ -26,8 +26,8 @@ import picocli.CommandLine.Option;
 import picocli.CommandLine.Spec;
 
 /** {@code pofk report MODEL}: the document to hand in. */
-@Command(description = {"Writes the document to hand in: results first, then the whole derivation, worked,",
-    "with figures, how it was checked, and what it stands on."})
+@Command(description = {"Writes the document to hand in: results first, then the whole derivation,",
+    "worked, with figures, how it was checked, and what it stands on."})
 final class ReportCommand implements Work {
     static final int REPORTED_UNASKED = 12;
 

@@ -118,7 +118,7 @@ final class ReportSummary {
                     SettlingProse.of(settling, longRun, style.digits()))));
             figures.highest().ifPresent(peak -> facts.add(new Labelled("highest", ValueText.of(peak.value(),
                     style.digits()) + peak.at().map(k -> " at k = " + k)
-                    .orElse(", approached as k grows and never reached"))));
+                    .orElse(", approached as k grows"))));
         });
         return facts;
     }

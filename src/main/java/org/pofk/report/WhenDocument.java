@@ -130,7 +130,7 @@ public final class WhenDocument {
         String value = peak.value().exact().map(this::number)
                 .orElseGet(() -> ValueText.of(peak.value(), style.digits()));
         return (condition.kind() == When.Condition.Kind.AT_LEAST ? "the highest value is " : "the lowest value is ")
-                + value + peak.at().map(k -> ", at k = " + k).orElse(", approached as k grows and never reached");
+                + value + peak.at().map(k -> ", at k = " + k).orElse(", approached as k grows");
     }
 
     /** With the step, in a line. */
