@@ -56,6 +56,9 @@ final class ReportCommand implements Work {
     private PassageOptions passage = new PassageOptions();
 
     @Mixin
+    private TotalSections totals = new TotalSections();
+
+    @Mixin
     private ClaimsOptions claims = new ClaimsOptions();
 
     @Mixin
@@ -104,6 +107,7 @@ final class ReportCommand implements Work {
             throws RefusedException, UsageException {
         return Stream.of(conditions.sections(read, outputs, style),
                 passage.sections(read.chain(), at.steps(), style),
+                totals.sections(read, at.steps(), style),
                 claims.sections(read, options.settings())).flatMap(List::stream).toList();
     }
 
@@ -130,6 +134,7 @@ final class ReportCommand implements Work {
         List<Output> outputs = AskedOutputs.thoseOf(chain, of);
         List<AskedSection> sections = new ArrayList<>(conditions.sections(model, outputs, style));
         sections.addAll(whereAsked(() -> passage.sections(chain, at.steps(), style)));
+        sections.addAll(whereAsked(() -> totals.sections(model.with(chain), at.steps(), style)));
         sections.addAll(whereAsked(() -> claims.sections(model, options.settings())));
         return Optional.of(new AskedReport(model, outputs, sections, at.steps(), extras()));
     }

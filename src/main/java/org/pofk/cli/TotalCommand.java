@@ -3,9 +3,12 @@ package org.pofk.cli;
 import java.util.List;
 import org.pofk.answer.TotalModel;
 import org.pofk.chain.Model;
+import org.pofk.report.CsvWriter;
+import org.pofk.report.NotebookWriter;
 import org.pofk.report.Style;
 import org.pofk.report.TotalDocument;
 import org.pofk.report.TotalJson;
+import org.pofk.report.TotalTable;
 import org.pofk.text.RefusedException;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
@@ -15,7 +18,7 @@ import picocli.CommandLine.Mixin;
     "entries into it, costs. Formulas that hold for every k, and how they grow."})
 final class TotalCommand implements Work {
     @Mixin
-    private AnswerOptions options = new AnswerOptions(CommandName.TOTAL, Format.JSON);
+    private AnswerOptions options = new AnswerOptions(CommandName.TOTAL, Format.JSON, Format.CSV, Format.NOTEBOOK);
 
     @Mixin
     private TotalOptions total = new TotalOptions();
@@ -26,14 +29,18 @@ final class TotalCommand implements Work {
         Destination destination = options.destination();
         Model read = options.model();
         List<TotalModel.Asked> asked = total.asked(read);
-        Worker.Outcome<TotalModel> outcome = options.within(streams, published ->
-                TotalModel.of(read, asked, total.steps(), published));
+        List<Integer> steps = destination.steps(total.to());
+        Worker.Outcome<TotalModel> outcome = options.within(streams, partly ->
+                partly.totals().size() + " of " + asked.size() + " totals found", published ->
+                TotalModel.of(read, asked, steps, published));
         if (outcome.published().isEmpty()) {
             return options.undecided(streams);
         }
         TotalModel found = outcome.published().get();
         destination.write(Answer.of(() -> TotalDocument.of(found, style))
-                .with(Format.JSON, () -> TotalJson.write(found, style.digits())), streams);
+                .with(Format.JSON, () -> TotalJson.write(found, style.digits()))
+                .with(Format.CSV, () -> CsvWriter.write(TotalTable.of(found, style.digits())))
+                .with(Format.NOTEBOOK, () -> NotebookWriter.write(found, style, options.convention(read))), streams);
         return found.isComplete() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
     }
 }

@@ -27,9 +27,9 @@ final class TotalOptions {
             description = "also gives the totals up to these steps, like 52,104 or 0..20")
     private Optional<StepList> to = Optional.empty();
 
-    /** Ascending. */
-    List<Integer> steps() {
-        return to.map(StepList::steps).orElse(List.of());
+    /** The steps asked for. */
+    Optional<StepList> to() {
+        return to;
     }
 
     /** What is asked for, in the order of the answer. */
@@ -53,8 +53,8 @@ final class TotalOptions {
 
     private List<Output> outputs(Chain chain) throws UsageException {
         if (of.isEmpty() && chain.outputs().isEmpty() && chain.size() > ADDED_UNASKED) {
-            throw new UsageException("which of " + chain.size() + " states is it to be added up for? Name states or sets"
-                    + " with --of");
+            throw new UsageException("which of " + chain.size() + " states is it to be added up for? Name states or"
+                    + " sets with --of");
         }
         return AskedOutputs.of(chain, of);
     }
@@ -66,7 +66,7 @@ final class TotalOptions {
         return chain.kind() == Chain.Kind.CHAIN ? Increment.ofOutput(output) : Increment.ofValues(output);
     }
 
-    private static Increment entries(Chain chain, Output output) throws UsageException {
+    static Increment entries(Chain chain, Output output) throws UsageException {
         if (chain.kind() == Chain.Kind.RECURSION) {
             throw new UsageException("--entries counts moves of a chain of probabilities; this model is a recursion");
         }

@@ -2,9 +2,17 @@ package org.pofk.report;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
+import java.util.Set;
 import org.pofk.answer.DerivedModel;
 import org.pofk.answer.DerivedOutput;
+import org.pofk.answer.Increment;
+import org.pofk.answer.Total;
+import org.pofk.answer.TotalModel;
+import org.pofk.answer.Wanted;
+import org.pofk.chain.Model;
 import org.pofk.chain.Model.Convention;
+import org.pofk.chain.Structure;
 import org.pofk.modes.ClosedForm;
 import org.pofk.report.Document.Block;
 import org.pofk.report.Document.Heading;
@@ -43,6 +51,38 @@ public final class NotebookWriter {
         return new Notebook(writer.cells).write();
     }
 
+    /** The totals of a model, each proved as outputs of the recursion that adds it up. */
+    public static String write(TotalModel found, Style style, Convention convention) {
+        List<DerivedModel> recursions = found.totals().stream().map(total -> recursion(found, total)).toList();
+        List<Block> head = new ArrayList<>(ModelHead.of(found.model()));
+        head.add(new Paragraph(WHAT_IT_DOES));
+        head.add(new Paragraph("A total is an output of a linear recursion: the states of the model, and behind them what"
+                + " the moves of a step add and what was added before."));
+        List<Notebook.Cell> cells = new ArrayList<>();
+        for (int i = 0; i < recursions.size(); i++) {
+            NotebookWriter writer = new NotebookWriter(recursions.get(i), style, convention);
+            writer.text(i == 0 ? head : List.of());
+            writer.text(List.of(new Heading(2, OutputProse.title(found.totals().get(i).total().output()))));
+            writer.text(TotalBlocks.of(found.model(), found.totals().get(i), style));
+            if (i == 0) {
+                writer.chain(recursions);
+            } else {
+                writer.nextChain();
+            }
+            writer.derived.outputs().forEach(writer::output);
+            cells.addAll(writer.cells);
+        }
+        cells.add(new Notebook.Cell(Notebook.Kind.MARKDOWN, MarkdownWriter.write(List.of(Caution.of(found.model())))));
+        return new Notebook(cells.stream().filter(cell -> !cell.source().isBlank()).toList()).write();
+    }
+
+    private static DerivedModel recursion(TotalModel found, Total total) {
+        Model model = found.model().with(total.summed().recursion());
+        return new DerivedModel(model, Structure.of(model.chain()), total.increment().kind() == Increment.Kind.COSTS
+                ? List.of(total.step(), total.total()) : List.of(total.total()), Optional.empty(),
+                new Wanted(List.of(), Set.of()));
+    }
+
     /** The same between the first page of a report with its answers, and what the report stands on. */
     public static String write(Report report, Style style, Convention convention) {
         NotebookWriter writer = new NotebookWriter(report.derived(), style, convention);
@@ -67,6 +107,17 @@ public final class NotebookWriter {
     }
 
     private void chain() {
+        chain(List.of(derived));
+    }
+
+    /** Another recursion, to which the tools of the first apply. */
+    private void nextChain() {
+        text("The recursion in exact fractions, stepped from its start:");
+        code(PythonChain.of(derived.model().chain(), convention) + "\npath = [start]");
+    }
+
+    /** @param all what the tools given here are to serve */
+    private void chain(List<DerivedModel> all) {
         text(ChainBlocks.of(derived.model(), derived.outputs().stream().map(DerivedOutput::output).toList(),
                 convention));
         text("The model in exact fractions:");
@@ -85,7 +136,7 @@ public final class NotebookWriter {
         text("A long run is proved by the poles: those on the unit circle are simple roots of unity, all others lie"
                 + " inside.");
         code(Python.tools("long_run"));
-        if (derived.outputs().stream().flatMap(output -> output.closedForm().stream())
+        if (all.stream().flatMap(each -> each.outputs().stream()).flatMap(output -> output.closedForm().stream())
                 .anyMatch(form -> PythonFormulas.of(form, style.digits()).needsDecimals())) {
             text("Roots, cosines and π to 100 digits, for formulas as they are printed:");
             code(Python.tools("decimals"));

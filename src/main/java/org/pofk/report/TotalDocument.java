@@ -7,7 +7,6 @@ import org.pofk.answer.TotalModel;
 import org.pofk.report.Document.Block;
 import org.pofk.report.Document.Heading;
 import org.pofk.report.Document.Labelled;
-import org.pofk.report.Document.Paragraph;
 import org.pofk.report.Document.Sequence;
 
 /** What is spent in states, entered and paid over steps, as a document. */
@@ -27,7 +26,7 @@ public final class TotalDocument {
             blocks.add(new Labelled("not decided", "within the budget: " + (found.wanted() - found.totals().size())
                     + " more"));
         }
-        blocks.add(new Paragraph(Caution.TEXT));
+        blocks.add(Caution.of(found.model()));
         return new Document(blocks, sequences);
     }
 
