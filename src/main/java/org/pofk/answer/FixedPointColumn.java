@@ -3,6 +3,7 @@ package org.pofk.answer;
 import java.math.BigInteger;
 import java.util.Arrays;
 import java.util.List;
+import java.util.stream.IntStream;
 import org.pofk.chain.SparseMatrix;
 
 /**
@@ -27,6 +28,22 @@ final class FixedPointColumn {
     /** The columns of M² from below, M given by its columns from below. */
     static List<FixedPointColumn> squared(List<FixedPointColumn> columns) {
         return columns.stream().map(column -> column.image(columns)).toList();
+    }
+
+    /** The columns of M N from below, both given by their columns from below. */
+    static List<FixedPointColumn> product(List<FixedPointColumn> m, List<FixedPointColumn> n) {
+        return n.stream().map(column -> column.image(m)).toList();
+    }
+
+    static List<FixedPointColumn> identity(int size) {
+        return IntStream.range(0, size).mapToObj(state -> new FixedPointColumn(new int[] {state},
+                new BigInteger[] {BigInteger.ONE.shiftLeft(FixedPointState.BITS)})).toList();
+    }
+
+    /** The component in row i. */
+    BigInteger at(int i) {
+        int place = Arrays.binarySearch(rows, i);
+        return place < 0 ? BigInteger.ZERO : values[place];
     }
 
     /** How many entries are not zero. */

@@ -27,6 +27,9 @@ public final class Cyclotomic {
         return totient;
     }
 
+    /** So few divisions cost less than finding the part whose roots come with their inverses. */
+    private static final int TRIED_ONE_BY_ONE = 8;
+
     /** All n whose cyclotomic polynomial divides this one, ascending; none for the zero polynomial. */
     public static List<Integer> ordersDividing(Polynomial<Rational> polynomial) {
         IntegerPolynomial common = withInverses(PrimitiveForm.partOf(polynomial));
@@ -35,7 +38,8 @@ public final class Cyclotomic {
 
     /** Those of the candidate orders whose cyclotomic polynomial divides this one, ascending; none for zero. */
     public static List<Integer> ordersDividing(Polynomial<Rational> polynomial, Collection<Integer> candidates) {
-        return ordersDividing(withInverses(PrimitiveForm.partOf(polynomial)), candidates);
+        IntegerPolynomial part = PrimitiveForm.partOf(polynomial);
+        return ordersDividing(candidates.size() <= TRIED_ONE_BY_ONE ? part : withInverses(part), candidates);
     }
 
     private static List<Integer> ordersDividing(IntegerPolynomial part, Collection<Integer> candidates) {

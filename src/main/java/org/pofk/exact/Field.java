@@ -25,6 +25,11 @@ public interface Field<E> {
 
     boolean isZero(E a);
 
+    /** How long an element is to write, in bits; a field whose elements don't grow has none to tell. */
+    default int bits(E a) {
+        return 0;
+    }
+
     default E of(long value) {
         return of(Rational.of(value));
     }

@@ -39,6 +39,11 @@ public enum RationalField implements Field<Rational> {
     }
 
     @Override
+    public int bits(Rational a) {
+        return a.numerator().bitLength() + a.denominator().bitLength();
+    }
+
+    @Override
     public Rational inverse(Rational a) {
         return a.inverse();
     }

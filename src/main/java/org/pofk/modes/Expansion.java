@@ -19,10 +19,12 @@ public record Expansion<E>(Field<E> field, List<E> impulses, List<Part<E>> parts
 
     /** Degree of a simple factor up to which its coefficient is reduced to one polynomial. */
     public static final int REDUCED_UP_TO = 12;
+    /** Degree times bits of the longest coefficient of such a factor. */
+    static final int REDUCED_UP_TO_BITS = 8_000;
 
     /**
      * What one factor q^e contributes: coefficients R_0 … R_{e−1} in E[λ]/(q), degree below that of q.
-     * For a simple factor of high degree (above {@link #REDUCED_UP_TO}) R_0 is kept as the quotient
+     * For a simple factor of high degree (above {@link #REDUCED_UP_TO}) or with long coefficients R_0 is kept as the quotient
      * numerator(λ)/denominator(λ), never reduced; otherwise denominator is one.
      */
     public record Part<E>(Factorization.Factor<E> factor, List<Coefficient<E>> coefficients) {

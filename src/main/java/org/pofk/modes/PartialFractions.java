@@ -97,9 +97,15 @@ public final class PartialFractions<E> {
 
     private List<Expansion.Coefficient<E>> coefficients(Polynomial<E> numerator, Factorization.Factor<E> factor) {
         boolean simple = factor.multiplicity() == 1;
-        return simple && factor.polynomial().degree() > Expansion.REDUCED_UP_TO
+        return simple && (factor.polynomial().degree() > Expansion.REDUCED_UP_TO || isLong(factor.polynomial()))
                 ? List.of(new Expansion.Coefficient<>(numerator, denominator.derivative()))
                 : taylor(numerator, factor);
+    }
+
+    /** Whether Euclid's algorithm, whose numbers grow with degree and length, would take long. */
+    private boolean isLong(Polynomial<E> factor) {
+        int bits = factor.coefficients().stream().mapToInt(field::bits).max().orElse(0);
+        return (long) bits * factor.degree() > Expansion.REDUCED_UP_TO_BITS;
     }
 
     /** R_p is the Taylor coefficient of order e−1−p: 1/(z − λ)^(p+1) goes with binomial(k, p) λ^(k−p). */

@@ -7,6 +7,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.function.Function;
 import java.util.stream.IntStream;
+import org.pofk.chain.SparseMatrix;
 import org.pofk.exact.Polynomial;
 import org.pofk.exact.Rational;
 import org.pofk.transform.RecurrenceProof.Method;
@@ -30,6 +31,7 @@ final class Recurrences {
     /** Up to this size the proof is made in rational numbers as well, as long as they stay short. */
     private static final int REPEATABLE_UP_TO = 16;
     private static final int REPEATABLE_BITS = 2048;
+    private static final int SHORT_BITS = 128;
 
     /** What one prime says. */
     private record Modular(PrimeField field, List<ModularRecurrence> recurrences) {
@@ -94,7 +96,7 @@ final class Recurrences {
      */
     private Recurrence repeatable(Recurrence joined, int place) {
         int order = joined.denominator().degree();
-        long bits = (long) scaled.unit().bitLength() * (system.size() + order);
+        long bits = (long) growth() * (system.size() + order);
         if (system.size() > REPEATABLE_UP_TO || bits > REPEATABLE_BITS) {
             return joined;
         }
@@ -111,6 +113,13 @@ final class Recurrences {
         return new Recurrence(joined.denominator(), joined.numerators(), whole
                 ? new RecurrenceProof(Method.VECTOR, order, 2 * order, 0, 0)
                 : new RecurrenceProof(Method.WINDOWS, system.size(), system.size() + order, 0, 0));
+    }
+
+    /** By how many bits terms grow in a step; short denominators of an unscaled matrix count as nothing. */
+    private int growth() {
+        int bits = CommonDenominator.of(system.matrix().columns().stream().flatMap(List::stream)
+                .map(SparseMatrix.Entry::value).distinct().toList()).bitLength();
+        return bits > SHORT_BITS ? bits : scaled.unit().bitLength();
     }
 
     private List<Rational> unit(int place) {

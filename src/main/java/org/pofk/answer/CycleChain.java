@@ -1,0 +1,81 @@
+package org.pofk.answer;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.stream.IntStream;
+import org.pofk.answer.CycleCourse.Side;
+import org.pofk.answer.CycleFormula.Place;
+import org.pofk.chain.Chain;
+import org.pofk.chain.Output;
+import org.pofk.chain.Timetable;
+import org.pofk.modes.ClosedForm;
+import org.pofk.modes.KnownPoles;
+import org.pofk.transform.Transform;
+import org.pofk.transform.Transforms;
+
+/**
+ * The chain that moves once a cycle, by S from x(P): its outputs at step m are the outputs of a scheduled chain in
+ * cycle m, so that all that is known of chains is known of these.
+ */
+final class CycleChain {
+    private final Timetable timetable;
+    private final StateArithmetic.Whole matrices;
+    private final Chain chain;
+    private final KnownPoles poles;
+
+    private CycleChain(Timetable timetable, StateArithmetic.Whole matrices, Chain chain) {
+        this.timetable = timetable;
+        this.matrices = matrices;
+        this.chain = chain;
+        this.poles = new KnownPoles(() -> Eigenvalues.guesses(chain.matrix()));
+    }
+
+    /** @param begin x(P) */
+    static CycleChain of(Chain chain, Timetable timetable, StateArithmetic.Whole matrices, WholeMatrix cycle,
+            WholeState begin) {
+        return new CycleChain(timetable, matrices, new Chain(chain.kind(), chain.states(), cycle.reduced(),
+                begin.reduced(), chain.sets(), List.of()));
+    }
+
+    Chain chain() {
+        return chain;
+    }
+
+    /** For each output its formulas at these places, and that of its mean over a cycle. */
+    List<List<CycleFormula>> formulas(List<Output> outputs, List<Place> places) {
+        List<Optional<Place>> asked = new ArrayList<>(places.stream().map(Optional::of).toList());
+        if (timetable.period() > 1) {
+            asked.add(Optional.empty());
+        }
+        List<Transform> transforms = Transforms.of(chain, outputs.stream()
+                .map(output -> new CycleOutputs(timetable, matrices, output))
+                .flatMap(later -> asked.stream().map(place -> place.map(at -> later.at(at.j(), at.side()))
+                        .orElseGet(later::average))).toList());
+        List<List<CycleFormula>> formulas = new ArrayList<>();
+        for (int i = 0; i < outputs.size(); i++) {
+            int from = i * asked.size();
+            formulas.add(IntStream.range(0, asked.size()).mapToObj(place ->
+                    formula(asked.get(place), transforms.get(from + place))).toList());
+        }
+        return formulas;
+    }
+
+    private CycleFormula formula(Optional<Place> place, Transform transform) {
+        return new CycleFormula(place, ClosedForm.of(transform, poles), LongRun.of(chain, transform));
+    }
+
+    /** Where an output is looked at unasked: after the actions that end a cycle, and just before any action. */
+    static List<Place> places(Timetable timetable, int most) {
+        List<Place> places = new ArrayList<>(List.of(new Place(0, Side.AFTER)));
+        for (int j = 1; j <= timetable.period() && places.size() <= most; j++) {
+            if (!timetable.cycle().get(j - 1).actions().isEmpty()) {
+                places.add(new Place(j, Side.BEFORE));
+                if (j < timetable.period()) {
+                    places.add(new Place(j, Side.AFTER));
+                }
+            }
+        }
+        return places.size() <= most ? places : places.subList(0, 1);
+    }
+}
