@@ -27,6 +27,7 @@ public final class Scheduling {
     /** Steps times entries times machine words of a number. */
     private static final double WALKED_EXACTLY_AT_MOST = 1e8;
     private static final int PLACES_AT_MOST = 8;
+    private static final int JOINT_STATES_AT_MOST = 6;
 
     private final Consumer<ScheduledModel> published;
     private final Chain chain;
@@ -195,6 +196,17 @@ public final class Scheduling {
         for (int i = 0; i < outputs.size(); i++) {
             List<CycleFormula> found = over.get(i);
             publish(i, output -> output.withOver(found));
+        }
+        within.firstPart().filter(part -> chain.size() <= JOINT_STATES_AT_MOST).flatMap(part -> JointFormulas.of(
+                cycles.chain(), timetable.moves().get(part.move()), part.to())).ifPresent(this::joint);
+    }
+
+    private void joint(JointFormulas formulas) {
+        for (int i = 0; i < outputs.size(); i++) {
+            Optional<JointFormula> found = formulas.of(outputs.get(i));
+            if (found.isPresent()) {
+                publish(i, output -> output.with(found.get()));
+            }
         }
     }
 

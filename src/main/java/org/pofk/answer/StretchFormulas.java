@@ -31,7 +31,7 @@ final class StretchFormulas {
     }
 
     /** A part of the cycle without actions but at its end, and without a change of phase. */
-    private record Part(int from, int to, int move) {
+    record Part(int from, int to, int move) {
     }
 
     /**
@@ -59,6 +59,11 @@ final class StretchFormulas {
             }
         }
         return formulas;
+    }
+
+    /** The move that each cycle begins with, and for how many steps; empty where it begins with none. */
+    Optional<Part> firstPart() {
+        return parts().stream().filter(part -> part.from == 0).findFirst();
     }
 
     private WholeState walked(WholeState state, int from, int to) {

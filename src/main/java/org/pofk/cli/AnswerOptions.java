@@ -55,6 +55,11 @@ final class AnswerOptions {
         return ScheduleRefusal.unlessScheduled(model.readAsWell(other));
     }
 
+    /** The same for a command that takes a schedule into account. */
+    Model modelWithSchedule() throws RefusedException, UsageException {
+        return model.readWithSchedule();
+    }
+
     /** What the command line puts in place of the file's own words. */
     SettingOptions settings() {
         return model.settings();

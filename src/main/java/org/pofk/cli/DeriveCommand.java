@@ -11,6 +11,7 @@ import org.pofk.answer.DerivedOutput;
 import org.pofk.answer.Deriving;
 import org.pofk.answer.Given;
 import org.pofk.answer.InspectedModel;
+import org.pofk.answer.Scheduling;
 import org.pofk.answer.Known;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
@@ -73,7 +74,10 @@ final class DeriveCommand implements Work {
     public ExitCode run(Streams streams) throws RefusedException, UsageException, WritingException {
         Style style = options.style();
         Destination destination = options.destination();
-        Model read = options.model();
+        Model read = options.modelWithSchedule();
+        if (read.schedule().isPresent()) {
+            return scheduled(read, destination, streams);
+        }
         Optional<Integer> step = given.at();
         if (given.isAsked() && step.isEmpty()) {
             return conditional(read, style, destination, streams);
@@ -84,6 +88,19 @@ final class DeriveCommand implements Work {
         Optional<Known> known = given.known(read, step.get());
         return known.isEmpty() ? given.nothing(read, step.get(), CommandName.DERIVE, destination, streams)
                 : derive(known.get().model(), known, style, destination, streams);
+    }
+
+    private ExitCode scheduled(Model read, Destination destination, Streams streams)
+            throws RefusedException, UsageException, WritingException {
+        if (given.isAsked() || secondOpinion || show == Part.DERIVATION) {
+            throw new UsageException("'" + read.origin().file() + "' has a schedule: --given, --second-opinion and"
+                    + " --show derivation aren't there for it; --show result and --show all are");
+        }
+        if (isTooLargeForAll(read.chain())) {
+            throw new UsageException(StructureDocument.askingForOutputs(read.chain()));
+        }
+        return ScheduledDerivation.write(options, read, AskedOutputs.of(read.chain(), of), destination.steps(at),
+                show == Part.ALL ? Scheduling.Formulas.ALL : Scheduling.Formulas.WITHIN_REACH, destination, streams);
     }
 
     private ExitCode derive(Model read, Optional<Known> known, Style style, Destination destination, Streams streams)

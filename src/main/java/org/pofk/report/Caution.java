@@ -9,6 +9,10 @@ final class Caution {
             + " on the strength of it, is for the governing standard or local code and a competent, where required"
             + " licensed, person.";
 
+    /** Besides, where the model may be that of a protective function. */
+    static final String PROTECTIVE_FUNCTION = "Not a safety integrity claim: architecture limits, systematic failures"
+            + " and common cause are judged by the governing functional-safety standard.";
+
     private Caution() {
     }
 

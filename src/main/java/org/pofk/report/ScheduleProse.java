@@ -1,0 +1,59 @@
+package org.pofk.report;
+
+import java.util.ArrayList;
+import java.util.List;
+import org.pofk.chain.Schedule;
+import org.pofk.chain.Schedule.Phases;
+import org.pofk.chain.Schedule.Recurring;
+import org.pofk.chain.Schedule.Repeat;
+import org.pofk.chain.Schedule.When;
+import org.pofk.chain.Timetable;
+import org.pofk.report.Document.Block;
+import org.pofk.report.Document.Labelled;
+
+/** A schedule in words. */
+final class ScheduleProse {
+    private ScheduleProse() {
+    }
+
+    static List<Block> of(Schedule schedule, Timetable timetable) {
+        List<Block> blocks = new ArrayList<>();
+        schedule.recurring().forEach(each -> blocks.add(new Labelled("action", recurring(each))));
+        schedule.phases().ifPresent(phases -> blocks.add(new Labelled("phases", phases(phases))));
+        blocks.add(new Labelled("cycle", cycle(timetable)));
+        return blocks;
+    }
+
+    private static Prose recurring(Recurring each) {
+        String steps = each.first() + ", " + ((long) each.first() + each.every()) + ", "
+                + ((long) each.first() + 2L * each.every()) + ", …";
+        return Prose.name(each.action().name()).and(each.when() == When.AFTER_THE_STEP
+                ? " at the end of steps " + steps : " instead of the moves of steps " + steps);
+    }
+
+    private static Prose phases(Phases phases) {
+        Prose all = Prose.joined(phases.list().stream().map(phase ->
+                Prose.of(steps(phase.steps()) + " ").andName(phase.use())).toList(), ", ");
+        return phases.repeat() == Repeat.YES ? all.and(", over and over")
+                : all.and(", and from there on ").andName(phases.list().get(phases.list().size() - 1).use());
+    }
+
+    private static String cycle(Timetable timetable) {
+        String step = step(timetable, "m", "j");
+        return steps(timetable.period()) + (timetable.before() == 0 ? ", from the start on"
+                : ", the first after step " + timetable.before()) + "; k = " + step + " is "
+                + (timetable.period() == 1 ? "the end of step m of them"
+                : "the end of step j of cycle m, 0 ≤ j < " + timetable.period());
+    }
+
+    /** {@code 12 m + j}, {@code 5 + 12 m}. */
+    static String step(Timetable timetable, String m, String j) {
+        String before = timetable.before() == 0 ? "" : timetable.before() + " + ";
+        String cycles = timetable.period() == 1 ? m : timetable.period() + " " + m;
+        return before + cycles + (timetable.period() == 1 || j.isEmpty() ? "" : " + " + j);
+    }
+
+    static String steps(int count) {
+        return count == 1 ? "1 step" : count + " steps";
+    }
+}
