@@ -29,6 +29,9 @@ final class CheckBlocks {
     }
 
     private void write() {
+        if (derived.wanted().extras().isEmpty()) {
+            return;
+        }
         blocks.add(new Heading(2, "How it was checked"));
         blocks.add(new Paragraph("Beside the proof, which needs none of this: the formula was compared with what comes"
                 + " out when the model is stepped."));

@@ -10,7 +10,7 @@ import org.pofk.exact.Rational;
 
 /** Outputs over steps in as many figures as they need: beside one much larger a small one would be a line on the axis. */
 public final class CourseCharts {
-    private static final Rational MOST_TIMES_LARGER = Rational.of(20);
+    private static final Rational MOST_TIMES_LARGER = Rational.of(5);
 
     private CourseCharts() {
     }

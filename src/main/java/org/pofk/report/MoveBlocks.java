@@ -46,10 +46,12 @@ final class MoveBlocks {
             blocks.add(table(isChain ? "probability" : "coefficient"));
         }
         List<Prose> changes = model.changes().stream().filter(change -> moves > LISTED_UP_TO || !change.contains(REST)
-                || change.startsWith("at the start")).limit(CHANGES_LISTED_UP_TO).map(ModelHead::words).toList();
+                || change.startsWith("at the start")).map(ModelHead::words).toList();
         if (!changes.isEmpty()) {
-            blocks.add(new Paragraph("What was worked out or changed on entry:"));
-            blocks.add(new Items(changes));
+            blocks.add(new Paragraph("What was worked out or changed on entry"
+                    + (changes.size() > CHANGES_LISTED_UP_TO ? ", the first " + CHANGES_LISTED_UP_TO + " of "
+                            + changes.size() + " entries:" : ":")));
+            blocks.add(new Items(changes.stream().limit(CHANGES_LISTED_UP_TO).toList()));
         }
         return blocks;
     }

@@ -12,6 +12,7 @@ import org.pofk.answer.TotalModel;
 import org.pofk.answer.Wanted;
 import org.pofk.chain.Model;
 import org.pofk.chain.Model.Convention;
+import org.pofk.chain.Output;
 import org.pofk.chain.Structure;
 import org.pofk.modes.ClosedForm;
 import org.pofk.report.Document.Block;
@@ -32,16 +33,23 @@ public final class NotebookWriter {
     private final DerivedModel derived;
     private final Style style;
     private final Convention convention;
+    private final Way way;
 
-    private NotebookWriter(DerivedModel derived, Style style, Convention convention) {
+    /** How the way to a formula is told between the cells of code. */
+    private enum Way {
+        SHORT, WORKED
+    }
+
+    private NotebookWriter(DerivedModel derived, Style style, Convention convention, Way way) {
         this.derived = derived;
         this.style = style;
         this.convention = convention;
+        this.way = way;
     }
 
     /** The notebook as JSON, nbformat 4.5, nothing of it run. */
     public static String write(DerivedModel derived, Style style, Convention convention) {
-        NotebookWriter writer = new NotebookWriter(derived, style, convention);
+        NotebookWriter writer = new NotebookWriter(derived, style, convention, Way.SHORT);
         List<Block> head = new ArrayList<>(ModelHead.of(derived.model()));
         head.add(new Paragraph(WHAT_IT_DOES));
         writer.text(head);
@@ -60,7 +68,7 @@ public final class NotebookWriter {
                 + " the moves of a step add and what was added before."));
         List<Notebook.Cell> cells = new ArrayList<>();
         for (int i = 0; i < recursions.size(); i++) {
-            NotebookWriter writer = new NotebookWriter(recursions.get(i), style, convention);
+            NotebookWriter writer = new NotebookWriter(recursions.get(i), style, convention, Way.SHORT);
             writer.text(i == 0 ? head : List.of());
             writer.text(List.of(new Heading(2, OutputProse.title(found.totals().get(i).total().output()))));
             writer.text(TotalBlocks.of(found.model(), found.totals().get(i), style));
@@ -85,11 +93,14 @@ public final class NotebookWriter {
 
     /** The same between the first page of a report with its answers, and what the report stands on. */
     public static String write(Report report, Style style, Convention convention) {
-        NotebookWriter writer = new NotebookWriter(report.derived(), style, convention);
+        NotebookWriter writer = new NotebookWriter(report.derived(), style, convention, Way.WORKED);
         writer.text(ReportDocument.before(report, style));
         writer.text(WHAT_IT_DOES);
         writer.chain();
+        writer.text(WayBlocks.rule(report.derived().outputs()));
         report.derived().outputs().forEach(writer::output);
+        writer.text(LongRunBlocks.of(report, style));
+        writer.text(CheckBlocks.of(report.derived(), style));
         writer.text(ReportDocument.after(report));
         return new Notebook(writer.cells).write();
     }
@@ -118,8 +129,9 @@ public final class NotebookWriter {
 
     /** @param all what the tools given here are to serve */
     private void chain(List<DerivedModel> all) {
-        text(ChainBlocks.of(derived.model(), derived.outputs().stream().map(DerivedOutput::output).toList(),
-                convention));
+        List<Output> outputs = derived.outputs().stream().map(DerivedOutput::output).toList();
+        text(way == Way.WORKED ? ChainBlocks.worked(derived.model(), outputs, convention)
+                : ChainBlocks.of(derived.model(), outputs, convention));
         text("The model in exact fractions:");
         code(Python.tools("numbers"));
         code(PythonChain.of(derived.model().chain(), convention));
@@ -146,8 +158,8 @@ public final class NotebookWriter {
     }
 
     private void output(DerivedOutput output) {
-        List<Block> way = WayBlocks.of(output, style);
-        text(way.isEmpty() ? List.of(new Heading(2, OutputProse.title(output.output()))) : way);
+        List<Block> told = way == Way.WORKED ? WayBlocks.worked(output, style) : WayBlocks.of(output, style);
+        text(told.isEmpty() ? List.of(new Heading(2, OutputProse.title(output.output()))) : told);
         output.transform().ifPresent(transform -> {
             text("The terms, the recurrence and Y(z) proved again:");
             code(PythonOutput.transform(transform));
