@@ -86,12 +86,12 @@ final class JudgedMatrix {
         return true;
     }
 
-    private static String inRows(List<String> texts, int size) {
-        List<String> rows = new ArrayList<>();
+    private String inRows(List<String> texts, int size) {
+        List<List<String>> rows = new ArrayList<>();
         for (int i = 0; i < size; i++) {
-            rows.add("[" + String.join(", ", texts.subList(i * size, (i + 1) * size)) + "]");
+            rows.add(texts.subList(i * size, (i + 1) * size));
         }
-        return "[" + String.join(", ", rows) + "]";
+        return MatrixText.of(rows, stated.notation());
     }
 
     private String rightWithout() {

@@ -62,6 +62,12 @@ public sealed interface Statement permits Statement.Start, Statement.Matrix, Sta
             rows = rows.stream().map(List::copyOf).toList();
         }
 
+        /** That of its entries. */
+        public FormulaText.Notation notation() {
+            return rows.stream().flatMap(List::stream).map(FormulaText::notation).findFirst()
+                    .orElse(FormulaText.Notation.PLAIN);
+        }
+
         @Override
         public <R> R accept(Visitor<R> visitor) {
             return visitor.matrix(this);

@@ -1,13 +1,17 @@
 package org.pofk.slip;
 
 import java.util.ArrayList;
+import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
+import java.util.Map;
 import java.util.Set;
 import org.pofk.claim.Claim;
 
 /** What a complete derivation states and a file of claims doesn't. */
 final class NotStated {
+    private static final int MOST_NAMED = 6;
+
     private final List<Claim> claims;
     private final List<String> missing = new ArrayList<>();
 
@@ -19,10 +23,7 @@ final class NotStated {
         NotStated stated = new NotStated(claims);
         stated.ofTheChain("start", "the start");
         stated.ofTheChain("matrix", "the transition matrix");
-        Set<String> outputs = stated.outputs();
-        for (String output : outputs) {
-            stated.ofOutput(output);
-        }
+        stated.ofOutputs();
         if (claims.stream().noneMatch(claim -> claim.kind().equals("formula") && claim.steps().to().isEmpty())) {
             stated.missing.add("a formula that is claimed for every k");
         }
@@ -42,20 +43,34 @@ final class NotStated {
         return names;
     }
 
-    private void ofOutput(String output) {
-        boolean transform = has(output, "transform") || has(output, "transform over z");
-        boolean expansion = has(output, "expansion") || has(output, "residues") || has(output, "transform over z");
-        add(transform, "the transform of " + output);
-        add(has(output, "poles"), "the poles of " + output);
-        add(expansion, "the partial fractions of " + output);
-        add(has(output, "formula"), "the formula of " + output);
-        add(has(output, "long run"), "the long run of " + output);
+    /** One entry for all outputs that lack the same. */
+    private void ofOutputs() {
+        Map<List<String>, List<String>> outputs = new LinkedHashMap<>();
+        outputs().forEach(output -> outputs.computeIfAbsent(lacking(output), none -> new ArrayList<>()).add(output));
+        outputs.forEach((lacking, names) -> {
+            if (!lacking.isEmpty()) {
+                missing.add("of " + inWords(names) + ": " + String.join(", ", lacking));
+            }
+        });
     }
 
-    private void add(boolean stated, String what) {
-        if (!stated) {
-            missing.add(what);
-        }
+    private static String inWords(List<String> names) {
+        return names.size() > MOST_NAMED ? String.join(", ", names.subList(0, MOST_NAMED)) + " and "
+                + (names.size() - MOST_NAMED) + " more"
+                : String.join(", ", names.subList(0, names.size() - 1)) + (names.size() > 1 ? " and " : "")
+                + names.get(names.size() - 1);
+    }
+
+    private List<String> lacking(String output) {
+        boolean transform = has(output, "transform") || has(output, "transform over z");
+        boolean expansion = has(output, "expansion") || has(output, "residues") || has(output, "transform over z");
+        Map<String, Boolean> stated = new LinkedHashMap<>();
+        stated.put("the transform", transform);
+        stated.put("the poles", has(output, "poles"));
+        stated.put("the partial fractions", expansion);
+        stated.put("the formula", has(output, "formula"));
+        stated.put("the long run", has(output, "long run"));
+        return stated.entrySet().stream().filter(step -> !step.getValue()).map(Map.Entry::getKey).toList();
     }
 
     /** Whether a claim of a kind speaks of an output: alone, among others, or by all states. */

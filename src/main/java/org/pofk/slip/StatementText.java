@@ -3,6 +3,7 @@ package org.pofk.slip;
 import java.util.List;
 import java.util.stream.Collectors;
 import org.pofk.claim.FormulaText;
+import org.pofk.claim.MatrixText;
 import org.pofk.claim.Statement;
 
 /** A statement as its author would write it into the file: its one text, or its texts in their brackets or by name. */
@@ -12,7 +13,8 @@ final class StatementText {
 
     static String of(Statement statement) {
         if (statement instanceof Statement.Matrix matrix) {
-            return matrix.rows().stream().map(StatementText::list).collect(Collectors.joining(", ", "[", "]"));
+            return MatrixText.of(matrix.rows().stream().map(row -> row.stream().map(FormulaText::text).toList()).toList(),
+                    matrix.notation());
         }
         if (statement instanceof Statement.Residues residues) {
             return residues.coefficients().stream().map(each -> each.pole().text() + ": " + one(each.coefficients()))
