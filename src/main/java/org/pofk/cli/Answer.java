@@ -44,6 +44,10 @@ final class Answer {
         };
     }
 
+    Document document() {
+        return document.get();
+    }
+
     private Form form(Format format) {
         if (!forms.containsKey(format)) {
             throw new AssertionError("an answer was offered as " + format + " and can't be written so");

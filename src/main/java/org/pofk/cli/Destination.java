@@ -7,11 +7,18 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.stream.IntStream;
+import org.pofk.report.Chart;
+import org.pofk.report.Document;
+import org.pofk.report.LatexFigures;
+import org.pofk.report.LatexLayout;
+import org.pofk.report.PngChart;
 import org.pofk.text.RefusedException;
 
 /** As what an answer is written, and where to. */
 final class Destination {
     private static final int LAST_OF_A_TABLE = 20;
+    /** Of a PNG, in pixels: 300 an inch on a page. */
+    private static final int FIGURE_WIDTH = 1800;
 
     private final List<Target> targets;
     private final DocumentForms forms;
@@ -50,6 +57,9 @@ final class Destination {
             } else {
                 files.put(target.file.get(), bytes);
             }
+            if (target.format == Format.LATEX && forms.layout().figures() == LatexLayout.Figures.IN_FILES) {
+                files.putAll(figures(answer.document(), target.file.orElseThrow(), streams));
+            }
         }
         save.write(files, streams);
         Optional<Path> article = targets.stream().filter(target -> target.format == Format.PDF)
@@ -58,6 +68,22 @@ final class Destination {
             throw new WritingException("pdflatex isn't installed, so there is no PDF; the article for it is '"
                     + article.get() + "'. Where it is installed:  pdflatex " + article.get().getFileName() + "  , twice");
         }
+    }
+
+    /** The figures of an article beside it. */
+    private Map<Path, byte[]> figures(Document document, Path article, Streams streams) throws WritingException {
+        Map<Path, byte[]> files = new LinkedHashMap<>();
+        for (Map.Entry<String, Chart> figure : LatexFigures.files(document, forms.layout()).entrySet()) {
+            files.put(article.resolveSibling(figure.getKey() + ".png"), PngChart.of(figure.getValue(), FIGURE_WIDTH));
+            if (pdflatex.isPresent()) {
+                files.put(article.resolveSibling(figure.getKey() + ".pdf"),
+                        pdflatex.get().page(LatexFigures.page(figure.getValue())));
+            }
+        }
+        if (pdflatex.isEmpty() && !files.isEmpty()) {
+            streams.notes().println("pofk: pdflatex isn't installed: the figures are PNG alone");
+        }
+        return files;
     }
 
     private byte[] bytes(Format format, String text) throws WritingException {

@@ -60,13 +60,22 @@ final class Pdflatex {
 
     /** An article as a PDF. */
     byte[] pdf(String article) throws WritingException {
+        return pdf(article, RUNS_AT_LEAST);
+    }
+
+    /** A page without references as a PDF. */
+    byte[] page(String page) throws WritingException {
+        return pdf(page, 1);
+    }
+
+    private byte[] pdf(String article, int runsAtLeast) throws WritingException {
         try {
             Path folder = Files.createTempDirectory("pofk-");
             try {
                 Files.writeString(folder.resolve("article.tex"), article, StandardCharsets.UTF_8);
                 boolean isSettled = false;
                 for (int run = 0; run < RUNS_AT_MOST && !isSettled; run++) {
-                    isSettled = !run(folder).contains(NOT_SETTLED) && run + 1 >= RUNS_AT_LEAST;
+                    isSettled = !run(folder).contains(NOT_SETTLED) && run + 1 >= runsAtLeast;
                 }
                 return Files.readAllBytes(folder.resolve("article.pdf"));
             } finally {

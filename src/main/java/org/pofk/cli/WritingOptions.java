@@ -7,6 +7,8 @@ import java.util.EnumSet;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
+import java.util.stream.Stream;
+import org.pofk.report.LatexLayout;
 import org.pofk.text.Alphabet;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
@@ -32,8 +34,29 @@ final class WritingOptions {
     @Option(names = "--fragment", description = "LaTeX to be put into a document of yours by \\input, not a whole one")
     private boolean fragment;
 
+    @Option(names = "--figures", paramLabel = "WHERE", defaultValue = "inside",
+            description = "in LaTeX: inside, or files: PNG and PDF beside it, so that a converter to other formats takes"
+                    + " them along; ${DEFAULT-VALUE} otherwise")
+    private Figures figures;
+
     @Mixin
     private SaveOptions save = new SaveOptions();
+
+    /** Where the figures of LaTeX are. */
+    enum Figures {
+        INSIDE(LatexLayout.Figures.INSIDE), FILES(LatexLayout.Figures.IN_FILES);
+
+        private final LatexLayout.Figures place;
+
+        Figures(LatexLayout.Figures place) {
+            this.place = place;
+        }
+
+        @Override
+        public String toString() {
+            return Words.lowerCase(this);
+        }
+    }
 
     /** For a command that writes the formats of any document and some besides. */
     WritingOptions(CommandName command, Format... besides) {
@@ -57,23 +80,47 @@ final class WritingOptions {
         for (Destination.Target target : asked) {
             requireOffered(target);
         }
-        Optional<Pdflatex> pdflatex = asked.stream().anyMatch(target -> target.format() == Format.PDF)
-                ? Pdflatex.installed() : Optional.empty();
+        requireLatex(asked);
+        boolean isMade = figures == Figures.FILES || asked.stream().anyMatch(target -> target.format() == Format.PDF);
+        Optional<Pdflatex> pdflatex = isMade ? Pdflatex.installed() : Optional.empty();
         List<Destination.Target> targets = pdflatex.isPresent() ? asked
                 : asked.stream().map(WritingOptions::asArticle).toList();
-        if (fragment && targets.stream().noneMatch(target -> target.format() == Format.LATEX)) {
+        LatexLayout layout = new LatexLayout(targets.get(0).file().map(WritingOptions::name)
+                .orElse(name(about) + "-" + command.word()), figures.place);
+        save.check(targets.stream().flatMap(target -> target.file().stream()).toList());
+        if (figures == Figures.FILES) {
+            save.check(firstFigure(targets, layout));
+        }
+        return new Destination(targets, new DocumentForms(plain ? Alphabet.ASCII : Alphabet.UNICODE,
+                fragment ? DocumentForms.LatexPart.FRAGMENT : DocumentForms.LatexPart.ARTICLE, layout), pdflatex, save);
+    }
+
+    private void requireLatex(List<Destination.Target> targets) throws UsageException {
+        Optional<Destination.Target> latex = targets.stream().filter(target -> target.format() == Format.LATEX).findFirst();
+        if (fragment && latex.isEmpty()) {
             throw new UsageException("--fragment is a part of a LaTeX document; there is no --as latex");
         }
-        save.check(targets.stream().flatMap(target -> target.file().stream()).toList());
-        return new Destination(targets, new DocumentForms(plain ? Alphabet.ASCII : Alphabet.UNICODE,
-                fragment ? DocumentForms.LatexPart.FRAGMENT : DocumentForms.LatexPart.ARTICLE), pdflatex, save);
+        if (figures == Figures.FILES && latex.flatMap(Destination.Target::file).isEmpty()) {
+            throw new UsageException("--figures files stand beside a LaTeX document: --save FILE.tex");
+        }
+    }
+
+    /** Those of the first figure stand for all: whether there are more is known after the work. */
+    private static List<Path> firstFigure(List<Destination.Target> targets, LatexLayout layout) {
+        return targets.stream().filter(target -> target.format() == Format.LATEX)
+                .flatMap(target -> target.file().stream()).flatMap(file -> Stream.of(".png", ".pdf")
+                        .map(ending -> file.resolveSibling(layout.file(1) + ending))).toList();
+    }
+
+    /** A file's name without its ending. */
+    private static String name(Path file) {
+        return file.getFileName().toString().replaceFirst("(?<=.)\\.[^.]*$", "");
     }
 
     /** The LaTeX of a PDF, beside where that was to be. */
     private static Destination.Target asArticle(Destination.Target target) {
         return target.format() != Format.PDF ? target : new Destination.Target(Format.PDF, target.file().map(file ->
-                file.resolveSibling(file.getFileName().toString().replaceFirst("(?i)\\.pdf$", "")
-                        + Format.LATEX.ending())));
+                file.resolveSibling(name(file) + Format.LATEX.ending())));
     }
 
     private List<Destination.Target> inFolder(Path folder, Path about) throws UsageException {
@@ -87,7 +134,7 @@ final class WritingOptions {
         if (!Files.isDirectory(folder)) {
             throw new UsageException("there is no folder '" + folder + "'");
         }
-        String name = about.getFileName().toString().replaceFirst("(?<=.)\\.[^.]*$", "") + "-" + command.word();
+        String name = name(about) + "-" + command.word();
         return as.stream().distinct().map(format -> new Destination.Target(format,
                 Optional.of(folder.resolve(name + format.ending())))).toList();
     }
@@ -104,8 +151,8 @@ final class WritingOptions {
 
     /** Where a file of YAML goes, which this command writes in place of its answer. */
     SaveOptions destinationOfYaml(String what) throws UsageException {
-        if (!as.isEmpty() || folder.isPresent() || plain || fragment) {
-            throw new UsageException(what + " is YAML; --as, --save-in, --plain and --fragment are for the answer of "
+        if (!as.isEmpty() || folder.isPresent() || plain || fragment || figures == Figures.FILES) {
+            throw new UsageException(what + " is YAML; --as, --save-in, --plain, --figures and --fragment are for the answer of "
                     + command.word());
         }
         if (save.file().flatMap(Format::of).isPresent()) {

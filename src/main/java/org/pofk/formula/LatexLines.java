@@ -35,7 +35,7 @@ final class LatexLines {
         } else if (formula instanceof Quotient quotient) {
             return ratio(wrapped(quotient.numerator(), inner), wrapped(quotient.denominator(), inner));
         } else if (formula instanceof Power power && LatexWidth.of(power.base()) > inner / 2) {
-            return around("\\Bigl(", of(power.base(), inner), "\\Bigr)^{" + Latex.write(power.exponent()) + "}");
+            return around("\\Big(", of(power.base(), inner), "\\Big)^{" + Latex.write(power.exponent()) + "}");
         } else if (formula instanceof Formula.RootSum sum) {
             return rootSum(sum, inner);
         } else if (formula instanceof Number number) {
@@ -107,7 +107,7 @@ final class LatexLines {
         boolean needsNone = !isSigned && (formula instanceof Number number && number.value().isInteger()
                 || formula instanceof Formula.Symbol || formula instanceof Power || formula instanceof Formula.Call
                 || formula instanceof Formula.WrittenDecimal decimal && !decimal.text().startsWith("-"));
-        return needsNone ? of(formula, width) : around("\\Bigl(", of(formula, width), "\\Bigr)");
+        return needsNone ? of(formula, width) : around("\\Big(", of(formula, width), "\\Big)");
     }
 
     private static List<String> number(Number number, double width) {

@@ -14,9 +14,11 @@ import org.pofk.formula.LatexText;
  */
 final class LatexSpelling {
     private static final Pattern OF_A_VARIABLE = Pattern.compile("([A-Za-z]?)\\(([kz])\\)");
-    private static final Pattern LONG = Pattern.compile("[^\\s~]{20,}");
+    private static final Pattern LONG = Pattern.compile("[^\\s~]{12,}");
     private static final Pattern RAISED =
             Pattern.compile("\\\\textasciicircum\\{}(\\\\ensuremath\\{-}|-)?([0-9]+|[A-Za-z])");
+    /** A word without parts is broken anywhere from this length on. */
+    private static final int LONGEST_PLAIN = 20;
     private static final int LONGEST_FORMULA = 28;
 
     private LatexSpelling() {
@@ -44,7 +46,9 @@ final class LatexSpelling {
 
     private static String words(String text) {
         return RAISED.matcher(LatexText.of(text).replace(" \\%", "~\\%")).replaceAll(found ->
-                Matcher.quoteReplacement("\\ensuremath{^{" + (found.group(1) == null ? "" : "-") + found.group(2) + "}}"));
+                Matcher.quoteReplacement("\\textsuperscript{" + (found.group(1) == null ? "" : "\\ensuremath{-}")
+                        + (Character.isLetter(found.group(2).charAt(0)) ? "\\textit{" + found.group(2) + "}"
+                                : found.group(2)) + "}"));
     }
 
     private static String breakable(String text) {
@@ -54,10 +58,12 @@ final class LatexSpelling {
 
     /** Places for breaks behind what parts words, or between any two characters where nothing does. */
     private static String withBreaks(String text) {
-        String parted = text.replaceAll("(?<=\\\\_|[-/.:;,])(?=[^{}])", "\\\\allowbreak{}");
+        String parted = text.replaceAll("(?<=\\\\_|[^{][-/:;]|[^{0-9][.,])(?=[^{}])", "\\\\allowbreak{}");
         boolean isPlain = parted.equals(text) && text.matches("[^\\\\{}]*");
-        return isPlain ? text.codePoints().mapToObj(Character::toString).collect(Collectors.joining("\\allowbreak{}"))
-                : parted;
+        if (!isPlain || text.length() < LONGEST_PLAIN) {
+            return parted;
+        }
+        return text.codePoints().mapToObj(Character::toString).collect(Collectors.joining("\\allowbreak{}"));
     }
 
     private static final class Text implements Prose.Visitor<String> {

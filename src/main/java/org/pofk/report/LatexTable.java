@@ -4,6 +4,7 @@ import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
+import java.util.stream.Collectors;
 import org.pofk.text.Alphabet;
 
 /**
@@ -15,6 +16,7 @@ final class LatexTable {
     /** Characters on a line of a table. */
     private static final int WIDTH = 80;
     private static final int GAP = 3;
+    private static final int SLACK = 2;
     private static final int NARROWEST_TEXT = 24;
 
     private record Column(TextColumn plain, int room, String header, List<String> cells) {
@@ -23,15 +25,24 @@ final class LatexTable {
         }
 
         String kind() {
-            return isBroken() ? String.format(Locale.ROOT, "p{%.3f\\linewidth}", room / (double) WIDTH)
-                    : plain.isNumeric() ? "r" : "l";
+            return isBroken() ? wide(room / (double) WIDTH) : plain.isNumeric() ? "r" : "l";
+        }
+
+        private static String wide(double share) {
+            return String.format(Locale.ROOT, "p{%.3f\\linewidth}", share);
+        }
+
+        /** With a share of the line whether it is broken or not, and some room in the letters of others. */
+        String wideKind(List<Column> line) {
+            return (plain.isNumeric() ? ">{\\raggedleft\\arraybackslash{}}" : "")
+                    + wide((room + SLACK) / (double) (total(line) + SLACK * line.size()));
         }
     }
 
     private LatexTable() {
     }
 
-    static List<String> lines(Document.Table table) {
+    static List<String> lines(Document.Table table, LatexLayout layout) {
         Spelling spelling = new Spelling(Alphabet.UNICODE, StandardCharsets.UTF_8);
         List<Column> columns = new ArrayList<>();
         for (int j = 0; j < table.header().size(); j++) {
@@ -44,7 +55,7 @@ final class LatexTable {
             }
             columns.add(new Column(plain, plain.width(), LatexSpelling.of(table.header().get(j)), cells));
         }
-        return folded(fitted(columns), table.rows().size());
+        return folded(fitted(columns), table.rows().size(), layout);
     }
 
     /** What brings a number's point below the others' points: room for the digits that it hasn't. */
@@ -85,30 +96,30 @@ final class LatexTable {
         return columns.stream().mapToInt(Column::room).sum() + GAP * (columns.size() - 1);
     }
 
-    private static List<String> folded(List<Column> columns, int rows) {
+    private static List<String> folded(List<Column> columns, int rows, LatexLayout layout) {
         List<String> lines = new ArrayList<>();
         List<Column> group = new ArrayList<>(List.of(columns.get(0)));
         for (Column column : columns.subList(1, columns.size())) {
             if (group.size() > 1 && total(group) + GAP + column.room > WIDTH) {
-                lines.addAll(part(group, rows));
+                lines.addAll(part(group, rows, layout));
                 group = new ArrayList<>(List.of(columns.get(0)));
             }
             group.add(column);
         }
-        lines.addAll(part(group, rows));
+        lines.addAll(part(group, rows, layout));
         return lines;
     }
 
-    private static List<String> part(List<Column> group, int rows) {
+    private static List<String> part(List<Column> group, int rows, LatexLayout layout) {
         List<String> lines = new ArrayList<>();
         lines.add("{\\small\\renewcommand{\\arraystretch}{1.25}");
-        lines.add("\\begin{longtable}{@{}" + String.join("", group.stream().map(Column::kind).toList()) + "@{}}");
+        lines.add("\\begin{longtable}{@{}" + kinds(group, layout) + "@{}}");
         lines.add("\\toprule");
         lines.add(row(group.stream().map(column -> column.isBroken() ? broken(column.header) : column.header).toList()));
         lines.add("\\midrule");
         lines.add("\\endhead");
         lines.add("\\bottomrule");
-        lines.add("\\endfoot");
+        lines.add("\\endfoot{}"); // a converter takes a number that follows for a part of the command
         for (int i = 0; i < rows; i++) {
             int row = i;
             lines.add(row(group.stream().map(column -> column.isBroken() ? broken(column.cells.get(row))
@@ -116,6 +127,14 @@ final class LatexTable {
         }
         lines.add("\\end{longtable}}");
         return lines;
+    }
+
+    /** A converter takes widths for all columns or for none. */
+    private static String kinds(List<Column> group, LatexLayout layout) {
+        boolean areAllWide = layout.figures() == LatexLayout.Figures.IN_FILES
+                && group.stream().anyMatch(Column::isBroken);
+        return group.stream().map(column -> areAllWide ? column.wideKind(group) : column.kind())
+                .collect(Collectors.joining());
     }
 
     private static String broken(String cell) {

@@ -18,46 +18,47 @@ import org.pofk.text.RefusedException;
  * every run.
  */
 public final class LatexWriter {
-    private static final List<String> PACKAGES = List.of("amsmath", "booktabs", "longtable");
+    private static final List<String> PACKAGES = List.of("amsmath", "array", "booktabs", "longtable");
     /** Digits on a line of a display. */
-    private static final int WIDTH = 76;
+    private static final int WIDTH = 70;
     private static final int LONGEST_UNDERLINED = 30;
 
     private LatexWriter() {
     }
 
     /** A whole article. */
-    public static String article(Document document) throws RefusedException {
+    public static String article(Document document, LatexLayout layout) throws RefusedException {
         List<String> lines = new ArrayList<>(List.of("\\documentclass[11pt,a4paper]{article}",
                 "\\usepackage[utf8]{inputenc}", "\\usepackage[T1]{fontenc}", "\\usepackage{lmodern}",
                 "\\usepackage[margin=25mm]{geometry}"));
-        packages(document).forEach(each -> lines.add("\\usepackage{" + each + "}"));
+        packages(document, layout).forEach(each -> lines.add("\\usepackage{" + each + "}"));
         lines.addAll(changes(document));
         lines.addAll(List.of("\\allowdisplaybreaks", "\\setlength{\\parindent}{0pt}",
                 "\\setlength{\\parskip}{6pt plus 2pt}", "\\setlength{\\emergencystretch}{4em}",
                 "\\begin{document}"));
-        lines.addAll(body(document));
+        lines.addAll(body(document, layout));
         lines.add("\\end{document}");
         return String.join("\n", lines) + "\n";
     }
 
     /** The contents alone, to be put into another document. */
-    public static String fragment(Document document) throws RefusedException {
+    public static String fragment(Document document, LatexLayout layout) throws RefusedException {
         List<String> lines = new ArrayList<>(List.of("% To be put into a document by \\input; needs"
-                + " \\usepackage[T1]{fontenc} and the packages " + String.join(", ", packages(document)) + "."));
+                + " \\usepackage[T1]{fontenc} and the packages " + String.join(", ", packages(document, layout)) + "."));
         if (!document.changed().isEmpty()) {
             lines.add("\\ifdefined\\pofkchangedbox\\else");
             lines.addAll(changes(document));
             lines.add("\\fi");
         }
-        lines.addAll(body(document));
+        lines.addAll(body(document, layout));
         return String.join("\n", lines) + "\n";
     }
 
     /** What the document needs; the one for figures only where there are some. */
-    private static List<String> packages(Document document) {
+    private static List<String> packages(Document document, LatexLayout layout) {
+        String forFigures = layout.figures() == LatexLayout.Figures.INSIDE ? TikzChart.PACKAGE : "graphicx";
         boolean hasFigures = document.blocks().stream().anyMatch(Document.Figure.class::isInstance);
-        return hasFigures ? Stream.concat(PACKAGES.stream(), Stream.of(TikzChart.PACKAGE)).toList() : PACKAGES;
+        return hasFigures ? Stream.concat(PACKAGES.stream(), Stream.of(forFigures)).toList() : PACKAGES;
     }
 
     /** What rules in the margin need, where there are any. */
@@ -65,12 +66,14 @@ public final class LatexWriter {
         return document.changed().isEmpty() ? List.of() : LatexChanges.DEFINITIONS;
     }
 
-    private static List<String> body(Document document) throws RefusedException {
-        List<String> lines = new ArrayList<>();
+    private static List<String> body(Document document, LatexLayout layout) throws RefusedException {
+        List<String> lines = new ArrayList<>(layout.figures() == LatexLayout.Figures.INSIDE ? List.of()
+                : LatexFigures.FOR_CONVERTERS);
+        Lines writer = new Lines(layout);
         for (int i = 0; i < document.blocks().size(); i++) {
             boolean isChanged = document.isChanged(i);
             Block block = document.blocks().get(i);
-            boolean isBoxed = isChanged && !(block instanceof Document.Table);
+            boolean isBoxed = isChanged && !(block instanceof Document.Table) && !writer.floats(block);
             boolean isFirst = !(block instanceof Labelled) || !isOfOneList(document, i - 1);
             boolean isLast = !(block instanceof Labelled) || !isOfOneList(document, i);
             if (isBoxed && isFirst) {
@@ -79,10 +82,10 @@ public final class LatexWriter {
             if (block instanceof Labelled && isFirst) {
                 lines.addAll(List.of("", "\\begin{description}"));
             }
-            List<String> latex = block.accept(new Lines());
+            List<String> latex = block.accept(writer);
             lines.addAll(isChanged ? LatexChanges.table(latex) : latex);
             if (block instanceof Labelled && isFirst) {
-                lines.add("\\setlength{\\itemsep}{0pt}");
+                lines.add("\\setlength{\\itemsep}{0pt}"); // in front of the label a converter takes it for the text
             }
             if (block instanceof Labelled && isLast) {
                 lines.add("\\end{description}");
@@ -119,6 +122,19 @@ public final class LatexWriter {
     }
 
     private static final class Lines implements Document.Visitor<List<String>> {
+        private final LatexLayout layout;
+        private int equations;
+        private int figures;
+
+        private Lines(LatexLayout layout) {
+            this.layout = layout;
+        }
+
+        /** Whether LaTeX finds a place for the block, where it may stand in no box. */
+        boolean floats(Block block) {
+            return block instanceof Document.Figure && layout.figures() == LatexLayout.Figures.IN_FILES;
+        }
+
         @Override
         public List<String> heading(Document.Heading heading) {
             String command = switch (heading.level()) {
@@ -156,21 +172,33 @@ public final class LatexWriter {
             boolean standsAlone = leftWidth > WIDTH / 3;
             int width = standsAlone ? WIDTH - 4 : WIDTH - leftWidth - 4;
             List<String> right = Latex.lines(display.right(), width);
-            List<String> lines = new ArrayList<>(List.of("\\begin{align*}"));
+            List<String> lines = new ArrayList<>();
             if (standsAlone) {
-                lines.add("&" + left + relation + "\\\\");
+                lines.add("&" + left + relation);
             }
             for (int i = 0; i < right.size(); i++) {
                 String start = i == 0 && !standsAlone ? left + " &" + relation : "&\\quad ";
-                lines.add(start + "{}" + right.get(i) + (i + 1 < right.size() ? " \\\\" : ""));
+                lines.add(start + right.get(i));
             }
             if (!display.condition().isEmpty()) {
-                int last = lines.size() - 1;
-                lines.set(last, lines.get(last) + " \\\\");
                 lines.add("&\\qquad \\text{" + LatexSpelling.of(display.condition()) + "}");
             }
-            lines.add("\\end{align*}");
-            return lines;
+            return numbered(lines);
+        }
+
+        /** One equation: its number and its label stand on the last line. */
+        private List<String> numbered(List<String> lines) {
+            equations++;
+            boolean isTagged = layout.figures() == LatexLayout.Figures.IN_FILES;
+            String environment = isTagged ? "{align*}" : "{align}";
+            String between = isTagged ? " \\\\" : " \\nonumber \\\\";
+            String number = (isTagged ? " \\tag{" + equations + "}" : "") + " \\label{" + layout.equation(equations) + "}";
+            List<String> all = new ArrayList<>(List.of("\\begin" + environment));
+            for (int i = 0; i < lines.size(); i++) {
+                all.add(lines.get(i) + (i + 1 < lines.size() ? between : number));
+            }
+            all.add("\\end" + environment);
+            return all;
         }
 
         /** In typewriter, the part that is meant underlined, or bold where it may go on over lines. */
@@ -186,12 +214,9 @@ public final class LatexWriter {
 
         @Override
         public List<String> figure(Document.Figure figure) {
-            List<String> lines = new ArrayList<>(List.of("", "\\begin{center}",
-                    "\\begin{minipage}{\\linewidth}\\centering"));
-            lines.addAll(TikzChart.lines(figure.chart()));
-            lines.addAll(List.of("\\par\\smallskip", LatexSpelling.of(figure.caption()),
-                    "\\end{minipage}", "\\end{center}"));
-            return lines;
+            figures++;
+            return layout.figures() == LatexLayout.Figures.INSIDE ? LatexFigures.inside(figure)
+                    : LatexFigures.inFile(figure, layout, figures);
         }
 
         @Override
@@ -200,7 +225,7 @@ public final class LatexWriter {
             if (!table.caption().isEmpty()) {
                 lines.addAll(List.of(LatexSpelling.of(table.caption()) + "\\nopagebreak", ""));
             }
-            lines.addAll(LatexTable.lines(table));
+            lines.addAll(LatexTable.lines(table, layout));
             return lines;
         }
     }

@@ -37,6 +37,7 @@ import org.pofk.text.Position;
 import org.pofk.text.RefusedException;
 
 class LatexWriterTest {
+    private static final LatexLayout INSIDE = new LatexLayout("a test", LatexLayout.Figures.INSIDE);
     private static final Pattern OVERFULL = Pattern.compile("Overfull .hbox \\(([0-9]+)\\.");
     private static final String HARD = "50% & rising_#1 {x} \\~^$ \"θ\" Überlauf ⟨α⟩ --flag [1] <<a>>";
 
@@ -74,7 +75,7 @@ class LatexWriterTest {
 
     private void assertCompiles(Document document) throws RefusedException, IOException, InterruptedException {
         Installed.require("pdflatex", "documents as LaTeX aren't compiled");
-        Files.writeString(folder.resolve("a.tex"), LatexWriter.article(document), StandardCharsets.UTF_8);
+        Files.writeString(folder.resolve("a.tex"), LatexWriter.article(document, INSIDE), StandardCharsets.UTF_8);
         String log = "";
         for (int run = 0; run < 2; run++) {
             Process process = new ProcessBuilder("pdflatex", "-interaction=nonstopmode", "-halt-on-error", "a.tex")
@@ -107,25 +108,25 @@ class LatexWriterTest {
         }
         assertEquals(15, figures.size());
         assertCompiles(new Document(figures));
-        assertTrue(LatexWriter.fragment(new Document(figures)).startsWith("% To be put into a document by \\input; needs"
-                + " \\usepackage[T1]{fontenc} and the packages amsmath, booktabs, longtable, tikz.\n"));
+        assertTrue(LatexWriter.fragment(new Document(figures), INSIDE).startsWith("% To be put into a document by \\input; needs"
+                + " \\usepackage[T1]{fontenc} and the packages amsmath, array, booktabs, longtable, tikz.\n"));
     }
 
     @Test
     void aPartForAnotherDocumentSaysWhatItNeeds() throws RefusedException {
-        String part = LatexWriter.fragment(everything());
+        String part = LatexWriter.fragment(everything(), INSIDE);
         assertTrue(part.startsWith("% To be put into a document by \\input; needs \\usepackage[T1]{fontenc} and the"
-                + " packages amsmath, booktabs, longtable.\n"), part);
+                + " packages amsmath, array, booktabs, longtable.\n"), part);
         assertFalse(part.contains("\\begin{document}"));
-        assertTrue(LatexWriter.article(everything()).contains(part.substring(part.indexOf('\n') + 1)));
-        assertEquals(part, LatexWriter.fragment(everything()));
+        assertTrue(LatexWriter.article(everything(), INSIDE).contains(part.substring(part.indexOf('\n') + 1)));
+        assertEquals(part, LatexWriter.fragment(everything(), INSIDE));
     }
 
     @Test
     void whatCannotBeSetIsRefusedWithItsCharacters() {
         Document document = new Document(List.of(new Paragraph(Prose.name("泵一 and 泵\u0007"))));
         assertEquals("LaTeX: these characters can't be set: '泵' U+6CF5, '一' U+4E00, U+0007; rename what holds them, or"
-                + " write another format", assertThrows(RefusedException.class, () -> LatexWriter.article(document))
+                + " write another format", assertThrows(RefusedException.class, () -> LatexWriter.article(document, INSIDE))
                 .getMessage());
     }
 }

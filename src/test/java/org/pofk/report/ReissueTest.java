@@ -26,6 +26,7 @@ import org.pofk.text.RefusedException;
 
 /** Reports issued again. */
 class ReissueTest {
+    private static final LatexLayout LAYOUT = new LatexLayout("report", LatexLayout.Figures.INSIDE);
     private static final Style STYLE = new Style(6, Style.Angles.RADIANS);
     private static final Path ISSUES = Path.of("test-data/issues");
 
@@ -148,10 +149,10 @@ class ReissueTest {
         assertTrue(text.lines().filter(line -> line.startsWith("| ")).count() > 50);
         assertTrue(text.lines().allMatch(line -> line.isEmpty() || line.startsWith("| ") || line.startsWith("  ")));
         assertEquals(document.changed().size(), HtmlWriter.write(document).split("class=\"changed\"", -1).length - 1);
-        String latex = LatexWriter.article(document);
+        String latex = LatexWriter.article(document, LAYOUT);
         assertTrue(latex.contains("\\begin{pofkchanged}") && latex.contains("\\@namedef{pofkchanged}"));
         assertEquals(latex.split("\\\\begin\\{pofkchanged}", -1).length, latex.split("\\\\end\\{pofkchanged}", -1).length);
-        String unmarked = LatexWriter.article(document(report("booster-station-b")));
+        String unmarked = LatexWriter.article(document(report("booster-station-b")), LAYOUT);
         assertFalse(unmarked.contains("pofkchanged"));
     }
 
