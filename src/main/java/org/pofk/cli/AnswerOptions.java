@@ -60,6 +60,11 @@ final class AnswerOptions {
         return model.readWithSchedule();
     }
 
+    /** The same, its schedule included, where the command takes a start in each state in turn. */
+    Model modelForEachStart() throws RefusedException, UsageException {
+        return model.readForEachStart();
+    }
+
     /** What the command line puts in place of the file's own words. */
     SettingOptions settings() {
         return model.settings();

@@ -11,11 +11,13 @@ import org.pofk.answer.DerivedOutput;
 import org.pofk.answer.Deriving;
 import org.pofk.answer.Given;
 import org.pofk.answer.InspectedModel;
+import org.pofk.answer.PowerModel;
 import org.pofk.answer.Scheduling;
 import org.pofk.answer.Known;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
+import org.pofk.chain.Outputs;
 import org.pofk.report.ConditionalDocument;
 import org.pofk.report.ConditionalJson;
 import org.pofk.report.ConditionalTable;
@@ -26,6 +28,8 @@ import org.pofk.report.DerivationTable;
 import org.pofk.report.Document;
 import org.pofk.report.GivenProse;
 import org.pofk.report.NotebookWriter;
+import org.pofk.report.PowerDocument;
+import org.pofk.report.PowerJson;
 import org.pofk.report.StructureDocument;
 import org.pofk.report.StructureJson;
 import org.pofk.report.Style;
@@ -74,9 +78,16 @@ final class DeriveCommand implements Work {
     public ExitCode run(Streams streams) throws RefusedException, UsageException, WritingException {
         Style style = options.style();
         Destination destination = options.destination();
-        Model read = options.modelWithSchedule();
+        Model read = options.modelForEachStart();
+        boolean isInEach = options.settings().isStartInEach(read.chain());
+        if (read.schedule().isPresent() && isInEach) {
+            throw new UsageException("--start each gives powers of one matrix; this model has a schedule");
+        }
         if (read.schedule().isPresent()) {
             return scheduled(read, destination, streams);
+        }
+        if (isInEach) {
+            return fromEach(read, style, destination, streams);
         }
         Optional<Integer> step = given.at();
         if (given.isAsked() && step.isEmpty()) {
@@ -117,6 +128,31 @@ final class DeriveCommand implements Work {
         DerivedModel derived = outcome.published().get();
         destination.write(answer(derived, known, style), streams);
         return derived.isDecided() && outcome.finished() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
+    }
+
+    /** From each state in turn. */
+    private ExitCode fromEach(Model read, Style style, Destination destination, Streams streams)
+            throws RefusedException, UsageException, WritingException {
+        if (destination.takes(Format.NOTEBOOK) || show != Part.RESULT || secondOpinion || given.isAsked()) {
+            throw new UsageException("with --start each derive shows its result, without the way to it and with nothing"
+                    + " given; with --start STATE everything is there");
+        }
+        if (read.chain().size() > DERIVED_UNASKED && of.isEmpty()) {
+            throw new UsageException("from each of " + read.chain().size() + " states: into which? Name states, sets or"
+                    + " outputs with --of");
+        }
+        List<Output> outputs = of.isEmpty() ? Outputs.states(read.chain()) : AskedOutputs.of(read.chain(), of);
+        Worker.Outcome<PowerModel> outcome = options.within(streams, partly ->
+                partly.found().size() + " of " + outputs.size() + " outputs derived", published ->
+                PowerModel.of(read, outputs, destination.steps(at), published));
+        if (outcome.published().isEmpty()) {
+            return options.undecided(streams);
+        }
+        PowerModel found = outcome.published().get();
+        destination.write(Answer.of(() -> PowerDocument.of(found, style))
+                .with(Format.JSON, () -> PowerJson.write(found, style.digits()))
+                .with(Format.CSV, () -> CsvWriter.write(PowerJson.table(found, style.digits()))), streams);
+        return found.isComplete() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
     }
 
     private static String soFar(DerivedModel derived) {

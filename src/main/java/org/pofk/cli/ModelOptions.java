@@ -65,7 +65,7 @@ final class ModelOptions {
     }
 
     private Model refusingEachStart(Model read) throws UsageException {
-        if (settings.overrides().isStartEach() && !read.chain().states().contains(Overrides.EACH)) {
+        if (settings.isStartInEach(read.chain())) {
             throw new UsageException("--start each is a start in each state in turn, which derive alone takes; name one"
                     + " state");
         }

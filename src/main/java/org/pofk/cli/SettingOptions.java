@@ -5,6 +5,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import org.pofk.chain.Chain;
 import org.pofk.input.Overrides;
 import org.pofk.text.Fault;
 import org.pofk.text.RefusedException;
@@ -16,7 +17,7 @@ final class SettingOptions {
             description = "gives a parameter another value than the file does; repeatable")
     private List<String> settings = new ArrayList<>();
 
-    @Option(names = "--start", paramLabel = "STATE", description = "starts in this state, whatever the file says")
+    @Option(names = "--start", paramLabel = "STATE", description = "starts in this state, whatever the file says; 'long run', and for derive 'each'")
     private Optional<String> start = Optional.empty();
 
     /** Something that reads a file. */
@@ -43,6 +44,11 @@ final class SettingOptions {
 
     Optional<String> start() {
         return start;
+    }
+
+    /** Whether the start is each state in turn: the word, which no state bears as its name. */
+    boolean isStartInEach(Chain chain) {
+        return start.equals(Optional.of(Overrides.EACH)) && !chain.states().contains(Overrides.EACH);
     }
 
     Overrides overrides() throws UsageException {

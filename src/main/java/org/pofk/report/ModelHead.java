@@ -25,11 +25,18 @@ final class ModelHead {
         return blocks;
     }
 
+    /** The same for an answer that is not about the model's own start. */
+    static List<Block> ofEachStart(Model model) {
+        List<Block> blocks = new ArrayList<>(of(model));
+        blocks.set(1, new Paragraph(facts(model).and(", started in each state in turn.")));
+        return blocks;
+    }
+
     /** The same where these stand elsewhere. */
     static List<Block> withoutAssumptions(Model model) {
         List<Block> blocks = new ArrayList<>();
         blocks.add(new Heading(1, words(model.title())));
-        blocks.add(new Paragraph(facts(model)));
+        blocks.add(new Paragraph(facts(model).and(start(model.chain())).and(".")));
         model.about().document().ifPresent(document -> blocks.add(new Labelled("document", Prose.name(document)
                 .and(model.about().revision().map(revision -> ", revision " + revision).orElse("")))));
         model.about().preparedBy().ifPresent(who -> blocks.add(new Labelled("prepared by", Prose.name(who))));
@@ -43,14 +50,16 @@ final class ModelHead {
 
     private static Prose facts(Model model) {
         Chain chain = model.chain();
-        Prose facts = Prose.name(model.origin().file()).and(": "
+        return Prose.name(model.origin().file()).and(": "
                 + (chain.kind() == Chain.Kind.CHAIN ? "" : "a recursion of ")
                 + (chain.size() == 1 ? "1 state" : chain.size() + " states") + ", one step is ")
                 .andName(model.step().is())
                 .and(model.step().lasts().filter(lasts -> !lasts.equals(model.step().is()))
                         .map(lasts -> Prose.of(" (lasts ").andName(lasts).and(")"))
                         .orElse(Prose.EMPTY));
-        return facts.and(chain.kind() == Chain.Kind.CHAIN
-                ? Prose.of(", starts in ").and(StartProse.of(chain)) : Prose.EMPTY).and(".");
+    }
+
+    private static Prose start(Chain chain) {
+        return chain.kind() == Chain.Kind.CHAIN ? Prose.of(", starts in ").and(StartProse.of(chain)) : Prose.EMPTY;
     }
 }

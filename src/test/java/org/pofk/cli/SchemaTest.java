@@ -119,6 +119,13 @@ class SchemaTest {
     }
 
     @ParameterizedTest
+    @ValueSource(strings = {"pump-pair", "valve-rotation", "relined-main"})
+    void formulasFromEachStateKeepTheirSchema(String pattern) throws Exception {
+        Path file = Path.of("test-data", "models", pattern + ".yaml");
+        assertKeeps("powers", "derive", file, "--start", "each", "--at", "0,7");
+    }
+
+    @ParameterizedTest
     @ValueSource(strings = {"models/pump-pair", "models/valve-rotation", "models/relined-main",
         "models/level-controller", "costs/pump-pair"})
     void totalsKeepTheirSchema(String model) throws Exception {
@@ -150,7 +157,7 @@ class SchemaTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"result", "structure", "simulation", "verdicts", "conditional", "total"})
+    @ValueSource(strings = {"result", "structure", "simulation", "verdicts", "conditional", "total", "powers"})
     void schemasAreSchemas(String name) throws Exception {
         JsonSchema metaschema = JsonSchemaFactory.getInstance(SpecVersion.VersionFlag.V202012)
                 .getSchema(com.networknt.schema.SchemaLocation.of(com.networknt.schema.SchemaId.V202012));
