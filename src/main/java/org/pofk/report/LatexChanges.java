@@ -11,17 +11,17 @@ final class LatexChanges {
     /** Leave alone those who read LaTeX without a TeX: to them the environment is one they don't know. */
     static final List<String> DEFINITIONS = List.of("\\makeatletter",
             "\\newbox\\pofkchangedbox \\newbox\\pofkchangedpart",
-            "\\@namedef{pofkchangedrule}#1{\\par\\noindent\\llap{\\vrule width 1.2pt height\\ht#1 depth\\dp#1\\hskip 8pt}"
-                    + "\\box#1\\par}",
+            "\\@namedef{pofkchangedrule}{\\par\\noindent\\llap{\\vrule width 1.2pt height\\ht\\pofkchangedpart"
+                    + " depth\\dp\\pofkchangedpart\\hskip 8pt}\\box\\pofkchangedpart\\par}",
             "\\@namedef{pofkchanged}{\\par\\setbox\\pofkchangedbox\\vbox\\bgroup\\hsize\\linewidth\\@parboxrestore"
                     + "\\parskip4pt plus 2pt\\def\\@listi{\\leftmargin\\leftmargini\\topsep0pt\\partopsep0pt\\parsep4pt"
                     + "\\itemsep0pt}\\abovedisplayskip3pt\\belowdisplayskip3pt\\abovedisplayshortskip0pt"
                     + "\\belowdisplayshortskip3pt}",
-            "\\@namedef{endpofkchanged}{\\par\\egroup\\splittopskip=10pt"
+            "\\@namedef{endpofkchanged}{\\par\\egroup\\splittopskip=10pt\\vbadness10000\\vfuzz\\maxdimen"
                     + "\\loop\\ifdim\\ht\\pofkchangedbox>.5\\textheight"
                     + "\\setbox\\pofkchangedpart\\vsplit\\pofkchangedbox to .25\\textheight"
                     + "\\setbox\\pofkchangedpart\\vbox{\\unvbox\\pofkchangedpart}"
-                    + "\\pofkchangedrule\\pofkchangedpart\\repeat\\pofkchangedrule\\pofkchangedbox}",
+                    + "\\pofkchangedrule\\repeat\\setbox\\pofkchangedpart\\box\\pofkchangedbox\\pofkchangedrule}",
             "\\makeatother");
     private static final String FIRST_COLUMN = "\\begin{longtable}{@{";
 

@@ -13,6 +13,8 @@ import java.util.ArrayList;
 import java.util.EnumSet;
 import java.util.List;
 import java.util.regex.Pattern;
+import java.util.stream.Collectors;
+import java.util.stream.IntStream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -96,6 +98,13 @@ class LatexWriterTest {
     @Test
     void everyBlockWithAnyNameCompiles() throws Exception {
         assertCompiles(everything());
+    }
+
+    @Test
+    void everyBlockCompilesWithARuleInTheMargin() throws Exception {
+        Document document = everything();
+        assertCompiles(document.withChanged(IntStream.range(0, document.blocks().size())
+                .filter(i -> !(document.blocks().get(i) instanceof Heading)).boxed().collect(Collectors.toSet())));
     }
 
     @Test
