@@ -65,7 +65,7 @@ class BrowserTest {
     @MethodSource("patterns")
     void aPageShowsItsPatternAndReadsOffExactValues(String pattern) throws Exception {
         DerivedModel derived = Pages.derived(pattern);
-        Path page = Files.writeString(folder.resolve(pattern + ".html"), HtmlWriter.write(Pages.document(derived)));
+        Path page = Files.writeString(folder.resolve(pattern + ".html"), HtmlWriter.write(Pages.report(derived)));
         browser.open(page);
         fitsBesideTheMargins();
         int fields = 0;
@@ -137,7 +137,7 @@ class BrowserTest {
     @Test
     void theStepIsMarkedInTheFigureAndNoOther() throws Exception {
         Path page = Files.writeString(folder.resolve("marked.html"),
-                HtmlWriter.write(Pages.document(Pages.derived("pump-pair"))));
+                HtmlWriter.write(Pages.report(Pages.derived("pump-pair"))));
         browser.open(page);
         for (int k : List.of(2, 5)) {
             browser.type("#step-1", String.valueOf(k));
@@ -152,7 +152,7 @@ class BrowserTest {
     @Test
     void aTargetIsReadAsWritten() throws Exception {
         Path page = Files.writeString(folder.resolve("targets.html"),
-                HtmlWriter.write(Pages.document(Pages.derived("pump-pair"))));
+                HtmlWriter.write(Pages.report(Pages.derived("pump-pair"))));
         browser.open(page);
         Map<String, String> answers = new LinkedHashMap<>();
         for (String typed : List.of("0.005", "5e-3", "1/200", "0.5 %")) {

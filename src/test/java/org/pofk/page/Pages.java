@@ -13,12 +13,17 @@ import java.util.stream.IntStream;
 import org.pofk.Pofk;
 import org.pofk.answer.DerivedModel;
 import org.pofk.answer.Deriving;
+import org.pofk.answer.KeyFigures;
 import org.pofk.chain.Model;
 import org.pofk.chain.Outputs;
 import org.pofk.report.CourseChart;
+import org.pofk.report.CourseCharts;
 import org.pofk.report.DerivationDocument;
 import org.pofk.report.Document;
 import org.pofk.report.PoleChart;
+import org.pofk.report.Provenance;
+import org.pofk.report.Report;
+import org.pofk.report.ReportDocument;
 import org.pofk.report.StateChart;
 import org.pofk.report.Style;
 import org.pofk.text.RefusedException;
@@ -56,6 +61,16 @@ final class Pages {
                 EnumSet.of(Deriving.Extra.COMPARISON, Deriving.Extra.STATE_MODES), published -> { });
     }
 
+    /** The whole report. */
+    static Document report(DerivedModel derived) {
+        List<KeyFigures> figures = derived.outputs().stream()
+                .map(output -> KeyFigures.of(derived.model().chain(), output)).toList();
+        return ReportDocument.of(new Report(derived, figures, CourseCharts.of(derived, figures), List.of(),
+                new Provenance("pofk", "pofk report", List.of(derived.model().origin()))), Report.Depth.FULL,
+                new Style(6, Style.Angles.RADIANS), Model.Convention.COLUMNS);
+    }
+
+    /** The derivation with figures. */
     static Document document(DerivedModel derived) {
         Document words = DerivationDocument.all(derived, new Style(6, Style.Angles.DEGREES), Model.Convention.COLUMNS);
         List<Document.Block> blocks = new ArrayList<>(words.blocks());
