@@ -12,8 +12,8 @@ public record Entry(Subject subject, List<String> of) {
     /** In the order in which a reader is told of them. */
     public enum Subject {
         TITLE, DOCUMENT, REVISION, PREPARED_BY, ASSUMPTION, KIND, STEP, STEP_LASTS, FIRST_STEP, STATE, START,
-        PARAMETER, DEFINITION, RANGE, MEANING, MOVE, ACTION, ACTION_MOVE, PHASE, PHASE_MOVE, AFTER_PHASES, SET,
-        OUTPUT, NOTE
+        PARAMETER, DEFINITION, RANGE, MEANING, MOVE, ACTION, ACTION_MOVE, PHASE, PHASE_MOVE, AFTER_PHASES,
+        COST_UNIT, COST_OF_STATE, COST_OF_MOVE, COST_AT_START, DISCOUNT, SET, OUTPUT, NOTE
     }
 
     public Entry {

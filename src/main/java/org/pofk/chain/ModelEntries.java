@@ -39,6 +39,7 @@ final class ModelEntries {
         all.chain();
         all.model.schedule().ifPresent(all::schedule);
         all.parameters();
+        all.model.costs().ifPresent(all::costs);
         model.notes().forEach(note -> all.join(Entry.of(Subject.NOTE, note.kind(), note.on()), note.text()));
         return all.entries;
     }
@@ -114,6 +115,21 @@ final class ModelEntries {
             put(phases.repeat() == Schedule.Repeat.YES ? "the first again" : "the last for ever",
                     Subject.AFTER_PHASES);
         });
+    }
+
+    private void costs(Costs costs) {
+        put(costs.unit(), Subject.COST_UNIT);
+        for (int i = 0; i < costs.eachStep().size(); i++) {
+            if (!costs.eachStep().get(i).isZero()) {
+                put(number(costs.eachStep().get(i)), Subject.COST_OF_STATE, state(i));
+            }
+        }
+        costs.moves().forEach(move -> put(number(move.cost()), Subject.COST_OF_MOVE, state(move.from()),
+                state(move.to())));
+        if (!costs.atStart().isZero()) {
+            put(number(costs.atStart()), Subject.COST_AT_START);
+        }
+        put(costs.discount().map(ModelEntries::number), Subject.DISCOUNT);
     }
 
     private void parameters() {

@@ -31,6 +31,11 @@ final class EntryProse {
             case ACTION_MOVE, PHASE_MOVE -> Prose.name(of.get(0)).and(": ").and(move(of.subList(1, of.size())));
             case PHASE -> named("phase ", of);
             case AFTER_PHASES -> Prose.of("after the last phase");
+            case COST_UNIT -> Prose.of("costs in");
+            case COST_OF_STATE -> named("cost of a step in ", of);
+            case COST_OF_MOVE -> Prose.of("cost of the move ").and(move(of));
+            case COST_AT_START -> Prose.of("cost at the start");
+            case DISCOUNT -> Prose.of("discount a step");
             case SET -> named("set ", of);
             case OUTPUT -> named("output ", of);
             case NOTE -> Prose.of(of.get(0) + " on ").andName(of.get(1));
