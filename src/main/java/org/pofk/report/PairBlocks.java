@@ -37,9 +37,8 @@ final class PairBlocks {
     }
 
     private void pair(PairStep pair) {
-        Formula angle = numbers.angle(pair.mode().angle());
         Formula argument = numbers.angle(pair.argument());
-        blocks.add(new Paragraph(Prose.of("The pair λ = ").and(WayTables.polar(numbers.of(pair.mode().modulus()), angle))
+        blocks.add(new Paragraph(Prose.of("The pair λ = ").and(WayTables.pole(pair, numbers))
                 .and(pair.mode().power() == 0 ? ":" : ", its fraction of power " + (pair.mode().power() + 1) + ":")));
         label("R", Prose.formula(rectangular(pair.real(), pair.imaginary())));
         label("|R|", Prose.formula(numbers.of(pair.modulus())).and(", and twice that is ")

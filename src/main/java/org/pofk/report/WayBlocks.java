@@ -1,9 +1,7 @@
 package org.pofk.report;
 
 import java.util.ArrayList;
-import java.util.LinkedHashSet;
 import java.util.List;
-import java.util.Set;
 import org.pofk.answer.DerivedOutput;
 import org.pofk.exact.Factorization;
 import org.pofk.exact.Polynomial;
@@ -13,15 +11,12 @@ import org.pofk.formula.Formulas;
 import org.pofk.modes.ClosedForm;
 import org.pofk.modes.Derivation;
 import org.pofk.modes.Derivation.FactorStep;
-import org.pofk.modes.Derivation.PairStep;
-import org.pofk.modes.Mode;
 import org.pofk.modes.TablePair;
 import org.pofk.report.Document.Block;
 import org.pofk.report.Document.Display;
 import org.pofk.report.Document.Heading;
 import org.pofk.report.Document.Paragraph;
 import org.pofk.report.Document.Relation;
-import org.pofk.report.Document.Table;
 
 /** The way of one output from Y(z) to the closed form. */
 final class WayBlocks {
@@ -64,8 +59,7 @@ final class WayBlocks {
         if (form.transform().y().denominator().degree() <= WRITTEN_OUT_UP_TO) {
             expansion(derivation);
         }
-        pairs(derivation);
-        terms(derivation);
+        blocks.addAll(new WayTables(derivation, numbers).inFull());
         output.poleCheck().ifPresent(check -> blocks.add(new Paragraph(PoleProse.of(check))));
     }
 
@@ -111,7 +105,7 @@ final class WayBlocks {
                     + " up to " + longest + " characters; neither it nor its expansion can be read, and both are in the"
                     + " result of derive as JSON."));
         }
-        blocks.addAll(new WayTables(derivation, numbers).blocks());
+        blocks.addAll(new WayTables(derivation, numbers).numbered());
         blocks.addAll(PairBlocks.of(derivation, numbers));
     }
 
@@ -168,44 +162,5 @@ final class WayBlocks {
         return isLinear ? Formulas.sum(fractions)
                 : new Formula.RootSum(TablePair.LAMBDA, Formulas.polynomial(factor, TablePair.LAMBDA),
                         Formulas.sum(fractions));
-    }
-
-    private void pairs(Derivation derivation) {
-        Set<TablePair> pairs = new LinkedHashSet<>();
-        derivation.impulses().forEach(step -> pairs.add(step.pair()));
-        derivation.factors().forEach(step -> {
-            step.real().forEach(real -> pairs.add(real.pair()));
-            step.pairs().forEach(pair -> pairs.add(pair.pair()));
-        });
-        blocks.add(new Table(Prose.of("Table pairs used"), List.of(Prose.of("in z"), Prose.of("in k")),
-                pairs.stream().map(pair -> List.of(Prose.formula(pair.transform()), Prose.formula(pair.sequence())))
-                        .toList()));
-    }
-
-    private void terms(Derivation derivation) {
-        List<List<Prose>> rows = new ArrayList<>();
-        derivation.impulses().forEach(step -> rows.add(row("impulse", Prose.EMPTY, Prose.EMPTY, step.mode())));
-        for (FactorStep step : derivation.factors()) {
-            step.real().forEach(real -> rows.add(row("real", Prose.formula(numbers.of(real.mode().base())),
-                    Prose.formula(numbers.of(real.mode().coefficient())), real.mode())));
-            step.pairs().forEach(pair -> rows.add(pair(pair)));
-        }
-        boolean hasPairs = derivation.factors().stream().anyMatch(step -> !step.pairs().isEmpty());
-        blocks.add(new Table(Prose.of("Poles, coefficients and the terms they become" + (hasPairs
-                ? "; λ, R and their conjugates join to 2|R| |λ|^k cos(arg λ · k + arg R)" : "")), List.of(Prose.of("pole"), Prose.of("λ"), Prose.of("R"),
-                        Prose.of("term")), rows));
-    }
-
-    private List<Prose> row(String kind, Prose pole, Prose coefficient, Mode mode) {
-        return List.of(Prose.of(kind), pole, coefficient, Prose.formula(mode.accept(new ModeTerm(numbers))));
-    }
-
-    private List<Prose> pair(PairStep pair) {
-        return row("pair", polar(numbers.of(pair.mode().modulus()), numbers.angle(pair.mode().angle())),
-                polar(numbers.of(pair.modulus()), numbers.angle(pair.argument())), pair.mode());
-    }
-
-    private static Prose polar(Formula modulus, Formula angle) {
-        return Prose.formula(modulus).and(" at ").andFormula(angle);
     }
 }

@@ -14,63 +14,86 @@ import org.pofk.modes.TablePair;
 import org.pofk.report.Document.Block;
 import org.pofk.report.Document.Table;
 
-/** The pairs of the table of transforms that are used, numbered, and the terms with the pair each of them comes from. */
+/** The pairs of the table of transforms that a way uses, and the terms that become of its poles. */
 final class WayTables {
-    private final Derivation derivation;
     private final NumberFormula numbers;
+    private final List<Term> terms = new ArrayList<>();
     private final List<TablePair> pairs;
 
+    /** What stands for a term: of which kind its pole is, the pole and the coefficient as shown, and what it becomes. */
+    private record Term(Kind kind, Prose pole, Prose coefficient, TablePair pair, Mode mode) {
+    }
+
+    private enum Kind {
+        IMPULSE("impulse"), REAL("real"), PAIR("pair");
+
+        private final String word;
+
+        Kind(String word) {
+            this.word = word;
+        }
+    }
+
     WayTables(Derivation derivation, NumberFormula numbers) {
-        this.derivation = derivation;
         this.numbers = numbers;
+        derivation.impulses().forEach(step -> terms.add(new Term(Kind.IMPULSE, Prose.EMPTY, Prose.EMPTY, step.pair(),
+                step.mode())));
+        for (FactorStep step : derivation.factors()) {
+            step.real().forEach(real -> terms.add(new Term(Kind.REAL, Prose.formula(numbers.of(real.mode().base())),
+                    Prose.formula(numbers.of(real.mode().coefficient())), real.pair(), real.mode())));
+            step.pairs().forEach(pair -> terms.add(new Term(Kind.PAIR, pole(pair, numbers), polar(
+                    numbers.of(pair.modulus()), numbers.angle(pair.argument())), pair.pair(), pair.mode())));
+        }
         Set<TablePair> used = new LinkedHashSet<>();
-        derivation.impulses().forEach(step -> used.add(step.pair()));
-        derivation.factors().forEach(step -> {
-            step.real().forEach(real -> used.add(real.pair()));
-            step.pairs().forEach(pair -> used.add(pair.pair()));
-        });
+        terms.forEach(term -> used.add(term.pair));
         this.pairs = List.copyOf(used);
     }
 
-    List<Block> blocks() {
-        List<List<Prose>> used = IntStream.range(0, pairs.size()).mapToObj(i -> List.of(Prose.of("(" + (i + 1) + ")"),
-                Prose.formula(pairs.get(i).transform()), Prose.formula(pairs.get(i).sequence()))).toList();
+    /** With each term in full. */
+    List<Block> inFull() {
+        boolean hasPairs = terms.stream().anyMatch(term -> term.kind == Kind.PAIR);
+        return List.of(new Table(Prose.of("Table pairs used"), List.of(Prose.of("in z"), Prose.of("in k")),
+                pairs.stream().map(WayTables::pair).toList()),
+                new Table(Prose.of("Poles, coefficients and the terms they become" + (hasPairs
+                        ? "; λ, R and their conjugates join to 2|R| |λ|^k cos(arg λ · k + arg R)" : "")),
+                        List.of(Prose.of("pole"), Prose.of("λ"), Prose.of("R"), Prose.of("term")),
+                        terms.stream().map(term -> List.of(Prose.of(term.kind.word), term.pole, term.coefficient,
+                                formula(term))).toList()));
+    }
+
+    /** With the number of the pair that each term comes from; the conjugate pairs that are worked out below say so. */
+    List<Block> numbered() {
+        List<List<Prose>> used = IntStream.range(0, pairs.size()).mapToObj(i -> List.of(number(pairs.get(i)),
+                pair(pairs.get(i)).get(0), pair(pairs.get(i)).get(1))).toList();
+        List<Mode> joined = terms.stream().filter(term -> term.kind == Kind.PAIR).map(Term::mode)
+                .limit(PairBlocks.WORKED_UP_TO).toList();
         return List.of(new Table(Prose.of("Pairs of the table of transforms"),
                 List.of(Prose.of("pair"), Prose.of("in z"), Prose.of("in k")), used),
                 new Table(Prose.of("Poles λ, coefficients R and the terms they become"), List.of(Prose.of("λ"),
-                        Prose.of("R"), Prose.of("by pair"), Prose.of("term")), terms()));
+                        Prose.of("R"), Prose.of("by pair"), Prose.of("term")), terms.stream().map(term -> List.of(
+                                term.kind == Kind.IMPULSE ? Prose.of("none") : term.pole, term.coefficient,
+                                number(term.pair), joined.contains(term.mode) ? Prose.of("joined below")
+                                        : formula(term))).toList()));
     }
 
-    private List<List<Prose>> terms() {
-        List<List<Prose>> rows = new ArrayList<>();
-        derivation.impulses().forEach(step -> rows.add(row(Prose.of("none"), Prose.formula(numbers.of(
-                step.mode().value())), step.pair(), term(step.mode()))));
-        int joined = 0;
-        for (FactorStep step : derivation.factors()) {
-            step.real().forEach(real -> rows.add(row(Prose.formula(numbers.of(real.mode().base())),
-                    Prose.formula(numbers.of(real.mode().coefficient())), real.pair(), term(real.mode()))));
-            for (PairStep pair : step.pairs()) {
-                rows.add(pair(pair, joined++ < PairBlocks.WORKED_UP_TO ? Prose.of("joined below") : term(pair.mode())));
-            }
-        }
-        return rows;
+    private Prose number(TablePair pair) {
+        return Prose.of("(" + (pairs.indexOf(pair) + 1) + ")");
     }
 
-    private Prose term(Mode mode) {
-        return Prose.formula(mode.accept(new ModeTerm(numbers)));
+    private static List<Prose> pair(TablePair pair) {
+        return List.of(Prose.formula(pair.transform()), Prose.formula(pair.sequence()));
     }
 
-    private List<Prose> row(Prose pole, Prose coefficient, TablePair pair, Prose term) {
-        return List.of(pole, coefficient, Prose.of("(" + (pairs.indexOf(pair) + 1) + ")"), term);
+    private Prose formula(Term term) {
+        return Prose.formula(term.mode.accept(new ModeTerm(numbers)));
     }
 
-    private List<Prose> pair(PairStep pair, Prose term) {
-        return row(polar(numbers.of(pair.mode().modulus()), numbers.angle(pair.mode().angle())),
-                polar(numbers.of(pair.modulus()), numbers.angle(pair.argument())), pair.pair(), term);
+    /** The pole of a pair that lies above the real axis. */
+    static Prose pole(PairStep pair, NumberFormula numbers) {
+        return polar(numbers.of(pair.mode().modulus()), numbers.angle(pair.mode().angle()));
     }
 
-    /** A complex number of a pair, the other with the angle turned round. */
-    static Prose polar(Formula modulus, Formula angle) {
+    private static Prose polar(Formula modulus, Formula angle) {
         return Prose.formula(modulus).and(" at ").andFormula(angle);
     }
 }
