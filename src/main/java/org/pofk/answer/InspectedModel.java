@@ -35,10 +35,13 @@ public record InspectedModel(Model model, Inspection inspection, List<InspectedO
         states = List.copyOf(states);
     }
 
-    /** The structure, and the long run of these outputs three ways. */
+    /** The structure, and the long run of these outputs three ways; under a schedule, where it isn't the chain's, none. */
     public static InspectedModel of(Model model, List<Output> outputs) {
         Chain chain = model.chain();
         Inspection inspection = Inspection.of(model);
+        if (model.schedule().isPresent()) {
+            return new InspectedModel(model, inspection, List.of(), List.of());
+        }
         List<InspectedOutput> inspected = new ArrayList<>();
         if (!outputs.isEmpty()) {
             LongRunChecks.Ground ground = LongRunChecks.Ground.of(chain);

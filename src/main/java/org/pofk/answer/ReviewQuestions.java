@@ -47,8 +47,8 @@ final class ReviewQuestions {
 
     private void askAboutLeaving(List<NearlyClosed> nearlyClosed) {
         List<Integer> neverLeft = structure.absorbing();
-        // with one state there is nothing to leave it for
-        if (!neverLeft.isEmpty() && chain.size() > 1) {
+        // with one state there is nothing to leave it for; a schedule may lead out of any
+        if (!neverLeft.isEmpty() && chain.size() > 1 && model.schedule().isEmpty()) {
             ask(Question.Kind.NEVER_LEFT, named(neverLeft) + " can't be left: is there no repair, renewal or restart?",
                     neverLeft);
         }

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Output;
+import org.pofk.chain.Timetable;
 import org.pofk.exact.Ball;
 import org.pofk.exact.Rational;
 
@@ -73,8 +74,28 @@ public record Simulation(long seed, int runs, List<Series> series) {
      */
     public static Simulation of(Chain chain, List<Output> outputs, List<Integer> steps, int runs, long seed) {
         List<Integer> ascending = steps.stream().distinct().sorted().toList();
-        StateCounts counts = StateCounts.of(chain, ascending, runs, seed);
-        List<FixedPointState> exact = FixedPointState.at(chain, ascending);
+        return of(outputs, ascending, StateCounts.of(chain, ascending, runs, seed),
+                FixedPointState.at(chain, ascending), runs, seed);
+    }
+
+    /** The same of a chain to which a timetable happens; at each step what is read after the actions done there. */
+    public static Simulation of(Chain chain, Timetable timetable, List<Output> outputs, List<Integer> steps, int runs,
+            long seed) {
+        List<Integer> ascending = steps.stream().distinct().sorted().toList();
+        StateArithmetic.Fixed fixed = StateArithmetic.Fixed.of(timetable);
+        List<FixedPointState> exact = new ArrayList<>();
+        FixedPointState state = fixed.start(chain.start());
+        int k = 0;
+        for (int step : ascending) {
+            state = step == k ? state : CycleCourse.of(timetable, fixed, state, k, step - k, List.of()).end();
+            k = step;
+            exact.add(state);
+        }
+        return of(outputs, ascending, StateCounts.of(chain, timetable, ascending, runs, seed), exact, runs, seed);
+    }
+
+    private static Simulation of(List<Output> outputs, List<Integer> ascending, StateCounts counts,
+            List<FixedPointState> exact, int runs, long seed) {
         List<Series> series = new ArrayList<>();
         for (Output output : outputs) {
             Reading reading = Reading.of(output);

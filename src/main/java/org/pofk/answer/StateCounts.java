@@ -2,11 +2,16 @@ package org.pofk.answer;
 
 import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
+import java.util.function.IntFunction;
+import java.util.stream.Stream;
 import org.apache.commons.math3.random.RandomGenerator;
 import org.apache.commons.math3.random.Well19937c;
 import org.pofk.chain.Chain;
 import org.pofk.chain.SparseMatrix;
+import org.pofk.chain.Timetable;
 import org.pofk.exact.Rational;
 
 /**
@@ -19,16 +24,38 @@ record StateCounts(List<List<Long>> counts) {
 
     /** @param steps ascending */
     static StateCounts of(Chain chain, List<Integer> steps, int runs, long seed) {
+        List<List<Choice>> move = List.of(choices(chain.matrix()));
+        return of(chain, k -> move, steps, runs, seed);
+    }
+
+    /** The same with what a timetable holds in each step, in place of the chain's own move. */
+    static StateCounts of(Chain chain, Timetable timetable, List<Integer> steps, int runs, long seed) {
+        List<List<Choice>> moves = timetable.moves().stream().map(StateCounts::choices).toList();
+        List<List<Choice>> actions = timetable.actions().stream().map(each -> choices(each.matrix())).toList();
+        Map<Timetable.Moment, List<List<Choice>>> known = new HashMap<>();
+        return of(chain, k -> known.computeIfAbsent(timetable.at(k), moment -> Stream.concat(
+                moment.move().stream().mapToObj(moves::get), moment.actions().stream().map(actions::get)).toList()),
+                steps, runs, seed);
+    }
+
+    private static List<Choice> choices(SparseMatrix matrix) {
+        return matrix.columns().stream().map(Choice::of).toList();
+    }
+
+    private static StateCounts of(Chain chain, IntFunction<List<List<Choice>>> atStep, List<Integer> steps, int runs,
+            long seed) {
         RandomGenerator random = new Well19937c(seed);
         Choice start = Choice.of(startOf(chain));
-        List<Choice> moves = chain.matrix().columns().stream().map(Choice::of).toList();
         long[][] counts = new long[steps.size()][chain.size()];
         for (int run = 0; run < runs; run++) {
             int state = start.draw(random);
             int k = 0;
             for (int i = 0; i < counts.length; i++) {
-                for (; k < steps.get(i); k++) {
-                    state = moves.get(state).draw(random);
+                while (k < steps.get(i)) {
+                    k++;
+                    for (List<Choice> choices : atStep.apply(k)) {
+                        state = choices.get(state).draw(random);
+                    }
                 }
                 counts[i][state]++;
             }

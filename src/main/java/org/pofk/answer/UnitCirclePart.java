@@ -37,6 +37,10 @@ final class UnitCirclePart {
     private static Polynomial<Rational> quotientModulo(Polynomial<Rational> dividend, Polynomial<Rational> divisor,
             Polynomial<Rational> modulus) {
         int degree = modulus.degree();
+        if (degree == 1) {
+            return Polynomial.ofRationals(List.of(dividend.remainder(modulus).coefficient(0)
+                    .dividedBy(divisor.remainder(modulus).coefficient(0))));
+        }
         List<List<SparseMatrix.Entry>> columns = new ArrayList<>();
         Polynomial<Rational> multiple = divisor.remainder(modulus);
         for (int j = 0; j < degree; j++) {

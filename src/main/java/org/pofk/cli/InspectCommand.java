@@ -30,7 +30,7 @@ final class InspectCommand implements Work {
     public ExitCode run(Streams streams) throws RefusedException, UsageException, WritingException {
         Style style = options.style();
         Destination destination = options.destination();
-        Model read = options.model();
+        Model read = options.modelWithSchedule();
         List<Output> outputs = of.isEmpty() ? read.chain().outputs() : AskedOutputs.of(read.chain(), of);
         Worker.Outcome<InspectedModel> outcome = options.within(streams, published -> {
             published.accept(InspectedModel.of(read, List.of()));

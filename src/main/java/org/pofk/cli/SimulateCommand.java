@@ -6,6 +6,7 @@ import org.pofk.answer.Simulation;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
+import org.pofk.chain.Timetable;
 import org.pofk.report.CsvWriter;
 import org.pofk.report.SimulationDocument;
 import org.pofk.report.SimulationJson;
@@ -47,14 +48,16 @@ final class SimulateCommand implements Work {
         if (runs < 1 || runs > MOST_RUNS) {
             throw new UsageException("--runs " + runs + " is not possible; 1 to " + MOST_RUNS + " are");
         }
-        Model read = options.model();
+        Model read = options.modelWithSchedule();
         if (read.chain().kind() == Chain.Kind.RECURSION) {
             throw new UsageException("'" + read.origin().file() + "' is a recursion: only a chain, whose entries are"
                     + " probabilities, can be run at random; pofk derive takes it");
         }
         List<Output> outputs = AskedOutputs.of(read.chain(), of);
         Worker.Outcome<Simulation> outcome = options.within(streams, published ->
-                published.accept(Simulation.of(read.chain(), outputs, at.steps(), runs, seed)));
+                published.accept(read.schedule().map(schedule -> Simulation.of(read.chain(),
+                        Timetable.of(read.chain(), schedule), outputs, at.steps(), runs, seed))
+                        .orElseGet(() -> Simulation.of(read.chain(), outputs, at.steps(), runs, seed))));
         if (outcome.published().isEmpty()) {
             streams.notes().println("pofk: the runs didn't end within the budget; fewer will, with --runs");
             return ExitCode.NOT_DECIDED;

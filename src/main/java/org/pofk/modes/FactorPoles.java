@@ -38,9 +38,10 @@ final class FactorPoles {
         this.cosines = CosineForm.of(factor.polynomial());
     }
 
-    /** Every element is searched for short forms up to some degree; above, in fields where they are to be expected. */
+    /** Every element is searched for short forms up to some degree and length; above, in fields where they are to be expected. */
     private static boolean isSearched(NumberField field) {
-        return field.degree() <= NumberField.SEARCHED_UP_TO || field.step() == field.degree()
+        return field.degree() <= NumberField.SEARCHED_UP_TO && !PartialFractions.isLong(field.modulus())
+                || field.step() == field.degree()
                 || !Cyclotomic.ordersDividing(field.modulus()).isEmpty();
     }
 

@@ -103,8 +103,8 @@ public final class PartialFractions<E> {
     }
 
     /** Whether Euclid's algorithm, whose numbers grow with degree and length, would take long. */
-    private boolean isLong(Polynomial<E> factor) {
-        int bits = factor.coefficients().stream().mapToInt(field::bits).max().orElse(0);
+    static <E> boolean isLong(Polynomial<E> factor) {
+        int bits = factor.coefficients().stream().mapToInt(factor.field()::bits).max().orElse(0);
         return (long) bits * factor.degree() > Expansion.REDUCED_UP_TO_BITS;
     }
 

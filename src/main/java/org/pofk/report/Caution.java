@@ -9,8 +9,7 @@ final class Caution {
             + " on the strength of it, is for the governing standard or local code and a competent, where required"
             + " licensed, person.";
 
-    /** Besides, where the model may be that of a protective function. */
-    static final String PROTECTIVE_FUNCTION = "Not a safety integrity claim: architecture limits, systematic failures"
+    private static final String PROTECTIVE_FUNCTION = "Not a safety integrity claim: architecture limits, systematic failures"
             + " and common cause are judged by the governing functional-safety standard.";
 
     private Caution() {
@@ -19,10 +18,15 @@ final class Caution {
     /** With what is to be added about what the model says it concerns. */
     static Paragraph of(Model model) {
         return new Paragraph(TEXT + model.about().concerns().map(concern -> " " + switch (concern) {
-            case PROTECTIVE_FUNCTION -> "Not a safety integrity claim: architecture limits, systematic failures and"
-                    + " common cause are judged by the governing functional-safety standard.";
+            case PROTECTIVE_FUNCTION -> PROTECTIVE_FUNCTION;
             case STRUCTURE -> "Doesn't replace an inspection or load rating by a licensed engineer.";
         }).orElse(""));
+    }
+
+    /** Where something is inspected, it may be a protective function although the model doesn't say so. */
+    static Paragraph ofInspections(Model model) {
+        return model.about().concerns().isPresent() || model.schedule().filter(each -> !each.recurring().isEmpty())
+                .isEmpty() ? of(model) : new Paragraph(TEXT + " " + PROTECTIVE_FUNCTION);
     }
 
     /** Whether a paragraph is one of these. */

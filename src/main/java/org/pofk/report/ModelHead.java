@@ -5,6 +5,7 @@ import java.util.Arrays;
 import java.util.List;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
+import org.pofk.chain.Timetable;
 import org.pofk.report.Document.Block;
 import org.pofk.report.Document.Heading;
 import org.pofk.report.Document.Items;
@@ -40,6 +41,8 @@ final class ModelHead {
         model.about().document().ifPresent(document -> blocks.add(new Labelled("document", Prose.name(document)
                 .and(model.about().revision().map(revision -> ", revision " + revision).orElse("")))));
         model.about().preparedBy().ifPresent(who -> blocks.add(new Labelled("prepared by", Prose.name(who))));
+        model.schedule().ifPresent(schedule ->
+                blocks.addAll(ScheduleProse.of(schedule, Timetable.of(model.chain(), schedule))));
         return blocks;
     }
 

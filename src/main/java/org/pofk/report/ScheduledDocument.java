@@ -16,12 +16,10 @@ import org.pofk.answer.PeriodicRegime;
 import org.pofk.answer.ScheduledModel;
 import org.pofk.answer.ScheduledOutput;
 import org.pofk.answer.StretchFormula;
-import org.pofk.chain.Chain;
 import org.pofk.chain.Timetable;
 import org.pofk.report.Document.Block;
 import org.pofk.report.Document.Heading;
 import org.pofk.report.Document.Labelled;
-import org.pofk.report.Document.Paragraph;
 import org.pofk.report.Document.Table;
 import org.pofk.transform.RecurrenceProof;
 
@@ -50,18 +48,9 @@ public final class ScheduledDocument {
 
     private void write() {
         blocks.addAll(ModelHead.of(found.model()));
-        found.model().schedule().ifPresent(schedule -> blocks.addAll(ScheduleProse.of(schedule, timetable)));
         found.outputs().forEach(this::output);
         values();
-        blocks.add(new Paragraph(Caution.TEXT));
-        if (isOfInspections()) {
-            blocks.add(new Paragraph(Caution.PROTECTIVE_FUNCTION));
-        }
-    }
-
-    private boolean isOfInspections() {
-        return found.model().chain().kind() == Chain.Kind.CHAIN
-                && found.model().schedule().filter(each -> !each.recurring().isEmpty()).isPresent();
+        blocks.add(Caution.ofInspections(found.model()));
     }
 
     private void output(ScheduledOutput output) {
@@ -224,8 +213,9 @@ public final class ScheduledDocument {
     }
 
     private Prose side(CycleFormula.Place place) {
-        return !isActed(place.j()) ? Prose.EMPTY
-                : Prose.of(place.side() == Side.BEFORE ? ", before " : ", after ").and(done(place.j()));
+        int step = place.j() == 0 ? timetable.period() : place.j();
+        return !isActed(step) ? Prose.EMPTY
+                : Prose.of(place.side() == Side.BEFORE ? ", before " : ", after ").and(done(step));
     }
 
     private void joint(ScheduledOutput output, JointFormula formula) {

@@ -19,6 +19,9 @@ public final class SimulationDocument {
     public static Document of(Model model, Simulation simulation, Style style) {
         List<Block> blocks = new ArrayList<>(ModelHead.of(model));
         blocks.add(sampled(simulation.runs(), simulation.seed()));
+        if (model.schedule().filter(each -> !each.recurring().isEmpty()).isPresent()) {
+            blocks.add(new Paragraph("At each step k what is read is read after the actions done there."));
+        }
         for (Series series : simulation.series()) {
             blocks.add(new Heading(2, OutputProse.title(series.output())));
             blocks.addAll(series(series, style));

@@ -52,7 +52,12 @@ public final class StructureDocument {
 
     private void structure() {
         Structure structure = inspected.inspection().structure();
-        blocks.add(new Heading(2, "Structure"));
+        boolean isScheduled = inspected.model().schedule().isPresent();
+        blocks.add(new Heading(2, isScheduled ? "Structure between what is scheduled" : "Structure"));
+        if (isScheduled) {
+            blocks.add(new Paragraph("Of the model's own moves alone. What the schedule makes of them in the long run"
+                    + " is told by pofk derive."));
+        }
         blocks.add(new Table(Prose.EMPTY, List.of(Prose.of("class"), Prose.of("kind"), Prose.of("period"),
                 Prose.of("reached"), Prose.of("states")), IntStream.range(0, structure.classes().size())
                         .mapToObj(i -> row(i, structure.classes().get(i))).toList()));

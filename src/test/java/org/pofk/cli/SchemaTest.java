@@ -135,6 +135,12 @@ class SchemaTest {
     }
 
     @ParameterizedTest
+    @ValueSource(strings = {"tested-valve", "bridge-deck", "staggered-pumps"})
+    void answersAboutSchedulesKeepTheirSchema(String model) throws Exception {
+        assertKeeps("schedule", "derive", Path.of("test-data", "scheduled", model + ".yaml"), "--at", "0..3,100");
+    }
+
+    @ParameterizedTest
     @ValueSource(strings = {"pump-pair", "right"})
     void verdictsKeepTheirSchema(String claims) throws Exception {
         Run run = Run.of("check", "test-data/claims/" + claims + ".yaml", "--as", "json");
