@@ -7,14 +7,22 @@ import java.util.List;
 /**
  * The iteration of Aberth and Ehrlich with p and p′ at any precision, for roots that doubles can't tell apart or hold.
  * Approximate: starts only. The sum over the other roots needs few digits and is taken in doubles. Mutable: goes on
- * from where it was when asked again with more precision.
+ * from where it was when asked again with more precision. Where a few points went astray, they start again around the
+ * centre of the roots that nobody has found: by the sum of all of them, which the coefficients tell.
  */
 final class PreciseAberth {
     private static final int MOST_ROUNDS = 100;
     private static final int FACTOR_BITS = 20;
     private static final double LARGEST_FACTOR = 0x1p40;
 
+    /** A disc that isn't smaller than its point's size by so many bits holds nothing. */
+    private static final int ASTRAY_BITS = 4;
+    private static final int MOST_RESTARTS = 3;
+    /** How far from the centre they start, in its size. */
+    private static final double SPREAD = 0.03;
+
     private final BoundedHorner polynomial;
+    private final double sumOfRoots;
     private final List<Point> points;
 
     /** One approximation. */
@@ -31,14 +39,27 @@ final class PreciseAberth {
             this.scale = scale;
         }
 
+        void startAt(Start start) {
+            x = start.x();
+            y = start.y();
+            scale = start.scale();
+            isDone = false;
+        }
+
+        boolean isAstray() {
+            return doubt > exponent() - ASTRAY_BITS;
+        }
+
         int exponent() {
             return Disc.leastExponent(x, y) - scale;
         }
     }
 
-    /** @param guesses none to start from the circles */
-    PreciseAberth(BoundedHorner polynomial, List<NewtonPolygon.Circle> circles, List<Start> guesses) {
+    /** @param whole the coefficients; {@code guesses} none to start from the polygon's circles */
+    PreciseAberth(BoundedHorner polynomial, BigInteger[] whole, List<Start> guesses) {
+        List<NewtonPolygon.Circle> circles = NewtonPolygon.circles(whole);
         this.polynomial = polynomial;
+        this.sumOfRoots = -new Rational(whole[whole.length - 2], whole[whole.length - 1]).approximate();
         this.points = guesses.isEmpty()
                 ? around(circles)
                 : new ArrayList<>(guesses.stream().map(s -> new Point(s.x(), s.y(), s.scale())).toList());
@@ -61,10 +82,35 @@ final class PreciseAberth {
     /** Guesses that are as good as this precision allows. */
     List<Start> starts(int precision) {
         points.forEach(point -> point.isDone = false);
+        iterate(precision);
+        for (int restart = 0; restart < MOST_RESTARTS && areFewAstray(); restart++) {
+            startAgain(points.stream().filter(Point::isAstray).toList(), restart);
+            iterate(precision);
+        }
+        return points.stream().map(p -> new Start(p.x, p.y, p.scale, p.doubt)).toList();
+    }
+
+    private void iterate(int precision) {
         for (int round = 0; round < MOST_ROUNDS && points.stream().anyMatch(point -> !point.isDone); round++) {
             points.stream().filter(point -> !point.isDone).forEach(point -> move(point, precision));
         }
-        return points.stream().map(p -> new Start(p.x, p.y, p.scale, p.doubt)).toList();
+    }
+
+    private boolean areFewAstray() {
+        long astray = points.stream().filter(Point::isAstray).count();
+        return astray > 0 && 4 * astray <= points.size();
+    }
+
+    private void startAgain(List<Point> astray, int restart) {
+        double found = points.stream().filter(point -> !point.isAstray())
+                .mapToDouble(point -> asDouble(point.x, point.scale)).sum();
+        double center = (sumOfRoots - found) / astray.size();
+        double radius = Math.max(Math.abs(center), 0x1p-30) * SPREAD * (restart + 1);
+        for (int i = 0; i < astray.size(); i++) {
+            double angle = Math.PI * (2 * i + 0.5 + restart) / astray.size();
+            Start start = Start.of(center + radius * Math.cos(angle), radius * Math.sin(angle), 1);
+            astray.get(i).startAt(start);
+        }
     }
 
     private void move(Point point, int precision) {

@@ -34,7 +34,7 @@ final class RootIsolation {
         if (isolated.isEmpty()) {
             isolated = Isolation.attempt(horner, TridiagonalStarts.of(polynomial));
         }
-        PreciseAberth precise = new PreciseAberth(horner, NewtonPolygon.circles(whole), starts);
+        PreciseAberth precise = new PreciseAberth(horner, whole, starts);
         for (int precision = FIRST_PRECISION; isolated.isEmpty(); precision *= 2) {
             if (precision == SUSPICIOUS_PRECISION) {
                 requireSquareFree(polynomial);

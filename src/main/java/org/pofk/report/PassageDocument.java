@@ -22,6 +22,7 @@ import org.pofk.report.Document.Table;
 public final class PassageDocument {
     /** Above so many states the table of all starts is left out. */
     private static final int STATES_AT_MOST = 40;
+    private static final int LONGEST_FRACTION = 60;
 
     private final Chain chain;
     private final Passage passage;
@@ -124,6 +125,9 @@ public final class PassageDocument {
 
     /** Exact as a fraction where its decimals don't say it all. */
     private String number(Rational value) {
+        if (value.toString().length() > LONGEST_FRACTION) {
+            return new LongRunProse(style.digits()).number(value);
+        }
         String decimals = ValueText.of(value, style.digits());
         return ValueText.isExact(value, style.digits()) ? decimals : value + " ≈ " + decimals;
     }

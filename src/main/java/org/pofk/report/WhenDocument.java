@@ -16,6 +16,8 @@ import org.pofk.report.Document.Table;
 
 /** When outputs meet a condition, as a document. */
 public final class WhenDocument {
+    private static final int LONGEST_FRACTION = 60;
+
     private final WhenModel found;
     private final Style style;
     private final List<Block> blocks = new ArrayList<>();
@@ -122,6 +124,9 @@ public final class WhenDocument {
     }
 
     private static String number(Rational value, Style style) {
+        if (value.toString().length() > LONGEST_FRACTION) {
+            return new LongRunProse(style.digits()).number(value);
+        }
         return Decimals.of(value, style.digits()).exact() ? Decimals.of(value, style.digits()).text()
                 : value + " ≈ " + Decimals.of(value, style.digits()).text();
     }
