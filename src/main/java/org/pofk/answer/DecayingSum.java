@@ -17,7 +17,7 @@ import org.pofk.modes.Mode;
  * products.
  */
 final class DecayingSum {
-    private static final Rational MOST_TURN = Rational.of(3);
+    private static final BigInteger MOST_TURN = BigInteger.valueOf(3);
     /** An angle multiplied by a step needs as many more bits. */
     private static final int STEP_BITS = Long.SIZE;
     private static final int UNIT_BITS = 96;
@@ -96,9 +96,15 @@ final class DecayingSum {
     Ball over(long from, long to, long stride) {
         Ball sum = Ball.of(Rational.ZERO, bits);
         for (Term term : terms) {
-            sum = sum.plus(size(term, from, to).times(term.size).times(cosine(term, from, to, stride)));
+            Ball amount = size(term, from, to).times(term.size).roundedTo(bits);
+            sum = sum.plus(amount.times(isGone(amount) ? everySign() : cosine(term, from, to, stride)));
         }
         return sum;
+    }
+
+    /** True for what is below the last place of the scale, whatever the cosine is. */
+    private static boolean isGone(Ball amount) {
+        return amount.center().bitLength() <= 1 && amount.radius().bitLength() <= 2;
     }
 
     /** binomial(k, p) · r^(k−p), zero for k < p. */
@@ -130,7 +136,8 @@ final class DecayingSum {
         }
         Ball steps = Ball.between(BigInteger.valueOf(from - term.power), BigInteger.valueOf(last - term.power), 0);
         Ball whole = term.angle.times(steps).plus(term.phase);
-        return whole.upper().minus(whole.lower()).compareTo(MOST_TURN) > 0 ? everySign() : whole.cos().roundedTo(bits);
+        boolean turnsFar = whole.radius().shiftLeft(1).compareTo(MOST_TURN.shiftLeft(whole.scale())) > 0;
+        return turnsFar ? everySign() : whole.cos().roundedTo(bits);
     }
 
     /** The cosine of a whole or half number of turns. */

@@ -23,6 +23,7 @@ import org.pofk.transform.Transforms;
  */
 public record Peak(StepValue value, Optional<Long> at) {
     private static final int BITS = 256;
+    private static final int ROUGH_BITS = 80;
     private static final int MOST_STRETCHES = 100_000;
     private static final int MOST_DIGITS = 40;
     private static final long MOST_CLASSES = 120;
@@ -56,6 +57,7 @@ public record Peak(StepValue value, Optional<Long> at) {
         private final ClosedForm form;
         private final List<Rational> limits;
         private final DecayingSum sum;
+        private final DecayingSum rough;
         private final long modulus;
         private final Rational longRun;
         private Optional<Long> best = Optional.empty();
@@ -66,6 +68,7 @@ public record Peak(StepValue value, Optional<Long> at) {
             this.form = form;
             this.limits = limits;
             this.sum = DecayingSum.of(form, BITS);
+            this.rough = DecayingSum.of(form, ROUGH_BITS);
             this.modulus = sum.stride(limits.size(), Math.max(2L * limits.size(), MOST_CLASSES));
             this.longRun = limits.stream().reduce(Rational::max).orElseThrow();
             this.bestValue = Ball.of(longRun, BITS);
@@ -168,10 +171,15 @@ public record Peak(StepValue value, Optional<Long> at) {
             return true;
         }
 
+        /** Looked at roughly first: most stretches hold nothing that comes near the best. */
         private Stretch stretch(long from, long to) {
             Ball limit = Ball.of(limits.get((int) (from % limits.size())), BITS);
-            Ball all = limit.plus(sum.over(from, to, modulus));
-            offer(from, from == to ? all : limit.plus(sum.over(from, from, modulus)));
+            Ball first = limit.plus(rough.over(from, from, modulus));
+            if (first.upper().compareTo(bestValue.lower()) > 0) {
+                first = limit.plus(sum.over(from, from, modulus));
+                offer(from, first);
+            }
+            Ball all = from == to ? first : limit.plus(rough.over(from, to, modulus));
             return new Stretch(from, to, modulus, all.upper());
         }
     }
