@@ -9,8 +9,6 @@ import org.pofk.exact.Rational;
 
 /** What is right where a claim answers a question about a chain. */
 final class Answers implements AnswerOf.Question<Answer> {
-    /** The last step whose values are held as fractions. */
-    private static final long EXACT = 4_000;
     private static final int BITS = 512;
 
     private final Truth truth;
@@ -41,7 +39,7 @@ final class Answers implements AnswerOf.Question<Answer> {
     /** Of p(first) + … + p(last) and a number: a difference of two sums from k = 0 on. */
     private Answer quotient(Output output, long first, long last, Rational divisor) {
         OutputTruth sums = truth.about(output).sums();
-        if (last <= EXACT) {
+        if (last <= OutputTruth.EXACT) {
             Rational before = first == 0 ? Rational.ZERO : sums.valueAt(first - 1);
             return Answer.of(sums.valueAt(last).minus(before).dividedBy(divisor));
         }
@@ -54,7 +52,7 @@ final class Answers implements AnswerOf.Question<Answer> {
         long at = conditional.at();
         OutputTruth given = truth.about(conditional.given());
         OutputTruth joint = truth.about(conditional.joint());
-        if (at > EXACT) {
+        if (at > OutputTruth.EXACT) {
             Ball below = FarValue.enclose(given, at, BITS);
             return below.containsZero()
                     ? Answer.notDecided("the probability of what is given is too small for enclosures")

@@ -12,8 +12,6 @@ import org.pofk.text.RefusedException;
  * holds for both.
  */
 final class JudgedValue {
-    /** The last step whose value is held as a fraction. */
-    private static final long EXACT = 4_000;
     /** The last step at which equality with a fraction is looked at. */
     private static final long COMPARED = 1_000_000;
     private static final int BITS = 512;
@@ -23,7 +21,7 @@ final class JudgedValue {
 
     static Judgement of(Statement.Value stated, Claim claim, Truth truth) throws RefusedException {
         OutputTruth output = truth.about(stated.output());
-        if (stated.at() <= EXACT) {
+        if (stated.at() <= OutputTruth.EXACT) {
             return exactly(output.valueAt(stated.at()), stated, claim);
         }
         Ball value = FarValue.enclose(output, stated.at(), BITS);

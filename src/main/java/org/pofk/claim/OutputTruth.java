@@ -25,6 +25,8 @@ import org.pofk.transform.Transforms;
  * stepping, its transform no factoring, and only what asks for poles has them found.
  */
 public final class OutputTruth {
+    /** The last step whose value is worth a fraction; later ones are enclosed. */
+    public static final long EXACT = 4_000;
     /** Values up to here are found by stepping; beyond, each by itself. */
     static final int STEPPED = 400;
 

@@ -8,6 +8,7 @@ import org.pofk.claim.AnswerOf;
 import org.pofk.claim.AnswerOf.MeanPassage;
 import org.pofk.claim.AnswerOf.MeanPassage.Beginning;
 import org.pofk.claim.AnswerOf.MeanPassage.Cases;
+import org.pofk.claim.OutputTruth;
 import org.pofk.claim.Statement;
 import org.pofk.claim.Truth;
 
@@ -81,7 +82,7 @@ final class OtherAnswers implements AnswerOf.Question<List<OtherAnswers.Other>> 
         others.add(sum(sum, SlipKind.INDEX_SHIFTED, first, last + 1));
         others.add(sum(sum, SlipKind.INDEX_SHIFTED, first + 1, last + 1));
         // where the term before is zero, the last one is merely missing
-        if (first > 0 && !truth.about(sum.output()).valueAt(first - 1).isZero()) {
+        if (first > 0 && first <= OutputTruth.EXACT && !truth.about(sum.output()).valueAt(first - 1).isZero()) {
             others.add(sum(sum, SlipKind.INDEX_SHIFTED, first - 1, last));
             others.add(sum(sum, SlipKind.INDEX_SHIFTED, first - 1, last - 1));
         }

@@ -39,8 +39,8 @@ record Probe(String variable, List<Rational> points, List<Rational> right, Preci
         if (claim.statement() instanceof Statement.PofK formula) {
             OutputTruth about = truth.about(formula.parts().get(part).output());
             List<Long> steps = LongStream.of(STEPS).map(step -> step + claim.steps().from()).filter(step ->
-                    claim.steps().to().isEmpty() || step <= claim.steps().to().getAsLong()).boxed().toList();
-            return Optional.of(new Probe("k", steps.stream().map(Rational::of).toList(),
+                    step <= Math.min(OutputTruth.EXACT, claim.steps().to().orElse(OutputTruth.EXACT))).boxed().toList();
+            return steps.isEmpty() ? Optional.empty() : Optional.of(new Probe("k", steps.stream().map(Rational::of).toList(),
                     steps.stream().map(about::valueAt).toList(), precision));
         }
         if (claim.statement() instanceof Statement.TransformOf transform) {

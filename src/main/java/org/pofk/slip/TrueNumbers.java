@@ -198,7 +198,8 @@ final class TrueNumbers {
 
         @Override
         public List<TrueNumber> value(Statement.Value value) {
-            return List.of(TrueNumber.of(truth.about(value.output()).valueAt(value.at())));
+            return value.at() > OutputTruth.EXACT ? List.of()
+                    : List.of(TrueNumber.of(truth.about(value.output()).valueAt(value.at())));
         }
 
         @Override
