@@ -127,7 +127,7 @@ class SchemaTest {
 
     @ParameterizedTest
     @ValueSource(strings = {"models/pump-pair", "models/valve-rotation", "models/relined-main",
-        "models/level-controller", "costs/pump-pair"})
+        "models/level-controller", "costs/burst-error-link"})
     void totalsKeepTheirSchema(String model) throws Exception {
         Run run = Run.of("total", "test-data/" + model + ".yaml", "--to", "0,7", "--as", "json");
         assertEquals(0, run.exitCode(), run.notes());

@@ -59,6 +59,7 @@ final class Comparisons {
         BY_KEY.put("at_x_3_5", Comparisons::wholeInstance);
         BY_KEY.put("rational_instance", Comparisons::wholeInstance);
         BY_KEY.putAll(PassageComparisons.BY_KEY);
+        BY_KEY.putAll(TotalComparisons.BY_KEY);
     }
 
     private Comparisons() {
