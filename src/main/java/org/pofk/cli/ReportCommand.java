@@ -97,6 +97,9 @@ final class ReportCommand implements Work {
             return options.undecided(streams);
         }
         Report report = outcome.published().get();
+        if (earlier.isPresent() && report.since().isEmpty()) {
+            streams.notes().println("pofk: what has changed was not reached within the budget");
+        }
         destination.write(Answer.of(() -> ReportDocument.of(report, show.depth, style, options.convention(read)))
                 .with(Format.NOTEBOOK, () -> NotebookWriter.write(report, style, options.convention(read))), streams);
         return code(report, outcome.finished());

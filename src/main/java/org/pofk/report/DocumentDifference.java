@@ -2,8 +2,10 @@ package org.pofk.report;
 
 import java.util.ArrayList;
 import java.util.HashMap;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.Set;
 import java.util.TreeSet;
 import org.pofk.report.Document.Block;
@@ -12,8 +14,9 @@ import org.pofk.report.Document.Heading;
 
 /**
  * Which blocks of a document differ from an earlier one: those outside a longest common subsequence (Wagner and Fischer,
- * 1974) of the blocks below the same headings. A title, the heading of level 1, is no such heading, and no heading is
- * said to differ. Figures are the same where the same is drawn and said. Time is the product of the lengths of the sections compared.
+ * 1974) of the blocks below the same headings, or below one that stands where another is gone. A title, the heading of
+ * level 1, is no such heading, and no heading is said to differ. Figures are the same where the same is drawn and said.
+ * Time is the product of the lengths of the sections compared.
  */
 final class DocumentDifference {
     private DocumentDifference() {
@@ -21,13 +24,24 @@ final class DocumentDifference {
 
     /** The later document, what differs in it marked. */
     static Document marked(Document before, Document after) {
-        Map<List<Object>, List<Integer>> sections = sections(before.blocks());
+        Map<List<Object>, List<Integer>> earlier = sections(before.blocks());
+        Map<List<Object>, List<Integer>> later = sections(after.blocks());
+        Map<List<Object>, List<Integer>> gone = new LinkedHashMap<>(earlier);
+        gone.keySet().removeAll(later.keySet());
         List<Object> was = before.blocks().stream().map(DocumentDifference::shown).toList();
         List<Object> is = after.blocks().stream().map(DocumentDifference::shown).toList();
         Set<Integer> changed = new TreeSet<>();
-        sections(after.blocks()).forEach((headings, places) ->
-                changed.addAll(differing(was, sections.getOrDefault(headings, List.of()), is, places)));
+        later.forEach((headings, places) -> changed.addAll(differing(was, earlier.containsKey(headings)
+                ? earlier.get(headings) : taken(gone, headings), is, places)));
         return after.withChanged(changed);
+    }
+
+    /** Under a new heading the first of the sections that are gone from the same place, for it may bear another name now. */
+    private static List<Integer> taken(Map<List<Object>, List<Integer>> gone, List<Object> headings) {
+        int above = Math.max(0, headings.size() - 2);
+        Optional<List<Object>> other = gone.keySet().stream().filter(each -> each.size() == headings.size()
+                && each.subList(0, above).equals(headings.subList(0, above))).findFirst();
+        return other.map(gone::remove).orElse(List.of());
     }
 
     /** What is equal for blocks that show the same: a figure's certified numbers aren't, but what they look like is. */
@@ -37,7 +51,7 @@ final class DocumentDifference {
 
     /** Places of blocks by the headings they stand below; headings that are there again are counted. */
     private static Map<List<Object>, List<Integer>> sections(List<Block> blocks) {
-        Map<List<Object>, List<Integer>> sections = new HashMap<>();
+        Map<List<Object>, List<Integer>> sections = new LinkedHashMap<>();
         Map<List<Object>, Integer> again = new HashMap<>();
         List<Object> path = List.of();
         List<Heading> headings = new ArrayList<>();

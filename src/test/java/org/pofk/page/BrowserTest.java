@@ -172,6 +172,22 @@ class BrowserTest {
         }
     }
 
+    /** The figure has marks every few hundred thousand steps, the field up to some thousand. */
+    @Test
+    void aStepWithoutAMarkOfItsOwnHasALineAcrossTheFigure() throws Exception {
+        Path page = Files.writeString(folder.resolve("across.html"),
+                HtmlWriter.write(Pages.report(Pages.derived("storage-cavern"))));
+        browser.open(page);
+        String count = "return [document.querySelectorAll('svg line.chosen').length,"
+                + " document.querySelectorAll('svg .chosen > title').length];";
+        for (int k : List.of(0, 5, 1000)) {
+            browser.type("#step-1", String.valueOf(k));
+            JsonNode chosen = browser.run(count);
+            assertEquals(k == 0 ? 0 : 1, chosen.get(0).asInt(), "lines for " + k);
+            assertEquals(k == 0 ? 1 : 0, chosen.get(1).asInt(), "marks for " + k);
+        }
+    }
+
     private static void isExact(Rational value, String shown) {
         Matcher parts = SHOWN.matcher(shown);
         assertTrue(parts.matches(), shown);

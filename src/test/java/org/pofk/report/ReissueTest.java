@@ -5,10 +5,12 @@ import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.HashSet;
 import java.util.List;
+import java.util.Optional;
 import java.util.Set;
 import java.util.stream.IntStream;
 import java.util.stream.Stream;
@@ -17,6 +19,9 @@ import org.pofk.Pofk;
 import org.pofk.answer.DerivedModel;
 import org.pofk.answer.KeyFigures;
 import org.pofk.chain.Model;
+import org.pofk.input.ModelReader;
+import org.pofk.input.Overrides;
+import org.pofk.input.Source;
 import org.pofk.report.Document.Block;
 import org.pofk.report.Document.Heading;
 import org.pofk.report.Document.Labelled;
@@ -95,6 +100,20 @@ class ReissueTest {
         blocks.subList(start + 1, blocks.size()).stream()
                 .takeWhile(block -> !(block instanceof Heading heading && heading.level() <= 2)).forEach(section::add);
         return section;
+    }
+
+    /** Its sections stand under other headings, with the same formulas and all that is said of them. */
+    @Test
+    void anOutputWrittenInAnotherWayIsSaidAndNothingIsMarked() throws Exception {
+        String text = Files.readString(Path.of("test-data/models/pump-pair.yaml"));
+        List<Report> reports = new ArrayList<>();
+        for (String lost : List.of("lost: none", "lost: 1 - both - one")) {
+            reports.add(report(PatternCharts.derived(ModelReader.read(Source.ofText("pumps.yaml",
+                    text.replace("lost: none", lost)), Optional.empty(), Overrides.NONE))));
+        }
+        Document document = document(reports.get(1).since(reports.get(0)));
+        assertEquals(List.of(), document.changed().stream().map(document.blocks()::get).toList());
+        assertTrue(said(section(document.blocks())).contains(List.of("output lost", "none", "1 - both - one")));
     }
 
     @Test
