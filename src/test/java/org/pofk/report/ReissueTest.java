@@ -153,12 +153,16 @@ class ReissueTest {
         Set<List<String>> said = new HashSet<>();
         for (Block block : section) {
             if (block instanceof Table table) {
-                table.rows().forEach(row -> said.add(row.stream().map(TextWidth::text).toList()));
+                table.rows().forEach(row -> said.add(row.stream().map(ReissueTest::plain).toList()));
             } else if (block instanceof Labelled labelled) {
-                said.add(List.of(TextWidth.text(labelled.label()), TextWidth.text(labelled.text())));
+                said.add(List.of(plain(labelled.label()), plain(labelled.text())));
             }
         }
         return said;
+    }
+
+    private static String plain(Prose prose) {
+        return TextWidth.text(prose).replace(Spelling.NO_BREAK, ' ');
     }
 
     @Test
