@@ -8,7 +8,8 @@ import picocli.CommandLine.Option;
 /** How long the work may take. */
 final class BudgetOptions {
     @Option(names = "--budget", paramLabel = "SECONDS",
-            description = "after this time, writes what is proven so far and ends with exit code 4")
+            description = "ends after this time, with exit code 4; writes what is proven by then, a"
+                    + " figure only whole")
     private Optional<Double> seconds = Optional.empty();
 
     /**

@@ -12,6 +12,8 @@ import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
 import org.pofk.chain.ModelChanges;
 import org.pofk.chain.Output;
+import org.pofk.report.CsvWriter;
+import org.pofk.report.DerivationTable;
 import org.pofk.report.NotebookWriter;
 import org.pofk.report.Provenance;
 import org.pofk.report.Report;
@@ -35,7 +37,7 @@ final class ReportCommand implements Work {
     private CommandSpec command;
 
     @Mixin
-    private AnswerOptions options = new AnswerOptions(CommandName.REPORT, Format.NOTEBOOK);
+    private AnswerOptions options = new AnswerOptions(CommandName.REPORT, Format.CSV, Format.NOTEBOOK);
 
     @Option(names = "--of", paramLabel = "NAME",
             description = "an output, a set or a state; repeatable; 'all' for every state")
@@ -101,6 +103,7 @@ final class ReportCommand implements Work {
             streams.notes().println("pofk: what has changed was not reached within the budget");
         }
         destination.write(Answer.of(() -> ReportDocument.of(report, show.depth, style, options.convention(read)))
+                .with(Format.CSV, () -> CsvWriter.write(DerivationTable.of(report.derived(), style.digits())))
                 .with(Format.NOTEBOOK, () -> NotebookWriter.write(report, style, options.convention(read))), streams);
         return code(report, outcome.finished());
     }

@@ -21,6 +21,9 @@ public final class LatexWriter {
     private static final List<String> PACKAGES = List.of("amsmath", "array", "booktabs", "longtable");
     /** Digits on a line of a display. */
     private static final int WIDTH = 70;
+    /** Where only a few lines are left of the page, the next one is begun. */
+    private static final String TOGETHER = "\\vspace{0pt plus 8\\baselineskip}\\pagebreak[2]"
+            + "\\vspace{0pt plus -8\\baselineskip}";
     private static final int LONGEST_UNDERLINED = 30;
 
     private LatexWriter() {
@@ -82,7 +85,9 @@ public final class LatexWriter {
             if (block instanceof Labelled && isFirst) {
                 lines.addAll(List.of("", "\\begin{description}"));
             }
-            List<String> latex = block.accept(writer);
+            List<String> latex = isHeadingOfTable(document.blocks(), i)
+                    ? Stream.concat(Stream.of("", TOGETHER), block.accept(writer).stream()).toList()
+                    : block.accept(writer);
             lines.addAll(isChanged ? LatexChanges.table(latex) : latex);
             if (block instanceof Labelled && isFirst) {
                 lines.add("\\setlength{\\itemsep}{0pt}"); // in front of the label a converter takes it for the text
@@ -96,6 +101,12 @@ public final class LatexWriter {
         }
         requireSettable(lines);
         return lines;
+    }
+
+    /** There LaTeX would end a page, between a heading and a table that begins the next one. */
+    private static boolean isHeadingOfTable(List<Block> blocks, int place) {
+        boolean hasTable = place + 1 < blocks.size() && blocks.get(place + 1) instanceof Document.Table;
+        return hasTable && blocks.get(place) instanceof Document.Heading;
     }
 
     /** Whether a label and the next stand in one list: both have changed, or neither has. */

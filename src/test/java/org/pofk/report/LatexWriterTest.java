@@ -10,20 +10,13 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
-import java.util.EnumSet;
 import java.util.List;
 import java.util.regex.Pattern;
 import java.util.stream.Collectors;
 import java.util.stream.IntStream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
-import org.junit.jupiter.params.ParameterizedTest;
-import org.junit.jupiter.params.provider.ValueSource;
-import org.pofk.Pofk;
 import org.pofk.answer.DerivedModel;
-import org.pofk.answer.Deriving;
-import org.pofk.chain.Model;
-import org.pofk.chain.Outputs;
 import org.pofk.formula.Formula;
 import org.pofk.formula.FormulaParser;
 import org.pofk.page.Installed;
@@ -48,13 +41,6 @@ class LatexWriterTest {
 
     private static Formula formula(String text) throws RefusedException {
         return FormulaParser.parse(text, new Position("test", 1, 1)).formula();
-    }
-
-    private static Document derived(String pattern) throws RefusedException {
-        Model model = Pofk.read(Path.of("test-data", "models", pattern + ".yaml"));
-        DerivedModel derived = Deriving.of(model, Outputs.byDefault(model.chain()), List.of(0, 1, 2, 5),
-                EnumSet.of(Deriving.Extra.COMPARISON, Deriving.Extra.STATE_MODES), published -> { });
-        return DerivationDocument.all(derived, new Style(6, Style.Angles.DEGREES), Model.Convention.COLUMNS);
     }
 
     private static Document everything() throws RefusedException {
@@ -87,12 +73,6 @@ class LatexWriterTest {
         }
         assertTrue(OVERFULL.matcher(log).results().allMatch(found -> Integer.parseInt(found.group(1)) < 5), log);
         assertFalse(log.contains("undefined"), log);
-    }
-
-    @ParameterizedTest
-    @ValueSource(strings = {"pump-pair", "proof-tested-interlock", "tandem-presses", "tunnel-ventilation"})
-    void derivationsCompileWithoutOverfullLines(String pattern) throws Exception {
-        assertCompiles(derived(pattern));
     }
 
     @Test
