@@ -6,6 +6,7 @@ import java.util.Optional;
 import java.util.Set;
 import java.util.TreeSet;
 import java.util.stream.IntStream;
+import org.pofk.answer.ConditionalModel;
 import org.pofk.answer.Given;
 import org.pofk.answer.Known;
 import org.pofk.chain.Chain;
@@ -15,6 +16,7 @@ import org.pofk.report.ConditionalDocument;
 import org.pofk.report.ConditionalJson;
 import org.pofk.report.ConditionalTable;
 import org.pofk.report.CsvWriter;
+import org.pofk.report.Style;
 import org.pofk.text.RefusedException;
 import picocli.CommandLine.Option;
 
@@ -47,6 +49,21 @@ final class GivenOptions {
             throw new UsageException("--given-at takes a step, 0 or later, not " + at.get());
         }
         return at;
+    }
+
+    /** What a report says given that. */
+    List<AskedSection> sections(Model read, List<Output> outputs, List<Integer> steps, Style style)
+            throws UsageException {
+        if (at().isPresent()) {
+            throw new UsageException("a report says what follows from what is known at k itself; derive, when and"
+                    + " passage say what follows from --given-at STEP");
+        }
+        if (!isAsked()) {
+            return List.of();
+        }
+        Given given = given(read.chain());
+        return List.of(new AskedSection(ConditionalDocument.title(given), () -> ConditionalDocument.section(
+                ConditionalModel.of(read, given, outputs, steps, partly -> { }), style)));
     }
 
     /** What is known, of a chain of probabilities. */

@@ -61,6 +61,9 @@ final class ReportCommand implements Work {
     private TotalSections totals = new TotalSections();
 
     @Mixin
+    private GivenOptions given = new GivenOptions();
+
+    @Mixin
     private ClaimsOptions claims = new ClaimsOptions();
 
     @Mixin
@@ -114,6 +117,7 @@ final class ReportCommand implements Work {
         return Stream.of(conditions.sections(read, outputs, style),
                 passage.sections(read.chain(), at.steps(), style),
                 totals.sections(read, at.steps(), style),
+                given.sections(read, outputs, at.steps(), style),
                 claims.sections(read, options.settings())).flatMap(List::stream).toList();
     }
 
@@ -141,6 +145,7 @@ final class ReportCommand implements Work {
         List<AskedSection> sections = new ArrayList<>(conditions.sections(model, outputs, style));
         sections.addAll(whereAsked(() -> passage.sections(chain, at.steps(), style)));
         sections.addAll(whereAsked(() -> totals.sections(model.with(chain), at.steps(), style)));
+        sections.addAll(whereAsked(() -> given.sections(model.with(chain), outputs, at.steps(), style)));
         sections.addAll(whereAsked(() -> claims.sections(model, options.settings())));
         return Optional.of(new AskedReport(model, outputs, sections, at.steps(), extras()));
     }

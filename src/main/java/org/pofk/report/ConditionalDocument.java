@@ -35,6 +35,23 @@ public final class ConditionalDocument {
         return new Document(document.blocks);
     }
 
+    /** The same as a part of a report. */
+    public static ReportSection section(ConditionalModel found, Style style) {
+        ConditionalDocument document = new ConditionalDocument(found, style);
+        document.write();
+        List<Labelled> key = found.outputs().stream().flatMap(output -> output.longRun().stream().map(longRun ->
+                new Labelled(Prose.name(output.joint().output().name()).and(", given ").and(document.given),
+                        Prose.of("long run: ").and(new ConditionalLongRunProse(style.digits()).of(longRun))))).toList();
+        return new ReportSection(ReportSection.Place.RESULTS, title(found.given()), key,
+                document.blocks.stream().map(Document::lowered).toList(),
+                found.isDecided() ? ReportSection.Standing.ANSWERED : ReportSection.Standing.NOT_DECIDED);
+    }
+
+    /** Of the section of a report. */
+    public static Prose title(Given given) {
+        return Prose.of("Given ").and(GivenProse.of(given, "k"));
+    }
+
     /** What is given has probability zero at the step: nothing follows from it. */
     public static Document ofNothing(Model model, Given given, int at) {
         List<Block> blocks = new ArrayList<>(ModelHead.of(model));
