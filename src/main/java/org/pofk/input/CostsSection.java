@@ -9,6 +9,8 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
+import java.util.regex.Matcher;
+import java.util.regex.Pattern;
 import java.util.stream.IntStream;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Costs;
@@ -21,10 +23,12 @@ import org.pofk.text.Position;
 final class CostsSection {
     private static final List<String> KEYS = List.of("unit", "each step in", "each move", "at start", "discount");
     private static final String UNIT = "units";
+    private static final Pattern OF_ACTION = Pattern.compile("each (.+) in");
 
     private final States states;
     private final Map<String, List<Integer>> sets;
     private final MoveFinder moves;
+    private final List<String> actions;
     private final Amounts amounts;
     private final Reading reading;
 
@@ -44,10 +48,13 @@ final class CostsSection {
         }
     }
 
-    CostsSection(States states, Map<String, List<Integer>> sets, MoveFinder moves, Amounts amounts, Reading reading) {
+    /** @param actions the names of the model's actions */
+    CostsSection(States states, Map<String, List<Integer>> sets, MoveFinder moves, List<String> actions,
+            Amounts amounts, Reading reading) {
         this.states = states;
         this.sets = sets;
         this.moves = moves;
+        this.actions = actions;
         this.amounts = amounts;
         this.reading = reading;
     }
@@ -63,7 +70,7 @@ final class CostsSection {
     }
 
     private Costs costs(Node.Mapping mapping) {
-        Fields fields = Fields.of(mapping, "costs", KEYS, reading);
+        Fields fields = Fields.of(withoutActions(mapping), "costs", KEYS, reading);
         if (KEYS.stream().filter(key -> !key.equals("unit") && !key.equals("discount"))
                 .allMatch(key -> fields.value(key).isEmpty())) {
             reading.fault(mapping.position(), "costs-of-nothing", "these costs name no amount; write for example "
@@ -75,6 +82,22 @@ final class CostsSection {
                 fields.value("at start").flatMap(start -> amounts.number(start, "costs at start"))
                         .orElse(Rational.ZERO),
                 fields.value("discount").flatMap(this::discount));
+    }
+
+    /** What actions cost is told apart from an unknown key, and refused: totals know nothing of schedules. */
+    private Node.Mapping withoutActions(Node.Mapping mapping) {
+        List<Node.Entry> others = new ArrayList<>();
+        for (Node.Entry entry : mapping.entries()) {
+            Matcher action = OF_ACTION.matcher(entry.name());
+            if (KEYS.contains(entry.name()) || !action.matches() || !actions.contains(action.group(1))) {
+                others.add(entry);
+            } else {
+                reading.fault(entry.key().position(), "costs-of-actions", "what the action '"
+                        + Words.shortened(action.group(1)) + "' costs isn't added up: totals leave a schedule out of"
+                        + " account; leave this line out");
+            }
+        }
+        return new Node.Mapping(mapping.position(), others);
     }
 
     private List<Rational> eachStep(Node node) {

@@ -79,14 +79,23 @@ public final class ModelReader {
         Optional<Schedule> schedule = ScheduleSections.read(fields, moves.states(), head,
                 new Amounts(section.values(), reading), chain.matrix(), reading);
         Optional<Costs> costs = fields.value("costs").flatMap(node -> new CostsSection(moves.states(), chain.sets(),
-                CostsSection.MoveFinder.of(chain.matrix(), written), new Amounts(section.values(), reading), reading)
-                .read(node, head));
+                CostsSection.MoveFinder.of(chain.matrix(), written), actions(fields),
+                new Amounts(section.values(), reading), reading).read(node, head));
+        if (schedule.isPresent()) {
+            new StartSection(moves.states(), chain.sets(), chain.matrix(), head, new Amounts(section.values(), reading),
+                    reading).refuseLongRun(fields.value("start"));
+        }
         NameClashes.check(root, moves.states(), reading);
         Convention convention = head.convention()
                 .or(() -> moves.orientation().map(Head.Orientation::convention)).orElse(Convention.COLUMNS);
         return Optional.of(new Model(head.title(), head.step(), convention, head.about(), chain, schedule, costs,
                 parameters, reading.remarks(), reading.changes(), written,
                 new Origin(source.name(), source.sha256()), reading.tables()));
+    }
+
+    private static List<String> actions(Fields fields) {
+        return fields.value("actions").flatMap(Node::asMapping).stream().flatMap(each -> each.entries().stream())
+                .map(Node.Entry::name).toList();
     }
 
     private void refuseWithoutStates(Node.Mapping root) {

@@ -57,6 +57,21 @@ final class StartSection {
                 .orElseGet(() -> inState(start.asScalar().orElseThrow()));
     }
 
+    /** A fault where the start is the long run of the moves alone, which a schedule changes. */
+    void refuseLongRun(Optional<Node> written) {
+        Optional<Node.Scalar> named = reading.overrides().start().map(word -> new Node.Scalar(
+                Position.ofWhole(Overrides.START_OPTION), word, Node.Style.QUOTED))
+                .or(() -> written.flatMap(Node::asScalar));
+        Optional<Position> part = reading.overrides().start().isPresent() ? Optional.empty()
+                : written.flatMap(Node::asMapping).stream().flatMap(each -> each.entries().stream())
+                .filter(entry -> entry.name().equals(LONG_RUN_OF) && !states.contains(LONG_RUN_OF))
+                .map(entry -> entry.key().position()).findFirst();
+        named.filter(name -> !states.contains(name.name()) && name.name().startsWith(LONG_RUN)).map(Node::position)
+                .or(() -> part).ifPresent(position -> reading.fault(position, "long-run-with-schedule", "the long run of"
+                + " the moves alone is no start for a model with a schedule, which changes it; name a state, or write"
+                + " the probabilities"));
+    }
+
     /** In a state, or in what a word stands for that names none. */
     private List<Rational> inState(Node.Scalar name) {
         if (head.kind() == Chain.Kind.CHAIN && !states.contains(name.name())) {

@@ -43,7 +43,8 @@ final class DecimalForms {
             return print(OptionalInt.empty(), Optional.empty()).orElseGet(() ->
                     none("to be that close, some number would need more than " + mostDigits + " digits"));
         }
-        String reason = "a pole on or outside the unit circle has no short exact form, and the error of its decimals"
+        String reason = "a number at a pole on or outside the unit circle has no short exact form, and the error of its"
+                + " decimals"
                 + " grows with k";
         for (int lastStep : LAST_STEPS) {
             Optional<DecimalForm> form = print(OptionalInt.of(lastStep), Optional.of(reason));

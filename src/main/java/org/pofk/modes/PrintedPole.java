@@ -6,6 +6,7 @@ import java.util.function.Function;
 import org.pofk.exact.Ball;
 import org.pofk.exact.Rational;
 import org.pofk.formula.Formula;
+import org.pofk.formula.PlainText;
 
 /**
  * The modes of one pole (a real one, or a conjugate pair), to be written in decimals, each number with as many digits
@@ -14,6 +15,8 @@ import org.pofk.formula.Formula;
  * at most n |θ − θ̃| + |φ − φ̃|.
  */
 final class PrintedPole {
+    private static final int EXACT_SHOWN_UP_TO = 60;
+
     private static final int SIZE_BITS = 48;
     /** A pole that isn't proved to lie inside the unit circle with this many bits counts as not inside. */
     private static final int MOST_BITS = 4_096;
@@ -77,8 +80,10 @@ final class PrintedPole {
                         .anyMatch(value -> isMissing(value, amplification(term.power()).ofCoefficient()))));
     }
 
+    /** An exact form longer than most of a line is none that is read. */
     private static boolean isMissing(RealValue value, Optional<Rational> weight) {
-        return weight.isEmpty() && value.exact().isEmpty();
+        return weight.isEmpty() && value.exact()
+                .filter(exact -> PlainText.UNICODE.write(exact).length() <= EXACT_SHOWN_UP_TO).isEmpty();
     }
 
     /** Σ over the powers of |C_p| · what one unit of error in the pole does; empty where that has no bound. */

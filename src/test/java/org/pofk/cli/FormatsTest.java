@@ -25,7 +25,9 @@ class FormatsTest {
     @ValueSource(strings = {"derive test-data/models/pump-pair.yaml", "inspect test-data/models/pump-pair.yaml",
         "simulate test-data/models/pump-pair.yaml --runs 100", "check test-data/claims/pump-pair.yaml",
         "when test-data/models/pump-pair.yaml --of lost --at-least 0.005",
-        "passage test-data/models/pump-pair.yaml --into none"})
+        "passage test-data/models/pump-pair.yaml --into none",
+        "total test-data/costs/burst-error-link.yaml --to 0,7",
+        "derive test-data/models/burst-error-link.yaml --start each"})
     void everyCommandThatShowsADocumentWritesItInEveryFormat(String command) {
         Run page = run(command, "--as", "html");
         assertTrue(page.answer().startsWith("<!DOCTYPE html>") && page.answer().endsWith("</html>\n"), page.notes());
