@@ -180,8 +180,8 @@ public final class ScheduledDocument {
                     .and("(" + (formula.from() == 0 ? "j)" : formula.from() + " + j)"));
             String cycle = formula.cycle() == StretchFormula.Cycle.FIRST ? "in the first cycle" : "in the long run";
             formulas.add(formula.closedForm(), left, Prose.of(cycle + ", 0 ≤ j ≤ " + steps)
-                    .and(isActed(formula.to()) ? Prose.of(", at " + steps + " before ").and(done(formula.to()))
-                            : Prose.EMPTY));
+                    .and(isActed(formula.to()) ? Prose.of("; j = " + steps + " is just before ")
+                            .and(done(formula.to())) : Prose.EMPTY));
         }
         blocks.addAll(formulas.blocks());
     }

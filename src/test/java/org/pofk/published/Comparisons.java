@@ -60,6 +60,7 @@ final class Comparisons {
         BY_KEY.put("rational_instance", Comparisons::wholeInstance);
         BY_KEY.putAll(PassageComparisons.BY_KEY);
         BY_KEY.putAll(TotalComparisons.BY_KEY);
+        BY_KEY.putAll(InspectionComparisons.BY_KEY);
     }
 
     private Comparisons() {
