@@ -48,8 +48,8 @@ final class SourceBlocks {
         Heading heading = new Heading(3, "Numbers without a source");
         return open.isEmpty() ? List.of(heading, new Paragraph("None: every number of the moves and every parameter"
                 + " names one, or follows from those that do."))
-                : open.size() > LISTED_UP_TO ? List.of(heading, new Paragraph("The moves out of " + open.size()
-                        + " states and parameters name none; too many to be listed here."))
+                : open.size() > LISTED_UP_TO ? List.of(heading, new Paragraph("In " + open.size() + " entries of the"
+                        + " model file, states with their moves and parameters; too many to be listed here."))
                 : List.of(heading, new Items(open));
     }
 
