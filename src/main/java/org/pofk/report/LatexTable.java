@@ -119,7 +119,7 @@ final class LatexTable {
         lines.add("\\midrule");
         lines.add("\\endhead");
         lines.add("\\bottomrule");
-        lines.add("\\endfoot{}"); // a converter takes a number that follows for a part of the command
+        lines.add("\\endfoot{}%"); // a converter takes a number that follows for a part of the command
         for (int i = 0; i < rows; i++) {
             int row = i;
             lines.add(row(group.stream().map(column -> column.isBroken() ? broken(column.cells.get(row))
