@@ -4,6 +4,7 @@ package org.pofk.slip;
 public enum SlipKind {
     SIGN_OF_A_TERM("the sign of a term is wrong"),
     SIGN_OF_A_POLE("the sign of a negative pole is lost"),
+    ROUNDED_TO_THE_UNSAFE_SIDE("a number is rounded to the side that isn't safe"),
     Z_LOST("the z of the transform is lost"),
     Z_DOUBLED("the z of the transform is there twice"),
     PAIR_NOT_DOUBLED("a conjugate pair isn't doubled: amplitude |R| instead of 2|R|"),
@@ -32,7 +33,6 @@ public enum SlipKind {
     DIGITS_TRANSPOSED("digits are transposed"),
     DECIMAL_POINT_MOVED("the decimal point is moved"),
     ROUNDED_TOO_EARLY("a number is rounded too early"),
-    ROUNDED_TO_THE_UNSAFE_SIDE("a number is rounded to the side that isn't safe"),
     EIGENVECTOR_NOT_SCALED("the eigenvector isn't scaled to sum to one"),
     MATRIX_TRANSPOSED("the matrix is transposed"),
     START_MISREAD("another start is used"),

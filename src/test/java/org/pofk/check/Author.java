@@ -131,6 +131,14 @@ final class Author {
                 Arbiter.number(text, Near.of(subject.steps().value(output, at))));
     }
 
+    /** A value that is meant to be above the true one, and isn't. */
+    Claimed estimate(Output output, int at, String text) {
+        BigDecimal truth = subject.values(output).get(at).real();
+        return claim("estimate", Claimed.line("value", Claimed.quoted(output.name()), "at", "" + at, "is",
+                Claimed.quoted(text), "within", "0.02", "safe side", "above"),
+                units -> new BigDecimal(text).compareTo(truth) < 0);
+    }
+
     /** The poles of Y(z) with their multiplicities. */
     Optional<Claimed> poles(Output output, Output written, Style style) {
         return Optional.of(poles(output, poleTexts(written, style), style));
@@ -173,26 +181,31 @@ final class Author {
     /** Coefficients by pole; only of outputs without impulses. */
     Optional<Claimed> residues(Output output, Style style) {
         Modes modes = believed.modes(output);
-        if (!modes.impulses().isEmpty()) {
-            return Optional.empty();
-        }
+        return modes.impulses().isEmpty() ? Optional.of(residues(output, modes.poles(), style)) : Optional.empty();
+    }
+
+    /** Stated for these poles, in the order of the true ones. */
+    Claimed residues(Output output, List<Pole> poles, Style style) {
         Map<String, String> entries = new LinkedHashMap<>();
         List<Function<String, Boolean>> checks = new ArrayList<>();
-        for (Pole pole : modes.poles()) {
+        for (int place = 0; place < poles.size(); place++) {
+            Pole pole = poles.get(place);
+            List<Num> truth = subject.modes(output).poles().get(place).coefficients();
             for (int side = 1; side >= (pole.isReal() ? 1 : -1); side -= 2) {
                 List<String> coefficients = new ArrayList<>();
-                for (Num coefficient : pole.coefficients()) {
+                for (int power = 0; power < pole.coefficients().size(); power++) {
+                    Num coefficient = pole.coefficients().get(power);
                     String text = coefficient.isNothing() ? "0" : complexText(coefficient, side, style);
                     coefficients.add(Claimed.quoted(text));
-                    Near value = coefficient.value().widened(BigDecimal.ONE.movePointLeft(50));
+                    Near value = truth.get(power).value().widened(BigDecimal.ONE.movePointLeft(50));
                     checks.add(Arbiter.number(text, side > 0 ? value : value.conjugate()));
                 }
                 entries.put(complexText(pole.lambda(), side, style),
                         coefficients.size() == 1 ? coefficients.get(0) : coefficients.toString());
             }
         }
-        return Optional.of(claim("residues " + style.kind(), Claimed.line("residues", Claimed.quoted(output.name()),
-                "are", Claimed.mapping(entries)), Arbiter.some(checks)));
+        return claim("residues " + style.kind(), Claimed.line("residues", Claimed.quoted(output.name()),
+                "are", Claimed.mapping(entries)), Arbiter.some(checks));
     }
 
     private String complexText(Num value, int side, Style style) {

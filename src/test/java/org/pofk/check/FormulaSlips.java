@@ -19,7 +19,8 @@ final class FormulaSlips {
             SlipKind.PAIR_DOUBLED_TWICE, SlipKind.SIGN_OF_THE_PHASE, SlipKind.DEGREES_AS_RADIANS,
             SlipKind.RADIANS_AS_DEGREES, SlipKind.SINE_FOR_COSINE, SlipKind.COSINE_FOR_SINE, SlipKind.INDEX_SHIFTED,
             SlipKind.COEFFICIENTS_SWAPPED, SlipKind.IMPULSE_MISSING, SlipKind.TERM_MISSING,
-            SlipKind.REPEATED_POLE_AS_SIMPLE, SlipKind.POWER_NOT_LOWERED, SlipKind.DIGITS_TRANSPOSED,
+            SlipKind.REPEATED_POLE_AS_SIMPLE, SlipKind.POWER_NOT_LOWERED, SlipKind.POWER_FOR_BINOMIAL,
+            SlipKind.SIGN_OF_A_POLE, SlipKind.DIGITS_TRANSPOSED,
             SlipKind.DECIMAL_POINT_MOVED, SlipKind.ROUNDED_TOO_EARLY, SlipKind.WRONG_POLE, SlipKind.WRONG_COEFFICIENT);
     /** The slips that are put into transforms. */
     static final List<SlipKind> IN_Z = List.of(SlipKind.SIGN_OF_A_TERM, SlipKind.Z_LOST, SlipKind.Z_DOUBLED,
@@ -58,6 +59,12 @@ final class FormulaSlips {
             case IMPULSE_MISSING -> withoutTerm(token -> token.plain().equals("delta(k)"));
             case TERM_MISSING -> withoutTerm(token -> token.role() == Role.SIGN && !isImpulseAtStart(token.term()));
             case REPEATED_POLE_AS_SIMPLE -> asSimple();
+            case POWER_FOR_BINOMIAL -> exchangedOne(token -> token.role() == Role.BINOMIAL
+                    && List.of("k*(k-1)/2", "binomial(k, 2)").contains(token.plain()),
+                    token -> Token.of(Role.BINOMIAL, token.term(), "k^2/2", "\\frac{k^2}{2}"));
+            case SIGN_OF_A_POLE -> exchangedOne(token -> token.role() == Role.OTHER && token.plain().equals("(-")
+                    && tokens.get(tokens.indexOf(token) + 1).role() == Role.BASE,
+                    token -> Token.of(Role.OTHER, token.term(), "(", "\\left("));
             case POWER_NOT_LOWERED -> exchangedOne(token -> token.role() == Role.EXPONENT
                     && token.plain().matches("\\(k-[1-9]\\)") && hasFactorInK(token.term()),
                     token -> Token.of(Role.EXPONENT, token.term(), "k", "{k}"));

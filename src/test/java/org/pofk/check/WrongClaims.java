@@ -78,6 +78,7 @@ final class WrongClaims {
 
     private static List<Notation> notationsFor(SlipKind kind) {
         return switch (kind) {
+            case SIGN_OF_A_POLE -> List.of(Notation.PLAIN, Notation.SHUFFLED);
             case PAIR_NOT_DOUBLED, PAIR_DOUBLED_TWICE -> List.of(Notation.PLAIN, Notation.SHUFFLED, Notation.DEGREES);
             case DEGREES_AS_RADIANS -> List.of(Notation.DEGREES);
             case COSINE_FOR_SINE -> List.of(Notation.SINE_AND_COSINE, Notation.OTHER_PHASE);

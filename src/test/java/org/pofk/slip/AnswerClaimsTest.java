@@ -14,6 +14,9 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import org.pofk.Pofk;
+import org.pofk.answer.Increment;
+import org.pofk.answer.StepValue;
+import org.pofk.answer.Total;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Output;
 import org.pofk.chain.Outputs;
@@ -161,6 +164,23 @@ class AnswerClaimsTest {
             }
         }
         assertTrue(compared > 80 && settled > 20, compared + " compared, " + settled + " settled");
+    }
+
+    /** What a claim's sum is held against is the total that the command for totals gives. */
+    @Test
+    void totalsSayTheSame() throws Exception {
+        Chain chain = Pofk.read(Path.of("test-data/models/pump-pair.yaml")).chain();
+        Truth truth = Truth.of(chain);
+        int compared = 0;
+        for (Output output : Outputs.states(chain)) {
+            Total total = Total.of(chain, Increment.ofOutput(output), List.of(0, 7, 30));
+            for (StepValue value : total.total().values()) {
+                assertEquals(value.exact().orElseThrow(),
+                        truth.answer(new AnswerOf.Sum(output, 0, value.k(), text())).low(), output.name());
+                compared++;
+            }
+        }
+        assertEquals(9, compared);
     }
 
     private static List<Rational> values(Truth truth, Output output) {
