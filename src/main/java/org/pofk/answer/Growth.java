@@ -2,6 +2,7 @@ package org.pofk.answer;
 
 import java.util.List;
 import java.util.Optional;
+import org.pofk.chain.Chain;
 import org.pofk.chain.Structure;
 import org.pofk.exact.Factoring;
 import org.pofk.exact.Polynomial;
@@ -29,17 +30,18 @@ public record Growth(Rational perStep, LongRun beyond) {
                 : new LongRun.None(LongRun.Reason.GROWS, Optional.empty(), "grows like k");
     }
 
-    /** Of a chain, whose reached closed classes alone leave poles on the unit circle. */
-    static Growth ofChain(Structure structure, LongRun step, TransferFunction<Rational> total) {
-        Rational perStep = Average.of(step).orElse(Rational.ZERO);
-        return new Growth(perStep, LongRunByPoles.ofChain(structure, without(perStep, total)));
-    }
-
-    /** Of any recursion. */
-    static Growth ofRecursion(LongRun step, TransferFunction<Rational> total) {
+    /**
+     * Of a total over a chain, whose reached closed classes alone leave poles on the unit circle, or over a recursion.
+     *
+     * @param step  what a step adds in the long run
+     * @param total the transform of the total
+     */
+    static Growth of(Chain chain, LongRun step, TransferFunction<Rational> total) {
         Rational perStep = Average.of(step).orElse(Rational.ZERO);
         TransferFunction<Rational> beyond = without(perStep, total);
-        return new Growth(perStep, LongRunByPoles.ofRecursion(beyond, Factoring.of(beyond.denominator())));
+        return new Growth(perStep, chain.kind() == Chain.Kind.CHAIN
+                ? LongRunByPoles.ofChain(Structure.of(chain), beyond)
+                : LongRunByPoles.ofRecursion(beyond, Factoring.of(beyond.denominator())));
     }
 
     /** G(k) − perStep · k: perStep · z/(z−1)² less. */

@@ -3,10 +3,7 @@ package org.pofk.answer;
 import java.math.BigInteger;
 import java.util.List;
 import java.util.Optional;
-import java.util.stream.IntStream;
 import org.pofk.chain.Chain;
-import org.pofk.chain.Output;
-import org.pofk.chain.Structure;
 import org.pofk.exact.Enclosed;
 import org.pofk.exact.Rational;
 import org.pofk.modes.ClosedForm;
@@ -39,23 +36,20 @@ public record Total(Increment increment, Rational factor, SummedChain summed, De
     /** The same where what step k adds counts v^k of it. */
     public static Total of(Chain chain, Increment increment, Rational factor, List<Integer> steps) {
         SummedChain summed = SummedChain.of(chain, increment, factor);
-        List<Output> outputs = List.of(summed.step(), summed.total());
-        List<Transform> transforms = Transforms.of(summed.recursion(), outputs);
-        Structure structure = Structure.of(chain);
-        LongRun stepLongRun = chain.kind() == Chain.Kind.CHAIN
-                ? LongRunByPoles.ofChain(structure, transforms.get(0).y()) : LongRun.of(transforms.get(0));
-        Growth growth = chain.kind() == Chain.Kind.CHAIN
-                ? Growth.ofChain(structure, stepLongRun, transforms.get(1).y())
-                : Growth.ofRecursion(stepLongRun, transforms.get(1).y());
+        List<Transform> transforms = Transforms.of(summed.recursion(), List.of(summed.step(), summed.total()));
+        LongRun ofStep = LongRun.of(chain, transforms.get(0));
+        Growth growth = Growth.of(chain, ofStep, transforms.get(1).y());
         KnownPoles poles = new KnownPoles(() -> Eigenvalues.guesses(summed.recursion().matrix()));
         List<ClosedForm> forms = transforms.stream().map(transform -> ClosedForm.of(transform, poles)).toList();
         List<List<StepValue>> values = StepValues.of(summed.recursion(), forms, steps);
-        List<LongRun> longRuns = List.of(stepLongRun, growth.longRun());
-        List<DerivedOutput> derived = IntStream.range(0, 2).mapToObj(i -> DerivedOutput.of(outputs.get(i))
-                .with(transforms.get(i)).with(forms.get(i)).with(values.get(i)).with(new LongRunChecks(longRuns.get(i),
-                        Optional.empty(), Optional.empty(), BigInteger.ONE))).toList();
-        return new Total(increment, factor, summed, derived.get(0), derived.get(1), growth,
+        return new Total(increment, factor, summed, derived(forms.get(0), ofStep, values.get(0)),
+                derived(forms.get(1), growth.longRun(), values.get(1)), growth,
                 values.get(1).stream().map(Total::average).toList());
+    }
+
+    private static DerivedOutput derived(ClosedForm form, LongRun longRun, List<StepValue> values) {
+        return DerivedOutput.of(form.transform().output()).with(form.transform()).with(form).with(values)
+                .with(new LongRunChecks(longRun, Optional.empty(), Optional.empty(), BigInteger.ONE));
     }
 
     private static StepValue average(StepValue total) {

@@ -30,6 +30,7 @@ import org.pofk.report.GivenProse;
 import org.pofk.report.NotebookWriter;
 import org.pofk.report.PowerDocument;
 import org.pofk.report.PowerJson;
+import org.pofk.report.PowerTable;
 import org.pofk.report.StructureDocument;
 import org.pofk.report.StructureJson;
 import org.pofk.report.Style;
@@ -151,7 +152,7 @@ final class DeriveCommand implements Work {
         PowerModel found = outcome.published().get();
         destination.write(Answer.of(() -> PowerDocument.of(found, style))
                 .with(Format.JSON, () -> PowerJson.write(found, style.digits()))
-                .with(Format.CSV, () -> CsvWriter.write(PowerJson.table(found, style.digits()))), streams);
+                .with(Format.CSV, () -> CsvWriter.write(PowerTable.of(found, style.digits()))), streams);
         return found.isComplete() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
     }
 
