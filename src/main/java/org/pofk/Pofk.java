@@ -5,7 +5,10 @@ import java.util.EnumSet;
 import java.util.List;
 import org.pofk.answer.DerivedModel;
 import org.pofk.answer.Deriving;
+import org.pofk.answer.Increment;
 import org.pofk.answer.InspectedModel;
+import org.pofk.answer.PowerModel;
+import org.pofk.answer.TotalModel;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
 import org.pofk.chain.Outputs;
@@ -32,6 +35,22 @@ public final class Pofk {
     /** Formulas, long runs and comparisons of these outputs. */
     public static DerivedModel derive(Model model, List<Output> outputs) {
         return Deriving.of(model, outputs, List.of(), EnumSet.of(Deriving.Extra.COMPARISON), published -> { });
+    }
+
+    /** What these outputs add up to over the steps 0 … k, for a state or a set the steps spent there, in every k. */
+    public static TotalModel totals(Model model, List<Output> outputs, List<Integer> steps) {
+        return TotalModel.of(model, outputs.stream().map(output ->
+                TotalModel.Asked.of(Increment.of(model.chain(), output))).toList(), steps, published -> { });
+    }
+
+    /** What the costs of a model add up to, and what is left of them discounted; nothing where it names none. */
+    public static TotalModel costs(Model model, List<Integer> steps) {
+        return TotalModel.of(model, TotalModel.costs(model), steps, published -> { });
+    }
+
+    /** These outputs from every state in turn: for all states the entries of A^k. */
+    public static PowerModel powers(Model model, List<Output> outputs) {
+        return PowerModel.of(model, outputs, List.of(), published -> { });
     }
 
     /** Structure, long runs and a reviewer's questions. */

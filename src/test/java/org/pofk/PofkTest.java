@@ -28,6 +28,17 @@ class PofkTest {
     }
 
     @Test
+    void totalsCostsAndPowersAreAsked() throws RefusedException {
+        Model link = Pofk.read(Path.of("test-data/costs/burst-error-link.yaml"));
+        // a burst begins in 1/50 of the clear hours and lasts 4 hours: 2/27 of the time
+        assertEquals(Rational.of(2, 27),
+                Pofk.totals(link, Pofk.outputs(link, "fading"), List.of()).totals().get(0).growth().perStep());
+        // 2/27 of 120 and 25/27 · 1/50 of 300
+        assertEquals(Rational.of(130, 9), Pofk.costs(link, List.of()).totals().get(0).growth().perStep());
+        assertEquals(2, Pofk.powers(link, Pofk.outputs(link, "fading")).found().get(0).byStart().size());
+    }
+
+    @Test
     void aNameThatStandsForNothingIsRefused() throws RefusedException {
         Model model = Pofk.read(PUMPS);
         assertThrows(RefusedException.class, () -> Pofk.outputs(model, "lots"));

@@ -33,6 +33,11 @@ public record Increment(Kind kind, String name, String definition, List<Rational
         byMove = List.copyOf(byMove);
     }
 
+    /** The value of an output at the end of each step. */
+    public static Increment of(Chain chain, Output output) {
+        return chain.kind() == Chain.Kind.CHAIN ? ofOutput(output) : ofValues(output);
+    }
+
     /** The value of a chain's output at the end of each step: for a state or a set, the steps spent there. */
     public static Increment ofOutput(Output output) {
         return ofOutput(isSet(output) ? Kind.STEPS : Kind.VALUES, output);

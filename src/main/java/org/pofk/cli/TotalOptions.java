@@ -60,10 +60,7 @@ final class TotalOptions {
     }
 
     private Increment increment(Chain chain, Output output) throws UsageException {
-        if (entries) {
-            return entries(chain, output);
-        }
-        return chain.kind() == Chain.Kind.CHAIN ? Increment.ofOutput(output) : Increment.ofValues(output);
+        return entries ? entries(chain, output) : Increment.of(chain, output);
     }
 
     static Increment entries(Chain chain, Output output) throws UsageException {

@@ -4,7 +4,6 @@ import java.util.ArrayList;
 import java.util.List;
 import org.pofk.answer.Increment;
 import org.pofk.answer.TotalModel;
-import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
 import org.pofk.report.Prose;
@@ -27,8 +26,7 @@ final class TotalSections {
         List<TotalModel.Asked> asked = new ArrayList<>();
         if (!names.isEmpty()) {
             for (Output output : AskedOutputs.of(read.chain(), names)) {
-                asked.add(TotalModel.Asked.of(read.chain().kind() == Chain.Kind.CHAIN ? Increment.ofOutput(output)
-                        : Increment.ofValues(output)));
+                asked.add(TotalModel.Asked.of(Increment.of(read.chain(), output)));
             }
         }
         if (!entered.isEmpty()) {
