@@ -8,12 +8,14 @@ import java.util.Map;
 /** The figures of a document in LaTeX: in the text, or in files of their own. */
 public final class LatexFigures {
     /**
-     * Both commands are known to LaTeX, which passes their definitions over; to a converter that doesn't know them they
-     * say that a number stands behind its equation, and that of a figure's files it takes the PNG.
+     * All these commands are known to LaTeX, which passes their definitions over; to a converter that doesn't know them
+     * they say that a number stands behind its equation, that of a figure's files it takes the PNG, and that places
+     * for the end of a line are nothing.
      */
     static final List<String> FOR_CONVERTERS = List.of(
             "% For converters to other formats; LaTeX has these commands and passes over what they would be.",
-            "\\providecommand{\\tag}[1]{\\qquad\\text{(#1)}}", "\\providecommand{\\empty}{.png}");
+            "\\providecommand{\\tag}[1]{\\qquad\\text{(#1)}}", "\\providecommand{\\empty}{.png}",
+            "\\providecommand{\\allowbreak}{}");
 
     private LatexFigures() {
     }

@@ -27,10 +27,10 @@ class FigureFilesTest {
     @TempDir
     private Path folder;
 
-    private Path report(String pattern) {
+    private Path report(String pattern, String depth) {
         Installed.require("pdflatex", "figures of LaTeX aren't made files");
         Path article = folder.resolve("A report_1.tex");
-        Run run = Run.of("report", "test-data/models/" + pattern + ".yaml", "--show", "brief", "--save", article.toString(),
+        Run run = Run.of("report", "test-data/models/" + pattern + ".yaml", "--show", depth, "--save", article.toString(),
                 "--figures", "files");
         assertEquals(0, run.exitCode(), run.notes());
         return article;
@@ -51,7 +51,7 @@ class FigureFilesTest {
 
     @Test
     void everyFigureIsThereTwiceAndLatexTakesThePdf() throws Exception {
-        Path article = report("pump-pair");
+        Path article = report("pump-pair", "brief");
         String latex = Files.readString(article);
         long figures = Pattern.compile("\\\\includegraphics").matcher(latex).results().count();
         assertTrue(figures > 0);
@@ -69,11 +69,11 @@ class FigureFilesTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"pump-pair", "level-controller"})
+    @ValueSource(strings = {"pump-pair", "tandem-presses"})
     void aConverterMakesEveryEquationOneThatCanBeEditedWithItsNumberAndTakesTheFiguresAlong(String pattern)
             throws Exception {
         Installed.require("pandoc", "LaTeX isn't made a document of a word processor");
-        Path article = report(pattern);
+        Path article = report(pattern, "full");
         String latex = Files.readString(article);
         assertEquals("", run("pandoc", article.getFileName().toString(), "-o", "report.docx"));
         run("pandoc", "report.docx", "-t", "json", "-o", "report.json", "--extract-media=media");
