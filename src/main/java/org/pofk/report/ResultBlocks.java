@@ -150,6 +150,10 @@ final class ResultBlocks {
     private void holds(Transform transform) {
         RecurrenceProof proof = transform.proof();
         int order = transform.recurrence().degree();
+        if (proof.order() == 0) {
+            label("holds", "for every k ≥ 0: nothing that the start reaches takes part");
+            return;
+        }
         String from = "for every k ≥ 0" + output.closedForm().filter(form -> form.withoutImpulsesFrom() > 0)
                 .map(form -> ", without the delta terms from k = " + form.withoutImpulsesFrom() + " on").orElse("");
         label("holds", from + ": " + switch (proof.method()) {
