@@ -34,7 +34,9 @@ final class OtherTruths {
 
     /** All that a claim may be true of; {@code right} is what it should say. */
     List<Candidate> of(Claim claim, String right) {
-        if (StatementPart.of(claim.statement()).isEmpty()) {
+        // a small whole number is right of many a chain, and so explains nothing
+        boolean isStep = claim.statement() instanceof AnswerOf.SettlingStep;
+        if (isStep || StatementPart.of(claim.statement()).isEmpty()) {
             return List.of();
         }
         List<Candidate> candidates = new ArrayList<>();

@@ -67,6 +67,7 @@ class AnswerClaimsTest {
             {settling step: lost, within: 1%, is: 7}                                | EXACT       |
             {settling step: lost, within: 0.0001, is: 7}                            | EXACT       |
             {settling step: lost, within: 1%, is: 6}                                | WRONG       | INDEX_SHIFTED
+            {settling step: lost, within: 2%, is: 4}                                | WRONG       | WRONG_COEFFICIENT
             {settling step: lost, within: 1%, is: 70}                               | WRONG       | DECIMAL_POINT_MOVED
             {mean passage: all, into: none, is: 14300/69}                           | EXACT       |
             {mean passage: all, into: none, is: 207.2}                              | ROUNDED     |
