@@ -8,6 +8,8 @@ import org.pofk.answer.Deriving;
 import org.pofk.answer.Increment;
 import org.pofk.answer.InspectedModel;
 import org.pofk.answer.PowerModel;
+import org.pofk.answer.ScheduledModel;
+import org.pofk.answer.Scheduling;
 import org.pofk.answer.TotalModel;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
@@ -39,22 +41,35 @@ public final class Pofk {
 
     /** What these outputs add up to over the steps 0 … k, for a state or a set the steps spent there, in every k. */
     public static TotalModel totals(Model model, List<Output> outputs, List<Integer> steps) {
-        return TotalModel.of(model, outputs.stream().map(output ->
+        return TotalModel.of(unscheduled(model), outputs.stream().map(output ->
                 TotalModel.Asked.of(Increment.of(model.chain(), output))).toList(), steps, published -> { });
     }
 
     /** What the costs of a model add up to, and what is left of them discounted; nothing where it names none. */
     public static TotalModel costs(Model model, List<Integer> steps) {
-        return TotalModel.of(model, TotalModel.costs(model), steps, published -> { });
+        return TotalModel.of(unscheduled(model), TotalModel.costs(model), steps, published -> { });
     }
 
     /** These outputs from every state in turn: for all states the entries of A^k. */
     public static PowerModel powers(Model model, List<Output> outputs) {
-        return PowerModel.of(model, outputs, List.of(), published -> { });
+        return PowerModel.of(unscheduled(model), outputs, List.of(), published -> { });
+    }
+
+    /** Formulas of a model with inspections or phases: its cycles, what they tend to, formulas within and over them. */
+    public static ScheduledModel schedule(Model model, List<Output> outputs) {
+        return Scheduling.of(model, outputs, List.of(), Scheduling.Formulas.WITHIN_REACH, published -> { });
     }
 
     /** Structure, long runs and a reviewer's questions. */
     public static InspectedModel inspect(Model model) {
         return InspectedModel.of(model, Outputs.byDefault(model.chain()));
+    }
+
+    /** Answers that know nothing of schedules must not leave one out of account. */
+    private static Model unscheduled(Model model) {
+        if (model.schedule().isPresent()) {
+            throw new IllegalArgumentException(model.origin() + " has a schedule, of which this answer knows nothing");
+        }
+        return model;
     }
 }

@@ -53,6 +53,12 @@ final class ScheduleProse {
         return before + cycles + (timetable.period() == 1 || j.isEmpty() ? "" : " + " + j);
     }
 
+    /** Step j of cycle m as a formula in m: {@code 17 + 12 m}, {@code 12 m + 5}. */
+    static String stepOf(Timetable timetable, int j) {
+        return timetable.before() == 0 ? step(timetable, "m", j == 0 ? "" : String.valueOf(j))
+                : timetable.before() + j + " + " + (timetable.period() == 1 ? "m" : timetable.period() + " m");
+    }
+
     static String steps(int count) {
         return count == 1 ? "1 step" : count + " steps";
     }

@@ -205,7 +205,7 @@ public final class ScheduledDocument {
         for (CycleFormula formula : output.over()) {
             Prose name = Prose.name(output.output().name());
             formulas.add(formula.closedForm(), formula.place().map(place -> name.and("("
-                    + ScheduleProse.step(timetable, "m", place.j() == 0 ? "" : String.valueOf(place.j())) + ")"))
+                    + ScheduleProse.stepOf(timetable, place.j()) + ")"))
                     .orElse(Prose.of("mean of ").and(name).and(" over cycle m")),
                     Prose.of("m ≥ 0").and(formula.place().map(this::side).orElse(Prose.EMPTY)));
         }
