@@ -39,7 +39,7 @@ final class ScheduleProse {
     }
 
     private static String cycle(Timetable timetable) {
-        String step = step(timetable, "m", "j");
+        String step = step(timetable, "m", timetable.period() == 1 ? "" : "j");
         return steps(timetable.period()) + (timetable.before() == 0 ? ", from the start on"
                 : ", the first after step " + timetable.before()) + "; k = " + step + " is "
                 + (timetable.period() == 1 ? "the end of step m of them"
@@ -50,7 +50,7 @@ final class ScheduleProse {
     static String step(Timetable timetable, String m, String j) {
         String before = timetable.before() == 0 ? "" : timetable.before() + " + ";
         String cycles = timetable.period() == 1 ? m : timetable.period() + " " + m;
-        return before + cycles + (timetable.period() == 1 || j.isEmpty() ? "" : " + " + j);
+        return before + cycles + (j.isEmpty() ? "" : " + " + j);
     }
 
     /** Step j of cycle m as a formula in m: {@code 17 + 12 m}, {@code 12 m + 5}. */

@@ -91,7 +91,7 @@ public final class ScheduledDocument {
         regime.accept(new PeriodicRegime.Visitor<Void>() {
             @Override
             public Void recurring(PeriodicRegime.Recurring recurring) {
-                if (recurring.course().steps() == 1) {
+                if (recurring.course().steps() == 1 && !isActed(1)) {
                     blocks.add(new Labelled("in the long run", "tends to "
                             + KnownText.withFraction(recurring.course().average(), style.digits())
                             + word(recurring.course())));
@@ -232,7 +232,7 @@ public final class ScheduledDocument {
         int order = output.over().get(0).closedForm().transform().recurrence().degree();
         String states = proof.order() == 1 ? "one state takes part" : proof.order() + " states take part";
         blocks.add(new Labelled("holds", "for every cycle: with S, the matrix of a whole cycle, x("
-                + ScheduleProse.step(timetable, "(m+1)", "") + ") = S x(" + ScheduleProse.step(timetable, "m", "")
+                + ScheduleProse.step(timetable, timetable.period() == 1 ? "m+1" : "(m+1)", "") + ") = S x(" + ScheduleProse.step(timetable, "m", "")
                 + "), " + switch (proof.method()) {
                     case CHARACTERISTIC -> "the sequence in m needs a recurrence of order " + order + ", and " + states
                             + ", so it is their characteristic polynomial (Cayley–Hamilton)";
