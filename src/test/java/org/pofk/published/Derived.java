@@ -59,6 +59,13 @@ final class Derived {
                 chain.sets(), chain.outputs()));
     }
 
+    /** The same case with another value for a parameter. */
+    Derived with(String parameter, Rational value) {
+        Map<String, Rational> other = new TreeMap<>(sample);
+        other.put(parameter, value);
+        return new Derived(published, other);
+    }
+
     Chain chain() {
         return chain;
     }

@@ -1,6 +1,7 @@
 package org.pofk.published;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import com.fasterxml.jackson.databind.JsonNode;
 import java.util.ArrayList;
@@ -13,6 +14,7 @@ import java.util.TreeSet;
 import java.util.function.BiConsumer;
 import org.pofk.answer.Passage;
 import org.pofk.chain.Structure;
+import org.pofk.exact.ComplexBall;
 import org.pofk.exact.Rational;
 
 /** How published first passages, recurrences and absorptions are compared with what the tool answers. */
@@ -46,6 +48,15 @@ final class PassageComparisons {
         BY_KEY.put("mean_gap_length", (derived, value) -> meanInto(derived, "good", Set.of("bad"), value));
         BY_KEY.put("mean_wet_spell", (derived, value) -> meanInto(derived, "wet", Set.of("dry"), value));
         BY_KEY.put("mean_dry_spell", (derived, value) -> meanInto(derived, "dry", Set.of("wet"), value));
+        BY_KEY.put("from_start", PassageComparisons::fromStartOf);
+        BY_KEY.put("from_9", PassageComparisons::fromStartOf);
+        BY_KEY.put("table", PublishedTables::walks);
+        BY_KEY.put("table_half_chance_one_trial_per_second", PublishedTables::runs);
+        BY_KEY.put("pmf_formula", PassageComparisons::lawAsFormula);
+        BY_KEY.put("numeric_MTTF", PassageComparisons::meanOfOneSample);
+        BY_KEY.put("no_repair_MTTF", (derived, value) -> meanFromStart(derived.with("mu", Rational.ZERO), value));
+        BY_KEY.put("mean_weather_cycle", (derived, value) -> assertValue(derived, value, Optional.of(
+                mean(derived, "dry", "wet").plus(mean(derived, "wet", "dry")))));
         BY_KEY.put("three_packets", (derived, node) -> momentsFrom(derived, "3", "0", node));
         BY_KEY.put("one_packet", (derived, node) -> momentsFrom(derived, "1", "0", node));
     }
@@ -190,5 +201,53 @@ final class PassageComparisons {
 
     private static void varianceFromStart(Derived derived, JsonNode value) {
         assertValue(derived, value, fromStart(derived).moments().variance());
+    }
+
+    private static Rational mean(Derived derived, String from, String into) {
+        return passage(derived, from, Set.of(into)).moments().mean().orElseThrow();
+    }
+
+    /** Into all absorbing states, or the one named by the key before all others; as value and as formula. */
+    private static void fromStartOf(Derived derived, JsonNode node) {
+        node.properties().forEach(each -> {
+            Passage all = fromStart(derived);
+            assertValue(derived, each.getValue(), switch (each.getKey()) {
+                case "mean", "mean_formula" -> all.moments().mean();
+                case "variance", "variance_formula" -> all.moments().variance();
+                case "success_run_first" -> Optional.of(first(derived, "S3", "F2"));
+                case "ruin" -> Optional.of(first(derived, "0", "10"));
+                default -> throw new AssertionError(derived + ": " + each.getKey());
+            });
+        });
+    }
+
+    private static Rational first(Derived derived, String into, String before) {
+        List<String> states = derived.chain().states();
+        return Passage.of(derived.chain(), places(states, Set.of(into)), places(states, Set.of(before)), List.of(),
+                List.of()).moments().probability();
+    }
+
+    /** {@code P(T=k)=…} for k ≥ 3, its one binomial coefficient written out. */
+    private static void lawAsFormula(Derived derived, JsonNode text) {
+        String[] sides = text.asText().split("=", 3);
+        assertEquals(List.of("P(T", "k)"), List.of(sides[0], sides[1]), derived::toString);
+        Passage passage = fromStart(derived);
+        String law = sides[2].replace(" ", "*").replace("binomial(k-1,2)", "((k-1)*(k-2)/2)");
+        for (int k = 3; k <= 20; k++) {
+            ComplexBall expected = CertifiedValue.of(derived.parse(law), derived.valuesAt(k), 200);
+            Rational found = passage.law().closedForm().orElseThrow().expansion().valueAt(k);
+            assertTrue(expected.real().contains(found), () -> derived + ": " + text + " is " + found);
+        }
+    }
+
+    /** Given for one choice of parameters, which the key names. */
+    private static void meanOfOneSample(Derived derived, JsonNode bySample) {
+        bySample.properties().forEach(each -> {
+            Derived sample = derived;
+            for (String setting : each.getKey().split(",")) {
+                sample = sample.with(setting.split("=")[0], Rational.parse(setting.split("=")[1]));
+            }
+            meanFromStart(sample, each.getValue());
+        });
     }
 }
