@@ -3,9 +3,12 @@ package org.pofk.answer;
 import java.math.BigInteger;
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.IntStream;
+import org.pofk.exact.Ball;
 import org.pofk.exact.Enclosed;
 import org.pofk.exact.Rational;
 import org.pofk.modes.ClosedForm;
+import org.pofk.modes.Mode;
 
 /**
  * How an output approaches its long run: by its slowest decaying mode, and from which step on it is proved to stay
@@ -16,11 +19,14 @@ import org.pofk.modes.ClosedForm;
  * @param tied    how many modes have that modulus or one that agrees with it to {@value #TIED_BITS} bits; a pair counts
  *                once. Equal moduli can't be told apart by looking closer
  * @param power   the highest power of k that one of these comes with
+ * @param period  in how many steps that mode turns round once: two for a negative base; empty for a positive one, and where
+ *                several modes are tied
  * @param digits  of the promise below
  * @param from    |p(k) − long run| ≤ 10^−digits for every k from here on: a bound from the amplitudes, so it may hold
  *                earlier
  */
-public record Settling(Optional<Enclosed> slowest, int tied, int power, int digits, BigInteger from) {
+public record Settling(Optional<Enclosed> slowest, int tied, int power, Optional<Enclosed> period, int digits,
+        BigInteger from) {
     static final int TIED_BITS = 256;
 
     /** Empty when there is neither a limit nor a cycle. */
@@ -33,10 +39,40 @@ public record Settling(Optional<Enclosed> slowest, int tied, int power, int digi
         BigInteger from = DecayBound.of(decaying, digits).settledFrom(
                 BigInteger.valueOf(closedForm.withoutImpulsesFrom()));
         Optional<DecayingMode> slowest = decaying.stream().max((a, b) -> a.compareModulus(b, TIED_BITS));
-        List<DecayingMode> tied = slowest.map(most -> decaying.stream()
-                .filter(each -> each.compareModulus(most, TIED_BITS) == 0).toList()).orElse(List.of());
-        int power = tied.stream().mapToInt(DecayingMode::power).max().orElse(0);
-        return new Settling(slowest.map(DecayingMode::modulus), tied.size(), power, digits, from);
+        List<Mode> modes = DecayingMode.decaying(closedForm);
+        List<Integer> tied = IntStream.range(0, decaying.size()).filter(i -> slowest.stream().anyMatch(most ->
+                decaying.get(i).compareModulus(most, TIED_BITS) == 0)).boxed().toList();
+        int power = tied.stream().mapToInt(i -> decaying.get(i).power()).max().orElse(0);
+        boolean isOne = tied.stream().map(i -> modes.get(i).pole()).distinct().count() == 1;
+        return new Settling(slowest.map(DecayingMode::modulus), tied.size(), power,
+                isOne ? modes.get(tied.get(0)).accept(new Period()) : Optional.empty(), digits, from);
+    }
+
+    /** After how many steps the slowest mode is half as large, powers of k left aside: ln 2 / −ln modulus. */
+    public Optional<Enclosed> halfLife() {
+        return slowest.map(modulus -> modulus.map(ball ->
+                Ball.of(2, ball.scale()).log().dividedBy(ball.log().negate())));
+    }
+
+    /** 2π over the angle. */
+    private static final class Period implements Mode.Visitor<Optional<Enclosed>> {
+        private static final int BITS = 64;
+
+        @Override
+        public Optional<Enclosed> impulse(Mode.Impulse impulse) {
+            throw new AssertionError("impulses don't decay: " + impulse);
+        }
+
+        @Override
+        public Optional<Enclosed> geometric(Mode.Geometric mode) {
+            return mode.base().enclosure().enclose(BITS).isNegative() ? Optional.of(Enclosed.of(Rational.TWO))
+                    : Optional.empty();
+        }
+
+        @Override
+        public Optional<Enclosed> oscillating(Mode.Oscillating mode) {
+            return Optional.of(Enclosed.pi().times(Enclosed.of(Rational.TWO)).dividedBy(mode.angle().enclosure()));
+        }
     }
 
     /** Enough digits to say something about a small long run: a thousandth of its smallest value other than zero. */

@@ -7,18 +7,22 @@ import org.pofk.answer.Known;
 import org.pofk.answer.Passage;
 import org.pofk.answer.PassageMoments;
 import org.pofk.answer.Percentile;
+import org.pofk.answer.Settling;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
+import org.pofk.exact.Decimals;
 import org.pofk.exact.Rational;
 
 /** Whether and when a set of states is first entered, as JSON: format {@code pofk-passage}. */
 public final class PassageJson {
     private final Json json;
     private final JsonOutput outputs;
+    private final int digits;
 
     private PassageJson(Json json, int digits) {
         this.json = json;
         this.outputs = new JsonOutput(json, digits);
+        this.digits = digits;
     }
 
     /** @param chain with the start that was asked about; {@code digits} are the significant digits of decimals */
@@ -45,6 +49,9 @@ public final class PassageJson {
         outputs.write(passage.law());
         json.name("distribution");
         outputs.write(passage.distribution());
+        json.name("survival");
+        outputs.write(passage.survival());
+        json.text("decay", passage.settling().flatMap(Settling::slowest).map(rate -> Decimals.of(rate, digits).text()));
         json.list("percentiles", passage.percentiles(), this::percentile);
         json.list("hazards", passage.hazards(), hazard -> json.object(() -> {
             json.count("k", hazard.k());

@@ -1,5 +1,6 @@
 package org.pofk.report;
 
+import java.util.Optional;
 import org.pofk.answer.LongRun;
 import org.pofk.answer.Settling;
 import org.pofk.exact.Ball;
@@ -23,6 +24,14 @@ final class SettlingProse {
                 + settling.slowest().map(modulus -> "; slowest part decays like "
                         + power(settling.power()) + base(modulus, digits) + "^k"
                         + (settling.tied() > 1 ? ", shared by " + settling.tied() + " modes" : "")).orElse("");
+    }
+
+    /** How long its slowest mode lasts: its half-life, and in how many steps it turns round. */
+    static Optional<String> slowest(Settling settling, int digits) {
+        return settling.halfLife().map(half -> "is halved every " + Decimals.of(half, digits).text() + " steps"
+                + (settling.power() > 0 ? ", powers of k left aside" : "")
+                + settling.period().map(period -> "; it turns round in " + Decimals.of(period, digits).text()
+                        + " steps").orElse(""));
     }
 
     private static String power(int power) {

@@ -89,6 +89,8 @@ public final class WhenDocument {
         label("long run", new LongRunProse(style.digits()).of(answer.longRun()));
         answer.settling().ifPresent(settling ->
                 label("settles", SettlingProse.of(settling, answer.longRun(), style.digits())));
+        answer.settling().flatMap(settling -> SettlingProse.slowest(settling, style.digits()))
+                .ifPresent(slowest -> label("slowest part", slowest));
     }
 
     private void steps(WhenModel.Answer answer) {

@@ -4,11 +4,14 @@ import java.util.Locale;
 import java.util.Optional;
 import org.pofk.answer.ConditionalWhen;
 import org.pofk.answer.Known;
+import org.pofk.answer.Settling;
 import org.pofk.answer.StepValue;
 import org.pofk.answer.When;
 import org.pofk.answer.WhenModel;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
+import org.pofk.exact.Decimals;
+import org.pofk.exact.Enclosed;
 
 /** When an output meets a condition, as JSON: format {@code pofk-when}. */
 public final class WhenJson {
@@ -44,6 +47,7 @@ public final class WhenJson {
         }));
         json.name("longRun");
         new JsonLongRun(json).write(answer.longRun());
+        json.optional("settling", answer.settling(), this::settling);
         json.list("values", answer.around(), value -> value(value.k(), Optional.of(value)));
     }
 
@@ -55,6 +59,8 @@ public final class WhenJson {
         json.name("nearest");
         json.nothing();
         json.name("longRun");
+        json.nothing();
+        json.name("settling");
         json.nothing();
         json.name("conditionalLongRun");
         new JsonConditionalLongRun(json, digits).write(answer.longRun());
@@ -78,6 +84,22 @@ public final class WhenJson {
             step("forEverFrom", each.forEverFrom());
         }));
         json.text("reason", word(when.reason()));
+    }
+
+    private void settling(Settling settling) {
+        json.object(() -> {
+            json.count("digits", settling.digits());
+            json.text("from", settling.from().toString());
+            json.text("slowest", decimal(settling.slowest()));
+            json.count("tied", settling.tied());
+            json.count("power", settling.power());
+            json.text("halfLife", decimal(settling.halfLife()));
+            json.text("period", decimal(settling.period()));
+        });
+    }
+
+    private Optional<String> decimal(Optional<Enclosed> value) {
+        return value.map(each -> Decimals.of(each, digits).text());
     }
 
     private void value(int k, Optional<StepValue> value) {

@@ -114,6 +114,47 @@ class PassageTest {
                 passage.moments().mean(), chain::toString);
     }
 
+    /** Runs of the stopped chain with seeds of their own; 99.9 % intervals, of which two in a thousand may be missed. */
+    @Test
+    void randomRunsStayInsideTheirIntervals() {
+        RandomChains chains = new RandomChains(SEED + 2);
+        Random random = new Random(SEED + 2);
+        long checked = 0;
+        long inside = 0;
+        for (int i = 0; i < 25; i++) {
+            Chain chain = chains.next();
+            Set<Integer> into = subset(random, chain.size(), Set.of());
+            into.add(random.nextInt(chain.size()));
+            StoppedChain stopped = StoppedChain.of(chain, into, Set.of());
+            Passage passage = Passage.of(chain, into, Set.of(), List.of(), List.of());
+            Simulation simulation = Simulation.of(stopped.chain(), List.of(stopped.distribution()),
+                    List.of(1, 3, 10, 40), 5_000, SEED + i);
+            Simulation.Series series = Comparison.of(stopped.chain(),
+                    List.of(passage.distribution().closedForm().orElseThrow()), STEPS, Optional.of(simulation))
+                    .get(0).random().orElseThrow();
+            checked += series.checked();
+            inside += series.inside();
+        }
+        assertTrue(checked > 50 && inside == checked, inside + " of " + checked + " inside");
+    }
+
+    /** A hundred states of which none is alike: the roots of degree 99 are found, and two ways to the mean agree. */
+    @Test
+    void aHundredStatesAreAnswered() throws Exception {
+        Chain chain = org.pofk.Pofk.read(java.nio.file.Path.of("test-data", "models", "cable-route.yaml")).chain();
+        Passage passage = Passage.of(chain, Set.of(99), Set.of(), List.of(Rational.HALF), List.of());
+        assertEquals(99, passage.law().closedForm().orElseThrow().roots().get(0).all().size());
+        assertFromEach(chain, passage);
+        int half = passage.percentiles().get(0).k().orElseThrow();
+        List<Rational> bounds = List.of(distributionAt(passage, half - 1), distributionAt(passage, half));
+        assertTrue(bounds.get(0).compareTo(Rational.HALF) < 0 && bounds.get(1).compareTo(Rational.HALF) > 0,
+                bounds::toString);
+    }
+
+    private static Rational distributionAt(Passage passage, int k) {
+        return ModeValues.of(passage.distribution().closedForm().orElseThrow()).at(k).enclose(64).middle();
+    }
+
     @Test
     void aStartInsideTheSetGivesZeroAndAReturn() {
         Chain chain = twoStates(Rational.of(1, 4), Rational.of(1, 3));

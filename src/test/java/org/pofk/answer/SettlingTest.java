@@ -9,6 +9,7 @@ import java.util.Optional;
 import org.junit.jupiter.api.Test;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Output;
+import org.pofk.exact.Decimals;
 import org.pofk.exact.Rational;
 
 class SettlingTest {
@@ -76,7 +77,7 @@ class SettlingTest {
     @Test
     void withoutDecayingModesTheLongRunIsThereAfterTheImpulses() {
         Chain turns = Chains.chain("1 0 0", "0 0 0", "1 0 1", "0 1 0");
-        assertEquals(new Settling(Optional.empty(), 0, 0, 6, BigInteger.ONE), settling(turns, 0, 6));
+        assertEquals(new Settling(Optional.empty(), 0, 0, Optional.empty(), 6, BigInteger.ONE), settling(turns, 0, 6));
     }
 
     @Test
@@ -84,6 +85,25 @@ class SettlingTest {
         Chain stages = Chains.chain("1 0 0", "1/2 0 0", "1/2 1/2 0", "0 1/2 1");
         assertEquals(0, settling(stages, 0, 6).power());
         assertEquals(1, settling(stages, 1, 6).power());
+    }
+
+    /** −1/2: half as large a step later, and back on its side after two; 1/2 turns never. */
+    @Test
+    void aNegativeSlowestPoleTurnsRoundInTwoSteps() {
+        Settling settling = settling(Chains.chain("1 0", "1/4 3/4", "3/4 1/4"), 0, 6);
+        assertEquals("1.00000", Decimals.of(settling.halfLife().orElseThrow(), 6).text());
+        assertEquals("2", Decimals.of(settling.period().orElseThrow(), 6).text());
+        assertTrue(settling(Chains.chain("1 0", "3/4 1/4", "1/4 3/4"), 0, 6).period().isEmpty());
+    }
+
+    /** 1/5 + 4/5 ω for ω³ = 1: −1/5 ± 2√3/5 i, of modulus √13/5 and angle π − arctan 2√3. */
+    @Test
+    void aSlowestPairTurnsRoundInItsAngle() {
+        Settling settling = settling(Chains.chain("1 0 0", "1/5 0 4/5", "4/5 1/5 0", "0 4/5 1/5"), 0, 6);
+        double angle = Math.PI - Math.atan(2 * Math.sqrt(3));
+        assertEquals(2 * Math.PI / angle, settling.period().orElseThrow().enclose(60).middle().approximate(), 1e-12);
+        assertEquals(Math.log(2) / -Math.log(Math.sqrt(13) / 5),
+                settling.halfLife().orElseThrow().enclose(60).middle().approximate(), 1e-12);
     }
 
     @Test
