@@ -12,6 +12,7 @@ import org.pofk.exact.Rational;
  *
  * @param into         the set
  * @param avoiding     states that end the wait without success
+ * @param stopped      the chain stopped where the set is entered: law, distribution and survival are its outputs
  * @param law          f(k) = P(T = k), with what it stands on
  * @param distribution F(k) = P(T ≤ k)
  * @param survival     P(T > k), "not yet"
@@ -24,9 +25,10 @@ import org.pofk.exact.Rational;
  * @param returns      where the start lies in the set with certainty
  * @param visits       the expected number of steps k ≥ 0 spent in the set; empty where that is infinite
  */
-public record Passage(List<Integer> into, List<Integer> avoiding, DerivedOutput law, DerivedOutput distribution,
-        DerivedOutput survival, Optional<Happening> happening, PassageMoments moments, Optional<Settling> settling, List<Percentile> percentiles,
-        List<Hazard> hazards, FirstEntrance fromEach, Optional<Return> returns, Optional<Rational> visits) {
+public record Passage(List<Integer> into, List<Integer> avoiding, Chain stopped, DerivedOutput law,
+        DerivedOutput distribution, DerivedOutput survival, Optional<Happening> happening, PassageMoments moments,
+        Optional<Settling> settling, List<Percentile> percentiles, List<Hazard> hazards, FirstEntrance fromEach,
+        Optional<Return> returns, Optional<Rational> visits) {
 
     /** f(k) and F(k) over the probability that T is finite. */
     public record Happening(DerivedOutput law, DerivedOutput distribution) {

@@ -49,7 +49,7 @@ final class PassageAnalysis {
                 .toList();
         PassageMoments moments = PassageMoments.of(transforms.get(0).y());
         Percentile.Finder finder = new Percentile.Finder(stopped.chain(), forms.get(1), moments.probability());
-        return new Passage(sorted(into), sorted(avoiding), derived.get(0), derived.get(1), derived.get(2),
+        return new Passage(sorted(into), sorted(avoiding), stopped.chain(), derived.get(0), derived.get(1), derived.get(2),
                 derived.size() > 3 ? Optional.of(new Passage.Happening(derived.get(3), derived.get(4)))
                         : Optional.empty(), moments,
                 Settling.of(forms.get(2), derived.get(2).longRun().orElseThrow().byPoles(), SETTLED_DIGITS),

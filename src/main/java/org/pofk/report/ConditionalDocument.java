@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.stream.IntStream;
 import org.pofk.answer.Conditional;
 import org.pofk.answer.ConditionalModel;
+import org.pofk.answer.DerivedOutput;
 import org.pofk.answer.Given;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
@@ -20,6 +21,7 @@ public final class ConditionalDocument {
     private final Style style;
     private final Prose given;
     private final List<Block> blocks = new ArrayList<>();
+    private final List<Proved> proofs = new ArrayList<>();
 
     private ConditionalDocument(ConditionalModel found, Style style) {
         this.found = found;
@@ -43,7 +45,7 @@ public final class ConditionalDocument {
                 new Labelled(Prose.name(output.joint().output().name()).and(", given ").and(document.given),
                         Prose.of("long run: ").and(new ConditionalLongRunProse(style.digits()).of(longRun))))).toList();
         return new ReportSection(ReportSection.Place.RESULTS, title(found.given()), key,
-                document.blocks.stream().map(Document::lowered).toList(),
+                document.blocks.stream().map(Document::lowered).toList(), document.proofs,
                 found.isDecided() ? ReportSection.Standing.ANSWERED : ReportSection.Standing.NOT_DECIDED);
     }
 
@@ -64,6 +66,7 @@ public final class ConditionalDocument {
         found.outputs().forEach(this::output);
         blocks.addAll(ResultBlocks.of(found.event(), new Heading(2, Prose.of("D(k) = P(").and(given).and(")")),
                 Prose.of("D(k)"), style));
+        proved(Prose.of("D(k) = P(").and(given).and(")"), found.event());
         values();
     }
 
@@ -78,8 +81,14 @@ public final class ConditionalDocument {
         label("defined", Prose.of(found.possible().map(GivenProse::impossible)
                 .orElse("wherever D(k) isn't zero; which steps these are repeats too late to be listed")));
         output.longRun().ifPresent(longRun -> label("long run", new ConditionalLongRunProse(style.digits()).of(longRun)));
-        blocks.addAll(ResultBlocks.of(output.joint(), new Heading(3, Prose.of("N(k) for ").andName(asked.name())),
-                Prose.of("N(k)"), style));
+        Prose title = Prose.of("N(k) for ").andName(asked.name());
+        blocks.addAll(ResultBlocks.of(output.joint(), new Heading(3, title), Prose.of("N(k)"), style));
+        proved(title.and(", given ").and(given), output.joint());
+    }
+
+    private void proved(Prose title, DerivedOutput output) {
+        Proved.of(title, found.given().chain(found.model().chain()),
+                found.given().never().isEmpty() ? "model" : "stopped chain", output).ifPresent(proofs::add);
     }
 
     private static boolean isShare(Output output) {

@@ -28,6 +28,7 @@ public final class PassageDocument {
     private final Passage passage;
     private final Style style;
     private final List<Block> blocks = new ArrayList<>();
+    private final List<Proved> proofs = new ArrayList<>();
 
     private PassageDocument(Chain chain, Passage passage, Style style) {
         this.chain = chain;
@@ -49,9 +50,10 @@ public final class PassageDocument {
     public static ReportSection section(Chain chain, Passage passage, Style style) {
         PassageDocument document = new PassageDocument(chain, passage, style);
         document.write();
-        return new ReportSection(ReportSection.Place.RESULTS, document.title(), List.of(new Labelled(Prose.of("first into ")
-                .and(document.names(passage.into())), Prose.of(document.inBrief()))), document.blocks,
-                ReportSection.Standing.ANSWERED);
+        Labelled key = new Labelled(Prose.of("first into ").and(document.names(passage.into())),
+                Prose.of(document.inBrief()));
+        return new ReportSection(ReportSection.Place.RESULTS, document.title(), List.of(key), document.blocks,
+                document.proofs, ReportSection.Standing.ANSWERED);
     }
 
     private Prose title() {
@@ -81,6 +83,8 @@ public final class PassageDocument {
         passage.returns().ifPresent(this::returns);
         label("visits", passage.visits().map(visits -> number(visits) + " steps are expected to be spent there")
                 .orElse("infinitely many steps are expected to be spent there"));
+        blocks.add(new Paragraph(Prose.of("The formulas are those of the chain stopped there: from ")
+                .and(names(passage.into())).and(" it goes on to one more state and stays in it.")));
         formula("Law", "P(T = k)", passage.law());
         formula("Distribution", "P(T ≤ k)", passage.distribution());
         formula("Survival", "P(T > k)", passage.survival());
@@ -157,7 +161,9 @@ public final class PassageDocument {
 
     private void formula(String title, String left, DerivedOutput output) {
         blocks.add(new Heading(3, title));
-        blocks.addAll(ResultBlocks.formulas(output, Prose.of(left), style));
+        blocks.addAll(ResultBlocks.proved(output, Prose.of(left), "states of the stopped chain", style));
+        Proved.of(Prose.of(left + ", into ").and(names(passage.into())), passage.stopped(), "stopped chain", output)
+                .ifPresent(proofs::add);
     }
 
     private void values() {

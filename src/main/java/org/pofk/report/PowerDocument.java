@@ -43,7 +43,7 @@ public final class PowerDocument {
         blocks.add(new Heading(2, Prose.of("From ").andName(found.model().chain().states().get(state))));
         for (PowerModel.FromEach each : found.found()) {
             DerivedOutput output = each.byStart().get(state);
-            blocks.addAll(ResultBlocks.formulas(output, style));
+            blocks.addAll(ResultBlocks.proved(output, OutputProse.atStep(output.output()), "states", style));
             output.longRun().ifPresent(checks -> blocks.add(new Labelled("long run",
                     new LongRunProse(style.digits()).of(checks.byPoles()))));
         }

@@ -6,10 +6,8 @@ import java.util.Optional;
 import java.util.Set;
 import java.util.stream.Collectors;
 import java.util.stream.IntStream;
-import org.pofk.answer.DerivedModel;
-import org.pofk.answer.DerivedOutput;
+import java.util.stream.Stream;
 import org.pofk.answer.ProofWindow;
-import org.pofk.chain.Chain;
 import org.pofk.exact.Rational;
 import org.pofk.formula.Formulas;
 import org.pofk.report.Document.Block;
@@ -34,30 +32,28 @@ final class ProofBlocks {
     private static final String SOURCE = "J. L. Massey, Shift-register synthesis and BCH decoding, IEEE Transactions on"
             + " Information Theory IT-15, 1969, 122–127, theorem 1";
 
-    private final DerivedModel derived;
     private final List<Block> blocks = new ArrayList<>();
 
-    private ProofBlocks(DerivedModel derived) {
-        this.derived = derived;
+    private ProofBlocks() {
     }
 
-    static List<Block> of(DerivedModel derived) {
-        ProofBlocks proof = new ProofBlocks(derived);
-        proof.write();
+    /** Of every formula a report shows, those of its sections behind those that are derived. */
+    static List<Block> of(Report report) {
+        ProofBlocks proof = new ProofBlocks();
+        proof.write(Stream.concat(Proved.of(report.derived()),
+                report.answers().stream().flatMap(section -> section.proofs().stream())).toList());
         return proof.blocks;
     }
 
-    private void write() {
-        List<DerivedOutput> proved = derived.outputs().stream().filter(each -> each.transform().isPresent()).toList();
-        if (proved.isEmpty()) {
+    private void write(List<Proved> formulas) {
+        if (formulas.isEmpty()) {
             return;
         }
         blocks.add(new Heading(2, "Why it holds for every k"));
-        theorem(proved.stream().map(each -> each.transform().orElseThrow().proof().method())
-                .collect(Collectors.toSet()));
-        proved.forEach(output -> {
-            blocks.add(new Heading(3, OutputProse.atStep(output.output())));
-            output(output.transform().orElseThrow());
+        theorem(formulas.stream().map(each -> each.transform().proof().method()).collect(Collectors.toSet()));
+        formulas.forEach(each -> {
+            blocks.add(new Heading(3, each.left()));
+            formula(each);
         });
     }
 
@@ -67,8 +63,8 @@ final class ProofBlocks {
         if (methods.contains(Method.WINDOWS)) {
             blocks.add(new Paragraph("The matrix of the n states that take part satisfies its own characteristic"
                     + " polynomial (Cayley–Hamilton), so y(k) obeys a recurrence of order n at every k, and so does what"
-                    + " the recurrence claims to be zero. Zero at n steps in a row, it is therefore zero for ever: comparing n windows,"
-                    + " which hold the terms y(0) … y(n+d−1), proves every k. In other words: two linear recurrences"
+                    + " the recurrence claims to be zero. Zero at n steps in a row, it is therefore zero for ever:"
+                    + " comparing n windows, which hold the terms y(0) … y(n+d−1), proves every k. In other words: two linear recurrences"
                     + " of orders n and d whose sequences agree in n + d terms agree in all of them (" + SOURCE
                     + ")."));
         }
@@ -86,11 +82,12 @@ final class ProofBlocks {
                 + " formula is y(k) for every k that is named with it."));
     }
 
-    private void output(Transform transform) {
+    private void formula(Proved formula) {
+        Transform transform = formula.transform();
         RecurrenceProof proof = transform.proof();
         int order = transform.recurrence().degree();
         label("order", "d = " + order + ", the shortest there is; n = " + proof.order());
-        label("compared", compared(proof, order));
+        label("compared", compared(formula, order));
         label("how", proof.primes() == 0 ? "in exact fractions" : "modulo " + (proof.primes() == 1 ? "1 prime"
                 : proof.primes() + " primes") + " of 31 bits, whose product has more than " + proof.bits()
                 + " bits: more than twice what could differ");
@@ -98,14 +95,15 @@ final class ProofBlocks {
         if (isShown) {
             blocks.add(new Display(Prose.of("D(z)"), Relation.EQUAL, RationalFunction.inZ(transform.recurrence())));
         }
-        window(transform, isShown);
+        window(formula, isShown);
     }
 
-    private static String compared(RecurrenceProof proof, int order) {
+    private static String compared(Proved formula, int order) {
+        RecurrenceProof proof = formula.transform().proof();
         return switch (proof.method()) {
             case WINDOWS -> (proof.order() == 1 ? "the window at k = 0" : "the windows at k = 0 … " + (proof.order() - 1))
                     + ", with the terms y(0)" + (proof.comparedSteps() > 1 ? " … y(" + (proof.comparedSteps() - 1) + ")"
-                            : "") + " as the model steps them";
+                            : "") + " as the " + formula.stepped() + " steps them";
             case CHARACTERISTIC -> "order " + order + " is needed and " + (order == 1 ? "one state takes part"
                     : order + " states take part") + "; the terms y(0) … y(" + (proof.comparedSteps() - 1)
                     + ") were compared";
@@ -118,21 +116,28 @@ final class ProofBlocks {
                 .map(i -> transform.recurrence().coefficient(i).toString().length()).max().orElse(0);
     }
 
-    private void window(Transform transform, boolean isShown) {
-        Optional<ProofWindow> window = isShown ? ProofWindow.of(derived.model().chain(), transform) : Optional.empty();
+    private void window(Proved formula, boolean isShown) {
+        Optional<ProofWindow> window = isShown ? ProofWindow.of(formula.chain(), formula.transform()) : Optional.empty();
         if (window.isEmpty()) {
-            blocks.add(new Paragraph("A window of this order has numbers too many or too long to be repeated by hand;"
-                    + " the notebook (--as notebook) repeats all of them."));
+            blocks.add(new Paragraph("A window of this order has numbers too many or too long to be repeated by hand"
+                    + elsewhere(formula)));
         } else if (window.get().longestNumber() > NUMBER_SHOWN_UP_TO) {
             blocks.add(new Paragraph("The shortest window begins at k = " + window.get().from() + " and has numbers of "
-                    + window.get().longestNumber() + " characters, too long to be repeated by hand; the notebook"
-                    + " (--as notebook) repeats all of them."));
+                    + window.get().longestNumber() + " characters, too long to be repeated by hand"
+                    + elsewhere(formula)));
         } else {
-            blocks.add(table(window.get()));
+            blocks.add(table(formula, window.get()));
         }
     }
 
-    private Table table(ProofWindow window) {
+    private static String elsewhere(Proved formula) {
+        return switch (formula.repeated()) {
+            case IN_NOTEBOOK -> "; the notebook (--as notebook) repeats all of them.";
+            case NOWHERE -> ".";
+        };
+    }
+
+    private static Table table(Proved formula, ProofWindow window) {
         List<List<Prose>> rows = new ArrayList<>();
         List<Rational> products = window.products();
         for (int i = 0; i < products.size(); i++) {
@@ -142,8 +147,7 @@ final class ProofBlocks {
         rows.add(List.of(Prose.of("sum"), Prose.EMPTY, Prose.EMPTY, number(window.sum())));
         String at = window.from() == 0 ? "i" : window.from() + "+i";
         return new Table(Prose.of("The window at k = " + window.from() + ", to be repeated by hand; "
-                + (derived.model().chain().kind() == Chain.Kind.CHAIN ? "y is what the model gives, step by step"
-                        : "y is what the recursion gives, step by step")),
+                + "y is what the " + formula.stepped() + " gives, step by step"),
                 List.of(Prose.of("i"), Prose.of("of z^i in D(z)"), Prose.of("y(" + at + ")"), Prose.of("product")), rows);
     }
 

@@ -52,7 +52,7 @@ public final class ReportDocument {
         } else {
             document.blocks.addAll(ReportSummary.longFormulas(report, style));
         }
-        document.blocks.addAll(ProofBlocks.of(report.derived()));
+        document.blocks.addAll(ProofBlocks.of(report));
         if (depth == Depth.FULL) {
             document.blocks.addAll(CheckBlocks.of(report.derived(), style));
         }

@@ -11,8 +11,10 @@ import org.pofk.report.Document.Labelled;
  * @param title      of the section
  * @param keyFigures for the first page
  * @param blocks     of the section, headings in it from the third level on
+ * @param proofs     of the formulas in it
  */
-public record ReportSection(Place place, Prose title, List<Labelled> keyFigures, List<Block> blocks, Standing standing) {
+public record ReportSection(Place place, Prose title, List<Labelled> keyFigures, List<Block> blocks,
+        List<Proved> proofs, Standing standing) {
 
     /** Where in the report the section stands. */
     public enum Place { RESULTS, CHECKS }
@@ -23,6 +25,12 @@ public record ReportSection(Place place, Prose title, List<Labelled> keyFigures,
     public ReportSection {
         keyFigures = List.copyOf(keyFigures);
         blocks = List.copyOf(blocks);
+        proofs = List.copyOf(proofs);
+    }
+
+    /** One without formulas of its own. */
+    public ReportSection(Place place, Prose title, List<Labelled> keyFigures, List<Block> blocks, Standing standing) {
+        this(place, title, keyFigures, blocks, List.of(), standing);
     }
 
     /** For what a budget left no time. */

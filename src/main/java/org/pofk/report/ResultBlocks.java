@@ -38,7 +38,6 @@ final class ResultBlocks {
         this(output, left, style, "states");
     }
 
-    /** @param states what the components of the state vector are */
     private ResultBlocks(DerivedOutput output, Prose left, Style style, String states) {
         this.output = output;
         this.left = left;
@@ -95,9 +94,13 @@ final class ResultBlocks {
         return result.blocks;
     }
 
-    /** The formulas of a total, from where on they hold and why. */
-    static List<Block> ofTotal(DerivedOutput output, Style style) {
-        ResultBlocks result = new ResultBlocks(output, OutputProse.atStep(output.output()), style, "states and sums");
+    /**
+     * The formulas, from where on they hold and why.
+     *
+     * @param states what the components are of the state vector whose output it is
+     */
+    static List<Block> proved(DerivedOutput output, Prose left, String states, Style style) {
+        ResultBlocks result = new ResultBlocks(output, left, style, states);
         output.closedForm().ifPresent(result::formulas);
         output.transform().ifPresent(result::holds);
         return result.blocks;

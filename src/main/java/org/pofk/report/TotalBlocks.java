@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.stream.IntStream;
+import org.pofk.answer.DerivedOutput;
 import org.pofk.answer.Growth;
 import org.pofk.answer.Increment.Kind;
 import org.pofk.answer.LongRun;
@@ -43,16 +44,25 @@ final class TotalBlocks {
         return writer.blocks.stream().map(Labelled.class::cast).toList();
     }
 
+    /** Of the formulas shown. */
+    static List<Proved> proofs(Total total) {
+        return shown(total).stream().flatMap(output -> Proved.of(OutputProse.atStep(output.output()),
+                total.summed().recursion(), "recursion", output).stream()).toList();
+    }
+
     private void write() {
         label("counts", counts());
-        if (total.increment().kind() == Kind.COSTS) {
-            blocks.addAll(ResultBlocks.ofTotal(total.step(), style));
-        }
-        blocks.addAll(ResultBlocks.ofTotal(total.total(), style));
+        shown(total).forEach(output -> blocks.addAll(ResultBlocks.proved(output, OutputProse.atStep(output.output()),
+                "states and sums", style)));
         growth(total.growth());
         if (!total.averages().isEmpty()) {
             blocks.add(values());
         }
+    }
+
+    /** Of costs, what a step adds has a formula of its own. */
+    private static List<DerivedOutput> shown(Total total) {
+        return total.increment().kind() == Kind.COSTS ? List.of(total.step(), total.total()) : List.of(total.total());
     }
 
     private void label(String label, String text) {

@@ -34,13 +34,15 @@ public final class TotalDocument {
     public static ReportSection section(TotalModel found, Prose title, Style style) {
         List<Block> blocks = new ArrayList<>();
         List<Labelled> keyFigures = new ArrayList<>();
+        List<Proved> proofs = new ArrayList<>();
         for (Total total : found.totals()) {
             blocks.add(new Heading(3, OutputProse.title(total.total().output())));
             blocks.addAll(TotalBlocks.of(found.model(), total, style));
+            proofs.addAll(TotalBlocks.proofs(total));
             keyFigures.addAll(TotalBlocks.keyFigures(found.model(), total, style).stream().limit(1)
                     .map(each -> new Labelled(Prose.name(total.total().output().name()), each.text())).toList());
         }
-        return new ReportSection(ReportSection.Place.RESULTS, title, keyFigures, blocks, found.isComplete()
-                ? ReportSection.Standing.ANSWERED : ReportSection.Standing.NOT_DECIDED);
+        return new ReportSection(ReportSection.Place.RESULTS, title, keyFigures, blocks, proofs,
+                found.isComplete() ? ReportSection.Standing.ANSWERED : ReportSection.Standing.NOT_DECIDED);
     }
 }
