@@ -107,7 +107,8 @@ final class ReportCommand implements Work {
         }
         destination.write(Answer.of(() -> ReportDocument.of(report, show.depth, style, options.convention(read)))
                 .with(Format.CSV, () -> CsvWriter.write(DerivationTable.of(report.derived(), style.digits())))
-                .with(Format.NOTEBOOK, () -> NotebookWriter.write(report, style, options.convention(read))), streams);
+                .with(Format.NOTEBOOK, () -> NotebookWriter.write(report, show.depth, style,
+                        options.convention(read))), streams);
         return code(report, outcome.finished());
     }
 

@@ -18,6 +18,7 @@ import org.pofk.modes.ClosedForm;
 import org.pofk.report.Document.Block;
 import org.pofk.report.Document.Heading;
 import org.pofk.report.Document.Paragraph;
+import org.pofk.report.ReportDocument.Part;
 
 /**
  * A derivation as a notebook that proves it again: its prose and formulas are those of the document, its code needs
@@ -33,23 +34,16 @@ public final class NotebookWriter {
     private final DerivedModel derived;
     private final Style style;
     private final Convention convention;
-    private final Way way;
 
-    /** How the way to a formula is told between the cells of code. */
-    private enum Way {
-        SHORT, WORKED
-    }
-
-    private NotebookWriter(DerivedModel derived, Style style, Convention convention, Way way) {
+    private NotebookWriter(DerivedModel derived, Style style, Convention convention) {
         this.derived = derived;
         this.style = style;
         this.convention = convention;
-        this.way = way;
     }
 
     /** The notebook as JSON, nbformat 4.5, nothing of it run. */
     public static String write(DerivedModel derived, Style style, Convention convention) {
-        NotebookWriter writer = new NotebookWriter(derived, style, convention, Way.SHORT);
+        NotebookWriter writer = new NotebookWriter(derived, style, convention);
         List<Block> head = new ArrayList<>(ModelHead.of(derived.model()));
         head.add(new Paragraph(WHAT_IT_DOES));
         writer.text(head);
@@ -68,7 +62,7 @@ public final class NotebookWriter {
                 + " the moves of a step add and what was added before."));
         List<Notebook.Cell> cells = new ArrayList<>();
         for (int i = 0; i < recursions.size(); i++) {
-            NotebookWriter writer = new NotebookWriter(recursions.get(i), style, convention, Way.SHORT);
+            NotebookWriter writer = new NotebookWriter(recursions.get(i), style, convention);
             writer.text(i == 0 ? head : List.of());
             writer.text(List.of(new Heading(2, OutputProse.title(found.totals().get(i).total().output()))));
             writer.text(TotalBlocks.of(found.model(), found.totals().get(i), style));
@@ -81,7 +75,7 @@ public final class NotebookWriter {
             cells.addAll(writer.cells);
         }
         cells.add(new Notebook.Cell(Notebook.Kind.MARKDOWN, MarkdownWriter.write(List.of(Caution.of(found.model())))));
-        return new Notebook(cells.stream().filter(cell -> !cell.source().isBlank()).toList()).write();
+        return new Notebook(cells).write();
     }
 
     private static DerivedModel recursion(TotalModel found, Total total) {
@@ -91,22 +85,33 @@ public final class NotebookWriter {
                 new Wanted(List.of(), Set.of()));
     }
 
-    /** The same between the first page of a report with its answers, and what the report stands on. */
-    public static String write(Report report, Style style, Convention convention) {
-        NotebookWriter writer = new NotebookWriter(report.derived(), style, convention, Way.WORKED);
-        writer.text(ReportDocument.before(report, style));
+    /** A whole report, and behind the way of each output its cells of code; where no way is told, behind the proof. */
+    public static String write(Report report, Report.Depth depth, Style style, Convention convention) {
+        NotebookWriter writer = new NotebookWriter(report.derived(), style, convention);
+        List<Part> parts = ReportDocument.parts(report, depth, style, convention);
+        List<Part> before = parts.stream().takeWhile(part -> part.proved().isEmpty()).toList();
+        before.forEach(writer::part);
         writer.text(WHAT_IT_DOES);
-        writer.chain();
-        writer.text(WayBlocks.rule(report.derived().outputs()));
-        report.derived().outputs().forEach(writer::output);
-        writer.text(LongRunBlocks.of(report, style));
-        writer.text(CheckBlocks.of(report.derived(), style));
-        writer.text(ReportDocument.after(report));
+        writer.tools(List.of(report.derived()));
+        parts.subList(before.size(), parts.size()).forEach(writer::part);
         return new Notebook(writer.cells).write();
     }
 
+    private void part(Part part) {
+        text(part.blocks());
+        part.proved().forEach(output -> {
+            if (part.blocks().isEmpty()) {
+                text(List.of(new Heading(3, OutputProse.atStep(output.output()))));
+            }
+            proof(output);
+            printed(output);
+        });
+    }
+
     private void text(List<Block> blocks) {
-        cells.add(new Notebook.Cell(Notebook.Kind.MARKDOWN, MarkdownWriter.write(blocks)));
+        if (!blocks.isEmpty()) {
+            cells.add(new Notebook.Cell(Notebook.Kind.MARKDOWN, MarkdownWriter.write(blocks)));
+        }
     }
 
     private void text(String paragraph) {
@@ -130,8 +135,11 @@ public final class NotebookWriter {
     /** @param all what the tools given here are to serve */
     private void chain(List<DerivedModel> all) {
         List<Output> outputs = derived.outputs().stream().map(DerivedOutput::output).toList();
-        text(way == Way.WORKED ? ChainBlocks.worked(derived.model(), outputs, convention)
-                : ChainBlocks.of(derived.model(), outputs, convention));
+        text(ChainBlocks.of(derived.model(), outputs, convention));
+        tools(all);
+    }
+
+    private void tools(List<DerivedModel> all) {
         text("The model in exact fractions:");
         code(Python.tools("numbers"));
         code(PythonChain.of(derived.model().chain(), convention));
@@ -158,8 +166,14 @@ public final class NotebookWriter {
     }
 
     private void output(DerivedOutput output) {
-        List<Block> told = way == Way.WORKED ? WayBlocks.worked(output, style) : WayBlocks.of(output, style);
+        List<Block> told = WayBlocks.of(output, style);
         text(told.isEmpty() ? List.of(new Heading(2, OutputProse.title(output.output()))) : told);
+        proof(output);
+        text(ResultBlocks.of(output, style));
+        printed(output);
+    }
+
+    private void proof(DerivedOutput output) {
         output.transform().ifPresent(transform -> {
             text("The terms, the recurrence and Y(z) proved again:");
             code(PythonOutput.transform(transform));
@@ -173,7 +187,9 @@ public final class NotebookWriter {
                 code(PythonOutput.parts(form));
             }
         });
-        text(ResultBlocks.of(output, style));
+    }
+
+    private void printed(DerivedOutput output) {
         output.closedForm().ifPresent(this::printed);
         output.longRun().ifPresent(checks -> code(output.closedForm().filter(PythonOutput::isEvaluated).isPresent()
                 ? PythonLongRun.of(checks.byPoles()) : PythonLongRun.FIGURE_ALONE));

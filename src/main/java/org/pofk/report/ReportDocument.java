@@ -20,7 +20,19 @@ public final class ReportDocument {
     private final Report report;
     private final Style style;
     private final Convention convention;
-    private final List<Block> blocks = new ArrayList<>();
+    private final List<Part> parts = new ArrayList<>();
+
+    /**
+     * A stretch of a report.
+     *
+     * @param proved the outputs whose way it tells: a notebook proves their formulas again behind it
+     */
+    record Part(List<Block> blocks, List<DerivedOutput> proved) {
+        Part {
+            blocks = List.copyOf(blocks);
+            proved = List.copyOf(proved);
+        }
+    }
 
     private ReportDocument(Report report, Style style, Convention convention) {
         this.report = report;
@@ -34,9 +46,22 @@ public final class ReportDocument {
      */
     public static Document of(Report report, Depth depth, Style style, Convention convention) {
         Document document = alone(report.alone(), depth, style, convention);
-        return report.since().map(earlier -> DocumentDifference
-                .marked(alone(earlier.asMadeLike(report), depth, style, convention), document)
-                .with(firstSection(document.blocks()), ChangeBlocks.of(earlier, report, style))).orElse(document);
+        return report.since().map(earlier -> withChanges(DocumentDifference.marked(
+                alone(earlier.asMadeLike(report), depth, style, convention), document), earlier, report, style))
+                .orElse(document);
+    }
+
+    /** The same in the order a notebook tells it, what has changed before all results. */
+    static List<Part> parts(Report report, Depth depth, Style style, Convention convention) {
+        ReportDocument document = new ReportDocument(report, style, convention);
+        document.write(depth);
+        report.since().ifPresent(earlier -> document.parts.set(0, new Part(withChanges(
+                new Document(document.parts.get(0).blocks()), earlier, report, style).blocks(), List.of())));
+        return document.parts;
+    }
+
+    private static Document withChanges(Document document, Report earlier, Report later, Style style) {
+        return document.with(firstSection(document.blocks()), ChangeBlocks.of(earlier, later, style));
     }
 
     private static int firstSection(List<Block> blocks) {
@@ -46,27 +71,37 @@ public final class ReportDocument {
 
     private static Document alone(Report report, Depth depth, Style style, Convention convention) {
         ReportDocument document = new ReportDocument(report, style, convention);
-        document.blocks.addAll(before(report, style));
-        if (depth == Depth.FULL) {
-            document.derivation();
-        } else {
-            document.blocks.addAll(ReportSummary.longFormulas(report, style));
-        }
-        document.blocks.addAll(ProofBlocks.of(report));
-        if (depth == Depth.FULL) {
-            document.blocks.addAll(CheckBlocks.of(report.derived(), style));
-        }
-        document.blocks.addAll(after(report));
-        return new Document(document.blocks, report.derived().outputs().stream()
-                .flatMap(output -> output.transform().map(OutputSequence::of).stream()).toList());
+        document.write(depth);
+        return new Document(document.parts.stream().flatMap(part -> part.blocks().stream()).toList(),
+                report.derived().outputs().stream()
+                        .flatMap(output -> output.transform().map(OutputSequence::of).stream()).toList());
     }
 
-    /** The first page, what has changed, the values, each answer in a section of its own, and what was modelled. */
-    static List<Block> before(Report report, Style style) {
+    private void write(Depth depth) {
+        add(answers());
+        switch (depth) {
+            case FULL -> {
+                derivation();
+                add(ProofBlocks.of(report));
+                add(CheckBlocks.of(report.derived(), style));
+            }
+            case BRIEF -> {
+                add(ReportSummary.longFormulas(report, style));
+                add(ProofBlocks.of(report));
+                parts.add(new Part(List.of(), report.derived().outputs()));
+            }
+        }
+        add(grounds());
+    }
+
+    private void add(List<Block> blocks) {
+        parts.add(new Part(blocks, List.of()));
+    }
+
+    /** The first page, the values, each answer in a section of its own, and what was modelled. */
+    private List<Block> answers() {
         DerivedModel derived = report.derived();
         List<Block> blocks = new ArrayList<>(ReportSummary.of(report, style));
-        report.since().ifPresent(earlier -> blocks.addAll(firstSection(blocks),
-                ChangeBlocks.of(earlier, report, style)));
         blocks.addAll(values(report, style));
         blocks.addAll(sections(report, Place.RESULTS));
         blocks.addAll(ModelBlocks.of(derived.model(), outputs(derived), derived.structure()));
@@ -106,18 +141,21 @@ public final class ReportDocument {
     /** From the matrix to the closed forms and their long runs. */
     private void derivation() {
         DerivedModel derived = report.derived();
-        blocks.addAll(ChainBlocks.worked(derived.model(), outputs(derived), convention));
-        blocks.addAll(WayBlocks.rule(derived.outputs()));
+        add(ChainBlocks.worked(derived.model(), outputs(derived), convention));
+        List<Block> blocks = new ArrayList<>(WayBlocks.rule(derived.outputs()));
         derived.outputs().forEach(output -> {
             blocks.addAll(WayBlocks.worked(output, style));
             blocks.addAll(MissingBlocks.way(output));
+            parts.add(new Part(blocks, List.of(output)));
+            blocks.clear();
         });
         PoleChart.of(derived).ifPresent(chart -> blocks.add(new Figure(Prose.of("Poles and the unit circle"), chart)));
         blocks.addAll(LongRunBlocks.of(report, style));
+        add(blocks);
     }
 
     /** The checks of what others state, and what the report stands on. */
-    static List<Block> after(Report report) {
+    private List<Block> grounds() {
         List<Block> blocks = new ArrayList<>(sections(report, Place.CHECKS));
         blocks.addAll(ProvenanceBlocks.of(report.provenance()));
         return blocks;

@@ -123,6 +123,49 @@ class NotebookTest {
         assertEquals(List.of(), outcomes.stream().filter(line -> !line.contains(" failed AssertionError ")).toList());
     }
 
+    private static String report(String pattern, String depth, String format) {
+        Run run = Run.of(List.of("report", model(pattern), "--show", depth, "--as", format));
+        assertEquals(0, run.exitCode(), run.notes());
+        return run.answer();
+    }
+
+    /** Lines that are underlined as sections are. */
+    private static List<String> sections(String text) {
+        List<String> lines = text.lines().toList();
+        return IntStream.range(1, lines.size()).filter(i -> lines.get(i).matches("─+"))
+                .mapToObj(i -> lines.get(i - 1)).toList();
+    }
+
+    @Test
+    void theNotebookOfAReportHasItsSectionsAndRuns() throws Exception {
+        Map<String, String> programs = new LinkedHashMap<>();
+        for (String pattern : List.of("relined-main", "valve-rotation")) {
+            for (String depth : List.of("brief", "full")) {
+                NotebookFile notebook = NotebookFile.of(report(pattern, depth, "notebook"));
+                notebook.assertFollowsTheFormat();
+                List<String> told = notebook.sources("markdown").stream().flatMap(String::lines)
+                        .filter(line -> line.startsWith("## ")).map(line -> line.substring(3))
+                        .filter(line -> !line.equals("How the formulas are proved again")).toList();
+                assertEquals(sections(report(pattern, depth, "text")), told);
+                programs.put(pattern + "-" + depth, notebook.program());
+            }
+        }
+        assertEquals(List.of(), run(programs).stream().filter(line -> !line.contains(" ended ")).toList());
+        assertEquals(programs.get("relined-main-brief"), programs.get("relined-main-full"));
+    }
+
+    @Test
+    void onlyTheNotebookOfAFullReportTellsTheWayAndTheChecks() {
+        String brief = report("relined-main", "brief", "notebook");
+        String full = report("relined-main", "full", "notebook");
+        for (String told : List.of("How it was checked", "second opinion", "From Y(z) to a formula in k")) {
+            assertTrue(full.contains(told) && !brief.contains(told), told);
+        }
+        for (String told : List.of("Why it holds for every k", "to be repeated by hand")) {
+            assertTrue(full.contains(told) && brief.contains(told), told);
+        }
+    }
+
     /** One line for each program: its name, whether it ended or failed, and the error. */
     private List<String> run(Map<String, String> programs) throws IOException, InterruptedException {
         Installed.require("python3", "notebooks aren't run");
