@@ -14,10 +14,11 @@ import java.util.Optional;
  *                   and what each {@code rest} came to, one line each
  * @param written    the entries of the chain's matrix as the file writes them, in its order; none for what stays
  * @param tables     the tables that the file names
+ * @param settings   what a command line puts in place of the file's words
  */
 public record Model(String title, Step step, Convention convention, About about, Chain chain,
         Optional<Schedule> schedule, Optional<Costs> costs, List<Parameter> parameters, List<Remark> notes,
-        List<String> changes, List<Written> written, Origin origin, List<Origin> tables) {
+        List<String> changes, List<Written> written, Origin origin, List<Origin> tables, List<Setting> settings) {
 
     /** How the author writes a matrix: moves out of a state stand in a column or in a row. */
     public enum Convention { COLUMNS, ROWS }
@@ -36,7 +37,7 @@ public record Model(String title, Step step, Convention convention, About about,
                 new About(Optional.empty(), Optional.empty(), Optional.empty(), List.of(), Optional.empty());
     }
 
-    /** A named value; {@code value} is its exact number as text. */
+    /** A named value; {@code value} is its exact number as text. One that a command line sets has no source in the file. */
     public record Parameter(String name, String value, Optional<String> definition, Optional<String> from,
             Optional<String> to, Optional<String> meaning, Optional<String> source) {
     }
@@ -49,6 +50,16 @@ public record Model(String title, Step step, Convention convention, About about,
     public record Remark(String on, String kind, String text) {
     }
 
+    /**
+     * A value from a command line in place of the file's.
+     *
+     * @param parameter which one; none where it is the start
+     * @param value     as typed
+     * @param inFile    what the file writes there, if anything
+     */
+    public record Setting(Optional<String> parameter, String value, Optional<String> inFile) {
+    }
+
     /** The file a model was read from: its name as given and the SHA-256 of its bytes, in hexadecimal. */
     public record Origin(String file, String sha256) {
     }
@@ -56,7 +67,7 @@ public record Model(String title, Step step, Convention convention, About about,
     /** The same model, as if it had been read from another file. */
     public Model readFrom(Origin other) {
         return new Model(title, step, convention, about, chain, schedule, costs, parameters, notes, changes, written,
-                other, tables);
+                other, tables, settings);
     }
 
     public Model {
@@ -65,11 +76,25 @@ public record Model(String title, Step step, Convention convention, About about,
         changes = List.copyOf(changes);
         written = List.copyOf(written);
         tables = List.copyOf(tables);
+        settings = List.copyOf(settings);
+    }
+
+    /** As the file alone says it. */
+    public Model(String title, Step step, Convention convention, About about, Chain chain, Optional<Schedule> schedule,
+            Optional<Costs> costs, List<Parameter> parameters, List<Remark> notes, List<String> changes,
+            List<Written> written, Origin origin, List<Origin> tables) {
+        this(title, step, convention, about, chain, schedule, costs, parameters, notes, changes, written, origin, tables,
+                List.of());
+    }
+
+    /** What a command line puts in place of a parameter's value. */
+    public Optional<Setting> setting(Parameter parameter) {
+        return settings.stream().filter(each -> each.parameter().equals(Optional.of(parameter.name()))).findFirst();
     }
 
     /** The same model with another chain. */
     public Model with(Chain other) {
         return new Model(title, step, convention, about, other, schedule, costs, parameters, notes, changes, written,
-                origin, tables);
+                origin, tables, settings);
     }
 }

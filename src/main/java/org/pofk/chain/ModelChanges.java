@@ -2,11 +2,13 @@ package org.pofk.chain;
 
 import java.util.ArrayList;
 import java.util.Comparator;
+import java.util.EnumMap;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
+import java.util.stream.Collectors;
 
 /**
  * What a later model says otherwise than an earlier one, entry by entry, in exact values. Nothing for two models that
@@ -20,6 +22,11 @@ public record ModelChanges(List<Change> changes, Map<String, String> renamed) {
     /** An entry with its values; empty in a model without it. A renamed state's entries bear the later name. */
     public record Change(Entry entry, Optional<String> before, Optional<String> after) {
     }
+
+    /** What is listed in an order that a reader sees, or that counts. */
+    private static final Map<Entry.Subject, String> ORDERED = new EnumMap<>(Map.of(Entry.Subject.STATE, "states",
+            Entry.Subject.PARAMETER, "parameters", Entry.Subject.SET, "sets", Entry.Subject.OUTPUT, "outputs",
+            Entry.Subject.ACTION, "actions", Entry.Subject.ASSUMPTION, "assumptions"));
 
     public ModelChanges {
         changes = List.copyOf(changes);
@@ -39,8 +46,22 @@ public record ModelChanges(List<Change> changes, Map<String, String> renamed) {
                 changes.add(change);
             }
         }
+        ORDERED.forEach((subject, name) -> {
+            Change order = new Change(Entry.of(Entry.Subject.ORDER, name),
+                    Optional.of(listed(was.keySet(), is.keySet(), subject)),
+                    Optional.of(listed(is.keySet(), was.keySet(), subject)));
+            if (!order.before().equals(order.after())) {
+                changes.add(order);
+            }
+        });
         changes.sort(Comparator.comparing(change -> change.entry().subject()));
         return new ModelChanges(changes, renamed);
+    }
+
+    /** The names of those that are in both models, in the order of the first. */
+    private static String listed(Set<Entry> entries, Set<Entry> others, Entry.Subject subject) {
+        return entries.stream().filter(entry -> entry.subject() == subject && others.contains(entry))
+                .map(entry -> entry.of().get(0)).collect(Collectors.joining(", "));
     }
 
     /** The earlier chain with the later names of its states. */

@@ -3,6 +3,7 @@ package org.pofk.chain;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.stream.Collectors;
@@ -18,6 +19,7 @@ import org.pofk.exact.Rational;
 final class ModelEntries {
     private static final int LONGEST_DECIMAL = 12;
     private static final int LONG_BITS = 1024;
+    private static final String REST = ": rest came to ";
 
     private final Model model;
     private final Map<String, String> names;
@@ -40,6 +42,10 @@ final class ModelEntries {
         all.model.schedule().ifPresent(all::schedule);
         all.parameters();
         all.model.costs().ifPresent(all::costs);
+        model.settings().forEach(all::inFile);
+        // what a rest came to is listed among the changes on entry too, and is what the author wrote
+        model.changes().stream().filter(change -> !change.contains(REST))
+                .forEach(change -> all.put(change, Subject.ADJUSTED, change));
         model.notes().forEach(note -> all.join(Entry.of(Subject.NOTE, note.kind(), note.on()), note.text()));
         return all.entries;
     }
@@ -61,8 +67,10 @@ final class ModelEntries {
         put(model.about().document(), Subject.DOCUMENT);
         put(model.about().revision(), Subject.REVISION);
         put(model.about().preparedBy(), Subject.PREPARED_BY);
-        model.about().assumptions().forEach(assumption -> put(assumption, Subject.ASSUMPTION, assumption));
+        put(model.about().concerns().map(ModelEntries::words), Subject.CONCERNS);
+        model.about().assumptions().forEach(assumption -> join(Entry.of(Subject.ASSUMPTION, assumption), assumption));
         put(model.chain().kind() == Chain.Kind.CHAIN ? "chain" : "recursion", Subject.KIND);
+        put(words(model.convention()), Subject.CONVENTION);
         put(model.step().is(), Subject.STEP);
         put(model.step().lasts(), Subject.STEP_LASTS);
         put(model.step().first(), Subject.FIRST_STEP);
@@ -142,6 +150,16 @@ final class ModelEntries {
             }
             put(parameter.meaning(), Subject.MEANING, name);
         }
+    }
+
+    /** The file's own words where others take their place: they change too, without any effect. */
+    private void inFile(Model.Setting setting) {
+        setting.parameter().ifPresentOrElse(name -> put(setting.inFile(), Subject.PARAMETER_IN_FILE, name),
+                () -> put(setting.inFile(), Subject.START_IN_FILE));
+    }
+
+    private static String words(Enum<?> constant) {
+        return constant.name().toLowerCase(Locale.ROOT).replace('_', ' ');
     }
 
     private static String number(Rational value) {

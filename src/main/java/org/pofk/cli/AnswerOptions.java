@@ -1,6 +1,7 @@
 package org.pofk.cli;
 
 import java.nio.file.Path;
+import java.util.List;
 import java.util.function.Consumer;
 import java.util.function.Function;
 import org.pofk.chain.Model;
@@ -50,9 +51,9 @@ final class AnswerOptions {
         return model.read();
     }
 
-    /** Another model's file, read as the model's own is. */
-    Model modelIn(Path other) throws RefusedException, UsageException {
-        return ScheduleRefusal.unlessScheduled(model.readAsWell(other));
+    /** The model, and then that of another file, read as the model's own is. */
+    List<Model> modelWith(Path other) throws RefusedException, UsageException {
+        return model.readWith(other);
     }
 
     /** The same for a command that takes a schedule into account. */

@@ -1,7 +1,12 @@
 package org.pofk.cli;
 
 import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
 import java.util.Optional;
+import java.util.stream.Collectors;
 import org.pofk.chain.Model;
 import org.pofk.input.FileKind;
 import org.pofk.input.MatrixFileReader;
@@ -9,6 +14,7 @@ import org.pofk.input.ModelReader;
 import org.pofk.input.Overrides;
 import org.pofk.input.Source;
 import org.pofk.input.TableOptions;
+import org.pofk.text.Fault;
 import org.pofk.text.RefusedException;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
@@ -56,12 +62,16 @@ final class ModelOptions {
 
     /** The same where the command takes a start in each state in turn. */
     Model readForEachStart() throws RefusedException, UsageException {
-        return readFile(file);
+        return readAll(List.of(file)).get(0);
     }
 
-    /** Another file, as this one is read; its schedule included. */
-    Model readAsWell(Path other) throws RefusedException, UsageException {
-        return refusingEachStart(readFile(other));
+    /** The model, and then another file that is read as it is. */
+    List<Model> readWith(Path other) throws RefusedException, UsageException {
+        List<Model> models = readAll(List.of(file, other));
+        for (Model model : models) {
+            ScheduleRefusal.unlessScheduled(refusingEachStart(model));
+        }
+        return models;
     }
 
     private Model refusingEachStart(Model read) throws UsageException {
@@ -72,15 +82,41 @@ final class ModelOptions {
         return read;
     }
 
-    private Model readFile(Path other) throws RefusedException, UsageException {
+    /** What is said of tables is said of those files that are tables, one at least; the faults of all files are told. */
+    private List<Model> readAll(List<Path> paths) throws RefusedException, UsageException {
         Overrides overrides = settings.overrides();
-        Source source = Source.read(other);
-        return settings.read(() -> read(other, source, overrides));
+        List<Fault> faults = new ArrayList<>();
+        Map<Path, Source> sources = new LinkedHashMap<>();
+        for (Path path : paths) {
+            gathering(faults, () -> sources.put(path, Source.read(path)));
+        }
+        if (faults.isEmpty()) {
+            refuseTableOptionsWithoutTable(sources);
+        }
+        List<Model> models = new ArrayList<>();
+        for (Path path : paths) {
+            if (sources.containsKey(path)) {
+                SettingOptions.FileReading<Model> reading = () -> read(path, sources.get(path), overrides);
+                gathering(faults, () -> models.add(paths.size() == 1 ? settings.read(reading)
+                        : settings.readOf(path, reading)));
+            }
+        }
+        if (!faults.isEmpty()) {
+            throw new RefusedException(faults);
+        }
+        return models;
+    }
+
+    private static void gathering(List<Fault> faults, SettingOptions.FileReading<?> reading) throws UsageException {
+        try {
+            reading.read();
+        } catch (RefusedException refused) {
+            faults.addAll(refused.faults());
+        }
     }
 
     private Model read(Path path, Source source, Overrides overrides) throws RefusedException, UsageException {
         if (FileKind.of(source) != FileKind.MATRIX) {
-            refuseTableOptions();
             return ModelReader.read(source, Optional.ofNullable(path.toAbsolutePath().getParent()),
                     overrides);
         }
@@ -91,10 +127,12 @@ final class ModelOptions {
                 orientation.map(Orientation::convention), settings.start(), new TableOptions(separator, names)));
     }
 
-    private void refuseTableOptions() throws UsageException {
-        if (orientation.isPresent() || separator.isPresent() || names.isPresent()) {
-            throw new UsageException("--orientation, --separator and --names are for CSV files; '" + file
-                    + "' says these itself, under 'matrix'");
+    private void refuseTableOptionsWithoutTable(Map<Path, Source> sources) throws UsageException {
+        boolean areGiven = orientation.isPresent() || separator.isPresent() || names.isPresent();
+        if (areGiven && sources.values().stream().noneMatch(each -> FileKind.of(each) == FileKind.MATRIX)) {
+            throw new UsageException("--orientation, --separator and --names are for CSV files; "
+                    + sources.keySet().stream().map(path -> "'" + path + "'").collect(Collectors.joining(" and "))
+                    + (sources.size() == 1 ? " says these itself" : " say these themselves") + ", under 'matrix'");
         }
     }
 }

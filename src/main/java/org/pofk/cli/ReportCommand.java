@@ -89,10 +89,12 @@ final class ReportCommand implements Work {
     public ExitCode run(Streams streams) throws RefusedException, UsageException, WritingException {
         Style style = options.style();
         Destination destination = options.destination();
-        Model read = options.model();
+        List<Model> models = since.models(options);
+        Model read = models.get(0);
         requireFew(read.chain());
         AskedReport asked = asked(read, style);
-        Optional<AskedReport> earlier = earlier(read, style);
+        Optional<AskedReport> earlier = models.size() == 1 ? Optional.empty()
+                : Optional.of(earlier(models.get(1), read, style));
         Provenance provenance = provenance(Stream.concat(asked.files(), earlier.stream().flatMap(AskedReport::files)));
         Worker.Outcome<Report> outcome = options.within(streams, published -> {
             Report report = asked.find(provenance, published);
@@ -135,12 +137,7 @@ final class ReportCommand implements Work {
     }
 
     /** The same of the model of an earlier issue, as far as it can be asked of that one; states by their later names. */
-    private Optional<AskedReport> earlier(Model later, Style style) throws RefusedException, UsageException {
-        Optional<Model> read = since.model(options);
-        if (read.isEmpty()) {
-            return Optional.empty();
-        }
-        Model model = read.get();
+    private AskedReport earlier(Model model, Model later, Style style) throws RefusedException, UsageException {
         Chain chain = ModelChanges.of(model, later).renamed(model.chain());
         List<Output> outputs = AskedOutputs.thoseOf(chain, of);
         List<AskedSection> sections = new ArrayList<>(conditions.sections(model, outputs, style));
@@ -148,7 +145,7 @@ final class ReportCommand implements Work {
         sections.addAll(whereAsked(() -> totals.sections(model.with(chain), at.steps(), style)));
         sections.addAll(whereAsked(() -> given.sections(model.with(chain), outputs, at.steps(), style)));
         sections.addAll(whereAsked(() -> claims.sections(model, options.settings())));
-        return Optional.of(new AskedReport(model, outputs, sections, at.steps(), extras()));
+        return new AskedReport(model, outputs, sections, at.steps(), extras());
     }
 
     /** None about names that the earlier model doesn't have, or by a derivation that is about the later one. */

@@ -1,5 +1,6 @@
 package org.pofk.cli;
 
+import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -27,11 +28,20 @@ final class SettingOptions {
 
     /** What is read; where it is refused for what was typed alone, that is a wrong usage. */
     <T> T read(FileReading<T> reading) throws RefusedException, UsageException {
+        return read("", reading);
+    }
+
+    /** The same of one of several files, which a refusal of what was typed then names. */
+    <T> T readOf(Path file, FileReading<T> reading) throws RefusedException, UsageException {
+        return read("for '" + file + "': ", reading);
+    }
+
+    private static <T> T read(String about, FileReading<T> reading) throws RefusedException, UsageException {
         try {
             return reading.read();
         } catch (RefusedException refused) {
             if (refused.faults().stream().allMatch(SettingOptions::isOfAnOption)) {
-                throw new UsageException(refused.getMessage());
+                throw new UsageException(about + refused.getMessage());
             }
             throw refused;
         }

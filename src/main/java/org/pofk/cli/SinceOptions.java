@@ -1,6 +1,7 @@
 package org.pofk.cli;
 
 import java.nio.file.Path;
+import java.util.List;
 import java.util.Optional;
 import org.pofk.chain.Model;
 import org.pofk.text.RefusedException;
@@ -13,8 +14,11 @@ final class SinceOptions {
                     + " each result before and now, and has a rule in the margin beside what differs")
     private Optional<Path> file = Optional.empty();
 
-    /** Read as the model itself is, with what the command line puts in place of its words; its faults are its own. */
-    Optional<Model> model(AnswerOptions options) throws RefusedException, UsageException {
-        return file.isEmpty() ? Optional.empty() : Optional.of(options.modelIn(file.get()));
+    /**
+     * The model, and then the earlier one where it is asked for: read as the model itself is, with what the command line
+     * puts in place of its words.
+     */
+    List<Model> models(AnswerOptions options) throws RefusedException, UsageException {
+        return file.isEmpty() ? List.of(options.model()) : options.modelWith(file.get());
     }
 }

@@ -51,7 +51,8 @@ public final class MatrixFileReader {
         faults.refuseIfAny();
         return new Model(head.title(), head.step(), options.orientation().orElseThrow(), About.NOTHING,
                 new Chain(Chain.Kind.CHAIN, states.names(), matrix, start, Map.of(), List.of()), Optional.empty(),
-                Optional.empty(), List.of(), List.of(), reading.changes(), reading.written(), new Origin(source.name(), source.sha256()), List.of());
+                Optional.empty(), List.of(), List.of(), reading.changes(), reading.written(),
+                new Origin(source.name(), source.sha256()), List.of(), reading.settings());
     }
 
     private static MatrixGrid grid(NamedTable table, Source source, Reading reading) {

@@ -90,7 +90,7 @@ public final class ModelReader {
                 .or(() -> moves.orientation().map(Head.Orientation::convention)).orElse(Convention.COLUMNS);
         return Optional.of(new Model(head.title(), head.step(), convention, head.about(), chain, schedule, costs,
                 parameters, reading.remarks(), reading.changes(), written,
-                new Origin(source.name(), source.sha256()), reading.tables()));
+                new Origin(source.name(), source.sha256()), reading.tables(), reading.settings()));
     }
 
     private static List<String> actions(Fields fields) {

@@ -2,6 +2,7 @@ package org.pofk.input;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.Collectors;
 import org.pofk.text.Places;
 import org.pofk.text.Position;
 
@@ -15,6 +16,9 @@ sealed interface Node {
 
     /** What it is, in words. */
     String inWords();
+
+    /** Its text in one line, as a reader would write it. */
+    String inOneLine();
 
     /** This, when it is a single value. */
     default Optional<Scalar> asScalar() {
@@ -84,6 +88,11 @@ sealed interface Node {
         public String inWords() {
             return isAbsent() ? "nothing" : "'" + Words.shortened(text) + "'";
         }
+
+        @Override
+        public String inOneLine() {
+            return text.strip();
+        }
     }
 
     /** A list. */
@@ -101,6 +110,11 @@ sealed interface Node {
         public String inWords() {
             return "a list";
         }
+
+        @Override
+        public String inOneLine() {
+            return items.stream().map(Node::inOneLine).collect(Collectors.joining(", ", "[", "]"));
+        }
     }
 
     /** Keys with values, in order; no key twice. */
@@ -117,6 +131,12 @@ sealed interface Node {
         @Override
         public String inWords() {
             return "a mapping";
+        }
+
+        @Override
+        public String inOneLine() {
+            return entries.stream().map(entry -> entry.name() + ": " + entry.value().inOneLine())
+                    .collect(Collectors.joining(", ", "{", "}"));
         }
     }
 

@@ -10,6 +10,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import org.pofk.chain.Model.Parameter;
+import org.pofk.chain.Model.Setting;
 import org.pofk.exact.Rational;
 import org.pofk.formula.LinearForm;
 import org.pofk.formula.ParsedFormula;
@@ -72,15 +73,22 @@ final class ParametersSection {
         Optional<Node> override = Optional.ofNullable(reading.overrides().parameters().get(entry.name()))
                 .map(text -> new Node.Scalar(option(entry.name()), text, Node.Style.QUOTED));
         if (entry.value().asMapping().isEmpty()) {
+            override.ifPresent(value -> set(entry, value, Optional.of(entry.value())));
             return new Declaration(entry.key(), scalar(override.or(() -> Optional.of(entry.value()))),
                     Optional.empty(), Optional.empty(), Optional.empty(), Optional.empty());
         }
         String on = "parameter '" + entry.name() + "'";
         Fields fields = Fields.of(entry.value().asMapping().get(), on, KEYS, reading);
+        override.ifPresent(value -> set(entry, value, fields.value("value")));
         return new Declaration(entry.key(), scalar(override.or(() -> fields.value("value"))), fields.value("from"),
                 fields.value("to"), fields.value("meaning").flatMap(node -> reading.text(node, "'meaning'")),
                 reading.remarks().stream().filter(remark -> remark.on().equals(on) && remark.kind().equals("source"))
-                        .map(remark -> remark.text()).findFirst());
+                        .filter(remark -> override.isEmpty()).map(remark -> remark.text()).findFirst());
+    }
+
+    private void set(Node.Entry entry, Node value, Optional<Node> inFile) {
+        reading.settings().add(new Setting(Optional.of(entry.name()), value.inOneLine(),
+                inFile.map(Node::inOneLine).filter(text -> !text.isEmpty())));
     }
 
     /** The scalar that defines a value; none for nothing, {@code ~} and {@code null}. */

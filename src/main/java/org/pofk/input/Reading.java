@@ -8,6 +8,7 @@ import java.util.List;
 import java.util.Optional;
 import org.pofk.chain.Model.Origin;
 import org.pofk.chain.Model.Remark;
+import org.pofk.chain.Model.Setting;
 import org.pofk.chain.Model.Written;
 import org.pofk.text.Faults;
 import org.pofk.text.Position;
@@ -25,6 +26,7 @@ final class Reading {
     private final List<String> changes = new ArrayList<>();
     private final List<Written> written = new ArrayList<>();
     private final List<Origin> tables = new ArrayList<>();
+    private final List<Setting> settings = new ArrayList<>();
     private int suggestions;
     private int count;
 
@@ -55,6 +57,10 @@ final class Reading {
 
     List<Origin> tables() {
         return tables;
+    }
+
+    List<Setting> settings() {
+        return settings;
     }
 
     /**

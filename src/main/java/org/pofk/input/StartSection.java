@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import org.pofk.chain.Chain;
+import org.pofk.chain.Model.Setting;
 import org.pofk.chain.SparseMatrix;
 import org.pofk.chain.SparseMatrix.Entry;
 import org.pofk.exact.Rational;
@@ -42,6 +43,7 @@ final class StartSection {
         Optional<String> override = reading.overrides().start();
         if (override.isPresent()) {
             Position option = Position.ofWhole(Overrides.START_OPTION);
+            reading.settings().add(new Setting(Optional.empty(), override.get(), written.map(Node::inOneLine)));
             return inState(new Node.Scalar(option, override.get(), Node.Style.QUOTED));
         }
         if (written.isEmpty()) {

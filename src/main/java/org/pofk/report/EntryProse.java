@@ -16,13 +16,17 @@ final class EntryProse {
             case REVISION -> Prose.of("revision");
             case PREPARED_BY -> Prose.of("prepared by");
             case ASSUMPTION -> Prose.of("assumption");
+            case CONCERNS -> Prose.of("concerns");
             case KIND -> Prose.of("kind");
+            case CONVENTION -> Prose.of("convention");
             case STEP -> Prose.of("one step is");
             case STEP_LASTS -> Prose.of("a step lasts");
             case FIRST_STEP -> Prose.of("first step");
             case STATE -> Prose.of("state");
             case START -> named("start in ", of);
+            case START_IN_FILE -> Prose.of("start in the file, not used here");
             case PARAMETER -> named("parameter ", of);
+            case PARAMETER_IN_FILE -> named("parameter ", of).and(" in the file, not used here");
             case DEFINITION -> named("definition of ", of);
             case RANGE -> named("range of ", of);
             case MEANING -> named("meaning of ", of);
@@ -38,6 +42,8 @@ final class EntryProse {
             case DISCOUNT -> Prose.of("discount a step");
             case SET -> named("set ", of);
             case OUTPUT -> named("output ", of);
+            case ADJUSTED -> Prose.of("changed on entry");
+            case ORDER -> Prose.of("order of the " + of.get(0));
             case NOTE -> Prose.of(of.get(0) + " on ").andName(of.get(1));
         };
     }

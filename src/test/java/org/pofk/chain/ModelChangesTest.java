@@ -4,9 +4,11 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.io.IOException;
+import java.lang.reflect.RecordComponent;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.EnumSet;
 import java.util.List;
 import java.util.Map;
@@ -37,6 +39,41 @@ class ModelChangesTest {
               down: {up: 3/5, down: rest}
             sets: {working: [up, slow]}
             outputs: {lost: down, load: {up: 1, slow: 1/2}}
+            """;
+
+    /** Without what is worked out, so that an edit changes one entry. */
+    private static final String PLAIN = FULL.replace("slow: 2*f, down: 1/100, up: rest", "slow: 0.1, down: 1/100, up: 0.89")
+            .replace("slow: rest", "slow: 0.4").replace("{up: 3/5, down: rest}", "{up: 3/5, down: 0.4, note: seen}")
+            .replace("assumptions: [one crew]", "assumptions: [one crew], concerns: structure")
+            .replace("source: log}}", "source: log}, g: 2*f}")
+            + "costs: {unit: kEUR, each step in: {down: 3}, each move: {up: {down: 7}}, at start: 2, discount: 1%}\n";
+
+    private static final String ROUNDED = """
+            pofk: 1
+            states: [up, down]
+            start: up
+            matrix: {orientation: rows, entries: [[0.33, 0.33], [1, 0]]}
+            sums: rescale
+            """;
+
+    private static final String TESTED = """
+            pofk: 1
+            states: [up, down]
+            start: up
+            transitions: {up: {down: 1/9, up: rest}, down: stays}
+            actions: {test: {down: {up: 1/2, down: rest}}, wash: {up: {down: 1/7, up: rest}}}
+            schedule: [{every: 6, first: 2, do: test}, {every: 4, do: wash}]
+            """;
+
+    private static final String PHASED = """
+            pofk: 1
+            states: [up, down]
+            start: up
+            moves:
+              wet: {up: {down: 1/9, up: rest}, down: {up: 1}}
+              dry: {up: {down: 1/99, up: rest}, down: {up: 1}}
+            phases: [{for: 3, use: wet}, {for: 9, use: dry}]
+            repeat: once
             """;
 
     private static Model read(String text) throws RefusedException {
@@ -87,32 +124,96 @@ class ModelChangesTest {
         assertTrue(changes > 200, changes + " changes");
     }
 
-    /** One edit, and the subject of the one entry that it changes. */
-    @Test
-    void eachEditIsSaidAsWhatItIs() throws Exception {
-        Map<String, Map<String, Subject>> edits = Map.ofEntries(
-                edit("Transfer line", "Transfer lines", Subject.TITLE), edit("TN-7", "TN-8", Subject.DOCUMENT),
-                edit("revision: A", "revision: B", Subject.REVISION), edit("line desk", "other desk", Subject.PREPARED_BY),
-                edit("is: shift", "is: slot", Subject.STEP), edit("8 h", "6 h", Subject.STEP_LASTS),
-                edit("2031", "2032", Subject.FIRST_STEP), edit("to: 1/2", "to: 1/3", Subject.RANGE),
-                edit("fails in a shift", "fails in it", Subject.MEANING), edit("source: log", "source: logs", Subject.NOTE),
-                edit("working: [up, slow]", "working: [up]", Subject.SET), edit("lost: down", "lost: 1 - up - slow",
-                        Subject.OUTPUT), edit("pofk: 1", "pofk: 1\nkind: recursion", Subject.KIND));
-        Set<Subject> seen = EnumSet.noneOf(Subject.class);
-        for (Map.Entry<String, Map<String, Subject>> edit : edits.entrySet()) {
-            Map.Entry<String, Subject> to = edit.getValue().entrySet().iterator().next();
-            String plain = FULL.replace("up: rest", "up: 0.89").replace("slow: rest", "slow: 0.4")
-                    .replace("down: rest", "down: 0.4");
-            List<Change> changes = ModelChanges.of(read(plain), read(plain.replace(edit.getKey(), to.getKey()))).changes();
-            assertEquals(List.of(to.getValue()), changes.stream().map(change -> change.entry().subject()).toList(),
-                    edit + " " + changes);
-            seen.add(to.getValue());
+    /** A text, what is edited in it, and the subject of the entries that this changes. */
+    private record Edit(String in, String from, String to, Subject subject) {
+        List<Change> changes() throws RefusedException {
+            assertTrue(in.contains(from), from);
+            return ModelChanges.of(read(in), read(in.replace(from, to))).changes();
         }
-        assertEquals(edits.size(), seen.size());
     }
 
-    private static Map.Entry<String, Map<String, Subject>> edit(String from, String to, Subject subject) {
-        return Map.entry(from, Map.of(to, subject));
+    private static Edit edit(String from, String to, Subject subject) {
+        return new Edit(PLAIN, from, to, subject);
+    }
+
+    private static final List<Edit> EDITS = List.of(
+            edit("Transfer line", "Transfer lines", Subject.TITLE), edit("TN-7", "TN-8", Subject.DOCUMENT),
+            edit("revision: A", "revision: B", Subject.REVISION), edit("line desk", "other desk", Subject.PREPARED_BY),
+            edit("concerns: structure", "concerns: protective function", Subject.CONCERNS),
+            edit(", concerns: structure", "", Subject.CONCERNS), edit("[one crew]", "[two crews]", Subject.ASSUMPTION),
+            edit("[one crew]", "[one crew, one crew]", Subject.ASSUMPTION),
+            edit("pofk: 1", "pofk: 1\nconvention: rows", Subject.CONVENTION),
+            edit("is: shift", "is: slot", Subject.STEP), edit("8 h", "6 h", Subject.STEP_LASTS),
+            edit("2031", "2032", Subject.FIRST_STEP), edit("[up, slow, down]", "[up, down, slow]", Subject.ORDER),
+            new Edit(TESTED, "down]\nstart: up\ntransitions: {", "down, dry]\nstart: up\ntransitions: {dry: stays, ",
+                    Subject.STATE),
+            edit("{up: 9/10, slow: 1/10}", "{up: 4/5, slow: 1/5}", Subject.START),
+            edit("value: 1/20", "value: 1/21", Subject.PARAMETER), edit("g: 2*f", "g: 1/10", Subject.DEFINITION),
+            edit("to: 1/2", "to: 1/3", Subject.RANGE), edit("fails in a shift", "fails in it", Subject.MEANING),
+            edit("source: log", "source: logs", Subject.NOTE), edit("note: seen", "note: counted", Subject.NOTE),
+            edit("{up: 1/2, down: 1/10, slow: 0.4}", "{up: 1/2, down: 1/5, slow: 0.3}", Subject.MOVE),
+            edit("working: [up, slow]", "working: [up]", Subject.SET),
+            edit("working: [up, slow]", "working: [up, slow], idle: [down]", Subject.SET),
+            edit("lost: down", "lost: 1 - up - slow", Subject.OUTPUT), edit("slow: 1/2}", "slow: 1/3}", Subject.OUTPUT),
+            edit("lost: down, load: {up: 1, slow: 1/2}", "load: {up: 1, slow: 1/2}, lost: down", Subject.ORDER),
+            edit("unit: kEUR", "unit: EUR", Subject.COST_UNIT), edit("in: {down: 3}", "in: {down: 4}", Subject.COST_OF_STATE),
+            edit("{up: {down: 7}}", "{up: {down: 8}}", Subject.COST_OF_MOVE),
+            edit("at start: 2", "at start: 5", Subject.COST_AT_START), edit(", discount: 1%", "", Subject.DISCOUNT),
+            new Edit(PLAIN.substring(0, PLAIN.indexOf("costs")), "pofk: 1", "pofk: 1\nkind: recursion", Subject.KIND),
+            new Edit(ROUNDED, "[0.33, 0.33]", "[0.25, 0.25]", Subject.ADJUSTED),
+            new Edit(TESTED, "every: 6", "every: 7", Subject.ACTION), new Edit(TESTED, "first: 2", "first: 3", Subject.ACTION),
+            new Edit(TESTED, "down: {up: 1/2, down: rest}}", "down: {up: 1/3, down: rest}}", Subject.ACTION_MOVE),
+            new Edit(TESTED, "[{every: 6, first: 2, do: test}, {every: 4, do: wash}]",
+                    "[{every: 4, do: wash}, {every: 6, first: 2, do: test}]", Subject.ORDER),
+            new Edit(PHASED, "for: 3", "for: 4", Subject.PHASE),
+            new Edit(PHASED, "up: {down: 1/9, up: rest}", "up: {down: 1/8, up: rest}", Subject.PHASE_MOVE),
+            new Edit(PHASED, "repeat: once", "repeat: yes", Subject.AFTER_PHASES));
+
+    /** Whatever a model file can say is tried: every subject there is, but what the command line adds. */
+    @Test
+    void eachEditIsSaidAsWhatItIs() throws Exception {
+        Set<Subject> seen = EnumSet.of(Subject.PARAMETER_IN_FILE, Subject.START_IN_FILE);
+        for (Edit edit : EDITS) {
+            List<Subject> subjects = edit.changes().stream().map(change -> change.entry().subject()).distinct().toList();
+            assertTrue(subjects.contains(edit.subject()), edit.from() + " " + edit.changes());
+            assertTrue(Set.of(Subject.PARAMETER, Subject.STATE, Subject.PHASE_MOVE).contains(edit.subject())
+                    || subjects.size() == 1, edit.from() + " " + edit.changes());
+            seen.add(edit.subject());
+        }
+        assertEquals(EnumSet.allOf(Subject.class), seen);
+    }
+
+    /** What is put into a model later must be compared too, as all of this is, or be how a file is laid out. */
+    @Test
+    void allThatAModelHoldsIsCompared() {
+        assertEquals(List.of("title", "step", "convention", "about", "chain", "schedule", "costs", "parameters", "notes",
+                "changes", "written", "origin", "tables", "settings"), components(Model.class));
+        assertEquals(List.of("is", "lasts", "first"), components(Model.Step.class));
+        assertEquals(List.of("document", "revision", "preparedBy", "assumptions", "concerns"), components(Model.About.class));
+        assertEquals(List.of("name", "value", "definition", "from", "to", "meaning", "source"),
+                components(Model.Parameter.class));
+        assertEquals(List.of("kind", "states", "matrix", "start", "sets", "outputs"), components(Chain.class));
+        assertEquals(List.of("unit", "eachStep", "moves", "atStart", "discount"), components(Costs.class));
+        assertEquals(List.of("recurring", "phases"), components(Schedule.class));
+        assertEquals(List.of("action", "every", "first", "when"), components(Schedule.Recurring.class));
+    }
+
+    private static List<String> components(Class<?> record) {
+        return Arrays.stream(record.getRecordComponents()).map(RecordComponent::getName).toList();
+    }
+
+    /** With the same values on the command line, what the files say there is told all the same. */
+    @Test
+    void whatTheCommandLineReplacesIsComparedToo() throws Exception {
+        Overrides overrides = new Overrides(Map.of("f", "1/10"), Optional.of("up"));
+        Model before = ModelReader.read(Source.ofText("line.yaml", FULL), Optional.empty(), overrides);
+        Model after = ModelReader.read(Source.ofText("line.yaml", FULL.replace("1/20", "1/25").replace("up: 9/10, slow: 1/10",
+                "slow: 1")), Optional.empty(), overrides);
+        assertEquals(List.of(
+                new Change(Entry.of(Subject.START_IN_FILE), Optional.of("{up: 9/10, slow: 1/10}"), Optional.of("{slow: 1}")),
+                new Change(Entry.of(Subject.PARAMETER_IN_FILE, "f"), Optional.of("1/20"), Optional.of("1/25"))),
+                ModelChanges.of(before, after).changes());
+        assertEquals(Optional.empty(), before.parameters().get(0).source());
     }
 
     @Test
