@@ -27,7 +27,7 @@ public record Simulation(long seed, int runs, List<Series> series) {
     public enum Method {
         /** Clopper and Pearson 1934, for the probability of a set of states. */
         CLOPPER_PEARSON,
-        /** Hoeffding 1963, theorem 2 (from memory), for the mean of a reading with other coefficients than 0 and 1. */
+        /** Hoeffding, Probability inequalities for sums of bounded random variables, 1963, for the mean of a reading with other coefficients than 0 and 1. */
         HOEFFDING
     }
 

@@ -8,14 +8,14 @@ import org.pofk.answer.AbsentEigenvalues.Reason;
 import org.pofk.formula.Formulas;
 import org.pofk.modes.TablePair;
 
-/** Which eigenvalues of A are no part of an output, and why, in one line. */
+/** Which eigenvalues of the matrix are no part of an output, and why, in one line. */
 final class AbsentProse {
     private AbsentProse() {
     }
 
     static Prose of(AbsentEigenvalues found) {
         if (found.factors().isEmpty()) {
-            return Prose.of("all of A's are in it");
+            return Prose.of("all of the matrix's are in it");
         }
         List<Prose> reasons = new ArrayList<>();
         for (Reason reason : Reason.values()) {
@@ -29,7 +29,7 @@ final class AbsentProse {
                 }));
             }
         }
-        return Prose.of("absent of A's: ").and(Prose.joined(reasons, "; "));
+        return Prose.of("absent of the matrix's: ").and(Prose.joined(reasons, "; "));
     }
 
     private static Prose name(Absent absent) {

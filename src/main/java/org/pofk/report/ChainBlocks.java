@@ -1,7 +1,9 @@
 package org.pofk.report;
 
 import java.util.ArrayList;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.stream.Collectors;
 import java.util.stream.IntStream;
 import org.pofk.chain.Chain;
@@ -112,9 +114,11 @@ final class ChainBlocks {
         if (values.size() <= WRITTEN_OUT_UP_TO) {
             return Prose.of(values.stream().map(Rational::toString).collect(Collectors.joining(", ", "(", ")")));
         }
-        List<Prose> entries = IntStream.range(0, values.size()).filter(i -> !values.get(i).isZero())
-                .mapToObj(i -> Prose.of(values.get(i) + " at ").andName(model.chain().states().get(i))).toList();
-        return Prose.joined(entries, ", ").and(", 0 elsewhere");
+        Map<Rational, List<Integer>> places = IntStream.range(0, values.size()).filter(i -> !values.get(i).isZero())
+                .boxed().collect(Collectors.groupingBy(values::get, LinkedHashMap::new, Collectors.toList()));
+        List<Prose> entries = places.entrySet().stream().map(each -> Prose.of(each.getKey() + " at ")
+                .and(StateNames.of(each.getValue(), model.chain().states()))).toList();
+        return Prose.joined(entries, "; ").and("; 0 elsewhere");
     }
 
     private void takingPart(Reduction reduction) {
@@ -138,9 +142,11 @@ final class ChainBlocks {
     private void lumping(Lumping lumping, Reduction reduction) {
         blocks.add(new Paragraph(switch (lumping.kind()) {
             case EXACT -> "The start is the same throughout these blocks, and so stays the state; states of a block are"
-                    + " taken together: A U = U Ã, x(0) = U x̃(0), c̃ = c U.";
+                    + " taken together: " + (isByColumns() ? "A U = U Ã, x(0) = U x̃(0), c̃ = c U."
+                            : "U P = P̃ U, p(0) = p̃(0) U, c̃ = U c.");
             case ORDINARY -> "The outputs are the same throughout these blocks, and only their sums are needed; states"
-                    + " of a block are taken together: V A = Ã V, c = c̃ V, x̃(0) = V x(0).";
+                    + " of a block are taken together: " + (isByColumns() ? "V A = Ã V, c = c̃ V, x̃(0) = V x(0)."
+                            : "P V = V P̃, c = V c̃, p̃(0) = p(0) V.");
         }));
         boolean first = lumping.equals(reduction.lumpings().get(0));
         blocks.add(new Items(IntStream.range(0, lumping.blocks().size()).mapToObj(i -> Prose.of("block "
@@ -149,6 +155,6 @@ final class ChainBlocks {
                                 .collect(Collectors.joining(", "))))).toList()));
         List<String> blockNames = IntStream.rangeClosed(1, lumping.blocks().size()).mapToObj(i -> "block " + i).toList();
         blocks.addAll(new MatrixBlocks(blockNames, lumping.after().matrix(), convention)
-                .of(convention == Convention.COLUMNS ? "Ã" : "P̃"));
+                .of(isByColumns() ? "Ã" : "P̃"));
     }
 }

@@ -33,8 +33,14 @@ final class CheckBlocks {
             return;
         }
         blocks.add(new Heading(2, "How it was checked"));
-        blocks.add(new Paragraph("Beside the proof, which needs none of this: the formula was compared with what comes"
-                + " out when the model is stepped."));
+        if (derived.outputs().stream().noneMatch(CheckBlocks::isChecked)) {
+            blocks.add(new Paragraph("Not reached within the budget."));
+            return;
+        }
+        if (derived.outputs().stream().anyMatch(output -> output.comparison().isPresent())) {
+            blocks.add(new Paragraph("Beside the proof, which needs none of this: the formula was compared with what"
+                    + " comes out when the model is stepped."));
+        }
         if (derived.outputs().stream().flatMap(output -> output.comparison().stream())
                 .anyMatch(comparison -> comparison.random().isPresent())) {
             blocks.add(SimulationDocument.sampled(Deriving.RUNS, Deriving.SEED));
@@ -42,8 +48,16 @@ final class CheckBlocks {
         derived.outputs().forEach(this::output);
     }
 
+    private static boolean isChecked(DerivedOutput output) {
+        return output.comparison().isPresent() || output.poleCheck().isPresent() || output.secondOpinion().isPresent();
+    }
+
     private void output(DerivedOutput output) {
         blocks.add(new Heading(3, OutputProse.atStep(output.output())));
+        if (!isChecked(output)) {
+            label("checked", MissingBlocks.NOT_DECIDED);
+            return;
+        }
         output.comparison().ifPresent(this::compared);
         output.poleCheck().ifPresent(check -> label("poles", PoleProse.of(check)));
         output.secondOpinion().ifPresent(opinion -> label("second opinion", CheckProse.of(opinion)));

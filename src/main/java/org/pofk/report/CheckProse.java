@@ -20,8 +20,8 @@ final class CheckProse {
     }
 
     static String powers(Comparison.ExactPowers powers) {
-        return powers.largestDifference().isZero() ? "equal to exact powers of A at k = 0 … " + powers.last()
-                : "differs from exact powers of A by " + small(powers.largestDifference()) + " at k = " + powers.at();
+        return powers.largestDifference().isZero() ? "equal to exact powers of the matrix at k = 0 … " + powers.last()
+                : "differs from exact powers of the matrix by " + small(powers.largestDifference()) + " at k = " + powers.at();
     }
 
     static String doubles(Comparison.DoubleStepping doubles) {

@@ -69,7 +69,7 @@ final class JsonOutput {
         });
     }
 
-    private static boolean isReduced(Expansion.Part<Rational> part) {
+    static boolean isReduced(Expansion.Part<Rational> part) {
         return part.coefficients().stream().allMatch(coefficient -> coefficient.denominator().isConstant());
     }
 

@@ -2,7 +2,7 @@ package org.pofk.report;
 
 import org.pofk.answer.HighPowers;
 
-/** Where comparing two successive powers of A would have stopped at a wrong value. */
+/** Where comparing two successive powers of the matrix would have stopped at a wrong value. */
 final class LongRunWarning {
     private LongRunWarning() {
     }
@@ -10,7 +10,7 @@ final class LongRunWarning {
     static String of(HighPowers.Stop stop, int digits) {
         String habit = stop.way() == HighPowers.Way.STEP_BY_STEP
                 ? "comparing each state with the one before"
-                : "squaring A until it no longer changes";
+                : "squaring the matrix until it no longer changes";
         String cause = switch (stop.outcome()) {
             case RIGHT -> throw new AssertionError("no warning is due at k = " + stop.k());
             case MISLED_BY_CYCLE -> "misled by a cycle";
@@ -18,6 +18,6 @@ final class LongRunWarning {
             case MISLED_BY_SIZE -> "too early for an output of this size";
         };
         return habit + " would have stopped at k = " + stop.k() + " with "
-                + (stop.value().containsZero() ? "0" : ValueText.of(stop.value().middle(), digits)) + ", " + cause;
+                + DecidedDigits.of(stop.value(), digits, ValueText::of) + ", " + cause;
     }
 }

@@ -80,7 +80,8 @@ final class ModelBlocks {
             blocks.add(new Paragraph(Prose.of(chain.size() + " states, too many to be listed here; they are those of "
                     + "the model file. The start: ").and(StartProse.of(chain)).and(".")));
             chain.sets().forEach((name, states) -> blocks.add(new Labelled(Prose.of("set ").andName(name),
-                    Prose.of(states.size() + (states.size() == 1 ? " state" : " states")))));
+                    Prose.of(states.size() + (states.size() == 1 ? " state: " : " states: "))
+                            .and(StateNames.of(states.stream().sorted().toList(), chain.states())))));
         }
         if (isChain) {
             named("never left", structure.absorbing());
@@ -126,13 +127,17 @@ final class ModelBlocks {
         List<Integer> read = IntStream.range(0, chain.size()).filter(i -> !output.coefficients().get(i).isZero())
                 .boxed().toList();
         boolean isPlain = read.stream().allMatch(i -> output.coefficients().get(i).isOne());
-        if (read.size() > NAMES_AT_MOST || read.isEmpty()) {
+        if (read.isEmpty() || !isPlain && read.size() > NAMES_AT_MOST) {
             return Prose.name(output.definition());
+        }
+        if (read.size() > NAMES_AT_MOST && chain.kind() == Chain.Kind.CHAIN) {
+            return Prose.of("the probability of being in one of " + read.size() + " states: ")
+                    .and(StateNames.of(read, chain.states()));
         }
         Prose sum = Prose.joined(read.stream().map(i -> isPlain ? Prose.name(chain.states().get(i))
                 : weighted(output.coefficients().get(i), chain.states().get(i))).toList(), isPlain ? " or " : " + ");
         boolean isChain = chain.kind() == Chain.Kind.CHAIN;
-        return Prose.of(isChain && isPlain ? "the probability to be in " : "the "
+        return Prose.of(isChain && isPlain ? "the probability of being in " : "the "
                 + (isChain ? "expected value of " : "value of ")).and(isPlain && !isChain ? Prose.joined(read.stream()
                         .map(i -> Prose.name(chain.states().get(i))).toList(), " + ") : sum)
                 .and(output.constant().isZero() ? "" : " + " + output.constant());

@@ -52,6 +52,9 @@ final class MoveBlocks {
                     + (changes.size() > CHANGES_LISTED_UP_TO ? ", the first " + CHANGES_LISTED_UP_TO + " of "
                             + changes.size() + " entries:" : ":")));
             blocks.add(new Items(changes.stream().limit(CHANGES_LISTED_UP_TO).toList()));
+            if (changes.size() > CHANGES_LISTED_UP_TO) {
+                blocks.add(new Paragraph("And " + (changes.size() - CHANGES_LISTED_UP_TO) + " more."));
+            }
         }
         return blocks;
     }

@@ -13,6 +13,7 @@ import org.pofk.modes.RealValue;
 record NumberFormula(Style style) {
     /** A short exact form is no longer than a decimal would be, and a little. */
     private static final int ROOM = 6;
+    static final String ROUNDED = "≈ ";
     private static final Rational DEGREES_IN_HALF_TURN = Rational.of(180);
 
     Formula of(RealValue value) {
@@ -36,6 +37,26 @@ record NumberFormula(Style style) {
         }
         Enclosed degrees = value.enclosure().times(Enclosed.of(DEGREES_IN_HALF_TURN)).dividedBy(Enclosed.pi());
         return Formulas.product(List.of(decimal(new RealValue(Optional.empty(), degrees)), Formula.Constant.DEGREE));
+    }
+
+    /** With ≈ before it where it is rounded. */
+    Prose marked(RealValue value) {
+        return Prose.of(isRounded(value) ? ROUNDED : "").andFormula(of(value));
+    }
+
+    /** An angle with ≈ before it where it is rounded. */
+    Prose markedAngle(RealValue value) {
+        return Prose.of(isRoundedAngle(value) ? ROUNDED : "").andFormula(angle(value));
+    }
+
+    /** Whether what is shown isn't the value itself. */
+    boolean isRounded(RealValue value) {
+        return value.exact().filter(this::isShort).isEmpty() && !value.decimal(style.digits()).exact();
+    }
+
+    boolean isRoundedAngle(RealValue value) {
+        return style.angles() == Style.Angles.RADIANS ? isRounded(value)
+                : value.exact().flatMap(PiMultiple::of).isEmpty();
     }
 
     private boolean isShort(Formula exact) {

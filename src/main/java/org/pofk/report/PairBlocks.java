@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import org.pofk.formula.Formula;
 import org.pofk.formula.Formulas;
+import org.pofk.formula.PlainText;
 import org.pofk.modes.Derivation;
 import org.pofk.modes.Derivation.PairStep;
 import org.pofk.modes.RealValue;
@@ -16,6 +17,8 @@ import org.pofk.report.Document.Relation;
 /** How the two terms of a conjugate pair of poles join to one that oscillates, step by step. */
 final class PairBlocks {
     static final int WORKED_UP_TO = 6;
+    private static final int EXACT_UP_TO = 60;
+    private static final Prose BOTH = Prose.of("both terms");
 
     private final NumberFormula numbers;
     private final List<Block> blocks = new ArrayList<>();
@@ -37,14 +40,33 @@ final class PairBlocks {
     }
 
     private void pair(PairStep pair) {
-        Formula argument = numbers.angle(pair.argument());
-        blocks.add(new Paragraph(Prose.of("The pair λ = ").and(WayTables.pole(pair, numbers))
+        blocks.add(new Paragraph(Prose.of(numbers.isRounded(pair.mode().modulus())
+                || numbers.isRoundedAngle(pair.mode().angle()) ? "The pair λ " : "The pair λ = ").and(WayTables.pole(pair, numbers))
                 .and(pair.mode().power() == 0 ? ":" : ", its fraction of power " + (pair.mode().power() + 1) + ":")));
-        label("R", Prose.formula(rectangular(pair.real(), pair.imaginary())));
-        label("|R|", Prose.formula(numbers.of(pair.modulus())).and(", and twice that is ")
-                .andFormula(numbers.of(pair.mode().amplitude())));
-        label("arg R", Prose.formula(argument).and(", " + quadrant(sign(pair.real()), sign(pair.imaginary()))));
-        blocks.add(new Display(Prose.of("both terms"), Relation.EQUAL, pair.mode().accept(new ModeTerm(numbers))));
+        label("R", Prose.of(numbers.isRounded(pair.real()) || numbers.isRounded(pair.imaginary())
+                ? NumberFormula.ROUNDED : "").andFormula(rectangular(pair.real(), pair.imaginary())));
+        label("|R|", numbers.marked(pair.modulus()).and(", and twice that is ")
+                .and(numbers.marked(pair.mode().amplitude())));
+        label("arg R", argument(pair.argument()).and(", " + quadrant(sign(pair.real()), sign(pair.imaginary()))));
+        blocks.add(pair.mode().accept(new ModeRounding(numbers)) ? rounded(pair)
+                : new Display(BOTH, Relation.EQUAL, pair.mode().accept(new ModeTerm(numbers))));
+    }
+
+    /** An exact form that is longer than its decimals stands beside them. */
+    private Prose argument(RealValue argument) {
+        return argument.exact().filter(exact -> numbers.isRounded(argument) && isShort(exact))
+                .map(exact -> Prose.formula(exact).and(" ")).orElse(Prose.EMPTY).and(numbers.markedAngle(argument));
+    }
+
+    /** The exact terms joined, where they are short and angles are in radians. */
+    private Display rounded(PairStep pair) {
+        return pair.joined().filter(exact -> isShort(exact) && numbers.style().angles() == Style.Angles.RADIANS)
+                .map(exact -> new Display(BOTH, Relation.EQUAL, exact))
+                .orElseGet(() -> new Display(BOTH, Relation.ROUNDED, pair.mode().accept(new ModeTerm(numbers))));
+    }
+
+    private static boolean isShort(Formula exact) {
+        return PlainText.UNICODE.write(exact).length() <= EXACT_UP_TO;
     }
 
     private Formula rectangular(RealValue real, RealValue imaginary) {

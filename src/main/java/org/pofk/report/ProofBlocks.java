@@ -8,6 +8,7 @@ import java.util.stream.Collectors;
 import java.util.stream.IntStream;
 import java.util.stream.Stream;
 import org.pofk.answer.ProofWindow;
+import org.pofk.chain.Model.Convention;
 import org.pofk.exact.Rational;
 import org.pofk.formula.Formulas;
 import org.pofk.report.Document.Block;
@@ -28,18 +29,23 @@ import org.pofk.transform.Transform;
 final class ProofBlocks {
     private static final int RECURRENCE_SHOWN_UP_TO = 12;
     private static final int NUMBER_SHOWN_UP_TO = 40;
-    /** What the paper's first theorem says of shift registers is this for any field; its number is from memory. */
+    /** What the paper says of shift registers is this for any field. */
     private static final String SOURCE = "J. L. Massey, Shift-register synthesis and BCH decoding, IEEE Transactions on"
-            + " Information Theory IT-15, 1969, 122–127, theorem 1";
+            + " Information Theory IT-15, 1969, 122–127";
 
+    /** D of the matrix at the start, and the powers of the matrix, in the reader's convention. */
+    private final String atStart;
+    private final String powers;
     private final List<Block> blocks = new ArrayList<>();
 
-    private ProofBlocks() {
+    private ProofBlocks(Convention convention) {
+        this.atStart = convention == Convention.COLUMNS ? "D(A) x(0)" : "p(0) D(P)";
+        this.powers = convention == Convention.COLUMNS ? "A^k" : "P^k";
     }
 
     /** Of every formula a report shows, those of its sections behind those that are derived. */
-    static List<Block> of(Report report) {
-        ProofBlocks proof = new ProofBlocks();
+    static List<Block> of(Report report, Convention convention) {
+        ProofBlocks proof = new ProofBlocks(convention);
         proof.write(Stream.concat(Proved.of(report.derived()),
                 report.answers().stream().flatMap(section -> section.proofs().stream())).toList());
         return proof.blocks;
@@ -74,7 +80,7 @@ final class ProofBlocks {
                     + " (Cayley–Hamilton): that alone proves every k."));
         }
         if (methods.contains(Method.VECTOR)) {
-            blocks.add(new Paragraph("Where D(A) x(0) = 0 holds as a vector, multiplying it by A^k and reading an"
+            blocks.add(new Paragraph("Where " + atStart + " = 0 holds as a vector, multiplying it by " + powers + " and reading an"
                     + " output off it gives the recurrence of every output at every k."));
         }
         blocks.add(new Paragraph("Y(z) is what the recurrence and its first d terms add up to; the expansion of Y(z) is"
@@ -98,7 +104,7 @@ final class ProofBlocks {
         window(formula, isShown);
     }
 
-    private static String compared(Proved formula, int order) {
+    private String compared(Proved formula, int order) {
         RecurrenceProof proof = formula.transform().proof();
         return switch (proof.method()) {
             case WINDOWS -> (proof.order() == 1 ? "the window at k = 0" : "the windows at k = 0 … " + (proof.order() - 1))
@@ -107,7 +113,7 @@ final class ProofBlocks {
             case CHARACTERISTIC -> "order " + order + " is needed and " + (order == 1 ? "one state takes part"
                     : order + " states take part") + "; the terms y(0) … y(" + (proof.comparedSteps() - 1)
                     + ") were compared";
-            case VECTOR -> "D(A) x(0) = 0, in every state that takes part";
+            case VECTOR -> atStart + " = 0, in every state that takes part";
         };
     }
 

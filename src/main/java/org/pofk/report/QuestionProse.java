@@ -34,8 +34,10 @@ final class QuestionProse {
             return Prose.of("What is the expected value of ").andName(output.name());
         }
         boolean isItself = read.size() == 1 && chain.states().get(read.get(0)).equals(output.name());
-        Prose which = read.size() > STATES_NAMED ? Prose.of("one of " + read.size() + " states")
-                : Prose.joined(read.stream().map(chain.states()::get).map(Prose::name).toList(), " or ");
+        List<Prose> parts = StateNames.parts(read, chain.states());
+        Prose which = parts.size() > STATES_NAMED ? Prose.of("one of " + read.size() + " states")
+                : parts.size() < read.size() ? Prose.of("one of the " + read.size() + " states ")
+                        .and(Prose.joined(parts, ", ")) : Prose.joined(parts, " or ");
         return isItself ? Prose.of("What is the probability of being in ").and(which)
                 : Prose.of("What is the probability of ").andName(output.name()).and(" (being in ").and(which).and(")");
     }

@@ -82,12 +82,12 @@ public final class ReportDocument {
         switch (depth) {
             case FULL -> {
                 derivation();
-                add(ProofBlocks.of(report));
+                add(ProofBlocks.of(report, convention));
                 add(CheckBlocks.of(report.derived(), style));
             }
             case BRIEF -> {
                 add(ReportSummary.longFormulas(report, style));
-                add(ProofBlocks.of(report));
+                add(ProofBlocks.of(report, convention));
                 parts.add(new Part(List.of(), report.derived().outputs()));
             }
         }

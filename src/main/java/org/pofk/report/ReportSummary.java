@@ -2,10 +2,12 @@ package org.pofk.report;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.stream.IntStream;
 import org.pofk.answer.DerivedOutput;
 import org.pofk.answer.KeyFigures;
 import org.pofk.answer.LongRun;
+import org.pofk.answer.Peak;
 import org.pofk.answer.StepValue;
 import org.pofk.chain.Model;
 import org.pofk.formula.Formula;
@@ -116,11 +118,20 @@ final class ReportSummary {
             facts.add(new Labelled("long run", new LongRunProse(style.digits()).of(longRun)));
             figures.settling().ifPresent(settling -> facts.add(new Labelled("settles",
                     SettlingProse.of(settling, longRun, style.digits()))));
-            figures.highest().ifPresent(peak -> facts.add(new Labelled("highest", ValueText.of(peak.value(),
-                    style.digits()) + peak.at().map(k -> " at k = " + k)
-                    .orElse(", approached as k grows"))));
+            highest(output, longRun, figures, style).ifPresent(text -> facts.add(new Labelled("highest", text)));
         });
         return facts;
+    }
+
+    /** Nothing where it may grow for ever; a formula without any figures is one whose figures a budget left no time for. */
+    private static Optional<String> highest(DerivedOutput output, LongRun longRun, KeyFigures figures, Style style) {
+        if (figures.highest().isPresent()) {
+            Peak peak = figures.highest().get();
+            return Optional.of(ValueText.of(peak.value(), style.digits()) + peak.at().map(k -> " at k = " + k)
+                    .orElse(", approached as k grows"));
+        }
+        return output.closedForm().isEmpty() || longRun instanceof LongRun.None ? Optional.empty()
+                : Optional.of(figures.equals(KeyFigures.NONE) ? MissingBlocks.NOT_DECIDED : "not decided");
     }
 
     /** A few, spread over those that are listed later. */

@@ -166,7 +166,7 @@ final class ResultBlocks {
             case WINDOWS -> (proof.comparedSteps() == 1 ? "the one exact term compared satisfies"
                     : "all " + terms(proof.comparedSteps()) + " compared satisfy") + " a recurrence of order "
                     + order + ", and " + states(proof.order()) + " (Cayley–Hamilton)";
-            case VECTOR -> "a recurrence of order " + order + " annihilates the start itself, D(A) x(0) = 0, and so"
+            case VECTOR -> "a recurrence of order " + order + " of the matrix takes the start itself to zero, and so"
                     + " every output";
         });
     }

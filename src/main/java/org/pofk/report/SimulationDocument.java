@@ -43,13 +43,13 @@ public final class SimulationDocument {
 
     private static Table table(Series series, int digits) {
         return Table.ofText("", List.of("k", "sampled", "from", "to", "p(k)", "inside"),
-                series.samples().stream().map(sample -> row(sample, digits)).toList());
+                series.samples().stream().map(sample -> row(sample, series.method(), digits)).toList());
     }
 
-    private static List<String> row(Sample sample, int digits) {
-        return List.of(String.valueOf(sample.k()), SampledNumber.text(sample.estimate()),
-                SampledNumber.text(sample.interval().lower()), SampledNumber.text(sample.interval().upper()),
-                SampledNumber.value(sample, digits), switch (sample.verdict()) {
+    private static List<String> row(Sample sample, Simulation.Method method, int digits) {
+        return List.of(String.valueOf(sample.k()), SampledNumber.text(sample.estimate(), method),
+                SampledNumber.text(sample.interval().lower(), method),
+                SampledNumber.text(sample.interval().upper(), method), SampledNumber.value(sample, method, digits), switch (sample.verdict()) {
                     case INSIDE -> "yes";
                     case OUTSIDE -> "NO";
                     case CANT_TELL -> "can't tell here";

@@ -18,8 +18,8 @@ import org.pofk.text.RefusedException;
 
 /**
  * The numbers of a model that name no source. A source stands for all that it is written on: the model, its moves, the
- * moves out of a state, one move, a parameter. What a rest came to and a certain move need none; an expression in
- * parameters has theirs.
+ * moves out of a state, one move, the start, an output, the costs, a parameter. What a rest came to and a certain move
+ * need none; an expression in parameters has theirs.
  */
 final class SourceBlocks {
     private static final Set<String> GIVEN = Set.of("rest", "0", "1");
@@ -40,17 +40,20 @@ final class SourceBlocks {
     }
 
     private List<Block> blocks() {
+        Map<String, List<Prose>> moves = moves();
         List<Prose> open = new ArrayList<>();
-        moves().forEach((from, moves) -> open.add(Prose.of("from ").andName(from).and(": ")
-                .and(Prose.joined(moves, ", "))));
+        if (moves.size() > LISTED_UP_TO) {
+            open.add(Prose.of("the moves out of " + moves.size() + " states, too many to be listed here"));
+        } else {
+            moves.forEach((from, each) -> open.add(Prose.of("from ").andName(from).and(": ")
+                    .and(Prose.joined(each, ", "))));
+        }
+        open.addAll(OtherSources.of(model, sourced));
         model.parameters().stream().filter(each -> each.source().isEmpty() && each.definition().isEmpty())
                 .forEach(each -> open.add(Prose.of("parameter ").andName(each.name()).and(" = " + each.value())));
         Heading heading = new Heading(3, "Numbers without a source");
-        return open.isEmpty() ? List.of(heading, new Paragraph("None: every number of the moves and every parameter"
-                + " names one, or follows from those that do."))
-                : open.size() > LISTED_UP_TO ? List.of(heading, new Paragraph("In " + open.size() + " entries of the"
-                        + " model file, states with their moves and parameters; too many to be listed here."))
-                : List.of(heading, new Items(open));
+        return List.of(heading, open.isEmpty() ? new Paragraph("None: every number of the moves, the start, the outputs"
+                + " and the costs, and every parameter, names one, or follows from those that do.") : new Items(open));
     }
 
     /** The moves without one, by the state they lead out of. */

@@ -10,8 +10,8 @@ import org.pofk.text.Columns;
  * blank) is aligned at the decimal point, or at the right where there are fractions; others at the left.
  */
 record TextColumn(boolean isNumeric, int width, String title, List<String> texts) {
-    private static final Pattern DECIMAL = Pattern.compile("[<>≤≥≈~]?[-−]?[0-9]+(\\.[0-9]*)?([eE][-−+]?[0-9]+)?%?");
-    private static final Pattern FRACTION = Pattern.compile("[-−]?[0-9]+/[0-9]+");
+    private static final Pattern DECIMAL = Pattern.compile("(?:[<>≤≥≈~] ?)?[-−]?[0-9]+(\\.[0-9]*)?([eE][-−+]?[0-9]+)?%?");
+    private static final Pattern FRACTION = Pattern.compile("(?:≈ )?[-−]?[0-9]+/[0-9]+");
 
     static TextColumn of(String title, List<String> cells) {
         List<String> texts = cells.stream().map(String::strip).toList();

@@ -80,13 +80,16 @@ final class WayBlocks {
 
     /** What is done in the same way for every output. */
     static List<Block> rule(List<DerivedOutput> outputs) {
+        if (outputs.stream().allMatch(output -> output.closedForm().isEmpty())) {
+            return List.of();
+        }
         List<Block> rule = new ArrayList<>(List.of(new Heading(2, "From Y(z) to a formula in k"), new Paragraph("Y(z)/z"
                 + " is split into fractions over the poles λ of Y(z). Multiplied by the z that was kept outside, each of"
                 + " them is a line of the table of transforms, and stands for a term in k.")));
         if (outputs.stream().flatMap(output -> output.closedForm().stream())
                 .anyMatch(form -> form.derivation().factors().stream().anyMatch(step -> !step.pairs().isEmpty()))) {
             rule.add(new Paragraph("A complex pole λ comes with its conjugate, its coefficient R with that of R. The two"
-                    + " terms join: R λ^n + conj(R) conj(λ)^n = 2|R| |λ|^n cos(n arg λ + arg R), where the sign of arg R"
+                    + " terms join: R λ^k + conj(R) conj(λ)^k = 2|R| |λ|^k cos(k arg λ + arg R), where the sign of arg R"
                     + " is that of the imaginary part of R."));
         }
         return rule;
@@ -97,13 +100,12 @@ final class WayBlocks {
         Derivation derivation = form.derivation();
         int longest = RationalFunction.longestCoefficient(form.transform().y());
         int degree = form.transform().y().denominator().degree();
+        blocks.addAll(TransformBlocks.found(form.transform()));
         if (degree <= READABLE_DEGREE && longest <= READABLE_COEFFICIENT) {
             transform();
-            expansion(derivation);
+            split(derivation);
         } else {
-            blocks.add(new Paragraph("Y(z) in lowest terms has a denominator of degree " + degree + " and coefficients of"
-                    + " up to " + longest + " characters; neither it nor its expansion can be read, and both are in the"
-                    + " result of derive as JSON."));
+            blocks.addAll(TransformBlocks.tooLong(form));
         }
         blocks.addAll(new WayTables(derivation, numbers).numbered());
         blocks.addAll(PairBlocks.of(derivation, numbers));
@@ -126,6 +128,20 @@ final class WayBlocks {
                 .allMatch(factor -> factor.irreducible() == Factorization.Irreducible.PROVED);
         blocks.add(new Paragraph(proved ? "No factor can be split further over the rational numbers; that is proved."
                 : "That the factors can't be split further isn't proved; nothing below depends on it."));
+    }
+
+    /** Y(z)/z = impulses/z + Σ R/(z − λ)^(p+1), exact. */
+    private void split(Derivation derivation) {
+        List<Formula> terms = new ArrayList<>();
+        for (int at = 0; at < form.expansion().impulses().size(); at++) {
+            Rational value = form.expansion().impulses().get(at);
+            if (!value.isZero()) {
+                terms.add(Formulas.quotient(Formulas.number(value),
+                        Formulas.power(RationalFunction.Z, Formulas.number(at + 1L))));
+            }
+        }
+        derivation.factors().forEach(step -> terms.add(fraction(step)));
+        blocks.add(new Display(Prose.of("Y(z)/z"), Relation.EQUAL, Formulas.sum(terms)));
     }
 
     /** Y(z) = impulses + z · Σ R/(z − λ)^(p+1), exact. */
