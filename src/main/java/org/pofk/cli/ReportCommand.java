@@ -49,7 +49,7 @@ final class ReportCommand implements Work {
 
     @Option(names = "--show", paramLabel = "DEPTH", defaultValue = "full",
             description = "brief or full; ${DEFAULT-VALUE} otherwise")
-    private Depth show;
+    private Report.Depth show;
 
     @Mixin
     private ConditionOptions conditions = new ConditionOptions();
@@ -68,22 +68,6 @@ final class ReportCommand implements Work {
 
     @Mixin
     private SinceOptions since = new SinceOptions();
-
-    /** How much of the way is shown. */
-    enum Depth {
-        BRIEF(Report.Depth.BRIEF), FULL(Report.Depth.FULL);
-
-        private final Report.Depth depth;
-
-        Depth(Report.Depth depth) {
-            this.depth = depth;
-        }
-
-        @Override
-        public String toString() {
-            return Words.lowerCase(this);
-        }
-    }
 
     @Override
     public ExitCode run(Streams streams) throws RefusedException, UsageException, WritingException {
@@ -107,9 +91,9 @@ final class ReportCommand implements Work {
         if (earlier.isPresent() && report.since().isEmpty()) {
             streams.notes().println("pofk: what has changed was not reached within the budget");
         }
-        destination.write(Answer.of(() -> ReportDocument.of(report, show.depth, style, options.convention(read)))
+        destination.write(Answer.of(() -> ReportDocument.of(report, show, style, options.convention(read)))
                 .with(Format.CSV, () -> CsvWriter.write(DerivationTable.of(report.derived(), style.digits())))
-                .with(Format.NOTEBOOK, () -> NotebookWriter.write(report, show.depth, style,
+                .with(Format.NOTEBOOK, () -> NotebookWriter.write(report, show, style,
                         options.convention(read))), streams);
         return code(report, outcome.finished());
     }
@@ -164,7 +148,7 @@ final class ReportCommand implements Work {
     }
 
     private Set<Deriving.Extra> extras() {
-        return show == Depth.BRIEF ? Set.of() : EnumSet.of(Deriving.Extra.COMPARISON, Deriving.Extra.POLE_CHECK,
+        return show == Report.Depth.BRIEF ? Set.of() : EnumSet.of(Deriving.Extra.COMPARISON, Deriving.Extra.POLE_CHECK,
                 Deriving.Extra.SECOND_OPINION);
     }
 

@@ -80,14 +80,18 @@ final class Worker {
             Thread.currentThread().interrupt();
             return false;
         } catch (ExecutionException failed) {
-            throw rethrown(failed.getCause());
+            throw thrown(failed.getCause());
         }
     }
 
-    private static RuntimeException rethrown(Throwable failure) {
+    /** Throws it again; what work can't declare to throw is a fault of ours. */
+    private static AssertionError thrown(Throwable failure) {
         if (failure instanceof Error error) {
             throw error;
         }
-        return (RuntimeException) failure;
+        if (failure instanceof RuntimeException exception) {
+            throw exception;
+        }
+        return new AssertionError("work ended with what it can't declare", failure);
     }
 }

@@ -2,6 +2,7 @@ package org.pofk.cli;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 import java.util.Optional;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
@@ -70,7 +71,7 @@ final class WrongValue {
 
     private static List<String> known(OptionSpec option) {
         List<String> known = new ArrayList<>();
-        option.completionCandidates().forEach(known::add);
+        option.completionCandidates().forEach(candidate -> known.add(candidate.toLowerCase(Locale.ROOT)));
         return known;
     }
 }

@@ -29,6 +29,12 @@ public record Document(List<Block> blocks, List<Sequence> sequences, Set<Integer
         this(blocks, List.of());
     }
 
+    /** Whether the block at a place and the one before it are labelled, and so stand in one list. */
+    static boolean isListed(List<Block> blocks, int place) {
+        return place > 0 && place < blocks.size() && blocks.get(place - 1) instanceof Labelled
+                && blocks.get(place) instanceof Labelled;
+    }
+
     /** Whether the block at a place differs from an earlier issue. */
     boolean isChanged(int place) {
         return changed.contains(place);

@@ -51,14 +51,12 @@ public final class HtmlWriter {
     private void writeBlocks() {
         List<Block> blocks = document.blocks();
         for (int i = 0; i < blocks.size(); i++) {
-            boolean continues = i > 0 && blocks.get(i - 1) instanceof Labelled && blocks.get(i) instanceof Labelled;
-            boolean goesOn = i + 1 < blocks.size() && blocks.get(i + 1) instanceof Labelled;
-            if (blocks.get(i) instanceof Labelled && !continues) {
+            if (blocks.get(i) instanceof Labelled && !Document.isListed(blocks, i)) {
                 lines.add("<dl class=\"facts\">");
             }
             List<String> html = blocks.get(i).accept(new Blocks());
             lines.addAll(document.isChanged(i) ? changed(html) : html);
-            if (blocks.get(i) instanceof Labelled && !goesOn) {
+            if (blocks.get(i) instanceof Labelled && !Document.isListed(blocks, i + 1)) {
                 lines.add("</dl>");
             }
             lines.addAll(extras.behind(i));

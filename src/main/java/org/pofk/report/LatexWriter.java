@@ -77,8 +77,8 @@ public final class LatexWriter {
             boolean isChanged = document.isChanged(i);
             Block block = document.blocks().get(i);
             boolean isBoxed = isChanged && !(block instanceof Document.Table) && !writer.floats(block);
-            boolean isFirst = !(block instanceof Labelled) || !isOfOneList(document, i - 1);
-            boolean isLast = !(block instanceof Labelled) || !isOfOneList(document, i);
+            boolean isFirst = !(block instanceof Labelled) || !isOfOneList(document, i);
+            boolean isLast = !(block instanceof Labelled) || !isOfOneList(document, i + 1);
             if (isBoxed && isFirst) {
                 lines.addAll(List.of("", "\\begin{pofkchanged}"));
             }
@@ -109,12 +109,10 @@ public final class LatexWriter {
         return hasTable && blocks.get(place) instanceof Document.Heading;
     }
 
-    /** Whether a label and the next stand in one list: both have changed, or neither has. */
+    /** Whether a label and the one before it stand in one list: both have changed, or neither has. */
     private static boolean isOfOneList(Document document, int place) {
-        List<Block> blocks = document.blocks();
-        return place >= 0 && place + 1 < blocks.size() && blocks.get(place) instanceof Labelled
-                && blocks.get(place + 1) instanceof Labelled
-                && document.isChanged(place) == document.isChanged(place + 1);
+        return Document.isListed(document.blocks(), place)
+                && document.isChanged(place - 1) == document.isChanged(place);
     }
 
     /** Refuses what the fonts don't have; everything else is in ASCII or a letter that they have. */

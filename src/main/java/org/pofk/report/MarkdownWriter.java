@@ -20,8 +20,7 @@ final class MarkdownWriter {
     static String write(List<Block> blocks) {
         StringBuilder text = new StringBuilder();
         for (int i = 0; i < blocks.size(); i++) {
-            boolean continues = i > 0 && blocks.get(i - 1) instanceof Labelled && blocks.get(i) instanceof Labelled;
-            text.append(i == 0 ? "" : continues ? "\n" : "\n\n").append(blocks.get(i).accept(new Text()));
+            text.append(i == 0 ? "" : Document.isListed(blocks, i) ? "\n" : "\n\n").append(blocks.get(i).accept(new Text()));
         }
         return text.toString();
     }

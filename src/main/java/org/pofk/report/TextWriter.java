@@ -37,7 +37,7 @@ public record TextWriter(Alphabet alphabet, Charset charset, int width) {
         List<String> lines = new ArrayList<>();
         for (int i = 0; i < document.blocks().size(); i++) {
             Block block = document.blocks().get(i);
-            if (i > 0 && needsBlankLine(document.blocks().get(i - 1), block)) {
+            if (i > 0 && needsBlankLine(document.blocks(), i)) {
                 lines.add("");
             }
             String before = document.isChanged(i) ? beforeChanged : beforeOthers;
@@ -48,15 +48,15 @@ public record TextWriter(Alphabet alphabet, Charset charset, int width) {
         return text.toString();
     }
 
-    private static boolean needsBlankLine(Block before, Block block) {
-        return !(before instanceof Document.Heading) && !(before instanceof Labelled && block instanceof Labelled);
+    private static boolean needsBlankLine(List<Block> blocks, int place) {
+        return !(blocks.get(place - 1) instanceof Document.Heading) && !Document.isListed(blocks, place);
     }
 
     /** The width of the widest label among the labelled lines that stand together with the one given. */
     private int labelWidth(List<Block> blocks, int index) {
         Spelling spelling = new Spelling(alphabet, charset);
         int first = index;
-        while (first > 0 && blocks.get(first - 1) instanceof Labelled) {
+        while (Document.isListed(blocks, first)) {
             first--;
         }
         int widest = 0;

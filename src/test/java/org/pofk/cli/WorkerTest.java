@@ -2,10 +2,12 @@ package org.pofk.cli;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertSame;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.io.ByteArrayOutputStream;
+import java.io.IOException;
 import java.io.PrintStream;
 import java.nio.charset.StandardCharsets;
 import java.time.Duration;
@@ -39,6 +41,20 @@ class WorkerTest {
                 Worker.within(Optional.empty(), Progress.UNSEEN, Object::toString, published -> published.accept(7));
         assertTrue(outcome.finished());
         assertEquals(Optional.of(7), outcome.published());
+    }
+
+    /** As libraries do that hide what they throw from the compiler. */
+    @SuppressWarnings("unchecked")
+    private static <E extends Throwable> void undeclared(Throwable failure) throws E {
+        throw (E) failure;
+    }
+
+    @Test
+    void whatWorkDoesNotDeclareIsAFaultOfOursWithItsCause() {
+        IOException cause = new IOException("not declared");
+        AssertionError failure = assertThrows(AssertionError.class, () -> Worker.within(Optional.empty(),
+                Progress.UNSEEN, Object::toString, published -> WorkerTest.<RuntimeException>undeclared(cause)));
+        assertSame(cause, failure.getCause());
     }
 
     @Test
