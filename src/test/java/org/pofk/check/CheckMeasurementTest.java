@@ -48,18 +48,25 @@ class CheckMeasurementTest {
         requireAll(measurement, 5_000);
     }
 
-    /** The same several times over, with other choices each time. */
+    /** The claims of the gate take no more than a minute for five thousand of them. */
     @Test
     @Tag("soak")
-    void rightClaimsPassAndSlipsAreNamedManyTimesOver() {
-        int rounds = 6;
+    void fiveThousandClaimsTakeAMinute() {
         long begun = System.nanoTime();
+        Measurement measurement = measured(1, 10, 40);
+        long seconds = (System.nanoTime() - begun) / 1_000_000_000L;
+        assertTrue(seconds * 5_000 <= measurement.claims() * 60L, () -> seconds + " seconds for "
+                + measurement.claims() + " claims");
+    }
+
+    /** All wrong claims, twice over, with other choices each time. */
+    @Test
+    @Tag("soak")
+    void rightClaimsPassAndSlipsAreNamedTwiceOver() {
+        int rounds = 2;
         Measurement measurement = measured(rounds, 19, 1);
-        long minutes = (System.nanoTime() - begun) / 60_000_000_000L;
         measurement.write(Path.of("target", "check-measurement-soak.txt"));
         requireAll(measurement, rounds * 5_000);
-        assertTrue(minutes <= measurement.claims() / 5_000, () -> minutes + " minutes for " + measurement.claims()
-                + " claims");
     }
 
     /** One claim in so many of the wrong ones; what is misread in the models of these tests is always taken. */
