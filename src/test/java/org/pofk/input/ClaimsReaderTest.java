@@ -104,6 +104,10 @@ class ClaimsReaderTest {
                   - {eigenvector: all, at: 1, are: [0.8532, 0.1386, 0.008176]}
                   - {value: lost, at: 5, is: 0.008, within: 2%, safe side: above, note: as in the table}
                   - {bound: lost, at most: 0.01, for: k >= 0, carried: 4 decimals}
+                  - {settling step: lost, within: 0.001, is: 9}
+                  - {mean passage: all, into: none, from: both, is: 207.2}
+                  - {sum: lost, to: 10, is: 0.0638}
+                  - {mean: lost, from: 1, to: 10, is: 0.00638}
                 """);
         assertEquals(ClaimKind.values().length, claims.claims().stream().map(Claim::kind).distinct().count());
         assertEquals("PN-12 B R. Vale", claims.review().document().get() + " " + claims.review().revision().get() + " "
@@ -179,7 +183,7 @@ class ClaimsReaderTest {
                 Optional.of(Path.of("test-data/refused")), Overrides.NONE));
         assertEquals(List.of("claims.yaml", "test-data/refused/negative.yaml"),
                 refused.faults().stream().map(fault -> fault.position().source()).distinct().toList());
-        assertTrue(refused.getMessage().contains("can't be checked yet"));
+        assertTrue(refused.getMessage().contains("nothing is stated here"));
     }
 
     @Test

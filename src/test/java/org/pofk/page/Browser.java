@@ -20,6 +20,11 @@ final class Browser implements AutoCloseable {
     private static final Pattern STARTED = Pattern.compile("started successfully on port ([0-9]+)");
     private static final ObjectMapper JSON = new ObjectMapper();
 
+    static {
+        // the driver may close a connection between two questions; what it never read is asked again
+        System.setProperty("jdk.httpclient.enableAllMethodRetry", "true");
+    }
+
     private final Process driver;
     private final HttpClient client = HttpClient.newHttpClient();
     private final String session;
