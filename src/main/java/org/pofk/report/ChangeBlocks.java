@@ -1,27 +1,26 @@
 package org.pofk.report;
 
 import java.util.ArrayList;
+import java.util.EnumSet;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import java.util.stream.IntStream;
+import java.util.Set;
 import java.util.stream.Stream;
-import org.pofk.answer.DerivedOutput;
-import org.pofk.answer.KeyFigures;
 import org.pofk.answer.StepValue;
+import org.pofk.chain.Entry.Subject;
 import org.pofk.chain.Model;
-import org.pofk.chain.ModelChanges;
 import org.pofk.chain.ModelChanges.Change;
 import org.pofk.exact.Decimals;
 import org.pofk.exact.Rational;
-import org.pofk.modes.FormulaShape;
 import org.pofk.report.Document.Block;
 import org.pofk.report.Document.Heading;
 import org.pofk.report.Document.Labelled;
 import org.pofk.report.Document.Paragraph;
 import org.pofk.report.Document.Table;
-import org.pofk.transform.Transform;
+import org.pofk.report.OutputPair.Found;
+import org.pofk.report.OutputPair.Standing;
 
 /** What is other than in an earlier issue: the input, then each result before and after. */
 final class ChangeBlocks {
@@ -31,39 +30,35 @@ final class ChangeBlocks {
     private static final int CHANGE_DIGITS = 3;
     /** What fits into a column of a table with two of its kind. */
     private static final int SHORT = 24;
+    private static final Set<Subject> NUMBERS = EnumSet.of(Subject.START, Subject.PARAMETER, Subject.MOVE,
+            Subject.ACTION_MOVE, Subject.PHASE_MOVE, Subject.COST_OF_STATE, Subject.COST_OF_MOVE, Subject.COST_AT_START,
+            Subject.DISCOUNT);
 
-    private final Report before;
-    private final Report after;
-    private final ModelChanges changes;
+    private final Reissue reissue;
     private final Style style;
     private final List<Block> blocks = new ArrayList<>();
 
-    private ChangeBlocks(Report before, Report after, Style style) {
-        this.before = before;
-        this.after = after;
-        this.changes = ModelChanges.of(before.derived().model(), after.derived().model());
+    private ChangeBlocks(Reissue reissue, Style style) {
+        this.reissue = reissue;
         this.style = style;
     }
 
-    static List<Block> of(Report before, Report after, Style style) {
-        ChangeBlocks section = new ChangeBlocks(before, after, style);
+    static List<Block> of(Reissue reissue, Style style) {
+        ChangeBlocks section = new ChangeBlocks(reissue, style);
         section.write();
         return section.blocks;
     }
 
     private void write() {
-        Model old = before.derived().model();
-        blocks.add(new Heading(2, old.about().revision().map(revision -> Prose.of("Changes since revision ")
-                .andName(revision)).orElseGet(() -> Prose.of("Changes since ").andName(old.origin().file()))));
-        blocks.add(file(BEFORE, old.origin()));
-        blocks.add(file(NOW, after.derived().model().origin()));
+        blocks.add(new Heading(2, Prose.of("What has changed ").and(reissue.since())));
+        blocks.add(file(BEFORE, reissue.earlier().origin()));
+        blocks.add(file(NOW, reissue.later().origin()));
+        if (!reissue.settings().isEmpty()) {
+            blocks.add(new Paragraph(Prose.of("Before is ").and(reissue.settings()).and(".")));
+        }
         input();
-        List<Found> was = Found.in(before);
-        List<Found> is = Found.in(after);
-        is.forEach(now -> output(was.stream().filter(each -> isSame(each, now)).findFirst(), Optional.of(now),
-                now.name()));
-        was.stream().filter(gone -> is.stream().noneMatch(now -> isSame(gone, now)))
-                .forEach(gone -> output(Optional.of(gone), Optional.empty(), gone.name()));
+        reissue.outputs().stream().filter(pair -> pair.standing() == Standing.MOVED).forEach(this::output);
+        others();
         answers();
         blocks.add(new Paragraph("What differs from this report of the earlier file has a rule in the margin, where the"
                 + " format has one."));
@@ -73,55 +68,40 @@ final class ChangeBlocks {
         return new Labelled(label, Prose.name(origin.file()).and(", SHA-256 ").andName(origin.sha256()));
     }
 
-    /** An output with what was found of it. */
-    private record Found(DerivedOutput output, KeyFigures figures) {
-        static List<Found> in(Report report) {
-            return IntStream.range(0, report.figures().size())
-                    .mapToObj(i -> new Found(report.derived().outputs().get(i), report.figures().get(i))).toList();
-        }
-
-        String name() {
-            return output.output().name();
-        }
-
-        Optional<Prose> shape() {
-            return output.closedForm().map(form -> Prose.of(ShapeProse.of(FormulaShape.of(form))));
-        }
-
-        List<Labelled> facts(Style style) {
-            return ReportSummary.facts(output, figures, style);
-        }
-    }
-
-    /** Outputs of the same name; a renamed state goes by its later one. */
-    private boolean isSame(Found old, Found now) {
-        return changes.renamed().getOrDefault(old.name(), old.name()).equals(now.name());
-    }
-
-    /** Short values in a table, longer words below each other. */
+    /** Words and numbers in tables, longer words below each other. */
     private void input() {
-        if (changes.isEmpty()) {
-            blocks.add(new Paragraph("Nothing has changed in the input: every exact value and every word is the same."));
-            return;
-        }
+        List<Change> changes = reissue.changes().changes();
         blocks.add(new Heading(3, "What has changed in the input"));
-        List<Change> inTable = changes.changes().stream().filter(ChangeBlocks::isShort).toList();
-        if (!inTable.isEmpty()) {
-            blocks.add(new Table(Prose.EMPTY, List.of(Prose.of("entry"), Prose.of(BEFORE), Prose.of(NOW)),
-                    inTable.stream().map(change -> List.of(EntryProse.of(change.entry()), named(change.before()),
-                            named(change.after()))).toList()));
+        if (changes.isEmpty()) {
+            blocks.add(new Paragraph("Nothing has changed in the input: " + reissue.sameInput() + "."));
         }
-        changes.changes().stream().filter(change -> !isShort(change)).forEach(change ->
-                beforeAndNow(EntryProse.of(change.entry()), change.before().map(Prose::name),
-                        change.after().map(Prose::name)));
+        table(changes.stream().filter(ChangeBlocks::isShort).filter(change -> !isNumber(change)).toList(), NOTHING);
+        table(changes.stream().filter(ChangeBlocks::isShort).filter(ChangeBlocks::isNumber).toList(), Prose.EMPTY);
+        changes.stream().filter(change -> !isShort(change)).forEach(change -> beforeAndNow(EntryProse.of(change.entry()),
+                change.before().map(Prose::name), change.after().map(Prose::name)));
+    }
+
+    /** Numbers apart from words, so that both columns are aligned alike. */
+    private void table(List<Change> changes, Prose nothing) {
+        if (!changes.isEmpty()) {
+            blocks.add(new Table(Prose.EMPTY, List.of(Prose.of("entry"), Prose.of(BEFORE), Prose.of(NOW)),
+                    changes.stream().map(change -> List.of(EntryProse.of(change.entry()),
+                            cell(change, change.before(), nothing), cell(change, change.after(), nothing))).toList()));
+        }
+    }
+
+    /** An amount that a model doesn't name is zero in it; a parameter that it doesn't have is none. */
+    private static Prose cell(Change change, Optional<String> value, Prose nothing) {
+        return value.map(Prose::name).orElse(isNumber(change) && change.entry().subject() != Subject.PARAMETER
+                && change.entry().subject() != Subject.DISCOUNT ? Prose.of("0") : nothing);
+    }
+
+    private static boolean isNumber(Change change) {
+        return NUMBERS.contains(change.entry().subject());
     }
 
     private static boolean isShort(Change change) {
         return Stream.concat(change.before().stream(), change.after().stream()).allMatch(text -> text.length() <= SHORT);
-    }
-
-    private static Prose named(Optional<String> value) {
-        return value.map(Prose::name).orElse(NOTHING);
     }
 
     private void beforeAndNow(Prose label, Optional<Prose> was, Optional<Prose> is) {
@@ -133,17 +113,31 @@ final class ChangeBlocks {
         }
     }
 
-    private void output(Optional<Found> old, Optional<Found> now, String name) {
-        blocks.add(new Heading(3, Prose.name(name).and(": ").and(compared(old, now))));
-        beforeAndNow(Prose.of("formula"), old.flatMap(Found::shape), now.flatMap(Found::shape));
-        pairs(old.map(each -> each.facts(style)), now.map(each -> each.facts(style)));
+    private void output(OutputPair pair) {
+        blocks.add(new Heading(3, Prose.name(pair.name()).and(": " + pair.compared())));
+        Found old = pair.before().orElseThrow();
+        Found now = pair.now().orElseThrow();
+        beforeAndNow(Prose.of("formula"), old.shape(), now.shape());
+        pairs(old.facts(style), now.facts(style));
         Map<Integer, StepValue> was = values(old);
         Map<Integer, StepValue> is = values(now);
-        List<Integer> steps = List.copyOf(is.isEmpty() ? was.keySet() : is.keySet());
-        if (!steps.isEmpty()) {
+        if (!is.isEmpty()) {
             blocks.add(new Table(Prose.EMPTY, List.of(Prose.of("k"), Prose.of(BEFORE), Prose.of(NOW), Prose.of("change")),
-                    steps.stream().map(k -> row(k, Optional.ofNullable(was.get(k)), Optional.ofNullable(is.get(k))))
+                    is.keySet().stream().map(k -> row(k, Optional.ofNullable(was.get(k)), Optional.of(is.get(k))))
                             .toList()));
+        }
+    }
+
+    /** A line for all that have nothing to be compared. */
+    private void others() {
+        Map<String, Standing> words = new LinkedHashMap<>();
+        words.put("not in the earlier report", Standing.NEW);
+        words.put("no longer in the report", Standing.GONE);
+        words.put("the formula is the same", Standing.AS_BEFORE);
+        words.values().removeIf(standing -> reissue.named(standing).isEmpty());
+        if (!words.isEmpty()) {
+            blocks.add(new Heading(3, "Outputs new, gone or as before"));
+            words.forEach((label, standing) -> blocks.add(new Labelled(label, Prose.names(reissue.named(standing)))));
         }
     }
 
@@ -151,25 +145,9 @@ final class ChangeBlocks {
         return List.of(Prose.of(String.valueOf(k)), shown(was), shown(is), Prose.of(difference(was, is)));
     }
 
-    /** Which of the formula's shape and numbers are other ones. */
-    private static String compared(Optional<Found> old, Optional<Found> now) {
-        if (old.isEmpty() || now.isEmpty()) {
-            return old.isEmpty() ? "not in the earlier report" : "in the earlier report alone";
-        }
-        Optional<Prose> was = old.get().shape();
-        Optional<Prose> is = now.get().shape();
-        if (was.isEmpty() || is.isEmpty()) {
-            return "the formula is " + MissingBlocks.NOT_DECIDED;
-        }
-        boolean isSame = old.get().output().transform().map(Transform::y)
-                .equals(now.get().output().transform().map(Transform::y));
-        return isSame ? "the formula is the same" : was.equals(is)
-                ? "the formula has the same shape, with other numbers" : "the formula has another shape";
-    }
-
-    private static Map<Integer, StepValue> values(Optional<Found> found) {
+    private static Map<Integer, StepValue> values(Found found) {
         Map<Integer, StepValue> values = new LinkedHashMap<>();
-        found.ifPresent(each -> each.output().values().forEach(value -> values.put(value.k(), value)));
+        found.output().values().forEach(value -> values.put(value.k(), value));
         return values;
     }
 
@@ -190,18 +168,20 @@ final class ChangeBlocks {
     }
 
     private void answers() {
-        List<Labelled> was = before.answers().stream().flatMap(answer -> answer.keyFigures().stream()).toList();
-        List<Labelled> is = after.answers().stream().flatMap(answer -> answer.keyFigures().stream()).toList();
-        if (!was.isEmpty() || !is.isEmpty()) {
+        List<Labelled> same = reissue.answersAsBefore();
+        List<Labelled> was = Reissue.keyFigures(reissue.before()).stream().filter(each -> !same.contains(each)).toList();
+        List<Labelled> is = Reissue.keyFigures(reissue.after()).stream().filter(each -> !same.contains(each)).toList();
+        if (!was.isEmpty() || !is.isEmpty() || !same.isEmpty()) {
             blocks.add(new Heading(3, "Answers"));
-            pairs(Optional.of(was), Optional.of(is));
+            pairs(was, is);
+        }
+        if (!same.isEmpty()) {
+            blocks.add(new Labelled("as before", Prose.joined(same.stream().map(Labelled::label).toList(), "; ")));
         }
     }
 
     /** What stands behind each label, in the later order. */
-    private void pairs(Optional<List<Labelled>> earlier, Optional<List<Labelled>> later) {
-        List<Labelled> was = earlier.orElse(List.of());
-        List<Labelled> is = later.orElse(List.of());
+    private void pairs(List<Labelled> was, List<Labelled> is) {
         is.forEach(now -> beforeAndNow(now.label(), text(was, now.label()), Optional.of(now.text())));
         was.stream().filter(gone -> text(is, gone.label()).isEmpty())
                 .forEach(gone -> beforeAndNow(gone.label(), Optional.of(gone.text()), Optional.empty()));

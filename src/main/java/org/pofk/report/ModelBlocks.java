@@ -20,6 +20,7 @@ import org.pofk.report.Document.Table;
 
 /** What was modelled, as its author wrote it: states, moves, parameters, sources, assumptions, and what is open. */
 final class ModelBlocks {
+    static final Heading TITLE = new Heading(2, "What was modelled");
     private static final int STATES_LISTED_UP_TO = 40;
     private static final int NAMES_AT_MOST = 8;
 
@@ -43,7 +44,7 @@ final class ModelBlocks {
     }
 
     private void write() {
-        blocks.add(new Heading(2, "What was modelled"));
+        blocks.add(TITLE);
         states();
         blocks.addAll(MoveBlocks.of(model));
         parameters();
@@ -104,13 +105,13 @@ final class ModelBlocks {
         }
         blocks.add(new Heading(3, "Parameters"));
         blocks.add(new Table(Prose.EMPTY, List.of(Prose.of("name"), Prose.of("value"), Prose.of("meaning"),
-                Prose.of("source")), model.parameters().stream().map(ModelBlocks::parameter).toList()));
+                Prose.of("source")), model.parameters().stream().map(this::parameter).toList()));
     }
 
-    private static List<Prose> parameter(Model.Parameter each) {
+    private List<Prose> parameter(Model.Parameter each) {
         return List.of(Prose.name(each.name()), each.definition().filter(text -> !text.equals(each.value()))
                 .map(text -> Prose.name(text).and(" = ")).orElse(Prose.EMPTY).and(each.value()),
-                text(each.meaning()), text(each.source()));
+                text(each.meaning()), model.setting(each).map(SettingProse::inPlaceOf).orElseGet(() -> text(each.source())));
     }
 
     private static Prose text(Optional<String> text) {
@@ -148,11 +149,18 @@ final class ModelBlocks {
     }
 
     private void notes() {
-        if (!model.notes().isEmpty()) {
+        List<Model.Remark> notes = model.notes().stream().filter(note -> !isOfReplaced(note)).toList();
+        if (!notes.isEmpty()) {
             blocks.add(new Heading(3, "Notes and sources"));
-            blocks.add(new Items(model.notes().stream().map(note -> ModelHead.words(note.on()).and(", " + note.kind()
+            blocks.add(new Items(notes.stream().map(note -> ModelHead.words(note.on()).and(", " + note.kind()
                     + ": ").and(ModelHead.words(note.text()))).toList()));
         }
+    }
+
+    /** The source of a value of the file that the command line replaces. */
+    private boolean isOfReplaced(Model.Remark note) {
+        return note.kind().equals("source") && model.settings().stream().flatMap(each -> each.parameter().stream())
+                .anyMatch(name -> note.on().equals("parameter '" + name + "'"));
     }
 
     private void assumptions() {

@@ -42,7 +42,7 @@ public final class ReportDocument {
 
     /**
      * What is brief leaves out how the formulas were derived and checked, not why they hold. What is other than in the
-     * same report of an earlier model is marked, and said before all results; a file's name alone is no difference.
+     * same report of an earlier model is marked, said in short before all results and in full behind the answers; a file's name alone is no difference.
      */
     public static Document of(Report report, Depth depth, Style style, Convention convention) {
         Document document = alone(report.alone(), depth, style, convention);
@@ -61,7 +61,9 @@ public final class ReportDocument {
     }
 
     private static Document withChanges(Document document, Report earlier, Report later, Style style) {
-        return document.with(firstSection(document.blocks()), ChangeBlocks.of(earlier, later, style));
+        Reissue reissue = Reissue.of(earlier, later);
+        return document.with(document.blocks().indexOf(ModelBlocks.TITLE), ChangeBlocks.of(reissue, style))
+                .with(firstSection(document.blocks()), ChangeSummary.of(reissue, style));
     }
 
     private static int firstSection(List<Block> blocks) {

@@ -45,6 +45,7 @@ final class ReportSummary {
 
     private void write() {
         blocks.addAll(ModelHead.withoutAssumptions(model));
+        model.settings().stream().map(SettingProse::line).forEach(blocks::add);
         blocks.add(new Heading(2, "Question"));
         List<Prose> questions = report.derived().outputs().stream()
                 .map(output -> QuestionProse.of(output.output(), model)).toList();

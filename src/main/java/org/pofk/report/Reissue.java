@@ -1,0 +1,71 @@
+package org.pofk.report;
+
+import java.util.List;
+import java.util.stream.Stream;
+import org.pofk.chain.Model;
+import org.pofk.chain.ModelChanges;
+import org.pofk.report.Document.Labelled;
+
+/**
+ * A report and the same of an earlier model.
+ *
+ * @param changes what the later model says otherwise
+ * @param outputs those of both, compared
+ */
+record Reissue(Report before, Report after, ModelChanges changes, List<OutputPair> outputs) {
+
+    static Reissue of(Report before, Report after) {
+        ModelChanges changes = ModelChanges.of(before.derived().model(), after.derived().model());
+        return new Reissue(before, after, changes, OutputPair.of(before, after, changes));
+    }
+
+    Model earlier() {
+        return before.derived().model();
+    }
+
+    Model later() {
+        return after.derived().model();
+    }
+
+    /** {@code since revision A}; without revisions, since the file. */
+    Prose since() {
+        return earlier().about().revision().map(revision -> Prose.of("since revision ").andName(revision))
+                .orElseGet(() -> Prose.of("since ").andName(earlier().origin().file()));
+    }
+
+    /** The names of the outputs that compare in one way. */
+    List<String> named(OutputPair.Standing standing) {
+        return outputs.stream().filter(pair -> pair.standing() == standing).map(OutputPair::name).toList();
+    }
+
+    /** Whether both models were read from the same bytes. */
+    boolean isOfTheSameFiles() {
+        return files(earlier()).equals(files(later()));
+    }
+
+    private static List<String> files(Model model) {
+        return Stream.concat(Stream.of(model.origin()), model.tables().stream()).map(Model.Origin::sha256).toList();
+    }
+
+    /** What is said of the files of an input without any change. */
+    String sameInput() {
+        return isOfTheSameFiles() ? "the files are the same" : "the files differ in wording or layout only";
+    }
+
+    static List<Labelled> keyFigures(Report report) {
+        return report.answers().stream().flatMap(answer -> answer.keyFigures().stream()).toList();
+    }
+
+    /** The key figures of answers that the earlier report has word by word. */
+    List<Labelled> answersAsBefore() {
+        List<Labelled> was = keyFigures(before);
+        return keyFigures(after).stream().filter(was::contains).toList();
+    }
+
+    /** What the command line puts in place of the words of both files; empty where it does nothing of the kind. */
+    Prose settings() {
+        List<Prose> set = later().settings().stream().map(SettingProse::of).toList();
+        return set.isEmpty() ? Prose.EMPTY : Prose.of("the earlier file with ").and(Prose.joined(set, " and "))
+                .and(" as well, which the command line sets for both");
+    }
+}
