@@ -9,6 +9,7 @@ import org.pofk.answer.CycleFormula.Place;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Output;
 import org.pofk.chain.Timetable;
+import org.pofk.exact.Rational;
 import org.pofk.modes.ClosedForm;
 import org.pofk.modes.KnownPoles;
 import org.pofk.transform.Transform;
@@ -59,6 +60,22 @@ final class CycleChain {
                     formula(asked.get(place), transforms.get(from + place))).toList());
         }
         return formulas;
+    }
+
+    /** An output as a formula in m at step j of cycle m, after what is done there. */
+    CycleFormula formula(Output output, int j) {
+        Output read = new CycleOutputs(timetable, matrices, output).at(j, Side.AFTER);
+        return formula(Optional.of(new Place(j, Side.AFTER)), Transforms.of(chain, List.of(read)).get(0));
+    }
+
+    /** What cycle m adds to an output: its value at the end less that at the beginning. */
+    CycleFormula added(Output output) {
+        List<Rational> end = new CycleOutputs(timetable, matrices, output).at(timetable.period(), Side.AFTER)
+                .coefficients();
+        List<Rational> added = IntStream.range(0, end.size())
+                .mapToObj(i -> end.get(i).minus(output.coefficients().get(i))).toList();
+        return formula(Optional.empty(), Transforms.of(chain, List.of(new Output(output.name(), added, Rational.ZERO,
+                output.definition()))).get(0));
     }
 
     private CycleFormula formula(Optional<Place> place, Transform transform) {

@@ -41,7 +41,7 @@ final class ScheduledValues {
         return values;
     }
 
-    private static boolean isWithinReach(int size, Timetable timetable, long bits, int k) {
+    static boolean isWithinReach(int size, Timetable timetable, long bits, int k) {
         double cycles = (double) k / timetable.period() + 1;
         double words = bits / (double) Long.SIZE + 1;
         return cycles * cycles * words * words * size * size <= EXACT_AT_MOST;

@@ -1,5 +1,6 @@
 package org.pofk.chain;
 
+import java.util.Collections;
 import java.util.List;
 import java.util.Optional;
 import org.pofk.exact.Rational;
@@ -11,17 +12,38 @@ import org.pofk.exact.Rational;
  * @param unit     what amounts are counted in: {@code kEUR}
  * @param eachStep of the state at the end of a step, one a state; the start, k = 0, counts as one
  * @param moves    of moves, each time they are made; at most one entry for each pair of states
+ * @param actions  of actions of a schedule, each time they are done; at most one entry for each action
  * @param atStart  once, at k = 0
  * @param discount the rate d a step: what is due at the end of step k counts (1 + d)^−k of it today; not negative
  */
-public record Costs(String unit, List<Rational> eachStep, List<Move> moves, Rational atStart,
-        Optional<Rational> discount) {
+public record Costs(String unit, List<Rational> eachStep, List<Move> moves, List<OfAction> actions,
+        Rational atStart, Optional<Rational> discount) {
 
     /** What one move costs each time it is made. */
     public record Move(int from, int to, Rational cost) {
     }
 
+    /** What an action costs each time it is done, by the state in which it finds the chain: one amount a state. */
+    public record OfAction(String action, List<Rational> inState) {
+        public OfAction {
+            inState = List.copyOf(inState);
+        }
+    }
+
+    /** Without actions. */
+    public Costs(String unit, List<Rational> eachStep, List<Move> moves, Rational atStart,
+            Optional<Rational> discount) {
+        this(unit, eachStep, moves, List.of(), atStart, discount);
+    }
+
+    /** What an action costs, one amount a state; nothing where it has no cost. */
+    public List<Rational> ofAction(String action) {
+        return actions.stream().filter(each -> each.action.equals(action)).map(OfAction::inState).findFirst()
+                .orElse(Collections.nCopies(eachStep.size(), Rational.ZERO));
+    }
+
     public Costs {
+        actions = List.copyOf(actions);
         eachStep = List.copyOf(eachStep);
         moves = List.copyOf(moves);
     }

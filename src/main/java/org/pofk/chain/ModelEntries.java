@@ -134,10 +134,19 @@ final class ModelEntries {
         }
         costs.moves().forEach(move -> put(number(move.cost()), Subject.COST_OF_MOVE, state(move.from()),
                 state(move.to())));
+        costs.actions().forEach(this::costs);
         if (!costs.atStart().isZero()) {
             put(number(costs.atStart()), Subject.COST_AT_START);
         }
         put(costs.discount().map(ModelEntries::number), Subject.DISCOUNT);
+    }
+
+    private void costs(Costs.OfAction costs) {
+        for (int i = 0; i < costs.inState().size(); i++) {
+            if (!costs.inState().get(i).isZero()) {
+                put(number(costs.inState().get(i)), Subject.COST_OF_ACTION, costs.action(), state(i));
+            }
+        }
     }
 
     private void parameters() {

@@ -27,7 +27,11 @@ final class TotalCommand implements Work {
     public ExitCode run(Streams streams) throws RefusedException, UsageException, WritingException {
         Style style = options.style();
         Destination destination = options.destination();
-        Model read = options.model();
+        Model read = options.modelWithSchedule();
+        if (read.schedule().isPresent()) {
+            return ScheduledAnswers.total(options, read, total.ofAnyMatrix(read), destination.steps(total.to()),
+                    destination, streams);
+        }
         List<TotalModel.Asked> asked = total.asked(read);
         List<Integer> steps = destination.steps(total.to());
         Worker.Outcome<TotalModel> outcome = options.within(streams, partly ->

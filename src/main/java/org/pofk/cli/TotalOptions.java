@@ -4,10 +4,12 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import org.pofk.answer.Increment;
+import org.pofk.answer.ScheduledTotal;
 import org.pofk.answer.TotalModel;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
+import org.pofk.exact.Rational;
 import picocli.CommandLine.Option;
 
 /** What is added up, and up to which steps. */
@@ -34,7 +36,13 @@ final class TotalOptions {
 
     /** What is asked for, in the order of the answer. */
     List<TotalModel.Asked> asked(Model model) throws UsageException {
-        List<TotalModel.Asked> asked = new ArrayList<>();
+        return ofAnyMatrix(model).stream().map(each ->
+                new TotalModel.Asked(each.increment().apply(model.chain()), each.factor())).toList();
+    }
+
+    /** The same for a model whose schedule moves it by several matrices. */
+    List<ScheduledTotal.Asked> ofAnyMatrix(Model model) throws UsageException {
+        List<ScheduledTotal.Asked> asked = new ArrayList<>();
         if (costs && model.costs().isEmpty()) {
             throw new UsageException("'" + model.origin().file() + "' names no costs; write for example"
                     + " costs: {unit: kEUR, each step in: {STATE: 12}}");
@@ -42,11 +50,16 @@ final class TotalOptions {
         boolean namesNothing = of.isEmpty() && !entries;
         if (!of.isEmpty() || entries || namesNothing && model.costs().isEmpty()) {
             for (Output output : outputs(model.chain())) {
-                asked.add(TotalModel.Asked.of(increment(model.chain(), output)));
+                refuseEntriesUnlessCounted(model.chain(), output);
+                asked.add(new ScheduledTotal.Asked(entries ? chain -> Increment.ofEntries(chain, output)
+                        : chain -> Increment.of(chain, output), Rational.ONE));
             }
         }
         if (costs || namesNothing) {
-            asked.addAll(TotalModel.costs(model));
+            for (TotalModel.Asked each : TotalModel.costs(model)) {
+                asked.add(new ScheduledTotal.Asked(chain -> Increment.ofCosts(chain, model.costs().orElseThrow()),
+                        each.factor()));
+            }
         }
         return asked;
     }
@@ -59,8 +72,10 @@ final class TotalOptions {
         return AskedOutputs.of(chain, of);
     }
 
-    private Increment increment(Chain chain, Output output) throws UsageException {
-        return entries ? entries(chain, output) : Increment.of(chain, output);
+    private void refuseEntriesUnlessCounted(Chain chain, Output output) throws UsageException {
+        if (entries) {
+            entries(chain, output);
+        }
     }
 
     static Increment entries(Chain chain, Output output) throws UsageException {

@@ -9,8 +9,6 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
-import java.util.regex.Matcher;
-import java.util.regex.Pattern;
 import java.util.stream.IntStream;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Costs;
@@ -19,11 +17,10 @@ import org.pofk.chain.SparseMatrix;
 import org.pofk.exact.Rational;
 import org.pofk.text.Position;
 
-/** The section {@code costs}: what states, moves and the start cost, and how later steps are discounted. */
+/** The section {@code costs}: what states, moves, actions and the start cost, and how later steps are discounted. */
 final class CostsSection {
     private static final List<String> KEYS = List.of("unit", "each step in", "each move", "at start", "discount");
     private static final String UNIT = "units";
-    private static final Pattern OF_ACTION = Pattern.compile("each (.+) in");
 
     private final States states;
     private final Map<String, List<Integer>> sets;
@@ -70,44 +67,40 @@ final class CostsSection {
     }
 
     private Costs costs(Node.Mapping mapping) {
-        Fields fields = Fields.of(withoutActions(mapping), "costs", KEYS, reading);
-        if (KEYS.stream().filter(key -> !key.equals("unit") && !key.equals("discount"))
+        List<String> keys = new ArrayList<>(KEYS);
+        actions.stream().map(CostsSection::key).filter(key -> !KEYS.contains(key)).forEach(keys::add);
+        Fields fields = Fields.of(mapping, "costs", keys, reading);
+        if (keys.stream().filter(key -> !key.equals("unit") && !key.equals("discount"))
                 .allMatch(key -> fields.value(key).isEmpty())) {
             reading.fault(mapping.position(), "costs-of-nothing", "these costs name no amount; write for example "
                     + "each step in: {STATE: 12}, each move: {STATE: {OTHER: 40}} or at start: 100");
         }
         return new Costs(fields.value("unit").flatMap(unit -> reading.text(unit, "'unit'")).orElse(UNIT),
-                fields.value("each step in").map(this::eachStep).orElseGet(() -> byState(Map.of())),
+                fields.value("each step in").map(node -> eachIn(node, "each step in")).orElseGet(() -> byState(Map.of())),
                 fields.value("each move").map(this::eachMove).orElse(List.of()),
+                actions.stream().flatMap(action -> fields.value(key(action)).filter(node -> keys.indexOf(key(action))
+                        >= KEYS.size()).map(node -> new Costs.OfAction(action, eachIn(node, key(action)))).stream())
+                        .toList(),
                 fields.value("at start").flatMap(start -> amounts.number(start, "costs at start"))
                         .orElse(Rational.ZERO),
                 fields.value("discount").flatMap(this::discount));
     }
 
-    /** What actions cost is told apart from an unknown key, and refused: totals know nothing of schedules. */
-    private Node.Mapping withoutActions(Node.Mapping mapping) {
-        List<Node.Entry> others = new ArrayList<>();
-        for (Node.Entry entry : mapping.entries()) {
-            Matcher action = OF_ACTION.matcher(entry.name());
-            if (KEYS.contains(entry.name()) || !action.matches() || !actions.contains(action.group(1))) {
-                others.add(entry);
-            } else {
-                reading.fault(entry.key().position(), "costs-of-actions", "what the action '"
-                        + Words.shortened(action.group(1)) + "' costs isn't added up: totals leave a schedule out of"
-                        + " account; leave this line out");
-            }
-        }
-        return new Node.Mapping(mapping.position(), others);
+    /** What an action's costs stand under. */
+    private static String key(String action) {
+        return "each " + action + " in";
     }
 
-    private List<Rational> eachStep(Node node) {
+    /** Amounts by state: {@code what} is {@code each step in}, or {@code each ACTION in}. */
+    private List<Rational> eachIn(Node node, String what) {
         Map<Integer, Rational> found = new HashMap<>();
         Map<Integer, Position> seen = new HashMap<>();
-        reading.mapping(node, "'each step in'", "{STATE: 12}").ifPresent(mapping -> {
-            for (Node.Entry entry : costed(mapping, "costs of each step")) {
-                Optional<Rational> cost = amounts.number(entry.value(), "cost of each step in '" + entry.name() + "'");
+        String each = what.substring(0, what.length() - " in".length());
+        reading.mapping(node, "'" + what + "'", "{STATE: 12}").ifPresent(mapping -> {
+            for (Node.Entry entry : costed(mapping, "costs of " + each)) {
+                Optional<Rational> cost = amounts.number(entry.value(), "cost of " + what + " '" + entry.name() + "'");
                 for (int state : members(entry.key())) {
-                    if (isNew(seen, state, entry.key(), "each step in '" + states.names().get(state) + "'")) {
+                    if (isNew(seen, state, entry.key(), what + " '" + states.names().get(state) + "'")) {
                         cost.ifPresent(amount -> found.put(state, amount));
                     }
                 }

@@ -38,6 +38,7 @@ final class EntryProse {
             case COST_UNIT -> Prose.of("costs in");
             case COST_OF_STATE -> named("cost of a step in ", of);
             case COST_OF_MOVE -> Prose.of("cost of the move ").and(move(of));
+            case COST_OF_ACTION -> named("cost of ", of.subList(0, 1)).and(named(" in ", of.subList(1, 2)));
             case COST_AT_START -> Prose.of("cost at the start");
             case DISCOUNT -> Prose.of("discount a step");
             case SET -> named("set ", of);

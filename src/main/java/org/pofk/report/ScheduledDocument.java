@@ -228,10 +228,15 @@ public final class ScheduledDocument {
         if (output.over().isEmpty()) {
             return;
         }
-        RecurrenceProof proof = output.over().get(0).closedForm().transform().proof();
-        int order = output.over().get(0).closedForm().transform().recurrence().degree();
+        blocks.add(proof(timetable, output.over().get(0)));
+    }
+
+    /** Why a formula over the cycles holds for every cycle. */
+    static Labelled proof(Timetable timetable, CycleFormula formula) {
+        RecurrenceProof proof = formula.closedForm().transform().proof();
+        int order = formula.closedForm().transform().recurrence().degree();
         String states = proof.order() == 1 ? "one state takes part" : proof.order() + " states take part";
-        blocks.add(new Labelled("holds", "for every cycle: with S, the matrix of a whole cycle, x("
+        return new Labelled("holds", "for every cycle: with S, the matrix of a whole cycle, x("
                 + ScheduleProse.step(timetable, timetable.period() == 1 ? "m+1" : "(m+1)", "") + ") = S x(" + ScheduleProse.step(timetable, "m", "")
                 + "), " + switch (proof.method()) {
                     case CHARACTERISTIC -> "the sequence in m needs a recurrence of order " + order + ", and " + states
@@ -240,7 +245,7 @@ public final class ScheduledDocument {
                             + " order " + order + ", and " + states + " (Cayley–Hamilton)";
                     case VECTOR -> "a recurrence of order " + order + " annihilates the state where cycles begin, and"
                             + " so every output at every step of the cycle";
-                }));
+                });
     }
 
     private void values() {

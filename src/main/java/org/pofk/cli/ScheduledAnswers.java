@@ -1,0 +1,43 @@
+package org.pofk.cli;
+
+import java.util.List;
+import org.pofk.answer.ScheduledTotal;
+import org.pofk.answer.ScheduledTotalModel;
+import org.pofk.chain.Model;
+import org.pofk.report.ScheduledTotalDocument;
+import org.pofk.report.Style;
+import org.pofk.text.RefusedException;
+
+/** What commands about totals, passages and conditions answer about a model that has inspections or phases. */
+final class ScheduledAnswers {
+    private ScheduledAnswers() {
+    }
+
+    static ExitCode total(AnswerOptions options, Model read, List<ScheduledTotal.Asked> asked, List<Integer> steps,
+            Destination destination, Streams streams) throws RefusedException, UsageException, WritingException {
+        refuseTables(read, destination);
+        Style style = options.style();
+        Worker.Outcome<ScheduledTotalModel> outcome = options.within(streams, partly ->
+                partly.totals().size() + " of " + asked.size() + " totals found", published ->
+                ScheduledTotalModel.of(read, asked, steps, published));
+        if (outcome.published().isEmpty()) {
+            return options.undecided(streams);
+        }
+        ScheduledTotalModel found = outcome.published().get();
+        destination.write(Answer.of(() -> ScheduledTotalDocument.of(found, style)), streams);
+        return found.isDecided() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
+    }
+
+    private static void refuseTables(Model read, Destination destination) throws UsageException {
+        for (Format format : List.of(Format.NOTEBOOK, Format.CSV, Format.JSON)) {
+            if (destination.takes(format)) {
+                throw new UsageException("'" + read.origin().file() + "' has a schedule: this is answered as text, LaTeX"
+                        + " or a web page, not as " + switch (format) {
+                            case CSV -> "a table";
+                            case NOTEBOOK -> "a notebook";
+                            default -> "JSON";
+                        });
+            }
+        }
+    }
+}

@@ -1,0 +1,158 @@
+package org.pofk.report;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import org.pofk.answer.Growth;
+import org.pofk.answer.Increment.Kind;
+import org.pofk.answer.KnownValue;
+import org.pofk.answer.LongRun;
+import org.pofk.answer.ScheduledTotal;
+import org.pofk.answer.ScheduledTotalModel;
+import org.pofk.chain.Timetable;
+import org.pofk.exact.Decimals;
+import org.pofk.exact.Rational;
+import org.pofk.report.Document.Block;
+import org.pofk.report.Document.Heading;
+import org.pofk.report.Document.Labelled;
+import org.pofk.report.Document.Table;
+
+/** What is spent in states, entered and paid under a schedule, as a document. */
+public final class ScheduledTotalDocument {
+    private final ScheduledTotalModel found;
+    private final Timetable timetable;
+    private final Style style;
+    private final List<Block> blocks = new ArrayList<>();
+
+    private ScheduledTotalDocument(ScheduledTotalModel found, Style style) {
+        this.found = found;
+        this.timetable = found.timetable();
+        this.style = style;
+    }
+
+    public static Document of(ScheduledTotalModel found, Style style) {
+        ScheduledTotalDocument document = new ScheduledTotalDocument(found, style);
+        document.blocks.addAll(ModelHead.of(found.model()));
+        found.totals().forEach(document::total);
+        if (found.totals().size() < found.wanted()) {
+            document.label("not decided", "within the budget: " + (found.wanted() - found.totals().size()) + " more");
+        }
+        document.blocks.add(Caution.ofInspections(found.model()));
+        return new Document(document.blocks);
+    }
+
+    private void total(ScheduledTotal total) {
+        blocks.add(new Heading(2, OutputProse.title(total.total())));
+        label("counts", counts(total));
+        total.over().ifPresentOrElse(over -> over(total, over), () -> label("long run",
+                "not decided: the numbers of a whole cycle are too long for formulas"));
+        values(total);
+    }
+
+    private void label(String label, String text) {
+        blocks.add(new Labelled(label, text));
+    }
+
+    private static String counts(ScheduledTotal total) {
+        return switch (total.increment().kind()) {
+            case VALUES -> "the value at the end of each step 0 … k, both included, after what is done there";
+            case STEPS -> "every step 0 … k, both included, at whose end, after what is done there, the chain is in it";
+            case ENTRIES -> "every move and every action in the steps 1 … k that leads into it from outside; a start"
+                    + " inside is no entry";
+            case COSTS -> total.factor().isOne()
+                    ? "in step k the state at its end, after what is done there, the move made in it, and each action"
+                    + " by the state in which it finds the chain; in step 0 the state at the start and what is due there"
+                    : "what is due in step k counts (" + total.factor() + ")^k of it: a discount of "
+                    + Decimals.of(total.factor().inverse().minus(Rational.ONE).times(Rational.of(100)), 6).text()
+                    + " % a step";
+        };
+    }
+
+    private void over(ScheduledTotal total, ScheduledTotal.OverCycles over) {
+        FormulaInSteps formulas = new FormulaInSteps("m", style);
+        formulas.add(over.total().closedForm(), Prose.name(total.total().name())
+                .and("(" + ScheduleProse.stepOf(timetable, 0) + ")"), Prose.of("m ≥ 0"));
+        formulas.add(over.cycle().closedForm(), Prose.of("added by cycle m"), Prose.of("m ≥ 0, steps "
+                + ScheduleProse.stepOf(timetable, 1) + " … " + ScheduleProse.stepOf(timetable, timetable.period())));
+        blocks.addAll(formulas.blocks());
+        blocks.add(ScheduledDocument.proof(timetable, over.total()));
+        growth(total, over.growth());
+    }
+
+    private void growth(ScheduledTotal total, Growth growth) {
+        Optional<Rational> everything = growth.everything();
+        if (everything.isPresent()) {
+            label("in all", amount(total, everything.get()) + " over all steps k ≥ 0");
+        } else if (growth.perStep().isZero()) {
+            label("long run", prose().of(growth.beyond()) + ", at the beginning of cycle m");
+        } else {
+            label("grows", "in the long run by " + amount(total, growth.perStep()) + " a cycle");
+            if (timetable.period() > 1) {
+                label("a step", amount(total, total.perStep().orElseThrow())
+                        + (total.increment().kind() == Kind.STEPS ? ", the share of time in the long run" : ""));
+            }
+            label("offset", "at the beginning of cycle m, what it is above that times m "
+                    + growth.beyond().accept(new Offset()));
+        }
+    }
+
+    private LongRunProse prose() {
+        return new LongRunProse(style.digits());
+    }
+
+    private String amount(ScheduledTotal total, Rational value) {
+        return prose().number(value) + switch (total.increment().kind()) {
+            case VALUES -> "";
+            case STEPS -> total.total().name().startsWith("steps") && value.isOne() ? " step" : " steps";
+            case ENTRIES -> " entries";
+            case COSTS -> " " + unit();
+        };
+    }
+
+    private String unit() {
+        return found.model().costs().map(costs -> costs.unit()).orElse("");
+    }
+
+    /** What a total does besides growing evenly. */
+    private final class Offset implements LongRun.Visitor<String> {
+        @Override
+        public String limit(LongRun.Limit limit) {
+            return "tends to " + prose().number(limit.value());
+        }
+
+        @Override
+        public String cycle(LongRun.Cycle cycle) {
+            return "has " + prose().cycle(cycle);
+        }
+
+        @Override
+        public String none(LongRun.None none) {
+            return none.explanation();
+        }
+    }
+
+    private void values(ScheduledTotal total) {
+        if (total.values().isEmpty()) {
+            return;
+        }
+        boolean isCost = total.increment().kind() == Kind.COSTS;
+        List<Prose> header = new ArrayList<>(List.of(Prose.of("k"), Prose.name(total.total().name())));
+        if (total.factor().isOne()) {
+            header.add(Prose.of(total.increment().kind() == Kind.STEPS ? "share of time" : "a step"));
+        }
+        blocks.add(new Table(Prose.of("Totals of the steps 0 … k" + (isCost ? ", in " + unit() : "")), header,
+                total.values().stream().map(each -> row(total, each)).toList()));
+    }
+
+    private List<Prose> row(ScheduledTotal total, ScheduledTotal.At at) {
+        List<Prose> cells = new ArrayList<>(List.of(Prose.of(String.valueOf(at.k())), Prose.of(text(at.total()))));
+        if (total.factor().isOne()) {
+            cells.add(Prose.of(text(at.average())));
+        }
+        return cells;
+    }
+
+    private String text(Optional<KnownValue> value) {
+        return value.map(known -> KnownText.of(known, style.digits())).orElse("not decided");
+    }
+}

@@ -1,0 +1,195 @@
+package org.pofk.answer;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.Set;
+import java.util.stream.IntStream;
+import org.junit.jupiter.api.Test;
+import org.pofk.chain.Costs;
+import org.pofk.chain.Model;
+import org.pofk.chain.Output;
+import org.pofk.chain.Outputs;
+import org.pofk.chain.Schedule;
+import org.pofk.chain.SparseMatrix;
+import org.pofk.chain.Timetable;
+import org.pofk.exact.Rational;
+import org.pofk.input.ModelReader;
+import org.pofk.input.Overrides;
+import org.pofk.input.Source;
+import org.pofk.text.RefusedException;
+
+/** Totals, passages and conditions under a schedule against plain stepping with nothing but its matrices. */
+class ScheduledQuestionsTest {
+    private static final int STEPS = 130;
+    private static final String HEAD = """
+            pofk: 1
+            states: [good, worn, failed]
+            start: good
+            """;
+    private static final String CHAIN = """
+            transitions:
+              good: {worn: 1/8, good: rest}
+              worn: {failed: 1/4, good: 1/16, worn: rest}
+              failed: {good: 1/32, failed: rest}
+            """;
+    private static final String OVERHAUL =
+            "actions: {overhaul: {failed: {good: 3/4, failed: rest}, worn: {good: 1/2, worn: rest}}}\n";
+    private static final String COSTS = "costs: {unit: EUR, each step in: {good: -1, failed: 5}, at start: 7,"
+            + " each overhaul in: {good: 2, worn: 3, failed: 11}%s}\n";
+    private static final String MOVES = ", each move: {good: {worn: 4}, worn: {good: 6, failed: 1}}";
+
+    private static Map<String, String> cases() {
+        Map<String, String> cases = new LinkedHashMap<>();
+        String costs = COSTS.formatted(MOVES);
+        cases.put("every step", CHAIN + OVERHAUL + "schedule: {every: 1, do: overhaul}\n" + costs);
+        cases.put("every twelfth", CHAIN + OVERHAUL + "schedule: {every: 12, do: overhaul}\n" + costs);
+        cases.put("begins late", CHAIN + OVERHAUL + "schedule: {every: 5, first: 13, do: overhaul}\n" + costs);
+        cases.put("instead", CHAIN + OVERHAUL
+                + "schedule: {every: 4, do: overhaul, when: instead of the step}\n" + costs);
+        cases.put("discounted", CHAIN + OVERHAUL + "schedule: {every: 6, do: overhaul}\n"
+                + COSTS.formatted(MOVES + ", discount: 1/50"));
+        cases.put("staggered", CHAIN + OVERHAUL.replace("}}}", "}}, renew: {failed: {good: 1}}}")
+                + "schedule: [{every: 4, first: 2, do: overhaul}, {every: 6, do: renew},"
+                + " {every: 12, do: overhaul, when: instead of the step}]\n" + costs);
+        String phases = "moves:\n  wet: {good: {worn: 1/2, good: rest}, worn: {failed: 1/2, worn: rest},"
+                + " failed: {good: 1/8, worn: 1/8, failed: rest}}\n  dry: {good: {failed: 1/16, worn: 1/16, good: rest},"
+                + " worn: {good: 3/8, worn: rest}, failed: {worn: 1/2, failed: rest}}\n"
+                + "phases: [{for: 3, use: wet}, {for: 9, use: dry}]\n";
+        cases.put("phases with inspections", phases + OVERHAUL + "schedule: {every: 8, do: overhaul}\n"
+                + COSTS.formatted(""));
+        cases.put("phases once", phases + "repeat: once\n" + "costs: {each step in: {failed: 3}}\n");
+        return cases;
+    }
+
+    private static Model model(String name, String rest) {
+        try {
+            return ModelReader.read(Source.ofText(name, HEAD + rest), Optional.empty(), Overrides.NONE);
+        } catch (RefusedException e) {
+            throw new AssertionError(name + e.faults(), e);
+        }
+    }
+
+    /** What each step does: the move, where one is made, then the actions with their names. */
+    private record Step(Optional<SparseMatrix> move, List<Schedule.Action> actions) {
+        static Step of(Model model, int k) {
+            Schedule schedule = model.schedule().orElseThrow();
+            List<Schedule.Recurring> due = schedule.recurring().stream()
+                    .filter(each -> k >= each.first() && (k - each.first()) % each.every() == 0).toList();
+            boolean moves = due.stream().allMatch(each -> each.when() == Schedule.When.AFTER_THE_STEP);
+            return new Step(moves ? Optional.of(move(model, k)) : Optional.empty(),
+                    due.stream().map(Schedule.Recurring::action).toList());
+        }
+
+        private static SparseMatrix move(Model model, int k) {
+            var phases = model.schedule().orElseThrow().phases();
+            if (phases.isEmpty()) {
+                return model.chain().matrix();
+            }
+            List<SparseMatrix> all = phases.get().list().stream()
+                    .flatMap(phase -> IntStream.range(0, phase.steps()).mapToObj(i -> phase.matrix())).toList();
+            return phases.get().repeat() == Schedule.Repeat.YES ? all.get((k - 1) % all.size())
+                    : all.get(Math.min(k, all.size()) - 1);
+        }
+    }
+
+    private static Rational read(List<Rational> weights, List<Rational> state) {
+        return new Output("", weights, Rational.ZERO, "").of(state);
+    }
+
+    /** Costs of the steps 0 … k, each as it is due, times the factor to the power k. */
+    private static List<Rational> costs(Model model, Rational factor) {
+        Costs costs = model.costs().orElseThrow();
+        List<Rational> state = model.chain().start();
+        Rational total = costs.atStart().plus(read(costs.eachStep(), state));
+        List<Rational> totals = new ArrayList<>(List.of(total));
+        for (int k = 1; k <= STEPS; k++) {
+            Step step = Step.of(model, k);
+            Rational due = Rational.ZERO;
+            if (step.move.isPresent()) {
+                for (Costs.Move move : costs.moves()) {
+                    due = due.plus(move.cost().times(state.get(move.from()))
+                            .times(step.move.get().at(move.to(), move.from())));
+                }
+                state = step.move.get().times(state);
+            }
+            for (Schedule.Action action : step.actions) {
+                due = due.plus(read(costs.ofAction(action.name()), state));
+                state = action.matrix().times(state);
+            }
+            total = total.plus(due.plus(read(costs.eachStep(), state)).times(factor.pow(k)));
+            totals.add(total);
+        }
+        return totals;
+    }
+
+    /** Moves and actions into the state from the others. */
+    private static List<Rational> entries(Model model, int into) {
+        List<Rational> state = model.chain().start();
+        List<Rational> totals = new ArrayList<>(List.of(Rational.ZERO));
+        for (int k = 1; k <= STEPS; k++) {
+            Rational total = totals.get(k - 1);
+            Step step = Step.of(model, k);
+            List<SparseMatrix> all = new ArrayList<>(step.move.stream().toList());
+            step.actions.forEach(each -> all.add(each.matrix()));
+            for (SparseMatrix matrix : all) {
+                for (int from = 0; from < 3; from++) {
+                    total = from == into ? total : total.plus(matrix.at(into, from).times(state.get(from)));
+                }
+                state = matrix.times(state);
+            }
+            totals.add(total);
+        }
+        return totals;
+    }
+
+    private static final List<Integer> AT = IntStream.rangeClosed(0, STEPS).boxed().toList();
+
+    @Test
+    void totalsAndTheirFormulasEqualPlainSteppingWithSums() {
+        int compared = 0;
+        for (Map.Entry<String, String> each : cases().entrySet()) {
+            Model model = model(each.getKey(), each.getValue());
+            List<ScheduledTotal.Asked> asked = new ArrayList<>();
+            List<List<Rational>> expected = new ArrayList<>();
+            for (TotalModel.Asked total : TotalModel.costs(model)) {
+                asked.add(new ScheduledTotal.Asked(chain -> Increment.ofCosts(chain, model.costs().orElseThrow()),
+                        total.factor()));
+                expected.add(costs(model, total.factor()));
+            }
+            Output failed = Outputs.states(model.chain()).get(2);
+            asked.add(new ScheduledTotal.Asked(chain -> Increment.ofEntries(chain, failed), Rational.ONE));
+            expected.add(entries(model, 2));
+            ScheduledTotalModel found = ScheduledTotalModel.of(model, asked, AT, published -> { });
+            assertTrue(found.isDecided());
+            for (int i = 0; i < asked.size(); i++) {
+                compared += compare(each.getKey(), found.timetable(), found.totals().get(i), expected.get(i));
+            }
+        }
+        assertTrue(compared > 2_000, "compared " + compared);
+    }
+
+    private static int compare(String name, Timetable timetable, ScheduledTotal found, List<Rational> expected) {
+        int compared = 0;
+        for (int k = 0; k <= STEPS; k++) {
+            Optional<Rational> exact = found.values().get(k).total().orElseThrow().exact();
+            assertEquals(Optional.of(expected.get(k)), exact, name + " at " + k);
+            compared++;
+        }
+        ScheduledTotal.OverCycles over = found.over().orElseThrow();
+        for (int m = 0; timetable.before() + (m + 1) * timetable.period() <= STEPS; m++) {
+            int k = timetable.before() + m * timetable.period();
+            Rational begun = over.total().closedForm().expansion().valueAt(m);
+            assertEquals(expected.get(k), begun, name + " in cycle " + m);
+            assertEquals(expected.get(k + timetable.period()).minus(begun),
+                    over.cycle().closedForm().expansion().valueAt(m), name + " in cycle " + m);
+            compared += 2;
+        }
+        return compared;
+    }
+}
