@@ -57,18 +57,18 @@ public record Derivation(List<ImpulseStep> impulses, List<FactorStep> factors) {
             Factor<Rational> factor = part.factor();
             int index = form.transform().factors().factors().indexOf(factor);
             FactorPoles poles = new FactorPoles(factor, form.roots().get(index));
+            List<Mode.Oscillating> pairs = collected.pairs.stream().filter(mode -> mode.factor() == index).toList();
+            List<CoefficientValues> values = pairs.isEmpty() ? List.of() : part.coefficients().stream()
+                    .map(coefficient -> new CoefficientValues(poles, coefficient)).toList();
             steps.add(new FactorStep(index, Formulas.polynomial(factor.polynomial(), TablePair.Z),
                     factor.multiplicity(), FormulaOverRoots.coefficients(part, form.transform().y()),
                     collected.real.stream().filter(step -> step.mode().factor() == index).toList(),
-                    collected.pairs.stream().filter(mode -> mode.factor() == index)
-                            .map(mode -> pair(mode, poles, part.coefficients().get(mode.power()))).toList()));
+                    pairs.stream().map(mode -> pair(mode, poles, values.get(mode.power()))).toList()));
         }
         return new Derivation(collected.impulses, steps);
     }
 
-    private static PairStep pair(Mode.Oscillating mode, FactorPoles poles,
-            Expansion.Coefficient<Rational> coefficient) {
-        CoefficientValues values = new CoefficientValues(poles, coefficient);
+    private static PairStep pair(Mode.Oscillating mode, FactorPoles poles, CoefficientValues values) {
         FactorPoles.Pole pole = poles.poles().stream()
                 .filter(candidate -> candidate.root().index() == mode.root()).findFirst().orElseThrow();
         EnclosedComplex value = values.at(pole.root());
