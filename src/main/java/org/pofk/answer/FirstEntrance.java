@@ -52,7 +52,7 @@ public record FirstEntrance(List<Rational> probabilities, List<Optional<Rational
      * The states outside both sets from which the first can be reached without passing the second: from the others it
      * never is, and without them I − Q is invertible.
      */
-    private static List<Integer> open(SparseMatrix matrix, Collection<Integer> into, Collection<Integer> avoiding) {
+    static List<Integer> open(SparseMatrix matrix, Collection<Integer> into, Collection<Integer> avoiding) {
         List<List<SparseMatrix.Entry>> columns = new ArrayList<>();
         for (int state = 0; state < matrix.size(); state++) {
             columns.add(avoiding.contains(state) || into.contains(state) ? List.of() : matrix.columns().get(state));
@@ -64,7 +64,7 @@ public record FirstEntrance(List<Rational> probabilities, List<Optional<Rational
     }
 
     /** I − Qᵀ on these states: row j says where j moves to. */
-    private static SparseMatrix identityMinusTransposed(SparseMatrix matrix, List<Integer> states,
+    static SparseMatrix identityMinusTransposed(SparseMatrix matrix, List<Integer> states,
             Map<Integer, Integer> place) {
         List<List<SparseMatrix.Entry>> columns = new ArrayList<>();
         states.forEach(state -> columns.add(new ArrayList<>()));

@@ -88,7 +88,8 @@ public record Percentile(Rational p, OptionalInt k, Optional<Reason> reason) {
             return new Percentile(p, OptionalInt.of((int) reached), Optional.empty());
         }
 
-        private Optional<Boolean> isReached(Rational p, int k) {
+        /** Whether F(k) ≥ p. */
+        Optional<Boolean> isReached(Rational p, int k) {
             Enclosed value = modes.at(k);
             for (int bits : BITS) {
                 Ball difference = value.enclose(bits).minus(Ball.of(p, bits));
@@ -99,7 +100,7 @@ public record Percentile(Rational p, OptionalInt k, Optional<Reason> reason) {
             return k <= EXACT_UP_TO ? Optional.of(exact.get().at(k).compareTo(p) >= 0) : Optional.empty();
         }
 
-        private static Percentile none(Rational p, Reason reason) {
+        static Percentile none(Rational p, Reason reason) {
             return new Percentile(p, OptionalInt.empty(), Optional.of(reason));
         }
     }

@@ -63,7 +63,8 @@ final class ScheduledChain {
 
     /**
      * An output at the end of some steps, ascending, after what is done there: exactly while the numbers stay within
-     * reach, by the formulas over the cycles beyond; empty where these are out of reach too.
+     * reach, by the formulas over the cycles beyond; where these are out of reach too, certified for a chain and empty for
+     * a recursion.
      */
     List<Optional<KnownValue>> at(Output output, List<Integer> steps) {
         List<Integer> near = steps.stream().filter(k -> ScheduledValues.isWithinReach(chain.size(), timetable, bits, k))
@@ -79,9 +80,12 @@ final class ScheduledChain {
 
     private Optional<KnownValue> far(Output output, int k) {
         Timetable.Place place = timetable.place(k);
-        return areWithinReach(1) && place.cycle().isPresent()
-                ? Optional.of(new KnownValue(KnownValue.Word.EXACT, Optional.empty(),
-                        ModeValues.of(cycles().formula(output, place.within()).closedForm())
-                                .at(place.cycle().getAsInt()))) : Optional.empty();
+        if (areWithinReach(1) && place.cycle().isPresent()) {
+            return Optional.of(new KnownValue(KnownValue.Word.EXACT, Optional.empty(),
+                    ModeValues.of(cycles().formula(output, place.within()).closedForm())
+                            .at(place.cycle().getAsInt())));
+        }
+        return chain.kind() == Chain.Kind.RECURSION ? Optional.empty() : Optional.of(ScheduledValues.of(chain,
+                timetable, whole, List.of(output), List.of(k)).get(0).get(0).after());
     }
 }

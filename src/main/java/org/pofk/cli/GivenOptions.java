@@ -40,6 +40,14 @@ final class GivenOptions {
         return !in.isEmpty() || !never.isEmpty();
     }
 
+    /** Of what is known, nothing is answered where the chain moves by several matrices. */
+    void refuseUnderSchedule(Model read) throws UsageException {
+        if (isAsked() || at.isPresent()) {
+            throw new UsageException("'" + read.origin().file() + "' has a schedule: --given, --given-never and"
+                    + " --given-at aren't there for it");
+        }
+    }
+
     Optional<Integer> at() throws UsageException {
         if (at.isPresent() && !isAsked()) {
             throw new UsageException("--given-at says when; say what is known then with --given NAME or"

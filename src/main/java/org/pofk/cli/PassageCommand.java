@@ -42,7 +42,13 @@ final class PassageCommand implements Work {
         if (!passage.isAsked()) {
             throw new UsageException("what is to be entered? Name a state or set with --into NAME");
         }
-        Model read = options.model();
+        Model read = options.modelWithSchedule();
+        if (read.schedule().isPresent()) {
+            given.refuseUnderSchedule(read);
+            Chain chain = passage.started(read.chain());
+            return ScheduledAnswers.passage(options, read.with(chain), passage.work(chain, read.schedule().get(),
+                    destination.steps(at)), destination, streams);
+        }
         Model started = read.with(passage.started(read.chain()));
         Optional<Integer> step = given.at();
         if (step.isEmpty()) {

@@ -8,7 +8,10 @@ import java.util.TreeSet;
 import java.util.function.Supplier;
 import org.pofk.answer.Given;
 import org.pofk.answer.Passage;
+import org.pofk.answer.ScheduledPassage;
 import org.pofk.chain.Chain;
+import org.pofk.chain.Schedule;
+import org.pofk.chain.Timetable;
 import org.pofk.exact.Rational;
 import org.pofk.report.PassageDocument;
 import org.pofk.report.Prose;
@@ -46,6 +49,15 @@ final class PassageOptions {
     /** Finds the passage, of a chain that is started, at these steps; what was typed is checked before. */
     Supplier<Passage> work(Chain chain, List<Integer> at) throws UsageException {
         return work(chain, Optional.empty(), at);
+    }
+
+    /** The same of a chain with a schedule. */
+    Supplier<ScheduledPassage> work(Chain chain, Schedule schedule, List<Integer> at) throws UsageException {
+        Set<Integer> target = states(chain, into, "--into");
+        Set<Integer> avoided = states(chain, avoiding, "--avoiding");
+        requireApart(chain, target, avoided);
+        List<Rational> shares = shares();
+        return () -> ScheduledPassage.of(chain, Timetable.of(chain, schedule), target, avoided, shares, at);
     }
 
     /** The same given what is known when it ends: what else is entered then ends the wait without success. */

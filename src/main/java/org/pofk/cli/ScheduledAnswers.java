@@ -1,9 +1,12 @@
 package org.pofk.cli;
 
 import java.util.List;
+import java.util.function.Supplier;
+import org.pofk.answer.ScheduledPassage;
 import org.pofk.answer.ScheduledTotal;
 import org.pofk.answer.ScheduledTotalModel;
 import org.pofk.chain.Model;
+import org.pofk.report.ScheduledPassageDocument;
 import org.pofk.report.ScheduledTotalDocument;
 import org.pofk.report.Style;
 import org.pofk.text.RefusedException;
@@ -26,6 +29,19 @@ final class ScheduledAnswers {
         ScheduledTotalModel found = outcome.published().get();
         destination.write(Answer.of(() -> ScheduledTotalDocument.of(found, style)), streams);
         return found.isDecided() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
+    }
+
+    static ExitCode passage(AnswerOptions options, Model started, Supplier<ScheduledPassage> work,
+            Destination destination, Streams streams) throws RefusedException, UsageException, WritingException {
+        refuseTables(started, destination);
+        Style style = options.style();
+        Worker.Outcome<ScheduledPassage> outcome = options.within(streams, published -> published.accept(work.get()));
+        if (outcome.published().isEmpty()) {
+            return options.undecided(streams);
+        }
+        ScheduledPassage found = outcome.published().get();
+        destination.write(Answer.of(() -> ScheduledPassageDocument.of(started, found, style)), streams);
+        return found.over().isPresent() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
     }
 
     private static void refuseTables(Model read, Destination destination) throws UsageException {

@@ -136,11 +136,11 @@ public final class PassageDocument {
         return ValueText.isExact(value, style.digits()) ? decimals : value + " ≈ " + decimals;
     }
 
-    private static String percent(Rational share) {
+    static String percent(Rational share) {
         return Decimals.of(share.times(Rational.of(100)), 6).text() + " %";
     }
 
-    private static String percentile(Percentile percentile) {
+    static String percentile(Percentile percentile) {
         if (percentile.k().isPresent()) {
             return "has happened by k = " + percentile.k().getAsInt() + ", not before";
         }

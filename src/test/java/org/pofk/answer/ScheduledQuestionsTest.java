@@ -192,4 +192,102 @@ class ScheduledQuestionsTest {
         }
         return compared;
     }
+
+    /** P(T ≤ k) by stepping the chain with what has entered the set taken out at once; rounded beyond the first steps. */
+    private static List<Rational> entered(Model model, int into) {
+        List<Rational> state = new ArrayList<>(model.chain().start());
+        Rational entered = state.get(into);
+        state.set(into, Rational.ZERO);
+        List<Rational> all = new ArrayList<>(List.of(entered));
+        for (int k = 1; k <= FAR; k++) {
+            Step step = Step.of(model, k);
+            List<SparseMatrix> matrices = new ArrayList<>(step.move.stream().toList());
+            step.actions.forEach(each -> matrices.add(each.matrix()));
+            for (SparseMatrix matrix : matrices) {
+                state = new ArrayList<>(matrix.times(state));
+                entered = entered.plus(state.get(into));
+                state.set(into, Rational.ZERO);
+            }
+            if (k > STEPS) {
+                state = new ArrayList<>(state.stream().map(ScheduledQuestionsTest::shortened).toList());
+                entered = shortened(entered);
+            }
+            all.add(entered);
+        }
+        return all;
+    }
+
+    private static final int FAR = 2_500;
+    private static final List<Rational> SHARES = List.of(Rational.of(1, 100), Rational.HALF, Rational.of(9, 10));
+
+    @Test
+    void passagesEqualPlainSteppingWhereWhatHasEnteredIsTakenOut() {
+        int compared = 0;
+        for (Map.Entry<String, String> each : cases().entrySet()) {
+            Model model = model(each.getKey(), each.getValue());
+            Timetable timetable = Timetable.of(model.chain(), model.schedule().orElseThrow());
+            List<Rational> entered = entered(model, 2);
+            ScheduledPassage found = ScheduledPassage.of(model.chain(), timetable, Set.of(2), Set.of(), SHARES, AT);
+            for (int k = 0; k <= STEPS; k++) {
+                assertEquals(Optional.of(entered.get(k)), found.values().get(k).distribution().exact(), each.getKey());
+                assertEquals(Optional.of(Rational.ONE.minus(entered.get(k))), found.values().get(k).survival().exact());
+                compared += 2;
+            }
+            ScheduledPassage.OverCycles over = found.over().orElseThrow();
+            for (CycleFormula formula : over.distributions()) {
+                int j = formula.place().orElseThrow().j();
+                for (int m = 0; timetable.before() + m * timetable.period() + j <= STEPS; m++) {
+                    assertEquals(entered.get(timetable.before() + m * timetable.period() + j),
+                            formula.closedForm().expansion().valueAt(m), each.getKey());
+                    compared++;
+                }
+            }
+            for (Percentile percentile : over.percentiles()) {
+                int k = percentile.k().orElseThrow();
+                assertTrue(entered.get(k).compareTo(percentile.p()) >= 0, each.getKey());
+                assertTrue(k == 0 || entered.get(k - 1).compareTo(percentile.p()) < 0, each.getKey());
+            }
+            assertMomentsAreSums(each.getKey(), entered, over.moments());
+        }
+        assertTrue(compared > 2_500, "compared " + compared);
+    }
+
+    /** The sums of k f(k) and k² f(k) up to a step beyond which next to nothing is left; nothing of them is negative. */
+    private static void assertMomentsAreSums(String name, List<Rational> entered, PassageMoments moments) {
+        Rational mean = Rational.ZERO;
+        Rational square = Rational.ZERO;
+        for (int k = 1; k <= FAR; k++) {
+            Rational law = shortened(entered.get(k).minus(entered.get(k - 1)));
+            mean = mean.plus(law.times(Rational.of(k)));
+            square = square.plus(law.times(Rational.of((long) k * k)));
+        }
+        Rational tiny = Rational.of(1, 1_000_000);
+        assertTrue(moments.isCertain(), name);
+        assertTrue(moments.mean().orElseThrow().minus(mean).abs().compareTo(tiny) < 0, name + ": mean "
+                + moments.mean().get().approximate() + " and " + mean.approximate());
+        Rational variance = square.minus(mean.times(mean));
+        assertTrue(moments.variance().orElseThrow().minus(variance).abs().compareTo(tiny) < 0, name + ": variance "
+                + moments.variance().get().approximate() + " and " + variance.approximate());
+    }
+
+    /** To 200 binary places: sums of a thousand long fractions take minutes. */
+    private static Rational shortened(Rational value) {
+        return new Rational(value.numerator().shiftLeft(200).divide(value.denominator()),
+                java.math.BigInteger.ONE.shiftLeft(200));
+    }
+
+    @Test
+    void anActionThatDoesNothingLeavesThePassageAsItIs() {
+        String chain = "transitions:\n  good: {worn: 1/8, good: rest}\n"
+                + "  worn: {failed: 1/4, good: 1/16, worn: rest}\n  failed: {good: 1/32, failed: rest}\n";
+        Model model = model("nothing", chain + "actions: {look: {failed: stays}}\n"
+                + "schedule: {every: 6, first: 10, do: look}\n");
+        Timetable timetable = Timetable.of(model.chain(), model.schedule().orElseThrow());
+        Passage plain = Passage.of(model.chain(), Set.of(2), Set.of(), SHARES, AT);
+        ScheduledPassage.OverCycles over = ScheduledPassage.of(model.chain(), timetable, Set.of(2), Set.of(), SHARES,
+                AT).over().orElseThrow();
+        assertEquals(plain.moments(), over.moments());
+        assertEquals(plain.percentiles(), over.percentiles());
+        assertEquals(plain.fromEach(), over.fromEach());
+    }
 }
