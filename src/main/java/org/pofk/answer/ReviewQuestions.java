@@ -14,7 +14,6 @@ import org.pofk.exact.Rational;
 /** Collects the questions a model raises. Lives for one model. */
 final class ReviewQuestions {
     private static final int NAMED_AT_MOST = 5;
-    private static final String REST = ": rest came to ";
 
     private final Model model;
     private final Chain chain;
@@ -88,13 +87,12 @@ final class ReviewQuestions {
     }
 
     private void askAboutEntry() {
-        // what a rest came to is listed among the changes too, and is what the author wrote
-        List<String> changes = model.changes().stream().filter(change -> !change.contains(REST)).toList();
+        List<Model.Adjustment> changes = model.changes().stream().filter(Model.Adjustment::isChange).toList();
         if (!changes.isEmpty()) {
-            ask(Question.Kind.CHANGED_ON_ENTRY, changes.size() + " changed on entry (" + changes.get(0)
+            ask(Question.Kind.CHANGED_ON_ENTRY, changes.size() + " changed on entry (" + changes.get(0).text()
                     + "): is that what the author meant?", List.of());
         }
-        boolean anySource = model.notes().stream().anyMatch(note -> note.kind().equals("source"))
+        boolean anySource = model.notes().stream().anyMatch(note -> note.kind() == Model.Remark.Kind.SOURCE)
                 || model.parameters().stream().anyMatch(parameter -> parameter.source().isPresent());
         long inner = inner();
         if (!anySource && inner > 0) {

@@ -10,15 +10,14 @@ import java.util.Optional;
  * @param costs      what states and moves cost, which the chain alone knows nothing of
  * @param parameters parameters in the order of the file
  * @param notes      notes and sources on entries, in the order of the file
- * @param changes    every change made to rounded rows on entry ({@code sums: rescale}, {@code give to diagonal}),
- *                   and what each {@code rest} came to, one line each
+ * @param changes    what was worked out and what was changed on entry
  * @param written    the entries of the chain's matrix as the file writes them, in its order; none for what stays
  * @param tables     the tables that the file names
  * @param settings   what a command line puts in place of the file's words
  */
 public record Model(String title, Step step, Convention convention, About about, Chain chain,
         Optional<Schedule> schedule, Optional<Costs> costs, List<Parameter> parameters, List<Remark> notes,
-        List<String> changes, List<Written> written, Origin origin, List<Origin> tables, List<Setting> settings) {
+        List<Adjustment> changes, List<Written> written, Origin origin, List<Origin> tables, List<Setting> settings) {
 
     /** How the author writes a matrix: moves out of a state stand in a column or in a row. */
     public enum Convention { COLUMNS, ROWS }
@@ -43,11 +42,41 @@ public record Model(String title, Step step, Convention convention, About about,
     }
 
     /** An entry of the matrix as the file writes it, between two states by their places: {@code rest}, {@code 0.095}. */
-    public record Written(int from, int to, String text) {
+    public record Written(int from, int to, String text, Form form) {
+
+        /** How a number is written; an expression is one in parameters. */
+        public enum Form { REST, NUMBER, EXPRESSION }
+    }
+
+    /** A number that isn't as the file writes it, in a line. */
+    public record Adjustment(Reason reason, String text) {
+
+        /** What a {@code rest} came to, or what {@code sums: rescale} and {@code give to diagonal} made of a number. */
+        public enum Reason { REST_OF_MOVES, REST_OF_START, SUM }
+
+        /** Whether the author didn't write what stands there now: what a rest comes to was meant. */
+        public boolean isChange() {
+            return reason == Reason.SUM;
+        }
     }
 
     /** A note or source on an entry of the file. */
-    public record Remark(String on, String kind, String text) {
+    public record Remark(Place on, Kind kind, String text) {
+
+        /** By the key it stands under. */
+        public enum Kind {
+            NOTE("note"), SOURCE("source");
+
+            private final String word;
+
+            Kind(String word) {
+                this.word = word;
+            }
+
+            public String word() {
+                return word;
+            }
+        }
     }
 
     /**
@@ -81,7 +110,7 @@ public record Model(String title, Step step, Convention convention, About about,
 
     /** As the file alone says it. */
     public Model(String title, Step step, Convention convention, About about, Chain chain, Optional<Schedule> schedule,
-            Optional<Costs> costs, List<Parameter> parameters, List<Remark> notes, List<String> changes,
+            Optional<Costs> costs, List<Parameter> parameters, List<Remark> notes, List<Adjustment> changes,
             List<Written> written, Origin origin, List<Origin> tables) {
         this(title, step, convention, about, chain, schedule, costs, parameters, notes, changes, written, origin, tables,
                 List.of());

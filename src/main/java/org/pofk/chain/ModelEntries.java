@@ -19,7 +19,6 @@ import org.pofk.exact.Rational;
 final class ModelEntries {
     private static final int LONGEST_DECIMAL = 12;
     private static final int LONG_BITS = 1024;
-    private static final String REST = ": rest came to ";
 
     private final Model model;
     private final Map<String, String> names;
@@ -44,9 +43,9 @@ final class ModelEntries {
         all.model.costs().ifPresent(all::costs);
         model.settings().forEach(all::inFile);
         // what a rest came to is listed among the changes on entry too, and is what the author wrote
-        model.changes().stream().filter(change -> !change.contains(REST))
+        model.changes().stream().filter(Model.Adjustment::isChange).map(Model.Adjustment::text)
                 .forEach(change -> all.put(change, Subject.ADJUSTED, change));
-        model.notes().forEach(note -> all.join(Entry.of(Subject.NOTE, note.kind(), note.on()), note.text()));
+        model.notes().forEach(note -> all.join(Entry.of(Subject.NOTE, note.kind().word(), note.on().words()), note.text()));
         return all.entries;
     }
 

@@ -3,6 +3,9 @@ package org.pofk.input;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
+import org.pofk.chain.Model.Written;
+import org.pofk.chain.Model.Written.Form;
+import org.pofk.chain.Place;
 import org.pofk.exact.Rational;
 import org.pofk.text.Fault;
 import org.pofk.text.Faults;
@@ -23,18 +26,19 @@ final class Amounts {
     }
 
     /** The number, or faults and nothing; {@code rest} is a fault. */
-    Optional<Rational> number(Node node, String on) {
+    Optional<Rational> number(Node node, Place on) {
         return scalar(node, on).flatMap(this::number);
     }
 
     /** What goes to a state, {@code rest} included; faults and nothing when it can't be read. */
-    Optional<Share> share(Node node, int state, String on) {
+    Optional<Share> share(Node node, int state, Place on) {
         Optional<Node.Scalar> scalar = scalar(node, on);
         if (scalar.isPresent() && isRest(scalar.get())) {
-            return Optional.of(new Share(state, Optional.empty(), scalar.get().position(), REST));
+            return Optional.of(new Share(state, Optional.empty(), scalar.get().position(), REST, Form.REST));
         }
         return scalar.flatMap(written -> number(written)
-                .map(value -> new Share(state, Optional.of(value), written.position(), written.text().strip())));
+                .map(value -> new Share(state, Optional.of(value), written.position(), written.text().strip(),
+                        form(written))));
     }
 
     static boolean isRest(Node.Scalar scalar) {
@@ -42,7 +46,7 @@ final class Amounts {
     }
 
     /** The written number itself, out of {@code {value: …, note: …}} where it has remarks. */
-    private Optional<Node.Scalar> scalar(Node node, String on) {
+    private Optional<Node.Scalar> scalar(Node node, Place on) {
         Optional<Node> value = node.asMapping().isEmpty() ? Optional.of(node)
                 : Fields.of(node.asMapping().get(), on, VALUE, reading).value("value");
         if (value.isEmpty()) {
@@ -57,11 +61,18 @@ final class Amounts {
         return value.get().asScalar();
     }
 
+    private Form form(Node.Scalar scalar) {
+        boolean usesNames = Expressions.isExpression(scalar.text()) && Expressions.parse(scalar, parameters.names(),
+                new Reading(new Faults(), Overrides.NONE)).filter(parsed -> !parsed.symbols().isEmpty()).isPresent();
+        return usesNames ? Form.EXPRESSION : Form.NUMBER;
+    }
+
     /** The number as it is written, without the remarks beside it. */
-    static Optional<String> written(Node node) {
+    Optional<Written> written(Node node, int from, int to) {
         Optional<Node> value = node.asMapping().map(mapping -> mapping.entries().stream()
                 .filter(entry -> entry.name().equals("value")).map(Node.Entry::value).findFirst()).orElse(Optional.of(node));
-        return value.flatMap(Node::asScalar).map(scalar -> scalar.text().strip());
+        return value.flatMap(Node::asScalar)
+                .map(scalar -> new Written(from, to, scalar.text().strip(), form(scalar)));
     }
 
     private Optional<Rational> number(Node.Scalar scalar) {

@@ -13,6 +13,8 @@ import java.util.stream.IntStream;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Costs;
 import org.pofk.chain.Model.Written;
+import org.pofk.chain.Place;
+import org.pofk.chain.Place.Part;
 import org.pofk.chain.SparseMatrix;
 import org.pofk.exact.Rational;
 import org.pofk.text.Position;
@@ -69,19 +71,20 @@ final class CostsSection {
     private Costs costs(Node.Mapping mapping) {
         List<String> keys = new ArrayList<>(KEYS);
         actions.stream().map(CostsSection::key).filter(key -> !KEYS.contains(key)).forEach(keys::add);
-        Fields fields = Fields.of(mapping, "costs", keys, reading);
+        Fields fields = Fields.of(mapping, Place.of(Part.COSTS), keys, reading);
         if (keys.stream().filter(key -> !key.equals("unit") && !key.equals("discount"))
                 .allMatch(key -> fields.value(key).isEmpty())) {
             reading.fault(mapping.position(), "costs-of-nothing", "these costs name no amount; write for example "
                     + "each step in: {STATE: 12}, each move: {STATE: {OTHER: 40}} or at start: 100");
         }
         return new Costs(fields.value("unit").flatMap(unit -> reading.text(unit, "'unit'")).orElse(UNIT),
-                fields.value("each step in").map(node -> eachIn(node, "each step in")).orElseGet(() -> byState(Map.of())),
+                fields.value("each step in").map(node -> eachIn(node, "each step in",
+                        Place.of(Part.COSTS_OF_EACH_STEP))).orElseGet(() -> byState(Map.of())),
                 fields.value("each move").map(this::eachMove).orElse(List.of()),
-                actions.stream().flatMap(action -> fields.value(key(action)).filter(node -> keys.indexOf(key(action))
-                        >= KEYS.size()).map(node -> new Costs.OfAction(action, eachIn(node, key(action)))).stream())
-                        .toList(),
-                fields.value("at start").flatMap(start -> amounts.number(start, "costs at start"))
+                actions.stream().filter(action -> keys.indexOf(key(action)) >= KEYS.size())
+                        .flatMap(action -> fields.value(key(action)).map(node -> new Costs.OfAction(action,
+                                eachIn(node, key(action), Place.named("costs of each " + action)))).stream()).toList(),
+                fields.value("at start").flatMap(start -> amounts.number(start, Place.of(Part.COSTS_AT_START)))
                         .orElse(Rational.ZERO),
                 fields.value("discount").flatMap(this::discount));
     }
@@ -92,13 +95,13 @@ final class CostsSection {
     }
 
     /** Amounts by state: {@code what} is {@code each step in}, or {@code each ACTION in}. */
-    private List<Rational> eachIn(Node node, String what) {
+    private List<Rational> eachIn(Node node, String what, Place on) {
         Map<Integer, Rational> found = new HashMap<>();
         Map<Integer, Position> seen = new HashMap<>();
-        String each = what.substring(0, what.length() - " in".length());
         reading.mapping(node, "'" + what + "'", "{STATE: 12}").ifPresent(mapping -> {
-            for (Node.Entry entry : costed(mapping, "costs of " + each)) {
-                Optional<Rational> cost = amounts.number(entry.value(), "cost of " + what + " '" + entry.name() + "'");
+            for (Node.Entry entry : costed(mapping, on)) {
+                Optional<Rational> cost = amounts.number(entry.value(),
+                        Place.named("cost of " + what + " '" + entry.name() + "'"));
                 for (int state : members(entry.key())) {
                     if (isNew(seen, state, entry.key(), what + " '" + states.names().get(state) + "'")) {
                         cost.ifPresent(amount -> found.put(state, amount));
@@ -119,10 +122,10 @@ final class CostsSection {
         Map<List<Integer>, Position> seen = new LinkedHashMap<>();
         List<Costs.Move> found = new ArrayList<>();
         reading.mapping(node, "'each move'", "{STATE: {OTHER: 40}}").ifPresent(mapping -> {
-            for (Node.Entry from : costed(mapping, "costs of moves")) {
+            for (Node.Entry from : costed(mapping, Place.of(Part.COSTS_OF_MOVES))) {
                 List<Integer> left = members(from.key());
                 reading.mapping(from.value(), "what moves from '" + Words.shortened(from.name()) + "' cost",
-                        "{OTHER: 40}").ifPresent(targets -> costed(targets, "costs of moves from '" + from.name() + "'")
+                        "{OTHER: 40}").ifPresent(targets -> costed(targets, Place.named("costs of moves from '" + from.name() + "'"))
                         .forEach(to -> found.addAll(moves(from, to, left, seen))));
             }
         });
@@ -133,7 +136,7 @@ final class CostsSection {
     private List<Costs.Move> moves(Node.Entry from, Node.Entry to, List<Integer> left,
             Map<List<Integer>, Position> seen) {
         Optional<Rational> cost = amounts.number(to.value(),
-                "cost of the move from '" + from.name() + "' to '" + to.name() + "'");
+                Place.named("cost of the move from '" + from.name() + "' to '" + to.name() + "'"));
         List<Integer> entered = members(to.key());
         List<Costs.Move> found = new ArrayList<>();
         boolean any = left.isEmpty() || entered.isEmpty();
@@ -171,7 +174,7 @@ final class CostsSection {
     }
 
     /** The entries that are no remarks. */
-    private List<Node.Entry> costed(Node.Mapping mapping, String on) {
+    private List<Node.Entry> costed(Node.Mapping mapping, Place on) {
         return mapping.entries().stream().filter(entry -> states.contains(entry.name())
                 || sets.containsKey(entry.name()) || !Fields.takeRemark(entry, on, reading)).toList();
     }
@@ -192,7 +195,7 @@ final class CostsSection {
     }
 
     private Optional<Rational> discount(Node node) {
-        Optional<Rational> rate = amounts.number(node, "discount");
+        Optional<Rational> rate = amounts.number(node, Place.of(Part.DISCOUNT));
         if (rate.isPresent() && (rate.get().signum() < 0 || rate.get().compareTo(Rational.ONE) > 0)) {
             reading.fault(node.position(), "discount-out-of-range", "a discount of " + Numbers.shown(rate.get())
                     + " a step must lie between 0 and 1; write for example 3.5%");

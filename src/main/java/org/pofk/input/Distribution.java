@@ -3,6 +3,8 @@ package org.pofk.input;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalInt;
+import org.pofk.chain.Model.Adjustment;
+import org.pofk.chain.Model.Adjustment.Reason;
 import org.pofk.chain.SparseMatrix.Entry;
 import org.pofk.exact.Rational;
 import org.pofk.text.Position;
@@ -86,7 +88,8 @@ record Distribution(String from, String link, Position position, List<Share> sha
             reading.fault(rest.position(), "negative-rest", from + " the other probabilities add up to "
                     + Numbers.shown(others) + ", above 1, so nothing is left for 'rest'");
         } else {
-            reading.changes().add(from + toward(rest) + ": rest came to " + Numbers.shown(left));
+            reading.changes().add(new Adjustment(diagonal.isPresent() ? Reason.REST_OF_MOVES : Reason.REST_OF_START,
+                    from + toward(rest) + ": rest came to " + Numbers.shown(left)));
         }
         List<Entry> entries = new ArrayList<>(entries());
         entries.add(new Entry(rest.state(), left));
@@ -115,9 +118,9 @@ record Distribution(String from, String link, Position position, List<Share> sha
             Rational value = entry.value().dividedBy(sum);
             scaled.add(new Entry(entry.row(), value));
             if (!entry.value().isZero()) {
-                reading.changes().add(from + toward(entry.row()) + ": " + Numbers.shown(entry.value()) + " became "
-                        + Numbers.shown(value) + ", rescaled because the sum was " + Numbers.shown(sum)
-                        + beyondRounding(sum));
+                reading.changes().add(new Adjustment(Reason.SUM, from + toward(entry.row()) + ": "
+                        + Numbers.shown(entry.value()) + " became " + Numbers.shown(value)
+                        + ", rescaled because the sum was " + Numbers.shown(sum) + beyondRounding(sum)));
             }
         }
         return scaled;
@@ -131,9 +134,9 @@ record Distribution(String from, String link, Position position, List<Share> sha
             reading.fault(position, "negative-diagonal", from + " the probabilities add up to " + Numbers.shown(sum)
                     + ", and staying has only " + Numbers.shown(before) + " to give");
         }
-        reading.changes().add(from + toward(staying) + ": " + Numbers.shown(before) + " became "
-                + Numbers.shown(after) + ", given to the diagonal because the sum was " + Numbers.shown(sum)
-                + beyondRounding(sum));
+        reading.changes().add(new Adjustment(Reason.SUM, from + toward(staying) + ": " + Numbers.shown(before)
+                + " became " + Numbers.shown(after) + ", given to the diagonal because the sum was "
+                + Numbers.shown(sum) + beyondRounding(sum)));
         List<Entry> entries = new ArrayList<>(entries().stream().filter(entry -> entry.row() != staying).toList());
         entries.add(new Entry(staying, after));
         return entries;

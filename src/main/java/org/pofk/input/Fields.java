@@ -1,16 +1,17 @@
 package org.pofk.input;
 
+import java.util.Arrays;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import org.pofk.chain.Model.Remark;
+import org.pofk.chain.Place;
 import org.pofk.text.Position;
 
 /** A mapping whose keys are words of the file format. Keys that begin with {@code x-} are ignored. */
 final class Fields {
     private static final int MOST_LISTED = 24;
-    private static final List<String> REMARKS = List.of("note", "source");
 
     private final Map<String, Node.Entry> entries;
 
@@ -22,7 +23,7 @@ final class Fields {
      * The known keys of {@code mapping}; a fault for each other key. A {@code note} or {@code source} is kept as a
      * remark on {@code on}.
      */
-    static Fields of(Node.Mapping mapping, String on, List<String> known, Reading reading) {
+    static Fields of(Node.Mapping mapping, Place on, List<String> known, Reading reading) {
         Map<String, Node.Entry> entries = new LinkedHashMap<>();
         for (Node.Entry entry : mapping.entries()) {
             if (known.contains(entry.name())) {
@@ -35,18 +36,25 @@ final class Fields {
         return new Fields(entries);
     }
 
+    /** The same of a section that nobody asks by its place what is written on it. */
+    static Fields of(Node.Mapping mapping, String on, List<String> known, Reading reading) {
+        return of(mapping, Place.named(on), known, reading);
+    }
+
     static boolean isRemark(Node.Entry entry) {
-        return REMARKS.contains(entry.name());
+        return kind(entry).isPresent();
     }
 
     /** Keeps the entry as a remark when it is one. */
-    static boolean takeRemark(Node.Entry entry, String on, Reading reading) {
-        if (!isRemark(entry)) {
-            return false;
-        }
-        reading.text(entry.value(), "'" + entry.name() + "'")
-                .ifPresent(text -> reading.remarks().add(new Remark(on, entry.name(), text)));
-        return true;
+    static boolean takeRemark(Node.Entry entry, Place on, Reading reading) {
+        Optional<Remark.Kind> kind = kind(entry);
+        kind.ifPresent(key -> reading.text(entry.value(), "'" + entry.name() + "'")
+                .ifPresent(text -> reading.remarks().add(new Remark(on, key, text))));
+        return kind.isPresent();
+    }
+
+    private static Optional<Remark.Kind> kind(Node.Entry entry) {
+        return Arrays.stream(Remark.Kind.values()).filter(kind -> kind.word().equals(entry.name())).findFirst();
     }
 
     private static String suggestion(List<String> known, String name, Reading reading) {

@@ -10,6 +10,8 @@ import org.pofk.chain.Model.About;
 import org.pofk.chain.Model.Convention;
 import org.pofk.chain.Model.Origin;
 import org.pofk.chain.Model.Step;
+import org.pofk.chain.Place;
+import org.pofk.chain.Place.Part;
 import org.pofk.chain.SparseMatrix;
 import org.pofk.exact.Rational;
 import org.pofk.input.Head.Orientation;
@@ -58,7 +60,7 @@ public final class MatrixFileReader {
     private static MatrixGrid grid(NamedTable table, Source source, Reading reading) {
         Amounts amounts = new Amounts(ParameterValues.NONE, reading);
         return new MatrixGrid(table.cells().stream().map(row -> row.stream()
-                .map(cell -> amounts.share(cell, 0, "matrix").map(MatrixGrid.Cell::new)).toList()).toList(),
+                .map(cell -> amounts.share(cell, 0, Place.of(Part.MATRIX)).map(MatrixGrid.Cell::new)).toList()).toList(),
                 new Position(source.name(), 1, 1));
     }
 

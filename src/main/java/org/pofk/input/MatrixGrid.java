@@ -21,7 +21,7 @@ record MatrixGrid(List<List<Optional<MatrixGrid.Cell>>> rows, Position place) {
     /** A cell: a number or {@code rest}. */
     record Cell(Share content) {
         Share to(int state) {
-            return new Share(state, content.value(), content.position(), content.written());
+            return new Share(state, content.value(), content.position(), content.written(), content.form());
         }
     }
 

@@ -8,6 +8,9 @@ import java.util.Optional;
 import java.util.stream.IntStream;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
+import org.pofk.chain.Model.Written.Form;
+import org.pofk.chain.Place;
+import org.pofk.chain.Place.Part;
 import org.pofk.chain.SparseMatrix;
 import org.pofk.input.Head.Orientation;
 import org.pofk.text.Fault;
@@ -29,7 +32,7 @@ final class MatrixSection {
     private MatrixSection(Node.Mapping written, Position place, Optional<Path> folder, Reading reading) {
         this.place = place;
         this.reading = reading;
-        this.fields = Fields.of(written, "matrix", KEYS, reading);
+        this.fields = Fields.of(written, Place.of(Part.MATRIX), KEYS, reading);
         this.orientation = fields.value("orientation")
                 .flatMap(node -> reading.keyword(node, "the orientation", Orientation.values()));
         this.sums = fields.value("sums").flatMap(node -> reading.keyword(node, "'sums'", Sums.values()));
@@ -118,9 +121,9 @@ final class MatrixSection {
     }
 
     private static Optional<MatrixGrid.Cell> cell(Node node, Head head, Amounts amounts) {
-        return head.kind() == Chain.Kind.CHAIN ? amounts.share(node, 0, "matrix").map(MatrixGrid.Cell::new)
-                : amounts.number(node, "matrix").map(value -> new MatrixGrid.Cell(
-                        new Share(0, Optional.of(value), node.position(), Numbers.shown(value))));
+        return head.kind() == Chain.Kind.CHAIN ? amounts.share(node, 0, Place.of(Part.MATRIX)).map(MatrixGrid.Cell::new)
+                : amounts.number(node, Place.of(Part.MATRIX)).map(value -> new MatrixGrid.Cell(
+                        new Share(0, Optional.of(value), node.position(), Numbers.shown(value), Form.NUMBER)));
     }
 
     /** The rows of {@code entries}, when they form a square. */

@@ -12,6 +12,8 @@ import org.pofk.chain.Model.Convention;
 import org.pofk.chain.Model.Origin;
 import org.pofk.chain.Model.Parameter;
 import org.pofk.chain.Output;
+import org.pofk.chain.Place;
+import org.pofk.chain.Place.Part;
 import org.pofk.chain.Schedule;
 import org.pofk.chain.SparseMatrix;
 import org.pofk.exact.Rational;
@@ -65,7 +67,7 @@ public final class ModelReader {
 
     /** The model, when there are no faults; nothing when not even its states could be read. */
     private Optional<Model> model(Node.Mapping root) {
-        Fields fields = Fields.of(root, "model", KEYS, reading);
+        Fields fields = Fields.of(root, Place.of(Part.MODEL), KEYS, reading);
         Head head = Head.read(fields, root, source.fileName(), reading);
         ParametersSection section = new ParametersSection(reading);
         List<Parameter> parameters = section.read(fields.value("parameters"));

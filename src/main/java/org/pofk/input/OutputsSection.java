@@ -12,6 +12,8 @@ import java.util.Set;
 import java.util.stream.Collectors;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Output;
+import org.pofk.chain.Place;
+import org.pofk.chain.Place.Part;
 import org.pofk.exact.Rational;
 import org.pofk.formula.LinearForm;
 import org.pofk.formula.ParsedFormula;
@@ -144,7 +146,7 @@ final class OutputsSection {
     }
 
     private LinearForm term(Node.Entry entry, String output) {
-        String on = "output '" + output + "'";
+        Place on = Place.of(Part.OUTPUT, output);
         String name = entry.name();
         if (isTerm(name)) {
             return amounts.number(entry.value(), on).map(names.get(name)::times).orElse(LinearForm.ZERO);

@@ -10,7 +10,10 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import org.pofk.chain.Model.Parameter;
+import org.pofk.chain.Model.Remark.Kind;
 import org.pofk.chain.Model.Setting;
+import org.pofk.chain.Place;
+import org.pofk.chain.Place.Part;
 import org.pofk.exact.Rational;
 import org.pofk.formula.LinearForm;
 import org.pofk.formula.ParsedFormula;
@@ -77,12 +80,12 @@ final class ParametersSection {
             return new Declaration(entry.key(), scalar(override.or(() -> Optional.of(entry.value()))),
                     Optional.empty(), Optional.empty(), Optional.empty(), Optional.empty());
         }
-        String on = "parameter '" + entry.name() + "'";
+        Place on = Place.of(Part.PARAMETER, entry.name());
         Fields fields = Fields.of(entry.value().asMapping().get(), on, KEYS, reading);
         override.ifPresent(value -> set(entry, value, fields.value("value")));
         return new Declaration(entry.key(), scalar(override.or(() -> fields.value("value"))), fields.value("from"),
                 fields.value("to"), fields.value("meaning").flatMap(node -> reading.text(node, "'meaning'")),
-                reading.remarks().stream().filter(remark -> remark.on().equals(on) && remark.kind().equals("source"))
+                reading.remarks().stream().filter(remark -> remark.on().equals(on) && remark.kind() == Kind.SOURCE)
                         .filter(remark -> override.isEmpty()).map(remark -> remark.text()).findFirst());
     }
 
@@ -160,8 +163,8 @@ final class ParametersSection {
 
     private Parameter parameter(Declaration declaration, Rational value) {
         Amounts amounts = new Amounts(ParameterValues.NONE, reading);
-        Optional<Rational> from = declaration.from().flatMap(node -> amounts.number(node, "from"));
-        Optional<Rational> to = declaration.to().flatMap(node -> amounts.number(node, "to"));
+        Optional<Rational> from = declaration.from().flatMap(node -> amounts.number(node, Place.named("from")));
+        Optional<Rational> to = declaration.to().flatMap(node -> amounts.number(node, Place.named("to")));
         Position place = declaration.value().orElseThrow().position();
         String name = declaration.name().name();
         if (from.isPresent() && to.isPresent() && from.get().compareTo(to.get()) > 0) {

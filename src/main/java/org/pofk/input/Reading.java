@@ -6,6 +6,7 @@ import java.util.Collection;
 import java.util.Deque;
 import java.util.List;
 import java.util.Optional;
+import org.pofk.chain.Model.Adjustment;
 import org.pofk.chain.Model.Origin;
 import org.pofk.chain.Model.Remark;
 import org.pofk.chain.Model.Setting;
@@ -23,7 +24,7 @@ final class Reading {
     private final Faults faults;
     private final Overrides overrides;
     private final List<Remark> remarks = new ArrayList<>();
-    private final List<String> changes = new ArrayList<>();
+    private final List<Adjustment> changes = new ArrayList<>();
     private final List<Written> written = new ArrayList<>();
     private final List<Origin> tables = new ArrayList<>();
     private final List<Setting> settings = new ArrayList<>();
@@ -47,7 +48,7 @@ final class Reading {
         return remarks;
     }
 
-    List<String> changes() {
+    List<Adjustment> changes() {
         return changes;
     }
 

@@ -7,6 +7,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.stream.IntStream;
+import org.pofk.chain.Place;
 import org.pofk.chain.Schedule;
 import org.pofk.chain.Schedule.Phases;
 import org.pofk.chain.Schedule.Recurring;
@@ -91,7 +92,7 @@ final class ScheduleSections {
         Optional<Node.Mapping> written = fields.value(section).flatMap(node -> reading.mapping(node,
                 "'" + section + "'", "{NAME: {STATE: {OTHER: 0.9, STATE: rest}}}"));
         for (Node.Entry entry : written.map(Node.Mapping::entries).orElse(List.of())) {
-            boolean isRemark = entry.value().asScalar().isPresent() && Fields.takeRemark(entry, section, reading);
+            boolean isRemark = entry.value().asScalar().isPresent() && Fields.takeRemark(entry, Place.named(section), reading);
             if (!isRemark && States.isName(entry.key(), section.equals(ACTIONS) ? "an action" : "moves", reading)) {
                 String place = in + " '" + Words.shortened(entry.name()) + "'";
                 reading.mapping(entry.value(), "what happens " + place, "{STATE: {OTHER: 0.9, STATE: rest}}")

@@ -2,6 +2,7 @@ package org.pofk.input;
 
 import java.util.Optional;
 import org.pofk.chain.Model.Written;
+import org.pofk.chain.Model.Written.Form;
 import org.pofk.exact.Rational;
 import org.pofk.text.Position;
 
@@ -12,7 +13,7 @@ import org.pofk.text.Position;
  * @param value   nothing for {@code rest}
  * @param written as in the file
  */
-record Share(int state, Optional<Rational> value, Position position, String written) {
+record Share(int state, Optional<Rational> value, Position position, String written, Form form) {
 
     boolean isRest() {
         return value.isEmpty();
@@ -20,7 +21,7 @@ record Share(int state, Optional<Rational> value, Position position, String writ
 
     /** Kept as it is written, as a move out of a state. */
     Written from(int origin) {
-        return new Written(origin, state, written);
+        return new Written(origin, state, written, form);
     }
 
     /** The value, zero for {@code rest}. */

@@ -7,6 +7,9 @@ import java.util.Map;
 import java.util.Optional;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model.Setting;
+import org.pofk.chain.Model.Written.Form;
+import org.pofk.chain.Place;
+import org.pofk.chain.Place.Part;
 import org.pofk.chain.SparseMatrix;
 import org.pofk.chain.SparseMatrix.Entry;
 import org.pofk.exact.Rational;
@@ -96,13 +99,13 @@ final class StartSection {
         Optional<Node.Entry> part = mapping.entries().stream().filter(entry -> entry.name().equals(LONG_RUN_OF)
                 && !states.contains(LONG_RUN_OF) && head.kind() == Chain.Kind.CHAIN).findFirst();
         if (part.isPresent()) {
-            Fields.of(mapping, "start", List.of(LONG_RUN_OF), reading);
+            Fields.of(mapping, Place.of(Part.START), List.of(LONG_RUN_OF), reading);
             return reading.scalar(part.get().value(), "the part whose long run is the start")
                     .map(name -> LongRunStart.ofPart(name, states, sets, matrix, reading)).orElse(List.of());
         }
         List<Optional<Share>> shares = new ArrayList<>();
         for (Node.Entry entry : mapping.entries()) {
-            if (states.contains(entry.name()) || !Fields.takeRemark(entry, "start", reading)) {
+            if (states.contains(entry.name()) || !Fields.takeRemark(entry, Place.of(Part.START), reading)) {
                 Optional<Integer> state = states.find(entry.key(), reading);
                 Optional<Share> share = share(entry.value(), state.orElse(0));
                 shares.add(state.flatMap(known -> share));
@@ -126,9 +129,9 @@ final class StartSection {
     }
 
     private Optional<Share> share(Node node, int state) {
-        return head.kind() == Chain.Kind.CHAIN ? amounts.share(node, state, "start")
-                : amounts.number(node, "start")
-                        .map(value -> new Share(state, Optional.of(value), node.position(), Numbers.shown(value)));
+        return head.kind() == Chain.Kind.CHAIN ? amounts.share(node, state, Place.of(Part.START))
+                : amounts.number(node, Place.of(Part.START))
+                        .map(value -> new Share(state, Optional.of(value), node.position(), Numbers.shown(value), Form.NUMBER));
     }
 
     private List<Rational> complete(List<Optional<Share>> read, Position position) {

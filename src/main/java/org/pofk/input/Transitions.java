@@ -7,9 +7,10 @@ import java.util.List;
 import java.util.Optional;
 import java.util.Set;
 import org.pofk.chain.Chain;
+import org.pofk.chain.Place;
+import org.pofk.chain.Place.Part;
 import org.pofk.chain.SparseMatrix;
 import org.pofk.chain.SparseMatrix.Entry;
-import org.pofk.chain.Model.Written;
 import org.pofk.exact.Rational;
 import org.pofk.text.Position;
 
@@ -95,7 +96,7 @@ final class Transitions {
         List<List<Entry>> columns = new ArrayList<>(others.columns());
         for (Node.Entry entry : written.entries()) {
             if (!states.contains(entry.name()) && isRemark(entry)) {
-                Fields.takeRemark(entry, section, reading);
+                Fields.takeRemark(entry, section.equals(ALL) ? Place.of(Part.TRANSITIONS) : Place.named(section), reading);
                 continue;
             }
             given.add(entry.name());
@@ -128,7 +129,8 @@ final class Transitions {
         boolean allRead = true;
         for (Node.Entry move : withoutRemarks(moves, entry.name())) {
             Optional<Integer> to = target(move.key());
-            Optional<Share> share = amounts.share(move.value(), to.orElse(from), in + on(entry, move));
+            Optional<Share> share = amounts.share(move.value(), to.orElse(from),
+                    place(Part.MOVE, entry.name(), move.name()));
             allRead &= to.isPresent() && share.isPresent();
             if (to.isPresent()) {
                 share.ifPresent(shares::add);
@@ -147,10 +149,10 @@ final class Transitions {
         List<Entry> column = new ArrayList<>();
         for (Node.Entry move : withoutRemarks(coefficients, entry.name())) {
             Optional<Integer> to = target(move.key());
-            Optional<Rational> value = amounts.number(move.value(), in + on(entry, move));
+            Optional<Rational> value = amounts.number(move.value(), place(Part.MOVE, entry.name(), move.name()));
             if (to.isPresent()) {
                 value.ifPresent(number -> column.add(new Entry(to.get(), number)));
-                Amounts.written(move.value()).ifPresent(text -> reading.written().add(new Written(from, to.get(), text)));
+                amounts.written(move.value(), from, to.get()).ifPresent(reading.written()::add);
             }
         }
         return column;
@@ -159,12 +161,14 @@ final class Transitions {
     /** The moves; what is a remark on them goes to the remarks. */
     private List<Node.Entry> withoutRemarks(Node.Mapping moves, String from) {
         return moves.entries().stream()
-                .filter(move -> states.contains(move.name()) || !Fields.takeRemark(move, in + "from '" + from + "'", reading))
+                .filter(move -> states.contains(move.name()) || !Fields.takeRemark(move,
+                        place(Part.MOVES_FROM, from), reading))
                 .toList();
     }
 
-    private static String on(Node.Entry from, Node.Entry to) {
-        return "from '" + from.name() + "' to '" + to.name() + "'";
+    private Place place(Part part, String... states) {
+        Place place = Place.of(part, states);
+        return in.isEmpty() ? place : Place.named(in + place.words());
     }
 
     private Optional<Integer> target(Node.Scalar name) {

@@ -54,7 +54,7 @@ final class ChainBlocks {
         heading();
         blocks.addAll(matrix().of(symbol()));
         if (!model.changes().isEmpty()) {
-            blocks.add(new Items(model.changes().stream().map(Prose::name).toList()));
+            blocks.add(new Items(model.changes().stream().map(change -> Prose.name(change.text())).toList()));
         }
         vectors();
         if (model.chain().size() <= CHARACTERISTIC_UP_TO) {

@@ -8,6 +8,7 @@ import java.util.stream.IntStream;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
+import org.pofk.chain.Place;
 import org.pofk.chain.Structure;
 import org.pofk.exact.Rational;
 import org.pofk.report.Document.Block;
@@ -152,15 +153,15 @@ final class ModelBlocks {
         List<Model.Remark> notes = model.notes().stream().filter(note -> !isOfReplaced(note)).toList();
         if (!notes.isEmpty()) {
             blocks.add(new Heading(3, "Notes and sources"));
-            blocks.add(new Items(notes.stream().map(note -> ModelHead.words(note.on()).and(", " + note.kind()
+            blocks.add(new Items(notes.stream().map(note -> ModelHead.words(note.on().words()).and(", " + note.kind().word()
                     + ": ").and(ModelHead.words(note.text()))).toList()));
         }
     }
 
     /** The source of a value of the file that the command line replaces. */
     private boolean isOfReplaced(Model.Remark note) {
-        return note.kind().equals("source") && model.settings().stream().flatMap(each -> each.parameter().stream())
-                .anyMatch(name -> note.on().equals("parameter '" + name + "'"));
+        return note.kind() == Model.Remark.Kind.SOURCE && model.settings().stream().flatMap(each -> each.parameter().stream())
+                .anyMatch(name -> note.on().equals(Place.of(Place.Part.PARAMETER, name)));
     }
 
     private void assumptions() {

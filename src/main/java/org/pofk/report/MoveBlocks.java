@@ -7,6 +7,7 @@ import java.util.Map;
 import java.util.Optional;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
+import org.pofk.chain.Model.Adjustment.Reason;
 import org.pofk.chain.SparseMatrix;
 import org.pofk.exact.Rational;
 import org.pofk.report.Document.Block;
@@ -18,17 +19,19 @@ import org.pofk.report.Document.Table;
 /** The moves of a model: each number with how its author writes it, so that what a {@code rest} came to is seen. */
 final class MoveBlocks {
     static final int LISTED_UP_TO = 150;
-    private static final String REST = ": rest came to ";
     private static final int CHANGES_LISTED_UP_TO = 40;
 
     private final Model model;
     private final Chain chain;
-    private final Map<List<Integer>, String> written = new HashMap<>();
+    private final Map<Move, String> written = new HashMap<>();
+
+    private record Move(int from, int to) {
+    }
 
     private MoveBlocks(Model model) {
         this.model = model;
         this.chain = model.chain();
-        model.written().forEach(each -> written.put(List.of(each.from(), each.to()), each.text()));
+        model.written().forEach(each -> written.put(new Move(each.from(), each.to()), each.text()));
     }
 
     static List<Block> of(Model model) {
@@ -45,8 +48,8 @@ final class MoveBlocks {
         } else {
             blocks.add(table(isChain ? "probability" : "coefficient"));
         }
-        List<Prose> changes = model.changes().stream().filter(change -> moves > LISTED_UP_TO || !change.contains(REST)
-                || change.startsWith("at the start")).map(ModelHead::words).toList();
+        List<Prose> changes = model.changes().stream().filter(change -> moves > LISTED_UP_TO
+                || change.reason() != Reason.REST_OF_MOVES).map(change -> ModelHead.words(change.text())).toList();
         if (!changes.isEmpty()) {
             blocks.add(new Paragraph("What was worked out or changed on entry"
                     + (changes.size() > CHANGES_LISTED_UP_TO ? ", the first " + CHANGES_LISTED_UP_TO + " of "
@@ -72,7 +75,7 @@ final class MoveBlocks {
     }
 
     private Prose asWritten(int from, SparseMatrix.Entry entry) {
-        return Optional.ofNullable(written.get(List.of(from, entry.row()))).map(Prose::name)
+        return Optional.ofNullable(written.get(new Move(from, entry.row()))).map(Prose::name)
                 .orElseGet(() -> Prose.of(entry.value().equals(Rational.ONE) ? "stays" : ""));
     }
 }

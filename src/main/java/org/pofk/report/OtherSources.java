@@ -11,6 +11,8 @@ import org.pofk.chain.Chain;
 import org.pofk.chain.Costs;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
+import org.pofk.chain.Place;
+import org.pofk.chain.Place.Part;
 import org.pofk.exact.Rational;
 
 /** The numbers without a source that stand beside the moves: those of the start, of outputs, of costs. */
@@ -21,22 +23,22 @@ final class OtherSources {
     private static final Comparator<String> LONGEST = Comparator.comparingInt(String::length).reversed();
 
     private final Model model;
-    private final Set<String> sourced;
+    private final Set<Place> sourced;
 
-    private OtherSources(Model model, Set<String> sourced) {
+    private OtherSources(Model model, Set<Place> sourced) {
         this.model = model;
         this.sourced = sourced;
     }
 
     /** @param sourced what sources are written on */
-    static List<Prose> of(Model model, Set<String> sourced) {
-        if (sourced.contains("model")) {
+    static List<Prose> of(Model model, Set<Place> sourced) {
+        if (sourced.contains(Place.of(Part.MODEL))) {
             return List.of();
         }
         OtherSources others = new OtherSources(model, sourced);
         List<Prose> open = new ArrayList<>();
         Chain chain = model.chain();
-        if (!sourced.contains("start") && chain.start().stream().anyMatch(OtherSources::isAmount)) {
+        if (!sourced.contains(Place.of(Part.START)) && chain.start().stream().anyMatch(OtherSources::isAmount)) {
             open.add(Prose.of("the start: ").and(StartProse.of(chain)));
         }
         chain.outputs().stream().filter(others::isOpen).forEach(output -> open.add(Prose.of("output ")
@@ -50,7 +52,7 @@ final class OtherSources {
     }
 
     private boolean isOpen(Output output) {
-        return !sourced.contains("output '" + output.name() + "'")
+        return !sourced.contains(Place.of(Part.OUTPUT, output.name()))
                 && NUMBER.matcher(withoutNames(output.definition())).results()
                         .anyMatch(number -> !NONE_NEEDED.contains(number.group()));
     }
@@ -69,24 +71,24 @@ final class OtherSources {
 
     private List<Prose> costs(Costs costs) {
         List<Prose> open = new ArrayList<>();
-        if (sourced.contains("costs")) {
+        if (sourced.contains(Place.of(Part.COSTS))) {
             return open;
         }
         List<String> states = model.chain().states();
         List<Prose> eachStep = IntStream.range(0, states.size()).filter(i -> !costs.eachStep().get(i).isZero())
                 .mapToObj(i -> Prose.of(costs.eachStep().get(i) + " in ").andName(states.get(i))).toList();
-        if (!eachStep.isEmpty() && !sourced.contains("costs of each step")) {
+        if (!eachStep.isEmpty() && !sourced.contains(Place.of(Part.COSTS_OF_EACH_STEP))) {
             open.add(Prose.of("costs of each step: ").and(Prose.joined(eachStep, ", ")));
         }
-        if (!costs.moves().isEmpty() && !sourced.contains("costs of moves")) {
+        if (!costs.moves().isEmpty() && !sourced.contains(Place.of(Part.COSTS_OF_MOVES))) {
             open.add(Prose.of("costs of moves: ").and(Prose.joined(costs.moves().stream().map(move ->
                     Prose.of(move.cost() + " from ").andName(states.get(move.from())).and(" to ")
                             .andName(states.get(move.to()))).toList(), ", ")));
         }
-        if (!costs.atStart().isZero()) {
+        if (!costs.atStart().isZero() && !sourced.contains(Place.of(Part.COSTS_AT_START))) {
             open.add(Prose.of("costs at the start: " + costs.atStart()));
         }
-        costs.discount().ifPresent(rate -> open.add(Prose.of("discount: " + rate)));
+        costs.discount().filter(rate -> !sourced.contains(Place.of(Part.DISCOUNT))).ifPresent(rate -> open.add(Prose.of("discount: " + rate)));
         return open;
     }
 }

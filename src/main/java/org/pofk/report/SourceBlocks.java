@@ -7,14 +7,15 @@ import java.util.Map;
 import java.util.Set;
 import java.util.stream.Collectors;
 import org.pofk.chain.Model;
+import org.pofk.chain.Model.Remark;
 import org.pofk.chain.Model.Written;
-import org.pofk.formula.FormulaParser;
+import org.pofk.chain.Place;
+import org.pofk.chain.Place.Part;
+import org.pofk.exact.Rational;
 import org.pofk.report.Document.Block;
 import org.pofk.report.Document.Heading;
 import org.pofk.report.Document.Items;
 import org.pofk.report.Document.Paragraph;
-import org.pofk.text.Position;
-import org.pofk.text.RefusedException;
 
 /**
  * The numbers of a model that name no source. A source stands for all that it is written on: the model, its moves, the
@@ -22,16 +23,16 @@ import org.pofk.text.RefusedException;
  * need none; an expression in parameters has theirs.
  */
 final class SourceBlocks {
-    private static final Set<String> GIVEN = Set.of("rest", "0", "1");
-    private static final Set<String> ON_ALL = Set.of("model", "transitions", "matrix");
+    private static final Set<Place> ON_ALL = Set.of(Place.of(Part.MODEL), Place.of(Part.TRANSITIONS),
+            Place.of(Part.MATRIX));
     private static final int LISTED_UP_TO = 30;
 
     private final Model model;
-    private final Set<String> sourced;
+    private final Set<Place> sourced;
 
     private SourceBlocks(Model model) {
         this.model = model;
-        this.sourced = model.notes().stream().filter(note -> note.kind().equals("source")).map(Model.Remark::on)
+        this.sourced = model.notes().stream().filter(note -> note.kind() == Remark.Kind.SOURCE).map(Remark::on)
                 .collect(Collectors.toSet());
     }
 
@@ -64,23 +65,20 @@ final class SourceBlocks {
         }
         List<String> states = model.chain().states();
         for (Written each : model.written()) {
-            String from = "from '" + states.get(each.from()) + "'";
+            String from = states.get(each.from());
             String to = states.get(each.to());
-            if (!GIVEN.contains(each.text()) && isNumber(each.text()) && !sourced.contains(from)
-                    && !sourced.contains(from + " to '" + to + "'")) {
-                open.computeIfAbsent(states.get(each.from()), none -> new ArrayList<>())
+            if (each.form() == Written.Form.NUMBER && !isCertain(each) && !sourced.contains(Place.of(Part.MOVES_FROM, from))
+                    && !sourced.contains(Place.of(Part.MOVE, from, to))) {
+                open.computeIfAbsent(from, none -> new ArrayList<>())
                         .add(Prose.of("to ").andName(to).and(" ").andName(each.text()));
             }
         }
         return open;
     }
 
-    /** Whether no parameter is in it. */
-    private static boolean isNumber(String text) {
-        try {
-            return FormulaParser.parse(text, Position.ofWhole("model")).symbols().isEmpty();
-        } catch (RefusedException notInNumbers) {
-            return true;
-        }
+    /** Zero and one say that a move never or always happens. */
+    private boolean isCertain(Written each) {
+        Rational value = model.chain().matrix().at(each.to(), each.from());
+        return value.isZero() || value.isOne();
     }
 }

@@ -9,12 +9,16 @@ import org.junit.jupiter.api.Test;
 import org.pofk.answer.Question.Kind;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
+import org.pofk.chain.Model.Adjustment;
+import org.pofk.chain.Model.Adjustment.Reason;
+import org.pofk.chain.Place;
 import org.pofk.exact.Rational;
 
 class InspectionTest {
     private static final Model.About ASSUMED = new Model.About(Optional.empty(), Optional.empty(), Optional.empty(),
             List.of("repairs as good as new"), Optional.empty());
-    private static final Model.Remark SOURCE = new Model.Remark("transitions", "source", "log book");
+    private static final Model.Remark SOURCE = new Model.Remark(Place.of(Place.Part.TRANSITIONS),
+            Model.Remark.Kind.SOURCE, "log book");
 
     @Test
     void aWellDocumentedErgodicChainRaisesNoQuestion() {
@@ -48,7 +52,8 @@ class InspectionTest {
     @Test
     void missingSourcesAndAssumptionsAndChangesOnEntryAreAskedAbout() {
         Model bare = model(Chains.pumps(), Model.About.NOTHING, List.of(),
-                List.of("from 'one': rest came to 19/50", "from 'none' to 'none': 0.41 became 2/5"));
+                List.of(new Adjustment(Reason.REST_OF_MOVES,
+                        "from 'one': rest came to 19/50"), new Adjustment(Reason.SUM, "from 'none' to 'none': 0.41 became 2/5")));
         assertEquals(List.of(Kind.CHANGED_ON_ENTRY, Kind.WITHOUT_SOURCE, Kind.WITHOUT_ASSUMPTIONS),
                 Inspection.of(bare).questions().stream().map(Question::kind).toList());
     }
@@ -71,7 +76,8 @@ class InspectionTest {
         return Inspection.of(model(chain, ASSUMED, List.of(SOURCE), List.of()));
     }
 
-    private static Model model(Chain chain, Model.About about, List<Model.Remark> remarks, List<String> changes) {
+    private static Model model(Chain chain, Model.About about, List<Model.Remark> remarks,
+            List<Adjustment> changes) {
         return new Model("invented", new Model.Step("1 shift", Optional.empty(), Optional.empty()),
                 Model.Convention.COLUMNS, about, chain, Optional.empty(), Optional.empty(), List.of(),
                 remarks, changes, List.of(), new Model.Origin("invented.yaml", ""), List.of());

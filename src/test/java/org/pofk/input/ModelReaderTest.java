@@ -5,16 +5,22 @@ import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.nio.file.Path;
+import java.util.Comparator;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import org.junit.jupiter.api.Test;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
+import org.pofk.chain.Model.Adjustment;
+import org.pofk.chain.Model.Adjustment.Reason;
 import org.pofk.chain.Model.Convention;
 import org.pofk.chain.Model.Parameter;
 import org.pofk.chain.Model.Remark;
+import org.pofk.chain.Model.Written;
+import org.pofk.chain.Model.Written.Form;
 import org.pofk.chain.Output;
+import org.pofk.chain.Place;
 import org.pofk.exact.Rational;
 import org.pofk.text.RefusedException;
 
@@ -65,7 +71,7 @@ class ModelReaderTest {
         assertEquals(numbers("5/2 1/2 0 0"), output(model, "twice").coefficients());
         assertEquals(numbers("5/2 2 0 0"), output(model, "weights").coefficients());
         assertEquals("{up: 2, both: 1/2}", output(model, "weights").definition());
-        assertTrue(model.notes().contains(new Remark("set 'noted'", "note", "agreed with operations")));
+        assertTrue(model.notes().contains(new Remark(Place.named("set 'noted'"), Remark.Kind.NOTE, "agreed with operations")));
     }
 
     @Test
@@ -87,7 +93,8 @@ class ModelReaderTest {
         assertEquals("1/4", move(model, "4", "3"));
         assertEquals("1", move(model, "3", "3"));
         assertEquals(Convention.ROWS, model.convention());
-        assertEquals(List.of("from '4' (row 2) to '4': rest came to 3/4"), model.changes());
+        assertEquals(List.of(new Adjustment(Reason.REST_OF_MOVES, "from '4' (row 2) to '4': rest came to 3/4")),
+                model.changes());
     }
 
     @Test
@@ -108,15 +115,27 @@ class ModelReaderTest {
         assertEquals("2/3", move(model, "new", "new"));
         assertEquals(numbers("1/3 1/3 1/3"), model.chain().start());
         assertEquals(5, model.changes().size());
-        assertTrue(model.changes().contains(
-                "from 'new' to 'used': 33/100 became 1/3, rescaled because the sum was 99/100"));
+        assertTrue(model.changes().contains(new Adjustment(Reason.SUM,
+                "from 'new' to 'used': 33/100 became 1/3, rescaled because the sum was 99/100")));
     }
 
     @Test
     void aSumFurtherFromOneThanRoundingIsSaid() throws RefusedException {
         Model model = text("pofk: 1\nsums: rescale\nstart: a\ntransitions:\n  a: {a: 0.50, b: 0.25}\n  b: stays\n");
-        assertTrue(model.changes().contains("from 'a' to 'b': 1/4 became 1/3, rescaled because the sum was 3/4, further "
-                + "from 1 than rounding explains"), model.changes().toString());
+        assertTrue(model.changes().contains(new Adjustment(Reason.SUM, "from 'a' to 'b': 1/4 became 1/3, rescaled because"
+                + " the sum was 3/4, further from 1 than rounding explains")), model.changes().toString());
+    }
+
+    @Test
+    void eachNumberTellsWhetherItIsOneItselfARestOrAnExpressionInParameters() throws RefusedException {
+        Model model = text("pofk: 1\nparameters: {f: 1/20}\nstart: {a: 1/2, b: rest}\ntransitions:\n"
+                + "  a: {a: rest, b: 2*f}\n  b: {a: 1/4 - 1/20, b: {value: 0.8, source: log book}}\n");
+        assertEquals(List.of(new Written(0, 0, "rest", Form.REST), new Written(0, 1, "2*f", Form.EXPRESSION),
+                new Written(1, 0, "1/4 - 1/20", Form.NUMBER), new Written(1, 1, "0.8", Form.NUMBER)), model.written());
+        assertEquals(List.of(Reason.REST_OF_START, Reason.REST_OF_MOVES),
+                model.changes().stream().map(Adjustment::reason).sorted(Comparator.reverseOrder()).toList());
+        assertEquals(List.of(new Remark(Place.of(Place.Part.MOVE, "b", "b"), Remark.Kind.SOURCE, "log book")),
+                model.notes());
     }
 
     @Test
@@ -138,7 +157,8 @@ class ModelReaderTest {
                 Optional.of("failures in an hour"), Optional.of("invented")), model.parameters().get(0));
         assertEquals(Optional.of("8*'per hour'"), model.parameters().get(1).definition());
         assertEquals("1 - up", output(model, "lost").definition());
-        assertTrue(model.notes().contains(new Remark("from 'up' to 'down'", "note", "a shift of eight hours")));
+        assertTrue(model.notes().contains(new Remark(Place.of(Place.Part.MOVE, "up", "down"), Remark.Kind.NOTE,
+                "a shift of eight hours")));
     }
 
     @Test
@@ -183,7 +203,7 @@ class ModelReaderTest {
                 List.of("repairs start at once", "no two failures in one step"),
                 Optional.of(Model.Concern.PROTECTIVE_FUNCTION)), model.about());
         assertEquals(List.of("model", "model", "transitions", "from 'Ventil A'"),
-                model.notes().stream().map(Remark::on).toList());
+                model.notes().stream().map(note -> note.on().words()).toList());
         assertEquals("1 inspection", model.step().is());
         assertEquals(64, model.origin().sha256().length());
     }

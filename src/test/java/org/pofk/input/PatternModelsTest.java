@@ -11,6 +11,8 @@ import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.pofk.chain.ChainCheck;
 import org.pofk.chain.Model;
+import org.pofk.chain.Model.Adjustment;
+import org.pofk.chain.Model.Adjustment.Reason;
 import org.pofk.exact.Rational;
 import org.pofk.text.RefusedException;
 
@@ -43,6 +45,7 @@ class PatternModelsTest {
         assertEquals(Rational.of(19, 200), model.chain().matrix().at(1, 0));
         assertEquals(Rational.of(2, 5), model.chain().matrix().at(2, 2));
         assertEquals(List.of(Rational.ONE, Rational.ZERO, Rational.ZERO), model.chain().outputs().get(1).coefficients());
-        assertTrue(model.changes().contains("from 'both' to 'both': rest came to 361/400"), model.changes().toString());
+        assertTrue(model.changes().contains(new Adjustment(Reason.REST_OF_MOVES,
+                "from 'both' to 'both': rest came to 361/400")), model.changes().toString());
     }
 }
