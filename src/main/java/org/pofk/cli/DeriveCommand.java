@@ -111,8 +111,9 @@ final class DeriveCommand implements Work {
         if (isTooLargeForAll(read.chain())) {
             throw new UsageException(StructureDocument.askingForOutputs(read.chain()));
         }
-        return ScheduledDerivation.write(options, read, AskedOutputs.of(read.chain(), of), destination.steps(at),
-                show == Part.ALL ? Scheduling.Formulas.ALL : Scheduling.Formulas.WITHIN_REACH, destination, streams);
+        return ScheduledDerivation.write(options, read, AskedOutputs.of(read.chain(), of),
+                at.map(StepList::steps).orElse(List.of()), show == Part.ALL ? Scheduling.Formulas.ALL
+                        : Scheduling.Formulas.WITHIN_REACH, destination, streams);
     }
 
     private ExitCode derive(Model read, Optional<Known> known, Style style, Destination destination, Streams streams)

@@ -73,7 +73,7 @@ final class DrawCommand implements Work {
         Drawn drawn = drawn();
         checkOptions(drawn);
         save.check();
-        Model read = model.read();
+        Model read = model.readWithSchedule();
         Optional<Chart> chart = what == Figure.STATES ? Optional.of(states(read)) : ofOutputs(read, streams);
         if (chart.isEmpty()) {
             streams.notes().println("pofk: not everything to be drawn was found within the budget; nothing is written");
@@ -129,6 +129,12 @@ final class DrawCommand implements Work {
         if (outputs.size() > CourseChart.MOST_CURVES) {
             throw new UsageException("these are " + outputs.size() + " outputs; " + CourseChart.MOST_CURVES
                     + " at most can be told apart in a figure; name those that matter with --of");
+        }
+        if (read.schedule().isPresent() && what == Figure.POLES) {
+            throw ScheduledDrawing.withoutPoles(read);
+        }
+        if (read.schedule().isPresent()) {
+            return ScheduledDrawing.course(run, read, outputs, at, streams);
         }
         Worker.Outcome<Chart> outcome = run.within(streams, published -> {
             DerivedModel derived = Deriving.of(read, outputs, List.of(), EnumSet.noneOf(Deriving.Extra.class),
