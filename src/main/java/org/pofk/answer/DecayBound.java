@@ -2,8 +2,10 @@ package org.pofk.answer;
 
 import java.math.BigInteger;
 import java.util.List;
+import org.pofk.exact.Ball;
 import org.pofk.exact.Enclosed;
 import org.pofk.exact.Rational;
+import org.pofk.exact.UnitCircle;
 
 /**
  * When a sum of decaying modes stays below 10^−digits: Σ a · k^p/p! · r^(k−p) from upper bounds a and r < 1, rounded up
@@ -28,7 +30,10 @@ final class DecayBound {
         this.bits = bits;
     }
 
-    /** The precision is raised until every modulus is bounded below one; modes that don't decay are a fault of ours. */
+    /**
+     * The precision is raised until every modulus is bounded below one. A mode that doesn't decay is a fault of ours: no
+     * precision would tell a pole on the unit circle from one inside, so the factor of a pole so near is asked, exactly.
+     */
     static DecayBound of(List<DecayingMode> modes, int digits) {
         int bits = LEAST_BITS + BITS_A_DIGIT * digits;
         while (bits <= MOST_BITS) {
@@ -41,9 +46,19 @@ final class DecayBound {
                     return new DecayBound(terms, digits, bits);
                 }
             }
+            modes.forEach(mode -> requireDecay(mode, tried));
             bits *= 2;
         }
         throw new AssertionError("a mode doesn't decay, as far as " + MOST_BITS + " bits tell: " + modes);
+    }
+
+    private static void requireDecay(DecayingMode mode, int bits) {
+        Ball modulus = mode.modulus().enclose(bits);
+        boolean isInside = modulus.upper().compareTo(Rational.ONE) < 0;
+        if (!isInside && (modulus.lower().compareTo(Rational.ONE) > 0 || UnitCircle.rootsOn(mode.factor()) > 0)) {
+            throw new AssertionError("a mode doesn't decay, or a factor with poles on the unit circle was not split off: "
+                    + mode.factor());
+        }
     }
 
     /** The least multiple of 2^−bits seen to be at least the value. */
