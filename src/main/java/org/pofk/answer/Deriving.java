@@ -112,7 +112,7 @@ public final class Deriving {
         var chain = known.model().chain();
         List<Output> outputs = known.outputs().stream().map(DerivedOutput::output).toList();
         Optional<Simulation> simulation = chain.kind() == org.pofk.chain.Chain.Kind.CHAIN
-                ? Optional.of(Simulation.of(chain, outputs, List.of(1, 5, 20, COMPARED_UP_TO), RUNS, SEED))
+                ? Optional.of(RandomRuns.of(chain, known.outputs(), RUNS, SEED))
                 : Optional.empty();
         List<Comparison> comparisons = Comparison.of(chain, closedForms(), COMPARED_UP_TO, simulation);
         for (int i = 0; i < comparisons.size(); i++) {

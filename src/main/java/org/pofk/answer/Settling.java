@@ -16,6 +16,7 @@ import org.pofk.modes.Mode;
  *
  * @param slowest the largest modulus below one of a pole; empty when no mode decays and the long run is there once the
  *                impulses are over
+ * @param exactly that modulus where it is known to be rational
  * @param tied    how many modes have that modulus or one that agrees with it to {@value #TIED_BITS} bits; a pair counts
  *                once. Equal moduli can't be told apart by looking closer
  * @param power   the highest power of k that one of these comes with
@@ -25,7 +26,7 @@ import org.pofk.modes.Mode;
  * @param from    |p(k) − long run| ≤ 10^−digits for every k from here on: a bound from the amplitudes, so it may hold
  *                earlier
  */
-public record Settling(Optional<Enclosed> slowest, int tied, int power, Optional<Enclosed> period, int digits,
+public record Settling(Optional<Enclosed> slowest, Optional<Rational> exactly, int tied, int power, Optional<Enclosed> period, int digits,
         BigInteger from) {
     static final int TIED_BITS = 256;
 
@@ -44,7 +45,8 @@ public record Settling(Optional<Enclosed> slowest, int tied, int power, Optional
                 decaying.get(i).compareModulus(most, TIED_BITS) == 0)).boxed().toList();
         int power = tied.stream().mapToInt(i -> decaying.get(i).power()).max().orElse(0);
         boolean isOne = tied.stream().map(i -> modes.get(i).pole()).distinct().count() == 1;
-        return new Settling(slowest.map(DecayingMode::modulus), tied.size(), power,
+        return new Settling(slowest.map(DecayingMode::modulus), isOne ? modes.get(tied.get(0)).accept(new Modulus())
+                : Optional.empty(), tied.size(), power,
                 isOne ? modes.get(tied.get(0)).accept(new Period()) : Optional.empty(), digits, from);
     }
 
@@ -52,6 +54,24 @@ public record Settling(Optional<Enclosed> slowest, int tied, int power, Optional
     public Optional<Enclosed> halfLife() {
         return slowest.map(modulus -> modulus.map(ball ->
                 Ball.of(2, ball.scale()).log().dividedBy(ball.log().negate())));
+    }
+
+    /** Where it is rational. */
+    private static final class Modulus implements Mode.Visitor<Optional<Rational>> {
+        @Override
+        public Optional<Rational> impulse(Mode.Impulse impulse) {
+            throw new AssertionError("impulses don't decay: " + impulse);
+        }
+
+        @Override
+        public Optional<Rational> geometric(Mode.Geometric mode) {
+            return mode.base().rational().map(Rational::abs);
+        }
+
+        @Override
+        public Optional<Rational> oscillating(Mode.Oscillating mode) {
+            return mode.modulus().rational();
+        }
     }
 
     /** 2π over the angle. */

@@ -44,7 +44,7 @@ final class ReportCommand implements Work {
     private List<String> of = new ArrayList<>();
 
     @Option(names = "--at", paramLabel = "STEPS", converter = StepList.Converter.class, defaultValue = "0..10,20,50",
-            description = "the steps of the table of values; ${DEFAULT-VALUE} otherwise")
+            description = {"the steps of the table of values; ${DEFAULT-VALUE}", "otherwise, and later ones where it settles later"})
     private StepList at;
 
     @Option(names = "--show", paramLabel = "DEPTH", defaultValue = "full",
@@ -82,7 +82,7 @@ final class ReportCommand implements Work {
         Provenance provenance = provenance(Stream.concat(asked.files(), earlier.stream().flatMap(AskedReport::files)));
         Worker.Outcome<Report> outcome = options.within(streams, published -> {
             Report report = asked.find(provenance, published);
-            earlier.ifPresent(each -> each.find(provenance, found -> published.accept(report.since(found))));
+            earlier.ifPresent(each -> each.at(report.derived().wanted().at()).find(provenance, found -> published.accept(report.since(found))));
         });
         if (outcome.published().isEmpty()) {
             return options.undecided(streams);
@@ -117,7 +117,7 @@ final class ReportCommand implements Work {
 
     private AskedReport asked(Model read, Style style) throws RefusedException, UsageException {
         List<Output> outputs = AskedOutputs.of(read.chain(), of);
-        return new AskedReport(read, outputs, sections(read, outputs, style), at.steps(), extras());
+        return new AskedReport(read, outputs, sections(read, outputs, style), at.steps(), reach(), extras());
     }
 
     /** The same of the model of an earlier issue, as far as it can be asked of that one; states by their later names. */
@@ -129,7 +129,7 @@ final class ReportCommand implements Work {
         sections.addAll(whereAsked(() -> totals.sections(model.with(chain), at.steps(), style)));
         sections.addAll(whereAsked(() -> given.sections(model.with(chain), outputs, at.steps(), style)));
         sections.addAll(whereAsked(() -> claims.sections(model, options.settings())));
-        return new AskedReport(model, outputs, sections, at.steps(), extras());
+        return new AskedReport(model, outputs, sections, at.steps(), reach(), extras());
     }
 
     /** None about names that the earlier model doesn't have, or by a derivation that is about the later one. */
@@ -145,6 +145,11 @@ final class ReportCommand implements Work {
     private Provenance provenance(Stream<Model.Origin> files) {
         return new Provenance(VersionCommand.program(), TypedLine.of("report", command.commandLine().getParseResult()
                 .originalArgs()), files.distinct().toList());
+    }
+
+    private AskedReport.Reach reach() {
+        return command.commandLine().getParseResult().hasMatchedOption("--at") ? AskedReport.Reach.AS_LISTED
+                : AskedReport.Reach.UNTIL_SETTLED;
     }
 
     private Set<Deriving.Extra> extras() {

@@ -47,7 +47,7 @@ final class HtmlSpelling {
     private static final class Text implements Prose.Visitor<String> {
         @Override
         public String words(Prose.Words words) {
-            return RAISED.matcher(Xml.escaped(words.text().replace(" %", Spelling.NO_BREAK + "%")))
+            return RAISED.matcher(Xml.escaped(Typography.of(words.text()).replace(" %", Spelling.NO_BREAK + "%")))
                     .replaceAll("<sup>$1</sup>");
         }
 

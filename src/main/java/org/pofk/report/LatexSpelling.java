@@ -17,6 +17,7 @@ final class LatexSpelling {
     private static final Pattern LONG = Pattern.compile("[^\\s~]{12,}");
     private static final Pattern RAISED =
             Pattern.compile("\\\\textasciicircum\\{}(\\\\ensuremath\\{-}|-)?([0-9]+|[A-Za-z])");
+    private static final Pattern EQUATION = Pattern.compile("(?<![A-Za-z\\\\])([A-Za-z]) = (?=[0-9])");
     /** A word without parts is broken anywhere from this length on. */
     private static final int LONGEST_PLAIN = 20;
     private static final int LONGEST_FORMULA = 28;
@@ -45,7 +46,8 @@ final class LatexSpelling {
     }
 
     private static String words(String text) {
-        return RAISED.matcher(LatexText.of(text).replace(" \\%", "~\\%")).replaceAll(found ->
+        return RAISED.matcher(EQUATION.matcher(LatexText.of(Typography.minus(text))).replaceAll("$1~=~")
+                .replace(" \\%", "~\\%")).replaceAll(found ->
                 Matcher.quoteReplacement("\\textsuperscript{" + (found.group(1) == null ? "" : "\\ensuremath{-}")
                         + (Character.isLetter(found.group(2).charAt(0)) ? "\\textit{" + found.group(2) + "}"
                                 : found.group(2)) + "}"));

@@ -135,8 +135,11 @@ final class ReportSummary {
                 : Optional.of(figures.equals(KeyFigures.NONE) ? MissingBlocks.NOT_DECIDED : "not decided");
     }
 
-    /** A few, spread over those that are listed later. */
-    private String values(List<StepValue> all) {
+    /** A few, spread over those that are listed later and differ from the one before. */
+    private String values(List<StepValue> listed) {
+        List<String> texts = listed.stream().map(value -> ValueText.of(value, style.digits())).toList();
+        List<StepValue> all = IntStream.range(0, listed.size())
+                .filter(i -> i == 0 || !texts.get(i).equals(texts.get(i - 1))).mapToObj(listed::get).toList();
         int last = all.size() - 1;
         return String.join("; ", IntStream.range(0, VALUES_SHOWN).map(i -> i * last / (VALUES_SHOWN - 1)).distinct()
                 .mapToObj(all::get).map(value -> ValueText.of(value, style.digits()) + " at k = " + value.k()).toList());

@@ -7,6 +7,7 @@ import org.pofk.answer.DerivedOutput;
 import org.pofk.answer.HighPowers;
 import org.pofk.answer.LongRunChecks;
 import org.pofk.exact.Decimals;
+import org.pofk.exact.Rational;
 import org.pofk.formula.Formula;
 import org.pofk.formula.PlainText;
 import org.pofk.modes.ClosedForm;
@@ -125,14 +126,23 @@ final class ResultBlocks {
             AnglesProse.of(form, style).ifPresent(angles -> blocks.add(new Labelled("in degrees", angles)));
         }
         if (!isSame && !isExact(decimals)) {
-            label("decimals", promise(decimals));
+            label("decimals", promise(decimals) + tooSmall(decimals));
         }
+    }
+
+    /** Values among those listed of which the decimals leave less than a digit. */
+    private String tooSmall(DecimalForm decimals) {
+        Rational bound = decimals.errorBound().times(Rational.of(10));
+        boolean isLost = decimals.formula().isPresent() && output.values().stream()
+                .map(value -> CourseChart.near(value).abs()).anyMatch(near -> !near.isZero() && near.compareTo(bound) < 0);
+        return isLost ? "; take values below " + Decimals.of(bound, ERROR_DIGITS).text()
+                + " from the exact formula or from --at" : "";
     }
 
     private void decimals(DecimalForm decimals) {
         decimals.formula().ifPresent(formula -> blocks.add(new Display(left,
                 isExact(decimals) ? Relation.EQUAL : Relation.ROUNDED, formula)));
-        label("decimals", promise(decimals));
+        label("decimals", promise(decimals) + tooSmall(decimals));
         label("exact", "too long for this page; it stands below");
     }
 

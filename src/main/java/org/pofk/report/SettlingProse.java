@@ -4,6 +4,7 @@ import java.util.Optional;
 import org.pofk.answer.LongRun;
 import org.pofk.answer.Settling;
 import org.pofk.exact.Ball;
+import org.pofk.exact.Decimal;
 import org.pofk.exact.Decimals;
 import org.pofk.exact.Enclosed;
 import org.pofk.exact.Rational;
@@ -22,7 +23,7 @@ final class SettlingProse {
                 ? "stays " + within + " of it" + from
                 : "the cycle is reached to " + within + from)
                 + settling.slowest().map(modulus -> "; slowest part decays like "
-                        + power(settling.power()) + base(modulus, digits) + "^k"
+                        + power(settling.power()) + base(settling, modulus, digits) + "^k"
                         + (settling.tied() > 1 ? ", shared by " + settling.tied() + " modes" : "")).orElse("");
     }
 
@@ -38,8 +39,13 @@ final class SettlingProse {
         return power == 0 ? "" : power == 1 ? "k·" : "k^" + power + "·";
     }
 
-    /** A base just below one is told apart from it by what it lacks. */
-    private static String base(Enclosed modulus, int digits) {
+    /** As it is where that is short. A base just below one is told apart from it by what it lacks. */
+    private static String base(Settling settling, Enclosed modulus, int digits) {
+        Optional<String> exact = settling.exactly().map(value -> Decimals.of(value, digits))
+                .filter(Decimal::exact).map(Decimal::text);
+        if (exact.isPresent()) {
+            return exact.get();
+        }
         Ball missing = Ball.of(1, BITS).minus(modulus.enclose(BITS));
         boolean nearlyOne = missing.isPositive() && missing.upper().compareTo(Rational.of(1, 1000)) <= 0;
         return nearlyOne

@@ -11,7 +11,7 @@ import org.pofk.text.Alphabet;
  * Prose as characters of a screen. Our words and formulas are written in the alphabet; names stay as they are. What a
  * screen can't show, or would obey (control characters, changes of direction), is written {@code \\u{1b}}. Blanks
  * where no line may break are no-break spaces: inside names, in formulas all but those before a sign, before
- * a percent sign.
+ * a percent sign, inside {@code k = 50}.
  */
 final class Spelling {
     static final char NO_BREAK = '\u00a0';
@@ -52,7 +52,7 @@ final class Spelling {
     private final class Parts implements Prose.Visitor<String> {
         @Override
         public String words(Prose.Words words) {
-            return of(words.text()).replace(" %", NO_BREAK + "%");
+            return of(Typography.of(words.text())).replace(" %", NO_BREAK + "%");
         }
 
         @Override

@@ -49,7 +49,8 @@ public record TextWriter(Alphabet alphabet, Charset charset, int width) {
     }
 
     private static boolean needsBlankLine(List<Block> blocks, int place) {
-        return !(blocks.get(place - 1) instanceof Document.Heading) && !Document.isListed(blocks, place);
+        return !(blocks.get(place - 1) instanceof Document.Heading
+                && !(blocks.get(place) instanceof Document.Heading)) && !Document.isListed(blocks, place);
     }
 
     /** The width of the widest label among the labelled lines that stand together with the one given. */
@@ -87,7 +88,7 @@ public record TextWriter(Alphabet alphabet, Charset charset, int width) {
             switch (heading.level()) {
                 case 1 -> lines.add(line("═", "=").repeat(widest));
                 case 2 -> lines.add(line("─", "-").repeat(widest));
-                default -> { }
+                default -> lines.add(line("┄", ".").repeat(widest));
             }
             return lines;
         }

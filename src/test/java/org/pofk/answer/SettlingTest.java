@@ -77,7 +77,7 @@ class SettlingTest {
     @Test
     void withoutDecayingModesTheLongRunIsThereAfterTheImpulses() {
         Chain turns = Chains.chain("1 0 0", "0 0 0", "1 0 1", "0 1 0");
-        assertEquals(new Settling(Optional.empty(), 0, 0, Optional.empty(), 6, BigInteger.ONE), settling(turns, 0, 6));
+        assertEquals(new Settling(Optional.empty(), Optional.empty(), 0, 0, Optional.empty(), 6, BigInteger.ONE), settling(turns, 0, 6));
     }
 
     @Test
