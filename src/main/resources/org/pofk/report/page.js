@@ -16,9 +16,10 @@
 
   function sequence(element) {
     const data = element.dataset;
+    const first = whole(data.first);
     return {
-      scale: BigInt(data.scale), divisor: BigInt(data.divisor),
-      recurrence: whole(data.recurrence), first: whole(data.first)
+      scale: BigInt(data.scale), divisor: BigInt(data.divisor), recurrence: whole(data.recurrence), first: first,
+      kept: first.slice()
     };
   }
 
@@ -155,18 +156,24 @@
   }
 
   // The first step, up to the last one looked at, at which y is at the target or on its other side; else -1.
+  // Every key that is typed searches again: above some order the values are kept, up to it only those still needed.
   function reaches(s, target, last) {
-    const next = s.first.slice();
+    const d = s.first.length;
+    const values = d > SQUARED_UP_TO ? s.kept : s.first.slice();
     let below = s.divisor;
     for (let k = 0; k <= last; k++) {
-      const ahead = (next.length === 0 ? 0n : next[0]) * target[1] - target[0] * below;
+      if (k >= values.length) {
+        let next = 0n;
+        s.recurrence.forEach(function (c, j) { next += c * values[k - d + j]; });
+        values.push(next);
+        if (values !== s.kept && d > 0) {
+          values[k - d] = 0n;
+        }
+      }
+      const ahead = values[k] * target[1] - target[0] * below;
       if (ahead === 0n || (ahead > 0n) !== startsAbove(s, target)) {
         return k;
       }
-      let after = 0n;
-      s.recurrence.forEach(function (c, j) { after += c * next[j]; });
-      next.push(after);
-      next.shift();
       below *= s.scale;
     }
     return -1;
