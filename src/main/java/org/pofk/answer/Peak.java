@@ -24,6 +24,8 @@ import org.pofk.transform.Transforms;
 public record Peak(StepValue value, Optional<Long> at) {
     private static final int BITS = 256;
     private static final int ROUGH_BITS = 80;
+    /** What rough values may differ by and yet be the same: else all of a long approach would be halved to single steps. */
+    private static final Rational ROUGHLY_ALIKE = Rational.TWO.pow(-ROUGH_BITS / 2);
     private static final int MOST_STRETCHES = 100_000;
     private static final int MOST_DIGITS = 40;
     private static final long MOST_CLASSES = 120;
@@ -179,8 +181,11 @@ public record Peak(StepValue value, Optional<Long> at) {
                 first = limit.plus(sum.over(from, from, modulus));
                 offer(from, first);
             }
-            Ball all = from == to ? first : limit.plus(rough.over(from, to, modulus));
-            return new Stretch(from, to, modulus, all.upper());
+            Rational all = from == to ? first.upper() : limit.plus(rough.over(from, to, modulus)).upper();
+            Rational above = all.minus(bestValue.upper());
+            boolean isRoughlyAsHigh = above.signum() > 0 && above.compareTo(ROUGHLY_ALIKE) <= 0;
+            return new Stretch(from, to, modulus, from < to && isRoughlyAsHigh
+                    ? limit.plus(sum.over(from, to, modulus)).upper() : all);
         }
     }
 }

@@ -6,6 +6,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
@@ -24,6 +25,7 @@ class KeyFiguresTest {
     void noStepIsHigherThanTheHighestAndTheOneNamedIsTheFirstToReachIt() throws IOException, RefusedException {
         int named = 0;
         int approached = 0;
+        List<String> undecided = new ArrayList<>();
         for (String pattern : Files.readAllLines(Path.of("test-data/models/index.txt"))) {
             Model model = Pofk.read(Path.of("test-data/models", pattern.strip() + ".yaml"));
             if (model.chain().size() <= 20) {
@@ -31,6 +33,9 @@ class KeyFiguresTest {
                         partly -> { });
                 for (DerivedOutput output : derived.outputs()) {
                     Optional<Peak> peak = KeyFigures.of(model.chain(), output).highest();
+                    if (peak.isEmpty() && !LongRunValues.of(output.longRun().orElseThrow().byPoles()).isEmpty()) {
+                        undecided.add(pattern + ": " + output.output().name());
+                    }
                     peak.ifPresent(found -> holds(model.chain(), output, found));
                     named += peak.flatMap(Peak::at).isPresent() ? 1 : 0;
                     approached += peak.isPresent() && peak.get().at().isEmpty() ? 1 : 0;
@@ -38,6 +43,8 @@ class KeyFiguresTest {
             }
         }
         assertTrue(named >= 15 && approached >= 8, named + " " + approached);
+        // three slowest modes of one modulus, whose signs in the end are looked at two classes apart alone
+        assertEquals(List.of("tandem-presses: finished"), undecided);
     }
 
     private static void holds(Chain chain, DerivedOutput output, Peak peak) {
