@@ -76,6 +76,9 @@ final class ReportCommand implements Work {
         List<Model> models = since.models(options);
         Model read = models.get(0);
         requireFew(read.chain());
+        if (read.schedule().isPresent()) {
+            return scheduled(read, style, destination, streams);
+        }
         AskedReport asked = asked(read, style);
         Optional<AskedReport> earlier = models.size() == 1 ? Optional.empty()
                 : Optional.of(earlier(models.get(1), read, style));
@@ -96,6 +99,17 @@ final class ReportCommand implements Work {
                 .with(Format.NOTEBOOK, () -> NotebookWriter.write(report, show, style,
                         options.convention(read))), streams);
         return code(report, outcome.finished());
+    }
+
+    private ExitCode scheduled(Model read, Style style, Destination destination, Streams streams)
+            throws RefusedException, UsageException, WritingException {
+        List<Output> outputs = AskedOutputs.of(read.chain(), of);
+        if (!sections(read, outputs, style).isEmpty()) {
+            throw new UsageException("'" + read.origin().file() + "' has a schedule: its report has the course, the long"
+                    + " run and the formulas over the cycles, no further answers and no claims");
+        }
+        return ScheduledReporting.write(options, read, outputs, at.steps(), show,
+                provenance(Stream.concat(Stream.of(read.origin()), read.tables().stream())), destination, streams);
     }
 
     /** Everything a report can say besides what is derived; an answer more is a line more. */

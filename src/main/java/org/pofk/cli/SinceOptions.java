@@ -16,9 +16,9 @@ final class SinceOptions {
 
     /**
      * The model, and then the earlier one where it is asked for: read as the model itself is, with what the command line
-     * puts in place of its words.
+     * puts in place of its words. One with a schedule is not compared with an earlier one.
      */
     List<Model> models(AnswerOptions options) throws RefusedException, UsageException {
-        return file.isEmpty() ? List.of(options.model()) : options.modelWith(file.get());
+        return file.isEmpty() ? List.of(options.modelWithSchedule()) : options.modelWith(file.get());
     }
 }

@@ -85,6 +85,9 @@ final class ModelBlocks {
                     Prose.of(states.size() + (states.size() == 1 ? " state: " : " states: "))
                             .and(StateNames.of(states.stream().sorted().toList(), chain.states())))));
         }
+        if (model.schedule().isPresent()) {
+            return; // what is scheduled may lead out of them and into them
+        }
         if (isChain) {
             named("never left", structure.absorbing());
         }

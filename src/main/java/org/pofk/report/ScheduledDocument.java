@@ -53,16 +53,56 @@ public final class ScheduledDocument {
         blocks.add(Caution.ofInspections(found.model()));
     }
 
+    /** The cycles of an output in a few lines: what the first is like, and what they tend to. */
+    static List<Block> results(ScheduledModel found, ScheduledOutput output, Style style) {
+        ScheduledDocument document = new ScheduledDocument(found, style);
+        document.results(output);
+        return document.blocks;
+    }
+
+    /** The long run by step of the cycle, and the formulas, whose proof is told apart. */
+    static List<Block> formulas(ScheduledModel found, ScheduledOutput output, Style style) {
+        ScheduledDocument document = new ScheduledDocument(found, style);
+        document.tabled(output);
+        document.formulas(output);
+        return document.blocks;
+    }
+
+    /** The values at the steps asked for. */
+    static List<Block> values(ScheduledModel found, Style style) {
+        ScheduledDocument document = new ScheduledDocument(found, style);
+        document.values();
+        return document.blocks;
+    }
+
     private void output(ScheduledOutput output) {
         blocks.add(new Heading(2, OutputProse.title(output.output())));
+        results(output);
+        tabled(output);
+        within(output);
+        over(output);
+        proof(output);
+        joint(output);
+    }
+
+    private void formulas(ScheduledOutput output) {
+        within(output);
+        over(output);
+        joint(output);
+    }
+
+    private void results(ScheduledOutput output) {
         output.preamble().ifPresent(course -> summary("before the cycles", course));
         output.first().filter(course -> timetable.period() > 1).ifPresent(course -> summary("first cycle", course));
         output.regime().ifPresentOrElse(this::regime, () -> blocks.add(new Labelled("in the long run",
                 "not decided: even very many cycles leave it unsettled, or the budget ran out")));
+    }
+
+    private void tabled(ScheduledOutput output) {
         output.regime().flatMap(RecurringCourse::of).ifPresent(course -> table(output, course));
-        within(output);
-        over(output);
-        proof(output);
+    }
+
+    private void joint(ScheduledOutput output) {
         output.joint().ifPresent(formula -> joint(output, formula));
         if (found.formulasLeftOut()) {
             blocks.add(new Labelled("formulas", "left out, their numbers are too long to be found at once; --show all"

@@ -1,0 +1,16 @@
+package org.pofk.report;
+
+import java.util.Optional;
+import org.pofk.answer.ScheduledModel;
+import org.pofk.answer.Simulation;
+
+/**
+ * What a report on a model with a schedule is written of, as far as it is found.
+ *
+ * @param found      with the values that are listed
+ * @param course     its outputs over a few cycles, where they can be drawn
+ * @param simulation random runs beside it, where it is compared with some
+ */
+public record ScheduledReport(ScheduledModel found, Optional<Chart.Course> course, Optional<Simulation> simulation,
+        Provenance provenance) {
+}

@@ -1,0 +1,149 @@
+package org.pofk.report;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import org.pofk.answer.KnownValue;
+import org.pofk.answer.ScheduledModel;
+import org.pofk.answer.ScheduledOutput;
+import org.pofk.answer.Simulation;
+import org.pofk.chain.Model;
+import org.pofk.chain.Model.Convention;
+import org.pofk.chain.Schedule.Action;
+import org.pofk.chain.Timetable;
+import org.pofk.report.Document.Block;
+import org.pofk.report.Document.Figure;
+import org.pofk.report.Document.Heading;
+import org.pofk.report.Document.Items;
+import org.pofk.report.Document.Labelled;
+import org.pofk.report.Document.Paragraph;
+
+/**
+ * The document an analyst hands in on a model with inspections or phases: results first, then course and values, what
+ * was modelled, the formulas by step of the cycle, why they hold, how they were checked, and what it stands on.
+ */
+public final class ScheduledReportDocument {
+    private final ScheduledReport report;
+    private final ScheduledModel found;
+    private final Model model;
+    private final Style style;
+    private final List<Block> blocks = new ArrayList<>();
+
+    private ScheduledReportDocument(ScheduledReport report, Style style) {
+        this.report = report;
+        this.found = report.found();
+        this.model = found.model();
+        this.style = style;
+    }
+
+    /** What is brief leaves out the matrices and how it was checked, not why it holds. */
+    public static Document of(ScheduledReport report, Report.Depth depth, Style style, Convention convention) {
+        ScheduledReportDocument document = new ScheduledReportDocument(report, style);
+        document.firstPage();
+        document.course();
+        document.blocks.addAll(ScheduledModelBlocks.of(report.found()));
+        document.formulas();
+        if (depth == Report.Depth.FULL) {
+            document.matrices(convention);
+        }
+        document.proof();
+        if (depth == Report.Depth.FULL) {
+            report.simulation().ifPresent(document::simulation);
+        }
+        document.blocks.addAll(ProvenanceBlocks.of(report.provenance()));
+        return new Document(document.blocks);
+    }
+
+    private void heading(String text) {
+        blocks.add(new Heading(2, text));
+    }
+
+    private void firstPage() {
+        blocks.addAll(ModelHead.withoutAssumptions(model));
+        model.settings().stream().map(SettingProse::line).forEach(blocks::add);
+        heading("Question");
+        List<Prose> questions = found.outputs().stream().map(output -> QuestionProse.of(output.output(), model)).toList();
+        blocks.add(questions.size() == 1 ? new Paragraph(questions.get(0)) : new Items(questions));
+        heading("Result");
+        for (ScheduledOutput output : found.outputs()) {
+            if (found.outputs().size() > 1) {
+                blocks.add(new Heading(3, OutputProse.title(output.output())));
+            }
+            blocks.addAll(ScheduledDocument.results(found, output, style));
+            blocks.add(new Labelled("holds", holds(output)));
+        }
+        blocks.add(Caution.ofInspections(model));
+    }
+
+    private static String holds(ScheduledOutput output) {
+        Optional<KnownValue.Word> word = output.first().map(course -> course.average().word());
+        if (word.isEmpty()) {
+            return MissingBlocks.NOT_DECIDED;
+        }
+        String values = word.get() == KnownValue.Word.EXACT ? "the first cycle exactly" : "the first cycle within its enclosures";
+        return values + (output.over().isEmpty() ? ", by stepping; the long run with the word beside it"
+                : ", by stepping; the formulas for every cycle m ≥ 0, proved");
+    }
+
+    private void course() {
+        heading("Course and values");
+        report.course().ifPresent(chart -> blocks.add(new Figure(
+                Prose.of("Course of ").and(Prose.names(chart.curves().stream().map(Chart.Curve::name).toList()))
+                        .and(" over steps"), chart)));
+        blocks.addAll(ScheduledDocument.values(found, style));
+    }
+
+    private void formulas() {
+        for (ScheduledOutput output : found.outputs()) {
+            blocks.add(new Heading(2, OutputProse.title(output.output())));
+            blocks.addAll(ScheduledDocument.formulas(found, output, style));
+        }
+    }
+
+    private void matrices(Convention convention) {
+        heading("The matrices");
+        Timetable timetable = found.timetable();
+        for (int i = 0; i < timetable.moves().size(); i++) {
+            matrix(timetable.moves().size() == 1 ? "The moves of a step" : "Moves " + (i + 1), new Action("",
+                    timetable.moves().get(i)), convention);
+        }
+        timetable.actions().forEach(action -> matrix("The action '" + action.name() + "'", action, convention));
+    }
+
+    private void matrix(String caption, Action action, Convention convention) {
+        blocks.addAll(new MatrixBlocks(model.chain().states(), action.matrix(), convention).of(caption));
+    }
+
+    private void proof() {
+        heading("Why it holds");
+        Timetable timetable = found.timetable();
+        String begin = ScheduleProse.step(timetable, "m", "");
+        blocks.add(new Paragraph("S is the product of the matrices of the steps of one cycle, the last on the left: each step"
+                + " moves and then does what is due. So x(" + begin + ") = S^m x(" + timetable.before() + "), and at step"
+                + " j of the cycle an output reads a fixed row c_j of that: y(" + ScheduleProse.step(timetable, "m", "j")
+                + ") = c_j S^m x(" + timetable.before() + ")."));
+        blocks.add(new Paragraph("Where D_S(S) x(" + timetable.before() + ") = 0 for a polynomial D_S, the recurrence with"
+                + " its coefficients holds in m for every output, at every j and on either side of an action, for every"
+                + " cycle."));
+        blocks.add(new Paragraph("In the long run the state where cycles begin is a fixed point of S, or of the power"
+                + " of S that the cycles recur with; the values by step of the cycle are stepped from there."));
+        found.outputs().stream().filter(output -> !output.over().isEmpty()).forEach(output -> {
+            if (found.outputs().size() > 1) {
+                blocks.add(new Heading(3, OutputProse.title(output.output())));
+            }
+            blocks.add(ScheduledDocument.proof(timetable, output.over().get(0)));
+        });
+    }
+
+    private void simulation(Simulation simulation) {
+        heading("Compared with simulation");
+        blocks.add(SimulationDocument.sampled(simulation.runs(), simulation.seed()));
+        blocks.add(new Paragraph("At each step k what is read is read after the actions done there."));
+        for (Simulation.Series series : simulation.series()) {
+            if (simulation.series().size() > 1) {
+                blocks.add(new Heading(3, OutputProse.title(series.output())));
+            }
+            blocks.addAll(SimulationDocument.series(series, style));
+        }
+    }
+}
