@@ -11,6 +11,7 @@ import org.pofk.chain.SparseMatrix.Entry;
 import org.pofk.chain.Structure;
 import org.pofk.chain.Timetable;
 import org.pofk.chain.Timetable.Moment;
+import org.pofk.exact.BinaryPowering;
 import org.pofk.exact.Rational;
 
 /**
@@ -83,12 +84,6 @@ final class CycleGraph {
     }
 
     private static List<BitSet> power(List<BitSet> matrix, int times) {
-        List<BitSet> result = identity(matrix.size());
-        List<BitSet> square = matrix;
-        for (int left = times; left > 0; left >>= 1) {
-            result = (left & 1) == 1 ? product(square, result) : result;
-            square = left > 1 ? product(square, square) : square;
-        }
-        return result;
+        return BinaryPowering.of(identity(matrix.size()), matrix, times, CycleGraph::product);
     }
 }

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import org.pofk.exact.Ball;
+import org.pofk.exact.BinaryPowering;
 import org.pofk.exact.ComplexBall;
 import org.pofk.exact.Rational;
 
@@ -96,17 +97,7 @@ final class EnclosedWaves {
         if (base.imaginary().isExact() && base.imaginary().center().signum() == 0) {
             return ComplexBall.of(Intervals.power(base.real(), exponent));
         }
-        ComplexBall result = ComplexBall.of(Ball.of(1, base.scale()));
-        ComplexBall square = base;
-        for (long left = exponent; left > 0; left >>= 1) {
-            if ((left & 1) == 1) {
-                result = result.times(square);
-            }
-            if (left > 1) {
-                square = square.times(square);
-            }
-        }
-        return result;
+        return BinaryPowering.of(ComplexBall.of(Ball.of(1, base.scale())), base, exponent, ComplexBall::times);
     }
 
     private Ball kPower(long k, int power) {

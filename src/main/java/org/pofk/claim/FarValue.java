@@ -1,6 +1,7 @@
 package org.pofk.claim;
 
 import org.pofk.exact.Ball;
+import org.pofk.exact.BinaryPowering;
 import org.pofk.exact.ComplexBall;
 import org.pofk.exact.Rational;
 import org.pofk.meaning.Quantity;
@@ -52,15 +53,7 @@ final class FarValue {
     }
 
     private static ComplexBall power(ComplexBall base, long exponent, int scale) {
-        ComplexBall result = ComplexBall.of(Rational.ONE, scale);
-        ComplexBall square = base;
-        for (long left = exponent; left > 0; left >>= 1) {
-            if ((left & 1) == 1) {
-                result = result.times(square).roundedTo(scale);
-            }
-            square = square.times(square).roundedTo(scale);
-        }
-        return result;
+        return BinaryPowering.of(ComplexBall.of(Rational.ONE, scale), base, exponent, (a, b) -> a.times(b).roundedTo(scale));
     }
 
     private static Rational binomial(long k, int p) {

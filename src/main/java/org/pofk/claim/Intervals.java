@@ -2,6 +2,7 @@ package org.pofk.claim;
 
 import java.math.BigInteger;
 import org.pofk.exact.Ball;
+import org.pofk.exact.BinaryPowering;
 
 /** Real numbers in balls, seen as intervals. Certified; everything at one scale. */
 final class Intervals {
@@ -31,16 +32,6 @@ final class Intervals {
 
     /** x^exponent for an exponent of any size, at the scale of x. */
     static Ball power(Ball x, long exponent) {
-        Ball result = Ball.of(1, x.scale());
-        Ball square = x;
-        for (long left = exponent; left > 0; left >>= 1) {
-            if ((left & 1) == 1) {
-                result = result.times(square);
-            }
-            if (left > 1) {
-                square = square.times(square);
-            }
-        }
-        return result;
+        return BinaryPowering.of(Ball.of(1, x.scale()), x, exponent, Ball::times);
     }
 }

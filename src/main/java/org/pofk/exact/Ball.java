@@ -198,17 +198,7 @@ public record Ball(BigInteger center, BigInteger radius, int scale) {
         if (exponent < 0) {
             return one.dividedBy(pow(Math.negateExact(exponent)));
         }
-        Ball result = one;
-        Ball square = this;
-        for (long left = exponent; left > 0; left >>= 1) {
-            if ((left & 1) == 1) {
-                result = result.times(square);
-            }
-            if (left > 1) {
-                square = square.times(square);
-            }
-        }
-        return result;
+        return BinaryPowering.of(one, this, exponent, Ball::times);
     }
 
     /** √x for a number known not to be negative: what lies below zero in the ball is left out. */

@@ -28,25 +28,6 @@ final class BoundedHorner {
         return coefficients.length - 1;
     }
 
-    /** The whole numbers c such that Σ c_j z^j is a multiple of the polynomial, coprime. */
-    static BigInteger[] wholeCoefficients(Polynomial<Rational> polynomial) {
-        BigInteger common = BigInteger.ONE;
-        for (Rational coefficient : polynomial.coefficients()) {
-            common = common.divide(common.gcd(coefficient.denominator())).multiply(coefficient.denominator());
-        }
-        BigInteger[] whole = new BigInteger[polynomial.degree() + 1];
-        BigInteger content = BigInteger.ZERO;
-        for (int i = 0; i < whole.length; i++) {
-            Rational coefficient = polynomial.coefficient(i);
-            whole[i] = coefficient.numerator().multiply(common.divide(coefficient.denominator()));
-            content = content.gcd(whole[i]);
-        }
-        for (int i = 0; i < whole.length; i++) {
-            whole[i] = whole[i].divide(content);
-        }
-        return whole;
-    }
-
     /** At (x + iy) · 2^−scale, not zero. */
     Evaluation at(BigInteger x, BigInteger y, int scale, int precision) {
         return new Walk(x, y, scale, precision).toTheEnd();

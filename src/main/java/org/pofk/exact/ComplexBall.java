@@ -60,17 +60,7 @@ public record ComplexBall(Ball real, Ball imaginary) {
         if (exponent < 0) {
             return one.dividedBy(pow(Math.negateExact(exponent)));
         }
-        ComplexBall result = one;
-        ComplexBall square = this;
-        for (int left = exponent; left > 0; left >>= 1) {
-            if ((left & 1) == 1) {
-                result = result.times(square);
-            }
-            if (left > 1) {
-                square = square.times(square);
-            }
-        }
-        return result;
+        return BinaryPowering.of(one, this, exponent, ComplexBall::times);
     }
 
     /** |z|, to within one unit of what the rectangle allows. */

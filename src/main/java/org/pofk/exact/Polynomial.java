@@ -139,17 +139,7 @@ public record Polynomial<E>(Field<E> field, List<E> coefficients) {
     }
 
     public Polynomial<E> pow(int exponent) {
-        Polynomial<E> result = one(field);
-        Polynomial<E> square = this;
-        for (int left = exponent; left > 0; left >>= 1) {
-            if ((left & 1) == 1) {
-                result = result.times(square);
-            }
-            if (left > 1) {
-                square = square.times(square);
-            }
-        }
-        return result;
+        return BinaryPowering.of(one(field), this, exponent, Polynomial::times);
     }
 
     /** Quotient and remainder, the remainder's degree below the divisor's; fails on a zero divisor. */

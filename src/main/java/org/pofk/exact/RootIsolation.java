@@ -22,7 +22,7 @@ final class RootIsolation {
      * @param guesses    asked for where the polynomial's own coefficients lead to no good guesses in doubles
      */
     static RealAndAbove of(Polynomial<Rational> polynomial, Supplier<List<Guess>> guesses) {
-        BigInteger[] whole = BoundedHorner.wholeCoefficients(polynomial);
+        BigInteger[] whole = PrimitiveForm.partOf(polynomial).coefficients().toArray(BigInteger[]::new);
         BoundedHorner horner = new BoundedHorner(whole);
         List<Start> starts = AberthInDoubles.starts(whole);
         Optional<List<Isolated>> isolated = Isolation.attempt(horner, starts);

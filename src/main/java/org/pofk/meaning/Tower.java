@@ -5,6 +5,7 @@ import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import org.pofk.exact.BinaryPowering;
 import org.pofk.exact.Rational;
 
 /**
@@ -108,17 +109,7 @@ final class Tower {
         if ((long) exponent * a.bitLength() > MOST_COEFFICIENT_BITS) {
             throw new BeyondTowerException();
         }
-        Element result = Element.ONE;
-        Element square = a;
-        for (int left = exponent; left > 0; left >>= 1) {
-            if ((left & 1) == 1) {
-                result = times(result, square);
-            }
-            if (left > 1) {
-                square = times(square, square);
-            }
-        }
-        return result;
+        return BinaryPowering.of(Element.ONE, a, exponent, this::times);
     }
 
     /** The number an element stands for. */

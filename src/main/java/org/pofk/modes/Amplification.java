@@ -2,6 +2,7 @@ package org.pofk.modes;
 
 import java.math.BigInteger;
 import java.util.Optional;
+import org.pofk.exact.BinaryPowering;
 import org.pofk.exact.Rational;
 
 /**
@@ -42,15 +43,7 @@ record Amplification(Optional<Rational> ofCoefficient, Optional<Rational> ofBase
     }
 
     private static Rational powerRoundedUp(Rational base, int exponent) {
-        Rational result = Rational.ONE;
-        Rational square = base;
-        for (int left = exponent; left > 0; left >>= 1) {
-            if ((left & 1) == 1) {
-                result = roundedUp(result.times(square));
-            }
-            square = roundedUp(square.times(square));
-        }
-        return result;
+        return BinaryPowering.of(Rational.ONE, base, exponent, (a, b) -> roundedUp(a.times(b)));
     }
 
     /** A dyadic number at least as large, of 64 bits. */

@@ -5,6 +5,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.IntFunction;
+import org.pofk.exact.BinaryPowering;
 import org.pofk.exact.ComplexBall;
 import org.pofk.exact.Polynomial;
 import org.pofk.exact.QuadraticScreen;
@@ -74,17 +75,7 @@ final class NumberField {
     }
 
     Polynomial<Rational> power(Polynomial<Rational> base, int exponent) {
-        Polynomial<Rational> result = residues.one();
-        Polynomial<Rational> square = base;
-        for (int left = exponent; left > 0; left >>= 1) {
-            if ((left & 1) == 1) {
-                result = multiply(result, square);
-            }
-            if (left > 1) {
-                square = multiply(square, square);
-            }
-        }
-        return result;
+        return BinaryPowering.of(residues.one(), base, exponent, this::multiply);
     }
 
     /** Whether h^exponent is proved to be no root of a quadratic over Q; false says nothing. */

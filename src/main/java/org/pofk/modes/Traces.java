@@ -1,6 +1,7 @@
 package org.pofk.modes;
 
 import java.util.List;
+import org.pofk.exact.BinaryPowering;
 import org.pofk.exact.Field;
 import org.pofk.exact.Polynomial;
 import org.pofk.exact.ResidueField;
@@ -37,16 +38,6 @@ final class Traces<E> {
     }
 
     private Polynomial<E> powerOfRoot(long exponent) {
-        Polynomial<E> result = residues.one();
-        Polynomial<E> square = residues.generator();
-        for (long left = exponent; left > 0; left >>= 1) {
-            if ((left & 1) == 1) {
-                result = residues.multiply(result, square);
-            }
-            if (left > 1) {
-                square = residues.multiply(square, square);
-            }
-        }
-        return result;
+        return BinaryPowering.of(residues.one(), residues.generator(), exponent, residues::multiply);
     }
 }

@@ -163,6 +163,7 @@ class ModelChangesTest {
             new Edit(ROUNDED, "[0.33, 0.33]", "[0.25, 0.25]", Subject.ADJUSTED),
             new Edit(TESTED, "every: 6", "every: 7", Subject.ACTION), new Edit(TESTED, "first: 2", "first: 3", Subject.ACTION),
             new Edit(TESTED, "down: {up: 1/2, down: rest}}", "down: {up: 1/3, down: rest}}", Subject.ACTION_MOVE),
+            new Edit(TESTED + "costs: {each test in: {down: 3}}\n", "{down: 3}", "{down: 4}", Subject.COST_OF_ACTION),
             new Edit(TESTED, "[{every: 6, first: 2, do: test}, {every: 4, do: wash}]",
                     "[{every: 4, do: wash}, {every: 6, first: 2, do: test}]", Subject.ORDER),
             new Edit(PHASED, "for: 3", "for: 4", Subject.PHASE),
@@ -193,7 +194,8 @@ class ModelChangesTest {
         assertEquals(List.of("name", "value", "definition", "from", "to", "meaning", "source"),
                 components(Model.Parameter.class));
         assertEquals(List.of("kind", "states", "matrix", "start", "sets", "outputs"), components(Chain.class));
-        assertEquals(List.of("unit", "eachStep", "moves", "atStart", "discount"), components(Costs.class));
+        assertEquals(List.of("unit", "eachStep", "moves", "actions", "atStart", "discount"), components(Costs.class));
+        assertEquals(List.of("action", "inState"), components(Costs.OfAction.class));
         assertEquals(List.of("recurring", "phases"), components(Schedule.class));
         assertEquals(List.of("action", "every", "first", "when"), components(Schedule.Recurring.class));
     }
