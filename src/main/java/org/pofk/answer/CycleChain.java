@@ -68,6 +68,14 @@ final class CycleChain {
         return formula(Optional.of(new Place(j, Side.AFTER)), Transforms.of(chain, List.of(read)).get(0));
     }
 
+    /** The same at each step j = 0 … T − 1 of a cycle. */
+    List<CycleFormula> formulas(Output output) {
+        CycleOutputs later = new CycleOutputs(timetable, matrices, output);
+        List<Place> places = IntStream.range(0, timetable.period()).mapToObj(j -> new Place(j, Side.AFTER)).toList();
+        List<Transform> transforms = Transforms.of(chain, places.stream().map(at -> later.at(at.j(), at.side())).toList());
+        return places.stream().map(at -> formula(Optional.of(at), transforms.get(at.j()))).toList();
+    }
+
     /** What cycle m adds to an output: its value at the end less that at the beginning. */
     CycleFormula added(Output output) {
         List<Rational> end = new CycleOutputs(timetable, matrices, output).at(timetable.period(), Side.AFTER)

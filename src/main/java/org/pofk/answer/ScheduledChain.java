@@ -12,6 +12,8 @@ import org.pofk.chain.Timetable;
 final class ScheduledChain {
     /** Cubed states times bits of a cycle's matrix, for formulas over the cycles: a second or two. */
     private static final double FORMULAS_AT_MOST = 3e6;
+    /** The same times the steps of a cycle, for a formula at each of them: ten seconds. */
+    private static final double ALL_FORMULAS_AT_MOST = 1.5e7;
 
     private final Chain chain;
     private final Timetable timetable;
@@ -38,9 +40,15 @@ final class ScheduledChain {
         return timetable;
     }
 
-    /** Whether so many formulas over the cycles are found in reasonable time. */
-    boolean areWithinReach(int formulas) {
-        return Math.pow(chain.size(), 3) * bits * formulas <= FORMULAS_AT_MOST;
+    /** Whether a few formulas over the cycles are found in reasonable time. */
+    boolean areFormulasWithinReach() {
+        return Math.pow(chain.size(), 3) * bits <= FORMULAS_AT_MOST;
+    }
+
+    /** Whether one for each step of a cycle is. */
+    boolean areAllFormulasWithinReach() {
+        return areFormulasWithinReach()
+                && Math.pow(chain.size(), 3) * bits * timetable.period() <= ALL_FORMULAS_AT_MOST;
     }
 
     /** The chain that moves by a whole cycle from x(P). */
@@ -61,14 +69,26 @@ final class ScheduledChain {
                         List.of(output)).courses().get(0).readings().stream().map(Reading::after).toList();
     }
 
+    /** An output at the end of the steps 0 … last: certified for a chain, exact for a recursion. */
+    List<KnownValue> first(Output output, int last) {
+        return chain.kind() == Chain.Kind.RECURSION ? walked(whole, output, last)
+                : walked(StateArithmetic.Fixed.of(timetable), output, last);
+    }
+
+    private <V, R> List<KnownValue> walked(StateArithmetic<V, R> arithmetic, Output output, int last) {
+        return CycleCourse.of(timetable, arithmetic, arithmetic.start(chain.start()), 0, last, List.of(output)).courses()
+                .get(0).readings().stream().map(Reading::after).toList();
+    }
+
     /**
      * An output at the end of some steps, ascending, after what is done there: exactly while the numbers stay within
      * reach, by the formulas over the cycles beyond; where these are out of reach too, certified for a chain and empty for
      * a recursion.
      */
     List<Optional<KnownValue>> at(Output output, List<Integer> steps) {
-        List<Integer> near = steps.stream().filter(k -> ScheduledValues.isWithinReach(chain.size(), timetable, bits, k))
-                .toList();
+        boolean isByFormula = chain.kind() == Chain.Kind.RECURSION || areFormulasWithinReach();
+        List<Integer> near = steps.stream().filter(k -> !isByFormula
+                || ScheduledValues.isWithinReach(chain.size(), timetable, bits, k)).toList();
         List<Optional<KnownValue>> values = new ArrayList<>();
         if (!near.isEmpty()) {
             ScheduledValues.of(chain, timetable, whole, List.of(output), near).get(0)
@@ -80,12 +100,9 @@ final class ScheduledChain {
 
     private Optional<KnownValue> far(Output output, int k) {
         Timetable.Place place = timetable.place(k);
-        if (areWithinReach(1) && place.cycle().isPresent()) {
-            return Optional.of(new KnownValue(KnownValue.Word.EXACT, Optional.empty(),
-                    ModeValues.of(cycles().formula(output, place.within()).closedForm())
-                            .at(place.cycle().getAsInt())));
-        }
-        return chain.kind() == Chain.Kind.RECURSION ? Optional.empty() : Optional.of(ScheduledValues.of(chain,
-                timetable, whole, List.of(output), List.of(k)).get(0).get(0).after());
+        return areFormulasWithinReach() && place.cycle().isPresent()
+                ? Optional.of(new KnownValue(KnownValue.Word.EXACT, Optional.empty(),
+                        ModeValues.of(cycles().formula(output, place.within()).closedForm())
+                                .at(place.cycle().getAsInt()))) : Optional.empty();
     }
 }

@@ -56,7 +56,7 @@ public record ScheduledPassage(List<Integer> into, List<Integer> avoiding, Timet
         List<Optional<KnownValue>> entered = stopped.chain().at(stopped.distribution(), steps);
         List<Optional<KnownValue>> waiting = stopped.chain().at(stopped.survival(), steps);
         return new ScheduledPassage(into.stream().sorted().toList(), avoiding.stream().sorted().toList(), timetable,
-                stopped.chain().areWithinReach(1) ? Optional.of(over(stopped, percentiles, steps)) : Optional.empty(),
+                stopped.chain().areFormulasWithinReach() ? Optional.of(over(stopped, percentiles, steps)) : Optional.empty(),
                 IntStream.range(0, steps.size()).mapToObj(i -> new At(steps.get(i), entered.get(i).orElseThrow(),
                         waiting.get(i).orElseThrow())).toList());
     }

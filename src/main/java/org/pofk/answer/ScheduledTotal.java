@@ -58,7 +58,7 @@ public record ScheduledTotal(Increment increment, Rational factor, Output total,
     }
 
     private static Optional<OverCycles> over(SummedSchedule summed) {
-        if (!summed.recursion().areWithinReach(1)) {
+        if (!summed.recursion().areFormulasWithinReach()) {
             return Optional.empty();
         }
         CycleChain cycles = summed.recursion().cycles();

@@ -5,10 +5,17 @@ import java.util.function.Supplier;
 import org.pofk.answer.ScheduledPassage;
 import org.pofk.answer.ScheduledTotal;
 import org.pofk.answer.ScheduledTotalModel;
+import org.pofk.answer.ScheduledWhen;
+import org.pofk.answer.WhenModel;
 import org.pofk.chain.Model;
+import org.pofk.chain.Output;
+import org.pofk.report.CsvWriter;
 import org.pofk.report.ScheduledPassageDocument;
 import org.pofk.report.ScheduledTotalDocument;
+import org.pofk.report.ScheduledWhenDocument;
 import org.pofk.report.Style;
+import org.pofk.report.WhenJson;
+import org.pofk.report.WhenTable;
 import org.pofk.text.RefusedException;
 
 /** What commands about totals, passages and conditions answer about a model that has inspections or phases. */
@@ -42,6 +49,22 @@ final class ScheduledAnswers {
         ScheduledPassage found = outcome.published().get();
         destination.write(Answer.of(() -> ScheduledPassageDocument.of(started, found, style)), streams);
         return found.over().isPresent() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
+    }
+
+    static ExitCode when(AnswerOptions options, Model read, List<Output> outputs, WhenModel.Asked asked,
+            Destination destination, Streams streams) throws RefusedException, UsageException, WritingException {
+        Style style = options.style();
+        Worker.Outcome<ScheduledWhen> outcome = options.within(streams, partly ->
+                partly.answers().size() + " of " + outputs.size() + " outputs answered", published ->
+                ScheduledWhen.of(read, outputs, asked, published));
+        if (outcome.published().isEmpty()) {
+            return options.undecided(streams);
+        }
+        ScheduledWhen found = outcome.published().get();
+        destination.write(Answer.of(() -> ScheduledWhenDocument.of(found, style))
+                .with(Format.JSON, () -> WhenJson.write(found, style.digits()))
+                .with(Format.CSV, () -> CsvWriter.write(WhenTable.of(found, style.digits()))), streams);
+        return found.isDecided() && outcome.finished() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
     }
 
     private static void refuseTables(Model read, Destination destination) throws UsageException {

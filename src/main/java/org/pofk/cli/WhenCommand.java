@@ -42,7 +42,11 @@ final class WhenCommand implements Work {
         Style style = options.style();
         Destination destination = options.destination();
         WhenModel.Asked asked = asked();
-        Model read = options.model();
+        Model read = options.modelWithSchedule();
+        if (read.schedule().isPresent()) {
+            given.refuseUnderSchedule(read);
+            return ScheduledAnswers.when(options, read, outputs(read, destination), asked, destination, streams);
+        }
         Optional<Integer> step = given.at();
         if (given.isAsked() && step.isEmpty()) {
             return conditional(read, asked, style, destination, streams);

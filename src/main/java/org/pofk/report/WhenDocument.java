@@ -173,7 +173,7 @@ public final class WhenDocument {
                         each.forEverFrom().map(String::valueOf).orElse("–"))).toList());
     }
 
-    private static String end(When.End end) {
+    static String end(When.End end) {
         return switch (end) {
             case MET -> "met";
             case FAILED -> "not met";

@@ -1,9 +1,11 @@
 package org.pofk.report;
 
+import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
 import org.pofk.answer.ConditionalWhen;
 import org.pofk.answer.Known;
+import org.pofk.answer.ScheduledWhen;
 import org.pofk.answer.Settling;
 import org.pofk.answer.StepValue;
 import org.pofk.answer.When;
@@ -34,6 +36,22 @@ public final class WhenJson {
     /** The text for the one answer given what is known at k. */
     public static String write(ConditionalWhen found, int digits) {
         return Json.ofObject(json -> new WhenJson(json, digits).fields(found));
+    }
+
+    /** The text for the one answer under a schedule. */
+    public static String write(ScheduledWhen found, int digits) {
+        return Json.ofObject(json -> new WhenJson(json, digits).fields(found));
+    }
+
+    private void fields(ScheduledWhen found) {
+        ScheduledWhen.Answer answer = found.answers().get(0);
+        JsonHead.write(json, FORMAT, COMMAND, found.model());
+        met(answer.output(), answer.when());
+        for (String absent : List.of("nearest", "longRun", "settling")) {
+            json.name(absent);
+            json.nothing();
+        }
+        json.list("values", answer.around(), value -> value(value.k(), Optional.of(value)));
     }
 
     private void fields(Model model, Optional<Known> known, WhenModel.Answer answer) {

@@ -4,6 +4,7 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
 import org.pofk.answer.ConditionalWhen;
+import org.pofk.answer.ScheduledWhen;
 import org.pofk.answer.When;
 import org.pofk.answer.WhenModel;
 import org.pofk.chain.Model;
@@ -31,6 +32,13 @@ public final class WhenTable {
 
     /** The same given what is known at k. */
     public static Document.Table of(ConditionalWhen found, int digits) {
+        WhenTable table = of(found.model(), digits);
+        found.answers().forEach(answer -> table.answer(answer.output(), answer.when()));
+        return table.rows.table();
+    }
+
+    /** The same under a schedule. */
+    public static Document.Table of(ScheduledWhen found, int digits) {
         WhenTable table = of(found.model(), digits);
         found.answers().forEach(answer -> table.answer(answer.output(), answer.when()));
         return table.rows.table();

@@ -290,4 +290,88 @@ class ScheduledQuestionsTest {
         assertEquals(plain.percentiles(), over.percentiles());
         assertEquals(plain.fromEach(), over.fromEach());
     }
+
+    /** p(k) of two states at the end of each step, after what is done there. */
+    private static List<List<Rational>> values(Model model) {
+        List<Rational> state = model.chain().start();
+        List<List<Rational>> all = new ArrayList<>(List.of(state));
+        for (int k = 1; k <= STEPS; k++) {
+            Step step = Step.of(model, k);
+            state = step.move.isPresent() ? step.move.get().times(state) : state;
+            for (Schedule.Action action : step.actions) {
+                state = action.matrix().times(state);
+            }
+            all.add(state);
+        }
+        return all;
+    }
+
+    @Test
+    void conditionsHoldFromTheStepsSaidOnAndNotBefore() {
+        int compared = 0;
+        int decided = 0;
+        List<Rational> bounds = List.of(Rational.of(1, 50), Rational.of(1, 10), Rational.of(1, 5), Rational.HALF);
+        for (Map.Entry<String, String> each : cases().entrySet()) {
+            Model model = model(each.getKey(), each.getValue());
+            List<List<Rational>> values = values(model);
+            for (When.Condition.Kind kind : List.of(When.Condition.Kind.AT_LEAST, When.Condition.Kind.AT_MOST)) {
+                for (Rational bound : bounds) {
+                    ScheduledWhen found = ScheduledWhen.of(model, Outputs.states(model.chain()),
+                            new WhenModel.Asked(kind, bound, false), published -> { });
+                    for (int state = 0; state < 3; state++) {
+                        int place = state;
+                        List<Boolean> met = values.stream().map(all -> kind == When.Condition.Kind.AT_LEAST
+                                ? all.get(place).compareTo(bound) >= 0 : all.get(place).compareTo(bound) <= 0).toList();
+                        When when = found.answers().get(state).when();
+                        decided += when.decided() ? 1 : 0;
+                        compared += compare(each.getKey() + " " + kind + " " + bound + " " + state, when, met);
+                    }
+                }
+            }
+        }
+        assertEquals(cases().size() * 24, decided);
+        assertTrue(compared > 10_000, "compared " + compared);
+    }
+
+    private static int compare(String name, When when, List<Boolean> met) {
+        int first = met.indexOf(true);
+        assertEquals(first < 0 ? when.first().filter(k -> k > STEPS) : Optional.of((long) first), when.first(), name);
+        when.forEverFrom().filter(from -> from <= STEPS).ifPresent(from -> assertTrue(
+                (from == 0 || !met.get((int) (from - 1))) && met.subList(from.intValue(), met.size()).stream()
+                        .allMatch(each -> each), name + " for ever from " + from));
+        int compared = 0;
+        for (When.ResidueClass each : when.classes()) {
+            for (long k = each.residue(); k <= STEPS; k += each.modulus()) {
+                boolean isMet = met.get((int) k);
+                boolean isForEver = each.forEverFrom().isPresent() && k >= each.forEverFrom().get();
+                boolean isBeforeTheFirst = each.first().isEmpty() || k < each.first().get();
+                assertTrue((!isForEver || isMet) && (!isBeforeTheFirst || !isMet), name + " at " + k);
+                compared++;
+            }
+        }
+        return compared;
+    }
+
+    @Test
+    void anActionThatDoesNothingLeavesConditionsAsTheyAre() {
+        String chain = CHAIN.replace("failed: {good: 1/32, failed: rest}", "failed: {good: 1/2, failed: rest}");
+        Model model = model("nothing", chain + "actions: {look: {failed: stays}}\n"
+                + "schedule: {every: 6, first: 10, do: look}\n");
+        List<WhenModel.Asked> all = List.of(
+                new WhenModel.Asked(When.Condition.Kind.AT_LEAST, Rational.of(1, 8), false),
+                new WhenModel.Asked(When.Condition.Kind.AT_MOST, Rational.of(3, 5), false),
+                new WhenModel.Asked(When.Condition.Kind.SETTLED, Rational.of(1, 1000), false),
+                new WhenModel.Asked(When.Condition.Kind.SETTLED, Rational.of(1, 100), true));
+        for (WhenModel.Asked asked : all) {
+            List<WhenModel.Answer> plain = WhenModel.of(model, Outputs.states(model.chain()), asked, published -> { })
+                    .answers();
+            List<ScheduledWhen.Answer> found = ScheduledWhen.of(model, Outputs.states(model.chain()), asked,
+                    published -> { }).answers();
+            for (int i = 0; i < 3; i++) {
+                assertEquals(plain.get(i).when().first(), found.get(i).when().first());
+                assertEquals(plain.get(i).when().forEverFrom(), found.get(i).when().forEverFrom());
+                assertEquals(plain.get(i).when().reason(), found.get(i).when().reason());
+            }
+        }
+    }
 }
