@@ -31,8 +31,8 @@ final class ChangeBlocks {
     /** What fits into a column of a table with two of its kind. */
     private static final int SHORT = 24;
     private static final Set<Subject> NUMBERS = EnumSet.of(Subject.START, Subject.PARAMETER, Subject.MOVE,
-            Subject.ACTION_MOVE, Subject.PHASE_MOVE, Subject.COST_OF_STATE, Subject.COST_OF_MOVE, Subject.COST_AT_START,
-            Subject.DISCOUNT);
+            Subject.ACTION_MOVE, Subject.PHASE_MOVE, Subject.COST_OF_STATE, Subject.COST_OF_MOVE, Subject.COST_OF_ACTION,
+            Subject.COST_AT_START, Subject.DISCOUNT);
 
     private final Reissue reissue;
     private final Style style;
