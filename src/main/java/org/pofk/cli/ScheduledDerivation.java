@@ -8,6 +8,7 @@ import org.pofk.chain.Output;
 import org.pofk.report.CsvWriter;
 import org.pofk.report.ScheduledDocument;
 import org.pofk.report.ScheduledJson;
+import org.pofk.report.ScheduledNotebook;
 import org.pofk.report.ScheduledTable;
 import org.pofk.report.Style;
 import org.pofk.text.RefusedException;
@@ -20,10 +21,6 @@ final class ScheduledDerivation {
     static ExitCode write(AnswerOptions options, Model read, List<Output> outputs, List<Integer> at,
             Scheduling.Formulas formulas, Destination destination, Streams streams)
             throws RefusedException, UsageException, WritingException {
-        if (destination.takes(Format.NOTEBOOK)) {
-            throw new UsageException("'" + read.origin().file() + "' has a schedule: it is derived as text, LaTeX, a web"
-                    + " page, JSON or a table, not as a notebook");
-        }
         Style style = options.style();
         Worker.Outcome<ScheduledModel> outcome = options.within(streams, published ->
                 Scheduling.of(read, outputs, at, formulas, published));
@@ -33,6 +30,7 @@ final class ScheduledDerivation {
         ScheduledModel found = outcome.published().get();
         destination.write(Answer.of(() -> ScheduledDocument.of(found, style))
                 .with(Format.JSON, () -> ScheduledJson.write(found, style.digits()))
+                .with(Format.NOTEBOOK, () -> ScheduledNotebook.write(found, style))
                 .with(Format.CSV, () -> CsvWriter.write(ScheduledTable.of(found, style.digits()))), streams);
         return found.isDecided() && outcome.finished() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
     }

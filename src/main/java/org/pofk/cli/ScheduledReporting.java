@@ -14,6 +14,7 @@ import org.pofk.report.CsvWriter;
 import org.pofk.report.Provenance;
 import org.pofk.report.Report;
 import org.pofk.report.ScheduledCourse;
+import org.pofk.report.ScheduledNotebook;
 import org.pofk.report.ScheduledReport;
 import org.pofk.report.ScheduledReportDocument;
 import org.pofk.report.ScheduledTable;
@@ -33,10 +34,6 @@ final class ScheduledReporting {
     static ExitCode write(AnswerOptions options, Model read, List<Output> outputs, List<Integer> listed,
             Report.Depth depth, Provenance provenance, Destination destination, Streams streams)
             throws RefusedException, UsageException, WritingException {
-        if (destination.takes(Format.NOTEBOOK)) {
-            throw new UsageException("'" + read.origin().file() + "' has a schedule: its report is text, LaTeX, PDF, a web"
-                    + " page or a table, not a notebook");
-        }
         Style style = options.style();
         List<Integer> drawn = ScheduledCourse.steps(Timetable.of(read.chain(), read.schedule().orElseThrow()));
         Worker.Outcome<ScheduledReport> outcome = options.within(streams, published -> {
@@ -52,6 +49,7 @@ final class ScheduledReporting {
         }
         ScheduledReport report = outcome.published().get();
         destination.write(Answer.of(() -> ScheduledReportDocument.of(report, depth, style, options.convention(read)))
+                .with(Format.NOTEBOOK, () -> ScheduledNotebook.write(report, depth, style, options.convention(read)))
                 .with(Format.CSV, () -> CsvWriter.write(ScheduledTable.of(report.found(), style.digits()))), streams);
         return report.found().isDecided() && outcome.finished() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
     }

@@ -1,0 +1,117 @@
+package org.pofk.report;
+
+import java.util.ArrayList;
+import java.util.List;
+import org.pofk.answer.PeriodicRegime;
+import org.pofk.answer.ScheduledModel;
+import org.pofk.answer.ScheduledOutput;
+import org.pofk.chain.Model.Convention;
+import org.pofk.report.Document.Block;
+import org.pofk.report.Document.Heading;
+import org.pofk.report.Document.Paragraph;
+
+/**
+ * What was found about a model with a schedule as a notebook that steps moves and actions in exact fractions, checks the
+ * first cycle and the long run, and ends with an error where a value isn't the one stated or outside its enclosure. The
+ * formulas stand in it as prose and are not proved again.
+ */
+public final class ScheduledNotebook {
+    private final List<Notebook.Cell> cells = new ArrayList<>();
+    private final ScheduledModel found;
+    private final Style style;
+
+    private ScheduledNotebook(ScheduledModel found, Style style) {
+        this.found = found;
+        this.style = style;
+    }
+
+    /** The notebook as JSON, nbformat 4.5, nothing of it run. */
+    public static String write(ScheduledModel found, Style style) {
+        ScheduledNotebook notebook = new ScheduledNotebook(found, style);
+        notebook.head();
+        found.outputs().forEach(notebook::output);
+        notebook.text(List.of(Caution.ofInspections(found.model())));
+        return new Notebook(notebook.cells).write();
+    }
+
+    /** A whole report, and behind it the cells that check its numbers. */
+    public static String write(ScheduledReport report, Report.Depth depth, Style style, Convention convention) {
+        ScheduledNotebook notebook = new ScheduledNotebook(report.found(), style);
+        notebook.text(ScheduledReportDocument.of(report, depth, style, convention).blocks());
+        notebook.text(List.of(new Heading(2, "Checked again")));
+        notebook.tools();
+        report.found().outputs().forEach(notebook::checks);
+        return new Notebook(notebook.cells).write();
+    }
+
+    private void text(List<Block> blocks) {
+        if (!blocks.isEmpty()) {
+            cells.add(new Notebook.Cell(Notebook.Kind.MARKDOWN, MarkdownWriter.write(blocks)));
+        }
+    }
+
+    private void code(String source) {
+        cells.add(new Notebook.Cell(Notebook.Kind.CODE, source));
+    }
+
+    private void head() {
+        List<Block> head = new ArrayList<>(ModelHead.of(found.model()));
+        text(head);
+        tools();
+    }
+
+    private void tools() {
+        text(List.of(new Paragraph("The cells of code step moves and actions in exact fractions, and check the first cycle and"
+                + " the long run independently of the program that wrote them; they need Python's own library alone and"
+                + " end with an error where something doesn't hold. What is certified is checked to lie in its"
+                + " enclosure. The formulas are stated, not proved again here.")));
+        code(Python.tools("numbers"));
+        code(PythonSchedule.of(found.model().chain(), found.timetable()));
+        code(Python.tools("polynomials"));
+        code(Python.tools("long_run"));
+        code(Python.tools("schedule"));
+        code("begin = stepped(start, preamble)[-1][1]  # where the first cycle begins");
+    }
+
+    private void output(ScheduledOutput output) {
+        List<Block> blocks = new ArrayList<>(List.of(new Heading(2, OutputProse.title(output.output()))));
+        blocks.addAll(ScheduledDocument.results(found, output, style));
+        text(blocks);
+        checks(output);
+        text(ScheduledDocument.formulas(found, output, style));
+    }
+
+    private void checks(ScheduledOutput output) {
+        String name = output.output().name();
+        code("c = " + Python.numbers(output.output().coefficients()) + "\nconstant = Fraction(\""
+                + output.output().constant() + "\")");
+        output.preamble().ifPresent(course -> code(PythonSchedule.course(name + " before the cycles", course,
+                "stepped(start, preamble)")));
+        output.first().ifPresent(course -> code(PythonSchedule.course(name + " in the first cycle", course,
+                "stepped(begin, cycle)")));
+        output.regime().ifPresent(regime -> regime.accept(new Regime(name)));
+    }
+
+    private final class Regime implements PeriodicRegime.Visitor<Boolean> {
+        private final String name;
+
+        Regime(String name) {
+            this.name = name;
+        }
+
+        @Override
+        public Boolean recurring(PeriodicRegime.Recurring recurring) {
+            int cycles = recurring.cycles();
+            code("settled = limit(begin, " + cycles + ")\nrequire(\"it is a fixed point of S^" + cycles
+                    + "\", stepped(settled, cycle * " + cycles + ")[-1][1] == settled)\n"
+                    + PythonSchedule.course(name + " in the long run", recurring.course(),
+                            "stepped(settled, cycle * " + cycles + ")"));
+            return true;
+        }
+
+        @Override
+        public Boolean none(PeriodicRegime.None none) {
+            return false;
+        }
+    }
+}
