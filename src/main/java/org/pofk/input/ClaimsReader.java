@@ -52,7 +52,8 @@ public final class ClaimsReader {
         Fields fields = Fields.of(root, "claims", KEYS, reading);
         checkVersion(fields, root);
         Optional<Model> model = model(fields, root);
-        Review review = fields.value("review").filter(node -> !isAbsent(node)).map(node -> ReviewSection.read(node, reading)).orElse(Review.NOTHING);
+        Review review = fields.value("review").filter(node -> !isAbsent(node))
+                .map(node -> ReviewSection.read(node, reading)).orElse(Review.NOTHING);
         Convention convention = review.convention().or(() -> model.map(Model::convention)).orElse(Convention.COLUMNS);
         ClaimSection section = new ClaimSection(new ClaimNames(model.map(Model::chain), reading), review, convention,
                 reading);

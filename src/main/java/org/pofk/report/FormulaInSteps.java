@@ -58,7 +58,8 @@ final class FormulaInSteps {
             blocks.add(new Display(left, decimals.isExact() ? Relation.EQUAL : Relation.ROUNDED, formula, range));
             promise(decimals);
         });
-        exact.filter(formula -> decimal.isEmpty() || !decimals.isExact()).ifPresent(formula -> blocks.add(new Display(left, Relation.EQUAL, formula, range)));
+        exact.filter(formula -> decimal.isEmpty() || !decimals.isExact())
+                .ifPresent(formula -> blocks.add(new Display(left, Relation.EQUAL, formula, range)));
         if (decimal.isEmpty() && exact.isEmpty()) {
             withoutDecimals(form, decimals, left, range);
         }

@@ -88,7 +88,8 @@ final class OtherSources {
         if (!costs.atStart().isZero() && !sourced.contains(Place.of(Part.COSTS_AT_START))) {
             open.add(Prose.of("costs at the start: " + costs.atStart()));
         }
-        costs.discount().filter(rate -> !sourced.contains(Place.of(Part.DISCOUNT))).ifPresent(rate -> open.add(Prose.of("discount: " + rate)));
+        costs.discount().filter(rate -> !sourced.contains(Place.of(Part.DISCOUNT)))
+                .ifPresent(rate -> open.add(Prose.of("discount: " + rate)));
         return open;
     }
 }

@@ -72,7 +72,8 @@ final class PolePicture {
         shapes.add(new Ring(new Point(zeroX, zeroY), radius, Ink.TEXT, 1.2));
         List<Point> places = set.poles().stream().map(pole -> place(pole, axis, plot)).toList();
         for (int i = 0; i < places.size(); i++) {
-            shapes.add(new Mark(places.get(i), places.size() > MANY ? Form.SMALL_CROSS : Form.CROSS, ink(set.poles().get(i).side()), tip(set.poles().get(i))));
+            shapes.add(new Mark(places.get(i), places.size() > MANY ? Form.SMALL_CROSS : Form.CROSS,
+                    ink(set.poles().get(i).side()), tip(set.poles().get(i))));
         }
         label(set.poles(), places, plot);
     }

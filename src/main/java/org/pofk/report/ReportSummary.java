@@ -108,7 +108,8 @@ final class ReportSummary {
 
     private static String holds(ClosedForm form) {
         int from = form.withoutImpulsesFrom();
-        return (form.isExactThroughout() ? "exact" : "certified") + " for every k ≥ 0, proved" + (from > 0 ? "; without the delta terms from k = " + from + " on" : "");
+        return (form.isExactThroughout() ? "exact" : "certified") + " for every k ≥ 0, proved"
+                + (from > 0 ? "; without the delta terms from k = " + from + " on" : "");
     }
 
     /** Where an output tends to, when it is there, and how high it gets. */

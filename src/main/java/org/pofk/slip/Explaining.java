@@ -142,7 +142,8 @@ final class Explaining {
     private Optional<List<Change>> inEachPart(List<Change> changes) {
         List<Change> chosen = new ArrayList<>();
         for (int part : wrongParts) {
-            Optional<Change> first = changes.stream().filter(change -> change.edits().keySet().equals(Set.of(part)) && budget.screening() && mayBeRight(change, part)).findFirst();
+            Optional<Change> first = changes.stream().filter(change -> change.edits().keySet().equals(Set.of(part))
+                    && budget.screening() && mayBeRight(change, part)).findFirst();
             if (first.isEmpty()) {
                 return Optional.empty();
             }
