@@ -137,7 +137,11 @@ class SchemaTest {
     @ParameterizedTest
     @ValueSource(strings = {"tested-valve", "bridge-deck", "staggered-pumps"})
     void answersAboutSchedulesKeepTheirSchema(String model) throws Exception {
-        assertKeeps("schedule", "derive", Path.of("test-data", "scheduled", model + ".yaml"), "--at", "0..3,100");
+        Path file = Path.of("test-data", "scheduled", model + ".yaml");
+        assertKeeps("schedule", "derive", file, "--at", "0..3,100");
+        String last = Pofk.read(file).chain().states().get(Pofk.read(file).chain().size() - 1);
+        assertKeeps("when", "when", file, "--of", last, "--at-least", "0.01");
+        assertKeeps("when", "when", file, "--of", last, "--settles-within", "1e-3");
     }
 
     @ParameterizedTest
