@@ -11,7 +11,9 @@ import org.pofk.chain.Model;
 import org.pofk.chain.Output;
 import org.pofk.report.CsvWriter;
 import org.pofk.report.ScheduledPassageDocument;
+import org.pofk.report.ScheduledPassageJson;
 import org.pofk.report.ScheduledTotalDocument;
+import org.pofk.report.ScheduledTotalJson;
 import org.pofk.report.ScheduledWhenDocument;
 import org.pofk.report.Style;
 import org.pofk.report.WhenJson;
@@ -34,7 +36,8 @@ final class ScheduledAnswers {
             return options.undecided(streams);
         }
         ScheduledTotalModel found = outcome.published().get();
-        destination.write(Answer.of(() -> ScheduledTotalDocument.of(found, style)), streams);
+        destination.write(Answer.of(() -> ScheduledTotalDocument.of(found, style))
+                .with(Format.JSON, () -> ScheduledTotalJson.write(found, style.digits())), streams);
         return found.isDecided() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
     }
 
@@ -47,7 +50,8 @@ final class ScheduledAnswers {
             return options.undecided(streams);
         }
         ScheduledPassage found = outcome.published().get();
-        destination.write(Answer.of(() -> ScheduledPassageDocument.of(started, found, style)), streams);
+        destination.write(Answer.of(() -> ScheduledPassageDocument.of(started, found, style))
+                .with(Format.JSON, () -> ScheduledPassageJson.write(started, found, style.digits())), streams);
         return found.over().isPresent() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
     }
 
@@ -68,14 +72,10 @@ final class ScheduledAnswers {
     }
 
     private static void refuseTables(Model read, Destination destination) throws UsageException {
-        for (Format format : List.of(Format.NOTEBOOK, Format.CSV, Format.JSON)) {
+        for (Format format : List.of(Format.NOTEBOOK, Format.CSV)) {
             if (destination.takes(format)) {
-                throw new UsageException("'" + read.origin().file() + "' has a schedule: this is answered as text, LaTeX"
-                        + " or a web page, not as " + switch (format) {
-                            case CSV -> "a table";
-                            case NOTEBOOK -> "a notebook";
-                            default -> "JSON";
-                        });
+                throw new UsageException("'" + read.origin().file() + "' has a schedule: this is answered as text, LaTeX,"
+                        + " a web page or JSON, not as a " + (format == Format.CSV ? "table" : "notebook"));
             }
         }
     }

@@ -1,6 +1,8 @@
 package org.pofk.report;
 
+import java.util.List;
 import java.util.Optional;
+import java.util.function.BiConsumer;
 import org.pofk.answer.CycleCourse;
 import org.pofk.answer.CycleCourse.Reading;
 import org.pofk.answer.CycleCourse.Side;
@@ -11,9 +13,11 @@ import org.pofk.answer.PeriodicRegime;
 import org.pofk.answer.ScheduledModel;
 import org.pofk.answer.ScheduledOutput;
 import org.pofk.answer.StretchFormula;
+import org.pofk.chain.Model;
 import org.pofk.chain.Schedule;
 import org.pofk.chain.Schedule.Repeat;
 import org.pofk.chain.Schedule.When;
+import org.pofk.chain.Timetable;
 import org.pofk.exact.Rational;
 import org.pofk.formula.Formula;
 import org.pofk.formula.Latex;
@@ -107,7 +111,7 @@ public final class ScheduledJson {
         });
     }
 
-    private void value(String name, KnownValue value) {
+    void value(String name, KnownValue value) {
         json.object(name, () -> {
             json.text("word", value.word() == KnownValue.Word.EXACT ? "exact" : "certified");
             json.text("exact", value.exact().map(Rational::toString));
@@ -154,7 +158,19 @@ public final class ScheduledJson {
         });
     }
 
-    private void over(CycleFormula formula) {
+    /** Other results about such a model: {@code fields} stand behind the head and the schedule. */
+    static String write(String command, Model model, Timetable timetable, int digits,
+            BiConsumer<Json, ScheduledJson> fields) {
+        return Json.ofObject(json -> {
+            ScheduledJson writer = new ScheduledJson(json, digits,
+                    new ScheduledModel(model, timetable, List.of(), false));
+            JsonHead.write(json, "pofk-schedule-" + command, command, model);
+            json.object("schedule", () -> writer.schedule(model.schedule().orElseThrow()));
+            fields.accept(json, writer);
+        });
+    }
+
+    void over(CycleFormula formula) {
         json.object(() -> {
             json.optional("j", formula.place(), place -> json.count(place.j()));
             json.text("side", formula.place().map(place -> place.side() == Side.BEFORE ? "before" : "after"));

@@ -141,6 +141,9 @@ class SchemaTest {
         assertKeeps("schedule", "derive", file, "--at", "0..3,100");
         String last = Pofk.read(file).chain().states().get(Pofk.read(file).chain().size() - 1);
         assertKeeps("when", "when", file, "--of", last, "--at-least", "0.01");
+        assertKeeps("schedule-total", "total", file, "--of", last, "--to", "0..3,100");
+        assertKeeps("schedule-total", "total", file, "--of", last, "--entries");
+        assertKeeps("schedule-passage", "passage", file, "--into", last, "--at", "0..3,100");
         assertKeeps("when", "when", file, "--of", last, "--settles-within", "1e-3");
     }
 
@@ -167,7 +170,8 @@ class SchemaTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"result", "structure", "simulation", "verdicts", "conditional", "total", "powers"})
+    @ValueSource(strings = {"result", "structure", "simulation", "verdicts", "conditional", "total", "powers",
+        "schedule-total", "schedule-passage"})
     void schemasAreSchemas(String name) throws Exception {
         JsonSchema metaschema = JsonSchemaFactory.getInstance(SpecVersion.VersionFlag.V202012)
                 .getSchema(com.networknt.schema.SchemaLocation.of(com.networknt.schema.SchemaId.V202012));
