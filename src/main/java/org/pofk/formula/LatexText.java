@@ -3,6 +3,7 @@ package org.pofk.formula;
 import java.text.Normalizer;
 import java.util.List;
 import java.util.Map;
+import java.util.regex.Pattern;
 import java.util.stream.Collectors;
 
 /**
@@ -32,6 +33,10 @@ public final class LatexText {
     private static final String RAISED = "⁰¹²³⁴⁵⁶⁷⁸⁹";
     private static final String LOWERED = "₀₁₂₃₄₅₆₇₈₉";
 
+    /** Between signs that LaTeX would make another one of. */
+    private static final Pattern JOINED = Pattern.compile("(?<=[-–—])(?=[-–—])|(?<=['’”])(?=['’”])|(?<=[!?])(?=“)"
+            + "|(?<=,)(?=,)|(?<=<)(?=<)|(?<=>)(?=>)");
+
     private LatexText() {
     }
 
@@ -45,11 +50,15 @@ public final class LatexText {
 
     /** The text, to stand outside mathematics or in {@code \text}; what can't be set stays as it is. */
     public static String of(String text) {
-        return Normalizer.normalize(text, Normalizer.Form.NFC).codePoints().mapToObj(LatexText::of)
-                .collect(Collectors.joining()).replaceAll("([-,<>'!?])(?=\\1|`)", "$1{}")
+        return JOINED.splitAsStream(Normalizer.normalize(text, Normalizer.Form.NFC)).map(LatexText::signs)
+                .collect(Collectors.joining("{}"))
                 .replaceAll("([A-Za-z])\u0303", "\\\\~{$1}").replaceAll("([A-Za-z])\u0302", "\\\\^{$1}")
                 .replaceAll("([A-Za-z])\u0304", "\\\\={$1}").replaceAll("([A-Za-z])\u0301", "\\\\'{$1}")
                 .replaceAll("([A-Za-z])\u0308", "\\\\\"{$1}").replaceAll("([A-Za-z])\u030c", "\\\\v{$1}");
+    }
+
+    private static String signs(String text) {
+        return text.codePoints().mapToObj(LatexText::of).collect(Collectors.joining());
     }
 
     private static String of(int c) {

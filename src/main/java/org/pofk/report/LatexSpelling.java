@@ -4,7 +4,6 @@ import java.util.List;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 import java.util.stream.Collectors;
-import org.pofk.formula.Formula;
 import org.pofk.formula.Latex;
 import org.pofk.formula.LatexText;
 
@@ -13,7 +12,6 @@ import org.pofk.formula.LatexText;
  * are longer than a third of it are broken at their signs.
  */
 final class LatexSpelling {
-    private static final Pattern OF_A_VARIABLE = Pattern.compile("([A-Za-z]?)\\(([kz])\\)");
     private static final Pattern LONG = Pattern.compile("[^\\s~]{12,}");
     private static final Pattern RAISED =
             Pattern.compile("\\\\textasciicircum\\{}(\\\\ensuremath\\{-}|-)?([0-9]+|[A-Za-z])");
@@ -34,18 +32,13 @@ final class LatexSpelling {
         return of(prose).replace("\\allowbreak{}", "");
     }
 
-    /** Prose within mathematics: words upright, {@code Y(z)} as mathematics. */
-    static String inMathematics(Prose prose) {
-        return prose.parts().stream().map(part -> part.accept(new InMathematics())).collect(Collectors.joining());
-    }
-
     /** What somebody typed: every blank is kept, and a line may be broken between any two characters. */
     static String typed(String text) {
         return text.codePoints().mapToObj(c -> c == ' ' ? "\\ " : LatexText.of(Character.toString(c)))
                 .collect(Collectors.joining("\\allowbreak{}"));
     }
 
-    private static String words(String text) {
+    static String words(String text) {
         return RAISED.matcher(EQUATION.matcher(LatexText.of(Typography.minus(text))).replaceAll("$1~=~")
                 .replace(" \\%", "~\\%")).replaceAll(found ->
                 Matcher.quoteReplacement("\\textsuperscript{" + (found.group(1) == null ? "" : "\\ensuremath{-}")
@@ -60,7 +53,7 @@ final class LatexSpelling {
 
     /** Places for breaks behind what parts words, or between any two characters where nothing does. */
     private static String withBreaks(String text) {
-        String parted = text.replaceAll("(?<=\\\\_|[^{][-/:;]|[^{0-9][.,])(?=[^{}])", "\\\\allowbreak{}");
+        String parted = text.replaceAll("(?<=\\\\_|[^{][-/:;]|[^{0-9][.,])(?=[^{}-])", "\\\\allowbreak{}");
         boolean isPlain = parted.equals(text) && text.matches("[^\\\\{}]*");
         if (!isPlain || text.length() < LONGEST_PLAIN) {
             return parted;
@@ -83,24 +76,6 @@ final class LatexSpelling {
         public String mathematics(Prose.Mathematics mathematics) {
             List<String> lines = Latex.lines(mathematics.formula(), LONGEST_FORMULA);
             return "$" + String.join(" \\allowbreak ", lines) + "$";
-        }
-    }
-
-    private static final class InMathematics implements Prose.Visitor<String> {
-        @Override
-        public String words(Prose.Words words) {
-            return OF_A_VARIABLE.matcher(words.text()).matches() ? words.text()
-                    : "\\text{" + LatexSpelling.words(words.text()) + "}";
-        }
-
-        @Override
-        public String name(Prose.Name name) {
-            return Latex.write(new Formula.Symbol(name.text()));
-        }
-
-        @Override
-        public String mathematics(Prose.Mathematics mathematics) {
-            return Latex.write(mathematics.formula());
         }
     }
 }

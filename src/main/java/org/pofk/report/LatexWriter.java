@@ -174,7 +174,7 @@ public final class LatexWriter {
         /** Aligned at its relation; a long left side stands on a line of its own. */
         @Override
         public List<String> display(Document.Display display) {
-            String left = LatexSpelling.inMathematics(display.left());
+            String left = LatexInMathematics.of(display.left());
             String relation = display.left().isEmpty() ? "" : display.relation() == Relation.EQUAL ? " = "
                     : " \\approx ";
             int leftWidth = left.replaceAll("\\\\[a-z]+|[{}]", "").length();
@@ -190,7 +190,7 @@ public final class LatexWriter {
                 lines.add(start + right.get(i));
             }
             if (!display.condition().isEmpty()) {
-                lines.add("&\\qquad \\text{" + LatexSpelling.of(display.condition()) + "}");
+                lines.add("&\\qquad " + LatexInMathematics.of(display.condition()));
             }
             return numbered(lines);
         }

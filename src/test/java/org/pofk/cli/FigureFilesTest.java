@@ -16,7 +16,7 @@ import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
-import org.junit.jupiter.params.provider.ValueSource;
+import org.junit.jupiter.params.provider.CsvSource;
 import org.pofk.page.Installed;
 
 /** LaTeX with its figures beside it: for pdflatex, and for pandoc, which makes a document of a word processor of it. */
@@ -27,11 +27,11 @@ class FigureFilesTest {
     @TempDir
     private Path folder;
 
-    private Path report(String pattern, String depth) {
+    private Path report(String pattern, String depth, String... asked) {
         Installed.require("pdflatex", "figures of LaTeX aren't made files");
         Path article = folder.resolve("A report_1.tex");
-        Run run = Run.of("report", "test-data/models/" + pattern + ".yaml", "--show", depth, "--save", article.toString(),
-                "--figures", "files");
+        Run run = Run.of(Stream.concat(Stream.of("report", "test-data/models/" + pattern + ".yaml", "--show", depth,
+                "--save", article.toString(), "--figures", "files"), Stream.of(asked)).toList());
         assertEquals(0, run.exitCode(), run.notes());
         return article;
     }
@@ -69,11 +69,13 @@ class FigureFilesTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"pump-pair", "tandem-presses"})
-    void aConverterMakesEveryEquationOneThatCanBeEditedWithItsNumberAndTakesTheFiguresAlong(String pattern)
+    @CsvSource({"pump-pair, ''", "tandem-presses, ''",
+        "pump-pair, --of none --into none --at-most 0.01 --percentile 90% --given running --total none",
+        "deck-condition, --into 5 --given-never 4", "../scheduled/tested-valve, --of stuck"})
+    void aConverterMakesEveryEquationOneThatCanBeEditedWithItsNumberAndTakesTheFiguresAlong(String pattern, String asked)
             throws Exception {
         Installed.require("pandoc", "LaTeX isn't made a document of a word processor");
-        Path article = report(pattern, "full");
+        Path article = report(pattern, asked.isEmpty() ? "full" : "brief", asked.isEmpty() ? new String[0] : asked.split(" "));
         String latex = Files.readString(article);
         assertEquals("", run("pandoc", article.getFileName().toString(), "-o", "report.docx"));
         run("pandoc", "report.docx", "-t", "json", "-o", "report.json", "--extract-media=media");
