@@ -100,13 +100,20 @@ final class StatementSection {
             return Optional.empty();
         }
         if (given.isEmpty()) {
-            reading.fault(subject.position(), "nothing-stated", "nothing is stated here; write "
-                    + ClaimExamples.of(kind));
+            nothingStated(ClaimKind.CONTENT);
             return Optional.empty();
         }
         String key = given.get(0);
         return fields.value(key)
                 .map(node -> new Content(node, key.equals("is-latex") ? Notation.LATEX : Notation.PLAIN));
+    }
+
+    /** One fault for what isn't there: none where a misspelt key is the cause. */
+    private void nothingStated(List<String> keys) {
+        if (!fields.misspell(keys)) {
+            reading.fault(subject.position(), "nothing-stated", "nothing is stated here; write "
+                    + ClaimExamples.of(kind));
+        }
     }
 
     private Optional<Output> output() {
@@ -278,19 +285,21 @@ final class StatementSection {
         Optional<FormulaText> angle = named("angle", "the angle");
         Optional<FormulaText> amplitude = named("amplitude", "the amplitude");
         Optional<FormulaText> phase = named("phase", "the phase");
-        if (List.of("radius", "angle", "amplitude", "phase").stream().noneMatch(key -> fields.value(key).isPresent())) {
-            reading.fault(subject.position(), "nothing-stated",
-                    "nothing is stated here; write " + ClaimExamples.of(ClaimKind.PAIR));
+        List<String> keys = List.of("radius", "angle", "amplitude", "phase");
+        if (keys.stream().noneMatch(key -> fields.value(key).isPresent())) {
+            nothingStated(keys);
         }
         return output().map(output -> new Statement.Pair(output, radius, angle, amplitude, phase));
     }
 
     private Optional<Statement> bound() {
         boolean isLeast = fields.value("at least").isPresent();
-        if (isLeast == fields.value("at most").isPresent()) {
-            reading.fault(subject.position(), "bound-unclear", isLeast
-                    ? "a bound is either 'at least' or 'at most'; make two claims of it"
-                    : "nothing is stated here; write " + ClaimExamples.of(ClaimKind.BOUND));
+        boolean isMost = fields.value("at most").isPresent();
+        if (isLeast && isMost) {
+            reading.fault(subject.position(), "bound-unclear",
+                    "a bound is either 'at least' or 'at most'; make two claims of it");
+        } else if (!isLeast && !isMost) {
+            nothingStated(List.of("at least", "at most"));
         }
         Optional<FormulaText> formula = named(isLeast ? "at least" : "at most", "a bound");
         Statement.Bound.Direction direction =
