@@ -36,8 +36,9 @@ final class Carrying {
         for (Implied each : implied) {
             Optional<Claim> seen = each.seen().apply(claim);
             if (seen.isPresent()) {
-                if (Judging.isRight(seen.get(), each.truth().get()) || !nearlyRight
-                        && isNear(seen.get(), Judging.of(seen.get(), each.truth().get()))) {
+                Truth other = each.truth().apply(claim);
+                if (Judging.isRight(seen.get(), other) || !nearlyRight
+                        && isNear(seen.get(), Judging.of(seen.get(), other))) {
                     return OptionalInt.of(each.from());
                 }
             }

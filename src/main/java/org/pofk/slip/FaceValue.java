@@ -23,6 +23,7 @@ import org.pofk.meaning.ExponentialSum;
 import org.pofk.meaning.Precision;
 import org.pofk.meaning.Quantity;
 import org.pofk.meaning.RationalForm;
+import org.pofk.meaning.WrittenPolynomial;
 import org.pofk.text.RefusedException;
 import org.pofk.transform.TransferFunction;
 
@@ -95,6 +96,21 @@ final class FaceValue {
             }
         }
         return realized(truth.y().numerator(), denominator);
+    }
+
+    /**
+     * That of the right numerator over what a stated polynomial of the matrix leaves of itself when what cancels for the
+     * output is taken away: the right polynomial divided by the output's denominator. Nothing where that is no factor.
+     */
+    static Optional<Chain> of(Statement.MatrixPolynomial stated, Polynomial<Rational> right, OutputTruth truth) {
+        try {
+            Polynomial<Rational> written = polynomial(WrittenPolynomial.of(stated.is().parsed(), Precision.AS_WRITTEN)
+                    .coefficients().stream().map(FaceValue::of).toList());
+            Polynomial<Rational> cancelled = right.dividedExactlyBy(truth.y().denominator());
+            return realized(truth.y().numerator(), written.dividedExactlyBy(cancelled));
+        } catch (RefusedException | ArithmeticException unusable) {
+            return Optional.empty();
+        }
     }
 
     /** That of the coefficients stated at the poles stated, where all of them are. */

@@ -5,7 +5,6 @@ import java.util.Collections;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.Function;
-import java.util.function.Supplier;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
@@ -23,20 +22,22 @@ import org.pofk.exact.Rational;
  *
  * @param from the number of the earlier step
  * @param seen the later claim as a claim about that truth; nothing where the step implies nothing about it
+ * @param truth that of a later claim of which something is implied
  */
-record Implied(int from, Function<Claim, Optional<Claim>> seen, Supplier<Truth> truth) {
+record Implied(int from, Function<Claim, Optional<Claim>> seen, Function<Claim, Truth> truth) {
 
     /** All that a wrong step implies: by what explains it, and at face value. */
     static List<Implied> of(Claim claim, Explanation explanation, Truth truth) {
         List<Implied> implied = new ArrayList<>();
         for (Candidate model : explanation.models()) {
-            implied.add(new Implied(claim.number(), later -> followed(claim, model, later), model.truth()));
+            implied.add(new Implied(claim.number(), later -> followed(claim, model, later),
+                    later -> model.truth().get()));
         }
         claim.statement().accept(new AtFaceValue(truth)).forEach(each ->
                 implied.add(new Implied(claim.number(), each.seen(), each.truth())));
         if (claim.statement() instanceof Statement.Pair && !explanation.together()) {
             explanation.slips().stream().limit(1).filter(slip -> Digits.isNumber(slip.found())).forEach(slip ->
-                    implied.add(new Implied(claim.number(), later -> mended(claim, slip, later), () -> truth)));
+                    implied.add(new Implied(claim.number(), later -> mended(claim, slip, later), later -> truth)));
         }
         return implied;
     }
@@ -73,7 +74,7 @@ record Implied(int from, Function<Claim, Optional<Claim>> seen, Supplier<Truth> 
                 : Optional.empty();
     }
 
-    private record Step(Function<Claim, Optional<Claim>> seen, Supplier<Truth> truth) {
+    private record Step(Function<Claim, Optional<Claim>> seen, Function<Claim, Truth> truth) {
         /** A recursion that stands for one output. */
         static List<Step> of(Output output, Optional<Chain> chain) {
             return chain.stream().map(found -> new Step(later -> Outcomes.only(later.statement())
@@ -81,9 +82,9 @@ record Implied(int from, Function<Claim, Optional<Claim>> seen, Supplier<Truth> 
                             each -> FaceValue.output(own.name(), found.size())))), known(found))).toList();
         }
 
-        private static Supplier<Truth> known(Chain chain) {
+        private static Function<Claim, Truth> known(Chain chain) {
             Truth truth = Truth.of(chain);
-            return () -> truth;
+            return later -> truth;
         }
     }
 
@@ -131,7 +132,8 @@ record Implied(int from, Function<Claim, Optional<Claim>> seen, Supplier<Truth> 
 
         @Override
         public List<Step> polynomial(Statement.MatrixPolynomial polynomial) {
-            return List.of();
+            ImpliedPoles implied = new ImpliedPoles(polynomial, truth);
+            return List.of(new Step(implied::seen, implied::truth));
         }
 
         @Override

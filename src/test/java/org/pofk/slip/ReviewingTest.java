@@ -124,6 +124,15 @@ class ReviewingTest {
     }
 
     @Test
+    void polesFromAWrongPolynomialAreCarriedAndOthersAreNot() {
+        String polynomial = "{characteristic polynomial: all, is: '(z-1)*(z^2-0.6825 z+0.11445)'}";
+        Finding carried = reviewed("pump-pair", polynomial, "{poles: lost, are: [1, 0.3860, 0.2965]}").findings().get(1);
+        assertEquals(OptionalInt.of(1), carried.carriedFrom());
+        Finding wrong = reviewed("pump-pair", polynomial, "{poles: lost, are: [1, 0.3890, 0.2965]}").findings().get(1);
+        assertEquals(Verdict.WRONG, wrong.verdict());
+    }
+
+    @Test
     void aFormulaFromAWrongTransformIsCarriedAndSoIsItsLongRun() {
         List<Finding> findings = reviewed("pump-pair", "{transform: lost, is: 'z*(0.0025 z + 0.0095)/((z-1)*(z^2-0.6825 z+0.10445))'}",
                 "{formula: lost, is: '0.02844 - 0.08832*0.4508^k + 0.05988*0.2317^k'}",
