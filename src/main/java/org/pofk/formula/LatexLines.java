@@ -73,7 +73,8 @@ final class LatexLines {
         List<String> lines = new ArrayList<>();
         double used = 0;
         for (Formula factor : product.factors()) {
-            List<String> own = wrapped(factor, width);
+            List<String> own = LatexWidth.of(factor) <= width ? List.of(Latex.write(new Product(List.of(factor))))
+                    : wrapped(factor, width);
             double needed = LatexWidth.of(factor) + 3;
             if (own.size() == 1 && !lines.isEmpty() && used + needed <= width) {
                 lines.set(lines.size() - 1, lines.get(lines.size() - 1) + " \\cdot " + own.get(0));
@@ -107,7 +108,9 @@ final class LatexLines {
         boolean needsNone = !isSigned && (formula instanceof Number number && number.value().isInteger()
                 || formula instanceof Formula.Symbol || formula instanceof Power || formula instanceof Formula.Call
                 || formula instanceof Formula.WrittenDecimal decimal && !decimal.text().startsWith("-"));
-        return needsNone ? of(formula, width) : around("\\Big(", of(formula, width), "\\Big)");
+        List<String> lines = of(formula, width);
+        return needsNone ? lines : lines.size() == 1 ? around("\\left(", lines, "\\right)")
+                : around("\\Big(", lines, "\\Big)");
     }
 
     private static List<String> number(Number number, double width) {

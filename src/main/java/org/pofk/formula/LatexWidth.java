@@ -6,8 +6,8 @@ import org.pofk.formula.Formula.Cases;
 /** About how wide a formula is set in a display, in digits. An estimate: it decides only where lines are broken. */
 final class LatexWidth implements Formula.Visitor<Double> {
     private static final LatexWidth WIDTH = new LatexWidth();
-    private static final double SIGN = 3;
-    private static final double PARENTHESES = 2;
+    private static final double SIGN = 2.5;
+    private static final double PARENTHESES = 1.6;
     private static final double RAISED = 0.75;
 
     private LatexWidth() {
@@ -36,12 +36,12 @@ final class LatexWidth implements Formula.Visitor<Double> {
 
     @Override
     public Double decimal(Formula.WrittenDecimal decimal) {
-        return decimal.text().length() + (decimal.text().matches(".*[eE].*") ? 3.0 : 0);
+        return decimal.text().length() - (decimal.text().contains(".") ? 0.5 : 0) + (decimal.text().matches(".*[eE].*") ? 3.0 : 0);
     }
 
     @Override
     public Double symbol(Formula.Symbol symbol) {
-        return 1.2 * symbol.name().length();
+        return symbol.name().length() == 1 ? 1.2 : symbol.name().length();
     }
 
     @Override

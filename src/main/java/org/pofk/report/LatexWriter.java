@@ -19,8 +19,8 @@ import org.pofk.text.RefusedException;
  */
 public final class LatexWriter {
     private static final List<String> PACKAGES = List.of("amsmath", "array", "booktabs", "longtable");
-    /** Digits on a line of a display. */
-    private static final int WIDTH = 70;
+    /** Digits on a line of a display: 82 of them fill it, the number of the equation stands at its end. */
+    private static final int WIDTH = 76;
     /** Where only a few lines are left of the page, the next one is begun. */
     private static final String TOGETHER = "\\vspace{0pt plus 8\\baselineskip}\\pagebreak[2]"
             + "\\vspace{0pt plus -8\\baselineskip}";
@@ -36,6 +36,9 @@ public final class LatexWriter {
                 "\\usepackage[margin=25mm]{geometry}"));
         packages(document, layout).forEach(each -> lines.add("\\usepackage{" + each + "}"));
         lines.addAll(changes(document));
+        if (layout.figures() == LatexLayout.Figures.INSIDE) { // a converter would take it for words
+            lines.addAll(PdfTitle.lines(document));
+        }
         lines.addAll(List.of("\\allowdisplaybreaks", "\\setlength{\\parindent}{0pt}",
                 "\\setlength{\\parskip}{6pt plus 2pt}", "\\setlength{\\emergencystretch}{4em}",
                 "\\begin{document}"));

@@ -40,6 +40,7 @@ class PdfTest {
             assertEquals(0, run.exitCode(), run.notes());
         }
         assertTrue(Files.readString(first, StandardCharsets.ISO_8859_1).startsWith("%PDF-"));
+        assertTrue(Files.readString(first, StandardCharsets.ISO_8859_1).contains("/Title <FEFF"));
         assertArrayEquals(Files.readAllBytes(first), Files.readAllBytes(second));
         try (Stream<Path> files = Files.list(folder)) {
             assertEquals(2, files.count());
