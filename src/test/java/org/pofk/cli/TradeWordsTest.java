@@ -18,11 +18,21 @@ class TradeWordsTest {
 
     @ParameterizedTest
     @ValueSource(strings = {"steady state", "availability", "mean time to failure", "MTTF", "transient", "burn-in",
-        "mean time between failures", "second eigenvalue", "proof test", "eigenvalue", "monte carlo"})
+        "mean time between failures", "second eigenvalue", "proof test", "eigenvalue", "monte carlo", "percentile", "quantile",
+        "mean time to blockage", "replacement", "docx", "pdf", "Word"})
     void wordsOfTheTradeLeadToACommand(String word) {
         Run run = Run.of("help", word);
         assertEquals(0, run.exitCode(), run.notes());
         assertTrue(run.answer().contains("pofk ") || run.answer().contains("not built yet"), run.answer());
+    }
+
+    @Test
+    void aWordDocumentIsMadeByPandoc() {
+        for (String asked : List.of("word", "docx")) {
+            Run run = Run.of("help", asked);
+            assertTrue(run.answer().contains("pandoc FILE.tex -o FILE.docx") && run.answer().contains("FILE.pdf"),
+                    run.answer());
+        }
     }
 
     @Test
