@@ -76,7 +76,7 @@ public final class Outputs {
         known.addAll(chain.sets().keySet());
         known.addAll(chain.states());
         return new Fault(asked, "unknown-output",
-                "there is no output, set or state '" + name + "'" + Suggestion.didYouMean(known, name));
+                "there is no output, set or state '" + name + "'" + Suggestion.didYouMeanOrAll(known, name));
     }
 
     private static Fault forTwo(String name, Position asked) {

@@ -24,7 +24,9 @@ record Amount(Rational value, boolean isPercent) {
                 return new Amount(LinearForm.value(
                         FormulaParser.parse(text, Position.ofWhole("number")), Map.of()), text.strip().endsWith("%"));
             } catch (RefusedException wrong) {
-                throw new TypeConversionException("'" + text + "' is no number such as 0.99, 1/1000 or 1%");
+                throw new TypeConversionException(text.strip().matches("-?[0-9]*,[0-9]+ ?%?")
+                        ? "'" + text + "' has a decimal comma; write " + text.strip().replace(',', '.')
+                        : "'" + text + "' is no number such as 0.99, 1/1000 or 1%");
             }
         }
     }

@@ -40,11 +40,11 @@ final class Misunderstood {
 
     private static String leftOver(CommandLine command, String word) {
         if (!word.startsWith("-")) {
-            return "'" + word + "' is one too many for  " + command.getCommandName();
+            return "'" + word + "' is one too many for " + command.getCommandName();
         }
         String option = word.contains("=") ? word.substring(0, word.indexOf('=')) : word;
-        return "there is no option '" + option + "' for  " + command.getCommandName()
-                + Suggestion.didYouMean(options(command.getCommandSpec()), option);
+        return "there is no option '" + option + "' for " + command.getCommandName()
+                + Meant.didYouMean(options(command.getCommandSpec()), option);
     }
 
     private static List<String> options(CommandSpec specification) {

@@ -101,7 +101,7 @@ final class PassageOptions {
         int state = chain.states().indexOf(from.get());
         if (state < 0) {
             throw new UsageException("--from: there is no state '" + from.get() + "'"
-                    + Suggestion.didYouMean(chain.states(), from.get()));
+                    + Suggestion.didYouMeanOrAll(chain.states(), from.get()));
         }
         List<Rational> start = new ArrayList<>();
         for (int i = 0; i < chain.size(); i++) {
@@ -121,7 +121,7 @@ final class PassageOptions {
                 List<String> known = new ArrayList<>(chain.states());
                 known.addAll(chain.sets().keySet());
                 throw new UsageException(option + ": there is no state or set '" + name + "'"
-                        + Suggestion.didYouMean(known, name));
+                        + Suggestion.didYouMeanOrAll(known, name));
             }
         }
         return states;

@@ -25,7 +25,7 @@ final class TotalOptions {
     @Option(names = "--costs", description = "adds up the costs of the model; the same without --of, where it has some")
     private boolean costs;
 
-    @Option(names = "--to", paramLabel = "STEPS", converter = StepList.Converter.class,
+    @Option(names = {"--to", "--at"}, paramLabel = "STEPS", converter = StepList.Converter.class,
             description = "also gives the totals up to these steps, like 52,104 or 0..20")
     private Optional<StepList> to = Optional.empty();
 

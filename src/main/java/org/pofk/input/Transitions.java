@@ -6,6 +6,7 @@ import java.util.HashSet;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
+import java.util.stream.Collectors;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Place;
 import org.pofk.chain.Place.Part;
@@ -13,12 +14,14 @@ import org.pofk.chain.SparseMatrix;
 import org.pofk.chain.SparseMatrix.Entry;
 import org.pofk.exact.Rational;
 import org.pofk.text.Position;
+import org.pofk.text.Suggestion;
 
 /**
  * Moves as {@code transitions}, an action or an entry of {@code moves} hold them: from each state a mapping of states
  * to probabilities, or {@code stays}.
  */
 final class Transitions {
+    private static final int MOST_MISSPELT = 100;
     private static final String STAYS = "stays";
     private static final String ALL = "transitions";
 
@@ -64,14 +67,21 @@ final class Transitions {
     SparseMatrix matrix() {
         Set<String> given = new HashSet<>();
         SparseMatrix matrix = over(new SparseMatrix(Collections.nCopies(states.size(), List.of())), given);
+        Set<String> misspelt = misspelt(given);
         for (Node.Scalar state : states.listed()) {
-            if (!given.contains(state.name())) {
+            if (!given.contains(state.name()) && !misspelt.contains(state.name())) {
                 reading.fault(state.position(), "state-without-entry", "the state '" + Words.shortened(state.name())
                         + "' has no entry under transitions; write '" + Words.shortened(state.name())
                         + ": stays' when nothing leaves it");
             }
         }
         return matrix;
+    }
+
+    /** States that entries of no state's name probably mean; what is wrong with these is said there. */
+    private Set<String> misspelt(Set<String> given) {
+        return given.stream().filter(name -> !states.contains(name)).sorted().limit(MOST_MISSPELT)
+                .flatMap(name -> Suggestion.among(states.names(), name).stream()).collect(Collectors.toSet());
     }
 
     /** The moves given; a fault at {@code place} unless there are some from every state. */

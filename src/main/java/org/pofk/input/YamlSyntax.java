@@ -3,6 +3,7 @@ package org.pofk.input;
 import java.util.List;
 import java.util.Optional;
 import java.util.stream.IntStream;
+import java.util.stream.Stream;
 import org.pofk.text.Faults;
 import org.pofk.text.Position;
 import org.snakeyaml.engine.v2.events.Event;
@@ -135,6 +136,13 @@ final class YamlSyntax {
         int above = at.line() - 1;
         while (above > 0 && (line(above).isBlank() || line(above).stripLeading().startsWith("#"))) {
             above--;
+        }
+        Optional<Integer> item = Stream.of(above, at.line()).filter(line -> line(line).strip().matches("-\\p{L}.*:.*"))
+                .findFirst();
+        if (item.isPresent()) {
+            faults.add(new Position(source.name(), item.get(), indentation(item.get()) + 1), "missing-blank",
+                    "a blank is missing after '-'");
+            return;
         }
         boolean runsOn = above > 0 && !line(above).matches(".*:(\\s.*)?") && isFirstColon(at);
         if (runsOn) {

@@ -1,6 +1,7 @@
 package org.pofk.text;
 
 import java.util.Collection;
+import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
 
@@ -12,6 +13,7 @@ import java.util.Optional;
 public final class Suggestion {
     private static final int LONGEST_WORD = 100;
     private static final int MOST_EDITS = 3;
+    private static final int MOST_LISTED = 12;
 
     private Suggestion() {
     }
@@ -37,6 +39,17 @@ public final class Suggestion {
     /** {@code "; did you mean 'both'?"} to end a fault's message with, or nothing when no candidate is near. */
     public static String didYouMean(Collection<String> candidates, String word) {
         return among(candidates, word).map(near -> "; did you mean '" + near + "'?").orElse("");
+    }
+
+    /** The same, or all candidates when none is near and they are few: {@code "; there are 'both' and 'one'"}. */
+    public static String didYouMeanOrAll(Collection<String> candidates, String word) {
+        String meant = didYouMean(candidates, word);
+        if (!meant.isEmpty() || candidates.size() < 2 || candidates.size() > MOST_LISTED) {
+            return meant;
+        }
+        List<String> quoted = candidates.stream().map(each -> "'" + each + "'").toList();
+        return "; there are " + String.join(", ", quoted.subList(0, quoted.size() - 1)) + " and "
+                + quoted.get(quoted.size() - 1);
     }
 
     /** The number of edits between two words, or {@code bound} when it isn't below that. */
