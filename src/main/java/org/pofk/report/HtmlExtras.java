@@ -29,7 +29,7 @@ final class HtmlExtras {
 
     /** The formula as LaTeX with its left side, as text, and for a spreadsheet where it can be said there. */
     String attributes(Display display) {
-        String left = display.left().isEmpty() ? "" : LatexSpelling.inMathematics(display.left())
+        String left = display.left().isEmpty() ? "" : LatexInMathematics.of(display.left())
                 + (display.relation() == Relation.EQUAL ? " = " : " \\approx ");
         Optional<String> sheet = OpenFormula.write(display.right(), CELL_OF_K);
         return attribute("latex", left + Latex.write(display.right()))

@@ -138,7 +138,7 @@ public final class HtmlWriter {
                 boolean isExact = display.relation() == Relation.EQUAL;
                 pieces.add(List.of(new Piece(HtmlSpelling.inMathematics(display.left()) + "<mo form=\"infix\">"
                         + (isExact ? "=" : "≈") + "</mo>",
-                        LatexSpelling.inMathematics(display.left()) + (isExact ? " =" : " \\approx"))));
+                        LatexInMathematics.of(display.left()) + (isExact ? " =" : " \\approx"))));
             }
             pieces.addAll(MathMl.terms(display.right(), HtmlSpelling.NARROW));
             List<String> html = new ArrayList<>(List.of("<div class=\"display\"" + extras.attributes(display) + ">",
