@@ -112,6 +112,7 @@ final class LatexTable {
 
     private static List<String> part(List<Column> group, int rows, LatexLayout layout) {
         List<String> lines = new ArrayList<>();
+        boolean isSetAsItIs = layout.figures() == LatexLayout.Figures.INSIDE;
         lines.add("{\\small\\renewcommand{\\arraystretch}{1.25}");
         lines.add("\\begin{longtable}{@{}" + kinds(group, layout) + "@{}}");
         lines.add("\\toprule");
@@ -123,10 +124,15 @@ final class LatexTable {
         for (int i = 0; i < rows; i++) {
             int row = i;
             lines.add(row(group.stream().map(column -> column.isBroken() ? broken(column.cells.get(row))
-                    : column.cells.get(row)).toList()));
+                    : column.cells.get(row)).toList()) + (isKept(row, rows) && isSetAsItIs ? "*" : ""));
         }
         lines.add("\\end{longtable}}");
         return lines;
+    }
+
+    /** Whether no page ends behind a row, since it or the one behind it would be alone. */
+    private static boolean isKept(int row, int rows) {
+        return row < rows - 1 && (row == 0 || row == rows - 2);
     }
 
     /** A converter takes widths for all columns or for none. */
