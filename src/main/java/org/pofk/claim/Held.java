@@ -6,8 +6,16 @@ import org.pofk.meaning.Decision;
 import org.pofk.meaning.Equation;
 import org.pofk.meaning.Quantity;
 
-/** A number of a claim beside the one it should be. */
-record Held(StatedNumber stated, Quantity right) {
+/**
+ * A number of a claim beside the one it should be.
+ *
+ * @param nearest what it is off from: the same, but for whole turns of an angle
+ */
+record Held(StatedNumber stated, Quantity right, Quantity nearest) {
+    Held(StatedNumber stated, Quantity right) {
+        this(stated, right, right);
+    }
+
     /** Whether they are the same number, decimals at face value. */
     Decision isExact() {
         return error().isZero();
@@ -18,9 +26,9 @@ record Held(StatedNumber stated, Quantity right) {
         return isExact() == Decision.YES ? Decision.YES : RightDecimals.of(equations()).areRight();
     }
 
-    /** Stated less right. */
+    /** Stated less the nearest that is right. */
     Quantity error() {
-        return stated.value().minus(right);
+        return stated.value().minus(nearest);
     }
 
     /** What its decimals have to satisfy: one equation, or two where something isn't seen to be real. */

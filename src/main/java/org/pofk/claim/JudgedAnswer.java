@@ -3,6 +3,7 @@ package org.pofk.claim;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalLong;
+import org.pofk.exact.Decimals;
 import org.pofk.exact.Rational;
 import org.pofk.meaning.Quantity;
 import org.pofk.text.RefusedException;
@@ -12,14 +13,17 @@ import org.pofk.text.RefusedException;
  * both.
  */
 final class JudgedAnswer {
+    private static final int DIGITS = 6;
+    private static final int LONGEST_FRACTION = 24;
+
     private JudgedAnswer() {
     }
 
     static Judgement of(AnswerOf stated, Claim claim, Truth truth) throws RefusedException {
         Answer answer = Answers.of(stated, truth);
         return switch (answer.standing()) {
-            case KNOWN -> between(answer.low(), answer.high(), stated.is(), claim, OptionalLong.empty(),
-                    answer.remarks());
+            case KNOWN -> told(between(answer.low(), answer.high(), stated.is(), claim, OptionalLong.empty(),
+                    answer.remarks()), answer);
             case NONE -> without(Verdict.WRONG, answer);
             case NOT_DECIDED -> without(Verdict.UNDECIDED, answer);
         };
@@ -43,6 +47,19 @@ final class JudgedAnswer {
         remarks.forEach(holding::remark);
         holding.hold(is, Quantity.of(value));
         return holding.judgement(texts -> texts.all().get(0), step);
+    }
+
+    /** With more of the true value than the digits of the author show, where it is known exactly. */
+    private static Judgement told(Judgement judgement, Answer answer) {
+        boolean isKnown = answer.low().equals(answer.high()) && !answer.low().isInteger();
+        return judgement.verdict() == Verdict.WRONG && isKnown ? judgement.remarking(inFull(answer.low())) : judgement;
+    }
+
+    private static String inFull(Rational value) {
+        String fraction = value.toString();
+        String decimals = Decimals.of(value, DIGITS).text();
+        return fraction.length() > LONGEST_FRACTION ? "the true value is about " + decimals
+                : "the true value is " + fraction + ", about " + decimals;
     }
 
     /** That nothing between the two is what is stated isn't known of a number that is both. */

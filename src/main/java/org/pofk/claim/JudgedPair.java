@@ -78,7 +78,10 @@ final class JudgedPair {
         amplitude.ifPresent(a -> hold("amplitude", a, isOpposite ? size.negate() : size));
         Quantity right = meant.isMirrored ? meant.pole.phase(0).negate() : meant.pole.phase(0);
         Quantity turned = isOpposite ? right.plus(Quantity.pi()) : right;
-        phase.ifPresent(p -> hold("phase", p, Angles.phaseLike(p.value(), turned)));
+        phase.ifPresent(p -> {
+            names.add("phase");
+            holding.hold(new Held(p, Angles.phaseLike(p.value(), turned), Angles.near(turned, p.value())));
+        });
     }
 
     private Optional<StatedNumber> number(Optional<FormulaText> text) throws RefusedException {

@@ -3,6 +3,7 @@ package org.pofk.claim;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalLong;
+import java.util.stream.Stream;
 import org.pofk.exact.Decimal;
 import org.pofk.meaning.Fit;
 import org.pofk.meaning.Written;
@@ -40,6 +41,12 @@ public record Judgement(Verdict verdict, Optional<Difference> difference, Option
     /** The same where how far the numbers are off says nothing of how far the claim is. */
     Judgement withoutDifference() {
         return new Judgement(verdict, Optional.empty(), firstWrongStep, numbers, remarks, right);
+    }
+
+    /** The same with one more sentence. */
+    Judgement remarking(String sentence) {
+        return new Judgement(verdict, difference, firstWrongStep, numbers,
+                Stream.concat(remarks.stream(), Stream.of(sentence)).toList(), right);
     }
 
     public boolean isRight() {

@@ -41,8 +41,10 @@ final class RightText {
             int before = Math.max(0, text.text(node).indexOf(decimal.text()));
             int start = AuthorText.start(node) + before;
             int end = before > 0 ? start + decimal.text().length() : AuthorText.end(node);
-            replacements.add(new AuthorText.Replacement(start, end,
-                    right.startsWith("-") && start > 0 ? "(" + right + ")" : right));
+            replacements.add(SignBefore.of(text.text(), start, end).filter(sign -> right.startsWith("-"))
+                    .map(sign -> sign.turned(text.text(), start, end, right.substring(1)))
+                    .orElse(new AuthorText.Replacement(start, end,
+                            right.startsWith("-") && start > 0 ? "(" + right + ")" : right)));
         }));
         return replacements.size() == decimals.size() ? text.with(replacements).map(FormulaText::text)
                 : Optional.empty();

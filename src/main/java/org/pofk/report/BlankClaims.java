@@ -2,6 +2,7 @@ package org.pofk.report;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
 import java.util.stream.Collectors;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
@@ -99,6 +100,13 @@ public final class BlankClaims {
                 .reduce((first, last) -> last).map(Yaml::name).orElse(GAP);
     }
 
+    /** A set within which the output varies; a single state leaves nothing to ask. */
+    private String given(Output output) {
+        return states().sets().entrySet().stream().filter(set -> set.getValue().stream()
+                .map(output.coefficients()::get).distinct().count() > 1)
+                .map(Map.Entry::getKey).findFirst().map(Yaml::name).orElse(GAP);
+    }
+
     /** A claim with one number, or one formula, for each state. */
     private void byState(String claim) {
         open("- " + claim);
@@ -132,7 +140,8 @@ public final class BlankClaims {
                 new Step("{long run: " + of + ", is: " + GAP + "}", "or none, or are: [" + GAP + ", " + GAP
                         + "] for a cycle"),
                 new Step("{value: " + of + ", at: 5, is: " + GAP + "}", "an estimate: within: 2%, safe side: above"),
-                new Step("{value: " + of + ", given: " + set() + ", at: 5, is: " + GAP + "}", "given that set then"),
+                new Step("{value: " + of + ", given: " + given(output) + ", at: 5, is: " + GAP + "}",
+                        "given a set of several states then"),
                 new Step("{bound: " + of + ", at most: " + GAP + "}", "or at least; for: k >= 0"),
                 new Step("{settling step: " + of + ", within: 1%, is: " + GAP + "}", "of the long run, for ever"),
                 new Step("{sum: " + of + ", to: 12, is: " + GAP + "}", "of k = 0 to 12; from: 1 to begin later"),

@@ -5,6 +5,7 @@ import java.util.List;
 import org.pofk.claim.AnswerOf;
 import org.pofk.claim.Claim;
 import org.pofk.claim.FormulaText;
+import org.pofk.claim.FoundAndRight;
 import org.pofk.claim.Judgement;
 import org.pofk.claim.Judgement.JudgedNumber;
 import org.pofk.claim.Statement;
@@ -104,17 +105,21 @@ final class FindingBlocks {
                 .filter(number -> number.fit() == Fit.WRONG).toList();
         if (wrong.size() > MARKED_AT_MOST) {
             blocks.add(new Table(Prose.EMPTY, List.of(Prose.of("found"), Prose.of("right"), Prose.of("place")),
-                    wrong.stream().map(number -> List.of(Prose.name(number.written().text()),
-                            Prose.name(number.right()),
+                    wrong.stream().map(number -> List.of(Prose.name(shown(number).found()),
+                            Prose.name(shown(number).right()),
                             Prose.of(place(number.written().span())))).toList()));
             return;
         }
         for (JudgedNumber number : wrong) {
             blocks.add(new Paragraph("A number is wrong, " + place(number.written().span())));
             blocks.add(text.excerpt(number.written().span(), finding.claim()));
-            blocks.add(new Labelled("found", Prose.name(number.written().text())));
-            blocks.add(new Labelled("right", Prose.name(number.right())));
+            blocks.add(new Labelled("found", Prose.name(shown(number).found())));
+            blocks.add(new Labelled("right", Prose.name(shown(number).right())));
         }
+    }
+
+    private FoundAndRight shown(JudgedNumber number) {
+        return FoundAndRight.of(number, StatedFormulas.of(finding.claim().statement()));
     }
 
     private static String place(Span span) {

@@ -3,6 +3,7 @@ package org.pofk.report;
 import java.math.BigDecimal;
 import java.util.Locale;
 import java.util.Optional;
+import org.pofk.claim.AnswerOf;
 import org.pofk.claim.Claim;
 import org.pofk.claim.Claim.SafeSide;
 import org.pofk.claim.Claim.Within;
@@ -82,14 +83,20 @@ final class VerdictProse {
         boolean isOverSteps = finding.claim().statement() instanceof Statement.PofK;
         return finding.judgement().difference().filter(difference -> finding.verdict() != Verdict.EXACT)
                 .filter(difference -> new BigDecimal(difference.size().text()).signum() != 0)
-                .map(difference -> size(difference) + (!isOverSteps ? ""
+                .map(difference -> size(difference, unit(finding.claim().statement(), difference)) + (!isOverSteps ? ""
                         : difference.at().isPresent() ? ", at " + step(difference.at().getAsLong())
                         : ", approached as k grows"));
     }
 
+    /** Steps, where it is steps that were counted. */
+    private static String unit(Statement statement, Judgement.Difference difference) {
+        boolean isInSteps = statement instanceof AnswerOf.SettlingStep || statement instanceof AnswerOf.MeanPassage;
+        return !isInSteps ? "" : Spelling.NO_BREAK + (difference.size().text().equals("1") ? "step" : "steps");
+    }
+
     /** {@code 2.1e-4}, or {@code 1.3 %} of the true value. */
-    private static String size(Judgement.Difference difference) {
+    private static String size(Judgement.Difference difference, String unit) {
         String size = difference.size().text();
-        return difference.relative() ? new BigDecimal(size).movePointRight(2).toPlainString() + " %" : size;
+        return difference.relative() ? new BigDecimal(size).movePointRight(2).toPlainString() + " %" : size + unit;
     }
 }

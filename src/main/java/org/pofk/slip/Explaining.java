@@ -12,6 +12,7 @@ import org.pofk.claim.FormulaText;
 import org.pofk.claim.Judgement;
 import org.pofk.claim.Judging;
 import org.pofk.claim.Truth;
+import org.pofk.formula.Formula;
 
 /**
  * Finds the slips that explain one wrong claim: every candidate that isn't refuted at a few points is judged as the
@@ -128,7 +129,7 @@ final class Explaining {
             several = new Pairs(texts, screens, changes, budget).found().stream().limit(MOST_PAIRS)
                     .filter(pair -> candidate(pair).filter(this::isRight).isPresent()).findFirst();
         }
-        if (several.isEmpty()) {
+        if (several.filter(chosen -> !replacesEveryNumber(chosen)).isEmpty()) {
             return new Explanation(List.of(), false, List.of(), Optional.of(Rest.of(claim, judgement, truth)));
         }
         List<Change> all = several.get();
@@ -136,6 +137,17 @@ final class Explaining {
         List<Slip> slips = all.stream().map(change -> new Slip(change.kind(), change.span(), change.found(),
                 change.right(), whole.corrected().get())).toList();
         return new Explanation(slips, true, List.of(), Optional.empty());
+    }
+
+    /** Other numbers in all places explain nothing: any claim comes right by them. */
+    private boolean replacesEveryNumber(List<Change> chosen) {
+        return chosen.stream().allMatch(change -> change.kind() == SlipKind.WRONG_COEFFICIENT
+                || change.kind() == SlipKind.WRONG_POLE)
+                && parts.stream().flatMap(part -> part.text().parsed().nodes())
+                .filter(node -> node.formula() instanceof Formula.WrittenDecimal
+                        || node.formula() instanceof Formula.Number)
+                .allMatch(node -> chosen.stream().anyMatch(change -> change.span().start().compareTo(node.span().start()) <= 0
+                        && node.span().end().compareTo(change.span().end()) <= 0));
     }
 
     /** The simplest change of each wrong part that makes this part right. */

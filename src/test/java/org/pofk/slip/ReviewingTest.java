@@ -133,6 +133,22 @@ class ReviewingTest {
     }
 
     @Test
+    void otherNumbersInAllPlacesExplainNothing() {
+        Finding finding = reviewed("pump-pair", "{long run: all, are: {both: 0.7311, one: 0.2277, none: 0.0412}}")
+                .findings().get(0);
+        assertEquals(Verdict.WRONG, finding.verdict());
+        assertEquals(List.of(), finding.slips());
+        assertTrue(finding.rest().isPresent());
+    }
+
+    @Test
+    void aRightNumberBelowZeroTurnsTheSignBeforeIt() {
+        String right = reviewed("pump-pair", "{formula: lost, is: '0.018176 + 0.11726*0.5508^k + 0.209084*0.3317^k'}")
+                .findings().get(0).judgement().right();
+        assertTrue(right.contains(" - 0.01") && !right.contains("(-"), right);
+    }
+
+    @Test
     void aFormulaFromAWrongTransformIsCarriedAndSoIsItsLongRun() {
         List<Finding> findings = reviewed("pump-pair", "{transform: lost, is: 'z*(0.0025 z + 0.0095)/((z-1)*(z^2-0.6825 z+0.10445))'}",
                 "{formula: lost, is: '0.02844 - 0.08832*0.4508^k + 0.05988*0.2317^k'}",
