@@ -3,6 +3,7 @@ package org.pofk.report;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.stream.Collectors;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
@@ -101,10 +102,10 @@ public final class BlankClaims {
     }
 
     /** A set within which the output varies; a single state leaves nothing to ask. */
-    private String given(Output output) {
+    private Optional<String> given(Output output) {
         return states().sets().entrySet().stream().filter(set -> set.getValue().stream()
                 .map(output.coefficients()::get).distinct().count() > 1)
-                .map(Map.Entry::getKey).findFirst().map(Yaml::name).orElse(GAP);
+                .map(Map.Entry::getKey).findFirst().map(Yaml::name);
     }
 
     /** A claim with one number, or one formula, for each state. */
@@ -130,7 +131,7 @@ public final class BlankClaims {
         says("About " + output.name().replaceAll("\\s+", " ")
                 + (outputs().size() < Outputs.byDefault(states()).size() ? ", and likewise about any other state" : ""));
         String formula = ", is: '" + GAP + "'}";
-        aligned(List.of(
+        List<Step> steps = new ArrayList<>(List.of(
                 new Step("{transform: " + of + formula, "Y(z), in any form"),
                 new Step("{transform over z: " + of + formula, "Y(z)/z"),
                 new Step("{expansion: " + of + formula, "Y(z) as a sum of partial fractions"),
@@ -140,14 +141,20 @@ public final class BlankClaims {
                 new Step("{long run: " + of + ", is: " + GAP + "}", "or none, or are: [" + GAP + ", " + GAP
                         + "] for a cycle"),
                 new Step("{value: " + of + ", at: 5, is: " + GAP + "}", "an estimate: within: 2%, safe side: above"),
-                new Step("{value: " + of + ", given: " + given(output) + ", at: 5, is: " + GAP + "}",
-                        "given a set of several states then"),
                 new Step("{bound: " + of + ", at most: " + GAP + "}", "or at least; for: k >= 0"),
                 new Step("{settling step: " + of + ", within: 1%, is: " + GAP + "}", "of the long run, for ever"),
                 new Step("{sum: " + of + ", to: 12, is: " + GAP + "}", "of k = 0 to 12; from: 1 to begin later"),
                 new Step("{mean: " + of + ", from: 1, to: 12, is: " + GAP + "}", "over these steps, both counted")));
+        Optional<String> given = given(output);
+        given.ifPresent(set -> steps.add(new Step("{value: " + of + ", given: " + set + ", at: 5, is: " + GAP + "}",
+                "given that set then")));
+        aligned(steps);
         open("- {pair: " + of + ", radius: " + GAP + ", angle: " + GAP + ", amplitude: " + GAP + ", phase: " + GAP
                 + "}");
+        if (states().sets().isEmpty()) {
+            says("A value given a set then, as given: up, needs one of several states in the model,");
+            says("as sets: {up: {not: down}}");
+        }
     }
 
     /** A claim on one line and what helps to fill it in. */
