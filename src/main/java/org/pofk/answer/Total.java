@@ -20,7 +20,8 @@ import org.pofk.transform.Transforms;
  * @param summed    the recursion whose outputs these are
  * @param step      what step k adds
  * @param total     what was added by the end of step k
- * @param averages  total(k)/(k+1) at the steps asked for: for a state or a set the share of time spent there
+ * @param averages  total(k) over how many steps count up to k, at the steps asked for: k + 1, for a state or a set the share
+ *                  of time spent there; for entries k, and none at k = 0
  */
 public record Total(Increment increment, Rational factor, SummedChain summed, DerivedOutput step, DerivedOutput total,
         Growth growth, List<StepValue> averages) {
@@ -44,7 +45,8 @@ public record Total(Increment increment, Rational factor, SummedChain summed, De
         List<List<StepValue>> values = StepValues.of(summed.recursion(), forms, steps);
         return new Total(increment, factor, summed, derived(forms.get(0), ofStep, values.get(0)),
                 derived(forms.get(1), growth.longRun(), values.get(1)), growth,
-                values.get(1).stream().map(Total::average).toList());
+                values.get(1).stream().filter(value -> counted(increment, value) > 0)
+                        .map(value -> average(value, counted(increment, value))).toList());
     }
 
     private static DerivedOutput derived(ClosedForm form, LongRun longRun, List<StepValue> values) {
@@ -52,8 +54,13 @@ public record Total(Increment increment, Rational factor, SummedChain summed, De
                 .with(new LongRunChecks(longRun, Optional.empty(), Optional.empty(), BigInteger.ONE));
     }
 
-    private static StepValue average(StepValue total) {
-        Rational share = Rational.of(1, total.k() + 1);
+    /** Steps that add something up to k: entries are made in the steps 1 … k. */
+    private static long counted(Increment increment, StepValue total) {
+        return increment.kind() == Increment.Kind.ENTRIES ? total.k() : total.k() + 1L;
+    }
+
+    private static StepValue average(StepValue total, long steps) {
+        Rational share = Rational.of(1, steps);
         return new StepValue(total.k(), total.exact().map(share::times),
                 total.enclosure().times(Enclosed.of(share)));
     }

@@ -49,6 +49,9 @@ public final class GivenProse {
         if (possible.always()) {
             return "at every step k";
         }
+        if (!possible.steps().contains(true)) {
+            return "at no step k: what is given has probability zero at every one";
+        }
         List<String> parts = new ArrayList<>();
         if (!possible.impossibleBefore().isEmpty()) {
             parts.add("at k = " + list(possible.impossibleBefore()));

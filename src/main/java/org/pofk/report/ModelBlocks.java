@@ -19,7 +19,7 @@ import org.pofk.report.Document.Labelled;
 import org.pofk.report.Document.Paragraph;
 import org.pofk.report.Document.Table;
 
-/** What was modelled, as its author wrote it: states, moves, parameters, sources, assumptions, and what is open. */
+/** What was modelled, as its author wrote it: states, moves, costs, parameters, sources, assumptions, and what is open. */
 final class ModelBlocks {
     static final Heading TITLE = new Heading(2, "What was modelled");
     private static final int STATES_LISTED_UP_TO = 40;
@@ -48,6 +48,7 @@ final class ModelBlocks {
         blocks.add(TITLE);
         states();
         blocks.addAll(MoveBlocks.of(model));
+        blocks.addAll(CostBlocks.of(model));
         parameters();
         outputs();
         notes();

@@ -69,14 +69,19 @@ final class OtherSources {
         return rest;
     }
 
+    /** Amounts by state, those that aren't zero. */
+    private List<Prose> inStates(List<Rational> amounts) {
+        return IntStream.range(0, amounts.size()).filter(i -> !amounts.get(i).isZero())
+                .mapToObj(i -> Prose.of(amounts.get(i) + " in ").andName(model.chain().states().get(i))).toList();
+    }
+
     private List<Prose> costs(Costs costs) {
         List<Prose> open = new ArrayList<>();
         if (sourced.contains(Place.of(Part.COSTS))) {
             return open;
         }
         List<String> states = model.chain().states();
-        List<Prose> eachStep = IntStream.range(0, states.size()).filter(i -> !costs.eachStep().get(i).isZero())
-                .mapToObj(i -> Prose.of(costs.eachStep().get(i) + " in ").andName(states.get(i))).toList();
+        List<Prose> eachStep = inStates(costs.eachStep());
         if (!eachStep.isEmpty() && !sourced.contains(Place.of(Part.COSTS_OF_EACH_STEP))) {
             open.add(Prose.of("costs of each step: ").and(Prose.joined(eachStep, ", ")));
         }
@@ -85,6 +90,12 @@ final class OtherSources {
                     Prose.of(move.cost() + " from ").andName(states.get(move.from())).and(" to ")
                             .andName(states.get(move.to()))).toList(), ", ")));
         }
+        costs.actions().forEach(each -> {
+            List<Prose> inState = inStates(each.inState());
+            if (!inState.isEmpty() && !sourced.contains(Place.named("costs of each " + each.action()))) {
+                open.add(Prose.of("costs of each ").andName(each.action()).and(": ").and(Prose.joined(inState, ", ")));
+            }
+        });
         if (!costs.atStart().isZero() && !sourced.contains(Place.of(Part.COSTS_AT_START))) {
             open.add(Prose.of("costs at the start: " + costs.atStart()));
         }

@@ -180,7 +180,7 @@ public final class PassageDocument {
 
     private void fromEach() {
         blocks.add(new Table(Prose.of("From each state"),
-                List.of(Prose.of("from"), Prose.of("ever"), Prose.of("mean, given that")),
+                List.of(Prose.of("from"), Prose.of("ever"), Prose.of("mean steps, where it happens")),
                 IntStream.range(0, chain.size()).mapToObj(i -> List.of(Prose.name(chain.states().get(i)),
                         Prose.of(number(passage.fromEach().probabilities().get(i))),
                         Prose.of(passage.fromEach().means().get(i).map(this::number).orElse("–")))).toList()));

@@ -110,7 +110,7 @@ public final class ScheduledPassageDocument {
 
     private void fromEach(ScheduledPassage.OverCycles over) {
         blocks.add(new Table(Prose.of("From each state, started there at k = 0"),
-                List.of(Prose.of("from"), Prose.of("ever"), Prose.of("mean, given that")),
+                List.of(Prose.of("from"), Prose.of("ever"), Prose.of("mean steps, where it happens")),
                 IntStream.range(0, chain.size()).mapToObj(state -> List.of(Prose.name(chain.states().get(state)),
                         Prose.of(ValueText.of(over.fromEach().probabilities().get(state), style.digits())),
                         Prose.of(over.fromEach().means().get(state)

@@ -55,7 +55,7 @@ final class TotalBlocks {
         shown(total).forEach(output -> blocks.addAll(ResultBlocks.proved(output, OutputProse.atStep(output.output()),
                 "states and sums", style)));
         growth(total.growth());
-        if (!total.averages().isEmpty()) {
+        if (!total.total().values().isEmpty()) {
             blocks.add(values());
         }
     }
@@ -155,13 +155,15 @@ final class TotalBlocks {
             columns.add(total.averages());
         }
         return new Table(Prose.of("Totals of the steps 0 … k" + (total.increment().kind() == Kind.COSTS
-                ? ", in " + unit() : "")), header, IntStream.range(0, total.averages().size())
+                ? ", in " + unit() : "")), header, IntStream.range(0, total.total().values().size())
                 .mapToObj(row -> row(columns, row)).toList());
     }
 
     private List<Prose> row(List<List<StepValue>> columns, int row) {
         List<Prose> cells = new ArrayList<>(List.of(Prose.of(String.valueOf(columns.get(0).get(row).k()))));
-        columns.forEach(column -> cells.add(Prose.of(ValueText.of(column.get(row), style.digits()))));
+        int k = columns.get(0).get(row).k();
+        columns.forEach(column -> cells.add(Prose.of(column.stream().filter(value -> value.k() == k).findFirst()
+                .map(value -> ValueText.of(value, style.digits())).orElse("–"))));
         return cells;
     }
 }

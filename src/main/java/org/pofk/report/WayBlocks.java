@@ -88,7 +88,7 @@ final class WayBlocks {
                 + " them is a line of the table of transforms, and stands for a term in k.")));
         if (outputs.stream().flatMap(output -> output.closedForm().stream())
                 .anyMatch(form -> form.derivation().factors().stream().anyMatch(step -> !step.pairs().isEmpty()))) {
-            rule.add(new Paragraph("A complex pole λ comes with its conjugate, its coefficient R with that of R. The two"
+            rule.add(new Paragraph("A complex pole λ comes with its conjugate conj(λ), its coefficient R with conj(R). The two"
                     + " terms join: R λ^k + conj(R) conj(λ)^k = 2|R| |λ|^k cos(k arg λ + arg R), where the sign of arg R"
                     + " is that of the imaginary part of R."));
         }

@@ -26,6 +26,20 @@ class TotalTest {
     private static final int CHAINS = 60;
     private static final int STEPS = 24;
 
+    /** Random chains; no step before the first can be entered in, so k = 0 has no average. */
+    @Test
+    void entriesAreAveragedOverTheStepsInWhichTheyAreMade() {
+        RandomChains chains = new RandomChains(SEED);
+        for (int i = 0; i < CHAINS; i++) {
+            Chain chain = chains.next();
+            Increment entries = Increment.ofEntries(chain, Outputs.states(chain).get(0));
+            Total total = Total.of(chain, entries, List.of(0, 1, STEPS));
+            assertEquals(List.of(1, STEPS), total.averages().stream().map(StepValue::k).toList());
+            assertEquals(Optional.of(valueAt(total.total(), STEPS).dividedBy(Rational.of(STEPS))),
+                    total.averages().get(1).exact());
+        }
+    }
+
     /** Random chains and costs, some discounted; added up move by move. */
     @Test
     void theTotalIsWhatSteppingAddsUpAtEveryStep() {
