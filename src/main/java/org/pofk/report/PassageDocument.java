@@ -2,6 +2,7 @@ package org.pofk.report;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.stream.Collectors;
 import java.util.stream.IntStream;
 import org.pofk.answer.DerivedOutput;
 import org.pofk.answer.Passage;
@@ -66,7 +67,13 @@ public final class PassageDocument {
         return moments.probability().isZero() ? "never: it can't be reached from there"
                 : (moments.isCertain() ? "certain" : "with probability " + number(moments.probability())
                         + "; given that it happens") + ", after " + number(moments.mean().orElseThrow())
-                        + " steps in the mean";
+                        + " steps in the mean" + percentilesInBrief();
+    }
+
+    /** Those reached; the others have their reason in the section. */
+    private String percentilesInBrief() {
+        return passage.percentiles().stream().filter(each -> each.k().isPresent())
+                .map(each -> "; " + percent(each.p()) + " by k = " + each.k().getAsInt()).collect(Collectors.joining());
     }
 
     private void write() {

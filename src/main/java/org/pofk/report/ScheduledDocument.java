@@ -281,8 +281,9 @@ public final class ScheduledDocument {
                 + "), " + switch (proof.method()) {
                     case CHARACTERISTIC -> "the sequence in m needs a recurrence of order " + order + ", and " + states
                             + ", so it is their characteristic polynomial (Cayley–Hamilton)";
-                    case WINDOWS -> "the " + proof.comparedSteps() + " exact terms compared satisfy a recurrence of"
-                            + " order " + order + ", and " + states + " (Cayley–Hamilton)";
+                    case WINDOWS -> (proof.comparedSteps() == 1 ? "the one exact term compared satisfies"
+                            : "the " + proof.comparedSteps() + " exact terms compared satisfy") + " a recurrence of order "
+                            + order + ", and " + states + " (Cayley–Hamilton)";
                     case VECTOR -> "a recurrence of order " + order + " annihilates the state where cycles begin, and"
                             + " so every output at every step of the cycle";
                 });
