@@ -21,13 +21,14 @@ final class Constraint {
     private static final int BITS_A_DIGIT = 4;
     private static final int[] CLOSER_BITS = {512, 2_048, 8_192};
     private static final long EXACT_UP_TO = 20_000;
-    private static final long UNDECIDED_SEARCHED_UP_TO = 1_000_000;
+    private static final long UNDECIDED_SEARCHED_UP_TO = EXACT_UP_TO;
 
     private final Chain chain;
     private final ClosedForm form;
     private final List<Rational> limits;
     private final Function<Rational, Band> aroundLimit;
     private final int digits;
+    private final ClassForms classForms;
     private final DecayingSum sum;
     private final long firstWithoutImpulses;
     private Optional<Rational> unit = Optional.empty();
@@ -40,6 +41,7 @@ final class Constraint {
         this.form = form;
         this.limits = limits;
         this.aroundLimit = aroundLimit;
+        this.classForms = new ClassForms(chain, form);
         this.digits = digits();
         this.sum = DecayingSum.of(form, bits());
         this.firstWithoutImpulses = form.withoutImpulsesFrom();
@@ -83,7 +85,7 @@ final class Constraint {
         return aroundLimit.apply(limit(residue));
     }
 
-    Ending ending(long residue) throws TooMuchWorkException {
+    Ending ending(long residue, long modulus) throws TooMuchWorkException {
         Band band = band(residue);
         if (!band.distanceFromZero().isZero()) {
             BigInteger from = DecayBound.of(DecayingMode.of(form), digits)
@@ -93,15 +95,20 @@ final class Constraint {
             }
             return new Ending(band.contains(Rational.ZERO) ? End.MET : End.FAILED, from.longValueExact());
         }
-        EventualSign sign = EventualSign.of(form, (int) (residue % 2), firstWithoutImpulses);
-        boolean below = band.low().isEmpty();
-        return switch (sign.kind()) {
-            case ZERO -> new Ending(End.MET, firstWithoutImpulses);
-            case POSITIVE -> new Ending(below ? End.FAILED : End.MET, sign.from());
-            case NEGATIVE -> new Ending(below ? End.MET : End.FAILED, sign.from());
-            case BOTH_FOR_EVER -> new Ending(End.BOTH_FOR_EVER, firstWithoutImpulses);
-            case UNDECIDED -> new Ending(End.APPROACH_NOT_DECIDED, UNDECIDED_SEARCHED_UP_TO);
+        Optional<EventualSign> sign = classForms.of(residue, modulus).map(EventualSign::of);
+        long from = sign.map(known -> residue + modulus * known.from()).orElse(0L);
+        return switch (sign.map(EventualSign::kind).orElse(EventualSign.Kind.UNDECIDED)) {
+            case ZERO -> new Ending(End.MET, from);
+            case POSITIVE -> new Ending(band.high().isPresent() ? End.FAILED : End.MET, from);
+            case NEGATIVE -> new Ending(band.low().isPresent() ? End.FAILED : End.MET, from);
+            case BOTH_FOR_EVER -> band.low().isPresent() && band.high().isPresent() ? undecided()
+                    : new Ending(End.BOTH_FOR_EVER, from);
+            case UNDECIDED -> undecided();
         };
+    }
+
+    private static Ending undecided() {
+        return new Ending(End.APPROACH_NOT_DECIDED, UNDECIDED_SEARCHED_UP_TO);
     }
 
     /** At all steps low, low + modulus, … high of a class. */

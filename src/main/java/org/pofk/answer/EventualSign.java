@@ -11,11 +11,11 @@ import org.pofk.modes.ClosedForm;
 import org.pofk.modes.Mode;
 
 /**
- * On which side of its limit a sum of decaying modes stays in the end, on the steps of one parity. Decided where one
- * real mode outlasts all others, or a real pole and its negative, or one conjugate pair, whose cosine then takes both
- * signs for ever; in general this is the positivity problem for linear recurrences, open from order six on (Ouaknine
- * and Worrell 2014, from memory). Moduli that agree to {@value Settling#TIED_BITS} bits and aren't known to be equal
- * are left undecided. Certified.
+ * On which side of its limit a sum of decaying modes stays in the end. Decided where one real mode outlasts all others,
+ * or one conjugate pair, whose cosine takes both signs for ever, as its angle is no multiple of π; in general this is
+ * the positivity problem for linear recurrences, open from order six on (Ouaknine and Worrell 2014, from memory).
+ * Moduli that agree to {@value Settling#TIED_BITS} bits are left undecided; poles with a power in common become one
+ * where every so many steps are looked at. Certified.
  *
  * @param from for {@code POSITIVE} and {@code NEGATIVE}, a step from which the sign is kept
  */
@@ -26,22 +26,23 @@ record EventualSign(Kind kind, long from) {
     /** {@code ZERO}: nothing decays. */
     enum Kind { POSITIVE, NEGATIVE, BOTH_FOR_EVER, ZERO, UNDECIDED }
 
-    static EventualSign of(ClosedForm closedForm, int parity, long atLeast) {
+    static EventualSign of(ClosedForm closedForm) {
+        long atLeast = closedForm.withoutImpulsesFrom();
         List<Mode> modes = DecayingMode.decaying(closedForm);
         if (modes.isEmpty()) {
             return new EventualSign(Kind.ZERO, atLeast);
         }
-        List<Weight> weights = modes.stream().map(mode -> Weight.of(closedForm, mode, parity)).toList();
+        List<Weight> weights = modes.stream().map(mode -> Weight.of(closedForm, mode)).toList();
         List<Weight> slowest = slowest(weights);
         int power = slowest.stream().mapToInt(Weight::power).max().orElseThrow();
         List<Weight> top = slowest.stream().filter(weight -> weight.power == power).toList();
-        if (top.size() == 1 && top.get(0).oscillates) {
-            return onePole(slowest) ? new EventualSign(Kind.BOTH_FOR_EVER, 0) : undecided();
-        }
-        if (top.stream().anyMatch(weight -> weight.oscillates) || !onePoleUpToSign(slowest)) {
+        if (top.size() != 1) {
             return undecided();
         }
-        Ball sum = top.stream().map(weight -> weight.signed.enclose(BITS)).reduce(Ball::plus).orElseThrow();
+        if (top.get(0).swings) {
+            return onePole(slowest) ? new EventualSign(Kind.BOTH_FOR_EVER, atLeast) : undecided();
+        }
+        Ball sum = top.get(0).coefficient.enclose(BITS);
         OptionalInt sign = sum.sign();
         if (sign.isEmpty() || sign.getAsInt() == 0) {
             return undecided();
@@ -64,14 +65,6 @@ record EventualSign(Kind kind, long from) {
 
     private static boolean onePole(List<Weight> weights) {
         return weights.stream().map(weight -> weight.pole).distinct().count() == 1;
-    }
-
-    /** One real pole, or two that are proved to be each other's negatives. */
-    private static boolean onePoleUpToSign(List<Weight> weights) {
-        List<Weight> firsts = weights.stream().filter(weight -> weight.power == 0 || onePole(weights)).toList();
-        return onePole(weights) || firsts.size() == weights.size() && weights.size() == 2
-                && weights.stream().noneMatch(weight -> weight.oscillates)
-                && weights.get(0).isNegativeOf(weights.get(1));
     }
 
     /**
@@ -100,13 +93,11 @@ record EventualSign(Kind kind, long from) {
         return Optional.empty();
     }
 
-    /** A mode with what tells when it is outlasted; {@code signed} is its coefficient for the steps of the parity. */
-    private record Weight(Mode shape, DecayingMode mode, List<Integer> pole, int power, boolean oscillates,
-            Enclosed signed, Enclosed base, boolean inEvenFactor) {
+    /** A mode with what tells when it is outlasted; it swings where it takes both signs for ever. */
+    private record Weight(DecayingMode mode, List<Integer> pole, int power, boolean swings, Enclosed coefficient) {
 
-        static Weight of(ClosedForm form, Mode shape, int parity) {
+        static Weight of(ClosedForm form, Mode shape) {
             DecayingMode decay = DecayingMode.of(form, shape);
-            boolean even = isEven(form, shape.pole().get(0));
             return shape.accept(new Mode.Visitor<Weight>() {
                 @Override
                 public Weight impulse(Mode.Impulse impulse) {
@@ -115,40 +106,15 @@ record EventualSign(Kind kind, long from) {
 
                 @Override
                 public Weight geometric(Mode.Geometric mode) {
-                    boolean negative = mode.base().enclosure().enclose(BITS).isNegative()
-                            && Math.floorMod(parity - mode.power(), 2) == 1;
-                    Enclosed coefficient = mode.coefficient().enclosure();
-                    return new Weight(shape, decay, shape.pole(), mode.power(), false,
-                            negative ? coefficient.negate() : coefficient, mode.base().enclosure(), even);
+                    return new Weight(decay, shape.pole(), mode.power(),
+                            mode.base().enclosure().enclose(BITS).isNegative(), mode.coefficient().enclosure());
                 }
 
                 @Override
                 public Weight oscillating(Mode.Oscillating mode) {
-                    return new Weight(shape, decay, shape.pole(), mode.power(), true,
-                            mode.amplitude().enclosure(), mode.modulus().enclosure(), even);
+                    return new Weight(decay, shape.pole(), mode.power(), true, mode.amplitude().enclosure());
                 }
             });
-        }
-
-        /** Whether the factor is a polynomial in z², so that its real roots are pairs ±λ. */
-        private static boolean isEven(ClosedForm form, int factor) {
-            List<Rational> coefficients =
-                    form.transform().factors().factors().get(factor).polynomial().coefficients();
-            for (int i = 1; i < coefficients.size(); i += 2) {
-                if (!coefficients.get(i).isZero()) {
-                    return false;
-                }
-            }
-            return true;
-        }
-
-        /** Tied in modulus, of opposite sign, and roots of one even factor, or rational and opposite. */
-        boolean isNegativeOf(Weight other) {
-            if (pole.get(0).equals(other.pole.get(0))) {
-                return inEvenFactor;
-            }
-            Ball sum = base.enclose(BITS).plus(other.base.enclose(BITS));
-            return sum.isExact() && sum.containsZero();
         }
 
         /** The step from which binomial(k, q) s^(k−q) over binomial(k, p) r^(k−p) falls, this the p and r. */

@@ -116,9 +116,11 @@ public record Peak(StepValue value, Optional<Long> at) {
 
         /** Every class that tends to the highest limit stays below it in the end. */
         private boolean approachedFromBelow() {
+            ClassForms forms = new ClassForms(chain, form);
             for (long residue = 0; residue < modulus; residue++) {
                 if (limits.get((int) (residue % limits.size())).equals(longRun)) {
-                    EventualSign.Kind kind = EventualSign.of(form, (int) (residue % 2), form.withoutImpulsesFrom()).kind();
+                    EventualSign.Kind kind = forms.of(residue, modulus).map(each -> EventualSign.of(each).kind())
+                            .orElse(EventualSign.Kind.UNDECIDED);
                     if (kind != EventualSign.Kind.NEGATIVE && kind != EventualSign.Kind.ZERO) {
                         return false;
                     }

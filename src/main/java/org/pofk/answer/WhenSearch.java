@@ -67,7 +67,7 @@ final class WhenSearch {
     }
 
     private ResidueClass residueClass(Stretches steps) throws TooMuchWorkException {
-        Constraint.Ending ending = ending(steps.residue);
+        Constraint.Ending ending = ending(steps.residue, steps.modulus);
         long from = steps.atLeast(ending.from());
         Optional<Long> first = steps.first(0, from);
         return switch (ending.end()) {
@@ -88,13 +88,13 @@ final class WhenSearch {
     }
 
     /** How they end together: one that fails is enough, and of one that comes and goes the others must all be met. */
-    private Constraint.Ending ending(long residue) throws TooMuchWorkException {
+    private Constraint.Ending ending(long residue, long modulus) throws TooMuchWorkException {
         if (possible.ends) {
             return new Constraint.Ending(End.FAILED, possible.from);
         }
         Constraint.Ending together = new Constraint.Ending(End.MET, possible.from);
         for (Constraint constraint : constraints) {
-            Constraint.Ending own = constraint.ending(residue);
+            Constraint.Ending own = constraint.ending(residue, modulus);
             long from = Math.max(own.from(), together.from());
             if (own.end() == End.FAILED) {
                 return new Constraint.Ending(End.FAILED, from);
