@@ -137,8 +137,8 @@ final class YamlSyntax {
         while (above > 0 && (line(above).isBlank() || line(above).stripLeading().startsWith("#"))) {
             above--;
         }
-        Optional<Integer> item = Stream.of(above, at.line()).filter(line -> line(line).strip().matches("-\\p{L}.*:.*"))
-                .findFirst();
+        Optional<Integer> item = Stream.of(above, at.line())
+                .filter(line -> line > 0 && line(line).strip().matches("-\\p{L}.*:.*")).findFirst();
         if (item.isPresent()) {
             faults.add(new Position(source.name(), item.get(), indentation(item.get()) + 1), "missing-blank",
                     "a blank is missing after '-'");
