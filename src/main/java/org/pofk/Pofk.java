@@ -8,14 +8,14 @@ import org.pofk.answer.Deriving;
 import org.pofk.answer.Increment;
 import org.pofk.answer.InspectedModel;
 import org.pofk.answer.PowerModel;
-import org.pofk.answer.ScheduledModel;
-import org.pofk.answer.Scheduling;
 import org.pofk.answer.TotalModel;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
 import org.pofk.chain.Outputs;
 import org.pofk.input.ModelReader;
 import org.pofk.input.Overrides;
+import org.pofk.schedule.ScheduledModel;
+import org.pofk.schedule.Scheduling;
 import org.pofk.text.Position;
 import org.pofk.text.RefusedException;
 

@@ -8,9 +8,9 @@ import java.nio.file.Path;
 import java.util.List;
 import org.junit.jupiter.api.Test;
 import org.pofk.answer.DerivedModel;
-import org.pofk.answer.LongRun;
 import org.pofk.chain.Model;
 import org.pofk.exact.Rational;
+import org.pofk.longrun.LongRun;
 import org.pofk.text.RefusedException;
 
 class PofkTest {

@@ -6,10 +6,10 @@ import org.pofk.exact.Ball;
 import org.pofk.exact.Rational;
 
 /** The numbers from low to high, both included; open-ended where one is missing. Exact. */
-record Band(Optional<Rational> low, Optional<Rational> high) {
+public record Band(Optional<Rational> low, Optional<Rational> high) {
 
     /** How numbers lie to a band. */
-    enum Relation {
+    public enum Relation {
         INSIDE, OUTSIDE, EITHER;
 
         /** Inside both, outside one of them, or that isn't told. */
@@ -18,13 +18,13 @@ record Band(Optional<Rational> low, Optional<Rational> high) {
         }
     }
 
-    boolean contains(Rational value) {
+    public boolean contains(Rational value) {
         return low.stream().allMatch(bound -> bound.compareTo(value) <= 0)
                 && high.stream().allMatch(bound -> value.compareTo(bound) <= 0);
     }
 
     /** All numbers of a ball, none of them, or that isn't told. */
-    Relation of(Ball ball) {
+    public Relation of(Ball ball) {
         Rational lower = ball.lower();
         Rational upper = ball.upper();
         if (low.stream().anyMatch(bound -> upper.compareTo(bound) < 0)

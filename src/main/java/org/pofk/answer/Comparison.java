@@ -5,6 +5,11 @@ import java.util.Optional;
 import org.pofk.chain.Chain;
 import org.pofk.exact.Rational;
 import org.pofk.modes.ClosedForm;
+import org.pofk.steps.ClosedFormValues;
+import org.pofk.steps.DoubleSteps;
+import org.pofk.steps.ExactSteps;
+import org.pofk.steps.ModeValues;
+import org.pofk.steps.PowerSeries;
 import org.pofk.transform.Transform;
 
 /**

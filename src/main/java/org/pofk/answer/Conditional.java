@@ -2,6 +2,7 @@ package org.pofk.answer;
 
 import java.util.List;
 import java.util.Optional;
+import org.pofk.steps.StepValue;
 
 /**
  * One output given what is known at the same step: E[output at k, and known] over P(known at k), two closed forms with

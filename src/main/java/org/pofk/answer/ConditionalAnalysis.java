@@ -8,6 +8,7 @@ import java.util.function.Consumer;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
+import org.pofk.steps.PossibleSteps;
 
 /**
  * Puts a {@link ConditionalModel} together: numerators and denominator as outputs of one chain, and their quotient's

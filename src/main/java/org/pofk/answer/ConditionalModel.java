@@ -6,6 +6,7 @@ import java.util.Optional;
 import java.util.function.Consumer;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
+import org.pofk.steps.PossibleSteps;
 
 /**
  * Outputs of a model given what is known at the same step.

@@ -9,9 +9,12 @@ import org.pofk.answer.When.ResidueClass;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Output;
 import org.pofk.exact.Rational;
+import org.pofk.longrun.LongRun;
+import org.pofk.longrun.LongRunValues;
 import org.pofk.modes.ClosedForm;
 import org.pofk.modes.KnownPoles;
 import org.pofk.modes.RealValue;
+import org.pofk.steps.PossibleSteps;
 import org.pofk.transform.Transform;
 import org.pofk.transform.Transforms;
 

@@ -7,6 +7,9 @@ import org.pofk.exact.Enclosed;
 import org.pofk.exact.Rational;
 import org.pofk.modes.ClosedForm;
 import org.pofk.modes.OutermostPole;
+import org.pofk.steps.ModeValues;
+import org.pofk.steps.PossibleSteps;
+import org.pofk.steps.StepValue;
 
 /**
  * Quotients of two outputs' values, the second never negative: exact where both are, certified elsewhere, in units of

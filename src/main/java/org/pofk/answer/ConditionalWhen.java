@@ -11,6 +11,8 @@ import org.pofk.chain.Model;
 import org.pofk.chain.Output;
 import org.pofk.modes.ClosedForm;
 import org.pofk.modes.KnownPoles;
+import org.pofk.steps.PossibleSteps;
+import org.pofk.steps.StepValues;
 import org.pofk.transform.Transforms;
 
 /**

@@ -7,6 +7,10 @@ import java.util.function.Function;
 import org.pofk.answer.When.End;
 import org.pofk.chain.Chain;
 import org.pofk.exact.Rational;
+import org.pofk.longrun.DecayBound;
+import org.pofk.longrun.DecayingMode;
+import org.pofk.longrun.DecayingSum;
+import org.pofk.longrun.EventualSign;
 import org.pofk.modes.ClosedForm;
 import org.pofk.transform.Sequence;
 

@@ -3,7 +3,9 @@ package org.pofk.answer;
 import java.util.List;
 import java.util.Optional;
 import org.pofk.chain.Output;
+import org.pofk.longrun.LongRunChecks;
 import org.pofk.modes.ClosedForm;
+import org.pofk.steps.StepValue;
 import org.pofk.transform.Transform;
 
 /**

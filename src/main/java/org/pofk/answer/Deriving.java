@@ -8,9 +8,12 @@ import java.util.function.Consumer;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
 import org.pofk.chain.Structure;
+import org.pofk.longrun.LongRunChecks;
 import org.pofk.modes.ClosedForm;
 import org.pofk.modes.KnownPoles;
 import org.pofk.modes.StateModes;
+import org.pofk.steps.StepValue;
+import org.pofk.steps.StepValues;
 import org.pofk.transform.Transform;
 import org.pofk.transform.Transforms;
 

@@ -10,7 +10,7 @@ import org.pofk.chain.SparseMatrix;
 import org.pofk.exact.Guess;
 
 /** The eigenvalues of a matrix as Commons Math finds them in doubles. Approximate; n³ steps. */
-final class Eigenvalues {
+public final class Eigenvalues {
     private Eigenvalues() {
     }
 
@@ -27,7 +27,7 @@ final class Eigenvalues {
     }
 
     /** As guesses at poles: none for large matrices or where the iteration doesn't converge. */
-    static List<Guess> guesses(SparseMatrix matrix) {
+    public static List<Guess> guesses(SparseMatrix matrix) {
         if (matrix.size() > PoleCheck.STATES_AT_MOST) {
             return List.of();
         }

@@ -11,6 +11,8 @@ import org.pofk.chain.Chain;
 import org.pofk.chain.Reach;
 import org.pofk.chain.SparseMatrix;
 import org.pofk.exact.Rational;
+import org.pofk.longrun.LinearEquations;
+import org.pofk.longrun.StationaryDistribution;
 
 /**
  * From each state: the probability of ever entering a set before those to be avoided, and the mean step of doing so
@@ -52,7 +54,7 @@ public record FirstEntrance(List<Rational> probabilities, List<Optional<Rational
      * The states outside both sets from which the first can be reached without passing the second: from the others it
      * never is, and without them I − Q is invertible.
      */
-    static List<Integer> open(SparseMatrix matrix, Collection<Integer> into, Collection<Integer> avoiding) {
+    public static List<Integer> open(SparseMatrix matrix, Collection<Integer> into, Collection<Integer> avoiding) {
         List<List<SparseMatrix.Entry>> columns = new ArrayList<>();
         for (int state = 0; state < matrix.size(); state++) {
             columns.add(avoiding.contains(state) || into.contains(state) ? List.of() : matrix.columns().get(state));
@@ -64,7 +66,7 @@ public record FirstEntrance(List<Rational> probabilities, List<Optional<Rational
     }
 
     /** I − Qᵀ on these states: row j says where j moves to. */
-    static SparseMatrix identityMinusTransposed(SparseMatrix matrix, List<Integer> states,
+    public static SparseMatrix identityMinusTransposed(SparseMatrix matrix, List<Integer> states,
             Map<Integer, Integer> place) {
         List<List<SparseMatrix.Entry>> columns = new ArrayList<>();
         states.forEach(state -> columns.add(new ArrayList<>()));

@@ -10,6 +10,7 @@ import org.pofk.chain.Chain;
 import org.pofk.chain.Output;
 import org.pofk.chain.SparseMatrix;
 import org.pofk.exact.Rational;
+import org.pofk.steps.ExactSteps;
 
 /**
  * What is known of a chain at a step: the state lies in a set, and other states have not been entered up to then. The

@@ -7,6 +7,9 @@ import org.pofk.chain.Structure;
 import org.pofk.exact.Factoring;
 import org.pofk.exact.Polynomial;
 import org.pofk.exact.Rational;
+import org.pofk.longrun.LongRun;
+import org.pofk.longrun.LongRunByPoles;
+import org.pofk.longrun.LongRunValues;
 import org.pofk.transform.TransferFunction;
 
 /**
@@ -36,7 +39,7 @@ public record Growth(Rational perStep, LongRun beyond) {
      * @param step  what a step adds in the long run
      * @param total the transform of the total
      */
-    static Growth of(Chain chain, LongRun step, TransferFunction<Rational> total) {
+    public static Growth of(Chain chain, LongRun step, TransferFunction<Rational> total) {
         Rational perStep = Average.of(step).orElse(Rational.ZERO);
         TransferFunction<Rational> beyond = without(perStep, total);
         return new Growth(perStep, chain.kind() == Chain.Kind.CHAIN
@@ -57,7 +60,7 @@ public record Growth(Rational perStep, LongRun beyond) {
 
     /** What the averages of a sequence tend to. */
     private static final class Average implements LongRun.Visitor<Optional<Rational>> {
-        static Optional<Rational> of(LongRun longRun) {
+        public static Optional<Rational> of(LongRun longRun) {
             return longRun.accept(new Average());
         }
 

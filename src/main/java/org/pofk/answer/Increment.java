@@ -89,7 +89,7 @@ public record Increment(Kind kind, String name, String definition, List<Rational
         return new Increment(Kind.COSTS, "costs", "costs", costs.eachStep(), byMove, costs.atStart(), Rational.ZERO);
     }
 
-    static List<Rational> zeros(int size) {
+    public static List<Rational> zeros(int size) {
         return new ArrayList<>(Collections.nCopies(size, Rational.ZERO));
     }
 }

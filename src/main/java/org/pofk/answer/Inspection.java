@@ -5,6 +5,7 @@ import java.util.Optional;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
 import org.pofk.chain.Structure;
+import org.pofk.longrun.RecursionPoles;
 
 /**
  * A model as a reviewer looks at it before any formula: its structure, and what one would ask its author.

@@ -2,6 +2,8 @@ package org.pofk.answer;
 
 import java.util.Optional;
 import org.pofk.chain.Chain;
+import org.pofk.longrun.LongRun;
+import org.pofk.longrun.Settling;
 
 /**
  * What is said of an output besides its formula and long run on a page that has room for little. Certified.

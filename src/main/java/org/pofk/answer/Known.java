@@ -4,6 +4,7 @@ import java.util.Optional;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
 import org.pofk.exact.Rational;
+import org.pofk.steps.ExactSteps;
 
 /**
  * A model seen from a step at which something is known: its start is the state then, and k counts the steps from there.

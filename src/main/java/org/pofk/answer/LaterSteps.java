@@ -6,6 +6,9 @@ import java.util.SortedSet;
 import java.util.TreeSet;
 import java.util.stream.IntStream;
 import java.util.stream.Stream;
+import org.pofk.longrun.Settling;
+import org.pofk.steps.StepValue;
+import org.pofk.steps.StepValues;
 
 /**
  * Steps at which something is to be seen of outputs that settle long after those listed: where each is highest, and

@@ -5,6 +5,7 @@ import java.util.Optional;
 import java.util.Set;
 import org.pofk.chain.Chain;
 import org.pofk.exact.Rational;
+import org.pofk.longrun.Settling;
 
 /**
  * How long until a set of states is first entered: T = min{k ≥ 0: x(k) in the set}, so a start inside it gives 0.

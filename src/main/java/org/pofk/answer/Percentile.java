@@ -9,6 +9,7 @@ import org.pofk.exact.Enclosed;
 import org.pofk.exact.Polynomial;
 import org.pofk.exact.Rational;
 import org.pofk.modes.ClosedForm;
+import org.pofk.steps.ModeValues;
 import org.pofk.transform.Sequence;
 
 /**
@@ -24,7 +25,7 @@ public record Percentile(Rational p, OptionalInt k, Optional<Reason> reason) {
     public enum Reason { NEVER, BEYOND_TWO_BILLION_STEPS, NOT_DECIDED }
 
     /** Finds percentiles of one distribution. */
-    static final class Finder {
+    public static final class Finder {
         private static final int[] BITS = {64, 512, 4096};
         private static final int EXACT_UP_TO = 20_000;
 
@@ -37,7 +38,7 @@ public record Percentile(Rational p, OptionalInt k, Optional<Reason> reason) {
          * @param limit what F tends to. Since F never falls, it reaches that at some step only where it stays constant
          *              from there on: when Y(z) has no poles but zero and one
          */
-        Finder(Chain chain, ClosedForm distribution, Rational limit) {
+        public Finder(Chain chain, ClosedForm distribution, Rational limit) {
             this.modes = ModeValues.of(distribution);
             this.limit = limit;
             this.reachesLimit = distribution.transform().factors().factors().stream().allMatch(factor ->
@@ -46,7 +47,7 @@ public record Percentile(Rational p, OptionalInt k, Optional<Reason> reason) {
             this.exact = () -> Sequence.of(chain, distribution.transform());
         }
 
-        Percentile of(Rational p) {
+        public Percentile of(Rational p) {
             int against = p.compareTo(limit);
             if (against > 0 || against == 0 && !reachesLimit) {
                 return none(p, Reason.NEVER);
@@ -89,7 +90,7 @@ public record Percentile(Rational p, OptionalInt k, Optional<Reason> reason) {
         }
 
         /** Whether F(k) ≥ p. */
-        Optional<Boolean> isReached(Rational p, int k) {
+        public Optional<Boolean> isReached(Rational p, int k) {
             Enclosed value = modes.at(k);
             for (int bits : BITS) {
                 Ball difference = value.enclose(bits).minus(Ball.of(p, bits));
@@ -100,7 +101,7 @@ public record Percentile(Rational p, OptionalInt k, Optional<Reason> reason) {
             return k <= EXACT_UP_TO ? Optional.of(exact.get().at(k).compareTo(p) >= 0) : Optional.empty();
         }
 
-        static Percentile none(Rational p, Reason reason) {
+        public static Percentile none(Rational p, Reason reason) {
             return new Percentile(p, OptionalInt.empty(), Optional.of(reason));
         }
     }

@@ -14,9 +14,12 @@ import org.pofk.chain.Output;
 import org.pofk.chain.Outputs;
 import org.pofk.chain.SparseMatrix;
 import org.pofk.chain.Structure;
-import org.pofk.exact.Rational;
+import org.pofk.longrun.LongRunByPoles;
+import org.pofk.longrun.LongRunChecks;
 import org.pofk.modes.ClosedForm;
 import org.pofk.modes.KnownPoles;
+import org.pofk.steps.StepValue;
+import org.pofk.steps.StepValues;
 import org.pofk.transform.Transform;
 import org.pofk.transform.Transforms;
 

@@ -6,6 +6,7 @@ import java.util.Optional;
 import java.util.stream.IntStream;
 import org.pofk.chain.Chain;
 import org.pofk.exact.Rational;
+import org.pofk.steps.ExactSteps;
 import org.pofk.transform.Transform;
 
 /**

@@ -7,6 +7,7 @@ import java.util.stream.IntStream;
 import java.util.stream.Stream;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Output;
+import org.pofk.longrun.Settling;
 
 /** The steps at which random runs are looked at beside a formula: early ones, and a late one where those say nothing. */
 final class RandomRuns {

@@ -5,8 +5,9 @@ import java.util.concurrent.CompletableFuture;
 import java.util.concurrent.ExecutionException;
 import java.util.concurrent.TimeUnit;
 import java.util.concurrent.TimeoutException;
-import org.pofk.modes.Expansion;
 import org.pofk.exact.Rational;
+import org.pofk.modes.Expansion;
+import org.pofk.steps.ClosedFormValues;
 import org.pofk.transform.Transform;
 
 /**

@@ -7,6 +7,8 @@ import org.pofk.chain.Output;
 import org.pofk.chain.Timetable;
 import org.pofk.exact.Ball;
 import org.pofk.exact.Rational;
+import org.pofk.steps.FixedPointState;
+import org.pofk.steps.StateArithmetic;
 
 /**
  * A chain run at random many times from a fixed seed, and what the outputs read at chosen steps, each with an interval
@@ -87,7 +89,7 @@ public record Simulation(long seed, int runs, List<Series> series) {
         FixedPointState state = fixed.start(chain.start());
         int k = 0;
         for (int step : ascending) {
-            state = step == k ? state : CycleCourse.of(timetable, fixed, state, k, step - k, List.of()).end();
+            state = fixed.walked(timetable, state, k, step - k);
             k = step;
             exact.add(state);
         }

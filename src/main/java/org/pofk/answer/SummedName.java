@@ -3,9 +3,9 @@ package org.pofk.answer;
 import org.pofk.exact.Rational;
 
 /** What the two outputs of a {@link SummedChain} are called, and what they are in words. */
-record SummedName(String step, String ofStep, String total, String ofTotal) {
+public record SummedName(String step, String ofStep, String total, String ofTotal) {
 
-    static SummedName of(Increment increment, Rational factor) {
+    public static SummedName of(Increment increment, Rational factor) {
         String name = increment.name();
         return switch (increment.kind()) {
             case VALUES -> new SummedName(name, increment.definition(), "total " + name, sum(name));

@@ -6,8 +6,12 @@ import java.util.Optional;
 import org.pofk.chain.Chain;
 import org.pofk.exact.Enclosed;
 import org.pofk.exact.Rational;
+import org.pofk.longrun.LongRun;
+import org.pofk.longrun.LongRunChecks;
 import org.pofk.modes.ClosedForm;
 import org.pofk.modes.KnownPoles;
+import org.pofk.steps.StepValue;
+import org.pofk.steps.StepValues;
 import org.pofk.transform.Transform;
 import org.pofk.transform.Transforms;
 

@@ -5,7 +5,10 @@ import java.util.Optional;
 import java.util.stream.LongStream;
 import org.pofk.chain.Chain;
 import org.pofk.exact.Rational;
+import org.pofk.longrun.LongRun;
+import org.pofk.longrun.LongRunValues;
 import org.pofk.modes.ClosedForm;
+import org.pofk.steps.ExactSteps;
 import org.pofk.transform.Sequence;
 
 /**
@@ -26,7 +29,7 @@ public record When(Condition condition, Optional<Long> first, Optional<Long> for
         /** {@code SETTLED}: within the bound of the long run, of each of its values where it is a cycle. */
         public enum Kind { AT_LEAST, AT_MOST, SETTLED }
 
-        Band around(Rational limit) {
+        public Band around(Rational limit) {
             return switch (kind) {
                 case AT_LEAST -> new Band(Optional.of(bound), Optional.empty()).minus(limit);
                 case AT_MOST -> new Band(Optional.empty(), Optional.of(bound)).minus(limit);

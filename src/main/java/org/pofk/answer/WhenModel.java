@@ -10,8 +10,13 @@ import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
 import org.pofk.exact.Rational;
+import org.pofk.longrun.LongRun;
+import org.pofk.longrun.LongRunValues;
+import org.pofk.longrun.Settling;
 import org.pofk.modes.ClosedForm;
 import org.pofk.modes.KnownPoles;
+import org.pofk.steps.StepValue;
+import org.pofk.steps.StepValues;
 import org.pofk.transform.Transform;
 import org.pofk.transform.Transforms;
 

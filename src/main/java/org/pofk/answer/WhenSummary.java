@@ -8,11 +8,11 @@ import org.pofk.answer.When.Reason;
 import org.pofk.answer.When.ResidueClass;
 
 /** Puts the answers of the residue classes together. */
-final class WhenSummary {
+public final class WhenSummary {
     private WhenSummary() {
     }
 
-    static When of(When.Condition condition, List<ResidueClass> found) {
+    public static When of(When.Condition condition, List<ResidueClass> found) {
         List<ResidueClass> classes = fewest(found);
         Optional<Long> first = classes.stream().flatMap(each -> each.first().stream()).min(Long::compare);
         boolean decided = classes.stream().allMatch(each -> each.end().isDecided());

@@ -5,10 +5,10 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import org.pofk.answer.LongRun;
 import org.pofk.answer.When;
 import org.pofk.answer.When.Condition;
 import org.pofk.exact.Rational;
+import org.pofk.longrun.LongRun;
 
 /**
  * The least step from which an output stays within a distance of its long run, or of each value of its cycle, for

@@ -8,7 +8,6 @@ import java.util.TreeSet;
 import java.util.function.Supplier;
 import org.pofk.answer.Given;
 import org.pofk.answer.Passage;
-import org.pofk.answer.ScheduledPassage;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Schedule;
 import org.pofk.chain.Timetable;
@@ -16,6 +15,7 @@ import org.pofk.exact.Rational;
 import org.pofk.report.PassageDocument;
 import org.pofk.report.Prose;
 import org.pofk.report.Style;
+import org.pofk.schedule.ScheduledPassage;
 import org.pofk.text.Suggestion;
 import picocli.CommandLine.Option;
 

@@ -2,10 +2,6 @@ package org.pofk.cli;
 
 import java.util.List;
 import java.util.function.Supplier;
-import org.pofk.answer.ScheduledPassage;
-import org.pofk.answer.ScheduledTotal;
-import org.pofk.answer.ScheduledTotalModel;
-import org.pofk.answer.ScheduledWhen;
 import org.pofk.answer.WhenModel;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
@@ -18,6 +14,10 @@ import org.pofk.report.ScheduledWhenDocument;
 import org.pofk.report.Style;
 import org.pofk.report.WhenJson;
 import org.pofk.report.WhenTable;
+import org.pofk.schedule.ScheduledPassage;
+import org.pofk.schedule.ScheduledTotal;
+import org.pofk.schedule.ScheduledTotalModel;
+import org.pofk.schedule.ScheduledWhen;
 import org.pofk.text.RefusedException;
 
 /** What commands about totals, passages and conditions answer about a model that has inspections or phases. */

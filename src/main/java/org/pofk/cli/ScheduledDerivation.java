@@ -1,8 +1,6 @@
 package org.pofk.cli;
 
 import java.util.List;
-import org.pofk.answer.ScheduledModel;
-import org.pofk.answer.Scheduling;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
 import org.pofk.report.CsvWriter;
@@ -11,6 +9,8 @@ import org.pofk.report.ScheduledJson;
 import org.pofk.report.ScheduledNotebook;
 import org.pofk.report.ScheduledTable;
 import org.pofk.report.Style;
+import org.pofk.schedule.ScheduledModel;
+import org.pofk.schedule.Scheduling;
 import org.pofk.text.RefusedException;
 
 /** What {@code derive} does with a model that has inspections or phases. */

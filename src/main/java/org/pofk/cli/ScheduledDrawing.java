@@ -2,13 +2,13 @@ package org.pofk.cli;
 
 import java.util.List;
 import java.util.Optional;
-import org.pofk.answer.ScheduledModel;
-import org.pofk.answer.Scheduling;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
 import org.pofk.chain.Timetable;
 import org.pofk.report.Chart;
 import org.pofk.report.ScheduledCourse;
+import org.pofk.schedule.ScheduledModel;
+import org.pofk.schedule.Scheduling;
 
 /** What {@code draw} does with a model that has inspections or phases. */
 final class ScheduledDrawing {

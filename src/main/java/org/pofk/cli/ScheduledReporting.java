@@ -2,8 +2,6 @@ package org.pofk.cli;
 
 import java.util.List;
 import java.util.Optional;
-import org.pofk.answer.ScheduledModel;
-import org.pofk.answer.Scheduling;
 import org.pofk.answer.Simulation;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
@@ -19,6 +17,8 @@ import org.pofk.report.ScheduledReport;
 import org.pofk.report.ScheduledReportDocument;
 import org.pofk.report.ScheduledTable;
 import org.pofk.report.Style;
+import org.pofk.schedule.ScheduledModel;
+import org.pofk.schedule.Scheduling;
 import org.pofk.text.RefusedException;
 
 /** What {@code report} does with a model that has inspections or phases. */

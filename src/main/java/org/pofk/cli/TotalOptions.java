@@ -4,12 +4,12 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import org.pofk.answer.Increment;
-import org.pofk.answer.ScheduledTotal;
 import org.pofk.answer.TotalModel;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
 import org.pofk.exact.Rational;
+import org.pofk.schedule.ScheduledTotal;
 import picocli.CommandLine.Option;
 
 /** What is added up, and up to which steps. */

@@ -6,12 +6,12 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.stream.Collectors;
-import org.pofk.answer.StationaryDistribution;
 import org.pofk.chain.Chain;
 import org.pofk.chain.SparseMatrix;
 import org.pofk.chain.Structure;
 import org.pofk.chain.Structure.CommunicatingClass;
 import org.pofk.exact.Rational;
+import org.pofk.longrun.StationaryDistribution;
 
 /**
  * A start in the long run: the shares that the states of a closed part have in it, which one step leaves as they are.

@@ -8,7 +8,6 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.stream.Stream;
-import org.pofk.answer.StepValue;
 import org.pofk.chain.Entry.Subject;
 import org.pofk.chain.Model;
 import org.pofk.chain.ModelChanges.Change;
@@ -21,6 +20,7 @@ import org.pofk.report.Document.Paragraph;
 import org.pofk.report.Document.Table;
 import org.pofk.report.OutputPair.Found;
 import org.pofk.report.OutputPair.Standing;
+import org.pofk.steps.StepValue;
 
 /** What is other than in an earlier issue: the input, then each result before and after. */
 final class ChangeBlocks {

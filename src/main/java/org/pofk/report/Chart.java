@@ -2,9 +2,9 @@ package org.pofk.report;
 
 import java.util.List;
 import java.util.Optional;
-import org.pofk.answer.StepValue;
 import org.pofk.exact.Rational;
 import org.pofk.exact.Root;
+import org.pofk.steps.StepValue;
 
 /**
  * What a figure shows, without how it is drawn: exact or certified data, a title, and an alternative in words that says

@@ -5,9 +5,9 @@ import java.util.Optional;
 import org.pofk.answer.Conditional;
 import org.pofk.answer.ConditionalModel;
 import org.pofk.answer.Given;
-import org.pofk.answer.PossibleSteps;
 import org.pofk.chain.Model;
 import org.pofk.exact.Rational;
+import org.pofk.steps.PossibleSteps;
 
 /** Outputs given what is known at the same step, as JSON: format {@code pofk-conditional}. */
 public final class ConditionalJson {

@@ -8,16 +8,16 @@ import java.util.stream.IntStream;
 import java.util.stream.Stream;
 import org.pofk.answer.DerivedModel;
 import org.pofk.answer.DerivedOutput;
-import org.pofk.answer.LongRun;
-import org.pofk.answer.LongRunValues;
-import org.pofk.answer.StepValue;
-import org.pofk.answer.StepValues;
 import org.pofk.answer.When;
 import org.pofk.chain.Chain;
 import org.pofk.exact.Ball;
 import org.pofk.exact.Rational;
+import org.pofk.longrun.LongRun;
+import org.pofk.longrun.LongRunValues;
 import org.pofk.modes.ClosedForm;
 import org.pofk.modes.Mode;
+import org.pofk.steps.StepValue;
+import org.pofk.steps.StepValues;
 
 /**
  * Which steps of outputs are drawn, and how: as far as the last output settles and a little on, a few turns of a cycle,

@@ -5,7 +5,6 @@ import java.math.RoundingMode;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import org.pofk.answer.StepValue;
 import org.pofk.exact.Decimals;
 import org.pofk.exact.Rational;
 import org.pofk.report.Picture.Anchor;
@@ -18,6 +17,7 @@ import org.pofk.report.Picture.Point;
 import org.pofk.report.Picture.Setting;
 import org.pofk.report.Picture.Shape;
 import org.pofk.report.Picture.Stroke;
+import org.pofk.steps.StepValue;
 
 /** Outputs over steps as a picture: the names stand beside the ends of their lines, with where they tend to. */
 final class CoursePicture {

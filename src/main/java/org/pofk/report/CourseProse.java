@@ -3,9 +3,9 @@ package org.pofk.report;
 import java.util.List;
 import java.util.Optional;
 import java.util.stream.Collectors;
-import org.pofk.answer.StepValue;
 import org.pofk.exact.Decimals;
 import org.pofk.exact.Rational;
+import org.pofk.steps.StepValue;
 
 /** What is seen of outputs over steps, in words. */
 final class CourseProse {

@@ -3,7 +3,6 @@ package org.pofk.report;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import org.pofk.answer.JointFormula;
 import org.pofk.exact.Decimals;
 import org.pofk.exact.Rational;
 import org.pofk.formula.Formula;
@@ -16,6 +15,7 @@ import org.pofk.report.Document.Block;
 import org.pofk.report.Document.Display;
 import org.pofk.report.Document.Labelled;
 import org.pofk.report.Document.Relation;
+import org.pofk.schedule.JointFormula;
 
 /** A closed form whose steps are called otherwise than k: cycles m, or steps j within one. */
 final class FormulaInSteps {

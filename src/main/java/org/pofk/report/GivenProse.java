@@ -5,9 +5,9 @@ import java.util.List;
 import java.util.Optional;
 import org.pofk.answer.Given;
 import org.pofk.answer.Known;
-import org.pofk.answer.PossibleSteps;
 import org.pofk.report.Document.Block;
 import org.pofk.report.Document.Paragraph;
+import org.pofk.steps.PossibleSteps;
 
 /** What is known of a state, in words. */
 public final class GivenProse {

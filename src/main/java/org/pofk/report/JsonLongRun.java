@@ -1,8 +1,8 @@
 package org.pofk.report;
 
 import java.util.List;
-import org.pofk.answer.LongRun;
 import org.pofk.exact.Rational;
+import org.pofk.longrun.LongRun;
 
 /** A long run as the fields of a JSON object. */
 record JsonLongRun(Json json) implements LongRun.Visitor<Runnable> {

@@ -2,7 +2,6 @@ package org.pofk.report;
 
 import java.util.List;
 import org.pofk.answer.DerivedOutput;
-import org.pofk.answer.StepValue;
 import org.pofk.exact.Factorization;
 import org.pofk.exact.Polynomial;
 import org.pofk.exact.Rational;
@@ -12,6 +11,7 @@ import org.pofk.formula.Latex;
 import org.pofk.formula.PlainText;
 import org.pofk.modes.ClosedForm;
 import org.pofk.modes.Expansion;
+import org.pofk.steps.StepValue;
 import org.pofk.transform.Transform;
 
 /** One derived output as an object: transform, factors, modes, formula, long run, values, proof. */

@@ -1,11 +1,11 @@
 package org.pofk.report;
 
 import java.util.Optional;
-import org.pofk.answer.KnownValue;
-import org.pofk.answer.StepValue;
 import org.pofk.exact.Ball;
 import org.pofk.exact.Decimals;
 import org.pofk.exact.Rational;
+import org.pofk.steps.KnownValue;
+import org.pofk.steps.StepValue;
 
 /** A number of an answer in decimals, as many as are certain. */
 final class KnownText {

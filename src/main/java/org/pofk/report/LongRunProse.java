@@ -3,11 +3,11 @@ package org.pofk.report;
 import java.util.List;
 import java.util.stream.Collectors;
 import java.util.stream.IntStream;
-import org.pofk.answer.LongRun;
-import org.pofk.answer.LongRunChecks;
 import org.pofk.exact.Decimal;
 import org.pofk.exact.Decimals;
 import org.pofk.exact.Rational;
+import org.pofk.longrun.LongRun;
+import org.pofk.longrun.LongRunChecks;
 
 /** A long run in words. */
 record LongRunProse(int digits) implements LongRun.Visitor<String> {

@@ -1,6 +1,6 @@
 package org.pofk.report;
 
-import org.pofk.answer.HighPowers;
+import org.pofk.longrun.HighPowers;
 
 /** Where comparing two successive powers of the matrix would have stopped at a wrong value. */
 final class LongRunWarning {

@@ -2,10 +2,10 @@ package org.pofk.report;
 
 import java.util.List;
 import java.util.stream.IntStream;
-import org.pofk.answer.PowerSeries;
 import org.pofk.exact.Polynomial;
 import org.pofk.exact.Rational;
 import org.pofk.report.Document.Sequence;
+import org.pofk.steps.PowerSeries;
 import org.pofk.transform.Transform;
 
 /** An output's values as the recurrence that was proved for them. Exact. */

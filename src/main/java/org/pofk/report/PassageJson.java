@@ -7,11 +7,11 @@ import org.pofk.answer.Known;
 import org.pofk.answer.Passage;
 import org.pofk.answer.PassageMoments;
 import org.pofk.answer.Percentile;
-import org.pofk.answer.Settling;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
 import org.pofk.exact.Decimals;
 import org.pofk.exact.Rational;
+import org.pofk.longrun.Settling;
 
 /** Whether and when a set of states is first entered, as JSON: format {@code pofk-passage}. */
 public final class PassageJson {

@@ -5,9 +5,9 @@ import java.util.List;
 import java.util.Optional;
 import java.util.stream.Collectors;
 import org.pofk.answer.PoleCheck;
-import org.pofk.answer.StepValue;
 import org.pofk.exact.Enclosed;
 import org.pofk.modes.RealValue;
+import org.pofk.steps.StepValue;
 
 /** Poles in words. */
 final class PoleProse {

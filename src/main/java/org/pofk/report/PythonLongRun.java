@@ -1,8 +1,8 @@
 package org.pofk.report;
 
 import java.util.List;
-import org.pofk.answer.LongRun;
 import org.pofk.exact.Rational;
+import org.pofk.longrun.LongRun;
 
 /** A long run as Python that proves it and draws the first steps. */
 final class PythonLongRun implements LongRun.Visitor<String> {

@@ -4,15 +4,15 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.stream.Collectors;
 import java.util.stream.Stream;
-import org.pofk.answer.CycleCourse;
-import org.pofk.answer.CycleCourse.Reading;
-import org.pofk.answer.KnownValue;
 import org.pofk.chain.Chain;
 import org.pofk.chain.SparseMatrix;
 import org.pofk.chain.Timetable;
 import org.pofk.chain.Timetable.Moment;
 import org.pofk.exact.Ball;
 import org.pofk.exact.Rational;
+import org.pofk.schedule.CycleCourse;
+import org.pofk.schedule.CycleCourse.Reading;
+import org.pofk.steps.KnownValue;
 
 /** A chain with its timetable, and courses of outputs, as Python. */
 final class PythonSchedule {

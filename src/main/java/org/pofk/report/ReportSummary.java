@@ -6,18 +6,18 @@ import java.util.Optional;
 import java.util.stream.IntStream;
 import org.pofk.answer.DerivedOutput;
 import org.pofk.answer.KeyFigures;
-import org.pofk.answer.LongRun;
 import org.pofk.answer.Peak;
-import org.pofk.answer.StepValue;
 import org.pofk.chain.Model;
 import org.pofk.formula.Formula;
 import org.pofk.formula.PlainText;
+import org.pofk.longrun.LongRun;
 import org.pofk.modes.ClosedForm;
 import org.pofk.report.Document.Block;
 import org.pofk.report.Document.Heading;
 import org.pofk.report.Document.Items;
 import org.pofk.report.Document.Labelled;
 import org.pofk.report.Document.Paragraph;
+import org.pofk.steps.StepValue;
 
 /** The first page: the question, the result with where it holds, the answers, and the caution. */
 final class ReportSummary {

@@ -4,8 +4,8 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.stream.Stream;
-import org.pofk.answer.StepValue;
 import org.pofk.exact.Rational;
+import org.pofk.steps.StepValue;
 
 /** A table for programs, built row by row: every number plain, exact ones as fractions. */
 final class Rows {

@@ -5,16 +5,16 @@ import java.util.List;
 import java.util.Optional;
 import java.util.TreeSet;
 import java.util.stream.IntStream;
-import org.pofk.answer.CycleCourse.Extreme;
-import org.pofk.answer.CycleCourse.Reading;
-import org.pofk.answer.CycleCourse.Side;
-import org.pofk.answer.KnownValue;
-import org.pofk.answer.PeriodicRegime;
-import org.pofk.answer.ScheduledModel;
-import org.pofk.answer.ScheduledOutput;
-import org.pofk.answer.StepValue;
 import org.pofk.chain.Timetable;
 import org.pofk.exact.Rational;
+import org.pofk.schedule.CycleCourse.Extreme;
+import org.pofk.schedule.CycleCourse.Reading;
+import org.pofk.schedule.CycleCourse.Side;
+import org.pofk.schedule.PeriodicRegime;
+import org.pofk.schedule.ScheduledModel;
+import org.pofk.schedule.ScheduledOutput;
+import org.pofk.steps.KnownValue;
+import org.pofk.steps.StepValue;
 
 /**
  * Outputs under a schedule over the steps before the cycles and a few cycles, as a figure: where something is done, both

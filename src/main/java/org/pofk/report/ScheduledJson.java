@@ -3,16 +3,6 @@ package org.pofk.report;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.BiConsumer;
-import org.pofk.answer.CycleCourse;
-import org.pofk.answer.CycleCourse.Reading;
-import org.pofk.answer.CycleCourse.Side;
-import org.pofk.answer.CycleFormula;
-import org.pofk.answer.JointFormula;
-import org.pofk.answer.KnownValue;
-import org.pofk.answer.PeriodicRegime;
-import org.pofk.answer.ScheduledModel;
-import org.pofk.answer.ScheduledOutput;
-import org.pofk.answer.StretchFormula;
 import org.pofk.chain.Model;
 import org.pofk.chain.Schedule;
 import org.pofk.chain.Schedule.Repeat;
@@ -24,6 +14,16 @@ import org.pofk.formula.Latex;
 import org.pofk.formula.PlainText;
 import org.pofk.formula.Renaming;
 import org.pofk.modes.ClosedForm;
+import org.pofk.schedule.CycleCourse;
+import org.pofk.schedule.CycleCourse.Reading;
+import org.pofk.schedule.CycleCourse.Side;
+import org.pofk.schedule.CycleFormula;
+import org.pofk.schedule.JointFormula;
+import org.pofk.schedule.PeriodicRegime;
+import org.pofk.schedule.ScheduledModel;
+import org.pofk.schedule.ScheduledOutput;
+import org.pofk.schedule.StretchFormula;
+import org.pofk.steps.KnownValue;
 
 /** What {@code derive} found about a model with a schedule, as JSON: format {@code pofk-schedule}. */
 public final class ScheduledJson {

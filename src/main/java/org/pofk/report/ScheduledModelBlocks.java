@@ -4,8 +4,6 @@ import java.util.ArrayList;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Set;
-import org.pofk.answer.ScheduledModel;
-import org.pofk.answer.ScheduledOutput;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
 import org.pofk.chain.Schedule.Action;
@@ -16,6 +14,8 @@ import org.pofk.report.Document.Block;
 import org.pofk.report.Document.Heading;
 import org.pofk.report.Document.Paragraph;
 import org.pofk.report.Document.Table;
+import org.pofk.schedule.ScheduledModel;
+import org.pofk.schedule.ScheduledOutput;
 
 /** What was modelled where there is a schedule: the chain, each action and each phase as a table, and when they are. */
 final class ScheduledModelBlocks {

@@ -2,13 +2,13 @@ package org.pofk.report;
 
 import java.util.ArrayList;
 import java.util.List;
-import org.pofk.answer.PeriodicRegime;
-import org.pofk.answer.ScheduledModel;
-import org.pofk.answer.ScheduledOutput;
 import org.pofk.chain.Model.Convention;
 import org.pofk.report.Document.Block;
 import org.pofk.report.Document.Heading;
 import org.pofk.report.Document.Paragraph;
+import org.pofk.schedule.PeriodicRegime;
+import org.pofk.schedule.ScheduledModel;
+import org.pofk.schedule.ScheduledOutput;
 
 /**
  * What was found about a model with a schedule as a notebook that steps moves and actions in exact fractions, checks the

@@ -3,9 +3,7 @@ package org.pofk.report;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.stream.IntStream;
-import org.pofk.answer.CycleFormula;
 import org.pofk.answer.PassageMoments;
-import org.pofk.answer.ScheduledPassage;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
 import org.pofk.exact.Decimals;
@@ -16,6 +14,8 @@ import org.pofk.report.Document.Heading;
 import org.pofk.report.Document.Labelled;
 import org.pofk.report.Document.Paragraph;
 import org.pofk.report.Document.Table;
+import org.pofk.schedule.CycleFormula;
+import org.pofk.schedule.ScheduledPassage;
 
 /** Whether and when a set of states is first entered under a schedule, as a document. */
 public final class ScheduledPassageDocument {

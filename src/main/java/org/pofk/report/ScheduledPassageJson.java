@@ -3,8 +3,8 @@ package org.pofk.report;
 import java.util.List;
 import java.util.stream.IntStream;
 import org.pofk.answer.FirstEntrance;
-import org.pofk.answer.ScheduledPassage;
 import org.pofk.chain.Model;
+import org.pofk.schedule.ScheduledPassage;
 
 /** A first passage under a schedule as JSON: format {@code pofk-schedule-passage}. */
 public final class ScheduledPassageJson {

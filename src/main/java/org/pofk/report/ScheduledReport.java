@@ -1,8 +1,8 @@
 package org.pofk.report;
 
 import java.util.Optional;
-import org.pofk.answer.ScheduledModel;
 import org.pofk.answer.Simulation;
+import org.pofk.schedule.ScheduledModel;
 
 /**
  * What a report on a model with a schedule is written of, as far as it is found.

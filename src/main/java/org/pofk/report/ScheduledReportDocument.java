@@ -3,9 +3,6 @@ package org.pofk.report;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import org.pofk.answer.KnownValue;
-import org.pofk.answer.ScheduledModel;
-import org.pofk.answer.ScheduledOutput;
 import org.pofk.answer.Simulation;
 import org.pofk.chain.Model;
 import org.pofk.chain.Model.Convention;
@@ -17,6 +14,9 @@ import org.pofk.report.Document.Heading;
 import org.pofk.report.Document.Items;
 import org.pofk.report.Document.Labelled;
 import org.pofk.report.Document.Paragraph;
+import org.pofk.schedule.ScheduledModel;
+import org.pofk.schedule.ScheduledOutput;
+import org.pofk.steps.KnownValue;
 
 /**
  * The document an analyst hands in on a model with inspections or phases: results first, then course and values, what

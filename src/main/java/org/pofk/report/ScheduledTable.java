@@ -2,13 +2,13 @@ package org.pofk.report;
 
 import java.util.ArrayList;
 import java.util.List;
-import org.pofk.answer.CycleCourse.Reading;
-import org.pofk.answer.CycleCourse.Side;
-import org.pofk.answer.KnownValue;
-import org.pofk.answer.ScheduledModel;
-import org.pofk.answer.ScheduledOutput;
 import org.pofk.chain.Timetable;
 import org.pofk.exact.Rational;
+import org.pofk.schedule.CycleCourse.Reading;
+import org.pofk.schedule.CycleCourse.Side;
+import org.pofk.schedule.ScheduledModel;
+import org.pofk.schedule.ScheduledOutput;
+import org.pofk.steps.KnownValue;
 
 /**
  * What {@code derive} found of a model with a schedule: a row for each output and step, two where something is done, at

@@ -5,17 +5,17 @@ import java.util.List;
 import java.util.Optional;
 import org.pofk.answer.Growth;
 import org.pofk.answer.Increment.Kind;
-import org.pofk.answer.KnownValue;
-import org.pofk.answer.LongRun;
-import org.pofk.answer.ScheduledTotal;
-import org.pofk.answer.ScheduledTotalModel;
 import org.pofk.chain.Timetable;
 import org.pofk.exact.Decimals;
 import org.pofk.exact.Rational;
+import org.pofk.longrun.LongRun;
 import org.pofk.report.Document.Block;
 import org.pofk.report.Document.Heading;
 import org.pofk.report.Document.Labelled;
 import org.pofk.report.Document.Table;
+import org.pofk.schedule.ScheduledTotal;
+import org.pofk.schedule.ScheduledTotalModel;
+import org.pofk.steps.KnownValue;
 
 /** What is spent in states, entered and paid under a schedule, as a document. */
 public final class ScheduledTotalDocument {

@@ -1,8 +1,8 @@
 package org.pofk.report;
 
 import java.util.Locale;
-import org.pofk.answer.ScheduledTotal;
-import org.pofk.answer.ScheduledTotalModel;
+import org.pofk.schedule.ScheduledTotal;
+import org.pofk.schedule.ScheduledTotalModel;
 
 /** Totals under a schedule as JSON: format {@code pofk-schedule-total}. */
 public final class ScheduledTotalJson {

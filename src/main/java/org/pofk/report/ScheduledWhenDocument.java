@@ -3,13 +3,13 @@ package org.pofk.report;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import org.pofk.answer.ScheduledWhen;
 import org.pofk.answer.When.End;
 import org.pofk.answer.When.ResidueClass;
 import org.pofk.report.Document.Block;
 import org.pofk.report.Document.Heading;
 import org.pofk.report.Document.Labelled;
 import org.pofk.report.Document.Table;
+import org.pofk.schedule.ScheduledWhen;
 
 /** When outputs meet a condition under a schedule, as a document. */
 public final class ScheduledWhenDocument {

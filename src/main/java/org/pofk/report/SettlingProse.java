@@ -1,13 +1,13 @@
 package org.pofk.report;
 
 import java.util.Optional;
-import org.pofk.answer.LongRun;
-import org.pofk.answer.Settling;
 import org.pofk.exact.Ball;
 import org.pofk.exact.Decimal;
 import org.pofk.exact.Decimals;
 import org.pofk.exact.Enclosed;
 import org.pofk.exact.Rational;
+import org.pofk.longrun.LongRun;
+import org.pofk.longrun.Settling;
 
 /** How an output approaches its long run, in words. */
 final class SettlingProse {

@@ -2,13 +2,13 @@ package org.pofk.report;
 
 import java.util.ArrayList;
 import java.util.List;
-import org.pofk.answer.HighPowers;
 import org.pofk.answer.InspectedModel;
 import org.pofk.answer.InspectedModel.InspectedOutput;
-import org.pofk.answer.LongRunChecks;
 import org.pofk.answer.Question;
 import org.pofk.chain.Structure;
 import org.pofk.chain.Structure.CommunicatingClass;
+import org.pofk.longrun.HighPowers;
+import org.pofk.longrun.LongRunChecks;
 
 /** What {@code inspect} found, or {@code derive} without knowing which formula is wanted: {@code pofk-structure}. */
 public final class StructureJson {

@@ -4,9 +4,9 @@ import java.util.List;
 import java.util.stream.IntStream;
 import java.util.stream.Stream;
 import org.pofk.answer.InspectedModel;
-import org.pofk.answer.LongRun;
 import org.pofk.chain.Structure.CommunicatingClass;
 import org.pofk.exact.Rational;
+import org.pofk.longrun.LongRun;
 
 /**
  * A model's states with their classes, and the long run of each state and output: a row for a limit, a row for each

@@ -7,15 +7,15 @@ import java.util.stream.IntStream;
 import org.pofk.answer.DerivedOutput;
 import org.pofk.answer.Growth;
 import org.pofk.answer.Increment.Kind;
-import org.pofk.answer.LongRun;
-import org.pofk.answer.StepValue;
 import org.pofk.answer.Total;
 import org.pofk.chain.Model;
 import org.pofk.exact.Decimals;
 import org.pofk.exact.Rational;
+import org.pofk.longrun.LongRun;
 import org.pofk.report.Document.Block;
 import org.pofk.report.Document.Labelled;
 import org.pofk.report.Document.Table;
+import org.pofk.steps.StepValue;
 
 /** What is said of one total: what counts, the formulas, how it grows, values. */
 final class TotalBlocks {

@@ -1,10 +1,10 @@
 package org.pofk.report;
 
 import java.util.Locale;
-import org.pofk.answer.StepValue;
 import org.pofk.answer.Total;
 import org.pofk.answer.TotalModel;
 import org.pofk.exact.Rational;
+import org.pofk.steps.StepValue;
 
 /** What is spent in states, entered and paid over steps, as JSON: format {@code pofk-total}. */
 public final class TotalJson {

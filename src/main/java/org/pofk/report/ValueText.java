@@ -1,11 +1,11 @@
 package org.pofk.report;
 
-import org.pofk.answer.StepValue;
 import org.pofk.exact.Ball;
 import org.pofk.exact.Decimal;
 import org.pofk.exact.Decimals;
 import org.pofk.exact.Enclosed;
 import org.pofk.exact.Rational;
+import org.pofk.steps.StepValue;
 
 /**
  * A value in decimals. Between 0.999 and one, where it isn't its decimal, what it lacks to one has as many digits:

@@ -5,15 +5,15 @@ import java.util.Locale;
 import java.util.Optional;
 import org.pofk.answer.ConditionalWhen;
 import org.pofk.answer.Known;
-import org.pofk.answer.ScheduledWhen;
-import org.pofk.answer.Settling;
-import org.pofk.answer.StepValue;
 import org.pofk.answer.When;
 import org.pofk.answer.WhenModel;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
 import org.pofk.exact.Decimals;
 import org.pofk.exact.Enclosed;
+import org.pofk.longrun.Settling;
+import org.pofk.schedule.ScheduledWhen;
+import org.pofk.steps.StepValue;
 
 /** When an output meets a condition, as JSON: format {@code pofk-when}. */
 public final class WhenJson {

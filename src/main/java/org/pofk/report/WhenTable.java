@@ -4,11 +4,11 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
 import org.pofk.answer.ConditionalWhen;
-import org.pofk.answer.ScheduledWhen;
 import org.pofk.answer.When;
 import org.pofk.answer.WhenModel;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
+import org.pofk.schedule.ScheduledWhen;
 
 /**
  * When outputs meet a condition: a row for each output, whose {@code residue} is empty, and where its steps end in

@@ -7,7 +7,6 @@ import java.util.Optional;
 import java.util.Set;
 import java.util.function.Supplier;
 import java.util.stream.IntStream;
-import org.pofk.answer.LongRun;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Output;
 import org.pofk.chain.Outputs;
@@ -17,6 +16,7 @@ import org.pofk.claim.Claim;
 import org.pofk.claim.Statement;
 import org.pofk.claim.Truth;
 import org.pofk.exact.Rational;
+import org.pofk.longrun.LongRun;
 import org.pofk.text.Span;
 
 /** What a claim may be true of instead: another chain, another output, the average of a cycle. */

@@ -9,20 +9,21 @@ import org.pofk.chain.Chain;
 import org.pofk.chain.Output;
 import org.pofk.chain.SparseMatrix;
 import org.pofk.exact.Rational;
+import org.pofk.longrun.LongRun;
 import org.pofk.modes.ClosedForm;
 import org.pofk.transform.Transform;
 import org.pofk.transform.Transforms;
 
 /** Small chains and recursions as text, row by row, entry in row i and column j the move from j to i. */
-final class Chains {
+public final class Chains {
     private Chains() {
     }
 
-    static Chain chain(String start, String... rows) {
+    public static Chain chain(String start, String... rows) {
         return of(Chain.Kind.CHAIN, start, rows);
     }
 
-    static Chain recursion(String start, String... rows) {
+    public static Chain recursion(String start, String... rows) {
         return of(Chain.Kind.RECURSION, start, rows);
     }
 
@@ -36,7 +37,7 @@ final class Chains {
         return new Chain(kind, names, SparseMatrix.ofRows(all), first, Map.of(), List.of());
     }
 
-    static List<Rational> numbers(String text) {
+    public static List<Rational> numbers(String text) {
         List<Rational> numbers = new ArrayList<>();
         for (String number : text.strip().split("\\s+")) {
             numbers.add(Rational.parse(number));
@@ -44,40 +45,40 @@ final class Chains {
         return numbers;
     }
 
-    static Output state(Chain chain, int state) {
+    public static Output state(Chain chain, int state) {
         List<Rational> coefficients = new ArrayList<>(Collections.nCopies(chain.size(), Rational.ZERO));
         coefficients.set(state, Rational.ONE);
         return new Output(chain.states().get(state), coefficients, Rational.ZERO, chain.states().get(state));
     }
 
-    static Output reading(String coefficients) {
+    public static Output reading(String coefficients) {
         return new Output("reading", numbers(coefficients), Rational.ZERO, coefficients);
     }
 
-    static Transform transform(Chain chain, Output output) {
+    public static Transform transform(Chain chain, Output output) {
         return Transforms.of(chain, List.of(output)).get(0);
     }
 
-    static ClosedForm closedForm(Chain chain, Output output) {
+    public static ClosedForm closedForm(Chain chain, Output output) {
         return ClosedForm.of(transform(chain, output));
     }
 
-    static LongRun longRun(Chain chain, Output output) {
+    public static LongRun longRun(Chain chain, Output output) {
         return LongRun.of(chain, transform(chain, output));
     }
 
     /** Duty and standby pump, invented: both run, one runs, none runs. */
-    static Chain pumps() {
+    public static Chain pumps() {
         return chain("1 0 0", "0.9025 0.6 0", "0.095 0.38 0.6", "1/400 0.02 0.4");
     }
 
     /** Three valves in strict rotation, invented; between them a shift may be skipped before the first turn. */
-    static Chain rotation() {
+    public static Chain rotation() {
         return chain("1 0 0 0", "1/2 0 0 0", "1/2 0 0 1", "0 1 0 0", "0 0 1 0");
     }
 
     /** A deck that ages between two sound states and fails with a chance of 1e-10 a step, for ever; invented. */
-    static Chain nearlyReducible() {
+    public static Chain nearlyReducible() {
         return chain("1 0 0", "0.9 0.3 0", "0.0999999999 0.7 0", "0.0000000001 0 1");
     }
 }

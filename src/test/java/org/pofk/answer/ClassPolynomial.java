@@ -8,6 +8,7 @@ import java.util.Map;
 import org.pofk.chain.SparseMatrix;
 import org.pofk.exact.Polynomial;
 import org.pofk.exact.Rational;
+import org.pofk.longrun.StationaryDistribution;
 
 /**
  * det(zI − A) of the part of A between given states, as a second way to it: the method of Faddeev and Le Verrier (Faddeev and Sominskii

@@ -17,6 +17,7 @@ import org.pofk.chain.Output;
 import org.pofk.chain.SparseMatrix;
 import org.pofk.exact.Rational;
 import org.pofk.modes.RealValue;
+import org.pofk.steps.StepValue;
 
 class ConditionalTest {
     private static final long SEED = 20_261_203;

@@ -13,6 +13,7 @@ import org.pofk.chain.Model.Adjustment;
 import org.pofk.chain.Model.Adjustment.Reason;
 import org.pofk.chain.Place;
 import org.pofk.exact.Rational;
+import org.pofk.longrun.RecursionPoles;
 
 class InspectionTest {
     private static final Model.About ASSUMED = new Model.About(Optional.empty(), Optional.empty(), Optional.empty(),

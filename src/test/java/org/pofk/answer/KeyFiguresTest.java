@@ -16,6 +16,8 @@ import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
 import org.pofk.chain.Outputs;
 import org.pofk.exact.Rational;
+import org.pofk.longrun.LongRunValues;
+import org.pofk.steps.ExactSteps;
 import org.pofk.text.RefusedException;
 
 class KeyFiguresTest {

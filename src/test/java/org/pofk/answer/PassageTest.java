@@ -15,6 +15,7 @@ import org.junit.jupiter.api.Test;
 import org.pofk.chain.Chain;
 import org.pofk.chain.SparseMatrix;
 import org.pofk.exact.Rational;
+import org.pofk.steps.ModeValues;
 
 class PassageTest {
     private static final long SEED = 20_261_201;

@@ -12,6 +12,7 @@ import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
 import org.pofk.chain.Outputs;
 import org.pofk.exact.Rational;
+import org.pofk.steps.StepValue;
 
 /** Formulas from each state are the entries of A^k. */
 class PowerModelTest {

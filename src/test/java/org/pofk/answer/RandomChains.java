@@ -12,14 +12,14 @@ import org.pofk.chain.SparseMatrix;
 import org.pofk.exact.Rational;
 
 /** Random chains of every structure: several classes, each with a period, some left for others, some hardly ever. */
-final class RandomChains {
+public final class RandomChains {
     private final Random random;
 
-    RandomChains(long seed) {
+    public RandomChains(long seed) {
         random = new Random(seed);
     }
 
-    Chain next() {
+    public Chain next() {
         List<List<List<Integer>>> classes = new ArrayList<>();
         int size = 0;
         for (int count = 1 + random.nextInt(3); count > 0; count--) {
@@ -48,7 +48,7 @@ final class RandomChains {
                 new SparseMatrix(columns), start(size), Map.of(), List.of());
     }
 
-    Output output(Chain chain) {
+    public Output output(Chain chain) {
         List<Rational> coefficients = IntStream.range(0, chain.size())
                 .mapToObj(i -> random.nextInt(3) == 0 ? Rational.of(random.nextInt(7) - 2, 2) : Rational.ZERO)
                 .toList();

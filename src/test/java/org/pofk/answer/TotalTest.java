@@ -19,6 +19,11 @@ import org.pofk.chain.Outputs;
 import org.pofk.chain.SparseMatrix;
 import org.pofk.chain.Structure;
 import org.pofk.exact.Rational;
+import org.pofk.longrun.ClosedClassLongRun;
+import org.pofk.longrun.LongRun;
+import org.pofk.longrun.LongRunValues;
+import org.pofk.steps.ExactSteps;
+import org.pofk.steps.StepValue;
 import org.pofk.transform.TransferFunction;
 
 class TotalTest {

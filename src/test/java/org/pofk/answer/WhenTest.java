@@ -19,6 +19,8 @@ import org.pofk.chain.Output;
 import org.pofk.chain.Outputs;
 import org.pofk.chain.SparseMatrix;
 import org.pofk.exact.Rational;
+import org.pofk.longrun.LongRun;
+import org.pofk.longrun.LongRunValues;
 import org.pofk.modes.ClosedForm;
 import org.pofk.transform.Transform;
 import org.pofk.transform.Transforms;

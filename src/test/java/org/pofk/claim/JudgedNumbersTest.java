@@ -9,12 +9,12 @@ import java.util.Optional;
 import java.util.function.Function;
 import java.util.stream.IntStream;
 import org.junit.jupiter.api.Test;
-import org.pofk.answer.LongRun;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model.Convention;
 import org.pofk.chain.Output;
 import org.pofk.chain.Outputs;
 import org.pofk.exact.Rational;
+import org.pofk.longrun.LongRun;
 import org.pofk.meaning.Decision;
 import org.pofk.meaning.Quantity;
 

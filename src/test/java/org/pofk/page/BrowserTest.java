@@ -25,9 +25,9 @@ import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
 import org.pofk.answer.DerivedModel;
 import org.pofk.answer.DerivedOutput;
-import org.pofk.answer.PowerSeries;
 import org.pofk.exact.Rational;
 import org.pofk.report.HtmlWriter;
+import org.pofk.steps.PowerSeries;
 
 /** Pages in a browser: no error, nothing beside the screen, and values read off that are the exact ones. */
 @TestInstance(TestInstance.Lifecycle.PER_CLASS)

@@ -10,14 +10,14 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.function.BiConsumer;
-import org.pofk.answer.KnownValue;
-import org.pofk.answer.ScheduledModel;
-import org.pofk.answer.Scheduling;
 import org.pofk.chain.Model;
 import org.pofk.exact.Rational;
 import org.pofk.input.ModelReader;
 import org.pofk.input.Overrides;
 import org.pofk.input.Source;
+import org.pofk.schedule.ScheduledModel;
+import org.pofk.schedule.Scheduling;
+import org.pofk.steps.KnownValue;
 import org.pofk.text.RefusedException;
 
 /**

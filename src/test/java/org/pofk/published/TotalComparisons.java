@@ -12,7 +12,6 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.function.BiConsumer;
 import org.pofk.answer.Increment;
-import org.pofk.answer.LongRunValues;
 import org.pofk.answer.Total;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Costs;
@@ -21,6 +20,7 @@ import org.pofk.chain.Outputs;
 import org.pofk.exact.ComplexBall;
 import org.pofk.exact.Rational;
 import org.pofk.formula.Formula;
+import org.pofk.longrun.LongRunValues;
 
 /** How published totals, rewards and fundamental matrices are compared with what the tool adds up. */
 final class TotalComparisons {

@@ -11,8 +11,8 @@ import java.util.List;
 import java.util.Random;
 import org.junit.jupiter.api.Test;
 import org.pofk.Pofk;
-import org.pofk.answer.StepValue;
 import org.pofk.exact.Rational;
+import org.pofk.steps.StepValue;
 import org.pofk.text.Alphabet;
 import org.pofk.text.RefusedException;
 

@@ -4,9 +4,9 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 
 import java.util.Optional;
 import org.junit.jupiter.api.Test;
-import org.pofk.answer.StepValue;
 import org.pofk.exact.Enclosed;
 import org.pofk.exact.Rational;
+import org.pofk.steps.StepValue;
 
 class ValueTextTest {
 

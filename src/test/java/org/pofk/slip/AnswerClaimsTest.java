@@ -15,7 +15,6 @@ import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import org.pofk.Pofk;
 import org.pofk.answer.Increment;
-import org.pofk.answer.StepValue;
 import org.pofk.answer.Total;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Output;
@@ -28,6 +27,7 @@ import org.pofk.claim.FormulaText;
 import org.pofk.claim.Truth;
 import org.pofk.claim.Verdict;
 import org.pofk.exact.Rational;
+import org.pofk.steps.StepValue;
 
 /** Claims that rest on answers: when it settles, how long until, how much by then, given what. */
 class AnswerClaimsTest {
@@ -228,19 +228,19 @@ class AnswerClaimsTest {
 
     private static List<Rational> limits(Truth truth, Output output) {
         List<Rational> limits = new ArrayList<>();
-        truth.about(output).longRun().accept(new org.pofk.answer.LongRun.Visitor<Boolean>() {
+        truth.about(output).longRun().accept(new org.pofk.longrun.LongRun.Visitor<Boolean>() {
             @Override
-            public Boolean limit(org.pofk.answer.LongRun.Limit limit) {
+            public Boolean limit(org.pofk.longrun.LongRun.Limit limit) {
                 return limits.add(limit.value());
             }
 
             @Override
-            public Boolean cycle(org.pofk.answer.LongRun.Cycle cycle) {
+            public Boolean cycle(org.pofk.longrun.LongRun.Cycle cycle) {
                 return limits.addAll(cycle.values());
             }
 
             @Override
-            public Boolean none(org.pofk.answer.LongRun.None none) {
+            public Boolean none(org.pofk.longrun.LongRun.None none) {
                 return false;
             }
         });

@@ -1,0 +1,89 @@
+package org.pofk.schedule;
+
+import java.util.ArrayList;
+import java.util.BitSet;
+import java.util.List;
+import java.util.Map;
+import java.util.stream.IntStream;
+import org.pofk.chain.Chain;
+import org.pofk.chain.SparseMatrix;
+import org.pofk.chain.SparseMatrix.Entry;
+import org.pofk.chain.Structure;
+import org.pofk.chain.Timetable;
+import org.pofk.chain.Timetable.Moment;
+import org.pofk.exact.BinaryPowering;
+import org.pofk.exact.Rational;
+
+/**
+ * Which states a whole cycle leads to, from the graphs of its steps alone: where no entry is negative, that is where S
+ * isn't zero. Exact; log T products of n × n tables of bits.
+ */
+final class CycleGraph {
+    private CycleGraph() {
+    }
+
+    /** The structure of S, begun in the states where x(P) isn't zero. */
+    static Structure of(Timetable timetable, List<Rational> start) {
+        int size = start.size();
+        BitSet begin = begin(timetable, start);
+        List<BitSet> product = identity(size);
+        for (CycleMatrices.Stretch stretch : CycleMatrices.stretches(timetable.cycle())) {
+            product = product(power(step(timetable, stretch.moment(), size), stretch.times()), product);
+        }
+        SparseMatrix matrix = new SparseMatrix(product.stream().map(column ->
+                column.stream().mapToObj(row -> new Entry(row, Rational.ONE)).toList()).toList());
+        return Structure.of(new Chain(Chain.Kind.RECURSION,
+                IntStream.range(0, size).mapToObj(String::valueOf).toList(), matrix,
+                IntStream.range(0, size).mapToObj(state -> begin.get(state) ? Rational.ONE : Rational.ZERO).toList(),
+                Map.of(), List.of()));
+    }
+
+    private static BitSet begin(Timetable timetable, List<Rational> start) {
+        BitSet states = new BitSet();
+        IntStream.range(0, start.size()).filter(state -> !start.get(state).isZero()).forEach(states::set);
+        List<BitSet> now = List.of(states);
+        for (CycleMatrices.Stretch stretch : CycleMatrices.stretches(timetable.preamble())) {
+            now = product(power(step(timetable, stretch.moment(), start.size()), stretch.times()), now);
+        }
+        return now.get(0);
+    }
+
+    private static List<BitSet> step(Timetable timetable, Moment moment, int size) {
+        List<BitSet> step = moment.move().isPresent() ? graph(timetable.moves().get(moment.move().getAsInt()))
+                : identity(size);
+        for (int action : moment.actions()) {
+            step = product(graph(timetable.actions().get(action).matrix()), step);
+        }
+        return step;
+    }
+
+    private static List<BitSet> graph(SparseMatrix matrix) {
+        List<BitSet> columns = new ArrayList<>();
+        for (List<Entry> column : matrix.columns()) {
+            BitSet rows = new BitSet();
+            column.forEach(entry -> rows.set(entry.row()));
+            columns.add(rows);
+        }
+        return columns;
+    }
+
+    private static List<BitSet> identity(int size) {
+        return IntStream.range(0, size).mapToObj(state -> {
+            BitSet column = new BitSet();
+            column.set(state);
+            return column;
+        }).toList();
+    }
+
+    private static List<BitSet> product(List<BitSet> m, List<BitSet> n) {
+        return n.stream().map(column -> {
+            BitSet image = new BitSet();
+            column.stream().forEach(row -> image.or(m.get(row)));
+            return image;
+        }).toList();
+    }
+
+    private static List<BitSet> power(List<BitSet> matrix, int times) {
+        return BinaryPowering.of(identity(matrix.size()), matrix, times, CycleGraph::product);
+    }
+}
