@@ -1,6 +1,7 @@
 package org.pofk.bench;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.Collections;
 import java.util.List;
 import java.util.Map;
@@ -46,7 +47,7 @@ final class SparseChains {
 
     private static List<Entry> column(Set<Integer> targets, int denominator, Random random) {
         int[] weights = new int[MOVES];
-        java.util.Arrays.fill(weights, denominator / MOVES);
+        Arrays.fill(weights, denominator / MOVES);
         for (int i = 1; i < MOVES; i += 2) {
             int moved = random.nextInt(denominator / MOVES);
             weights[i] += moved;

@@ -2,6 +2,7 @@ package org.pofk.answer;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.IntStream;
 import org.pofk.chain.Chain;
 import org.pofk.exact.Rational;
 import org.pofk.modes.ClosedForm;
@@ -60,7 +61,7 @@ public record Comparison(ExactPowers exactPowers, DoubleStepping doubleStepping,
                 last);
         DoubleSteps doubles = DoubleSteps.of(chain, closedForms.stream().map(each -> each.transform().output()).toList(),
                 last);
-        return java.util.stream.IntStream.range(0, closedForms.size()).mapToObj(i -> new Comparison(
+        return IntStream.range(0, closedForms.size()).mapToObj(i -> new Comparison(
                 exactPowers(closedForms.get(i), exact.values().get(i)),
                 doubleStepping(doubles.values().get(i), exact.values().get(i)),
                 simulation.map(each -> each.series().get(i)))).toList();

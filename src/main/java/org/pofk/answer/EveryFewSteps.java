@@ -12,6 +12,7 @@ import org.pofk.chain.Chain;
 import org.pofk.chain.Reach;
 import org.pofk.chain.SparseMatrix;
 import org.pofk.chain.Structure;
+import org.pofk.exact.LeastCommonMultiple;
 import org.pofk.exact.Rational;
 
 /**
@@ -29,7 +30,7 @@ final class EveryFewSteps {
         return Structure.of(chain).classes().stream()
                 .filter(each -> each.reached() && each.period() > 1 && leading.contains(each.states().get(0)))
                 .map(each -> BigInteger.valueOf(each.period()))
-                .reduce(BigInteger.ONE, (a, b) -> a.divide(a.gcd(b)).multiply(b));
+                .reduce(BigInteger.ONE, LeastCommonMultiple::of);
     }
 
     /** One chain for each residue r = 0 … d − 1; its m-th step is the step r + d m. */

@@ -1,6 +1,7 @@
 package org.pofk.answer;
 
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
@@ -26,10 +27,10 @@ public record Given(List<String> names, Set<Integer> in, List<String> neverNames
     public Given {
         names = List.copyOf(names);
         neverNames = List.copyOf(neverNames);
-        never = java.util.Collections.unmodifiableSet(new TreeSet<>(never));
+        never = Collections.unmodifiableSet(new TreeSet<>(never));
         Set<Integer> left = new TreeSet<>(in);
         left.removeAll(never);
-        in = java.util.Collections.unmodifiableSet(left);
+        in = Collections.unmodifiableSet(left);
     }
 
     /** The state a chain is in at a step, given what is known: with which probability that was so. */

@@ -6,6 +6,7 @@ import java.util.Optional;
 import java.util.function.LongPredicate;
 import org.pofk.answer.When.End;
 import org.pofk.answer.When.ResidueClass;
+import org.pofk.exact.LeastCommonMultiple;
 
 /**
  * When several constraints hold together, residue class by residue class of the long run's period: beyond a bound a
@@ -42,15 +43,12 @@ final class WhenSearch {
         long modulus = least;
         for (Constraint constraint : constraints) {
             long period = constraint.period();
-            modulus = modulus / gcd(modulus, period) * period;
+            modulus = LeastCommonMultiple.of(modulus, period);
             modulus = constraint.stride(modulus, Math.max(modulus * 2, MOST_CLASSES));
         }
         return modulus;
     }
 
-    private static long gcd(long a, long b) {
-        return b == 0 ? a : gcd(b, a % b);
-    }
 
     /** One a residue, in order. */
     List<ResidueClass> classes(long modulus) {

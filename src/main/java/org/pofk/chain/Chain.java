@@ -1,5 +1,7 @@
 package org.pofk.chain;
 
+import java.util.Collections;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import org.pofk.exact.Rational;
@@ -22,7 +24,7 @@ public record Chain(Kind kind, List<String> states, SparseMatrix matrix, List<Ra
     public Chain {
         states = List.copyOf(states);
         start = List.copyOf(start);
-        sets = java.util.Collections.unmodifiableMap(new java.util.LinkedHashMap<>(sets));
+        sets = Collections.unmodifiableMap(new LinkedHashMap<>(sets));
         outputs = List.copyOf(outputs);
     }
 

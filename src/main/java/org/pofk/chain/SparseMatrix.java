@@ -1,8 +1,10 @@
 package org.pofk.chain;
 
+import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.Collections;
 import java.util.List;
+import org.pofk.exact.CommonDenominator;
 import org.pofk.exact.Rational;
 
 /**
@@ -40,6 +42,11 @@ public record SparseMatrix(List<List<Entry>> columns) {
     /** n, the number of states. */
     public int size() {
         return columns.size();
+    }
+
+    /** The least positive integer that makes integers of all entries. */
+    public BigInteger commonDenominator() {
+        return CommonDenominator.of(columns.stream().flatMap(List::stream).map(Entry::value).distinct().toList());
     }
 
     /** The entry in row i of column j. */

@@ -1,9 +1,11 @@
 package org.pofk.chain;
 
+import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.BitSet;
 import java.util.List;
+import org.pofk.exact.LeastCommonMultiple;
 
 /**
  * What the graph of a chain says: its communicating classes and what can be reached. For a recursion the same is said
@@ -64,6 +66,12 @@ public record Structure(List<CommunicatingClass> classes, List<Integer> unreache
         }
         reached.flip(0, chain.size());
         return new Structure(classes, reached.stream().boxed().toList());
+    }
+
+    /** The least common multiple of the periods of the closed classes that are reached; one where there are none. */
+    public BigInteger period() {
+        return closedClasses().stream().filter(CommunicatingClass::reached)
+                .map(each -> BigInteger.valueOf(each.period())).reduce(BigInteger.ONE, LeastCommonMultiple::of);
     }
 
     /** The classes nothing leads out of, in their order. */

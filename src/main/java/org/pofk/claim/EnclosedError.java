@@ -1,10 +1,10 @@
 package org.pofk.claim;
 
-import java.math.BigInteger;
 import java.util.Map;
 import java.util.Optional;
 import java.util.function.LongPredicate;
 import org.pofk.exact.Ball;
+import org.pofk.exact.LeastCommonMultiple;
 
 /**
  * The size of an {@link ErrorCurve} with all numbers enclosed: at one step, over ranges of steps of a class, and from
@@ -27,11 +27,8 @@ final class EnclosedError {
         this.impulses = impulses;
         this.reference = reference;
         this.bits = bits;
-        this.classes = common(difference.classes(), reference.map(p -> p.truth.classes()).orElse(1));
-    }
-
-    private static int common(int a, int b) {
-        return a / BigInteger.valueOf(a).gcd(BigInteger.valueOf(b)).intValue() * b;
+        this.classes = Math.toIntExact(LeastCommonMultiple.of(difference.classes(),
+                reference.map(p -> p.truth.classes()).orElse(1)));
     }
 
     int bits() {

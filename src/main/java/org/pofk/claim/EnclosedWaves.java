@@ -6,6 +6,7 @@ import java.util.Optional;
 import org.pofk.exact.Ball;
 import org.pofk.exact.BinaryPowering;
 import org.pofk.exact.ComplexBall;
+import org.pofk.exact.LeastCommonMultiple;
 import org.pofk.exact.Rational;
 
 /**
@@ -57,15 +58,11 @@ final class EnclosedWaves {
         for (Line line : lines) {
             for (Enclosed wave : all(line)) {
                 int order = Math.max(1, wave.turn.order());
-                int next = common / gcd(common, order) * order;
-                common = next > MOST_CLASSES ? common : next;
+                long next = LeastCommonMultiple.of(common, order);
+                common = next > MOST_CLASSES ? common : (int) next;
             }
         }
         return common;
-    }
-
-    private static int gcd(int a, int b) {
-        return b == 0 ? a : gcd(b, a % b);
     }
 
     private static List<Enclosed> all(Line line) {

@@ -1,7 +1,9 @@
 package org.pofk.claim;
 
 import java.util.ArrayList;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
 import org.pofk.exact.Factorization.Factor;
 import org.pofk.exact.Polynomial;
 import org.pofk.exact.Rational;
@@ -70,7 +72,7 @@ record TransformTarget(OutputTruth truth, int overZ, TransferFunction<Rational> 
         }
         List<Quantity> sum = List.of();
         for (FormPole pole : poles.counts().keySet()) {
-            java.util.Map<FormPole, Integer> others = new java.util.LinkedHashMap<>(poles.counts());
+            Map<FormPole, Integer> others = new LinkedHashMap<>(poles.counts());
             others.remove(pole);
             List<Quantity> product = QuantityPolynomials.times(partAt(pole), new RootCounts(others).polynomial());
             sum = QuantityPolynomials.plus(sum, product);

@@ -2,6 +2,7 @@ package org.pofk.claim;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.IntStream;
 import org.pofk.exact.ComplexBall;
 import org.pofk.exact.Rational;
 import org.pofk.meaning.Decision;
@@ -35,7 +36,7 @@ record Wave(Quantity coefficient, int power, Quantity base, Optional<Quantity> r
     static List<Wave> of(TruePole pole) {
         List<Quantity> coefficients = PowersOfK.of(pole);
         Rational doubled = pole.isReal() ? Rational.ONE : Rational.TWO;
-        return java.util.stream.IntStream.range(0, coefficients.size())
+        return IntStream.range(0, coefficients.size())
                 .mapToObj(power -> new Wave(coefficients.get(power).times(doubled), power, pole.value(),
                         Optional.empty())).toList();
     }

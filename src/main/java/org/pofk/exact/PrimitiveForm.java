@@ -11,13 +11,7 @@ import java.util.List;
 record PrimitiveForm(Rational content, IntegerPolynomial part) {
 
     static PrimitiveForm of(Polynomial<Rational> polynomial) {
-        BigInteger denominator = BigInteger.ONE;
-        for (Rational coefficient : polynomial.coefficients()) {
-            BigInteger next = coefficient.denominator();
-            if (!next.equals(denominator)) {
-                denominator = denominator.divide(denominator.gcd(next)).multiply(next);
-            }
-        }
+        BigInteger denominator = CommonDenominator.of(polynomial.coefficients());
         List<BigInteger> integers = new ArrayList<>(polynomial.coefficients().size());
         for (Rational coefficient : polynomial.coefficients()) {
             integers.add(coefficient.denominator().equals(denominator)

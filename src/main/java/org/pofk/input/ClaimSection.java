@@ -1,6 +1,7 @@
 package org.pofk.input;
 
 import java.util.List;
+import java.util.Locale;
 import java.util.Optional;
 import org.pofk.chain.Model.Convention;
 import org.pofk.claim.Claim;
@@ -8,7 +9,6 @@ import org.pofk.claim.Claim.SafeSide;
 import org.pofk.claim.Claim.Steps;
 import org.pofk.claim.Claim.Within;
 import org.pofk.claim.Claims.Review;
-import org.pofk.claim.Statement;
 import org.pofk.exact.Rational;
 import org.pofk.meaning.Carried;
 
@@ -30,7 +30,7 @@ final class ClaimSection {
 
         @Override
         public String word() {
-            return name().toLowerCase(java.util.Locale.ROOT);
+            return name().toLowerCase(Locale.ROOT);
         }
     }
 

@@ -9,7 +9,6 @@ import org.pofk.chain.Model;
 import org.pofk.chain.Model.About;
 import org.pofk.chain.Model.Convention;
 import org.pofk.chain.Model.Origin;
-import org.pofk.chain.Model.Step;
 import org.pofk.chain.Place;
 import org.pofk.chain.Place.Part;
 import org.pofk.chain.SparseMatrix;

@@ -1,5 +1,6 @@
 package org.pofk.input;
 
+import java.util.Collections;
 import java.util.LinkedHashMap;
 import java.util.Map;
 import java.util.Optional;
@@ -21,7 +22,7 @@ public record Overrides(Map<String, String> parameters, Optional<String> start) 
     static final String START_OPTION = "--start";
 
     public Overrides {
-        parameters = java.util.Collections.unmodifiableMap(new LinkedHashMap<>(parameters));
+        parameters = Collections.unmodifiableMap(new LinkedHashMap<>(parameters));
     }
 
     /** Whether each state is to be the start in turn: then the model starts in all of them with equal chances. */

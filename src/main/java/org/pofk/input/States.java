@@ -7,6 +7,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
+import java.util.stream.IntStream;
 import org.pofk.text.Position;
 
 /** The states of a model, in order, by name. */
@@ -55,7 +56,7 @@ final class States {
 
     /** States without names of their own: 1 … n. */
     static States numbered(int n) {
-        return new States(java.util.stream.IntStream.rangeClosed(1, n).mapToObj(Integer::toString).toList(),
+        return new States(IntStream.rangeClosed(1, n).mapToObj(Integer::toString).toList(),
                 List.of(), Set.of());
     }
 

@@ -3,6 +3,7 @@ package org.pofk.longrun;
 import java.math.BigInteger;
 import java.util.List;
 import org.pofk.chain.SparseMatrix;
+import org.pofk.exact.LeastCommonMultiple;
 import org.pofk.exact.Rational;
 
 /**
@@ -31,7 +32,7 @@ final class IntegerRows {
             for (SparseMatrix.Entry entry : column) {
                 BigInteger denominator = entry.value().denominator();
                 BigInteger known = scale[entry.row()];
-                scale[entry.row()] = known.multiply(denominator.divide(known.gcd(denominator)));
+                scale[entry.row()] = LeastCommonMultiple.of(known, denominator);
                 counts[entry.row()]++;
             }
         }

@@ -4,7 +4,6 @@ import java.math.BigInteger;
 import java.util.Optional;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Structure;
-import org.pofk.chain.Structure.CommunicatingClass;
 import org.pofk.transform.Transform;
 
 /**
@@ -56,8 +55,6 @@ public record LongRunChecks(LongRun byPoles, Optional<LongRun> byClasses, Option
     }
 
     private static BigInteger periodOf(Chain chain, Structure structure) {
-        return chain.kind() == Chain.Kind.RECURSION ? BigInteger.ONE : structure.closedClasses().stream()
-                .filter(CommunicatingClass::reached).map(each -> BigInteger.valueOf(each.period()))
-                .reduce(BigInteger.ONE, (a, b) -> a.divide(a.gcd(b)).multiply(b));
+        return chain.kind() == Chain.Kind.RECURSION ? BigInteger.ONE : structure.period();
     }
 }

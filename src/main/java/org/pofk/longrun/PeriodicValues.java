@@ -3,6 +3,7 @@ package org.pofk.longrun;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import org.pofk.exact.LeastCommonMultiple;
 import org.pofk.exact.Rational;
 
 /**
@@ -26,7 +27,7 @@ record PeriodicValues(List<List<Rational>> parts, Rational constant) {
         List<List<Rational>> least = parts.stream().map(PeriodicValues::leastPeriod).toList();
         long period = 1;
         for (List<Rational> part : least) {
-            period = leastCommonMultiple(period, part.size());
+            period = LeastCommonMultiple.of(period, part.size());
             if (period > LISTED_UP_TO) {
                 return new LongRun.None(LongRun.Reason.CYCLE_TOO_LONG, Optional.of(average()),
                         "cycles with a period above " + LISTED_UP_TO + ", too long to list");
@@ -69,16 +70,5 @@ record PeriodicValues(List<List<Rational>> parts, Rational constant) {
             }
         }
         return true;
-    }
-
-    private static long leastCommonMultiple(long a, long b) {
-        long first = a;
-        long second = b;
-        while (second != 0) {
-            long rest = first % second;
-            first = second;
-            second = rest;
-        }
-        return a / first * b;
     }
 }

@@ -1,6 +1,7 @@
 package org.pofk.longrun;
 
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
@@ -23,7 +24,7 @@ public final class StationaryDistribution {
         for (int state : others) {
             columns.add(identityMinus(matrix, state, place));
         }
-        List<Rational> right = new ArrayList<>(java.util.Collections.nCopies(others.size(), Rational.ZERO));
+        List<Rational> right = new ArrayList<>(Collections.nCopies(others.size(), Rational.ZERO));
         for (SparseMatrix.Entry entry : matrix.columns().get(closedClass.get(0))) {
             if (place.containsKey(entry.row())) {
                 right.set(place.get(entry.row()), entry.value());

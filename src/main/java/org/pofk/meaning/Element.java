@@ -3,6 +3,7 @@ package org.pofk.meaning;
 import java.math.BigInteger;
 import java.util.HashMap;
 import java.util.Map;
+import org.pofk.exact.LeastCommonMultiple;
 import org.pofk.exact.Rational;
 
 /**
@@ -56,7 +57,7 @@ record Element(Map<Long, BigInteger> coefficients, BigInteger denominator) {
     }
 
     Element plus(Element other) {
-        BigInteger common = denominator.divide(denominator.gcd(other.denominator)).multiply(other.denominator);
+        BigInteger common = LeastCommonMultiple.of(denominator, other.denominator);
         BigInteger first = common.divide(denominator);
         BigInteger second = common.divide(other.denominator);
         Map<Long, BigInteger> sum = new HashMap<>();

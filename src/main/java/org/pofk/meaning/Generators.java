@@ -7,6 +7,7 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import org.pofk.exact.CommonDenominator;
 import org.pofk.exact.Polynomial;
 import org.pofk.exact.Rational;
 import org.pofk.exact.Root;
@@ -139,8 +140,7 @@ final class Generators {
 
     /** c^d q(x/c), whose roots are c times those of q. */
     private static Roots withoutDenominators(Polynomial<Rational> monic) {
-        BigInteger scale = monic.coefficients().stream().map(Rational::denominator)
-                .reduce(BigInteger.ONE, (a, b) -> a.divide(a.gcd(b)).multiply(b));
+        BigInteger scale = CommonDenominator.of(monic.coefficients());
         List<Element> coefficients = new ArrayList<>();
         for (int power = 0; power <= monic.degree(); power++) {
             coefficients.add(Element.of(monic.coefficient(power)

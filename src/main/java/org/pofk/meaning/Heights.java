@@ -7,7 +7,9 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.TreeSet;
+import org.pofk.exact.CommonDenominator;
 import org.pofk.exact.Cyclotomic;
+import org.pofk.exact.LeastCommonMultiple;
 import org.pofk.exact.Polynomial;
 import org.pofk.exact.Rational;
 import org.pofk.exact.Root;
@@ -69,7 +71,7 @@ final class Heights extends Walk<Optional<Long>> {
     }
 
     private void takeInOrder(BigInteger other) {
-        order = order.divide(order.gcd(other)).multiply(other);
+        order = LeastCommonMultiple.of(order, other);
     }
 
     private static Optional<Long> rational(Rational value) {
@@ -99,8 +101,7 @@ final class Heights extends Walk<Optional<Long>> {
 
     /** At least the logarithm of Mahler's measure of the primitive integer multiple, by Landau's ‖q‖₂. */
     static long measure(Polynomial<Rational> polynomial) {
-        BigInteger denominator = polynomial.coefficients().stream().map(Rational::denominator)
-                .reduce(BigInteger.ONE, (a, b) -> a.divide(a.gcd(b)).multiply(b));
+        BigInteger denominator = CommonDenominator.of(polynomial.coefficients());
         BigInteger squares = polynomial.coefficients().stream()
                 .map(c -> c.numerator().multiply(denominator.divide(c.denominator())))
                 .map(c -> c.multiply(c)).reduce(BigInteger.ZERO, BigInteger::add);
@@ -171,7 +172,7 @@ final class Heights extends Walk<Optional<Long>> {
     private Optional<Long> rotation(int angleNumber, Rational times) {
         Node.Angle angle = (Node.Angle) same.withNumber(angleNumber);
         takeInOrder(BigInteger.valueOf(4));
-        anglesOver.merge(angleNumber, times.denominator(), (a, b) -> a.divide(a.gcd(b)).multiply(b));
+        anglesOver.merge(angleNumber, times.denominator(), LeastCommonMultiple::of);
         return of(angle.argument()).map(height -> {
             long doubled = Math.addExact(height, 2 * Logarithm.PER_BIT);
             BigInteger total = BigInteger.valueOf(doubled).multiply(times.numerator().abs());

@@ -2,6 +2,7 @@ package org.pofk.meaning;
 
 import java.math.BigInteger;
 import java.util.Optional;
+import org.pofk.exact.LeastCommonMultiple;
 import org.pofk.exact.Rational;
 
 /**
@@ -23,13 +24,9 @@ final class Unity extends Walk<BigInteger> {
     private BigInteger ofParts(Iterable<Quantity> parts) {
         BigInteger order = BigInteger.ONE;
         for (Quantity part : parts) {
-            order = common(order, of(part));
+            order = LeastCommonMultiple.of(order, of(part));
         }
         return order;
-    }
-
-    private static BigInteger common(BigInteger a, BigInteger b) {
-        return a.divide(a.gcd(b)).multiply(b);
     }
 
     @Override
@@ -60,7 +57,7 @@ final class Unity extends Walk<BigInteger> {
 
     @Override
     public BigInteger product(Node.Product product) {
-        return common(of(product.first()), of(product.second()));
+        return LeastCommonMultiple.of(of(product.first()), of(product.second()));
     }
 
     @Override
@@ -81,7 +78,7 @@ final class Unity extends Walk<BigInteger> {
         }
         Rational halfTurns = exponent.get().pi().imaginary();
         BigInteger order = halfTurns.times(Rational.HALF).denominator();
-        return exponent.get().angles().isEmpty() ? order : common(order, FOUR);
+        return exponent.get().angles().isEmpty() ? order : LeastCommonMultiple.of(order, FOUR);
     }
 
     @Override

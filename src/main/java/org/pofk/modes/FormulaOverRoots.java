@@ -5,6 +5,7 @@ import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import java.util.stream.Stream;
+import org.pofk.exact.CommonDenominator;
 import org.pofk.exact.Polynomial;
 import org.pofk.exact.Rational;
 import org.pofk.formula.Formula;
@@ -81,8 +82,7 @@ final class FormulaOverRoots {
     private static Rational content(Stream<Rational> numbers) {
         List<Rational> all = numbers.toList();
         BigInteger divisor = all.stream().map(Rational::numerator).reduce(BigInteger.ZERO, BigInteger::gcd);
-        BigInteger denominator = all.stream().map(Rational::denominator)
-                .reduce(BigInteger.ONE, (a, b) -> a.divide(a.gcd(b)).multiply(b));
+        BigInteger denominator = CommonDenominator.of(all);
         return new Rational(divisor, denominator);
     }
 

@@ -1,6 +1,7 @@
 package org.pofk.report;
 
 import java.util.List;
+import java.util.Optional;
 import org.pofk.answer.DerivedOutput;
 import org.pofk.exact.Factorization;
 import org.pofk.exact.Polynomial;
@@ -80,7 +81,7 @@ final class JsonOutput {
     }
 
     /** Exact where it is exact throughout, otherwise in decimals that give p(k) to the digits for every k. */
-    private java.util.Optional<Formula> formula(ClosedForm form) {
+    private Optional<Formula> formula(ClosedForm form) {
         return form.exactFormula().or(() -> form.decimalForm(numbers.digits()).formula());
     }
 

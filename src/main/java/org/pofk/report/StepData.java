@@ -6,6 +6,8 @@ import java.util.List;
 import java.util.Optional;
 import java.util.stream.Collectors;
 import java.util.stream.IntStream;
+import org.pofk.exact.CommonDenominator;
+import org.pofk.exact.LeastCommonMultiple;
 import org.pofk.exact.Rational;
 import org.pofk.report.Document.Sequence;
 
@@ -26,7 +28,7 @@ record StepData(BigInteger scale, BigInteger divisor, List<BigInteger> recurrenc
     static Optional<StepData> of(Sequence sequence) {
         int order = sequence.first().size();
         BigInteger scale = scale(sequence.recurrence());
-        BigInteger divisor = commonDenominator(IntStream.range(0, order)
+        BigInteger divisor = CommonDenominator.of(IntStream.range(0, order)
                 .mapToObj(i -> sequence.first().get(i).times(Rational.of(scale.pow(i)))).toList());
         List<BigInteger> recurrence = new ArrayList<>();
         List<BigInteger> first = new ArrayList<>();
@@ -59,12 +61,7 @@ record StepData(BigInteger scale, BigInteger divisor, List<BigInteger> recurrenc
             }
             scale = scale.multiply(BigInteger.valueOf(prime).pow(needed));
         }
-        return scale.multiply(rest.stream().reduce(BigInteger.ONE, (a, b) -> a.divide(a.gcd(b)).multiply(b)));
-    }
-
-    private static BigInteger commonDenominator(List<Rational> numbers) {
-        return numbers.stream().map(Rational::denominator).reduce(BigInteger.ONE,
-                (a, b) -> a.divide(a.gcd(b)).multiply(b));
+        return scale.multiply(rest.stream().reduce(BigInteger.ONE, LeastCommonMultiple::of));
     }
 
     private static BigInteger whole(Rational number) {

@@ -2,6 +2,7 @@ package org.pofk.report;
 
 import java.math.BigDecimal;
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -10,7 +11,7 @@ import java.util.stream.Collectors;
 /** An element of SVG: a name, attributes in their order, and either text or elements inside. */
 record SvgElement(String name, Map<String, String> attributes, String text, List<SvgElement> inside) {
     SvgElement {
-        attributes = java.util.Collections.unmodifiableMap(new LinkedHashMap<>(attributes));
+        attributes = Collections.unmodifiableMap(new LinkedHashMap<>(attributes));
         inside = List.copyOf(inside);
     }
 

@@ -11,7 +11,6 @@ import org.pofk.report.Picture.Label;
 import org.pofk.report.Picture.Mark;
 import org.pofk.report.Picture.Point;
 import org.pofk.report.Picture.Ring;
-import org.pofk.report.Picture.Setting;
 import org.pofk.report.Picture.Stroke;
 
 /**

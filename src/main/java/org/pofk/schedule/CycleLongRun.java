@@ -2,12 +2,14 @@ package org.pofk.schedule;
 
 import java.math.BigInteger;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Outputs;
 import org.pofk.chain.Structure;
 import org.pofk.chain.Structure.CommunicatingClass;
+import org.pofk.exact.LeastCommonMultiple;
 import org.pofk.exact.Rational;
 import org.pofk.longrun.LongRun;
 import org.pofk.longrun.LongRunValues;
@@ -32,9 +34,7 @@ record CycleLongRun<V>(int cycles, V limit) {
 
     /** d, from which moves of S there are; empty when it is above {@value #CYCLES_AT_MOST}. */
     static Optional<Integer> period(Structure structure) {
-        BigInteger period = structure.closedClasses().stream().filter(CommunicatingClass::reached)
-                .map(each -> BigInteger.valueOf(each.period()))
-                .reduce(BigInteger.ONE, (a, b) -> a.divide(a.gcd(b)).multiply(b));
+        BigInteger period = structure.period();
         return period.bitLength() < Integer.SIZE && period.intValue() <= CYCLES_AT_MOST
                 ? Optional.of(period.intValue()) : Optional.empty();
     }
@@ -51,7 +51,7 @@ record CycleLongRun<V>(int cycles, V limit) {
         BigInteger[][] table = matrix.table();
         WholeState visits = visits(matrix.divisor(), table, start, left);
         BigInteger[] numerators = new BigInteger[matrix.size()];
-        java.util.Arrays.fill(numerators, BigInteger.ZERO);
+        Arrays.fill(numerators, BigInteger.ZERO);
         WholeState limit = new WholeState(List.of(numerators), BigInteger.ONE);
         for (List<Integer> closed : closedClasses(structure)) {
             limit = sum(limit, ending(matrix.divisor(), table, start, left, visits, closed));
@@ -64,7 +64,7 @@ record CycleLongRun<V>(int cycles, V limit) {
         List<List<Rational>> values = Transforms.of(cycles, Outputs.states(cycles)).stream()
                 .map(LongRun::of).map(LongRunValues::of).toList();
         BigInteger period = values.stream().map(each -> BigInteger.valueOf(Math.max(1, each.size())))
-                .reduce(BigInteger.ONE, (a, b) -> a.divide(a.gcd(b)).multiply(b));
+                .reduce(BigInteger.ONE, LeastCommonMultiple::of);
         return values.stream().anyMatch(List::isEmpty) || period.bitLength() >= Integer.SIZE
                 || period.intValue() > CYCLES_AT_MOST ? Optional.empty()
                 : Optional.of(new CycleLongRun<>(period.intValue(),
@@ -101,7 +101,7 @@ record CycleLongRun<V>(int cycles, V limit) {
                 .plus(new Fraction(entered, divisor.multiply(visits.divisor())));
         WholeState stationary = stationary(divisor, table, members);
         BigInteger[] numerators = new BigInteger[table.length];
-        java.util.Arrays.fill(numerators, BigInteger.ZERO);
+        Arrays.fill(numerators, BigInteger.ZERO);
         for (int i = 0; i < members.size(); i++) {
             numerators[members.get(i)] = stationary.numerators().get(i).multiply(weight.numerator());
         }
@@ -171,7 +171,7 @@ record CycleLongRun<V>(int cycles, V limit) {
     private static FixedPointState below(List<FixedPointColumn> power, FixedPointState state,
             List<List<Integer>> closed) {
         BigInteger[] components = new BigInteger[power.size()];
-        java.util.Arrays.fill(components, BigInteger.ZERO);
+        Arrays.fill(components, BigInteger.ZERO);
         for (List<Integer> members : closed) {
             BigInteger share = members.stream().map(state.components()::get).reduce(BigInteger.ZERO, BigInteger::add);
             for (int i : members) {

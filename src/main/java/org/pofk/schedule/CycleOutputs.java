@@ -1,6 +1,7 @@
 package org.pofk.schedule;
 
 import java.math.BigInteger;
+import java.util.ArrayList;
 import java.util.List;
 import org.pofk.chain.Output;
 import org.pofk.chain.Timetable;
@@ -62,7 +63,7 @@ final class CycleOutputs {
     /** The divisor of the longer row is a multiple of the other's. */
     private static WholeState plus(WholeState row, WholeState once) {
         BigInteger factor = row.divisor().divide(once.divisor());
-        java.util.List<BigInteger> sum = new java.util.ArrayList<>();
+        List<BigInteger> sum = new ArrayList<>();
         for (int i = 0; i < row.numerators().size(); i++) {
             sum.add(row.numerators().get(i).add(once.numerators().get(i).multiply(factor)));
         }

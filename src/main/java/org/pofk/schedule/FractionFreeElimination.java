@@ -1,6 +1,7 @@
 package org.pofk.schedule;
 
 import java.math.BigInteger;
+import java.util.Arrays;
 import java.util.Optional;
 import org.pofk.steps.WholeState;
 
@@ -73,7 +74,7 @@ final class FractionFreeElimination {
             solution[i] = sum.divide(rows[i][i]);
         }
         boolean isNegative = determinant.signum() < 0;
-        return new WholeState(java.util.Arrays.stream(solution)
+        return new WholeState(Arrays.stream(solution)
                 .map(each -> isNegative ? each.negate() : each).toList(), determinant.abs());
     }
 }

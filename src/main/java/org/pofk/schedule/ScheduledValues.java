@@ -2,6 +2,7 @@ package org.pofk.schedule;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.function.UnaryOperator;
 import java.util.stream.Collectors;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Output;
@@ -59,7 +60,7 @@ final class ScheduledValues {
     }
 
     private static <V, R> List<List<Reading>> walked(Timetable timetable, StateArithmetic<V, R> arithmetic, V start,
-            java.util.function.UnaryOperator<V> cycle, List<Output> outputs, List<Integer> at) {
+            UnaryOperator<V> cycle, List<Output> outputs, List<Integer> at) {
         List<List<Reading>> values = outputs.stream().map(output -> new ArrayList<Reading>())
                 .collect(Collectors.toList());
         V begun = start;

@@ -1,7 +1,6 @@
 package org.pofk.slip;
 
 import java.util.List;
-import org.pofk.claim.AuthorText;
 import org.pofk.claim.AuthorText.Replacement;
 import org.pofk.text.Span;
 

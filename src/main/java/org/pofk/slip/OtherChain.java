@@ -6,6 +6,7 @@ import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
+import java.util.stream.Collectors;
 import java.util.stream.IntStream;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
@@ -86,7 +87,7 @@ record OtherChain(SlipKind kind, String found, String right, Chain chain) {
                 .toList();
         return held.size() == 1 && chain.start().get(held.get(0)).isOne() ? chain.states().get(held.get(0))
                 : held.stream().map(i -> chain.states().get(i) + ": " + chain.start().get(i))
-                        .collect(java.util.stream.Collectors.joining(", "));
+                        .collect(Collectors.joining(", "));
     }
 
     private static List<OtherChain> shifted(Chain chain) {

@@ -2,7 +2,6 @@ package org.pofk.steps;
 
 import java.math.BigInteger;
 import java.util.ArrayList;
-import java.util.Arrays;
 import java.util.List;
 import java.util.stream.IntStream;
 import org.pofk.chain.Chain;
@@ -32,22 +31,17 @@ public record ExactSteps(List<List<Rational>> values) {
 
     /** The values at steps in ascending order. */
     public static ExactSteps at(Chain chain, List<Output> outputs, List<Integer> steps) {
-        BigInteger scale = commonDenominator(chain.matrix());
-        BigInteger divisor = commonDenominator(chain.start());
-        BigInteger[] state = new BigInteger[chain.size()];
-        for (int i = 0; i < state.length; i++) {
-            state[i] = times(chain.start().get(i), divisor);
-        }
+        WholeMatrix matrix = WholeMatrix.of(chain.matrix());
+        WholeState state = WholeState.of(chain.start());
         List<List<Rational>> values = new ArrayList<>();
         outputs.forEach(output -> values.add(new ArrayList<>()));
         int k = 0;
         for (int wanted : steps) {
             for (; k < wanted; k++) {
-                state = step(chain.matrix(), scale, state);
-                divisor = divisor.multiply(scale);
+                state = matrix.times(state);
             }
             for (int i = 0; i < outputs.size(); i++) {
-                values.get(i).add(reading(outputs.get(i), state, divisor));
+                values.get(i).add(state.reading(outputs.get(i)).reduced());
             }
         }
         return new ExactSteps(values);
@@ -55,53 +49,9 @@ public record ExactSteps(List<List<Rational>> values) {
 
     /** By how many bits the numbers grow in one step at most: L, or L times the largest sum of a column of |A|. */
     public static int bitsPerStep(SparseMatrix matrix) {
-        BigInteger scale = commonDenominator(matrix);
+        BigInteger scale = matrix.commonDenominator();
         return matrix.columns().stream().map(column -> column.stream()
-                .map(entry -> times(entry.value(), scale).abs()).reduce(BigInteger.ZERO, BigInteger::add))
+                .map(entry -> WholeMatrix.whole(entry.value(), scale).abs()).reduce(BigInteger.ZERO, BigInteger::add))
                 .reduce(scale, BigInteger::max).bitLength();
-    }
-
-    /** L, of all entries of a matrix. */
-    private static BigInteger commonDenominator(SparseMatrix matrix) {
-        return commonDenominator(matrix.columns().stream().flatMap(List::stream).map(SparseMatrix.Entry::value)
-                .toList());
-    }
-
-    private static BigInteger commonDenominator(List<Rational> values) {
-        return values.stream().map(Rational::denominator).distinct()
-                .reduce(BigInteger.ONE, ExactSteps::leastCommonMultiple);
-    }
-
-    private static BigInteger[] step(SparseMatrix matrix, BigInteger scale, BigInteger[] state) {
-        BigInteger[] next = new BigInteger[state.length];
-        Arrays.fill(next, BigInteger.ZERO);
-        for (int j = 0; j < state.length; j++) {
-            if (state[j].signum() != 0) {
-                for (SparseMatrix.Entry entry : matrix.columns().get(j)) {
-                    next[entry.row()] = next[entry.row()].add(times(entry.value(), scale).multiply(state[j]));
-                }
-            }
-        }
-        return next;
-    }
-
-    private static Rational reading(Output output, BigInteger[] state, BigInteger divisor) {
-        BigInteger common = commonDenominator(output.coefficients());
-        BigInteger sum = BigInteger.ZERO;
-        for (int i = 0; i < state.length; i++) {
-            Rational weight = output.coefficients().get(i);
-            if (!weight.isZero()) {
-                sum = sum.add(times(weight, common).multiply(state[i]));
-            }
-        }
-        return new Rational(sum, divisor.multiply(common)).plus(output.constant());
-    }
-
-    private static BigInteger times(Rational value, BigInteger multiple) {
-        return value.numerator().multiply(multiple.divide(value.denominator()));
-    }
-
-    private static BigInteger leastCommonMultiple(BigInteger a, BigInteger b) {
-        return a.divide(a.gcd(b)).multiply(b);
     }
 }

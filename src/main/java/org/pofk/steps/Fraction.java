@@ -55,9 +55,14 @@ public record Fraction(BigInteger numerator, BigInteger denominator) {
         return new Ball(quotient, quotient.abs().shiftRight(LEADING_BITS - 2).add(BigInteger.valueOf(4)), LEADING_BITS);
     }
 
+    /** In lowest terms. */
+    Rational reduced() {
+        return new Rational(numerator, denominator);
+    }
+
     KnownValue known() {
         if ((long) numerator.bitLength() + denominator.bitLength() <= 2 * SHOWN_BITS) {
-            return KnownValue.of(new Rational(numerator, denominator));
+            return KnownValue.of(reduced());
         }
         return new KnownValue(KnownValue.Word.EXACT, Optional.empty(), bits ->
                 new Ball(numerator.shiftLeft(Math.max(bits, 0)).divide(denominator), BigInteger.ONE,

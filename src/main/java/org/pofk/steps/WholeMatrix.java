@@ -3,8 +3,8 @@ package org.pofk.steps;
 import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.Arrays;
-import java.util.Collection;
 import java.util.List;
+import java.util.stream.IntStream;
 import org.pofk.chain.SparseMatrix;
 import org.pofk.chain.SparseMatrix.Entry;
 import org.pofk.exact.Rational;
@@ -25,8 +25,7 @@ public final class WholeMatrix {
     }
 
     public static WholeMatrix of(SparseMatrix matrix) {
-        BigInteger common = commonDenominator(matrix.columns().stream().flatMap(List::stream).map(Entry::value)
-                .distinct().toList());
+        BigInteger common = matrix.commonDenominator();
         return new WholeMatrix(
                 matrix.columns().stream().map(column -> column.stream().mapToInt(Entry::row).toArray())
                         .toArray(int[][]::new),
@@ -42,11 +41,6 @@ public final class WholeMatrix {
             values[j] = new BigInteger[] {BigInteger.ONE};
         }
         return new WholeMatrix(rows, values, BigInteger.ONE);
-    }
-
-    static BigInteger commonDenominator(Collection<Rational> values) {
-        return values.stream().map(Rational::denominator).distinct()
-                .reduce(BigInteger.ONE, (a, b) -> a.divide(a.gcd(b)).multiply(b));
     }
 
     static BigInteger whole(Rational value, BigInteger divisor) {
@@ -129,7 +123,7 @@ public final class WholeMatrix {
         BigInteger[][] newValues = new BigInteger[size()][];
         for (int j = 0; j < size(); j++) {
             BigInteger[] column = image(right.spread(j));
-            newRows[j] = java.util.stream.IntStream.range(0, size()).filter(i -> column[i].signum() != 0).toArray();
+            newRows[j] = IntStream.range(0, size()).filter(i -> column[i].signum() != 0).toArray();
             newValues[j] = Arrays.stream(newRows[j]).mapToObj(i -> column[i]).toArray(BigInteger[]::new);
         }
         return new WholeMatrix(newRows, newValues, divisor.multiply(right.divisor));

@@ -3,6 +3,7 @@ package org.pofk.steps;
 import java.math.BigInteger;
 import java.util.List;
 import org.pofk.chain.Output;
+import org.pofk.exact.CommonDenominator;
 import org.pofk.exact.Rational;
 
 /**
@@ -16,7 +17,7 @@ public record WholeState(List<BigInteger> numerators, BigInteger divisor) {
     }
 
     public static WholeState of(List<Rational> vector) {
-        BigInteger common = WholeMatrix.commonDenominator(vector);
+        BigInteger common = CommonDenominator.of(vector);
         return new WholeState(vector.stream().map(value -> WholeMatrix.whole(value, common)).toList(), common);
     }
 

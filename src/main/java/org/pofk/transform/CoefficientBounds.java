@@ -4,6 +4,7 @@ import java.math.BigInteger;
 import java.util.List;
 import org.pofk.chain.SparseMatrix;
 import org.pofk.chain.SparseMatrix.Entry;
+import org.pofk.exact.CommonDenominator;
 import org.pofk.exact.Rational;
 
 /**

@@ -5,6 +5,7 @@ import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 import org.pofk.chain.SparseMatrix.Entry;
+import org.pofk.exact.CommonDenominator;
 import org.pofk.exact.Polynomial;
 import org.pofk.exact.Rational;
 
@@ -24,8 +25,7 @@ final class ExactWindows {
 
     private ExactWindows(LinearSystem system) {
         this.system = system;
-        this.unit = CommonDenominator.of(system.matrix().columns().stream().flatMap(List::stream).map(Entry::value)
-                .distinct().toList());
+        this.unit = system.matrix().commonDenominator();
         this.starts = CommonDenominator.of(system.start());
         this.columns = system.matrix().columns().stream().map(column -> column.stream()
                 .map(entry -> times(entry.value(), unit)).toArray(BigInteger[]::new)).toList();

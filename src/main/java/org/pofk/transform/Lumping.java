@@ -8,6 +8,7 @@ import java.util.Map;
 import java.util.Optional;
 import org.pofk.chain.SparseMatrix;
 import org.pofk.chain.SparseMatrix.Entry;
+import org.pofk.exact.CommonDenominator;
 import org.pofk.exact.Rational;
 
 /**

@@ -7,7 +7,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.function.Function;
 import java.util.stream.IntStream;
-import org.pofk.chain.SparseMatrix;
+import org.pofk.exact.CommonDenominator;
 import org.pofk.exact.Polynomial;
 import org.pofk.exact.Rational;
 import org.pofk.transform.RecurrenceProof.Method;
@@ -117,8 +117,7 @@ final class Recurrences {
 
     /** By how many bits terms grow in a step; short denominators of an unscaled matrix count as nothing. */
     private int growth() {
-        int bits = CommonDenominator.of(system.matrix().columns().stream().flatMap(List::stream)
-                .map(SparseMatrix.Entry::value).distinct().toList()).bitLength();
+        int bits = system.matrix().commonDenominator().bitLength();
         return bits > SHORT_BITS ? bits : scaled.unit().bitLength();
     }
 

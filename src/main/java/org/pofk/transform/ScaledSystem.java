@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.stream.IntStream;
 import org.pofk.chain.SparseMatrix;
 import org.pofk.chain.SparseMatrix.Entry;
+import org.pofk.exact.CommonDenominator;
 import org.pofk.exact.Polynomial;
 import org.pofk.exact.Rational;
 
@@ -29,18 +30,13 @@ record ScaledSystem(LinearSystem system, CoefficientBounds bounds, BigInteger un
                 original.readings().stream().map(reading -> times(reading, readings)).toList());
         BigInteger weight = starts.multiply(readings);
         ScaledSystem asItIs = new ScaledSystem(whole, CoefficientBounds.of(whole), BigInteger.ONE, weight);
-        BigInteger unit = commonDenominator(original.matrix());
+        BigInteger unit = original.matrix().commonDenominator();
         if (unit.bitLength() > LONGEST_UNIT || unit.equals(BigInteger.ONE)) {
             return asItIs;
         }
         LinearSystem integral = new LinearSystem(times(original.matrix(), unit), whole.start(), whole.readings());
         ScaledSystem scaled = new ScaledSystem(integral, CoefficientBounds.of(integral), unit, weight);
         return scaled.bounds.wanted().compareTo(asItIs.bounds.wanted()) <= 0 ? scaled : asItIs;
-    }
-
-    private static BigInteger commonDenominator(SparseMatrix matrix) {
-        return CommonDenominator.of(matrix.columns().stream().flatMap(List::stream).map(Entry::value).distinct()
-                .toList());
     }
 
     private static List<Rational> times(List<Rational> vector, BigInteger factor) {

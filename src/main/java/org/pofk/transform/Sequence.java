@@ -2,11 +2,12 @@ package org.pofk.transform;
 
 import java.math.BigInteger;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import java.util.stream.IntStream;
 import org.pofk.chain.Chain;
-import org.pofk.chain.SparseMatrix.Entry;
 import org.pofk.exact.Ball;
+import org.pofk.exact.CommonDenominator;
 import org.pofk.exact.Polynomial;
 import org.pofk.exact.Rational;
 
@@ -31,8 +32,7 @@ public final class Sequence {
 
     /** The values of a transform of the chain. */
     public static Sequence of(Chain chain, Transform transform) {
-        return of(transform.recurrence(), transform.y(), CommonDenominator.of(chain.matrix().columns().stream()
-                .flatMap(List::stream).map(Entry::value).distinct().toList()));
+        return of(transform.recurrence(), transform.y(), chain.matrix().commonDenominator());
     }
 
     /** The values of a sequence known by its transform alone. */
@@ -114,7 +114,7 @@ public final class Sequence {
 
     private static List<BigInteger> product(List<BigInteger> a, List<BigInteger> b) {
         BigInteger[] product = new BigInteger[a.size() + b.size() - 1];
-        java.util.Arrays.fill(product, BigInteger.ZERO);
+        Arrays.fill(product, BigInteger.ZERO);
         for (int i = 0; i < a.size(); i++) {
             if (a.get(i).signum() != 0) {
                 for (int j = 0; j < b.size(); j++) {

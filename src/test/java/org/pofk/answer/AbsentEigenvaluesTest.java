@@ -3,6 +3,7 @@ package org.pofk.answer;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.stream.Collectors;
@@ -96,7 +97,7 @@ class AbsentEigenvaluesTest {
     }
 
     private static List<Rational> replaced(List<Rational> list, int place, Rational value) {
-        List<Rational> copy = new java.util.ArrayList<>(list);
+        List<Rational> copy = new ArrayList<>(list);
         copy.set(place, value);
         return copy;
     }

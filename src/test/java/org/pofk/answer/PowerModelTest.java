@@ -5,6 +5,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.nio.file.Path;
 import java.util.List;
+import java.util.Optional;
 import java.util.stream.IntStream;
 import org.junit.jupiter.api.Test;
 import org.pofk.Pofk;
@@ -45,7 +46,7 @@ class PowerModelTest {
                 Rational value = output.closedForm().orElseThrow().expansion().valueAt(k);
                 assertEquals(state.get(to), value, file + ": " + from + " to " + to + " in " + k);
                 if (k == 3) {
-                    assertEquals(List.of(new StepValue(3, java.util.Optional.of(value),
+                    assertEquals(List.of(new StepValue(3, Optional.of(value),
                             output.values().get(0).enclosure())), output.values());
                 }
                 sum = sum.plus(value);

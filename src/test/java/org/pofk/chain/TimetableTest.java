@@ -5,6 +5,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalInt;
 import java.util.Random;
@@ -21,7 +22,7 @@ import org.pofk.exact.Rational;
 class TimetableTest {
     private static final long SEED = 61_508L;
     private static final Chain CHAIN = new Chain(Chain.Kind.CHAIN, List.of("works", "failed"), matrix(9, 10),
-            List.of(Rational.ONE, Rational.ZERO), java.util.Map.of(), List.of());
+            List.of(Rational.ONE, Rational.ZERO), Map.of(), List.of());
     private static final Action TEST = new Action("test", matrix(1, 1));
     private static final Action OVERHAUL = new Action("overhaul", matrix(1, 2));
 

@@ -9,6 +9,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.Random;
 import java.util.Set;
+import java.util.stream.IntStream;
 import org.junit.jupiter.api.Test;
 import org.pofk.chain.Output;
 
@@ -19,7 +20,7 @@ class ArbiterTest {
 
     private static List<Subject> some() {
         List<Subject> all = Subject.all();
-        return java.util.stream.IntStream.range(0, all.size()).filter(i -> i % EVERY == 0).mapToObj(all::get).toList();
+        return IntStream.range(0, all.size()).filter(i -> i % EVERY == 0).mapToObj(all::get).toList();
     }
 
     @Test

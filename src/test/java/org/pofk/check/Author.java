@@ -3,6 +3,7 @@ package org.pofk.check;
 import java.math.BigDecimal;
 import java.math.RoundingMode;
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -154,7 +155,7 @@ final class Author {
         if (atZero > 0) {
             texts.add("0" + times(atZero));
         }
-        java.util.Collections.shuffle(texts, random);
+        Collections.shuffle(texts, random);
         return texts;
     }
 

@@ -8,6 +8,7 @@ import java.util.Optional;
 import java.util.Random;
 import java.util.function.Predicate;
 import java.util.function.UnaryOperator;
+import java.util.stream.Collectors;
 import org.pofk.check.Token.Role;
 import org.pofk.exact.Rational;
 import org.pofk.slip.SlipKind;
@@ -226,7 +227,7 @@ final class FormulaSlips {
         List<Integer> terms = tokens.stream().filter(token -> token.role() == Role.COEFFICIENT).map(Token::term)
                 .distinct().filter(term -> !oscillates(term) && count(term, Role.COEFFICIENT) == 1
                         && count(term, Role.SIGN) == 1 && count(term, Role.IMPULSE) == 0
-                        && !hasFactorInK(term)).collect(java.util.stream.Collectors.toCollection(ArrayList::new));
+                        && !hasFactorInK(term)).collect(Collectors.toCollection(ArrayList::new));
         if (terms.size() < 2) {
             return Optional.empty();
         }
@@ -255,7 +256,7 @@ final class FormulaSlips {
 
     private Optional<List<Token>> withoutTerm(Predicate<Token> inTerm) {
         List<Integer> terms = tokens.stream().filter(inTerm).map(Token::term).distinct()
-                .collect(java.util.stream.Collectors.toCollection(ArrayList::new));
+                .collect(Collectors.toCollection(ArrayList::new));
         long all = tokens.stream().map(Token::term).distinct().count();
         if (terms.isEmpty() || all < 2 || tokens.stream().anyMatch(token -> token.role() == Role.FRONT)) {
             return Optional.empty();

@@ -8,6 +8,7 @@ import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.EnumMap;
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 import java.util.TreeMap;
 import org.pofk.claim.Verdict;
@@ -206,9 +207,9 @@ final class Measurement {
                 .append(" wrong claims, ").append(passed.size()).append(" passed; ").append(faults.size())
                 .append(" faults; ").append(uncounted).append(" of ").append(edits)
                 .append(" edits not counted, for they can't be told from a rounding\n")
-                .append(String.format(java.util.Locale.ROOT, "named first %.2f %%, named %.2f %%, both of two %d of %d%n",
+                .append(String.format(Locale.ROOT, "named first %.2f %%, named %.2f %%, both of two %d of %d%n",
                         namedFirstShare(), namedShare(), pairsNamed, pairs));
-        bySlip.forEach((kind, score) -> text.append(String.format(java.util.Locale.ROOT, "  %-26s %5d  first %5d  named %5d%n",
+        bySlip.forEach((kind, score) -> text.append(String.format(Locale.ROOT, "  %-26s %5d  first %5d  named %5d%n",
                 kind, score.claims, score.first, score.named)));
         list(text, "faults", faults, SHOWN);
         list(text, "false alarms", falseAlarms, SHOWN);

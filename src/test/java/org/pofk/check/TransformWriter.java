@@ -1,6 +1,7 @@
 package org.pofk.check;
 
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.List;
 import java.util.Optional;
 import java.util.Random;
@@ -192,7 +193,7 @@ final class TransformWriter {
             }
         }
         if (random.nextBoolean()) {
-            java.util.Collections.shuffle(terms, random);
+            Collections.shuffle(terms, random);
         }
         terms.forEach(term -> term.accept(pieces));
     }

@@ -16,6 +16,8 @@ import java.util.Map;
 import java.util.TreeSet;
 import java.util.jar.Attributes;
 import java.util.jar.JarFile;
+import java.util.regex.MatchResult;
+import java.util.regex.Pattern;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
@@ -86,8 +88,8 @@ class DistributionTest {
     @Test
     void everyLicenceTheNoticeNamesIsThere() throws IOException {
         String notice = Files.readString(HOME.resolve("NOTICE"));
-        List<String> texts = java.util.regex.Pattern.compile("licences/[A-Za-z0-9.-]+\\.(txt|md)").matcher(notice)
-                .results().map(java.util.regex.MatchResult::group).distinct().toList();
+        List<String> texts = Pattern.compile("licences/[A-Za-z0-9.-]+\\.(txt|md)").matcher(notice)
+                .results().map(MatchResult::group).distinct().toList();
         assertEquals(10, texts.size());
         for (String text : texts) {
             assertTrue(Files.size(HOME.resolve(text)) > 1000, text);

@@ -7,7 +7,9 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.Arrays;
 import java.util.List;
+import java.util.regex.Pattern;
 import java.util.stream.Stream;
 import javax.imageio.ImageIO;
 import org.junit.jupiter.api.Test;
@@ -44,7 +46,7 @@ class DrawTest {
         byte[] first = Files.readAllBytes(file);
         assertEquals(640, ImageIO.read(file.toFile()).getWidth());
         assertEquals(0, Run.of("draw", KILN, "--save", file.toString(), "--width", "640", "--replace").exitCode());
-        assertTrue(java.util.Arrays.equals(first, Files.readAllBytes(file)));
+        assertTrue(Arrays.equals(first, Files.readAllBytes(file)));
         assertEquals(1, files());
     }
 
@@ -65,7 +67,7 @@ class DrawTest {
     void theStepsAskedForAreThoseThatAreDrawn() {
         String svg = Run.of("draw", KILN, "--of", "running", "--at", "2..4,9").answer();
         assertEquals(List.of("running(2)", "running(3)", "running(4)", "running(9)"),
-                java.util.regex.Pattern.compile("running\\(\\d+\\)").matcher(svg).results().map(found -> found.group())
+                Pattern.compile("running\\(\\d+\\)").matcher(svg).results().map(found -> found.group())
                         .toList());
         assertEquals(0, Run.of("draw", KILN, "--at", "7").exitCode());
     }

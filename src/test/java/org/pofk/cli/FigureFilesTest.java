@@ -10,6 +10,7 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Set;
+import java.util.regex.MatchResult;
 import java.util.regex.Pattern;
 import java.util.stream.Collectors;
 import java.util.stream.Stream;
@@ -80,10 +81,10 @@ class FigureFilesTest {
         assertEquals("", run("pandoc", article.getFileName().toString(), "-o", "report.docx"));
         run("pandoc", "report.docx", "-t", "json", "-o", "report.json", "--extract-media=media");
         String read = Files.readString(folder.resolve("report.json"));
-        List<java.util.regex.MatchResult> displays = DISPLAY.matcher(latex).results().toList();
+        List<MatchResult> displays = DISPLAY.matcher(latex).results().toList();
         assertFalse(displays.isEmpty());
         assertEquals(displays.size(), count(read, "\"DisplayMath\""));
-        for (java.util.regex.MatchResult display : displays) {
+        for (MatchResult display : displays) {
             assertTrue(read.contains("(" + display.group(1) + ")"), display.group());
             NUMBER.matcher(display.group().replaceAll("\\\\(tag|label)\\{[^}]*}", "")).results().forEach(number ->
                     assertTrue(read.contains(number.group()), number.group() + " of " + display.group()));

@@ -13,6 +13,7 @@ import com.networknt.schema.JsonSchemaFactory;
 import com.networknt.schema.SpecVersion;
 import java.io.InputStream;
 import java.nio.file.Path;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Set;
 import org.junit.jupiter.api.Test;
@@ -111,7 +112,7 @@ class SchemaTest {
     }
 
     private static void assertKeeps(String schema, String command, Path file, String... options) throws Exception {
-        List<String> arguments = new java.util.ArrayList<>(List.of(command, file.toString(), "--as", "json"));
+        List<String> arguments = new ArrayList<>(List.of(command, file.toString(), "--as", "json"));
         arguments.addAll(List.of(options));
         Run run = Run.of(arguments.toArray(String[]::new));
         assertEquals(0, run.exitCode(), run.notes());

@@ -8,6 +8,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.OptionalInt;
 import java.util.Random;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -183,7 +184,7 @@ class RootsTest {
             assertEquals(root.isReal(), root.conjugateIndex() == i);
             assertEquals(i, roots.all().get(root.conjugateIndex()).conjugateIndex());
             assertTrue(enclosures.get(i).isWithin(bits));
-            assertEquals(root.isReal(), enclosures.get(i).imaginary().sign().equals(java.util.OptionalInt.of(0)));
+            assertEquals(root.isReal(), enclosures.get(i).imaginary().sign().equals(OptionalInt.of(0)));
             assertTrue(enclosures.get(i).overlaps(enclosures.get(root.conjugateIndex()).conjugate()));
         }
         multipliesOut(polynomial.monic(), roots, bits);

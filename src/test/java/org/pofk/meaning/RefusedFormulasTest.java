@@ -5,6 +5,7 @@ import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.util.List;
+import java.util.function.IntFunction;
 import java.util.stream.Collectors;
 import java.util.stream.IntStream;
 import java.util.stream.Stream;
@@ -104,7 +105,7 @@ class RefusedFormulasTest {
                 "1" + "/3".repeat(150), "1/(" + "1+1/(".repeat(80) + "k" + ")".repeat(81));
     }
 
-    private static String joined(int count, java.util.function.IntFunction<String> part, String sign) {
+    private static String joined(int count, IntFunction<String> part, String sign) {
         return IntStream.range(0, count).mapToObj(part).collect(Collectors.joining(sign));
     }
 

@@ -4,6 +4,7 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -127,7 +128,7 @@ class SchedulingTest {
 
     private static final List<Integer> AT = IntStream.concat(IntStream.rangeClosed(0, 60), IntStream.of(299, 300))
             .boxed().toList();
-    private static final Map<String, ScheduledModel> DERIVED = new java.util.HashMap<>();
+    private static final Map<String, ScheduledModel> DERIVED = new HashMap<>();
 
     /** Each case is derived once. */
     private static ScheduledModel derived(Model model) {
@@ -215,7 +216,7 @@ class SchedulingTest {
             FixedPointState state = FixedPointState.below(model.chain().start());
             before.add(state);
             after.add(state);
-            Map<SparseMatrix, List<FixedPointColumn>> columns = new java.util.HashMap<>();
+            Map<SparseMatrix, List<FixedPointColumn>> columns = new HashMap<>();
             for (exact.k = 1; exact.k <= steps; exact.k++) {
                 var due = model.schedule().orElseThrow().recurring().stream()
                         .filter(each -> exact.k >= each.first() && (exact.k - each.first()) % each.every() == 0)

@@ -4,7 +4,9 @@ import static org.junit.jupiter.api.Assertions.assertArrayEquals;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import java.util.List;
 import java.util.Random;
+import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 
 class BerlekampMasseyTest {
@@ -67,7 +69,7 @@ class BerlekampMasseyTest {
         LinearSystem system = ScaledSystem.of(Reduction.of(RandomSystems.sparseChain(4, 70, 6),
                 RandomSystems.sparseChain(4, 70, 6).outputs()).reduced()).system();
         SystemResidues residues = new SystemResidues(system);
-        java.util.List<ModularSystem> systems = java.util.stream.Stream.iterate(PrimeField.below(1L << 31),
+        List<ModularSystem> systems = Stream.iterate(PrimeField.below(1L << 31),
                         field -> PrimeField.below(field.prime())).limit(4)
                 .map(residues::modulo).toList();
         ModularLanes lanes = ModularLanes.of(systems).orElseThrow();

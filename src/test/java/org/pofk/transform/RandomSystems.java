@@ -1,6 +1,7 @@
 package org.pofk.transform;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.Collections;
 import java.util.List;
 import java.util.Map;
@@ -47,7 +48,7 @@ final class RandomSystems {
         List<List<Entry>> columns = new ArrayList<>();
         for (int j = 0; j < size; j++) {
             Rational[] column = new Rational[size];
-            java.util.Arrays.fill(column, Rational.ZERO);
+            Arrays.fill(column, Rational.ZERO);
             int left = 1000;
             for (int move = 1; move < moves; move++) {
                 int weight = 1 + random.nextInt(1000 / moves);

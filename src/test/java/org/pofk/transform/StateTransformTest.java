@@ -3,6 +3,8 @@ package org.pofk.transform;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import java.util.ArrayList;
+import java.util.Collections;
 import java.util.List;
 import org.junit.jupiter.api.Test;
 import org.pofk.chain.Chain;
@@ -53,10 +55,10 @@ class StateTransformTest {
     }
 
     private static List<Rational> applied(Polynomial<Rational> polynomial, Chain chain) {
-        List<Rational> value = java.util.Collections.nCopies(chain.size(), Rational.ZERO);
+        List<Rational> value = Collections.nCopies(chain.size(), Rational.ZERO);
         for (int power = polynomial.degree(); power >= 0; power--) {
             List<Rational> product = chain.matrix().times(value);
-            List<Rational> sum = new java.util.ArrayList<>();
+            List<Rational> sum = new ArrayList<>();
             for (int i = 0; i < chain.size(); i++) {
                 sum.add(product.get(i).plus(chain.start().get(i).times(polynomial.coefficient(power))));
             }

@@ -1,20 +1,19 @@
-package org.pofk.transform;
+package org.pofk.exact;
 
 import java.math.BigInteger;
 import java.util.Collection;
-import org.pofk.exact.Rational;
 
-/** The least common multiple of denominators. Exact; a gcd for each new one. */
-final class CommonDenominator {
+/** The least common multiple of denominators; one where there are none. Exact; a gcd for each new one. */
+public final class CommonDenominator {
     private CommonDenominator() {
     }
 
-    static BigInteger of(Collection<Rational> values) {
+    public static BigInteger of(Collection<Rational> values) {
         BigInteger common = BigInteger.ONE;
         for (Rational value : values) {
             BigInteger denominator = value.denominator();
             if (!denominator.equals(common) && common.mod(denominator).signum() != 0) {
-                common = common.multiply(denominator.divide(common.gcd(denominator)));
+                common = LeastCommonMultiple.of(common, denominator);
             }
         }
         return common;
