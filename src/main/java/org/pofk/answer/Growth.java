@@ -40,7 +40,7 @@ public record Growth(Rational perStep, LongRun beyond) {
      * @param total the transform of the total
      */
     public static Growth of(Chain chain, LongRun step, TransferFunction<Rational> total) {
-        Rational perStep = Average.of(step).orElse(Rational.ZERO);
+        Rational perStep = step.meanValue().orElse(Rational.ZERO);
         TransferFunction<Rational> beyond = without(perStep, total);
         return new Growth(perStep, chain.kind() == Chain.Kind.CHAIN
                 ? LongRunByPoles.ofChain(Structure.of(chain), beyond)
@@ -56,27 +56,5 @@ public record Growth(Rational perStep, LongRun beyond) {
                 .dividedExactlyBy(Polynomial.ofIntegers(-1, 1)).dividedExactlyBy(Polynomial.ofIntegers(-1, 1));
         Polynomial<Rational> ramp = rest.shiftedUp(1).times(perStep);
         return new TransferFunction<>(total.numerator().minus(ramp), total.denominator());
-    }
-
-    /** What the averages of a sequence tend to. */
-    private static final class Average implements LongRun.Visitor<Optional<Rational>> {
-        public static Optional<Rational> of(LongRun longRun) {
-            return longRun.accept(new Average());
-        }
-
-        @Override
-        public Optional<Rational> limit(LongRun.Limit limit) {
-            return Optional.of(limit.value());
-        }
-
-        @Override
-        public Optional<Rational> cycle(LongRun.Cycle cycle) {
-            return Optional.of(cycle.average());
-        }
-
-        @Override
-        public Optional<Rational> none(LongRun.None none) {
-            return none.average();
-        }
     }
 }

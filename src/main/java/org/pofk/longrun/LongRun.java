@@ -12,6 +12,9 @@ public sealed interface LongRun {
 
     <R> R accept(Visitor<R> visitor);
 
+    /** What the averages of p(0) … p(k) tend to, where they tend to anything. */
+    Optional<Rational> meanValue();
+
     /** One method per variant. */
     interface Visitor<R> {
         R limit(Limit limit);
@@ -23,6 +26,11 @@ public sealed interface LongRun {
 
     /** p(k) tends to {@code value}. */
     record Limit(Rational value) implements LongRun {
+        @Override
+        public Optional<Rational> meanValue() {
+            return Optional.of(value);
+        }
+
         @Override
         public <R> R accept(Visitor<R> visitor) {
             return visitor.limit(this);
@@ -44,6 +52,11 @@ public sealed interface LongRun {
         }
 
         @Override
+        public Optional<Rational> meanValue() {
+            return Optional.of(average());
+        }
+
+        @Override
         public <R> R accept(Visitor<R> visitor) {
             return visitor.cycle(this);
         }
@@ -56,6 +69,11 @@ public sealed interface LongRun {
      * @param explanation why, in one line: {@code grows like k * 1.2^k}
      */
     record None(Reason reason, Optional<Rational> average, String explanation) implements LongRun {
+        @Override
+        public Optional<Rational> meanValue() {
+            return average;
+        }
+
         @Override
         public <R> R accept(Visitor<R> visitor) {
             return visitor.none(this);

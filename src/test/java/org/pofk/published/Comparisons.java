@@ -224,7 +224,7 @@ final class Comparisons {
         List<LongRun> found = derived.longRuns();
         assertEquals(list.size(), found.size(), derived::toString);
         for (int i = 0; i < list.size(); i++) {
-            assertEquals(Optional.of(derived.value(list.get(i).asText())), found.get(i).accept(new Averages()),
+            assertEquals(Optional.of(derived.value(list.get(i).asText())), found.get(i).meanValue(),
                     derived::toString);
         }
     }
@@ -240,7 +240,7 @@ final class Comparisons {
     }
 
     private static void lossRate(Derived derived, JsonNode value) {
-        assertEquals(Optional.of(derived.value(value.asText())), derived.longRun("loss").accept(new Averages()),
+        assertEquals(Optional.of(derived.value(value.asText())), derived.longRun("loss").meanValue(),
                 derived::toString);
     }
 
@@ -300,7 +300,7 @@ final class Comparisons {
             assertEquals(derived.value(numeric.get("A_10").asText()), derived.form("up").expansion().valueAt(10),
                     derived::toString);
             assertEquals(Optional.of(derived.value(numeric.get("A_inf").asText())),
-                    derived.longRun("up").accept(new Averages()), derived::toString);
+                    derived.longRun("up").meanValue(), derived::toString);
         }
     }
 
@@ -358,24 +358,6 @@ final class Comparisons {
         @Override
         public Optional<Mode.Oscillating> oscillating(Mode.Oscillating oscillating) {
             return Optional.of(oscillating);
-        }
-    }
-
-    /** The limit, or the average over a cycle. */
-    private record Averages() implements LongRun.Visitor<Optional<Rational>> {
-        @Override
-        public Optional<Rational> limit(LongRun.Limit limit) {
-            return Optional.of(limit.value());
-        }
-
-        @Override
-        public Optional<Rational> cycle(LongRun.Cycle cycle) {
-            return Optional.of(cycle.average());
-        }
-
-        @Override
-        public Optional<Rational> none(LongRun.None none) {
-            return Optional.empty();
         }
     }
 
