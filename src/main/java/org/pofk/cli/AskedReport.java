@@ -44,21 +44,30 @@ record AskedReport(Model model, List<Output> outputs, List<AskedSection> section
 
     /** Finds what it says, and publishes all that is found by then, again and again. */
     Report find(Provenance provenance, Consumer<Report> published) {
-        List<ReportSection> answers = new ArrayList<>(sections.stream()
-                .map(section -> ReportSection.notReached(section.place(), section.title())).toList());
+        List<ReportSection> answers = notReached();
         List<KeyFigures> none = Collections.nCopies(outputs.size(), KeyFigures.NONE);
         DerivedModel asListed = Deriving.of(model, outputs, at, extras, partly ->
                 published.accept(new Report(partly, none, List.of(), answers, provenance)));
         List<KeyFigures> figures = asListed.outputs().stream().map(each -> KeyFigures.of(model.chain(), each)).toList();
         DerivedModel derived = reach == Reach.AS_LISTED ? asListed : LaterSteps.added(asListed, figures);
         List<Chart.Course> courses = CourseCharts.of(derived, figures);
-        Report report = new Report(derived, figures, courses, answers, provenance);
-        published.accept(report);
+        published.accept(new Report(derived, figures, courses, answers, provenance));
+        return new Report(derived, figures, courses, answered(partly ->
+                published.accept(new Report(derived, figures, courses, partly, provenance))), provenance);
+    }
+
+    /** What stands in place of each section before it is found. */
+    List<ReportSection> notReached() {
+        return sections.stream().map(section -> ReportSection.notReached(section.place(), section.title())).toList();
+    }
+
+    /** The sections, published again after each that is found. */
+    List<ReportSection> answered(Consumer<List<ReportSection>> published) {
+        List<ReportSection> answers = new ArrayList<>(notReached());
         for (int i = 0; i < sections.size(); i++) {
             answers.set(i, sections.get(i).work().get());
-            report = new Report(derived, figures, courses, answers, provenance);
-            published.accept(report);
+            published.accept(List.copyOf(answers));
         }
-        return report;
+        return answers;
     }
 }

@@ -8,8 +8,10 @@ import org.pofk.answer.WhenModel;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
 import org.pofk.report.Prose;
+import org.pofk.report.ScheduledWhenDocument;
 import org.pofk.report.Style;
 import org.pofk.report.WhenDocument;
+import org.pofk.schedule.ScheduledWhen;
 import picocli.CommandLine.Option;
 
 /** Conditions on p(k). */
@@ -41,6 +43,8 @@ final class ConditionOptions {
     /** What a report says of them. */
     List<AskedSection> sections(Model read, List<Output> outputs, Style style) throws UsageException {
         return asked().stream().map(asked -> new AskedSection(Prose.of(WhenDocument.title(asked, style)),
-                () -> WhenDocument.section(WhenModel.of(read, outputs, asked, partly -> { }), style))).toList();
+                read.schedule().isPresent() ? () -> ScheduledWhenDocument.section(ScheduledWhen.of(read, outputs, asked,
+                        partly -> { }), style)
+                : () -> WhenDocument.section(WhenModel.of(read, outputs, asked, partly -> { }), style))).toList();
     }
 }

@@ -69,6 +69,9 @@ final class GivenOptions {
         if (!isAsked()) {
             return List.of();
         }
+        if (read.schedule().isPresent()) {
+            refuseUnderSchedule(read);
+        }
         Given given = given(read.chain());
         return List.of(new AskedSection(ConditionalDocument.title(given), () -> ConditionalDocument.section(
                 ConditionalModel.of(read, given, outputs, steps, partly -> { }), style)));

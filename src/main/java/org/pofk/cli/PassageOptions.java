@@ -9,11 +9,14 @@ import java.util.function.Supplier;
 import org.pofk.answer.Given;
 import org.pofk.answer.Passage;
 import org.pofk.chain.Chain;
+import org.pofk.chain.Model;
 import org.pofk.chain.Schedule;
 import org.pofk.chain.Timetable;
 import org.pofk.exact.Rational;
 import org.pofk.report.PassageDocument;
 import org.pofk.report.Prose;
+import org.pofk.report.ReportSection;
+import org.pofk.report.ScheduledPassageDocument;
 import org.pofk.report.Style;
 import org.pofk.schedule.ScheduledPassage;
 import org.pofk.text.Suggestion;
@@ -80,14 +83,23 @@ final class PassageOptions {
     }
 
     /** What a report says of it. */
-    List<AskedSection> sections(Chain read, List<Integer> at, Style style) throws UsageException {
+    List<AskedSection> sections(Model read, List<Integer> at, Style style) throws UsageException {
         if (!isAsked()) {
             return List.of();
         }
-        Chain chain = started(read);
-        Supplier<Passage> work = work(chain, at);
+        Chain chain = started(read.chain());
         return List.of(new AskedSection(Prose.of("First passage into ").and(Prose.names(into)),
-                () -> PassageDocument.section(chain, work.get(), style)));
+                section(chain, read.schedule(), at, style)));
+    }
+
+    private Supplier<ReportSection> section(Chain chain, Optional<Schedule> schedule, List<Integer> at, Style style)
+            throws UsageException {
+        if (schedule.isPresent()) {
+            Supplier<ScheduledPassage> work = work(chain, schedule.get(), at);
+            return () -> ScheduledPassageDocument.section(chain, work.get(), style);
+        }
+        Supplier<Passage> work = work(chain, at);
+        return () -> PassageDocument.section(chain, work.get(), style);
     }
 
     /** The chain as it is waited in. */

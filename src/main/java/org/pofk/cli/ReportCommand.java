@@ -76,10 +76,10 @@ final class ReportCommand implements Work {
         List<Model> models = since.models(options);
         Model read = models.get(0);
         requireFew(read.chain());
-        if (read.schedule().isPresent()) {
-            return scheduled(read, style, destination, streams);
-        }
         AskedReport asked = asked(read, style);
+        if (read.schedule().isPresent()) {
+            return ScheduledReporting.write(options, asked, show, provenance(asked.files()), destination, streams);
+        }
         Optional<AskedReport> earlier = models.size() == 1 ? Optional.empty()
                 : Optional.of(earlier(models.get(1), read, style));
         Provenance provenance = provenance(Stream.concat(asked.files(), earlier.stream().flatMap(AskedReport::files)));
@@ -98,25 +98,14 @@ final class ReportCommand implements Work {
                 .with(Format.CSV, () -> CsvWriter.write(DerivationTable.of(report.derived(), style.digits())))
                 .with(Format.NOTEBOOK, () -> NotebookWriter.write(report, show, style,
                         options.convention(read))), streams);
-        return code(report, outcome.finished());
-    }
-
-    private ExitCode scheduled(Model read, Style style, Destination destination, Streams streams)
-            throws RefusedException, UsageException, WritingException {
-        List<Output> outputs = AskedOutputs.of(read.chain(), of);
-        if (!sections(read, outputs, style).isEmpty()) {
-            throw new UsageException("'" + read.origin().file() + "' has a schedule: its report has the course, the long"
-                    + " run and the formulas over the cycles, no further answers and no claims");
-        }
-        return ScheduledReporting.write(options, read, outputs, at.steps(), show,
-                provenance(Stream.concat(Stream.of(read.origin()), read.tables().stream())), destination, streams);
+        return code(report.answers(), outcome.finished() && report.derived().isDecided());
     }
 
     /** Everything a report can say besides what is derived; an answer more is a line more. */
     private List<AskedSection> sections(Model read, List<Output> outputs, Style style)
             throws RefusedException, UsageException {
         return Stream.of(conditions.sections(read, outputs, style),
-                passage.sections(read.chain(), at.steps(), style),
+                passage.sections(read, at.steps(), style),
                 totals.sections(read, at.steps(), style),
                 given.sections(read, outputs, at.steps(), style),
                 claims.sections(read, options.settings())).flatMap(List::stream).toList();
@@ -139,7 +128,7 @@ final class ReportCommand implements Work {
         Chain chain = ModelChanges.of(model, later).renamed(model.chain());
         List<Output> outputs = AskedOutputs.thoseOf(chain, of);
         List<AskedSection> sections = new ArrayList<>(conditions.sections(model, outputs, style));
-        sections.addAll(whereAsked(() -> passage.sections(chain, at.steps(), style)));
+        sections.addAll(whereAsked(() -> passage.sections(model.with(chain), at.steps(), style)));
         sections.addAll(whereAsked(() -> totals.sections(model.with(chain), at.steps(), style)));
         sections.addAll(whereAsked(() -> given.sections(model.with(chain), outputs, at.steps(), style)));
         sections.addAll(whereAsked(() -> claims.sections(model, options.settings())));
@@ -171,13 +160,14 @@ final class ReportCommand implements Work {
                 Deriving.Extra.SECOND_OPINION);
     }
 
-    private static ExitCode code(Report report, boolean finished) {
-        Optional<ReportSection.Standing> worst = report.answers().stream().map(ReportSection::standing)
+    /** @param isDecided whether all that is derived is */
+    static ExitCode code(List<ReportSection> answers, boolean isDecided) {
+        Optional<ReportSection.Standing> worst = answers.stream().map(ReportSection::standing)
                 .max(Comparator.naturalOrder());
         if (worst.equals(Optional.of(ReportSection.Standing.CLAIM_WRONG))) {
             return ExitCode.CLAIM_WRONG;
         }
-        return finished && report.derived().isDecided() && !worst.equals(Optional.of(ReportSection.Standing.NOT_DECIDED))
+        return isDecided && !worst.equals(Optional.of(ReportSection.Standing.NOT_DECIDED))
                 ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
     }
 }

@@ -11,8 +11,8 @@ final class ScheduleRefusal {
     static Model unlessScheduled(Model model) throws UsageException {
         if (model.schedule().isPresent()) {
             throw new UsageException("'" + model.origin().file() + "' has " + what(model)
-                    + ", which this command would leave out of account; pofk derive, pofk inspect, pofk passage,"
-                    + " pofk simulate, pofk total and pofk when take them into account");
+                    + ", which this command would leave out of account; pofk derive, pofk draw, pofk inspect,"
+                    + " pofk passage, pofk report, pofk simulate, pofk total and pofk when take them into account");
         }
         return model;
     }

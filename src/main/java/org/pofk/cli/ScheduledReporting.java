@@ -2,15 +2,16 @@ package org.pofk.cli;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.function.Consumer;
 import org.pofk.answer.Simulation;
 import org.pofk.chain.Chain;
-import org.pofk.chain.Model;
+import org.pofk.chain.Model.Convention;
 import org.pofk.chain.Output;
-import org.pofk.chain.Timetable;
 import org.pofk.report.Chart;
 import org.pofk.report.CsvWriter;
 import org.pofk.report.Provenance;
 import org.pofk.report.Report;
+import org.pofk.report.ReportSection;
 import org.pofk.report.ScheduledCourse;
 import org.pofk.report.ScheduledNotebook;
 import org.pofk.report.ScheduledReport;
@@ -31,27 +32,38 @@ final class ScheduledReporting {
     private ScheduledReporting() {
     }
 
-    static ExitCode write(AnswerOptions options, Model read, List<Output> outputs, List<Integer> listed,
-            Report.Depth depth, Provenance provenance, Destination destination, Streams streams)
-            throws RefusedException, UsageException, WritingException {
+    static ExitCode write(AnswerOptions options, AskedReport asked, Report.Depth depth, Provenance provenance,
+            Destination destination, Streams streams) throws RefusedException, UsageException, WritingException {
         Style style = options.style();
-        List<Integer> drawn = ScheduledCourse.steps(Timetable.of(read.chain(), read.schedule().orElseThrow()));
-        Worker.Outcome<ScheduledReport> outcome = options.within(streams, published -> {
-            ScheduledModel found = Scheduling.of(read, outputs, listed, Scheduling.Formulas.WITHIN_REACH, partly ->
-                    published.accept(new ScheduledReport(partly, Optional.empty(), Optional.empty(), provenance)));
-            Optional<Chart.Course> course = ScheduledCourse.of(Scheduling.of(read, outputs, drawn,
-                    Scheduling.Formulas.WITHIN_REACH, partly -> { }), drawn);
-            published.accept(new ScheduledReport(found, course, depth == Report.Depth.FULL
-                    ? simulated(found, outputs, listed) : Optional.empty(), provenance));
-        });
+        Convention convention = options.convention(asked.model());
+        Worker.Outcome<ScheduledReport> outcome = options.within(streams, published ->
+                find(asked, depth, provenance, published));
         if (outcome.published().isEmpty()) {
             return options.undecided(streams);
         }
         ScheduledReport report = outcome.published().get();
-        destination.write(Answer.of(() -> ScheduledReportDocument.of(report, depth, style, options.convention(read)))
-                .with(Format.NOTEBOOK, () -> ScheduledNotebook.write(report, depth, style, options.convention(read)))
+        destination.write(Answer.of(() -> ScheduledReportDocument.of(report, depth, style, convention))
+                .with(Format.NOTEBOOK, () -> ScheduledNotebook.write(report, depth, style, convention))
                 .with(Format.CSV, () -> CsvWriter.write(ScheduledTable.of(report.found(), style.digits()))), streams);
-        return report.found().isDecided() && outcome.finished() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
+        return ReportCommand.code(report.answers(), outcome.finished() && report.found().isDecided());
+    }
+
+    /** Finds what the report says, and publishes all that is found by then, again and again. */
+    static ScheduledReport find(AskedReport asked, Report.Depth depth, Provenance provenance,
+            Consumer<ScheduledReport> published) {
+        List<ReportSection> none = asked.notReached();
+        ScheduledModel found = Scheduling.of(asked.model(), asked.outputs(), asked.at(),
+                Scheduling.Formulas.WITHIN_REACH, partly -> published.accept(new ScheduledReport(partly, Optional.empty(),
+                        none, Optional.empty(), provenance)));
+        List<Integer> drawn = ScheduledCourse.steps(found.timetable());
+        Optional<Chart.Course> course = ScheduledCourse.of(Scheduling.of(asked.model(), asked.outputs(), drawn,
+                Scheduling.Formulas.WITHIN_REACH, partly -> { }), drawn);
+        List<ReportSection> answers = asked.answered(partly ->
+                published.accept(new ScheduledReport(found, course, partly, Optional.empty(), provenance)));
+        ScheduledReport report = new ScheduledReport(found, course, answers, depth == Report.Depth.FULL
+                ? simulated(found, asked.outputs(), asked.at()) : Optional.empty(), provenance);
+        published.accept(report);
+        return report;
     }
 
     /** Only a chain, whose entries are probabilities, can be run at random. */

@@ -36,8 +36,12 @@ final class TotalOptions {
 
     /** What is asked for, in the order of the answer. */
     List<TotalModel.Asked> asked(Model model) throws UsageException {
-        return ofAnyMatrix(model).stream().map(each ->
-                new TotalModel.Asked(each.increment().apply(model.chain()), each.factor())).toList();
+        return ofChain(model.chain(), ofAnyMatrix(model));
+    }
+
+    /** What is asked for of one that moves by a single matrix. */
+    static List<TotalModel.Asked> ofChain(Chain chain, List<ScheduledTotal.Asked> asked) {
+        return asked.stream().map(each -> new TotalModel.Asked(each.increment().apply(chain), each.factor())).toList();
     }
 
     /** The same for a model whose schedule moves it by several matrices. */
@@ -49,19 +53,34 @@ final class TotalOptions {
         }
         boolean namesNothing = of.isEmpty() && !entries;
         if (!of.isEmpty() || entries || namesNothing && model.costs().isEmpty()) {
-            for (Output output : outputs(model.chain())) {
-                refuseEntriesUnlessCounted(model.chain(), output);
-                asked.add(new ScheduledTotal.Asked(entries ? chain -> Increment.ofEntries(chain, output)
-                        : chain -> Increment.of(chain, output), Rational.ONE));
-            }
+            List<Output> outputs = outputs(model.chain());
+            asked.addAll(entries ? entries(model.chain(), outputs) : values(outputs));
         }
         if (costs || namesNothing) {
-            for (TotalModel.Asked each : TotalModel.costs(model)) {
-                asked.add(new ScheduledTotal.Asked(chain -> Increment.ofCosts(chain, model.costs().orElseThrow()),
-                        each.factor()));
-            }
+            asked.addAll(costs(model));
         }
         return asked;
+    }
+
+    /** Steps spent in a state or a set, values of other outputs. */
+    static List<ScheduledTotal.Asked> values(List<Output> outputs) {
+        return outputs.stream().map(output -> new ScheduledTotal.Asked(chain -> Increment.of(chain, output),
+                Rational.ONE)).toList();
+    }
+
+    /** Entries, of a chain and into what can be entered. */
+    static List<ScheduledTotal.Asked> entries(Chain chain, List<Output> outputs) throws UsageException {
+        for (Output output : outputs) {
+            requireCounted(chain, output);
+        }
+        return outputs.stream().map(output -> new ScheduledTotal.Asked(each -> Increment.ofEntries(each, output),
+                Rational.ONE)).toList();
+    }
+
+    /** The costs of a model, in the order of the answer; none where it names none. */
+    static List<ScheduledTotal.Asked> costs(Model model) {
+        return TotalModel.costs(model).stream().map(each -> new ScheduledTotal.Asked(chain ->
+                Increment.ofCosts(chain, model.costs().orElseThrow()), each.factor())).toList();
     }
 
     private List<Output> outputs(Chain chain) throws UsageException {
@@ -72,13 +91,7 @@ final class TotalOptions {
         return AskedOutputs.of(chain, of);
     }
 
-    private void refuseEntriesUnlessCounted(Chain chain, Output output) throws UsageException {
-        if (entries) {
-            entries(chain, output);
-        }
-    }
-
-    static Increment entries(Chain chain, Output output) throws UsageException {
+    private static void requireCounted(Chain chain, Output output) throws UsageException {
         if (chain.kind() == Chain.Kind.RECURSION) {
             throw new UsageException("--entries counts moves of a chain of probabilities; this model is a recursion");
         }
@@ -86,6 +99,5 @@ final class TotalOptions {
             throw new UsageException("'" + output.name() + "' weighs states and can't be entered; --entries takes a"
                     + " state or a set");
         }
-        return Increment.ofEntries(chain, output);
     }
 }

@@ -52,7 +52,7 @@ public final class PassageDocument {
         PassageDocument document = new PassageDocument(chain, passage, style);
         document.write();
         Labelled key = new Labelled(Prose.of("first into ").and(document.names(passage.into())),
-                Prose.of(document.inBrief()));
+                Prose.of(inBrief(passage.moments(), passage.percentiles(), style)));
         return new ReportSection(ReportSection.Place.RESULTS, document.title(), List.of(key), document.blocks,
                 document.proofs, ReportSection.Standing.ANSWERED);
     }
@@ -62,17 +62,16 @@ public final class PassageDocument {
     }
 
     /** Whether and when, in a line. */
-    private String inBrief() {
-        PassageMoments moments = passage.moments();
+    static String inBrief(PassageMoments moments, List<Percentile> percentiles, Style style) {
         return moments.probability().isZero() ? "never: it can't be reached from there"
-                : (moments.isCertain() ? "certain" : "with probability " + number(moments.probability())
-                        + "; given that it happens") + ", after " + number(moments.mean().orElseThrow())
-                        + " steps in the mean" + percentilesInBrief();
+                : (moments.isCertain() ? "certain" : "with probability "
+                        + number(moments.probability(), style) + "; given that it happens") + ", after "
+                        + number(moments.mean().orElseThrow(), style) + " steps in the mean" + inBrief(percentiles);
     }
 
     /** Those reached; the others have their reason in the section. */
-    private String percentilesInBrief() {
-        return passage.percentiles().stream().filter(each -> each.k().isPresent())
+    private static String inBrief(List<Percentile> percentiles) {
+        return percentiles.stream().filter(each -> each.k().isPresent())
                 .map(each -> "; " + percent(each.p()) + " by k = " + each.k().getAsInt()).collect(Collectors.joining());
     }
 
@@ -134,8 +133,12 @@ public final class PassageDocument {
                 + Decimals.of(Enclosed.of(variance).map(ball -> ball.sqrt()), style.digits()).text()));
     }
 
-    /** Exact as a fraction where its decimals don't say it all. */
     private String number(Rational value) {
+        return number(value, style);
+    }
+
+    /** Exact as a fraction where its decimals don't say it all. */
+    private static String number(Rational value, Style style) {
         if (value.toString().length() > LONGEST_FRACTION) {
             return new LongRunProse(style.digits()).number(value);
         }

@@ -5,6 +5,7 @@ import java.util.stream.Stream;
 import org.pofk.answer.DerivedModel;
 import org.pofk.answer.DerivedOutput;
 import org.pofk.chain.Chain;
+import org.pofk.schedule.CycleFormula;
 import org.pofk.transform.Transform;
 
 /**
@@ -26,6 +27,11 @@ record Proved(Prose left, Chain chain, String stepped, Transform transform, Repe
         String stepped = chain.kind() == Chain.Kind.CHAIN ? "model" : "recursion";
         return derived.outputs().stream().flatMap(output -> output.transform().stream().map(transform ->
                 new Proved(OutputProse.atStep(output.output()), chain, stepped, transform, Repeated.IN_NOTEBOOK)));
+    }
+
+    /** A formula over the cycles of a schedule, which the chain has that moves once a cycle. */
+    static Proved overCycles(Prose left, String stepped, CycleFormula formula) {
+        return new Proved(left, formula.chain(), stepped, formula.closedForm().transform(), Repeated.IN_NOTEBOOK);
     }
 
     /** A formula that stands in a section of its own. */

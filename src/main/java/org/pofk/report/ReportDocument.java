@@ -42,7 +42,8 @@ public final class ReportDocument {
 
     /**
      * What is brief leaves out how the formulas were derived and checked, not why they hold. What is other than in the
-     * same report of an earlier model is marked, said in short before all results and in full behind the answers; a file's name alone is no difference.
+     * same report of an earlier model is marked, said in short before all results and in full behind the answers; a file's
+     * name alone is no difference.
      */
     public static Document of(Report report, Depth depth, Style style, Convention convention) {
         Document document = alone(report.alone(), depth, style, convention);
@@ -105,7 +106,7 @@ public final class ReportDocument {
         DerivedModel derived = report.derived();
         List<Block> blocks = new ArrayList<>(ReportSummary.of(report, style));
         blocks.addAll(values(report, style));
-        blocks.addAll(sections(report, Place.RESULTS));
+        blocks.addAll(sections(report.answers(), Place.RESULTS));
         blocks.addAll(ModelBlocks.of(derived.model(), outputs(derived), derived.structure()));
         return blocks;
     }
@@ -131,9 +132,9 @@ public final class ReportDocument {
     }
 
     /** An answer that is to be part of a report comes here by its {@link ReportSection}. */
-    private static List<Block> sections(Report report, Place place) {
+    static List<Block> sections(List<ReportSection> answers, Place place) {
         List<Block> blocks = new ArrayList<>();
-        report.answers().stream().filter(answer -> answer.place() == place).forEach(answer -> {
+        answers.stream().filter(answer -> answer.place() == place).forEach(answer -> {
             blocks.add(new Heading(2, answer.title()));
             blocks.addAll(answer.blocks());
         });
@@ -158,7 +159,7 @@ public final class ReportDocument {
 
     /** The checks of what others state, and what the report stands on. */
     private List<Block> grounds() {
-        List<Block> blocks = new ArrayList<>(sections(report, Place.CHECKS));
+        List<Block> blocks = new ArrayList<>(sections(report.answers(), Place.CHECKS));
         blocks.addAll(ProvenanceBlocks.of(report.provenance()));
         return blocks;
     }

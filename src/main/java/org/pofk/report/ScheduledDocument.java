@@ -6,6 +6,7 @@ import java.util.Optional;
 import java.util.OptionalInt;
 import java.util.TreeSet;
 import java.util.stream.IntStream;
+import java.util.stream.Stream;
 import org.pofk.chain.Timetable;
 import org.pofk.report.Document.Block;
 import org.pofk.report.Document.Heading;
@@ -21,7 +22,6 @@ import org.pofk.schedule.ScheduledModel;
 import org.pofk.schedule.ScheduledOutput;
 import org.pofk.schedule.StretchFormula;
 import org.pofk.steps.KnownValue;
-import org.pofk.transform.RecurrenceProof;
 
 /** What was found about a model with a schedule, as a document. */
 public final class ScheduledDocument {
@@ -242,14 +242,22 @@ public final class ScheduledDocument {
         }
         blocks.add(new Heading(3, "Over the cycles"));
         FormulaInSteps formulas = new FormulaInSteps("m", style);
-        for (CycleFormula formula : output.over()) {
-            Prose name = Prose.name(output.output().name());
-            formulas.add(formula.closedForm(), formula.place().map(place -> name.and("("
-                    + ScheduleProse.stepOf(timetable, place.j()) + ")"))
-                    .orElse(Prose.of("mean of ").and(name).and(" over cycle m")),
-                    Prose.of("m ≥ 0").and(formula.place().map(this::side).orElse(Prose.EMPTY)));
-        }
+        output.over().forEach(formula -> formulas.add(formula.closedForm(), left(output, formula),
+                Prose.of("m ≥ 0").and(formula.place().map(this::side).orElse(Prose.EMPTY))));
         blocks.addAll(formulas.blocks());
+    }
+
+    private Prose left(ScheduledOutput output, CycleFormula formula) {
+        Prose name = Prose.name(output.output().name());
+        return formula.place().map(place -> name.and("(" + ScheduleProse.stepOf(timetable, place.j()) + ")"))
+                .orElse(Prose.of("mean of ").and(name).and(" over cycle m"));
+    }
+
+    /** Of the formulas over the cycles. */
+    static Stream<Proved> proofs(ScheduledModel found, ScheduledOutput output, Style style) {
+        ScheduledDocument document = new ScheduledDocument(found, style);
+        return output.over().stream().map(formula -> Proved.overCycles(document.left(output, formula)
+                .and(formula.place().map(document::side).orElse(Prose.EMPTY)), "schedule", formula));
     }
 
     private Prose side(CycleFormula.Place place) {
@@ -268,25 +276,7 @@ public final class ScheduledDocument {
         if (output.over().isEmpty()) {
             return;
         }
-        blocks.add(proof(timetable, output.over().get(0)));
-    }
-
-    /** Why a formula over the cycles holds for every cycle. */
-    static Labelled proof(Timetable timetable, CycleFormula formula) {
-        RecurrenceProof proof = formula.closedForm().transform().proof();
-        int order = formula.closedForm().transform().recurrence().degree();
-        String states = proof.order() == 1 ? "one state takes part" : proof.order() + " states take part";
-        return new Labelled("holds", "for every cycle: with S, the matrix of a whole cycle, x("
-                + ScheduleProse.step(timetable, timetable.period() == 1 ? "m+1" : "(m+1)", "") + ") = S x(" + ScheduleProse.step(timetable, "m", "")
-                + "), " + switch (proof.method()) {
-                    case CHARACTERISTIC -> "the sequence in m needs a recurrence of order " + order + ", and " + states
-                            + ", so it is their characteristic polynomial (Cayley–Hamilton)";
-                    case WINDOWS -> (proof.comparedSteps() == 1 ? "the one exact term compared satisfies"
-                            : "the " + proof.comparedSteps() + " exact terms compared satisfy") + " a recurrence of order "
-                            + order + ", and " + states + " (Cayley–Hamilton)";
-                    case VECTOR -> "a recurrence of order " + order + " annihilates the state where cycles begin, and"
-                            + " so every output at every step of the cycle";
-                });
+        blocks.add(CycleProof.holds(timetable, output.over().get(0)));
     }
 
     private void values() {

@@ -37,14 +37,33 @@ public final class ScheduledPassageDocument {
     public static Document of(Model model, ScheduledPassage passage, Style style) {
         ScheduledPassageDocument document = new ScheduledPassageDocument(model.chain(), passage, style);
         document.blocks.addAll(ModelHead.of(model));
+        document.blocks.add(new Heading(2, document.title()));
         document.write();
         document.blocks.add(Caution.ofInspections(model));
         return new Document(document.blocks);
     }
 
+    /** The same as a part of a report. */
+    public static ReportSection section(Chain chain, ScheduledPassage passage, Style style) {
+        ScheduledPassageDocument document = new ScheduledPassageDocument(chain, passage, style);
+        document.write();
+        Prose set = document.names(passage.into());
+        return new ReportSection(ReportSection.Place.RESULTS, document.title(),
+                List.of(new Labelled(Prose.of("first into ").and(set), Prose.of(passage.over().map(over ->
+                        PassageDocument.inBrief(over.moments(), over.percentiles(), style))
+                        .orElse("not decided: the numbers of a whole cycle are too long for formulas")))),
+                document.blocks, passage.over().stream().flatMap(over -> over.distributions().stream())
+                        .map(formula -> Proved.overCycles(document.left(formula).and(", into ").and(set), "stopped chain",
+                                formula)).toList(),
+                passage.over().isPresent() ? ReportSection.Standing.ANSWERED : ReportSection.Standing.NOT_DECIDED);
+    }
+
+    private Prose title() {
+        return Prose.of("First passage into ").and(names(passage.into()));
+    }
+
     private void write() {
         Prose set = names(passage.into());
-        blocks.add(new Heading(2, Prose.of("First passage into ").and(set)));
         blocks.add(new Paragraph(Prose.of("T is the first step k ≥ 0 in which ").and(set)
                 .and(" is entered, by the move or by an action, from ").and(StartProse.of(chain))
                 .and("; what is done at the end of the same step doesn't undo it")
@@ -73,12 +92,13 @@ public final class ScheduledPassageDocument {
                         + " falls by the factor " + Decimals.of(slowest, style.digits()).text() + " a cycle"));
         blocks.add(new Heading(3, "Over the cycles"));
         FormulaInSteps formulas = new FormulaInSteps("m", style);
-        for (CycleFormula formula : over.distributions()) {
-            formulas.add(formula.closedForm(), Prose.of("P(T ≤ " + ScheduleProse.stepOf(passage.timetable(),
-                    formula.place().orElseThrow().j()) + ")"), Prose.of("m ≥ 0"));
-        }
+        over.distributions().forEach(formula -> formulas.add(formula.closedForm(), left(formula), Prose.of("m ≥ 0")));
         blocks.addAll(formulas.blocks());
-        blocks.add(ScheduledDocument.proof(passage.timetable(), over.distributions().get(0)));
+        blocks.add(CycleProof.holds(passage.timetable(), over.distributions().get(0)));
+    }
+
+    private Prose left(CycleFormula formula) {
+        return Prose.of("P(T ≤ " + ScheduleProse.stepOf(passage.timetable(), formula.place().orElseThrow().j()) + ")");
     }
 
     private void moments(PassageMoments moments) {

@@ -1,5 +1,6 @@
 package org.pofk.report;
 
+import java.util.List;
 import java.util.Optional;
 import org.pofk.answer.Simulation;
 import org.pofk.schedule.ScheduledModel;
@@ -9,8 +10,12 @@ import org.pofk.schedule.ScheduledModel;
  *
  * @param found      with the values that are listed
  * @param course     its outputs over a few cycles, where they can be drawn
+ * @param answers    in the order of the report
  * @param simulation random runs beside it, where it is compared with some
  */
-public record ScheduledReport(ScheduledModel found, Optional<Chart.Course> course, Optional<Simulation> simulation,
-        Provenance provenance) {
+public record ScheduledReport(ScheduledModel found, Optional<Chart.Course> course, List<ReportSection> answers,
+        Optional<Simulation> simulation, Provenance provenance) {
+    public ScheduledReport {
+        answers = List.copyOf(answers);
+    }
 }

@@ -3,6 +3,7 @@ package org.pofk.report;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.Stream;
 import org.pofk.answer.Simulation;
 import org.pofk.chain.Model;
 import org.pofk.chain.Model.Convention;
@@ -41,6 +42,7 @@ public final class ScheduledReportDocument {
         ScheduledReportDocument document = new ScheduledReportDocument(report, style);
         document.firstPage();
         document.course();
+        document.sections(ReportSection.Place.RESULTS);
         document.blocks.addAll(ScheduledModelBlocks.of(report.found()));
         document.formulas();
         if (depth == Report.Depth.FULL) {
@@ -50,6 +52,7 @@ public final class ScheduledReportDocument {
         if (depth == Report.Depth.FULL) {
             report.simulation().ifPresent(document::simulation);
         }
+        document.sections(ReportSection.Place.CHECKS);
         document.blocks.addAll(ProvenanceBlocks.of(report.provenance()));
         return new Document(document.blocks);
     }
@@ -72,7 +75,15 @@ public final class ScheduledReportDocument {
             blocks.addAll(ScheduledDocument.results(found, output, style));
             blocks.add(new Labelled("holds", holds(output)));
         }
+        if (!report.answers().isEmpty()) {
+            heading("Answers");
+            report.answers().forEach(answer -> blocks.addAll(answer.keyFigures()));
+        }
         blocks.add(Caution.ofInspections(model));
+    }
+
+    private void sections(ReportSection.Place place) {
+        blocks.addAll(ReportDocument.sections(report.answers(), place));
     }
 
     private static String holds(ScheduledOutput output) {
@@ -122,17 +133,22 @@ public final class ScheduledReportDocument {
                 + " moves and then does what is due. So x(" + begin + ") = S^m x(" + timetable.before() + "), and at step"
                 + " j of the cycle an output reads a fixed row c_j of that: y(" + ScheduleProse.step(timetable, "m", "j")
                 + ") = c_j S^m x(" + timetable.before() + ")."));
-        blocks.add(new Paragraph("Where D_S(S) x(" + timetable.before() + ") = 0 for a polynomial D_S, the recurrence with"
-                + " its coefficients holds in m for every output, at every j and on either side of an action, for every"
-                + " cycle."));
+        List<Proved> proofs = proofs();
+        blocks.addAll(CycleProof.theorem(proofs));
         blocks.add(new Paragraph("In the long run the state where cycles begin is a fixed point of S, or of the power"
                 + " of S that the cycles recur with; the values by step of the cycle are stepped from there."));
-        found.outputs().stream().filter(output -> !output.over().isEmpty()).forEach(output -> {
-            if (found.outputs().size() > 1) {
-                blocks.add(new Heading(3, OutputProse.title(output.output())));
-            }
-            blocks.add(ScheduledDocument.proof(timetable, output.over().get(0)));
-        });
+        if (report.answers().stream().anyMatch(answer -> !answer.proofs().isEmpty())) {
+            blocks.add(new Paragraph("For a first passage the moves and actions are those of the chain stopped where the wait"
+                    + " ends; for totals the state has two more components, what was added up so far and the constant"
+                    + " one, so that S is linear there too."));
+        }
+        blocks.addAll(CycleProof.compared(proofs));
+    }
+
+    /** Of the formulas of the outputs, then of those of the answers. */
+    private List<Proved> proofs() {
+        return Stream.concat(found.outputs().stream().flatMap(output -> ScheduledDocument.proofs(found, output, style)),
+                report.answers().stream().flatMap(answer -> answer.proofs().stream())).toList();
     }
 
     private void simulation(Simulation simulation) {

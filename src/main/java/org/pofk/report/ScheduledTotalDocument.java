@@ -19,6 +19,8 @@ import org.pofk.steps.KnownValue;
 
 /** What is spent in states, entered and paid under a schedule, as a document. */
 public final class ScheduledTotalDocument {
+    private static final String OUT_OF_REACH = "not decided: the numbers of a whole cycle are too long for formulas";
+
     private final ScheduledTotalModel found;
     private final Timetable timetable;
     private final Style style;
@@ -33,7 +35,10 @@ public final class ScheduledTotalDocument {
     public static Document of(ScheduledTotalModel found, Style style) {
         ScheduledTotalDocument document = new ScheduledTotalDocument(found, style);
         document.blocks.addAll(ModelHead.of(found.model()));
-        found.totals().forEach(document::total);
+        found.totals().forEach(total -> {
+            document.blocks.add(new Heading(2, OutputProse.title(total.total())));
+            document.total(total);
+        });
         if (found.totals().size() < found.wanted()) {
             document.label("not decided", "within the budget: " + (found.wanted() - found.totals().size()) + " more");
         }
@@ -41,11 +46,43 @@ public final class ScheduledTotalDocument {
         return new Document(document.blocks);
     }
 
+    /** The place the totals have in a report. */
+    public static ReportSection section(ScheduledTotalModel found, Prose title, Style style) {
+        ScheduledTotalDocument document = new ScheduledTotalDocument(found, style);
+        List<Labelled> keyFigures = new ArrayList<>();
+        List<Proved> proofs = new ArrayList<>();
+        found.totals().forEach(total -> {
+            document.blocks.add(new Heading(3, OutputProse.title(total.total())));
+            document.total(total);
+            keyFigures.add(document.keyFigure(total));
+            total.over().ifPresent(over -> proofs.addAll(document.proofs(total, over)));
+        });
+        return new ReportSection(ReportSection.Place.RESULTS, title, keyFigures, document.blocks, proofs,
+                found.isDecided() ? ReportSection.Standing.ANSWERED : ReportSection.Standing.NOT_DECIDED);
+    }
+
+    /** How it grows. */
+    private Labelled keyFigure(ScheduledTotal total) {
+        ScheduledTotalDocument alone = new ScheduledTotalDocument(found, style);
+        total.over().ifPresentOrElse(over -> alone.growth(total, over.growth()), () -> alone.label(TotalBlocks.LONG_RUN,
+                OUT_OF_REACH));
+        return TotalBlocks.keyFigure(total.total(), (Labelled) alone.blocks.get(0));
+    }
+
+    private List<Proved> proofs(ScheduledTotal total, ScheduledTotal.OverCycles over) {
+        return List.of(Proved.overCycles(left(total), "recursion", over.total()),
+                Proved.overCycles(Prose.of("what cycle m adds to ").andName(total.total().name()), "recursion",
+                        over.cycle()));
+    }
+
+    private Prose left(ScheduledTotal total) {
+        return Prose.name(total.total().name()).and("(" + ScheduleProse.stepOf(timetable, 0) + ")");
+    }
+
     private void total(ScheduledTotal total) {
-        blocks.add(new Heading(2, OutputProse.title(total.total())));
         label("counts", counts(total));
-        total.over().ifPresentOrElse(over -> over(total, over), () -> label("long run",
-                "not decided: the numbers of a whole cycle are too long for formulas"));
+        total.over().ifPresentOrElse(over -> over(total, over), () -> label(TotalBlocks.LONG_RUN,
+                OUT_OF_REACH));
         values(total);
     }
 
@@ -70,12 +107,11 @@ public final class ScheduledTotalDocument {
 
     private void over(ScheduledTotal total, ScheduledTotal.OverCycles over) {
         FormulaInSteps formulas = new FormulaInSteps("m", style);
-        formulas.add(over.total().closedForm(), Prose.name(total.total().name())
-                .and("(" + ScheduleProse.stepOf(timetable, 0) + ")"), Prose.of("m ≥ 0"));
+        formulas.add(over.total().closedForm(), left(total), Prose.of("m ≥ 0"));
         formulas.add(over.cycle().closedForm(), Prose.of("added by cycle m"), Prose.of("m ≥ 0, steps "
                 + ScheduleProse.stepOf(timetable, 1) + " … " + ScheduleProse.stepOf(timetable, timetable.period())));
         blocks.addAll(formulas.blocks());
-        blocks.add(ScheduledDocument.proof(timetable, over.total()));
+        blocks.add(CycleProof.holds(timetable, over.total()));
         growth(total, over.growth());
     }
 
@@ -84,7 +120,7 @@ public final class ScheduledTotalDocument {
         if (everything.isPresent()) {
             label("in all", amount(total, everything.get()) + " over all steps k ≥ 0");
         } else if (growth.perStep().isZero()) {
-            label("long run", prose().of(growth.beyond()) + ", at the beginning of cycle m");
+            label(TotalBlocks.LONG_RUN, prose().of(growth.beyond()) + ", at the beginning of cycle m");
         } else {
             label("grows", "in the long run by " + amount(total, growth.perStep()) + " a cycle");
             if (timetable.period() > 1) {

@@ -25,13 +25,31 @@ public final class ScheduledWhenDocument {
     public static Document of(ScheduledWhen found, Style style) {
         ScheduledWhenDocument document = new ScheduledWhenDocument(style);
         document.blocks.addAll(ModelHead.of(found.model()));
-        found.answers().forEach(document::answer);
+        found.answers().forEach(answer -> {
+            document.blocks.add(new Heading(2, OutputProse.title(answer.output())));
+            document.answer(answer);
+        });
         document.blocks.add(Caution.ofInspections(found.model()));
         return new Document(document.blocks);
     }
 
+    /** The same as a part of a report. */
+    public static ReportSection section(ScheduledWhen found, Style style) {
+        ScheduledWhenDocument document = new ScheduledWhenDocument(style);
+        List<Labelled> key = new ArrayList<>();
+        found.answers().forEach(answer -> {
+            if (found.answers().size() > 1) {
+                document.blocks.add(new Heading(3, OutputProse.title(answer.output())));
+            }
+            document.answer(answer);
+            key.add(WhenDocument.keyFigure(answer.output(), answer.when(), style));
+        });
+        return new ReportSection(ReportSection.Place.RESULTS, Prose.of(WhenDocument.title(found.asked(), style)), key,
+                document.blocks, found.isDecided() ? ReportSection.Standing.ANSWERED
+                        : ReportSection.Standing.NOT_DECIDED);
+    }
+
     private void answer(ScheduledWhen.Answer answer) {
-        blocks.add(new Heading(2, OutputProse.title(answer.output())));
         label("asked", WhenDocument.asked(answer.when().condition(), style) + ", at the end of step k, after what is"
                 + " done there");
         label("answer", WhenDocument.inWords(answer.when()));

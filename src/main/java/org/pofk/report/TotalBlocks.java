@@ -9,6 +9,7 @@ import org.pofk.answer.Growth;
 import org.pofk.answer.Increment.Kind;
 import org.pofk.answer.Total;
 import org.pofk.chain.Model;
+import org.pofk.chain.Output;
 import org.pofk.exact.Decimals;
 import org.pofk.exact.Rational;
 import org.pofk.longrun.LongRun;
@@ -19,6 +20,8 @@ import org.pofk.steps.StepValue;
 
 /** What is said of one total: what counts, the formulas, how it grows, values. */
 final class TotalBlocks {
+    static final String LONG_RUN = "long run";
+
     private final Model model;
     private final Total total;
     private final Style style;
@@ -42,6 +45,13 @@ final class TotalBlocks {
         TotalBlocks writer = new TotalBlocks(model, total, style);
         writer.growth(total.growth());
         return writer.blocks.stream().map(Labelled.class::cast).toList();
+    }
+
+    /** The first thing said of how a total grows, with its name. */
+    static Labelled keyFigure(Output total, Labelled growth) {
+        boolean isSentence = growth.label().equals(Prose.of(LONG_RUN));
+        return new Labelled(Prose.name(total.name()), isSentence ? growth.text()
+                : growth.label().and(" ").and(growth.text()));
     }
 
     /** Of the formulas shown. */
@@ -91,7 +101,7 @@ final class TotalBlocks {
         if (everything.isPresent()) {
             label("in all", amount(everything.get()) + " over all steps k ≥ 0");
         } else if (growth.perStep().isZero()) {
-            label("long run", prose().of(growth.beyond()));
+            label(LONG_RUN, prose().of(growth.beyond()));
         } else {
             label("grows", "in the long run by " + amount(growth.perStep()) + " a step"
                     + (total.increment().kind() == Kind.ENTRIES ? ", once in "

@@ -40,7 +40,7 @@ public final class TotalDocument {
             blocks.addAll(TotalBlocks.of(found.model(), total, style));
             proofs.addAll(TotalBlocks.proofs(total));
             keyFigures.addAll(TotalBlocks.keyFigures(found.model(), total, style).stream().limit(1)
-                    .map(each -> new Labelled(Prose.name(total.total().output().name()), each.text())).toList());
+                    .map(each -> TotalBlocks.keyFigure(total.total().output(), each)).toList());
         }
         return new ReportSection(ReportSection.Place.RESULTS, title, keyFigures, blocks, proofs,
                 found.isComplete() ? ReportSection.Standing.ANSWERED : ReportSection.Standing.NOT_DECIDED);

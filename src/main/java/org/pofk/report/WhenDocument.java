@@ -7,6 +7,7 @@ import org.pofk.answer.Peak;
 import org.pofk.answer.When;
 import org.pofk.answer.When.ResidueClass;
 import org.pofk.answer.WhenModel;
+import org.pofk.chain.Output;
 import org.pofk.exact.Decimals;
 import org.pofk.exact.Rational;
 import org.pofk.report.Document.Block;
@@ -50,8 +51,7 @@ public final class WhenDocument {
             if (answer.when().classes().size() > 1 || answer.around().size() > 1) {
                 document.steps(answer);
             }
-            key.add(new Labelled(Prose.name(answer.output().name()).and(" "
-                    + document.asked(answer.when().condition())), Prose.of(inBrief(answer.when()))));
+            key.add(keyFigure(answer.output(), answer.when(), style));
         });
         return new ReportSection(ReportSection.Place.RESULTS, Prose.of(title(found.asked(), style)), key, document.blocks,
                 found.isDecided() ? ReportSection.Standing.ANSWERED : ReportSection.Standing.NOT_DECIDED);
@@ -138,6 +138,12 @@ public final class WhenDocument {
                 .orElseGet(() -> ValueText.of(peak.value(), style.digits()));
         return (condition.kind() == When.Condition.Kind.AT_LEAST ? "the highest value is " : "the lowest value is ")
                 + value + peak.at().map(k -> ", at k = " + k).orElse(", approached as k grows");
+    }
+
+    /** What is asked of an output, and the answer in a line. */
+    static Labelled keyFigure(Output output, When when, Style style) {
+        return new Labelled(Prose.name(output.name()).and(" " + asked(when.condition(), style)),
+                Prose.of(inBrief(when)));
     }
 
     /** With the step, in a line. */

@@ -92,7 +92,7 @@ final class CycleChain {
     }
 
     private CycleFormula formula(Optional<Place> place, Transform transform) {
-        return new CycleFormula(place, ClosedForm.of(transform, poles), LongRun.of(chain, transform));
+        return new CycleFormula(place, chain, ClosedForm.of(transform, poles), LongRun.of(chain, transform));
     }
 
     /** Where an output is looked at unasked: after the actions that end a cycle, and just before any action. */
