@@ -6,12 +6,14 @@ import org.pofk.answer.WhenModel;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
 import org.pofk.report.CsvWriter;
+import org.pofk.report.PassageTable;
 import org.pofk.report.ScheduledPassageDocument;
 import org.pofk.report.ScheduledPassageJson;
 import org.pofk.report.ScheduledTotalDocument;
 import org.pofk.report.ScheduledTotalJson;
 import org.pofk.report.ScheduledWhenDocument;
 import org.pofk.report.Style;
+import org.pofk.report.TotalTable;
 import org.pofk.report.WhenJson;
 import org.pofk.report.WhenTable;
 import org.pofk.schedule.ScheduledPassage;
@@ -37,7 +39,8 @@ final class ScheduledAnswers {
         }
         ScheduledTotalModel found = outcome.published().get();
         destination.write(Answer.of(() -> ScheduledTotalDocument.of(found, style))
-                .with(Format.JSON, () -> ScheduledTotalJson.write(found, style.digits())), streams);
+                .with(Format.JSON, () -> ScheduledTotalJson.write(found, style.digits()))
+                .with(Format.CSV, () -> CsvWriter.write(TotalTable.of(found, style.digits()))), streams);
         return found.isDecided() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
     }
 
@@ -51,7 +54,8 @@ final class ScheduledAnswers {
         }
         ScheduledPassage found = outcome.published().get();
         destination.write(Answer.of(() -> ScheduledPassageDocument.of(started, found, style))
-                .with(Format.JSON, () -> ScheduledPassageJson.write(started, found, style.digits())), streams);
+                .with(Format.JSON, () -> ScheduledPassageJson.write(started, found, style.digits()))
+                .with(Format.CSV, () -> CsvWriter.write(PassageTable.of(started, found, style.digits()))), streams);
         return found.over().isPresent() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
     }
 
@@ -72,11 +76,9 @@ final class ScheduledAnswers {
     }
 
     private static void refuseTables(Model read, Destination destination) throws UsageException {
-        for (Format format : List.of(Format.NOTEBOOK, Format.CSV)) {
-            if (destination.takes(format)) {
-                throw new UsageException("'" + read.origin().file() + "' has a schedule: this is answered as text, LaTeX,"
-                        + " a web page or JSON, not as a " + (format == Format.CSV ? "table" : "notebook"));
-            }
+        if (destination.takes(Format.NOTEBOOK)) {
+            throw new UsageException("'" + read.origin().file() + "' has a schedule: this is answered as text, LaTeX, a"
+                    + " web page, a table or JSON, not as a notebook");
         }
     }
 }

@@ -8,7 +8,7 @@ import java.util.stream.Collectors;
 import org.pofk.text.Alphabet;
 
 /**
- * A table in LaTeX that goes on over pages with its header repeated. Numbers are aligned as in text; a table that is too
+ * A table in LaTeX: a short one in one piece, a long one over pages with its header repeated. Numbers are aligned as in text; a table that is too
  * wide has its widest column of text broken into lines, and else its columns dealt to several tables, each beginning
  * with the first column.
  */
@@ -17,6 +17,8 @@ final class LatexTable {
     private static final int WIDTH = 80;
     private static final int GAP = 3;
     private static final int SLACK = 2;
+    /** Parting such a table on a page would leave its header alone on the one before. */
+    private static final int ONE_PIECE_UP_TO = 8;
     private static final int NARROWEST_TEXT = 24;
 
     private record Column(TextColumn plain, int room, String header, List<String> cells) {
@@ -113,20 +115,23 @@ final class LatexTable {
     private static List<String> part(List<Column> group, int rows, LatexLayout layout) {
         List<String> lines = new ArrayList<>();
         boolean isSetAsItIs = layout.figures() == LatexLayout.Figures.INSIDE;
-        lines.add("{\\small\\renewcommand{\\arraystretch}{1.25}");
-        lines.add("\\begin{longtable}{@{}" + kinds(group, layout) + "@{}}");
+        boolean isOnePiece = isSetAsItIs && rows <= ONE_PIECE_UP_TO;
+        lines.add("{\\small\\renewcommand{\\arraystretch}{1.25}" + (isOnePiece ? "\\centering\\vspace{6pt}" : ""));
+        lines.add("\\begin{" + (isOnePiece ? "tabular" : "longtable") + "}{@{}" + kinds(group, layout) + "@{}}");
         lines.add("\\toprule");
         lines.add(row(group.stream().map(column -> column.isBroken() ? broken(column.header) : column.header).toList()));
         lines.add("\\midrule");
-        lines.add("\\endhead");
-        lines.add("\\bottomrule");
-        lines.add("\\endfoot{}%"); // a converter takes a number that follows for a part of the command
+        if (!isOnePiece) {
+            lines.add("\\endhead");
+            lines.add("\\bottomrule");
+            lines.add("\\endfoot{}%"); // a converter takes a number that follows for a part of the command
+        }
         for (int i = 0; i < rows; i++) {
             int row = i;
             lines.add(row(group.stream().map(column -> column.isBroken() ? broken(column.cells.get(row))
-                    : column.cells.get(row)).toList()) + (isKept(row, rows) && isSetAsItIs ? "*" : ""));
+                    : column.cells.get(row)).toList()) + (isKept(row, rows) && isSetAsItIs && !isOnePiece ? "*" : ""));
         }
-        lines.add("\\end{longtable}}");
+        lines.addAll(isOnePiece ? List.of("\\bottomrule", "\\end{tabular}\\par\\vspace{12pt}}") : List.of("\\end{longtable}}"));
         return lines;
     }
 

@@ -3,11 +3,14 @@ package org.pofk.report;
 import java.util.List;
 import java.util.Optional;
 import org.pofk.answer.DerivedOutput;
+import org.pofk.answer.FirstEntrance;
 import org.pofk.answer.Passage;
 import org.pofk.answer.PassageMoments;
+import org.pofk.answer.Percentile;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
 import org.pofk.exact.Rational;
+import org.pofk.schedule.ScheduledPassage;
 
 /**
  * A first passage as rows that each say one number: law, distribution, survival and hazard by step, with an empty
@@ -35,13 +38,38 @@ public final class PassageTable {
         passage.hazards().forEach(hazard ->
                 rows.add(Rows.words("hazard"), START, steps.cells(hazard.k()), rows.value(hazard.value())));
         table.moments(passage.moments());
-        passage.percentiles().stream().filter(each -> each.k().isPresent()).forEach(each -> rows.add(
-                Rows.words("percentile"), START, steps.cells(each.k().getAsInt()), rows.value(each.p())));
-        for (int i = 0; i < chain.size(); i++) {
-            table.number("probability", chain.states().get(i), Optional.of(passage.fromEach().probabilities().get(i)));
-            table.number("mean given that it happens", chain.states().get(i), passage.fromEach().means().get(i));
-        }
+        table.percentiles(passage.percentiles());
+        table.fromEach(chain, passage.fromEach());
         return rows.table();
+    }
+
+    /** The same under a schedule, without law and hazard. */
+    public static Document.Table of(Model model, ScheduledPassage passage, int digits) {
+        StepColumns steps = StepColumns.of(model);
+        Rows rows = new Rows(digits, Rows.words("quantity", "from"), steps.header(), Rows.words("exact", "decimal"));
+        PassageTable table = new PassageTable(steps, rows);
+        passage.values().forEach(each -> rows.add(Rows.words("distribution"), START, steps.cells(each.k()),
+                rows.value(each.distribution())));
+        passage.values().forEach(each -> rows.add(Rows.words("survival"), START, steps.cells(each.k()),
+                rows.value(each.survival())));
+        passage.over().ifPresent(over -> {
+            table.moments(over.moments());
+            table.percentiles(over.percentiles());
+            table.fromEach(model.chain(), over.fromEach());
+        });
+        return rows.table();
+    }
+
+    private void percentiles(List<Percentile> percentiles) {
+        percentiles.stream().filter(each -> each.k().isPresent()).forEach(each -> rows.add(
+                Rows.words("percentile"), START, steps.cells(each.k().getAsInt()), rows.value(each.p())));
+    }
+
+    private void fromEach(Chain chain, FirstEntrance entrance) {
+        for (int i = 0; i < chain.size(); i++) {
+            number("probability", chain.states().get(i), Optional.of(entrance.probabilities().get(i)));
+            number("mean given that it happens", chain.states().get(i), entrance.means().get(i));
+        }
     }
 
     private void byStep(String quantity, DerivedOutput output) {

@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.stream.Stream;
 import org.pofk.exact.Rational;
+import org.pofk.steps.KnownValue;
 import org.pofk.steps.StepValue;
 
 /** A table for programs, built row by row: every number plain, exact ones as fractions. */
@@ -42,6 +43,12 @@ final class Rows {
     /** The same for what there may be none of. */
     List<Prose> value(Optional<Rational> value) {
         return value.map(this::value).orElse(List.of(Prose.EMPTY, Prose.EMPTY));
+    }
+
+    /** The same of a number with its word; both cells are empty where no digit is certain. */
+    List<Prose> value(KnownValue value) {
+        return List.of(Prose.of(value.exact().map(Rational::toString).orElse("")),
+                Prose.of(KnownText.number(value, digits).orElse("")));
     }
 
     /** The same; {@code exact} stays empty where only certified decimals are known. */

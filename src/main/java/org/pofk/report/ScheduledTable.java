@@ -3,12 +3,10 @@ package org.pofk.report;
 import java.util.ArrayList;
 import java.util.List;
 import org.pofk.chain.Timetable;
-import org.pofk.exact.Rational;
 import org.pofk.schedule.CycleCourse.Reading;
 import org.pofk.schedule.CycleCourse.Side;
 import org.pofk.schedule.ScheduledModel;
 import org.pofk.schedule.ScheduledOutput;
-import org.pofk.steps.KnownValue;
 
 /**
  * What {@code derive} found of a model with a schedule: a row for each output and step, two where something is done, at
@@ -27,7 +25,7 @@ public final class ScheduledTable {
             for (Reading reading : readings(output, found.timetable())) {
                 for (Side side : sides(found.timetable(), reading.j())) {
                     rows.add(name, steps.cells(reading.j()), Rows.words(side == Side.BEFORE ? "before" : "after"),
-                            cells(reading.at(side), digits));
+                            rows.value(reading.at(side)));
                 }
             }
         }
@@ -52,10 +50,5 @@ public final class ScheduledTable {
                 .toList();
         readings.addAll(cycle);
         return readings;
-    }
-
-    private static List<Prose> cells(KnownValue value, int digits) {
-        return List.of(Prose.of(value.exact().map(Rational::toString).orElse("")),
-                Prose.of(KnownText.number(value, digits).orElse("")));
     }
 }
