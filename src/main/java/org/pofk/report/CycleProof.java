@@ -42,8 +42,7 @@ final class CycleProof {
 
     private static String terms(int count, int order) {
         String terms = count == 1 ? "the one exact term compared " : "the " + count + " exact terms compared ";
-        return terms + (order == 0 ? count == 1 ? "is zero" : "are zero"
-                : (count == 1 ? "satisfies" : "satisfy") + " a recurrence of order " + order);
+        return terms + RecurrenceProse.satisfied(count, order);
     }
 
     /** Why a comparison of finitely many terms proves a formula for every cycle. */

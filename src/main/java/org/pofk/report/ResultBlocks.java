@@ -173,9 +173,9 @@ final class ResultBlocks {
             case CHARACTERISTIC -> "the sequence needs a recurrence of order " + order + ", and " + states(proof.order())
                     + ", so it is their characteristic polynomial (Cayley–Hamilton); " + terms(proof.comparedSteps())
                     + " compared";
-            case WINDOWS -> (proof.comparedSteps() == 1 ? "the one exact term compared satisfies"
-                    : "all " + terms(proof.comparedSteps()) + " compared satisfy") + " a recurrence of order "
-                    + order + ", and " + states(proof.order()) + " (Cayley–Hamilton)";
+            case WINDOWS -> (proof.comparedSteps() == 1 ? "the one exact term compared "
+                    : "all " + terms(proof.comparedSteps()) + " compared ")
+                    + RecurrenceProse.satisfied(proof.comparedSteps(), order) + ", and " + states(proof.order()) + " (Cayley–Hamilton)";
             case VECTOR -> "a recurrence of order " + order + " of the matrix takes the start itself to zero, and so"
                     + " every output";
         });

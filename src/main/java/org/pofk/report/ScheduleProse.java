@@ -46,6 +46,17 @@ final class ScheduleProse {
                 : "the end of step j of cycle m, 0 ≤ j < " + timetable.period());
     }
 
+    /** The names of what is done at the end of step j of a cycle. */
+    static Prose done(Timetable timetable, int j) {
+        return Prose.names(timetable.cycle().get((j - 1) % timetable.period()).actions().stream()
+                .map(action -> timetable.actions().get(action).name()).toList());
+    }
+
+    /** Whether anything is done at the end of step j of a cycle; never at its beginning. */
+    static boolean isActed(Timetable timetable, int j) {
+        return j > 0 && !timetable.cycle().get((j - 1) % timetable.period()).actions().isEmpty();
+    }
+
     /** {@code 12 m + j}, {@code 5 + 12 m}. */
     static String step(Timetable timetable, String m, String j) {
         String before = timetable.before() == 0 ? "" : timetable.before() + " + ";

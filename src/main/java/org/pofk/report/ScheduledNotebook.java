@@ -75,7 +75,7 @@ public final class ScheduledNotebook {
 
     private void output(ScheduledOutput output) {
         List<Block> blocks = new ArrayList<>(List.of(new Heading(2, OutputProse.title(output.output()))));
-        blocks.addAll(ScheduledDocument.results(found, output, style));
+        blocks.addAll(RegimeBlocks.of(found.timetable(), output, style));
         text(blocks);
         checks(output);
         text(ScheduledDocument.formulas(found, output, style));

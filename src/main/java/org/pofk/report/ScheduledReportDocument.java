@@ -48,7 +48,7 @@ public final class ScheduledReportDocument {
         if (depth == Report.Depth.FULL) {
             document.matrices(convention);
         }
-        document.proof();
+        document.proof(convention);
         if (depth == Report.Depth.FULL) {
             report.simulation().ifPresent(document::simulation);
         }
@@ -72,7 +72,7 @@ public final class ScheduledReportDocument {
             if (found.outputs().size() > 1) {
                 blocks.add(new Heading(3, OutputProse.title(output.output())));
             }
-            blocks.addAll(ScheduledDocument.results(found, output, style));
+            blocks.addAll(RegimeBlocks.of(found.timetable(), output, style));
             blocks.add(new Labelled("holds", holds(output)));
         }
         if (!report.answers().isEmpty()) {
@@ -101,7 +101,7 @@ public final class ScheduledReportDocument {
         report.course().ifPresent(chart -> blocks.add(new Figure(
                 Prose.of("Course of ").and(Prose.names(chart.curves().stream().map(Chart.Curve::name).toList()))
                         .and(" over steps"), chart)));
-        blocks.addAll(ScheduledDocument.values(found, style));
+        CycleTables.values(found, style).ifPresent(blocks::add);
     }
 
     private void formulas() {
@@ -125,14 +125,14 @@ public final class ScheduledReportDocument {
         blocks.addAll(new MatrixBlocks(model.chain().states(), action.matrix(), convention).of(caption));
     }
 
-    private void proof() {
+    private void proof(Convention convention) {
         heading("Why it holds");
-        Timetable timetable = found.timetable();
-        String begin = ScheduleProse.step(timetable, "m", "");
-        blocks.add(new Paragraph("S is the product of the matrices of the steps of one cycle, the last on the left: each step"
-                + " moves and then does what is due. So x(" + begin + ") = S^m x(" + timetable.before() + "), and at step"
-                + " j of the cycle an output reads a fixed row c_j of that: y(" + ScheduleProse.step(timetable, "m", "j")
-                + ") = c_j S^m x(" + timetable.before() + ")."));
+        blocks.add(new Paragraph("S is the product of the matrices of the steps of one cycle, the "
+                + (convention == Convention.COLUMNS ? "last" : "first") + " on the left: each step moves and then does"
+                + " what is due. So " + state(convention, ScheduleProse.step(found.timetable(), "m", "")) + " = "
+                + powers(convention) + ", and at step j of the cycle an output weighs the components of that by fixed"
+                + " numbers, c(j): y(" + ScheduleProse.step(found.timetable(), "m", "j") + ") = "
+                + (convention == Convention.COLUMNS ? "c(j) " + powers(convention) : powers(convention) + " c(j)") + "."));
         List<Proved> proofs = proofs();
         blocks.addAll(CycleProof.theorem(proofs));
         blocks.add(new Paragraph("In the long run the state where cycles begin is a fixed point of S, or of the power"
@@ -145,9 +145,18 @@ public final class ScheduledReportDocument {
         blocks.addAll(CycleProof.compared(proofs));
     }
 
+    private static String state(Convention convention, String step) {
+        return (convention == Convention.COLUMNS ? "x(" : "p(") + step + ")";
+    }
+
+    private String powers(Convention convention) {
+        String begin = state(convention, String.valueOf(found.timetable().before()));
+        return convention == Convention.COLUMNS ? "S^m " + begin : begin + " S^m";
+    }
+
     /** Of the formulas of the outputs, then of those of the answers. */
     private List<Proved> proofs() {
-        return Stream.concat(found.outputs().stream().flatMap(output -> ScheduledDocument.proofs(found, output, style)),
+        return Stream.concat(found.outputs().stream().flatMap(output -> CycleFormulas.proofs(found.timetable(), output)),
                 report.answers().stream().flatMap(answer -> answer.proofs().stream())).toList();
     }
 
