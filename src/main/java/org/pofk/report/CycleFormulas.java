@@ -25,6 +25,10 @@ final class CycleFormulas {
         this.name = Prose.name(output.output().name());
     }
 
+    static CycleFormulas of(Timetable timetable, ScheduledOutput output) {
+        return new CycleFormulas(timetable, output);
+    }
+
     /** In steps j of a cycle. */
     static List<Block> within(Timetable timetable, ScheduledOutput output, Style style) {
         return output.within().isEmpty() ? List.of() : new CycleFormulas(timetable, output).within(style);
@@ -36,11 +40,15 @@ final class CycleFormulas {
         while (!left.isEmpty()) {
             StretchFormula formula = left.get(0);
             List<StretchFormula> same = left.stream().filter(other -> isSame(formula, other)).toList();
-            formulas.add(formula.closedForm(), name.and("(" + (formula.from() == 0 ? "j)" : formula.from() + " + j)")),
+            formulas.add(formula.closedForm(), left(formula),
                     range(formula, same.stream().map(StretchFormula::cycle).toList()));
             left.removeAll(same);
         }
         return headed("Within a cycle", formulas);
+    }
+
+    Prose left(StretchFormula formula) {
+        return name.and("(" + (formula.from() == 0 ? "j)" : formula.from() + " + j)"));
     }
 
     /** In the same steps of a cycle the same sequence. */
@@ -82,8 +90,11 @@ final class CycleFormulas {
     static List<Block> joint(Timetable timetable, ScheduledOutput output) {
         CycleFormulas all = new CycleFormulas(timetable, output);
         return output.joint().map(formula -> List.<Block>of(new Heading(3, "Both at once"),
-                FormulaInSteps.joint(formula, all.name.and("(" + ScheduleProse.step(timetable, "m", "j") + ")"))))
-                .orElse(List.of());
+                FormulaInSteps.joint(formula, all.leftOfBoth()))).orElse(List.of());
+    }
+
+    Prose leftOfBoth() {
+        return name.and("(" + ScheduleProse.step(timetable, "m", "j") + ")");
     }
 
     private static List<Block> headed(String heading, FormulaInSteps formulas) {
@@ -92,12 +103,13 @@ final class CycleFormulas {
         return blocks;
     }
 
-    private Prose left(CycleFormula formula) {
+    Prose left(CycleFormula formula) {
         return formula.place().map(place -> name.and("(" + ScheduleProse.stepOf(timetable, place.j()) + ")"))
                 .orElse(Prose.of("mean of ").and(name).and(" over cycle m"));
     }
 
-    private Prose side(CycleFormula formula) {
+    /** Before or after what is done there. */
+    Prose side(CycleFormula formula) {
         return formula.place().filter(place -> ScheduleProse.isActed(timetable, endOf(place)))
                 .map(place -> Prose.of(place.side() == Side.BEFORE ? ", before " : ", after ")
                         .and(ScheduleProse.done(timetable, endOf(place)))).orElse(Prose.EMPTY);

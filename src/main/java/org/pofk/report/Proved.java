@@ -31,7 +31,7 @@ record Proved(Prose left, Chain chain, String stepped, Transform transform, Repe
 
     /** A formula over the cycles of a schedule, which the chain has that moves once a cycle. */
     static Proved overCycles(Prose left, String stepped, CycleFormula formula) {
-        return new Proved(left, formula.chain(), stepped, formula.closedForm().transform(), Repeated.IN_NOTEBOOK);
+        return new Proved(left, formula.chain(), stepped, formula.closedForm().transform(), Repeated.NOWHERE);
     }
 
     /** A formula that stands in a section of its own. */

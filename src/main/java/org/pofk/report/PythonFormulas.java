@@ -36,14 +36,19 @@ record PythonFormulas(List<Printed> printed) {
     }
 
     static PythonFormulas of(ClosedForm form, int digits) {
+        return of(form, digits, LAST);
+    }
+
+    /** @param until the last step for which there are terms */
+    static PythonFormulas of(ClosedForm form, int digits, long until) {
         List<Printed> printed = new ArrayList<>();
         Optional<Formula> exact = form.exactFormula();
         exact.flatMap(PythonExpression::of).ifPresent(expression ->
-                printed.add(new Printed("exact", expression, Rational.ZERO, LAST)));
+                printed.add(new Printed("exact", expression, Rational.ZERO, until)));
         DecimalForm decimals = form.decimalForm(digits);
         decimals.formula().filter(formula -> !Optional.of(formula).equals(exact)).flatMap(PythonExpression::of)
                 .ifPresent(expression -> printed.add(new Printed("decimals", expression, decimals.errorBound(),
-                        decimals.upTo().map(last -> Math.min(last, LAST)).orElse(LAST))));
+                        decimals.upTo().map(last -> Math.min(last, until)).orElse(until))));
         return new PythonFormulas(printed);
     }
 

@@ -16,6 +16,9 @@ import org.pofk.steps.KnownValue;
 
 /** A chain with its timetable, and courses of outputs, as Python. */
 final class PythonSchedule {
+    /** Behind a chain and the tools. */
+    static final String BEGIN = "begin = stepped(start, preamble)[-1][1]  # where the first cycle begins\ncycle_path = []";
+
     private static final int BITS = 128;
 
     private PythonSchedule() {
@@ -38,6 +41,13 @@ final class PythonSchedule {
                     "require(\"the start adds up to one\", sum(start) == 1 and min(start) >= 0)"));
         }
         return String.join("\n", lines);
+    }
+
+    /** What steps such a chain, behind it: cells. */
+    static List<String> tools() {
+        return List.of(Python.tools("polynomials"), Python.tools("proof"), Python.tools("long_run"),
+                Python.tools("decimals"), Python.tools("printed"), Python.tools("schedule"), Python.tools("cycles"),
+                BEGIN);
     }
 
     private static String matrices(List<SparseMatrix> matrices) {
@@ -83,7 +93,7 @@ final class PythonSchedule {
                 "\"\"\", summary(before, after)))");
     }
 
-    private static String values(Stream<KnownValue> values) {
+    static String values(Stream<KnownValue> values) {
         return values.map(PythonSchedule::value).collect(Collectors.joining("\n"));
     }
 

@@ -9,11 +9,12 @@ import org.pofk.report.Document.Paragraph;
 import org.pofk.schedule.PeriodicRegime;
 import org.pofk.schedule.ScheduledModel;
 import org.pofk.schedule.ScheduledOutput;
+import org.pofk.schedule.StretchFormula;
 
 /**
  * What was found about a model with a schedule as a notebook that steps moves and actions in exact fractions, checks the
- * first cycle and the long run, and ends with an error where a value isn't the one stated or outside its enclosure. The
- * formulas stand in it as prose and are not proved again.
+ * first cycle and the long run, proves the formulas again whose terms aren't too many, and ends with an error where a
+ * value isn't the one stated or outside its enclosure, or a formula doesn't hold.
  */
 public final class ScheduledNotebook {
     private final List<Notebook.Cell> cells = new ArrayList<>();
@@ -40,7 +41,14 @@ public final class ScheduledNotebook {
         notebook.text(ScheduledReportDocument.of(report, depth, style, convention).blocks());
         notebook.text(List.of(new Heading(2, "Checked again")));
         notebook.tools();
-        report.found().outputs().forEach(notebook::checks);
+        report.found().outputs().forEach(output -> {
+            notebook.checks(output);
+            notebook.proofs(output);
+        });
+        if (!report.answers().isEmpty()) {
+            notebook.text(List.of(new Paragraph("The answers are not worked out again here; pofk passage and pofk total"
+                    + " write notebooks that prove theirs.")));
+        }
         return new Notebook(notebook.cells).write();
     }
 
@@ -61,16 +69,14 @@ public final class ScheduledNotebook {
     }
 
     private void tools() {
-        text(List.of(new Paragraph("The cells of code step moves and actions in exact fractions, and check the first cycle and"
-                + " the long run independently of the program that wrote them; they need Python's own library alone and"
-                + " end with an error where something doesn't hold. What is certified is checked to lie in its"
-                + " enclosure. The formulas are stated, not proved again here.")));
+        text(List.of(new Paragraph("The cells of code step moves and actions in exact fractions, check the first cycle and the"
+                + " long run, and prove the formulas again, independently of the program that wrote them; they need"
+                + " Python's own library alone and end with an error where something doesn't hold. What is certified is"
+                + " checked to lie in its enclosure. A formula that would take too many steps is stated, not proved"
+                + " again, and said to be so.")));
         code(Python.tools("numbers"));
         code(PythonSchedule.of(found.model().chain(), found.timetable()));
-        code(Python.tools("polynomials"));
-        code(Python.tools("long_run"));
-        code(Python.tools("schedule"));
-        code("begin = stepped(start, preamble)[-1][1]  # where the first cycle begins");
+        PythonSchedule.tools().forEach(this::code);
     }
 
     private void output(ScheduledOutput output) {
@@ -79,6 +85,50 @@ public final class ScheduledNotebook {
         text(blocks);
         checks(output);
         text(ScheduledDocument.formulas(found, output, style));
+        proofs(output);
+    }
+
+    /** Of the formulas, or that they are only stated. */
+    private void proofs(ScheduledOutput output) {
+        List<String> proofs = new ArrayList<>();
+        List<Prose> stated = new ArrayList<>();
+        PythonCycles python = new PythonCycles(found.timetable());
+        CycleFormulas formulas = CycleFormulas.of(found.timetable(), output);
+        output.within().forEach(formula -> {
+            boolean isFirst = formula.cycle() == StretchFormula.Cycle.FIRST;
+            Prose name = formulas.left(formula).and(isFirst ? " in the first cycle" : " in the long run");
+            if (python.isProved(formula.closedForm(), formula.to())) {
+                proofs.add(PythonCycles.within(name, formula, "stepped(" + (isFirst ? "begin" : "settled") + ", cycle)"));
+            } else {
+                stated.add(name);
+            }
+        });
+        output.over().forEach(formula -> {
+            Prose name = formulas.left(formula).and(formulas.side(formula));
+            if (python.isProved(formula)) {
+                proofs.addAll(python.formula(name, formula, style.digits()));
+            } else {
+                stated.add(name);
+            }
+        });
+        output.joint().ifPresent(formula -> {
+            boolean isProved = output.over().stream().allMatch(python::isProved) && formula.terms().stream()
+                    .allMatch(term -> python.isProved(term.within(), formula.to()));
+            if (isProved) {
+                proofs.add(PythonCycles.joint(formulas.leftOfBoth(), formula));
+            } else {
+                stated.add(formulas.leftOfBoth());
+            }
+        });
+        if (!proofs.isEmpty()) {
+            text(List.of(new Paragraph("These formulas proved again; in the code a cycle m is called k where a formula is"
+                    + " written as it is printed:")));
+        }
+        proofs.forEach(this::code);
+        if (!stated.isEmpty()) {
+            text(List.of(new Paragraph(Prose.of("Not proved again here, as their terms would take too many steps: ")
+                    .and(Prose.joined(stated, "; ")).and("."))));
+        }
     }
 
     private void checks(ScheduledOutput output) {
