@@ -9,6 +9,7 @@ import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
 import org.pofk.report.CsvWriter;
 import org.pofk.report.GivenProse;
+import org.pofk.report.NotebookWriter;
 import org.pofk.report.PassageDocument;
 import org.pofk.report.PassageJson;
 import org.pofk.report.PassageTable;
@@ -23,7 +24,7 @@ import picocli.CommandLine.Option;
     "passage as a formula, mean, variance and percentiles; and from every state."})
 final class PassageCommand implements Work {
     @Mixin
-    private AnswerOptions options = new AnswerOptions(CommandName.PASSAGE, Format.JSON, Format.CSV);
+    private AnswerOptions options = new AnswerOptions(CommandName.PASSAGE, Format.JSON, Format.CSV, Format.NOTEBOOK);
 
     @Mixin
     private PassageOptions passage = new PassageOptions();
@@ -71,7 +72,9 @@ final class PassageCommand implements Work {
         Passage found = outcome.published().get();
         destination.write(Answer.of(() -> GivenProse.in(PassageDocument.of(read, chain, found, style), known, style))
                 .with(Format.JSON, () -> PassageJson.write(read, chain, known, found, style.digits()))
-                .with(Format.CSV, () -> CsvWriter.write(PassageTable.of(read, chain, found, style.digits()))), streams);
+                .with(Format.CSV, () -> CsvWriter.write(PassageTable.of(read, chain, found, style.digits())))
+                .with(Format.NOTEBOOK, () -> NotebookWriter.write(read, chain, found, style, options.convention(read))),
+                streams);
         return ExitCode.ANSWERED;
     }
 }

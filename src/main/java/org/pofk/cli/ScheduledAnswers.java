@@ -9,8 +9,10 @@ import org.pofk.report.CsvWriter;
 import org.pofk.report.PassageTable;
 import org.pofk.report.ScheduledPassageDocument;
 import org.pofk.report.ScheduledPassageJson;
+import org.pofk.report.ScheduledPassageNotebook;
 import org.pofk.report.ScheduledTotalDocument;
 import org.pofk.report.ScheduledTotalJson;
+import org.pofk.report.ScheduledTotalNotebook;
 import org.pofk.report.ScheduledWhenDocument;
 import org.pofk.report.Style;
 import org.pofk.report.TotalTable;
@@ -29,7 +31,6 @@ final class ScheduledAnswers {
 
     static ExitCode total(AnswerOptions options, Model read, List<ScheduledTotal.Asked> asked, List<Integer> steps,
             Destination destination, Streams streams) throws RefusedException, UsageException, WritingException {
-        refuseTables(read, destination);
         Style style = options.style();
         Worker.Outcome<ScheduledTotalModel> outcome = options.within(streams, partly ->
                 partly.totals().size() + " of " + asked.size() + " totals found", published ->
@@ -40,13 +41,13 @@ final class ScheduledAnswers {
         ScheduledTotalModel found = outcome.published().get();
         destination.write(Answer.of(() -> ScheduledTotalDocument.of(found, style))
                 .with(Format.JSON, () -> ScheduledTotalJson.write(found, style.digits()))
-                .with(Format.CSV, () -> CsvWriter.write(TotalTable.of(found, style.digits()))), streams);
+                .with(Format.CSV, () -> CsvWriter.write(TotalTable.of(found, style.digits())))
+                .with(Format.NOTEBOOK, () -> ScheduledTotalNotebook.write(found, style)), streams);
         return found.isDecided() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
     }
 
     static ExitCode passage(AnswerOptions options, Model started, Supplier<ScheduledPassage> work,
             Destination destination, Streams streams) throws RefusedException, UsageException, WritingException {
-        refuseTables(started, destination);
         Style style = options.style();
         Worker.Outcome<ScheduledPassage> outcome = options.within(streams, published -> published.accept(work.get()));
         if (outcome.published().isEmpty()) {
@@ -55,7 +56,8 @@ final class ScheduledAnswers {
         ScheduledPassage found = outcome.published().get();
         destination.write(Answer.of(() -> ScheduledPassageDocument.of(started, found, style))
                 .with(Format.JSON, () -> ScheduledPassageJson.write(started, found, style.digits()))
-                .with(Format.CSV, () -> CsvWriter.write(PassageTable.of(started, found, style.digits()))), streams);
+                .with(Format.CSV, () -> CsvWriter.write(PassageTable.of(started, found, style.digits())))
+                .with(Format.NOTEBOOK, () -> ScheduledPassageNotebook.write(started, found, style)), streams);
         return found.over().isPresent() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
     }
 
@@ -73,12 +75,5 @@ final class ScheduledAnswers {
                 .with(Format.JSON, () -> WhenJson.write(found, style.digits()))
                 .with(Format.CSV, () -> CsvWriter.write(WhenTable.of(found, style.digits()))), streams);
         return found.isDecided() && outcome.finished() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
-    }
-
-    private static void refuseTables(Model read, Destination destination) throws UsageException {
-        if (destination.takes(Format.NOTEBOOK)) {
-            throw new UsageException("'" + read.origin().file() + "' has a schedule: this is answered as text, LaTeX, a"
-                    + " web page, a table or JSON, not as a notebook");
-        }
     }
 }

@@ -7,9 +7,11 @@ import java.util.Set;
 import org.pofk.answer.DerivedModel;
 import org.pofk.answer.DerivedOutput;
 import org.pofk.answer.Increment;
+import org.pofk.answer.Passage;
 import org.pofk.answer.Total;
 import org.pofk.answer.TotalModel;
 import org.pofk.answer.Wanted;
+import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
 import org.pofk.chain.Model.Convention;
 import org.pofk.chain.Output;
@@ -76,6 +78,30 @@ public final class NotebookWriter {
         }
         cells.add(new Notebook.Cell(Notebook.Kind.MARKDOWN, MarkdownWriter.write(List.of(Caution.of(found.model())))));
         return new Notebook(cells).write();
+    }
+
+    /**
+     * A first passage, its law, distribution and survival proved as outputs of the stopped chain.
+     *
+     * @param start the chain with the start that was asked about
+     */
+    public static String write(Model model, Chain start, Passage passage, Style style, Convention convention) {
+        Model stopped = model.with(passage.stopped());
+        NotebookWriter writer = new NotebookWriter(new DerivedModel(stopped, Structure.of(stopped.chain()),
+                List.of(passage.law(), passage.distribution(), passage.survival()), Optional.empty(),
+                new Wanted(List.of(), Set.of())), style, convention);
+        ReportSection section = PassageDocument.section(start, passage, style);
+        List<Block> head = new ArrayList<>(ModelHead.of(model));
+        head.add(new Heading(2, section.title()));
+        head.addAll(section.blocks());
+        head.add(new Paragraph(WHAT_IT_DOES));
+        head.add(new Paragraph("They prove law, distribution and survival; moments, percentiles, visits and what holds from"
+                + " each state are stated, not worked out again."));
+        writer.text(head);
+        writer.chain();
+        writer.derived.outputs().forEach(writer::output);
+        writer.text(List.of(Caution.of(model)));
+        return new Notebook(writer.cells).write();
     }
 
     private static DerivedModel recursion(TotalModel found, Total total) {

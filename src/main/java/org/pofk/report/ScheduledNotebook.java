@@ -5,7 +5,6 @@ import java.util.List;
 import org.pofk.chain.Model.Convention;
 import org.pofk.report.Document.Block;
 import org.pofk.report.Document.Heading;
-import org.pofk.report.Document.Paragraph;
 import org.pofk.schedule.PeriodicRegime;
 import org.pofk.schedule.ScheduledModel;
 import org.pofk.schedule.ScheduledOutput;
@@ -17,7 +16,7 @@ import org.pofk.schedule.StretchFormula;
  * value isn't the one stated or outside its enclosure, or a formula doesn't hold.
  */
 public final class ScheduledNotebook {
-    private final List<Notebook.Cell> cells = new ArrayList<>();
+    private final NotebookCells cells = new NotebookCells();
     private final ScheduledModel found;
     private final Style style;
 
@@ -31,60 +30,48 @@ public final class ScheduledNotebook {
         ScheduledNotebook notebook = new ScheduledNotebook(found, style);
         notebook.head();
         found.outputs().forEach(notebook::output);
-        notebook.text(List.of(Caution.ofInspections(found.model())));
-        return new Notebook(notebook.cells).write();
+        notebook.cells.text(List.of(Caution.ofInspections(found.model())));
+        return notebook.cells.write();
     }
 
     /** A whole report, and behind it the cells that check its numbers. */
     public static String write(ScheduledReport report, Report.Depth depth, Style style, Convention convention) {
         ScheduledNotebook notebook = new ScheduledNotebook(report.found(), style);
-        notebook.text(ScheduledReportDocument.of(report, depth, style, convention).blocks());
-        notebook.text(List.of(new Heading(2, "Checked again")));
+        notebook.cells.text(ScheduledReportDocument.of(report, depth, style, convention).blocks());
+        notebook.cells.text(List.of(new Heading(2, "Checked again")));
         notebook.tools();
         report.found().outputs().forEach(output -> {
             notebook.checks(output);
             notebook.proofs(output);
         });
         if (!report.answers().isEmpty()) {
-            notebook.text(List.of(new Paragraph("The answers are not worked out again here; pofk passage and pofk total"
-                    + " write notebooks that prove theirs.")));
+            notebook.cells.text(Prose.of("The answers are not worked out again here; pofk passage and pofk total"
+                    + " write notebooks that prove theirs."));
         }
-        return new Notebook(notebook.cells).write();
-    }
-
-    private void text(List<Block> blocks) {
-        if (!blocks.isEmpty()) {
-            cells.add(new Notebook.Cell(Notebook.Kind.MARKDOWN, MarkdownWriter.write(blocks)));
-        }
-    }
-
-    private void code(String source) {
-        cells.add(new Notebook.Cell(Notebook.Kind.CODE, source));
+        return notebook.cells.write();
     }
 
     private void head() {
         List<Block> head = new ArrayList<>(ModelHead.of(found.model()));
-        text(head);
+        cells.text(head);
         tools();
     }
 
     private void tools() {
-        text(List.of(new Paragraph("The cells of code step moves and actions in exact fractions, check the first cycle and the"
+        cells.text(Prose.of("The cells of code step moves and actions in exact fractions, check the first cycle and the"
                 + " long run, and prove the formulas again, independently of the program that wrote them; they need"
                 + " Python's own library alone and end with an error where something doesn't hold. What is certified is"
                 + " checked to lie in its enclosure. A formula that would take too many steps is stated, not proved"
-                + " again, and said to be so.")));
-        code(Python.tools("numbers"));
-        code(PythonSchedule.of(found.model().chain(), found.timetable()));
-        PythonSchedule.tools().forEach(this::code);
+                + " again, and said to be so."));
+        cells.schedule(found.model().chain(), found.timetable());
     }
 
     private void output(ScheduledOutput output) {
         List<Block> blocks = new ArrayList<>(List.of(new Heading(2, OutputProse.title(output.output()))));
         blocks.addAll(RegimeBlocks.of(found.timetable(), output, style));
-        text(blocks);
+        cells.text(blocks);
         checks(output);
-        text(ScheduledDocument.formulas(found, output, style));
+        cells.text(ScheduledDocument.formulas(found, output, style));
         proofs(output);
     }
 
@@ -121,23 +108,23 @@ public final class ScheduledNotebook {
             }
         });
         if (!proofs.isEmpty()) {
-            text(List.of(new Paragraph("These formulas proved again; in the code a cycle m is called k where a formula is"
-                    + " written as it is printed:")));
+            cells.text(Prose.of("These formulas proved again; in the code a cycle m is called k where a formula is"
+                    + " written as it is printed:"));
         }
-        proofs.forEach(this::code);
+        cells.code(proofs);
         if (!stated.isEmpty()) {
-            text(List.of(new Paragraph(Prose.of("Not proved again here, as their terms would take too many steps: ")
-                    .and(Prose.joined(stated, "; ")).and("."))));
+            cells.text(Prose.of("Not proved again here, as their terms would take too many steps: ")
+                    .and(Prose.joined(stated, "; ")).and("."));
         }
     }
 
     private void checks(ScheduledOutput output) {
         String name = output.output().name();
-        code("c = " + Python.numbers(output.output().coefficients()) + "\nconstant = Fraction(\""
+        cells.code("c = " + Python.numbers(output.output().coefficients()) + "\nconstant = Fraction(\""
                 + output.output().constant() + "\")");
-        output.preamble().ifPresent(course -> code(PythonSchedule.course(name + " before the cycles", course,
+        output.preamble().ifPresent(course -> cells.code(PythonSchedule.course(name + " before the cycles", course,
                 "stepped(start, preamble)")));
-        output.first().ifPresent(course -> code(PythonSchedule.course(name + " in the first cycle", course,
+        output.first().ifPresent(course -> cells.code(PythonSchedule.course(name + " in the first cycle", course,
                 "stepped(begin, cycle)")));
         output.regime().ifPresent(regime -> regime.accept(new Regime(name)));
     }
@@ -152,7 +139,7 @@ public final class ScheduledNotebook {
         @Override
         public Boolean recurring(PeriodicRegime.Recurring recurring) {
             int cycles = recurring.cycles();
-            code("settled = limit(begin, " + cycles + ")\nrequire(\"it is a fixed point of S^" + cycles
+            cells.code("settled = limit(begin, " + cycles + ")\nrequire(\"it is a fixed point of S^" + cycles
                     + "\", stepped(settled, cycle * " + cycles + ")[-1][1] == settled)\n"
                     + PythonSchedule.course(name + " in the long run", recurring.course(),
                             "stepped(settled, cycle * " + cycles + ")"));

@@ -53,7 +53,7 @@ public final class ScheduledPassageDocument {
                         PassageDocument.inBrief(over.moments(), over.percentiles(), style))
                         .orElse("not decided: the numbers of a whole cycle are too long for formulas")))),
                 document.blocks, passage.over().stream().flatMap(over -> over.distributions().stream())
-                        .map(formula -> Proved.overCycles(document.left(formula).and(", into ").and(set), "stopped chain",
+                        .map(formula -> Proved.overCycles(left(passage, formula).and(", into ").and(set), "stopped chain",
                                 formula)).toList(),
                 passage.over().isPresent() ? ReportSection.Standing.ANSWERED : ReportSection.Standing.NOT_DECIDED);
     }
@@ -92,12 +92,12 @@ public final class ScheduledPassageDocument {
                         + " falls by the factor " + Decimals.of(slowest, style.digits()).text() + " a cycle"));
         blocks.add(new Heading(3, "Over the cycles"));
         FormulaInSteps formulas = new FormulaInSteps("m", style);
-        over.distributions().forEach(formula -> formulas.add(formula.closedForm(), left(formula), Prose.of("m ≥ 0")));
+        over.distributions().forEach(formula -> formulas.add(formula.closedForm(), left(passage, formula), Prose.of("m ≥ 0")));
         blocks.addAll(formulas.blocks());
         blocks.add(CycleProof.holds(passage.timetable(), over.distributions().get(0)));
     }
 
-    private Prose left(CycleFormula formula) {
+    static Prose left(ScheduledPassage passage, CycleFormula formula) {
         return Prose.of("P(T ≤ " + ScheduleProse.stepOf(passage.timetable(), formula.place().orElseThrow().j()) + ")");
     }
 

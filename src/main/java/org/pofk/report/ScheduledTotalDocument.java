@@ -61,6 +61,13 @@ public final class ScheduledTotalDocument {
                 found.isDecided() ? ReportSection.Standing.ANSWERED : ReportSection.Standing.NOT_DECIDED);
     }
 
+    /** What is said of one total, without a heading. */
+    static List<Block> section(ScheduledTotalModel found, ScheduledTotal total, Style style) {
+        ScheduledTotalDocument document = new ScheduledTotalDocument(found, style);
+        document.total(total);
+        return document.blocks;
+    }
+
     /** How it grows. */
     private Labelled keyFigure(ScheduledTotal total) {
         ScheduledTotalDocument alone = new ScheduledTotalDocument(found, style);

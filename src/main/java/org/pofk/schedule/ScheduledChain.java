@@ -13,7 +13,7 @@ import org.pofk.steps.StateArithmetic;
 import org.pofk.steps.WholeState;
 
 /** A chain with its timetable, and the chain of its whole cycles, made when it is first asked for. Exact. */
-final class ScheduledChain {
+public final class ScheduledChain {
     /** Cubed states times bits of a cycle's matrix, for formulas over the cycles: a second or two. */
     private static final double FORMULAS_AT_MOST = 3e6;
     /** The same times the steps of a cycle, for a formula at each of them: ten seconds. */
@@ -36,11 +36,11 @@ final class ScheduledChain {
         return new ScheduledChain(chain, timetable);
     }
 
-    Chain chain() {
+    public Chain chain() {
         return chain;
     }
 
-    Timetable timetable() {
+    public Timetable timetable() {
         return timetable;
     }
 

@@ -21,11 +21,12 @@ import org.pofk.steps.KnownValue;
  *
  * @param into     the set
  * @param avoiding states that end the wait without success
+ * @param stopped  the chain that is stopped where the wait ends
  * @param over     what holds over all cycles; empty where the numbers of a cycle are too long
  * @param values   at the steps asked for
  */
 public record ScheduledPassage(List<Integer> into, List<Integer> avoiding, Timetable timetable,
-        Optional<OverCycles> over, List<At> values) {
+        ScheduledChain stopped, Optional<OverCycles> over, List<At> values) {
     private static final int PLACES_AT_MOST = 6;
     private static final int SETTLED_DIGITS = 6;
 
@@ -61,7 +62,7 @@ public record ScheduledPassage(List<Integer> into, List<Integer> avoiding, Timet
         List<Optional<KnownValue>> entered = stopped.chain().at(stopped.distribution(), steps);
         List<Optional<KnownValue>> waiting = stopped.chain().at(stopped.survival(), steps);
         return new ScheduledPassage(into.stream().sorted().toList(), avoiding.stream().sorted().toList(), timetable,
-                stopped.chain().areFormulasWithinReach() ? Optional.of(over(stopped, percentiles, steps)) : Optional.empty(),
+                stopped.chain(), stopped.chain().areFormulasWithinReach() ? Optional.of(over(stopped, percentiles, steps)) : Optional.empty(),
                 IntStream.range(0, steps.size()).mapToObj(i -> new At(steps.get(i), entered.get(i).orElseThrow(),
                         waiting.get(i).orElseThrow())).toList());
     }

@@ -20,11 +20,12 @@ import org.pofk.steps.KnownValue;
  *
  * @param increment what is added up
  * @param factor    v, with which each later step counts less; one where nothing is discounted
+ * @param recursion the chain with what is added up as one more component, whose output the total is
  * @param over      over whole cycles; empty where the numbers of a cycle are too long for formulas
  * @param values    at the steps asked for
  */
-public record ScheduledTotal(Increment increment, Rational factor, Output total, int period, Optional<OverCycles> over,
-        List<At> values) {
+public record ScheduledTotal(Increment increment, Rational factor, Output total, ScheduledChain recursion, int period,
+        Optional<OverCycles> over, List<At> values) {
 
     /** What is asked for: the increment of a chain by its matrix, and how much less each later step counts. */
     public record Asked(Function<Chain, Increment> increment, Rational factor) {
@@ -56,7 +57,7 @@ public record ScheduledTotal(Increment increment, Rational factor, Output total,
                 ScheduledIncrement.of(model.chain(), timetable, asked.increment, model.costs());
         SummedSchedule summed = SummedSchedule.of(model.chain(), timetable, increment, asked.factor);
         List<Optional<KnownValue>> values = steps.isEmpty() ? List.of() : summed.recursion().at(summed.total(), steps);
-        return new ScheduledTotal(increment.own(), asked.factor, summed.total(), timetable.period(), over(summed),
+        return new ScheduledTotal(increment.own(), asked.factor, summed.total(), summed.recursion(), timetable.period(), over(summed),
                 IntStream.range(0, steps.size()).mapToObj(i -> new At(steps.get(i), values.get(i))).toList());
     }
 

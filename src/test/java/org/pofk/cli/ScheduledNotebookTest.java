@@ -8,6 +8,7 @@ import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -46,8 +47,61 @@ class ScheduledNotebookTest {
         assertTrue(shown.contains("doesn't hold: closed in the long run: average"), shown);
     }
 
+    @Test
+    void formulasAreProvedAgainAndAnAlteredOneIsCaught() throws Exception {
+        String program = program("derive", "test-data/scheduled/sluice-gate.yaml", "--of", "open");
+        String shown = python(program, 0);
+        assertTrue(shown.contains("open(j) in the first cycle: the formula is what is stepped"), shown);
+        assertTrue(shown.contains("mean of open over cycle m: the closed form equals y(m)"), shown);
+        assertTrue(shown.contains("open(3 m + j): the formula is what is stepped at every j"), shown);
+        int joint = program.indexOf("joint = []");
+        python(program.substring(0, joint) + program.substring(joint).replaceFirst("impulses = numbers\\(\"-1/2",
+                "impulses = numbers(\"-1/3"), 1);
+        python(program.replaceFirst("numerator = numbers\\(\"0 1/3", "numerator = numbers(\"0 1/4"), 1);
+    }
+
+    @Test
+    void aPassageIsProvedAgainAndAnAlteredPercentileIsCaught() throws Exception {
+        String program = program("passage", "test-data/scheduled/tested-valve.yaml", "--into", "stuck", "--at", "6");
+        String shown = python(program, 0);
+        assertTrue(shown.contains("probability, and mean and variance where it happens"), shown);
+        assertTrue(shown.contains("9/10 by k = 387, not before"), shown);
+        assertTrue(shown.contains("P(T ≤ 12 m + 6): the closed form equals y(m)"), shown);
+        python(program.replace("(387, Fraction(\"9/10\"))", "(388, Fraction(\"9/10\"))"), 1);
+    }
+
+    @Test
+    void aPassageThatMayNeverHappenHasItsMomentsWorkedOutAgain() throws Exception {
+        String shown = python(program("passage", "test-data/scheduled/staggered-pumps.yaml", "--into", "none",
+                "--avoiding", "first failed"), 0);
+        assertTrue(shown.contains("probability and mean from each state"), shown);
+    }
+
+    @Test
+    void aPassageWithoutScheduleIsProvedAgainAndAnAlteredMoveIsCaught() throws Exception {
+        String program = program("passage", "test-data/models/pump-pair.yaml", "--into", "failed");
+        String shown = python(program, 0);
+        for (String name : new String[] {"law", "distribution", "survival"}) {
+            assertTrue(shown.contains(name + ": the closed form equals y(k)"), name + " in " + shown);
+        }
+        python(program.replaceFirst("factors\\[0\\]\\[0\\], \\[numbers\\(\"", "$01"), 1);
+    }
+
+    @Test
+    void totalsAreProvedAgainAndAnAlteredCostIsCaught() throws Exception {
+        String program = program("total", "test-data/scheduled/tested-valve-costs.yaml", "--costs", "--of", "leaking",
+                "--to", "12");
+        String shown = python(program, 0);
+        for (String name : new String[] {"steps in leaking", "total cost"}) {
+            assertTrue(shown.contains(name + ": the values listed, as stepped"), shown);
+            assertTrue(shown.contains(name + "(12 m): the closed form equals y(m)"), shown);
+            assertTrue(shown.contains(name + ", added by cycle m: the closed form equals y(m)"), shown);
+        }
+        python(program.replace("Fraction(\"14\")", "Fraction(\"15\")"), 1);
+    }
+
     private static String program(String... arguments) throws Exception {
-        Run run = Run.of(arguments[0], arguments[1], "--as", "notebook");
+        Run run = Run.of(Stream.concat(Stream.of(arguments), Stream.of("--as", "notebook")).toArray(String[]::new));
         assertEquals(0, run.exitCode(), run.notes());
         NotebookFile notebook = NotebookFile.of(run.answer());
         notebook.assertFollowsTheFormat();
