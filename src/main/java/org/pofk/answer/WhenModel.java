@@ -33,7 +33,8 @@ public record WhenModel(Model model, List<Output> outputs, Asked asked, List<Ans
      * @param relative for {@code SETTLED}: the bound is a part of the long run's size, of its largest value for a cycle
      */
     public record Asked(Condition.Kind kind, Rational bound, boolean relative) {
-        Condition of(LongRun longRun) {
+        /** With a part of the long run worked out; nothing of none. */
+        public Condition of(LongRun longRun) {
             Rational size = LongRunValues.of(longRun).stream().map(Rational::abs).reduce(Rational.ZERO, Rational::max);
             return new Condition(kind, relative ? bound.times(size) : bound);
         }
@@ -79,9 +80,14 @@ public record WhenModel(Model model, List<Output> outputs, Asked asked, List<Ans
     }
 
     private static Optional<Peak> nearest(Chain chain, ClosedForm form, LongRun longRun, When when) {
-        return when.reason() != When.Reason.NEVER ? Optional.empty()
-                : when.condition().kind() == Condition.Kind.AT_LEAST ? Peak.highest(chain, form, longRun)
-                : Peak.lowest(chain, form.transform().output());
+        if (when.reason() != When.Reason.NEVER) {
+            return Optional.empty();
+        }
+        return switch (when.condition().kind()) {
+            case AT_LEAST -> Peak.highest(chain, form, longRun);
+            case AT_MOST -> Peak.lowest(chain, form.transform().output());
+            case SETTLED -> Optional.empty();
+        };
     }
 
     /** The steps just before and at the two that were found. */

@@ -24,6 +24,13 @@ public record Model(String title, Step step, Convention convention, About about,
 
     /** What one step is: {@code 1 shift}; how long it lasts and what the first is called, where given. */
     public record Step(String is, Optional<String> lasts, Optional<String> first) {
+        /** Where the author doesn't say what a step is. */
+        public static final Step UNNAMED = new Step("1 step", Optional.empty(), Optional.empty());
+
+        /** What one step is, where that says more than that it is one. */
+        public Optional<String> named() {
+            return Optional.of(is).filter(word -> !word.equals(UNNAMED.is));
+        }
     }
 
     /** What stands or falls with what is modelled, where a caution more is due. */

@@ -21,8 +21,6 @@ record Head(String title, Step step, Chain.Kind kind, Optional<Convention> conve
         return new Head(title, step, kind, convention, own.orElse(sums), about);
     }
 
-    private static final Step ONE_STEP = new Step("1 step", Optional.empty(), Optional.empty());
-
     private enum Kind implements Keyword {
         CHAIN, RECURSION;
 
@@ -71,7 +69,7 @@ record Head(String title, Step step, Chain.Kind kind, Optional<Convention> conve
 
     /** For a table alone, which says nothing about itself. */
     static Head ofTable(String file) {
-        return new Head(file, ONE_STEP, Chain.Kind.CHAIN, Optional.empty(), Sums.EXACT, About.NOTHING);
+        return new Head(file, Step.UNNAMED, Chain.Kind.CHAIN, Optional.empty(), Sums.EXACT, About.NOTHING);
     }
 
     static Head read(Fields fields, Node.Mapping root, String file, Reading reading) {
@@ -89,7 +87,7 @@ record Head(String title, Step step, Chain.Kind kind, Optional<Convention> conve
                     "in a recursion nothing must add up to 1; leave 'sums' out");
         }
         Step step = fields.value("step").flatMap(node -> step(node, reading))
-                .orElse(ONE_STEP);
+                .orElse(Step.UNNAMED);
         About about = fields.value("about").map(node -> about(node, reading)).orElse(About.NOTHING);
         return new Head(title, step, kind == Kind.CHAIN ? Chain.Kind.CHAIN : Chain.Kind.RECURSION, convention, sums,
                 about);

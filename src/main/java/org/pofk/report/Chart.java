@@ -39,10 +39,10 @@ public sealed interface Chart {
     /**
      * Outputs over steps.
      *
-     * @param step   what one step is
+     * @param step   what one step is, where the author says so
      * @param within how near to its long run an output counts as settled
      */
-    record Course(Prose title, Prose alternative, String step, Drawing drawing, Axis steps, Axis values,
+    record Course(Prose title, Prose alternative, Optional<String> step, Drawing drawing, Axis steps, Axis values,
             Rational within, List<Curve> curves) implements Chart {
         public Course {
             curves = List.copyOf(curves);

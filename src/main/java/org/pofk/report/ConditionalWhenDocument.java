@@ -35,13 +35,14 @@ public final class ConditionalWhenDocument {
         When when = answer.when();
         blocks.add(new Heading(2, OutputProse.title(answer.output()).and(", given ").and(given)));
         label("asked", Prose.of(WhenDocument.asked(when.condition(), style)));
+        WhenDocument.partOfNothing(when).ifPresent(blocks::add);
         label("answer", Prose.of(WhenDocument.inWords(when)));
         when.first().ifPresent(first -> label("first", Prose.of("k = " + first)));
         when.forEverFrom().ifPresent(from -> label("for ever", Prose.of("from k = " + from + " on")));
         label("long run", new ConditionalLongRunProse(style.digits()).of(answer.longRun()));
         found.possible().ifPresent(possible -> label("defined", Prose.of(GivenProse.impossible(possible))));
         if (when.classes().size() > 1) {
-            blocks.add(WhenDocument.classes(when.classes()));
+            blocks.add(ResidueTable.of(when.classes()));
         }
         if (!answer.around().isEmpty()) {
             blocks.add(new Table(Prose.of("Values there, given that"),

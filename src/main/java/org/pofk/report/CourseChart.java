@@ -83,7 +83,7 @@ public final class CourseChart {
             List<Chart.Curve> curves) {
         Prose names = Prose.names(curves.stream().map(Chart.Curve::name).toList());
         Prose title = Prose.of("p(k) of ").and(names).and(" — ").andName(derived.model().title());
-        return new Chart.Course(title, CourseProse.of(curves, within), derived.model().step().is(), drawing, steps,
+        return new Chart.Course(title, CourseProse.of(curves, within), derived.model().step().named(), drawing, steps,
                 valueAxis(curves), within, curves);
     }
 

@@ -103,8 +103,9 @@ final class CoursePicture {
         }
         shapes.add(Stroke.line(LEFT, bottom, right, bottom, Ink.MUTED, 1, Dash.SOLID));
         shapes.add(text(LEFT - 50, TOP - 18, Anchor.START, Prose.of("p(k)" + unit(course.values())), Ink.TEXT, SIZE));
-        shapes.add(text(LEFT + plotWidth / 2, bottom + 40, Anchor.MIDDLE, Prose.of("step k" + unit(course.steps())
-                + " (one step is ").andName(TextWidth.cut(course.step(), SIZE, 220)).and(")"), Ink.TEXT, SIZE));
+        shapes.add(text(LEFT + plotWidth / 2, bottom + 40, Anchor.MIDDLE, Prose.of("step k" + unit(course.steps()))
+                .and(course.step().map(is -> Prose.of(" (one step is ").andName(TextWidth.cut(is, SIZE, 220)).and(")"))
+                        .orElse(Prose.EMPTY)), Ink.TEXT, SIZE));
     }
 
     /** {@code  in 10⁻⁵}, where the ticks leave it out. */

@@ -55,8 +55,8 @@ final class ModelHead {
         Chain chain = model.chain();
         return Prose.name(model.origin().file()).and(": "
                 + (chain.kind() == Chain.Kind.CHAIN ? "" : "a recursion of ")
-                + (chain.size() == 1 ? "1 state" : chain.size() + " states") + ", one step is ")
-                .andName(model.step().is())
+                + (chain.size() == 1 ? "1 state" : chain.size() + " states"))
+                .and(model.step().named().map(is -> Prose.of(", one step is ").andName(is)).orElse(Prose.EMPTY))
                 .and(model.step().lasts().filter(lasts -> !lasts.equals(model.step().is()))
                         .map(lasts -> Prose.of(" (lasts ").andName(lasts).and(")"))
                         .orElse(Prose.EMPTY));

@@ -16,13 +16,13 @@ final class QuestionProse {
     static Prose of(Output output, Model model) {
         Chain chain = model.chain();
         return chain.kind() == Chain.Kind.RECURSION
-                ? Prose.of("What is ").andName(output.name()).and(" after k steps of ").and(step(model)).and("?")
-                : subject(output, chain).and(" at the end of step k, one step being ").and(step(model))
-                        .and(" and the start ").and(StartProse.of(chain)).and("?");
-    }
-
-    private static Prose step(Model model) {
-        return ModelHead.words(model.step().is());
+                ? Prose.of("What is ").andName(output.name()).and(" after k steps")
+                        .and(model.step().named().map(is -> Prose.of(" of ").and(ModelHead.words(is)))
+                                .orElse(Prose.EMPTY)).and("?")
+                : subject(output, chain).and(" at the end of step k, ")
+                        .and(model.step().named().map(is -> Prose.of("one step being ").and(ModelHead.words(is))
+                                .and(" and the start ")).orElse(Prose.of("the start being ")))
+                        .and(StartProse.of(chain)).and("?");
     }
 
     private static Prose subject(Output output, Chain chain) {

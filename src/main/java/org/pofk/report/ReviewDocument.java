@@ -93,9 +93,9 @@ public final class ReviewDocument {
         blocks.add(new Heading(1, "Check of a derivation"));
         review();
         blocks.add(new Labelled("model", ClaimProse.text(model.title())));
-        blocks.add(new Labelled("step", Prose.name(model.step().is())
-                .and(model.step().lasts().filter(lasts -> !lasts.equals(model.step().is()))
-                        .map(lasts -> Prose.of(", lasts ").andName(lasts)).orElse(Prose.EMPTY))));
+        model.step().named().ifPresent(is -> blocks.add(new Labelled("step", Prose.name(is)
+                .and(model.step().lasts().filter(lasts -> !lasts.equals(is))
+                        .map(lasts -> Prose.of(", lasts ").andName(lasts)).orElse(Prose.EMPTY)))));
         review.carried().ifPresent(carried -> blocks.add(new Labelled("numbers", carried(carried))));
         blocks.add(new Labelled("claims file", file(claims.origin())));
         blocks.add(new Labelled("model file", file(model.origin())));

@@ -64,7 +64,7 @@ public final class ScheduledCourse {
         Axis axis = from.equals(to) ? Axis.around(from, to, 1) : Axis.between(from, to, STEP_INTERVALS);
         Prose title = Prose.of("p(k) of ").and(Prose.names(curves.stream().map(Chart.Curve::name).toList()))
                 .and(" — ").andName(found.model().title());
-        return Optional.of(new Chart.Course(title, alternative(found, steps), found.model().step().is(),
+        return Optional.of(new Chart.Course(title, alternative(found, steps), found.model().step().named(),
                 steps.size() > CourseChart.MARKED_UP_TO + 1 ? Chart.Drawing.LINE : Chart.Drawing.JOINED_MARKS,
                 new Axis(axis.from(), axis.to(), Rational.max(axis.step(), Rational.ONE)), levels, Rational.ZERO, curves));
     }

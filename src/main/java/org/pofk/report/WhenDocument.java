@@ -5,7 +5,6 @@ import java.util.List;
 import java.util.Optional;
 import org.pofk.answer.Peak;
 import org.pofk.answer.When;
-import org.pofk.answer.When.ResidueClass;
 import org.pofk.answer.WhenModel;
 import org.pofk.chain.Output;
 import org.pofk.exact.Decimals;
@@ -79,6 +78,7 @@ public final class WhenDocument {
 
     private void met(WhenModel.Answer answer) {
         label("asked", asked(answer.when().condition()));
+        partOfNothing(answer.when()).ifPresent(blocks::add);
         label("answer", inWords(answer.when()));
         answer.nearest().ifPresent(peak -> label("nearest", nearest(peak, answer.when().condition())));
         answer.when().first().ifPresent(first -> label("first", "k = " + first));
@@ -95,7 +95,7 @@ public final class WhenDocument {
 
     private void steps(WhenModel.Answer answer) {
         if (answer.when().classes().size() > 1) {
-            blocks.add(classes(answer.when().classes()));
+            blocks.add(ResidueTable.of(answer.when().classes()));
         }
         if (!answer.around().isEmpty()) {
             blocks.add(Table.ofText("Values there", List.of("k", answer.output().name() + "(k)"),
@@ -106,6 +106,15 @@ public final class WhenDocument {
 
     private void label(String label, String text) {
         blocks.add(new Labelled(label, text));
+    }
+
+    /** That a part of a long run of zero is no distance. */
+    static Optional<Labelled> partOfNothing(When when) {
+        boolean isNothing = when.condition().kind() == When.Condition.Kind.SETTLED && when.condition().bound().isZero();
+        return isNothing && when.reason() != When.Reason.NO_LONG_RUN
+                ? Optional.of(new Labelled("beware", "the long run is 0, and so is every part of it: met only where p(k)"
+                        + " is 0 itself; ask for a distance, as with --settles-within 1e-6"))
+                : Optional.empty();
     }
 
     private String asked(When.Condition condition) {
@@ -169,22 +178,6 @@ public final class WhenDocument {
             case APPROACH_NOT_DECIDED -> "not decided: the value asked for is the long run itself, and nothing known"
                     + " decides from which side it is approached in the end";
             case TOO_MANY_STEPS -> "not decided: too many steps would have to be looked at";
-        };
-    }
-
-    static Table classes(List<ResidueClass> classes) {
-        return Table.ofText("By step", List.of("k", "in the end", "first", "for ever from"), classes.stream()
-                .map(each -> List.of("≡ " + each.residue() + " mod " + each.modulus(), end(each.end()),
-                        each.first().map(String::valueOf).orElse("–"),
-                        each.forEverFrom().map(String::valueOf).orElse("–"))).toList());
-    }
-
-    static String end(When.End end) {
-        return switch (end) {
-            case MET -> "met";
-            case FAILED -> "not met";
-            case BOTH_FOR_EVER -> "met now and then";
-            case APPROACH_NOT_DECIDED, TOO_MANY_STEPS -> "not decided";
         };
     }
 }
