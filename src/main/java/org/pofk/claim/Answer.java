@@ -11,7 +11,7 @@ import org.pofk.exact.Rational;
  *
  * @param standing whether there is a number, and whether it is known
  * @param low      zero where there is none
- * @param word     what stands in the place of a number: {@code infinite}
+ * @param word     what stands in the place of a number, {@code infinite} or {@code never}; empty where nothing does
  * @param remarks  what a reviewer should know besides; first the reason where there is no number
  */
 public record Answer(Standing standing, Rational low, Rational high, String word, List<String> remarks) {

@@ -60,14 +60,14 @@ final class Answers implements AnswerOf.Question<Answer> {
         }
         Rational below = given.valueAt(at);
         return below.isZero()
-                ? Answer.none("none", "at k = " + at + " what is given has probability zero: nothing is given by it")
+                ? Answer.none("", "at k = " + at + " what is given has probability zero: nothing is given by it")
                 : Answer.of(joint.valueAt(at).dividedBy(below));
     }
 
     @Override
     public Answer passage(AnswerOf.MeanPassage passage) {
         if (truth.chain().kind() != Chain.Kind.CHAIN) {
-            return Answer.none("none", "only in a chain is a set entered");
+            return Answer.none("", "only in a chain is a set entered");
         }
         FirstEntrance entrance = truth.entrance(passage.into());
         Rational entered = Rational.ZERO;
@@ -78,7 +78,7 @@ final class Answers implements AnswerOf.Question<Answer> {
             steps = steps.plus(begun.times(entrance.means().get(state).orElse(Rational.ZERO)));
         }
         if (entered.isZero()) {
-            return Answer.none("none", passage.set() + " is never entered");
+            return Answer.none("never", passage.set() + " is never entered");
         }
         return switch (passage.cases()) {
             case NEVER_AS_NOTHING -> Answer.of(steps);

@@ -24,7 +24,8 @@ final class JudgedAnswer {
         return switch (answer.standing()) {
             case KNOWN -> told(between(answer.low(), answer.high(), stated.is(), claim, OptionalLong.empty(),
                     answer.remarks()), answer);
-            case NONE -> without(Verdict.WRONG, answer);
+            case NONE -> without(Verdict.WRONG, answer.remarking("there is no such number: "
+                    + String.join("; ", answer.remarks())));
             case NOT_DECIDED -> without(Verdict.UNDECIDED, answer);
         };
     }
@@ -52,14 +53,16 @@ final class JudgedAnswer {
     /** With more of the true value than the digits of the author show, where it is known exactly. */
     private static Judgement told(Judgement judgement, Answer answer) {
         boolean isKnown = answer.low().equals(answer.high()) && !answer.low().isInteger();
-        return judgement.verdict() == Verdict.WRONG && isKnown ? judgement.remarking(inFull(answer.low())) : judgement;
+        return judgement.verdict() == Verdict.WRONG && isKnown ? judgement.remarking("the true value is "
+                + inFull(answer)) : judgement;
     }
 
-    private static String inFull(Rational value) {
-        String fraction = value.toString();
-        String decimals = Decimals.of(value, DIGITS).text();
-        return fraction.length() > LONGEST_FRACTION ? "the true value is about " + decimals
-                : "the true value is " + fraction + ", about " + decimals;
+    /** A number: as it is where that is short, and what that comes to. */
+    static String inFull(Answer answer) {
+        String fraction = answer.low().toString();
+        String decimals = "about " + Decimals.of(answer.low(), DIGITS).text();
+        boolean isShort = answer.low().equals(answer.high()) && fraction.length() <= LONGEST_FRACTION;
+        return !isShort ? decimals : answer.low().isInteger() ? fraction : fraction + ", " + decimals;
     }
 
     /** That nothing between the two is what is stated isn't known of a number that is both. */

@@ -99,6 +99,11 @@ public final class Judging implements Statement.Visitor<Judgement> {
         return judged(() -> JudgedAnswer.of(answer, claim, truth));
     }
 
+    @Override
+    public Judgement noNumber(Statement.NoNumber noNumber) {
+        return JudgedAbsence.of(noNumber, truth);
+    }
+
     /** A way to a judgement that ends where the claim means nothing. */
     private interface Way {
         Judgement judgement() throws RefusedException;

@@ -1,13 +1,14 @@
 package org.pofk.claim;
 
 import java.util.List;
+import java.util.Locale;
 import java.util.Optional;
 import org.pofk.chain.Output;
 
 /** What one claim states: one variant for each kind of step of a derivation. */
 public sealed interface Statement permits Statement.Start, Statement.Matrix, Statement.MatrixPolynomial,
         Statement.TransformOf, Statement.Poles, Statement.Residues, Statement.PofK, Statement.Pair, Statement.LongRunOf,
-        Statement.Eigenvector, Statement.Value, Statement.Bound, AnswerOf {
+        Statement.Eigenvector, Statement.Value, Statement.Bound, Statement.NoNumber, AnswerOf {
 
     <R> R accept(Visitor<R> visitor);
 
@@ -38,6 +39,8 @@ public sealed interface Statement permits Statement.Start, Statement.Matrix, Sta
         R bound(Bound bound);
 
         R answer(AnswerOf answer);
+
+        R noNumber(NoNumber noNumber);
     }
 
     /** A quantity stated for a state: its place in the chain's states. */
@@ -203,6 +206,27 @@ public sealed interface Statement permits Statement.Start, Statement.Matrix, Sta
         @Override
         public <R> R accept(Visitor<R> visitor) {
             return visitor.bound(this);
+        }
+    }
+
+    /**
+     * That a question has a word for its answer and no number.
+     *
+     * @param asked its text is the word as written
+     */
+    record NoNumber(AnswerOf asked, Word word) implements Statement {
+        /** Beyond every number, or not there because what is asked about never happens. */
+        public enum Word {
+            INFINITE, NEVER;
+
+            public String text() {
+                return name().toLowerCase(Locale.ROOT);
+            }
+        }
+
+        @Override
+        public <R> R accept(Visitor<R> visitor) {
+            return visitor.noNumber(this);
         }
     }
 }

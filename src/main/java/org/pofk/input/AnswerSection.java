@@ -10,7 +10,6 @@ import org.pofk.claim.AnswerOf;
 import org.pofk.claim.AnswerOf.MeanPassage.Beginning;
 import org.pofk.claim.Claim.Within;
 import org.pofk.claim.FormulaText;
-import org.pofk.claim.Statement;
 import org.pofk.text.Position;
 
 /** What a claim answers: the question by its keys, the answer being the number that is stated. */
@@ -39,7 +38,7 @@ final class AnswerSection {
     }
 
     /** Within what of the long run, from which step on. */
-    Optional<Statement> settling(FormulaText is, Optional<Within> within) {
+    Optional<AnswerOf> settling(FormulaText is, Optional<Within> within) {
         if (required("within", "how close to the long run is missing", "within: 1%").isEmpty()) {
             return Optional.empty();
         }
@@ -48,7 +47,7 @@ final class AnswerSection {
     }
 
     /** Into which set, from where, and whether given that it is entered at all. */
-    Optional<Statement> passage(FormulaText is) {
+    Optional<AnswerOf> passage(FormulaText is) {
         if (names.chain().filter(chain -> chain.kind() != Chain.Kind.CHAIN).isPresent()) {
             reading.fault(subject.position(), "passage-in-a-recursion", "only in a chain is a set entered, and this"
                     + " model is a recursion; leave this claim out");
@@ -70,7 +69,7 @@ final class AnswerSection {
     }
 
     /** From which step to which, both counted. */
-    Optional<Statement> overSteps(FormulaText is) {
+    Optional<AnswerOf> overSteps(FormulaText is) {
         Optional<Node> to = required("to", "the last step is missing", "to: 12");
         Optional<Node> from = kind == ClaimKind.SUM ? fields.value("from")
                 : required("from", "the first step is missing", "from: 0");
@@ -90,7 +89,7 @@ final class AnswerSection {
     }
 
     /** A value given that the chain is then in a set. */
-    Optional<Statement> conditional(Node given, Output output, long at, FormulaText is) {
+    Optional<AnswerOf> conditional(Node given, Output output, long at, FormulaText is) {
         return reading.scalar(given, "what is given").flatMap(name -> set(name, "given"))
                 .map(set -> new AnswerOf.Conditional(output, set, at, is));
     }

@@ -18,8 +18,9 @@ final class ClaimExamples {
             case FORMULA -> "is: 'FORMULA IN k', or with 'all' are: {STATE: 'FORMULA IN k', OTHER: …}";
             case PAIR -> "radius: NUMBER, angle: NUMBER deg, amplitude: NUMBER, phase: NUMBER deg";
             case LONG_RUN -> "is: NUMBER, is: none, or with 'all' are: {STATE: NUMBER, OTHER: NUMBER}";
-            case VALUE, SUM, MEAN, MEAN_PASSAGE -> "is: NUMBER";
-            case SETTLING_STEP -> "is: STEP";
+            case VALUE, SUM, MEAN -> "is: NUMBER";
+            case MEAN_PASSAGE -> "is: NUMBER, is: infinite, or is: never";
+            case SETTLING_STEP -> "is: STEP, or is: never";
             case BOUND -> "at most: NUMBER, or at least: NUMBER";
         };
     }

@@ -37,6 +37,11 @@ final class ClaimFormulas {
         return formula(content, Subject.NUMBER, what).filter(this::isNumber);
     }
 
+    /** A word in the place of a number. */
+    Optional<FormulaText> word(Content content, String what) {
+        return formula(content, Subject.NUMBER, what);
+    }
+
     /** A formula in k. */
     Optional<FormulaText> inK(Content content, String what) {
         return formula(content, Subject.OF_K, what)

@@ -6,14 +6,17 @@ import java.util.Optional;
 import java.util.OptionalLong;
 import java.util.function.BiFunction;
 import java.util.function.Function;
+import java.util.regex.Pattern;
 import java.util.stream.IntStream;
 import org.pofk.chain.Model.Convention;
 import org.pofk.chain.Output;
+import org.pofk.claim.AnswerOf;
 import org.pofk.claim.Claim.Within;
 import org.pofk.claim.FormulaText;
 import org.pofk.claim.FormulaText.Notation;
 import org.pofk.claim.Statement;
 import org.pofk.claim.Statement.Component;
+import org.pofk.claim.Statement.NoNumber.Word;
 import org.pofk.exact.Rational;
 import org.pofk.formula.FormulaReading.Subject;
 
@@ -21,6 +24,8 @@ import org.pofk.formula.FormulaReading.Subject;
 final class StatementSection {
     /** Stands where no output could be found, so that the rest of a claim is read for the sake of its faults. */
     private static final Output UNKNOWN = new Output("", List.of(), Rational.ZERO, "");
+
+    private static final Pattern LETTERS = Pattern.compile("[a-z]{3,}");
 
     private final Fields fields;
     private final ClaimKind kind;
@@ -84,8 +89,8 @@ final class StatementSection {
             case LONG_RUN -> Optional.of(new Statement.LongRunOf(ofOutputs(content, this::longRun)));
             case EIGENVECTOR -> eigenvector(content);
             case VALUE -> value(content);
-            case SETTLING_STEP -> answer(content, is -> answers.settling(is, within));
-            case MEAN_PASSAGE -> answer(content, answers::passage);
+            case SETTLING_STEP -> answerOr(List.of(Word.NEVER), content, is -> answers.settling(is, within));
+            case MEAN_PASSAGE -> answerOr(List.of(Word.values()), content, answers::passage);
             case SUM, MEAN -> answer(content, answers::overSteps);
             case PAIR, BOUND -> throw new AssertionError(kind + " has no content");
         };
@@ -268,11 +273,31 @@ final class StatementSection {
         }
         Optional<Node> given = fields.value("given");
         return given.isEmpty() ? Optional.of(new Statement.Value(output.get(), at.getAsLong(), formula.get()))
-                : answers.conditional(given.get(), output.get(), at.getAsLong(), formula.get());
+                : answers.conditional(given.get(), output.get(), at.getAsLong(), formula.get())
+                        .map(Function.identity());
     }
 
-    private Optional<Statement> answer(Content content, Function<FormulaText, Optional<Statement>> statement) {
+    private Optional<Statement> answer(Content content,
+            Function<FormulaText, Optional<? extends Statement>> statement) {
         return formulas.number(content, "a number").flatMap(statement);
+    }
+
+    /** One of some words may stand in the place of the number. */
+    private Optional<Statement> answerOr(List<Word> words, Content content,
+            Function<FormulaText, Optional<AnswerOf>> question) {
+        String written = content.node().asScalar().map(value -> value.text().strip()).orElse("");
+        Optional<Word> word = words.stream().filter(each -> each.text().equals(written)).findFirst();
+        if (word.isPresent()) {
+            return formulas.word(content, "a number").flatMap(question)
+                    .map(asked -> new Statement.NoNumber(asked, word.get()));
+        }
+        if (LETTERS.matcher(written).matches()) {
+            reading.fault(content.node().position(), "not-a-number", "a number or "
+                    + String.join(" or ", words.stream().map(Word::text).toList()) + " belongs here, not '"
+                    + Words.shortened(written) + "'");
+            return Optional.empty();
+        }
+        return answer(content, question::apply);
     }
 
     /** The number under a key of its own, in ordinary notation. */

@@ -90,7 +90,7 @@ public final class BlankClaims {
         byState("long run: all");
         byState("formula: all");
         if (states().kind() == Chain.Kind.CHAIN) {
-            open("- {mean passage: all, into: " + set() + ", is: " + GAP + "}    # from the start; or from: STATE");
+            open("- {mean passage: all, into: " + set() + ", is: " + GAP + "}    # or infinite, never; from the start, or from: STATE");
         }
     }
 
@@ -142,7 +142,7 @@ public final class BlankClaims {
                         + "] for a cycle"),
                 new Step("{value: " + of + ", at: 5, is: " + GAP + "}", "an estimate: within: 2%, safe side: above"),
                 new Step("{bound: " + of + ", at most: " + GAP + "}", "or at least; for: k >= 0"),
-                new Step("{settling step: " + of + ", within: 1%, is: " + GAP + "}", "of the long run, for ever"),
+                new Step("{settling step: " + of + ", within: 1%, is: " + GAP + "}", "or never; of the long run, for ever"),
                 new Step("{sum: " + of + ", to: 12, is: " + GAP + "}", "of k = 0 to 12; from: 1 to begin later"),
                 new Step("{mean: " + of + ", from: 1, to: 12, is: " + GAP + "}", "over these steps, both counted")));
         Optional<String> given = given(output);

@@ -19,6 +19,9 @@ final class ClaimProse {
         if (claim.statement() instanceof AnswerOf asked) {
             return kind.and(asked.asked(new AskedProse(claim)));
         }
+        if (claim.statement() instanceof Statement.NoNumber noNumber) {
+            return kind.and(noNumber.asked().asked(new AskedProse(claim)));
+        }
         if (claim.statement() instanceof Statement.Eigenvector eigenvector) {
             return kind.and(" for ").andName(eigenvector.eigenvalue().text());
         }

@@ -82,4 +82,9 @@ final class StatedFormulas implements Statement.Visitor<Stream<FormulaText>> {
     public Stream<FormulaText> answer(AnswerOf answer) {
         return Stream.of(answer.is());
     }
+
+    @Override
+    public Stream<FormulaText> noNumber(Statement.NoNumber noNumber) {
+        return Stream.of(noNumber.asked().is());
+    }
 }

@@ -6,11 +6,14 @@ import java.util.List;
 import java.util.Optional;
 import java.util.Set;
 import java.util.stream.IntStream;
+import org.pofk.claim.Answer;
+import org.pofk.claim.AnswerOf;
 import org.pofk.claim.AuthorText;
 import org.pofk.claim.Claim;
 import org.pofk.claim.FormulaText;
 import org.pofk.claim.Judgement;
 import org.pofk.claim.Judging;
+import org.pofk.claim.Statement;
 import org.pofk.claim.Truth;
 import org.pofk.formula.Formula;
 
@@ -44,7 +47,21 @@ final class Explaining {
     }
 
     static Explanation of(Claim claim, Judgement judgement, Truth truth, OtherTruths others) {
-        return new Explaining(claim, judgement, truth).explained(others);
+        if (claim.statement() instanceof Statement.NoNumber) {
+            return Explanation.NOTHING;
+        }
+        Explaining explaining = new Explaining(claim, judgement, truth);
+        boolean hasNumber = !(claim.statement() instanceof AnswerOf asked)
+                || truth.answer(asked).standing() != Answer.Standing.NONE;
+        return hasNumber ? explaining.explained(others) : explaining.averaged(others);
+    }
+
+    /** Where no number is right, what explains one is that it is a mean over what never happens. */
+    private Explanation averaged(OtherTruths others) {
+        List<Candidate> found = others.of(claim, judgement.right()).stream()
+                .filter(each -> each.kind() == SlipKind.NEVER_IS_AVERAGED && isRight(each)).toList();
+        return new Explanation(Told.of(found, parts).stream().map(Candidate::slip).toList(), false, found,
+                Optional.empty());
     }
 
     private Explanation explained(OtherTruths others) {

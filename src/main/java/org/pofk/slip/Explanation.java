@@ -11,6 +11,9 @@ import java.util.Optional;
  * @param rest     what is left where there are none
  */
 record Explanation(List<Slip> slips, boolean together, List<Candidate> models, Optional<String> rest) {
+    /** Nothing is to be said. */
+    static final Explanation NOTHING = new Explanation(List.of(), false, List.of(), Optional.empty());
+
     Explanation {
         slips = List.copyOf(slips);
         models = List.copyOf(models);

@@ -208,5 +208,10 @@ record Implied(int from, Function<Claim, Optional<Claim>> seen, Function<Claim, 
         public List<Step> answer(AnswerOf answer) {
             return List.of();
         }
+
+        @Override
+        public List<Step> noNumber(Statement.NoNumber noNumber) {
+            return List.of();
+        }
     }
 }

@@ -93,6 +93,11 @@ final class Outcomes {
         public List<Output> answer(AnswerOf answer) {
             return answer.asked(new AnswerOutputs.Named());
         }
+
+        @Override
+        public List<Output> noNumber(Statement.NoNumber noNumber) {
+            return answer(noNumber.asked());
+        }
     }
 
     private record Changed(UnaryOperator<Output> change) implements Statement.Visitor<Statement> {
@@ -162,6 +167,11 @@ final class Outcomes {
         @Override
         public Statement answer(AnswerOf answer) {
             return answer.asked(new AnswerOutputs.Changed(change));
+        }
+
+        @Override
+        public Statement noNumber(Statement.NoNumber noNumber) {
+            return new Statement.NoNumber(noNumber.asked().asked(new AnswerOutputs.Changed(change)), noNumber.word());
         }
     }
 }

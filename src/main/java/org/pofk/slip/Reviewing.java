@@ -74,7 +74,7 @@ public final class Reviewing {
         OptionalInt from = Carrying.from(claim, judgement, truth, implied);
         if (from.isPresent()) {
             // what it implies is what the earlier step implies, as far as its own digits go
-            implied.addAll(Implied.of(claim, new Explanation(List.of(), false, List.of(), Optional.empty()), truth)
+            implied.addAll(Implied.of(claim, Explanation.NOTHING, truth)
                     .stream().map(own -> new Implied(from.getAsInt(), own.seen(), own.truth())).toList());
             return new Finding(claim, judgement, Verdict.CARRIED, from, List.of(), false, Optional.empty());
         }

@@ -141,6 +141,11 @@ record StatementPart(FormulaText text, String name, Function<FormulaText, Statem
             return List.of(new StatementPart(answer.is(), "", answer::stating));
         }
 
+        @Override
+        public List<StatementPart> noNumber(Statement.NoNumber noNumber) {
+            return List.of();
+        }
+
         private interface Replacing<T> {
             T with(T old, FormulaText text);
         }

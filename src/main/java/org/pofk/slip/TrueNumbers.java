@@ -212,6 +212,11 @@ final class TrueNumbers {
             return truth.answer(answer).exact().map(TrueNumber::of).stream().toList();
         }
 
+        @Override
+        public List<TrueNumber> noNumber(Statement.NoNumber noNumber) {
+            return List.of();
+        }
+
         /** Real and imaginary parts, for an author who writes them. */
         private List<TrueNumber> complex(FormulaText text, Output output, Role wanted) {
             List<Mode> modes = truth.about(output).closedForm().modes();

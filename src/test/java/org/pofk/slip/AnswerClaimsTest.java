@@ -13,6 +13,7 @@ import java.util.stream.LongStream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
+import org.junit.jupiter.params.provider.ValueSource;
 import org.pofk.Pofk;
 import org.pofk.answer.Increment;
 import org.pofk.answer.Total;
@@ -97,7 +98,7 @@ class AnswerClaimsTest {
         Finding infinite = finding("../published/walk-absorbing-5", claim.replace("…", "12.345"));
         assertEquals(Verdict.WRONG, infinite.verdict());
         assertEquals("infinite", infinite.judgement().right());
-        assertEquals(List.of("0 is never entered with probability 1/2, so that the mean is infinite; given that it is"
+        assertEquals(List.of("there is no such number: 0 is never entered with probability 1/2, so that the mean is infinite; given that it is"
                 + " entered, the mean is 4"), infinite.judgement().remarks());
         assertEquals(List.of(), kinds(infinite));
         for (String averaged : List.of("4", "2")) {
@@ -108,8 +109,63 @@ class AnswerClaimsTest {
         assertEquals(Verdict.EXACT, given.verdict());
         assertEquals(SlipKind.NEVER_IS_AVERAGED, kinds(finding("../published/walk-absorbing-5",
                 "{mean passage: all, into: '0', given: entered, is: 2}")).get(0));
-        assertEquals(List.of("1 is never entered"), finding("../published/walk-absorbing-5",
+        assertEquals(List.of("there is no such number: 1 is never entered"), finding("../published/walk-absorbing-5",
                 "{mean passage: all, into: '1', from: '0', is: 3}").judgement().remarks());
+    }
+
+    /** Each word where the question has it for its answer, and nowhere else. */
+    @ParameterizedTest
+    @CsvSource(delimiter = '|', quoteCharacter = '`', textBlock = """
+            {mean passage: all, into: relined tight, is: infinite}                                     | EXACT |
+            {mean passage: all, into: relined tight, is: never}                                        | WRONG | infinite
+            {mean passage: all, into: relined tight, given: entered, is: infinite}                     | WRONG |
+            {mean passage: all, into: relined tight, from: out of use, is: never}                      | EXACT |
+            {mean passage: all, into: relined tight, from: out of use, is: infinite}                   | EXACT |
+            {mean passage: all, into: relined tight, from: out of use, given: entered, is: never}      | EXACT |
+            {mean passage: all, into: relined tight, from: out of use, given: entered, is: infinite}   | WRONG | never
+            {settling step: leaking, within: 1%, is: never}                                            | EXACT |
+            {settling step: leaking, within: 0.01, is: never}                                          | WRONG |
+            {settling step: leaking, within: 1%, is: 100}                                              | WRONG | never
+            """)
+    void aWordStandsWhereThereIsNoNumber(String claim, Verdict verdict, String right) {
+        Finding finding = finding("relined-main", claim);
+        assertEquals(verdict, finding.verdict(), finding::toString);
+        assertEquals(Optional.ofNullable(right).orElse(""), finding.judgement().right(), finding::toString);
+        assertEquals(List.of(), kinds(finding));
+    }
+
+    /** Another start, another step and the joint probability explain nothing where there is nothing right. */
+    @ParameterizedTest
+    @ValueSource(strings = {
+        "{mean passage: all, into: relined tight, from: out of use, is: 0}",
+        "{mean passage: all, into: relined tight, given: entered, from: out of use, is: 4}",
+        "{value: leaks, given: out of use, at: 0, is: 0}",
+        "{value: leaks, given: relined leaking, at: 0, is: 1}",
+        "{settling step: leaking, within: 1%, is: 0}"})
+    void noSlipIsNamedWhereThereIsNoNumber(String claim) {
+        Finding finding = finding("relined-main", claim);
+        assertEquals(Verdict.WRONG, finding.verdict());
+        assertEquals(List.of(), kinds(finding), finding::toString);
+        assertEquals(Optional.empty(), finding.rest());
+        assertTrue(finding.judgement().remarks().get(0).startsWith("there is no such number: "), finding::toString);
+    }
+
+    /** A part of a cycle is one of its largest value, zeros in it or not: held against stepping. */
+    @Test
+    void onACycleAPartIsOneOfTheLargestValue() throws Exception {
+        Chain chain = Pofk.read(Path.of("test-data/models/alternating-filters.yaml")).chain();
+        Truth truth = Truth.of(chain);
+        int compared = 0;
+        for (Output output : Outputs.states(chain)) {
+            List<Rational> p = values(truth, output);
+            List<Rational> limits = limits(truth, output);
+            Rational part = Rational.of(1, 1000);
+            Rational near = part.times(limits.stream().reduce(Rational.ZERO, Rational::max));
+            Answer answer = truth.answer(new AnswerOf.SettlingStep(output, new Claim.Within(part, true), text()));
+            assertEquals(Rational.of(lastFarOff(p, limits, near) + 1), answer.low(), output.name());
+            compared += limits.size() == 2 && limits.contains(Rational.ZERO) ? 1 : 0;
+        }
+        assertEquals(4, compared);
     }
 
     @Test
@@ -120,7 +176,7 @@ class AnswerClaimsTest {
         Finding finding = finding("pump-pair", "{value: one, given: running, at: 2, is: " + joint + "}");
         assertEquals(SlipKind.JOINT_FOR_CONDITIONAL, kinds(finding).get(0), finding::toString);
         Finding never = finding("pump-pair", "{value: both, given: none, at: 0, is: 0}");
-        assertEquals(List.of("at k = 0 what is given has probability zero: nothing is given by it"),
+        assertEquals(List.of("there is no such number: at k = 0 what is given has probability zero: nothing is given by it"),
                 never.judgement().remarks());
     }
 
@@ -216,14 +272,19 @@ class AnswerClaimsTest {
         if (limits.isEmpty() || answer.exact().filter(from -> from.compareTo(Rational.of(STEPS - 40)) < 0).isEmpty()) {
             return 0;
         }
+        assertEquals(Rational.of(lastFarOff(p, limits, near) + 1), answer.low(), name + " " + output.name());
+        return 1;
+    }
+
+    /** The last of the steps seen that is further off than that; -1 where none is. */
+    private static int lastFarOff(List<Rational> p, List<Rational> limits, Rational near) {
         int last = -1;
         for (int k = 0; k < STEPS; k++) {
             if (p.get(k).minus(limits.get(k % limits.size())).abs().compareTo(near) > 0) {
                 last = k;
             }
         }
-        assertEquals(Rational.of(last + 1), answer.low(), name + " " + output.name());
-        return 1;
+        return last;
     }
 
     private static List<Rational> limits(Truth truth, Output output) {
