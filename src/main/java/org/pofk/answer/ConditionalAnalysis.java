@@ -34,7 +34,7 @@ final class ConditionalAnalysis {
         DerivedModel derived = Deriving.of(model.with(chain), asked, at, Set.of(Deriving.Extra.COMPARISON), found ->
                 published.accept(ConditionalModel.of(model, given, possible, found)));
         ConditionalModel known = ConditionalModel.of(model, given, possible, derived);
-        List<ConditionalLongRun> longRuns = ConditionalForms.longRuns(ConditionalForms.of(given, chain,
+        List<ConditionalLongRun> longRuns = ConditionalForms.longRuns(ConditionalForms.of(given.in(), chain,
                 derived.outputs().stream().map(each -> each.closedForm().orElseThrow()).toList()), outputs.size());
         List<Conditional> complete = new ArrayList<>();
         for (int i = 0; i < outputs.size(); i++) {

@@ -3,6 +3,7 @@ package org.pofk.answer;
 import java.math.BigInteger;
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
 import java.util.stream.IntStream;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Output;
@@ -31,9 +32,14 @@ record ConditionalForms(List<Residue> residues) {
         return residues.size();
     }
 
-    /** Empty where the classes' common period is too long. @param known forms on the chain itself, event first */
-    static Optional<ConditionalForms> of(Given given, Chain chain, List<ClosedForm> known) {
-        BigInteger period = EveryFewSteps.period(chain, given.in());
+    /**
+     * Empty where the classes' common period is too long.
+     *
+     * @param in    states in which what is known holds, so that the event's coefficients are zero elsewhere
+     * @param known forms on the chain itself, event first
+     */
+    static Optional<ConditionalForms> of(Set<Integer> in, Chain chain, List<ClosedForm> known) {
+        BigInteger period = EveryFewSteps.period(chain, in);
         if (period.compareTo(PERIOD_AT_MOST) > 0) {
             return Optional.empty();
         }

@@ -3,6 +3,7 @@ package org.pofk.answer;
 import java.util.List;
 import java.util.Optional;
 import org.pofk.exact.Enclosed;
+import org.pofk.exact.Rational;
 import org.pofk.modes.RealValue;
 
 /**
@@ -14,6 +15,9 @@ import org.pofk.modes.RealValue;
  */
 public record ConditionalLongRun(Kind kind, List<Optional<RealValue>> values) {
     private static final int TOLD_APART_BITS = 2_048;
+    private static final int NEAR_BITS = 192;
+    /** {@link #near} is no farther away than this. */
+    public static final Rational NEAR_WITHIN = Rational.TWO.pow(4 - NEAR_BITS);
 
     /** What it may be. */
     public enum Kind {
@@ -30,12 +34,28 @@ public record ConditionalLongRun(Kind kind, List<Optional<RealValue>> values) {
         values = List.copyOf(values);
     }
 
-    static ConditionalLongRun without(Kind kind) {
+    public static ConditionalLongRun without(Kind kind) {
         return new ConditionalLongRun(kind, List.of());
     }
 
+    /** The value that k tends to; empty where there is none. */
+    public Optional<RealValue> at(int k) {
+        return values.isEmpty() ? Optional.empty() : values.get(Math.floorMod(k, values.size()));
+    }
+
+    /** The value itself where it is a fraction, one near to it elsewhere. */
+    public static Rational near(RealValue value) {
+        return value.rational().orElseGet(() -> value.enclosure().enclose(NEAR_BITS).middle());
+    }
+
+    /** The largest of them by size, or nearly so; zero where there is none. */
+    public Rational largest() {
+        return values.stream().flatMap(Optional::stream).map(value -> near(value).abs())
+                .reduce(Rational.ZERO, Rational::max);
+    }
+
     /** With the least period that the values are proved to have. */
-    static ConditionalLongRun of(List<Optional<RealValue>> values) {
+    public static ConditionalLongRun of(List<Optional<RealValue>> values) {
         if (values.stream().allMatch(Optional::isEmpty)) {
             return without(Kind.IMPOSSIBLE_IN_THE_END);
         }

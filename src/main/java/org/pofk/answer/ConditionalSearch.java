@@ -13,7 +13,6 @@ import org.pofk.longrun.LongRun;
 import org.pofk.longrun.LongRunValues;
 import org.pofk.modes.ClosedForm;
 import org.pofk.modes.KnownPoles;
-import org.pofk.modes.RealValue;
 import org.pofk.steps.PossibleSteps;
 import org.pofk.transform.Transform;
 import org.pofk.transform.Transforms;
@@ -24,8 +23,6 @@ import org.pofk.transform.Transforms;
  * have to give the same answer.
  */
 final class ConditionalSearch {
-    private static final int LIMIT_BITS = 192;
-    private static final Rational LIMIT_WITHIN = Rational.TWO.pow(4 - LIMIT_BITS);
     private static final long MOST_CLASSES = 240;
     private static final Band NOT_NEGATIVE = new Band(Optional.of(Rational.ZERO), Optional.empty());
     private static final Band NOT_POSITIVE = new Band(Optional.empty(), Optional.of(Rational.ZERO));
@@ -46,29 +43,19 @@ final class ConditionalSearch {
     static When of(ConditionalForms forms, PossibleSteps possible, ConditionalLongRun longRun, int output,
             WhenModel.Asked asked) {
         ConditionalSearch search = new ConditionalSearch(forms, possible, longRun, output);
-        Rational size = asked.relative() ? search.largestLimit() : Rational.ONE;
+        Rational size = asked.relative() ? longRun.largest() : Rational.ONE;
         Condition condition = new Condition(asked.kind(), asked.bound().times(size));
         if (condition.kind() != Kind.SETTLED || search.limitsAreFractions()) {
             return search.answer(condition, condition.bound());
         }
-        When inner = search.answer(condition, condition.bound().minus(LIMIT_WITHIN));
-        When outer = search.answer(condition, condition.bound().plus(LIMIT_WITHIN));
+        When inner = search.answer(condition, condition.bound().minus(ConditionalLongRun.NEAR_WITHIN));
+        When outer = search.answer(condition, condition.bound().plus(ConditionalLongRun.NEAR_WITHIN));
         return inner.equals(outer) ? inner : new When(condition, Optional.empty(), Optional.empty(), List.of(), false,
                 When.Reason.TOO_MANY_STEPS);
     }
 
     private boolean limitsAreFractions() {
         return longRun.values().stream().flatMap(Optional::stream).allMatch(value -> value.rational().isPresent());
-    }
-
-    private Rational largestLimit() {
-        return longRun.values().stream().flatMap(Optional::stream).map(value -> fraction(value).abs())
-                .reduce(Rational.ZERO, Rational::max);
-    }
-
-    /** The value, or a fraction near to it. */
-    private static Rational fraction(RealValue value) {
-        return value.rational().orElseGet(() -> value.enclosure().enclose(LIMIT_BITS).middle());
     }
 
     private When answer(Condition condition, Rational bound) {
@@ -113,8 +100,7 @@ final class ConditionalSearch {
     }
 
     private Optional<Rational> limit(int r) {
-        return longRun.values().isEmpty() ? Optional.empty()
-                : longRun.values().get(r % longRun.values().size()).map(ConditionalSearch::fraction);
+        return longRun.at(r).map(ConditionalLongRun::near);
     }
 
     /** On a − t b. */

@@ -41,8 +41,12 @@ final class ConditionalValues {
             Rational exact = above.exact().get().dividedBy(below.exact().get());
             return new StepValue(above.k(), Optional.of(exact), Enclosed.of(exact));
         }
-        Rational unit = OutermostPole.of(belowForm).orElseThrow().value().enclose(SCALE_BITS).middle();
-        return new StepValue(above.k(), Optional.empty(), ModeValues.of(aboveForm).inUnitsOf(unit).at(above.k())
-                .dividedBy(ModeValues.of(belowForm).inUnitsOf(unit).at(below.k())));
+        return new StepValue(above.k(), Optional.empty(), quotient(above.k(), aboveForm, belowForm));
+    }
+
+    /** At a step far enough for the second's modes to be above zero. */
+    static Enclosed quotient(int k, ClosedForm above, ClosedForm below) {
+        Rational unit = OutermostPole.of(below).orElseThrow().value().enclose(SCALE_BITS).middle();
+        return ModeValues.of(above).inUnitsOf(unit).at(k).dividedBy(ModeValues.of(below).inUnitsOf(unit).at(k));
     }
 }

@@ -51,12 +51,12 @@ public record ConditionalWhen(Model model, Given given, List<Output> outputs, Op
         KnownPoles poles = new KnownPoles(() -> Eigenvalues.guesses(chain.matrix()));
         List<ClosedForm> forms = Transforms.of(chain, all).stream()
                 .map(transform -> ClosedForm.of(transform, poles)).toList();
-        Optional<ConditionalForms> seen = ConditionalForms.of(given, chain, forms);
+        Optional<ConditionalForms> seen = ConditionalForms.of(given.in(), chain, forms);
         List<Answer> answers = new ArrayList<>();
         for (int i = 0; i < outputs.size(); i++) {
             ConditionalLongRun longRun = ConditionalForms.longRuns(seen, outputs.size()).get(i);
-            When when = seen.isPresent() && possible.isPresent()
-                    ? ConditionalSearch.of(seen.get(), possible.get(), longRun, i, asked)
+            When when = possible.filter(PossibleSteps::isNever).isPresent() ? nothingDefined(asked)
+                    : seen.isPresent() && possible.isPresent() ? ConditionalSearch.of(seen.get(), possible.get(), longRun, i, asked)
                     : new When(new Condition(asked.kind(), asked.bound()), Optional.empty(), Optional.empty(),
                             List.of(), false, When.Reason.NO_LONG_RUN);
             List<Integer> around = around(when);
@@ -66,6 +66,12 @@ public record ConditionalWhen(Model model, Given given, List<Output> outputs, Op
             published.accept(new ConditionalWhen(model, given, outputs, possible, answers));
         }
         return new ConditionalWhen(model, given, outputs, possible, answers);
+    }
+
+    /** The answer where what is known has probability zero at every step. */
+    public static When nothingDefined(WhenModel.Asked asked) {
+        return new When(new Condition(asked.kind(), asked.bound()), Optional.empty(), Optional.empty(), List.of(), true,
+                When.Reason.NOTHING_DEFINED);
     }
 
     /** The steps just before and at the two that were found. */

@@ -1,6 +1,5 @@
 package org.pofk.answer;
 
-import java.util.ArrayList;
 import java.util.Collections;
 import java.util.List;
 import java.util.Optional;
@@ -8,10 +7,15 @@ import java.util.Set;
 import java.util.TreeSet;
 import java.util.stream.IntStream;
 import org.pofk.chain.Chain;
+import org.pofk.chain.Model;
 import org.pofk.chain.Output;
+import org.pofk.chain.Schedule;
 import org.pofk.chain.SparseMatrix;
+import org.pofk.chain.Timetable;
 import org.pofk.exact.Rational;
 import org.pofk.steps.ExactSteps;
+import org.pofk.steps.StateArithmetic;
+import org.pofk.steps.WholeState;
 
 /**
  * What is known of a chain at a step: the state lies in a set, and other states have not been entered up to then. The
@@ -45,10 +49,18 @@ public record Given(List<String> names, Set<Integer> in, List<String> neverNames
         if (never.isEmpty()) {
             return chain;
         }
-        List<List<SparseMatrix.Entry>> columns = IntStream.range(0, chain.size()).mapToObj(state ->
-                never.contains(state) ? List.of(new SparseMatrix.Entry(state, Rational.ONE))
-                        : chain.matrix().columns().get(state)).toList();
-        return with(chain, new SparseMatrix(columns), chain.start());
+        return with(chain, stopped(chain.matrix()), chain.start());
+    }
+
+    /** The same of a model: with a schedule, neither moves nor actions lead out of states never to be entered. */
+    public Model model(Model model) {
+        Model stopped = model.with(chain(model.chain()));
+        return model.schedule().map(schedule -> stopped.with(schedule.with(this::stopped))).orElse(stopped);
+    }
+
+    private SparseMatrix stopped(SparseMatrix matrix) {
+        return new SparseMatrix(IntStream.range(0, matrix.size()).mapToObj(state -> never.contains(state)
+                ? List.of(new SparseMatrix.Entry(state, Rational.ONE)) : matrix.columns().get(state)).toList());
     }
 
     /** The output where what is known holds, zero elsewhere: E[output at k, and known]. */
@@ -65,22 +77,31 @@ public record Given(List<String> names, Set<Integer> in, List<String> neverNames
     }
 
     /**
-     * The state at step j given what is known there; empty where that has probability zero. Cost: j steps in fractions
-     * that grow, see {@link ExactSteps#bitsPerStep}.
+     * The state at step j given what is known there, after what a schedule does then; empty where that has probability
+     * zero. Cost: j steps in fractions that grow, see {@link ExactSteps#bitsPerStep}.
      */
-    public Optional<Start> at(Chain chain, int j) {
-        Chain stopped = chain(chain);
-        List<Rational> state = stopped.start();
-        for (int k = 0; k < j; k++) {
-            state = stopped.matrix().times(state);
-        }
-        List<Rational> kept = new ArrayList<>();
-        for (int i = 0; i < chain.size(); i++) {
-            kept.add(in.contains(i) ? state.get(i) : Rational.ZERO);
-        }
+    public Optional<Start> at(Model model, int j) {
+        Model stopped = model(model);
+        List<Rational> state = stopped.schedule().map(schedule -> stepped(stopped.chain(), schedule, j))
+                .orElseGet(() -> stepped(stopped.chain(), j));
+        List<Rational> kept = IntStream.range(0, state.size()).mapToObj(i ->
+                in.contains(i) ? state.get(i) : Rational.ZERO).toList();
         Rational probability = kept.stream().reduce(Rational.ZERO, Rational::plus);
         return probability.isZero() ? Optional.empty() : Optional.of(new Start(probability,
                 kept.stream().map(share -> share.dividedBy(probability)).toList()));
+    }
+
+    private static List<Rational> stepped(Chain chain, int j) {
+        List<Rational> state = chain.start();
+        for (int k = 0; k < j; k++) {
+            state = chain.matrix().times(state);
+        }
+        return state;
+    }
+
+    private static List<Rational> stepped(Chain chain, Schedule schedule, int j) {
+        Timetable timetable = Timetable.of(chain, schedule);
+        return StateArithmetic.Whole.of(timetable).walked(timetable, WholeState.of(chain.start()), 0, j).reduced();
     }
 
     /** The same chain from another start. */

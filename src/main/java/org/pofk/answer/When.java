@@ -69,6 +69,8 @@ public record When(Condition condition, Optional<Long> first, Optional<Long> for
         ONLY_FOR_A_WHILE,
         /** At no step. */
         NEVER,
+        /** What is given has probability zero at every step: there is nothing that could be met or missed. */
+        NOTHING_DEFINED,
         /** The long run is neither a limit nor a cycle that is listed. */
         NO_LONG_RUN,
         /** The bound is a value of the long run, and no theorem decides on which side p(k) approaches it. */

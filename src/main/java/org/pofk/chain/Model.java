@@ -133,4 +133,10 @@ public record Model(String title, Step step, Convention convention, About about,
         return new Model(title, step, convention, about, other, schedule, costs, parameters, notes, changes, written,
                 origin, tables, settings);
     }
+
+    /** The same model with another schedule. */
+    public Model with(Schedule other) {
+        return new Model(title, step, convention, about, chain, Optional.of(other), costs, parameters, notes, changes,
+                written, origin, tables, settings);
+    }
 }

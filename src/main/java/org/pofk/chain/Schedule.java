@@ -1,7 +1,9 @@
 package org.pofk.chain;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.UnaryOperator;
 
 /**
  * What happens to a chain at fixed steps besides its ordinary move: actions on its state, such as inspections, and
@@ -33,6 +35,15 @@ public record Schedule(List<Recurring> recurring, Optional<Phases> phases) {
         boolean isAt(int k) {
             return k >= first && (k - first) % every == 0;
         }
+
+        private Recurring after(int step) {
+            int next = step < first ? first - step : every - (step - first) % every;
+            return new Recurring(action, every, next, when);
+        }
+
+        private Recurring with(UnaryOperator<SparseMatrix> changed) {
+            return new Recurring(new Action(action.name, changed.apply(action.matrix)), every, first, when);
+        }
     }
 
     /**
@@ -60,10 +71,48 @@ public record Schedule(List<Recurring> recurring, Optional<Phases> phases) {
         public int steps() {
             return (int) Math.min(Integer.MAX_VALUE, list.stream().mapToLong(Phase::steps).sum());
         }
+
+        /** The phase a step lies in is cut in two; what has gone by comes last where phases repeat. */
+        private Phases after(int step) {
+            int left = repeat == Repeat.YES ? step % steps() : Math.min(step, steps() - 1);
+            List<Phase> goneBy = new ArrayList<>();
+            List<Phase> ahead = new ArrayList<>();
+            for (Phase phase : list) {
+                int gone = Math.min(left, phase.steps);
+                left -= gone;
+                if (gone > 0) {
+                    goneBy.add(new Phase(gone, phase.use, phase.matrix));
+                }
+                if (gone < phase.steps) {
+                    ahead.add(new Phase(phase.steps - gone, phase.use, phase.matrix));
+                }
+            }
+            if (repeat == Repeat.YES) {
+                ahead.addAll(goneBy);
+            }
+            return new Phases(ahead, repeat);
+        }
+
+        private Phases with(UnaryOperator<SparseMatrix> changed) {
+            return new Phases(list.stream().map(each ->
+                    new Phase(each.steps, each.use, changed.apply(each.matrix))).toList(), repeat);
+        }
     }
 
     public Schedule {
         recurring = List.copyOf(recurring);
+    }
+
+    /** The same as seen from the end of a step, 0 or later: what happens in step k of it happens in step {@code step} + k. */
+    public Schedule after(int step) {
+        return new Schedule(recurring.stream().map(each -> each.after(step)).toList(),
+                phases.map(each -> each.after(step)));
+    }
+
+    /** The same with each of its matrices changed. */
+    public Schedule with(UnaryOperator<SparseMatrix> changed) {
+        return new Schedule(recurring.stream().map(each -> each.with(changed)).toList(),
+                phases.map(each -> each.with(changed)));
     }
 
     private static void requirePositive(int count) {

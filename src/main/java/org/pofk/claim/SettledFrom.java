@@ -22,6 +22,7 @@ final class SettledFrom {
         When when = When.of(truth.chain(), truth.closedForm(), longRun, asked.of(longRun));
         return switch (when.reason()) {
             case FOR_EVER -> remarked(when.forEverFrom().orElseThrow(), when.first());
+            case NOTHING_DEFINED -> throw new AssertionError("nothing is given, so p(k) is defined: " + truth);
             case NO_LONG_RUN -> longRun.accept(new Missing());
             case APPROACH_NOT_DECIDED, TOO_MANY_STEPS -> Answer.notDecided("how close it stays isn't decided");
             case NEVER, ONLY_FOR_A_WHILE, AGAIN_AND_AGAIN, ONLY_IN_SOME_CLASSES -> Answer.none("never",

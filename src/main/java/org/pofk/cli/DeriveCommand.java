@@ -43,6 +43,8 @@ import picocli.CommandLine.Option;
 @Command(description = "Derives formulas p(k) that hold for every k, with their proof and the long run.")
 final class DeriveCommand implements Work {
     private static final int DERIVED_UNASKED = 12;
+    private static final String WITHOUT_THE_WAY = "with --given at k itself derive shows its result, without the way to"
+            + " it; with --given-at STEP everything is there";
 
     @Mixin
     private AnswerOptions options = new AnswerOptions(CommandName.DERIVE, Format.JSON, Format.CSV, Format.NOTEBOOK);
@@ -104,16 +106,33 @@ final class DeriveCommand implements Work {
 
     private ExitCode scheduled(Model read, Destination destination, Streams streams)
             throws RefusedException, UsageException, WritingException {
-        if (given.isAsked() || secondOpinion || show == Part.DERIVATION) {
-            throw new UsageException("'" + read.origin().file() + "' has a schedule: --given, --second-opinion and"
+        if (secondOpinion || show == Part.DERIVATION) {
+            throw new UsageException("'" + read.origin().file() + "' has a schedule: --second-opinion and"
                     + " --show derivation aren't there for it; --show result and --show all are");
         }
         if (isTooLargeForAll(read.chain())) {
             throw new UsageException(StructureDocument.askingForOutputs(read.chain()));
         }
-        return ScheduledDerivation.write(options, read, AskedOutputs.of(read.chain(), of),
+        ScheduledDerivation derivation = new ScheduledDerivation(options, AskedOutputs.of(read.chain(), of),
                 at.map(StepList::steps).orElse(List.of()), show == Part.ALL ? Scheduling.Formulas.ALL
                         : Scheduling.Formulas.WITHIN_REACH, destination, streams);
+        Optional<Integer> step = given.at();
+        if (given.isAsked() && step.isEmpty()) {
+            refuseNotebook(destination);
+            return derivation.given(read, given.given(read.chain()));
+        }
+        if (step.isEmpty()) {
+            return derivation.of(read, Optional.empty());
+        }
+        Optional<Known> known = given.known(read, step.get());
+        return known.isEmpty() ? given.nothing(read, step.get(), CommandName.DERIVE, destination, streams)
+                : derivation.of(known.get().model(), known);
+    }
+
+    private void refuseNotebook(Destination destination) throws UsageException {
+        if (destination.takes(Format.NOTEBOOK)) {
+            throw new UsageException(WITHOUT_THE_WAY);
+        }
     }
 
     private ExitCode derive(Model read, Optional<Known> known, Style style, Destination destination, Streams streams)
@@ -164,10 +183,10 @@ final class DeriveCommand implements Work {
 
     private ExitCode conditional(Model read, Style style, Destination destination, Streams streams)
             throws RefusedException, UsageException, WritingException {
-        if (destination.takes(Format.NOTEBOOK) || show != Part.RESULT || secondOpinion) {
-            throw new UsageException("with --given at k itself derive shows its result, without the way"
-                    + " to it; with --given-at STEP everything is there");
+        if (show != Part.RESULT || secondOpinion) {
+            throw new UsageException(WITHOUT_THE_WAY);
         }
+        refuseNotebook(destination);
         Given what = given.given(read.chain());
         List<Output> outputs = AskedOutputs.of(read.chain(), of);
         Worker.Outcome<ConditionalModel> outcome = options.within(streams, published ->

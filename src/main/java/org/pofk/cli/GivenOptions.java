@@ -16,7 +16,10 @@ import org.pofk.report.ConditionalDocument;
 import org.pofk.report.ConditionalJson;
 import org.pofk.report.ConditionalTable;
 import org.pofk.report.CsvWriter;
+import org.pofk.report.ScheduledConditionalDocument;
 import org.pofk.report.Style;
+import org.pofk.schedule.ConditionalSchedule;
+import org.pofk.schedule.Scheduling;
 import org.pofk.text.RefusedException;
 import picocli.CommandLine.Option;
 
@@ -40,14 +43,6 @@ final class GivenOptions {
         return !in.isEmpty() || !never.isEmpty();
     }
 
-    /** Of what is known, nothing is answered where the chain moves by several matrices. */
-    void refuseUnderSchedule(Model read) throws UsageException {
-        if (isAsked() || at.isPresent()) {
-            throw new UsageException("'" + read.origin().file() + "' has a schedule: --given, --given-never and"
-                    + " --given-at aren't there for it");
-        }
-    }
-
     Optional<Integer> at() throws UsageException {
         if (at.isPresent() && !isAsked()) {
             throw new UsageException("--given-at says when; say what is known then with --given NAME or"
@@ -69,10 +64,11 @@ final class GivenOptions {
         if (!isAsked()) {
             return List.of();
         }
-        if (read.schedule().isPresent()) {
-            refuseUnderSchedule(read);
-        }
         Given given = given(read.chain());
+        if (read.schedule().isPresent()) {
+            return List.of(new AskedSection(ConditionalDocument.title(given), () -> ScheduledConditionalDocument.section(
+                    ConditionalSchedule.of(read, given, outputs, steps, Scheduling.Formulas.WITHIN_REACH), style)));
+        }
         return List.of(new AskedSection(ConditionalDocument.title(given), () -> ConditionalDocument.section(
                 ConditionalModel.of(read, given, outputs, steps, partly -> { }), style)));
     }
@@ -110,7 +106,7 @@ final class GivenOptions {
 
     /** The model seen from the step at which something is known; empty where that has probability zero. */
     Optional<Known> known(Model model, int step) throws UsageException {
-        if (!Known.isNear(model.chain(), step)) {
+        if (!Known.isNear(model, step)) {
             throw new UsageException("--given-at " + step + ": the exact state at that step has fractions of more than "
                     + Known.BITS_AT_MOST + " bits; name an earlier step");
         }

@@ -45,10 +45,7 @@ final class PassageCommand implements Work {
         }
         Model read = options.modelWithSchedule();
         if (read.schedule().isPresent()) {
-            given.refuseUnderSchedule(read);
-            Chain chain = passage.started(read.chain());
-            return ScheduledAnswers.passage(options, read.with(chain), passage.work(chain, read.schedule().get(),
-                    destination.steps(at)), destination, streams);
+            return scheduled(read.with(passage.started(read.chain())), destination, streams);
         }
         Model started = read.with(passage.started(read.chain()));
         Optional<Integer> step = given.at();
@@ -60,6 +57,20 @@ final class PassageCommand implements Work {
         return known.isEmpty() ? given.nothing(started, step.get(), CommandName.PASSAGE, destination, streams)
                 : passage(known.get().model(), known.get().model().chain(), known, Optional.empty(), style,
                         destination, streams);
+    }
+
+    private ExitCode scheduled(Model started, Destination destination, Streams streams)
+            throws RefusedException, UsageException, WritingException {
+        Optional<Integer> step = given.at();
+        if (step.isEmpty()) {
+            return ScheduledAnswers.passage(options, started, Optional.empty(), passage.scheduled(started,
+                    given.isAsked() ? Optional.of(given.given(started.chain())) : Optional.empty(),
+                    destination.steps(at)), destination, streams);
+        }
+        Optional<Known> known = given.known(started, step.get());
+        return known.isEmpty() ? given.nothing(started, step.get(), CommandName.PASSAGE, destination, streams)
+                : ScheduledAnswers.passage(options, known.get().model(), known, passage.scheduled(known.get().model(),
+                        Optional.empty(), destination.steps(at)), destination, streams);
     }
 
     private ExitCode passage(Model read, Chain chain, Optional<Known> known, Optional<Given> atTheEnd, Style style,

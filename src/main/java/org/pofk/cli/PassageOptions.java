@@ -10,7 +10,6 @@ import org.pofk.answer.Given;
 import org.pofk.answer.Passage;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
-import org.pofk.chain.Schedule;
 import org.pofk.chain.Timetable;
 import org.pofk.exact.Rational;
 import org.pofk.report.PassageDocument;
@@ -54,17 +53,29 @@ final class PassageOptions {
         return work(chain, Optional.empty(), at);
     }
 
-    /** The same of a chain with a schedule. */
-    Supplier<ScheduledPassage> work(Chain chain, Schedule schedule, List<Integer> at) throws UsageException {
-        Set<Integer> target = states(chain, into, "--into");
-        Set<Integer> avoided = states(chain, avoiding, "--avoiding");
-        requireApart(chain, target, avoided);
+    /** The same of a model with a schedule. */
+    Supplier<ScheduledPassage> scheduled(Model started, Optional<Given> atTheEnd, List<Integer> at)
+            throws UsageException {
+        Chain chain = started.chain();
+        Ends ends = ends(chain, atTheEnd);
         List<Rational> shares = shares();
-        return () -> ScheduledPassage.of(chain, Timetable.of(chain, schedule), target, avoided, shares, at);
+        return () -> ScheduledPassage.of(chain, Timetable.of(chain, started.schedule().orElseThrow()), ends.target,
+                ends.avoided, shares, at);
     }
 
-    /** The same given what is known when it ends: what else is entered then ends the wait without success. */
+    /** The same given what is known when it ends. */
     Supplier<Passage> work(Chain chain, Optional<Given> atTheEnd, List<Integer> at) throws UsageException {
+        Ends ends = ends(chain, atTheEnd);
+        List<Rational> shares = shares();
+        return () -> Passage.of(chain, ends.target, ends.avoided, shares, at);
+    }
+
+    /** The states that end the wait, with success and without. */
+    private record Ends(Set<Integer> target, Set<Integer> avoided) {
+    }
+
+    /** Given what is known at the end, what else is entered then ends the wait without success. */
+    private Ends ends(Chain chain, Optional<Given> atTheEnd) throws UsageException {
         Set<Integer> target = states(chain, into, "--into");
         Set<Integer> avoided = states(chain, avoiding, "--avoiding");
         requireApart(chain, target, avoided);
@@ -78,8 +89,7 @@ final class PassageOptions {
                         + " entered, so that has probability zero and nothing is defined given it");
             }
         }
-        List<Rational> shares = shares();
-        return () -> Passage.of(chain, target, avoided, shares, at);
+        return new Ends(target, avoided);
     }
 
     /** What a report says of it. */
@@ -89,13 +99,13 @@ final class PassageOptions {
         }
         Chain chain = started(read.chain());
         return List.of(new AskedSection(Prose.of("First passage into ").and(Prose.names(into)),
-                section(chain, read.schedule(), at, style)));
+                section(read.with(chain), at, style)));
     }
 
-    private Supplier<ReportSection> section(Chain chain, Optional<Schedule> schedule, List<Integer> at, Style style)
-            throws UsageException {
-        if (schedule.isPresent()) {
-            Supplier<ScheduledPassage> work = work(chain, schedule.get(), at);
+    private Supplier<ReportSection> section(Model started, List<Integer> at, Style style) throws UsageException {
+        Chain chain = started.chain();
+        if (started.schedule().isPresent()) {
+            Supplier<ScheduledPassage> work = scheduled(started, Optional.empty(), at);
             return () -> ScheduledPassageDocument.section(chain, work.get(), style);
         }
         Supplier<Passage> work = work(chain, at);

@@ -1,11 +1,17 @@
 package org.pofk.cli;
 
 import java.util.List;
+import java.util.Optional;
 import java.util.function.Supplier;
+import org.pofk.answer.ConditionalWhen;
+import org.pofk.answer.Given;
+import org.pofk.answer.Known;
 import org.pofk.answer.WhenModel;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
+import org.pofk.report.ConditionalWhenDocument;
 import org.pofk.report.CsvWriter;
+import org.pofk.report.GivenProse;
 import org.pofk.report.PassageTable;
 import org.pofk.report.ScheduledPassageDocument;
 import org.pofk.report.ScheduledPassageJson;
@@ -18,6 +24,7 @@ import org.pofk.report.Style;
 import org.pofk.report.TotalTable;
 import org.pofk.report.WhenJson;
 import org.pofk.report.WhenTable;
+import org.pofk.schedule.ScheduledConditionalWhen;
 import org.pofk.schedule.ScheduledPassage;
 import org.pofk.schedule.ScheduledTotal;
 import org.pofk.schedule.ScheduledTotalModel;
@@ -46,7 +53,8 @@ final class ScheduledAnswers {
         return found.isDecided() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
     }
 
-    static ExitCode passage(AnswerOptions options, Model started, Supplier<ScheduledPassage> work,
+    /** @param known what the model is seen from, where it isn't its own start */
+    static ExitCode passage(AnswerOptions options, Model started, Optional<Known> known, Supplier<ScheduledPassage> work,
             Destination destination, Streams streams) throws RefusedException, UsageException, WritingException {
         Style style = options.style();
         Worker.Outcome<ScheduledPassage> outcome = options.within(streams, published -> published.accept(work.get()));
@@ -54,15 +62,16 @@ final class ScheduledAnswers {
             return options.undecided(streams);
         }
         ScheduledPassage found = outcome.published().get();
-        destination.write(Answer.of(() -> ScheduledPassageDocument.of(started, found, style))
-                .with(Format.JSON, () -> ScheduledPassageJson.write(started, found, style.digits()))
+        destination.write(Answer.of(() -> GivenProse.in(ScheduledPassageDocument.of(started, found, style), known, style))
+                .with(Format.JSON, () -> ScheduledPassageJson.write(started, known, found, style.digits()))
                 .with(Format.CSV, () -> CsvWriter.write(PassageTable.of(started, found, style.digits())))
                 .with(Format.NOTEBOOK, () -> ScheduledPassageNotebook.write(started, found, style)), streams);
         return found.over().isPresent() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
     }
 
-    static ExitCode when(AnswerOptions options, Model read, List<Output> outputs, WhenModel.Asked asked,
-            Destination destination, Streams streams) throws RefusedException, UsageException, WritingException {
+    /** @param known what the model is seen from, where it isn't its own start */
+    static ExitCode when(AnswerOptions options, Model read, Optional<Known> known, List<Output> outputs,
+            WhenModel.Asked asked, Destination destination, Streams streams) throws RefusedException, UsageException, WritingException {
         Style style = options.style();
         Worker.Outcome<ScheduledWhen> outcome = options.within(streams, partly ->
                 partly.answers().size() + " of " + outputs.size() + " outputs answered", published ->
@@ -71,7 +80,23 @@ final class ScheduledAnswers {
             return options.undecided(streams);
         }
         ScheduledWhen found = outcome.published().get();
-        destination.write(Answer.of(() -> ScheduledWhenDocument.of(found, style))
+        destination.write(Answer.of(() -> GivenProse.in(ScheduledWhenDocument.of(found, style), known, style))
+                .with(Format.JSON, () -> WhenJson.write(found, known, style.digits()))
+                .with(Format.CSV, () -> CsvWriter.write(WhenTable.of(found, style.digits()))), streams);
+        return found.isDecided() && outcome.finished() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
+    }
+
+    /** The same given what is known at each step. */
+    static ExitCode when(AnswerOptions options, Model read, Given given, List<Output> outputs, WhenModel.Asked asked,
+            Destination destination, Streams streams) throws RefusedException, UsageException, WritingException {
+        Style style = options.style();
+        Worker.Outcome<ConditionalWhen> outcome = options.within(streams, published ->
+                ScheduledConditionalWhen.of(read, given, outputs, asked, published));
+        if (outcome.published().isEmpty()) {
+            return options.undecided(streams);
+        }
+        ConditionalWhen found = outcome.published().get();
+        destination.write(Answer.of(() -> ConditionalWhenDocument.of(found, style))
                 .with(Format.JSON, () -> WhenJson.write(found, style.digits()))
                 .with(Format.CSV, () -> CsvWriter.write(WhenTable.of(found, style.digits()))), streams);
         return found.isDecided() && outcome.finished() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;

@@ -44,8 +44,7 @@ final class WhenCommand implements Work {
         WhenModel.Asked asked = asked();
         Model read = options.modelWithSchedule();
         if (read.schedule().isPresent()) {
-            given.refuseUnderSchedule(read);
-            return ScheduledAnswers.when(options, read, outputs(read, destination), asked, destination, streams);
+            return scheduled(read, asked, destination, streams);
         }
         Optional<Integer> step = given.at();
         if (given.isAsked() && step.isEmpty()) {
@@ -57,6 +56,21 @@ final class WhenCommand implements Work {
         Optional<Known> known = given.known(read, step.get());
         return known.isEmpty() ? given.nothing(read, step.get(), CommandName.WHEN, destination, streams)
                 : when(known.get().model(), known, asked, style, destination, streams);
+    }
+
+    private ExitCode scheduled(Model read, WhenModel.Asked asked, Destination destination, Streams streams)
+            throws RefusedException, UsageException, WritingException {
+        List<Output> outputs = outputs(read, destination);
+        Optional<Integer> step = given.at();
+        if (given.isAsked() && step.isEmpty()) {
+            return ScheduledAnswers.when(options, read, given.given(read.chain()), outputs, asked, destination, streams);
+        }
+        if (step.isEmpty()) {
+            return ScheduledAnswers.when(options, read, Optional.empty(), outputs, asked, destination, streams);
+        }
+        Optional<Known> known = given.known(read, step.get());
+        return known.isEmpty() ? given.nothing(read, step.get(), CommandName.WHEN, destination, streams)
+                : ScheduledAnswers.when(options, known.get().model(), known, outputs, asked, destination, streams);
     }
 
     private ExitCode when(Model read, Optional<Known> known, WhenModel.Asked asked, Style style,

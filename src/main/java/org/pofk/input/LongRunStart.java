@@ -46,10 +46,16 @@ final class LongRunStart {
         if (start.closed.size() > 1) {
             reading.fault(written.position(), "long-run-of-which", "the chain can end in " + start.closed.size()
                     + " closed parts, " + start.parts() + ", each with a long run of its own; name a state or a set of "
-                    + "one: long run of " + states.names().get(start.closed.get(0).states().get(0)));
+                    + "one, " + like(states.names().get(start.closed.get(0).states().get(0)), reading));
             return List.of();
         }
         return start.of(start.closed.get(0));
+    }
+
+    /** How it is named where it was asked for: in the file or on the command line. */
+    private static String like(String state, Reading reading) {
+        return reading.overrides().start().isPresent() ? "like --start \"long run of " + state + "\""
+                : "like start: {long run of: " + state + "}";
     }
 
     /** Of the closed part in which a state or a set lies; a fault at the name when there is none. */

@@ -91,13 +91,31 @@ final class StartSection {
                 return Collections.nCopies(states.size(), Rational.of(1, states.size()));
             }
         }
+        if (head.kind() == Chain.Kind.RECURSION && !states.contains(name.name())) {
+            boolean isLongRun = name.name().equals(LONG_RUN) || name.name().startsWith(LONG_RUN_OF + " ");
+            if (isLongRun || reading.overrides().isStartEach()) {
+                refuseOfRecursion(name, isLongRun ? "doesn't start in a long run" : "doesn't start in each state in turn");
+                return List.of();
+            }
+        }
         return states.find(name, reading).map(state -> vector(List.of(new Entry(state, Rational.ONE))))
                 .orElse(List.of());
     }
 
+    private void refuseOfRecursion(Node.Scalar name, String what) {
+        String first = states.names().get(0);
+        reading.fault(name.position(), "start-of-a-recursion", "a recursion " + what + "; only a chain of probabilities does."
+                + " Name a state, like " + (reading.overrides().start().isPresent() ? "--start '" + first + "', or leave"
+                + " --start out" : "start: " + first + ", or write numbers, like start: {" + first + ": 1}"));
+    }
+
     private List<Rational> fromMapping(Node.Mapping mapping) {
         Optional<Node.Entry> part = mapping.entries().stream().filter(entry -> entry.name().equals(LONG_RUN_OF)
-                && !states.contains(LONG_RUN_OF) && head.kind() == Chain.Kind.CHAIN).findFirst();
+                && !states.contains(LONG_RUN_OF)).findFirst();
+        if (part.isPresent() && head.kind() == Chain.Kind.RECURSION) {
+            refuseOfRecursion(part.get().key(), "doesn't start in a long run");
+            return List.of();
+        }
         if (part.isPresent()) {
             Fields.of(mapping, Place.of(Part.START), List.of(LONG_RUN_OF), reading);
             return reading.scalar(part.get().value(), "the part whose long run is the start")

@@ -46,11 +46,12 @@ public final class ConditionalJson {
         new JsonGiven(json).write(found.given(), Optional.empty(), Optional.empty());
         json.name("event");
         outputs.write(found.event());
-        json.optional("impossible", found.possible(), this::impossible);
+        json.optional("impossible", found.possible(), possible -> impossible(json, possible));
         json.list("outputs", found.outputs(), this::output);
     }
 
-    private void impossible(PossibleSteps possible) {
+    /** The steps at which what is known has probability zero. */
+    static void impossible(Json json, PossibleSteps possible) {
         json.object(() -> {
             json.list("steps", possible.impossibleBefore(), json::count);
             json.count("from", possible.from());

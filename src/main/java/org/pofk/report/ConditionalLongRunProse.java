@@ -8,8 +8,14 @@ import org.pofk.exact.Rational;
 import org.pofk.formula.Formula;
 import org.pofk.modes.RealValue;
 
-/** The long run of a conditional value in words. */
-record ConditionalLongRunProse(int digits) {
+/** The long run of a conditional value in words, with short exact forms or in decimals alone. */
+record ConditionalLongRunProse(int digits, Numbers numbers) {
+    /** What is shown of a number. */
+    enum Numbers { WITH_EXACT_FORMS, DECIMALS }
+
+    ConditionalLongRunProse(int digits) {
+        this(digits, Numbers.WITH_EXACT_FORMS);
+    }
 
     Prose of(ConditionalLongRun longRun) {
         return switch (longRun.kind()) {
@@ -32,6 +38,9 @@ record ConditionalLongRunProse(int digits) {
 
     private Prose number(RealValue value) {
         Optional<Rational> rational = value.rational();
+        if (numbers == Numbers.DECIMALS) {
+            return Prose.of(value.decimal(digits).text());
+        }
         if (rational.isPresent()) {
             return Prose.of(new LongRunProse(digits).number(rational.get()));
         }

@@ -11,6 +11,8 @@ import org.pofk.steps.PossibleSteps;
 
 /** What is known of a state, in words. */
 public final class GivenProse {
+    static final String NEVER = "at no step k: what is given has probability zero at every one, proved, so nothing is"
+            + " defined given it";
     private static final int SHOWN = 8;
     /** Behind the title and the facts of the model. */
     private static final int PLACE = 2;
@@ -40,7 +42,8 @@ public final class GivenProse {
         known.ifPresent(each -> blocks.add(PLACE, new Paragraph(Prose.of("Given ")
                 .and(of(each.given(), "step " + each.at())).and(", which has probability "
                 + new LongRunProse(style.digits()).number(each.probability())
-                + ": the start above is the state then, and k counts the steps from there."))));
+                + ": the start above is the state then, and k counts the steps from there"
+                + (each.model().schedule().isPresent() ? ", in the schedule too." : ".")))));
         return new Document(blocks, document.sequences());
     }
 
@@ -49,8 +52,8 @@ public final class GivenProse {
         if (possible.always()) {
             return "at every step k";
         }
-        if (!possible.steps().contains(true)) {
-            return "at no step k: what is given has probability zero at every one";
+        if (possible.isNever()) {
+            return NEVER;
         }
         List<String> parts = new ArrayList<>();
         if (!possible.impossibleBefore().isEmpty()) {

@@ -8,6 +8,7 @@ import org.pofk.report.Document.Heading;
 import org.pofk.report.Document.Labelled;
 import org.pofk.schedule.ScheduledModel;
 import org.pofk.schedule.ScheduledOutput;
+import org.pofk.schedule.StretchFormula;
 
 /** What was found about a model with a schedule, as a document. */
 public final class ScheduledDocument {
@@ -35,6 +36,13 @@ public final class ScheduledDocument {
         output.over().stream().limit(1).forEach(formula -> blocks.add(CycleProof.holds(found.timetable(), formula)));
         blocks.addAll(joint(found, output));
         return blocks;
+    }
+
+    /** The same of numerator or denominator: no means, and nothing that dies out in the long run. */
+    static List<Block> quotientPart(ScheduledModel found, ScheduledOutput output, Style style) {
+        return proved(found, output.withWithin(output.within().stream().filter(each ->
+                each.cycle() == StretchFormula.Cycle.FIRST || !each.closedForm().modes().isEmpty()).toList())
+                .withOver(output.over().stream().filter(each -> each.place().isPresent()).toList()), style);
     }
 
     /** The long run by step of the cycle, and the formulas, whose proof is told apart. */

@@ -3,6 +3,7 @@ package org.pofk.report;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.BiConsumer;
+import org.pofk.answer.Known;
 import org.pofk.chain.Model;
 import org.pofk.chain.Schedule;
 import org.pofk.chain.Schedule.Repeat;
@@ -38,12 +39,13 @@ public final class ScheduledJson {
     }
 
     /** The text; {@code digits} are the significant digits of decimals. */
-    public static String write(ScheduledModel found, int digits) {
-        return Json.ofObject(json -> new ScheduledJson(json, digits, found).fields());
+    public static String write(ScheduledModel found, Optional<Known> known, int digits) {
+        return Json.ofObject(json -> new ScheduledJson(json, digits, found).fields(known));
     }
 
-    private void fields() {
+    private void fields(Optional<Known> known) {
         JsonHead.write(json, "pofk-schedule", "derive", found.model());
+        new JsonGiven(json).write(known);
         json.object("schedule", () -> schedule(found.model().schedule().orElseThrow()));
         json.list("outputs", found.outputs(), this::output);
     }
@@ -64,7 +66,7 @@ public final class ScheduledJson {
         json.text("repeat", schedule.phases().map(phases -> phases.repeat() == Repeat.YES ? "yes" : "once"));
     }
 
-    private void output(ScheduledOutput output) {
+    void output(ScheduledOutput output) {
         json.object(() -> {
             json.text("name", output.output().name());
             json.text("word", word(output));
@@ -103,7 +105,7 @@ public final class ScheduledJson {
         extreme("lowest", course.lowest());
     }
 
-    private void extreme(String name, CycleCourse.Extreme extreme) {
+    void extreme(String name, CycleCourse.Extreme extreme) {
         json.object(name, () -> {
             json.count("j", extreme.j());
             json.text("side", extreme.side() == Side.BEFORE ? "before" : "after");
@@ -161,10 +163,16 @@ public final class ScheduledJson {
     /** Other results about such a model: {@code fields} stand behind the head and the schedule. */
     static String write(String command, Model model, Timetable timetable, int digits,
             BiConsumer<Json, ScheduledJson> fields) {
+        return write(command, command, model, timetable, digits, fields);
+    }
+
+    /** The same with a format named otherwise than the command. */
+    static String write(String format, String command, Model model, Timetable timetable, int digits,
+            BiConsumer<Json, ScheduledJson> fields) {
         return Json.ofObject(json -> {
             ScheduledJson writer = new ScheduledJson(json, digits,
                     new ScheduledModel(model, timetable, List.of(), false));
-            JsonHead.write(json, "pofk-schedule-" + command, command, model);
+            JsonHead.write(json, "pofk-schedule-" + format, command, model);
             json.object("schedule", () -> writer.schedule(model.schedule().orElseThrow()));
             fields.accept(json, writer);
         });

@@ -1,8 +1,10 @@
 package org.pofk.report;
 
 import java.util.List;
+import java.util.Optional;
 import java.util.stream.IntStream;
 import org.pofk.answer.FirstEntrance;
+import org.pofk.answer.Known;
 import org.pofk.chain.Model;
 import org.pofk.schedule.ScheduledPassage;
 
@@ -12,8 +14,9 @@ public final class ScheduledPassageJson {
     }
 
     /** The text; {@code digits} are the significant digits of decimals, {@code model} has the start asked about. */
-    public static String write(Model model, ScheduledPassage found, int digits) {
+    public static String write(Model model, Optional<Known> known, ScheduledPassage found, int digits) {
         return ScheduledJson.write("passage", model, found.timetable(), digits, (json, writer) -> {
+            new JsonGiven(json).write(known);
             json.texts("into", names(model, found.into()));
             json.texts("avoiding", names(model, found.avoiding()));
             json.text("word", found.over().isPresent() ? "exact" : "undecided");

@@ -10,6 +10,8 @@ import org.pofk.schedule.ScheduledWhen;
 
 /** When outputs meet a condition under a schedule, as a document. */
 public final class ScheduledWhenDocument {
+    static final String AT = ", at the end of step k, after what is done there";
+
     private final Style style;
     private final List<Block> blocks = new ArrayList<>();
 
@@ -45,8 +47,7 @@ public final class ScheduledWhenDocument {
     }
 
     private void answer(ScheduledWhen.Answer answer) {
-        label("asked", WhenDocument.asked(answer.when().condition(), style) + ", at the end of step k, after what is"
-                + " done there");
+        label("asked", WhenDocument.asked(answer.when().condition(), style) + AT);
         WhenDocument.partOfNothing(answer.when()).ifPresent(blocks::add);
         label("answer", WhenDocument.inWords(answer.when()));
         answer.when().first().ifPresent(first -> label("first", "k = " + first));

@@ -39,13 +39,14 @@ public final class WhenJson {
     }
 
     /** The text for the one answer under a schedule. */
-    public static String write(ScheduledWhen found, int digits) {
-        return Json.ofObject(json -> new WhenJson(json, digits).fields(found));
+    public static String write(ScheduledWhen found, Optional<Known> known, int digits) {
+        return Json.ofObject(json -> new WhenJson(json, digits).fields(found, known));
     }
 
-    private void fields(ScheduledWhen found) {
+    private void fields(ScheduledWhen found, Optional<Known> known) {
         ScheduledWhen.Answer answer = found.answers().get(0);
         JsonHead.write(json, FORMAT, COMMAND, found.model());
+        new JsonGiven(json).write(known);
         met(answer.output(), answer.when());
         for (String absent : List.of("nearest", "longRun", "settling")) {
             json.name(absent);

@@ -69,16 +69,26 @@ final class CycleChain {
 
     /** An output as a formula in m at step j of cycle m, after what is done there. */
     CycleFormula formula(Output output, int j) {
-        Output read = new CycleOutputs(timetable, matrices, output).at(j, Side.AFTER);
-        return formula(Optional.of(new Place(j, Side.AFTER)), Transforms.of(chain, List.of(read)).get(0));
+        return formula(output, new Place(j, Side.AFTER));
+    }
+
+    /** The same at any place. */
+    CycleFormula formula(Output output, Place place) {
+        Output read = new CycleOutputs(timetable, matrices, output).at(place.j(), place.side());
+        return formula(Optional.of(place), Transforms.of(chain, List.of(read)).get(0));
     }
 
     /** The same at each step j = 0 … T − 1 of a cycle. */
     List<CycleFormula> formulas(Output output) {
+        return formulas(output, IntStream.range(0, timetable.period()).mapToObj(j -> new Place(j, Side.AFTER)).toList());
+    }
+
+    /** The same at these places. */
+    List<CycleFormula> formulas(Output output, List<Place> places) {
         CycleOutputs later = new CycleOutputs(timetable, matrices, output);
-        List<Place> places = IntStream.range(0, timetable.period()).mapToObj(j -> new Place(j, Side.AFTER)).toList();
         List<Transform> transforms = Transforms.of(chain, places.stream().map(at -> later.at(at.j(), at.side())).toList());
-        return places.stream().map(at -> formula(Optional.of(at), transforms.get(at.j()))).toList();
+        return IntStream.range(0, places.size()).mapToObj(i ->
+                formula(Optional.of(places.get(i)), transforms.get(i))).toList();
     }
 
     /** What cycle m adds to an output: its value at the end less that at the beginning. */

@@ -3,10 +3,13 @@ package org.pofk.schedule;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.IntStream;
+import org.pofk.answer.ConditionalSequence;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Output;
 import org.pofk.chain.Timetable;
 import org.pofk.schedule.CycleCourse.Reading;
+import org.pofk.schedule.CycleFormula.Place;
 import org.pofk.steps.KnownValue;
 import org.pofk.steps.ModeValues;
 import org.pofk.steps.StateArithmetic;
@@ -62,6 +65,14 @@ public final class ScheduledChain {
             cycles = Optional.of(CycleChain.of(chain, timetable, whole, CycleMatrices.exact(timetable, whole), begin));
         }
         return cycles.get();
+    }
+
+    /** One output over another, each at these places of a cycle, as sequences in m. */
+    List<ConditionalSequence> conditional(Output joint, Output event, List<Place> places) {
+        List<CycleFormula> above = cycles().formulas(joint, places);
+        List<CycleFormula> below = cycles().formulas(event, places);
+        return IntStream.range(0, places.size()).mapToObj(i -> ConditionalSequence.of(cycles().chain(),
+                above.get(i).closedForm(), below.get(i).closedForm())).toList();
     }
 
     /** An output at the end of the steps 0 … P before the first cycle. */

@@ -38,11 +38,13 @@ public record ScheduledOutput(Output output, Optional<CycleCourse> preamble, Opt
         return new ScheduledOutput(output, preamble, first, Optional.of(found), within, over, joint, values);
     }
 
-    ScheduledOutput withWithin(List<StretchFormula> found) {
+    /** The same with these formulas within a cycle. */
+    public ScheduledOutput withWithin(List<StretchFormula> found) {
         return new ScheduledOutput(output, preamble, first, regime, found, over, joint, values);
     }
 
-    ScheduledOutput withOver(List<CycleFormula> found) {
+    /** The same with these formulas over the cycles. */
+    public ScheduledOutput withOver(List<CycleFormula> found) {
         return new ScheduledOutput(output, preamble, first, regime, within, found, joint, values);
     }
 
@@ -52,5 +54,11 @@ public record ScheduledOutput(Output output, Optional<CycleCourse> preamble, Opt
 
     ScheduledOutput withValues(List<CycleCourse.Reading> found) {
         return new ScheduledOutput(output, preamble, first, regime, within, over, joint, found);
+    }
+
+    /** The same under another name. */
+    public ScheduledOutput named(String name) {
+        return new ScheduledOutput(new Output(name, output.coefficients(), output.constant(), output.definition()),
+                preamble, first, regime, within, over, joint, values);
     }
 }

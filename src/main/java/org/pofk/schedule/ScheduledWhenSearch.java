@@ -7,7 +7,6 @@ import java.util.Optional;
 import org.pofk.answer.Band;
 import org.pofk.answer.When;
 import org.pofk.answer.When.Condition;
-import org.pofk.answer.When.End;
 import org.pofk.answer.When.Reason;
 import org.pofk.answer.When.ResidueClass;
 import org.pofk.answer.WhenModel;
@@ -52,7 +51,9 @@ final class ScheduledWhenSearch {
             if (when.reason() == Reason.NO_LONG_RUN) {
                 return new When(condition, walked(condition), Optional.empty(), List.of(), false, Reason.NO_LONG_RUN);
             }
-            classes.add(residueClass(j, when, LongRunValues.of(formula.longRun()), before));
+            List<Rational> limits = LongRunValues.of(formula.longRun());
+            classes.add(ResidueOfPlace.of(timetable, j, when, (k, m) ->
+                    isMet(before.get(k), condition, limits.get(Math.floorMod(m, limits.size())))));
         }
         classes.sort(Comparator.comparing(ResidueClass::residue));
         When together = WhenSummary.of(condition, classes);
@@ -90,29 +91,6 @@ final class ScheduledWhenSearch {
         return Optional.empty();
     }
 
-    /** The steps k ≡ P + j, those before the cycles included. */
-    private ResidueClass residueClass(int j, When when, List<Rational> limits, List<KnownValue> before) {
-        long period = timetable.period();
-        long begin = timetable.before() + j;
-        long residue = begin % period;
-        End end = end(when.reason());
-        Optional<Long> first = when.first().map(m -> begin + m * period);
-        Optional<Long> forEver = when.forEverFrom().map(m -> begin + m * period);
-        boolean holdsSoFar = forEver.equals(Optional.of(begin));
-        for (long k = begin - period; k >= 0; k -= period) {
-            Rational limit = limits.get((int) Math.floorMod((k - begin) / period, (long) limits.size()));
-            Optional<Boolean> isMet = k > timetable.before() ? Optional.of(false)
-                    : isMet(before.get((int) k), when.condition(), limit);
-            if (isMet.isEmpty()) {
-                return new ResidueClass(residue, period, End.TOO_MANY_STEPS, Optional.empty(), Optional.empty());
-            }
-            holdsSoFar &= isMet.get();
-            first = isMet.get() ? Optional.of(k) : first;
-            forEver = holdsSoFar ? Optional.of(k) : forEver;
-        }
-        return new ResidueClass(residue, period, end, first, forEver);
-    }
-
     private static Optional<Boolean> isMet(KnownValue value, Condition condition, Rational limit) {
         Band band = condition.around(limit);
         if (value.exact().isPresent()) {
@@ -120,15 +98,5 @@ final class ScheduledWhenSearch {
         }
         Band.Relation relation = band.of(value.enclosure().enclose(BITS).minus(Ball.of(limit, BITS)));
         return relation == Band.Relation.EITHER ? Optional.empty() : Optional.of(relation == Band.Relation.INSIDE);
-    }
-
-    private static End end(Reason reason) {
-        return switch (reason) {
-            case FOR_EVER -> End.MET;
-            case ONLY_IN_SOME_CLASSES, AGAIN_AND_AGAIN -> End.BOTH_FOR_EVER;
-            case ONLY_FOR_A_WHILE, NEVER -> End.FAILED;
-            case NO_LONG_RUN, APPROACH_NOT_DECIDED -> End.APPROACH_NOT_DECIDED;
-            case TOO_MANY_STEPS -> End.TOO_MANY_STEPS;
-        };
     }
 }

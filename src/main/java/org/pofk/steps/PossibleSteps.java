@@ -61,8 +61,8 @@ public record PossibleSteps(List<Boolean> steps, int from, int period) {
         return to;
     }
 
-    /** The least period, and the first step from which it holds. */
-    private static PossibleSteps leastPeriod(List<Boolean> steps, int from, int period) {
+    /** With the least period, and the first step from which it holds; {@code steps} go up to the first repetition. */
+    public static PossibleSteps leastPeriod(List<Boolean> steps, int from, int period) {
         int least = period;
         for (int candidate = period - 1; candidate >= 1; candidate--) {
             least = period % candidate == 0 && repeats(steps, from, candidate) ? candidate : least;
@@ -91,6 +91,11 @@ public record PossibleSteps(List<Boolean> steps, int from, int period) {
     /** True when it can be at every step. */
     public boolean always() {
         return !steps.contains(false);
+    }
+
+    /** True when it can be at no step. */
+    public boolean isNever() {
+        return !steps.contains(true);
     }
 
     /** True when it never can be from some step on. */

@@ -146,6 +146,16 @@ class SchemaTest {
         assertKeeps("schedule-total", "total", file, "--of", last, "--entries");
         assertKeeps("schedule-passage", "passage", file, "--into", last, "--at", "0..3,100");
         assertKeeps("when", "when", file, "--of", last, "--settles-within", "1e-3");
+        String first = Pofk.read(file).chain().states().get(0);
+        for (String option : List.of("--given", "--given-never")) {
+            assertKeeps("schedule-conditional", "derive", file, option, last, "--at", "0..3,100");
+            assertKeeps("when", "when", file, "--of", first, option, last, "--at-least", "0.01");
+        }
+        assertKeeps("schedule-passage", "passage", file, "--into", first, "--into", last, "--given", last);
+        assertKeeps("schedule", "derive", file, "--given", first, "--given-at", "5", "--at", "0..3");
+        assertKeeps("when", "when", file, "--of", last, "--given", first, "--given-at", "5", "--at-least", "0.01");
+        assertKeeps("schedule-passage", "passage", file, "--into", last, "--given", first, "--given-at", "5");
+        assertKeeps("conditional", "derive", file, "--given", first, "--given-never", first, "--given-at", "5");
     }
 
     @ParameterizedTest
