@@ -2,6 +2,7 @@ package org.pofk.chain;
 
 import java.util.Collections;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import org.pofk.exact.Rational;
 
@@ -15,9 +16,10 @@ import org.pofk.exact.Rational;
  * @param actions  of actions of a schedule, each time they are done; at most one entry for each action
  * @param atStart  once, at k = 0
  * @param discount the rate d a step: what is due at the end of step k counts (1 + d)^−k of it today; not negative
+ * @param written  the amounts that aren't zero and the discount as the file writes them; none where no file does
  */
 public record Costs(String unit, List<Rational> eachStep, List<Move> moves, List<OfAction> actions,
-        Rational atStart, Optional<Rational> discount) {
+        Rational atStart, Optional<Rational> discount, Map<Entry, String> written) {
 
     /** What one move costs each time it is made. */
     public record Move(int from, int to, Rational cost) {
@@ -30,10 +32,10 @@ public record Costs(String unit, List<Rational> eachStep, List<Move> moves, List
         }
     }
 
-    /** Without actions. */
+    /** Without actions, and not from a file. */
     public Costs(String unit, List<Rational> eachStep, List<Move> moves, Rational atStart,
             Optional<Rational> discount) {
-        this(unit, eachStep, moves, List.of(), atStart, discount);
+        this(unit, eachStep, moves, List.of(), atStart, discount, Map.of());
     }
 
     /** What an action costs, one amount a state; nothing where it has no cost. */
@@ -46,5 +48,6 @@ public record Costs(String unit, List<Rational> eachStep, List<Move> moves, List
         actions = List.copyOf(actions);
         eachStep = List.copyOf(eachStep);
         moves = List.copyOf(moves);
+        written = Map.copyOf(written);
     }
 }

@@ -21,7 +21,7 @@ public record Entry(Subject subject, List<String> of) {
         of = List.copyOf(of);
     }
 
-    static Entry of(Subject subject, String... of) {
+    public static Entry of(Subject subject, String... of) {
         return new Entry(subject, List.of(of));
     }
 }

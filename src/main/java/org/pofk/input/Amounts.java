@@ -69,10 +69,18 @@ final class Amounts {
 
     /** The number as it is written, without the remarks beside it. */
     Optional<Written> written(Node node, int from, int to) {
+        return scalar(node).map(scalar -> new Written(from, to, scalar.text().strip(), form(scalar)));
+    }
+
+    /** The same as text alone. */
+    Optional<String> written(Node node) {
+        return scalar(node).map(scalar -> scalar.text().strip());
+    }
+
+    private static Optional<Node.Scalar> scalar(Node node) {
         Optional<Node> value = node.asMapping().map(mapping -> mapping.entries().stream()
                 .filter(entry -> entry.name().equals("value")).map(Node.Entry::value).findFirst()).orElse(Optional.of(node));
-        return value.flatMap(Node::asScalar)
-                .map(scalar -> new Written(from, to, scalar.text().strip(), form(scalar)));
+        return value.flatMap(Node::asScalar);
     }
 
     private Optional<Rational> number(Node.Scalar scalar) {

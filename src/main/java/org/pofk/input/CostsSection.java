@@ -9,9 +9,12 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
+import java.util.function.Function;
 import java.util.stream.IntStream;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Costs;
+import org.pofk.chain.Entry;
+import org.pofk.chain.Entry.Subject;
 import org.pofk.chain.Model.Written;
 import org.pofk.chain.Place;
 import org.pofk.chain.Place.Part;
@@ -30,6 +33,7 @@ final class CostsSection {
     private final List<String> actions;
     private final Amounts amounts;
     private final Reading reading;
+    private final Map<Entry, String> written = new HashMap<>();
 
     /** Whether there is a move between two states. */
     interface MoveFinder {
@@ -79,14 +83,14 @@ final class CostsSection {
         }
         return new Costs(fields.value("unit").flatMap(unit -> reading.text(unit, "'unit'")).orElse(UNIT),
                 fields.value("each step in").map(node -> eachIn(node, "each step in",
-                        Place.of(Part.COSTS_OF_EACH_STEP))).orElseGet(() -> byState(Map.of())),
+                        Place.of(Part.COSTS_OF_EACH_STEP), state -> Entry.of(Subject.COST_OF_STATE, state))).orElseGet(() -> byState(Map.of())),
                 fields.value("each move").map(this::eachMove).orElse(List.of()),
                 actions.stream().filter(action -> keys.indexOf(key(action)) >= KEYS.size())
                         .flatMap(action -> fields.value(key(action)).map(node -> new Costs.OfAction(action,
-                                eachIn(node, key(action), Place.named("costs of each " + action)))).stream()).toList(),
-                fields.value("at start").flatMap(start -> amounts.number(start, Place.of(Part.COSTS_AT_START)))
-                        .orElse(Rational.ZERO),
-                fields.value("discount").flatMap(this::discount));
+                                eachIn(node, key(action), Place.named("costs of each " + action),
+                                        state -> Entry.of(Subject.COST_OF_ACTION, action, state)))).stream()).toList(),
+                fields.value("at start").flatMap(this::atStart).orElse(Rational.ZERO),
+                fields.value("discount").flatMap(this::discount), written);
     }
 
     /** What an action's costs stand under. */
@@ -94,8 +98,17 @@ final class CostsSection {
         return "each " + action + " in";
     }
 
+    private void write(Node value, Entry entry) {
+        amounts.written(value).ifPresent(text -> written.put(entry, text));
+    }
+
+    private Optional<Rational> atStart(Node node) {
+        write(node, Entry.of(Subject.COST_AT_START));
+        return amounts.number(node, Place.of(Part.COSTS_AT_START));
+    }
+
     /** Amounts by state: {@code what} is {@code each step in}, or {@code each ACTION in}. */
-    private List<Rational> eachIn(Node node, String what, Place on) {
+    private List<Rational> eachIn(Node node, String what, Place on, Function<String, Entry> entryOf) {
         Map<Integer, Rational> found = new HashMap<>();
         Map<Integer, Position> seen = new HashMap<>();
         reading.mapping(node, "'" + what + "'", "{STATE: 12}").ifPresent(mapping -> {
@@ -104,6 +117,7 @@ final class CostsSection {
                         Place.named("cost of " + what + " '" + entry.name() + "'"));
                 for (int state : members(entry.key())) {
                     if (isNew(seen, state, entry.key(), what + " '" + states.names().get(state) + "'")) {
+                        write(entry.value(), entryOf.apply(states.names().get(state)));
                         cost.ifPresent(amount -> found.put(state, amount));
                     }
                 }
@@ -146,6 +160,8 @@ final class CostsSection {
                     any = true;
                     if (isNew(seen, List.of(start, end), to.key(), "the move from '" + states.names().get(start)
                             + "' to '" + states.names().get(end) + "'")) {
+                        write(to.value(), Entry.of(Subject.COST_OF_MOVE, states.names().get(start),
+                                states.names().get(end)));
                         cost.ifPresent(amount -> found.add(new Costs.Move(start, end, amount)));
                     }
                 }
@@ -195,6 +211,7 @@ final class CostsSection {
     }
 
     private Optional<Rational> discount(Node node) {
+        write(node, Entry.of(Subject.DISCOUNT));
         Optional<Rational> rate = amounts.number(node, Place.of(Part.DISCOUNT));
         if (rate.isPresent() && (rate.get().signum() < 0 || rate.get().compareTo(Rational.ONE) > 0)) {
             reading.fault(node.position(), "discount-out-of-range", "a discount of " + Numbers.shown(rate.get())

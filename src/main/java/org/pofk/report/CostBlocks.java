@@ -2,6 +2,8 @@ package org.pofk.report;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
+import java.util.Optional;
 import java.util.stream.IntStream;
 import org.pofk.chain.Costs;
 import org.pofk.chain.Entry;
@@ -15,20 +17,23 @@ import org.pofk.report.Document.Heading;
 import org.pofk.report.Document.Paragraph;
 import org.pofk.report.Document.Table;
 
-/** The amounts that the costs of a model are made of, each as a decimal, where that ends soon, and exact. */
+/** The amounts that costs are made of, each as a decimal, where that ends soon, exact, and as the author wrote it. */
 final class CostBlocks {
     private static final int LONGEST_DECIMAL = 12;
 
     private final List<String> states;
+    private final Map<Entry, String> written;
     private final List<List<Prose>> rows = new ArrayList<>();
 
-    private CostBlocks(List<String> states) {
+    private CostBlocks(List<String> states, Map<Entry, String> written) {
         this.states = states;
+        this.written = written;
     }
 
     /** Nothing for a model without costs. */
     static List<Block> of(Model model) {
-        return model.costs().map(costs -> new CostBlocks(model.chain().states()).blocks(costs)).orElse(List.of());
+        return model.costs().map(costs -> new CostBlocks(model.chain().states(), costs.written()).blocks(costs))
+                .orElse(List.of());
     }
 
     private List<Block> blocks(Costs costs) {
@@ -45,7 +50,8 @@ final class CostBlocks {
                         + " here; they are those of the model file, whose checksum is at the end."))
                 : new Table(Prose.of("Amounts in ").andName(costs.unit()).and(costs.discount().isPresent()
                         ? "; the discount is a rate, not an amount" : ""),
-                        List.of(Prose.of("what"), Prose.of("decimal"), Prose.of("exact")), rows));
+                        List.of(Prose.of("what"), Prose.of("decimal"), Prose.of("exact"),
+                                Prose.of("as written")), rows));
     }
 
     private void inStates(List<Rational> amounts, Subject subject, List<String> of) {
@@ -58,7 +64,9 @@ final class CostBlocks {
 
     private void row(Subject subject, List<String> of, Rational amount) {
         Decimal decimal = Decimals.of(amount, LONGEST_DECIMAL);
-        rows.add(List.of(EntryProse.of(new Entry(subject, of)), Prose.of((decimal.exact() ? "" : "≈ ") + decimal.text()),
-                Prose.of(amount.toString())));
+        Entry entry = new Entry(subject, of);
+        rows.add(List.of(EntryProse.of(entry), Prose.of((decimal.exact() ? "" : "≈ ") + decimal.text()),
+                Prose.of(amount.toString()), Optional.ofNullable(written.get(entry)).map(Prose::name)
+                        .orElse(Prose.EMPTY)));
     }
 }
