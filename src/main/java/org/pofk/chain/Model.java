@@ -128,6 +128,13 @@ public record Model(String title, Step step, Convention convention, About about,
         return settings.stream().filter(each -> each.parameter().equals(Optional.of(parameter.name()))).findFirst();
     }
 
+    /** The same model; one without a schedule with one in which nothing is done, a cycle being one step. */
+    public Model scheduled() {
+        return new Model(title, step, convention, about, chain,
+                Optional.of(schedule.orElse(new Schedule(List.of(), Optional.empty()))), costs, parameters, notes, changes,
+                written, origin, tables, settings);
+    }
+
     /** The same model with another chain. */
     public Model with(Chain other) {
         return new Model(title, step, convention, about, other, schedule, costs, parameters, notes, changes, written,

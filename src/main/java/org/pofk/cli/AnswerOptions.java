@@ -51,7 +51,7 @@ final class AnswerOptions {
         return model.read();
     }
 
-    /** The model, and then that of another file, read as the model's own is. */
+    /** The model, and then that of another file, read as the model's own is, their schedules included. */
     List<Model> modelWith(Path other) throws RefusedException, UsageException {
         return model.readWith(other);
     }

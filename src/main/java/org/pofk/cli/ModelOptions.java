@@ -65,11 +65,11 @@ final class ModelOptions {
         return readAll(List.of(file)).get(0);
     }
 
-    /** The model, and then another file that is read as it is. */
+    /** The model, and then another file that is read as it is, their schedules included. */
     List<Model> readWith(Path other) throws RefusedException, UsageException {
         List<Model> models = readAll(List.of(file, other));
         for (Model model : models) {
-            ScheduleRefusal.unlessScheduled(refusingEachStart(model));
+            refusingEachStart(model);
         }
         return models;
     }

@@ -32,6 +32,7 @@ import picocli.CommandLine.Spec;
     "worked, with figures, how it was checked, and what it stands on."})
 final class ReportCommand implements Work {
     static final int REPORTED_UNASKED = 12;
+    static final String CHANGES_NOT_REACHED = "pofk: what has changed was not reached within the budget";
 
     @Spec
     private CommandSpec command;
@@ -77,22 +78,23 @@ final class ReportCommand implements Work {
         Model read = models.get(0);
         requireFew(read.chain());
         AskedReport asked = asked(read, style);
-        if (read.schedule().isPresent()) {
-            return ScheduledReporting.write(options, asked, show, provenance(asked.files()), destination, streams);
-        }
         Optional<AskedReport> earlier = models.size() == 1 ? Optional.empty()
                 : Optional.of(earlier(models.get(1), read, style));
         Provenance provenance = provenance(Stream.concat(asked.files(), earlier.stream().flatMap(AskedReport::files)));
+        if (read.schedule().isPresent()) {
+            return ScheduledReporting.write(options, asked, earlier, show, provenance, destination, streams);
+        }
         Worker.Outcome<Report> outcome = options.within(streams, published -> {
             Report report = asked.find(provenance, published);
-            earlier.ifPresent(each -> each.at(report.derived().wanted().at()).find(provenance, found -> published.accept(report.since(found))));
+            earlier.ifPresent(each -> each.at(report.derived().wanted().at()).find(provenance,
+                    found -> published.accept(report.since(found))));
         });
         if (outcome.published().isEmpty()) {
             return options.undecided(streams);
         }
         Report report = outcome.published().get();
         if (earlier.isPresent() && report.since().isEmpty()) {
-            streams.notes().println("pofk: what has changed was not reached within the budget");
+            streams.notes().println(CHANGES_NOT_REACHED);
         }
         destination.write(Answer.of(() -> ReportDocument.of(report, show, style, options.convention(read)))
                 .with(Format.CSV, () -> CsvWriter.write(DerivationTable.of(report.derived(), style.digits())))

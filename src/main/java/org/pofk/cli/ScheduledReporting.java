@@ -32,16 +32,21 @@ final class ScheduledReporting {
     private ScheduledReporting() {
     }
 
-    static ExitCode write(AnswerOptions options, AskedReport asked, Report.Depth depth, Provenance provenance,
-            Destination destination, Streams streams) throws RefusedException, UsageException, WritingException {
+    static ExitCode write(AnswerOptions options, AskedReport asked, Optional<AskedReport> earlier, Report.Depth depth,
+            Provenance provenance, Destination destination, Streams streams) throws RefusedException, UsageException, WritingException {
         Style style = options.style();
         Convention convention = options.convention(asked.model());
-        Worker.Outcome<ScheduledReport> outcome = options.within(streams, published ->
-                find(asked, depth, provenance, published));
+        Worker.Outcome<ScheduledReport> outcome = options.within(streams, published -> {
+            ScheduledReport report = find(asked, depth, provenance, published);
+            earlier.ifPresent(each -> find(each, depth, provenance, found -> published.accept(report.since(found))));
+        });
         if (outcome.published().isEmpty()) {
             return options.undecided(streams);
         }
         ScheduledReport report = outcome.published().get();
+        if (earlier.isPresent() && report.since().isEmpty()) {
+            streams.notes().println(ReportCommand.CHANGES_NOT_REACHED);
+        }
         destination.write(Answer.of(() -> ScheduledReportDocument.of(report, depth, style, convention))
                 .with(Format.NOTEBOOK, () -> ScheduledNotebook.write(report, depth, style, convention))
                 .with(Format.CSV, () -> CsvWriter.write(ScheduledTable.of(report.found(), style.digits()))), streams);

@@ -16,9 +16,14 @@ final class SinceOptions {
 
     /**
      * The model, and then the earlier one where it is asked for: read as the model itself is, with what the command line
-     * puts in place of its words. One with a schedule is not compared with an earlier one.
+     * puts in place of its words. Where one of the two has a schedule, both do: the other one in which nothing is done.
      */
     List<Model> models(AnswerOptions options) throws RefusedException, UsageException {
-        return file.isEmpty() ? List.of(options.modelWithSchedule()) : options.modelWith(file.get());
+        if (file.isEmpty()) {
+            return List.of(options.modelWithSchedule());
+        }
+        List<Model> models = options.modelWith(file.get());
+        return models.stream().noneMatch(model -> model.schedule().isPresent()) ? models
+                : models.stream().map(Model::scheduled).toList();
     }
 }

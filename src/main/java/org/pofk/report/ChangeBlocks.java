@@ -18,7 +18,6 @@ import org.pofk.report.Document.Heading;
 import org.pofk.report.Document.Labelled;
 import org.pofk.report.Document.Paragraph;
 import org.pofk.report.Document.Table;
-import org.pofk.report.OutputPair.Found;
 import org.pofk.report.OutputPair.Standing;
 import org.pofk.steps.StepValue;
 
@@ -115,14 +114,14 @@ final class ChangeBlocks {
 
     private void output(OutputPair pair) {
         blocks.add(new Heading(3, Prose.name(pair.name()).and(": " + pair.compared())));
-        Found old = pair.before().orElseThrow();
-        Found now = pair.now().orElseThrow();
+        FoundOutput old = pair.before().orElseThrow();
+        FoundOutput now = pair.now().orElseThrow();
         beforeAndNow(Prose.of("formula"), old.shape(), now.shape());
         pairs(old.facts(style), now.facts(style));
         Map<Integer, StepValue> was = values(old);
         Map<Integer, StepValue> is = values(now);
         if (!is.isEmpty()) {
-            blocks.add(new Table(Prose.EMPTY, List.of(Prose.of("k"), Prose.of(BEFORE), Prose.of(NOW), Prose.of("change")),
+            blocks.add(new Table(now.reading(), List.of(Prose.of("k"), Prose.of(BEFORE), Prose.of(NOW), Prose.of("change")),
                     is.keySet().stream().map(k -> row(k, Optional.ofNullable(was.get(k)), Optional.of(is.get(k))))
                             .toList()));
         }
@@ -145,9 +144,9 @@ final class ChangeBlocks {
         return List.of(Prose.of(String.valueOf(k)), shown(was), shown(is), Prose.of(difference(was, is)));
     }
 
-    private static Map<Integer, StepValue> values(Found found) {
+    private static Map<Integer, StepValue> values(FoundOutput found) {
         Map<Integer, StepValue> values = new LinkedHashMap<>();
-        found.output().values().forEach(value -> values.put(value.k(), value));
+        found.values().forEach(value -> values.put(value.k(), value));
         return values;
     }
 

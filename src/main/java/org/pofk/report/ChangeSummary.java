@@ -2,7 +2,6 @@ package org.pofk.report;
 
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Optional;
 import org.pofk.report.Document.Block;
 import org.pofk.report.Document.Heading;
 import org.pofk.report.Document.Labelled;
@@ -73,14 +72,8 @@ final class ChangeSummary {
     }
 
     private List<Prose> row(OutputPair pair) {
-        Prose was = longRun(pair.before());
-        Prose is = longRun(pair.now());
+        Prose was = pair.before().orElseThrow().longRun(style);
+        Prose is = pair.now().orElseThrow().longRun(style);
         return List.of(Prose.name(pair.name()), was, was.equals(is) ? Prose.of("as before, by another formula") : is);
-    }
-
-    private Prose longRun(Optional<OutputPair.Found> found) {
-        return Prose.of(found.flatMap(each -> each.output().longRun())
-                .map(checks -> new LongRunProse(style.digits()).of(checks.byPoles()))
-                .orElse(MissingBlocks.NOT_DECIDED));
     }
 }

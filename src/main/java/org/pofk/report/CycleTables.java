@@ -27,8 +27,13 @@ final class CycleTables {
 
     /** What a regime recurs with, both sides of each step where something is ever done; none for cycles of one step. */
     static Optional<Table> longRun(Timetable timetable, ScheduledOutput output, Style style) {
-        return output.regime().flatMap(regime -> regime.accept(new RecurringCourse())).filter(course ->
-                course.steps() > 1).map(course -> longRun(sides(timetable.cycle()), output, course, style));
+        return recurring(output).filter(course -> course.steps() > 1).map(course ->
+                longRun(sides(timetable.cycle()), output, course, style));
+    }
+
+    /** What the cycles recur with in the long run. */
+    static Optional<CycleCourse> recurring(ScheduledOutput output) {
+        return output.regime().flatMap(regime -> regime.accept(new RecurringCourse()));
     }
 
     /** The course of a regime that recurs. */

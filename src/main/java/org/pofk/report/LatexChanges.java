@@ -1,6 +1,8 @@
 package org.pofk.report;
 
 import java.util.List;
+import java.util.regex.Matcher;
+import java.util.regex.Pattern;
 
 /**
  * A rule in the margin beside what has changed, in plain TeX that every LaTeX has: what is beside the rule is set in a
@@ -23,14 +25,14 @@ final class LatexChanges {
                     + "\\setbox\\pofkchangedpart\\vbox{\\unvbox\\pofkchangedpart}"
                     + "\\pofkchangedrule\\repeat\\setbox\\pofkchangedpart\\box\\pofkchangedbox\\pofkchangedrule}",
             "\\makeatother");
-    private static final String FIRST_COLUMN = "\\begin{longtable}{@{";
+    private static final Pattern FIRST_COLUMN = Pattern.compile("^\\\\begin\\{(?:longtable|tabular)}\\{@\\{");
 
     private LatexChanges() {
     }
 
     /** The lines of a table, with the rule beside its rows. */
     static List<String> table(List<String> lines) {
-        return lines.stream().map(line -> line.startsWith(FIRST_COLUMN) ? FIRST_COLUMN
-                + "\\hskip-9.2pt\\vrule width 1.2pt\\hskip8pt" + line.substring(FIRST_COLUMN.length()) : line).toList();
+        return lines.stream().map(line -> FIRST_COLUMN.matcher(line).replaceFirst(begin ->
+                Matcher.quoteReplacement(begin.group() + "\\hskip-9.2pt\\vrule width 1.2pt\\hskip8pt"))).toList();
     }
 }

@@ -8,9 +8,9 @@ import java.util.stream.Collectors;
 import org.pofk.text.Alphabet;
 
 /**
- * A table in LaTeX: a short one in one piece, a long one over pages with its header repeated. Numbers are aligned as in text; a table that is too
- * wide has its widest column of text broken into lines, and else its columns dealt to several tables, each beginning
- * with the first column.
+ * A table in LaTeX: a short one in one piece, a long one over pages with its header repeated. Numbers are aligned as in
+ * text; a table that is too wide has its widest column of text broken into lines, and else its columns dealt to several
+ * tables, each beginning with the first column.
  */
 final class LatexTable {
     /** Characters on a line of a table. */
@@ -27,7 +27,13 @@ final class LatexTable {
         }
 
         String kind() {
-            return isBroken() ? wide(room / (double) WIDTH) : plain.isNumeric() ? "r" : "l";
+            return isBroken() ? ">{\\raggedright\\arraybackslash{}}" + wide(room / (double) WIDTH) : plain.isNumeric() ? "r" : "l";
+        }
+
+        /** Converters know raggedness in a cell alone; there it makes an empty line in what LaTeX sets. */
+        String cell(String text, LatexLayout layout) {
+            return isBroken() && layout.figures() == LatexLayout.Figures.IN_FILES ? "{\\raggedright " + text + "\\par}"
+                    : text;
         }
 
         private static String wide(double share) {
@@ -119,7 +125,7 @@ final class LatexTable {
         lines.add("{\\small\\renewcommand{\\arraystretch}{1.25}" + (isOnePiece ? "\\centering\\vspace{6pt}" : ""));
         lines.add("\\begin{" + (isOnePiece ? "tabular" : "longtable") + "}{@{}" + kinds(group, layout) + "@{}}");
         lines.add("\\toprule");
-        lines.add(row(group.stream().map(column -> column.isBroken() ? broken(column.header) : column.header).toList()));
+        lines.add(row(group.stream().map(column -> column.cell(column.header, layout)).toList()));
         lines.add("\\midrule");
         if (!isOnePiece) {
             lines.add("\\endhead");
@@ -128,8 +134,8 @@ final class LatexTable {
         }
         for (int i = 0; i < rows; i++) {
             int row = i;
-            lines.add(row(group.stream().map(column -> column.isBroken() ? broken(column.cells.get(row))
-                    : column.cells.get(row)).toList()) + (isKept(row, rows) && isSetAsItIs && !isOnePiece ? "*" : ""));
+            lines.add(row(group.stream().map(column -> column.cell(column.cells.get(row), layout)).toList())
+                    + (isKept(row, rows) && isSetAsItIs && !isOnePiece ? "*" : ""));
         }
         lines.addAll(isOnePiece ? List.of("\\bottomrule", "\\end{tabular}\\par\\vspace{12pt}}") : List.of("\\end{longtable}}"));
         return lines;
@@ -146,10 +152,6 @@ final class LatexTable {
                 && group.stream().anyMatch(Column::isBroken);
         return group.stream().map(column -> areAllWide ? column.wideKind(group) : column.kind())
                 .collect(Collectors.joining());
-    }
-
-    private static String broken(String cell) {
-        return "{\\raggedright " + cell + "\\par}";
     }
 
     private static String row(List<String> cells) {

@@ -98,7 +98,7 @@ final class PythonSchedule {
     }
 
     /** The number, or where it is long or not known exactly the interval that holds it. */
-    private static String value(KnownValue value) {
+    static String value(KnownValue value) {
         return value.exact().map(Rational::toString).orElseGet(() -> {
             Ball ball = value.enclosure().enclose(BITS);
             return ball.lower() + ".." + ball.upper();

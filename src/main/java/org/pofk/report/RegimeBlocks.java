@@ -39,6 +39,18 @@ final class RegimeBlocks implements PeriodicRegime.Visitor<Labelled> {
                 new Labelled(LONG_RUN, "not decided: even very many cycles leave it unsettled, or the budget ran out"));
     }
 
+    /** Its average and its highest value in a line. */
+    static String inBrief(ScheduledOutput output, Style style) {
+        return CycleTables.recurring(output).map(course -> inBrief(course, style))
+                .orElse(output.regime().isPresent() ? "nothing that recurs" : "not decided");
+    }
+
+    private static String inBrief(CycleCourse course, Style style) {
+        String highest = KnownText.of(course.highest().value(), style.digits());
+        return highest.equals(KnownText.of(course.lowest().value(), style.digits())) ? "tends to " + highest
+                : "average " + KnownText.of(course.average(), style.digits()) + "; highest " + highest;
+    }
+
     @Override
     public Labelled recurring(PeriodicRegime.Recurring recurring) {
         if (recurring.course().steps() == 1 && !ScheduleProse.isActed(timetable, 1)) {

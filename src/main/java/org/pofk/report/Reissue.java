@@ -7,24 +7,24 @@ import org.pofk.chain.ModelChanges;
 import org.pofk.report.Document.Labelled;
 
 /**
- * A report and the same of an earlier model.
+ * What a report says and what the same said of an earlier model.
  *
  * @param changes what the later model says otherwise
  * @param outputs those of both, compared
  */
-record Reissue(Report before, Report after, ModelChanges changes, List<OutputPair> outputs) {
+record Reissue(Issue before, Issue after, ModelChanges changes, List<OutputPair> outputs) {
 
-    static Reissue of(Report before, Report after) {
-        ModelChanges changes = ModelChanges.of(before.derived().model(), after.derived().model());
-        return new Reissue(before, after, changes, OutputPair.of(before, after, changes));
+    static Reissue of(Issue before, Issue after) {
+        ModelChanges changes = ModelChanges.of(before.model(), after.model());
+        return new Reissue(before, after, changes, OutputPair.of(before.outputs(), after.outputs(), changes));
     }
 
     Model earlier() {
-        return before.derived().model();
+        return before.model();
     }
 
     Model later() {
-        return after.derived().model();
+        return after.model();
     }
 
     /** {@code since revision A}; without revisions, since the file. */
@@ -52,8 +52,8 @@ record Reissue(Report before, Report after, ModelChanges changes, List<OutputPai
         return isOfTheSameFiles() ? "the files are the same" : "the files differ in wording or layout only";
     }
 
-    static List<Labelled> keyFigures(Report report) {
-        return report.answers().stream().flatMap(answer -> answer.keyFigures().stream()).toList();
+    static List<Labelled> keyFigures(Issue issue) {
+        return issue.answers().stream().flatMap(answer -> answer.keyFigures().stream()).toList();
     }
 
     /** The key figures of answers that the earlier report has word by word. */

@@ -47,29 +47,19 @@ public final class ReportDocument {
      */
     public static Document of(Report report, Depth depth, Style style, Convention convention) {
         Document document = alone(report.alone(), depth, style, convention);
-        return report.since().map(earlier -> withChanges(DocumentDifference.marked(
-                alone(earlier.asMadeLike(report), depth, style, convention), document), earlier, report, style))
-                .orElse(document);
+        return report.since().map(earlier -> ReissuedDocument.of(
+                alone(earlier.asMadeLike(report), depth, style, convention), document, Reissue.of(Issue.of(earlier),
+                        Issue.of(report)), style)).orElse(document);
     }
 
     /** The same in the order a notebook tells it, what has changed before all results. */
     static List<Part> parts(Report report, Depth depth, Style style, Convention convention) {
         ReportDocument document = new ReportDocument(report, style, convention);
         document.write(depth);
-        report.since().ifPresent(earlier -> document.parts.set(0, new Part(withChanges(
-                new Document(document.parts.get(0).blocks()), earlier, report, style).blocks(), List.of())));
+        report.since().ifPresent(earlier -> document.parts.set(0, new Part(ReissuedDocument.withChanges(
+                new Document(document.parts.get(0).blocks()), Reissue.of(Issue.of(earlier), Issue.of(report)), style)
+                .blocks(), List.of())));
         return document.parts;
-    }
-
-    private static Document withChanges(Document document, Report earlier, Report later, Style style) {
-        Reissue reissue = Reissue.of(earlier, later);
-        return document.with(document.blocks().indexOf(ModelBlocks.TITLE), ChangeBlocks.of(reissue, style))
-                .with(firstSection(document.blocks()), ChangeSummary.of(reissue, style));
-    }
-
-    private static int firstSection(List<Block> blocks) {
-        return (int) blocks.stream().takeWhile(block -> !(block instanceof Heading heading) || heading.level() < 2)
-                .count();
     }
 
     private static Document alone(Report report, Depth depth, Style style, Convention convention) {

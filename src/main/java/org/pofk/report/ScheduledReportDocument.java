@@ -37,8 +37,18 @@ public final class ScheduledReportDocument {
         this.style = style;
     }
 
-    /** What is brief leaves out the matrices and how it was checked, not why it holds. */
+    /**
+     * What is brief leaves out the matrices and how it was checked, not why it holds. What is other than in the same
+     * report of an earlier model is marked and told.
+     */
     public static Document of(ScheduledReport report, Report.Depth depth, Style style, Convention convention) {
+        Document document = alone(report, depth, style, convention);
+        return report.since().map(earlier -> ReissuedDocument.of(
+                alone(earlier.asMadeLike(report), depth, style, convention), document, Reissue.of(Issue.of(earlier),
+                        Issue.of(report)), style)).orElse(document);
+    }
+
+    private static Document alone(ScheduledReport report, Report.Depth depth, Style style, Convention convention) {
         ScheduledReportDocument document = new ScheduledReportDocument(report, style);
         document.firstPage();
         document.course();
