@@ -194,7 +194,8 @@ class ModelChangesTest {
         assertEquals(List.of("name", "value", "definition", "from", "to", "meaning", "source"),
                 components(Model.Parameter.class));
         assertEquals(List.of("kind", "states", "matrix", "start", "sets", "outputs"), components(Chain.class));
-        assertEquals(List.of("unit", "eachStep", "moves", "actions", "atStart", "discount"), components(Costs.class));
+        assertEquals(List.of("unit", "eachStep", "moves", "actions", "atStart", "discount", "written"),
+                components(Costs.class));
         assertEquals(List.of("action", "inState"), components(Costs.OfAction.class));
         assertEquals(List.of("recurring", "phases"), components(Schedule.class));
         assertEquals(List.of("action", "every", "first", "when"), components(Schedule.Recurring.class));
