@@ -5,6 +5,8 @@ import java.util.List;
 import java.util.Optional;
 import java.util.Set;
 import java.util.TreeSet;
+import java.util.function.Consumer;
+import java.util.function.Function;
 import java.util.function.Supplier;
 import org.pofk.answer.Given;
 import org.pofk.answer.Passage;
@@ -54,13 +56,13 @@ final class PassageOptions {
     }
 
     /** The same of a model with a schedule. */
-    Supplier<ScheduledPassage> scheduled(Model started, Optional<Given> atTheEnd, List<Integer> at)
-            throws UsageException {
+    Function<Consumer<ScheduledPassage>, ScheduledPassage> scheduled(Model started, Optional<Given> atTheEnd,
+            List<Integer> at) throws UsageException {
         Chain chain = started.chain();
         Ends ends = ends(chain, atTheEnd);
         List<Rational> shares = shares();
-        return () -> ScheduledPassage.of(chain, Timetable.of(chain, started.schedule().orElseThrow()), ends.target,
-                ends.avoided, shares, at);
+        return published -> ScheduledPassage.of(chain, Timetable.of(chain, started.schedule().orElseThrow()), ends.target,
+                ends.avoided, shares, at, published);
     }
 
     /** The same given what is known when it ends. */
@@ -105,8 +107,8 @@ final class PassageOptions {
     private Supplier<ReportSection> section(Model started, List<Integer> at, Style style) throws UsageException {
         Chain chain = started.chain();
         if (started.schedule().isPresent()) {
-            Supplier<ScheduledPassage> work = scheduled(started, Optional.empty(), at);
-            return () -> ScheduledPassageDocument.section(chain, work.get(), style);
+            Function<Consumer<ScheduledPassage>, ScheduledPassage> work = scheduled(started, Optional.empty(), at);
+            return () -> ScheduledPassageDocument.section(chain, work.apply(partly -> { }), style);
         }
         Supplier<Passage> work = work(chain, at);
         return () -> PassageDocument.section(chain, work.get(), style);

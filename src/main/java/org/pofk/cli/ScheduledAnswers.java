@@ -2,7 +2,8 @@ package org.pofk.cli;
 
 import java.util.List;
 import java.util.Optional;
-import java.util.function.Supplier;
+import java.util.function.Consumer;
+import java.util.function.Function;
 import org.pofk.answer.ConditionalWhen;
 import org.pofk.answer.Given;
 import org.pofk.answer.Known;
@@ -54,10 +55,11 @@ final class ScheduledAnswers {
     }
 
     /** @param known what the model is seen from, where it isn't its own start */
-    static ExitCode passage(AnswerOptions options, Model started, Optional<Known> known, Supplier<ScheduledPassage> work,
-            Destination destination, Streams streams) throws RefusedException, UsageException, WritingException {
+    static ExitCode passage(AnswerOptions options, Model started, Optional<Known> known,
+            Function<Consumer<ScheduledPassage>, ScheduledPassage> work, Destination destination, Streams streams)
+            throws RefusedException, UsageException, WritingException {
         Style style = options.style();
-        Worker.Outcome<ScheduledPassage> outcome = options.within(streams, published -> published.accept(work.get()));
+        Worker.Outcome<ScheduledPassage> outcome = options.within(streams, work::apply);
         if (outcome.published().isEmpty()) {
             return options.undecided(streams);
         }
@@ -66,7 +68,7 @@ final class ScheduledAnswers {
                 .with(Format.JSON, () -> ScheduledPassageJson.write(started, known, found, style.digits()))
                 .with(Format.CSV, () -> CsvWriter.write(PassageTable.of(started, found, style.digits())))
                 .with(Format.NOTEBOOK, () -> ScheduledPassageNotebook.write(started, found, style)), streams);
-        return found.over().isPresent() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
+        return found.isDecided() && outcome.finished() ? ExitCode.ANSWERED : ExitCode.NOT_DECIDED;
     }
 
     /** @param known what the model is seen from, where it isn't its own start */

@@ -70,7 +70,7 @@ public final class PassageDocument {
     }
 
     /** Those reached; the others have their reason in the section. */
-    private static String inBrief(List<Percentile> percentiles) {
+    static String inBrief(List<Percentile> percentiles) {
         return percentiles.stream().filter(each -> each.k().isPresent())
                 .map(each -> "; " + percent(each.p()) + " by k = " + each.k().getAsInt()).collect(Collectors.joining());
     }

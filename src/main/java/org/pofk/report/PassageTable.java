@@ -2,6 +2,7 @@ package org.pofk.report;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.function.Function;
 import org.pofk.answer.DerivedOutput;
 import org.pofk.answer.FirstEntrance;
 import org.pofk.answer.Passage;
@@ -11,6 +12,9 @@ import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
 import org.pofk.exact.Rational;
 import org.pofk.schedule.ScheduledPassage;
+import org.pofk.schedule.ScheduledPassage.At;
+import org.pofk.schedule.ScheduledWait;
+import org.pofk.steps.KnownValue;
 
 /**
  * A first passage as rows that each say one number: law, distribution, survival and hazard by step, with an empty
@@ -43,21 +47,42 @@ public final class PassageTable {
         return rows.table();
     }
 
-    /** The same under a schedule, without law and hazard. */
+    /** The same under a schedule. */
     public static Document.Table of(Model model, ScheduledPassage passage, int digits) {
         StepColumns steps = StepColumns.of(model);
         Rows rows = new Rows(digits, Rows.words("quantity", "from"), steps.header(), Rows.words("exact", "decimal"));
         PassageTable table = new PassageTable(steps, rows);
-        passage.values().forEach(each -> rows.add(Rows.words("distribution"), START, steps.cells(each.k()),
-                rows.value(each.distribution())));
-        passage.values().forEach(each -> rows.add(Rows.words("survival"), START, steps.cells(each.k()),
-                rows.value(each.survival())));
-        passage.over().ifPresent(over -> {
-            table.moments(over.moments());
-            table.percentiles(over.percentiles());
-            table.fromEach(model.chain(), over.fromEach());
+        table.byStep("law", passage, At::law);
+        table.byStep("distribution", passage, At::distribution);
+        table.byStep("survival", passage, At::survival);
+        passage.values().forEach(each -> each.hazard().ifPresent(hazard -> rows.add(Rows.words("hazard"), START,
+                steps.cells(each.k()), rows.value(hazard))));
+        passage.entrance().ifPresent(entrance -> {
+            table.wait(START, entrance.first());
+            entrance.first().variance().ifPresent(variance ->
+                    table.number("variance given that it happens", START, variance));
+        });
+        table.percentiles(passage.percentiles());
+        passage.entrance().ifPresent(entrance -> {
+            for (int i = 0; i < entrance.fromEach().size(); i++) {
+                table.wait(List.of(Prose.name(model.chain().states().get(i))), entrance.fromEach().get(i));
+            }
         });
         return rows.table();
+    }
+
+    private void byStep(String quantity, ScheduledPassage passage, Function<At, KnownValue> value) {
+        passage.values().forEach(each ->
+                rows.add(Rows.words(quantity), START, steps.cells(each.k()), rows.value(value.apply(each))));
+    }
+
+    private void wait(List<Prose> from, ScheduledWait wait) {
+        number("probability", from, wait.probability());
+        wait.mean().ifPresent(mean -> number("mean given that it happens", from, mean));
+    }
+
+    private void number(String quantity, List<Prose> from, KnownValue value) {
+        rows.add(Rows.words(quantity), from, steps.none(), rows.value(value));
     }
 
     private void percentiles(List<Percentile> percentiles) {

@@ -3,11 +3,9 @@ package org.pofk.report;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.stream.IntStream;
-import org.pofk.answer.PassageMoments;
+import java.util.stream.Stream;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
-import org.pofk.exact.Decimals;
-import org.pofk.exact.Enclosed;
 import org.pofk.exact.Rational;
 import org.pofk.report.Document.Block;
 import org.pofk.report.Document.Heading;
@@ -15,12 +13,20 @@ import org.pofk.report.Document.Labelled;
 import org.pofk.report.Document.Paragraph;
 import org.pofk.report.Document.Table;
 import org.pofk.schedule.CycleFormula;
+import org.pofk.schedule.ScheduledEntrance;
 import org.pofk.schedule.ScheduledPassage;
+import org.pofk.schedule.ScheduledVisits;
+import org.pofk.schedule.ScheduledWait;
+import org.pofk.schedule.ScheduledWait.Ever;
+import org.pofk.steps.KnownValue;
 
 /** Whether and when a set of states is first entered under a schedule, as a document. */
 public final class ScheduledPassageDocument {
     /** Above so many states the table of all starts is left out. */
     private static final int STATES_AT_MOST = 40;
+    private static final String GIVEN = " | T < ∞";
+    private static final String NEVER = "never: it can't be reached from there";
+    private static final String NOT_DECIDED = "not decided within the budget";
 
     private final Chain chain;
     private final ScheduledPassage passage;
@@ -49,13 +55,35 @@ public final class ScheduledPassageDocument {
         document.write();
         Prose set = document.names(passage.into());
         return new ReportSection(ReportSection.Place.RESULTS, document.title(),
-                List.of(new Labelled(Prose.of("first into ").and(set), Prose.of(passage.over().map(over ->
-                        PassageDocument.inBrief(over.moments(), over.percentiles(), style))
-                        .orElse("not decided: the numbers of a whole cycle are too long for formulas")))),
-                document.blocks, passage.over().stream().flatMap(over -> over.distributions().stream())
-                        .map(formula -> Proved.overCycles(left(passage, formula).and(", into ").and(set), "stopped chain",
-                                formula)).toList(),
-                passage.over().isPresent() ? ReportSection.Standing.ANSWERED : ReportSection.Standing.NOT_DECIDED);
+                List.of(new Labelled(Prose.of("first into ").and(set), Prose.of(document.inBrief()))),
+                document.blocks, document.proofs(set), passage.isDecided() ? ReportSection.Standing.ANSWERED
+                        : ReportSection.Standing.NOT_DECIDED);
+    }
+
+    private List<Proved> proofs(Prose set) {
+        return passage.over().stream().flatMap(over -> Stream.of(
+                proofs(over.laws(), "=", set), proofs(over.distributions(), "≤", set),
+                proofs(over.survivals(), ">", set))).flatMap(each -> each).toList();
+    }
+
+    private Stream<Proved> proofs(List<CycleFormula> formulas, String relation, Prose set) {
+        return formulas.stream().map(formula -> Proved.overCycles(left(relation, formula).and(", into ").and(set),
+                "stopped chain", formula));
+    }
+
+    /** Whether and when, in a line. */
+    private String inBrief() {
+        return passage.entrance().map(entrance -> switch (entrance.first().ever()) {
+            case NEVER -> NEVER;
+            case CERTAIN -> "certain" + inBrief(entrance.first());
+            case PERHAPS -> "with probability " + number(entrance.first().probability()) + "; given that it happens"
+                    + inBrief(entrance.first());
+        }).orElse(NOT_DECIDED);
+    }
+
+    private String inBrief(ScheduledWait wait) {
+        return wait.mean().map(mean -> ", after " + number(mean) + " steps in the mean").orElse("")
+                + PassageDocument.inBrief(passage.percentiles());
     }
 
     private Prose title() {
@@ -70,10 +98,17 @@ public final class ScheduledPassageDocument {
                 .and(passage.avoiding().isEmpty() ? Prose.EMPTY
                         : Prose.of("; entering ").and(names(passage.avoiding())).and(" first ends the wait"))
                 .and(".")));
-        passage.over().ifPresentOrElse(this::over, () -> label("ever",
-                "not decided: the numbers of a whole cycle are too long for formulas"));
+        passage.entrance().ifPresentOrElse(this::entrance, () -> label("ever", NOT_DECIDED));
+        passage.percentiles().forEach(each -> label(PassageDocument.percent(each.p()), PassageDocument.percentile(each)));
+        passage.decay().ifPresent(this::decay);
+        passage.entrance().flatMap(ScheduledEntrance::back).ifPresent(this::back);
+        label("visits", passage.visits().map(this::visits).orElse(NOT_DECIDED));
+        if (passage.entrance().filter(entrance -> !entrance.first().isExact()).isPresent()) {
+            label("numbers", "certified: every digit shown is right");
+        }
+        formulas();
         values();
-        passage.over().filter(over -> chain.size() <= STATES_AT_MOST).ifPresent(this::fromEach);
+        passage.entrance().filter(entrance -> chain.size() <= STATES_AT_MOST).ifPresent(this::fromEach);
     }
 
     private Prose names(List<Integer> states) {
@@ -84,56 +119,110 @@ public final class ScheduledPassageDocument {
         blocks.add(new Labelled(label, text));
     }
 
-    private void over(ScheduledPassage.OverCycles over) {
-        moments(over.moments());
-        over.percentiles().forEach(each -> label(PassageDocument.percent(each.p()), PassageDocument.percentile(each)));
-        over.settling().flatMap(settling -> settling.slowest()).ifPresent(slowest -> label("decay",
-                "in the long run " + (over.moments().isCertain() ? "P(T > k)" : "what P(T > k) is above its limit")
-                        + " falls by the factor " + Decimals.of(slowest, style.digits()).text() + " a cycle"));
-        blocks.add(new Heading(3, "Over the cycles"));
-        FormulaInSteps formulas = new FormulaInSteps("m", style);
-        over.distributions().forEach(formula -> formulas.add(formula.closedForm(), left(passage, formula), Prose.of("m ≥ 0")));
-        blocks.addAll(formulas.blocks());
-        blocks.add(CycleProof.holds(passage.timetable(), over.distributions().get(0)));
+    private void entrance(ScheduledEntrance entrance) {
+        ScheduledWait wait = entrance.first();
+        boolean isCertain = wait.ever() == Ever.CERTAIN;
+        label("ever", switch (wait.ever()) {
+            case NEVER -> NEVER;
+            case CERTAIN -> "with probability 1";
+            case PERHAPS -> "with probability " + number(wait.probability());
+        });
+        wait.mean().ifPresent(mean -> label("mean", (isCertain ? ""
+                : "infinite, since it may never happen; given that it does, ") + number(mean)));
+        wait.variance().ifPresent(variance -> label("variance", (isCertain ? "" : "given that it happens, ")
+                + number(variance) + (variance.exact().filter(Rational::isZero).isPresent() ? ""
+                : "; standard deviation " + KnownText.of(variance.sqrt(), style.digits()))));
     }
 
-    static Prose left(ScheduledPassage passage, CycleFormula formula) {
-        return Prose.of("P(T ≤ " + ScheduleProse.stepOf(passage.timetable(), formula.place().orElseThrow().j()) + ")");
+    private void decay(ScheduledPassage.Decay decay) {
+        String left = passage.entrance().filter(entrance -> entrance.first().ever() == Ever.PERHAPS).isPresent()
+                ? "what P(T > k) is above its limit" : "P(T > k)";
+        boolean isOver = decay.perCycle().exact().filter(Rational::isZero).isPresent();
+        label("decay", isOver ? "nothing of " + left + " is left after finitely many cycles"
+                : "in the long run " + left + " falls by the factor " + number(decay.perCycle()) + " a cycle"
+                + (passage.timetable().period() == 1 ? "" : ", " + number(decay.perStep()) + " a step on average"));
     }
 
-    private void moments(PassageMoments moments) {
-        if (moments.probability().isZero()) {
-            label("ever", "never: it can't be reached from there");
-            return;
+    private void back(ScheduledWait back) {
+        String how = ", in the first step k ≥ 1 in which it is entered or still there, by the move or by an action";
+        String when = back.mean().map(mean -> "after " + number(mean) + " steps in the mean").orElse(NOT_DECIDED);
+        label("return", switch (back.ever()) {
+            case NEVER -> "never";
+            case CERTAIN -> "certain, " + when + how;
+            case PERHAPS -> "with probability " + number(back.probability()) + "; given that, " + when + how;
+        });
+    }
+
+    private String visits(ScheduledVisits visits) {
+        return visits.steps().map(steps -> number(steps) + " steps are expected to end there, after what is done in them")
+                .orElse("infinitely many steps are expected to end there");
+    }
+
+    private void formulas() {
+        if (passage.formulas() == ScheduledPassage.Formulas.TOO_LONG) {
+            label("formulas", "left out: those over the cycles would need numbers too long to be found at once");
         }
-        label("ever", moments.isCertain() ? "with probability 1" : "with probability " + number(moments.probability()));
-        label("mean", (moments.isCertain() ? "" : "infinite, since it may never happen; given that it does, ")
-                + number(moments.mean().orElseThrow()) + " steps");
-        Rational variance = moments.variance().orElseThrow();
-        label("variance", (moments.isCertain() ? "" : "given that it happens, ") + number(variance)
-                + (variance.isZero() ? "" : "; standard deviation "
-                + Decimals.of(Enclosed.of(variance).map(ball -> ball.sqrt()), style.digits()).text()));
+        passage.over().ifPresent(over -> {
+            formulas("Law over the cycles", "=", over.laws());
+            formulas("Distribution over the cycles", "≤", over.distributions());
+            formulas("Survival over the cycles", ">", over.survivals());
+            over.happening().ifPresent(happening -> {
+                blocks.add(new Heading(3, "Given that it happens"));
+                FormulaInSteps formulas = new FormulaInSteps("m", style);
+                formulas.add(happening.law().closedForm(), left(passage, "=", happening.law(), GIVEN), Prose.of("m ≥ 0"));
+                formulas.add(happening.distribution().closedForm(), left(passage, "≤", happening.distribution(), GIVEN),
+                        Prose.of("m ≥ 0"));
+                blocks.addAll(formulas.blocks());
+            });
+        });
     }
 
-    private String number(Rational value) {
-        return new LongRunProse(style.digits()).number(value);
+    private void formulas(String title, String relation, List<CycleFormula> all) {
+        blocks.add(new Heading(3, title));
+        FormulaInSteps formulas = new FormulaInSteps("m", style);
+        all.forEach(formula -> formulas.add(formula.closedForm(), left(relation, formula), Prose.of("m ≥ 0")));
+        blocks.addAll(formulas.blocks());
+        blocks.add(CycleProof.holds(passage.timetable(), all.get(0)));
+    }
+
+    private Prose left(String relation, CycleFormula formula) {
+        return left(passage, relation, formula, "");
+    }
+
+    /** {@code P(T ≤ 12 m)}, with any relation. */
+    static Prose left(ScheduledPassage passage, String relation, CycleFormula formula, String given) {
+        return Prose.of("P(T " + relation + " "
+                + ScheduleProse.stepOf(passage.timetable(), formula.place().orElseThrow().j()) + given + ")");
+    }
+
+    private String number(KnownValue value) {
+        return KnownText.withFraction(value, style.digits());
     }
 
     private void values() {
         if (!passage.values().isEmpty()) {
-            blocks.add(Table.ofText("Values at step k", List.of("k", "P(T ≤ k)", "P(T > k)"),
+            blocks.add(Table.ofText("Values at step k", List.of("k", "P(T = k)", "P(T ≤ k)", "P(T > k)", "hazard"),
                     passage.values().stream().map(each -> List.of(String.valueOf(each.k()),
+                            KnownText.of(each.law(), style.digits()),
                             KnownText.of(each.distribution(), style.digits()),
-                            KnownText.of(each.survival(), style.digits()))).toList()));
+                            KnownText.of(each.survival(), style.digits()),
+                            hazard(each))).toList()));
         }
     }
 
-    private void fromEach(ScheduledPassage.OverCycles over) {
+    private String hazard(ScheduledPassage.At at) {
+        boolean isOver = at.survival().exact().filter(Rational::isZero).isPresent();
+        return at.hazard().map(hazard -> KnownText.of(hazard, style.digits())).orElse(isOver ? "–" : "not decided");
+    }
+
+    private void fromEach(ScheduledEntrance entrance) {
         blocks.add(new Table(Prose.of("From each state, started there at k = 0"),
                 List.of(Prose.of("from"), Prose.of("ever"), Prose.of("mean steps, where it happens")),
-                IntStream.range(0, chain.size()).mapToObj(state -> List.of(Prose.name(chain.states().get(state)),
-                        Prose.of(ValueText.of(over.fromEach().probabilities().get(state), style.digits())),
-                        Prose.of(over.fromEach().means().get(state)
-                                .map(mean -> ValueText.of(mean, style.digits())).orElse("–")))).toList()));
+                IntStream.range(0, chain.size()).mapToObj(state -> {
+                    ScheduledWait wait = entrance.fromEach().get(state);
+                    return List.of(Prose.name(chain.states().get(state)),
+                            Prose.of(KnownText.of(wait.probability(), style.digits())),
+                            Prose.of(wait.mean().map(mean -> KnownText.of(mean, style.digits())).orElse("–")));
+                }).toList()));
     }
 }

@@ -4,18 +4,18 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.stream.Collectors;
-import java.util.stream.IntStream;
 import java.util.stream.Stream;
-import org.pofk.answer.PassageMoments;
 import org.pofk.answer.Percentile;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
-import org.pofk.exact.Rational;
 import org.pofk.report.Document.Block;
 import org.pofk.report.Document.Heading;
 import org.pofk.report.Document.Paragraph;
 import org.pofk.schedule.CycleFormula;
+import org.pofk.schedule.ScheduledEntrance;
 import org.pofk.schedule.ScheduledPassage;
+import org.pofk.schedule.ScheduledWait;
+import org.pofk.steps.KnownValue;
 
 /**
  * A first passage under a schedule as a notebook that steps the stopped chain in exact fractions, proves the formulas
@@ -61,10 +61,11 @@ public final class ScheduledPassageNotebook {
         cells.code("into, avoiding = " + passage.into() + ", " + passage.avoiding()
                 + "\nc = [Fraction(int(i in into)) for i in range(len(states))]\nconstant = Fraction(0)");
         values();
+        passage.entrance().ifPresent(this::moments);
+        percentiles(passage.percentiles());
         passage.over().ifPresent(over -> {
-            moments(over);
-            percentiles(over.percentiles());
             over.distributions().forEach(this::distribution);
+            cells.text(Prose.of("P(T > k) is what P(T ≤ k) lacks to one, and P(T = k) what it is above P(T ≤ k − 1)."));
         });
     }
 
@@ -80,18 +81,25 @@ public final class ScheduledPassageNotebook {
         }
     }
 
-    private void moments(ScheduledPassage.OverCycles over) {
-        PassageMoments moments = over.moments();
-        String stated = Stream.of(Optional.of(moments.probability()), moments.mean(), moments.variance())
-                .flatMap(Optional::stream).map(Rational::toString).collect(Collectors.joining("\n"));
-        String each = IntStream.range(0, chain.size()).mapToObj(state -> over.fromEach().probabilities().get(state) + "\n"
-                + over.fromEach().means().get(state).map(Rational::toString).orElse("0"))
-                .collect(Collectors.joining("\n"));
+    private void moments(ScheduledEntrance entrance) {
+        if (!entrance.first().isExact()) {
+            cells.text(Prose.of("Probability, mean and variance are certified and stated, not worked out again here."));
+            return;
+        }
+        ScheduledWait wait = entrance.first();
+        String stated = Stream.of(Optional.of(wait.probability()), wait.mean(), wait.variance())
+                .flatMap(Optional::stream).map(ScheduledPassageNotebook::exact).collect(Collectors.joining("\n"));
+        String each = entrance.fromEach().stream().map(from -> exact(from.probability()) + "\n"
+                + from.mean().map(ScheduledPassageNotebook::exact).orElse("0")).collect(Collectors.joining("\n"));
         cells.code(String.join("\n", "h, u, w = first_entrance(into, avoiding)",
                 "require(\"probability, and mean and variance where it happens\", holds(\"\"\"", stated,
                 "\"\"\", moments_of(h, u, w)))",
                 "require(\"probability and mean from each state\", holds(\"\"\"", each,
                 "\"\"\", [value for a, b in zip(h, u) for value in (a, b / a if a != 0 else Fraction(0))]))"));
+    }
+
+    private static String exact(KnownValue value) {
+        return value.exact().orElseThrow().toString();
     }
 
     private void percentiles(List<Percentile> percentiles) {
@@ -112,7 +120,7 @@ public final class ScheduledPassageNotebook {
 
     private void distribution(CycleFormula formula) {
         PythonCycles python = new PythonCycles(passage.stopped().timetable());
-        Prose left = ScheduledPassageDocument.left(passage, formula);
+        Prose left = ScheduledPassageDocument.left(passage, "≤", formula, "");
         if (python.isProved(formula)) {
             cells.code(python.formula(left, formula, style.digits()));
         } else {

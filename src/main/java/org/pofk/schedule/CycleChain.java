@@ -91,14 +91,24 @@ final class CycleChain {
                 formula(Optional.of(places.get(i)), transforms.get(i))).toList();
     }
 
+    /** What step j of cycle m adds to an output, 1 ≤ j ≤ T: its value there less that one step before. */
+    CycleFormula difference(Output output, int j) {
+        CycleOutputs later = new CycleOutputs(timetable, matrices, output);
+        return formula(Optional.of(new Place(j, Side.AFTER)), Transforms.of(chain, List.of(difference(output,
+                later.at(j, Side.AFTER), j == 1 ? output : later.at(j - 1, Side.AFTER)))).get(0));
+    }
+
+    private static Output difference(Output output, Output end, Output begin) {
+        return new Output(output.name(), IntStream.range(0, end.coefficients().size())
+                .mapToObj(i -> end.coefficients().get(i).minus(begin.coefficients().get(i))).toList(), Rational.ZERO,
+                output.definition());
+    }
+
     /** What cycle m adds to an output: its value at the end less that at the beginning. */
     CycleFormula added(Output output) {
-        List<Rational> end = new CycleOutputs(timetable, matrices, output).at(timetable.period(), Side.AFTER)
-                .coefficients();
-        List<Rational> added = IntStream.range(0, end.size())
-                .mapToObj(i -> end.get(i).minus(output.coefficients().get(i))).toList();
-        return formula(Optional.empty(), Transforms.of(chain, List.of(new Output(output.name(), added, Rational.ZERO,
-                output.definition()))).get(0));
+        Output end = new CycleOutputs(timetable, matrices, output).at(timetable.period(), Side.AFTER);
+        return formula(Optional.empty(),
+                Transforms.of(chain, List.of(difference(output, end, output))).get(0));
     }
 
     private CycleFormula formula(Optional<Place> place, Transform transform) {

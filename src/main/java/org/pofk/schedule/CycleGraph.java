@@ -25,25 +25,37 @@ final class CycleGraph {
     /** The structure of S, begun in the states where x(P) isn't zero. */
     static Structure of(Timetable timetable, List<Rational> start) {
         int size = start.size();
-        BitSet begin = begin(timetable, start);
-        List<BitSet> product = identity(size);
-        for (CycleMatrices.Stretch stretch : CycleMatrices.stretches(timetable.cycle())) {
-            product = product(power(step(timetable, stretch.moment(), size), stretch.times()), product);
-        }
-        SparseMatrix matrix = new SparseMatrix(product.stream().map(column ->
-                column.stream().mapToObj(row -> new Entry(row, Rational.ONE)).toList()).toList());
+        BitSet begin = through(timetable, timetable.preamble(), support(start));
         return Structure.of(new Chain(Chain.Kind.RECURSION,
-                IntStream.range(0, size).mapToObj(String::valueOf).toList(), matrix,
+                IntStream.range(0, size).mapToObj(String::valueOf).toList(), matrix(timetable, size),
                 IntStream.range(0, size).mapToObj(state -> begin.get(state) ? Rational.ONE : Rational.ZERO).toList(),
                 Map.of(), List.of()));
     }
 
-    private static BitSet begin(Timetable timetable, List<Rational> start) {
+    /** One where S isn't zero. */
+    static SparseMatrix matrix(Timetable timetable, int size) {
+        List<BitSet> product = identity(size);
+        for (CycleMatrices.Stretch stretch : CycleMatrices.stretches(timetable.cycle())) {
+            product = product(power(step(timetable, stretch.moment(), size), stretch.times()), product);
+        }
+        return new SparseMatrix(product.stream().map(column ->
+                column.stream().mapToObj(row -> new Entry(row, Rational.ONE)).toList()).toList());
+    }
+
+    /** Where a vector isn't zero. */
+    static BitSet support(List<Rational> vector) {
         BitSet states = new BitSet();
-        IntStream.range(0, start.size()).filter(state -> !start.get(state).isZero()).forEach(states::set);
-        List<BitSet> now = List.of(states);
-        for (CycleMatrices.Stretch stretch : CycleMatrices.stretches(timetable.preamble())) {
-            now = product(power(step(timetable, stretch.moment(), start.size()), stretch.times()), now);
+        IntStream.range(0, vector.size()).filter(state -> !vector.get(state).isZero()).forEach(states::set);
+        return states;
+    }
+
+    /** Where these steps lead to from some states. */
+    static BitSet through(Timetable timetable, List<Moment> moments, BitSet from) {
+        int size = timetable.moves().get(0).size();
+        List<BitSet> now = List.of(from);
+        for (CycleMatrices.Stretch stretch : CycleMatrices.stretches(moments)) {
+            List<BitSet> step = step(timetable, stretch.moment(), size);
+            now = product(stretch.times() == 1 ? step : power(step, stretch.times()), now);
         }
         return now.get(0);
     }

@@ -1,133 +1,132 @@
 package org.pofk.schedule;
 
-import java.util.ArrayList;
+import java.util.BitSet;
 import java.util.List;
-import java.util.Map;
 import java.util.Optional;
+import java.util.OptionalInt;
 import java.util.stream.IntStream;
-import org.pofk.answer.FirstEntrance;
 import org.pofk.answer.Increment;
-import org.pofk.answer.PassageMoments;
-import org.pofk.chain.Chain;
-import org.pofk.chain.SparseMatrix;
+import org.pofk.chain.Timetable;
 import org.pofk.chain.Timetable.Moment;
 import org.pofk.exact.Rational;
-import org.pofk.longrun.LinearEquations;
-import org.pofk.longrun.StationaryDistribution;
 
 /**
- * From each state at a step of a schedule: h, the probability of ever entering a set, u and w, the means of T and of
- * T² where it is entered and zero where it isn't, T counted from there. First-step analysis step by step: before a
- * step that does M, h = Mᵀ h, u = Mᵀ (u + h), w = Mᵀ (w + 2 u + h); over a whole cycle each solves one system with
- * I − Sᵀ on the states from which the set can be reached. Exact.
+ * Whether and when a set is first entered under a schedule. From each state at a step of it: h, the probability of ever
+ * entering the set, u and w, the means of T and of T² where it is entered and zero where it isn't, T counted from there.
+ * First-step analysis step by step: before a step that does M, h = Mᵀ h, u = Mᵀ (u + h), w = Mᵀ (w + 2 u + h); over a
+ * whole cycle each solves one system with I − Sᵀ on the states from which the set can be reached. Exact, or certified
+ * where that says so.
+ *
+ * @param first    from the start
+ * @param fromEach from each state at k = 0
+ * @param back     of a start that lies in the set: until the first step k ≥ 1 in which it is there, after the move or
+ *                 after an action
  */
-record ScheduledEntrance(List<Rational> h, List<Rational> u, List<Rational> w) {
-
-    /** From the start of the chain, step 0. */
-    static ScheduledEntrance of(StoppedSchedule stopped) {
-        Backwards backwards = new Backwards(stopped);
-        return backwards.through(stopped.chain().timetable().preamble(), backwards.atCycles());
+public record ScheduledEntrance(ScheduledWait first, List<ScheduledWait> fromEach, Optional<ScheduledWait> back) {
+    public ScheduledEntrance {
+        fromEach = List.copyOf(fromEach);
     }
 
-    /** Of the chain's own start. */
-    PassageMoments moments(List<Rational> start) {
-        Rational probability = sum(start, h);
-        if (probability.isZero()) {
-            return new PassageMoments(probability, Optional.empty(), Optional.empty());
-        }
-        Rational mean = sum(start, u).dividedBy(probability);
-        return new PassageMoments(probability, Optional.of(mean),
-                Optional.of(sum(start, w).dividedBy(probability).minus(mean.times(mean))));
+    /**
+     * Empty where bounds tell nothing: it takes too many cycles.
+     *
+     * @param unstopped the timetable of the chain that is not stopped
+     */
+    static <W> Optional<ScheduledEntrance> of(StoppedSchedule stopped, Timetable unstopped,
+            BackwardArithmetic<W> arithmetic) {
+        Backwards<W> backwards = new Backwards<>(stopped, unstopped, arithmetic);
+        return backwards.atCycles().map(backwards::entrance);
     }
 
-    /** From each state. */
-    FirstEntrance fromEach() {
-        return new FirstEntrance(h, IntStream.range(0, h.size()).mapToObj(i -> h.get(i).isZero()
-                ? Optional.<Rational>empty()
-                : Optional.of(u.get(i).dividedBy(h.get(i)))).toList());
-    }
-
-    private static Rational sum(List<Rational> weights, List<Rational> values) {
-        return IntStream.range(0, weights.size()).mapToObj(i -> weights.get(i).times(values.get(i)))
-                .reduce(Rational.ZERO, Rational::plus);
+    /** What is expected from each state at one step. */
+    private record Sums<W>(W h, W u, W w) {
     }
 
     /** One stopped chain, from later steps to earlier ones. */
-    private static final class Backwards {
+    private static final class Backwards<W> {
         private final StoppedSchedule stopped;
-        private final List<Integer> open;
-        private final SparseMatrix system;
-        private final List<Rational> probabilities;
+        private final Timetable timetable;
+        private final Timetable unstopped;
+        private final BackwardArithmetic<W> arithmetic;
+        private final EntranceGraph graph;
+        private final List<Integer> waiting;
+        private final W zeros;
 
-        Backwards(StoppedSchedule stopped) {
+        Backwards(StoppedSchedule stopped, Timetable unstopped, BackwardArithmetic<W> arithmetic) {
             this.stopped = stopped;
-            Chain cycles = stopped.chain().cycles().chain();
-            this.open = FirstEntrance.open(cycles.matrix(), stopped.into(), stopped.avoiding());
-            Map<Integer, Integer> place = StationaryDistribution.placeOf(open);
-            this.system = FirstEntrance.identityMinusTransposed(cycles.matrix(), open, place);
-            this.probabilities = FirstEntrance.of(cycles, stopped.into(), stopped.avoiding()).probabilities();
+            this.timetable = stopped.chain().timetable();
+            this.unstopped = unstopped;
+            this.arithmetic = arithmetic;
+            this.graph = EntranceGraph.of(stopped);
+            this.waiting = IntStream.range(0, size()).filter(state -> !stopped.into().contains(state)
+                    && !stopped.avoiding().contains(state)).boxed().toList();
+            this.zeros = arithmetic.weights(Increment.zeros(size()));
+        }
+
+        private int size() {
+            return stopped.chain().chain().size();
         }
 
         /** At the beginning of any cycle. */
-        ScheduledEntrance atCycles() {
-            List<Moment> cycle = stopped.chain().timetable().cycle();
-            List<Rational> zeros = Increment.zeros(probabilities.size());
-            List<Rational> steps = solved(through(cycle, new ScheduledEntrance(probabilities, zeros, zeros)).u);
-            List<Rational> squares = solved(through(cycle, new ScheduledEntrance(probabilities, steps, zeros)).w);
-            return new ScheduledEntrance(probabilities, steps, squares);
+        Optional<Sums<W>> atCycles() {
+            List<Moment> cycle = timetable.cycle();
+            W inside = arithmetic.weights(stopped.distribution().coefficients());
+            return arithmetic.solved(graph.open(), arithmetic.through(cycle, inside))
+                    .map(open -> arithmetic.sum(open, inside)).flatMap(h ->
+                    solved(through(cycle, new Sums<>(h, zeros, zeros)).u).flatMap(u ->
+                    solved(through(cycle, new Sums<>(h, u, zeros)).w).map(w -> new Sums<>(h, u, w))));
         }
 
-        /** x with x = Sᵀ x + what one cycle adds. */
-        private List<Rational> solved(List<Rational> added) {
-            List<Rational> solution = LinearEquations.solve(system, open.stream().map(added::get).toList());
-            List<Rational> all = Increment.zeros(added.size());
-            for (int i = 0; i < open.size(); i++) {
-                all.set(open.get(i), solution.get(i));
-            }
-            return all;
+        private Optional<W> solved(W added) {
+            return arithmetic.solved(graph.open(), added);
         }
 
-        ScheduledEntrance through(List<Moment> moments, ScheduledEntrance end) {
-            ScheduledEntrance now = end;
+        Sums<W> through(List<Moment> moments, Sums<W> end) {
+            Sums<W> now = end;
             for (int i = moments.size() - 1; i >= 0; i--) {
-                now = before(moments.get(i), now);
+                Sums<W> counted = before(moments.get(i), now);
+                now = new Sums<>(counted.h, arithmetic.only(waiting, counted.u), arithmetic.only(waiting, counted.w));
             }
             return now;
         }
 
-        private ScheduledEntrance before(Moment moment, ScheduledEntrance after) {
-            List<Rational> later = plus(after.u, after.h);
-            return new ScheduledEntrance(through(moment, after.h), ended(through(moment, later)),
-                    ended(through(moment, plus(plus(after.w, after.u), later))));
+        /** One step earlier, and counted, wherever that is. */
+        private Sums<W> before(Moment moment, Sums<W> after) {
+            W later = arithmetic.sum(after.u, after.h);
+            return new Sums<>(arithmetic.before(moment, after.h), arithmetic.before(moment, later),
+                    arithmetic.before(moment, arithmetic.sum(arithmetic.sum(after.w, after.u), later)));
         }
 
-        /** Zero where nothing is waited for any more. */
-        private List<Rational> ended(List<Rational> values) {
-            return IntStream.range(0, values.size()).mapToObj(state -> stopped.into().contains(state)
-                    || stopped.avoiding().contains(state) ? Rational.ZERO : values.get(state)).toList();
+        ScheduledEntrance entrance(Sums<W> atCycles) {
+            Sums<W> begin = through(timetable.preamble(), atCycles);
+            List<Rational> start = stopped.chain().chain().start();
+            List<ScheduledWait> fromEach = IntStream.range(0, size()).mapToObj(state -> {
+                List<Rational> there = Increment.zeros(size());
+                there.set(state, Rational.ONE);
+                return wait(graph.from(CycleGraph.support(there)), there, begin);
+            }).toList();
+            return new ScheduledEntrance(wait(graph.from(CycleGraph.support(start)), start, begin), fromEach,
+                    CycleGraph.support(start).stream().allMatch(stopped.into()::contains)
+                            ? Optional.of(back(start, atCycles)) : Optional.empty());
         }
 
-        private List<Rational> through(Moment moment, List<Rational> row) {
-            List<Rational> result = row;
-            for (int i = moment.actions().size() - 1; i >= 0; i--) {
-                result = fromLeft(stopped.chain().timetable().actions().get(moment.actions().get(i)).matrix(), result);
-            }
-            return moment.move().isPresent()
-                    ? fromLeft(stopped.chain().timetable().moves().get(moment.move().getAsInt()), result) : result;
+        private ScheduledWait wait(ScheduledWait.Ever ever, List<Rational> start, Sums<W> sums) {
+            return ScheduledWait.of(ever, arithmetic.expected(start, sums.h), arithmetic.expected(start, sums.u),
+                    arithmetic.expected(start, sums.w));
         }
 
-        private static List<Rational> fromLeft(SparseMatrix matrix, List<Rational> row) {
-            return matrix.columns().stream().map(column -> column.stream()
-                    .map(entry -> entry.value().times(row.get(entry.row())))
-                    .reduce(Rational.ZERO, Rational::plus)).toList();
-        }
-
-        private static List<Rational> plus(List<Rational> a, List<Rational> b) {
-            List<Rational> sum = new ArrayList<>();
-            for (int i = 0; i < a.size(); i++) {
-                sum.add(a.get(i).plus(b.get(i)));
-            }
-            return sum;
+        /** The first thing that happens leads out of the set as it may; from there on the chain is stopped. */
+        private ScheduledWait back(List<Rational> start, Sums<W> atCycles) {
+            List<Moment> first = timetable.before() > 0 ? timetable.preamble() : timetable.cycle();
+            Moment moment = first.get(0);
+            boolean isMoved = moment.move().isPresent();
+            List<Rational> after = (isMoved ? unstopped.moves().get(moment.move().getAsInt())
+                    : unstopped.actions().get(moment.actions().get(0)).matrix()).times(start);
+            Moment rest = new Moment(OptionalInt.empty(), isMoved ? moment.actions()
+                    : moment.actions().subList(1, moment.actions().size()));
+            BitSet reached = CycleGraph.through(timetable, List.of(rest), CycleGraph.support(after));
+            return wait(graph.afterOneStep(reached), after,
+                    before(rest, through(first.subList(1, first.size()), atCycles)));
         }
     }
 }

@@ -37,6 +37,12 @@ record StoppedSchedule(ScheduledChain chain, Set<Integer> into, Set<Integer> avo
                         "P(T > k)"));
     }
 
+    /** P(T ≤ k | T < ∞), given the probability that T is finite. */
+    Output distributionOver(Rational probability) {
+        return new Output("distribution given that it happens", distribution.coefficients().stream()
+                .map(each -> each.dividedBy(probability)).toList(), Rational.ZERO, "P(T ≤ k | T < ∞)");
+    }
+
     private static SparseMatrix stopped(SparseMatrix matrix, Set<Integer> into, Set<Integer> avoiding) {
         List<List<Entry>> columns = new ArrayList<>();
         for (int state = 0; state < matrix.size(); state++) {

@@ -3,6 +3,7 @@ package org.pofk.steps;
 import java.math.BigInteger;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.BinaryOperator;
 import org.pofk.exact.Ball;
 import org.pofk.exact.Enclosed;
 import org.pofk.exact.Rational;
@@ -15,17 +16,17 @@ import org.pofk.exact.Rational;
  * @param enclosure as close as asked for an exact number; for a certified one the interval there is
  */
 public record KnownValue(Word word, Optional<Rational> exact, Enclosed enclosure) {
+    /** To so many bits a number is taken that is combined with one known by an interval. */
+    private static final int BITS = 512;
 
     /** What stands behind a number. */
     public enum Word { EXACT, CERTIFIED }
-
-    private static final int BITS = 256;
 
     public static KnownValue of(Rational value) {
         return new KnownValue(Word.EXACT, Optional.of(value), Enclosed.of(value));
     }
 
-    static KnownValue within(Ball ball) {
+    public static KnownValue within(Ball ball) {
         return new KnownValue(Word.CERTIFIED, Optional.empty(), bits -> ball);
     }
 
@@ -41,11 +42,7 @@ public record KnownValue(Word word, Optional<Rational> exact, Enclosed enclosure
 
     /** This over a number that is above zero for certain. */
     public KnownValue over(KnownValue positive) {
-        if (exact.isPresent() && positive.exact.isPresent()) {
-            return of(exact.get().dividedBy(positive.exact.get()));
-        }
-        return word == Word.EXACT && positive.word == Word.EXACT ? of(enclosure.dividedBy(positive.enclosure))
-                : within(enclosure.enclose(BITS).dividedBy(positive.enclosure.enclose(BITS)));
+        return combined(positive, Rational::dividedBy, Ball::dividedBy);
     }
 
     /** The mean of some, at least one. */
@@ -77,5 +74,38 @@ public record KnownValue(Word word, Optional<Rational> exact, Enclosed enclosure
         BigInteger widest = others.stream().map(each -> each.enclosure.enclose(BITS).roundedTo(BITS).radius())
                 .reduce(BigInteger.ZERO, BigInteger::max);
         return within(new Ball(enclosure.enclose(BITS).roundedTo(BITS).center(), widest, BITS));
+    }
+
+    public KnownValue plus(KnownValue other) {
+        return combined(other, Rational::plus, Ball::plus);
+    }
+
+    public KnownValue minus(KnownValue other) {
+        return combined(other, Rational::minus, Ball::minus);
+    }
+
+    public KnownValue times(KnownValue other) {
+        return combined(other, Rational::times, Ball::times);
+    }
+
+    /** This over a number that isn't zero; empty where {@value #BITS} bits don't show that it isn't. */
+    public Optional<KnownValue> dividedBy(KnownValue other) {
+        return other.exact.isEmpty() && other.enclosure.enclose(BITS).containsZero() ? Optional.empty()
+                : Optional.of(over(other));
+    }
+
+    /** √ of a number that isn't negative. */
+    public KnownValue sqrt() {
+        return new KnownValue(word, Optional.empty(), word == Word.CERTIFIED ? bits -> enclosure.enclose(BITS).sqrt()
+                : enclosure.map(Ball::sqrt));
+    }
+
+    private KnownValue combined(KnownValue other, BinaryOperator<Rational> exactly, BinaryOperator<Ball> enclosed) {
+        if (word == Word.CERTIFIED || other.word == Word.CERTIFIED) {
+            return within(enclosed.apply(enclosure.enclose(BITS), other.enclosure.enclose(BITS)));
+        }
+        return exact.isPresent() && other.exact.isPresent()
+                ? of(exactly.apply(exact.get(), other.exact.get()))
+                : of(Enclosed.combine(enclosure, other.enclosure, enclosed));
     }
 }

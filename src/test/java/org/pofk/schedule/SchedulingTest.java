@@ -5,23 +5,19 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.util.ArrayList;
 import java.util.HashMap;
-import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
-import java.util.Optional;
 import java.util.Random;
 import java.util.stream.IntStream;
 import org.junit.jupiter.api.Test;
-import org.pofk.answer.When;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
 import org.pofk.chain.Outputs;
+import org.pofk.chain.Schedule;
 import org.pofk.chain.SparseMatrix;
 import org.pofk.chain.Timetable;
+import org.pofk.exact.Ball;
 import org.pofk.exact.Rational;
-import org.pofk.input.ModelReader;
-import org.pofk.input.Overrides;
-import org.pofk.input.Source;
 import org.pofk.schedule.CycleCourse.Reading;
 import org.pofk.schedule.CycleCourse.Side;
 import org.pofk.steps.FixedPointColumn;
@@ -29,65 +25,12 @@ import org.pofk.steps.FixedPointState;
 import org.pofk.steps.KnownValue;
 import org.pofk.steps.ModeValues;
 import org.pofk.steps.StateArithmetic;
-import org.pofk.text.RefusedException;
 
 /** Every answer about a schedule against plain stepping: x(k⁻) and x(k) one after the other, nothing but A and B. */
 class SchedulingTest {
     private static final long SEED = 20_261_201L;
     private static final int STEPS = 5_000;
     private static final Rational TINY = Rational.of(10).pow(-25);
-
-    private static final String HEAD = """
-            pofk: 1
-            states: [good, worn, failed]
-            start: good
-            """;
-    private static final String CHAIN = """
-            transitions:
-              good: {worn: 1/8, good: rest}
-              worn: {failed: 1/4, good: 1/16, worn: rest}
-              failed: {good: 1/32, failed: rest}
-            """;
-
-    /** The cases of the contract, by name. */
-    private static Map<String, String> cases() {
-        Map<String, String> cases = new LinkedHashMap<>();
-        String overhaul = "actions: {overhaul: {failed: {good: 3/4, failed: rest}, worn: {good: 1/2, worn: rest}}}\n";
-        cases.put("every step", CHAIN + overhaul + "schedule: {every: 1, do: overhaul}\n");
-        cases.put("every twelfth", CHAIN + overhaul + "schedule: {every: 12, do: overhaul}\n");
-        cases.put("every thousandth", CHAIN + overhaul + "schedule: {every: 1000, do: overhaul}\n");
-        cases.put("begins late", CHAIN + overhaul + "schedule: {every: 5, first: 13, do: overhaul}\n");
-        cases.put("begins early", CHAIN + overhaul + "schedule: {every: 7, first: 3, do: overhaul}\n");
-        cases.put("instead", CHAIN + overhaul + "schedule: {every: 4, do: overhaul, when: instead of the step}\n");
-        cases.put("singular action", CHAIN + "actions: {renew: {worn: {good: 1}, failed: {good: 1}}}\n"
-                + "schedule: {every: 6, do: renew}\n");
-        cases.put("permutation", CHAIN + "actions: {swap: {good: {worn: 1}, worn: {failed: 1}, failed: {good: 1}}}\n"
-                + "schedule: {every: 5, do: swap}\n");
-        cases.put("nothing but a permutation", "transitions: {good: stays, worn: stays, failed: stays}\n"
-                + "actions: {swap: {good: {worn: 1}, worn: {good: 1}}}\nschedule: {every: 2, do: swap}\n");
-        cases.put("staggered", CHAIN + overhaul.replace("}}}", "}}, renew: {failed: {good: 1}}}")
-                + "schedule: [{every: 4, first: 2, do: overhaul}, {every: 6, do: renew},"
-                + " {every: 12, do: overhaul, when: instead of the step}]\n");
-        String phases = "moves:\n  wet: {good: {worn: 1/2, good: rest}, worn: {failed: 1/2, worn: rest},"
-                + " failed: {good: 1/8, worn: 1/8, failed: rest}}\n  dry: {good: {failed: 1/16, good: rest},"
-                + " worn: {good: 3/8, worn: rest}, failed: {worn: 1/2, failed: rest}}\n"
-                + "phases: [{for: 3, use: wet}, {for: 9, use: dry}]\n";
-        cases.put("phases over and over", phases);
-        cases.put("phases once", phases + "repeat: once\n");
-        cases.put("phases with inspections", phases + overhaul + "schedule: {every: 8, do: overhaul}\n");
-        cases.put("absorbing", "transitions: {good: {worn: 1/8, failed: 1/64, good: rest},"
-                + " worn: {failed: 1/16, worn: rest}, failed: stays}\n"
-                + "actions: {look: {worn: {good: 3/4, worn: rest}}}\nschedule: {every: 3, do: look}\n");
-        return cases;
-    }
-
-    private static Model model(String name, String rest) {
-        try {
-            return ModelReader.read(Source.ofText(name, HEAD + rest), Optional.empty(), Overrides.NONE);
-        } catch (RefusedException e) {
-            throw new AssertionError(name, e);
-        }
-    }
 
     /** One step after the other, by matrices times vectors alone; denominators are powers of two. */
     private static final class Plain {
@@ -104,25 +47,10 @@ class SchedulingTest {
 
         void step() {
             k++;
-            var schedule = model.schedule().orElseThrow();
-            var due = schedule.recurring().stream()
-                    .filter(each -> k >= each.first() && (k - each.first()) % each.every() == 0).toList();
-            boolean moves = due.stream().allMatch(each ->
-                    each.when() == org.pofk.chain.Schedule.When.AFTER_THE_STEP);
-            before = moves ? move().times(state) : state;
+            ScheduledCases.Step step = ScheduledCases.Step.of(model, k);
+            before = step.move().isPresent() ? step.move().get().times(state) : state;
             state = before;
-            due.forEach(each -> state = each.action().matrix().times(state));
-        }
-
-        private SparseMatrix move() {
-            var phases = model.schedule().orElseThrow().phases();
-            if (phases.isEmpty()) {
-                return model.chain().matrix();
-            }
-            List<SparseMatrix> all = phases.get().list().stream()
-                    .flatMap(phase -> IntStream.range(0, phase.steps()).mapToObj(i -> phase.matrix())).toList();
-            return phases.get().repeat() == org.pofk.chain.Schedule.Repeat.YES ? all.get((k - 1) % all.size())
-                    : all.get(Math.min(k, all.size()) - 1);
+            step.actions().forEach(action -> state = action.matrix().times(state));
         }
     }
 
@@ -144,8 +72,8 @@ class SchedulingTest {
     @Test
     void valuesEqualPlainSteppingBeforeAndAfterTheAction() {
         int compared = 0;
-        for (Map.Entry<String, String> each : cases().entrySet()) {
-            Model model = model(each.getKey(), each.getValue());
+        for (Map.Entry<String, String> each : ScheduledCases.ofTheContract().entrySet()) {
+            Model model = ScheduledCases.model(each.getKey(), each.getValue());
             ScheduledModel found = derived(model);
             Plain plain = new Plain(model);
             for (int k = 0, place = 0; k <= 300; k++) {
@@ -161,7 +89,7 @@ class SchedulingTest {
                 plain.step();
             }
         }
-        assertEquals(cases().size() * 63 * 2 * 2, compared);
+        assertEquals(ScheduledCases.ofTheContract().size() * 63 * 2 * 2, compared);
     }
 
     private static int assertIs(Rational expected, KnownValue found, String where) {
@@ -177,8 +105,8 @@ class SchedulingTest {
     @Test
     void formulasOverTheCyclesEqualPlainSteppingForFiveThousandSteps() {
         long compared = 0;
-        for (Map.Entry<String, String> each : cases().entrySet()) {
-            Model model = model(each.getKey(), each.getValue());
+        for (Map.Entry<String, String> each : ScheduledCases.ofTheContract().entrySet()) {
+            Model model = ScheduledCases.model(each.getKey(), each.getValue());
             Timetable timetable = Timetable.of(model.chain(), model.schedule().orElseThrow());
             ScheduledModel found = derived(model);
             FloatingPlain plain = new FloatingPlain(model, STEPS + timetable.period());
@@ -212,44 +140,41 @@ class SchedulingTest {
         private final List<FixedPointState> after = new ArrayList<>();
 
         FloatingPlain(Model model, int steps) {
-            Plain exact = new Plain(model);
             FixedPointState state = FixedPointState.below(model.chain().start());
             before.add(state);
             after.add(state);
             Map<SparseMatrix, List<FixedPointColumn>> columns = new HashMap<>();
-            for (exact.k = 1; exact.k <= steps; exact.k++) {
-                var due = model.schedule().orElseThrow().recurring().stream()
-                        .filter(each -> exact.k >= each.first() && (exact.k - each.first()) % each.every() == 0)
-                        .toList();
-                boolean moves = due.stream().allMatch(each ->
-                        each.when() == org.pofk.chain.Schedule.When.AFTER_THE_STEP);
-                state = moves ? FixedPointState.combination(columns.computeIfAbsent(exact.move(),
-                        FixedPointColumn::below), state.components()) : state;
+            for (int k = 1; k <= steps; k++) {
+                ScheduledCases.Step step = ScheduledCases.Step.of(model, k);
+                if (step.move().isPresent()) {
+                    state = FixedPointState.combination(columns.computeIfAbsent(step.move().get(),
+                            FixedPointColumn::below), state.components());
+                }
                 before.add(state);
-                for (var each : due) {
-                    state = FixedPointState.combination(columns.computeIfAbsent(each.action().matrix(),
+                for (Schedule.Action action : step.actions()) {
+                    state = FixedPointState.combination(columns.computeIfAbsent(action.matrix(),
                             FixedPointColumn::below), state.components());
                 }
                 after.add(state);
             }
         }
 
-        private static org.pofk.exact.Ball reading(FixedPointState state, int place) {
+        private static Ball reading(FixedPointState state, int place) {
             List<Rational> weights = IntStream.range(0, 3)
                     .mapToObj(i -> i == place ? Rational.ONE : Rational.ZERO).toList();
             return state.reading(new Output("state", weights, Rational.ZERO, "state"));
         }
 
-        org.pofk.exact.Ball before(int k, int state) {
+        Ball before(int k, int state) {
             return reading(before.get(k), state);
         }
 
-        org.pofk.exact.Ball after(int k, int state) {
+        Ball after(int k, int state) {
             return reading(after.get(k), state);
         }
 
-        org.pofk.exact.Ball mean(int from, int steps, int state) {
-            org.pofk.exact.Ball sum = after(from, state);
+        Ball mean(int from, int steps, int state) {
+            Ball sum = after(from, state);
             for (int j = 1; j < steps; j++) {
                 sum = sum.plus(after(from + j, state));
             }
@@ -261,8 +186,8 @@ class SchedulingTest {
     @Test
     void theRegimeIsWhatPlainSteppingComesTo() {
         int compared = 0;
-        for (Map.Entry<String, String> each : cases().entrySet()) {
-            Model model = model(each.getKey(), each.getValue());
+        for (Map.Entry<String, String> each : ScheduledCases.ofTheContract().entrySet()) {
+            Model model = ScheduledCases.model(each.getKey(), each.getValue());
             Timetable timetable = Timetable.of(model.chain(), model.schedule().orElseThrow());
             int period = timetable.period() * 6;
             FloatingPlain plain = new FloatingPlain(model, STEPS * 2 + period);
@@ -285,8 +210,8 @@ class SchedulingTest {
     @Test
     void theCertifiedWayEnclosesTheExactOne() {
         int compared = 0;
-        for (Map.Entry<String, String> each : cases().entrySet()) {
-            Model model = model(each.getKey(), each.getValue());
+        for (Map.Entry<String, String> each : ScheduledCases.ofTheContract().entrySet()) {
+            Model model = ScheduledCases.model(each.getKey(), each.getValue());
             Timetable timetable = Timetable.of(model.chain(), model.schedule().orElseThrow());
             StateArithmetic.Fixed fixed = StateArithmetic.Fixed.of(timetable);
             FixedPointState start =
@@ -310,7 +235,7 @@ class SchedulingTest {
                 }
             }
         }
-        assertEquals(cases().size() * 6, compared);
+        assertEquals(ScheduledCases.ofTheContract().size() * 6, compared);
     }
 
     /** Exact identities on random chains: the mean in the long run is that of the values; the joint formula's parts. */
@@ -318,8 +243,8 @@ class SchedulingTest {
     void formulasWithinACycleEqualTheCourse() {
         Random random = new Random(SEED);
         int compared = 0;
-        for (Map.Entry<String, String> each : cases().entrySet()) {
-            Model model = model(each.getKey(), each.getValue());
+        for (Map.Entry<String, String> each : ScheduledCases.ofTheContract().entrySet()) {
+            Model model = ScheduledCases.model(each.getKey(), each.getValue());
             ScheduledModel found = derived(model);
             for (ScheduledOutput output : found.outputs()) {
                 for (StretchFormula formula : output.within()) {
@@ -337,7 +262,7 @@ class SchedulingTest {
 
     @Test
     void jointFormulasEqualTheValuesAtEveryStep() {
-        Model model = model("renewed", "transitions: {good: {failed: 1/8, good: rest}, worn: stays, failed: stays}\n"
+        Model model = ScheduledCases.model("renewed", "transitions: {good: {failed: 1/8, good: rest}, worn: stays, failed: stays}\n"
                 + "actions: {test: {failed: {good: 3/4, failed: rest}}}\nschedule: {every: 6, do: test}\n");
         ScheduledOutput output = derived(model).outputs().get(1);
         JointFormula joint = output.joint().orElseThrow();
