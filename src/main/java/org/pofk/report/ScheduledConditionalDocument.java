@@ -117,7 +117,7 @@ public final class ScheduledConditionalDocument {
         output.longRun().map(this::longRun).ifPresentOrElse(blocks::add, () -> label("in the long run",
                 "not decided: the numbers of a whole cycle are too long for formulas"));
         output.longRun().ifPresent(course -> table(asked, course));
-        blocks.add(new Heading(3, Prose.of("N(k) for ").andName(asked.name())));
+        blocks.add(new Heading(2, Prose.of("N(k) for ").andName(asked.name())));
         formulas(output.joint(), "N");
     }
 
