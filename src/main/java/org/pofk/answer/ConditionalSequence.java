@@ -12,8 +12,8 @@ import org.pofk.modes.ClosedForm;
 import org.pofk.steps.PossibleSteps;
 
 /**
- * One sequence over another, a(k)/b(k), both outputs of one chain: b has no negative coefficient, and a none where b has
- * none, so that it is what an output is given what has probability b. Exact and certified as closed forms are.
+ * One sequence over another, a(k)/b(k), both outputs of one chain: b has no negative coefficient, and a none where b
+ * has none, so that it is what an output is given what has probability b. Exact and certified as closed forms are.
  */
 public final class ConditionalSequence {
     private final ClosedForm joint;

@@ -56,7 +56,8 @@ public record ConditionalWhen(Model model, Given given, List<Output> outputs, Op
         for (int i = 0; i < outputs.size(); i++) {
             ConditionalLongRun longRun = ConditionalForms.longRuns(seen, outputs.size()).get(i);
             When when = possible.filter(PossibleSteps::isNever).isPresent() ? nothingDefined(asked)
-                    : seen.isPresent() && possible.isPresent() ? ConditionalSearch.of(seen.get(), possible.get(), longRun, i, asked)
+                    : seen.isPresent() && possible.isPresent()
+                    ? ConditionalSearch.of(seen.get(), possible.get(), longRun, i, asked)
                     : new When(new Condition(asked.kind(), asked.bound()), Optional.empty(), Optional.empty(),
                             List.of(), false, When.Reason.NO_LONG_RUN);
             List<Integer> around = around(when);

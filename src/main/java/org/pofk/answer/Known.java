@@ -27,7 +27,8 @@ public record Known(Given given, int at, Rational probability, Model model) {
     /** How many bits the steps up to one add, or more than enough of them. */
     private static long bits(Timetable timetable, int at) {
         List<Integer> ofMoves = timetable.moves().stream().map(ExactSteps::bitsPerStep).toList();
-        List<Integer> ofActions = timetable.actions().stream().map(each -> ExactSteps.bitsPerStep(each.matrix())).toList();
+        List<Integer> ofActions = timetable.actions().stream()
+                .map(each -> ExactSteps.bitsPerStep(each.matrix())).toList();
         long bits = 0;
         for (int k = 1; k <= at && bits <= BITS_AT_MOST; k++) {
             Timetable.Moment moment = timetable.at(k);

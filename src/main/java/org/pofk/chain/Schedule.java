@@ -103,7 +103,7 @@ public record Schedule(List<Recurring> recurring, Optional<Phases> phases) {
         recurring = List.copyOf(recurring);
     }
 
-    /** The same as seen from the end of a step, 0 or later: what happens in step k of it happens in step {@code step} + k. */
+    /** The same as seen from the end of a step, 0 or later: its step k is the step {@code step} + k of this. */
     public Schedule after(int step) {
         return new Schedule(recurring.stream().map(each -> each.after(step)).toList(),
                 phases.map(each -> each.after(step)));

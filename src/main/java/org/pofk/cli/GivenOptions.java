@@ -66,8 +66,9 @@ final class GivenOptions {
         }
         Given given = given(read.chain());
         if (read.schedule().isPresent()) {
-            return List.of(new AskedSection(ConditionalDocument.title(given), () -> ScheduledConditionalDocument.section(
-                    ConditionalSchedule.of(read, given, outputs, steps, Scheduling.Formulas.WITHIN_REACH), style)));
+            return List.of(new AskedSection(ConditionalDocument.title(given), () ->
+                    ScheduledConditionalDocument.section(ConditionalSchedule.of(read, given, outputs, steps,
+                            Scheduling.Formulas.WITHIN_REACH), style)));
         }
         return List.of(new AskedSection(ConditionalDocument.title(given), () -> ConditionalDocument.section(
                 ConditionalModel.of(read, given, outputs, steps, partly -> { }), style)));

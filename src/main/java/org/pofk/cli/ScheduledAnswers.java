@@ -64,7 +64,8 @@ final class ScheduledAnswers {
             return options.undecided(streams);
         }
         ScheduledPassage found = outcome.published().get();
-        destination.write(Answer.of(() -> GivenProse.in(ScheduledPassageDocument.of(started, found, style), known, style))
+        destination.write(Answer.of(() ->
+                        GivenProse.in(ScheduledPassageDocument.of(started, found, style), known, style))
                 .with(Format.JSON, () -> ScheduledPassageJson.write(started, known, found, style.digits()))
                 .with(Format.CSV, () -> CsvWriter.write(PassageTable.of(started, found, style.digits())))
                 .with(Format.NOTEBOOK, () -> ScheduledPassageNotebook.write(started, found, style)), streams);
@@ -73,7 +74,8 @@ final class ScheduledAnswers {
 
     /** @param known what the model is seen from, where it isn't its own start */
     static ExitCode when(AnswerOptions options, Model read, Optional<Known> known, List<Output> outputs,
-            WhenModel.Asked asked, Destination destination, Streams streams) throws RefusedException, UsageException, WritingException {
+            WhenModel.Asked asked, Destination destination, Streams streams)
+            throws RefusedException, UsageException, WritingException {
         Style style = options.style();
         Worker.Outcome<ScheduledWhen> outcome = options.within(streams, partly ->
                 partly.answers().size() + " of " + outputs.size() + " outputs answered", published ->

@@ -63,7 +63,8 @@ final class WhenCommand implements Work {
         List<Output> outputs = outputs(read, destination);
         Optional<Integer> step = given.at();
         if (given.isAsked() && step.isEmpty()) {
-            return ScheduledAnswers.when(options, read, given.given(read.chain()), outputs, asked, destination, streams);
+            return ScheduledAnswers.when(options, read, given.given(read.chain()), outputs, asked, destination,
+                    streams);
         }
         if (step.isEmpty()) {
             return ScheduledAnswers.when(options, read, Optional.empty(), outputs, asked, destination, streams);

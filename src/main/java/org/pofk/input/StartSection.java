@@ -94,7 +94,8 @@ final class StartSection {
         if (head.kind() == Chain.Kind.RECURSION && !states.contains(name.name())) {
             boolean isLongRun = name.name().equals(LONG_RUN) || name.name().startsWith(LONG_RUN_OF + " ");
             if (isLongRun || reading.overrides().isStartEach()) {
-                refuseOfRecursion(name, isLongRun ? "doesn't start in a long run" : "doesn't start in each state in turn");
+                refuseOfRecursion(name, isLongRun ? "doesn't start in a long run"
+                        : "doesn't start in each state in turn");
                 return List.of();
             }
         }
@@ -104,9 +105,9 @@ final class StartSection {
 
     private void refuseOfRecursion(Node.Scalar name, String what) {
         String first = states.names().get(0);
-        reading.fault(name.position(), "start-of-a-recursion", "a recursion " + what + "; only a chain of probabilities does."
-                + " Name a state, like " + (reading.overrides().start().isPresent() ? "--start '" + first + "', or leave"
-                + " --start out" : "start: " + first + ", or write numbers, like start: {" + first + ": 1}"));
+        reading.fault(name.position(), "start-of-a-recursion", "a recursion " + what + "; only a chain of probabilities"
+                + " does. Name a state, like " + (reading.overrides().start().isPresent()
+                ? "--start '" + first + "', or leave --start out" : "start: " + first + ", or write numbers, like start: {" + first + ": 1}"));
     }
 
     private List<Rational> fromMapping(Node.Mapping mapping) {

@@ -47,7 +47,8 @@ public final class ConditionalDocument {
         document.write();
         List<Labelled> key = found.outputs().stream()
                 .filter(output -> !isExcluded(output.joint().output()))
-                .flatMap(output -> output.longRun().stream().map(longRun -> new Labelled(Prose.name(output.joint().output().name()).and(", given ").and(document.given),
+                .flatMap(output -> output.longRun().stream().map(longRun ->
+                new Labelled(Prose.name(output.joint().output().name()).and(", given ").and(document.given),
                         Prose.of("long run: ").and(new ConditionalLongRunProse(style.digits()).of(longRun))))).toList();
         return new ReportSection(ReportSection.Place.RESULTS, title(found.given()), key,
                 document.blocks.stream().map(Document::lowered).toList(), document.proofs,

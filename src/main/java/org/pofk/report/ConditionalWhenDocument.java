@@ -30,7 +30,8 @@ public final class ConditionalWhenDocument {
         ConditionalWhenDocument document = new ConditionalWhenDocument(found, style);
         document.blocks.addAll(ModelHead.of(found.model()));
         found.answers().forEach(document::answer);
-        document.blocks.add(document.isScheduled() ? Caution.ofInspections(found.model()) : new Paragraph(Caution.TEXT));
+        document.blocks.add(document.isScheduled() ? Caution.ofInspections(found.model())
+                : new Paragraph(Caution.TEXT));
         return new Document(document.blocks);
     }
 

@@ -108,8 +108,8 @@ public final class ScheduledConditionalDocument {
             return;
         }
         blocks.add(new Labelled("is", ConditionalDocument.quotient(asked, given)));
-        label("read", "at the end of step k, after what is done there; just before it, where that is said, what is given"
-                + " is known just before it too");
+        label("read", "at the end of step k, after what is done there; just before it, where that is said, what is"
+                + " given is known just before it too");
         defined();
         output.preamble().ifPresent(course -> blocks.add(summary("before the cycles", course)));
         output.first().filter(course -> timetable.period() > 1)
@@ -147,8 +147,8 @@ public final class ScheduledConditionalDocument {
                     : "not decided"));
         }
         boolean isEverywhere = course.readings().stream().allMatch(each -> each.after().kind() == Value.Kind.VALUE);
-        return new Labelled(label, Prose.of(course.average().map(average -> "average " + number(average) + " over the steps"
-                + (isEverywhere ? "" : " where it is defined") + ", each given what is known then; highest ")
+        return new Labelled(label, Prose.of(course.average().map(average -> "average " + number(average)
+                + " over the steps" + (isEverywhere ? "" : " where it is defined") + ", each given what is known then; highest ")
                 .orElse("highest ")).and(extreme(course.highest().get())).and("; lowest ")
                 .and(extreme(course.lowest().orElseThrow())));
     }

@@ -9,8 +9,8 @@ import org.pofk.schedule.ConditionalSchedule.Conditional;
 import org.pofk.schedule.CycleCourse.Side;
 
 /**
- * Outputs of a model with a schedule given what is known: rows as in {@link ScheduledTable}; the number's cells are empty
- * where that is impossible.
+ * Outputs of a model with a schedule given what is known: rows as in {@link ScheduledTable}; the number's cells are
+ * empty where that is impossible.
  */
 public final class ScheduledConditionalTable {
     private ScheduledConditionalTable() {
@@ -25,8 +25,8 @@ public final class ScheduledConditionalTable {
             for (Reading reading : readings(output, timetable)) {
                 for (Side side : ScheduledTable.sides(timetable, reading.j())) {
                     rows.add(List.of(Prose.name(output.output().name())), steps.cells(reading.j()),
-                            Rows.words(side == Side.BEFORE ? "before" : "after"), reading.at(side).value().map(rows::value)
-                                    .orElse(List.of(Prose.EMPTY, Prose.EMPTY)));
+                            Rows.words(side == Side.BEFORE ? "before" : "after"),
+                            reading.at(side).value().map(rows::value).orElse(List.of(Prose.EMPTY, Prose.EMPTY)));
                 }
             }
         }

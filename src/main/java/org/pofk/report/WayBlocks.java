@@ -88,9 +88,9 @@ final class WayBlocks {
                 + " them is a line of the table of transforms, and stands for a term in k.")));
         if (outputs.stream().flatMap(output -> output.closedForm().stream())
                 .anyMatch(form -> form.derivation().factors().stream().anyMatch(step -> !step.pairs().isEmpty()))) {
-            rule.add(new Paragraph("A complex pole λ comes with its conjugate, and the coefficient there is the conjugate of"
-                    + " its own, R. So the two terms are conjugates of each other, and join to twice the real part of one:"
-                    + " 2|R| |λ|^k cos(k arg λ + arg R), where the sign of arg R is that of the imaginary part of R."));
+            rule.add(new Paragraph("A complex pole λ comes with its conjugate, and the coefficient there is the"
+                    + " conjugate of its own, R. So the two terms are conjugates of each other, and join to twice the"
+                    + " real part of one: 2|R| |λ|^k cos(k arg λ + arg R), where the sign of arg R is that of the imaginary part of R."));
         }
         return rule;
     }

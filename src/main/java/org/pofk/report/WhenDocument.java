@@ -174,7 +174,8 @@ public final class WhenDocument {
             case AGAIN_AND_AGAIN -> "met and missed again and again, for ever";
             case ONLY_FOR_A_WHILE -> "only for a while: from some step on never again";
             case NEVER -> "never, proved for every k";
-            case NOTHING_DEFINED -> "none: nothing is defined, as what is given has probability zero at every step, proved";
+            case NOTHING_DEFINED -> "none: nothing is defined, as what is given has probability zero at every step,"
+                    + " proved";
             case NO_LONG_RUN -> "not decided: there is neither a limit nor a cycle to compare with";
             case APPROACH_NOT_DECIDED -> "not decided: the value asked for is the long run itself, and nothing known"
                     + " decides from which side it is approached in the end";

@@ -14,8 +14,8 @@ import org.pofk.steps.KnownValue;
  * there are. As in {@link CycleCourse} what is before the actions of step 0 is no value of its own.
  *
  * @param readings at j = 0 … n
- * @param average  mean of the values after at j = 0 … n − 1, each given what is known at its own step; empty where there
- *                 is none, or some aren't decided
+ * @param average  mean of the values after at j = 0 … n − 1, each given what is known at its own step; empty where
+ *                 there is none, or some aren't decided
  * @param highest  over the values before at j = 1 … n and after at j = 0 … n − 1
  */
 public record ConditionalCourse(List<Reading> readings, Optional<KnownValue> average, Optional<Extreme> highest,
@@ -64,7 +64,8 @@ public record ConditionalCourse(List<Reading> readings, Optional<KnownValue> ave
         }).toList();
         List<Reading> begun = readings.subList(0, steps);
         List<KnownValue> after = begun.stream().flatMap(each -> each.after.value.stream()).toList();
-        boolean isMean = !after.isEmpty() && begun.stream().noneMatch(each -> each.after.kind == Value.Kind.NOT_DECIDED);
+        boolean isMean = !after.isEmpty()
+                && begun.stream().noneMatch(each -> each.after.kind == Value.Kind.NOT_DECIDED);
         return new ConditionalCourse(readings, isMean ? Optional.of(KnownValue.mean(after)) : Optional.empty(),
                 extreme(readings, 1), extreme(readings, -1));
     }

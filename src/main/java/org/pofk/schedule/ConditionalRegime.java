@@ -31,8 +31,8 @@ final class ConditionalRegime {
     }
 
     /** Over as many cycles as it takes until it recurs; empty where it isn't decided. */
-    static Optional<ConditionalCourse> of(ScheduledChain chain, Optional<PossibleMoments> possible, ScheduledOutput joint,
-            ScheduledOutput event) {
+    static Optional<ConditionalCourse> of(ScheduledChain chain, Optional<PossibleMoments> possible,
+            ScheduledOutput joint, ScheduledOutput event) {
         ConditionalRegime regime = new ConditionalRegime(chain);
         return regime.kept(possible, recurring(joint), recurring(event)).or(() -> regime.byPoles(joint, event));
     }

@@ -8,8 +8,8 @@ import org.pofk.chain.Output;
 import org.pofk.schedule.ConditionalCourse.Reading;
 
 /**
- * Outputs of a model with a schedule given what is known at the same moment: quotients of two formulas that are shown and
- * proved, N(k)/D(k).
+ * Outputs of a model with a schedule given what is known at the same moment: quotients of two formulas that are shown
+ * and proved, N(k)/D(k).
  *
  * @param stopped  what was found of D and then of the N, in the order of {@code outputs}: of the model in which what is
  *                 entered that is known never to have been isn't left again, neither by a move nor by an action

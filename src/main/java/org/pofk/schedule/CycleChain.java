@@ -80,13 +80,15 @@ final class CycleChain {
 
     /** The same at each step j = 0 … T − 1 of a cycle. */
     List<CycleFormula> formulas(Output output) {
-        return formulas(output, IntStream.range(0, timetable.period()).mapToObj(j -> new Place(j, Side.AFTER)).toList());
+        return formulas(output, IntStream.range(0, timetable.period())
+                .mapToObj(j -> new Place(j, Side.AFTER)).toList());
     }
 
     /** The same at these places. */
     List<CycleFormula> formulas(Output output, List<Place> places) {
         CycleOutputs later = new CycleOutputs(timetable, matrices, output);
-        List<Transform> transforms = Transforms.of(chain, places.stream().map(at -> later.at(at.j(), at.side())).toList());
+        List<Transform> transforms = Transforms.of(chain, places.stream()
+                .map(at -> later.at(at.j(), at.side())).toList());
         return IntStream.range(0, places.size()).mapToObj(i ->
                 formula(Optional.of(places.get(i)), transforms.get(i))).toList();
     }

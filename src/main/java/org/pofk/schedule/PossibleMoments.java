@@ -15,8 +15,8 @@ import org.pofk.schedule.CycleCourse.Side;
 import org.pofk.steps.PossibleSteps;
 
 /**
- * At which steps a scheduled chain can be in a set of states, just before and just after what is done there: which states
- * carry probability where a cycle begins follows from which did where the one before began, so they repeat. Exact: a
+ * At which steps a scheduled chain can be in a set of states, just before and just after what is done there: which
+ * states carry probability where a cycle begins follows from which did where the one before began, so they repeat. Exact: a
  * matter of moves and actions, not of numbers. What is before the actions of step 0 is what is after them.
  */
 public record PossibleMoments(PossibleSteps before, PossibleSteps after) {

@@ -44,8 +44,8 @@ public final class ScheduledConditionalWhen {
     private final List<Place> places;
 
     private ScheduledConditionalWhen(Model stopped, Given given) {
-        this.chain = ScheduledChain.of(stopped.chain(), Timetable.of(stopped.chain(), stopped.schedule().orElseThrow()));
-        this.timetable = chain.timetable();
+        this.timetable = Timetable.of(stopped.chain(), stopped.schedule().orElseThrow());
+        this.chain = ScheduledChain.of(stopped.chain(), timetable);
         this.possible = PossibleMoments.of(timetable, stopped.chain().start(), given.in()).map(PossibleMoments::after);
         this.event = given.event(stopped.chain());
         this.places = IntStream.range(0, timetable.period()).mapToObj(j -> new Place(j, Side.AFTER)).toList();
@@ -79,8 +79,8 @@ public final class ScheduledConditionalWhen {
     }
 
     private static When notDecided(WhenModel.Asked asked, Reason reason) {
-        return new When(new Condition(asked.kind(), asked.bound()), Optional.empty(), Optional.empty(), List.of(), false,
-                reason);
+        return new When(new Condition(asked.kind(), asked.bound()), Optional.empty(), Optional.empty(), List.of(),
+                false, reason);
     }
 
     private When when(Output joint, List<ConditionalSequence> sequences, List<ConditionalLongRun> limits,
@@ -119,7 +119,8 @@ public final class ScheduledConditionalWhen {
         if (above.exact().isPresent() && below.exact().isPresent()) {
             return Optional.of(above.exact().get().minus(below.exact().get().times(t)).signum());
         }
-        Ball difference = above.enclosure().enclose(BITS).minus(below.enclosure().enclose(BITS).times(Ball.of(t, BITS)));
+        Ball difference = above.enclosure().enclose(BITS)
+                .minus(below.enclosure().enclose(BITS).times(Ball.of(t, BITS)));
         return difference.sign().stream().boxed().findFirst();
     }
 
@@ -127,13 +128,14 @@ public final class ScheduledConditionalWhen {
     private static Optional<Boolean> isNear(KnownValue above, KnownValue below, Rational bound, RealValue limit) {
         Rational near = ConditionalLongRun.near(limit);
         Rational within = limit.rational().isPresent() ? Rational.ZERO : ConditionalLongRun.NEAR_WITHIN;
-        Optional<Boolean> inner = isBetween(above, below, near.minus(bound).plus(within), near.plus(bound).minus(within));
-        Optional<Boolean> outer = isBetween(above, below, near.minus(bound).minus(within), near.plus(bound).plus(within));
+        Optional<Boolean> inner = isNear(above, below, near, bound.minus(within));
+        Optional<Boolean> outer = isNear(above, below, near, bound.plus(within));
         return inner.equals(outer) ? inner : Optional.empty();
     }
 
-    private static Optional<Boolean> isBetween(KnownValue above, KnownValue below, Rational least, Rational most) {
-        return sign(above, below, least).flatMap(low -> sign(above, below, most).map(high -> low >= 0 && high <= 0));
+    private static Optional<Boolean> isNear(KnownValue above, KnownValue below, Rational middle, Rational distance) {
+        return sign(above, below, middle.minus(distance)).flatMap(low ->
+                sign(above, below, middle.plus(distance)).map(high -> low >= 0 && high <= 0));
     }
 
     /** By the residue of k. */

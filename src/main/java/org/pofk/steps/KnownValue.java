@@ -56,8 +56,8 @@ public record KnownValue(Word word, Optional<Rational> exact, Enclosed enclosure
     }
 
     private static Ball mean(List<KnownValue> values, int bits) {
-        return values.stream().map(each -> each.enclosure.enclose(bits)).reduce(Ball.of(Rational.ZERO, bits), Ball::plus)
-                .dividedBy(values.size());
+        return values.stream().map(each -> each.enclosure.enclose(bits))
+                .reduce(Ball.of(Rational.ZERO, bits), Ball::plus).dividedBy(values.size());
     }
 
     /** Positive where this is the larger one, zero where they can't be told apart. */
