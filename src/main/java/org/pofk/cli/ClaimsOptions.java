@@ -30,8 +30,8 @@ final class ClaimsOptions {
             return List.of();
         }
         if (read.schedule().isPresent()) {
-            throw new UsageException("'" + read.origin().file() + "' has a schedule: claims are judged of a model that moves"
-                    + " by one matrix alone; leave --claims out, and compare by hand with what the report states");
+            throw new UsageException("'" + read.origin().file() + "' has a schedule: claims are judged of a model that"
+                    + " moves by one matrix alone; leave --claims out, and compare by hand with what the report states");
         }
         Source source = Source.read(file.get());
         Overrides overrides = settings.overrides();

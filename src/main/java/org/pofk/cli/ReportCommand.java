@@ -45,7 +45,8 @@ final class ReportCommand implements Work {
     private List<String> of = new ArrayList<>();
 
     @Option(names = "--at", paramLabel = "STEPS", converter = StepList.Converter.class, defaultValue = "0..10,20,50",
-            description = {"the steps of the table of values; ${DEFAULT-VALUE}", "otherwise, and later ones where it settles later"})
+            description = {"the steps of the table of values; ${DEFAULT-VALUE}",
+                    "otherwise, and later ones where it settles later"})
     private StepList at;
 
     @Option(names = "--show", paramLabel = "DEPTH", defaultValue = "full",
@@ -125,7 +126,7 @@ final class ReportCommand implements Work {
         return new AskedReport(read, outputs, sections(read, outputs, style), at.steps(), reach(), extras());
     }
 
-    /** The same of the model of an earlier issue, as far as it can be asked of that one; states by their later names. */
+    /** The same of the model of an earlier issue, as far as it can be asked of that; states by their later names. */
     private AskedReport earlier(Model model, Model later, Style style) throws RefusedException, UsageException {
         Chain chain = ModelChanges.of(model, later).renamed(model.chain());
         List<Output> outputs = AskedOutputs.thoseOf(chain, of);

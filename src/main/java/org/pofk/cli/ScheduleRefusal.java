@@ -19,7 +19,8 @@ final class ScheduleRefusal {
 
     private static String what(Model model) {
         return model.schedule().filter(each -> each.recurring().isEmpty()).isPresent() ? "phases"
-                : model.schedule().filter(each -> each.phases().isPresent()).isPresent() ? "scheduled actions and phases"
+                : model.schedule().filter(each -> each.phases().isPresent()).isPresent()
+                        ? "scheduled actions and phases"
                 : "scheduled actions";
     }
 }

@@ -33,7 +33,8 @@ final class ScheduledReporting {
     }
 
     static ExitCode write(AnswerOptions options, AskedReport asked, Optional<AskedReport> earlier, Report.Depth depth,
-            Provenance provenance, Destination destination, Streams streams) throws RefusedException, UsageException, WritingException {
+            Provenance provenance, Destination destination, Streams streams)
+            throws RefusedException, UsageException, WritingException {
         Style style = options.style();
         Convention convention = options.convention(asked.model());
         Worker.Outcome<ScheduledReport> outcome = options.within(streams, published -> {
@@ -58,8 +59,8 @@ final class ScheduledReporting {
             Consumer<ScheduledReport> published) {
         List<ReportSection> none = asked.notReached();
         ScheduledModel found = Scheduling.of(asked.model(), asked.outputs(), asked.at(),
-                Scheduling.Formulas.WITHIN_REACH, partly -> published.accept(new ScheduledReport(partly, Optional.empty(),
-                        none, Optional.empty(), provenance)));
+                Scheduling.Formulas.WITHIN_REACH, partly -> published.accept(new ScheduledReport(partly,
+                        Optional.empty(), none, Optional.empty(), provenance)));
         List<Integer> drawn = ScheduledCourse.steps(found.timetable());
         Optional<Chart.Course> course = ScheduledCourse.of(Scheduling.of(asked.model(), asked.outputs(), drawn,
                 Scheduling.Formulas.WITHIN_REACH, partly -> { }), drawn);

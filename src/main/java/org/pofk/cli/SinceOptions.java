@@ -15,8 +15,9 @@ final class SinceOptions {
     private Optional<Path> file = Optional.empty();
 
     /**
-     * The model, and then the earlier one where it is asked for: read as the model itself is, with what the command line
-     * puts in place of its words. Where one of the two has a schedule, both do: the other one in which nothing is done.
+     * The model, and then the earlier one where it is asked for: read as the model itself is, with what the command
+     * line puts in place of its words. Where one of the two has a schedule, both do: the other one in which nothing is
+     * done.
      */
     List<Model> models(AnswerOptions options) throws RefusedException, UsageException {
         if (file.isEmpty()) {

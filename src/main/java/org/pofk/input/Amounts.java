@@ -79,7 +79,8 @@ final class Amounts {
 
     private static Optional<Node.Scalar> scalar(Node node) {
         Optional<Node> value = node.asMapping().map(mapping -> mapping.entries().stream()
-                .filter(entry -> entry.name().equals("value")).map(Node.Entry::value).findFirst()).orElse(Optional.of(node));
+                .filter(entry -> entry.name().equals("value")).map(Node.Entry::value).findFirst())
+                        .orElse(Optional.of(node));
         return value.flatMap(Node::asScalar);
     }
 

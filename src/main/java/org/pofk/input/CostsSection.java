@@ -83,7 +83,8 @@ final class CostsSection {
         }
         return new Costs(fields.value("unit").flatMap(unit -> reading.text(unit, "'unit'")).orElse(UNIT),
                 fields.value("each step in").map(node -> eachIn(node, "each step in",
-                        Place.of(Part.COSTS_OF_EACH_STEP), state -> Entry.of(Subject.COST_OF_STATE, state))).orElseGet(() -> byState(Map.of())),
+                        Place.of(Part.COSTS_OF_EACH_STEP), state -> Entry.of(Subject.COST_OF_STATE, state)))
+                                .orElseGet(() -> byState(Map.of())),
                 fields.value("each move").map(this::eachMove).orElse(List.of()),
                 actions.stream().filter(action -> keys.indexOf(key(action)) >= KEYS.size())
                         .flatMap(action -> fields.value(key(action)).map(node -> new Costs.OfAction(action,
@@ -139,7 +140,8 @@ final class CostsSection {
             for (Node.Entry from : costed(mapping, Place.of(Part.COSTS_OF_MOVES))) {
                 List<Integer> left = members(from.key());
                 reading.mapping(from.value(), "what moves from '" + Words.shortened(from.name()) + "' cost",
-                        "{OTHER: 40}").ifPresent(targets -> costed(targets, Place.named("costs of moves from '" + from.name() + "'"))
+                        "{OTHER: 40}").ifPresent(targets -> costed(targets, Place.named("costs of moves from '"
+                                + from.name() + "'"))
                         .forEach(to -> found.addAll(moves(from, to, left, seen))));
             }
         });

@@ -30,7 +30,8 @@ final class ChangeBlocks {
     /** What fits into a column of a table with two of its kind. */
     private static final int SHORT = 24;
     private static final Set<Subject> NUMBERS = EnumSet.of(Subject.START, Subject.PARAMETER, Subject.MOVE,
-            Subject.ACTION_MOVE, Subject.PHASE_MOVE, Subject.COST_OF_STATE, Subject.COST_OF_MOVE, Subject.COST_OF_ACTION,
+            Subject.ACTION_MOVE, Subject.PHASE_MOVE, Subject.COST_OF_STATE, Subject.COST_OF_MOVE,
+                    Subject.COST_OF_ACTION,
             Subject.COST_AT_START, Subject.DISCOUNT);
 
     private final Reissue reissue;
@@ -76,7 +77,8 @@ final class ChangeBlocks {
         }
         table(changes.stream().filter(ChangeBlocks::isShort).filter(change -> !isNumber(change)).toList(), NOTHING);
         table(changes.stream().filter(ChangeBlocks::isShort).filter(ChangeBlocks::isNumber).toList(), Prose.EMPTY);
-        changes.stream().filter(change -> !isShort(change)).forEach(change -> beforeAndNow(EntryProse.of(change.entry()),
+        changes.stream().filter(change -> !isShort(change)).forEach(change ->
+                beforeAndNow(EntryProse.of(change.entry()),
                 change.before().map(Prose::name), change.after().map(Prose::name)));
     }
 
@@ -100,7 +102,8 @@ final class ChangeBlocks {
     }
 
     private static boolean isShort(Change change) {
-        return Stream.concat(change.before().stream(), change.after().stream()).allMatch(text -> text.length() <= SHORT);
+        return Stream.concat(change.before().stream(), change.after().stream()).allMatch(text ->
+                text.length() <= SHORT);
     }
 
     private void beforeAndNow(Prose label, Optional<Prose> was, Optional<Prose> is) {
@@ -121,7 +124,8 @@ final class ChangeBlocks {
         Map<Integer, StepValue> was = values(old);
         Map<Integer, StepValue> is = values(now);
         if (!is.isEmpty()) {
-            blocks.add(new Table(now.reading(), List.of(Prose.of("k"), Prose.of(BEFORE), Prose.of(NOW), Prose.of("change")),
+            blocks.add(new Table(now.reading(), List.of(Prose.of("k"), Prose.of(BEFORE), Prose.of(NOW),
+                    Prose.of("change")),
                     is.keySet().stream().map(k -> row(k, Optional.ofNullable(was.get(k)), Optional.of(is.get(k))))
                             .toList()));
         }
@@ -168,7 +172,8 @@ final class ChangeBlocks {
 
     private void answers() {
         List<Labelled> same = reissue.answersAsBefore();
-        List<Labelled> was = Reissue.keyFigures(reissue.before()).stream().filter(each -> !same.contains(each)).toList();
+        List<Labelled> was = Reissue.keyFigures(reissue.before()).stream().filter(each -> !same.contains(each))
+                .toList();
         List<Labelled> is = Reissue.keyFigures(reissue.after()).stream().filter(each -> !same.contains(each)).toList();
         if (!was.isEmpty() || !is.isEmpty() || !same.isEmpty()) {
             blocks.add(new Heading(3, "Answers"));

@@ -46,8 +46,8 @@ final class CostBlocks {
         }
         costs.discount().ifPresent(rate -> row(Subject.DISCOUNT, List.of(), rate));
         return List.of(new Heading(3, "Costs"), rows.size() > MoveBlocks.LISTED_UP_TO
-                ? new Paragraph(Prose.of(rows.size() + " amounts in ").andName(costs.unit()).and(", too many to be listed"
-                        + " here; they are those of the model file, whose checksum is at the end."))
+                ? new Paragraph(Prose.of(rows.size() + " amounts in ").andName(costs.unit()).and(", too many to be"
+                        + " listed here; they are those of the model file, whose checksum is at the end."))
                 : new Table(Prose.of("Amounts in ").andName(costs.unit()).and(costs.discount().isPresent()
                         ? "; the discount is a rate, not an amount" : ""),
                         List.of(Prose.of("what"), Prose.of("decimal"), Prose.of("exact"),

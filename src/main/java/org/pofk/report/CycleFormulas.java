@@ -63,7 +63,8 @@ final class CycleFormulas {
 
     private Prose range(StretchFormula formula, List<Cycle> cycles) {
         int steps = formula.to() - formula.from();
-        String cycle = cycles.containsAll(List.of(Cycle.FIRST, Cycle.LONG_RUN)) ? "in the first cycle and in the long run"
+        String cycle = cycles.containsAll(List.of(Cycle.FIRST, Cycle.LONG_RUN))
+                ? "in the first cycle and in the long run"
                 : cycles.contains(Cycle.FIRST) ? "in the first cycle" : "in the long run";
         return Prose.of(cycle + ", 0 ≤ j ≤ " + steps).and(ScheduleProse.isActed(timetable, formula.to())
                 ? Prose.of("; j = " + steps + " is just before ").and(ScheduleProse.done(timetable, formula.to()))

@@ -17,27 +17,38 @@ final class CycleProof {
     private CycleProof() {
     }
 
-    /** In a line, behind the formulas. */
-    static Labelled holds(Timetable timetable, CycleFormula formula) {
-        return new Labelled("holds", "for every cycle: " + because(timetable, formula.closedForm().transform()));
+    /** In a line, behind the formulas; one at least. */
+    static Labelled holds(Timetable timetable, List<CycleFormula> formulas) {
+        List<Transform> transforms = formulas.stream().map(formula -> formula.closedForm().transform()).toList();
+        String because = transforms.stream().map(CycleProof::because).distinct().count() == 1
+                ? because(transforms.get(0)) : becauseOfEach(transforms);
+        return new Labelled("holds", "for every cycle: with S, the matrix of a whole cycle, x("
+                + ScheduleProse.step(timetable, timetable.period() == 1 ? "m+1" : "(m+1)", "") + ") = S x("
+                + ScheduleProse.step(timetable, "m", "") + "), " + because);
     }
 
-    private static String because(Timetable timetable, Transform transform) {
+    private static String becauseOfEach(List<Transform> transforms) {
+        int order = transforms.stream().mapToInt(each -> each.recurrence().degree()).max().orElseThrow();
+        int states = transforms.stream().mapToInt(each -> each.proof().order()).max().orElseThrow();
+        return "the exact terms compared of each satisfy a recurrence of order " + order + " at most, and "
+                + (states == 1 ? "one state takes part" : "up to " + states + " states take part")
+                        + " (Cayley–Hamilton)";
+    }
+
+    private static String because(Transform transform) {
         RecurrenceProof proof = transform.proof();
         int order = transform.recurrence().degree();
         if (proof.order() == 0) {
             return "nothing that the start reaches takes part";
         }
         String states = proof.order() == 1 ? "one state takes part" : proof.order() + " states take part";
-        return "with S, the matrix of a whole cycle, x("
-                + ScheduleProse.step(timetable, timetable.period() == 1 ? "m+1" : "(m+1)", "") + ") = S x("
-                + ScheduleProse.step(timetable, "m", "") + "), " + switch (proof.method()) {
-                    case CHARACTERISTIC -> "the sequence in m needs a recurrence of order " + order + ", and " + states
-                            + ", so it is their characteristic polynomial (Cayley–Hamilton)";
-                    case WINDOWS -> terms(proof.comparedSteps(), order) + ", and " + states + " (Cayley–Hamilton)";
-                    case VECTOR -> "a recurrence of order " + order + " annihilates the state where cycles begin, and"
-                            + " so every output at every step of the cycle";
-                };
+        return switch (proof.method()) {
+            case CHARACTERISTIC -> "the sequence in m needs a recurrence of order " + order + ", and " + states
+                    + ", so it is their characteristic polynomial (Cayley–Hamilton)";
+            case WINDOWS -> terms(proof.comparedSteps(), order) + ", and " + states + " (Cayley–Hamilton)";
+            case VECTOR -> "a recurrence of order " + order + " annihilates the state where cycles begin, and"
+                    + " so every output at every step of the cycle";
+        };
     }
 
     private static String terms(int count, int order) {
@@ -51,8 +62,8 @@ final class CycleProof {
         if (formulas.stream().anyMatch(each -> each.transform().proof().method() != Method.VECTOR)) {
             blocks.add(new Paragraph("On the n states that take part in a sequence over the cycles, S satisfies its own"
                     + " characteristic polynomial (Cayley–Hamilton). So a recurrence of order d that holds at"
-                    + " m = 0 … n − 1, which the terms m = 0 … n + d − 1 decide, holds for every cycle; and a formula that"
-                    + " obeys the recurrence and has the first d terms is the sequence itself."));
+                    + " m = 0 … n − 1, which the terms m = 0 … n + d − 1 decide, holds for every cycle; and a formula"
+                    + " that obeys the recurrence and has the first d terms is the sequence itself."));
         }
         if (formulas.stream().anyMatch(each -> each.transform().proof().method() == Method.VECTOR)) {
             blocks.add(new Paragraph("Where a polynomial D of S takes the state in which cycles begin to zero, in every"

@@ -27,7 +27,8 @@ final class LatexTable {
         }
 
         String kind() {
-            return isBroken() ? ">{\\raggedright\\arraybackslash{}}" + wide(room / (double) WIDTH) : plain.isNumeric() ? "r" : "l";
+            return isBroken() ? ">{\\raggedright\\arraybackslash{}}" + wide(room / (double) WIDTH) : plain.isNumeric()
+                    ? "r" : "l";
         }
 
         /** Converters know raggedness in a cell alone; there it makes an empty line in what LaTeX sets. */
@@ -137,7 +138,8 @@ final class LatexTable {
             lines.add(row(group.stream().map(column -> column.cell(column.cells.get(row), layout)).toList())
                     + (isKept(row, rows) && isSetAsItIs && !isOnePiece ? "*" : ""));
         }
-        lines.addAll(isOnePiece ? List.of("\\bottomrule", "\\end{tabular}\\par\\vspace{12pt}}") : List.of("\\end{longtable}}"));
+        lines.addAll(isOnePiece ? List.of("\\bottomrule", "\\end{tabular}\\par\\vspace{12pt}}")
+                : List.of("\\end{longtable}}"));
         return lines;
     }
 

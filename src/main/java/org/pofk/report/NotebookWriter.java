@@ -60,8 +60,8 @@ public final class NotebookWriter {
         List<DerivedModel> recursions = found.totals().stream().map(total -> recursion(found, total)).toList();
         List<Block> head = new ArrayList<>(ModelHead.of(found.model()));
         head.add(new Paragraph(WHAT_IT_DOES));
-        head.add(new Paragraph("A total is an output of a linear recursion: the states of the model, and behind them what"
-                + " the moves of a step add and what was added before."));
+        head.add(new Paragraph("A total is an output of a linear recursion: the states of the model, and behind them"
+                + " what the moves of a step add and what was added before."));
         List<Notebook.Cell> cells = new ArrayList<>();
         for (int i = 0; i < recursions.size(); i++) {
             NotebookWriter writer = new NotebookWriter(recursions.get(i), style, convention);
@@ -95,8 +95,8 @@ public final class NotebookWriter {
         head.add(new Heading(2, section.title()));
         head.addAll(section.blocks());
         head.add(new Paragraph(WHAT_IT_DOES));
-        head.add(new Paragraph("They prove law, distribution and survival; moments, percentiles, visits and what holds from"
-                + " each state are stated, not worked out again."));
+        head.add(new Paragraph("They prove law, distribution and survival; moments, percentiles, visits and what holds"
+                + " from each state are stated, not worked out again."));
         writer.text(head);
         writer.chain();
         writer.derived.outputs().forEach(writer::output);

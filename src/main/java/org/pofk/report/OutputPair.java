@@ -5,7 +5,7 @@ import java.util.List;
 import java.util.Optional;
 import org.pofk.chain.ModelChanges;
 
-/** An output in an earlier report and in a later one, in one of them at least; a renamed state goes by its later name. */
+/** An output in an earlier report and in a later one, or in one of them; a renamed state goes by its later name. */
 record OutputPair(Optional<FoundOutput> before, Optional<FoundOutput> now) {
 
     /** How the two compare. */
@@ -31,7 +31,8 @@ record OutputPair(Optional<FoundOutput> before, Optional<FoundOutput> now) {
 
     Standing standing() {
         return before.isEmpty() ? Standing.NEW : now.isEmpty() ? Standing.GONE
-                : before.get().identity().isPresent() && before.get().identity().equals(now.get().identity()) ? Standing.AS_BEFORE : Standing.MOVED;
+                : before.get().identity().isPresent() && before.get().identity().equals(now.get().identity())
+                        ? Standing.AS_BEFORE : Standing.MOVED;
     }
 
     /** Which of the formula's shape and numbers are other ones, where both reports have it. */

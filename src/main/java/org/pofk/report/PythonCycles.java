@@ -69,7 +69,8 @@ final class PythonCycles {
     static String within(Prose name, StretchFormula formula, String pairs) {
         List<String> lines = new ArrayList<>(List.of(named(name)));
         lines.addAll(PythonOutput.alone(formula.closedForm()));
-        lines.addAll(List.of("", "y = stretch(c, constant, " + pairs + ", " + formula.from() + ", " + formula.to() + ")",
+        lines.addAll(List.of("", "y = stretch(c, constant, " + pairs + ", " + formula.from() + ", " + formula.to()
+                + ")",
                 "require(f\"{name}: the formula is what is stepped, at every one of its steps\",",
                 "        closed_form(impulses, parts, len(y)) == y)"));
         return String.join("\n", lines);
@@ -86,8 +87,8 @@ final class PythonCycles {
         lines.addAll(List.of("", "cycles = taking_part(constant) + len(joint)",
                 "require(f\"{name}: the formula is what is stepped at every j in the first {cycles} cycles, and so in"
                         + " all\", all(",
-                "    stretch(c, constant, cycle_of(m), 0, " + formula.to() + ") == [sum(base ** m * at[j] for base, at in"
-                        + " joint)",
+                "    stretch(c, constant, cycle_of(m), 0, " + formula.to() + ") == [sum(base ** m * at[j] for base, at"
+                        + " in joint)",
                 "                                                  for j in range(" + (formula.to() + 1) + ")]",
                 "    for m in range(cycles)))"));
         return String.join("\n", lines);

@@ -26,7 +26,8 @@ final class PythonOutput {
         int order = transform.recurrence().degree();
         List<String> lines = new ArrayList<>(List.of(
                 "name = " + Python.text(output.name()),
-                "c, constant = " + Python.numbers(output.coefficients()) + ", Fraction(\"" + output.constant() + "\")"));
+                "c, constant = " + Python.numbers(output.coefficients()) + ", Fraction(\"" + output.constant()
+                        + "\")"));
         lines.addAll(claimed(transform));
         lines.addAll(List.of("",
                 "n, d = annihilated_by_degree(c, constant), " + order,
@@ -57,8 +58,8 @@ final class PythonOutput {
     /** That they are those of the terms in y, in steps called k or m. */
     static List<String> proof(String k) {
         return List.of(
-                "require(f\"{name}: the recurrence of order {d} holds at " + k + " = 0 ... {n - 1}, and so for every " + k
-                        + "\",",
+                "require(f\"{name}: the recurrence of order {d} holds at " + k + " = 0 ... {n - 1}, and so for every "
+                        + k + "\",",
                 "        len(recurrence) == d + 1 and recurrence[-1] == 1 and satisfies(recurrence, y, n))",
                 "require(f\"{name}: the denominator of Y(z) is the recurrence, up to a z that cancels\",",
                 "        recurrence in (denominator, [Fraction(0)] + denominator))",
@@ -118,7 +119,8 @@ final class PythonOutput {
     private static String coefficients(Part<Rational> part) {
         return part.coefficients().stream().map(coefficient -> coefficient.isReduced()
                 ? Python.numbers(coefficient.numerator().times(coefficient.denominator().coefficient(0).inverse()))
-                : "(" + Python.numbers(coefficient.numerator()) + ", " + Python.numbers(coefficient.denominator()) + ")")
+                : "(" + Python.numbers(coefficient.numerator()) + ", " + Python.numbers(coefficient.denominator())
+                        + ")")
                 .collect(Collectors.joining(", ", "[", "]"));
     }
 }

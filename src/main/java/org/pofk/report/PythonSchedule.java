@@ -17,7 +17,8 @@ import org.pofk.steps.KnownValue;
 /** A chain with its timetable, and courses of outputs, as Python. */
 final class PythonSchedule {
     /** Behind a chain and the tools. */
-    static final String BEGIN = "begin = stepped(start, preamble)[-1][1]  # where the first cycle begins\ncycle_path = []";
+    static final String BEGIN = "begin = stepped(start, preamble)[-1][1]  # where the first cycle begins\n"
+            + "cycle_path = []";
 
     private static final int BITS = 128;
 

@@ -42,8 +42,8 @@ public final class ReportDocument {
 
     /**
      * What is brief leaves out how the formulas were derived and checked, not why they hold. What is other than in the
-     * same report of an earlier model is marked, said in short before all results and in full behind the answers; a file's
-     * name alone is no difference.
+     * same report of an earlier model is marked, said in short before all results and in full behind the answers; a
+     * file's name alone is no difference.
      */
     public static Document of(Report report, Depth depth, Style style, Convention convention) {
         Document document = alone(report.alone(), depth, style, convention);

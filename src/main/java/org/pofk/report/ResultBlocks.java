@@ -134,7 +134,8 @@ final class ResultBlocks {
     private String tooSmall(DecimalForm decimals) {
         Rational bound = decimals.errorBound().times(Rational.of(10));
         boolean isLost = decimals.formula().isPresent() && output.values().stream()
-                .map(value -> CourseChart.near(value).abs()).anyMatch(near -> !near.isZero() && near.compareTo(bound) < 0);
+                .map(value -> CourseChart.near(value).abs()).anyMatch(near -> !near.isZero()
+                        && near.compareTo(bound) < 0);
         return isLost ? "; take values below " + Decimals.of(bound, ERROR_DIGITS).text()
                 + " from the exact formula or from --at" : "";
     }
@@ -170,12 +171,13 @@ final class ResultBlocks {
         String from = "for every k ≥ 0" + output.closedForm().filter(form -> form.withoutImpulsesFrom() > 0)
                 .map(form -> ", without the delta terms from k = " + form.withoutImpulsesFrom() + " on").orElse("");
         label("holds", from + ": " + switch (proof.method()) {
-            case CHARACTERISTIC -> "the sequence needs a recurrence of order " + order + ", and " + states(proof.order())
-                    + ", so it is their characteristic polynomial (Cayley–Hamilton); " + terms(proof.comparedSteps())
+            case CHARACTERISTIC -> "the sequence needs a recurrence of order " + order + ", and "
+                    + states(proof.order()) + ", so it is their characteristic polynomial (Cayley–Hamilton); " + terms(proof.comparedSteps())
                     + " compared";
             case WINDOWS -> (proof.comparedSteps() == 1 ? "the one exact term compared "
                     : "all " + terms(proof.comparedSteps()) + " compared ")
-                    + RecurrenceProse.satisfied(proof.comparedSteps(), order) + ", and " + states(proof.order()) + " (Cayley–Hamilton)";
+                    + RecurrenceProse.satisfied(proof.comparedSteps(), order) + ", and " + states(proof.order())
+                            + " (Cayley–Hamilton)";
             case VECTOR -> "a recurrence of order " + order + " of the matrix takes the start itself to zero, and so"
                     + " every output";
         });

@@ -17,8 +17,8 @@ import org.pofk.steps.KnownValue;
 import org.pofk.steps.StepValue;
 
 /**
- * Outputs under a schedule over the steps before the cycles and a few cycles, as a figure: where something is done, both
- * values stand at the same step, so that the line falls or rises upright there. Every value is exact or certified.
+ * Outputs under a schedule over the steps before the cycles and a few cycles, as a figure: where something is done,
+ * both values stand at the same step, so that the line falls or rises upright there. Every value is exact or certified.
  */
 public final class ScheduledCourse {
     private static final int CYCLES = 4;
@@ -56,7 +56,8 @@ public final class ScheduledCourse {
         if (curves.isEmpty() || curves.size() > CourseChart.MOST_CURVES) {
             return Optional.empty();
         }
-        List<Rational> values = curves.stream().flatMap(curve -> curve.points().stream()).map(CourseChart::near).toList();
+        List<Rational> values = curves.stream().flatMap(curve -> curve.points().stream()).map(CourseChart::near)
+                .toList();
         Axis levels = Axis.around(values.stream().reduce(Rational.ZERO, Rational::min),
                 values.stream().reduce(Rational.ZERO, Rational::max), INTERVALS);
         Rational from = Rational.of(steps.get(0));
@@ -66,7 +67,8 @@ public final class ScheduledCourse {
                 .and(" — ").andName(found.model().title());
         return Optional.of(new Chart.Course(title, alternative(found, steps), found.model().step().named(),
                 steps.size() > CourseChart.MARKED_UP_TO + 1 ? Chart.Drawing.LINE : Chart.Drawing.JOINED_MARKS,
-                new Axis(axis.from(), axis.to(), Rational.max(axis.step(), Rational.ONE)), levels, Rational.ZERO, curves));
+                new Axis(axis.from(), axis.to(), Rational.max(axis.step(), Rational.ONE)), levels, Rational.ZERO,
+                        curves));
     }
 
     private static Chart.Curve curve(ScheduledOutput output, Timetable timetable, List<Integer> steps) {
@@ -84,7 +86,8 @@ public final class ScheduledCourse {
     private static Prose alternative(ScheduledModel found, List<Integer> steps) {
         boolean isActed = steps.stream().anyMatch(k -> ScheduledTable.sides(found.timetable(), k).size() > 1);
         Prose scope = Prose.of("Steps " + steps.get(0) + " to " + steps.get(steps.size() - 1) + ". ")
-                .and(isActed ? "Where something is done, the values just before and just after stand at one step. " : "");
+                .and(isActed ? "Where something is done, the values just before and just after stand at one step. "
+                        : "");
         return scope.and(Prose.joined(found.outputs().stream().map(output -> Prose.name(output.output().name())
                 .and(output.regime().map(ScheduledCourse::longRun).orElse(": its long run is not decided"))
                 .and(".")).toList(), " "));

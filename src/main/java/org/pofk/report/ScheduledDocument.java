@@ -33,7 +33,9 @@ public final class ScheduledDocument {
     static List<Block> proved(ScheduledModel found, ScheduledOutput output, Style style) {
         List<Block> blocks = new ArrayList<>(CycleFormulas.within(found.timetable(), output, style));
         blocks.addAll(CycleFormulas.over(found.timetable(), output, style));
-        output.over().stream().limit(1).forEach(formula -> blocks.add(CycleProof.holds(found.timetable(), formula)));
+        if (!output.over().isEmpty()) {
+            blocks.add(CycleProof.holds(found.timetable(), output.over()));
+        }
         blocks.addAll(joint(found, output));
         return blocks;
     }

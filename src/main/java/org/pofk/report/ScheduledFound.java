@@ -15,7 +15,8 @@ import org.pofk.steps.StepValue;
 /** An output under a schedule; it is as before where the first cycle, the long run and the formulas are. */
 record ScheduledFound(Timetable timetable, ScheduledOutput output) implements FoundOutput {
     static List<FoundOutput> in(ScheduledModel found) {
-        return found.outputs().stream().<FoundOutput>map(output -> new ScheduledFound(found.timetable(), output)).toList();
+        return found.outputs().stream().<FoundOutput>map(output -> new ScheduledFound(found.timetable(), output))
+                .toList();
     }
 
     @Override

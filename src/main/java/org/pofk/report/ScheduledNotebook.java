@@ -11,9 +11,9 @@ import org.pofk.schedule.ScheduledOutput;
 import org.pofk.schedule.StretchFormula;
 
 /**
- * What was found about a model with a schedule as a notebook that steps moves and actions in exact fractions, checks the
- * first cycle and the long run, proves the formulas again whose terms aren't too many, and ends with an error where a
- * value isn't the one stated or outside its enclosure, or a formula doesn't hold.
+ * What was found about a model with a schedule as a notebook that steps moves and actions in exact fractions, checks
+ * the first cycle and the long run, proves the formulas again whose terms aren't too many, and ends with an error where
+ * a value isn't the one stated or outside its enclosure, or a formula doesn't hold.
  */
 public final class ScheduledNotebook {
     private final NotebookCells cells = new NotebookCells();
@@ -85,7 +85,8 @@ public final class ScheduledNotebook {
             boolean isFirst = formula.cycle() == StretchFormula.Cycle.FIRST;
             Prose name = formulas.left(formula).and(isFirst ? " in the first cycle" : " in the long run");
             if (python.isProved(formula.closedForm(), formula.to())) {
-                proofs.add(PythonCycles.within(name, formula, "stepped(" + (isFirst ? "begin" : "settled") + ", cycle)"));
+                proofs.add(PythonCycles.within(name, formula, "stepped(" + (isFirst ? "begin" : "settled")
+                        + ", cycle)"));
             } else {
                 stated.add(name);
             }

@@ -182,7 +182,7 @@ public final class ScheduledPassageDocument {
         FormulaInSteps formulas = new FormulaInSteps("m", style);
         all.forEach(formula -> formulas.add(formula.closedForm(), left(relation, formula), Prose.of("m ≥ 0")));
         blocks.addAll(formulas.blocks());
-        blocks.add(CycleProof.holds(passage.timetable(), all.get(0)));
+        blocks.add(CycleProof.holds(passage.timetable(), all));
     }
 
     private Prose left(String relation, CycleFormula formula) {

@@ -34,6 +34,7 @@ public record ScheduledReport(ScheduledModel found, Optional<Chart.Course> cours
     /** The same, as if its model had been read from another's file, and it had been made as the other was. */
     ScheduledReport asMadeLike(ScheduledReport other) {
         return new ScheduledReport(new ScheduledModel(found.model().readFrom(other.found.model().origin()),
-                found.timetable(), found.outputs(), found.formulasLeftOut()), course, answers, simulation, other.provenance);
+                found.timetable(), found.outputs(), found.formulasLeftOut()), course, answers, simulation,
+                        other.provenance);
     }
 }

@@ -75,7 +75,8 @@ public final class ScheduledReportDocument {
         blocks.addAll(ModelHead.withoutAssumptions(model));
         model.settings().stream().map(SettingProse::line).forEach(blocks::add);
         heading("Question");
-        List<Prose> questions = found.outputs().stream().map(output -> QuestionProse.of(output.output(), model)).toList();
+        List<Prose> questions = found.outputs().stream().map(output -> QuestionProse.of(output.output(), model))
+                .toList();
         blocks.add(questions.size() == 1 ? new Paragraph(questions.get(0)) : new Items(questions));
         heading("Result");
         for (ScheduledOutput output : found.outputs()) {
@@ -101,7 +102,8 @@ public final class ScheduledReportDocument {
         if (word.isEmpty()) {
             return MissingBlocks.NOT_DECIDED;
         }
-        String values = word.get() == KnownValue.Word.EXACT ? "the first cycle exactly" : "the first cycle within its enclosures";
+        String values = word.get() == KnownValue.Word.EXACT ? "the first cycle exactly"
+                : "the first cycle within its enclosures";
         return values + (output.over().isEmpty() ? ", by stepping; the long run with the word beside it"
                 : ", by stepping; the formulas for every cycle m ≥ 0, proved");
     }
@@ -142,15 +144,16 @@ public final class ScheduledReportDocument {
                 + " what is due. So " + state(convention, ScheduleProse.step(found.timetable(), "m", "")) + " = "
                 + powers(convention) + ", and at step j of the cycle an output weighs the components of that by fixed"
                 + " numbers, c(j): y(" + ScheduleProse.step(found.timetable(), "m", "j") + ") = "
-                + (convention == Convention.COLUMNS ? "c(j) " + powers(convention) : powers(convention) + " c(j)") + "."));
+                + (convention == Convention.COLUMNS ? "c(j) " + powers(convention) : powers(convention) + " c(j)")
+                        + "."));
         List<Proved> proofs = proofs();
         blocks.addAll(CycleProof.theorem(proofs));
         blocks.add(new Paragraph("In the long run the state where cycles begin is a fixed point of S, or of the power"
                 + " of S that the cycles recur with; the values by step of the cycle are stepped from there."));
         if (report.answers().stream().anyMatch(answer -> !answer.proofs().isEmpty())) {
-            blocks.add(new Paragraph("For a first passage the moves and actions are those of the chain stopped where the wait"
-                    + " ends; for totals the state has two more components, what was added up so far and the constant"
-                    + " one, so that S is linear there too."));
+            blocks.add(new Paragraph("For a first passage the moves and actions are those of the chain stopped where"
+                    + " the wait ends; for totals the state has two more components, what was added up so far and the"
+                    + " constant one, so that S is linear there too."));
         }
         blocks.addAll(CycleProof.compared(proofs));
     }
@@ -166,7 +169,8 @@ public final class ScheduledReportDocument {
 
     /** Of the formulas of the outputs, then of those of the answers. */
     private List<Proved> proofs() {
-        return Stream.concat(found.outputs().stream().flatMap(output -> CycleFormulas.proofs(found.timetable(), output)),
+        return Stream.concat(found.outputs().stream().flatMap(output -> CycleFormulas.proofs(found.timetable(),
+                output)),
                 report.answers().stream().flatMap(answer -> answer.proofs().stream())).toList();
     }
 

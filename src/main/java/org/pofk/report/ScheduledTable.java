@@ -10,7 +10,8 @@ import org.pofk.schedule.ScheduledOutput;
 
 /**
  * What {@code derive} found of a model with a schedule: a row for each output and step, two where something is done, at
- * the steps asked for or else before the cycles and over the first one. Exact, or certified where {@code exact} is empty.
+ * the steps asked for or else before the cycles and over the first one. Exact, or certified where {@code exact} is
+ * empty.
  */
 public final class ScheduledTable {
     private ScheduledTable() {

@@ -105,7 +105,8 @@ public final class ScheduledTotalDocument {
                     + " inside is no entry";
             case COSTS -> total.factor().isOne()
                     ? "in step k the state at its end, after what is done there, the move made in it, and each action"
-                    + " by the state in which it finds the chain; in step 0 the state at the start and what is due there"
+                    + " by the state in which it finds the chain; in step 0 the state at the start and what is due"
+                    + " there"
                     : "what is due in step k counts (" + total.factor() + ")^k of it: a discount of "
                     + Decimals.of(total.factor().inverse().minus(Rational.ONE).times(Rational.of(100)), 6).text()
                     + " % a step";
@@ -118,7 +119,7 @@ public final class ScheduledTotalDocument {
         formulas.add(over.cycle().closedForm(), Prose.of("added by cycle m"), Prose.of("m ≥ 0, steps "
                 + ScheduleProse.stepOf(timetable, 1) + " … " + ScheduleProse.stepOf(timetable, timetable.period())));
         blocks.addAll(formulas.blocks());
-        blocks.add(CycleProof.holds(timetable, over.total()));
+        blocks.add(CycleProof.holds(timetable, List.of(over.total(), over.cycle())));
         growth(total, over.growth());
     }
 

@@ -33,7 +33,8 @@ public final class ScheduledTotalJson {
             json.name("beyond");
             new JsonLongRun(json).write(over.growth().beyond());
         }));
-        json.list("values", total.values().stream().filter(at -> at.total().isPresent()).toList(), at -> json.object(() -> {
+        json.list("values", total.values().stream().filter(at -> at.total().isPresent()).toList(), at ->
+                json.object(() -> {
             json.count("k", at.k());
             writer.value("total", at.total().orElseThrow());
             writer.value("average", at.average().orElseThrow());

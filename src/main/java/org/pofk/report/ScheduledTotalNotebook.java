@@ -20,10 +20,11 @@ public final class ScheduledTotalNotebook {
     public static String write(ScheduledTotalModel found, Style style) {
         NotebookCells cells = new NotebookCells();
         List<Block> head = new ArrayList<>(ModelHead.of(found.model()));
-        head.add(new Document.Paragraph("A total is an output of a linear recursion: the states of the model, and behind them what"
-                + " was added up so far and the constant one. The cells of code step it in exact fractions and prove the"
-                + " formulas over the cycles again; they need Python's own library alone and end with an error where"
-                + " something doesn't hold. What is said of growth in the long run is stated, not worked out again."));
+        head.add(new Document.Paragraph("A total is an output of a linear recursion: the states of the model, and"
+                + " behind them what was added up so far and the constant one. The cells of code step it in exact"
+                + " fractions and prove the formulas over the cycles again; they need Python's own library alone and"
+                + " end with an error where something doesn't hold. What is said of growth in the long run is stated, not"
+                + " worked out again."));
         cells.text(head);
         for (int i = 0; i < found.totals().size(); i++) {
             ScheduledTotal total = found.totals().get(i);
@@ -60,8 +61,8 @@ public final class ScheduledTotalNotebook {
                         over.total(), style.digits()));
                 cells.code(python.added(name.and(", added by cycle m"), over.cycle(), style.digits()));
             } else {
-                cells.text(Prose.of("The formulas over the cycles are stated, not proved again here: their terms would take too"
-                        + " many steps."));
+                cells.text(Prose.of("The formulas over the cycles are stated, not proved again here: their terms would"
+                        + " take too many steps."));
             }
         });
         if (stepped.size() < total.values().size()) {

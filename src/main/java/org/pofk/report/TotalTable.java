@@ -46,7 +46,8 @@ public final class TotalTable {
             total.perStep().ifPresent(value -> number(of, "a step in the long run", value));
             total.over().ifPresent(over -> number(of, "a cycle in the long run", over.growth().perStep()));
         }
-        total.over().flatMap(over -> over.growth().everything()).ifPresent(value -> number(of, "over all steps", value));
+        total.over().flatMap(over -> over.growth().everything()).ifPresent(value -> number(of, "over all steps",
+                value));
     }
 
     private void total(Total total) {
