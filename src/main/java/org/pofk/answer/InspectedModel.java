@@ -12,6 +12,7 @@ import org.pofk.longrun.LongRun;
 import org.pofk.longrun.LongRunChecks;
 import org.pofk.longrun.Settling;
 import org.pofk.modes.ClosedForm;
+import org.pofk.modes.KnownPoles;
 import org.pofk.transform.Transform;
 import org.pofk.transform.Transforms;
 
@@ -49,10 +50,11 @@ public record InspectedModel(Model model, Inspection inspection, List<InspectedO
         List<InspectedOutput> inspected = new ArrayList<>();
         if (!outputs.isEmpty()) {
             LongRunChecks.Ground ground = LongRunChecks.Ground.of(chain);
+            KnownPoles poles = new KnownPoles(() -> Eigenvalues.guesses(chain.matrix()));
             for (Transform transform : Transforms.of(chain, outputs)) {
                 LongRunChecks longRun = LongRunChecks.of(ground, transform);
                 inspected.add(new InspectedOutput(transform.output(), longRun,
-                        Settling.of(ClosedForm.of(transform), longRun.byPoles(),
+                        Settling.of(ClosedForm.of(transform, poles), longRun.byPoles(),
                                 Settling.digitsFor(longRun.byPoles(), SETTLED_DIGITS))));
             }
         }

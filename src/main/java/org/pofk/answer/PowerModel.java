@@ -82,7 +82,8 @@ public record PowerModel(Model model, List<FromEach> found, int wanted) {
     private static FromEach fromEach(Chain turned, Output output, Structure structure, KnownPoles poles,
             List<Integer> steps) {
         List<Transform> transforms = Transforms.of(turned, Outputs.states(turned));
-        List<ClosedForm> forms = transforms.stream().map(transform -> ClosedForm.of(transform, poles)).toList();
+        List<ClosedForm> forms = transforms.stream().parallel()
+                .map(transform -> ClosedForm.of(transform, poles)).toList();
         List<List<StepValue>> values = steps.isEmpty() ? Collections.nCopies(forms.size(), List.of())
                 : StepValues.of(turned, forms, steps);
         return new FromEach(output, IntStream.range(0, forms.size()).mapToObj(from -> {

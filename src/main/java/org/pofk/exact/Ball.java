@@ -215,9 +215,17 @@ public record Ball(BigInteger center, BigInteger radius, int scale) {
             return roundedTo(0).root(n);
         }
         int shift = Math.multiplyExact(scale, n - 1);
-        BigInteger low = IntegerRoots.floor(center.subtract(radius).max(BigInteger.ZERO).shiftLeft(shift), n);
-        BigInteger high = IntegerRoots.ceiling(center.add(radius).shiftLeft(shift), n);
-        return between(low, high, scale);
+        BigInteger least = center.subtract(radius).max(BigInteger.ZERO).shiftLeft(shift);
+        BigInteger most = center.add(radius).shiftLeft(shift);
+        BigInteger low = IntegerRoots.floor(least, n);
+        return n == 2 && low.signum() > 0 && !isExact()
+                ? between(low, aboveSquareRoot(low, most.subtract(least)), scale)
+                : between(low, IntegerRoots.ceiling(most, n), scale);
+    }
+
+    /** At least √(a + more), low the whole part of √a: √(a + more) ≤ √a + more / (2 √a). */
+    private static BigInteger aboveSquareRoot(BigInteger low, BigInteger more) {
+        return low.add(more.divide(low.shiftLeft(1))).add(BigInteger.TWO);
     }
 
     public Ball arctan() {

@@ -1,7 +1,9 @@
 package org.pofk.exact;
 
 import java.math.BigInteger;
+import java.util.Optional;
 import java.util.concurrent.atomic.AtomicReference;
+import java.util.concurrent.atomic.AtomicReferenceArray;
 
 /**
  * π, arctan, the argument, cos and sin of balls. Certified: each is taken at the center with guard bits, in ball
@@ -11,6 +13,10 @@ final class ElementaryFunctions {
     /** Times the argument is halved before a series is summed. */
     private static final int HALVINGS = 8;
     private static final int GUARD = 2 * HALVINGS + 16;
+
+    /** arctan(j / 64) for j = 0 … 64, each as finely as it was needed so far. */
+    private static final int STEPS = 64;
+    private static final AtomicReferenceArray<Ball> FINEST_ARCTAN = new AtomicReferenceArray<>(STEPS + 1);
 
     private static final AtomicReference<Ball> FINEST_PI = new AtomicReference<>(machin(256));
 
@@ -62,21 +68,46 @@ final class ElementaryFunctions {
         return pi(scale + 1).timesPowerOfTwo(-1).times(sign).roundedTo(scale);
     }
 
-    /** |x| ≤ 1: arctan x = 2 arctan(x / (1 + √(1 + x²))), several times, then the alternating series. */
+    /** |x| ≤ 1: arctan x = arctan t + arctan((x − t) / (1 + x t)), t the nearest of the kept steps. */
     private static Ball arctanUpToOne(Ball x) {
+        int step = x.center().abs().multiply(BigInteger.valueOf(2L * STEPS)).shiftRight(x.scale()).add(BigInteger.ONE)
+                .shiftRight(1).min(BigInteger.valueOf(STEPS)).intValueExact();
+        if (step == 0) {
+            return arctanSeries(x);
+        }
+        int signed = x.center().signum() * step;
+        Ball rest = x.times(STEPS).minus(Ball.of(signed, x.scale()))
+                .dividedBy(Ball.of(STEPS, x.scale()).plus(x.times(signed)));
+        return arctanOfStep(step, x.scale()).times(x.center().signum()).plus(arctanSeries(rest)).roundedTo(x.scale());
+    }
+
+    private static Ball arctanOfStep(int step, int scale) {
+        Optional<Ball> known = Optional.ofNullable(FINEST_ARCTAN.get(step)).filter(ball -> ball.scale() >= scale);
+        Ball fine = known.orElseGet(() -> arctanByHalving(Ball.of(Rational.of(step, STEPS), scale + GUARD)));
+        FINEST_ARCTAN.set(step, fine);
+        return fine.roundedTo(scale);
+    }
+
+    /** |x| ≤ 1: arctan x = 2 arctan(x / (1 + √(1 + x²))), several times, then the series. */
+    private static Ball arctanByHalving(Ball x) {
         Ball one = Ball.of(1, x.scale());
         Ball reduced = x;
         for (int i = 0; i < HALVINGS; i++) {
             reduced = reduced.dividedBy(one.plus(one.plus(reduced.times(reduced)).sqrt()));
         }
-        Ball square = reduced.times(reduced);
-        Ball power = reduced;
-        Ball sum = reduced;
+        return arctanSeries(reduced).timesPowerOfTwo(HALVINGS).roundedTo(x.scale());
+    }
+
+    /** Σ (−1)^i x^(2i+1) / (2i+1) for small |x|: alternating with falling terms. */
+    private static Ball arctanSeries(Ball x) {
+        Ball square = x.times(x);
+        Ball power = x;
+        Ball sum = x;
         for (int i = 1; magnitude(power).compareTo(BigInteger.TWO) > 0; i++) {
             power = power.times(square).negate();
             sum = sum.plus(power.dividedBy(2L * i + 1));
         }
-        return sum.widened(magnitude(power)).timesPowerOfTwo(HALVINGS).roundedTo(x.scale());
+        return sum.widened(magnitude(power));
     }
 
     private static BigInteger magnitude(Ball x) {

@@ -238,7 +238,7 @@ record IntegerPolynomial(List<BigInteger> coefficients) {
         if (isConstant() || other.isConstant()) {
             return ofIntegers(1);
         }
-        if (Math.min(degree(), other.degree()) >= RINGS_DEGREE) {
+        if (degree() * other.degree() >= RINGS_DEGREE * RINGS_DEGREE / 4) {
             return RingsAlgebra.greatestCommonDivisor(this, other);
         }
         return ModularPolynomial.provesCoprime(this, other)

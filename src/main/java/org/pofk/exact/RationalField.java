@@ -73,10 +73,17 @@ public enum RationalField implements Field<Rational> {
 
     @Override
     public Polynomial<Rational> greatestCommonDivisor(Polynomial<Rational> a, Polynomial<Rational> b) {
-        if (ModularPolynomial.provesCoprime(a, b)) {
-            return Polynomial.one(this);
+        if (a.isZero() || b.isZero()) {
+            return PrimitiveForm.monic(PrimitiveForm.partOf(a).greatestCommonDivisor(PrimitiveForm.partOf(b)));
         }
-        return PrimitiveForm.monic(PrimitiveForm.partOf(a).greatestCommonDivisor(PrimitiveForm.partOf(b)));
+        // A transform has z in common with its recurrence at times, and hardly ever anything else.
+        int power = Math.min(a.lowestPower(), b.lowestPower());
+        return withoutZero(a.shiftedDown(a.lowestPower()), b.shiftedDown(b.lowestPower())).shiftedUp(power);
+    }
+
+    private Polynomial<Rational> withoutZero(Polynomial<Rational> a, Polynomial<Rational> b) {
+        return ModularPolynomial.provesCoprime(a, b) ? Polynomial.one(this)
+                : PrimitiveForm.monic(PrimitiveForm.partOf(a).greatestCommonDivisor(PrimitiveForm.partOf(b)));
     }
 
     @Override

@@ -50,7 +50,10 @@ public record ClosedClassLongRun(List<Ending> endings) {
             for (List<Integer> cyclicClass : closedClass.cyclicClasses()) {
                 Rational sum = Rational.ZERO;
                 for (int state : cyclicClass) {
-                    sum = sum.plus(output.coefficients().get(state).times(stationary.get(place.get(state))));
+                    Rational weight = output.coefficients().get(state);
+                    if (!weight.isZero()) {
+                        sum = sum.plus(weight.times(stationary.get(place.get(state))));
+                    }
                 }
                 readings.add(sum.times(Rational.of(closedClass.period())));
             }

@@ -1,6 +1,7 @@
 package org.pofk.longrun;
 
 import java.math.BigInteger;
+import java.util.Arrays;
 import java.util.List;
 import org.pofk.chain.SparseMatrix;
 import org.pofk.exact.LeastCommonMultiple;
@@ -11,14 +12,26 @@ import org.pofk.exact.Rational;
  * is not handed out.
  */
 final class IntegerRows {
+    /** A row whose entries are that short in sum is multiplied by digits of 32 bits without overflow. */
+    private static final int SHORT_BITS = 31;
+
     private final int[][] places;
     private final BigInteger[][] values;
     private final BigInteger[] right;
+    private final boolean[] isShort;
+    private final long[][] shortValues;
 
     private IntegerRows(int[][] places, BigInteger[][] values, BigInteger[] right) {
         this.places = places;
         this.values = values;
         this.right = right;
+        this.isShort = new boolean[values.length];
+        this.shortValues = new long[values.length][];
+        for (int i = 0; i < values.length; i++) {
+            isShort[i] = isShort(values[i]);
+            shortValues[i] = isShort[i] ? Arrays.stream(values[i]).mapToLong(BigInteger::longValueExact).toArray()
+                    : new long[0];
+        }
     }
 
     static IntegerRows of(SparseMatrix matrix, List<Rational> right) {
@@ -81,11 +94,34 @@ final class IntegerRows {
     /** rest ← (rest − M digit) / prime, which leaves nothing. */
     void reduce(BigInteger[] rest, long[] digit, BigInteger prime) {
         for (int i = 0; i < rest.length; i++) {
-            for (int place = 0; place < places[i].length; place++) {
-                rest[i] = rest[i].subtract(values[i][place].multiply(BigInteger.valueOf(digit[places[i][place]])));
-            }
-            rest[i] = rest[i].divide(prime);
+            rest[i] = rest[i].subtract(isShort[i] ? BigInteger.valueOf(shortProduct(i, digit)) : product(i, digit))
+                    .divide(prime);
         }
+    }
+
+    private BigInteger product(int row, long[] digit) {
+        BigInteger sum = BigInteger.ZERO;
+        for (int place = 0; place < places[row].length; place++) {
+            sum = sum.add(values[row][place].multiply(BigInteger.valueOf(digit[places[row][place]])));
+        }
+        return sum;
+    }
+
+    private long shortProduct(int row, long[] digit) {
+        long sum = 0;
+        for (int place = 0; place < places[row].length; place++) {
+            sum += shortValues[row][place] * digit[places[row][place]];
+        }
+        return sum;
+    }
+
+    /** Whether the sum of the row's entries times digits below 2^32 stays below 2^63. */
+    private static boolean isShort(BigInteger[] row) {
+        BigInteger sum = BigInteger.ZERO;
+        for (BigInteger value : row) {
+            sum = sum.add(value.abs());
+        }
+        return sum.bitLength() <= SHORT_BITS;
     }
 
     /** M numerators = denominator · b. */

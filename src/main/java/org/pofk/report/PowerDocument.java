@@ -29,7 +29,8 @@ public final class PowerDocument {
         document.blocks.add(new Paragraph("From each state in turn: what is expected after k steps, for every k ≥ 0. For"
                 + " all states these are the entries of A^k."));
         Chain chain = found.model().chain();
-        IntStream.range(0, chain.size()).forEach(document::from);
+        document.blocks.addAll(IntStream.range(0, chain.size()).parallel().mapToObj(document::from)
+                .flatMap(List::stream).toList());
         document.found.found().forEach(document::values);
         if (!found.isComplete()) {
             document.blocks.add(new Labelled("not decided", "within the budget: "
@@ -39,14 +40,16 @@ public final class PowerDocument {
         return new Document(document.blocks);
     }
 
-    private void from(int state) {
-        blocks.add(new Heading(2, Prose.of("From ").andName(found.model().chain().states().get(state))));
+    private List<Block> from(int state) {
+        List<Block> own = new ArrayList<>(List.of(
+                new Heading(2, Prose.of("From ").andName(found.model().chain().states().get(state)))));
         for (PowerModel.FromEach each : found.found()) {
             DerivedOutput output = each.byStart().get(state);
-            blocks.addAll(ResultBlocks.proved(output, OutputProse.atStep(output.output()), "states", style));
-            output.longRun().ifPresent(checks -> blocks.add(new Labelled("long run",
+            own.addAll(ResultBlocks.proved(output, OutputProse.atStep(output.output()), "states", style));
+            output.longRun().ifPresent(checks -> own.add(new Labelled("long run",
                     new LongRunProse(style.digits()).of(checks.byPoles()))));
         }
+        return own;
     }
 
     private void values(PowerModel.FromEach each) {
