@@ -32,6 +32,8 @@ public final class Measure {
                 "|---|---|---|"));
         processes.forEach((name, time) -> page.add(String.format(Locale.ROOT, "| %s | %.0f | %.1f |", name, time,
                 time / hello)));
+        page.addAll(List.of("", "## Every question of a hundred states, whole process, ms (median of 3)", ""));
+        page.addAll(LargeChainTimes.table());
         OptionsBuilder options = new OptionsBuilder();
         options.include(arguments.length == 0 ? "org.pofk.bench" : String.join("|", arguments));
         page.addAll(List.of("", "## Warm, by JMH 1.37", "", "| benchmark | | ms | ± (99.9 %) |", "|---|---|---|---|"));

@@ -51,6 +51,14 @@ final class WholeProcess {
         return command;
     }
 
+    /** One run of a command of the launcher on a model. */
+    static double milliseconds(List<String> command, Path model) throws IOException, InterruptedException {
+        List<String> all = new ArrayList<>(List.of(LAUNCHER.toString()));
+        all.addAll(command);
+        all.add(model.toString());
+        return milliseconds(all);
+    }
+
     private static double milliseconds(List<String> command) throws IOException, InterruptedException {
         long begin = System.nanoTime();
         Process process = new ProcessBuilder(command).redirectErrorStream(true)
