@@ -5,12 +5,12 @@ import java.util.List;
 import org.pofk.exact.Rational;
 
 /** Exact elimination on full matrices, for tests alone: shares nothing with what it is held against. */
-final class Gauss {
+public final class Gauss {
     private Gauss() {
     }
 
     /** M⁻¹, row by row. */
-    static List<List<Rational>> inverse(List<List<Rational>> rows) {
+    public static List<List<Rational>> inverse(List<List<Rational>> rows) {
         int n = rows.size();
         Rational[][] work = new Rational[n][2 * n];
         for (int i = 0; i < n; i++) {
@@ -46,11 +46,11 @@ final class Gauss {
     }
 
     /** M x. */
-    static List<Rational> times(List<List<Rational>> rows, List<Rational> vector) {
+    public static List<Rational> times(List<List<Rational>> rows, List<Rational> vector) {
         return rows.stream().map(row -> dot(row, vector)).toList();
     }
 
-    static Rational dot(List<Rational> a, List<Rational> b) {
+    public static Rational dot(List<Rational> a, List<Rational> b) {
         Rational sum = Rational.ZERO;
         for (int i = 0; i < a.size(); i++) {
             sum = sum.plus(a.get(i).times(b.get(i)));
