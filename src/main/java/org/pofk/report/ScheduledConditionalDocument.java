@@ -90,6 +90,10 @@ public final class ScheduledConditionalDocument {
             return;
         }
         blocks.add(new Heading(2, Prose.of("D(k) = P(").and(given).and(")")));
+        if (!found.given().never().isEmpty()) {
+            blocks.add(new Labelled("of", Prose.of("D and N are those of the chain in which what enters ")
+                    .and(Prose.names(found.given().neverNames())).and(" stays there, whatever is done")));
+        }
         formulas(found.event(), "D");
         values();
     }
