@@ -34,6 +34,15 @@ public record Band(Optional<Rational> low, Optional<Rational> high) {
         return contains(lower) && contains(upper) ? Relation.INSIDE : Relation.EITHER;
     }
 
+    /** All numbers strictly between two, none of them, or neither is the case. */
+    public Relation ofBetween(Rational lower, Rational upper) {
+        if (low.stream().anyMatch(bound -> upper.compareTo(bound) <= 0)
+                || high.stream().anyMatch(bound -> bound.compareTo(lower) <= 0)) {
+            return Relation.OUTSIDE;
+        }
+        return contains(lower) && contains(upper) ? Relation.INSIDE : Relation.EITHER;
+    }
+
     /** How far zero is from the nearest end; zero when it is one. */
     Rational distanceFromZero() {
         return Stream.concat(low.stream(), high.stream()).map(Rational::abs).min(Rational::compareTo).orElseThrow();

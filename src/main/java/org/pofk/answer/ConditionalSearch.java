@@ -114,7 +114,7 @@ final class ConditionalSearch {
         }
         Transform transform = Transforms.of(chain, List.of(new Output(a.name(), coefficients, Rational.ZERO, "a − t b")))
                 .get(0);
-        return new Constraint(chain, ClosedForm.of(transform, poles), LongRunValues.of(LongRun.of(chain, transform)),
-                band::minus);
+        return new ClosedFormConstraint(chain, ClosedForm.of(transform, poles),
+                LongRunValues.of(LongRun.of(chain, transform)), band::minus);
     }
 }

@@ -1,6 +1,6 @@
 package org.pofk.answer;
 
 /** Thrown where the work of a search is bounded; caught where the search is answered. */
-final class TooMuchWorkException extends Exception {
+public final class TooMuchWorkException extends Exception {
     private static final long serialVersionUID = 1;
 }

@@ -6,7 +6,6 @@ import java.util.stream.LongStream;
 import org.pofk.chain.Chain;
 import org.pofk.exact.Rational;
 import org.pofk.longrun.LongRun;
-import org.pofk.longrun.LongRunValues;
 import org.pofk.modes.ClosedForm;
 import org.pofk.steps.ExactSteps;
 import org.pofk.transform.Sequence;
@@ -85,14 +84,13 @@ public record When(Condition condition, Optional<Long> first, Optional<Long> for
 
     /** The answer for one output. */
     public static When of(Chain chain, ClosedForm closedForm, LongRun longRun, Condition condition) {
-        List<Rational> limits = LongRunValues.of(longRun);
-        if (limits.isEmpty()) {
+        Optional<Constraint> constraint = Constraint.of(chain, closedForm, longRun, condition);
+        if (constraint.isEmpty()) {
             return new When(condition, firstOfFew(chain, closedForm, condition), Optional.empty(), List.of(), false,
                     Reason.NO_LONG_RUN);
         }
-        WhenSearch search = new WhenSearch(List.of(new Constraint(chain, closedForm, limits, condition::around)),
-                WhenSearch.Possible.ALWAYS);
-        return WhenSummary.of(condition, search.classes(search.modulus(limits.size())));
+        WhenSearch search = new WhenSearch(List.of(constraint.get()));
+        return WhenSummary.of(condition, search.classes(search.modulus(1)));
     }
 
     private static Optional<Long> firstOfFew(Chain chain, ClosedForm form, Condition condition) {

@@ -35,7 +35,11 @@ public record WhenModel(Model model, List<Output> outputs, Asked asked, List<Ans
     public record Asked(Condition.Kind kind, Rational bound, boolean relative) {
         /** With a part of the long run worked out; nothing of none. */
         public Condition of(LongRun longRun) {
-            Rational size = LongRunValues.of(longRun).stream().map(Rational::abs).reduce(Rational.ZERO, Rational::max);
+            return of(LongRunValues.of(longRun).stream().map(Rational::abs).reduce(Rational.ZERO, Rational::max));
+        }
+
+        /** @param size of the largest value of the long run */
+        public Condition of(Rational size) {
             return new Condition(kind, relative ? bound.times(size) : bound);
         }
     }

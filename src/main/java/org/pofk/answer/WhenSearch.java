@@ -13,7 +13,7 @@ import org.pofk.exact.LeastCommonMultiple;
  * class stays as it ends; before it, stretches of steps are enclosed at once and halved until each is inside or outside
  * for certain.
  */
-final class WhenSearch {
+public final class WhenSearch {
     private static final long MOST_CLASSES = 120;
     private static final long FARTHEST = Long.MAX_VALUE / 8;
     private static final int MOST_STRETCHES = 200_000;
@@ -33,13 +33,18 @@ final class WhenSearch {
         static final Possible NEVER = new Possible(k -> false, 0, true);
     }
 
+    /** At every step. */
+    public WhenSearch(List<Constraint> constraints) {
+        this(constraints, Possible.ALWAYS);
+    }
+
     WhenSearch(List<Constraint> constraints, Possible possible) {
         this.constraints = List.copyOf(constraints);
         this.possible = possible;
     }
 
     /** The period of the long run, times what the phases of the decaying modes need to come round, while that is few. */
-    long modulus(long least) {
+    public long modulus(long least) {
         long modulus = least;
         for (Constraint constraint : constraints) {
             long period = constraint.period();
@@ -51,7 +56,7 @@ final class WhenSearch {
 
 
     /** One a residue, in order. */
-    List<ResidueClass> classes(long modulus) {
+    public List<ResidueClass> classes(long modulus) {
         List<ResidueClass> classes = new ArrayList<>();
         for (long residue = 0; residue < modulus; residue++) {
             stretches = 0;
@@ -150,7 +155,7 @@ final class WhenSearch {
                     : met ? search(middle + modulus, high, true) : search(low, middle, false);
         }
 
-        private Band.Relation over(long low, long high) {
+        private Band.Relation over(long low, long high) throws TooMuchWorkException {
             Band.Relation together = low < possible.from ? Band.Relation.EITHER : Band.Relation.INSIDE;
             for (Constraint constraint : constraints) {
                 together = together.and(constraint.over(residue, low, high, modulus));

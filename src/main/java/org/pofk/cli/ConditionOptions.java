@@ -12,6 +12,7 @@ import org.pofk.report.ScheduledWhenDocument;
 import org.pofk.report.Style;
 import org.pofk.report.WhenDocument;
 import org.pofk.schedule.ScheduledWhen;
+import org.pofk.schedule.ScheduledWhen.Sides;
 import picocli.CommandLine.Option;
 
 /** Conditions on p(k). */
@@ -28,6 +29,20 @@ final class ConditionOptions {
             description = "p(k) no farther than this from its long run; 1%% is a part of the long run")
     private Optional<Amount> settlesWithin = Optional.empty();
 
+    @Option(names = "--side", paramLabel = "SIDE",
+            description = {"with a schedule: p(k) before what is done at step k, after it, or both;",
+                "after unless said otherwise (before, after, both)"})
+    private Optional<Sides> side = Optional.empty();
+
+    /** Which values of a step are meant. */
+    Sides sides(Model read) throws UsageException {
+        if (side.isPresent() && read.schedule().isEmpty()) {
+            throw new UsageException("'" + read.origin().file() + "' has no schedule: before and after are one there;"
+                    + " leave --side out");
+        }
+        return side.orElse(Sides.AFTER);
+    }
+
     /** All that are given. */
     List<WhenModel.Asked> asked() throws UsageException {
         if (settlesWithin.filter(amount -> amount.value().signum() <= 0).isPresent()) {
@@ -42,9 +57,10 @@ final class ConditionOptions {
 
     /** What a report says of them. */
     List<AskedSection> sections(Model read, List<Output> outputs, Style style) throws UsageException {
+        Sides sides = sides(read);
         return asked().stream().map(asked -> new AskedSection(Prose.of(WhenDocument.title(asked, style)),
                 read.schedule().isPresent() ? () -> ScheduledWhenDocument.section(ScheduledWhen.of(read, outputs, asked,
-                        partly -> { }), style)
+                        sides, partly -> { }), style)
                 : () -> WhenDocument.section(WhenModel.of(read, outputs, asked, partly -> { }), style))).toList();
     }
 }

@@ -30,6 +30,7 @@ import org.pofk.schedule.ScheduledPassage;
 import org.pofk.schedule.ScheduledTotal;
 import org.pofk.schedule.ScheduledTotalModel;
 import org.pofk.schedule.ScheduledWhen;
+import org.pofk.schedule.ScheduledWhen.Sides;
 import org.pofk.text.RefusedException;
 
 /** What commands about totals, passages and conditions answer about a model that has inspections or phases. */
@@ -74,12 +75,12 @@ final class ScheduledAnswers {
 
     /** @param known what the model is seen from, where it isn't its own start */
     static ExitCode when(AnswerOptions options, Model read, Optional<Known> known, List<Output> outputs,
-            WhenModel.Asked asked, Destination destination, Streams streams)
+            WhenModel.Asked asked, Sides sides, Destination destination, Streams streams)
             throws RefusedException, UsageException, WritingException {
         Style style = options.style();
         Worker.Outcome<ScheduledWhen> outcome = options.within(streams, partly ->
                 partly.answers().size() + " of " + outputs.size() + " outputs answered", published ->
-                ScheduledWhen.of(read, outputs, asked, published));
+                ScheduledWhen.of(read, outputs, asked, sides, published));
         if (outcome.published().isEmpty()) {
             return options.undecided(streams);
         }

@@ -16,6 +16,7 @@ import org.pofk.report.Style;
 import org.pofk.report.WhenDocument;
 import org.pofk.report.WhenJson;
 import org.pofk.report.WhenTable;
+import org.pofk.schedule.ScheduledWhen.Sides;
 import org.pofk.text.RefusedException;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
@@ -43,8 +44,9 @@ final class WhenCommand implements Work {
         Destination destination = options.destination();
         WhenModel.Asked asked = asked();
         Model read = options.modelWithSchedule();
+        Sides sides = conditions.sides(read);
         if (read.schedule().isPresent()) {
-            return scheduled(read, asked, destination, streams);
+            return scheduled(read, asked, sides, destination, streams);
         }
         Optional<Integer> step = given.at();
         if (given.isAsked() && step.isEmpty()) {
@@ -58,20 +60,25 @@ final class WhenCommand implements Work {
                 : when(known.get().model(), known, asked, style, destination, streams);
     }
 
-    private ExitCode scheduled(Model read, WhenModel.Asked asked, Destination destination, Streams streams)
-            throws RefusedException, UsageException, WritingException {
+    private ExitCode scheduled(Model read, WhenModel.Asked asked, Sides sides, Destination destination,
+            Streams streams) throws RefusedException, UsageException, WritingException {
         List<Output> outputs = outputs(read, destination);
         Optional<Integer> step = given.at();
         if (given.isAsked() && step.isEmpty()) {
-            return ScheduledAnswers.when(options, read, given.given(read.chain()), outputs, asked, destination,
-                    streams);
+            if (sides != Sides.AFTER) {
+                throw new UsageException("--side goes with --given-at K, not with what is known at k itself: there the"
+                        + " values are those after what is done");
+            }
+            return ScheduledAnswers.when(options, read, given.given(read.chain()), outputs, asked, destination, streams);
         }
         if (step.isEmpty()) {
-            return ScheduledAnswers.when(options, read, Optional.empty(), outputs, asked, destination, streams);
+            return ScheduledAnswers.when(options, read, Optional.empty(), outputs, asked, sides, destination,
+                    streams);
         }
         Optional<Known> known = given.known(read, step.get());
         return known.isEmpty() ? given.nothing(read, step.get(), CommandName.WHEN, destination, streams)
-                : ScheduledAnswers.when(options, known.get().model(), known, outputs, asked, destination, streams);
+                : ScheduledAnswers.when(options, known.get().model(), known, outputs, asked, sides,
+                        destination, streams);
     }
 
     private ExitCode when(Model read, Optional<Known> known, WhenModel.Asked asked, Style style,

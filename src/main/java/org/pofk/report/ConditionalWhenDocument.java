@@ -10,6 +10,7 @@ import org.pofk.report.Document.Heading;
 import org.pofk.report.Document.Labelled;
 import org.pofk.report.Document.Paragraph;
 import org.pofk.report.Document.Table;
+import org.pofk.schedule.ScheduledWhen.Sides;
 
 /** When outputs given what is known at the same step meet a condition, as a document. */
 public final class ConditionalWhenDocument {
@@ -39,7 +40,7 @@ public final class ConditionalWhenDocument {
         When when = answer.when();
         blocks.add(new Heading(2, OutputProse.title(answer.output()).and(", given ").and(given)));
         label("asked", Prose.of(WhenDocument.asked(when.condition(), style)
-                + (isScheduled() ? ScheduledWhenDocument.AT : "")));
+                + (isScheduled() ? ScheduledWhenDocument.at(Sides.AFTER) : "")));
         WhenDocument.partOfNothing(when).ifPresent(blocks::add);
         label("answer", Prose.of(WhenDocument.inWords(when)));
         when.first().ifPresent(first -> label("first", Prose.of("k = " + first)));

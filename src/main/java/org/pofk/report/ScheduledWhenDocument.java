@@ -2,25 +2,29 @@ package org.pofk.report;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.stream.Stream;
 import org.pofk.report.Document.Block;
 import org.pofk.report.Document.Heading;
 import org.pofk.report.Document.Labelled;
 import org.pofk.report.Document.Table;
+import org.pofk.schedule.CycleCourse.Side;
 import org.pofk.schedule.ScheduledWhen;
+import org.pofk.schedule.ScheduledWhen.Sides;
 
 /** When outputs meet a condition under a schedule, as a document. */
 public final class ScheduledWhenDocument {
-    static final String AT = ", at the end of step k, after what is done there";
 
+    private final ScheduledWhen found;
     private final Style style;
     private final List<Block> blocks = new ArrayList<>();
 
-    private ScheduledWhenDocument(Style style) {
+    private ScheduledWhenDocument(ScheduledWhen found, Style style) {
+        this.found = found;
         this.style = style;
     }
 
     public static Document of(ScheduledWhen found, Style style) {
-        ScheduledWhenDocument document = new ScheduledWhenDocument(style);
+        ScheduledWhenDocument document = new ScheduledWhenDocument(found, style);
         document.blocks.addAll(ModelHead.of(found.model()));
         found.answers().forEach(answer -> {
             document.blocks.add(new Heading(2, OutputProse.title(answer.output())));
@@ -32,7 +36,7 @@ public final class ScheduledWhenDocument {
 
     /** The same as a part of a report. */
     public static ReportSection section(ScheduledWhen found, Style style) {
-        ScheduledWhenDocument document = new ScheduledWhenDocument(style);
+        ScheduledWhenDocument document = new ScheduledWhenDocument(found, style);
         List<Labelled> key = new ArrayList<>();
         found.answers().forEach(answer -> {
             if (found.answers().size() > 1) {
@@ -47,7 +51,7 @@ public final class ScheduledWhenDocument {
     }
 
     private void answer(ScheduledWhen.Answer answer) {
-        label("asked", WhenDocument.asked(answer.when().condition(), style) + AT);
+        label("asked", WhenDocument.asked(answer.when().condition(), style) + at(found.sides()));
         WhenDocument.partOfNothing(answer.when()).ifPresent(blocks::add);
         label("answer", WhenDocument.inWords(answer.when()));
         answer.when().first().ifPresent(first -> label("first", "k = " + first));
@@ -56,10 +60,30 @@ public final class ScheduledWhenDocument {
             blocks.add(ResidueTable.of(answer.when().classes()));
         }
         if (!answer.around().isEmpty()) {
-            blocks.add(Table.ofText("Values there", List.of("k", answer.output().name() + "(k)"),
-                    answer.around().stream().map(value -> List.of(String.valueOf(value.k()),
-                            ValueText.of(value, style.digits()))).toList()));
+            blocks.add(values(answer));
         }
+    }
+
+    /** Which values of a step are meant. */
+    static String at(Sides sides) {
+        return ", at the end of step k, " + switch (sides) {
+            case BEFORE -> "before what is done there";
+            case AFTER -> "after what is done there";
+            case BOTH -> "both before and after what is done there";
+        };
+    }
+
+    private Table values(ScheduledWhen.Answer answer) {
+        String name = answer.output().name() + "(k)";
+        return Table.ofText("Values there", found.sides() == Sides.AFTER ? List.of("k", name)
+                : Stream.concat(Stream.of("k"), found.sides().all().stream().map(side -> name + ", " + word(side))).toList(),
+                answer.around().stream().map(reading -> Stream.concat(Stream.of(String.valueOf(reading.j())),
+                        found.sides().all().stream().map(side -> KnownText.of(reading.at(side), style.digits())))
+                        .toList()).toList());
+    }
+
+    private static String word(Side side) {
+        return side == Side.BEFORE ? "before" : "after";
     }
 
     private void label(String label, String text) {

@@ -12,7 +12,9 @@ import org.pofk.chain.Output;
 import org.pofk.exact.Decimals;
 import org.pofk.exact.Enclosed;
 import org.pofk.longrun.Settling;
+import org.pofk.schedule.CycleCourse.Side;
 import org.pofk.schedule.ScheduledWhen;
+import org.pofk.steps.KnownValue;
 import org.pofk.steps.StepValue;
 
 /** When an output meets a condition, as JSON: format {@code pofk-when}. */
@@ -47,12 +49,26 @@ public final class WhenJson {
         ScheduledWhen.Answer answer = found.answers().get(0);
         JsonHead.write(json, FORMAT, COMMAND, found.model());
         new JsonGiven(json).write(known);
+        json.text("side", word(found.sides()));
         met(answer.output(), answer.when());
         for (String absent : List.of("nearest", "longRun", "settling")) {
             json.name(absent);
             json.nothing();
         }
-        json.list("values", answer.around(), value -> value(value.k(), Optional.of(value)));
+        json.list("values", answer.around().stream().flatMap(reading -> found.sides().all().stream()
+                .map(side -> new SidedValue(reading.j(), side, reading.at(side)))).toList(), this::value);
+    }
+
+    private record SidedValue(int k, Side side, KnownValue value) {
+    }
+
+    private void value(SidedValue at) {
+        json.object(() -> {
+            json.count("k", at.k);
+            json.text("side", word(at.side));
+            json.text("exact", at.value.exact().map(Object::toString));
+            json.text("decimal", KnownText.number(at.value, digits));
+        });
     }
 
     private void fields(Model model, Optional<Known> known, WhenModel.Answer answer) {

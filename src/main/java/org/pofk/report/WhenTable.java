@@ -16,10 +16,12 @@ import org.pofk.schedule.ScheduledWhen;
  */
 public final class WhenTable {
     private final StepColumns steps;
+    private final List<Prose> side;
     private final Rows rows;
 
-    private WhenTable(StepColumns steps, Rows rows) {
+    private WhenTable(StepColumns steps, List<Prose> side, Rows rows) {
         this.steps = steps;
+        this.side = side;
         this.rows = rows;
     }
 
@@ -37,17 +39,21 @@ public final class WhenTable {
         return table.rows.table();
     }
 
-    /** The same under a schedule. */
+    /** The same under a schedule, with the side of what is done at a step that is asked about. */
     public static Document.Table of(ScheduledWhen found, int digits) {
-        WhenTable table = of(found.model(), digits);
+        WhenTable table = of(found.model(), Rows.words("side"), Rows.words(inWords(found.sides())), digits);
         found.answers().forEach(answer -> table.answer(answer.output(), answer.when()));
         return table.rows.table();
     }
 
     private static WhenTable of(Model model, int digits) {
+        return of(model, List.of(), List.of(), digits);
+    }
+
+    private static WhenTable of(Model model, List<Prose> head, List<Prose> side, int digits) {
         StepColumns steps = StepColumns.of(model);
-        return new WhenTable(steps, new Rows(digits, Rows.words("output", "condition", "exact", "decimal", "residue",
-                "modulus", "answer"), first(steps.header(), "first"), first(steps.header(), "for ever from")));
+        return new WhenTable(steps, side, new Rows(digits, Rows.words("output"), head, Rows.words("condition", "exact",
+                "decimal", "residue", "modulus", "answer"), first(steps.header(), "first"), first(steps.header(), "for ever from")));
     }
 
     /** {@code first k}, {@code first time (h)}. */
@@ -65,8 +71,7 @@ public final class WhenTable {
 
     private void add(Output output, When when, List<Prose> middle, Optional<Long> first,
             Optional<Long> forEverFrom) {
-        rows.add(List.of(Prose.name(output.name()),
-                Prose.of(inWords(when.condition().kind()))), rows.value(when.condition().bound()),
+        rows.add(List.of(Prose.name(output.name())), side, Rows.words(inWords(when.condition().kind())), rows.value(when.condition().bound()),
                 middle, first.map(steps::cells).orElse(steps.none()), forEverFrom.map(steps::cells).orElse(steps.none()));
     }
 

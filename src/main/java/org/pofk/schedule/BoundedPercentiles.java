@@ -142,7 +142,7 @@ final class BoundedPercentiles {
             return Optional.of(difference.isPositive());
         }
         return k > EXACT_UP_TO ? Optional.empty()
-                : stopped.chain().at(stopped.distribution(), List.of((int) k)).get(0).flatMap(KnownValue::exact)
+                : stopped.chain().after(stopped.distribution(), List.of((int) k)).get(0).flatMap(KnownValue::exact)
                         .map(value -> value.compareTo(p) >= 0);
     }
 

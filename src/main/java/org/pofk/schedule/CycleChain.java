@@ -4,7 +4,9 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.stream.IntStream;
+import org.pofk.answer.Constraint;
 import org.pofk.answer.Eigenvalues;
+import org.pofk.answer.When.Condition;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Output;
 import org.pofk.chain.Timetable;
@@ -76,6 +78,12 @@ final class CycleChain {
     CycleFormula formula(Output output, Place place) {
         Output read = new CycleOutputs(timetable, matrices, output).at(place.j(), place.side());
         return formula(Optional.of(place), Transforms.of(chain, List.of(read)).get(0));
+    }
+
+    /** A condition on an output at a place of cycle m; empty where there is no long run. */
+    Optional<Constraint> constraint(Output output, Place place, Condition condition) {
+        CycleFormula formula = formula(output, place);
+        return Constraint.of(chain, formula.closedForm(), formula.longRun(), condition);
     }
 
     /** The same at each step j = 0 … T − 1 of a cycle. */

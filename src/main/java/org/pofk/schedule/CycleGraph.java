@@ -69,7 +69,8 @@ final class CycleGraph {
         return step;
     }
 
-    private static List<BitSet> graph(SparseMatrix matrix) {
+    /** Column by column, where a matrix isn't zero. */
+    static List<BitSet> graph(SparseMatrix matrix) {
         List<BitSet> columns = new ArrayList<>();
         for (List<Entry> column : matrix.columns()) {
             BitSet rows = new BitSet();
@@ -88,11 +89,14 @@ final class CycleGraph {
     }
 
     private static List<BitSet> product(List<BitSet> m, List<BitSet> n) {
-        return n.stream().map(column -> {
-            BitSet image = new BitSet();
-            column.stream().forEach(row -> image.or(m.get(row)));
-            return image;
-        }).toList();
+        return n.stream().map(column -> image(m, column)).toList();
+    }
+
+    /** Where the states of a column lead to. */
+    static BitSet image(List<BitSet> graph, BitSet column) {
+        BitSet image = new BitSet();
+        column.stream().forEach(row -> image.or(graph.get(row)));
+        return image;
     }
 
     private static List<BitSet> power(List<BitSet> matrix, int times) {

@@ -5,10 +5,12 @@ import java.util.List;
 import java.util.Optional;
 import java.util.stream.IntStream;
 import org.pofk.answer.ConditionalSequence;
+import org.pofk.answer.TooMuchWorkException;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Output;
 import org.pofk.chain.Timetable;
 import org.pofk.schedule.CycleCourse.Reading;
+import org.pofk.schedule.CycleCourse.Side;
 import org.pofk.schedule.CycleFormula.Place;
 import org.pofk.steps.KnownValue;
 import org.pofk.steps.ModeValues;
@@ -27,6 +29,7 @@ public final class ScheduledChain {
     private final StateArithmetic.Whole whole;
     private final long bits;
     private Optional<CycleChain> cycles = Optional.empty();
+    private Optional<Optional<CycleEnclosures>> enclosures = Optional.empty();
 
     private ScheduledChain(Chain chain, Timetable timetable) {
         this.chain = chain;
@@ -54,8 +57,13 @@ public final class ScheduledChain {
 
     /** Whether one for each step of a cycle is. */
     boolean areAllFormulasWithinReach() {
-        return areFormulasWithinReach()
-                && Math.pow(chain.size(), 3) * bits * timetable.period() <= ALL_FORMULAS_AT_MOST;
+        return formulasWithinReach() >= timetable.period();
+    }
+
+    /** For how many places of a cycle formulas are found in reasonable time. */
+    long formulasWithinReach() {
+        return areFormulasWithinReach() ? (long) (ALL_FORMULAS_AT_MOST / Math.pow(chain.size(), 3) / Math.max(1, bits))
+                : 0;
     }
 
     /** The chain that moves by a whole cycle from x(P). */
@@ -75,47 +83,89 @@ public final class ScheduledChain {
                 above.get(i).closedForm(), below.get(i).closedForm())).toList();
     }
 
-    /** An output at the end of the steps 0 … P before the first cycle. */
-    List<KnownValue> before(Output output) {
-        return timetable.before() == 0 ? List.of(at(output, List.of(0)).get(0).orElseThrow())
-                : CycleCourse.of(timetable, whole, WholeState.of(chain.start()), 0, timetable.before(),
-                        List.of(output)).courses().get(0).readings().stream().map(Reading::after).toList();
+    /** The states at the beginnings of the cycles, enclosed; empty where they can't be, and for a recursion. */
+    Optional<CycleEnclosures> enclosures() {
+        if (enclosures.isEmpty()) {
+            enclosures = Optional.of(chain.kind() == Chain.Kind.RECURSION ? Optional.empty()
+                    : CycleEnclosures.of(chain, timetable));
+        }
+        return enclosures.get();
     }
 
-    /** An output at the end of the steps 0 … last: certified for a chain, exact for a recursion. */
-    List<KnownValue> first(Output output, int last) {
+    /** An output at the steps 0 … P before the first cycle: exact. */
+    List<Reading> before(Output output) {
+        return walked(whole, output, timetable.before());
+    }
+
+    /** An output at the steps 0 … last: certified for a chain, exact for a recursion. */
+    List<Reading> first(Output output, int last) {
         return chain.kind() == Chain.Kind.RECURSION ? walked(whole, output, last)
                 : walked(StateArithmetic.Fixed.of(timetable), output, last);
     }
 
-    private <V, R> List<KnownValue> walked(StateArithmetic<V, R> arithmetic, Output output, int last) {
-        return CycleCourse.of(timetable, arithmetic, arithmetic.start(chain.start()), 0, last, List.of(output)).courses()
-                .get(0).readings().stream().map(Reading::after).toList();
+    private <V, R> List<Reading> walked(StateArithmetic<V, R> arithmetic, Output output, int last) {
+        V start = arithmetic.start(chain.start());
+        KnownValue here = arithmetic.known(arithmetic.reading(output, start));
+        return last == 0 ? List.of(new Reading(0, here, here))
+                : CycleCourse.of(timetable, arithmetic, start, 0, last, List.of(output)).courses().get(0).readings();
+    }
+
+    /** An output at step j of cycle m, exactly; empty where the numbers are out of reach. */
+    Optional<Reading> exactly(Output output, long m, int j) {
+        long k = timetable.before() + m * timetable.period() + j;
+        return k > Integer.MAX_VALUE || !ScheduledValues.isWithinReach(chain.size(), timetable, bits, (int) k)
+                ? Optional.empty()
+                : Optional.of(ScheduledValues.of(chain, timetable, whole, List.of(output), List.of((int) k)).get(0).get(0));
     }
 
     /**
-     * An output at the end of some steps, ascending, after what is done there: exactly while the numbers stay within
-     * reach, by the formulas over the cycles beyond; where these are out of reach too, certified for a chain and empty for
-     * a recursion.
+     * An output at some steps, ascending: exactly while the numbers stay within reach, by the formulas over the cycles
+     * beyond; where these are out of reach too, certified for a chain and empty for a recursion.
      */
-    List<Optional<KnownValue>> at(Output output, List<Integer> steps) {
-        boolean isByFormula = chain.kind() == Chain.Kind.RECURSION || areFormulasWithinReach();
-        List<Integer> near = steps.stream().filter(k -> !isByFormula
-                || ScheduledValues.isWithinReach(chain.size(), timetable, bits, k)).toList();
-        List<Optional<KnownValue>> values = new ArrayList<>();
+    List<Optional<Reading>> at(Output output, List<Integer> steps) {
+        List<Integer> near = steps.stream()
+                .filter(k -> ScheduledValues.isWithinReach(chain.size(), timetable, bits, k)).toList();
+        List<Optional<Reading>> values = new ArrayList<>();
         if (!near.isEmpty()) {
             ScheduledValues.of(chain, timetable, whole, List.of(output), near).get(0)
-                    .forEach(reading -> values.add(Optional.of(reading.after())));
+                    .forEach(reading -> values.add(Optional.of(reading)));
         }
         steps.subList(near.size(), steps.size()).forEach(k -> values.add(far(output, k)));
         return values;
     }
 
-    private Optional<KnownValue> far(Output output, int k) {
-        Timetable.Place place = timetable.place(k);
-        return areFormulasWithinReach() && place.cycle().isPresent()
-                ? Optional.of(new KnownValue(KnownValue.Word.EXACT, Optional.empty(),
-                        ModeValues.of(cycles().formula(output, place.within()).closedForm())
-                                .at(place.cycle().getAsInt()))) : Optional.empty();
+    /** The same after what is done there. */
+    List<Optional<KnownValue>> after(Output output, List<Integer> steps) {
+        return at(output, steps).stream().map(each -> each.map(Reading::after)).toList();
+    }
+
+    private Optional<Reading> far(Output output, int k) {
+        int place = k - timetable.before() - 1;
+        int j = Math.floorMod(place, timetable.period()) + 1;
+        int m = Math.floorDiv(place, timetable.period());
+        if (place >= 0 && areFormulasWithinReach()) {
+            KnownValue after = value(output, new Place(j, Side.AFTER), m);
+            return Optional.of(new Reading(k, timetable.at(k).actions().isEmpty() ? after
+                    : value(output, new Place(j, Side.BEFORE), m), after));
+        }
+        Optional<Reading> enclosed = place < 0 ? Optional.empty() : enclosures()
+                .flatMap(cycles -> enclosed(cycles, output, j, m))
+                .map(reading -> new Reading(k, reading.before(), reading.after()));
+        return enclosed.isPresent() || chain.kind() == Chain.Kind.RECURSION ? enclosed : Optional.of(
+                ScheduledValues.of(chain, timetable, whole, List.of(output), List.of(k)).get(0).get(0));
+    }
+
+    private Optional<Reading> enclosed(CycleEnclosures cycles, Output output, int j, int m) {
+        try {
+            return Optional.of(CycleCourse.of(timetable, StateArithmetic.Fixed.of(timetable), cycles.state(m),
+                    timetable.before(), j, List.of(output)).courses().get(0).readings().get(j));
+        } catch (TooMuchWorkException tooMuch) {
+            return Optional.empty();
+        }
+    }
+
+    private KnownValue value(Output output, Place place, int m) {
+        return new KnownValue(KnownValue.Word.EXACT, Optional.empty(),
+                ModeValues.of(cycles().formula(output, place).closedForm()).at(m));
     }
 }

@@ -26,6 +26,7 @@ import org.pofk.exact.Rational;
 import org.pofk.modes.RealValue;
 import org.pofk.schedule.CycleCourse.Side;
 import org.pofk.schedule.CycleFormula.Place;
+import org.pofk.schedule.CycleCourse.Reading;
 import org.pofk.steps.KnownValue;
 import org.pofk.steps.PossibleSteps;
 import org.pofk.steps.StepValue;
@@ -89,8 +90,8 @@ public final class ScheduledConditionalWhen {
                 .reduce(Rational.ZERO, Rational::max) : Rational.ONE;
         WhenModel.Asked absolute = new WhenModel.Asked(asked.kind(), asked.bound().times(size), false);
         Condition condition = new Condition(absolute.kind(), absolute.bound());
-        List<KnownValue> above = chain.before(joint);
-        List<KnownValue> below = chain.before(event);
+        List<KnownValue> above = chain.before(joint).stream().map(Reading::after).toList();
+        List<KnownValue> below = chain.before(event).stream().map(Reading::after).toList();
         List<ResidueClass> classes = new ArrayList<>();
         for (int j = 0; j < timetable.period(); j++) {
             When inCycles = sequences.get(j).when(absolute);
@@ -156,8 +157,8 @@ public final class ScheduledConditionalWhen {
         List<Integer> steps = Stream.of(when.first(), when.forEverFrom()).flatMap(Optional::stream)
                 .flatMap(k -> Stream.of(k - 1, k)).filter(k -> k >= 0 && k <= Integer.MAX_VALUE)
                 .map(Long::intValue).distinct().sorted().toList();
-        List<Optional<KnownValue>> above = chain.at(joint, steps);
-        List<Optional<KnownValue>> below = chain.at(event, steps);
+        List<Optional<KnownValue>> above = chain.after(joint, steps);
+        List<Optional<KnownValue>> below = chain.after(event, steps);
         return IntStream.range(0, steps.size()).mapToObj(i -> new Conditional.At(steps.get(i),
                 possible.orElseThrow().at(steps.get(i)) ? Optional.of(value(steps.get(i), above.get(i).orElseThrow(),
                         below.get(i).orElseThrow(), sequences)) : Optional.empty())).toList();

@@ -72,7 +72,7 @@ final class ScheduledPassageAnalysis {
     }
 
     private Map<Integer, KnownValue> at(List<Integer> steps, Output output) {
-        List<Optional<KnownValue>> values = stopped.chain().at(output, steps);
+        List<Optional<KnownValue>> values = stopped.chain().after(output, steps);
         Map<Integer, KnownValue> byStep = new HashMap<>();
         IntStream.range(0, steps.size()).forEach(i -> byStep.put(steps.get(i), values.get(i).orElseThrow()));
         return byStep;

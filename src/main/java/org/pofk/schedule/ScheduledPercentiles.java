@@ -60,7 +60,8 @@ final class ScheduledPercentiles {
     }
 
     private Percentile beforeTheCycles(Rational p) {
-        List<KnownValue> values = stopped.chain().before(stopped.distribution());
+        List<KnownValue> values = stopped.chain().before(stopped.distribution()).stream()
+                .map(CycleCourse.Reading::after).toList();
         for (int k = 0; k < values.size(); k++) {
             Optional<Boolean> is = isReached(values.get(k), p);
             if (is.isEmpty()) {

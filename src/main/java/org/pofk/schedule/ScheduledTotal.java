@@ -56,7 +56,7 @@ public record ScheduledTotal(Increment increment, Rational factor, Output total,
         ScheduledIncrement increment =
                 ScheduledIncrement.of(model.chain(), timetable, asked.increment, model.costs());
         SummedSchedule summed = SummedSchedule.of(model.chain(), timetable, increment, asked.factor);
-        List<Optional<KnownValue>> values = steps.isEmpty() ? List.of() : summed.recursion().at(summed.total(), steps);
+        List<Optional<KnownValue>> values = steps.isEmpty() ? List.of() : summed.recursion().after(summed.total(), steps);
         return new ScheduledTotal(increment.own(), asked.factor, summed.total(), summed.recursion(), timetable.period(), over(summed),
                 IntStream.range(0, steps.size()).mapToObj(i -> new At(steps.get(i), values.get(i))).toList());
     }

@@ -4,6 +4,7 @@ import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
+import java.util.stream.IntStream;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Output;
 import org.pofk.exact.Ball;
@@ -45,6 +46,11 @@ public record FixedPointState(List<BigInteger> components) {
         return value.numerator().shiftLeft(BITS).divide(value.denominator());
     }
 
+    /** The largest whole number of 2^−{@value #BITS} that isn't above a value. */
+    public static BigInteger floor(Rational value) {
+        return value.times(Rational.of(ONE)).floor();
+    }
+
     /** What the components lack to one: the true vector lies within this of them, summed over all states. */
     public BigInteger missing() {
         return ONE.subtract(components.stream().reduce(BigInteger.ZERO, BigInteger::add));
@@ -74,6 +80,21 @@ public record FixedPointState(List<BigInteger> components) {
             largest = largest.max(components.get(i).subtract(other.components.get(i)).abs());
         }
         return largest.add(missing().max(other.missing())).compareTo(below(tolerance)) <= 0;
+    }
+
+    /** The two true vectors differ by no more than this many 2^−{@value #BITS}, summed over all states. */
+    public BigInteger distance(FixedPointState other) {
+        BigInteger sum = missing().add(other.missing());
+        for (int i = 0; i < components.size(); i++) {
+            sum = sum.add(components.get(i).subtract(other.components.get(i)).abs());
+        }
+        return sum;
+    }
+
+    /** All in one state, exactly. */
+    public static FixedPointState in(int state, int size) {
+        return new FixedPointState(IntStream.range(0, size)
+                .mapToObj(i -> i == state ? ONE : BigInteger.ZERO).toList());
     }
 
     /** The components of Σ column · weight, rounded down. */

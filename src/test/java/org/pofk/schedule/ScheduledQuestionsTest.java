@@ -21,6 +21,7 @@ import org.pofk.chain.Schedule;
 import org.pofk.chain.SparseMatrix;
 import org.pofk.chain.Timetable;
 import org.pofk.exact.Rational;
+import org.pofk.schedule.ScheduledWhen.Sides;
 
 /** Totals and conditions under a schedule against plain stepping with nothing but its matrices. */
 class ScheduledQuestionsTest {
@@ -147,7 +148,7 @@ class ScheduledQuestionsTest {
             for (When.Condition.Kind kind : List.of(When.Condition.Kind.AT_LEAST, When.Condition.Kind.AT_MOST)) {
                 for (Rational bound : bounds) {
                     ScheduledWhen found = ScheduledWhen.of(model, Outputs.states(model.chain()),
-                            new WhenModel.Asked(kind, bound, false), published -> { });
+                            new WhenModel.Asked(kind, bound, false), Sides.AFTER, published -> { });
                     for (int state = 0; state < 3; state++) {
                         int place = state;
                         List<Boolean> met = values.stream().map(all -> kind == When.Condition.Kind.AT_LEAST
@@ -195,7 +196,7 @@ class ScheduledQuestionsTest {
         for (WhenModel.Asked asked : all) {
             List<WhenModel.Answer> plain = WhenModel.of(model, Outputs.states(model.chain()), asked, published -> { })
                     .answers();
-            List<ScheduledWhen.Answer> found = ScheduledWhen.of(model, Outputs.states(model.chain()), asked,
+            List<ScheduledWhen.Answer> found = ScheduledWhen.of(model, Outputs.states(model.chain()), asked, Sides.AFTER,
                     published -> { }).answers();
             for (int i = 0; i < 3; i++) {
                 assertEquals(plain.get(i).when().first(), found.get(i).when().first());
