@@ -60,8 +60,8 @@ public final class ScheduledDocument {
     private static List<Block> joint(ScheduledModel found, ScheduledOutput output) {
         List<Block> blocks = new ArrayList<>(CycleFormulas.joint(found.timetable(), output));
         if (found.formulasLeftOut()) {
-            blocks.add(new Labelled("formulas", "left out, their numbers are too long to be found at once; --show all"
-                    + " derives them however long it takes"));
+            blocks.add(new Labelled("formulas", "left out: the numbers of a whole cycle have up to " + found.cycleDigits()
+                    + " digits, those of formulas more; --show all derives them however long it takes"));
         }
         return blocks;
     }

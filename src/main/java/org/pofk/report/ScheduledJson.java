@@ -114,7 +114,12 @@ public final class ScheduledJson {
     }
 
     void value(String name, KnownValue value) {
-        json.object(name, () -> {
+        json.name(name);
+        value(value);
+    }
+
+    void value(KnownValue value) {
+        json.object(() -> {
             json.text("word", value.word() == KnownValue.Word.EXACT ? "exact" : "certified");
             json.text("exact", value.exact().map(Rational::toString));
             json.text("decimal", KnownText.number(value, digits));

@@ -20,6 +20,8 @@ import org.pofk.steps.KnownValue;
 /** What is spent in states, entered and paid under a schedule, as a document. */
 public final class ScheduledTotalDocument {
     private static final String OUT_OF_REACH = "not decided: the numbers of a whole cycle are too long for formulas";
+    private static final String CERTIFIED = "certified: every digit shown is right; formulas over the cycles would need"
+            + " numbers too long to be found at once";
 
     private final ScheduledTotalModel found;
     private final Timetable timetable;
@@ -71,8 +73,7 @@ public final class ScheduledTotalDocument {
     /** How it grows. */
     private Labelled keyFigure(ScheduledTotal total) {
         ScheduledTotalDocument alone = new ScheduledTotalDocument(found, style);
-        total.over().ifPresentOrElse(over -> alone.growth(total, over.growth()), () -> alone.label(TotalBlocks.LONG_RUN,
-                OUT_OF_REACH));
+        total.over().ifPresentOrElse(over -> alone.growth(total, over.growth()), () -> alone.bounds(total));
         return TotalBlocks.keyFigure(total.total(), (Labelled) alone.blocks.get(0));
     }
 
@@ -88,9 +89,23 @@ public final class ScheduledTotalDocument {
 
     private void total(ScheduledTotal total) {
         label("counts", counts(total));
-        total.over().ifPresentOrElse(over -> over(total, over), () -> label(TotalBlocks.LONG_RUN,
-                OUT_OF_REACH));
+        total.over().ifPresentOrElse(over -> over(total, over), () -> bounds(total));
         values(total);
+    }
+
+    /** What is certain without formulas. */
+    private void bounds(ScheduledTotal total) {
+        total.bounds().flatMap(ScheduledTotal.Bounds::perStep).ifPresent(value -> label("grows", "in the long run by "
+                + amount(total, value) + " a step"
+                + (total.increment().kind() == Kind.STEPS ? ", the share of time in the long run" : "")));
+        total.bounds().flatMap(ScheduledTotal.Bounds::everything).ifPresent(value -> label("in all",
+                amount(total, value) + " over all steps k ≥ 0"));
+        label(total.isDecided() && total.bounds().isPresent() ? "numbers" : TotalBlocks.LONG_RUN,
+                total.isDecided() && total.bounds().isPresent() ? CERTIFIED : OUT_OF_REACH);
+    }
+
+    private String amount(ScheduledTotal total, KnownValue value) {
+        return KnownText.of(value, style.digits()) + unit(total);
     }
 
     private void label(String label, String text) {
@@ -145,9 +160,13 @@ public final class ScheduledTotalDocument {
     }
 
     private String amount(ScheduledTotal total, Rational value) {
-        return prose().number(value) + switch (total.increment().kind()) {
+        return prose().number(value) + (total.increment().kind() == Kind.STEPS && value.isOne() ? " step" : unit(total));
+    }
+
+    private String unit(ScheduledTotal total) {
+        return switch (total.increment().kind()) {
             case VALUES -> "";
-            case STEPS -> total.total().name().startsWith("steps") && value.isOne() ? " step" : " steps";
+            case STEPS -> " steps";
             case ENTRIES -> " entries";
             case COSTS -> " " + unit();
         };
@@ -191,7 +210,8 @@ public final class ScheduledTotalDocument {
     private List<Prose> row(ScheduledTotal total, ScheduledTotal.At at) {
         List<Prose> cells = new ArrayList<>(List.of(Prose.of(String.valueOf(at.k())), Prose.of(text(at.total()))));
         if (total.factor().isOne()) {
-            cells.add(Prose.of(text(at.average())));
+            boolean isNone = at.total().isPresent() && at.average().isEmpty();
+            cells.add(Prose.of(isNone ? "–" : text(at.average())));
         }
         return cells;
     }

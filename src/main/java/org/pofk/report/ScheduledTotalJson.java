@@ -21,7 +21,7 @@ public final class ScheduledTotalJson {
         json.text("name", total.total().name());
         json.text("counts", total.increment().kind().name().toLowerCase(Locale.ROOT));
         json.text("factor", total.factor().toString());
-        json.text("word", total.isDecided() ? "exact" : "undecided");
+        json.text("word", !total.isDecided() ? "undecided" : total.over().isPresent() ? "exact" : "certified");
         json.optional("overCycles", total.over(), over -> json.object(() -> {
             json.name("total");
             writer.over(over.total());
@@ -33,11 +33,17 @@ public final class ScheduledTotalJson {
             json.name("beyond");
             new JsonLongRun(json).write(over.growth().beyond());
         }));
+        json.optional("bounds", total.bounds(), bounds -> json.object(() -> {
+            json.optional("perCycle", bounds.perCycle(), writer::value);
+            json.optional("perStep", bounds.perStep(), writer::value);
+            json.optional("everything", bounds.everything(), writer::value);
+        }));
         json.list("values", total.values().stream().filter(at -> at.total().isPresent()).toList(), at ->
                 json.object(() -> {
             json.count("k", at.k());
             writer.value("total", at.total().orElseThrow());
-            writer.value("average", at.average().orElseThrow());
+            json.name("average");
+            at.average().ifPresentOrElse(writer::value, json::nothing);
         }));
     }
 }

@@ -7,7 +7,9 @@ import org.pofk.answer.TotalModel;
 import org.pofk.chain.Model;
 import org.pofk.exact.Rational;
 import org.pofk.schedule.ScheduledTotal;
+import org.pofk.schedule.ScheduledTotal.Bounds;
 import org.pofk.schedule.ScheduledTotalModel;
+import org.pofk.steps.KnownValue;
 
 /**
  * Totals as rows that each say one number: what a step adds, the total and its average by step; without a step, how
@@ -44,10 +46,17 @@ public final class TotalTable {
             total.values().forEach(at -> at.average().ifPresent(value ->
                     rows.add(of, Rows.words("average of a step"), steps.cells(at.k()), rows.value(value))));
             total.perStep().ifPresent(value -> number(of, "a step in the long run", value));
+            total.bounds().flatMap(Bounds::perStep).ifPresent(value -> number(of, "a step in the long run", value));
+            total.bounds().flatMap(Bounds::perCycle).ifPresent(value -> number(of, "a cycle in the long run", value));
             total.over().ifPresent(over -> number(of, "a cycle in the long run", over.growth().perStep()));
         }
         total.over().flatMap(over -> over.growth().everything()).ifPresent(value -> number(of, "over all steps",
                 value));
+        total.bounds().flatMap(Bounds::everything).ifPresent(value -> number(of, "over all steps", value));
+    }
+
+    private void number(List<Prose> of, String quantity, KnownValue value) {
+        rows.add(of, Rows.words(quantity), steps.none(), rows.value(value));
     }
 
     private void total(Total total) {

@@ -13,6 +13,9 @@ import org.pofk.steps.WholeMatrix;
  * happens in many steps running: log T products of n × n matrices.
  */
 final class CycleMatrices {
+    private static final double FORMULAS_AT_MOST = 3e6;
+    private static final double LOWEST_TERMS_AT_MOST = 1e10;
+
     private CycleMatrices() {
     }
 
@@ -77,6 +80,15 @@ final class CycleMatrices {
             square = left > 1 ? FixedPointColumn.squared(square) : square;
         }
         return result;
+    }
+
+    /**
+     * Whether a few formulas over the cycles are found in some seconds: by the primes that a recurrence of n states with
+     * so long numbers needs, and by putting its numbers in lowest terms.
+     */
+    static boolean areFormulasWithinReach(int states, long bits) {
+        return Math.pow(states, 3) * bits <= FORMULAS_AT_MOST
+                && states * Math.pow((double) states * bits, 2) <= LOWEST_TERMS_AT_MOST;
     }
 
     /** How many bits the entries of S have at most, without computing it. */

@@ -19,9 +19,7 @@ import org.pofk.steps.WholeState;
 
 /** A chain with its timetable, and the chain of its whole cycles, made when it is first asked for. Exact. */
 public final class ScheduledChain {
-    /** Cubed states times bits of a cycle's matrix, for formulas over the cycles: a second or two. */
-    private static final double FORMULAS_AT_MOST = 3e6;
-    /** The same times the steps of a cycle, for a formula at each of them: ten seconds. */
+    /** Cubed states times bits of a cycle's matrix times the steps of a cycle, for a formula at each of them: ten seconds. */
     private static final double ALL_FORMULAS_AT_MOST = 1.5e7;
 
     private final Chain chain;
@@ -52,7 +50,7 @@ public final class ScheduledChain {
 
     /** Whether a few formulas over the cycles are found in reasonable time. */
     boolean areFormulasWithinReach() {
-        return Math.pow(chain.size(), 3) * bits <= FORMULAS_AT_MOST;
+        return CycleMatrices.areFormulasWithinReach(chain.size(), bits);
     }
 
     /** Whether one for each step of a cycle is. */

@@ -3,6 +3,7 @@ package org.pofk.schedule;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.Function;
+import java.util.stream.Stream;
 import org.pofk.answer.Increment;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Costs;
@@ -33,6 +34,12 @@ record ScheduledIncrement(Increment own, List<List<Rational>> byMove, List<List<
                 timetable.actions().stream().map(action -> own.kind() == Increment.Kind.COSTS
                         ? costs.orElseThrow().ofAction(action.name())
                         : increment.apply(by(chain, action.matrix())).byMove()).toList());
+    }
+
+    /** All of them. */
+    Stream<Rational> amounts() {
+        return Stream.of(own.atState().stream(), byMove.stream().flatMap(List::stream),
+                byAction.stream().flatMap(List::stream), Stream.of(own.atStart(), own.constant())).flatMap(each -> each);
     }
 
     private static Chain by(Chain chain, SparseMatrix matrix) {

@@ -2,6 +2,7 @@ package org.pofk.schedule;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.function.Consumer;
 import java.util.function.Function;
 import java.util.stream.IntStream;
 import org.pofk.answer.Growth;
@@ -10,7 +11,6 @@ import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
 import org.pofk.chain.Timetable;
-import org.pofk.exact.Enclosed;
 import org.pofk.exact.Rational;
 import org.pofk.steps.KnownValue;
 
@@ -22,10 +22,11 @@ import org.pofk.steps.KnownValue;
  * @param factor    v, with which each later step counts less; one where nothing is discounted
  * @param recursion the chain with what is added up as one more component, whose output the total is
  * @param over      over whole cycles; empty where the numbers of a cycle are too long for formulas
+ * @param bounds    what is certified in place of these
  * @param values    at the steps asked for
  */
 public record ScheduledTotal(Increment increment, Rational factor, Output total, ScheduledChain recursion, int period,
-        Optional<OverCycles> over, List<At> values) {
+        Optional<OverCycles> over, Optional<Bounds> bounds, List<At> values) {
 
     /** What is asked for: the increment of a chain by its matrix, and how much less each later step counts. */
     public record Asked(Function<Chain, Increment> increment, Rational factor) {
@@ -39,12 +40,34 @@ public record ScheduledTotal(Increment increment, Rational factor, Output total,
     public record OverCycles(CycleFormula total, CycleFormula cycle, Growth growth) {
     }
 
-    /** The total of the steps 0 … k, and that over k + 1; empty where it isn't within reach. */
-    public record At(int k, Optional<KnownValue> total) {
-        public Optional<KnownValue> average() {
-            Rational share = Rational.of(1, k + 1);
-            return total.map(value -> new KnownValue(value.word(), value.exact().map(share::times),
-                    value.enclosure().times(Enclosed.of(share))));
+    /**
+     * What is certain where the numbers of a cycle are too long for formulas.
+     *
+     * @param perCycle   what a cycle adds in the long run
+     * @param perStep    that over its steps
+     * @param everything the total of all steps, where later ones count less
+     */
+    public record Bounds(Optional<KnownValue> perCycle, Optional<KnownValue> perStep, Optional<KnownValue> everything) {
+        static Bounds of(BoundedTotal total, Rational factor, int period) {
+            Optional<KnownValue> perCycle = factor.isOne() ? total.perCycle() : Optional.empty();
+            return new Bounds(perCycle, perCycle.map(each -> each.over(KnownValue.of(Rational.of(period)))),
+                    factor.compareTo(Rational.ONE) < 0 ? total.everything() : Optional.empty());
+        }
+
+        boolean isKnown() {
+            return perCycle.isPresent() || everything.isPresent();
+        }
+    }
+
+    /**
+     * The total of the steps 0 … k, and that over how many of them count: k + 1, for entries k, and none at k = 0. Empty
+     * where they aren't known.
+     */
+    public record At(int k, Optional<KnownValue> total, Optional<KnownValue> average) {
+        static At of(Increment increment, int k, Optional<KnownValue> total) {
+            long counted = increment.kind() == Increment.Kind.ENTRIES ? k : k + 1L;
+            return new At(k, total, total.filter(value -> counted > 0)
+                    .map(value -> value.over(KnownValue.of(Rational.of(counted)))));
         }
     }
 
@@ -52,13 +75,26 @@ public record ScheduledTotal(Increment increment, Rational factor, Output total,
         values = List.copyOf(values);
     }
 
-    static ScheduledTotal of(Model model, Timetable timetable, Asked asked, List<Integer> steps) {
-        ScheduledIncrement increment =
-                ScheduledIncrement.of(model.chain(), timetable, asked.increment, model.costs());
-        SummedSchedule summed = SummedSchedule.of(model.chain(), timetable, increment, asked.factor);
+    /** Published when its values are known, and whole. */
+    static ScheduledTotal of(Model model, Timetable timetable, Asked asked, List<Integer> steps,
+            Consumer<ScheduledTotal> published) {
+        Chain chain = model.chain();
+        ScheduledIncrement increment = ScheduledIncrement.of(chain, timetable, asked.increment, model.costs());
+        SummedSchedule summed = SummedSchedule.of(chain, timetable, increment, asked.factor);
+        boolean isBounded = chain.kind() == Chain.Kind.CHAIN && !summed.recursion().areFormulasWithinReach();
+        Optional<BoundedTotal> bounded = isBounded
+                ? Optional.of(BoundedTotal.of(chain, timetable, increment, asked.factor)) : Optional.empty();
         List<Optional<KnownValue>> values = steps.isEmpty() ? List.of() : summed.recursion().after(summed.total(), steps);
-        return new ScheduledTotal(increment.own(), asked.factor, summed.total(), summed.recursion(), timetable.period(), over(summed),
-                IntStream.range(0, steps.size()).mapToObj(i -> new At(steps.get(i), values.get(i))).toList());
+        ScheduledTotal known = new ScheduledTotal(increment.own(), asked.factor, summed.total(), summed.recursion(),
+                timetable.period(), Optional.empty(), Optional.empty(), IntStream.range(0, steps.size()).mapToObj(i ->
+                At.of(increment.own(), steps.get(i), values.get(i).or(() -> bounded.map(total -> total.at(steps.get(i))))))
+                .toList());
+        published.accept(known);
+        return known.with(over(summed), bounded.map(total -> Bounds.of(total, asked.factor, timetable.period())));
+    }
+
+    private ScheduledTotal with(Optional<OverCycles> found, Optional<Bounds> between) {
+        return new ScheduledTotal(increment, factor, total, recursion, period, found, between, values);
     }
 
     private static Optional<OverCycles> over(SummedSchedule summed) {
@@ -78,6 +114,6 @@ public record ScheduledTotal(Increment increment, Rational factor, Output total,
     }
 
     public boolean isDecided() {
-        return over.isPresent() && values.stream().allMatch(each -> each.total.isPresent());
+        return (over.isPresent() || bounds.filter(Bounds::isKnown).isPresent()) && values.stream().allMatch(each -> each.total.isPresent());
     }
 }

@@ -22,7 +22,11 @@ public record ScheduledTotalModel(Model model, Timetable timetable, List<Schedul
         Timetable timetable = Timetable.of(model.chain(), model.schedule().orElseThrow());
         List<ScheduledTotal> totals = new ArrayList<>();
         for (ScheduledTotal.Asked each : asked) {
-            totals.add(ScheduledTotal.of(model, timetable, each, steps));
+            totals.add(ScheduledTotal.of(model, timetable, each, steps, partly -> {
+                List<ScheduledTotal> soFar = new ArrayList<>(totals);
+                soFar.add(partly);
+                published.accept(new ScheduledTotalModel(model, timetable, soFar, asked.size()));
+            }));
             published.accept(new ScheduledTotalModel(model, timetable, totals, asked.size()));
         }
         return new ScheduledTotalModel(model, timetable, totals, asked.size());

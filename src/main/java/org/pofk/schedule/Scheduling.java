@@ -25,8 +25,6 @@ import org.pofk.steps.WholeState;
 public final class Scheduling {
     /** Cubed states times bits of a cycle's matrix, for exact long runs and formulas: seconds. */
     private static final double EXACT_AT_MOST = 4e7;
-    /** The same for formulas over the cycles, whose poles have to be found too. */
-    private static final double FORMULAS_AT_MOST = 3e6;
     /** Steps times entries times machine words of a number. */
     private static final double WALKED_EXACTLY_AT_MOST = 1e8;
     private static final int PLACES_AT_MOST = 8;
@@ -72,7 +70,7 @@ public final class Scheduling {
         if (!at.isEmpty()) {
             values(at);
         }
-        boolean within = work() <= FORMULAS_AT_MOST || formulas == Formulas.ALL;
+        boolean within = CycleMatrices.areFormulasWithinReach(chain.size(), cycleBits) || formulas == Formulas.ALL;
         if (within) {
             formulas(beginExactly(), limit, at);
         } else {
