@@ -145,7 +145,8 @@ final class ClosedFormConstraint implements Constraint {
     public Band.Relation at(long residue, long k) throws TooMuchWorkException {
         if (k >= firstWithoutImpulses) {
             Band.Relation relation = band(residue).of(sum(residue).over(k, k, 1));
-            for (int i = 0; relation == Band.Relation.EITHER && i < CLOSER_BITS.length; i++) {
+            for (int i = 0; relation == Band.Relation.EITHER && i < CLOSER_BITS.length
+                    && CLOSER_BITS[i] < bitsOfValue(k); i++) {
                 relation = band(residue).of(sum(residue, CLOSER_BITS[i]).over(k, k, 1));
             }
             if (relation != Band.Relation.EITHER) {
@@ -156,6 +157,11 @@ final class ClosedFormConstraint implements Constraint {
             throw new TooMuchWorkException();
         }
         return band(residue).contains(valueAt(k).minus(limit(residue))) ? Band.Relation.INSIDE : Band.Relation.OUTSIDE;
+    }
+
+    /** About how long the exact value is: where it is shorter than an enclosure, it is the quicker way. */
+    private long bitsOfValue(long k) {
+        return k * chain.matrix().commonDenominator().bitLength();
     }
 
     /** Exact. */

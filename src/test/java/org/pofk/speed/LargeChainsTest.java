@@ -12,6 +12,7 @@ import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.EnumSource;
 import org.pofk.answer.Passage;
 import org.pofk.answer.PowerModel;
+import org.pofk.answer.When;
 import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
@@ -20,6 +21,8 @@ import org.pofk.exact.Rational;
 import org.pofk.input.ModelReader;
 import org.pofk.input.Overrides;
 import org.pofk.input.Source;
+import org.pofk.longrun.LongRun;
+import org.pofk.modes.ClosedForm;
 import org.pofk.steps.ExactSteps;
 import org.pofk.steps.PowerSeries;
 import org.pofk.text.RefusedException;
@@ -56,6 +59,26 @@ class LargeChainsTest {
         assertEquals(stepped, PowerSeries.of(passage.law().transform().orElseThrow().y(), STEPS));
         assertEquals(stepped.stream().reduce(Rational.ZERO, Rational::plus), ExactSteps.of(passage.stopped(),
                 List.of(passage.distribution().output()), STEPS).values().get(0).get(STEPS));
+    }
+
+    /** Early steps touch the bound exactly: no enclosure tells that, exact values do. */
+    @ParameterizedTest
+    @EnumSource(LargeChains.class)
+    void whenTouchingItsBoundIsWhatStepsSay(LargeChains kind) throws RefusedException {
+        Chain chain = model(kind, 16).chain();
+        Output output = chain.outputs().get(0);
+        Transform transform = Transforms.of(chain, List.of(output)).get(0);
+        List<Rational> stepped = ExactSteps.of(chain, List.of(output), STEPS).values().get(0);
+        When notAbove = When.of(chain, ClosedForm.of(transform), LongRun.of(chain, transform),
+                new When.Condition(When.Condition.Kind.AT_MOST, Rational.ZERO));
+        long first = stepped.stream().takeWhile(value -> value.signum() > 0).count();
+        assertTrue(notAbove.decided());
+        assertEquals(first < stepped.size() ? Optional.of(first) : Optional.empty(), notAbove.first());
+        When above = When.of(chain, ClosedForm.of(transform), LongRun.of(chain, transform),
+                new When.Condition(When.Condition.Kind.AT_LEAST, stepped.get(STEPS)));
+        assertTrue(above.first().orElseThrow() <= STEPS);
+        assertEquals(stepped.indexOf(stepped.stream().filter(value -> value.compareTo(stepped.get(STEPS)) >= 0)
+                .findFirst().orElseThrow()), above.first().orElseThrow());
     }
 
     @ParameterizedTest
