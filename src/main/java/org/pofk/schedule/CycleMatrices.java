@@ -86,15 +86,21 @@ final class CycleMatrices {
      * Whether a few formulas over the cycles are found in some seconds: by the primes that a recurrence of n states with
      * so long numbers needs, and by putting its numbers in lowest terms.
      */
-    static boolean areFormulasWithinReach(int states, long bits) {
+    static boolean areFormulasWithinReach(int states, Timetable timetable, StateArithmetic.Whole matrices) {
+        long bits = bits(timetable.cycle(), matrices);
+        double begun = bits(timetable.preamble(), matrices);
         return Math.pow(states, 3) * bits <= FORMULAS_AT_MOST
-                && states * Math.pow((double) states * bits, 2) <= LOWEST_TERMS_AT_MOST;
+                && states * Math.pow((double) states * bits + begun, 2) <= LOWEST_TERMS_AT_MOST;
     }
 
     /** How many bits the entries of S have at most, without computing it. */
     static long bits(Timetable timetable, StateArithmetic.Whole matrices) {
+        return bits(timetable.cycle(), matrices);
+    }
+
+    private static long bits(List<Moment> moments, StateArithmetic.Whole matrices) {
         long bits = 0;
-        for (Moment moment : timetable.cycle()) {
+        for (Moment moment : moments) {
             bits += moment.move().isPresent() ? matrices.moves().get(moment.move().getAsInt()).divisor().bitLength() : 0;
             bits += moment.actions().stream().mapToLong(action -> matrices.actions().get(action).divisor().bitLength())
                     .sum();

@@ -19,7 +19,7 @@ import org.pofk.steps.WholeState;
 
 /** A chain with its timetable, and the chain of its whole cycles, made when it is first asked for. Exact. */
 public final class ScheduledChain {
-    /** Cubed states times bits of a cycle's matrix times the steps of a cycle, for a formula at each of them: ten seconds. */
+    /** Cubed states times bits of a cycle's matrix times the steps of a cycle, for a formula at each: ten seconds. */
     private static final double ALL_FORMULAS_AT_MOST = 1.5e7;
 
     private final Chain chain;
@@ -50,7 +50,7 @@ public final class ScheduledChain {
 
     /** Whether a few formulas over the cycles are found in reasonable time. */
     boolean areFormulasWithinReach() {
-        return CycleMatrices.areFormulasWithinReach(chain.size(), bits);
+        return CycleMatrices.areFormulasWithinReach(chain.size(), timetable, whole);
     }
 
     /** Whether one for each step of a cycle is. */
@@ -90,9 +90,10 @@ public final class ScheduledChain {
         return enclosures.get();
     }
 
-    /** An output at the steps 0 … P before the first cycle: exact. */
+    /** An output at the steps 0 … P before the first cycle: exact while the numbers of a chain stay within reach. */
     List<Reading> before(Output output) {
-        return walked(whole, output, timetable.before());
+        return ScheduledValues.isWithinReach(chain.size(), timetable, bits, timetable.before())
+                ? walked(whole, output, timetable.before()) : first(output, timetable.before());
     }
 
     /** An output at the steps 0 … last: certified for a chain, exact for a recursion. */

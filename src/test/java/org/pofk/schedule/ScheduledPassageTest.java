@@ -30,6 +30,7 @@ class ScheduledPassageTest {
     private static final List<Integer> AT = IntStream.rangeClosed(0, STEPS).boxed().toList();
     private static final List<Rational> SHARES = List.of(Rational.of(1, 100), Rational.HALF, Rational.of(9, 10));
     private static final int FAILED = 2;
+    private static final int BITS = 512;
 
     private static Map<String, String> cases() {
         Map<String, String> cases = new TreeMap<>(ScheduledCases.withCosts());
@@ -289,5 +290,34 @@ class ScheduledPassageTest {
             assertEquals(plain.hazards().stream().map(Passage.Hazard::value).toList(),
                     found.values().stream().map(each -> each.hazard().flatMap(KnownValue::exact)).toList());
         }
+    }
+
+    /** (1 − qᴺ)/p + qᴺ/r, q = 1 − p, where a step fails with p until N and with r from there on. */
+    @Test
+    void longPreambleIsEnclosedAndNoStepOfItIsMissing() {
+        int steps = 20_000;
+        Rational early = Rational.of(1, 1 << 14);
+        Rational late = Rational.of(1, 1 << 12);
+        Model model = ScheduledCases.model("long preamble", """
+                moves:
+                  early: {good: {failed: 1/16384, good: rest}, worn: stays, failed: stays}
+                  late: {good: {failed: 1/4096, good: rest}, worn: stays, failed: stays}
+                phases: [{for: 20000, use: early}, {for: 1, use: late}]
+                repeat: once
+                """);
+        ScheduledPassage passage = passage(model, List.of(100, 15_000, 30_000));
+        Rational left = Rational.ONE.minus(early).pow(steps);
+        assertEquals(ScheduledPassage.Formulas.TOO_LONG, passage.formulas());
+        assertHolds(Rational.ONE.minus(left).dividedBy(early).plus(left.dividedBy(late)),
+                passage.entrance().orElseThrow().first().mean().orElseThrow());
+        assertHolds(Rational.ONE.minus(early).pow(100), passage.values().get(0).survival());
+        assertHolds(Rational.ONE.minus(early).pow(15_000), passage.values().get(1).survival());
+        assertHolds(left.times(Rational.ONE.minus(late).pow(10_000)), passage.values().get(2).survival());
+    }
+
+    private static void assertHolds(Rational expected, KnownValue found) {
+        Ball ball = found.enclosure().enclose(BITS);
+        assertTrue(ball.lower().compareTo(expected) <= 0 && expected.compareTo(ball.upper()) <= 0, ball::toString);
+        assertTrue(ball.upper().minus(ball.lower()).compareTo(Rational.TWO.pow(-100)) < 0, ball::toString);
     }
 }
