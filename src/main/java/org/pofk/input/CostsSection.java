@@ -39,13 +39,18 @@ final class CostsSection {
     interface MoveFinder {
         boolean isMove(int from, int to);
 
-        /** A move that isn't zero, or that the file writes although it is: a parameter may be zero. */
-        static MoveFinder of(SparseMatrix matrix, List<Written> written) {
+        /**
+         * A move that isn't zero in one of the matrices the chain moves by, or that the file writes although it is: a
+         * parameter may be zero.
+         */
+        static MoveFinder of(List<SparseMatrix> matrices, List<Written> written) {
             Set<List<Integer>> moves = new HashSet<>();
             written.forEach(each -> moves.add(List.of(each.from(), each.to())));
-            for (int from = 0; from < matrix.size(); from++) {
-                int left = from;
-                matrix.columns().get(from).forEach(entry -> moves.add(List.of(left, entry.row())));
+            for (SparseMatrix matrix : matrices) {
+                for (int from = 0; from < matrix.size(); from++) {
+                    int left = from;
+                    matrix.columns().get(from).forEach(entry -> moves.add(List.of(left, entry.row())));
+                }
             }
             return (from, to) -> moves.contains(List.of(from, to));
         }

@@ -4,6 +4,7 @@ import java.nio.file.Path;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.stream.Stream;
 import org.pofk.chain.Chain;
 import org.pofk.chain.ChainCheck;
 import org.pofk.chain.Costs;
@@ -81,7 +82,7 @@ public final class ModelReader {
         Optional<Schedule> schedule = ScheduleSections.read(fields, moves.states(), head,
                 new Amounts(section.values(), reading), chain.matrix(), reading);
         Optional<Costs> costs = fields.value("costs").flatMap(node -> new CostsSection(moves.states(), chain.sets(),
-                CostsSection.MoveFinder.of(chain.matrix(), written), actions(fields),
+                CostsSection.MoveFinder.of(matrices(chain, schedule), written), actions(fields),
                 new Amounts(section.values(), reading), reading).read(node, head));
         if (schedule.isPresent()) {
             new StartSection(moves.states(), chain.sets(), chain.matrix(), head, new Amounts(section.values(), reading),
@@ -93,6 +94,12 @@ public final class ModelReader {
         return Optional.of(new Model(head.title(), head.step(), convention, head.about(), chain, schedule, costs,
                 parameters, reading.remarks(), reading.changes(), written,
                 new Origin(source.name(), source.sha256()), reading.tables(), reading.settings()));
+    }
+
+    /** The matrices the chain moves by, in one phase or another. */
+    private static List<SparseMatrix> matrices(Chain chain, Optional<Schedule> schedule) {
+        return Stream.concat(Stream.of(chain.matrix()), schedule.flatMap(Schedule::phases).stream()
+                .flatMap(phases -> phases.list().stream()).map(Schedule.Phase::matrix)).toList();
     }
 
     private static List<String> actions(Fields fields) {

@@ -26,9 +26,9 @@ final class RegimeBlocks implements PeriodicRegime.Visitor<Labelled> {
     static List<Block> of(Timetable timetable, ScheduledOutput output, Style style) {
         RegimeBlocks all = new RegimeBlocks(timetable, style);
         List<Block> blocks = new ArrayList<>();
-        output.preamble().ifPresent(course -> blocks.add(all.summary("before the cycles", course)));
+        output.preamble().ifPresent(course -> blocks.add(all.summary("before the cycles", course, 0)));
         output.first().filter(course -> timetable.period() > 1).ifPresent(course ->
-                blocks.add(all.summary("first cycle", course)));
+                blocks.add(all.summary("first cycle", course, timetable.before())));
         blocks.add(longRun(timetable, output, style));
         return blocks;
     }
@@ -58,7 +58,7 @@ final class RegimeBlocks implements PeriodicRegime.Visitor<Labelled> {
                     + KnownText.withFraction(recurring.course().average(), style.digits()) + word(recurring.course()));
         }
         return summary(recurring.cycles() == 1 ? LONG_RUN : LONG_RUN + ", over " + recurring.cycles() + " cycles",
-                recurring.course());
+                recurring.course(), timetable.before());
     }
 
     @Override
@@ -66,16 +66,18 @@ final class RegimeBlocks implements PeriodicRegime.Visitor<Labelled> {
         return new Labelled(LONG_RUN, "nothing that recurs: " + none.explanation());
     }
 
-    private Labelled summary(String label, CycleCourse course) {
+    private Labelled summary(String label, CycleCourse course, int first) {
         return new Labelled(label, Prose.of("average " + KnownText.withFraction(course.average(), style.digits())
-                + "; highest ").and(extreme(course.highest())).and("; lowest ").and(extreme(course.lowest()))
+                + "; highest ").and(extreme(course.highest(), first)).and("; lowest ")
+                .and(extreme(course.lowest(), first))
                 .and(word(course)));
     }
 
-    private Prose extreme(CycleCourse.Extreme extreme) {
-        String value = KnownText.of(extreme.value(), style.digits()) + " at j = " + extreme.j();
-        return extreme.side() == Side.BEFORE && ScheduleProse.isActed(timetable, extreme.j())
-                ? Prose.of(value + ", just before ").and(ScheduleProse.done(timetable, extreme.j())) : Prose.of(value);
+    /** @param first the step at j = 0 */
+    private Prose extreme(CycleCourse.Extreme extreme, int first) {
+        return Prose.of(KnownText.of(extreme.value(), style.digits()) + " at j = " + extreme.j())
+                .and(extreme.side() == Side.BEFORE ? ScheduleProse.justBefore(timetable, first + extreme.j())
+                        : Prose.EMPTY);
     }
 
     private static String word(CycleCourse course) {

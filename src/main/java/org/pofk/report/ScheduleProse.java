@@ -52,6 +52,13 @@ final class ScheduleProse {
                 .map(action -> timetable.actions().get(action).name()).toList());
     }
 
+    /** {@code , just before fix}, where that is done at the end of step k ≥ 1, counted from the start; else nothing. */
+    static Prose justBefore(Timetable timetable, int k) {
+        List<String> done = timetable.at(k).actions().stream()
+                .map(action -> timetable.actions().get(action).name()).toList();
+        return done.isEmpty() ? Prose.EMPTY : Prose.of(", just before ").and(Prose.names(done));
+    }
+
     /** Whether anything is done at the end of step j of a cycle; never at its beginning. */
     static boolean isActed(Timetable timetable, int j) {
         return j > 0 && !timetable.cycle().get((j - 1) % timetable.period()).actions().isEmpty();

@@ -115,9 +115,9 @@ public final class ScheduledConditionalDocument {
         label("read", "at the end of step k, after what is done there; just before it, where that is said, what is"
                 + " given is known just before it too");
         defined();
-        output.preamble().ifPresent(course -> blocks.add(summary("before the cycles", course)));
+        output.preamble().ifPresent(course -> blocks.add(summary("before the cycles", course, 0)));
         output.first().filter(course -> timetable.period() > 1)
-                .ifPresent(course -> blocks.add(summary("first cycle", course)));
+                .ifPresent(course -> blocks.add(summary("first cycle", course, timetable.before())));
         output.longRun().map(this::longRun).ifPresentOrElse(blocks::add, () -> label("in the long run",
                 "not decided: the numbers of a whole cycle are too long for formulas"));
         output.longRun().ifPresent(course -> table(asked, course));
@@ -142,10 +142,10 @@ public final class ScheduledConditionalDocument {
         }
         return course.steps() == 1 && !ScheduleProse.isActed(timetable, 1)
                 ? new Labelled(label, Prose.of("tends to " + number(course.highest().get().value())))
-                : summary(label, course);
+                : summary(label, course, timetable.before());
     }
 
-    private Labelled summary(String label, ConditionalCourse course) {
+    private Labelled summary(String label, ConditionalCourse course, int first) {
         if (course.highest().isEmpty()) {
             return new Labelled(label, Prose.of(course.isDecided() ? "what is given has probability zero throughout"
                     : "not decided"));
@@ -153,18 +153,19 @@ public final class ScheduledConditionalDocument {
         boolean isEverywhere = course.readings().stream().allMatch(each -> each.after().kind() == Value.Kind.VALUE);
         return new Labelled(label, Prose.of(course.average().map(average -> "average " + number(average)
                 + " over the steps" + (isEverywhere ? "" : " where it is defined") + ", each given what is known then; highest ")
-                .orElse("highest ")).and(extreme(course.highest().get())).and("; lowest ")
-                .and(extreme(course.lowest().orElseThrow())));
+                .orElse("highest ")).and(extreme(course.highest().get(), first)).and("; lowest ")
+                .and(extreme(course.lowest().orElseThrow(), first)));
     }
 
     private String number(KnownValue value) {
         return KnownText.withFraction(value, style.digits());
     }
 
-    private Prose extreme(Extreme extreme) {
-        String value = KnownText.of(extreme.value(), style.digits()) + " at j = " + extreme.j();
-        return extreme.side() == Side.BEFORE && ScheduleProse.isActed(timetable, extreme.j())
-                ? Prose.of(value + ", just before ").and(ScheduleProse.done(timetable, extreme.j())) : Prose.of(value);
+    /** @param first the step at j = 0 */
+    private Prose extreme(Extreme extreme, int first) {
+        return Prose.of(KnownText.of(extreme.value(), style.digits()) + " at j = " + extreme.j())
+                .and(extreme.side() == Side.BEFORE ? ScheduleProse.justBefore(timetable, first + extreme.j())
+                        : Prose.EMPTY);
     }
 
     private boolean isAnyActed() {
