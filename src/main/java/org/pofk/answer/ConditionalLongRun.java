@@ -27,7 +27,9 @@ public record ConditionalLongRun(Kind kind, List<Optional<RealValue>> values) {
         /** What is known is impossible from some step on. */
         IMPOSSIBLE_IN_THE_END,
         /** The moves go through cycles whose common period is too long. */
-        PERIOD_TOO_LONG
+        PERIOD_TOO_LONG,
+        /** The formulas over the cycles of a schedule would need numbers that are too long, or too many of them. */
+        FORMULAS_TOO_LONG
     }
 
     public ConditionalLongRun {
@@ -45,7 +47,10 @@ public record ConditionalLongRun(Kind kind, List<Optional<RealValue>> values) {
 
     /** The value itself where it is a fraction, one near to it elsewhere. */
     public static Rational near(RealValue value) {
-        return value.rational().orElseGet(() -> value.enclosure().enclose(NEAR_BITS).middle());
+        return value.rational().orElseGet(() -> {
+            int whole = value.enclosure().enclose(0).abs().upper().floor().bitLength();
+            return value.enclosure().enclose(NEAR_BITS + whole).middle();
+        });
     }
 
     /** The largest of them by size, or nearly so; zero where there is none. */

@@ -24,7 +24,10 @@ record ConditionalLongRunProse(int digits, Numbers numbers) {
             case CYCLE_OR_LIMIT -> Prose.of("tends to values by residue of k, of which it isn't decided whether they"
                     + " are equal: ").and(cycle(longRun));
             case IMPOSSIBLE_IN_THE_END -> Prose.of("none: from some step on what is given has probability zero");
-            case PERIOD_TOO_LONG -> Prose.of("not decided: the moves go through cycles whose common period is too long");
+            case PERIOD_TOO_LONG -> Prose.of("not decided: the moves go through cycles whose common period is too"
+                    + " long");
+            case FORMULAS_TOO_LONG -> Prose.of("not decided: formulas over the cycles would need numbers too long to"
+                    + " be found at once");
         };
     }
 

@@ -55,17 +55,37 @@ final class BoundedPercentiles {
 
     /** The step after which nothing is left that waits: where it is, no number decides. */
     private Percentile byMovesAlone(Rational p) {
-        BitSet waiting = CycleGraph.support(stopped.chain().chain().start());
-        stopped.into().forEach(waiting::clear);
-        long last = timetable.before() + (long) timetable.period() * stopped.chain().chain().size();
-        for (int k = 0; k <= last; k++) {
+        BitSet start = waiting(CycleGraph.support(stopped.chain().chain().start()));
+        BitSet waiting = waiting(CycleGraph.through(timetable, timetable.preamble(), start));
+        if (waiting.isEmpty()) {
+            return byMovesAlone(p, start, 0, timetable.before());
+        }
+        for (int m = 0; m < stopped.chain().chain().size(); m++) {
+            BitSet left = waiting(CycleGraph.through(timetable, timetable.cycle(), waiting));
+            if (left.isEmpty()) {
+                return byMovesAlone(p, waiting, timetable.before() + m * timetable.period(), timetable.period());
+            }
+            waiting = left;
+        }
+        return Percentile.Finder.none(p, Reason.NEVER);
+    }
+
+    /** @param steps after which nothing waits */
+    private Percentile byMovesAlone(Rational p, BitSet begin, int from, int steps) {
+        BitSet waiting = begin;
+        for (int k = from; k < from + steps; k++) {
             if (waiting.isEmpty()) {
                 return at(p, k);
             }
-            waiting = CycleGraph.through(timetable, List.of(timetable.at(k + 1)), waiting);
-            stopped.into().forEach(waiting::clear);
+            waiting = waiting(CycleGraph.through(timetable, List.of(timetable.at(k + 1)), waiting));
         }
-        return Percentile.Finder.none(p, Reason.NEVER);
+        return at(p, from + steps);
+    }
+
+    private BitSet waiting(BitSet states) {
+        BitSet waiting = (BitSet) states.clone();
+        stopped.into().forEach(waiting::clear);
+        return waiting;
     }
 
     private Percentile bySteps(Rational p) {

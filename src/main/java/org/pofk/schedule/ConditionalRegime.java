@@ -6,8 +6,10 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.stream.IntStream;
+import java.util.stream.LongStream;
 import org.pofk.answer.ConditionalLongRun;
 import org.pofk.chain.Timetable;
+import org.pofk.exact.LeastCommonMultiple;
 import org.pofk.schedule.ConditionalCourse.Value;
 import org.pofk.schedule.CycleCourse.Side;
 import org.pofk.schedule.CycleFormula.Place;
@@ -72,7 +74,8 @@ final class ConditionalRegime {
     private boolean isNeverMore(PossibleSteps possible, int j, int every) {
         long first = timetable.before() + j;
         long late = first + (possible.from() / every + 1L) * every;
-        return IntStream.range(0, possible.period()).noneMatch(i -> possible.at(late + (long) i * every));
+        return LongStream.range(0, LeastCommonMultiple.of(possible.period(), every) / every)
+                .noneMatch(i -> possible.at(late + i * every));
     }
 
     private Optional<ConditionalCourse> byPoles(ScheduledOutput joint, ScheduledOutput event) {
@@ -82,19 +85,16 @@ final class ConditionalRegime {
         List<Place> places = places();
         List<ConditionalLongRun> found = chain.conditional(joint.output(), event.output(), places).stream()
                 .map(each -> each.longRun()).toList();
-        int cycles = found.stream().mapToInt(each -> Math.max(1, each.values().size())).reduce(1, (a, b) ->
-                a > CYCLES_AT_MOST ? a : a / greatestCommonDivisor(a, b) * b);
+        long cycles = found.stream().mapToLong(each -> Math.max(1, each.values().size())).reduce(1, (a, b) ->
+                a > CYCLES_AT_MOST ? a : LeastCommonMultiple.of(a, b));
         if (cycles > CYCLES_AT_MOST
                 || found.stream().anyMatch(each -> each.kind() == ConditionalLongRun.Kind.PERIOD_TOO_LONG)) {
             return Optional.empty();
         }
         Map<Place, ConditionalLongRun> byPlace = new HashMap<>();
         IntStream.range(0, places.size()).forEach(i -> byPlace.put(places.get(i), found.get(i)));
-        return Optional.of(ConditionalCourse.of(cycles * timetable.period(), (j, side) -> value(byPlace, j, side)));
-    }
-
-    private static int greatestCommonDivisor(int a, int b) {
-        return b == 0 ? a : greatestCommonDivisor(b, a % b);
+        return Optional.of(ConditionalCourse.of(Math.toIntExact(cycles * timetable.period()),
+                (j, side) -> value(byPlace, j, side)));
     }
 
     /** All steps after what is done there, and before it where something is done. */

@@ -8,6 +8,7 @@ import org.pofk.answer.Given;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
 import org.pofk.chain.Timetable;
+import org.pofk.exact.Rational;
 import org.pofk.schedule.ConditionalCourse.Reading;
 import org.pofk.schedule.ConditionalCourse.Value;
 import org.pofk.schedule.ConditionalSchedule.Conditional;
@@ -61,7 +62,8 @@ final class ConditionalScheduling {
     }
 
     private Value quotient(KnownValue above, KnownValue below, int k, Side side) {
-        if (possible.isPresent() && !possible.get().at(side).at(k)) {
+        if (possible.isPresent() && !possible.get().at(side).at(k)
+                || below.exact().filter(Rational::isZero).isPresent()) {
             return Value.IMPOSSIBLE;
         }
         boolean isQuotient = below.isPositive() || possible.isPresent() && below.word() == KnownValue.Word.EXACT;

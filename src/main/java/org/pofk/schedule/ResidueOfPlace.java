@@ -29,8 +29,7 @@ final class ResidueOfPlace {
         Optional<Long> forEver = inCycles.forEverFrom().map(m -> begin + m * period);
         boolean holdsSoFar = forEver.equals(Optional.of(begin));
         for (long k = begin - period; k >= 0; k -= period) {
-            Optional<Boolean> isMet = k > timetable.before() ? Optional.of(false)
-                    : earlier.isMet((int) k, Math.toIntExact((k - begin) / period));
+            Optional<Boolean> isMet = earlier.isMet((int) k, Math.toIntExact((k - begin) / period));
             if (isMet.isEmpty()) {
                 return new ResidueClass(residue, period, End.TOO_MANY_STEPS, Optional.empty(), Optional.empty());
             }

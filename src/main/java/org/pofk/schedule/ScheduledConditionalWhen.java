@@ -71,7 +71,8 @@ public final class ScheduledConditionalWhen {
         }
         if (!chain.areAllFormulasWithinReach() || possible.isEmpty()) {
             return new ConditionalWhen.Answer(output, notDecided(asked, Reason.TOO_MANY_STEPS),
-                    ConditionalLongRun.without(ConditionalLongRun.Kind.PERIOD_TOO_LONG), List.of());
+                    ConditionalLongRun.without(possible.isEmpty() ? ConditionalLongRun.Kind.PERIOD_TOO_LONG
+                            : ConditionalLongRun.Kind.FORMULAS_TOO_LONG), List.of());
         }
         List<ConditionalSequence> sequences = chain.conditional(joint, event, places);
         List<ConditionalLongRun> limits = sequences.stream().map(ConditionalSequence::longRun).toList();

@@ -15,6 +15,8 @@ import org.pofk.chain.Chain;
 import org.pofk.chain.Model;
 import org.pofk.chain.Output;
 import org.pofk.chain.SparseMatrix;
+import org.pofk.exact.Ball;
+import org.pofk.exact.Enclosed;
 import org.pofk.exact.Rational;
 import org.pofk.modes.RealValue;
 import org.pofk.steps.StepValue;
@@ -221,5 +223,15 @@ class ConditionalTest {
         return new Model("random", new Model.Step("1 step", Optional.empty(), Optional.empty()),
                 Model.Convention.COLUMNS, Model.About.NOTHING, chain, Optional.empty(), Optional.empty(), List.of(), List.of(),
                 List.of(), List.of(), new Model.Origin("none", "0"), List.of());
+    }
+
+    @Test
+    void theNumberNearALargeLimitIsAsNearAsThatOfASmallOne() {
+        for (int digits = 0; digits <= 60; digits += 20) {
+            Enclosed root = Enclosed.of(Rational.TWO.times(Rational.of(10).pow(digits))).map(Ball::sqrt);
+            Rational near = ConditionalLongRun.near(new RealValue(Optional.empty(), root));
+            Rational off = root.enclose(1_000).middle().minus(near).abs();
+            assertTrue(off.compareTo(ConditionalLongRun.NEAR_WITHIN) < 0, digits + ": " + off.signum());
+        }
     }
 }

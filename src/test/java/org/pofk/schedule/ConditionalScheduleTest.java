@@ -1,6 +1,7 @@
 package org.pofk.schedule;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.io.IOException;
@@ -16,6 +17,7 @@ import java.util.stream.IntStream;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.pofk.Pofk;
+import org.pofk.answer.ConditionalLongRun;
 import org.pofk.answer.ConditionalWhen;
 import org.pofk.answer.Given;
 import org.pofk.answer.Known;
@@ -357,5 +359,15 @@ class ConditionalScheduleTest {
             compared++;
         }
         assertEquals(31, compared);
+    }
+
+    @Test
+    void whereFormulasAreTooLongThatIsTheReason() {
+        Model model = ScheduledCases.model("every thousandth", ScheduledCases.ofTheContract().get("every thousandth"));
+        Given given = new Given(List.of("all"), Set.of(0, 1, 2), List.of("failed"), Set.of(2));
+        ConditionalWhen found = ScheduledConditionalWhen.of(model, given, Outputs.states(model.chain()).subList(0, 1),
+                new WhenModel.Asked(When.Condition.Kind.AT_MOST, Rational.HALF, false), each -> { });
+        assertFalse(found.isDecided());
+        assertEquals(ConditionalLongRun.Kind.FORMULAS_TOO_LONG, found.answers().get(0).longRun().kind());
     }
 }

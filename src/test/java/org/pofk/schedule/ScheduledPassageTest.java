@@ -8,6 +8,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.OptionalInt;
 import java.util.Set;
 import java.util.TreeMap;
 import java.util.stream.IntStream;
@@ -313,6 +314,26 @@ class ScheduledPassageTest {
         assertHolds(Rational.ONE.minus(early).pow(100), passage.values().get(0).survival());
         assertHolds(Rational.ONE.minus(early).pow(15_000), passage.values().get(1).survival());
         assertHolds(left.times(Rational.ONE.minus(late).pow(10_000)), passage.values().get(2).survival());
+    }
+
+    @Test
+    void allOfItHasHappenedWhereMovesAndActionsLeaveNothingThatWaits() {
+        String pushed = "transitions: {good: stays, worn: stays, failed: stays}\n"
+                + "actions: {push: {good: {worn: 1}, worn: {failed: 1}}}\n";
+        assertEquals(OptionalInt.of(14), all(pushed + "schedule: {every: 7, do: push}\n").k());
+        assertEquals(OptionalInt.of(10), all(pushed + "schedule: {every: 7, first: 3, do: push}\n").k());
+        assertEquals(OptionalInt.of(5), all(pushed + "schedule: {every: 3, first: 2, do: push}\n").k());
+        assertEquals(Optional.of(Percentile.Reason.NEVER),
+                all(ScheduledCases.ofTheContract().get("every twelfth")).reason());
+    }
+
+    /** The step by which it has happened with probability 1. */
+    private static Percentile all(String rest) {
+        Model model = ScheduledCases.model("all", rest);
+        StoppedSchedule stopped = StoppedSchedule.of(model.chain(), timetable(model), Set.of(FAILED), Set.of());
+        ScheduledWait wait = ScheduledEntrance.of(stopped, timetable(model),
+                BackwardBounded.of(stopped.chain().timetable())).orElseThrow().first();
+        return new BoundedPercentiles(stopped, wait).of(Rational.ONE);
     }
 
     private static void assertHolds(Rational expected, KnownValue found) {
