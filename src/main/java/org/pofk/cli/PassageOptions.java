@@ -61,8 +61,8 @@ final class PassageOptions {
         Chain chain = started.chain();
         Ends ends = ends(chain, atTheEnd);
         List<Rational> shares = shares();
-        return published -> ScheduledPassage.of(chain, Timetable.of(chain, started.schedule().orElseThrow()), ends.target,
-                ends.avoided, shares, at, published);
+        return published -> ScheduledPassage.of(chain, Timetable.of(chain, started.schedule().orElseThrow()),
+                ends.target, ends.avoided, shares, at, published);
     }
 
     /** The same given what is known when it ends. */

@@ -69,7 +69,8 @@ final class WhenCommand implements Work {
                 throw new UsageException("--side goes with --given-at K, not with what is known at k itself: there the"
                         + " values are those after what is done");
             }
-            return ScheduledAnswers.when(options, read, given.given(read.chain()), outputs, asked, destination, streams);
+            return ScheduledAnswers.when(options, read, given.given(read.chain()), outputs, asked,
+                    destination, streams);
         }
         if (step.isEmpty()) {
             return ScheduledAnswers.when(options, read, Optional.empty(), outputs, asked, sides, destination,

@@ -107,7 +107,8 @@ final class StartSection {
         String first = states.names().get(0);
         reading.fault(name.position(), "start-of-a-recursion", "a recursion " + what + "; only a chain of probabilities"
                 + " does. Name a state, like " + (reading.overrides().start().isPresent()
-                ? "--start '" + first + "', or leave --start out" : "start: " + first + ", or write numbers, like start: {" + first + ": 1}"));
+                ? "--start '" + first + "', or leave --start out" : "start: " + first
+                        + ", or write numbers, like start: {" + first + ": 1}"));
     }
 
     private List<Rational> fromMapping(Node.Mapping mapping) {

@@ -99,7 +99,8 @@ public final class ScheduledPassageDocument {
                         : Prose.of("; entering ").and(names(passage.avoiding())).and(" first ends the wait"))
                 .and(".")));
         passage.entrance().ifPresentOrElse(this::entrance, () -> label("ever", NOT_DECIDED));
-        passage.percentiles().forEach(each -> label(PassageDocument.percent(each.p()), PassageDocument.percentile(each)));
+        passage.percentiles().forEach(each -> label(PassageDocument.percent(each.p()),
+                PassageDocument.percentile(each)));
         passage.decay().ifPresent(this::decay);
         passage.entrance().flatMap(ScheduledEntrance::back).ifPresent(this::back);
         label("visits", passage.visits().map(this::visits).orElse(NOT_DECIDED));
@@ -154,7 +155,8 @@ public final class ScheduledPassageDocument {
     }
 
     private String visits(ScheduledVisits visits) {
-        return visits.steps().map(steps -> number(steps) + " steps are expected to end there, after what is done in them")
+        return visits.steps().map(steps -> number(steps)
+                + " steps are expected to end there, after what is done in them")
                 .orElse("infinitely many steps are expected to end there");
     }
 
@@ -169,7 +171,8 @@ public final class ScheduledPassageDocument {
             over.happening().ifPresent(happening -> {
                 blocks.add(new Heading(3, "Given that it happens"));
                 FormulaInSteps formulas = new FormulaInSteps("m", style);
-                formulas.add(happening.law().closedForm(), left(passage, "=", happening.law(), GIVEN), Prose.of("m ≥ 0"));
+                formulas.add(happening.law().closedForm(), left(passage, "=", happening.law(), GIVEN),
+                        Prose.of("m ≥ 0"));
                 formulas.add(happening.distribution().closedForm(), left(passage, "≤", happening.distribution(), GIVEN),
                         Prose.of("m ≥ 0"));
                 blocks.addAll(formulas.blocks());

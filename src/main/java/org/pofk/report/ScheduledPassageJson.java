@@ -23,7 +23,8 @@ public final class ScheduledPassageJson {
             json.texts("into", names(model, found.into()));
             json.texts("avoiding", names(model, found.avoiding()));
             json.text("word", word(found));
-            json.optional("wait", found.entrance(), entrance -> json.object(() -> wait(json, writer, entrance.first())));
+            json.optional("wait", found.entrance(), entrance -> json.object(() ->
+                    wait(json, writer, entrance.first())));
             json.optional("return", found.entrance().flatMap(ScheduledEntrance::back), back ->
                     json.object(() -> wait(json, writer, back)));
             json.optional("visits", found.visits(), visits -> json.object(() ->

@@ -70,7 +70,8 @@ public final class ScheduledPassageNotebook {
     }
 
     private void values() {
-        List<ScheduledPassage.At> stepped = passage.values().stream().filter(at -> PythonCycles.isStepped(at.k())).toList();
+        List<ScheduledPassage.At> stepped = passage.values().stream().filter(at -> PythonCycles.isStepped(at.k()))
+                .toList();
         if (!stepped.isEmpty()) {
             cells.code(PythonCycles.values("P(T ≤ k) as stepped, at the steps listed",
                     stepped.stream().map(ScheduledPassage.At::k).toList(),
@@ -113,7 +114,8 @@ public final class ScheduledPassageNotebook {
                     "    require(f\"{p} by k = {k}, not before\", by_then >= p and (k == 0 or before < p))"));
             cells.code(String.join("\n", lines));
         }
-        if (percentiles.stream().anyMatch(each -> each.k().isPresent() && !PythonCycles.isStepped(each.k().getAsInt()))) {
+        if (percentiles.stream().anyMatch(each -> each.k().isPresent()
+                && !PythonCycles.isStepped(each.k().getAsInt()))) {
             cells.text(Prose.of("Percentiles at later steps are stated, not stepped again here."));
         }
     }

@@ -160,7 +160,8 @@ public final class ScheduledTotalDocument {
     }
 
     private String amount(ScheduledTotal total, Rational value) {
-        return prose().number(value) + (total.increment().kind() == Kind.STEPS && value.isOne() ? " step" : unit(total));
+        return prose().number(value)
+                + (total.increment().kind() == Kind.STEPS && value.isOne() ? " step" : unit(total));
     }
 
     private String unit(ScheduledTotal total) {

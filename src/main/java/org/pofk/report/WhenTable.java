@@ -53,7 +53,8 @@ public final class WhenTable {
     private static WhenTable of(Model model, List<Prose> head, List<Prose> side, int digits) {
         StepColumns steps = StepColumns.of(model);
         return new WhenTable(steps, side, new Rows(digits, Rows.words("output"), head, Rows.words("condition", "exact",
-                "decimal", "residue", "modulus", "answer"), first(steps.header(), "first"), first(steps.header(), "for ever from")));
+                "decimal", "residue", "modulus", "answer"), first(steps.header(), "first"),
+                first(steps.header(), "for ever from")));
     }
 
     /** {@code first k}, {@code first time (h)}. */
@@ -71,7 +72,8 @@ public final class WhenTable {
 
     private void add(Output output, When when, List<Prose> middle, Optional<Long> first,
             Optional<Long> forEverFrom) {
-        rows.add(List.of(Prose.name(output.name())), side, Rows.words(inWords(when.condition().kind())), rows.value(when.condition().bound()),
+        rows.add(List.of(Prose.name(output.name())), side, Rows.words(inWords(when.condition().kind())),
+                rows.value(when.condition().bound()),
                 middle, first.map(steps::cells).orElse(steps.none()), forEverFrom.map(steps::cells).orElse(steps.none()));
     }
 

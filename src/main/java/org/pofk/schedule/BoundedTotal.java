@@ -107,7 +107,7 @@ final class BoundedTotal {
                 : taken.get().everything().map(sum::minus));
     }
 
-    /** What a cycle adds in the long run, on average where the cycles alternate; empty where they take too long to settle. */
+    /** What a cycle adds in the long run, on average where they alternate; empty where they take too long to settle. */
     Optional<KnownValue> perCycle() {
         Structure structure = CycleGraph.of(timetable, chain.start());
         StateArithmetic.Fixed fixed = StateArithmetic.Fixed.of(timetable);

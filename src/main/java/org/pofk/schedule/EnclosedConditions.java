@@ -210,7 +210,8 @@ final class EnclosedConditions implements CycleConditions {
             }
             Optional<Rational> value = condition.kind() == Kind.SETTLED || ++exactValues > EXACT_VALUES_AT_MOST
                     ? Optional.empty()
-                    : chain.exactly(output, m, place.j()).map(reading -> reading.at(place.side())).flatMap(KnownValue::exact);
+                    : chain.exactly(output, m, place.j()).map(reading -> reading.at(place.side()))
+                            .flatMap(KnownValue::exact);
             return value.map(exact -> band.contains(exact) ? Band.Relation.INSIDE : Band.Relation.OUTSIDE)
                     .orElseThrow(TooMuchWorkException::new);
         }

@@ -7,7 +7,8 @@ import org.pofk.exact.Ball;
 import org.pofk.steps.FixedPointState;
 
 /**
- * A band in whole units of 2^−{@value FixedPointState#BITS}: for multiples of the unit it says exactly what the band says.
+ * A band in whole units of 2^−{@value FixedPointState#BITS}: for multiples of the unit it says exactly what the band
+ * says.
  *
  * @param low  the least unit in it
  * @param high the largest

@@ -16,8 +16,8 @@ import org.pofk.steps.PossibleSteps;
 
 /**
  * At which steps a scheduled chain can be in a set of states, just before and just after what is done there: which
- * states carry probability where a cycle begins follows from which did where the one before began, so they repeat. Exact: a
- * matter of moves and actions, not of numbers. What is before the actions of step 0 is what is after them.
+ * states carry probability where a cycle begins follows from which did where the one before began, so they repeat. Exact:
+ * a matter of moves and actions, not of numbers. What is before the actions of step 0 is what is after them.
  */
 public record PossibleMoments(PossibleSteps before, PossibleSteps after) {
     /** More steps beyond the first cycle are not looked at. */

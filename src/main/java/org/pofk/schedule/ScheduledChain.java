@@ -114,7 +114,8 @@ public final class ScheduledChain {
         long k = timetable.before() + m * timetable.period() + j;
         return k > Integer.MAX_VALUE || !ScheduledValues.isWithinReach(chain.size(), timetable, bits, (int) k)
                 ? Optional.empty()
-                : Optional.of(ScheduledValues.of(chain, timetable, whole, List.of(output), List.of((int) k)).get(0).get(0));
+                : Optional.of(ScheduledValues.of(chain, timetable, whole, List.of(output),
+                        List.of((int) k)).get(0).get(0));
     }
 
     /**

@@ -39,7 +39,8 @@ record ScheduledIncrement(Increment own, List<List<Rational>> byMove, List<List<
     /** All of them. */
     Stream<Rational> amounts() {
         return Stream.of(own.atState().stream(), byMove.stream().flatMap(List::stream),
-                byAction.stream().flatMap(List::stream), Stream.of(own.atStart(), own.constant())).flatMap(each -> each);
+                byAction.stream().flatMap(List::stream), Stream.of(own.atStart(), own.constant()))
+                        .flatMap(each -> each);
     }
 
     private static Chain by(Chain chain, SparseMatrix matrix) {

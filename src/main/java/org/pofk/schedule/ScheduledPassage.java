@@ -28,7 +28,8 @@ import org.pofk.steps.KnownValue;
  * @param over        formulas over the cycles
  */
 public record ScheduledPassage(List<Integer> into, List<Integer> avoiding, Timetable timetable,
-        ScheduledChain stopped, List<At> values, Optional<ScheduledEntrance> entrance, Optional<ScheduledVisits> visits, List<Percentile> percentiles,
+        ScheduledChain stopped, List<At> values, Optional<ScheduledEntrance> entrance,
+        Optional<ScheduledVisits> visits, List<Percentile> percentiles,
         Optional<Decay> decay, Formulas formulas, Optional<OverCycles> over) {
 
     /** Why there are none: not come to yet, or a whole cycle has numbers that are too long. */
@@ -98,27 +99,28 @@ public record ScheduledPassage(List<Integer> into, List<Integer> avoiding, Timet
     }
 
     ScheduledPassage withValues(List<At> found) {
-        return new ScheduledPassage(into, avoiding, timetable, stopped, found, entrance, visits, percentiles, decay, formulas,
-                over);
+        return new ScheduledPassage(into, avoiding, timetable, stopped, found, entrance, visits, percentiles, decay,
+                formulas, over);
     }
 
     ScheduledPassage with(ScheduledEntrance found) {
-        return new ScheduledPassage(into, avoiding, timetable, stopped, values, Optional.of(found), visits, percentiles, decay,
-                formulas, over);
+        return new ScheduledPassage(into, avoiding, timetable, stopped, values, Optional.of(found), visits, percentiles,
+                decay, formulas, over);
     }
 
     ScheduledPassage with(ScheduledVisits found) {
-        return new ScheduledPassage(into, avoiding, timetable, stopped, values, entrance, Optional.of(found), percentiles, decay,
-                formulas, over);
+        return new ScheduledPassage(into, avoiding, timetable, stopped, values, entrance, Optional.of(found),
+                percentiles, decay, formulas, over);
     }
 
     ScheduledPassage withPercentiles(List<Percentile> found) {
-        return new ScheduledPassage(into, avoiding, timetable, stopped, values, entrance, visits, found, decay, formulas, over);
+        return new ScheduledPassage(into, avoiding, timetable, stopped, values, entrance, visits, found, decay,
+                formulas, over);
     }
 
     ScheduledPassage with(Decay found) {
-        return new ScheduledPassage(into, avoiding, timetable, stopped, values, entrance, visits, percentiles, Optional.of(found),
-                formulas, over);
+        return new ScheduledPassage(into, avoiding, timetable, stopped, values, entrance, visits, percentiles,
+                Optional.of(found), formulas, over);
     }
 
     ScheduledPassage with(OverCycles found) {

@@ -84,10 +84,12 @@ public record ScheduledTotal(Increment increment, Rational factor, Output total,
         boolean isBounded = chain.kind() == Chain.Kind.CHAIN && !summed.recursion().areFormulasWithinReach();
         Optional<BoundedTotal> bounded = isBounded
                 ? Optional.of(BoundedTotal.of(chain, timetable, increment, asked.factor)) : Optional.empty();
-        List<Optional<KnownValue>> values = steps.isEmpty() ? List.of() : summed.recursion().after(summed.total(), steps);
+        List<Optional<KnownValue>> values = steps.isEmpty() ? List.of()
+                : summed.recursion().after(summed.total(), steps);
         ScheduledTotal known = new ScheduledTotal(increment.own(), asked.factor, summed.total(), summed.recursion(),
                 timetable.period(), Optional.empty(), Optional.empty(), IntStream.range(0, steps.size()).mapToObj(i ->
-                At.of(increment.own(), steps.get(i), values.get(i).or(() -> bounded.map(total -> total.at(steps.get(i))))))
+                At.of(increment.own(), steps.get(i), values.get(i)
+                        .or(() -> bounded.map(total -> total.at(steps.get(i))))))
                 .toList());
         published.accept(known);
         return known.with(over(summed), bounded.map(total -> Bounds.of(total, asked.factor, timetable.period())));
@@ -114,6 +116,7 @@ public record ScheduledTotal(Increment increment, Rational factor, Output total,
     }
 
     public boolean isDecided() {
-        return (over.isPresent() || bounds.filter(Bounds::isKnown).isPresent()) && values.stream().allMatch(each -> each.total.isPresent());
+        return (over.isPresent() || bounds.filter(Bounds::isKnown).isPresent())
+                && values.stream().allMatch(each -> each.total.isPresent());
     }
 }

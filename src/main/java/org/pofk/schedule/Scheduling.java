@@ -70,7 +70,8 @@ public final class Scheduling {
         if (!at.isEmpty()) {
             values(at);
         }
-        boolean within = CycleMatrices.areFormulasWithinReach(chain.size(), timetable, whole) || formulas == Formulas.ALL;
+        boolean within = CycleMatrices.areFormulasWithinReach(chain.size(), timetable, whole)
+                || formulas == Formulas.ALL;
         if (within) {
             formulas(beginExactly(), limit, at);
         } else {

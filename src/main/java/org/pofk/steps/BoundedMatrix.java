@@ -121,7 +121,8 @@ public final class BoundedMatrix {
     }
 
     private BigInteger[][] sums(BigInteger[][] a, BigInteger[][] b) {
-        return IntStream.range(0, a.length).mapToObj(i -> IntStream.range(0, columns).mapToObj(j -> a[i][j].add(b[i][j]))
+        return IntStream.range(0, a.length).mapToObj(i -> IntStream.range(0, columns)
+                .mapToObj(j -> a[i][j].add(b[i][j]))
                 .toArray(BigInteger[]::new)).toArray(BigInteger[][]::new);
     }
 
