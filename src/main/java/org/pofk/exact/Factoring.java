@@ -10,9 +10,9 @@ import org.pofk.exact.Factorization.Irreducible;
 
 /**
  * Factors rational polynomials over Q. Exact: the product is multiplied out and compared each time. Every factor says
- * whether it is proved irreducible; above degree {@value SquareFreeFactoring#FACTORED_DEGREE} a factor may be left
- * whole, square-free and not proved, because full factorization grows out of reach there and only the showing of
- * exact forms needs it.
+ * whether it is proved irreducible; above degree {@value SquareFreeFactoring#FACTORED_DEGREE}, or above degree 30 with
+ * long numbers, a factor may be left whole, square-free and not proved, because full factorization grows out of reach
+ * there and only the showing of exact forms needs it.
  */
 public final class Factoring {
     /** By degree, then by the coefficients in ascending power, compared as numbers. */

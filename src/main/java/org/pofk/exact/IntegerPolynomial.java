@@ -238,11 +238,11 @@ record IntegerPolynomial(List<BigInteger> coefficients) {
         if (isConstant() || other.isConstant()) {
             return ofIntegers(1);
         }
-        if (degree() * other.degree() >= RINGS_DEGREE * RINGS_DEGREE / 4) {
-            return RingsAlgebra.greatestCommonDivisor(this, other);
+        if (ModularPolynomial.provesCoprime(this, other)) {
+            return ofIntegers(1);
         }
-        return ModularPolynomial.provesCoprime(this, other)
-                ? ofIntegers(1)
+        return degree() * other.degree() >= RINGS_DEGREE * RINGS_DEGREE / 4
+                ? RingsAlgebra.greatestCommonDivisor(this, other)
                 : FractionFreeEuclid.greatestCommonDivisor(this, other);
     }
 

@@ -1,5 +1,6 @@
 package org.pofk.exact;
 
+import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.Collection;
 import java.util.List;
@@ -8,15 +9,19 @@ import org.pofk.exact.Factorization.Irreducible;
 /**
  * Takes a square-free primitive polynomial without the root zero apart, the cheap ways first: rational roots,
  * cyclotomic factors, known divisors, q(z) = g(z^m), degrees modulo primes, and the Rings library up to degree
- * {@link #FACTORED_DEGREE}. Exact; what stays undecided is said so.
+ * {@link #FACTORED_DEGREE} while the numbers are not too long. Exact; what stays undecided is said so.
  */
 final class SquareFreeFactoring {
-    /** Up to here full factorization takes about a second. */
+    /** Up to here, and up to so much work, degree² · bits, full factorization takes about a second. */
     static final int FACTORED_DEGREE = 200;
-    /** Where full factorization can follow, primes that bring nothing are given up soon. */
+    private static final long FACTORED_WORK = 10_000_000;
+    /** Up to here short exact forms are looked for, which factors are needed for whatever they cost. */
+    private static final int ALWAYS_FACTORED_DEGREE = 30;
+    /** Where full factorization takes no longer, primes that bring nothing are given up soon. */
+    private static final int QUICK_DEGREE = 48;
     private static final int SHORT_PATIENCE = 4;
     /** By chance a factor of degree 2 seems possible modulo 12 primes in a row for one polynomial in a thousand. */
-    private static final int LONG_PATIENCE = 12;
+    private static final int LONG_PATIENCE = 16;
 
     /** A factor, and whether it is known to have none of its own. */
     record Piece(IntegerPolynomial polynomial, Irreducible irreducible) {
@@ -105,12 +110,19 @@ final class SquareFreeFactoring {
         if (polynomial.isConstant()) {
             return List.of();
         }
-        boolean small = polynomial.degree() <= FACTORED_DEGREE;
-        if (DegreePatterns.proveIrreducible(polynomial, small ? SHORT_PATIENCE : LONG_PATIENCE)) {
+        int patience = polynomial.degree() <= QUICK_DEGREE ? SHORT_PATIENCE : LONG_PATIENCE;
+        if (DegreePatterns.proveIrreducible(polynomial, patience)) {
             return List.of(Piece.proved(polynomial));
         }
-        return small
+        return isFactoredSoon(polynomial)
                 ? RingsAlgebra.irreducibleFactors(polynomial).stream().map(Piece::proved).toList()
                 : List.of(new Piece(polynomial, Irreducible.NOT_PROVED));
+    }
+
+    private static boolean isFactoredSoon(IntegerPolynomial polynomial) {
+        int degree = polynomial.degree();
+        long bits = polynomial.coefficients().stream().mapToInt(BigInteger::bitLength).max().orElse(0);
+        return degree <= ALWAYS_FACTORED_DEGREE
+                || degree <= FACTORED_DEGREE && degree * degree * bits <= FACTORED_WORK;
     }
 }

@@ -171,6 +171,32 @@ class FactoringTest {
                 Factoring.of(first.times(second), hints).factors());
     }
 
+    /** Below the degree of full factorization, too, what would take long stays whole, proved square-free at most. */
+    @Test
+    void longNumbersLeaveAProductWholeUntilADivisorIsKnown() {
+        Random random = new Random(13);
+        Polynomial<Rational> first = random(random, 40, 1_500).monic();
+        Polynomial<Rational> second = random(random, 41, 1_500).monic();
+        assertEquals(List.of(new Factor<>(first.times(second), 1, Irreducible.NOT_PROVED)),
+                Factoring.of(first.times(second)).factors());
+        Factoring.Hints hints = new Factoring.Hints(List.of(), List.of(second));
+        assertEquals(List.of(new Factor<>(first, 1, Irreducible.PROVED), new Factor<>(second, 1, Irreducible.PROVED)),
+                Factoring.of(first.times(second), hints).factors());
+    }
+
+    /** Coprime by one prime, a common divisor by the library, both as they were made. */
+    @Test
+    void greatestCommonDivisorOfLargePolynomialsIsWhatWasPutIn() {
+        Random random = new Random(17);
+        for (int degree = 30; degree <= 60; degree += 10) {
+            IntegerPolynomial first = PrimitiveForm.partOf(random(random, degree, 60));
+            IntegerPolynomial second = PrimitiveForm.partOf(random(random, degree + 3, 60));
+            IntegerPolynomial common = PrimitiveForm.partOf(random(random, 5, 20));
+            assertEquals(IntegerPolynomial.ofIntegers(1), first.greatestCommonDivisor(second));
+            assertEquals(common, first.times(common).greatestCommonDivisor(second.times(common)));
+        }
+    }
+
     @Test
     void zeroRootsRepeatedFactorsAndUnitAreKept() {
         Polynomial<Rational> polynomial = Polynomial.ofIntegers(0, 0, 0, 6).times(Polynomial.ofIntegers(-1, 2).pow(4))
