@@ -16,7 +16,7 @@ import org.pofk.steps.KnownValue;
  * @param readings at j = 0 … n
  * @param average  mean of the values after at j = 0 … n − 1, each given what is known at its own step; empty where
  *                 there is none, or some aren't decided
- * @param highest  over the values before at j = 1 … n and after at j = 0 … n − 1
+ * @param highest  over the values before at j = 1 … n and after at j = 0 … n − 1; empty likewise
  */
 public record ConditionalCourse(List<Reading> readings, Optional<KnownValue> average, Optional<Extreme> highest,
         Optional<Extreme> lowest) {
@@ -52,6 +52,10 @@ public record ConditionalCourse(List<Reading> readings, Optional<KnownValue> ave
 
     /** Whether no value is left undecided. */
     public boolean isDecided() {
+        return isDecided(readings);
+    }
+
+    private static boolean isDecided(List<Reading> readings) {
         return readings.stream().noneMatch(each -> each.before.kind == Value.Kind.NOT_DECIDED
                 || each.after.kind == Value.Kind.NOT_DECIDED);
     }
@@ -72,6 +76,9 @@ public record ConditionalCourse(List<Reading> readings, Optional<KnownValue> ave
 
     /** @param sign 1 for the largest, −1 for the smallest */
     private static Optional<Extreme> extreme(List<Reading> readings, int sign) {
+        if (!isDecided(readings)) {
+            return Optional.empty();
+        }
         List<Extreme> all = new ArrayList<>();
         readings.subList(0, readings.size() - 1).forEach(each -> add(all, each, Side.AFTER));
         readings.subList(1, readings.size()).forEach(each -> add(all, each, Side.BEFORE));

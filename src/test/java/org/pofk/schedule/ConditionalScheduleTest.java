@@ -37,6 +37,7 @@ import org.pofk.modes.RealValue;
 import org.pofk.schedule.ConditionalCourse.Reading;
 import org.pofk.schedule.ConditionalCourse.Value;
 import org.pofk.schedule.CycleCourse.Side;
+import org.pofk.steps.KnownValue;
 import org.pofk.text.RefusedException;
 
 /** What is given under a schedule against Bayes' rule on probabilities that are stepped by hand. */
@@ -369,5 +370,14 @@ class ConditionalScheduleTest {
                 new WhenModel.Asked(When.Condition.Kind.AT_MOST, Rational.HALF, false), each -> { });
         assertFalse(found.isDecided());
         assertEquals(ConditionalLongRun.Kind.FORMULAS_TOO_LONG, found.answers().get(0).longRun().kind());
+    }
+
+    @Test
+    void besideAValueThatIsNotDecidedNoneIsTheHighest() {
+        Value one = Value.of(KnownValue.of(Rational.ONE));
+        ConditionalCourse some = ConditionalCourse.of(3, (j, side) -> j == 2 ? Value.NOT_DECIDED : one);
+        assertTrue(some.average().isEmpty() && some.highest().isEmpty() && some.lowest().isEmpty());
+        ConditionalCourse rest = ConditionalCourse.of(3, (j, side) -> j == 2 ? Value.IMPOSSIBLE : one);
+        assertEquals(Optional.of(Rational.ONE), rest.highest().flatMap(each -> each.value().exact()));
     }
 }
