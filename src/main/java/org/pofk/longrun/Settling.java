@@ -52,8 +52,11 @@ public record Settling(Optional<Enclosed> slowest, Optional<Rational> exactly, i
 
     /** After how many steps the slowest mode is half as large, powers of k left aside: ln 2 / −ln modulus. */
     public Optional<Enclosed> halfLife() {
-        return slowest.map(modulus -> modulus.map(ball ->
-                Ball.of(2, ball.scale()).log().dividedBy(ball.log().negate())));
+        return slowest.map(modulus -> Enclosed.raising(bits -> {
+            // what is known more closely would make the logarithm as long
+            Ball ball = modulus.enclose(bits).roundedTo(bits);
+            return Ball.of(2, bits).log().dividedBy(ball.log().negate());
+        }));
     }
 
     /** Where it is rational. */

@@ -25,20 +25,31 @@ record AskedPattern(String name, Path file, Chain chain, PlainChain plain, List<
     /** Steps that {@code --at} and {@code --to} ask for. */
     static final String AT = "0..12";
 
+    /** Read and stepped once, by whoever asks first. */
+    private static final class Every {
+        static final List<AskedPattern> PATTERNS = Patterns.names().stream()
+                .map(name -> of(name, Path.of("test-data", "models", name + ".yaml"))).toList();
+    }
+
     /** Every pattern of the index, or those of one kind. */
     static List<AskedPattern> all() {
-        return Patterns.names().stream().map(name -> of(name, Path.of("test-data", "models", name + ".yaml"))).toList();
+        return Every.PATTERNS;
     }
 
     static List<AskedPattern> all(Chain.Kind kind) {
         return all().stream().filter(pattern -> pattern.chain.kind() == kind).toList();
     }
 
+    /** The chains of few states. */
+    static List<AskedPattern> small() {
+        return all(Chain.Kind.CHAIN).stream().filter(pattern -> !pattern.isLarge()).toList();
+    }
+
     private static AskedPattern of(String name, Path file) {
         try {
             Chain chain = Pofk.read(file).chain();
             PlainChain plain = PlainChain.of(chain);
-            return new AskedPattern(name, file, chain, plain, plain.states(name.equals(LARGE) ? 24 : 60));
+            return new AskedPattern(name, file, chain, plain, plain.states(name.equals(LARGE) ? 16 : 36));
         } catch (Exception broken) {
             throw new AssertionError(name, broken);
         }

@@ -7,6 +7,7 @@ import com.fasterxml.jackson.databind.JsonNode;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Set;
+import java.util.TreeSet;
 import org.junit.jupiter.api.Test;
 import org.pofk.answer.Gauss;
 import org.pofk.chain.Chain;
@@ -29,20 +30,20 @@ class EveryPassageTest {
         assertEquals(2, AskedPattern.assertNeedsAChain("passage", "--into", "open"));
     }
 
-    /** Of few states, from each other one in turn, avoiding the second. */
+    /** Of few states, from the first, one in the middle and the last but one, avoiding the second. */
     @Test
     void fromAnotherStateAvoidingOne() {
         int asked = 0;
         for (AskedPattern pattern : AskedPattern.all(Chain.Kind.CHAIN)) {
             int size = pattern.chain().size();
-            for (int from = 0; from < size - 1 && size > 2 && size <= 8; from++) {
+            for (int from : size <= 2 || size > 8 ? Set.<Integer>of() : new TreeSet<>(List.of(0, size / 2, size - 2))) {
                 JsonNode found = pattern.ask("passage", with("--into", pattern.lastState(), "--avoiding",
                         pattern.chain().states().get(1), "--from", pattern.chain().states().get(from)));
                 assertPassage(pattern, pattern.plain().from(from), Set.of(size - 1), Set.of(1), found);
                 asked++;
             }
         }
-        assertEquals(44, asked);
+        assertEquals(28, asked);
     }
 
     private static String[] with(String... options) {
@@ -165,9 +166,9 @@ class EveryPassageTest {
     @Test
     void givenWhereItEndsAndGivenAtAStep() {
         int asked = 0;
-        for (AskedPattern pattern : AskedPattern.all(Chain.Kind.CHAIN)) {
+        for (AskedPattern pattern : AskedPattern.small()) {
             int last = pattern.chain().size() - 1;
-            if (pattern.isLarge() || last < 2) {
+            if (last < 2) {
                 continue;
             }
             List<Rational> law = pattern.plain().law(Set.of(last), Set.of(1), pattern.steps());
