@@ -66,6 +66,9 @@ final class ReviewQuestions {
     }
 
     private void askAboutLongRun(List<NearlyClosed> nearlyClosed) {
+        if (model.schedule().isPresent()) {
+            return; // what is done, or another phase, may lead out of any closed class and make any period
+        }
         List<CommunicatingClass> closed = structure.closedClasses().stream().filter(CommunicatingClass::reached)
                 .toList();
         if (closed.size() > 1) {

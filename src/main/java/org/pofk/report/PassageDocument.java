@@ -51,7 +51,9 @@ public final class PassageDocument {
     public static ReportSection section(Chain chain, Passage passage, Style style) {
         PassageDocument document = new PassageDocument(chain, passage, style);
         document.write();
-        Labelled key = new Labelled(Prose.of("first into ").and(document.names(passage.into())),
+        Labelled key = new Labelled(Prose.of("first into ").and(document.names(passage.into()))
+                .and(", from ").and(StartProse.of(chain)).and(passage.avoiding().isEmpty() ? Prose.EMPTY
+                        : Prose.of(", before ").and(document.names(passage.avoiding()))),
                 Prose.of(inBrief(passage.moments(), passage.percentiles(), style)));
         return new ReportSection(ReportSection.Place.RESULTS, document.title(), List.of(key), document.blocks,
                 document.proofs, ReportSection.Standing.ANSWERED);

@@ -3,6 +3,7 @@ package org.pofk.report;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.Collectors;
 import org.pofk.answer.When.End;
 import org.pofk.answer.When.ResidueClass;
 import org.pofk.report.Document.Table;
@@ -13,6 +14,7 @@ import org.pofk.report.Document.Table;
  */
 final class ResidueTable {
     private static final int ROWS_AT_MOST = 12;
+    private static final int NAMED_AT_MOST = 3;
     private static final String NO_STEP = "–";
 
     private ResidueTable() {
@@ -25,6 +27,14 @@ final class ResidueTable {
                 + stretches.size() + " rows; pofk when --as csv has all of them";
         return Table.ofText(caption, List.of("k", "in the end", "first", "for ever from"),
                 stretches.stream().limit(ROWS_AT_MOST).map(Stretch::row).toList());
+    }
+
+    /** Where the condition is met in the end: {@code at k ≡ 8 … 11 mod 12}. */
+    static String met(List<ResidueClass> classes) {
+        List<Stretch> met = stretches(classes).stream().filter(each -> each.classes.get(0).end() == End.MET).toList();
+        return met.isEmpty() || met.size() > NAMED_AT_MOST ? "at some steps of a cycle, see the table"
+                : "at k ≡ " + met.stream().map(Stretch::residues).collect(Collectors.joining(", ")) + " mod "
+                        + classes.get(0).modulus();
     }
 
     private static List<Stretch> stretches(List<ResidueClass> classes) {
@@ -47,6 +57,11 @@ final class ResidueTable {
             return List.of(steps(), end(end),
                     shown(classes.stream().flatMap(each -> each.first().stream()).min(Long::compare)),
                     shown(end == End.MET ? forEverFrom() : Optional.empty()));
+        }
+
+        private String residues() {
+            long last = classes.get(classes.size() - 1).residue();
+            return classes.get(0).residue() + (classes.size() == 1 ? "" : (classes.size() == 2 ? ", " : " … ") + last);
         }
 
         /** {@code 3, 15, 27, …} or {@code 0 … 7, 12 … 19, …}. */

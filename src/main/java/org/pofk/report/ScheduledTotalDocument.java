@@ -74,7 +74,15 @@ public final class ScheduledTotalDocument {
     private Labelled keyFigure(ScheduledTotal total) {
         ScheduledTotalDocument alone = new ScheduledTotalDocument(found, style);
         total.over().ifPresentOrElse(over -> alone.growth(total, over.growth()), () -> alone.bounds(total));
-        return TotalBlocks.keyFigure(total.total(), (Labelled) alone.blocks.get(0));
+        Labelled figure = TotalBlocks.keyFigure(total.total(), (Labelled) alone.blocks.get(0));
+        return total.over().isPresent() && timetable.period() > 1
+                ? new Labelled(figure.label(), figure.text().and(aStep(total))) : figure;
+    }
+
+    /** What two schedules with other cycles are compared by. */
+    private String aStep(ScheduledTotal total) {
+        return total.perStep().filter(value -> !value.isZero()).map(value -> ", " + amount(total, value) + " a step")
+                .orElse("");
     }
 
     private List<Proved> proofs(ScheduledTotal total, ScheduledTotal.OverCycles over) {
@@ -145,7 +153,8 @@ public final class ScheduledTotalDocument {
         } else if (growth.perStep().isZero()) {
             label(TotalBlocks.LONG_RUN, prose().of(growth.beyond()) + ", at the beginning of cycle m");
         } else {
-            label("grows", "in the long run by " + amount(total, growth.perStep()) + " a cycle");
+            label("grows", "in the long run by " + amount(total, growth.perStep()) + " a cycle of "
+                    + timetable.period() + " steps");
             if (timetable.period() > 1) {
                 label("a step", amount(total, total.perStep().orElseThrow())
                         + (total.increment().kind() == Kind.STEPS ? ", the share of time in the long run" : ""));

@@ -43,7 +43,7 @@ public final class ScheduledWhenDocument {
                 document.blocks.add(new Heading(3, OutputProse.title(answer.output())));
             }
             document.answer(answer);
-            key.add(WhenDocument.keyFigure(answer.output(), answer.when(), style));
+            key.add(document.keyFigure(answer));
         });
         return new ReportSection(ReportSection.Place.RESULTS, Prose.of(WhenDocument.title(found.asked(), style)), key,
                 document.blocks, found.isDecided() ? ReportSection.Standing.ANSWERED
@@ -56,12 +56,26 @@ public final class ScheduledWhenDocument {
         label("answer", WhenDocument.inWords(answer.when()));
         answer.when().first().ifPresent(first -> label("first", "k = " + first));
         answer.when().forEverFrom().ifPresent(from -> label("for ever", "from k = " + from + " on"));
+        answer.otherwiseBefore().ifPresent(before -> label("beware", "just before what is done there: "
+                + WhenDocument.inBrief(before) + " (--side before)"));
         if (answer.when().classes().size() > 1) {
             blocks.add(ResidueTable.of(answer.when().classes()));
         }
         if (!answer.around().isEmpty()) {
             blocks.add(values(answer));
         }
+    }
+
+    /** With the answer just before what is done, where that is another. */
+    private Labelled keyFigure(ScheduledWhen.Answer answer) {
+        Labelled figure = WhenDocument.keyFigure(answer.output(), answer.when(), style);
+        String sides = switch (found.sides()) {
+            case BEFORE -> "just before what is done: ";
+            case AFTER -> answer.otherwiseBefore().isPresent() ? "after what is done: " : "";
+            case BOTH -> "before and after what is done: ";
+        };
+        return new Labelled(figure.label(), Prose.of(sides).and(figure.text()).and(answer.otherwiseBefore()
+                .map(before -> "; just before it: " + WhenDocument.inBrief(before)).orElse("")));
     }
 
     /** Which values of a step are meant. */

@@ -156,7 +156,7 @@ public final class WhenDocument {
     }
 
     /** With the step, in a line. */
-    private static String inBrief(When when) {
+    static String inBrief(When when) {
         boolean isForEver = when.forEverFrom().isPresent() && when.forEverFrom().get() > 0;
         return isForEver ? "for ever from k = " + when.forEverFrom().get() + " on"
                 + (when.first().equals(when.forEverFrom()) ? ", not before"
@@ -170,7 +170,7 @@ public final class WhenDocument {
             case FOR_EVER -> when.forEverFrom().equals(Optional.of(0L)) ? "at every step"
                     : when.first().equals(when.forEverFrom()) ? "from a step on for ever; not before"
                     : "from a step on for ever; now and then before";
-            case ONLY_IN_SOME_CLASSES -> "for ever only at some steps of a cycle, see the table";
+            case ONLY_IN_SOME_CLASSES -> "for ever only " + ResidueTable.met(when.classes());
             case AGAIN_AND_AGAIN -> "met and missed again and again, for ever";
             case ONLY_FOR_A_WHILE -> "only for a while: from some step on never again";
             case NEVER -> "never, proved for every k";

@@ -42,8 +42,13 @@ public record ScheduledWhen(Model model, List<Output> outputs, WhenModel.Asked a
         }
     }
 
-    /** The answer for one output, with the values at the steps it names and just before these. */
-    public record Answer(Output output, When when, List<Reading> around) {
+    /**
+     * The answer for one output, with the values at the steps it names and just before these.
+     *
+     * @param otherwiseBefore where the values after what is done were asked for, the answer for those just before it,
+     *                        if that is another
+     */
+    public record Answer(Output output, When when, Optional<When> otherwiseBefore, List<Reading> around) {
         public Answer {
             around = List.copyOf(around);
         }
@@ -62,7 +67,8 @@ public record ScheduledWhen(Model model, List<Output> outputs, WhenModel.Asked a
         List<Answer> answers = new ArrayList<>();
         for (Output output : outputs) {
             When when = new ScheduledWhenSearch(chain, output, sides).of(asked);
-            answers.add(new Answer(output, when, around(chain, output, when)));
+            answers.add(new Answer(output, when, otherwiseBefore(chain, output, asked, sides)
+                    .filter(before -> !before.equals(when)), around(chain, output, when)));
             published.accept(new ScheduledWhen(model, outputs, asked, sides, answers));
         }
         return new ScheduledWhen(model, outputs, asked, sides, answers);
@@ -71,6 +77,14 @@ public record ScheduledWhen(Model model, List<Output> outputs, WhenModel.Asked a
     /** True when every output has its answer, proved. */
     public boolean isDecided() {
         return answers.size() == outputs.size() && answers.stream().allMatch(answer -> answer.when.decided());
+    }
+
+    /** A limit that is kept after each test and exceeded just before it is no limit kept. */
+    private static Optional<When> otherwiseBefore(ScheduledChain chain, Output output, WhenModel.Asked asked,
+            Sides sides) {
+        boolean isAsked = sides == Sides.AFTER && asked.kind() != When.Condition.Kind.SETTLED
+                && !chain.timetable().actions().isEmpty();
+        return isAsked ? Optional.of(new ScheduledWhenSearch(chain, output, Sides.BEFORE).of(asked)) : Optional.empty();
     }
 
     /** The steps just before and at the two that were found. */
