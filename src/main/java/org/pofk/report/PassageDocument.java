@@ -54,7 +54,7 @@ public final class PassageDocument {
         Labelled key = new Labelled(Prose.of("first into ").and(document.names(passage.into()))
                 .and(", from ").and(StartProse.of(chain)).and(passage.avoiding().isEmpty() ? Prose.EMPTY
                         : Prose.of(", before ").and(document.names(passage.avoiding()))),
-                Prose.of(inBrief(passage.moments(), passage.percentiles(), style)));
+                Prose.of(document.inBrief()));
         return new ReportSection(ReportSection.Place.RESULTS, document.title(), List.of(key), document.blocks,
                 document.proofs, ReportSection.Standing.ANSWERED);
     }
@@ -63,12 +63,23 @@ public final class PassageDocument {
         return Prose.of("First passage into ").and(names(passage.into()));
     }
 
+    /** That it isn't entered at all. */
+    static String never(List<Integer> avoiding) {
+        return "never: it can't be reached from there" + (avoiding.isEmpty() ? "" : " unless the wait has ended before");
+    }
+
+    /** Visits are counted after the wait has ended, too. */
+    static String whatever(List<Integer> avoiding) {
+        return avoiding.isEmpty() ? "" : ", whatever is entered before";
+    }
+
     /** Whether and when, in a line. */
-    static String inBrief(PassageMoments moments, List<Percentile> percentiles, Style style) {
-        return moments.probability().isZero() ? "never: it can't be reached from there"
+    private String inBrief() {
+        PassageMoments moments = passage.moments();
+        return moments.probability().isZero() ? never(passage.avoiding())
                 : (moments.isCertain() ? "certain" : "with probability "
                         + number(moments.probability(), style) + "; given that it happens") + ", after "
-                        + number(moments.mean().orElseThrow(), style) + " steps in the mean" + inBrief(percentiles);
+                        + number(moments.mean().orElseThrow(), style) + " steps in the mean" + inBrief(passage.percentiles());
     }
 
     /** Those reached; the others have their reason in the section. */
@@ -90,7 +101,7 @@ public final class PassageDocument {
                         + " falls by the factor " + Decimals.of(slowest, style.digits()).text() + " a step"));
         passage.returns().ifPresent(this::returns);
         label("visits", passage.visits().map(visits -> number(visits) + " steps are expected to be spent there")
-                .orElse("infinitely many steps are expected to be spent there"));
+                .orElse("infinitely many steps are expected to be spent there") + whatever(passage.avoiding()));
         blocks.add(new Paragraph(Prose.of("The formulas are those of the chain stopped there: from ")
                 .and(names(passage.into())).and(" it goes on to one more state and stays in it.")));
         formula("Law", "P(T = k)", passage.law());
@@ -117,7 +128,7 @@ public final class PassageDocument {
     private void moments() {
         PassageMoments moments = passage.moments();
         label("ever", moments.isCertain() ? "with probability 1"
-                : moments.probability().isZero() ? "never: it can't be reached from there"
+                : moments.probability().isZero() ? never(passage.avoiding())
                 : "with probability " + number(moments.probability()));
         if (moments.isCertain()) {
             label("mean", number(moments.mean().orElseThrow()));

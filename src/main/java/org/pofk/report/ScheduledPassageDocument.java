@@ -25,7 +25,6 @@ public final class ScheduledPassageDocument {
     /** Above so many states the table of all starts is left out. */
     private static final int STATES_AT_MOST = 40;
     private static final String GIVEN = " | T < ∞";
-    private static final String NEVER = "never: it can't be reached from there";
     private static final String NOT_DECIDED = "not decided within the budget";
 
     private final Chain chain;
@@ -77,7 +76,7 @@ public final class ScheduledPassageDocument {
     /** Whether and when, in a line. */
     private String inBrief() {
         return passage.entrance().map(entrance -> switch (entrance.first().ever()) {
-            case NEVER -> NEVER;
+            case NEVER -> PassageDocument.never(passage.avoiding());
             case CERTAIN -> "certain" + inBrief(entrance.first());
             case PERHAPS -> "with probability " + number(entrance.first().probability()) + "; given that it happens"
                     + inBrief(entrance.first());
@@ -104,9 +103,11 @@ public final class ScheduledPassageDocument {
         passage.entrance().ifPresentOrElse(this::entrance, () -> label("ever", NOT_DECIDED));
         passage.percentiles().forEach(each -> label(PassageDocument.percent(each.p()),
                 PassageDocument.percentile(each)));
-        passage.decay().ifPresent(this::decay);
+        passage.decay().filter(decay -> passage.entrance().map(each -> each.first().ever() != Ever.NEVER).orElse(true))
+                .ifPresent(this::decay);
         passage.entrance().flatMap(ScheduledEntrance::back).ifPresent(this::back);
-        label("visits", passage.visits().map(this::visits).orElse(NOT_DECIDED));
+        label("visits", passage.visits().map(this::visits).orElse(NOT_DECIDED)
+                + PassageDocument.whatever(passage.avoiding()));
         if (passage.entrance().filter(entrance -> !entrance.first().isExact()).isPresent()) {
             label("numbers", "certified: every digit shown is right");
         }
@@ -127,7 +128,7 @@ public final class ScheduledPassageDocument {
         ScheduledWait wait = entrance.first();
         boolean isCertain = wait.ever() == Ever.CERTAIN;
         label("ever", switch (wait.ever()) {
-            case NEVER -> NEVER;
+            case NEVER -> PassageDocument.never(passage.avoiding());
             case CERTAIN -> "with probability 1";
             case PERHAPS -> "with probability " + number(wait.probability());
         });
