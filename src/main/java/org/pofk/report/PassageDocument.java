@@ -52,9 +52,9 @@ public final class PassageDocument {
         PassageDocument document = new PassageDocument(chain, passage, style);
         document.write();
         Labelled key = new Labelled(Prose.of("first into ").and(document.names(passage.into()))
-                .and(", from ").and(StartProse.of(chain)).and(passage.avoiding().isEmpty() ? Prose.EMPTY
+                .and(passage.avoiding().isEmpty() ? Prose.EMPTY
                         : Prose.of(", before ").and(document.names(passage.avoiding()))),
-                Prose.of(document.inBrief()));
+                Prose.of("from ").and(StartProse.of(chain)).and(": " + document.inBrief()));
         return new ReportSection(ReportSection.Place.RESULTS, document.title(), List.of(key), document.blocks,
                 document.proofs, ReportSection.Standing.ANSWERED);
     }

@@ -54,10 +54,10 @@ public final class ScheduledPassageDocument {
         document.write();
         Prose set = document.names(passage.into());
         return new ReportSection(ReportSection.Place.RESULTS, document.title(),
-                List.of(new Labelled(Prose.of("first into ").and(set).and(", from ").and(StartProse.of(chain))
+                List.of(new Labelled(Prose.of("first into ").and(set)
                         .and(passage.avoiding().isEmpty() ? Prose.EMPTY
                                 : Prose.of(", before ").and(document.names(passage.avoiding()))),
-                        Prose.of(document.inBrief()))),
+                        Prose.of("from ").and(StartProse.of(chain)).and(": " + document.inBrief()))),
                 document.blocks, document.proofs(set), passage.isDecided() ? ReportSection.Standing.ANSWERED
                         : ReportSection.Standing.NOT_DECIDED);
     }
