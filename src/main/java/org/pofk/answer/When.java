@@ -86,11 +86,22 @@ public record When(Condition condition, Optional<Long> first, Optional<Long> for
     public static When of(Chain chain, ClosedForm closedForm, LongRun longRun, Condition condition) {
         Optional<Constraint> constraint = Constraint.of(chain, closedForm, longRun, condition);
         if (constraint.isEmpty()) {
-            return new When(condition, firstOfFew(chain, closedForm, condition), Optional.empty(), List.of(), false,
-                    Reason.NO_LONG_RUN);
+            return withoutLongRun(chain, closedForm, condition);
         }
         WhenSearch search = new WhenSearch(List.of(constraint.get()));
         return WhenSummary.of(condition, search.classes(search.modulus(1)));
+    }
+
+    /** Settling on nothing is never decided; a bound often is, by the sign that p(k) less the bound has in the end. */
+    private static When withoutLongRun(Chain chain, ClosedForm form, Condition condition) {
+        if (condition.kind != Condition.Kind.SETTLED) {
+            When found = ScaledDifference.of(form.transform(), condition.bound).when(condition.kind);
+            if (found.decided) {
+                return new When(condition, found.first, found.forEverFrom, found.classes, true, found.reason);
+            }
+        }
+        return new When(condition, firstOfFew(chain, form, condition), Optional.empty(), List.of(), false,
+                Reason.NO_LONG_RUN);
     }
 
     private static Optional<Long> firstOfFew(Chain chain, ClosedForm form, Condition condition) {
