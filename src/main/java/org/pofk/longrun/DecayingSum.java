@@ -46,9 +46,9 @@ public final class DecayingSum {
     }
 
     /** size · binomial(k, p) · modulus^(k−p) · cos(angle (k−p) + phase); for a real mode the angle is 0 or π. */
-    private record Term(Ball size, Ball modulus, int power, Ball angle, Ball phase, Optional<Rational> turns) {
+    private record Term(Ball size, Powers modulus, int power, Ball angle, Ball phase, Optional<Rational> turns) {
         public Term over(Rational unit, int bits) {
-            return new Term(size.times(Ball.of(unit.pow(-power), bits)), modulus.times(Ball.of(unit.inverse(), bits)),
+            return new Term(size.times(Ball.of(unit.pow(-power), bits)), new Powers(modulus.base().times(Ball.of(unit.inverse(), bits))),
                     power, angle, phase, turns);
         }
     }
@@ -64,7 +64,7 @@ public final class DecayingSum {
         @Override
         public Term geometric(Mode.Geometric mode) {
             Ball base = mode.base().enclosure().enclose(bits).roundedTo(bits);
-            return new Term(mode.coefficient().enclosure().enclose(bits).roundedTo(bits), base.abs(), mode.power(),
+            return new Term(mode.coefficient().enclosure().enclose(bits).roundedTo(bits), new Powers(base.abs()), mode.power(),
                     Ball.of(0, bits), Ball.of(0, bits),
                     Optional.of(base.isNegative() ? Rational.HALF : Rational.ZERO));
         }
@@ -72,7 +72,7 @@ public final class DecayingSum {
         @Override
         public Term oscillating(Mode.Oscillating mode) {
             return new Term(mode.amplitude().enclosure().enclose(bits).roundedTo(bits),
-                    mode.modulus().enclosure().enclose(bits).roundedTo(bits), mode.power(),
+                    new Powers(mode.modulus().enclosure().enclose(bits).roundedTo(bits)), mode.power(),
                     mode.angle().enclosure().enclose(bits + STEP_BITS).roundedTo(bits + STEP_BITS),
                     mode.phase().enclosure().enclose(bits + STEP_BITS).roundedTo(bits + STEP_BITS),
                     mode.angle().exact().flatMap(Formulas::multipleOfPi).map(Rational.HALF::times));
@@ -112,12 +112,12 @@ public final class DecayingSum {
             return Ball.of(Rational.ZERO, bits);
         }
         long first = Math.max(from, term.power);
-        Ball most = term.modulus.pow(first - term.power).times(binomial(to, term.power));
+        Ball most = term.modulus.at(first - term.power).times(binomial(to, term.power));
         if (from == to) {
             return most;
         }
         return from < term.power ? hull(Ball.of(Rational.ZERO, bits), most)
-                : hull(term.modulus.pow(to - term.power).times(binomial(first, term.power)), most);
+                : hull(term.modulus.at(to - term.power).times(binomial(first, term.power)), most);
     }
 
     private Ball cosine(Term term, long from, long to, long stride) {
