@@ -15,10 +15,18 @@ final class KnownText {
     private KnownText() {
     }
 
-    /** For people: {@code 0.0376446}; {@code below 1.2e-30} where no digit is certain. */
+    /** For people: {@code 0.0376446}; {@code below 1.2e-30} or {@code above 1 − 1.2e-30} where no digit is certain. */
     static String of(KnownValue value, int digits) {
-        return number(value, digits, ValueText::of, ValueText::of).orElseGet(() -> "below " + Decimals.of(
-                largest(value).times(Rational.of(11, 10)), BOUND_DIGITS).text());
+        return number(value, digits, ValueText::of, ValueText::of).orElseGet(() -> {
+            Ball ball = value.enclosure().enclose(BITS);
+            return ball.lower().compareTo(Rational.HALF) > 0 && ball.lower().compareTo(Rational.ONE) < 0
+                    ? "above 1 − " + bound(Rational.ONE.minus(ball.lower())) : "below " + bound(largest(ball));
+        });
+    }
+
+    /** A tenth more than the number: no rounding makes it less. */
+    private static String bound(Rational number) {
+        return Decimals.of(number.times(Rational.of(11, 10)), BOUND_DIGITS).text();
     }
 
     /** For people, an exact one with its fraction. */
@@ -54,8 +62,7 @@ final class KnownText {
                 ? Optional.of(exact.of(ball.middle(), digits)) : Optional.empty();
     }
 
-    private static Rational largest(KnownValue value) {
-        Ball ball = value.enclosure().enclose(BITS);
+    private static Rational largest(Ball ball) {
         return Rational.max(ball.upper().abs(), ball.lower().abs());
     }
 }
